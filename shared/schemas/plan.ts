@@ -1,0 +1,90 @@
+import { z } from "zod";
+import { componentTotal, controlBandSchema, frameSchema, requirements, roles, solidsBases, waterSchema } from "./problem";
+
+export const presetNames = [
+  "sulfate",
+  "sulfate_sulfide",
+  "chloride",
+  "ammonia",
+  "ammonia_carbonate",
+  "cyanide",
+  "carbonate",
+  "thiosulfate_ammonia",
+  "glycine",
+  "water",
+] as const;
+export type PresetName = (typeof presetNames)[number];
+
+/** One metal line of a plan: the typed number and how it is to be read. */
+export const planMetal = z.object({
+  element: z.string().min(1),
+  role: z.enum(roles),
+  requirement: z.enum(requirements),
+  /** activity entered as such, or a tenor in g/L turned into one */
+  entry: z.enum(["activity", "gPerL"]),
+  value: z.number().positive().max(1000),
+  gammaFrom: z.enum(["one", "davies", "typed"]),
+  gamma: z.number().positive().max(100).nullable(),
+});
+export type PlanMetal = z.infer<typeof planMetal>;
+
+/** Everything a plan asks; a revision freezes it. */
+export const planInputs = z.object({
+  temperatureC: z.number().min(0).max(150),
+  preset: z.enum(presetNames),
+  metals: z.array(planMetal).min(1).max(16),
+  ligands: z.array(componentTotal),
+  others: z.array(componentTotal),
+  /** mol/kg, for Davies; null: gamma 1 */
+  ionicStrength: z.number().positive().max(20).nullable(),
+  sulfateReduction: z.boolean(),
+  solidsBasis: z.enum(solidsBases),
+  feedMinerals: z.array(z.string()),
+  dosed: z.array(z.string()),
+  leftOut: z.array(z.object({ species: z.string(), reason: z.string().min(1) })),
+  putBack: z.array(z.string()),
+  frame: frameSchema,
+  water: waterSchema,
+  controlBand: controlBandSchema,
+});
+export type PlanInputs = z.infer<typeof planInputs>;
+
+export const planCreate = z.object({
+  projectId: z.string().min(1),
+  name: z.string().trim().min(1).max(120),
+  description: z.string().max(2000).default(""),
+  inputs: planInputs,
+});
+export const planUpdate = z.object({
+  name: z.string().trim().min(1).max(120).optional(),
+  description: z.string().max(2000).optional(),
+  archived: z.boolean().optional(),
+});
+export const revisionCreate = z.object({ note: z.string().trim().max(500), inputs: planInputs });
+
+/** As the server answers. */
+export interface RevisionRow {
+  planId: string;
+  number: number;
+  note: string;
+  author: string;
+  createdAt: string; // ISO 8601
+  dataVersion: string;
+  inputs: PlanInputs;
+}
+export interface PlanRow {
+  id: string;
+  projectId: string;
+  projectName: string;
+  siteName: string;
+  name: string;
+  description: string;
+  /** demo data is invented and says so */
+  invented: boolean;
+  archived: boolean;
+  version: number;
+  createdAt: string;
+  updatedAt: string;
+  revisionCount: number;
+  latest: RevisionRow;
+}

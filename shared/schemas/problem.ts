@@ -1,0 +1,68 @@
+import { z } from "zod";
+import { speciesRow } from "./chemistry";
+
+export const roles = ["target", "gangue", "watched"] as const;
+export const requirements = ["dissolved", "solid", "metal", "compound", "free"] as const;
+export type Requirement = (typeof requirements)[number];
+export const solidsBases = ["feed", "fresh", "aged"] as const;
+
+const positive = z.number().positive();
+const range = z
+  .tuple([z.number(), z.number()])
+  .refine(([lo, hi]) => lo < hi, { message: "the lower end must stand below the upper end" });
+
+export const metalInput = z
+  .object({
+    element: z.string().min(1),
+    requirement: z.enum(requirements),
+    role: z.enum(roles).optional(),
+    /** what the liquor must carry (target), the most that may dissolve (gangue), the most that may remain (won out) */
+    activity: positive.max(100).optional(),
+    /** tenor in g/L instead of an activity; molality x gamma becomes the activity */
+    gPerL: positive.max(1000).optional(),
+    /** activity coefficient for gPerL; 1 when absent */
+    gamma: positive.max(100).optional(),
+  })
+  .refine((m) => (m.activity === undefined) !== (m.gPerL === undefined), {
+    message: "give either activity or gPerL, not both and not neither",
+    path: ["activity"],
+  });
+
+export const componentTotal = z.object({ component: z.string().min(1), activity: positive.max(100) });
+
+export const frameSchema = z.object({ pH: range, Eh: range });
+export const waterSchema = z.object({
+  /** which lines bound windows; the band is always drawn */
+  bound: z.enum(["both", "upper", "lower", "none"]),
+  /** overpotential of oxygen evolution, V, raises the upper line */
+  oxygenV: z.number().min(0).max(2).optional(),
+  /** overpotential of hydrogen on the named cementing metal, V, lowers the lower line */
+  hydrogenV: z.number().min(0).max(2).optional(),
+});
+export const controlBandSchema = z.object({ pH: positive.max(5), Eh: positive.max(1) });
+
+/** The solver's question. Same body for the CLI, POST /api/solve, the browser and a frozen revision. Potentials in V vs SHE at T. */
+export const problemSchema = z.object({
+  temperatureC: z.number().min(0).max(150),
+  metals: z.array(metalInput).min(1).max(16),
+  ligands: z.array(componentTotal),
+  others: z.array(componentTotal).optional(),
+  sulfateReduction: z.boolean().optional(),
+  solidsBasis: z.enum(solidsBases).optional(),
+  /** minerals named for the feed: stay in whatever the basis says */
+  feedMinerals: z.array(z.string()).optional(),
+  /** reagents dosed, as defaults.csv names them: persulfate, chlorate, peroxide, sulfite, nitrate, dithionite */
+  dosed: z.array(z.string()).optional(),
+  leftOut: z.array(z.string()).optional(),
+  /** put back whatever the basis or the defaults leave out */
+  putBack: z.array(z.string()).optional(),
+  only: z.array(z.string()).optional(),
+  species: z.array(speciesRow).optional(),
+  frame: frameSchema,
+  water: waterSchema.optional(),
+  controlBand: controlBandSchema,
+});
+export type Problem = z.infer<typeof problemSchema>;
+export type MetalInput = z.infer<typeof metalInput>;
+export type ComponentTotal = z.infer<typeof componentTotal>;
+export type Frame = z.infer<typeof frameSchema>;

@@ -1,0 +1,104 @@
+import type { Requirement } from "./schemas/problem";
+
+/** What the solver answers (docs/solver.md). Potentials in V vs SHE at T; polygons counter-clockwise in (pH, Eh). */
+export type Point = readonly [pH: number, Eh: number];
+export type State = "dissolved" | "metal" | "compound";
+
+export interface Field {
+  metal: string;
+  species: string;
+  state: State;
+  /** one convex piece */
+  polygon: Point[];
+}
+
+/** One term of a balanced reaction; left-hand side negative. `e^-` and `H^+(aq)`, `H2O(l)` included. */
+export interface ReactionTerm {
+  species: string;
+  formula: string;
+  coefficient: number;
+}
+
+export type LimitKind = "metal" | "water" | "frame" | "hazard";
+
+export interface Limit {
+  kind: LimitKind;
+  metal?: string;
+  /** species of the metal on the window's side and beyond the limit */
+  inside?: string;
+  outside?: string;
+  /** balanced, as text; `reactionTerms` for typesetting */
+  reaction?: string;
+  reactionTerms?: ReactionTerm[];
+  /** water limits: "oxygen" or "hydrogen"; frame limits: the side */
+  side?: string;
+  /** k + x pH + y Eh = 0 on the limit, positive inside the window */
+  line: [k: number, x: number, y: number];
+  from: Point;
+  to: Point;
+  /** from the set point, counted in control bands */
+  distance: number;
+  /** signed distance from the set point along pH at its Eh, and along Eh at its pH; null where that line misses the limit */
+  distancePH: number | null;
+  distanceEh: number | null;
+}
+
+export interface SetPoint {
+  pH: number;
+  Eh: number;
+  /** control bands to the nearest limit */
+  margin: number;
+  /** true where no couple of the liquor holds both forms above about 10 mg/L: margin counts pH alone, Eh is a range */
+  mixedPotential: boolean;
+  EhRange?: [number, number];
+  /** the couple that sets Eh, for example ["Fe^2+(aq)", "Fe^3+(aq)"] */
+  couple?: [string, string];
+  cutByFrame: boolean;
+}
+
+export interface Window {
+  polygons: { outer: Point[]; holes: Point[][] }[];
+  /** pH x V */
+  area: number;
+  pH: [number, number];
+  Eh: [number, number];
+  /** wide enough for the control bands */
+  controllable: boolean;
+  setPoint: SetPoint;
+  limits: Limit[];
+}
+
+export type WarningCode =
+  | "TEMPERATURE_TRUST" // a drawn field rests on a G outside its trusted range
+  | "LIGAND_DRAWN_DOWN"
+  | "METASTABLE"
+  | "KINETICS"
+  | "SATURATION_PRESSURE";
+
+export interface SolutionWarning {
+  code: WarningCode;
+  species?: string;
+  metal?: string;
+  text: string;
+}
+
+export interface WaterLine {
+  which: "oxygen" | "hydrogen";
+  /** Eh = intercept + slope pH */
+  intercept: number;
+  slope: number;
+}
+
+export interface Solution {
+  temperatureC: number;
+  fields: Field[];
+  windows: Window[];
+  /** of the best window (largest margin), null without a window */
+  setPoint: SetPoint | null;
+  conflicts: { metal: string; requirement: Requirement }[][];
+  leftOut: { species: string; reason: string }[];
+  warnings: SolutionWarning[];
+  waterLines: WaterLine[];
+  /** activity each metal was solved at, with gamma where it came from a tenor */
+  activities: { metal: string; activity: number; gPerL?: number; gamma?: number }[];
+}
