@@ -1,0 +1,57 @@
+import tailwindcss from "@tailwindcss/vite";
+import react from "@vitejs/plugin-react";
+import { defineConfig } from "vitest/config";
+
+const apiPort = process.env.PORT ?? "5180";
+
+export default defineConfig({
+  plugins: [react(), tailwindcss()],
+  build: {
+    outDir: "dist/client",
+    emptyOutDir: true,
+    rolldownOptions: {
+      output: {
+        codeSplitting: {
+          // The app loads Plotly with import(); named so that the size check and the browser tests can point at it.
+          groups: [{ name: "plotly", test: /node_modules[\\/](plotly\.js|react-plotly\.js)/ }],
+        },
+      },
+    },
+    chunkSizeWarningLimit: 1600,
+  },
+  server: { proxy: { "/api": `http://127.0.0.1:${apiPort}` } },
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: "core",
+          environment: "node",
+          include: ["tests/{core,golden,properties,cases}/**/*.test.ts"],
+          testTimeout: 30_000,
+        },
+      },
+      {
+        extends: true,
+        test: { name: "server", environment: "node", include: ["tests/server/**/*.test.ts"], testTimeout: 20_000 },
+      },
+      {
+        extends: true,
+        test: { name: "client", environment: "jsdom", include: ["tests/client/**/*.test.{ts,tsx}"] },
+      },
+      {
+        extends: true,
+        test: {
+          name: "e2e",
+          environment: "node",
+          include: ["tests/e2e/**/*.test.ts"],
+          globalSetup: ["tests/support/builtApp.ts"],
+          // One browser at a time: the machines this runs on have two cores.
+          fileParallelism: false,
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
+  },
+});
