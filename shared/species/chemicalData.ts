@@ -29,7 +29,10 @@ export interface ChemicalData {
   readonly tables: ChemicalTables;
   readonly species: ReadonlyMap<string, Species>;
   /** element or ligand component -> kind; H and O included */
-  readonly components: ReadonlyMap<string, { kind: "element" | "ligand_group"; elements: Readonly<Record<string, number>>; note: string }>;
+  readonly components: ReadonlyMap<
+    string,
+    { kind: "element" | "ligand_group"; elements: Readonly<Record<string, number>>; note: string }
+  >;
   readonly molarMass: ReadonlyMap<string, number>;
   readonly extrapolation: ReadonlyMap<string, Extrapolation>;
 }
