@@ -1,0 +1,20 @@
+import { Dialog } from "../components/Dialog";
+import { SignInForm } from "../features/auth/SignInForm";
+import { useSession, useSessionEnded } from "../lib/session";
+
+/** The session ended while the page was open: the page stays as it is, with everything typed, until one signs in again. */
+export function SignInAgain() {
+  const ended = useSessionEnded();
+  const { user } = useSession();
+  return (
+    <Dialog
+      open={ended}
+      onOpenChange={() => undefined}
+      title="Sign in again"
+      description="Your session has ended. Nothing on the page is lost; what was being saved can be saved again afterwards."
+      width={420}
+    >
+      <SignInForm email={user.email} />
+    </Dialog>
+  );
+}

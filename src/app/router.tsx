@@ -1,0 +1,33 @@
+import { createBrowserRouter, Navigate, type RouteObject } from "react-router-dom";
+import { Gate } from "./Gate";
+import { Waiting } from "./AppShell";
+import { RouteError } from "./RouteError";
+
+interface Screen {
+  default: React.ComponentType;
+}
+
+/** A screen in a chunk of its own, with its own error boundary. */
+const screen = (path: string, load: () => Promise<Screen>): RouteObject => ({
+  path,
+  lazy: async () => ({ Component: (await load()).default }),
+  ErrorBoundary: RouteError,
+  HydrateFallback: Waiting,
+});
+
+export const router = createBrowserRouter([
+  {
+    path: "/",
+    Component: Gate,
+    ErrorBoundary: RouteError,
+    HydrateFallback: Waiting,
+    children: [
+      { index: true, element: <Navigate to="/plans" replace /> },
+      screen("plans", () => import("../features/plans/PlansPage")),
+      screen("plans/:planId", () => import("../features/workspace/WorkspacePage")),
+      screen("chemistry", () => import("../features/chemistry/ChemistryPage")),
+      screen("chemistry/:speciesId", () => import("../features/chemistry/ChemistryPage")),
+      screen("*", () => import("./NotFoundPage")),
+    ],
+  },
+]);

@@ -1,0 +1,34 @@
+import type { ReactNode } from "react";
+
+/** Stands with every caution: the product screens, it does not clear. */
+export const deference =
+  "Screening information. It does not replace a hazard study, the safety data sheets, local law and exposure limits, or the judgement of a licensed engineer or industrial hygienist.";
+const limitsNote = "Limits shown are US values as of the stated date; check the values in force where you work.";
+
+/** A caution beside the number that calls for it: a bar in the signal colour, text, and the deference wording. */
+export function Caution({
+  title,
+  children,
+  limits = false,
+  defer = true,
+}: {
+  title?: string;
+  children: ReactNode;
+  /** true where exposure limits are quoted */
+  limits?: boolean;
+  /** false only where a neighbouring caution already carries the wording */
+  defer?: boolean;
+}) {
+  return (
+    <aside role="note" className="border-l-4 border-signal bg-sheet px-3 py-2 text-sm">
+      {title !== undefined && <p className="font-bold">{title}</p>}
+      <div>{children}</div>
+      {defer && (
+        <p className="mt-1 text-xs text-muted">
+          {deference}
+          {limits && ` ${limitsNote}`}
+        </p>
+      )}
+    </aside>
+  );
+}

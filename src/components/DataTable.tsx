@@ -1,0 +1,229 @@
+import { useVirtualizer } from "@tanstack/react-virtual";
+import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from "react";
+import { classes } from "../lib/classes";
+import { fixed } from "../lib/format";
+import { headerText, useTableModel, type Column, type Sort } from "./tableModel";
+
+export interface DataTableProps<Row extends object> {
+  /** what the table holds, for those who hear it */
+  caption: string;
+  rows: readonly Row[];
+  /** stable: defined at module level or memoised */
+  columns: readonly Column<Row>[];
+  rowKey: (row: Row) => string;
+  /** words that must all stand in a row; typed beside the table's other filters */
+  filter?: string;
+  initialSort?: Sort;
+  selectedKey?: string | undefined;
+  /** follows the arrow keys and clicks */
+  onSelect?: (row: Row) => void;
+  /** Enter or double click; a single click where there is no `onSelect` */
+  onOpen?: (row: Row) => void;
+  /** stands in place of the rows when the filter leaves none */
+  empty?: ReactNode;
+  /** height of a row in px; rows never wrap */
+  rowHeight?: number;
+  muted?: (row: Row) => boolean;
+  /** the scrolling box: give it a height */
+  className?: string;
+  /** told the rows as filtered and sorted, for a count or an export */
+  onShown?: (rows: readonly Row[]) => void;
+}
+
+/** beyond this many rows only those in sight are in the page */
+const virtualFrom = 100;
+const none = () => undefined;
+
+/** A table that sorts by its headings and is walked with the arrow keys; the row in focus is the row selected. */
+export function DataTable<Row extends object>(props: DataTableProps<Row>) {
+  const { caption, rows, columns, rowKey, filter = "", initialSort, selectedKey } = props;
+  const { onSelect, onOpen, empty, rowHeight = 28, muted, className, onShown = none } = props;
+  const { shown, sorting, setSorting } = useTableModel(rows, columns, rowKey, filter, initialSort);
+  const box = useRef<HTMLDivElement>(null);
+  const [reached, setReached] = useState<string | null>(null);
+  const current = selectedKey ?? reached;
+  const at = shown.findIndex((row) => rowKey(row) === current);
+  const interactive = Boolean(onSelect ?? onOpen);
+
+  const signature = shown.length + (shown[0] ? rowKey(shown[0]) : "") + (shown.at(-1) ? rowKey(shown.at(-1)!) : "");
+  // The rows changed when their number or either end did; a re-render alone must not call back.
+  // eslint-disable-next-line react-hooks/exhaustive-deps
+  useEffect(() => onShown(shown), [signature, filter]);
+
+  const virtual = shown.length > virtualFrom;
+  // eslint-disable-next-line react-hooks/incompatible-library
+  const virtualizer = useVirtualizer({
+    count: virtual ? shown.length : 0,
+    getScrollElement: () => box.current,
+    estimateSize: () => rowHeight,
+    overscan: 12,
+    scrollPaddingStart: rowHeight + 4,
+  });
+  const items = virtualizer.getVirtualItems();
+  const first = virtual ? (items[0]?.index ?? 0) : 0;
+  const last = virtual ? (items.at(-1)?.index ?? -1) : shown.length - 1;
+  const visible = shown.slice(first, last + 1);
+
+  function reach(index: number) {
+    const row = shown[Math.max(0, Math.min(shown.length - 1, index))];
+    if (!row) return;
+    const key = rowKey(row);
+    setReached(key);
+    onSelect?.(row);
+    if (virtual) virtualizer.scrollToIndex(shown.indexOf(row));
+    // the row may only come into the page with the scroll
+    requestAnimationFrame(() => box.current?.querySelector<HTMLElement>(`[data-key="${CSS.escape(key)}"]`)?.focus());
+  }
+
+  function onKeyDown(event: KeyboardEvent) {
+    const page = Math.max(1, Math.floor((box.current?.clientHeight ?? 0) / rowHeight) - 2);
+    const to: Record<string, number> = {
+      ArrowDown: at + 1,
+      ArrowUp: at - 1,
+      PageDown: at + page,
+      PageUp: at - page,
+      Home: 0,
+      End: shown.length - 1,
+    };
+    const next = to[event.key];
+    if (next !== undefined) {
+      event.preventDefault();
+      reach(next);
+    } else if (event.key === "Enter" && shown[at] && event.target instanceof HTMLTableRowElement) {
+      event.preventDefault();
+      (onOpen ?? onSelect)?.(shown[at]);
+    }
+  }
+
+  return (
+    <div ref={box} className={classes("overflow-auto", className)}>
+      <table role="grid" aria-rowcount={shown.length + 1} className="w-full table-fixed border-collapse text-sm">
+        <caption className="sr-only">{caption}</caption>
+        <colgroup>
+          {columns.map((column) => (
+            <col key={column.id} className={hidden(column)} style={{ width: column.width }} />
+          ))}
+        </colgroup>
+        <thead className="sticky top-0 z-10 bg-paper">
+          <tr style={{ height: rowHeight }} aria-rowindex={1}>
+            {columns.map((column) => (
+              <Heading
+                key={column.id}
+                column={column}
+                sorted={sorting[0]?.id === column.id ? (sorting[0].desc ? "descending" : "ascending") : undefined}
+                onSort={() =>
+                  setSorting([{ id: column.id, desc: sorting[0]?.id === column.id ? !sorting[0].desc : false }])
+                }
+              />
+            ))}
+          </tr>
+        </thead>
+        <tbody onKeyDown={interactive ? onKeyDown : undefined}>
+          {first > 0 && <Spacer height={first * rowHeight} columns={columns.length} />}
+          {visible.map((row, i) => {
+            const key = rowKey(row);
+            const selected = key === selectedKey;
+            return (
+              <tr
+                key={key}
+                data-key={key}
+                aria-rowindex={first + i + 2}
+                aria-selected={onSelect ? selected : undefined}
+                tabIndex={interactive ? (at < 0 ? (first + i === 0 ? 0 : -1) : key === current ? 0 : -1) : undefined}
+                style={{ height: rowHeight }}
+                onClick={() => {
+                  setReached(key);
+                  (onSelect ?? onOpen)?.(row);
+                }}
+                onDoubleClick={() => onOpen?.(row)}
+                className={classes(
+                  "border-b border-rule -outline-offset-2!",
+                  interactive && "cursor-pointer hover:bg-tint/50",
+                  selected && "bg-tint",
+                  muted?.(row) && "text-muted",
+                )}
+              >
+                {columns.map((column) => (
+                  <Cell key={column.id} column={column} row={row} />
+                ))}
+              </tr>
+            );
+          })}
+          {virtual && last + 1 < shown.length && (
+            <Spacer height={(shown.length - last - 1) * rowHeight} columns={columns.length} />
+          )}
+        </tbody>
+      </table>
+      {shown.length === 0 && <div className="py-6 text-muted">{empty ?? "Nothing matches."}</div>}
+    </div>
+  );
+}
+
+const rightOf = (column: Column<never>) =>
+  (column.align ?? (column.digits === undefined ? "left" : "right")) === "right";
+const hidden = (column: { wide?: boolean }) => (column.wide ? "max-md:hidden" : undefined);
+
+function Heading<Row>({
+  column,
+  sorted,
+  onSort,
+}: {
+  column: Column<Row>;
+  sorted: "ascending" | "descending" | undefined;
+  onSort: () => void;
+}) {
+  const right = rightOf(column);
+  return (
+    <th
+      scope="col"
+      aria-sort={sorted}
+      className={classes(
+        "border-b border-ink px-2 font-mono text-xs font-bold first:pl-0 last:pr-0",
+        right ? "text-right" : "text-left",
+        hidden(column),
+      )}
+    >
+      {column.sortable === false ? (
+        headerText(column)
+      ) : (
+        <button type="button" onClick={onSort} className="max-w-full truncate align-bottom hover:text-verdigris">
+          {headerText(column)}
+          {sorted && (
+            <span aria-hidden className="text-verdigris">
+              {sorted === "ascending" ? " ↑" : " ↓"}
+            </span>
+          )}
+        </button>
+      )}
+    </th>
+  );
+}
+
+function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
+  const value = column.value(row);
+  const number = column.digits !== undefined;
+  return (
+    <td
+      className={classes(
+        "truncate px-2 first:pl-0 last:pr-0",
+        rightOf(column) && "text-right",
+        number && "font-mono",
+        hidden(column),
+      )}
+    >
+      {column.cell
+        ? column.cell(row)
+        : value === null
+          ? ""
+          : typeof value === "number"
+            ? fixed(value, column.digits ?? 0)
+            : value}
+    </td>
+  );
+}
+
+const Spacer = ({ height, columns }: { height: number; columns: number }) => (
+  <tr aria-hidden>
+    <td colSpan={columns} style={{ height, padding: 0 }} />
+  </tr>
+);

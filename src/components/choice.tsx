@@ -1,0 +1,126 @@
+import { Tabs as RadixTabs, ToggleGroup } from "radix-ui";
+import { useId, type ReactNode } from "react";
+import { classes } from "../lib/classes";
+
+export interface Choice<Value extends string> {
+  value: Value;
+  label: ReactNode;
+  disabled?: boolean;
+  title?: string;
+}
+
+/** A few choices side by side; one always holds. Arrow keys move along. */
+export function Segmented<Value extends string>({
+  label,
+  value,
+  onChange,
+  options,
+  disabled = false,
+  className,
+}: {
+  label: string;
+  value: Value;
+  onChange: (value: Value) => void;
+  options: readonly Choice<Value>[];
+  disabled?: boolean;
+  className?: string;
+}) {
+  return (
+    <ToggleGroup.Root
+      type="single"
+      aria-label={label}
+      value={value}
+      disabled={disabled}
+      onValueChange={(next) => next !== "" && onChange(next as Value)}
+      className={classes("inline-flex rounded-sm border border-ink", className)}
+    >
+      {options.map((option) => (
+        <ToggleGroup.Item
+          key={option.value}
+          value={option.value}
+          disabled={option.disabled ?? false}
+          title={option.title}
+          className="h-6 border-l border-ink px-2 text-sm whitespace-nowrap first:border-l-0 hover:bg-tint focus-visible:z-10 disabled:opacity-50 data-[state=on]:bg-ink data-[state=on]:font-bold data-[state=on]:text-paper"
+        >
+          {option.label}
+        </ToggleGroup.Item>
+      ))}
+    </ToggleGroup.Root>
+  );
+}
+
+/** Panels behind a row of words; the word in force is underlined. */
+export function Tabs<Value extends string>({
+  label,
+  value,
+  onChange,
+  panels,
+  className,
+}: {
+  label: string;
+  value: Value;
+  onChange: (value: Value) => void;
+  panels: readonly (Choice<Value> & { content: ReactNode })[];
+  className?: string;
+}) {
+  return (
+    <RadixTabs.Root value={value} onValueChange={(next) => onChange(next as Value)} className={className}>
+      <RadixTabs.List aria-label={label} className="flex gap-5 border-b border-ink">
+        {panels.map((panel) => (
+          <RadixTabs.Trigger
+            key={panel.value}
+            value={panel.value}
+            disabled={panel.disabled ?? false}
+            className="-mb-px border-b-[3px] border-transparent px-0 py-1 text-sm whitespace-nowrap data-[state=active]:border-verdigris data-[state=active]:font-bold"
+          >
+            {panel.label}
+          </RadixTabs.Trigger>
+        ))}
+      </RadixTabs.List>
+      {panels.map((panel) => (
+        <RadixTabs.Content key={panel.value} value={panel.value} className="pt-3">
+          {panel.content}
+        </RadixTabs.Content>
+      ))}
+    </RadixTabs.Root>
+  );
+}
+
+/** A box to tick, with its words. */
+export function Check({
+  label,
+  children,
+  checked,
+  onChange,
+  disabled = false,
+  hint,
+}: {
+  /** accessible name where the children are not plain text */
+  label?: string;
+  children: ReactNode;
+  checked: boolean;
+  onChange: (checked: boolean) => void;
+  disabled?: boolean;
+  hint?: ReactNode;
+}) {
+  const id = useId();
+  return (
+    <div className="py-1">
+      <div className="flex items-baseline gap-2">
+        <input
+          id={id}
+          type="checkbox"
+          aria-label={label}
+          checked={checked}
+          disabled={disabled}
+          onChange={(event) => onChange(event.target.checked)}
+          className="relative top-0.5 h-3.5 w-3.5 shrink-0 accent-verdigris"
+        />
+        <label htmlFor={id} className="min-w-0">
+          {children}
+        </label>
+      </div>
+      {hint !== undefined && <div className="pl-5.5 text-sm text-muted">{hint}</div>}
+    </div>
+  );
+}

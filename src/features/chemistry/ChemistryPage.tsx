@@ -1,0 +1,6 @@
+import { usePageTitle } from "../../lib/title";
+
+export default function ChemistryPage() {
+  usePageTitle("Chemistry");
+  return <h1 className="p-5 text-xl">Chemistry</h1>;
+}

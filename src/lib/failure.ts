@@ -1,0 +1,35 @@
+import type { ApiError } from "../../shared/schemas/member";
+
+/** A refusal of the server, or the network's silence, as an Error that keeps code and path. */
+export class ApiFailure extends Error {
+  override readonly name = "ApiFailure";
+  constructor(
+    /** HTTP status; 0 when the server did not answer */
+    readonly status: number,
+    readonly code: string,
+    /** where in the request, "" when it concerns the whole */
+    readonly path: string,
+    message: string,
+  ) {
+    super(message);
+  }
+}
+
+export const offline = () =>
+  new ApiFailure(
+    0,
+    "NO_ANSWER",
+    "",
+    "The server does not answer. What you entered is still here; try again in a moment.",
+  );
+
+export const fromBody = (status: number, body: unknown): ApiFailure =>
+  isApiError(body)
+    ? new ApiFailure(status, body.error.code, body.error.path, body.error.message)
+    : new ApiFailure(status, "UNEXPECTED", "", `The server answered with status ${status} and no explanation.`);
+
+const isApiError = (body: unknown): body is ApiError =>
+  typeof body === "object" && body !== null && "error" in body && typeof (body as ApiError).error?.message === "string";
+
+export const messageOf = (error: unknown): string =>
+  error instanceof Error ? error.message : "Something unexpected went wrong.";

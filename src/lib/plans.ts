@@ -1,0 +1,96 @@
+import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import type { z } from "zod";
+import type { Page, planDuplicate, projectCreate, ProjectRow } from "../../shared/schemas/api";
+import type { planCreate, planUpdate, PlanRow, revisionCreate, RevisionRow } from "../../shared/schemas/plan";
+import { api } from "./api";
+import { keys } from "./queries";
+
+/** All rows of a list route, page after page. */
+async function all<Row>(path: string, signal: AbortSignal): Promise<Row[]> {
+  const rows: Row[] = [];
+  for (;;) {
+    const join = path.includes("?") ? "&" : "?";
+    const page = await api.get<Page<Row>>(`${path}${join}limit=200&offset=${rows.length}`, { signal });
+    rows.push(...page.rows);
+    if (rows.length >= page.total || page.rows.length === 0) return rows;
+  }
+}
+
+export type ArchivedFilter = "false" | "true" | "all";
+
+export const useProjects = () =>
+  useQuery({ queryKey: keys.projects, queryFn: ({ signal }) => all<ProjectRow>("/projects", signal) });
+
+export const usePlans = (projectId: string | undefined, archived: ArchivedFilter = "false") =>
+  useQuery({
+    queryKey: keys.planList(projectId ?? "", archived),
+    queryFn: ({ signal }) =>
+      all<PlanRow>(`/plans?projectId=${encodeURIComponent(projectId ?? "")}&archived=${archived}`, signal),
+    enabled: projectId !== undefined,
+  });
+
+export const usePlan = (id: string | undefined) =>
+  useQuery({
+    queryKey: keys.plan(id ?? ""),
+    queryFn: ({ signal }) => api.get<PlanRow>(`/plans/${encodeURIComponent(id ?? "")}`, { signal }),
+    enabled: id !== undefined,
+  });
+
+export const useRevisions = (planId: string, enabled = true) =>
+  useQuery({
+    queryKey: keys.revisions(planId),
+    queryFn: ({ signal }) => all<RevisionRow>(`/plans/${encodeURIComponent(planId)}/revisions`, signal),
+    enabled,
+  });
+
+/** After a write every list of plans and projects may have changed. */
+function usePlanMutation<Variables, Answer>(
+  mutationFn: (variables: Variables) => Promise<Answer>,
+  seen?: (answer: Answer, variables: Variables) => PlanRow | undefined,
+) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn,
+    onSuccess: (answer, variables) => {
+      const plan = seen?.(answer, variables);
+      if (plan) client.setQueryData(keys.plan(plan.id), plan);
+      void client.invalidateQueries({ queryKey: keys.plans });
+      void client.invalidateQueries({ queryKey: keys.projects });
+    },
+  });
+}
+
+export const useCreateProject = () =>
+  usePlanMutation((body: z.input<typeof projectCreate>) => api.post<ProjectRow>("/projects", body));
+
+export const useCreatePlan = () =>
+  usePlanMutation(
+    (body: z.input<typeof planCreate>) => api.post<PlanRow>("/plans", body),
+    (plan) => plan,
+  );
+
+export const useDuplicatePlan = () =>
+  usePlanMutation(
+    ({ id, ...body }: z.input<typeof planDuplicate> & { id: string }) =>
+      api.post<PlanRow>(`/plans/${encodeURIComponent(id)}/duplicate`, body),
+    (plan) => plan,
+  );
+
+/** Name, description, archived. The version is the one the change was made against; 412 STALE when somebody was faster. */
+export const useUpdatePlan = () =>
+  usePlanMutation(
+    ({ id, version, ...body }: z.input<typeof planUpdate> & { id: string; version: number }) =>
+      api.patch<PlanRow>(`/plans/${encodeURIComponent(id)}`, body, { ifMatch: version }),
+    (plan) => plan,
+  );
+
+/** Saves the inputs as the next revision of the plan. */
+export const useSaveRevision = () =>
+  usePlanMutation(
+    ({ planId, version, ...body }: z.input<typeof revisionCreate> & { planId: string; version?: number }) =>
+      api.post<RevisionRow>(
+        `/plans/${encodeURIComponent(planId)}/revisions`,
+        body,
+        version === undefined ? {} : { ifMatch: version },
+      ),
+  );

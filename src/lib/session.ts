@@ -1,0 +1,74 @@
+import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import type { z } from "zod";
+import type { firstAdmin, Member, MemberRole, SessionAnswer, signIn } from "../../shared/schemas/member";
+import { api } from "./api";
+import { keys } from "./queries";
+
+/** Demo accounts, named by the server while demo data is seeded. */
+export interface DemoAccounts {
+  accounts: { email: string; role: MemberRole; name?: string }[];
+  password: string;
+}
+export type Session = SessionAnswer & { demo?: DemoAccounts | null };
+
+export const useSessionQuery = () =>
+  useQuery({
+    queryKey: keys.session,
+    queryFn: ({ signal }) => api.get<Session>("/session", { signal }),
+    staleTime: Infinity,
+  });
+
+/** The signed-in member. Only below the gate, where there is one.
+ *  @throws Error when nobody is signed in */
+export function useSession(): { user: Member } {
+  const { data } = useSessionQuery();
+  if (!data?.user) throw new Error("useSession is for screens behind the sign-in");
+  return { user: data.user };
+}
+
+const may = {
+  /** create, change, archive plans and projects */
+  writePlans: ["admin", "metallurgist"],
+} as const satisfies Record<string, readonly MemberRole[]>;
+
+/** Mirrors the server's roles: a control nobody may use is not shown. The server decides. */
+export function useMay(action: keyof typeof may): boolean {
+  const { user } = useSession();
+  return (may[action] as readonly MemberRole[]).includes(user.role);
+}
+
+function useEnter<Body>(path: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: Body) => api.post<Session>(path, body),
+    onSuccess: (session) => {
+      client.setQueryData(keys.sessionEnded, false);
+      client.setQueryData(keys.session, session);
+      void client.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== "session" });
+    },
+  });
+}
+export const useSignIn = () => useEnter<z.infer<typeof signIn>>("/session");
+export const useFirstAdmin = () => useEnter<z.infer<typeof firstAdmin>>("/first-admin");
+
+export function useSignOut() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: () => api.delete<null>("/session"),
+    onSuccess: async () => {
+      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== "session" });
+      await client.refetchQueries({ queryKey: keys.session, exact: true });
+    },
+  });
+}
+
+/** True when the server stopped knowing the session while the page was open; the page stays and asks to sign in again. */
+export function useSessionEnded(): boolean {
+  const { data } = useQuery({
+    queryKey: keys.sessionEnded,
+    queryFn: () => false,
+    staleTime: Infinity,
+    initialData: false,
+  });
+  return data;
+}
