@@ -1,11 +1,17 @@
 import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
+import { compression } from "vite-plugin-compression2";
 import { defineConfig } from "vitest/config";
 
 const apiPort = process.env.PORT ?? "5180";
 
 export default defineConfig({
-  plugins: [react(), tailwindcss()],
+  plugins: [
+    react(),
+    tailwindcss(),
+    // The server sends the .br and .gz files that are made here.
+    compression({ algorithms: ["gzip", "brotliCompress"], include: /\.(html|css|js|svg|json|ttf)$/ }),
+  ],
   build: {
     outDir: "dist/client",
     emptyOutDir: true,

@@ -1,0 +1,6 @@
+/** Every table of the database, on one page. */
+export { sessions } from "../features/auth/schema";
+export { chemistryVersions, libraryRows, speciesRows } from "../features/chemistry/schema";
+export { users } from "../features/members/schema";
+export { planRevisions, plans } from "../features/plans/schema";
+export { projects } from "../features/projects/schema";

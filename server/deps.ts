@@ -1,0 +1,23 @@
+import type { Logger } from "pino";
+import type { Outcome } from "../shared/outcome";
+import type { ChemicalTables } from "../shared/schemas/chemistry";
+import type { Solution } from "../shared/solution";
+import type { ChemicalData } from "../shared/species/chemicalData";
+import type { Config } from "./config";
+import type { Db } from "./db/open";
+import type { Sessions } from "./features/auth/sessions";
+
+/** Everything the routes stand on. */
+export interface Deps {
+  db: Db;
+  config: Config;
+  clock: () => Date;
+  log: Logger;
+  sessions: Sessions;
+  chemistry: {
+    /** the library this server ships, as the database keeps it */
+    current: ChemicalTables;
+    data: ChemicalData;
+  };
+  solve: (problem: unknown, data: ChemicalData) => Outcome<Solution>;
+}

@@ -1,0 +1,75 @@
+import { rateLimit } from "express-rate-limit";
+import { firstAdmin, signIn, type Member, type SessionAnswer } from "../../../shared/schemas/member";
+import type { Deps } from "../../deps";
+import { created, noContent, ok } from "../../http/answer";
+import { Refusal } from "../../http/refusal";
+import { route } from "../../http/route";
+import { anyMember, createFirstAdmin, findByEmail } from "../members/service";
+import { passwordMatches } from "./passwords";
+
+const minutes = 15;
+
+/** Counts failures alone: members who mistype and then get in are not held up. */
+const failureLimit = (attempts: number) =>
+  rateLimit({
+    windowMs: minutes * 60_000,
+    limit: attempts,
+    standardHeaders: "draft-8",
+    legacyHeaders: false,
+    skipSuccessfulRequests: true,
+    // Whether X-Forwarded-For is believed is TRUST_PROXY's business.
+    validate: { xForwardedForHeader: false },
+    handler: () => {
+      const message = `Too many failed attempts from this address; try again in ${minutes} minutes.`;
+      throw new Refusal("TOO_MANY_ATTEMPTS", "", message);
+    },
+  });
+
+export function authRoutes({ db, sessions, clock, config }: Deps) {
+  const answer = (user: Member | null): SessionAnswer => ({ user, needsFirstAdmin: !anyMember(db) });
+  const limit = failureLimit(config.signInAttempts);
+  return [
+    route({
+      method: "GET",
+      path: "/api/session",
+      roles: "public",
+      handle: ({ user }) => ok(answer(user)),
+    }),
+    route({
+      method: "POST",
+      path: "/api/session",
+      roles: "public",
+      before: [limit],
+      body: signIn,
+      handle: async ({ body, req }) => {
+        const found = findByEmail(db, body.email);
+        if (!(await passwordMatches(found?.passwordHash ?? null, body.password)) || !found) {
+          throw new Refusal("WRONG_CREDENTIALS", "", "No member has this e-mail address with this password.");
+        }
+        const { passwordHash: _, ...member } = found;
+        await sessions.end(req.headers.cookie);
+        return ok(answer(member), { "Set-Cookie": await sessions.start(member.id) });
+      },
+    }),
+    route({
+      method: "DELETE",
+      path: "/api/session",
+      roles: "public",
+      handle: async ({ req, res }) => {
+        res.set("Set-Cookie", await sessions.end(req.headers.cookie));
+        return noContent();
+      },
+    }),
+    route({
+      method: "POST",
+      path: "/api/first-admin",
+      roles: "public",
+      before: [limit],
+      body: firstAdmin,
+      handle: async ({ body }) => {
+        const member = await createFirstAdmin(db, clock(), body);
+        return created(answer(member), { "Set-Cookie": await sessions.start(member.id) });
+      },
+    }),
+  ];
+}

@@ -1,0 +1,91 @@
+import { and, count, desc, eq, sql, type SQL } from "drizzle-orm";
+import type { z } from "zod";
+import type { plansQuery } from "../../../shared/schemas/api";
+import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
+import type { Db } from "../../db/open";
+import { Refusal } from "../../http/refusal";
+import { users } from "../members/schema";
+import { projects } from "../projects/schema";
+import { planRevisions, plans } from "./schema";
+
+const revisionColumns = {
+  planId: planRevisions.planId,
+  number: planRevisions.number,
+  note: planRevisions.note,
+  author: users.name,
+  createdAt: planRevisions.createdAt,
+  dataVersion: planRevisions.dataVersion,
+  inputs: planRevisions.inputs,
+};
+
+/** Revisions are numbered without gaps and never deleted: the highest number is also how many there are. */
+const highestNumber = sql`(select max(number) from plan_revisions where plan_id = ${plans.id})`;
+
+const selectPlans = (db: Db) =>
+  db
+    .select({ plan: plans, projectName: projects.name, siteName: projects.siteName, latest: revisionColumns })
+    .from(plans)
+    .innerJoin(projects, eq(projects.id, plans.projectId))
+    .innerJoin(planRevisions, and(eq(planRevisions.planId, plans.id), eq(planRevisions.number, highestNumber)))
+    .innerJoin(users, eq(users.id, planRevisions.authorId));
+type Selected = NonNullable<ReturnType<ReturnType<typeof selectPlans>["get"]>>;
+
+const asRow = ({ plan, latest, projectName, siteName }: Selected): PlanRow => ({
+  ...plan,
+  projectName,
+  siteName,
+  revisionCount: latest.number,
+  latest,
+});
+
+type Query = z.output<typeof plansQuery>;
+
+function filterOf({ projectId, archived }: Query): SQL | undefined {
+  return and(
+    projectId === undefined ? undefined : eq(plans.projectId, projectId),
+    archived === "all" ? undefined : eq(plans.archived, archived === "true"),
+  );
+}
+
+/** Newest change first. */
+export function listPlans(db: Db, query: Query): { rows: PlanRow[]; total: number } {
+  const filter = filterOf(query);
+  const rows = selectPlans(db)
+    .where(filter)
+    .orderBy(desc(plans.updatedAt), plans.id)
+    .limit(query.limit)
+    .offset(query.offset)
+    .all();
+  const total = db.select({ n: count() }).from(plans).where(filter).get()?.n ?? 0;
+  return { rows: rows.map(asRow), total };
+}
+
+/** @throws Refusal NOT_FOUND */
+export function planOf(db: Db, id: string): PlanRow {
+  const found = selectPlans(db).where(eq(plans.id, id)).get();
+  if (!found) throw new Refusal("NOT_FOUND", "id", `There is no plan ${id}.`);
+  return asRow(found);
+}
+
+const selectRevisions = (db: Db) =>
+  db.select(revisionColumns).from(planRevisions).innerJoin(users, eq(users.id, planRevisions.authorId));
+
+/** Newest first. */
+export function listRevisions(db: Db, planId: string, { limit, offset }: { limit: number; offset: number }) {
+  const total = planOf(db, planId).revisionCount;
+  const rows: RevisionRow[] = selectRevisions(db)
+    .where(eq(planRevisions.planId, planId))
+    .orderBy(desc(planRevisions.number))
+    .limit(limit)
+    .offset(offset)
+    .all();
+  return { rows, total };
+}
+
+/** @throws Refusal NOT_FOUND */
+export function revisionOf(db: Db, planId: string, number: number): RevisionRow {
+  const wanted = and(eq(planRevisions.planId, planId), eq(planRevisions.number, number));
+  const found = selectRevisions(db).where(wanted).get();
+  if (!found) throw new Refusal("NOT_FOUND", "number", `Plan ${planId} has no revision ${number}.`);
+  return found;
+}

@@ -1,0 +1,121 @@
+import { and, eq } from "drizzle-orm";
+import type { z } from "zod";
+import type { planDuplicate } from "../../../shared/schemas/api";
+import type {
+  PlanInputs,
+  planCreate,
+  PlanRow,
+  planUpdate,
+  revisionCreate,
+  RevisionRow,
+} from "../../../shared/schemas/plan";
+import type { Db } from "../../db/open";
+import { Refusal } from "../../http/refusal";
+import { projectOf } from "../projects/service";
+import { planOf, revisionOf } from "./rows";
+import { planRevisions, plans } from "./schema";
+
+/** Who writes, when, and with which version of the chemistry library. */
+export interface Writing {
+  authorId: string;
+  now: Date;
+  dataVersion: string;
+}
+
+interface NewPlan {
+  projectId: string;
+  name: string;
+  description: string;
+  inputs: PlanInputs;
+  note: string;
+  invented: boolean;
+}
+
+function insertPlan(db: Db, { note, inputs, ...plan }: NewPlan, writing: Writing): PlanRow {
+  const id = crypto.randomUUID();
+  const at = writing.now.toISOString();
+  return db.transaction((tx) => {
+    tx.insert(plans)
+      .values({ id, ...plan, createdAt: at, updatedAt: at })
+      .run();
+    insertRevision(tx, { planId: id, number: 1, note, inputs }, writing);
+    return planOf(tx, id);
+  });
+}
+
+function insertRevision(
+  db: Db,
+  revision: { planId: string; number: number; note: string; inputs: PlanInputs },
+  { authorId, now, dataVersion }: Writing,
+): void {
+  db.insert(planRevisions)
+    .values({ ...revision, authorId, dataVersion, createdAt: now.toISOString() })
+    .run();
+}
+
+export function createPlan(db: Db, values: z.output<typeof planCreate>, writing: Writing): PlanRow {
+  const { invented } = projectOf(db, values.projectId);
+  return insertPlan(db, { ...values, note: "", invented }, writing);
+}
+
+/** A new plan whose first revision holds the latest inputs of another. What stems from invented data stays marked. */
+export function duplicatePlan(
+  db: Db,
+  id: string,
+  { name, projectId }: z.output<typeof planDuplicate>,
+  writing: Writing,
+): PlanRow {
+  const source = planOf(db, id);
+  const project = projectOf(db, projectId ?? source.projectId);
+  const values: NewPlan = {
+    projectId: project.id,
+    name: name ?? `${source.name.slice(0, 113)} (copy)`,
+    description: source.description,
+    inputs: source.latest.inputs,
+    note: `Copied from “${source.name}”, revision ${source.latest.number}.`,
+    invented: source.invented || project.invented,
+  };
+  return insertPlan(db, values, writing);
+}
+
+/** Raises the version, if it still is the one the writer saw.
+ *  @throws Refusal STALE with the current row beside it */
+function change(db: Db, id: string, seen: number, now: Date, values: z.output<typeof planUpdate> = {}): void {
+  const current = planOf(db, id);
+  if (current.version === seen) {
+    const set = { ...values, version: seen + 1, updatedAt: now.toISOString() };
+    db.update(plans)
+      .set(set)
+      .where(and(eq(plans.id, id), eq(plans.version, seen)))
+      .run();
+    return;
+  }
+  const message = `The plan is at version ${current.version} by now, you changed version ${seen}.`;
+  throw new Refusal("STALE", "If-Match", message, { current });
+}
+
+/** @throws Refusal NOT_FOUND, STALE */
+export function updatePlan(db: Db, id: string, seen: number, values: z.output<typeof planUpdate>, now: Date): PlanRow {
+  return db.transaction((tx) => {
+    change(tx, id, seen, now, values);
+    return planOf(tx, id);
+  });
+}
+
+/** @param seen  the plan's version the writer saw; null: append whatever happened meanwhile
+ *  @throws Refusal NOT_FOUND, STALE */
+export function addRevision(
+  db: Db,
+  planId: string,
+  seen: number | null,
+  { note, inputs }: z.output<typeof revisionCreate>,
+  writing: Writing,
+): RevisionRow {
+  return db.transaction((tx) => {
+    const current = planOf(tx, planId);
+    change(tx, planId, seen ?? current.version, writing.now);
+    const number = current.revisionCount + 1;
+    insertRevision(tx, { planId, number, note, inputs }, writing);
+    return revisionOf(tx, planId, number);
+  });
+}

@@ -1,0 +1,14 @@
+/** What a route's handler gives back; only the router touches the response. */
+export interface Answer {
+  status: number;
+  body?: unknown;
+  headers: Record<string, string>;
+}
+
+export const ok = (body: unknown, headers: Record<string, string> = {}): Answer => ({ status: 200, body, headers });
+export const created = (body: unknown, headers: Record<string, string> = {}): Answer => ({
+  status: 201,
+  body,
+  headers,
+});
+export const noContent = (): Answer => ({ status: 204, headers: {} });

@@ -1,0 +1,69 @@
+import { createServer, type Server } from "node:http";
+import type { AddressInfo } from "node:net";
+import { join } from "node:path";
+import type { Logger } from "pino";
+import { valueOf } from "../shared/outcome";
+import { solve } from "../shared/solve";
+import { libraryFrom } from "../shared/species/library";
+import { createApp } from "./app";
+import { readTables } from "./chemistry/readTables";
+import type { Config } from "./config";
+import { migrateDatabase } from "./db/migrate";
+import { openDatabase } from "./db/open";
+import { createSessions } from "./features/auth/sessions";
+import { keepVersion, keptVersion } from "./features/chemistry/service";
+import { findByEmail } from "./features/members/service";
+import { demoAccounts } from "./demo/accounts";
+import { seedDemoOnFirstRun } from "./demo/seed";
+import { projectRoot } from "./root";
+
+export interface Running {
+  url: string;
+  /** the demo's accounts still open this server */
+  demo: boolean;
+  /** takes no more requests, lets those under way end, closes the database */
+  stop: () => Promise<void>;
+}
+
+/** Opens, migrates and fills the database, then serves API and pages on one port. */
+export async function startServer(config: Config, log: Logger): Promise<Running> {
+  const open = openDatabase(config.databasePath);
+  const { db, raw } = open;
+  const { ran, backup } = migrateDatabase(open);
+  if (ran > 0) log.info({ ran, backup }, "database migrated");
+
+  const clock = () => new Date();
+  const { tables, version } = readTables();
+  if (keepVersion(db, tables, clock())) log.info({ version }, "chemistry library written to the database");
+  const current = keptVersion(db, version);
+  if (config.seedDemo && (await seedDemoOnFirstRun(db, version))) log.info("demo data written");
+
+  const https = config.appUrl.startsWith("https:");
+  const sessions = createSessions(db, { https, days: config.sessionDays });
+  const chemistry = { current, data: valueOf(libraryFrom(current)) };
+  const app = createApp({ db, config, clock, log, sessions, chemistry, solve }, join(projectRoot, "dist/client"));
+
+  const server = await listen(createServer(app), config);
+  const { port } = server.address() as AddressInfo;
+  const demo = demoAccounts.some(({ email }) => findByEmail(db, email));
+  const stop = async () => {
+    await close(server);
+    raw.close();
+  };
+  return { url: `http://${config.host === "0.0.0.0" ? "localhost" : config.host}:${port}`, demo, stop };
+}
+
+function listen(server: Server, { port, host }: Config): Promise<Server> {
+  return new Promise((resolve, reject) => {
+    server.once("error", reject);
+    server.listen(port, host, () => resolve(server));
+  });
+}
+
+function close(server: Server): Promise<void> {
+  return new Promise((resolve) => {
+    server.close(() => resolve());
+    server.closeIdleConnections();
+    setTimeout(() => server.closeAllConnections(), 3000).unref();
+  });
+}
