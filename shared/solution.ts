@@ -56,8 +56,14 @@ export interface SetPoint {
   cutByFrame: boolean;
 }
 
+/** Counter-clockwise outside, holes clockwise. */
+export interface Outline {
+  outer: Point[];
+  holes: Point[][];
+}
+
 export interface Window {
-  polygons: { outer: Point[]; holes: Point[][] }[];
+  polygons: Outline[];
   /** pH x V */
   area: number;
   pH: [number, number];
@@ -99,6 +105,9 @@ export interface Solution {
   leftOut: { species: string; reason: string }[];
   warnings: SolutionWarning[];
   waterLines: WaterLine[];
-  /** activity each metal was solved at, with gamma where it came from a tenor */
-  activities: { metal: string; activity: number; gPerL?: number; gamma?: number }[];
+  /** requirement and activity each metal was solved at, with gamma where it came from a tenor */
+  metals: { metal: string; requirement: Requirement; activity: number; gPerL?: number; gamma?: number }[];
+  /** ground shut by each metal: the union of its fields that are not as required, outlines with holes; on request only */
+  shut?: { metal: string; polygons: Outline[] }[];
+  frame: { pH: [number, number]; Eh: [number, number] };
 }

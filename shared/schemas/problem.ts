@@ -6,6 +6,15 @@ export const requirements = ["dissolved", "solid", "metal", "compound", "free"] 
 export type Requirement = (typeof requirements)[number];
 export const solidsBases = ["feed", "fresh", "aged"] as const;
 
+/** A species a problem brings along: the columns of the tables, the unknown ones left away. */
+const ownSpecies = z.preprocess(
+  (row) =>
+    typeof row === "object" && row !== null
+      ? { name: "", grade: "C", source: "", note: "", ion_class: "", dHf_kJ: "", S_J: "", Cp_J: "", Cp_a: "", Cp_b: "", Cp_c: "", Cp_Tmax_K: "", ...row }
+      : row,
+  speciesRow,
+);
+
 const positive = z.number().positive();
 const range = z
   .tuple([z.number(), z.number()])
@@ -57,7 +66,7 @@ export const problemSchema = z.object({
   /** put back whatever the basis or the defaults leave out */
   putBack: z.array(z.string()).optional(),
   only: z.array(z.string()).optional(),
-  species: z.array(speciesRow).optional(),
+  species: z.array(ownSpecies).optional(),
   frame: frameSchema,
   water: waterSchema.optional(),
   controlBand: controlBandSchema,

@@ -1,0 +1,161 @@
+import { sideOfCrossing, turn, type Line } from "./line";
+
+/** A convex piece of the (pH, E) plane: the counter-clockwise cycle of its bounding lines, each positive inside.
+ *  Corner i is the crossing of edges i and i + 1; its coordinates are only for drawing, measuring and for filtering the
+ *  exact predicates (`ex`, `ey` bound their rounding). `tags[i]` says, in the caller's own numbers, what edge i is. */
+export interface Convex {
+  readonly lines: readonly Line[];
+  readonly tags: readonly number[];
+  readonly x: readonly number[];
+  readonly y: readonly number[];
+  readonly ex: readonly number[];
+  readonly ey: readonly number[];
+}
+
+const EPS = Number.EPSILON;
+
+function corner(a: Line, b: Line): [x: number, y: number, ex: number, ey: number] {
+  const p = a[1] * b[2];
+  const q = b[1] * a[2];
+  const det = p - q;
+  const u1 = a[2] * b[0];
+  const u2 = b[2] * a[0];
+  const v1 = b[1] * a[0];
+  const v2 = a[1] * b[0];
+  const x = (u1 - u2) / det;
+  const y = (v1 - v2) / det;
+  const size = Math.abs(det);
+  const detError = Math.abs(p) + Math.abs(q);
+  const ex = (4 * EPS * (Math.abs(u1) + Math.abs(u2) + Math.abs(x) * detError)) / size;
+  const ey = (4 * EPS * (Math.abs(v1) + Math.abs(v2) + Math.abs(y) * detError)) / size;
+  return [x, y, ex, ey];
+}
+
+/** A piece from its cycle of lines.
+ *  @param lines  counter-clockwise, positive inside, no redundant line     @param tags  one a line     @returns  the piece
+ *  @source  Cramer's rule for the corners */
+export function convexOf(lines: readonly Line[], tags: readonly number[]): Convex {
+  const n = lines.length;
+  const x = new Array<number>(n);
+  const y = new Array<number>(n);
+  const ex = new Array<number>(n);
+  const ey = new Array<number>(n);
+  for (let i = 0; i < n; i++) {
+    const c = corner(lines[i]!, lines[i + 1 === n ? 0 : i + 1]!);
+    x[i] = c[0];
+    y[i] = c[1];
+    ex[i] = c[2];
+    ey[i] = c[3];
+  }
+  return { lines, tags, x, y, ex, ey };
+}
+
+/** The rectangle of the frame; edges in the order low E, high pH, high E, low pH.
+ *  @param pH, Eh  [low, high], pH and V     @param tags  of the four edges in that order
+ *  @source  axis-parallel half-planes */
+export function rectangle(
+  pH: readonly [number, number],
+  Eh: readonly [number, number],
+  tags: readonly [number, number, number, number],
+): Convex {
+  return convexOf(
+    [
+      [-Eh[0], 0, 1],
+      [pH[1], -1, 0],
+      [Eh[1], 0, -1],
+      [-pH[0], 1, 0],
+    ],
+    tags,
+  );
+}
+
+/** Sign of line h at corner i of a piece; exact (floating point decides only where its error bound allows).
+ *  @returns  -1, 0 or 1     @source  filtered predicate, Shewchuk 1997 */
+export function sideOfCorner(piece: Convex, i: number, h: Line): number {
+  const x = piece.x[i]!;
+  const y = piece.y[i]!;
+  const hx = h[1] * x;
+  const hy = h[2] * y;
+  const value = h[0] + hx + hy;
+  const bound =
+    Math.abs(h[1]) * piece.ex[i]! +
+    Math.abs(h[2]) * piece.ey[i]! +
+    4 * EPS * (Math.abs(h[0]) + Math.abs(hx) + Math.abs(hy));
+  if (value > bound) return 1;
+  if (value < -bound) return -1;
+  const n = piece.lines.length;
+  return sideOfCrossing(h, piece.lines[i]!, piece.lines[i + 1 === n ? 0 : i + 1]!);
+}
+
+/** The part of a piece where line h is >= 0, or null when no corner lies strictly inside it. An edge stays if one of its
+ *  ends is strictly inside. Where h lies along an edge, `prefersNew(edge)` says whether the new tag replaces the old.
+ *  @param piece  the piece     @param h  new bound     @param tag  of the new edge     @param prefersNew  tie rule, default keeps the old
+ *  @returns  the same object when nothing is cut     @source  half-plane clipping on the cycle of lines, signs exact */
+export function clip(piece: Convex, h: Line, tag: number, prefersNew?: (edge: number) => boolean): Convex | null {
+  const n = piece.lines.length;
+  let anyInside = false;
+  let anyOutside = false;
+  let anyOn = false;
+  const sign = new Array<number>(n);
+  for (let i = 0; i < n; i++) {
+    const s = sideOfCorner(piece, i, h);
+    sign[i] = s;
+    if (s > 0) anyInside = true;
+    else if (s < 0) anyOutside = true;
+    else anyOn = true;
+  }
+  if (!anyInside) return null;
+  if (!anyOutside) return anyOn && prefersNew ? retag(piece, h, tag, sign, prefersNew) : piece;
+  // strictly inside corners are contiguous on the cycle: edges first..last keep an end inside
+  let first = 0;
+  while (!(sign[first]! > 0 && sign[first === 0 ? n - 1 : first - 1]! <= 0)) first++;
+  const lines: Line[] = [];
+  const tags: number[] = [];
+  let i = first; // edge i ends in corner i
+  while (sign[i]! > 0) {
+    lines.push(piece.lines[i]!);
+    tags.push(piece.tags[i]!);
+    i = i + 1 === n ? 0 : i + 1;
+  }
+  lines.push(piece.lines[i]!); // begins strictly inside
+  tags.push(piece.tags[i]!);
+  lines.push(h);
+  tags.push(tag);
+  return convexOf(lines, tags);
+}
+
+function retag(
+  piece: Convex,
+  h: Line,
+  tag: number,
+  sign: readonly number[],
+  prefersNew: (edge: number) => boolean,
+): Convex {
+  const n = piece.lines.length;
+  for (let i = 0; i < n; i++) {
+    const before = sign[i === 0 ? n - 1 : i - 1]!;
+    if (sign[i] === 0 && before === 0 && turn(piece.lines[i]!, h) === 0 && prefersNew(i)) {
+      return {
+        ...piece,
+        lines: piece.lines.map((l, k) => (k === i ? h : l)),
+        tags: piece.tags.map((t, k) => (k === i ? tag : t)),
+      };
+    }
+  }
+  return piece;
+}
+
+/** Area of a piece, pH x V; shoelace on the drawn corners.
+ *  @source  Gauss's area formula */
+export function areaOf(piece: Convex): number {
+  const n = piece.x.length;
+  let twice = 0;
+  for (let i = 0; i < n; i++) {
+    const j = i + 1 === n ? 0 : i + 1;
+    twice += (piece.x[i]! - piece.x[0]!) * (piece.y[j]! - piece.y[0]!) - (piece.x[j]! - piece.x[0]!) * (piece.y[i]! - piece.y[0]!);
+  }
+  return twice / 2;
+}
+
+/** Corners counter-clockwise, for drawing. */
+export const cornersOf = (piece: Convex): [number, number][] => piece.x.map((x, i) => [x, piece.y[i]!]);

@@ -1,0 +1,136 @@
+import type { Convex } from "./convex";
+import { flipped, orderAlong, sameLine, type Line } from "./line";
+
+/** One edge of one piece, on its line. */
+export interface Edge {
+  readonly piece: number;
+  readonly edge: number;
+  readonly line: Line;
+  /** lines that cut the edge at its start and end, walking counter-clockwise round the piece */
+  readonly before: Line;
+  readonly after: Line;
+}
+
+/** All edges that lie on one line, whichever way they face. Places along it are whole numbers: equal places, equal rank. */
+export interface LineClass {
+  readonly line: Line;
+  readonly edges: readonly (Edge & { readonly facing: 1 | -1; readonly low: number; readonly high: number })[];
+  /** drawn coordinates of each rank */
+  readonly places: readonly (readonly [number, number])[];
+}
+
+interface Sortable {
+  edge: Edge;
+  slope: number;
+  offset: number;
+}
+
+/** Pseudo-angle and offset of a line, direction ignored; only to bring equal lines near each other in a list. */
+function sortable(edge: Edge): Sortable {
+  const [k, x, y] = edge.line;
+  const size = Math.abs(x) + Math.abs(y);
+  const sign = x > 0 || (x === 0 && y > 0) ? 1 : -1;
+  return { edge, slope: (sign * y) / size, offset: (sign * k) / size };
+}
+
+/** Splits a sorted list where neighbours differ by more than `gap`. */
+function runs<T>(list: readonly T[], key: (item: T) => number, gap: number): T[][] {
+  const out: T[][] = [];
+  for (const item of list) {
+    const last = out.at(-1);
+    if (last && key(item) - key(last.at(-1)!) <= gap * (1 + Math.abs(key(item)))) last.push(item);
+    else out.push([item]);
+  }
+  return out;
+}
+
+/** Groups the edges of many pieces by the line they lie on. Near lines are found by sorting, equal ones decided exactly.
+ *  @param pieces  convex pieces with disjoint interiors     @returns  one class a line, places ranked along it
+ *  @source  exact collinearity (line.ts) */
+export function lineClasses(pieces: readonly Convex[]): LineClass[] {
+  const all: Sortable[] = [];
+  pieces.forEach((p, piece) => {
+    const n = p.lines.length;
+    for (let e = 0; e < n; e++) {
+      all.push(
+        sortable({
+          piece,
+          edge: e,
+          line: p.lines[e]!,
+          before: p.lines[e === 0 ? n - 1 : e - 1]!,
+          after: p.lines[e + 1 === n ? 0 : e + 1]!,
+        }),
+      );
+    }
+  });
+  all.sort((a, b) => a.slope - b.slope);
+  const classes: LineClass[] = [];
+  for (const parallel of runs(all, (s) => s.slope, 1e-9)) {
+    parallel.sort((a, b) => a.offset - b.offset);
+    for (const near of runs(parallel, (s) => s.offset, 1e-9)) {
+      const groups: Edge[][] = [];
+      for (const { edge } of near) {
+        const home = groups.find((g) => sameLine(g[0]!.line, edge.line));
+        if (home) home.push(edge);
+        else groups.push([edge]);
+      }
+      for (const group of groups) classes.push(ranked(group, pieces));
+    }
+  }
+  return classes;
+}
+
+interface End {
+  t: number;
+  error: number;
+  cut: Line;
+  place: readonly [number, number];
+}
+
+function ranked(group: readonly Edge[], pieces: readonly Convex[]): LineClass {
+  const line = group[0]!.line;
+  const axis = Math.abs(line[1]) > Math.abs(line[2]) ? 1 : 2;
+  const size = Math.hypot(line[1], line[2]);
+  const dx = line[2] / size;
+  const dy = -line[1] / size;
+  const ends: End[] = [];
+  for (const e of group) {
+    const p = pieces[e.piece]!;
+    const n = p.lines.length;
+    const start = e.edge === 0 ? n - 1 : e.edge - 1;
+    for (const [corner, cut] of [
+      [start, e.before],
+      [e.edge, e.after],
+    ] as const) {
+      const x = p.x[corner]!;
+      const y = p.y[corner]!;
+      ends.push({
+        t: x * dx + y * dy,
+        error: p.ex[corner]! + p.ey[corner]! + 8 * Number.EPSILON * (Math.abs(x) + Math.abs(y)),
+        cut,
+        place: [x, y],
+      });
+    }
+  }
+  const order = (a: End, b: End): number => {
+    const gap = a.t - b.t;
+    return Math.abs(gap) > a.error + b.error ? gap : orderAlong(line, a.cut, b.cut);
+  };
+  const sorted = ends.map((_, i) => i).sort((a, b) => order(ends[a]!, ends[b]!));
+  const rank = new Array<number>(ends.length);
+  const places: (readonly [number, number])[] = [];
+  sorted.forEach((i, at) => {
+    if (at === 0 || order(ends[sorted[at - 1]!]!, ends[i]!) !== 0) places.push(ends[i]!.place);
+    rank[i] = places.length - 1;
+  });
+  const edges = group.map((e, i) => {
+    const facing: 1 | -1 = Math.sign(e.line[axis]) === Math.sign(line[axis]) ? 1 : -1;
+    const a = rank[2 * i]!;
+    const b = rank[2 * i + 1]!;
+    return { ...e, facing, low: Math.min(a, b), high: Math.max(a, b) };
+  });
+  return { line, edges, places };
+}
+
+/** The line of a class as an edge facing that way sees it. */
+export const lineFacing = (c: LineClass, facing: 1 | -1): Line => (facing === 1 ? c.line : flipped(c.line));

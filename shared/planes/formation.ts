@@ -1,0 +1,58 @@
+import type { Plane } from "../geometry/envelope";
+import type { Species } from "../species/chemicalData";
+import { snap, type Basis } from "./grid";
+
+/** A species written over its main element, ligands, H2O, H^+ and e^-. */
+export interface Formation {
+  readonly species: Species;
+  /** everything but the ligands' potentials, for the whole formula unit */
+  readonly plane: Plane;
+  /** ligand component -> number in the formula unit (whole) */
+  readonly ligands: readonly (readonly [component: string, count: number])[];
+}
+
+/** Smallest factor that makes every number whole: pentlandite is written with 4.5 iron. */
+function wholeFactor(numbers: readonly number[]): number {
+  for (let f = 1; f <= 12; f++) if (numbers.every((n) => Math.abs(n * f - Math.round(n * f)) < 1e-9)) return f;
+  throw new Error(`no small factor makes ${numbers.join(", ")} whole`);
+}
+
+/** Plane of a species per formula unit: k + x pH + y E is its free energy less that of its H2O, H^+ and e^-, at the given
+ *  total activity of the main element. With nu atoms a dissolved species carries RT ln(a / nu).
+ *  @param species  holds `main`     @param main  element or ligand group     @param activity  total, > 0     @param ligands  numbers of the other components
+ *  @param basis  prices at T     @returns  snapped plane; `atoms` = nu (times the factor that makes the formula whole)
+ *  @source  docs/method.md, step 2: sp = nu M + l L + o H2O + (h - 2o) H^+ + (h - 2o - z) e^- */
+export function formationOf(
+  species: Species,
+  main: string,
+  activity: number,
+  ligands: readonly (readonly [string, number])[],
+  basis: Basis,
+): Formation {
+  const { composition, charge, phase, id } = species;
+  const factor = wholeFactor(Object.values(composition));
+  const atoms = composition[main]!;
+  const oxygen = composition["O"] ?? 0;
+  const protons = (composition["H"] ?? 0) - 2 * oxygen;
+  const electrons = protons - charge;
+  const dissolved = phase === "aq" ? basis.thermal * Math.log(activity / atoms) : 0;
+  const k = basis.energies.of(id).G + dissolved - oxygen * basis.water - electrons * basis.electronAtZero;
+  return {
+    species,
+    plane: {
+      k: snap(factor * k),
+      x: Math.round(factor * protons) * basis.proton,
+      y: Math.round(factor * electrons) * basis.electron,
+      atoms: Math.round(factor * atoms),
+    },
+    ligands: ligands.map(([c, n]) => [c, Math.round(factor * n)] as const),
+  };
+}
+
+/** The same per atom of the main element, snapped again: the potential of a ligand in a cell where this species holds it. */
+export const perAtom = ({ plane: p }: Formation): Plane => ({
+  k: Math.round(p.k / p.atoms),
+  x: Math.round(p.x / p.atoms),
+  y: Math.round(p.y / p.atoms),
+  atoms: 1,
+});

@@ -1,0 +1,60 @@
+import type { ChemicalData, Species } from "../species/chemicalData";
+
+/** Sulfur that never meets sulfate while sulfate reduction is off: sulfide, S(0), sulfite. Own total, none by default. */
+export const SULFIDE_SULFUR = "S(sulfide)";
+
+const LIGAND_ELEMENTS: ReadonlySet<string> = new Set(["S", "N", "C", "Cl", "F", "P"]);
+/** "other components" of a plan: not ligands of the lixiviant, but partners of jarosites, gypsum, silicates */
+const PARTNERS: ReadonlySet<string> = new Set(["K", "Na", "Li", "Mg", "Ca", "Si", "NH3"]);
+
+const SULFATE = /SO4|S2O8/;
+
+/** Whether the sulfur of a species is sulfate sulfur (its formula holds SO4, HSO4 or S2O8).
+ *  @param species  holds S     @returns  true for sulfate sulfur     @source  design rule: sulfate and sulfide sulfur never equilibrate */
+export const holdsSulfate = (species: Species): boolean => SULFATE.test(species.formula);
+
+/** The component through which a species takes its `S`, given whether sulfate reduction is on. */
+export const sulfurComponent = (species: Species, sulfateReduction: boolean): string =>
+  sulfateReduction || holdsSulfate(species) ? "S" : SULFIDE_SULFUR;
+
+export type ComponentKind = "ligand" | "partner" | "metal" | "unknown";
+
+/** What a component is to the solver: a ligand, a partner with its own total, or a metal.
+ *  @param data  library     @param component  as in components.csv, or `S(sulfide)` */
+export function componentKind(data: ChemicalData, component: string): ComponentKind {
+  if (component === SULFIDE_SULFUR) return "ligand";
+  const entry = data.components.get(component);
+  if (!entry || component === "H" || component === "O") return "unknown";
+  if (entry.kind === "ligand_group" || LIGAND_ELEMENTS.has(component)) return "ligand";
+  return PARTNERS.has(component) ? "partner" : "metal";
+}
+
+/** Composition of a species without its main element, H and O, sulfur named by the pool it belongs to.
+ *  @returns  component -> atoms or groups */
+export function ligandNumbers(species: Species, main: string, sulfateReduction: boolean): [component: string, count: number][] {
+  const out: [string, number][] = [];
+  for (const [component, count] of Object.entries(species.composition)) {
+    if (component === main || component === "H" || component === "O") continue;
+    out.push([component === "S" ? sulfurComponent(species, sulfateReduction) : component, count]);
+  }
+  return out;
+}
+
+const byMain = new WeakMap<ChemicalData, Map<string, Species[]>>();
+
+/** All species that hold a component, in the order of the tables; indexed once per library. */
+export function speciesHolding(data: ChemicalData, component: string): readonly Species[] {
+  let index = byMain.get(data);
+  if (!index) {
+    index = new Map();
+    for (const species of data.species.values()) {
+      for (const part of Object.keys(species.composition)) {
+        const list = index.get(part);
+        if (list) list.push(species);
+        else index.set(part, [species]);
+      }
+    }
+    byMain.set(data, index);
+  }
+  return index.get(component) ?? [];
+}

@@ -1,0 +1,47 @@
+import type { MetalFields } from "./fields/fields";
+import type { Prepared } from "./selection/prepare";
+import type { Field, SolutionWarning } from "./solution";
+import type { EnergiesAtT } from "./species/chemicalData";
+
+/** A ligand's total is not drawn down by the metals; beyond this share of it the plan says so (design, method step 3). */
+const DRAWN_DOWN_SHARE = 1 / 3;
+
+/** What the user must know before trusting the picture: fields that rest on a G outside its trusted range, ligands that
+ *  the metals would use up, saturation pressure.
+ *  @param prepared, metals, fields, energies  of one solution     @returns  sentences with a code
+ *  @source  docs/method.md, steps 1 and 3 */
+export function warningsOf(
+  prepared: Prepared,
+  metals: readonly MetalFields[],
+  fields: readonly Field[],
+  energies: EnergiesAtT,
+): SolutionWarning[] {
+  const warnings: SolutionWarning[] = [];
+  const ruling = new Set(fields.map((f) => f.species));
+  for (const id of ruling) {
+    const { warning } = energies.of(id);
+    if (warning !== null) warnings.push({ code: "TEMPERATURE_TRUST", species: id, text: warning });
+  }
+  for (const { component, activity } of prepared.components) {
+    for (const m of metals) {
+      const need = Math.max(
+        0,
+        ...m.formations
+          .filter((f) => f.species.phase === "aq" && ruling.has(f.species.id))
+          .map((f) => ((f.ligands.find(([c]) => c === component)?.[1] ?? 0) / f.plane.atoms) * m.metal.activity),
+      );
+      if (need > activity * DRAWN_DOWN_SHARE)
+        warnings.push({
+          code: "LIGAND_DRAWN_DOWN",
+          metal: m.metal.element,
+          text: `${m.metal.element} at ${m.metal.activity} would bind ${need.toPrecision(2)} of ${component}, more than a third of its total ${activity}: the total is not drawn down here`,
+        });
+    }
+  }
+  if (prepared.problem.temperatureC > 100)
+    warnings.push({
+      code: "SATURATION_PRESSURE",
+      text: "above 100 C the liquor is under its saturation pressure; gas pressures are absolute",
+    });
+  return warnings;
+}

@@ -1,0 +1,159 @@
+import { FRAME_SIDES, type LigandCell } from "../fields/ligandCells";
+import type { MetalFields } from "../fields/fields";
+import type { Convex } from "../geometry/convex";
+import { valueAt } from "../geometry/line";
+import type { Region, Stretch } from "../geometry/region";
+import { balance, reactionText } from "../reactions/balance";
+import { clearances, widest, type Segment } from "../setpoint/segments";
+import type { Limit, Point } from "../solution";
+import type { ChemicalData } from "../species/chemicalData";
+import { meaningOf, type EdgeMeaning, type WindowPiece } from "./pieces";
+import { fulfils } from "./requirement";
+
+export interface Ground {
+  readonly data: ChemicalData;
+  readonly cells: readonly LigandCell[];
+  readonly metals: readonly MetalFields[];
+  readonly pieces: readonly WindowPiece[];
+}
+
+type Shut = Exclude<EdgeMeaning, { kind: "ligand" }>;
+interface RawLimit {
+  readonly meaning: Shut;
+  readonly piece: number;
+  readonly edge: number;
+  readonly from: Point;
+  readonly to: Point;
+}
+
+const contains = (piece: Convex, x: number, y: number): boolean => piece.lines.every((l) => valueAt(l, x, y) >= 0);
+
+/** A ligand-cell edge on a window's border: a metal changes state right on it. Look just across. */
+function acrossLigandEdge(ground: Ground, s: Stretch): Shut {
+  const { piece } = ground.pieces[s.piece]!;
+  const line = piece.lines[s.edge]!;
+  const size = Math.hypot(line[1], line[2]);
+  const step = 1e-7 / size;
+  const x = (s.from[0] + s.to[0]) / 2;
+  const y = (s.from[1] + s.to[1]) / 2;
+  const speciesAt = (m: MetalFields, dx: number, dy: number): number | undefined => {
+    for (const [c, cell] of ground.cells.entries())
+      if (contains(cell.piece, x + dx, y + dy))
+        return m.cells[c]!.pieces.find((f) => contains(f.piece, x + dx, y + dy))?.plane;
+    return undefined;
+  };
+  for (const [i, m] of ground.metals.entries()) {
+    const inside = speciesAt(m, line[1] * step, line[2] * step);
+    const outside = speciesAt(m, -line[1] * step, -line[2] * step);
+    if (inside !== undefined && outside !== undefined && !fulfils(m.metal.requirement, m.states[outside]!))
+      return { kind: "metal", metal: i, inside, outside };
+  }
+  throw new Error(`no metal changes state across the ligand edge at pH ${x}, ${y} V`);
+}
+
+/** The border of a region as limits, stretches of one line with one meaning joined. */
+function rawLimits(ground: Ground, loop: readonly Stretch[]): RawLimit[] {
+  const out: RawLimit[] = [];
+  for (const s of loop) {
+    const tag = ground.pieces[s.piece]!.piece.tags[s.edge]!;
+    const read = meaningOf(tag);
+    const meaning = read.kind === "ligand" ? acrossLigandEdge(ground, s) : read;
+    const last = out.at(-1);
+    if (last && continues(ground, last, meaning, s)) out[out.length - 1] = { ...last, to: s.to };
+    else out.push({ meaning, piece: s.piece, edge: s.edge, from: s.from, to: s.to });
+  }
+  const first = out[0];
+  const last = out.at(-1);
+  if (first && last && first !== last && continues(ground, last, first.meaning, first))
+    return [{ ...last, to: first.to }, ...out.slice(1, -1)];
+  return out;
+}
+
+function continues(ground: Ground, last: RawLimit, meaning: Shut, s: { piece: number; edge: number }): boolean {
+  if (JSON.stringify(last.meaning) !== JSON.stringify(meaning)) return false;
+  const a = ground.pieces[last.piece]!.piece.lines[last.edge]!;
+  const b = ground.pieces[s.piece]!.piece.lines[s.edge]!;
+  return a[1] * b[2] === a[2] * b[1] && a[0] * b[1] === a[1] * b[0] && a[0] * b[2] === a[2] * b[0];
+}
+
+export interface BorderLoops {
+  readonly outer: RawLimit[];
+  readonly holes: RawLimit[][];
+}
+
+export const loopsOf = (ground: Ground, region: Region): BorderLoops => ({
+  outer: rawLimits(ground, region.outer),
+  holes: region.holes.map((h) => rawLimits(ground, h)),
+});
+
+export const pointsOf = (loop: readonly RawLimit[]): Point[] => loop.map((l) => l.from);
+
+export const segmentOf = (l: RawLimit, band: { pH: number; Eh: number }): Segment => ({
+  ax: l.from[0] / band.pH,
+  ay: l.from[1] / band.Eh,
+  bx: l.to[0] / band.pH,
+  by: l.to[1] / band.Eh,
+});
+
+/** Signed way from a point to the limit along one axis, or null when that line misses it. */
+function wayAlong(l: RawLimit, p: Point, axis: 0 | 1): number | null {
+  const other = axis === 0 ? 1 : 0;
+  const [a, b] = [l.from, l.to];
+  const span = b[other] - a[other];
+  const t = span === 0 ? Number.NaN : (p[other] - a[other]) / span;
+  return t >= 0 && t <= 1 ? a[axis] + t * (b[axis] - a[axis]) - p[axis] : null;
+}
+
+/** A border stretch in full: names, reaction, line, distances from the set point.
+ *  @param ground  the solved plane     @param raw  border stretch     @param at  set point     @param band  control bands
+ *  @returns  the limit as the solution prints it     @source  docs/method.md, step 5 */
+export function limitOf(ground: Ground, raw: RawLimit, at: Point, band: { pH: number; Eh: number }): Limit {
+  const { piece, cell } = ground.pieces[raw.piece]!;
+  const line = piece.lines[raw.edge]!;
+  const size = Math.max(Math.abs(line[1]), Math.abs(line[2]));
+  const u = at[0] / band.pH;
+  const v = at[1] / band.Eh;
+  const common = {
+    line: [line[0] / size, line[1] / size, line[2] / size] as [number, number, number],
+    from: raw.from,
+    to: raw.to,
+    distance: Math.max(0, widest(clearances(segmentOf(raw, band)), u, v)[1]),
+    distancePH: wayAlong(raw, at, 0),
+    distanceEh: wayAlong(raw, at, 1),
+  };
+  const { meaning } = raw;
+  if (meaning.kind === "frame") return { kind: "frame", side: FRAME_SIDES[meaning.side]!, ...common };
+  if (meaning.kind === "water") return { kind: "water", side: meaning.side, ...waterReaction(meaning.side), ...common };
+  const metal = ground.metals[meaning.metal]!;
+  const inside = metal.formations[meaning.inside]!.species.id;
+  const outside = metal.formations[meaning.outside]!.species.id;
+  const holders = [...ground.cells[cell]!.holders.values()].map((h) => h.species.id);
+  const balanced = balance(ground.data, inside, outside, holders, metal.metal.element);
+  return {
+    kind: "metal",
+    metal: metal.metal.element,
+    inside,
+    outside,
+    ...(balanced.ok ? { reaction: reactionText(balanced.value), reactionTerms: balanced.value } : {}),
+    ...common,
+  };
+}
+
+const WATER_TERMS = {
+  oxygen: [
+    { species: "H2O(l)", formula: "H2O", coefficient: -2 },
+    { species: "O2(g)", formula: "O2", coefficient: 1 },
+    { species: "H^+(aq)", formula: "H^+", coefficient: 4 },
+    { species: "e^-", formula: "e^-", coefficient: 4 },
+  ],
+  hydrogen: [
+    { species: "H^+(aq)", formula: "H^+", coefficient: -2 },
+    { species: "e^-", formula: "e^-", coefficient: -2 },
+    { species: "H2(g)", formula: "H2", coefficient: 1 },
+  ],
+};
+
+const waterReaction = (side: "oxygen" | "hydrogen"): Pick<Limit, "reaction" | "reactionTerms"> => ({
+  reactionTerms: WATER_TERMS[side],
+  reaction: reactionText(WATER_TERMS[side]),
+});

@@ -1,0 +1,88 @@
+import { LIGAND_EDGE, type LigandCell } from "../fields/ligandCells";
+import type { MetalFields } from "../fields/fields";
+import { clip, type Convex } from "../geometry/convex";
+import type { Line } from "../geometry/line";
+import { fulfils } from "./requirement";
+
+/** What an edge of a window piece is, packed in its tag: frame sides and ligand-cell edges keep theirs (negative). */
+export type EdgeMeaning =
+  | { readonly kind: "frame"; readonly side: number }
+  | { readonly kind: "ligand" }
+  | { readonly kind: "water"; readonly side: "oxygen" | "hydrogen" }
+  | { readonly kind: "metal"; readonly metal: number; readonly inside: number; readonly outside: number };
+
+const SPECIES = 4096;
+const WATER = SPECIES * SPECIES * 64;
+export const OXYGEN_TAG = WATER;
+export const HYDROGEN_TAG = WATER + 1;
+const metalTag = (metal: number, inside: number, outside: number): number =>
+  (metal * SPECIES + inside) * SPECIES + outside;
+
+/** Reads a tag back.
+ *  @param tag  of an edge of a window piece     @returns  what it means */
+export function meaningOf(tag: number): EdgeMeaning {
+  if (tag === LIGAND_EDGE) return { kind: "ligand" };
+  if (tag < 0) return { kind: "frame", side: -1 - tag };
+  if (tag >= WATER) return { kind: "water", side: tag === OXYGEN_TAG ? "oxygen" : "hydrogen" };
+  return {
+    kind: "metal",
+    metal: Math.floor(tag / (SPECIES * SPECIES)),
+    inside: Math.floor(tag / SPECIES) % SPECIES,
+    outside: tag % SPECIES,
+  };
+}
+
+export interface WindowPiece {
+  readonly piece: Convex;
+  /** ligand cell it lies in */
+  readonly cell: number;
+}
+
+/** A line that bounds windows besides the metals: positive where allowed. */
+export interface Bound {
+  readonly line: Line;
+  readonly tag: number;
+}
+
+const apart = (a: Convex, b: Convex): boolean =>
+  Math.min(...a.x) > Math.max(...b.x) ||
+  Math.max(...a.x) < Math.min(...b.x) ||
+  Math.min(...a.y) > Math.max(...b.y) ||
+  Math.max(...a.y) < Math.min(...b.y);
+
+/** Where all metals are as required: per ligand cell, the intersection of each metal's fulfilled fields.
+ *  @param cells  ligand cells     @param metals  fields of each metal over the same cells     @param bounds  water lines that bind
+ *  @returns  convex pieces with disjoint interiors     @source  docs/method.md, step 5 */
+export function windowPieces(
+  cells: readonly LigandCell[],
+  metals: readonly MetalFields[],
+  bounds: readonly Bound[],
+): WindowPiece[] {
+  const out: WindowPiece[] = [];
+  cells.forEach((cell, c) => {
+    let pieces: Convex[] = [cell.piece];
+    for (const { line, tag } of bounds) pieces = pieces.flatMap((p) => clip(p, line, tag) ?? []);
+    for (let m = 0; m < metals.length && pieces.length > 0; m++) {
+      const { metal, states, cells: perCell } = metals[m]!;
+      const all = perCell[c]!.pieces;
+      const fulfilled = all.filter((f) => fulfils(metal.requirement, states[f.plane]!));
+      if (fulfilled.length === all.length) continue;
+      pieces = pieces.flatMap((p) => fulfilled.flatMap((f) => within(p, f.piece, f.plane, m) ?? []));
+    }
+    for (const piece of pieces) out.push({ piece, cell: c });
+  });
+  return out;
+}
+
+/** Part of a piece inside one field; only edges against other fields cut, the cell's own are the piece's already. */
+function within(piece: Convex, field: Convex, species: number, metal: number): Convex | null {
+  if (apart(piece, field)) return null;
+  let part: Convex | null = piece;
+  for (let e = 0; e < field.lines.length; e++) {
+    const neighbour = field.tags[e]!;
+    if (neighbour < 0) continue;
+    part = clip(part, field.lines[e]!, metalTag(metal, species, neighbour));
+    if (part === null) return null;
+  }
+  return part;
+}
