@@ -1,0 +1,66 @@
+import { davies } from "../activity/davies";
+import type { PlanInputs, PlanMetal, PresetName } from "../schemas/plan";
+import type { Problem } from "../schemas/problem";
+import { SULFIDE_SULFUR } from "../selection/components";
+import type { ChemicalData } from "../species/chemicalData";
+
+/** Charge of the simple ion a tenor's gamma is meant for: the divalent one where there is one, else the lowest.
+ *  @param data  library     @param element  metal     @returns  charge number, 0 without a simple ion */
+export function simpleIonCharge(data: ChemicalData, element: string): number {
+  const charges = [...data.species.values()]
+    .filter((s) => s.phase === "aq" && s.charge !== 0 && Object.keys(s.composition).length === 1 && s.composition[element] === 1)
+    .map((s) => s.charge);
+  return charges.includes(2) ? 2 : charges.length > 0 ? Math.min(...charges) : 0;
+}
+
+/** Activity coefficient of a metal line of a plan: 1, Davies at the plan's ionic strength, or typed.
+ *  @param data  library     @param metal  line of the plan     @param ionicStrength  mol/kg or null (gamma 1)
+ *  @returns  gamma; Davies is flagged beyond 0.5 mol/kg by the screen     @source  activity/davies.ts */
+export function gammaOf(data: ChemicalData, metal: PlanMetal, ionicStrength: number | null): number {
+  if (metal.gammaFrom === "typed") return metal.gamma ?? 1;
+  if (metal.gammaFrom === "davies" && ionicStrength !== null)
+    return davies(simpleIonCharge(data, metal.element), ionicStrength);
+  return 1;
+}
+
+/** Species a lixiviant preset leaves out (presets.csv). Where sulfur is to change state after all, the list of the full
+ *  sulfur preset stands in for that of sulfate. */
+export function presetLeavesOut(data: ChemicalData, preset: PresetName, fullSulfur: boolean): readonly string[] {
+  const name = preset === "sulfate" && fullSulfur ? "sulfate_sulfide" : preset;
+  const row = data.tables.presets.find((r) => r.preset === name);
+  return (row?.exclude_ids ?? "").split(";").filter((id) => id !== "");
+}
+
+/** The solver's question behind a plan.
+ *  @param inputs  of a revision or a draft     @param data  library     @returns  a problem; the solver validates it
+ *  @source  presets.csv for what the lixiviant leaves out; the plan's own list and what it puts back come after */
+export function toProblem(inputs: PlanInputs, data: ChemicalData): Problem {
+  const fullSulfur = inputs.sulfateReduction || inputs.ligands.some((l) => l.component === SULFIDE_SULFUR);
+  const kept = new Set([...inputs.putBack, ...inputs.feedMinerals]);
+  const leftOut = new Set([
+    ...presetLeavesOut(data, inputs.preset, fullSulfur).filter((id) => data.species.has(id) && !kept.has(id)),
+    ...inputs.leftOut.map((l) => l.species),
+  ]);
+  return {
+    temperatureC: inputs.temperatureC,
+    metals: inputs.metals.map((m) => ({
+      element: m.element,
+      role: m.role,
+      requirement: m.requirement,
+      ...(m.entry === "activity"
+        ? { activity: m.value }
+        : { gPerL: m.value, gamma: gammaOf(data, m, inputs.ionicStrength) }),
+    })),
+    ligands: inputs.ligands,
+    others: inputs.others,
+    sulfateReduction: inputs.sulfateReduction,
+    solidsBasis: inputs.solidsBasis,
+    feedMinerals: inputs.feedMinerals,
+    dosed: inputs.dosed,
+    leftOut: [...leftOut],
+    putBack: inputs.putBack,
+    frame: inputs.frame,
+    water: inputs.water,
+    controlBand: inputs.controlBand,
+  };
+}
