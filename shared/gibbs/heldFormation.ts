@@ -1,4 +1,5 @@
 import type { ChemicalData, Species } from "../species/chemicalData";
+import { isSulfate } from "../species/sulfur";
 
 type Partners = readonly (readonly [id: string, n: number])[];
 
@@ -19,7 +20,7 @@ const freeForm: Readonly<Record<string, string>> = {
 
 /** Sulfate sulfur as the ion, any other as the element. */
 const freeFormOf = (component: string, formula: string): string | undefined =>
-  component === "S" && /SO4|S2O8/.test(formula) ? "SO4^2-(aq)" : freeForm[component];
+  component === "S" && isSulfate(formula) ? "SO4^2-(aq)" : freeForm[component];
 
 /** The element in its reference state: one component, and nothing to form. */
 function referenceOf(data: ChemicalData, component: string): Species | undefined {
