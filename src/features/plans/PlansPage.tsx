@@ -1,6 +1,171 @@
+import { useState } from "react";
+import { useNavigate } from "react-router-dom";
+import type { PlanRow } from "../../../shared/schemas/plan";
+import { Button } from "../../components/Button";
+import { Segmented } from "../../components/choice";
+import { DataTable } from "../../components/DataTable";
+import { SearchField } from "../../components/SearchField";
+import { ErrorNote, Loading } from "../../components/status";
+import { Empty, Note } from "../../components/text";
+import { counted } from "../../lib/format";
+import { usePlans, type ArchivedFilter } from "../../lib/plans";
+import { useProject } from "../../lib/project";
+import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
+import { CreatePlanDialog } from "./CreatePlanDialog";
+import { planColumns } from "./planColumns";
+import { PlanDetail } from "./PlanDetail";
+import { CreateProjectDialog } from "./CreateProjectDialog";
 
+const shelves = [
+  { value: "false", label: "Current" },
+  { value: "true", label: "Archived" },
+] as const satisfies { value: ArchivedFilter; label: string }[];
+
+/** The plans of one project, and beside them the one in hand. */
 export default function PlansPage() {
   usePageTitle("Plans");
-  return <h1 className="p-5 text-xl">Plans</h1>;
+  const mayWrite = useMay("writePlans");
+  const { project, projects } = useProject();
+  const [archived, setArchived] = useState<ArchivedFilter>("false");
+  const [filter, setFilter] = useState("");
+  const [chosen, setChosen] = useState<string>();
+  const [dialog, setDialog] = useState<"plan" | "project" | null>(null);
+  const plans = usePlans(project?.id, archived);
+  const navigate = useNavigate();
+  const selected = plans.data?.find((plan) => plan.id === chosen) ?? plans.data?.[0];
+  const close = (open: boolean) => !open && setDialog(null);
+
+  return (
+    <>
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
+        <h1 className="text-lg">Plans</h1>
+        <Note>
+          {project && plans.data
+            ? `${counted(plans.data.length, archived === "true" ? "archived plan" : "plan")} of ${project.siteName} / ${project.name}`
+            : ""}
+        </Note>
+        <span className="flex-1" />
+        {mayWrite && (
+          <>
+            <Button onClick={() => setDialog("project")}>New project</Button>
+            {project && (
+              <Button kind="primary" onClick={() => setDialog("plan")}>
+                New plan
+              </Button>
+            )}
+          </>
+        )}
+      </div>
+      {projects?.length === 0 ? (
+        <div className="px-5">
+          <Empty
+            title="No project yet"
+            action={
+              mayWrite && (
+                <Button kind="primary" onClick={() => setDialog("project")}>
+                  New project
+                </Button>
+              )
+            }
+          >
+            A project is a circuit of a site. Its plans ask where each metal dissolves and where it stays solid.
+            {!mayWrite && " A metallurgist makes the first one."}
+          </Empty>
+        </div>
+      ) : (
+        <div className="flex min-h-0 flex-1">
+          <section aria-label="Plans of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
+            <div className="flex flex-wrap items-center gap-4 pb-2">
+              <SearchField
+                label="Filter plans"
+                placeholder="name, metal, lixiviant"
+                value={filter}
+                onChange={setFilter}
+              />
+              <Segmented label="Which plans" value={archived} onChange={setArchived} options={shelves} />
+            </div>
+            {plans.error ? (
+              <ErrorNote doing="The plans could not be read" error={plans.error} retry={() => void plans.refetch()} />
+            ) : !plans.data ? (
+              <Loading label="Reading the plans" />
+            ) : (
+              <List
+                plans={plans.data}
+                {...{ filter, archived, mayWrite }}
+                selected={selected?.id}
+                onSelect={(plan) => setChosen(plan.id)}
+                onOpen={(plan) => void navigate(`/plans/${plan.id}`)}
+                onCreate={() => setDialog("plan")}
+                onClear={() => setFilter("")}
+              />
+            )}
+          </section>
+          {selected && <PlanDetail key={selected.id} plan={selected} onCopied={(plan) => setChosen(plan.id)} />}
+        </div>
+      )}
+      <CreateProjectDialog open={dialog === "project"} onOpenChange={close} />
+      {project && projects && (
+        <CreatePlanDialog open={dialog === "plan"} onOpenChange={close} projects={projects} projectId={project.id} />
+      )}
+    </>
+  );
+}
+
+interface ListProps {
+  plans: readonly PlanRow[];
+  filter: string;
+  archived: ArchivedFilter;
+  mayWrite: boolean;
+  selected: string | undefined;
+  onSelect: (plan: PlanRow) => void;
+  onOpen: (plan: PlanRow) => void;
+  onCreate: () => void;
+  onClear: () => void;
+}
+
+function List({ plans, filter, archived, mayWrite, selected, onSelect, onOpen, onCreate, onClear }: ListProps) {
+  if (plans.length === 0) {
+    return archived === "true" ? (
+      <Empty title="Nothing archived">An archived plan keeps its revisions and can be taken back at any time.</Empty>
+    ) : (
+      <Empty
+        title="No plan yet"
+        action={
+          mayWrite && (
+            <Button kind="primary" onClick={onCreate}>
+              New plan
+            </Button>
+          )
+        }
+      >
+        A plan asks one question: at which pH and potential is every metal as it should be in this step?
+        {!mayWrite && " A metallurgist writes the first one."}
+      </Empty>
+    );
+  }
+  return (
+    <DataTable
+      caption="Plans"
+      rows={plans}
+      columns={planColumns}
+      rowKey={(plan) => plan.id}
+      filter={filter}
+      initialSort={{ id: "saved", desc: true }}
+      selectedKey={selected}
+      onSelect={onSelect}
+      onOpen={onOpen}
+      muted={(plan) => plan.archived}
+      rowHeight={48}
+      className="min-h-0 flex-1 pb-4"
+      empty={
+        <>
+          No plan matches “{filter}”.{" "}
+          <Button kind="quiet" onClick={onClear}>
+            Clear the filter
+          </Button>
+        </>
+      }
+    />
+  );
 }

@@ -1,0 +1,92 @@
+import type { PlanInputs, PlanMetal } from "../../shared/schemas/plan";
+import { celsius, fixed, MINUS, significant, withUnit } from "./format";
+import { amountWord, lixiviantName, requirementWord, solidsBasisWord, waterBoundWord } from "./planWords";
+
+/** One change between two states of a plan, in words: what, from, to. A missing side is something added or taken out. */
+export interface PlanChange {
+  what: string;
+  from: string | null;
+  to: string | null;
+}
+
+const metalText = (m: PlanMetal): string => {
+  const amount = m.entry === "gPerL" ? withUnit(significant(m.value, 3), "g/L") : significant(m.value);
+  const gamma = m.gammaFrom === "typed" && m.gamma !== null ? `, gamma ${significant(m.gamma)}` : "";
+  const davies = m.gammaFrom === "davies" ? ", gamma by Davies" : "";
+  return `${m.role}, ${requirementWord[m.requirement]}, ${amountWord(m)} ${amount}${gamma}${davies}`;
+};
+
+const rangeText = ([lo, hi]: readonly [number, number], digits: number) =>
+  `${fixed(lo, digits)} to ${fixed(hi, digits)}`;
+const listText = (ids: readonly string[]) => (ids.length === 0 ? "none" : ids.join(", "));
+const onOff = (on: boolean) => (on ? "on" : "off");
+
+/** Adds a change where the two texts differ. */
+function compare(changes: PlanChange[], what: string, from: string | null, to: string | null): void {
+  if (from !== to) changes.push({ what, from, to });
+}
+
+function compareKeyed<Item>(
+  changes: PlanChange[],
+  before: readonly Item[],
+  after: readonly Item[],
+  key: (item: Item) => string,
+  text: (item: Item) => string,
+  name: (key: string) => string = (k) => k,
+): void {
+  const old = new Map(before.map((item) => [key(item), text(item)]));
+  const now = new Map(after.map((item) => [key(item), text(item)]));
+  for (const k of new Set([...old.keys(), ...now.keys()]))
+    compare(changes, name(k), old.get(k) ?? null, now.get(k) ?? null);
+}
+
+/** What differs between two states of a plan, in the order of the workspace's panels. */
+export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[] {
+  const changes: PlanChange[] = [];
+  compareKeyed(changes, before.metals, after.metals, (m) => m.element, metalText);
+  compare(changes, "Lixiviant", lixiviantName[before.preset], lixiviantName[after.preset]);
+  const total = (c: { activity: number }) => significant(c.activity, 3);
+  compareKeyed(
+    changes,
+    before.ligands,
+    after.ligands,
+    (c) => c.component,
+    total,
+    (k) => `${k}, total activity`,
+  );
+  compareKeyed(
+    changes,
+    before.others,
+    after.others,
+    (c) => c.component,
+    total,
+    (k) => `${k}, total activity`,
+  );
+  const ionic = (i: PlanInputs) =>
+    i.ionicStrength === null ? "not given" : withUnit(significant(i.ionicStrength), "mol/kg");
+  compare(changes, "Ionic strength", ionic(before), ionic(after));
+  compare(changes, "Sulfate reduction", onOff(before.sulfateReduction), onOff(after.sulfateReduction));
+  compare(changes, "Temperature", celsius(before.temperatureC, 1), celsius(after.temperatureC, 1));
+  compare(changes, "Solids basis", solidsBasisWord[before.solidsBasis], solidsBasisWord[after.solidsBasis]);
+  compare(changes, "Feed minerals", listText(before.feedMinerals), listText(after.feedMinerals));
+  compare(changes, "Dosed", listText(before.dosed), listText(after.dosed));
+  compareKeyed(
+    changes,
+    before.leftOut,
+    after.leftOut,
+    (x) => x.species,
+    (x) => x.reason,
+    (k) => `Left out: ${k}`,
+  );
+  compare(changes, "Put back", listText(before.putBack), listText(after.putBack));
+  const frame = (i: PlanInputs) => `pH ${rangeText(i.frame.pH, 1)}, Eh ${rangeText(i.frame.Eh, 2)} V vs SHE`;
+  compare(changes, "Frame", frame(before), frame(after));
+  const water = (i: PlanInputs) =>
+    waterBoundWord[i.water.bound] +
+    (i.water.oxygenV ? `, oxygen +${fixed(i.water.oxygenV, 2)} V` : "") +
+    (i.water.hydrogenV ? `, hydrogen ${MINUS}${fixed(i.water.hydrogenV, 2)} V` : "");
+  compare(changes, "Bounded by", water(before), water(after));
+  const band = (i: PlanInputs) => `pH ±${fixed(i.controlBand.pH, 2)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
+  compare(changes, "Control bands", band(before), band(after));
+  return changes;
+}
