@@ -2,65 +2,47 @@ import { fail, ok, type Outcome } from "../outcome";
 import type { ReactionTerm } from "../solution";
 import type { ChemicalData, Species } from "../species/chemicalData";
 import { isSulfate } from "../species/sulfur";
-import { fraction, gcd, minus, over, times, zero, type Fraction } from "./fraction";
+import { smallestWhole, solveWhole, wholeFactor } from "./wholeNumbers";
 
-/** What a reaction must keep: each component by name, sulfate and other sulfur apart where they never meet, and charge. */
-type Content = ReadonlyMap<string, Fraction>;
+/** One unknown of the balance: how much of each component, and of charge, `scale` units of the species hold, in whole numbers. */
 interface Partner {
   readonly id: string;
   readonly formula: string;
-  readonly content: Content;
+  readonly scale: number;
+  readonly content: readonly (readonly [what: string, n: number])[];
 }
 
-const electron: Partner = { id: "e^-", formula: "e^-", content: new Map([["charge", [-1, 1] as const]]) };
+const electron: Partner = { id: "e^-", formula: "e^-", scale: 1, content: [["charge", -1]] };
+const cache = new WeakMap<Species, Partner>();
 
-function partnerOf(species: Species, twoSulfurs: boolean): Partner {
+function partnerOf(species: Species): Partner {
+  let partner = cache.get(species);
+  if (partner !== undefined) return partner;
   const { id, formula, composition, charge } = species;
-  const content = new Map<string, Fraction>();
-  for (const [component, n] of Object.entries(composition))
-    content.set(component === "S" && twoSulfurs && isSulfate(formula) ? "sulfate S" : component, fraction(n));
-  if (charge !== 0) content.set("charge", [charge, 1]);
-  return { id, formula, content };
+  const counts = Object.entries(composition);
+  const scale = wholeFactor(counts.map(([, n]) => n));
+  const content = counts.map(([what, n]) => [what, Math.round(n * scale)] as const);
+  if (charge !== 0) content.push(["charge", charge * scale]);
+  cache.set(species, (partner = { id, formula, scale, content }));
+  return partner;
 }
 
-/** Solves for how much of each partner makes up for one `left`; partners late in the list stay out where an earlier one will do. Exact. */
-function solve(left: Partner, partners: readonly Partner[]): Fraction[] | { unmet: string } {
-  const kept = [...new Set([left, ...partners].flatMap((p) => [...p.content.keys()]))];
-  const width = partners.length;
-  const rows = kept.map((what) => ({
-    what,
-    cells: [...partners.map((p) => p.content.get(what) ?? zero), left.content.get(what) ?? zero],
-  }));
-  const pivots: number[] = [];
-  for (let column = 0; column < width; column += 1) {
-    const at = pivots.length;
-    const found = rows.findIndex((row, i) => i >= at && row.cells[column]?.[0] !== 0);
-    const pivot = rows[found];
-    const swapped = rows[at];
-    if (pivot === undefined || swapped === undefined) continue;
-    [rows[at], rows[found]] = [pivot, swapped];
-    const scale = pivot.cells[column] ?? zero;
-    pivot.cells = pivot.cells.map((c) => (c[0] === 0 ? c : over(c, scale)));
-    for (const row of rows) {
-      const factor = row.cells[column] ?? zero;
-      if (row === pivot || factor[0] === 0) continue;
-      row.cells = row.cells.map((c, i) => minus(c, times(factor, pivot.cells[i] ?? zero)));
+/** One equation a component: partners' contents, the content of `left` last. Sulfate sulfur may be a component of its own. */
+function equations(partners: readonly Partner[], left: Partner, twoSulfurs: boolean) {
+  const kept: string[] = [];
+  const rows: number[][] = [];
+  for (const [i, { content, formula }] of [...partners, left].entries())
+    for (const [what, n] of content) {
+      const name = twoSulfurs && what === "S" && isSulfate(formula) ? "sulfate S" : what;
+      let at = kept.indexOf(name);
+      if (at < 0) {
+        at = kept.push(name) - 1;
+        rows.push(new Array<number>(partners.length + 1).fill(0));
+      }
+      const row = rows[at];
+      if (row !== undefined) row[i] = n;
     }
-    pivots.push(column);
-  }
-  const unmet = rows.slice(pivots.length).find((row) => row.cells[width]?.[0] !== 0);
-  if (unmet !== undefined) return { unmet: unmet.what };
-  const amounts = partners.map(() => zero);
-  pivots.forEach((column, i) => (amounts[column] = rows[i]?.cells[width] ?? zero));
-  return amounts;
-}
-
-/** The smallest whole numbers in the same ratio. */
-function wholeNumbers(amounts: readonly Fraction[]): number[] {
-  const common = amounts.reduce((d, [, b]) => (d / gcd(d, b)) * b, 1);
-  const whole = amounts.map(([a, b]) => (a * common) / b);
-  const divisor = whole.reduce((g, n) => gcd(g, n), 0);
-  return whole.map((n) => n / divisor);
+  return { kept, rows };
 }
 
 /** The balanced reaction by which one species of a metal turns into another, with H2O, H^+, e^- and the ligands as they stand there.
@@ -94,13 +76,15 @@ export function balance(
   const twoSulfurs =
     ligandFormulas.some((s) => isSulfate(s.formula)) && ligandFormulas.some((s) => !isSulfate(s.formula));
 
-  const [left, ...others] = species.map((s) => partnerOf(s, twoSulfurs));
+  const [left, ...others] = species.map(partnerOf);
   if (left === undefined) return fail("UNKNOWN_SPECIES", "reaction", "no species given");
   const partners = [...others, electron];
-  const amounts = solve(left, partners);
-  if ("unmet" in amounts)
-    return fail("LIGAND_MISSING", "reaction", `${inside} to ${outside}: no partner for ${amounts.unmet}`);
-  const [first = 1, ...rest] = wholeNumbers([[1, 1], ...amounts]);
+  const { kept, rows } = equations(partners, left, twoSulfurs);
+  const solved = solveWhole(rows);
+  if ("unmet" in solved)
+    return fail("LIGAND_MISSING", "reaction", `${inside} to ${outside}: no partner for ${kept[solved.unmet]}`);
+  const amounts = solved.values.map(([n, d], i) => [n * (partners[i]?.scale ?? 1), d] as const);
+  const [first = 1, ...rest] = smallestWhole([[left.scale, 1], ...amounts]);
   const terms: ReactionTerm[] = [{ species: left.id, formula: left.formula, coefficient: -first }];
   for (const side of [-1, 1])
     for (const [i, { id, formula }] of partners.entries()) {
