@@ -60,9 +60,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
       activity,
       ...(gPerL === undefined ? {} : { gPerL, gamma: gamma ?? 1 }),
     })),
-    ...(options.shutGround
-      ? { shut: metals.map((m) => ({ metal: m.metal.element, polygons: shutGroundOf(m) })) }
-      : {}),
+    ...(options.shutGround ? { shut: metals.map((m) => ({ metal: m.metal.element, polygons: shutGroundOf(m) })) } : {}),
     frame: problem.frame,
   });
 }
@@ -104,7 +102,9 @@ function windowOf(ground: Ground, region: Region, { problem, data }: Prepared, b
   const loops = loopsOf(ground, region);
   const all = [loops.outer, ...loops.holes];
   const border = all.flatMap((loop) => loop.map((l) => ({ ...segmentOf(l, band), frame: l.meaning.kind === "frame" })));
-  const setPoint = setPointOf(border, band, (at: Point) => coupleAt(data, ground.cells as LigandCell[], ground.metals, basis, at));
+  const setPoint = setPointOf(border, band, (at: Point) =>
+    coupleAt(data, ground.cells as LigandCell[], ground.metals, basis, at),
+  );
   const outer = pointsOf(loops.outer);
   const pHs = outer.map((p) => p[0]);
   const Ehs = outer.map((p) => p[1]);

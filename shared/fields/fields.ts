@@ -27,7 +27,12 @@ export function stateOf(species: Species): State {
  *  the potentials of its ligands there. Across a cell's border the two planes of one species meet exactly on it.
  *  @param metal  chosen species and activity     @param cells  ligand cells     @param basis  prices at T
  *  @returns  exact convex pieces     @source  docs/method.md, step 4 */
-export function fieldsOf(metal: PreparedMetal, cells: readonly LigandCell[], basis: Basis, sulfateReduction: boolean): MetalFields {
+export function fieldsOf(
+  metal: PreparedMetal,
+  cells: readonly LigandCell[],
+  basis: Basis,
+  sulfateReduction: boolean,
+): MetalFields {
   const formations = metal.species.map((s) =>
     formationOf(s, metal.element, metal.activity, ligandNumbers(s, metal.element, sulfateReduction), basis),
   );

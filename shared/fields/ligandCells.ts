@@ -38,4 +38,3 @@ export function ligandCells(components: readonly PreparedComponent[], frame: Con
 /** Edges between two cells of one ligand become plain inner edges. */
 const withInnerTags = (piece: Convex): Convex =>
   piece.tags.some((t) => t >= 0) ? { ...piece, tags: piece.tags.map((t) => (t >= 0 ? LIGAND_EDGE : t)) } : piece;
-

@@ -1,4 +1,4 @@
-import { sideOfCrossing, turn, type Line } from "./line";
+import { coincides, sideOfCrossing, turn, type Line } from "./line";
 
 /** A convex piece of the (pH, E) plane: the counter-clockwise cycle of its bounding lines, each positive inside.
  *  Corner i is the crossing of edges i and i + 1; its coordinates are only for drawing, measuring and for filtering the
@@ -83,8 +83,9 @@ export function sideOfCorner(piece: Convex, i: number, h: Line): number {
     4 * EPS * (Math.abs(h[0]) + Math.abs(hx) + Math.abs(hy));
   if (value > bound) return 1;
   if (value < -bound) return -1;
-  const n = piece.lines.length;
-  return sideOfCrossing(h, piece.lines[i]!, piece.lines[i + 1 === n ? 0 : i + 1]!);
+  const a = piece.lines[i]!;
+  const b = piece.lines[i + 1 === piece.lines.length ? 0 : i + 1]!;
+  return coincides(h, a) || coincides(h, b) ? 0 : sideOfCrossing(h, a, b);
 }
 
 /** The part of a piece where line h is >= 0, or null when no corner lies strictly inside it. An edge stays if one of its
@@ -152,7 +153,9 @@ export function areaOf(piece: Convex): number {
   let twice = 0;
   for (let i = 0; i < n; i++) {
     const j = i + 1 === n ? 0 : i + 1;
-    twice += (piece.x[i]! - piece.x[0]!) * (piece.y[j]! - piece.y[0]!) - (piece.x[j]! - piece.x[0]!) * (piece.y[i]! - piece.y[0]!);
+    twice +=
+      (piece.x[i]! - piece.x[0]!) * (piece.y[j]! - piece.y[0]!) -
+      (piece.x[j]! - piece.x[0]!) * (piece.y[i]! - piece.y[0]!);
   }
   return twice / 2;
 }

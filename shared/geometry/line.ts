@@ -9,6 +9,10 @@ export type Line = readonly [k: number, x: number, y: number];
  *  @example turn([0, 1, 0], [0, 0, 1]) // => 1 */
 export const turn = (q: Line, r: Line): number => -Math.sign(orient2d(q[1], q[2], r[1], r[2], 0, 0));
 
+/** Equal or opposite coefficients: the cheap answer to most exact zeros. */
+export const coincides = (p: Line, q: Line): boolean =>
+  p === q || (p[0] === q[0] && p[1] === q[1] && p[2] === q[2]) || (p[0] === -q[0] && p[1] === -q[1] && p[2] === -q[2]);
+
 const volume = (p: Line, q: Line, r: Line): number =>
   Math.sign(orient3d(p[0], p[1], p[2], q[0], q[1], q[2], r[0], r[1], r[2], 0, 0, 0));
 
@@ -21,12 +25,14 @@ export const sideOfCrossing = (p: Line, q: Line, r: Line): number => volume(p, q
  *  comes first. Exact; p and q must cross `on`.
  *  @param on, p, q  lines     @returns  -1, 0 or 1     @source  sign of q at (on, p) against the growth of q along `on`
  *  @example orderAlong([0, 0, 1], [-1, 1, 0], [-2, 1, 0]) // => -1 */
-export const orderAlong = (on: Line, p: Line, q: Line): number => sideOfCrossing(q, on, p) * -turn(on, q);
+export const orderAlong = (on: Line, p: Line, q: Line): number =>
+  coincides(p, q) ? 0 : sideOfCrossing(q, on, p) * -turn(on, q);
 
 /** Whether two lines are the same set of points (either direction). Exact.
  *  @param p, q  lines     @returns  true when all 2x2 minors vanish     @source  proportional coefficients */
 export const sameLine = (p: Line, q: Line): boolean =>
-  turn(p, q) === 0 && orient2d(p[0], p[1], q[0], q[1], 0, 0) === 0 && orient2d(p[0], p[2], q[0], q[2], 0, 0) === 0;
+  coincides(p, q) ||
+  (turn(p, q) === 0 && orient2d(p[0], p[1], q[0], q[1], 0, 0) === 0 && orient2d(p[0], p[2], q[0], q[2], 0, 0) === 0);
 
 /** The line seen from its other side. */
 export const flipped = (p: Line): Line => [-p[0], -p[1], -p[2]];

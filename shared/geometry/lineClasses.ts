@@ -112,17 +112,7 @@ function ranked(group: readonly Edge[], pieces: readonly Convex[]): LineClass {
       });
     }
   }
-  const order = (a: End, b: End): number => {
-    const gap = a.t - b.t;
-    return Math.abs(gap) > a.error + b.error ? gap : orderAlong(line, a.cut, b.cut);
-  };
-  const sorted = ends.map((_, i) => i).sort((a, b) => order(ends[a]!, ends[b]!));
-  const rank = new Array<number>(ends.length);
-  const places: (readonly [number, number])[] = [];
-  sorted.forEach((i, at) => {
-    if (at === 0 || order(ends[sorted[at - 1]!]!, ends[i]!) !== 0) places.push(ends[i]!.place);
-    rank[i] = places.length - 1;
-  });
+  const { rank, places } = ranks(line, ends);
   const edges = group.map((e, i) => {
     const facing: 1 | -1 = Math.sign(e.line[axis]) === Math.sign(line[axis]) ? 1 : -1;
     const a = rank[2 * i]!;
@@ -130,6 +120,29 @@ function ranked(group: readonly Edge[], pieces: readonly Convex[]): LineClass {
     return { ...e, facing, low: Math.min(a, b), high: Math.max(a, b) };
   });
   return { line, edges, places };
+}
+
+/** Ranks ends along their line. Floating point orders what its error bound allows; ends nearer than that are put in order,
+ *  or found equal, exactly. */
+function ranks(line: Line, ends: readonly End[]): { rank: number[]; places: (readonly [number, number])[] } {
+  const sorted = ends.map((_, i) => i).sort((a, b) => ends[a]!.t - ends[b]!.t);
+  const groups: number[][] = []; // equal ends, in order along the line
+  let from = 0; // groups before this one lie clearly before the end in hand
+  for (const i of sorted) {
+    const end = ends[i]!;
+    while (from < groups.length && groups[from]!.every((j) => end.t - ends[j]!.t > end.error + ends[j]!.error)) from++;
+    let at = from;
+    let order = -1;
+    for (; at < groups.length; at++) {
+      order = orderAlong(line, end.cut, ends[groups[at]![0]!]!.cut);
+      if (order <= 0) break;
+    }
+    if (at < groups.length && order === 0) groups[at]!.push(i);
+    else groups.splice(at, 0, [i]);
+  }
+  const rank = new Array<number>(ends.length);
+  groups.forEach((g, r) => g.forEach((i) => (rank[i] = r)));
+  return { rank, places: groups.map((g) => ends[g[0]!]!.place) };
 }
 
 /** The line of a class as an edge facing that way sees it. */

@@ -61,7 +61,10 @@ export function connect(pieces: readonly Convex[]): Region[] {
     total += c.places.length;
   }
   const vertex = new Groups(total);
-  const ends = pieces.map((p) => ({ start: new Array<number>(p.lines.length), end: new Array<number>(p.lines.length) }));
+  const ends = pieces.map((p) => ({
+    start: new Array<number>(p.lines.length),
+    end: new Array<number>(p.lines.length),
+  }));
   classes.forEach((c, k) => {
     for (const e of c.edges) {
       ends[e.piece]!.start[e.edge] = base[k]! + (e.facing === 1 ? e.low : e.high);

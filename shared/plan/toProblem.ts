@@ -8,7 +8,10 @@ import type { ChemicalData } from "../species/chemicalData";
  *  @param data  library     @param element  metal     @returns  charge number, 0 without a simple ion */
 export function simpleIonCharge(data: ChemicalData, element: string): number {
   const charges = [...data.species.values()]
-    .filter((s) => s.phase === "aq" && s.charge !== 0 && Object.keys(s.composition).length === 1 && s.composition[element] === 1)
+    .filter(
+      (s) =>
+        s.phase === "aq" && s.charge !== 0 && Object.keys(s.composition).length === 1 && s.composition[element] === 1,
+    )
     .map((s) => s.charge);
   return charges.includes(2) ? 2 : charges.length > 0 ? Math.min(...charges) : 0;
 }

@@ -31,7 +31,11 @@ export function componentKind(data: ChemicalData, component: string): ComponentK
 
 /** Composition of a species without its main element, H and O, sulfur named by the pool it belongs to.
  *  @returns  component -> atoms or groups */
-export function ligandNumbers(species: Species, main: string, sulfateReduction: boolean): [component: string, count: number][] {
+export function ligandNumbers(
+  species: Species,
+  main: string,
+  sulfateReduction: boolean,
+): [component: string, count: number][] {
   const out: [string, number][] = [];
   for (const [component, count] of Object.entries(species.composition)) {
     if (component === main || component === "H" || component === "O") continue;

@@ -23,7 +23,9 @@ function rules(data: ChemicalData): Rules {
     else defaults.set(id, [{ when, reason }]);
   }
   const fresh = new Map(
-    data.tables.solidsBasis.map((r) => [r.id, { fresh: r.fresh, below: r.below_C ?? Infinity, reason: r.reason }] as const),
+    data.tables.solidsBasis.map(
+      (r) => [r.id, { fresh: r.fresh, below: r.below_C ?? Infinity, reason: r.reason }] as const,
+    ),
   );
   const made = { defaults, fresh };
   rulesOf.set(data, made);
@@ -38,8 +40,7 @@ function holds(when: string, problem: Problem, isFeed: boolean): boolean {
     if (condition === "always") return true;
     if (condition === "sulfate_couple=off") return false;
     if (condition === "unless_feed" || condition === "as_product") return !isFeed;
-    if (condition === "role:iron_gangue")
-      return problem.metals.some((m) => m.element === "Fe" && m.role === "gangue");
+    if (condition === "role:iron_gangue") return problem.metals.some((m) => m.element === "Fe" && m.role === "gangue");
     const dosed = /^unless_dosed:(\w+)$/.exec(condition);
     if (dosed) return !(problem.dosed ?? []).includes(dosed[1]!);
     const limit = /^T(<|>=)(-?[\d.]+)$/.exec(condition);
@@ -66,4 +67,18 @@ export function leavesOut(problem: Problem, data: ChemicalData): LeavesOut {
     const row = defaults.get(id)?.find((r) => holds(r.when, problem, feed.has(id)));
     return row ? row.reason : null;
   };
+}
+
+const stagesOf = new WeakMap<ChemicalData, readonly number[]>();
+
+/** How many temperature limits of the rules lie at or below T: between two limits the rules do not change.
+ *  @param data  library     @param temperatureC  C     @returns  a count */
+export function temperatureStage(data: ChemicalData, temperatureC: number): number {
+  let stages = stagesOf.get(data);
+  if (!stages) {
+    const limits = data.tables.defaults.flatMap((r) => [...r.when.matchAll(/T(?:<|>=)(-?[\d.]+)/g)].map((m) => +m[1]!));
+    stages = [...limits, ...data.tables.solidsBasis.flatMap((r) => r.below_C ?? [])];
+    stagesOf.set(data, stages);
+  }
+  return stages.filter((limit) => limit <= temperatureC).length;
 }

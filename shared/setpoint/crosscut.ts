@@ -43,7 +43,13 @@ export function crosscut(solution: Solution, metal: string, along: "pH" | "Eh", 
     if (f.metal !== metal) continue;
     const reach = span(f.polygon, axis, level);
     if (reach)
-      parts.push({ species: f.species, state: f.state, fulfilled: fulfils(requirement, f.state), from: reach[0], to: reach[1] });
+      parts.push({
+        species: f.species,
+        state: f.state,
+        fulfilled: fulfils(requirement, f.state),
+        from: reach[0],
+        to: reach[1],
+      });
   }
   parts.sort((a, b) => a.from - b.from || a.to - b.to);
   return parts.reduce<CrosscutPart[]>((out, p) => {

@@ -27,7 +27,14 @@ function borderOf(segments: readonly Segment[]): Border {
     hy = Math.max(hy, s.ay);
   }
   const box = 4 * Math.max(Math.abs(ux), Math.abs(uy), Math.abs(hx), Math.abs(hy), 1);
-  return { segments, functions: segments.map(clearances), low: [ux, uy], high: [hx, hy], box, convex: isConvex(segments) };
+  return {
+    segments,
+    functions: segments.map(clearances),
+    low: [ux, uy],
+    high: [hx, hy],
+    box,
+    convex: isConvex(segments),
+  };
 }
 
 /** One loop that only turns left. */
@@ -65,7 +72,10 @@ const innerSide = (s: Segment): Affine => {
 const asConstraint = (f: Affine): Constraint => [-f[0], -f[1], 1, f[2]];
 
 function convexOptimum(border: Border): Deepest | null {
-  const found = largest(border.segments.map((s) => asConstraint(innerSide(s))), border.box);
+  const found = largest(
+    border.segments.map((s) => asConstraint(innerSide(s))),
+    border.box,
+  );
   return found && { u: found[0], v: found[1], margin: found[2] };
 }
 
@@ -127,7 +137,8 @@ function branchAndBound(border: Border): Deepest | null {
   const { low, high } = border;
   let best: Deepest | null = null;
   const offer = (d: Deepest): void => {
-    if (best === null || d.margin > best.margin + EXACT || (d.margin > best.margin - EXACT && d.u < best.u - EXACT)) best = d;
+    if (best === null || d.margin > best.margin + EXACT || (d.margin > best.margin - EXACT && d.u < best.u - EXACT))
+      best = d;
   };
   const side = Math.max(high[0] - low[0], high[1] - low[1]) / 8;
   const queue: Cell[] = [];

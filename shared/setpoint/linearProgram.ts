@@ -4,7 +4,12 @@ export type Constraint = readonly [a: number, b: number, c: number, d: number];
 const TINY = 1e-13;
 
 /** Largest value of q . t with p t <= r for all pairs, t in [lo, hi]; null when empty. */
-function solve1(bounds: readonly (readonly [p: number, r: number])[], q: number, lo: number, hi: number): number | null {
+function solve1(
+  bounds: readonly (readonly [p: number, r: number])[],
+  q: number,
+  lo: number,
+  hi: number,
+): number | null {
   for (const [p, r] of bounds) {
     if (p > TINY) hi = Math.min(hi, r / p);
     else if (p < -TINY) lo = Math.max(lo, r / p);
@@ -87,8 +92,7 @@ function onRow(rows: readonly Constraint[], i: number, box: number): [number, nu
     reduced.push([r[p]! - f * row[p]!, r[q]! - f * row[q]!, r[3] - f * row[3]]);
   }
   // the eliminated variable stays in the box too
-  for (const s of [1, -1])
-    reduced.push([(-s * row[p]!) / pivot, (-s * row[q]!) / pivot, box - (s * row[3]) / pivot]);
+  for (const s of [1, -1]) reduced.push([(-s * row[p]!) / pivot, (-s * row[q]!) / pivot, box - (s * row[3]) / pivot]);
   const objective: [number, number] =
     out === 2 ? [-row[p]! / pivot, -row[q]! / pivot] : [p === 2 ? 1 : 0, q === 2 ? 1 : 0];
   const found = solve2(reduced, objective, box);

@@ -30,7 +30,10 @@ export function setPointOf(
     };
   }
   const chord = widestChord(border) ?? deepest;
-  const range = chordAt(border, chord.u).find(([lo, hi]) => chord.v >= lo - 1e-9 && chord.v <= hi + 1e-9) ?? [chord.v, chord.v];
+  const range = chordAt(border, chord.u).find(([lo, hi]) => chord.v >= lo - 1e-9 && chord.v <= hi + 1e-9) ?? [
+    chord.v,
+    chord.v,
+  ];
   const v =
     range[1] - range[0] > 2 ? Math.min(Math.max(chord.v, range[0] + 1), range[1] - 1) : (range[0] + range[1]) / 2;
   const [left, right] = pHReach(border, chord.u, v);

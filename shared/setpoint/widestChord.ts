@@ -23,8 +23,17 @@ export function widestChord(segments: readonly Segment[]): Deepest | null {
       const flat = Math.abs(below - above) < 1e-9;
       const margin = Math.max(below, above);
       const stretch = flat ? [low, high] : below > above ? [low, low] : [high, high];
-      const place = flat ? (left.low + right.low + left.high + right.high) / 4 : below > above ? (left.low + right.low) / 2 : (left.high + right.high) / 2;
-      if (best && Math.abs(margin - best.margin) < 1e-9 && Math.abs(place - best.u) < 1e-6 && stretch[0]! <= best.high + 1e-9)
+      const place = flat
+        ? (left.low + right.low + left.high + right.high) / 4
+        : below > above
+          ? (left.low + right.low) / 2
+          : (left.high + right.high) / 2;
+      if (
+        best &&
+        Math.abs(margin - best.margin) < 1e-9 &&
+        Math.abs(place - best.u) < 1e-6 &&
+        stretch[0]! <= best.high + 1e-9
+      )
         best.high = Math.max(best.high, stretch[1]!);
       else if (!best || margin > best.margin + 1e-9 || (margin > best.margin - 1e-9 && place < best.u - 1e-6))
         best = { margin, u: place, low: stretch[0]!, high: stretch[1]! };

@@ -25,7 +25,14 @@ export function conflictsOf(
   for (let size = 1; size <= demanding.length; size++) {
     for (const set of subsets(demanding.length, size)) {
       if (found.some((f) => f.every((i) => set.includes(i)))) continue;
-      if (windowPieces(cells, set.map((i) => demanding[i]!), bounds).length === 0) found.push(set);
+      if (
+        windowPieces(
+          cells,
+          set.map((i) => demanding[i]!),
+          bounds,
+        ).length === 0
+      )
+        found.push(set);
     }
   }
   return found.map((set) =>

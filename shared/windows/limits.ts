@@ -128,15 +128,31 @@ export function limitOf(ground: Ground, raw: RawLimit, at: Point, band: { pH: nu
   const inside = metal.formations[meaning.inside]!.species.id;
   const outside = metal.formations[meaning.outside]!.species.id;
   const holders = [...ground.cells[cell]!.holders.values()].map((h) => h.species.id);
-  const balanced = balance(ground.data, inside, outside, holders, metal.metal.element);
   return {
     kind: "metal",
     metal: metal.metal.element,
     inside,
     outside,
-    ...(balanced.ok ? { reaction: reactionText(balanced.value), reactionTerms: balanced.value } : {}),
+    ...metalReaction(ground.data, inside, outside, holders, metal.metal.element),
     ...common,
   };
+}
+
+type Shown = Pick<Limit, "reaction" | "reactionTerms">;
+const shown = new WeakMap<ChemicalData, Map<string, Shown>>();
+
+/** The balanced reaction across a limit; a moving slider asks for the same ones again. */
+function metalReaction(data: ChemicalData, inside: string, outside: string, holders: string[], metal: string): Shown {
+  const known = shown.get(data) ?? new Map<string, Shown>();
+  shown.set(data, known);
+  const key = [inside, outside, metal, ...holders].join("|");
+  let reaction = known.get(key);
+  if (!reaction) {
+    const balanced = balance(data, inside, outside, holders, metal);
+    reaction = balanced.ok ? { reaction: reactionText(balanced.value), reactionTerms: balanced.value } : {};
+    known.set(key, reaction);
+  }
+  return reaction;
 }
 
 const WATER_TERMS = {

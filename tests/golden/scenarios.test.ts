@@ -26,14 +26,24 @@ interface Scenario {
 }
 type Expectation =
   | { type: "stable_at"; metal: string; pH: number; E: number; one_of: string[] }
-  | { type: "border"; metal: string; between: [string, string]; at: { pH?: number; E?: number }; axis: Axis; value: number; tol: number }
+  | {
+      type: "border";
+      metal: string;
+      between: [string, string];
+      at: { pH?: number; E?: number };
+      axis: Axis;
+      value: number;
+      tol: number;
+    }
   | { type: "window_contains" | "window_overlaps" | "window_excludes"; pH: [number, number]; E: [number, number] }
   | { type: "window_empty" }
   | { type: "window_E_at_pH"; pH: number; min: number; max: number; tol: number }
   | { type: "window_pH_at_E"; E: number; min: number; max: number; tol: number }
   | { type: "never" | "appears"; metal: string; species: string[]; in_water_band?: boolean };
 
-const { scenarios } = JSON.parse(readFileSync(new URL("./scenarios.json", import.meta.url), "utf8")) as { scenarios: Scenario[] };
+const { scenarios } = JSON.parse(readFileSync(new URL("./scenarios.json", import.meta.url), "utf8")) as {
+  scenarios: Scenario[];
+};
 const solvable = scenarios.filter((s) => s.inputs.companions === undefined && s.inputs.T_C <= 150);
 
 export function problemOf({ inputs }: Scenario): Problem {
@@ -111,7 +121,10 @@ describe.each(solvable.map((s) => [`${s.id} ${s.title}`, s] as const))("%s", (_,
 });
 
 /** Whether a convex polygon has a point strictly inside the water band: clip it against both lines. */
-function reachesBand(polygon: readonly (readonly [number, number])[], lines: { which: string; intercept: number; slope: number }[]): boolean {
+function reachesBand(
+  polygon: readonly (readonly [number, number])[],
+  lines: { which: string; intercept: number; slope: number }[],
+): boolean {
   let rest = [...polygon];
   for (const { which, intercept, slope } of lines) {
     const side = which === "oxygen" ? 1 : -1;
