@@ -9,7 +9,7 @@ import { memberRoutes } from "./features/members/routes";
 import { planRoutes } from "./features/plans/routes";
 import { projectRoutes } from "./features/projects/routes";
 import { solverRoutes } from "./features/solver/routes";
-import { clientFiles } from "./http/clientFiles";
+import { clientFiles, noSuchFile } from "./http/clientFiles";
 import { errorHandler, unknownRoute } from "./http/errorHandler";
 import { mountRoutes, type Route } from "./http/route";
 import { sameOrigin } from "./http/sameOrigin";
@@ -31,7 +31,7 @@ export function createApp(deps: Deps, clientFolder: string): Express {
   app.use("/api", sessions.middleware);
   app.use(mountRoutes(routesOf(deps)));
   app.use("/api", unknownRoute);
-  app.use(clientFiles(clientFolder));
+  app.use(clientFiles(clientFolder), noSuchFile);
   return app.use(errorHandler(log));
 }
 

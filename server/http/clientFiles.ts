@@ -26,3 +26,7 @@ export function clientFiles(folder: string): RequestHandler {
     },
   });
 }
+
+export const noSuchFile: RequestHandler = (_req, res) => {
+  res.status(404).type("text").send("There is no such file.");
+};

@@ -1,0 +1,73 @@
+import { eq } from "drizzle-orm";
+import { expect, test } from "vitest";
+import { planRevisions, plans, projects, users } from "../../server/db/schema";
+import { demoAccounts, demoPassword } from "../../server/demo/accounts";
+import { demoPlans } from "../../server/demo/plans";
+import { seedDemo, seedDemoOnFirstRun } from "../../server/demo/seed";
+import { planInputs } from "../../shared/schemas/plan";
+import { memberRoles } from "../../shared/schemas/member";
+import type { OpenDatabase } from "../../server/db/open";
+import { unusualInputs } from "../support/planInputs";
+import { tables, testServer } from "../support/testServer";
+
+const everything = ({ db }: OpenDatabase) => ({
+  users: db.select().from(users).all(),
+  projects: db.select().from(projects).all(),
+  plans: db.select().from(plans).all(),
+  revisions: db.select().from(planRevisions).all(),
+});
+
+test("an empty database gets one account a role, plans with revisions, and everything says that it is invented", async () => {
+  const server = await testServer({ members: false });
+  expect(await seedDemoOnFirstRun(server.db, tables.version)).toBe(true);
+  const rows = everything(server);
+  expect(rows.users.map(({ role }) => role).sort()).toEqual([...memberRoles].sort());
+  expect([...rows.projects, ...rows.plans].every(({ invented }) => invented)).toBe(true);
+  expect(rows.projects.every(({ siteName }) => siteName.includes("invented"))).toBe(true);
+  for (const { email } of demoAccounts) {
+    await server.anyone.post("/api/session").send({ email, password: demoPassword }).expect(200);
+  }
+  const { body } = await server.anyone.get("/api/plans").expect(200);
+  const found = (body as { rows: { name: string; revisionCount: number; latest: { inputs: unknown } }[] }).rows;
+  expect(found).toHaveLength(demoPlans.length);
+  for (const { name, revisions } of demoPlans) {
+    const plan = found.find((row) => row.name === name);
+    const { note, at: createdAt, inputs } = revisions.at(-1) ?? expect.fail(`${name} has no revision`);
+    expect(plan).toMatchObject({ revisionCount: revisions.length, latest: { note, createdAt, inputs } });
+  }
+});
+
+test("what the demo asks fits the schema of a plan", () => {
+  for (const { name, revisions } of demoPlans) {
+    for (const { inputs } of revisions) expect(planInputs.safeParse(inputs).error, name).toBeUndefined();
+  }
+});
+
+test("seeding twice changes nothing, not even what was edited or archived since", async () => {
+  const server = await testServer({ members: false });
+  await seedDemo(server.db, tables.version);
+  server.db.update(plans).set({ name: "Renamed", archived: true }).where(eq(plans.id, "demo-neutral-leach")).run();
+  server.db.update(users).set({ passwordHash: "changed" }).where(eq(users.id, "demo-admin")).run();
+  const before = everything(server);
+  await seedDemo(server.db, tables.version);
+  expect(everything(server)).toEqual(before);
+});
+
+test("real members and plans are not touched, and beside them the demo is not written of itself", async () => {
+  const server = await testServer();
+  const metallurgist = await server.as("metallurgist");
+  const project = await metallurgist.post("/api/projects").send({ siteName: "North works", name: "Calcine circuit" });
+  const projectId = (project.body as { id: string }).id;
+  const plan = { projectId, name: "Neutral leach, second tank", inputs: unusualInputs };
+  await metallurgist.post("/api/plans").send(plan).expect(201);
+  const before = everything(server);
+  expect(await seedDemoOnFirstRun(server.db, tables.version)).toBe(false);
+  expect(everything(server)).toEqual(before);
+
+  await seedDemo(server.db, tables.version);
+  const after = everything(server);
+  for (const name of ["users", "projects", "plans", "revisions"] as const) {
+    for (const row of before[name]) expect(after[name]).toContainEqual(row);
+    expect(after[name].length).toBeGreaterThan(before[name].length);
+  }
+});

@@ -1,0 +1,100 @@
+import { cpSync, existsSync, readFileSync, writeFileSync } from "node:fs";
+import { join } from "node:path";
+import { expect, test } from "vitest";
+import { migrateDatabase } from "../../server/db/migrate";
+import { openDatabase, type OpenDatabase } from "../../server/db/open";
+import { planRevisions, sessions, users } from "../../server/db/schema";
+import { seedDemo } from "../../server/demo/seed";
+import { projectRoot } from "../../server/root";
+import { tables, temporaryFolder, testDatabase } from "../support/testServer";
+
+async function filledDatabase(): Promise<OpenDatabase> {
+  const open = testDatabase();
+  await seedDemo(open.db, tables.version);
+  open.db.insert(sessions).values({ id: "s1", userId: "demo-admin", expiresAt: 4_000_000_000 }).run();
+  return open;
+}
+
+/** The shipped migrations and one more. */
+function migrationsWith(sql: string): string {
+  const folder = join(temporaryFolder(), "drizzle");
+  cpSync(join(projectRoot, "drizzle"), folder, { recursive: true });
+  const journalPath = join(folder, "meta/_journal.json");
+  const journal = JSON.parse(readFileSync(journalPath, "utf8")) as {
+    entries: { idx: number; when: number; tag: string }[];
+  };
+  const last = journal.entries.at(-1);
+  if (!last) throw new Error("no migrations are shipped");
+  const next = { ...last, idx: last.idx + 1, when: last.when + 1000, tag: "9999_trial" };
+  writeFileSync(journalPath, JSON.stringify({ ...journal, entries: [...journal.entries, next] }));
+  writeFileSync(join(folder, "9999_trial.sql"), sql);
+  return folder;
+}
+
+/** What drizzle-kit writes when a column changes: a new table, the rows copied, the old one dropped. */
+const rebuildUsers = [
+  "PRAGMA foreign_keys=OFF;",
+  "CREATE TABLE `__new_users` (`id` text PRIMARY KEY NOT NULL, `email` text NOT NULL, `name` text NOT NULL, `role` text NOT NULL, `password_hash` text NOT NULL, `preferences` text NOT NULL, `created_at` text NOT NULL, `phone` text);",
+  'INSERT INTO `__new_users`("id", "email", "name", "role", "password_hash", "preferences", "created_at") SELECT "id", "email", "name", "role", "password_hash", "preferences", "created_at" FROM `users`;',
+  "DROP TABLE `users`;",
+  "ALTER TABLE `__new_users` RENAME TO `users`;",
+  "PRAGMA foreign_keys=ON;",
+].join("\n--> statement-breakpoint\n");
+
+test("rebuilding a table keeps the rows that refer to it, and a copy from before stands beside the file", async () => {
+  const open = await filledDatabase();
+  const [members, revisions] = [open.db.select().from(users).all(), open.db.select().from(planRevisions).all()];
+  const { ran, backup } = migrateDatabase(open, migrationsWith(rebuildUsers));
+  expect(ran).toBe(1);
+  expect(open.db.select().from(users).all()).toEqual(members);
+  expect(open.db.select().from(sessions).all()).toHaveLength(1);
+  expect(open.db.select().from(planRevisions).all()).toEqual(revisions);
+  expect(open.raw.pragma("foreign_keys", { simple: true })).toBe(1);
+  expect(open.raw.prepare("select phone from users").all()).toHaveLength(members.length);
+
+  expect(backup && existsSync(backup)).toBeTruthy();
+  const copy = openDatabase(backup ?? "");
+  expect(copy.db.select().from(users).all()).toEqual(members);
+  expect(() => copy.raw.prepare("select phone from users")).toThrow("no such column");
+  copy.raw.close();
+});
+
+test("a migration that leaves a row pointing at nothing is an error that names both tables", async () => {
+  const open = await filledDatabase();
+  const migrate = () => migrateDatabase(open, migrationsWith("DELETE FROM `users` WHERE `id` = 'demo-admin';"));
+  expect(migrate).toThrow(/of sessions points at a missing row of users; copy from before: .*before-migration/);
+  expect(open.raw.pragma("foreign_keys", { simple: true })).toBe(1);
+  // The migration itself is done: later starts must still refuse to work on such a file.
+  expect(() => migrateDatabase(open)).toThrow(/of sessions points at a missing row of users/);
+});
+
+test("a migration that fails half way leaves the file as it was", async () => {
+  const open = await filledDatabase();
+  const half = "DELETE FROM `sessions`;\n--> statement-breakpoint\nDELETE FROM `no_such_table`;";
+  expect(() => migrateDatabase(open, migrationsWith(half))).toThrow("no_such_table");
+  expect(open.db.select().from(sessions).all()).toHaveLength(1);
+});
+
+test("a second start migrates nothing and copies nothing", async () => {
+  const open = await filledDatabase();
+  expect(migrateDatabase(open)).toEqual({ ran: 0, backup: null });
+});
+
+test("the tables in the code are the tables that the migrations make", () => {
+  const { raw } = testDatabase();
+  const made = raw
+    .prepare("select name from sqlite_master where type = 'table' and name not like '\\_\\_%' escape '\\'")
+    .all();
+  const names = (made as { name: string }[]).map(({ name }) => name).sort();
+  expect(names).toEqual([
+    "chemistry_versions",
+    "library_rows",
+    "plan_revisions",
+    "plans",
+    "projects",
+    "sessions",
+    "species_rows",
+    "users",
+  ]);
+  expect(raw.pragma("foreign_key_check")).toEqual([]);
+});
