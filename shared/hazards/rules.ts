@@ -1,4 +1,5 @@
 import type { PlanInputs } from "../schemas/plan";
+import { SULFIDE_SULFUR } from "../selection/components";
 
 /** What the rules look at: nothing but the plan's inputs and where its set point stands. */
 export interface HazardContext {
@@ -158,7 +159,7 @@ export function hazardContext(
     feedMinerals: inputs.feedMinerals,
     dosed: inputs.dosed,
     sulfideSulfur:
-      components.includes("sulfide") ||
+      components.includes(SULFIDE_SULFUR) ||
       (components.includes("S") && (inputs.sulfateReduction || inputs.preset === "sulfate_sulfide")),
     setPoint: setPoint && { pH: setPoint.pH, Eh: setPoint.Eh },
   };

@@ -1,0 +1,43 @@
+import Plotly from "plotly.js-cartesian-dist-min";
+import createPlotlyComponent from "react-plotly.js/factory";
+import type { Figure } from "./plotTypes";
+
+/** The one place where Plotly comes in; loaded as a chunk of its own. The factory is needed: the package's default export
+ *  looks for a full Plotly that is not shipped. */
+const Plotted = createPlotlyComponent(Plotly);
+
+const config = {
+  displayModeBar: false,
+  doubleClick: "reset",
+  scrollZoom: true,
+  responsive: false,
+  showTips: false,
+  showAxisDragHandles: true,
+} as const;
+
+export interface PlotProps {
+  figure: Figure;
+  onRelayout: (change: Record<string, unknown>) => void;
+  onDrawn: () => void;
+}
+
+export default function Plot({ figure, onRelayout, onDrawn }: PlotProps) {
+  return (
+    <Plotted
+      data={figure.data}
+      layout={figure.layout}
+      config={config}
+      onRelayout={onRelayout as (event: unknown) => void}
+      onInitialized={onDrawn}
+      onUpdate={onDrawn}
+      style={{ width: figure.layout.width, height: figure.layout.height }}
+    />
+  );
+}
+
+/** The same figure as a picture, drawn apart from the screen. */
+export const picture = (figure: Figure, format: "png" | "svg"): Promise<string> =>
+  Plotly.toImage(
+    { data: figure.data, layout: figure.layout },
+    { format, width: figure.layout.width, height: figure.layout.height, scale: format === "png" ? 2 : 1 },
+  );

@@ -1,0 +1,54 @@
+import type { Reach } from "../../shared/reach/reach";
+import { crosscut } from "../../shared/setpoint/crosscut";
+import type { Limit, Outline, Point, Solution } from "../../shared/solution";
+import type { Crosscut } from "./traces/crosscuts";
+import { boundariesByMetal } from "./traces/fields";
+import { movedLimits } from "./traces/lines";
+import type { MapMetal } from "./view";
+
+/** Everything a map shows, worked out before the view comes in, so that a theme or a zoom redoes none of it. */
+export interface MapContent {
+  solution: Solution;
+  shut: ReadonlyMap<string, readonly Outline[]>;
+  boundaries: ReadonlyMap<string, readonly (readonly Point[])[]>;
+  /** the point the crosscuts run through; null hides them */
+  through: Point | null;
+  crosscuts: readonly Crosscut[];
+  reaches: readonly Reach[];
+  /** edges that the other solids basis would move, with its name */
+  moved: { basis: string; limits: readonly Limit[] } | null;
+  /** cyanide has a total: the HCN region is drawn */
+  cyanide: boolean;
+}
+
+export interface ContentWishes {
+  metals: readonly MapMetal[];
+  /** solved with the shut ground outlined */
+  solution: Solution;
+  /** the same question on the other solids basis */
+  other: { basis: string; solution: Solution } | null;
+  /** where the crosscuts run; the set point of the window in hand, or a point the user chose */
+  through: Point | null;
+  reaches: readonly Reach[];
+  cyanide: boolean;
+}
+
+export function mapContent({ metals, solution, other, through, reaches, cyanide }: ContentWishes): MapContent {
+  return {
+    solution,
+    shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
+    boundaries: boundariesByMetal(solution.fields, solution.frame),
+    through,
+    crosscuts:
+      through === null
+        ? []
+        : metals.map((metal) => ({
+            metal,
+            alongPH: crosscut(solution, metal.element, "pH", through),
+            alongEh: crosscut(solution, metal.element, "Eh", through),
+          })),
+    reaches,
+    moved: other && { basis: other.basis, limits: movedLimits(solution, other.solution) },
+    cyanide,
+  };
+}

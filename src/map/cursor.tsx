@@ -1,0 +1,139 @@
+import { useEffect, useRef, useSyncExternalStore, type RefObject } from "react";
+import type { Frame } from "../../shared/schemas/problem";
+import type { Point } from "../../shared/solution";
+import { mapPixels, type Sheet } from "./boxes";
+
+/** Where the pointer stands, outside React's state: only the read-out listens, so that moving it redraws nothing else. */
+export class CursorStore {
+  private at: Point | null = null;
+  private readonly listeners = new Set<() => void>();
+  readonly get = (): Point | null => this.at;
+  readonly set = (at: Point | null): void => {
+    if (at === this.at) return;
+    this.at = at;
+    this.listeners.forEach((tell) => tell());
+  };
+  readonly subscribe = (tell: () => void): (() => void) => {
+    this.listeners.add(tell);
+    return () => this.listeners.delete(tell);
+  };
+}
+
+export const useCursor = (store: CursorStore): Point | null => useSyncExternalStore(store.subscribe, store.get);
+
+interface CursorProps {
+  sheet: Sheet;
+  visible: Frame;
+  /** on a strip the other coordinate is the one its line runs at */
+  through: Point | null;
+  store: CursorStore;
+  holder: RefObject<HTMLDivElement | null>;
+  onPick: (pH: number, Eh: number) => void;
+}
+
+/** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them; a click or Enter picks the point. */
+export function Cursor({ sheet, visible, through, store, holder, onPick }: CursorProps) {
+  const upright = useRef<HTMLDivElement>(null);
+  const level = useRef<HTMLDivElement>(null);
+  const now = useRef({ sheet, visible, through, onPick });
+  useEffect(() => {
+    now.current = { sheet, visible, through, onPick };
+  });
+
+  useEffect(() => {
+    const element = holder.current;
+    if (!element) return;
+    let frame = 0;
+    let pressed: { x: number; y: number } | null = null;
+    const place = (at: Point | null) => {
+      const { sheet: s, visible: v } = now.current;
+      const { toPixel, box } = mapPixels(s, v);
+      const [x, y] = at ? toPixel(at[0], at[1]) : [0, 0];
+      const foot = s.height - (s.alongPH?.y0 ?? s.map.y0);
+      const right = s.alongEh?.x1 ?? s.map.x1;
+      for (const line of [upright.current, level.current]) if (line) line.style.visibility = at ? "visible" : "hidden";
+      if (!at) return;
+      if (upright.current)
+        Object.assign(upright.current.style, {
+          transform: `translateX(${x}px)`,
+          top: `${box.y0}px`,
+          height: `${foot - box.y0}px`,
+        });
+      if (level.current)
+        Object.assign(level.current.style, {
+          transform: `translateY(${y}px)`,
+          left: `${box.x0}px`,
+          width: `${right - box.x0}px`,
+        });
+    };
+    const pointAt = (event: { clientX: number; clientY: number }): Point | null => {
+      const { sheet: s, visible: v, through: t } = now.current;
+      const outline = element.getBoundingClientRect();
+      const [x, y] = [event.clientX - outline.left, event.clientY - outline.top];
+      const { box, toPoint } = mapPixels(s, v);
+      const inMap = { x: x >= box.x0 && x <= box.x1, y: y >= box.y0 && y <= box.y1 };
+      const [pH, Eh] = toPoint(x, y);
+      if (inMap.x && inMap.y) return [pH, Eh];
+      if (t && inMap.x && s.alongPH && y >= s.height - s.alongPH.y1 && y <= s.height - s.alongPH.y0) return [pH, t[1]];
+      if (t && inMap.y && s.alongEh && x >= s.alongEh.x0 && x <= s.alongEh.x1) return [t[0], Eh];
+      return null;
+    };
+    const show = (at: Point | null) => {
+      cancelAnimationFrame(frame);
+      frame = requestAnimationFrame(() => {
+        place(at);
+        store.set(at);
+      });
+    };
+    const onMove = (event: PointerEvent) => show(pointAt(event));
+    const onLeave = () => show(null);
+    const onDown = (event: PointerEvent) => {
+      pressed = event.button === 0 ? { x: event.clientX, y: event.clientY } : null;
+    };
+    const onUp = (event: PointerEvent) => {
+      const still = pressed && Math.hypot(event.clientX - pressed.x, event.clientY - pressed.y) < 4;
+      pressed = null;
+      const at = still ? pointAt(event) : null;
+      if (at) now.current.onPick(at[0], at[1]);
+    };
+    const onKey = (event: KeyboardEvent) => {
+      const step = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] }[event.key];
+      const { visible: v, through: t } = now.current;
+      if (step) {
+        event.preventDefault();
+        const from = store.get() ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
+        const fine = event.shiftKey ? 5 : 1;
+        const clamp = (x: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, x));
+        show([
+          clamp(from[0] + (step[0] ?? 0) * 0.02 * fine, v.pH),
+          clamp(from[1] + (step[1] ?? 0) * 0.005 * fine, v.Eh),
+        ]);
+      } else if (event.key === "Enter") {
+        const at = store.get();
+        if (at) now.current.onPick(at[0], at[1]);
+      } else if (event.key === "Escape") show(null);
+    };
+    // Capture: Plotly stops some pointer events on its drag layer.
+    element.addEventListener("pointermove", onMove, true);
+    element.addEventListener("pointerleave", onLeave);
+    element.addEventListener("pointerdown", onDown, true);
+    window.addEventListener("pointerup", onUp, true);
+    element.addEventListener("keydown", onKey);
+    return () => {
+      cancelAnimationFrame(frame);
+      element.removeEventListener("pointermove", onMove, true);
+      element.removeEventListener("pointerleave", onLeave);
+      element.removeEventListener("pointerdown", onDown, true);
+      window.removeEventListener("pointerup", onUp, true);
+      element.removeEventListener("keydown", onKey);
+    };
+  }, [holder, store]);
+
+  const hair = "pointer-events-none absolute bg-ink opacity-50 no-print";
+  return (
+    <>
+      <div ref={upright} aria-hidden className={`${hair} left-0 w-px`} style={{ visibility: "hidden" }} />
+      <div ref={level} aria-hidden className={`${hair} top-0 h-px`} style={{ visibility: "hidden" }} />
+    </>
+  );
+}

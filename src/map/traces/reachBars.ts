@@ -1,0 +1,69 @@
+import type { Reach } from "../../../shared/reach/reach";
+import { formulaHtml } from "../../../shared/species/typeset";
+import { type Coordinate, type PlotTrace, trace } from "../plotTypes";
+import type { MapView } from "../view";
+
+const beside = { xaxis: "x3", yaxis: "y" } as const;
+const inside = (Eh: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, Eh));
+
+/** Bars beside the Eh axis: the practical range solid, a thin line on to the couple's equilibrium at the set point's pH, with a cap. */
+export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace[] {
+  const { toShown } = view.scale;
+  const range = view.frame.Eh;
+  const solid: { x: Coordinate[]; y: Coordinate[] } = { x: [], y: [] };
+  const thin: { x: Coordinate[]; y: Coordinate[] } = { x: [], y: [] };
+  const push = (into: typeof solid, points: [number, number][]) => {
+    for (const [x, Eh] of points) {
+      into.x.push(x);
+      into.y.push(toShown(Eh));
+    }
+    into.x.push(null);
+    into.y.push(null);
+  };
+  reaches.forEach(({ reached, equilibrium }, i) => {
+    const x = i + 0.5;
+    const [lo, hi] = reached ? [reached[0], reached[1] ?? range[1]] : [null, null];
+    if (lo !== null)
+      push(
+        solid,
+        [lo, hi].map((v): [number, number] => [x, inside(v, range)]),
+      );
+    if (equilibrium === null) return;
+    const end = inside(equilibrium, range);
+    const start = lo === null ? end : inside(equilibrium > hi ? hi : equilibrium < lo ? lo : equilibrium, range);
+    if (start !== end)
+      push(thin, [
+        [x, start],
+        [x, end],
+      ]);
+    if (end === equilibrium)
+      push(thin, [
+        [x - 0.28, end],
+        [x + 0.28, end],
+      ]);
+  });
+  return [
+    trace({
+      uid: "reach-thin",
+      name: "Equilibrium of the couple, E0 only",
+      mode: "lines",
+      ...beside,
+      ...thin,
+      line: { color: view.colours.water, width: 1 },
+    }),
+    trace({
+      uid: "reach-solid",
+      name: "Practical range",
+      mode: "lines",
+      ...beside,
+      ...solid,
+      line: { color: view.colours.water, width: 6 },
+    }),
+  ];
+}
+
+/** Names at the foot of the columns, as the ticks of their axis. */
+export const reachHeads = (reaches: readonly Reach[]): { tickvals: number[]; ticktext: string[] } => ({
+  tickvals: reaches.map((_, i) => i + 0.5),
+  ticktext: reaches.map(({ reagent }) => formulaHtml(reagent.name)),
+});

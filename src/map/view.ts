@@ -1,0 +1,76 @@
+import type { Frame, Requirement } from "../../shared/schemas/problem";
+import type { PotentialScale } from "../lib/potential";
+import type { ThemeColours } from "../lib/theme";
+
+export type Role = "target" | "gangue" | "watched";
+
+export interface MapMetal {
+  element: string;
+  role: Role;
+  requirement: Requirement;
+}
+
+/** What the map needs of the potential scale; the core stays in V vs SHE, and here the scale enters. */
+export type ShownScale = Pick<PotentialScale, "unit" | "electrode" | "toShown" | "fromShown">;
+
+/** The layers a user can switch; the map's ground and window always stay. */
+export const layerNames = [
+  "boundaries",
+  "labels",
+  "water",
+  "setPoint",
+  "crosscuts",
+  "reach",
+  "equilibriumLines",
+  "otherBasis",
+  "hazard",
+] as const;
+export type LayerName = (typeof layerNames)[number];
+export type Layers = Readonly<Record<LayerName, boolean>>;
+
+export const layerWords: Readonly<Record<LayerName, string>> = {
+  boundaries: "Field boundaries",
+  labels: "Field names",
+  water: "Water lines",
+  setPoint: "Set point and band",
+  crosscuts: "Crosscuts",
+  reach: "Reach bars",
+  equilibriumLines: "Reagent equilibria, E0 only",
+  otherBasis: "Other solids basis",
+  hazard: "Hazard regions",
+};
+
+export const defaultLayers: Layers = {
+  boundaries: true,
+  labels: true,
+  water: true,
+  setPoint: true,
+  crosscuts: true,
+  reach: true,
+  equilibriumLines: false,
+  otherBasis: true,
+  hazard: true,
+};
+
+/** Everything that decides how a solution is drawn, none of it what is drawn. */
+export interface MapView {
+  metals: readonly MapMetal[];
+  frame: Frame;
+  controlBand: { pH: number; Eh: number };
+  /** the ranges in sight, V vs SHE; the frame until somebody zooms */
+  visible: Frame;
+  scale: ShownScale;
+  colours: ThemeColours;
+  /** all-fields view: every field named, nothing hatched */
+  plain: boolean;
+  /** element in focus: the others step back */
+  focus: string | null;
+  layers: Layers;
+  /** index into solution.windows */
+  window: number;
+}
+
+export const MONO = "JetBrains Mono, Gangueway Signs, ui-monospace, monospace";
+
+/** Windows are called A, B, C ... in the order of the solution. */
+export const windowName = (index: number): string => String.fromCharCode(65 + (index % 26));
