@@ -1,5 +1,14 @@
 import { z } from "zod";
-import { componentTotal, controlBandSchema, frameSchema, requirements, roles, solidsBases, waterSchema } from "./problem";
+import {
+  componentTotal,
+  controlBandSchema,
+  frameSchema,
+  requirements,
+  roles,
+  solidsBases,
+  TEMPERATURE_RANGE_C,
+  waterSchema,
+} from "./problem";
 
 export const presetNames = [
   "sulfate",
@@ -30,7 +39,7 @@ export type PlanMetal = z.infer<typeof planMetal>;
 
 /** Everything a plan asks; a revision freezes it. */
 export const planInputs = z.object({
-  temperatureC: z.number().min(0).max(150),
+  temperatureC: z.number().min(TEMPERATURE_RANGE_C.min).max(TEMPERATURE_RANGE_C.max),
   preset: z.enum(presetNames),
   metals: z.array(planMetal).min(1).max(16),
   ligands: z.array(componentTotal),

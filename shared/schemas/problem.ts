@@ -4,13 +4,29 @@ import { speciesRow } from "./chemistry";
 export const roles = ["target", "gangue", "watched"] as const;
 export const requirements = ["dissolved", "solid", "metal", "compound", "free"] as const;
 export type Requirement = (typeof requirements)[number];
+/** Range of the temperature models, C (docs/method.md, step 1). */
+export const TEMPERATURE_RANGE_C = { min: 0, max: 250 } as const;
 export const solidsBases = ["feed", "fresh", "aged"] as const;
 
 /** A species a problem brings along: the columns of the tables, the unknown ones left away. */
 const ownSpecies = z.preprocess(
   (row) =>
     typeof row === "object" && row !== null
-      ? { name: "", grade: "C", source: "", note: "", ion_class: "", dHf_kJ: "", S_J: "", Cp_J: "", Cp_a: "", Cp_b: "", Cp_c: "", Cp_Tmax_K: "", ...row }
+      ? {
+          name: "",
+          grade: "C",
+          source: "",
+          note: "",
+          ion_class: "",
+          dHf_kJ: "",
+          S_J: "",
+          Cp_J: "",
+          Cp_a: "",
+          Cp_b: "",
+          Cp_c: "",
+          Cp_Tmax_K: "",
+          ...row,
+        }
       : row,
   speciesRow,
 );
@@ -52,7 +68,7 @@ export const controlBandSchema = z.object({ pH: positive.max(5), Eh: positive.ma
 
 /** The solver's question. Same body for the CLI, POST /api/solve, the browser and a frozen revision. Potentials in V vs SHE at T. */
 export const problemSchema = z.object({
-  temperatureC: z.number().min(0).max(150),
+  temperatureC: z.number().min(TEMPERATURE_RANGE_C.min).max(TEMPERATURE_RANGE_C.max),
   metals: z.array(metalInput).min(1).max(16),
   ligands: z.array(componentTotal),
   others: z.array(componentTotal).optional(),
