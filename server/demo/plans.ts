@@ -63,7 +63,7 @@ const oxideHeap: PlanInputs = {
   preset: "sulfate",
   metals: metals(
     { element: "Cu", role: "target", requirement: "dissolved", value: 0.02 },
-    { element: "Fe", role: "gangue", requirement: "solid", value: 1e-4 },
+    { element: "Fe", role: "watched", requirement: "free", value: 0.02 },
   ),
   ligands: [{ component: "S", activity: 0.1 }],
   feedMinerals: ["CuO(s)"],
@@ -144,7 +144,7 @@ export const demoPlans: DemoPlan[] = [
         inputs: { ...zincDust, metals: zincDust.metals.filter(({ element }) => element !== "Cd") },
       },
       {
-        note: "Cadmium down to 1e-6 as well: it takes nearly the whole drive of the dust.",
+        note: "Cadmium down to 1e-6 as well: it takes most of the drive that the dust has.",
         at: "2026-09-24T13:30:00.000Z",
         inputs: zincDust,
       },
@@ -154,8 +154,7 @@ export const demoPlans: DemoPlan[] = [
     id: "demo-oxide-heap",
     project: "demo-heap",
     name: "Oxide heap, acid on the last lift",
-    description:
-      "Copper oxide ore under dilute sulfuric acid: where copper still dissolves and ferric iron no longer does.",
+    description: "Copper oxide ore under raffinate; iron goes round with the liquor and is watched, not held back.",
     revisions: [{ note: "From the column tests.", at: "2026-09-10T10:20:00.000Z", inputs: oxideHeap }],
   },
   {

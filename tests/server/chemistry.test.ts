@@ -3,8 +3,7 @@ import { speciesRows } from "../../server/db/schema";
 import { keepVersion, tablesOf } from "../../server/features/chemistry/service";
 import { valueOf } from "../../shared/outcome";
 import { solve } from "../../shared/solve";
-import { libraryFrom } from "../../shared/species/library";
-import { tables, testDatabase, testServer } from "../support/testServer";
+import { library, tables, testDatabase, testServer } from "../support/testServer";
 
 test("the library comes out of the database as it went in", () => {
   const { db } = testDatabase();
@@ -67,7 +66,7 @@ test("POST /api/solve answers as the solver does", async () => {
   const { as } = await testServer();
   const manager = await as("manager");
   const { body } = await manager.post("/api/solve").send(problem).expect(200);
-  const expected = valueOf(solve(problem, valueOf(libraryFrom(tables))));
+  const expected = valueOf(solve(problem, library));
   expect(expected.windows.length).toBeGreaterThan(0);
   expect(body).toEqual(JSON.parse(JSON.stringify(expected)));
 });
@@ -81,7 +80,7 @@ test.each([
   const { as } = await testServer();
   const manager = await as("manager");
   const { body } = await manager.post("/api/solve").send(wrong).expect(400);
-  const outcome = solve(wrong, valueOf(libraryFrom(tables)));
+  const outcome = solve(wrong, library);
   expect(body).toEqual({ error: outcome.ok ? null : outcome.error });
   expect((body as { error: { path: string } }).error.path).toMatch(path);
 });

@@ -6,8 +6,7 @@ import { expect, onTestFinished, test } from "vitest";
 import { projectRoot } from "../../server/root";
 import { valueOf } from "../../shared/outcome";
 import { solve } from "../../shared/solve";
-import { libraryFrom } from "../../shared/species/library";
-import { tables, temporaryFolder } from "../support/testServer";
+import { library, temporaryFolder } from "../support/testServer";
 
 interface Ended {
   code: number | null;
@@ -48,7 +47,7 @@ test("solve prints the solution of a file, or of stdin, and nothing else", async
   const fromFile = start("server/tools/solve.ts", [file]);
   const fromStdin = start("server/tools/solve.ts", ["-"]);
   fromStdin.child.stdin.end(JSON.stringify(problem));
-  const solution = valueOf(solve(problem, valueOf(libraryFrom(tables))));
+  const solution = valueOf(solve(problem, library));
   for (const { code, out, err } of await Promise.all([fromFile.end, fromStdin.end])) {
     expect({ code, err }).toEqual({ code: 0, err: "" });
     expect(JSON.parse(out)).toEqual(JSON.parse(JSON.stringify(solution)));

@@ -1,14 +1,17 @@
 import { eq } from "drizzle-orm";
 import { expect, test } from "vitest";
+import type { OpenDatabase } from "../../server/db/open";
 import { planRevisions, plans, projects, users } from "../../server/db/schema";
 import { demoAccounts, demoPassword } from "../../server/demo/accounts";
 import { demoPlans } from "../../server/demo/plans";
 import { seedDemo, seedDemoOnFirstRun } from "../../server/demo/seed";
+import { valueOf } from "../../shared/outcome";
+import { toProblem } from "../../shared/plan/toProblem";
 import { planInputs } from "../../shared/schemas/plan";
 import { memberRoles } from "../../shared/schemas/member";
-import type { OpenDatabase } from "../../server/db/open";
+import { solve } from "../../shared/solve";
 import { unusualInputs } from "../support/planInputs";
-import { tables, testServer } from "../support/testServer";
+import { library, tables, testServer } from "../support/testServer";
 
 const everything = ({ db }: OpenDatabase) => ({
   users: db.select().from(users).all(),
@@ -40,6 +43,15 @@ test("an empty database gets one account a role, plans with revisions, and every
 test("what the demo asks fits the schema of a plan", () => {
   for (const { name, revisions } of demoPlans) {
     for (const { inputs } of revisions) expect(planInputs.safeParse(inputs).error, name).toBeUndefined();
+  }
+});
+
+test("every revision of the demo opens a window that its loops can hold", () => {
+  for (const { name, revisions } of demoPlans) {
+    for (const { inputs } of revisions) {
+      const { windows } = valueOf(solve(toProblem(inputs, library), library));
+      expect(windows[0]?.controllable, name).toBe(true);
+    }
   }
 });
 

@@ -25,7 +25,7 @@ export const emailOf = (role: MemberRole) => `${role}@works.example`;
 export const idOf = (role: MemberRole) => `user-${role}`;
 
 export const { tables } = readTables();
-const data = valueOf(libraryFrom(tables));
+export const library = valueOf(libraryFrom(tables));
 
 /** A folder that is gone when the test is over. */
 export function temporaryFolder(): string {
@@ -86,7 +86,11 @@ export interface TestServer extends OpenDatabase {
 }
 
 /** The whole application on a SQLite file of its own, with one member a role. */
-export async function testServer({ env = {}, members = true, clientFolder = temporaryFolder() }: Options = {}): Promise<TestServer> {
+export async function testServer({
+  env = {},
+  members = true,
+  clientFolder = temporaryFolder(),
+}: Options = {}): Promise<TestServer> {
   const open = testDatabase();
   if (members) await addMembers(open);
   let clock = new Date("2026-05-04T03:02:01.000Z");
@@ -98,7 +102,7 @@ export async function testServer({ env = {}, members = true, clientFolder = temp
     clock: () => clock,
     log: pino({ level: "silent" }),
     sessions,
-    chemistry: { current: tables, data },
+    chemistry: { current: tables, data: library },
     solve,
   };
   const app = createApp(deps, clientFolder);
