@@ -1,11 +1,13 @@
 import type { ReactNode } from "react";
+import { FormulaText } from "./FormulaText";
 
 /** Stands with every caution: the product screens, it does not clear. */
 export const deference =
   "Screening information. It does not replace a hazard study, the safety data sheets, local law and exposure limits, or the judgement of a licensed engineer or industrial hygienist.";
 const limitsNote = "Limits shown are US values as of the stated date; check the values in force where you work.";
 
-/** A caution beside the number that calls for it: a bar in the signal colour, text, and the deference wording. */
+/** A caution beside the number that calls for it: a bar in the signal colour, text, and the deference wording.
+ *  Formulas in plain text are typeset. */
 export function Caution({
   title,
   children,
@@ -22,7 +24,7 @@ export function Caution({
   return (
     <aside role="note" className="border-l-4 border-signal bg-sheet px-3 py-2 text-sm">
       {title !== undefined && <p className="font-bold">{title}</p>}
-      <div>{children}</div>
+      <div>{typeof children === "string" ? <FormulaText text={children} /> : children}</div>
       {defer && (
         <p className="mt-1 text-xs text-muted">
           {deference}

@@ -2,7 +2,7 @@ import { useVirtualizer } from "@tanstack/react-virtual";
 import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from "react";
 import { classes } from "../lib/classes";
 import { fixed } from "../lib/format";
-import { headerText, useTableModel, type Column, type Sort } from "./tableModel";
+import { useTableModel, type Column, type Sort } from "./tableModel";
 
 export interface DataTableProps<Row extends object> {
   /** what the table holds, for those who hear it */
@@ -32,6 +32,7 @@ export interface DataTableProps<Row extends object> {
 
 /** beyond this many rows only those in sight are in the page */
 const virtualFrom = 100;
+
 const none = () => undefined;
 
 /** A table that sorts by its headings and is walked with the arrow keys; the row in focus is the row selected. */
@@ -39,6 +40,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const { caption, rows, columns, rowKey, filter = "", initialSort, selectedKey } = props;
   const { onSelect, onOpen, empty, rowHeight = 28, muted, className, onShown = none } = props;
   const { shown, sorting, setSorting } = useTableModel(rows, columns, rowKey, filter, initialSort);
+  const headHeight = columns.some((column) => column.unit) ? 40 : 26;
   const box = useRef<HTMLDivElement>(null);
   const [reached, setReached] = useState<string | null>(null);
   const current = selectedKey ?? reached;
@@ -57,12 +59,20 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     getScrollElement: () => box.current,
     estimateSize: () => rowHeight,
     overscan: 12,
-    scrollPaddingStart: rowHeight + 4,
+    scrollPaddingStart: headHeight + 4,
   });
   const items = virtualizer.getVirtualItems();
   const first = virtual ? (items[0]?.index ?? 0) : 0;
   const last = virtual ? (items.at(-1)?.index ?? -1) : shown.length - 1;
   const visible = shown.slice(first, last + 1);
+
+  // An address may name a row far down: show it once, when it first stands there.
+  const arrived = useRef(false);
+  useEffect(() => {
+    if (arrived.current || at < 0) return;
+    arrived.current = true;
+    if (virtual && at > 10) virtualizer.scrollToIndex(at, { align: "center" });
+  }, [at, virtual, virtualizer]);
 
   function reach(index: number) {
     const row = shown[Math.max(0, Math.min(shown.length - 1, index))];
@@ -105,7 +115,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           ))}
         </colgroup>
         <thead className="sticky top-0 z-10 bg-paper">
-          <tr style={{ height: rowHeight }} aria-rowindex={1}>
+          <tr style={{ height: headHeight }} aria-rowindex={1} className="align-bottom">
             {columns.map((column) => (
               <Heading
                 key={column.id}
@@ -159,6 +169,14 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   );
 }
 
+/** A value short of decimals is filled with spaces, which in mono are as wide as digits. */
+function numberText(value: number, { digits = 0, asGiven = false }: { digits?: number; asGiven?: boolean }): string {
+  const text = fixed(value, digits);
+  if (!asGiven || digits === 0) return text;
+  const short = text.replace(/\.?0+$/, "");
+  return short.padEnd(text.length, "\u00a0");
+}
+
 const rightOf = (column: Column<never>) =>
   (column.align ?? (column.digits === undefined ? "left" : "right")) === "right";
 const hidden = (column: { wide?: boolean }) => (column.wide ? "max-md:hidden" : undefined);
@@ -178,23 +196,24 @@ function Heading<Row>({
       scope="col"
       aria-sort={sorted}
       className={classes(
-        "border-b border-ink px-2 font-mono text-xs font-bold first:pl-0 last:pr-0",
+        "border-b border-ink px-2 pb-0.5 font-mono text-xs font-bold first:pl-0 last:pr-0",
         right ? "text-right" : "text-left",
         hidden(column),
       )}
     >
       {column.sortable === false ? (
-        headerText(column)
+        column.header
       ) : (
         <button type="button" onClick={onSort} className="max-w-full truncate align-bottom hover:text-verdigris">
-          {headerText(column)}
           {sorted && (
             <span aria-hidden className="text-verdigris">
-              {sorted === "ascending" ? " ↑" : " ↓"}
+              {sorted === "ascending" ? "↑ " : "↓ "}
             </span>
           )}
+          {column.header}
         </button>
       )}
+      {column.unit && <span className="block truncate font-normal text-muted">{column.unit}</span>}
     </th>
   );
 }
@@ -216,7 +235,7 @@ function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
         : value === null
           ? ""
           : typeof value === "number"
-            ? fixed(value, column.digits ?? 0)
+            ? numberText(value, column)
             : value}
     </td>
   );

@@ -123,7 +123,8 @@ export function NumberField(props: NumberFieldProps) {
         onKeyDown={onKeyDown}
         style={{ width: `${width}ch` }}
         className={classes(
-          "h-6 rounded-sm border bg-sheet px-1 text-right font-mono text-base disabled:opacity-60",
+          layout === "stacked" ? "h-8" : "h-6",
+          "rounded-sm border bg-sheet px-1 text-right font-mono text-base disabled:opacity-60",
           message !== null ? "border-signal" : "border-rule hover:border-muted",
         )}
       />

@@ -60,7 +60,8 @@ export function Tabs<Value extends string>({
   label: string;
   value: Value;
   onChange: (value: Value) => void;
-  panels: readonly (Choice<Value> & { content: ReactNode })[];
+  /** `fill`: the panel takes the height that is left and scrolls inside itself */
+  panels: readonly (Choice<Value> & { content: ReactNode; fill?: boolean })[];
   className?: string;
 }) {
   return (
@@ -78,7 +79,14 @@ export function Tabs<Value extends string>({
         ))}
       </RadixTabs.List>
       {panels.map((panel) => (
-        <RadixTabs.Content key={panel.value} value={panel.value} className="pt-3">
+        <RadixTabs.Content
+          key={panel.value}
+          value={panel.value}
+          className={classes(
+            "pt-3 outline-offset-4",
+            panel.fill && "min-h-0 flex-1 data-[state=active]:flex data-[state=active]:flex-col",
+          )}
+        >
           {panel.content}
         </RadixTabs.Content>
       ))}

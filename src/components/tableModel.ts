@@ -26,6 +26,8 @@ export interface Column<Row> {
   exported?: (row: Row) => string | number | null;
   /** decimals of a number, so that the column aligns on its point */
   digits?: number;
+  /** draws as many decimals as the value has, up to `digits`, still aligned: no precision is made up */
+  asGiven?: boolean;
   /** any CSS width; columns without one share the rest */
   width?: string;
   /** numbers stand right unless told otherwise */
@@ -86,7 +88,7 @@ export function useTableModel<Row extends object>(
     features,
     columns: definitions,
     // the table never writes to its rows
-    data: rows as Row[],
+    data: rows,
     getRowId: rowKey,
     state: { sorting, globalFilter: filter.trim().toLowerCase() },
     onSortingChange: setSorting,

@@ -64,3 +64,8 @@ export function Empty({ title, children, action }: { title: string; children?: R
     </div>
   );
 }
+
+/** A caveat in sight of the verdict: a bar in ink, no alarm. Hazards are Cautions. */
+export function Remark({ children, className }: { children: ReactNode; className?: string }) {
+  return <div className={classes("border-l-4 border-ink bg-sheet px-3 py-1.5 text-sm", className)}>{children}</div>;
+}

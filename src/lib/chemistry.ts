@@ -18,11 +18,12 @@ export function libraryOf(tables: ChemicalTables): ChemicalData {
 }
 
 /** The chemistry library in force, or the version a revision froze. `data` is one stable object while the version stands. */
-export function useChemistry(version?: string) {
+export function useChemistry(version?: string, enabled = true) {
   return useQuery({
     queryKey: version === undefined ? keys.chemistry : keys.chemistryVersion(version),
     queryFn: ({ signal }) =>
       api.get<ChemicalTables>(version === undefined ? "/chemistry" : `/chemistry/versions/${version}`, { signal }),
+    enabled,
     select: libraryOf,
     structuralSharing: false,
     staleTime: Infinity,

@@ -4,54 +4,74 @@ import type { DemoAccounts } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
 import { SignInForm } from "./SignInForm";
 
-/** The first page of a visitor: what this is, and the way in. */
+const answers = [
+  [
+    "Where",
+    "The ground in pH and potential on which the target dissolves while every other metal stays where it should.",
+  ],
+  ["How far", "The reaction that shuts each edge, and how many control bands a real loop has before it is reached."],
+  ["By what", "The oxidants and reductants that bring a slurry there, and the caution that goes with them."],
+] as const;
+
+/** The first page of a visitor: what this answers, and the way in. */
 export function SignInPage({ demo }: { demo: DemoAccounts | null }) {
   usePageTitle("Sign in");
   const [email, setEmail] = useState("");
   return (
-    <main className="mx-auto grid max-w-[880px] gap-x-16 gap-y-10 px-6 py-[10vh] md:grid-cols-2">
-      <div>
-        <h1 className="font-mono text-xl">Gangueway</h1>
-        <p className="mt-3 text-lg">
-          Where in potential and pH the target metal dissolves while the gangue stays solid, and how far a real loop may
-          drift before it does not.
-        </p>
-        <p className="mt-3 text-muted">
-          Plans, windows and set points for leach, purification and cementation circuits. Decision support: it does not
-          replace test work, site procedures or licensed practice.
-        </p>
-      </div>
-      <div className="space-y-8">
-        <section>
-          <SectionHead>Sign in</SectionHead>
-          <div className="pt-4">
-            <SignInForm email={email} password={email && demo ? demo.password : ""} />
-          </div>
-        </section>
-        {demo && (
+    <div className="flex min-h-dvh flex-col">
+      <header className="flex h-11 shrink-0 items-center border-b border-ink px-5">
+        <h1 className="text-lg">Gangueway</h1>
+      </header>
+      <main className="grid flex-1 md:grid-cols-[1fr_420px]">
+        <div className="px-5 pt-[9vh] pb-10 md:pr-16">
+          <p className="max-w-[24em] font-mono text-xl font-bold">
+            Process windows for leach, purification and cementation circuits
+          </p>
+          <dl className="mt-8 max-w-[620px] border-t border-ink">
+            {answers.map(([question, answer]) => (
+              <div key={question} className="hairline grid grid-cols-[7em_1fr] gap-3 py-3">
+                <dt className="font-mono font-bold">{question}</dt>
+                <dd>{answer}</dd>
+              </div>
+            ))}
+          </dl>
+          <p className="mt-4 max-w-[620px] text-sm text-muted">
+            Decision support. It says what can happen, not how fast, and it does not replace test work, the site’s
+            procedures or licensed practice.
+          </p>
+        </div>
+        <div className="space-y-8 border-rule px-5 pt-[9vh] pb-10 max-md:border-t md:border-l md:px-8">
           <section>
-            <SectionHead aside="invented data">Demo accounts</SectionHead>
-            <ul>
-              {demo.accounts.map((account) => (
-                <li key={account.email} className="hairline">
-                  <button
-                    type="button"
-                    className="flex w-full justify-between gap-3 py-1 text-left hover:text-verdigris"
-                    onClick={() => setEmail(account.email)}
-                  >
-                    <span>{account.role}</span>
-                    <span className="font-mono text-sm">{account.email}</span>
-                  </button>
-                </li>
-              ))}
-            </ul>
-            <p className="pt-2 text-sm text-muted">
-              Password for all of them: <span className="font-mono text-ink">{demo.password}</span>. Choose a line to
-              fill the form.
-            </p>
+            <SectionHead>Sign in</SectionHead>
+            <div className="pt-4">
+              <SignInForm email={email} password={email && demo ? demo.password : ""} />
+            </div>
           </section>
-        )}
-      </div>
-    </main>
+          {demo && (
+            <section>
+              <SectionHead aside="invented data">Demo accounts</SectionHead>
+              <ul>
+                {demo.accounts.map((account) => (
+                  <li key={account.email} className="hairline">
+                    <button
+                      type="button"
+                      className="flex w-full justify-between gap-3 py-1 text-left hover:text-verdigris"
+                      onClick={() => setEmail(account.email)}
+                    >
+                      <span>{account.role}</span>
+                      <span className="font-mono text-sm">{account.email}</span>
+                    </button>
+                  </li>
+                ))}
+              </ul>
+              <p className="pt-2 text-sm text-muted">
+                Password of all four: <span className="font-mono text-ink">{demo.password}</span>. Choose a line to fill
+                the form.
+              </p>
+            </section>
+          )}
+        </div>
+      </main>
+    </div>
   );
 }

@@ -55,7 +55,7 @@ export function PlanDetail({ plan, onCopied }: { plan: PlanRow; onCopied: (copy:
             <>
               <MetalName {...metal} />{" "}
               <span className="text-muted">
-                {metal.role === "watched" ? "watched" : `${requirementWord[metal.requirement]}, ${metal.role}`}
+                {metal.role === "watched" ? "watched" : requirementWord[metal.requirement]}
               </span>
             </>
           }

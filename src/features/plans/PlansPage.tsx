@@ -42,18 +42,14 @@ export default function PlansPage() {
         <h1 className="text-lg">Plans</h1>
         <Note>
           {project && plans.data
-            ? `${counted(plans.data.length, archived === "true" ? "archived plan" : "plan")} of ${project.siteName} / ${project.name}`
+            ? `${counted(plans.data.length, archived === "true" ? "archived plan" : "plan")} in this project`
             : ""}
         </Note>
         <span className="flex-1" />
         {mayWrite && (
           <>
             <Button onClick={() => setDialog("project")}>New project</Button>
-            {project && (
-              <Button kind="primary" onClick={() => setDialog("plan")}>
-                New plan
-              </Button>
-            )}
+            {project && <Button onClick={() => setDialog("plan")}>New plan</Button>}
           </>
         )}
       </div>

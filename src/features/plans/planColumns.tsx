@@ -58,7 +58,7 @@ export const planColumns: readonly Column<PlanRow>[] = [
   {
     id: "saved",
     header: "saved",
-    width: "10em",
+    width: "12.5em",
     align: "right",
     filtered: false,
     wide: true,
