@@ -62,7 +62,7 @@ export function route<
 
 /** May this member (or nobody) call the route?
  *  @throws Refusal NOT_SIGNED_IN or FORBIDDEN */
-export function checkAccess(roles: Roles, user: Member | null): void {
+function checkAccess(roles: Roles, user: Member | null): void {
   if (roles === "public") return;
   if (!user) throw new Refusal("NOT_SIGNED_IN", "", "Sign in first.");
   if (roles === "signed-in" || roles.includes(user.role)) return;

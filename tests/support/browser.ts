@@ -50,7 +50,8 @@ export async function openPage({ expected = [], ...options }: PageOptions = {}):
   const provoked = (text: string) => expected.some((status) => text.includes(`status of ${status}`));
   page.on("console", (message) => {
     const bad = message.type() === "error" || message.type() === "warning";
-    if (bad && !provoked(message.text())) complaints.push(`${message.type()}: ${message.text()} ${message.location().url}`);
+    if (bad && !provoked(message.text()))
+      complaints.push(`${message.type()}: ${message.text()} ${message.location().url}`);
   });
   page.on("pageerror", (error) => complaints.push(`uncaught: ${error.message}`));
   page.on("requestfailed", (request) => {
