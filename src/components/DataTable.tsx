@@ -223,6 +223,7 @@ function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
   const number = column.digits !== undefined;
   return (
     <td
+      role="gridcell"
       className={classes(
         "truncate px-2 first:pl-0 last:pr-0",
         rightOf(column) && "text-right",

@@ -59,6 +59,9 @@ export function Slider({ step = 1, marks = [], ...p }: SliderProps) {
 }
 
 const tidy = (x: number) => Number(x.toPrecision(10));
+/** The nearest thumb position: from one between two, a key would only go to its neighbour, whose two figures may be the same. */
+const onGrid = (x: number, low: number, high: number, step: number) =>
+  tidy(Math.min(high, Math.max(low, low + Math.round((x - low) / step) * step)));
 /** a dragged activity has two figures, as its label shows */
 const antilog = (x: number) => Number((10 ** x).toPrecision(2));
 
@@ -73,7 +76,7 @@ export function LogSlider({ stepsPerDecade = 20, typedMax, ...p }: LogSliderProp
       {!p.readOnly && (
         <Track
           label={p.label}
-          position={Math.min(high, Math.max(low, Math.log10(p.value)))}
+          position={onGrid(Math.log10(p.value), low, high, 1 / stepsPerDecade)}
           low={low}
           high={high}
           step={1 / stepsPerDecade}
