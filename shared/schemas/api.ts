@@ -1,4 +1,5 @@
 import { z } from "zod";
+import type { FieldDifference } from "./history";
 
 /** `?limit=50&offset=0` of every list route. */
 export const pageQuery = z.object({
@@ -43,4 +44,6 @@ export const planDuplicate = z.object({
 export interface StaleAnswer<Row> {
   error: { code: "STALE"; path: string; message: string };
   current: Row;
+  /** fields that this write would have set and that stand otherwise by now */
+  difference: FieldDifference[];
 }
