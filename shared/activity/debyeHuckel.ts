@@ -43,7 +43,7 @@ export function dielectricConstant(T: Kelvin | number, density = saturatedDensit
  *  @param T  K, 273.15 to 523.15     @returns  kg^0.5 mol^-0.5
  *  @source  A = e^3 (2 N_A rho)^0.5 / (8 pi ln10 (eps0 eps k T)^1.5), with the density of SR1-86 and the dielectric constant of R8-97
  *  @example debyeHuckelA(kelvin(25)) // => 0.5098
- *  @example debyeHuckelA(kelvin(250)) // => 0.972 */
+ *  @example debyeHuckelA(kelvin(250)) // => 0.971 */
 export function debyeHuckelA(T: Kelvin | number): number {
   const density = saturatedDensity(T);
   const field = permittivityOfVacuum * dielectricConstant(T, density) * boltzmann * T;

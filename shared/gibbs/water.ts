@@ -6,7 +6,7 @@ const critical = { T: 647.096, p: 22.064e6, density: 322 }; // K, Pa, kg/m3
  *  @param T  K, 273.16 to 647.096     @returns  Pa
  *  @source  IAPWS SR1-86 (1992), equation 1 (Wagner and Pruss 1993)
  *  @example saturationPressure(373.1243) // => 101325
- *  @example saturationPressure(kelvin(150)) / 1e5 // => 4.761 */
+ *  @example saturationPressure(kelvin(150)) / 1e5 // => 4.76 */
 export function saturationPressure(T: Kelvin | number): number {
   const tau = 1 - T / critical.T;
   const sum =

@@ -101,7 +101,7 @@ const nameOf = (term: ReactionTerm, terms: readonly ReactionTerm[]): string =>
 /** A reaction as text: `Fe(OH)3 + 2 SO4^2- + 3 H^+ = Fe(SO4)2^- + 3 H2O`. Where two species share a formula their ids are printed.
  *  @param terms  as `balance` gives them     @returns  both sides, terms in their order
  *  @source  IUPAC Green Book 2007, 2.10.1 (equations)
- *  @example reactionText(valueOf(balance(chemistry(), "CuO(s)", "Cu^2+(aq)", [], "Cu"))).length // => 28 */
+ *  @example reactionText(valueOf(balance(chemistry(), "CuO(s)", "Cu^2+(aq)", [], "Cu"))).length // => 25 */
 export function reactionText(terms: readonly ReactionTerm[]): string {
   const side = (sign: number) =>
     terms

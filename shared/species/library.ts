@@ -1,3 +1,4 @@
+import { GAS_CONSTANT, LN10, T_REFERENCE } from "../constants";
 import { fail, ok, type Failure, type Outcome } from "../outcome";
 import type { ChemicalTables, SpeciesRow } from "../schemas/chemistry";
 import type { ChemicalData, Extrapolation, Species } from "./chemicalData";
@@ -88,6 +89,24 @@ function checkBalance(id: string, extrapolation: Extrapolation, species: Readonl
     refuse(path, `${id}: its reaction must make one ${id}, it makes ${extrapolation.reaction.terms.get(id) ?? 0}`);
 }
 
+/** The log K printed beside the reaction must be that of the energies, or one of the two was changed alone. */
+function checkLogK(
+  id: string,
+  printed: number | null,
+  { reaction }: Extrapolation,
+  species: ReadonlyMap<string, Species>,
+): void {
+  if (reaction === null) return;
+  let G = 0;
+  for (const [partner, n] of reaction.terms) G += n * (species.get(partner)?.row.dGf_kJ ?? Number.NaN) * 1000;
+  const logK = -G / (LN10 * GAS_CONSTANT * T_REFERENCE);
+  if (printed === null || !(Math.abs(logK - printed) <= 0.02))
+    refuse(
+      `extrapolation/${id}/logK_25`,
+      `${id}: log K ${printed ?? "missing"}, but the energies give ${logK.toFixed(2)}`,
+    );
+}
+
 function extrapolationsOf(tables: ChemicalTables, species: ReadonlyMap<string, Species>): Map<string, Extrapolation> {
   const found = new Map<string, Extrapolation>();
   for (const row of tables.extrapolation) {
@@ -97,6 +116,7 @@ function extrapolationsOf(tables: ChemicalTables, species: ReadonlyMap<string, S
     const reaction = row.hold === "none" ? null : must(parseReaction(row.reaction, `${path}/reaction`));
     const extrapolation = { hold: row.hold, reaction };
     checkBalance(row.id, extrapolation, species);
+    checkLogK(row.id, row.logK_25, extrapolation, species);
     found.set(row.id, extrapolation);
   }
   for (const { id, row } of species.values())
