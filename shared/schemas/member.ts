@@ -27,11 +27,18 @@ export interface Member {
   name: string;
   role: MemberRole;
 }
+/** Accounts of the invented site, for the sign-in page. */
+export interface DemoAccounts {
+  accounts: { email: string; role: MemberRole }[];
+  password: string;
+}
 /** GET /api/session */
 export interface SessionAnswer {
   user: Member | null;
   /** true while the database has no user: the client shows the first-admin page */
   needsFirstAdmin: boolean;
+  /** to those signed out, while the demo's accounts are there */
+  demo?: DemoAccounts;
 }
 /** Every refusal: status code plus this body. */
 export interface ApiError {

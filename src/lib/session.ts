@@ -4,17 +4,10 @@ import type { firstAdmin, Member, MemberRole, SessionAnswer, signIn } from "../.
 import { api } from "./api";
 import { keys } from "./queries";
 
-/** Demo accounts, named by the server while demo data is seeded. */
-export interface DemoAccounts {
-  accounts: { email: string; role: MemberRole; name?: string }[];
-  password: string;
-}
-export type Session = SessionAnswer & { demo?: DemoAccounts | null };
-
 export const useSessionQuery = () =>
   useQuery({
     queryKey: keys.session,
-    queryFn: ({ signal }) => api.get<Session>("/session", { signal }),
+    queryFn: ({ signal }) => api.get<SessionAnswer>("/session", { signal }),
     staleTime: Infinity,
   });
 
@@ -40,7 +33,7 @@ export function useMay(action: keyof typeof may): boolean {
 function useEnter<Body>(path: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: Body) => api.post<Session>(path, body),
+    mutationFn: (body: Body) => api.post<SessionAnswer>(path, body),
     onSuccess: (session) => {
       client.setQueryData(keys.sessionEnded, false);
       client.setQueryData(keys.session, session);

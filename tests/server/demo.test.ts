@@ -40,6 +40,21 @@ test("an empty database gets one account a role, plans with revisions, and every
   }
 });
 
+test("the sign-in page is told the demo's accounts while they are there, and nobody who is signed in", async () => {
+  const server = await testServer({ members: false });
+  expect((await server.anyone.get("/api/session").expect(200)).body).not.toHaveProperty("demo");
+  await seedDemo(server.db, tables.version);
+  const { body } = await server.anyone.get("/api/session").expect(200);
+  expect(body).toEqual({
+    user: null,
+    needsFirstAdmin: false,
+    demo: { accounts: demoAccounts.map(({ email, role }) => ({ email, role })), password: demoPassword },
+  });
+  const [first] = demoAccounts;
+  await server.anyone.post("/api/session").send({ email: first?.email, password: demoPassword }).expect(200);
+  expect((await server.anyone.get("/api/session").expect(200)).body).not.toHaveProperty("demo");
+});
+
 test("what the demo asks fits the schema of a plan", () => {
   for (const { name, revisions } of demoPlans) {
     for (const { inputs } of revisions) expect(planInputs.safeParse(inputs).error, name).toBeUndefined();

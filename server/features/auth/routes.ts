@@ -1,5 +1,6 @@
 import { rateLimit } from "express-rate-limit";
-import { firstAdmin, signIn, type Member, type SessionAnswer } from "../../../shared/schemas/member";
+import { firstAdmin, signIn, type DemoAccounts, type Member, type SessionAnswer } from "../../../shared/schemas/member";
+import { demoAccounts, demoPassword } from "../../demo/accounts";
 import type { Deps } from "../../deps";
 import { created, noContent, ok } from "../../http/answer";
 import { Refusal } from "../../http/refusal";
@@ -26,7 +27,16 @@ const failureLimit = (attempts: number) =>
   });
 
 export function authRoutes({ db, sessions, clock, config }: Deps) {
-  const answer = (user: Member | null): SessionAnswer => ({ user, needsFirstAdmin: !anyMember(db) });
+  const demo = (): DemoAccounts | null => {
+    const accounts = demoAccounts.filter(({ email }) => findByEmail(db, email));
+    return accounts.length === 0
+      ? null
+      : { accounts: accounts.map(({ email, role }) => ({ email, role })), password: demoPassword };
+  };
+  const answer = (user: Member | null): SessionAnswer => {
+    const shown = user === null && demo();
+    return { user, needsFirstAdmin: !anyMember(db), ...(shown && { demo: shown }) };
+  };
   const limit = failureLimit(config.signInAttempts);
   return [
     route({

@@ -1,6 +1,7 @@
 import { useState } from "react";
+import type { DemoAccounts } from "../../../shared/schemas/member";
 import { SectionHead } from "../../components/text";
-import type { DemoAccounts } from "../../lib/session";
+
 import { usePageTitle } from "../../lib/title";
 import { SignInForm } from "./SignInForm";
 
