@@ -10,8 +10,9 @@ import { prepare } from "../../shared/selection/prepare";
 import { solve } from "../../shared/solve";
 import { kelvin } from "../../shared/units";
 import { chemistry } from "../support/chemistry";
-import { combinationsOf, makeGrid, type Grid } from "./grid";
-import { eightMixed, fourDemanding, fourInSulfate } from "./problems";
+import { median, table, timed } from "./rivals/measure";
+import { combinationsOf, makeGrid, type Grid } from "./rivals/grid";
+import { eightMixed, fourDemanding, fourInSulfate } from "./rivals/problems";
 
 const library = chemistry();
 const SIZE = 400;
@@ -34,16 +35,9 @@ function gridOf(problem: Problem): Grid {
   });
 }
 
-const timed = (work: () => void): number => {
-  const from = performance.now();
-  work();
-  return performance.now() - from;
-};
-const median = (list: number[]): number => [...list].sort((a, b) => a - b)[list.length >> 1]!;
-
 /** Side by side in one process, rounds interleaved so that a busy machine slows both. The temperature moves a little each
  *  round: nothing can be remembered from the round before. */
-function compare(name: string, problem: Problem): string {
+function compare(name: string, problem: Problem): string[] {
   const grid = gridOf(problem);
   const rounds = 31;
   const perRound = 8;
@@ -62,7 +56,7 @@ function compare(name: string, problem: Problem): string {
     gridded.push(timed(() => grid.run()));
   }
   const rate = grid.evaluations() / median(gridded) / 1000;
-  const cells = [
+  return [
     name,
     median(exact).toFixed(3),
     Math.min(...exact).toFixed(3),
@@ -72,13 +66,22 @@ function compare(name: string, problem: Problem): string {
     `${(median(gridded) / median(exact)).toFixed(0)}x`,
     `${(Math.min(...gridded) / Math.min(...exact)).toFixed(0)}x`,
   ];
-  return `| ${cells.join(" | ")} |`;
 }
 
-console.log(
-  "| problem | exact ms, median | min | 400x400 grid ms, median | min | grid speed | ratio of medians | ratio of minima |",
+table(
+  [
+    "problem",
+    "exact ms, median",
+    "min",
+    "400x400 grid ms, median",
+    "min",
+    "grid speed",
+    "ratio of medians",
+    "ratio of minima",
+  ],
+  [
+    compare("4 metals, sulfate, 2 asked", fourInSulfate),
+    compare("4 metals, sulfate, 4 asked", fourDemanding),
+    compare("8 metals, sulfate + chloride", eightMixed),
+  ],
 );
-console.log("| --- | --- | --- | --- | --- | --- | --- | --- |");
-console.log(compare("4 metals, sulfate, 2 asked", fourInSulfate));
-console.log(compare("4 metals, sulfate, 4 asked", fourDemanding));
-console.log(compare("8 metals, sulfate + chloride", eightMixed));

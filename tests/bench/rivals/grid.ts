@@ -1,6 +1,5 @@
-import type { Plane } from "../../shared/geometry/envelope";
-import type { MetalFields } from "../../shared/fields/fields";
-import type { LigandCell } from "../../shared/fields/ligandCells";
+import type { Plane } from "../../../shared/geometry/envelope";
+import type { MetalFields } from "../../../shared/fields/fields";
 
 /** The honest rival: which species of each metal is stable at every point of a grid, and nothing else. Typed arrays, planes
  *  hoisted to one line of the grid, no allocation while it runs. Ligands: their holders are found per point first. */
@@ -97,7 +96,7 @@ export function combinationsOf(
   ligandPlanes: readonly { component: string; planes: readonly Plane[] }[],
   metals: readonly MetalFields[],
 ): Plane[][][] {
-  let combos: Map<string, Plane>[] = [new Map()];
+  let combos = [new Map<string, Plane>()];
   for (const { component, planes } of ligandPlanes)
     combos = combos.flatMap((c) => planes.map((p) => new Map(c).set(component, p)));
   return combos.map((holders) =>
@@ -115,5 +114,3 @@ export function combinationsOf(
     ),
   );
 }
-
-export type { LigandCell };

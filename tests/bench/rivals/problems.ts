@@ -1,4 +1,4 @@
-import type { Problem } from "../../shared/schemas/problem";
+import type { Problem } from "../../../shared/schemas/problem";
 
 const frame: Problem["frame"] = { pH: [0, 12], Eh: [-1, 1.4] };
 
