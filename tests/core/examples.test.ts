@@ -12,7 +12,8 @@ const line = /@example +(.+?) *\/\/ => (-?\d+(?:\.(\d+))?(?:e(-?\d+))?)(?: *\*\/
 function evaluate(call: string, path: string): unknown {
   const scope = { ...everything, ...modules[path] };
   // eslint-disable-next-line @typescript-eslint/no-implied-eval -- the text comes from the repository's own doc comments
-  return new Function(...Object.keys(scope), `return (${call});`)(...Object.values(scope)) as unknown;
+  const run = new Function(...Object.keys(scope), `return (${call});`) as (...values: unknown[]) => unknown;
+  return run(...Object.values(scope));
 }
 
 for (const [path, source] of Object.entries(sources)) {

@@ -1,0 +1,96 @@
+import { readFileSync } from "node:fs";
+import { describe, expect, test } from "vitest";
+import { FARADAY, GAS_CONSTANT, LN10, T_REFERENCE } from "../../shared/constants";
+import { absoluteEntropy, correspondenceIntegral } from "../../shared/gibbs/correspondence";
+import { energiesAt } from "../../shared/gibbs/energies";
+import * as published from "../../shared/gibbs/equilibria";
+import { gibbsShift, koppHeatCapacity } from "../../shared/gibbs/heatCapacity";
+import { pKwater } from "../../shared/gibbs/water";
+import { valueOf } from "../../shared/outcome";
+import { parseFormula } from "../../shared/species/formula";
+import { parseReaction } from "../../shared/species/reaction";
+import { kelvin } from "../../shared/units";
+import { chemistry } from "../support/chemistry";
+import { csvRows } from "../support/csv";
+
+/** docs/method.md, section 1: its worked examples and its measured errors are what the code gives, to the digit printed. */
+const data = chemistry();
+const page = readFileSync("docs/method.md", "utf8");
+
+function reactionG(text: string, t: number): number {
+  const energies = energiesAt(data, kelvin(t));
+  return [...valueOf(parseReaction(text)).terms].reduce((sum, [id, n]) => sum + n * energies.of(id).G, 0);
+}
+const pK = (text: string, t: number) => reactionG(text, t) / (LN10 * GAS_CONSTANT * kelvin(t));
+const steps = (lo: number, hi: number, by = 5) =>
+  Array.from({ length: Math.round((hi - lo) / by) + 1 }, (_, i) => lo + by * i);
+const largest = (temperatures: number[], gap: (t: number) => number) =>
+  Math.max(...temperatures.map((t) => Math.abs(gap(t))));
+
+/** pK by the entropy correspondence alone, from the S of the row, without the published K(T). */
+function pKByEntropy(id: string, from: string, sign: 1 | -1, t: number): number {
+  const row = data.species.get(id)?.row;
+  if (row === undefined || row.S_J === null || row.ion_class === null) throw new Error(id);
+  const { a, b, h } = correspondenceIntegral(data.tables.correspondence, row.ion_class, kelvin(t));
+  const G = row.dGf_kJ * 1000 - (a + b * absoluteEntropy(row.S_J, row.charge) - row.charge * h);
+  return (sign * (G - energiesAt(data, kelvin(t)).of(from).G)) / (LN10 * GAS_CONSTANT * kelvin(t));
+}
+
+/** Kopp's rule against every solid that has a heat capacity of its own: relative errors, rising. */
+const kopp = [...data.species.values()]
+  .filter((s) => s.phase === "s" && s.row.Cp_J !== null)
+  .map((s) => Math.abs(koppHeatCapacity(valueOf(parseFormula(s.formula)).atoms) / (s.row.Cp_J ?? NaN) - 1))
+  .sort((p, q) => p - q);
+const koppQuantile = (share: number) => 100 * (kopp[Math.floor(share * kopp.length)] ?? NaN);
+
+const pKw = csvRows("tests/golden/water.csv");
+const silver = csvRows("shared/data/electrodes.csv").filter((r) => r.id?.startsWith("AGCL-E0-"));
+const iron = (t: number) => -reactionG("Fe^3+(aq) + e^- = Fe^2+(aq)", t) / FARADAY;
+
+const measured: Readonly<Record<string, () => number>> = {
+  "pKw, library": () => Math.max(...pKw.map((r) => Math.abs(pK("H2O(l) = H^+(aq) + OH^-(aq)", Number(r.T_C)) - Number(r.pKw__IAPWSR11)))),
+  "pKw, entropy correspondence alone": () => largest(steps(60, 200), (t) => pKByEntropy("OH^-(aq)", "H2O(l)", 1, t) - pKwater(kelvin(t))),
+  "pK of HSO4^-, library": () => largest(steps(0, 200), (t) => pK("HSO4^-(aq) = H^+(aq) + SO4^2-(aq)", t) - published.pKBisulfate(kelvin(t))),
+  "pK of HSO4^-, entropy correspondence alone": () => largest(steps(25, 100), (t) => pKByEntropy("HSO4^-(aq)", "SO4^2-(aq)", -1, t) - published.pKBisulfate(kelvin(t))),
+  "pK of NH4^+, library": () => largest(steps(0, 50), (t) => pK("NH4^+(aq) = H^+(aq) + NH3(aq)", t) - published.pKAmmonium(kelvin(t))),
+  "pK1 of CO2, library": () => largest(steps(0, 90), (t) => pK("CO2(aq) + H2O(l) = H^+(aq) + HCO3^-(aq)", t) - published.pKCarbonicAcid(kelvin(t))),
+  "pK2 of CO2, library": () => largest(steps(0, 90), (t) => pK("HCO3^-(aq) = H^+(aq) + CO3^2-(aq)", t) - published.pKBicarbonate(kelvin(t))),
+  "pK of HCN, library": () => largest(steps(10, 45), (t) => pK("HCN(aq) = H^+(aq) + CN^-(aq)", t) - published.pKHydrocyanicAcid(kelvin(t))),
+  "pK1 of H2S, entropy and Cp": () => largest(steps(5, 25), (t) => {
+    const T = kelvin(t);
+    return pK("H2S(aq) = H^+(aq) + HS^-(aq)", t) - (-98.08 + 5765.4 / T + 15.0455 * Math.log(T));
+  }),
+  "Ag/AgCl, mV": () => Math.max(...silver.map((r) => Math.abs((-1000 * reactionG("AgCl(s,chlorargyrite) + e^- = Ag(s) + Cl^-(aq)", Number(r.T_C))) / FARADAY - Number(r.E_mV)))),
+  "oxygen line at 100 C, mV": () => Math.abs((-1000 * reactionG("O2(g) + 4 H^+(aq) + 4 e^- = 2 H2O(l)", 100)) / 4 / FARADAY - 1167),
+  "boiling of water, kJ/mol": () => Math.abs(reactionG("H2O(l) = H2O(g)", 100)) / 1000,
+  "Kopp's rule, median, %": () => koppQuantile(0.5),
+  "Kopp's rule, nine in ten below, %": () => koppQuantile(0.9),
+  "Kopp's rule at 150 C, kJ/mol": () => Math.abs((koppQuantile(0.9) / 100) * (gibbsShift(423.15, 0, { a: 100, b: 0, c: 0, Tmax: Infinity }) / 1000)),
+}; // prettier-ignore
+
+/** Lines of the page's tables: first cell, the others. */
+const cells = [...page.matchAll(/^\| (.+) \|$/gm)].map(([, line = ""]) => line.split(" | ").map((cell) => cell.trim()));
+const digits = (printed: string) => printed.split(".")[1]?.length ?? 0;
+
+describe("measured errors", () => {
+  test.each(Object.entries(measured))("%s", (name, measure) => {
+    const row = cells.find(([first]) => first === name);
+    const printed = row?.at(-1) ?? "missing in docs/method.md";
+    expect(`${name}: ${measure().toFixed(digits(printed))}`).toBe(`${name}: ${printed}`);
+  });
+});
+
+describe("worked examples", () => {
+  const examples = cells.filter(([, id]) => id?.startsWith("`"));
+  test("there is one for every rule", () => expect(examples.length).toBe(11));
+  test.each(examples)("%s %s %s %s", (_, id = "", t = "", G = "") => {
+    const energy = energiesAt(data, kelvin(Number(t)));
+    expect((energy.of(id.replaceAll("`", "")).G / 1000).toFixed(digits(G))).toBe(G);
+  });
+});
+
+test("the example of iron: E0(Fe^3+/Fe^2+) at 25, 100 and 150 C", () => {
+  const line = /E0\(Fe\^3\+\/Fe\^2\+\) is ([\d.]+) V at 25 C, ([\d.]+) V at 100 C and ([\d.]+) V at 150 C/.exec(page);
+  expect(line?.slice(1)).toEqual([iron(25), iron(100), iron(150)].map((E) => E.toFixed(3)));
+  expect(T_REFERENCE).toBe(298.15);
+});
