@@ -1,8 +1,9 @@
 import { z } from "zod";
 
-/** Empty cell of a table means "unknown", never zero. */
-const optionalNumber = z.preprocess((v) => (v === "" || v === undefined ? null : v), z.coerce.number().nullable());
-const requiredNumber = z.preprocess((v) => (v === "" || v === undefined ? Number.NaN : v), z.coerce.number());
+/** Empty cell of a table (blanks are empty too) means "unknown", never zero. */
+const empty = (v: unknown): boolean => v === undefined || (typeof v === "string" && v.trim() === "");
+const optionalNumber = z.preprocess((v) => (empty(v) ? null : v), z.coerce.number().nullable());
+const requiredNumber = z.preprocess((v) => (empty(v) ? Number.NaN : v), z.coerce.number());
 const text = z.string();
 
 export const phases = ["aq", "s", "l", "g"] as const;
@@ -26,7 +27,7 @@ export const speciesRow = z.object({
   Cp_b: optionalNumber,
   Cp_c: optionalNumber,
   Cp_Tmax_K: optionalNumber,
-  ion_class: z.preprocess((v) => (v === "" || v === undefined ? null : v), z.enum(ionClasses).nullable()),
+  ion_class: z.preprocess((v) => (empty(v) ? null : v), z.enum(ionClasses).nullable()),
   grade: z.enum(grades),
   source: text,
   note: text,

@@ -95,6 +95,11 @@ describe("own rows", () => {
     expect(chemistry().species.get("CuOH^+(aq)")?.row.dGf_kJ).toBe(-126.2);
   });
 
+  test("a blank cell is unknown, never zero", () => {
+    expect(speciesRow.parse({ ...own, S_J: "  ", dHf_kJ: "", ion_class: " " })).toEqual(own);
+    expect(speciesRow.safeParse({ ...own, dGf_kJ: " " }).success).toBe(false);
+  });
+
   test("add a species without entropy: held, no temperature data", () => {
     const row = { ...own, id: "CuSn(s)", formula: "CuSn", composition: "Cu:1 Sn:1" };
     const made = withSpecies(chemistry(), [row]);
