@@ -5,6 +5,8 @@ import type { Deps } from "./deps";
 import { authRoutes } from "./features/auth/routes";
 import { chemistryRoutes } from "./features/chemistry/routes";
 import { healthRoutes } from "./features/health/routes";
+import { mailboxRoutes } from "./features/mailbox/routes";
+import { invitationRoutes } from "./features/members/invitationRoutes";
 import { memberRoutes } from "./features/members/routes";
 import { planRoutes } from "./features/plans/routes";
 import { projectRoutes } from "./features/projects/routes";
@@ -15,7 +17,17 @@ import { mountRoutes, type Route } from "./http/route";
 import { sameOrigin } from "./http/sameOrigin";
 import { securityHeaders } from "./http/security";
 
-const features = [healthRoutes, authRoutes, memberRoutes, chemistryRoutes, solverRoutes, projectRoutes, planRoutes];
+const features = [
+  healthRoutes,
+  authRoutes,
+  memberRoutes,
+  invitationRoutes,
+  mailboxRoutes,
+  chemistryRoutes,
+  solverRoutes,
+  projectRoutes,
+  planRoutes,
+];
 
 /** Every route of the API with its roles. */
 export const routesOf = (deps: Deps): Route[] => features.flatMap((routes): Route[] => routes(deps));

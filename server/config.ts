@@ -22,6 +22,10 @@ const environment = z.object({
   SESSION_DAYS: z.coerce.number().int().min(1).max(365).default(30),
   /** failed sign-ins from one address in a quarter of an hour */
   SIGN_IN_ATTEMPTS: z.coerce.number().int().min(1).max(1000).default(10),
+  INVITATION_DAYS: z.coerce.number().int().min(1).max(60).default(7),
+  /** without it letters stay in the mailbox page and nothing goes to the network */
+  SMTP_URL: z.url({ protocol: /^smtps?$/, error: "must be an smtp or smtps address" }).optional(),
+  MAIL_FROM: z.string().min(3).max(200).default("Gangueway <gangueway@localhost>"),
 });
 
 export interface Config {
@@ -35,6 +39,9 @@ export interface Config {
   logLevel: z.infer<typeof environment>["LOG_LEVEL"];
   sessionDays: number;
   signInAttempts: number;
+  invitationDays: number;
+  smtpUrl: string | null;
+  mailFrom: string;
 }
 
 /** Every setting that is wrong, in one message. */
@@ -63,5 +70,8 @@ export function readConfig(env: Record<string, string | undefined>): Config {
     logLevel: settings.LOG_LEVEL,
     sessionDays: settings.SESSION_DAYS,
     signInAttempts: settings.SIGN_IN_ATTEMPTS,
+    invitationDays: settings.INVITATION_DAYS,
+    smtpUrl: settings.SMTP_URL ?? null,
+    mailFrom: settings.MAIL_FROM,
   };
 }

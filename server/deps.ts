@@ -6,6 +6,7 @@ import type { ChemicalData } from "../shared/species/chemicalData";
 import type { Config } from "./config";
 import type { Db } from "./db/open";
 import type { Sessions } from "./features/auth/sessions";
+import type { Mailer } from "./features/mailbox/mailer";
 
 /** Everything the routes stand on. */
 export interface Deps {
@@ -14,6 +15,7 @@ export interface Deps {
   clock: () => Date;
   log: Logger;
   sessions: Sessions;
+  mailer: Mailer;
   chemistry: {
     /** the library this server ships, as the database keeps it */
     current: ChemicalTables;

@@ -11,6 +11,7 @@ import type { Config } from "./config";
 import { migrateDatabase } from "./db/migrate";
 import { openDatabase } from "./db/open";
 import { createSessions } from "./features/auth/sessions";
+import { createMailer } from "./features/mailbox/mailer";
 import { keepVersion, keptVersion } from "./features/chemistry/service";
 import { findByEmail } from "./features/members/service";
 import { demoAccounts } from "./demo/accounts";
@@ -40,8 +41,12 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
 
   const https = config.appUrl.startsWith("https:");
   const sessions = createSessions(db, { https, days: config.sessionDays });
+  const mailer = createMailer(db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock });
   const chemistry = { current, data: valueOf(libraryFrom(current)) };
-  const app = createApp({ db, config, clock, log, sessions, chemistry, solve }, join(projectRoot, "dist/client"));
+  const app = createApp(
+    { db, config, clock, log, sessions, mailer, chemistry, solve },
+    join(projectRoot, "dist/client"),
+  );
 
   const server = await listen(createServer(app), config);
   const { port } = server.address() as AddressInfo;

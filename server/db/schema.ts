@@ -1,6 +1,8 @@
 /** Every table of the database, on one page. */
 export { sessions } from "../features/auth/schema";
 export { chemistryVersions, libraryRows, speciesRows } from "../features/chemistry/schema";
-export { users } from "../features/members/schema";
+export { history } from "../features/history/schema";
+export { mails } from "../features/mailbox/schema";
+export { invitations, users } from "../features/members/schema";
 export { planRevisions, plans } from "../features/plans/schema";
 export { projects } from "../features/projects/schema";

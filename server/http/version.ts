@@ -3,6 +3,10 @@ import { Refusal } from "./refusal";
 /** The row version as an entity tag. */
 export const tagOf = (version: number | string): string => `"${version}"`;
 
+/** Headers of a row that others may change. The tag names the row's own version, not what is joined to it or worked out: a
+ *  browser that kept the answer would be told "not modified" too often. */
+export const versionHeaders = (version: number) => ({ ETag: tagOf(version), "Cache-Control": "no-store" });
+
 /** The version an `If-Match` header names, with or without quotes; null without a header.
  *  @throws Refusal INVALID_INPUT when it is no version */
 export function ifMatch(header: string | undefined): number | null {

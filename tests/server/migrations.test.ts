@@ -1,9 +1,11 @@
 import { cpSync, existsSync, readFileSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
+import { getTableName, is } from "drizzle-orm";
+import { SQLiteTable } from "drizzle-orm/sqlite-core";
 import { expect, test } from "vitest";
 import { migrateDatabase } from "../../server/db/migrate";
 import { openDatabase, type OpenDatabase } from "../../server/db/open";
-import { planRevisions, sessions, users } from "../../server/db/schema";
+import * as schema from "../../server/db/schema";
 import { seedDemo } from "../../server/demo/seed";
 import { projectRoot } from "../../server/root";
 import { tables, temporaryFolder, testDatabase } from "../support/testServer";
@@ -11,7 +13,7 @@ import { tables, temporaryFolder, testDatabase } from "../support/testServer";
 async function filledDatabase(): Promise<OpenDatabase> {
   const open = testDatabase();
   await seedDemo(open.db, tables.version);
-  open.db.insert(sessions).values({ id: "s1", userId: "demo-admin", expiresAt: 4_000_000_000 }).run();
+  open.db.insert(schema.sessions).values({ id: "s1", userId: "demo-admin", expiresAt: 4_000_000_000 }).run();
   return open;
 }
 
@@ -34,8 +36,8 @@ function migrationsWith(sql: string): string {
 /** What drizzle-kit writes when a column changes: a new table, the rows copied, the old one dropped. */
 const rebuildUsers = [
   "PRAGMA foreign_keys=OFF;",
-  "CREATE TABLE `__new_users` (`id` text PRIMARY KEY NOT NULL, `email` text NOT NULL, `name` text NOT NULL, `role` text NOT NULL, `password_hash` text NOT NULL, `preferences` text NOT NULL, `created_at` text NOT NULL, `phone` text);",
-  'INSERT INTO `__new_users`("id", "email", "name", "role", "password_hash", "preferences", "created_at") SELECT "id", "email", "name", "role", "password_hash", "preferences", "created_at" FROM `users`;',
+  "CREATE TABLE `__new_users` (`id` text PRIMARY KEY NOT NULL, `email` text NOT NULL, `name` text NOT NULL, `role` text NOT NULL, `password_hash` text NOT NULL, `preferences` text NOT NULL, `created_at` text NOT NULL, `version` integer DEFAULT 1 NOT NULL, `disabled_at` text, `phone` text);",
+  'INSERT INTO `__new_users`("id", "email", "name", "role", "password_hash", "preferences", "created_at", "version", "disabled_at") SELECT "id", "email", "name", "role", "password_hash", "preferences", "created_at", "version", "disabled_at" FROM `users`;',
   "DROP TABLE `users`;",
   "ALTER TABLE `__new_users` RENAME TO `users`;",
   "PRAGMA foreign_keys=ON;",
@@ -43,18 +45,21 @@ const rebuildUsers = [
 
 test("rebuilding a table keeps the rows that refer to it, and a copy from before stands beside the file", async () => {
   const open = await filledDatabase();
-  const [members, revisions] = [open.db.select().from(users).all(), open.db.select().from(planRevisions).all()];
+  const [members, revisions] = [
+    open.db.select().from(schema.users).all(),
+    open.db.select().from(schema.planRevisions).all(),
+  ];
   const { ran, backup } = migrateDatabase(open, migrationsWith(rebuildUsers));
   expect(ran).toBe(1);
-  expect(open.db.select().from(users).all()).toEqual(members);
-  expect(open.db.select().from(sessions).all()).toHaveLength(1);
-  expect(open.db.select().from(planRevisions).all()).toEqual(revisions);
+  expect(open.db.select().from(schema.users).all()).toEqual(members);
+  expect(open.db.select().from(schema.sessions).all()).toHaveLength(1);
+  expect(open.db.select().from(schema.planRevisions).all()).toEqual(revisions);
   expect(open.raw.pragma("foreign_keys", { simple: true })).toBe(1);
   expect(open.raw.prepare("select phone from users").all()).toHaveLength(members.length);
 
   expect(backup && existsSync(backup)).toBeTruthy();
   const copy = openDatabase(backup ?? "");
-  expect(copy.db.select().from(users).all()).toEqual(members);
+  expect(copy.db.select().from(schema.users).all()).toEqual(members);
   expect(() => copy.raw.prepare("select phone from users")).toThrow("no such column");
   copy.raw.close();
 });
@@ -72,7 +77,7 @@ test("a migration that fails half way leaves the file as it was", async () => {
   const open = await filledDatabase();
   const half = "DELETE FROM `sessions`;\n--> statement-breakpoint\nDELETE FROM `no_such_table`;";
   expect(() => migrateDatabase(open, migrationsWith(half))).toThrow("no_such_table");
-  expect(open.db.select().from(sessions).all()).toHaveLength(1);
+  expect(open.db.select().from(schema.sessions).all()).toHaveLength(1);
 });
 
 test("a second start migrates nothing and copies nothing", async () => {
@@ -82,19 +87,12 @@ test("a second start migrates nothing and copies nothing", async () => {
 
 test("the tables in the code are the tables that the migrations make", () => {
   const { raw } = testDatabase();
-  const made = raw
-    .prepare("select name from sqlite_master where type = 'table' and name not like '\\_\\_%' escape '\\'")
-    .all();
-  const names = (made as { name: string }[]).map(({ name }) => name).sort();
-  expect(names).toEqual([
-    "chemistry_versions",
-    "library_rows",
-    "plan_revisions",
-    "plans",
-    "projects",
-    "sessions",
-    "species_rows",
-    "users",
-  ]);
+  const made = raw.prepare("select name from sqlite_master where type = 'table'").all() as { name: string }[];
+  const ours = made.map(({ name }) => name).filter((name) => !/^(sqlite_|__drizzle)/.test(name));
+  const declared = Object.values<unknown>(schema).flatMap((table) =>
+    is(table, SQLiteTable) ? [getTableName(table)] : [],
+  );
+  expect(declared.length).toBeGreaterThan(10);
+  expect(ours.sort()).toEqual(declared.sort());
   expect(raw.pragma("foreign_key_check")).toEqual([]);
 });

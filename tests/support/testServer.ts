@@ -14,6 +14,7 @@ import { users } from "../../server/db/schema";
 import type { Deps } from "../../server/deps";
 import { hashPassword } from "../../server/features/auth/passwords";
 import { createSessions } from "../../server/features/auth/sessions";
+import { createMailer } from "../../server/features/mailbox/mailer";
 import { keepVersion } from "../../server/features/chemistry/service";
 import { valueOf } from "../../shared/outcome";
 import { memberRoles, type MemberRole } from "../../shared/schemas/member";
@@ -96,12 +97,14 @@ export async function testServer({
   let clock = new Date("2026-05-04T03:02:01.000Z");
   const config = readConfig({ SIGN_IN_ATTEMPTS: "1000", ...env });
   const sessions = createSessions(open.db, { https: config.appUrl.startsWith("https:"), days: config.sessionDays });
+  const now = () => clock;
   const deps: Deps = {
     db: open.db,
     config,
-    clock: () => clock,
+    clock: now,
     log: pino({ level: "silent" }),
     sessions,
+    mailer: createMailer(open.db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock: now }),
     chemistry: { current: tables, data: library },
     solve,
   };

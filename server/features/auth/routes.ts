@@ -1,30 +1,12 @@
-import { rateLimit } from "express-rate-limit";
 import { firstAdmin, signIn, type DemoAccounts, type Member, type SessionAnswer } from "../../../shared/schemas/member";
 import { demoAccounts, demoPassword } from "../../demo/accounts";
 import type { Deps } from "../../deps";
 import { created, noContent, ok } from "../../http/answer";
+import { failureLimit } from "../../http/failureLimit";
 import { Refusal } from "../../http/refusal";
 import { route } from "../../http/route";
 import { anyMember, createFirstAdmin, findByEmail } from "../members/service";
 import { passwordMatches } from "./passwords";
-
-const minutes = 15;
-
-/** Counts failures alone: members who mistype and then get in are not held up. */
-const failureLimit = (attempts: number) =>
-  rateLimit({
-    windowMs: minutes * 60_000,
-    limit: attempts,
-    standardHeaders: "draft-8",
-    legacyHeaders: false,
-    skipSuccessfulRequests: true,
-    // Whether X-Forwarded-For is believed is TRUST_PROXY's business.
-    validate: { xForwardedForHeader: false },
-    handler: () => {
-      const message = `Too many failed attempts from this address; try again in ${minutes} minutes.`;
-      throw new Refusal("TOO_MANY_ATTEMPTS", "", message);
-    },
-  });
 
 export function authRoutes({ db, sessions, clock, config }: Deps) {
   const demo = (): DemoAccounts | null => {
@@ -56,7 +38,9 @@ export function authRoutes({ db, sessions, clock, config }: Deps) {
         if (!(await passwordMatches(found?.passwordHash ?? null, body.password)) || !found) {
           throw new Refusal("WRONG_CREDENTIALS", "", "No member has this e-mail address with this password.");
         }
-        const { passwordHash: _, ...member } = found;
+        const { passwordHash: _, disabledAt, ...member } = found;
+        if (disabledAt !== null)
+          throw new Refusal("DISABLED", "", "This account is closed; an administrator can open it again.");
         await sessions.end(req.headers.cookie);
         return ok(answer(member), { "Set-Cookie": await sessions.start(member.id) });
       },

@@ -10,6 +10,7 @@ interface UserAttributes {
   email: string;
   name: string;
   role: Member["role"];
+  disabledAt: string | null;
 }
 type SessionLucia = Lucia<Record<never, never>, UserAttributes>;
 
@@ -49,7 +50,7 @@ export function createSessions(db: Db, { https, days }: { https: boolean; days: 
       attributes: { secure: https, sameSite: "lax" },
     },
     // The adapter reads the whole row; only these leave it.
-    getUserAttributes: ({ email, name, role }) => ({ email, name, role }),
+    getUserAttributes: ({ email, name, role, disabledAt }) => ({ email, name, role, disabledAt }),
   });
   const idIn = (cookieHeader: string | undefined) => lucia.readSessionCookie(cookieHeader ?? "");
   return {
@@ -64,10 +65,14 @@ export function createSessions(db: Db, { https, days }: { https: boolean; days: 
     },
     middleware: async (req, res, next) => {
       res.locals.user = null;
-      const id = idIn(req.headers.cookie);
-      if (id) {
-        const { session, user } = await lucia.validateSession(id);
-        res.locals.user = user;
+      const sessionId = idIn(req.headers.cookie);
+      if (sessionId) {
+        const { session, user } = await lucia.validateSession(sessionId);
+        // Closing an account ends its sessions; a sign-in that was under way meanwhile opens nothing either.
+        if (user && user.disabledAt === null) {
+          const { id, email, name, role } = user;
+          res.locals.user = { id, email, name, role };
+        }
         if (session?.fresh) res.appendHeader("Set-Cookie", lucia.createSessionCookie(session.id).serialize());
         if (!session) res.appendHeader("Set-Cookie", lucia.createBlankSessionCookie().serialize());
       }
