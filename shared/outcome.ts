@@ -6,6 +6,8 @@ export type ErrorCode =
   | "UNKNOWN_COMPONENT"
   | "UNKNOWN_SPECIES"
   | "LIGAND_MISSING" // a named mineral needs a component that has no total
+  | "AMBIGUOUS_SPECIES" // a formula that several species of the library share
+  | "UNBALANCED" // a reaction that loses atoms or charge
   | "BAD_FORMULA"
   | "BAD_DATA"; // a table row contradicts itself
 

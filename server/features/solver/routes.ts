@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { reactionDesk } from "../../../shared/reactions/desk";
 import type { Deps } from "../../deps";
 import { ok } from "../../http/answer";
 import { Refusal } from "../../http/refusal";
@@ -15,6 +16,17 @@ export const solverRoutes = ({ chemistry, solve }: Deps) => [
       const solution = solve(body, chemistry.data);
       if (!solution.ok) throw Refusal.from(solution.error);
       return ok(solution.value);
+    },
+  }),
+  route({
+    method: "POST",
+    path: "/api/reaction",
+    roles: "signed-in",
+    body: z.unknown(), // checked by the desk, for the same reason
+    handle: ({ body }) => {
+      const answer = reactionDesk(chemistry.data, body);
+      if (!answer.ok) throw Refusal.from(answer.error);
+      return ok(answer.value);
     },
   }),
 ];
