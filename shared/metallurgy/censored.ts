@@ -1,5 +1,5 @@
 import type { Reading } from "../entry/readEntry";
-import type { Interval } from "./interval";
+import type { Interval } from "../entry/interval";
 
 export interface CensoredMean extends Interval {
   /** each limit taken as half: shown beside the interval, never instead of it */

@@ -28,3 +28,20 @@ export function spanOf(
     hi: f(ends(raising, "hi"), ends(lowering, "lo")),
   };
 }
+
+export const plus = (...terms: readonly Interval[]): Interval =>
+  terms.reduce((sum, t) => ({ lo: sum.lo + t.lo, hi: sum.hi + t.hi }), exactly(0));
+
+export const minus = (a: Interval, b: Interval): Interval => ({ lo: a.lo - b.hi, hi: a.hi - b.lo });
+
+/** @param factor  any sign */
+export const times = (a: Interval, factor: number): Interval =>
+  factor >= 0 ? { lo: a.lo * factor, hi: a.hi * factor } : { lo: a.hi * factor, hi: a.lo * factor };
+
+/** Range of a / b for b above zero; the two may not hang together.
+ *  @param a  any sign     @param b  ends >= 0     @returns  ends of a / b; an end is infinite where b reaches zero
+ *  @example over({ lo: 1, hi: 2 }, { lo: 4, hi: 5 }).hi // => 0.5 */
+export const over = (a: Interval, b: Interval): Interval => ({
+  lo: a.lo / (a.lo >= 0 ? b.hi : b.lo),
+  hi: a.hi / (a.hi >= 0 ? b.lo : b.hi),
+});
