@@ -31,6 +31,11 @@ describe("a limit's reaction", () => {
   test("sulfate and sulfide sulfur do not turn into each other where both are given", () =>
     expect(text("CuS(s)", "CuSO4(aq)", ["SO4^2-(aq)", "H2S(aq)"], "Cu")).toBe("CuS + SO4^2- + 2 H^+ = CuSO4 + H2S"));
 
+  test("nor does one oxidise a metal and turn into the other", () =>
+    expect(text("Fe^2+(aq)", "Fe(OH)3(s,ferrihydrite)", ["SO4^2-(aq)", "H2S(aq)"], "Fe")).toBe(
+      "Fe^2+ + 3 H2O = Fe(OH)3 + 3 H^+ + e^-",
+    ));
+
   test("with one sulfur they do", () =>
     expect(text("CuS(s)", "CuSO4(aq)", ["SO4^2-(aq)"], "Cu")).toBe("CuS + 4 H2O = CuSO4 + 8 H^+ + 8 e^-"));
 
