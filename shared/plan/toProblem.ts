@@ -1,6 +1,7 @@
-import { davies } from "../activity/davies";
+import { davies, daviesSlope } from "../activity/davies";
 import type { PlanInputs, PlanMetal, PresetName } from "../schemas/plan";
 import type { Problem } from "../schemas/problem";
+import { kelvin } from "../units";
 import { SULFIDE_SULFUR } from "../selection/components";
 import type { ChemicalData } from "../species/chemicalData";
 
@@ -17,12 +18,12 @@ export function simpleIonCharge(data: ChemicalData, element: string): number {
 }
 
 /** Activity coefficient of a metal line of a plan: 1, Davies at the plan's ionic strength, or typed.
- *  @param data  library     @param metal  line of the plan     @param ionicStrength  mol/kg or null (gamma 1)
+ *  @param data  library     @param metal  line of the plan     @param ionicStrength  mol/kg or null (gamma 1)     @param temperatureC  C
  *  @returns  gamma; Davies is flagged beyond 0.5 mol/kg by the screen     @source  activity/davies.ts */
-export function gammaOf(data: ChemicalData, metal: PlanMetal, ionicStrength: number | null): number {
+export function gammaOf(data: ChemicalData, metal: PlanMetal, ionicStrength: number | null, temperatureC = 25): number {
   if (metal.gammaFrom === "typed") return metal.gamma ?? 1;
   if (metal.gammaFrom === "davies" && ionicStrength !== null)
-    return davies(simpleIonCharge(data, metal.element), ionicStrength);
+    return davies(simpleIonCharge(data, metal.element), ionicStrength, 0.3, daviesSlope(kelvin(temperatureC)));
   return 1;
 }
 
@@ -52,7 +53,7 @@ export function toProblem(inputs: PlanInputs, data: ChemicalData): Problem {
       requirement: m.requirement,
       ...(m.entry === "activity"
         ? { activity: m.value }
-        : { gPerL: m.value, gamma: gammaOf(data, m, inputs.ionicStrength) }),
+        : { gPerL: m.value, gamma: gammaOf(data, m, inputs.ionicStrength, inputs.temperatureC) }),
     })),
     ligands: inputs.ligands,
     others: inputs.others,

@@ -1,7 +1,8 @@
 import { fail, ok, type Outcome } from "../outcome";
 import type { Problem } from "../schemas/problem";
 import type { ChemicalData, Species } from "../species/chemicalData";
-import { componentKind, holdsSulfate, ligandNumbers, speciesHolding, SULFIDE_SULFUR } from "./components";
+import { componentKind, ligandNumbers, speciesHolding, SULFIDE_SULFUR } from "./components";
+import { isSulfate } from "../species/sulfur";
 import { leavesOut, temperatureStage } from "./leftOut";
 
 /** Which species count, in the order of the problem's components and metals. */
@@ -57,15 +58,22 @@ function choose(
   for (const component of totals.keys()) {
     const species = componentSpecies(data, component, sulfateReduction).filter((s) => !reject(s, out, leftOut));
     if (species.length === 0)
-      return fail("UNKNOWN_COMPONENT", "ligands", `${component} has no species left that could hold its total`);
+      return fail(
+        "UNKNOWN_COMPONENT",
+        pathOf(component, problem),
+        `${component} has no species left that could hold its total`,
+      );
     components.push(species);
   }
   const metals: Species[][] = [];
   const seen = new Set<string>();
   for (const [i, { element }] of problem.metals.entries()) {
     const path = `metals.${i}.element`;
-    if (componentKind(data, element) === "unknown" || !data.molarMass.has(element))
+    const kind = componentKind(data, element);
+    if (kind === "unknown" || !data.molarMass.has(element))
       return fail("UNKNOWN_METAL", path, `"${element}" is not an element of the library`);
+    if (kind === "ligand" || data.components.get(element)?.kind === "ligand_group")
+      return fail("UNKNOWN_METAL", path, `${element} is no metal: it takes a total among the ligands`);
     if (seen.has(element)) return fail("INVALID_INPUT", path, `${element} stands twice in the list of metals`);
     if (totals.has(element))
       return fail("INVALID_INPUT", path, `${element} is both a metal and a component with a total`);
@@ -75,6 +83,13 @@ function choose(
     metals.push(species);
   }
   return ok({ components, metals, leftOut });
+}
+
+function pathOf(component: string, { ligands, others = [] }: Problem): string {
+  const ligand = ligands.findIndex((l) => l.component === component);
+  return ligand >= 0
+    ? `ligands.${ligand}.component`
+    : `others.${others.findIndex((o) => o.component === component)}.component`;
 }
 
 type LeftOut = { species: string; reason: string }[];
@@ -92,7 +107,7 @@ function componentSpecies(data: ChemicalData, component: string, sulfateReductio
     if (s.phase === "g") return false;
     if (!Object.keys(s.composition).every((c) => c === main || c === "H" || c === "O")) return false;
     if (main !== "S" || sulfateReduction) return true;
-    return holdsSulfate(s) === (component === "S");
+    return isSulfate(s.formula) === (component === "S");
   });
 }
 

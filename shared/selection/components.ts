@@ -1,4 +1,5 @@
 import type { ChemicalData, Species } from "../species/chemicalData";
+import { isSulfate } from "../species/sulfur";
 
 /** Sulfur that never meets sulfate while sulfate reduction is off: sulfide, S(0), sulfite. Own total, none by default. */
 export const SULFIDE_SULFUR = "S(sulfide)";
@@ -7,15 +8,9 @@ const LIGAND_ELEMENTS: ReadonlySet<string> = new Set(["S", "N", "C", "Cl", "F", 
 /** "other components" of a plan: not ligands of the lixiviant, but partners of jarosites, gypsum, silicates */
 const PARTNERS: ReadonlySet<string> = new Set(["K", "Na", "Li", "Mg", "Ca", "Si", "NH3"]);
 
-const SULFATE = /SO4|S2O8/;
-
-/** Whether the sulfur of a species is sulfate sulfur (its formula holds SO4, HSO4 or S2O8).
- *  @param species  holds S     @returns  true for sulfate sulfur     @source  design rule: sulfate and sulfide sulfur never equilibrate */
-export const holdsSulfate = (species: Species): boolean => SULFATE.test(species.formula);
-
 /** The component through which a species takes its `S`, given whether sulfate reduction is on. */
 export const sulfurComponent = (species: Species, sulfateReduction: boolean): string =>
-  sulfateReduction || holdsSulfate(species) ? "S" : SULFIDE_SULFUR;
+  sulfateReduction || isSulfate(species.formula) ? "S" : SULFIDE_SULFUR;
 
 export type ComponentKind = "ligand" | "partner" | "metal" | "unknown";
 

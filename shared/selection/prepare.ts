@@ -3,6 +3,7 @@ import { fail, ok, type Outcome } from "../outcome";
 import { problemSchema, type MetalInput, type Problem, type Requirement } from "../schemas/problem";
 import type { ChemicalData, Species } from "../species/chemicalData";
 import { withSpecies } from "../species/library";
+import { wholeFactor } from "../planes/formation";
 import { chooseSpecies } from "./choose";
 import { componentKind, SULFIDE_SULFUR } from "./components";
 
@@ -38,14 +39,22 @@ const valueAt = (input: unknown, path: readonly PropertyKey[]): unknown =>
     input,
   );
 
+/** A value as people would write it, cut where it gets long. */
+function shown(value: unknown): string {
+  if (value === undefined) return "nothing";
+  if (typeof value === "number" || typeof value === "bigint") return String(value);
+  const text = (JSON.stringify(value) as string | undefined) ?? typeof value;
+  return text.length > 80 ? `${text.slice(0, 77)}...` : text;
+}
+
 /** The first complaint of zod as a failure with path, bound and value. */
 export function failureOf(error: z.ZodError, input: unknown): Outcome<never> {
   const issue = error.issues[0]!;
-  const path = issue.path.map(String).join(".");
-  const value = valueAt(input, issue.path);
-  const range = issue.code === "too_small" || issue.code === "too_big";
-  const got = value === undefined ? "nothing" : JSON.stringify(value);
-  return fail(range ? "OUT_OF_RANGE" : "INVALID_INPUT", path, `${issue.message}; got ${got}`);
+  const unknown = issue.code === "unrecognized_keys" ? issue.keys.slice(0, 1) : [];
+  const keys = [...issue.path, ...unknown];
+  const outside = (issue.code === "too_small" || issue.code === "too_big") && issue.origin === "number";
+  const got = shown(valueAt(input, keys));
+  return fail(outside ? "OUT_OF_RANGE" : "INVALID_INPUT", keys.map(String).join("."), `${issue.message}; got ${got}`);
 }
 
 /** Validates a problem and chooses the species that count.
@@ -58,6 +67,8 @@ export function prepare(input: unknown, library: ChemicalData): Outcome<Prepared
   const problem = parsed.data;
   const extended = problem.species?.length ? withSpecies(library, problem.species) : ok(library);
   if (!extended.ok) return extended;
+  const own = ownSpeciesFit(problem, extended.value);
+  if (!own.ok) return own;
   const data = extended.value;
   const sulfateReduction = problem.sulfateReduction ?? problem.temperatureC >= SULFATE_REDUCTION_FROM_C;
 
@@ -74,6 +85,28 @@ export function prepare(input: unknown, library: ChemicalData): Outcome<Prepared
     components: [...totals.value].map(([component, activity], i) => ({ component, activity, species: components[i]! })),
     leftOut,
   });
+}
+
+/** Largest |G| of a species that the grid of planes holds exactly with all its atoms, kJ/mol. */
+const LARGEST_G = 1e5;
+
+/** A row the problem brings along must fit the exact grid of planes: its atoms in small fractions, its energy in bounds. */
+function ownSpeciesFit({ species = [] }: Problem, data: ChemicalData): Outcome<null> {
+  for (const [i, { id, dGf_kJ, composition }] of species.entries()) {
+    if (!(Math.abs(dGf_kJ) <= LARGEST_G))
+      return fail(
+        "OUT_OF_RANGE",
+        `species.${i}.dGf_kJ`,
+        `${id}: at most ${LARGEST_G} kJ/mol either way; got ${dGf_kJ}`,
+      );
+    if (wholeFactor(Object.values(data.species.get(id)!.composition)) === null)
+      return fail(
+        "BAD_DATA",
+        `species.${i}.composition`,
+        `${id}: fractions of an atom no finer than a twelfth; got ${composition}`,
+      );
+  }
+  return ok(null);
 }
 
 function preparedMetal(metal: MetalInput, species: readonly Species[], data: ChemicalData): PreparedMetal {
