@@ -35,9 +35,6 @@ export default function Plot({ figure, onRelayout, onDrawn }: PlotProps) {
   );
 }
 
-/** The same figure as a picture, drawn apart from the screen. */
-export const picture = (figure: Figure, format: "png" | "svg"): Promise<string> =>
-  Plotly.toImage(
-    { data: figure.data, layout: figure.layout },
-    { format, width: figure.layout.width, height: figure.layout.height, scale: format === "png" ? 2 : 1 },
-  );
+/** The same figure as an SVG data URL, drawn apart from the screen. */
+export const picture = ({ data, layout }: Figure): Promise<string> =>
+  Plotly.toImage({ data, layout }, { format: "svg", width: layout.width, height: layout.height });

@@ -1,10 +1,12 @@
 import { lazy, Suspense, useCallback, useMemo, useRef, useState } from "react";
 import { Loading } from "../components/status";
 import type { Frame } from "../../shared/schemas/problem";
+import type { Point } from "../../shared/solution";
 import { sheetBoxes } from "./boxes";
 import type { MapContent } from "./content";
 import { Cursor, type CursorStore } from "./cursor";
 import { mapFigure } from "./figure";
+import { haloStyle } from "./texts";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
 
@@ -15,18 +17,20 @@ export interface WindowMapProps {
   /** how to draw it; what is in sight is the map's own affair */
   view: Omit<MapView, "visible">;
   cursor: CursorStore;
-  /** a click or tap on the map */
-  onPick: (pH: number, Eh: number) => void;
+  /** a click or tap on the map; null lets the point go */
+  onPick: (at: Point | null) => void;
+  /** what a screen reader says of it */
+  label: string;
 }
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure. */
-export function WindowMap({ content, view, cursor, onPick }: WindowMapProps) {
+export function WindowMap({ content, view, cursor, onPick, label }: WindowMapProps) {
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
   const { frame, scale } = view;
   const [zoom, setZoom] = useState<{ of: string; frame: Frame } | null>(null);
   // A zoom belongs to one frame on one scale; the axes go back when either changes, and so must this.
-  const zoomOf = [frame.pH, frame.Eh, scale.unit, scale.electrode].flat().join(" ");
+  const zoomOf = [frame.pH, frame.Eh, scale.unit, scale.short].flat().join(" ");
   const visible = zoom?.of === zoomOf ? zoom.frame : frame;
   const { alongPH, reachShown } = {
     alongPH: view.layers.crosscuts && content.through !== null,
@@ -76,7 +80,16 @@ export function WindowMap({ content, view, cursor, onPick }: WindowMapProps) {
   }, []);
 
   return (
-    <div ref={holder} className="window-map relative h-full w-full overflow-hidden" data-testid="window-map">
+    <div
+      ref={holder}
+      role="application"
+      aria-roledescription="window map"
+      aria-label={label}
+      tabIndex={0}
+      className="relative h-full w-full overflow-hidden"
+      data-testid="window-map"
+    >
+      <style>{haloStyle("var(--color-sheet)", "var(--color-tint)")}</style>
       {figure && sheet ? (
         <>
           <Suspense fallback={<Loading label="Opening the map" />}>

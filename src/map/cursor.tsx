@@ -28,10 +28,10 @@ interface CursorProps {
   through: Point | null;
   store: CursorStore;
   holder: RefObject<HTMLDivElement | null>;
-  onPick: (pH: number, Eh: number) => void;
+  onPick: (at: Point | null) => void;
 }
 
-/** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them; a click or Enter picks the point. */
+/** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them; a click or Enter picks the point, Escape lets it go. */
 export function Cursor({ sheet, visible, through, store, holder, onPick }: CursorProps) {
   const upright = useRef<HTMLDivElement>(null);
   const level = useRef<HTMLDivElement>(null);
@@ -94,7 +94,7 @@ export function Cursor({ sheet, visible, through, store, holder, onPick }: Curso
       const still = pressed && Math.hypot(event.clientX - pressed.x, event.clientY - pressed.y) < 4;
       pressed = null;
       const at = still ? pointAt(event) : null;
-      if (at) now.current.onPick(at[0], at[1]);
+      if (at) now.current.onPick(at);
     };
     const onKey = (event: KeyboardEvent) => {
       const step = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] }[event.key];
@@ -110,8 +110,11 @@ export function Cursor({ sheet, visible, through, store, holder, onPick }: Curso
         ]);
       } else if (event.key === "Enter") {
         const at = store.get();
-        if (at) now.current.onPick(at[0], at[1]);
-      } else if (event.key === "Escape") show(null);
+        if (at) now.current.onPick(at);
+      } else if (event.key === "Escape") {
+        show(null);
+        now.current.onPick(null);
+      }
     };
     // Capture: Plotly stops some pointer events on its drag layer.
     element.addEventListener("pointermove", onMove, true);

@@ -61,7 +61,7 @@ function annotations(content: MapContent, sheet: Sheet, view: MapView): PlotAnno
       font: muted,
     },
     {
-      text: `Eh / ${view.scale.unit} vs ${view.scale.electrode}`,
+      text: `Eh / ${view.scale.unit} vs ${view.scale.short}`,
       x: 0,
       y: 0.5,
       xref: "x domain",
@@ -74,8 +74,24 @@ function annotations(content: MapContent, sheet: Sheet, view: MapView): PlotAnno
       font: muted,
     },
   ];
+  const reachHead: PlotAnnotation[] = sheet.reach
+    ? [
+        {
+          text: "reach",
+          x: 0.5,
+          y: 1,
+          xref: "x3 domain",
+          yref: "y domain",
+          xanchor: "center",
+          yanchor: "bottom",
+          showarrow: false,
+          font: muted,
+        },
+      ]
+    : [];
   return [
     ...axisWords,
+    ...reachHead,
     ...(sheet.alongEh && content.through ? alongEhNames(content.crosscuts, view, stripSizes(sheet, view)) : []),
   ];
 }
@@ -124,7 +140,7 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
     showlegend: false,
     hovermode: false,
     dragmode: "zoom",
-    uirevision: [frame.pH, frame.Eh, scale.unit, scale.electrode].flat().join(" "),
+    uirevision: [frame.pH, frame.Eh, scale.unit, scale.short].flat().join(" "),
     font: { family: MONO, size: 12, color: colours.ink },
     hoverlabel: { font: { family: MONO, size: 12 } },
     xaxis: { ...axis, domain: place.x, range: [frame.pH[0], frame.pH[1]], anchor: "y", nticks: 9 },

@@ -11,7 +11,7 @@ export interface MapMetal {
 }
 
 /** What the map needs of the potential scale; the core stays in V vs SHE, and here the scale enters. */
-export type ShownScale = Pick<PotentialScale, "unit" | "electrode" | "toShown" | "fromShown">;
+export type ShownScale = Pick<PotentialScale, "unit" | "short" | "toShown" | "fromShown">;
 
 /** The layers a user can switch; the map's ground and window always stay. */
 export const layerNames = [

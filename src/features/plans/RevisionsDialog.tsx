@@ -10,17 +10,19 @@ import { planChanges, type PlanChange } from "../../lib/planChanges";
 import { useRevisions } from "../../lib/plans";
 
 /** Every saved state of a plan, newest first, and what each changed from the one before. `onTake` brings the inputs of an
- *  earlier one back into the plan that is open. */
+ *  earlier one back into the plan that is open; `onLook` opens it as it was, with the data it froze. */
 export function RevisionsDialog({
   plan,
   open,
   onOpenChange,
   onTake,
+  onLook,
 }: {
   plan: Pick<PlanRow, "id" | "name">;
   open: boolean;
   onOpenChange: (open: boolean) => void;
   onTake?: (revision: RevisionRow) => void;
+  onLook?: (revision: RevisionRow) => void;
 }) {
   const revisions = useRevisions(plan.id, open);
   const [number, setNumber] = useState<number>();
@@ -34,17 +36,22 @@ export function RevisionsDialog({
       title={`Revisions of ${plan.name}`}
       width={860}
       footer={
-        onTake &&
-        shown && (
-          <Button
-            kind="primary"
-            onClick={() => {
-              onTake(shown);
-              onOpenChange(false);
-            }}
-          >
-            Take the inputs of revision {shown.number}
-          </Button>
+        shown &&
+        (onLook ?? onTake) && (
+          <>
+            {onLook && <Button onClick={() => onLook(shown)}>Open revision {shown.number} as it was</Button>}
+            {onTake && (
+              <Button
+                kind="primary"
+                onClick={() => {
+                  onTake(shown);
+                  onOpenChange(false);
+                }}
+              >
+                Take the inputs of revision {shown.number}
+              </Button>
+            )}
+          </>
         )
       }
     >

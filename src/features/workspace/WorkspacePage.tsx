@@ -1,7 +1,47 @@
-import { useParams } from "react-router-dom";
-import { usePlan } from "../../lib/plans";
+import { useParams, useSearchParams } from "react-router-dom";
+import { ErrorNote, Loading } from "../../components/status";
+import { useChemistry } from "../../lib/chemistry";
+import { usePlan, useRevisions } from "../../lib/plans";
+import { usePageTitle } from "../../lib/title";
+import { Workspace } from "./Workspace";
 
+/** A plan, or with ?revision=n one of its saved states as it was, with the chemistry data it froze. */
 export default function WorkspacePage() {
-  const { data } = usePlan(useParams().planId);
-  return <h1 className="p-5 text-xl">{data?.name}</h1>;
+  const { planId = "" } = useParams();
+  const [search] = useSearchParams();
+  const number = search.get("revision");
+  const plan = usePlan(planId);
+  const revisions = useRevisions(planId, number !== null);
+  const frozen = number === null ? null : revisions.data?.find((r) => String(r.number) === number);
+  const current = useChemistry(undefined, number === null);
+  const past = useChemistry(frozen?.dataVersion, frozen !== null && frozen !== undefined);
+  const chemistry = number === null ? current : past;
+  usePageTitle(plan.data?.name);
+
+  const wrong =
+    plan.error ??
+    (number === null ? null : revisions.error) ??
+    chemistry.error ??
+    (number !== null && revisions.data && !frozen ? new Error(`Revision ${number} does not exist.`) : null);
+  if (wrong) {
+    return (
+      <div className="p-5">
+        <ErrorNote
+          doing="The plan could not be opened"
+          error={wrong}
+          retry={() => {
+            void plan.refetch();
+            void chemistry.refetch();
+          }}
+        />
+      </div>
+    );
+  }
+  if (!plan.data || !chemistry.data || frozen === undefined)
+    return (
+      <div className="px-5">
+        <Loading label="Opening the plan" />
+      </div>
+    );
+  return <Workspace key={`${planId} ${number ?? ""}`} plan={plan.data} frozen={frozen} data={chemistry.data} />;
 }

@@ -159,7 +159,7 @@ function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonl
         if (better(spot, best)) best = spot;
       }
     }
-    return (best as Spot | null)?.at ?? null;
+    return best?.at ?? null;
   };
   // A large field is searched coarsely, always on multiples of one lattice, so that its name holds still.
   const coarse = (spare: number) => LATTICE * 2 ** Math.max(0, Math.floor(Math.log2(spare / (10 * LATTICE))));

@@ -92,6 +92,10 @@ export function nameTraces(content: MapContent, sheet: Sheet, view: MapView): Pl
   const lines = [
     ...[...boundaries.values()].flat().flatMap(segments),
     ...solution.windows.flatMap((w) => w.polygons.flatMap(({ outer }) => segments([...outer, outer[0] as Point]))),
+    ...solution.waterLines.flatMap(({ intercept, slope }) =>
+      segments(view.frame.pH.map((pH): Point => [pH, intercept + slope * pH])),
+    ),
+    ...(content.moved && view.layers.otherBasis ? content.moved.limits.flatMap((l) => segments([l.from, l.to])) : []),
   ];
   const placed = placeLabels(wishes, inSight, taken, lines);
   const texts = wishes.flatMap((wish) => {

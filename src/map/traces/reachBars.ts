@@ -6,7 +6,7 @@ import type { MapView } from "../view";
 const beside = { xaxis: "x3", yaxis: "y" } as const;
 const inside = (Eh: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, Eh));
 
-/** Bars beside the Eh axis: the practical range solid, a thin line on to the couple's equilibrium at the set point's pH, with a cap. */
+/** Bars beside the Eh axis: the practical range solid, a thin line on to the couple's equilibrium at the set point's pH. */
 export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace[] {
   const { toShown } = view.scale;
   const range = view.frame.Eh;
@@ -20,27 +20,30 @@ export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace
     into.x.push(null);
     into.y.push(null);
   };
+  const barb = 0.02 * (range[1] - range[0]);
   reaches.forEach(({ reached, equilibrium }, i) => {
     const x = i + 0.5;
-    const [lo, hi] = reached ? [reached[0], reached[1] ?? range[1]] : [null, null];
-    if (lo !== null)
+    const bar = reached && ([reached[0], reached[1] ?? range[1]] as const);
+    if (bar)
       push(
         solid,
-        [lo, hi].map((v): [number, number] => [x, inside(v, range)]),
+        bar.map((v): [number, number] => [x, inside(v, range)]),
       );
     if (equilibrium === null) return;
     const end = inside(equilibrium, range);
-    const start = lo === null ? end : inside(equilibrium > hi ? hi : equilibrium < lo ? lo : equilibrium, range);
+    const off = Math.sign(equilibrium - end);
+    const start = bar ? inside(Math.min(bar[1], Math.max(bar[0], equilibrium)), range) : end - 2 * off * barb;
     if (start !== end)
       push(thin, [
         [x, start],
         [x, end],
       ]);
-    if (end === equilibrium)
-      push(thin, [
-        [x - 0.28, end],
-        [x + 0.28, end],
-      ]);
+    // On the map the equilibrium is a cap across the line; beyond it an arrow says which way.
+    push(thin, [
+      [x - 0.4, end - off * barb],
+      [x, end],
+      [x + 0.4, end - off * barb],
+    ]);
   });
   return [
     trace({
@@ -49,7 +52,7 @@ export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace
       mode: "lines",
       ...beside,
       ...thin,
-      line: { color: view.colours.water, width: 1 },
+      line: { color: view.colours.water, width: 1.2 },
     }),
     trace({
       uid: "reach-solid",

@@ -90,7 +90,7 @@ export const solution: Solution = {
 /** millivolts against an electrode at +0.2 V: every drawn potential must have gone through the scale */
 export const millivolts: MapView["scale"] = {
   unit: "mV",
-  electrode: "Ag/AgCl",
+  short: "Ag/AgCl",
   toShown: (E) => (E - 0.2) * 1000,
   fromShown: (shown) => shown / 1000 + 0.2,
 };

@@ -117,14 +117,21 @@ describe("reach bars", () => {
   const [air] = reachAt(["air"], "sulfate", 5, 60);
   test("solid over the practical range, thin from its end on to the equilibrium, inside the frame", () => {
     const [thin, solid] = reachTraces([air!], view);
-    expect(shown(solid!)).toEqual([(0.45 - 0.2) * 1000, (0.75 - 0.2) * 1000].map((v) => expect.closeTo(v)));
+    shown(solid!).forEach((v, i) => expect(v).toBeCloseTo(([0.45, 0.75][i]! - 0.2) * 1000));
+    expect(shown(solid!)).toHaveLength(2);
     expect(Math.max(...shown(thin!))).toBeCloseTo((air!.equilibrium! - 0.2) * 1000);
     expect(thin!.line!.width).toBeLessThan(solid!.line!.width);
   });
-  test("an equilibrium above the frame runs to its edge and gets no cap", () => {
-    const [thin] = reachTraces([{ ...air!, equilibrium: 1.4 }], view);
-    expect(Math.max(...shown(thin!))).toBe(800);
-    expect(new Set(thin!.x.filter((x) => x !== null))).toEqual(new Set([0.5]));
+  test("on the map the equilibrium is capped level; beyond it an arrow points on", () => {
+    const wings = (equilibrium: number) => {
+      const [thin] = reachTraces([{ ...air!, equilibrium }], view);
+      const at = thin!.x.flatMap((x, i) => (x !== null && Math.abs(x - 0.5) > 0.1 ? [thin!.y[i]!] : []));
+      return { tip: Math.max(...shown(thin!)), wings: at };
+    };
+    expect(wings(0.9)).toEqual({ tip: 700, wings: [700, 700] });
+    const beyond = wings(1.4);
+    expect(beyond.tip).toBe(800);
+    for (const y of beyond.wings) expect(y).toBeLessThan(800);
   });
 });
 

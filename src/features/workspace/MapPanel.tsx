@@ -1,0 +1,73 @@
+import type { PlanInputs } from "../../../shared/schemas/plan";
+import type { Point } from "../../../shared/solution";
+import { Button } from "../../components/Button";
+import type { PotentialScale } from "../../lib/potential";
+import { solidsBasisWord } from "../../lib/planWords";
+import type { CursorStore } from "../../map/cursor";
+import { ReadOut } from "../../map/ReadOut";
+import { windowName } from "../../map/view";
+import { WindowMap } from "../../map/WindowMap";
+import type { MapModel } from "./model/useMapModel";
+
+export interface MapPanelProps {
+  model: MapModel;
+  inputs: PlanInputs;
+  scale: PotentialScale;
+  onPlain: (plain: boolean) => void;
+  onFocus: (element: string | null) => void;
+  pinned: Point | null;
+  onPin: (at: Point | null) => void;
+  cursor: CursorStore;
+}
+
+/** The middle: what stands under the cursor, and the map. */
+export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor }: MapPanelProps) {
+  const { content, view, metals, through } = model;
+  const { solution } = content;
+  const { plain, focus, window: chosen } = view;
+  const hasWindow = solution.windows.length > 0;
+  const where = pinned
+    ? "at the pinned point"
+    : hasWindow
+      ? `at the set point of window ${windowName(chosen)}`
+      : "in the middle of the frame";
+  return (
+    <div className="flex min-h-0 flex-1 flex-col">
+      <div className="flex items-start gap-3 px-4 pt-2">
+        <div className="min-w-0 flex-1">
+          <ReadOut
+            store={cursor}
+            solution={solution}
+            metals={metals}
+            scale={scale}
+            rest={{ at: through, words: where }}
+          />
+        </div>
+        <div className="no-print flex shrink-0 gap-3 leading-none">
+          {pinned && (
+            <Button kind="quiet" className="h-auto!" onClick={() => onPin(null)}>
+              {hasWindow ? "back to the set point" : "unpin"}
+            </Button>
+          )}
+          {focus !== null && (
+            <Button kind="quiet" className="h-auto!" onClick={() => onFocus(null)}>
+              all metals
+            </Button>
+          )}
+          <Button kind="quiet" className="h-auto!" title="Key f" onClick={() => onPlain(!plain)}>
+            {plain ? "shut and open ground" : "all fields"}
+          </Button>
+        </div>
+      </div>
+      <div className="min-h-0 flex-1 px-2 pb-2">
+        <WindowMap
+          content={content}
+          view={view}
+          cursor={cursor}
+          onPick={onPin}
+          label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
+        />
+      </div>
+    </div>
+  );
+}

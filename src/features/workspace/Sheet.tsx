@@ -1,0 +1,19 @@
+import type { ReactNode } from "react";
+
+/** The workspace's three parts. Wide: asks, map, answers side by side, each scrolling by itself. Tablet: the map first, asks and
+ *  answers in two columns below it. Paper: map, then answers and asks. */
+export function Sheet({ asks, map, answers }: { asks: ReactNode; map: ReactNode; answers: ReactNode }) {
+  return (
+    <div className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(560px,62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:block">
+      <div className="order-2 border-r border-rule pr-4 pl-5 pt-3 pb-8 lg:order-1 lg:min-h-0 lg:overflow-y-auto print:border-0 print:columns-2">
+        {asks}
+      </div>
+      <div className="order-1 col-span-2 flex min-h-0 flex-col border-b border-rule lg:order-2 lg:col-span-1 lg:border-b-0 print:h-[640px] print:w-[690px]">
+        {map}
+      </div>
+      <div className="order-3 pr-5 pl-4 pt-3 pb-8 lg:min-h-0 lg:overflow-y-auto lg:border-l lg:border-rule print:border-0 print:columns-2">
+        {answers}
+      </div>
+    </div>
+  );
+}

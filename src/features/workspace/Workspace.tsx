@@ -1,0 +1,211 @@
+import { useCallback, useMemo, useState } from "react";
+import { useNavigate } from "react-router-dom";
+import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
+import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
+import type { Point } from "../../../shared/solution";
+import type { ChemicalData } from "../../../shared/species/chemicalData";
+import { FormulaText } from "../../components/FormulaText";
+import { Remark } from "../../components/text";
+import { messageOf } from "../../lib/failure";
+import { usePotentialScale } from "../../lib/potential";
+import { useMay } from "../../lib/session";
+import { printColours, useThemeColours } from "../../lib/theme";
+import { CursorStore } from "../../map/cursor";
+import { AnswersPanel } from "./answers/AnswersPanel";
+import { ChooseReagents } from "./answers/ChooseReagents";
+import { AsksPanel } from "./asks/AsksPanel";
+import { AskingContext } from "./asks/context";
+import { Dialogs, type DialogName } from "./header/Dialogs";
+import { type ExportKind, FrozenBanner, WorkspaceHeader } from "./header/WorkspaceHeader";
+import { MapPanel } from "./MapPanel";
+import { exportPlan } from "./model/exportPlan";
+import { useDraft } from "./model/useDraft";
+import { useKeys } from "./model/useKeys";
+import { useMapModel } from "./model/useMapModel";
+import { useMapSettings, useReagents } from "./model/useMapSettings";
+import { usePrinting } from "./model/usePrinting";
+import { useSolved } from "./model/useSolved";
+import { dropDraft, keepDraft } from "./model/draftShelf";
+import { Sheet } from "./Sheet";
+
+export interface WorkspaceProps {
+  plan: PlanRow;
+  /** a saved state that is looked at; without it the plan is worked on */
+  frozen: RevisionRow | null;
+  data: ChemicalData;
+}
+
+/** A plan on the table: left asks, middle shows, right answers. */
+export function Workspace({ plan, frozen, data }: WorkspaceProps) {
+  const navigate = useNavigate();
+  const mayWrite = useMay("writePlans");
+  const draft = useDraft(plan.id, plan.latest);
+  const inputs = frozen ? frozen.inputs : draft.inputs;
+  const { problem, solution, failure } = useSolved(inputs, data);
+  const scale = usePotentialScale(inputs.temperatureC);
+  const theme = useThemeColours();
+  const printing = usePrinting();
+  const { layers, setLayer, plain, setPlain } = useMapSettings();
+  const { reagents, choose } = useReagents(plan.id, inputs);
+  const [cursor] = useState(() => new CursorStore());
+  const [wantedFocus, setFocus] = useState<string | null>(null);
+  const [wantedWindow, setWindow] = useState(0);
+  const [pinned, setPinned] = useState<Point | null>(null);
+  const [dialog, setDialog] = useState<DialogName | null>(null);
+  const [exporting, setExporting] = useState<{ text: string; bad: boolean } | null>(null);
+  const focus = inputs.metals.some((m) => m.element === wantedFocus) ? wantedFocus : null;
+  const count = solution?.windows.length ?? 0;
+  const chosen = Math.min(wantedWindow, Math.max(0, count - 1));
+
+  useKeys([
+    { key: "z", ctrl: true, shift: false, run: draft.undo },
+    { key: "z", ctrl: true, shift: true, run: draft.redo },
+    { key: "y", ctrl: true, run: draft.redo },
+    { key: "s", ctrl: true, run: () => mayWrite && !frozen && draft.changed && setDialog("save") },
+    { key: "f", run: () => setPlain(!plain) },
+    { key: "r", run: () => setDialog("revisions") },
+    { key: "w", run: () => count > 1 && setWindow((chosen + 1) % count) },
+    { key: "?", run: () => setDialog("keys") },
+    ...["0", "escape"].map((key) => ({
+      key,
+      run: () => {
+        setFocus(null);
+        setPinned(null);
+      },
+    })),
+    ...inputs.metals.slice(0, 9).map(({ element }, i) => ({
+      key: String(i + 1),
+      run: () => setFocus(focus === element ? null : element),
+    })),
+  ]);
+
+  const asking = useMemo(
+    () => ({
+      inputs,
+      edit: draft.edit,
+      settle: draft.settle,
+      data,
+      solution,
+      failure,
+      scale,
+      readOnly: frozen !== null,
+      focus,
+      onFocus: setFocus,
+    }),
+    [inputs, draft.edit, draft.settle, data, solution, failure, scale, frozen, focus],
+  );
+
+  const map = useMapModel({
+    inputs,
+    problem,
+    solution,
+    data,
+    scale,
+    colours: printing ? printColours : theme,
+    layers,
+    plain,
+    focus,
+    chosen,
+    pinned,
+    reagents,
+  });
+
+  const unconfirmed = cautionsFor(hazardContext(inputs, solution?.windows[chosen]?.setPoint ?? null))
+    .filter((c) => c.confirm !== null && (draft.procedures[c.code] ?? "").trim() === "")
+    .map((c) => c.code);
+
+  const onExport = useCallback(
+    (kind: ExportKind) => {
+      if (!solution || !map) return;
+      setExporting({ text: "Making the file …", bad: false });
+      const state = frozen
+        ? `revision ${frozen.number}`
+        : draft.changed
+          ? `draft on revision ${draft.basedOn}`
+          : `revision ${plan.latest.number}`;
+      exportPlan(kind, { plan, state, inputs, problem, solution, model: map, dataVersion: data.version }).then(
+        () => setExporting(null),
+        (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
+      );
+    },
+    [solution, map, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version],
+  );
+
+  function restore(revision: RevisionRow) {
+    dropDraft(plan.id);
+    keepDraft(plan.id, { basedOn: plan.latest.number, inputs: revision.inputs, procedures: {} });
+    void navigate(`/plans/${plan.id}`);
+  }
+
+  return (
+    <AskingContext value={asking}>
+      {frozen ? (
+        <FrozenBanner {...frozen} plan={plan} onRestore={() => restore(frozen)} />
+      ) : (
+        <WorkspaceHeader
+          plan={plan}
+          draft={draft}
+          mayWrite={mayWrite}
+          exporting={exporting}
+          onExport={onExport}
+          onOpen={setDialog}
+        />
+      )}
+      <Sheet
+        asks={<AsksPanel layers={layers} onLayer={setLayer} plain={plain} onPlain={setPlain} />}
+        map={
+          map ? (
+            <MapPanel
+              model={map}
+              inputs={inputs}
+              scale={scale}
+              onPlain={setPlain}
+              onFocus={setFocus}
+              pinned={pinned}
+              onPin={setPinned}
+              cursor={cursor}
+            />
+          ) : null
+        }
+        answers={
+          <>
+            {failure && (
+              <Remark className="mb-3 border-signal!">
+                <p role="alert">
+                  <b>This cannot be solved.</b> <FormulaText text={failure.message} />.{" "}
+                  <span className="text-muted">
+                    At <span className="font-mono">{failure.path || "the plan"}</span>.
+                    {solution && " The map still shows the last answer; nothing you entered is lost."}
+                  </span>
+                </p>
+              </Remark>
+            )}
+            {solution && map && (
+              <AnswersPanel
+                inputs={inputs}
+                solution={solution}
+                data={data}
+                scale={scale}
+                chosen={chosen}
+                onChoose={setWindow}
+                reaches={map.reaches}
+                chooseReagents={<ChooseReagents preset={inputs.preset} value={reagents} onChange={choose} />}
+                procedures={draft.procedures}
+                onProcedure={draft.nameProcedure}
+              />
+            )}
+          </>
+        }
+      />
+      <Dialogs
+        open={dialog}
+        onOpen={setDialog}
+        plan={plan}
+        draft={draft}
+        unconfirmed={unconfirmed}
+        frozen={frozen !== null}
+        onRestore={restore}
+      />
+    </AskingContext>
+  );
+}

@@ -1,0 +1,91 @@
+import type { Limit, Window } from "../../../../shared/solution";
+import { SpeciesName } from "../../../components/Formula";
+import { Term } from "../../../components/Help";
+import { SectionHead } from "../../../components/text";
+import { fixed, withUnit } from "../../../lib/format";
+import type { PotentialScale } from "../../../lib/potential";
+import { type LimitSentence, limitSentences, type Naming } from "../model/limitWords";
+import { Reaction } from "./Reaction";
+
+/** Each way out of the window: what happens there, by which reaction, and how far it is. */
+export function LimitsBlock({
+  window,
+  name,
+  band,
+  naming,
+  scale,
+}: {
+  window: Window;
+  name: string;
+  band: { pH: number; Eh: number };
+  naming: Naming;
+  scale: PotentialScale;
+}) {
+  return (
+    <section aria-label={`What shuts window ${name}`} className="mt-4">
+      <SectionHead aside={<Term word="windowLimit">limits</Term>}>What shuts window {name}</SectionHead>
+      <ul>
+        {limitSentences(window, band, naming).map((sentence) => (
+          <Sentence key={`${sentence.side} ${sentence.what}`} sentence={sentence} scale={scale} />
+        ))}
+      </ul>
+    </section>
+  );
+}
+
+function Sentence({ sentence, scale }: { sentence: LimitSentence; scale: PotentialScale }) {
+  const { side, what, limit, others } = sentence;
+  const further = others.filter((o) => o.reaction !== limit.reaction);
+  return (
+    <li className="hairline py-1">
+      <div className="flex items-baseline justify-between gap-3">
+        <span>
+          <b>{side}</b> {what}
+        </span>
+        <Distance sentence={sentence} scale={scale} />
+      </div>
+      <Why limit={limit} />
+      {further.length > 0 && (
+        <details className="text-sm text-muted">
+          <summary className="w-fit">
+            and {further.length === 1 ? "one more reaction" : `${further.length} more reactions`} on this side
+          </summary>
+          {further.map((other) => (
+            <Why key={`${other.reaction ?? ""}${other.from.join()}`} limit={other} />
+          ))}
+        </details>
+      )}
+    </li>
+  );
+}
+
+function Distance({ sentence: { distance, axis, bands }, scale }: { sentence: LimitSentence; scale: PotentialScale }) {
+  const text =
+    distance === null
+      ? withUnit(fixed(bands, 1), "bands")
+      : axis === "pH"
+        ? withUnit(fixed(distance, 2), "pH")
+        : withUnit(fixed(scale.differenceToShown(distance), scale.digits), scale.unit);
+  return (
+    <span
+      className="shrink-0 font-mono whitespace-nowrap"
+      title={distance === null ? "nearest way, counted in control bands" : `${fixed(bands, 1)} control bands away`}
+    >
+      {text}
+    </span>
+  );
+}
+
+function Why({ limit }: { limit: Limit }) {
+  return (
+    <div className="text-sm text-muted">
+      {limit.reactionTerms ? (
+        <Reaction terms={limit.reactionTerms} />
+      ) : limit.inside && limit.outside ? (
+        <>
+          <SpeciesName id={limit.inside} /> <span className="font-mono">→</span> <SpeciesName id={limit.outside} />
+        </>
+      ) : null}
+    </div>
+  );
+}

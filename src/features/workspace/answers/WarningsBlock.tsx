@@ -1,0 +1,32 @@
+import type { SolutionWarning } from "../../../../shared/solution";
+import { SpeciesName } from "../../../components/Formula";
+import { FormulaText } from "../../../components/FormulaText";
+import { SectionHead } from "../../../components/text";
+
+const heads: Readonly<Record<SolutionWarning["code"], string>> = {
+  TEMPERATURE_TRUST: "beyond its trusted temperature",
+  LIGAND_DRAWN_DOWN: "a ligand would be drawn down",
+  METASTABLE: "metastable",
+  KINETICS: "slow",
+  SATURATION_PRESSURE: "under pressure",
+};
+
+/** What to know before trusting the picture. */
+export function WarningsBlock({ warnings }: { warnings: readonly SolutionWarning[] }) {
+  if (warnings.length === 0) return null;
+  return (
+    <section aria-label="Before you trust this" className="mt-4">
+      <SectionHead>Before you trust this</SectionHead>
+      <ul>
+        {warnings.map((w, i) => (
+          <li key={i} className="hairline py-1 text-sm">
+            <b>{w.species ? <SpeciesName id={w.species} withPhase /> : (w.metal ?? "The plan")}</b>, {heads[w.code]}:{" "}
+            <span className="text-muted">
+              <FormulaText text={w.text} />
+            </span>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+}

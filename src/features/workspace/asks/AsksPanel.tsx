@@ -1,0 +1,29 @@
+import type { LayerName, Layers } from "../../../map/view";
+import { LayersSection } from "./LayersSection";
+import { LixiviantSection } from "./LixiviantSection";
+import { MetalsSection } from "./MetalsSection";
+import { BandsSection, FrameSection, TemperatureSection, WaterSection } from "./SheetSections";
+import { SolidsSection } from "./SolidsSection";
+
+/** The left side: everything the plan asks, and what the map shows of it. */
+export function AsksPanel(props: {
+  layers: Layers;
+  onLayer: (name: LayerName, on: boolean) => void;
+  plain: boolean;
+  onPlain: (plain: boolean) => void;
+}) {
+  return (
+    <>
+      <MetalsSection />
+      <LixiviantSection />
+      <TemperatureSection />
+      <SolidsSection />
+      <FrameSection />
+      <WaterSection />
+      <BandsSection />
+      <div className="no-print">
+        <LayersSection {...props} />
+      </div>
+    </>
+  );
+}

@@ -1,0 +1,115 @@
+import { useState } from "react";
+import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
+import { Button } from "../../../components/Button";
+import { Dialog } from "../../../components/Dialog";
+import { ErrorNote } from "../../../components/status";
+import { TextArea } from "../../../components/TextField";
+import { Note, Row } from "../../../components/text";
+import { ApiFailure } from "../../../lib/failure";
+import { planChanges } from "../../../lib/planChanges";
+import { useSaveRevision } from "../../../lib/plans";
+import type { DraftInHand } from "../model/useDraft";
+
+const LONGEST = 500;
+
+/** Asks for a note and shows what the revision will change, then saves the inputs in hand. */
+export function SaveDialog({
+  plan,
+  draft,
+  open,
+  onOpenChange,
+  unconfirmed,
+}: {
+  plan: PlanRow;
+  draft: DraftInHand;
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  /** cautions that ask for a procedure nobody has named */
+  unconfirmed: readonly string[];
+}) {
+  const [note, setNote] = useState("");
+  const save = useSaveRevision();
+  const { inputs, procedures } = draft;
+  const changes = planChanges(plan.latest.inputs, inputs);
+  const named = Object.entries(procedures).filter(([, p]) => p.trim() !== "");
+  const procedureNote = named.map(([code, p]) => `${code} under procedure ${p.trim()}.`).join(" ");
+  const whole = [note.trim(), procedureNote].filter((part) => part !== "").join(" ");
+  const stale = save.error instanceof ApiFailure && (save.error.status === 412 || save.error.status === 409);
+
+  function run(overtake: boolean) {
+    save.mutate(
+      { planId: plan.id, note: whole, inputs, ...(overtake ? {} : { version: plan.version }) },
+      {
+        onSuccess: (revision: RevisionRow) => {
+          draft.saved(revision);
+          setNote("");
+          onOpenChange(false);
+        },
+      },
+    );
+  }
+
+  return (
+    <Dialog
+      open={open}
+      onOpenChange={(next) => {
+        if (!next) save.reset();
+        onOpenChange(next);
+      }}
+      title={`Save revision ${plan.latest.number + 1}`}
+      description="A revision freezes these inputs and the chemistry data they were solved with."
+      footer={
+        <>
+          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
+          {stale && <Button onClick={() => run(true)}>Save on top of it</Button>}
+          <Button
+            kind="primary"
+            type="submit"
+            form="save-revision"
+            disabled={save.isPending || changes.length === 0 || whole.length > LONGEST}
+          >
+            {save.isPending ? "Saving …" : "Save revision"}
+          </Button>
+        </>
+      }
+    >
+      <form
+        id="save-revision"
+        onSubmit={(event) => {
+          event.preventDefault();
+          run(false);
+        }}
+      >
+        <TextArea
+          label="Note"
+          hint="Why: for whoever asks later. It may stay empty."
+          value={note}
+          onChange={(event) => setNote(event.target.value)}
+          error={whole.length > LONGEST ? `${whole.length} characters; at most ${LONGEST}` : null}
+        />
+      </form>
+      {procedureNote !== "" && <Note className="mt-1">The note will also say: {procedureNote}</Note>}
+      {unconfirmed.length > 0 && (
+        <p className="mt-1 text-sm text-signal">
+          {unconfirmed.join(", ")}: no procedure is named for this set point. It can be saved; the caution stays.
+        </p>
+      )}
+      <div className="mt-3">
+        {changes.length === 0 ? (
+          <Note>Nothing has changed since revision {plan.latest.number}.</Note>
+        ) : (
+          changes.map(({ what, from, to }) => (
+            <Row key={what} label={what}>
+              <span className="font-sans text-sm">
+                <span className="text-muted">{from ?? "not there"}</span>
+                <span className="mx-1 font-mono">→</span>
+                {to ?? "taken out"}
+              </span>
+            </Row>
+          ))
+        )}
+      </div>
+      {save.error && <ErrorNote className="mt-3" doing="Not saved; nothing is lost" error={save.error} />}
+    </Dialog>
+  );
+}

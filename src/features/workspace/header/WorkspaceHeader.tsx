@@ -1,0 +1,148 @@
+import { Link } from "react-router-dom";
+import type { PlanRow } from "../../../../shared/schemas/plan";
+import { Button } from "../../../components/Button";
+import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../../components/Menu";
+import { Status } from "../../../components/status";
+import { fullTime, savedAt } from "../../../lib/format";
+import type { DraftInHand } from "../model/useDraft";
+
+export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv";
+
+export interface HeaderProps {
+  plan: PlanRow;
+  draft: DraftInHand;
+  mayWrite: boolean;
+  /** a word on the export that runs or failed */
+  exporting: { text: string; bad: boolean } | null;
+  onExport: (kind: ExportKind) => void;
+  onOpen: (dialog: "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys") => void;
+}
+
+/** The plan's name, what is saved of it and what is not, and the commands that concern the whole. */
+export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, onOpen }: HeaderProps) {
+  const { latest } = plan;
+  return (
+    <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5">
+      <h1 className="text-lg">{plan.name}</h1>
+      <p className="min-w-0 text-sm text-muted" title={`${fullTime(latest.createdAt)} by ${latest.author}`}>
+        revision {latest.number}, saved {savedAt(latest.createdAt)} by {latest.author}
+        {plan.invented && ", invented data"}
+        {plan.archived && <b>, archived</b>}
+      </p>
+      <Unsaved plan={plan} draft={draft} mayWrite={mayWrite} />
+      {exporting && <Status tone={exporting.bad ? "bad" : "quiet"}>{exporting.text}</Status>}
+      <span className="flex-1" />
+      <span className="no-print flex gap-2">
+        <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl Z">
+          Undo
+        </Button>
+        <Button disabled={!draft.canRedo} onClick={draft.redo} title="Ctrl Shift Z">
+          Redo
+        </Button>
+        <Button onClick={() => onOpen("revisions")} title="r">
+          Revisions
+        </Button>
+        {mayWrite && (
+          <Button kind="primary" disabled={!draft.changed} onClick={() => onOpen("save")} title="Ctrl S">
+            Save revision
+          </Button>
+        )}
+        <Menu trigger={<Button aria-label="More commands">More</Button>}>
+          {mayWrite && (
+            <>
+              <MenuItem onSelect={() => onOpen("rename")}>Name and description</MenuItem>
+              <MenuItem onSelect={() => onOpen("duplicate")}>Duplicate</MenuItem>
+              <MenuItem onSelect={() => onOpen("archive")}>
+                {plan.archived ? "Take back from the archive" : "Archive"}
+              </MenuItem>
+              <MenuSeparator />
+            </>
+          )}
+          <MenuLabel>Export</MenuLabel>
+          <MenuItem onSelect={() => onExport("png")} note="PNG">
+            Picture of the map
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("svg")} note="SVG">
+            Drawing of the map
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("csv")} note="CSV">
+            Limits of the windows
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("problem")} note="JSON">
+            Problem, for the solver
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("solution")} note="JSON">
+            Solution
+          </MenuItem>
+          <MenuSeparator />
+          <MenuItem onSelect={() => window.print()}>Print</MenuItem>
+          <MenuItem onSelect={() => onOpen("keys")} note="?">
+            Keys
+          </MenuItem>
+        </Menu>
+      </span>
+    </div>
+  );
+}
+
+function Unsaved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "mayWrite">) {
+  if (!draft.changed) return null;
+  const behind = draft.basedOn < plan.latest.number;
+  return (
+    <Status>
+      <b className="text-ink">
+        {mayWrite ? "Unsaved changes" : "Changed here only: your role looks and tries, a metallurgist saves"}
+      </b>
+      {draft.kept
+        ? mayWrite
+          ? ", kept in this browser"
+          : ""
+        : ", and this browser keeps nothing when the page closes"}
+      {behind && `; revision ${plan.latest.number} was saved since you began from ${draft.basedOn}`}
+      {" · "}
+      <button
+        type="button"
+        className="no-print underline decoration-rule underline-offset-4 hover:decoration-ink"
+        onClick={() => draft.take(plan.latest)}
+      >
+        go back to revision {plan.latest.number}
+      </button>
+    </Status>
+  );
+}
+
+/** Over a frozen revision: what it is, and the two ways on. */
+export function FrozenBanner({
+  plan,
+  number,
+  author,
+  createdAt,
+  note,
+  dataVersion,
+  onRestore,
+}: {
+  plan: PlanRow;
+  number: number;
+  author: string;
+  createdAt: string;
+  note: string;
+  dataVersion: string;
+  onRestore: () => void;
+}) {
+  return (
+    <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-ink bg-sheet px-5 py-1.5">
+      <h1 className="text-lg">{plan.name}</h1>
+      <p className="min-w-0 flex-1 text-sm">
+        <b>Revision {number} as it was saved</b>, {savedAt(createdAt)} by {author}, solved with chemistry data{" "}
+        <span className="font-mono">{dataVersion.slice(0, 12)}</span>. Nothing changes here.
+        {note !== "" && <span className="text-muted"> {note}</span>}
+      </p>
+      <span className="no-print flex gap-2">
+        <Button onClick={onRestore}>Restore as draft</Button>
+        <Link to={`/plans/${plan.id}`} className="self-center text-sm underline underline-offset-4">
+          Back to the plan
+        </Link>
+      </span>
+    </div>
+  );
+}

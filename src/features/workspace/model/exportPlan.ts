@@ -1,0 +1,64 @@
+import type { PlanInputs, PlanRow } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Solution } from "../../../../shared/solution";
+import { toCsv } from "../../../lib/csv";
+import { celsius, significant } from "../../../lib/format";
+import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
+import { captionedFigure, mapPicture } from "../../../map/picture";
+import type { ExportKind } from "../header/WorkspaceHeader";
+import { fileStem, limitsTable } from "./exports";
+import { saveFile, saveJson } from "./saveFile";
+import type { MapModel } from "./useMapModel";
+
+export interface Exported {
+  plan: Pick<PlanRow, "name" | "invented">;
+  /** "revision 3" or "draft on revision 3" */
+  state: string;
+  inputs: PlanInputs;
+  problem: Problem;
+  solution: Solution;
+  model: MapModel;
+  dataVersion: string;
+}
+
+/** What a picture rests on: data, temperature, activities, basis; and whether it is invented. */
+export function captionLines({ plan, state, inputs, solution, model, dataVersion }: Exported): string[] {
+  const metals = solution.metals.map(({ metal, activity }) => {
+    const line = inputs.metals.find((m) => m.element === metal);
+    const asks = line
+      ? `${line.role === "watched" ? "watched" : requirementWord[line.requirement]}, ${amountWord(line)} `
+      : "";
+    return `${metal} ${asks}${significant(activity)}`;
+  });
+  const totals = [...inputs.ligands, ...inputs.others].map((c) => `${c.component} ${significant(c.activity)}`);
+  return [
+    `${state}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
+    `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (total activities ${totals.join(", ")})` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
+    `activities: ${metals.join("; ")}`,
+    `Eh vs ${model.view.scale.short}. What can happen, not how fast. Screening only.`,
+  ];
+}
+
+/** Writes one export as a file. */
+export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
+  const stem = fileStem(e.plan.name);
+  switch (kind) {
+    case "problem":
+      return saveJson(`${stem}-problem.json`, e.problem);
+    case "solution":
+      return saveJson(`${stem}-solution.json`, e.solution);
+    case "csv": {
+      const { header, rows } = limitsTable(e.solution.windows, e.inputs.controlBand);
+      // The mark in front makes spreadsheets read UTF-8.
+      return saveFile(
+        `${stem}-limits.csv`,
+        new Blob(["\ufeff", toCsv(header, rows)], { type: "text/csv;charset=utf-8" }),
+      );
+    }
+    case "png":
+    case "svg": {
+      const figure = captionedFigure(e.model.content, e.model.view, e.plan.name, captionLines(e));
+      return saveFile(`${stem}-map.${kind}`, await mapPicture(figure, e.model.view, kind));
+    }
+  }
+}

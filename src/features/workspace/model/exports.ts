@@ -1,0 +1,71 @@
+import { electrodeSeries } from "../../../../shared/electrodes/series";
+import type { Solution, Window } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { windowName } from "../../../map/view";
+import { type Naming, sideOf } from "./limitWords";
+
+/** A name for files: letters, digits and hyphens. */
+export const fileStem = (name: string): string =>
+  name
+    .toLowerCase()
+    .replace(/[^a-z0-9]+/g, "-")
+    .replace(/^-|-$/g, "") || "plan";
+
+export const namingOf = (data: ChemicalData, solution: Pick<Solution, "fields">): Naming => {
+  const states = new Map(solution.fields.map((f) => [`${f.metal} ${f.species}`, f.state]));
+  return {
+    metalName: (element) => data.tables.elements.find((e) => e.symbol === element)?.name ?? element,
+    stateOf: (metal, species) => states.get(`${metal} ${species}`),
+  };
+};
+
+const header = [
+  "window",
+  "kind",
+  "side",
+  "metal",
+  "inside",
+  "outside",
+  "reaction",
+  "from_pH",
+  "from_Eh_V_SHE",
+  "to_pH",
+  "to_Eh_V_SHE",
+  "distance_bands",
+  "distance_pH",
+  "distance_Eh_V",
+] as const;
+
+/** Every limit of every window as a table; potentials in V vs SHE whatever the screen shows. */
+export function limitsTable(
+  windows: readonly Window[],
+  band: { pH: number; Eh: number },
+): { header: string[]; rows: (string | number | null)[][] } {
+  return {
+    header: [...header],
+    rows: windows.flatMap((window, i) =>
+      window.limits.map((l) => [
+        windowName(i),
+        l.kind,
+        l.kind === "metal" ? sideOf(l, band) : (l.side ?? sideOf(l, band)),
+        l.metal ?? null,
+        l.inside ?? null,
+        l.outside ?? null,
+        l.reaction ?? null,
+        l.from[0],
+        l.from[1],
+        l.to[0],
+        l.to[1],
+        l.distance,
+        l.distancePH,
+        l.distanceEh,
+      ]),
+    ),
+  };
+}
+
+/** The electrode a reading is quoted for where the screen itself is on SHE: the common 3 M Ag/AgCl, else the first. */
+export function usualProbe(data: ChemicalData) {
+  const all = electrodeSeries(data.tables);
+  return all.find((s) => s.id === "AGCL-3M") ?? all[0];
+}

@@ -1,0 +1,132 @@
+import type { Limit, Point, SetPoint, State, Window } from "../../../../shared/solution";
+
+export type Side = "low pH" | "high pH" | "low Eh" | "high Eh";
+
+export interface LimitSentence {
+  side: Side;
+  /** "iron dissolves": what happens beyond */
+  what: string;
+  /** along the side's own axis where the line through the set point meets the limit; V or pH */
+  distance: number | null;
+  axis: "pH" | "Eh";
+  /** counted in control bands */
+  bands: number;
+  limit: Limit;
+  /** further stretches of the same side and verb, with reactions of their own */
+  others: Limit[];
+}
+
+/** Which side of the window a limit closes: its outward normal, weighed in control bands. */
+export function sideOf(limit: Pick<Limit, "line">, band: { pH: number; Eh: number }): Side {
+  const [, x, y] = limit.line;
+  // k + x pH + y Eh is positive inside, so the way out is (-x, -y).
+  const [u, v] = [-x * band.pH, -y * band.Eh];
+  if (Math.abs(u) >= Math.abs(v)) return u > 0 ? "high pH" : "low pH";
+  return v > 0 ? "high Eh" : "low Eh";
+}
+
+const electrons = (limit: Limit): number =>
+  limit.reactionTerms?.find((t) => t.species === "e^-" || t.formula === "e^-")?.coefficient ?? 0;
+
+/** What the metal does when the limit is passed. */
+function verb(inside: State | undefined, outside: State | undefined, limit: Limit, side: Side): string {
+  const moves = electrons(limit) !== 0;
+  if (outside === "dissolved") {
+    if (inside === "dissolved")
+      return moves ? (side === "low Eh" ? "is reduced" : "is oxidised") : "changes its complex";
+    if (!moves) return "dissolves";
+    return side === "low Eh"
+      ? "is reduced and dissolves"
+      : side === "high Eh"
+        ? "is oxidised and dissolves"
+        : "dissolves";
+  }
+  if (outside === "metal") return "goes to metal";
+  if (inside === "metal") return side === "low Eh" ? "turns to a compound" : "is oxidised to a compound";
+  return inside === "dissolved" ? "precipitates" : "changes its compound";
+}
+
+export interface Naming {
+  /** element → its name in words: "zinc" */
+  metalName: (element: string) => string;
+  stateOf: (metal: string, species: string) => State | undefined;
+}
+
+function what(limit: Limit, side: Side, { metalName, stateOf }: Naming): string {
+  switch (limit.kind) {
+    case "water":
+      return limit.side === "hydrogen" ? "water gives hydrogen" : "water gives oxygen";
+    case "frame":
+      return "the frame ends here, not the window";
+    case "hazard":
+      return "a hazard is kept out";
+    case "metal": {
+      const metal = limit.metal ?? "";
+      const state = (species: string | undefined) => (species === undefined ? undefined : stateOf(metal, species));
+      return `${metalName(metal)} ${verb(state(limit.inside), state(limit.outside), limit, side)}`;
+    }
+  }
+}
+
+/** What shuts a window, one sentence a side and verb, nearest first; the frame comes last, since it shuts nothing. */
+export function limitSentences(window: Window, band: { pH: number; Eh: number }, naming: Naming): LimitSentence[] {
+  const bySentence = new Map<string, LimitSentence>();
+  const near = [...window.limits].sort((a, b) => a.distance - b.distance);
+  for (const limit of near) {
+    const side = sideOf(limit, band);
+    const words = what(limit, side, naming);
+    const known = bySentence.get(`${side} ${words}`);
+    if (known) {
+      known.others.push(limit);
+      continue;
+    }
+    const axis = side.endsWith("pH") ? "pH" : "Eh";
+    bySentence.set(`${side} ${words}`, {
+      side,
+      what: words,
+      axis,
+      distance: along(window.limits, side, words, axis, band, naming, limit),
+      bands: limit.distance,
+      limit,
+      others: [],
+    });
+  }
+  const all = [...bySentence.values()];
+  return [...all.filter((s) => s.limit.kind !== "frame"), ...all.filter((s) => s.limit.kind === "frame")];
+}
+
+/** The way along the axis to the nearest stretch of this sentence that lies straight ahead. */
+function along(
+  limits: readonly Limit[],
+  side: Side,
+  words: string,
+  axis: "pH" | "Eh",
+  band: { pH: number; Eh: number },
+  naming: Naming,
+  first: Limit,
+): number | null {
+  const ahead = limits
+    .filter((l) => l === first || (sideOf(l, band) === side && what(l, side, naming) === words))
+    .map((l) => (axis === "pH" ? l.distancePH : l.distanceEh))
+    .filter((d) => d !== null)
+    .map(Math.abs);
+  return ahead.length > 0 ? Math.min(...ahead) : null;
+}
+
+/** The potentials a window allows on the line through its set point. */
+export function allowedEh(window: Window): [number, number] {
+  const { pH, Eh } = window.setPoint;
+  const crossings: number[] = [];
+  for (const { outer, holes } of window.polygons)
+    for (const ring of [outer, ...holes])
+      ring.forEach(([x0, y0], i) => {
+        const [x1, y1] = ring[(i + 1) % ring.length] as Point;
+        if (x0 > pH !== x1 > pH) crossings.push(y0 + ((pH - x0) / (x1 - x0)) * (y1 - y0));
+      });
+  const above = crossings.filter((v) => v >= Eh);
+  const below = crossings.filter((v) => v <= Eh);
+  return [below.length > 0 ? Math.max(...below) : window.Eh[0], above.length > 0 ? Math.min(...above) : window.Eh[1]];
+}
+
+/** How the margin reads: bands of pH alone where Eh is a mixed potential. */
+export const marginWords = (setPoint: SetPoint): string => (setPoint.mixedPotential ? "bands of pH" : "control bands");

@@ -1,0 +1,73 @@
+import { useMemo } from "react";
+import { type Reach, reachAt } from "../../../../shared/reach/reach";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Point, Solution } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import type { PotentialScale } from "../../../lib/potential";
+import type { ThemeColours } from "../../../lib/theme";
+import { type MapContent, mapContent } from "../../../map/content";
+import type { Layers, MapMetal, MapView } from "../../../map/view";
+import { useOtherBasis } from "./useSolved";
+
+export interface MapModel {
+  content: MapContent;
+  view: Omit<MapView, "visible">;
+  metals: readonly MapMetal[];
+  reaches: readonly Reach[];
+  /** the point the crosscuts run through */
+  through: Point;
+}
+
+interface Wishes {
+  inputs: PlanInputs;
+  problem: Problem;
+  /** null before any answer */
+  solution: Solution | null;
+  data: ChemicalData;
+  scale: PotentialScale;
+  colours: ThemeColours;
+  layers: Layers;
+  plain: boolean;
+  focus: string | null;
+  chosen: number;
+  pinned: Point | null;
+  reagents: readonly string[];
+}
+
+const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
+
+/** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
+export function useMapModel(w: Wishes): MapModel | null {
+  const { inputs, problem, solution, data, scale, colours, layers, plain, focus, chosen, pinned, reagents } = w;
+  const { metals: planMetals, controlBand, preset } = inputs;
+  const frame = solution?.frame ?? inputs.frame;
+  const temperatureC = solution?.temperatureC ?? inputs.temperatureC;
+  const other = useOtherBasis(problem, data, layers.otherBasis && !plain);
+  const setPoint = solution?.windows[chosen]?.setPoint ?? null;
+  const metals = useMemo(
+    () => planMetals.map(({ element, role, requirement }) => ({ element, role, requirement })),
+    [planMetals],
+  );
+  const through = useMemo(
+    (): Point => pinned ?? (setPoint ? [setPoint.pH, setPoint.Eh] : [middle(frame.pH), middle(frame.Eh)]),
+    [pinned, setPoint, frame],
+  );
+  const reaches = useMemo(
+    () => reachAt(reagents, preset, through[0], temperatureC),
+    [reagents, preset, through, temperatureC],
+  );
+  const cyanide = inputs.ligands.some((l) => l.component === "CN");
+  const content = useMemo(
+    () => solution && mapContent({ metals, solution, other, through, reaches, cyanide }),
+    [metals, solution, other, through, reaches, cyanide],
+  );
+  const view = useMemo(
+    () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
+    [metals, frame, controlBand, scale, colours, plain, focus, layers, chosen],
+  );
+  return useMemo(
+    () => content && { content, view, metals, reaches, through },
+    [content, view, metals, reaches, through],
+  );
+}

@@ -1,0 +1,52 @@
+import { useMemo, useState } from "react";
+import type { Failure, Outcome } from "../../../../shared/outcome";
+import { toProblem } from "../../../../shared/plan/toProblem";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Solution } from "../../../../shared/solution";
+import { solve } from "../../../../shared/solve";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+
+export interface Solved {
+  problem: Problem;
+  /** of these inputs, or the last that could be solved while these cannot; null before any could */
+  solution: Solution | null;
+  failure: Failure | null;
+}
+
+/** Keeps the last answer that was one, so that a slip of the hand does not empty the screen. */
+class LastGood {
+  private solution: Solution | null = null;
+  take(outcome: Outcome<Solution>): Solution | null {
+    if (outcome.ok) this.solution = outcome.value;
+    return this.solution;
+  }
+}
+
+/** Solves the plan in hand, at once and here: some milliseconds, so there is nothing to wait for. */
+export function useSolved(inputs: PlanInputs, data: ChemicalData): Solved {
+  const [last] = useState(() => new LastGood());
+  return useMemo(() => {
+    const problem = toProblem(inputs, data);
+    const outcome = solve(problem, data, { shutGround: true });
+    return { problem, solution: last.take(outcome), failure: outcome.ok ? null : outcome.error };
+  }, [inputs, data, last]);
+}
+
+export type Basis = PlanInputs["solidsBasis"];
+/** The basis whose edge is drawn thin beside the one in force. */
+export const otherBasisOf = (basis: Basis): Basis => (basis === "aged" ? "fresh" : "aged");
+
+/** The same question on the other solids basis; null where it has no answer. */
+export function useOtherBasis(
+  problem: Problem,
+  data: ChemicalData,
+  wanted: boolean,
+): { basis: Basis; solution: Solution } | null {
+  return useMemo(() => {
+    if (!wanted) return null;
+    const basis = otherBasisOf(problem.solidsBasis ?? "fresh");
+    const outcome = solve({ ...problem, solidsBasis: basis }, data);
+    return outcome.ok ? { basis, solution: outcome.value } : null;
+  }, [problem, data, wanted]);
+}

@@ -1,0 +1,78 @@
+import { speciesAt } from "../../shared/setpoint/crosscut";
+import type { Point, Solution } from "../../shared/solution";
+import { SpeciesName } from "../components/Formula";
+import { MetalName } from "../components/MetalLine";
+import { classes } from "../lib/classes";
+import { fixed } from "../lib/format";
+import type { PotentialScale } from "../lib/potential";
+import { type CursorStore, useCursor } from "./cursor";
+import type { MapMetal } from "./view";
+
+/** Names every metal's species at the cursor, in one fixed place; without a cursor, at the point the crosscuts run through. */
+export function ReadOut({
+  store,
+  solution,
+  metals,
+  scale,
+  rest,
+}: {
+  store: CursorStore;
+  solution: Solution;
+  metals: readonly MapMetal[];
+  scale: PotentialScale;
+  /** what is read while nobody points at the map */
+  rest: { at: Point; words: string } | null;
+}) {
+  const cursor = useCursor(store);
+  const at = cursor ?? rest?.at ?? null;
+  const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
+  const shut = here && metals.some((m) => here.get(m.element)?.fulfilled === false);
+  return (
+    <div
+      role="status"
+      aria-label="Read-out"
+      aria-live={cursor ? "off" : "polite"}
+      className="flex min-h-11 flex-wrap items-baseline gap-x-4 text-sm"
+      data-testid="read-out"
+    >
+      {at ? (
+        <>
+          <span className="font-mono whitespace-nowrap">
+            pH {fixed(at[0], 2)}
+            <span className="mx-2">{scale.format(at[1])}</span>
+            <span className="text-muted">vs {scale.short}</span>
+          </span>
+          <span className="text-muted">
+            {cursor ? "under the cursor" : rest?.words}
+            {shut !== null && <>: {shut ? "shut" : "open"}</>}
+          </span>
+          <span className="flex basis-full flex-wrap gap-x-4">
+            {metals.map((metal) => {
+              const found = here?.get(metal.element);
+              return (
+                <span key={metal.element} className="whitespace-nowrap">
+                  <MetalName {...metal} />{" "}
+                  {found ? (
+                    <span
+                      className={classes(
+                        !found.fulfilled && "underline decoration-wavy decoration-1 underline-offset-2",
+                      )}
+                    >
+                      <SpeciesName id={found.species} withPhase />
+                    </span>
+                  ) : (
+                    <span className="text-muted">off the map</span>
+                  )}
+                </span>
+              );
+            })}
+          </span>
+        </>
+      ) : (
+        <span className="text-muted">
+          Point at the map, or press an arrow key on it, to read every metal’s species.
+        </span>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,112 @@
+import { describe, expect, test } from "vitest";
+import type { Limit } from "../../../shared/solution";
+import { allowedEh, limitSentences, sideOf } from "../../../src/features/workspace/model/limitWords";
+import { window as fixture } from "../map/fixture";
+
+const band = { pH: 0.15, Eh: 0.03 };
+const naming = {
+  metalName: (e: string) => ({ Zn: "zinc", Fe: "iron", Cu: "copper" })[e] ?? e,
+  stateOf: (_: string, species: string) =>
+    species.endsWith("(aq)")
+      ? ("dissolved" as const)
+      : species === "Cu(s)"
+        ? ("metal" as const)
+        : ("compound" as const),
+};
+const limit = (parts: Partial<Limit>): Limit => ({
+  kind: "metal",
+  line: [0, 1, 0],
+  from: [4, 0.3],
+  to: [4, 0.8],
+  distance: 6,
+  distancePH: null,
+  distanceEh: null,
+  ...parts,
+});
+const words = (...limits: Limit[]) =>
+  limitSentences({ ...fixture, limits }, band, naming).map(
+    (s) => `${s.side}: ${s.what}, ${s.distance?.toFixed(2) ?? "-"} ${s.axis}`,
+  );
+const electron = (coefficient: number) => [{ species: "e^-", formula: "e^-", coefficient }];
+
+describe("the side of a limit", () => {
+  test("is where its outward normal points, weighed in control bands", () => {
+    expect(sideOf({ line: [-4, 1, 0] }, band)).toBe("low pH");
+    expect(sideOf({ line: [6, -1, 0] }, band)).toBe("high pH");
+    expect(sideOf({ line: [1, 0, -1] }, band)).toBe("high Eh");
+    // 0.2 V a pH unit: one band of pH moves the line by 30 mV, one band of Eh; steeper counts as a pH side
+    expect(sideOf({ line: [-1, 0.19, 1] }, band)).toBe("low Eh");
+    expect(sideOf({ line: [-1, 0.21, 1] }, band)).toBe("low pH");
+  });
+});
+
+describe("what happens there, in words", () => {
+  test("iron dissolves at low pH and is reduced at low Eh; zinc precipitates at high pH", () => {
+    expect(
+      words(
+        limit({ metal: "Fe", inside: "Fe(OH)3(s,ferrihydrite)", outside: "Fe(SO4)2^-(aq)", distancePH: -1.03 }),
+        limit({ metal: "Zn", inside: "ZnSO4(aq)", outside: "ZnO(s)", line: [6, -1, 0], distancePH: 1.06 }),
+        limit({
+          metal: "Fe",
+          inside: "Fe(OH)3(s,ferrihydrite)",
+          outside: "FeSO4(aq)",
+          line: [-1, 0.19, 1],
+          distanceEh: -0.29,
+          reactionTerms: electron(-1),
+        }),
+      ),
+    ).toEqual([
+      "low pH: iron dissolves, 1.03 pH",
+      "high pH: zinc precipitates, 1.06 pH",
+      "low Eh: iron is reduced and dissolves, 0.29 Eh",
+    ]);
+  });
+  test("a cemented metal goes back into solution when it is oxidised", () =>
+    expect(
+      words(
+        limit({
+          metal: "Cu",
+          inside: "Cu(s)",
+          outside: "CuSO4(aq)",
+          line: [0.3, 0, -1],
+          distanceEh: 0.2,
+          reactionTerms: electron(2),
+        }),
+      ),
+    ).toEqual(["high Eh: copper is oxidised and dissolves, 0.20 Eh"]));
+  test("a dissolved metal goes to metal", () =>
+    expect(
+      words(limit({ metal: "Cu", inside: "CuSO4(aq)", outside: "Cu(s)", line: [-0.2, 0, 1], distanceEh: -0.1 })),
+    ).toEqual(["low Eh: copper goes to metal, 0.10 Eh"]));
+  test("water and frame say what they are, and the frame comes last", () =>
+    expect(
+      words(
+        limit({ kind: "frame", side: "low pH", distance: 1 }),
+        limit({ kind: "water", side: "oxygen", line: [1, -0.06, -1], distance: 4, distanceEh: 0.15 }),
+      ),
+    ).toEqual(["high Eh: water gives oxygen, 0.15 Eh", "low pH: the frame ends here, not the window, - pH"]));
+  test("stretches of one side and verb make one sentence with the nearest reaction first", () => {
+    const near = limit({
+      metal: "Fe",
+      inside: "FeOOH(s)",
+      outside: "Fe^3+(aq)",
+      distance: 3,
+      reaction: "a",
+      distancePH: -1,
+    });
+    const far = limit({ metal: "Fe", inside: "FeOOH(s)", outside: "FeSO4^+(aq)", distance: 8, reaction: "b" });
+    const [sentence, ...rest] = limitSentences({ ...fixture, limits: [far, near] }, band, naming);
+    expect(rest).toEqual([]);
+    expect(sentence!.limit).toBe(near);
+    expect(sentence!.others).toEqual([far]);
+  });
+});
+
+describe("potentials a window allows at its set point", () => {
+  test("run from edge to edge on the line through it", () => expect(allowedEh(fixture)).toEqual([0, 1]));
+  test("stop at a hole above or below", () => {
+    const at = (Eh: number) => allowedEh({ ...fixture, setPoint: { ...fixture.setPoint, pH: 3, Eh } });
+    expect(at(0.2)).toEqual([0, 0.4]);
+    expect(at(0.9)).toEqual([0.6, 1]);
+  });
+});
