@@ -11,7 +11,7 @@ export default tseslint.config(
   { ignores: ["dist/", "data/", "coverage/", "node_modules/", "test-results/", "drizzle/"] },
   tseslint.configs.recommendedTypeChecked,
   {
-    languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
+    languageOptions: { parserOptions: { project: "./tsconfig.json", tsconfigRootDir: import.meta.dirname } },
     rules: {
       "@typescript-eslint/consistent-type-imports": "error",
       "@typescript-eslint/no-explicit-any": "error",
