@@ -27,6 +27,7 @@ export function practiceCheck(id: string) {
   return {
     input: (key: string) => number(check.inputs, key),
     list: (key: string) => check.inputs[key] as number[],
+    keys: () => Object.keys(check.expected),
     expected: (key: string) => number(check.expected, key),
     /** allowed difference from an expected value */
     within: (key: string) => check.tolerance.abs ?? (check.tolerance.rel ?? 0) * Math.abs(number(check.expected, key)),
