@@ -16,6 +16,8 @@ const screen = (path: string, load: () => Promise<Screen>): RouteObject => ({
 });
 
 export const router = createBrowserRouter([
+  // Before the gate: whoever follows the link has no account yet.
+  screen("/invitation/:token", () => import("../features/invitation/InvitationPage")),
   {
     path: "/",
     Component: Gate,
@@ -27,6 +29,8 @@ export const router = createBrowserRouter([
       screen("plans/:planId", () => import("../features/workspace/WorkspacePage")),
       screen("chemistry", () => import("../features/chemistry/ChemistryPage")),
       screen("chemistry/:speciesId", () => import("../features/chemistry/ChemistryPage")),
+      screen("members", () => import("../features/members/MembersPage")),
+      screen("mailbox", () => import("../features/mailbox/MailboxPage")),
       screen("*", () => import("./NotFoundPage")),
     ],
   },

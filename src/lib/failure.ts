@@ -1,3 +1,4 @@
+import type { StaleAnswer } from "../../shared/schemas/api";
 import type { ApiError } from "../../shared/schemas/member";
 
 /** A refusal of the server, or the network's silence, as an Error that keeps code and path. */
@@ -10,10 +11,20 @@ export class ApiFailure extends Error {
     /** where in the request, "" when it concerns the whole */
     readonly path: string,
     message: string,
+    /** the whole body of the refusal: a stale write comes with what stands there now */
+    readonly body: unknown = null,
   ) {
     super(message);
   }
 }
+
+/** What a write that came too late is told; null for every other failure. */
+export const staleAnswer = <Row>(error: unknown): StaleAnswer<Row> | null =>
+  error instanceof ApiFailure && error.status === 412 && error.code === "STALE" && hasCurrent(error.body)
+    ? (error.body as StaleAnswer<Row>)
+    : null;
+
+const hasCurrent = (body: unknown) => typeof body === "object" && body !== null && "current" in body;
 
 export const offline = () =>
   new ApiFailure(
@@ -25,7 +36,7 @@ export const offline = () =>
 
 export const fromBody = (status: number, body: unknown): ApiFailure =>
   isApiError(body)
-    ? new ApiFailure(status, body.error.code, body.error.path, body.error.message)
+    ? new ApiFailure(status, body.error.code, body.error.path, body.error.message, body)
     : new ApiFailure(status, "UNEXPECTED", "", `The server answered with status ${status} and no explanation.`);
 
 const isApiError = (body: unknown): body is ApiError =>

@@ -1,31 +1,21 @@
 import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
-import type { Page, planDuplicate, projectCreate, ProjectRow } from "../../shared/schemas/api";
+import type { planDuplicate, projectCreate, ProjectRow } from "../../shared/schemas/api";
 import type { planCreate, planUpdate, PlanRow, revisionCreate, RevisionRow } from "../../shared/schemas/plan";
 import { api } from "./api";
+import { allRows } from "./pages";
 import { keys } from "./queries";
-
-/** All rows of a list route, page after page. */
-async function all<Row>(path: string, signal: AbortSignal): Promise<Row[]> {
-  const rows: Row[] = [];
-  for (;;) {
-    const join = path.includes("?") ? "&" : "?";
-    const page = await api.get<Page<Row>>(`${path}${join}limit=200&offset=${rows.length}`, { signal });
-    rows.push(...page.rows);
-    if (rows.length >= page.total || page.rows.length === 0) return rows;
-  }
-}
 
 export type ArchivedFilter = "false" | "true" | "all";
 
 export const useProjects = () =>
-  useQuery({ queryKey: keys.projects, queryFn: ({ signal }) => all<ProjectRow>("/projects", signal) });
+  useQuery({ queryKey: keys.projects, queryFn: ({ signal }) => allRows<ProjectRow>("/projects", signal) });
 
 export const usePlans = (projectId: string | undefined, archived: ArchivedFilter = "false") =>
   useQuery({
     queryKey: keys.planList(projectId ?? "", archived),
     queryFn: ({ signal }) =>
-      all<PlanRow>(`/plans?projectId=${encodeURIComponent(projectId ?? "")}&archived=${archived}`, signal),
+      allRows<PlanRow>(`/plans?projectId=${encodeURIComponent(projectId ?? "")}&archived=${archived}`, signal),
     enabled: projectId !== undefined,
   });
 
@@ -39,7 +29,7 @@ export const usePlan = (id: string | undefined) =>
 export const useRevisions = (planId: string, enabled = true) =>
   useQuery({
     queryKey: keys.revisions(planId),
-    queryFn: ({ signal }) => all<RevisionRow>(`/plans/${encodeURIComponent(planId)}/revisions`, signal),
+    queryFn: ({ signal }) => allRows<RevisionRow>(`/plans/${encodeURIComponent(planId)}/revisions`, signal),
     enabled,
   });
 

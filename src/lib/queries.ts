@@ -14,6 +14,10 @@ export const keys = {
   plan: (id: string) => ["plans", id] as const,
   revisions: (id: string) => ["plans", id, "revisions"] as const,
   revision: (id: string, number: number) => ["plans", id, "revisions", number] as const,
+  members: ["members"] as const,
+  invitations: ["invitations"] as const,
+  invitation: (token: string) => ["invitation", token] as const,
+  letters: ["letters"] as const,
 };
 
 /** Asking again helps only when the server did not answer or stumbled. */

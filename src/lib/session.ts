@@ -22,6 +22,14 @@ export function useSession(): { user: Member } {
 const may = {
   /** create, change, archive plans and projects */
   writePlans: ["admin", "metallurgist"],
+  /** add a species to the library, override one */
+  editChemistry: ["admin", "metallurgist"],
+  /** feeds and campaigns; approve and reject trials */
+  review: ["admin", "metallurgist"],
+  /** plan and record trials */
+  writeBench: ["admin", "metallurgist", "technician"],
+  /** invite members, change their role, close their account */
+  manageMembers: ["admin"],
 } as const satisfies Record<string, readonly MemberRole[]>;
 
 /** Mirrors the server's roles: a control nobody may use is not shown. The server decides. */

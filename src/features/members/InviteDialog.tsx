@@ -1,0 +1,110 @@
+import { zodResolver } from "@hookform/resolvers/zod";
+import { Controller, useForm } from "react-hook-form";
+import { Link } from "react-router-dom";
+import type { z } from "zod";
+import { invitationCreate } from "../../../shared/schemas/invitation";
+import { Button } from "../../components/Button";
+import { Dialog } from "../../components/Dialog";
+import { Select } from "../../components/Select";
+import { ErrorNote } from "../../components/status";
+import { TextArea, TextField } from "../../components/TextField";
+import { useInvite } from "./members";
+import { roleOptions } from "./memberWords";
+
+interface InviteDialogProps {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+}
+
+/** A letter with a link that opens one account, once. */
+export function InviteDialog(props: InviteDialogProps) {
+  return props.open ? <Invite {...props} /> : null;
+}
+
+function Invite({ open, onOpenChange }: InviteDialogProps) {
+  const invite = useInvite();
+  const form = useForm<z.input<typeof invitationCreate>, unknown, z.output<typeof invitationCreate>>({
+    resolver: zodResolver(invitationCreate),
+    defaultValues: { email: "", role: "technician", message: "" },
+  });
+  const submit = form.handleSubmit((values) => invite.mutate(values));
+  const { errors } = form.formState;
+  if (invite.data) {
+    const { email, mail } = invite.data;
+    return (
+      <Dialog
+        open={open}
+        onOpenChange={onOpenChange}
+        title="Invited"
+        footer={
+          <Button kind="primary" onClick={() => onOpenChange(false)}>
+            Done
+          </Button>
+        }
+      >
+        {mail?.state === "sent" ? (
+          <p>
+            A letter went to <b>{email}</b>. Its link works once.
+          </p>
+        ) : mail?.state === "failed" ? (
+          <ErrorNote
+            doing={`The letter to ${email} was not taken`}
+            error={new Error(`${mail.error ?? "The mail server refused it"}. The invitation stands; send it again.`)}
+          />
+        ) : (
+          <p>
+            No mail server is set up here: the letter to <b>{email}</b> is kept on this server. Read it in the{" "}
+            <Link to="/mailbox">mailbox</Link> and pass the link on; it works once.
+          </p>
+        )}
+      </Dialog>
+    );
+  }
+  return (
+    <Dialog
+      open={open}
+      onOpenChange={onOpenChange}
+      title="Invite a member"
+      description="They get a letter with a link, choose their name and password, and are in. The link works once and expires."
+      footer={
+        <>
+          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
+          <Button type="submit" form="invite" kind="primary" disabled={invite.isPending}>
+            {invite.isPending ? "Sending …" : "Send the letter"}
+          </Button>
+        </>
+      }
+    >
+      <form id="invite" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
+        <TextField
+          label="E-mail"
+          type="email"
+          autoComplete="off"
+          autoFocus
+          error={errors.email && "An e-mail address, such as name@site.example"}
+          {...form.register("email")}
+        />
+        <Controller
+          control={form.control}
+          name="role"
+          render={({ field }) => (
+            <Select
+              label="Role"
+              layout="stacked"
+              value={field.value}
+              onChange={field.onChange}
+              options={roleOptions}
+              hint={roleOptions.find(({ value }) => value === field.value)?.note}
+            />
+          )}
+        />
+        <TextArea
+          label="A line of your own, if you like"
+          error={errors.message && "At most 500 characters"}
+          {...form.register("message")}
+        />
+        {invite.error && <ErrorNote doing="Not invited" error={invite.error} />}
+      </form>
+    </Dialog>
+  );
+}
