@@ -14,7 +14,7 @@ const places = [
 /** The line at the top of every screen: where one is, where one can go, who one is. The screen below fills the rest. */
 export function AppShell() {
   return (
-    <div className="flex min-h-dvh flex-col">
+    <div className="flex h-dvh flex-col print:h-auto">
       <a
         href="#screen"
         className="no-print absolute -top-20 left-2 z-50 border border-ink bg-paper px-3 py-1 focus:top-1"
@@ -45,7 +45,11 @@ export function AppShell() {
         <span className="flex-1" />
         <MemberMenu />
       </header>
-      <main id="screen" tabIndex={-1} className="flex min-h-0 flex-1 flex-col outline-none">
+      <main
+        id="screen"
+        tabIndex={-1}
+        className="flex min-h-0 flex-1 flex-col overflow-y-auto outline-none print:overflow-visible"
+      >
         <Suspense fallback={<Waiting />}>
           <Outlet />
         </Suspense>

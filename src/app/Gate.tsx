@@ -1,9 +1,9 @@
 import { lazy, Suspense } from "react";
 import { ErrorNote } from "../components/status";
-import { SignInPage } from "../features/auth/SignInPage";
 import { useSessionQuery } from "../lib/session";
 import { AppShell, Waiting } from "./AppShell";
 
+const SignInPage = lazy(() => import("../features/auth/SignInPage"));
 const FirstAdminPage = lazy(() => import("../features/firstAdmin/FirstAdminPage"));
 
 /** What stands at any address: the first-admin page, the sign-in, or the screen itself. The address is kept, so that one
@@ -18,12 +18,10 @@ export function Gate() {
       </div>
     );
   }
-  if (data.needsFirstAdmin) {
-    return (
-      <Suspense fallback={<Waiting />}>
-        <FirstAdminPage />
-      </Suspense>
-    );
-  }
-  return data.user ? <AppShell /> : <SignInPage demo={data.demo ?? null} />;
+  if (data.user) return <AppShell />;
+  return (
+    <Suspense fallback={<Waiting />}>
+      {data.needsFirstAdmin ? <FirstAdminPage /> : <SignInPage demo={data.demo ?? null} />}
+    </Suspense>
+  );
 }

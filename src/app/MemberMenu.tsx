@@ -1,6 +1,6 @@
 import { useState } from "react";
 import { Menu, MenuChoice, MenuItem, MenuLabel, MenuSeparator } from "../components/Menu";
-import { PotentialScaleDialog } from "../components/PotentialScale";
+import { PotentialScaleDialog } from "../components/PotentialScaleDialog";
 import { usePotentialScale } from "../lib/potential";
 import { usePreferences } from "../lib/preferences";
 import { useSession, useSignOut } from "../lib/session";

@@ -1,6 +1,9 @@
+import { lazy, Suspense } from "react";
 import { Dialog } from "../components/Dialog";
-import { SignInForm } from "../features/auth/SignInForm";
+import { Loading } from "../components/status";
 import { useSession, useSessionEnded } from "../lib/session";
+
+const SignInForm = lazy(() => import("../features/auth/SignInForm"));
 
 /** The session ended while the page was open: the page stays as it is, with everything typed, until one signs in again. */
 export function SignInAgain() {
@@ -14,7 +17,9 @@ export function SignInAgain() {
       description="Your session has ended. Nothing on the page is lost; what was being saved can be saved again afterwards."
       width={420}
     >
-      <SignInForm email={user.email} />
+      <Suspense fallback={<Loading label="Opening" />}>
+        <SignInForm email={user.email} />
+      </Suspense>
     </Dialog>
   );
 }

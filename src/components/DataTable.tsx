@@ -1,7 +1,7 @@
-import { useVirtualizer } from "@tanstack/react-virtual";
-import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from "react";
+import { useEffect, useRef, useState, type ComponentType, type KeyboardEvent, type ReactNode } from "react";
 import { classes } from "../lib/classes";
 import { fixed } from "../lib/format";
+import { PlainBody, type TableBodyProps } from "./tableBody";
 import { useTableModel, type Column, type Sort } from "./tableModel";
 
 export interface DataTableProps<Row extends object> {
@@ -28,17 +28,16 @@ export interface DataTableProps<Row extends object> {
   className?: string;
   /** told the rows as filtered and sorted, for a count or an export */
   onShown?: (rows: readonly Row[]) => void;
+  /** `VirtualBody` where there are hundreds of rows */
+  Body?: ComponentType<TableBodyProps>;
 }
-
-/** beyond this many rows only those in sight are in the page */
-const virtualFrom = 100;
 
 const none = () => undefined;
 
 /** A table that sorts by its headings and is walked with the arrow keys; the row in focus is the row selected. */
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const { caption, rows, columns, rowKey, filter = "", initialSort, selectedKey } = props;
-  const { onSelect, onOpen, empty, rowHeight = 28, muted, className, onShown = none } = props;
+  const { onSelect, onOpen, empty, rowHeight = 28, muted, className, onShown = none, Body = PlainBody } = props;
   const { shown, sorting, setSorting } = useTableModel(rows, columns, rowKey, filter, initialSort);
   const headHeight = columns.some((column) => column.unit) ? 40 : 26;
   const box = useRef<HTMLDivElement>(null);
@@ -47,32 +46,9 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const at = shown.findIndex((row) => rowKey(row) === current);
   const interactive = Boolean(onSelect ?? onOpen);
 
-  const signature = shown.length + (shown[0] ? rowKey(shown[0]) : "") + (shown.at(-1) ? rowKey(shown.at(-1)!) : "");
-  // The rows changed when their number or either end did; a re-render alone must not call back.
-  // eslint-disable-next-line react-hooks/exhaustive-deps
-  useEffect(() => onShown(shown), [signature, filter]);
+  const reveal = useRef<(index: number) => void>(none);
 
-  const virtual = shown.length > virtualFrom;
-  // eslint-disable-next-line react-hooks/incompatible-library
-  const virtualizer = useVirtualizer({
-    count: virtual ? shown.length : 0,
-    getScrollElement: () => box.current,
-    estimateSize: () => rowHeight,
-    overscan: 12,
-    scrollPaddingStart: headHeight + 4,
-  });
-  const items = virtualizer.getVirtualItems();
-  const first = virtual ? (items[0]?.index ?? 0) : 0;
-  const last = virtual ? (items.at(-1)?.index ?? -1) : shown.length - 1;
-  const visible = shown.slice(first, last + 1);
-
-  // An address may name a row far down: show it once, when it first stands there.
-  const arrived = useRef(false);
-  useEffect(() => {
-    if (arrived.current || at < 0) return;
-    arrived.current = true;
-    if (virtual && at > 10) virtualizer.scrollToIndex(at, { align: "center" });
-  }, [at, virtual, virtualizer]);
+  useEffect(() => onShown(shown), [shown, onShown]);
 
   function reach(index: number) {
     const row = shown[Math.max(0, Math.min(shown.length - 1, index))];
@@ -80,7 +56,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     const key = rowKey(row);
     setReached(key);
     onSelect?.(row);
-    if (virtual) virtualizer.scrollToIndex(shown.indexOf(row));
+    reveal.current(shown.indexOf(row));
     // the row may only come into the page with the scroll
     requestAnimationFrame(() => box.current?.querySelector<HTMLElement>(`[data-key="${CSS.escape(key)}"]`)?.focus());
   }
@@ -103,6 +79,37 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
       event.preventDefault();
       (onOpen ?? onSelect)?.(shown[at]);
     }
+  }
+
+  function drawRow(row: Row, index: number) {
+    const key = rowKey(row);
+    const selected = key === selectedKey;
+    const tabStop = at < 0 ? index === 0 : key === current;
+    return (
+      <tr
+        key={key}
+        data-key={key}
+        aria-rowindex={index + 2}
+        aria-selected={onSelect ? selected : undefined}
+        tabIndex={interactive ? (tabStop ? 0 : -1) : undefined}
+        style={{ height: rowHeight }}
+        onClick={() => {
+          setReached(key);
+          (onSelect ?? onOpen)?.(row);
+        }}
+        onDoubleClick={() => onOpen?.(row)}
+        className={classes(
+          "border-b border-rule -outline-offset-2!",
+          interactive && "cursor-pointer hover:bg-tint/50",
+          selected && "bg-tint!",
+          muted?.(row) && "text-muted",
+        )}
+      >
+        {columns.map((column) => (
+          <Cell key={column.id} column={column} row={row} />
+        ))}
+      </tr>
+    );
   }
 
   return (
@@ -129,39 +136,15 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           </tr>
         </thead>
         <tbody onKeyDown={interactive ? onKeyDown : undefined}>
-          {first > 0 && <Spacer height={first * rowHeight} columns={columns.length} />}
-          {visible.map((row, i) => {
-            const key = rowKey(row);
-            const selected = key === selectedKey;
-            return (
-              <tr
-                key={key}
-                data-key={key}
-                aria-rowindex={first + i + 2}
-                aria-selected={onSelect ? selected : undefined}
-                tabIndex={interactive ? (at < 0 ? (first + i === 0 ? 0 : -1) : key === current ? 0 : -1) : undefined}
-                style={{ height: rowHeight }}
-                onClick={() => {
-                  setReached(key);
-                  (onSelect ?? onOpen)?.(row);
-                }}
-                onDoubleClick={() => onOpen?.(row)}
-                className={classes(
-                  "border-b border-rule -outline-offset-2!",
-                  interactive && "cursor-pointer hover:bg-tint/50",
-                  selected && "bg-tint",
-                  muted?.(row) && "text-muted",
-                )}
-              >
-                {columns.map((column) => (
-                  <Cell key={column.id} column={column} row={row} />
-                ))}
-              </tr>
-            );
-          })}
-          {virtual && last + 1 < shown.length && (
-            <Spacer height={(shown.length - last - 1) * rowHeight} columns={columns.length} />
-          )}
+          <Body
+            count={shown.length}
+            startAt={at}
+            row={(index) => {
+              const row = shown[index];
+              return row && drawRow(row, index);
+            }}
+            {...{ rowHeight, headHeight, box, reveal }}
+          />
         </tbody>
       </table>
       {shown.length === 0 && <div className="py-6 text-muted">{empty ?? "Nothing matches."}</div>}
@@ -179,7 +162,7 @@ function numberText(value: number, { digits = 0, asGiven = false }: { digits?: n
 
 const rightOf = (column: Column<never>) =>
   (column.align ?? (column.digits === undefined ? "left" : "right")) === "right";
-const hidden = (column: { wide?: boolean }) => (column.wide ? "max-md:hidden" : undefined);
+const hidden = (column: { wide?: boolean }) => (column.wide ? "max-lg:hidden" : undefined);
 
 function Heading<Row>({
   column,
@@ -196,7 +179,7 @@ function Heading<Row>({
       scope="col"
       aria-sort={sorted}
       className={classes(
-        "border-b border-ink px-2 pb-0.5 font-mono text-xs font-bold first:pl-0 last:pr-0",
+        "border-b border-ink px-2 pb-0.5 font-mono text-xs font-bold",
         right ? "text-right" : "text-left",
         hidden(column),
       )}
@@ -221,29 +204,20 @@ function Heading<Row>({
 function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
   const value = column.value(row);
   const number = column.digits !== undefined;
+  const plain = typeof value === "number" ? numberText(value, column) : (value ?? "");
+  const content = column.cell ? column.cell(row) : plain;
   return (
     <td
       role="gridcell"
       className={classes(
-        "truncate px-2 first:pl-0 last:pr-0",
+        "px-2",
+        !column.wrap && "truncate",
         rightOf(column) && "text-right",
         number && "font-mono",
         hidden(column),
       )}
     >
-      {column.cell
-        ? column.cell(row)
-        : value === null
-          ? ""
-          : typeof value === "number"
-            ? numberText(value, column)
-            : value}
+      {column.wrap ? <div className="line-clamp-2">{content}</div> : content}
     </td>
   );
 }
-
-const Spacer = ({ height, columns }: { height: number; columns: number }) => (
-  <tr aria-hidden>
-    <td colSpan={columns} style={{ height, padding: 0 }} />
-  </tr>
-);

@@ -20,7 +20,7 @@ export function Dialog({ open, onOpenChange, title, description, children, foote
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-40 bg-ink/30 dark-overlay" />
+        <Radix.Overlay className="fixed inset-0 z-40 bg-veil" />
         <Radix.Content
           className="fixed top-[8vh] left-1/2 z-50 flex max-h-[84vh] w-[calc(100vw-32px)] -translate-x-1/2 flex-col border border-ink bg-paper text-base text-ink"
           style={{ maxWidth: width }}

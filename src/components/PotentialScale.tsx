@@ -4,7 +4,6 @@ import { celsius, fixed, withUnit } from "../lib/format";
 import { usePotentialScale } from "../lib/potential";
 import { usePreferences } from "../lib/preferences";
 import { Segmented } from "./choice";
-import { Dialog } from "./Dialog";
 import { FormulaText } from "./FormulaText";
 import { NumberField } from "./NumberField";
 import { Select } from "./Select";
@@ -76,27 +75,8 @@ export function PotentialScaleFields({ liquorC }: { liquorC?: number }) {
             </p>
           )}
           {scale.remark !== null && <Remark className="my-1">{scale.remark}</Remark>}
-          {chosen.note !== "" && <p className="py-1 text-sm text-muted">{chosen.note}</p>}
         </>
       )}
     </>
-  );
-}
-
-export function PotentialScaleDialog(props: {
-  open: boolean;
-  onOpenChange: (open: boolean) => void;
-  liquorC?: number;
-}) {
-  const { liquorC, ...dialog } = props;
-  return (
-    <Dialog
-      {...dialog}
-      title="Potential scale"
-      width={520}
-      description="Plans are solved and stored in volts against the standard hydrogen electrode. What is shown is up to you; the scale always stands beside the number."
-    >
-      <PotentialScaleFields {...(liquorC === undefined ? {} : { liquorC })} />
-    </Dialog>
   );
 }

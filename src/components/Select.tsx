@@ -1,5 +1,5 @@
 import { Select as Radix } from "radix-ui";
-import { useId, type ReactNode } from "react";
+import { useId, useState, type ReactNode } from "react";
 import { classes } from "../lib/classes";
 
 export interface SelectOption<Value extends string> {
@@ -31,17 +31,24 @@ export interface SelectProps<Value extends string> {
 export function Select<Value extends string>(props: SelectProps<Value>) {
   const { label, labelText, value, onChange, options, placeholder, hint, error, disabled, layout = "row" } = props;
   const id = useId();
+  const [open, setOpen] = useState(false);
   const chosen = options.find((option) => option.value === value);
   const control = props.readOnly ? (
-    <span className="font-mono">{chosen?.label ?? "none"}</span>
+    <span className="font-sans">{chosen?.label ?? "none"}</span>
   ) : (
-    <Radix.Root value={value} onValueChange={(next) => onChange(next as Value)} disabled={disabled ?? false}>
+    <Radix.Root
+      value={value}
+      onValueChange={(next) => onChange(next as Value)}
+      open={open}
+      onOpenChange={setOpen}
+      disabled={disabled ?? false}
+    >
       <Radix.Trigger
         id={id}
         aria-label={label}
         aria-invalid={Boolean(error)}
         className={classes(
-          "inline-flex h-6 min-w-0 items-center justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
+          "inline-flex h-6 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
           layout === "stacked" && "h-8! w-full",
           error ? "border-signal" : "border-rule hover:border-muted",
         )}
@@ -53,28 +60,31 @@ export function Select<Value extends string>(props: SelectProps<Value>) {
           ▾
         </span>
       </Radix.Trigger>
-      <Radix.Portal>
-        <Radix.Content
-          position="popper"
-          sideOffset={2}
-          className="z-50 max-h-[60vh] max-w-[420px] min-w-(--radix-select-trigger-width) border border-ink bg-paper text-base text-ink"
-        >
-          <Radix.Viewport className="py-1">
-            {options.map((option) => (
-              <Radix.Item
-                key={option.value}
-                value={option.value}
-                disabled={option.disabled ?? false}
-                {...(option.text === undefined ? {} : { textValue: option.text })}
-                className="cursor-pointer px-3 py-1 outline-none data-[disabled]:opacity-50 data-[highlighted]:bg-tint data-[state=checked]:font-bold"
-              >
-                <Radix.ItemText>{option.label}</Radix.ItemText>
-                {option.note !== undefined && <div className="text-sm font-normal text-muted">{option.note}</div>}
-              </Radix.Item>
-            ))}
-          </Radix.Viewport>
-        </Radix.Content>
-      </Radix.Portal>
+      {/* closed, the list would still be drawn, out of sight, at every step of a drag elsewhere */}
+      {open && (
+        <Radix.Portal>
+          <Radix.Content
+            position="popper"
+            sideOffset={2}
+            className="z-50 max-h-[min(340px,var(--radix-select-content-available-height))] max-w-[420px] min-w-(--radix-select-trigger-width) border border-ink bg-paper text-base text-ink"
+          >
+            <Radix.Viewport className="py-1">
+              {options.map((option) => (
+                <Radix.Item
+                  key={option.value}
+                  value={option.value}
+                  disabled={option.disabled ?? false}
+                  {...(option.text === undefined ? {} : { textValue: option.text })}
+                  className="cursor-pointer px-3 py-1 outline-none data-[disabled]:opacity-50 data-[highlighted]:bg-tint data-[state=checked]:font-bold"
+                >
+                  <Radix.ItemText>{option.label}</Radix.ItemText>
+                  {option.note !== undefined && <div className="text-sm font-normal text-muted">{option.note}</div>}
+                </Radix.Item>
+              ))}
+            </Radix.Viewport>
+          </Radix.Content>
+        </Radix.Portal>
+      )}
     </Radix.Root>
   );
   const below = (

@@ -32,7 +32,7 @@ export function Segmented<Value extends string>({
       value={value}
       disabled={disabled}
       onValueChange={(next) => next !== "" && onChange(next as Value)}
-      className={classes("inline-flex rounded-sm border border-ink", className)}
+      className={classes("inline-flex rounded-sm border border-ink font-sans", className)}
     >
       {options.map((option) => (
         <ToggleGroup.Item

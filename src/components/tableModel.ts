@@ -35,7 +35,9 @@ export interface Column<Row> {
   /** false: the text filter does not look here */
   filtered?: boolean;
   sortable?: boolean;
-  /** left out below the `md` width, where the sheet is narrow */
+  /** two lines where one is too short; for tables with tall rows */
+  wrap?: boolean;
+  /** left out below the `lg` width, where the sheet is narrow */
   wide?: boolean;
 }
 
@@ -97,7 +99,9 @@ export function useTableModel<Row extends object>(
     // the function above looks at the whole row, so one column asks for all
     getColumnCanGlobalFilter: (column) => column.id === columns[0]?.id,
   });
-  return { shown: table.getRowModel().rows.map((row) => row.original), sorting, setSorting };
+  const kept = table.getRowModel().rows;
+  const shown = useMemo(() => kept.map((row) => row.original), [kept]);
+  return { shown, sorting, setSorting };
 }
 
 export const headerText = (column: Pick<Column<never>, "header" | "unit">) =>

@@ -92,7 +92,7 @@ test("every field of the inputs is looked at", () => {
     controlBand: { pH: 0.2, Eh: 0.04 },
   };
   for (const key of Object.keys(inputs) as (keyof PlanInputs)[]) {
-    const changed = { ...inputs, [key]: other[key] } as PlanInputs;
+    const changed = { ...inputs, [key]: other[key] };
     expect(planChanges(inputs, changed), key).not.toEqual([]);
   }
 });

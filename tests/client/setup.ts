@@ -8,10 +8,16 @@ class NoObserver {
   disconnect() {}
 }
 globalThis.ResizeObserver ??= NoObserver as unknown as typeof ResizeObserver;
-Element.prototype.scrollIntoView ??= () => undefined;
-Element.prototype.hasPointerCapture ??= () => false;
-Element.prototype.setPointerCapture ??= () => undefined;
-Element.prototype.releasePointerCapture ??= () => undefined;
 globalThis.CSS ??= { escape: (text: string) => text.replace(/["\\]/g, "\\$&") } as unknown as typeof CSS;
+
+const missing = {
+  scrollIntoView: () => undefined,
+  hasPointerCapture: () => false,
+  setPointerCapture: () => undefined,
+  releasePointerCapture: () => undefined,
+};
+for (const [name, answer] of Object.entries(missing)) {
+  if (!(name in Element.prototype)) Object.defineProperty(Element.prototype, name, { value: answer });
+}
 
 afterEach(cleanup);

@@ -8,7 +8,7 @@ import { TextField } from "../../components/TextField";
 import { useSignIn } from "../../lib/session";
 
 /** Address and password. `email` given: that member comes back to a page that is still open. */
-export function SignInForm({ email = "", password = "" }: { email?: string; password?: string }) {
+export default function SignInForm({ email = "", password = "" }: { email?: string; password?: string }) {
   const enter = useSignIn();
   const form = useForm<z.infer<typeof signIn>>({ resolver: zodResolver(signIn), values: { email, password } });
   const { errors } = form.formState;

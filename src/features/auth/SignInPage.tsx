@@ -3,7 +3,7 @@ import type { DemoAccounts } from "../../../shared/schemas/member";
 import { SectionHead } from "../../components/text";
 
 import { usePageTitle } from "../../lib/title";
-import { SignInForm } from "./SignInForm";
+import SignInForm from "./SignInForm";
 
 const answers = [
   [
@@ -15,7 +15,7 @@ const answers = [
 ] as const;
 
 /** The first page of a visitor: what this answers, and the way in. */
-export function SignInPage({ demo }: { demo: DemoAccounts | null }) {
+export default function SignInPage({ demo }: { demo: DemoAccounts | null }) {
   usePageTitle("Sign in");
   const [email, setEmail] = useState("");
   return (
@@ -56,7 +56,7 @@ export function SignInPage({ demo }: { demo: DemoAccounts | null }) {
                   <li key={account.email} className="hairline">
                     <button
                       type="button"
-                      className="flex w-full justify-between gap-3 py-1 text-left hover:text-verdigris"
+                      className="flex w-full items-baseline justify-between gap-3 py-1 text-left hover:text-verdigris"
                       onClick={() => setEmail(account.email)}
                     >
                       <span>{account.role}</span>

@@ -25,7 +25,7 @@ const kinds = [
 export function ElectrodesTab({ data }: { data: ChemicalData }) {
   const series = useMemo(() => seriesOf(data.tables.electrodes), [data]);
   return (
-    <div className="max-w-[1000px] space-y-8 pb-10">
+    <div className="max-w-[1240px] space-y-8 pb-10">
       {kinds.map(({ kind, title, text }) => (
         <section key={kind}>
           <SectionHead>{title}</SectionHead>
@@ -57,9 +57,14 @@ export function ElectrodesTab({ data }: { data: ChemicalData }) {
               },
               { header: "against", width: "8em", cell: ({ first }) => first.versus },
               {
-                header: "source",
+                header: "source, grade",
                 width: "8em",
-                cell: ({ rows }) => [...new Set(rows.map((row) => `${row.source} (${row.grade})`))].join(", "),
+                cell: ({ rows }) => [...new Set(rows.map((row) => `${row.source} ${row.grade}`))].join(", "),
+              },
+              {
+                header: "note",
+                width: "22%",
+                cell: ({ rows }) => [...new Set(rows.map((row) => row.note).filter(Boolean))].join("; "),
               },
             ]}
           />

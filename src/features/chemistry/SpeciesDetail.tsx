@@ -5,7 +5,7 @@ import { Formula } from "../../components/Formula";
 import { FormulaText } from "../../components/FormulaText";
 import { Term } from "../../components/Help";
 import { Note, Row, SectionHead } from "../../components/text";
-import { fixed, withUnit } from "../../lib/format";
+import { fixed, MINUS, withUnit } from "../../lib/format";
 import { lixiviantName } from "../../lib/planWords";
 import type { PresetName } from "../../../shared/schemas/plan";
 import { whenText } from "./leftOutWords";
@@ -34,16 +34,16 @@ export function SpeciesDetail({ data, id }: { data: ChemicalData; id: string }) 
       <SectionHead className="mt-4" aside="25 °C, 1 bar">
         Standard values
       </SectionHead>
-      <Row label="G of formation">{value(row.dGf_kJ, 2, "kJ/mol")}</Row>
-      <Row label="H of formation">{value(row.dHf_kJ, 2, "kJ/mol")}</Row>
-      <Row label="Entropy">{value(row.S_J, 2, "J/(mol K)")}</Row>
-      <Row label="Heat capacity">{value(row.Cp_J, 1, "J/(mol K)")}</Row>
+      <Row label="G of formation">{value(row.dGf_kJ, "kJ/mol")}</Row>
+      <Row label="H of formation">{value(row.dHf_kJ, "kJ/mol")}</Row>
+      <Row label="Entropy">{value(row.S_J, "J/(mol K)")}</Row>
+      <Row label="Heat capacity">{value(row.Cp_J, "J/(mol K)")}</Row>
       {row.Cp_a !== null && (
         <Row
           label="Cp polynomial"
           below={
             <span className="font-mono text-xs">
-              {fixed(row.Cp_a, 3)} + {signless(row.Cp_b)} T + {signless(row.Cp_c)} T<sup>−2</sup>, T in K
+              {asGiven(row.Cp_a)} + {asGiven(row.Cp_b ?? 0)} T + {asGiven(row.Cp_c ?? 0)} T<sup>{MINUS}2</sup>, T in K
             </span>
           }
         >
@@ -75,10 +75,11 @@ export function SpeciesDetail({ data, id }: { data: ChemicalData; id: string }) 
   );
 }
 
-const value = (x: number | null, digits: number, unit: string): ReactNode =>
-  x === null ? <span className="font-sans text-muted">not known</span> : withUnit(fixed(x, digits), unit);
+/** as it stands in the table, digit for digit */
+const asGiven = (x: number) => String(x).replace("-", MINUS);
 
-const signless = (x: number | null) => (x === null ? "0" : String(x).replace("-", "−"));
+const value = (x: number | null, unit: string): ReactNode =>
+  x === null ? <span className="font-sans text-muted">not known</span> : withUnit(asGiven(x), unit);
 
 /** Several codes may stand in one cell. */
 function sources(data: ChemicalData, cell: string) {

@@ -10,6 +10,7 @@ import { SearchField } from "../../components/SearchField";
 import { Select } from "../../components/Select";
 import { tableCsv } from "../../components/tableModel";
 import { Note, Remark } from "../../components/text";
+import { VirtualBody } from "../../components/VirtualBody";
 import { downloadText } from "../../lib/csv";
 import { phaseWord } from "./phases";
 import { SpeciesDetail } from "./SpeciesDetail";
@@ -107,6 +108,7 @@ export function SpeciesTab({ data }: { data: ChemicalData }) {
             )
           }
           onShown={setShown}
+          Body={VirtualBody}
           className="min-h-0 flex-1 basis-0 pr-3"
           empty="No species has all of that. Take a word away, or choose another element or phase."
         />

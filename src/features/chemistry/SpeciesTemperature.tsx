@@ -23,7 +23,7 @@ export function SpeciesTemperature({ data, id }: { data: ChemicalData; id: strin
   const [lo, hi] = at.trusted;
   return (
     <>
-      <SectionHead className="mt-4" aside="1 bar, saturated above 100 °C">
+      <SectionHead className="mt-4" aside="1 bar or saturated">
         Free energy at T
       </SectionHead>
       <Slider label="Temperature" value={t} onChange={setT} min={0} max={150} step={1} unit="°C" marks={stops} />

@@ -1,63 +1,8 @@
-import { zodResolver } from "@hookform/resolvers/zod";
-import { useForm } from "react-hook-form";
-import type { z } from "zod";
-import { projectCreate } from "../../../shared/schemas/api";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
-import { ErrorNote } from "../../components/status";
-import { TextField } from "../../components/TextField";
-import { useCreateProject } from "../../lib/plans";
-import { selectProject, useProject } from "../../lib/project";
+import { whenOpened } from "../../components/whenOpened";
 
-/** A circuit of a site, to hold plans. */
-export function CreateProjectDialog({ open, onOpenChange }: { open: boolean; onOpenChange: (open: boolean) => void }) {
-  const create = useCreateProject();
-  const { project } = useProject();
-  const form = useForm<z.infer<typeof projectCreate>>({
-    resolver: zodResolver(projectCreate),
-    values: { siteName: project?.invented ? "" : (project?.siteName ?? ""), name: "" },
-    resetOptions: { keepDirtyValues: true },
-  });
-  const { errors } = form.formState;
-  const submit = form.handleSubmit((values) =>
-    create.mutate(values, {
-      onSuccess: (made) => {
-        selectProject(made.id);
-        onOpenChange(false);
-        form.reset();
-      },
-    }),
-  );
-  return (
-    <Dialog
-      open={open}
-      onOpenChange={onOpenChange}
-      title="New project"
-      description="A project is one circuit of a site; its plans stay together and stand under its name."
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="new-project" kind="primary" disabled={create.isPending}>
-            Create project
-          </Button>
-        </>
-      }
-    >
-      <form id="new-project" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="Site"
-          placeholder="where the plant stands"
-          error={errors.siteName && "The site’s name, 1 to 120 characters"}
-          {...form.register("siteName")}
-        />
-        <TextField
-          label="Project"
-          placeholder="such as calcine circuit, heap 3, gold plant"
-          error={errors.name && "The project’s name, 1 to 120 characters"}
-          {...form.register("name")}
-        />
-        {create.error && <ErrorNote doing="Not created" error={create.error} />}
-      </form>
-    </Dialog>
-  );
+export interface CreateProjectDialogProps {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
 }
+
+export const CreateProjectDialog = whenOpened<CreateProjectDialogProps>(() => import("./CreateProject"));

@@ -1,14 +1,5 @@
-import { zodResolver } from "@hookform/resolvers/zod";
-import { useForm } from "react-hook-form";
-import type { z } from "zod";
-import { planUpdate, type PlanRow } from "../../../shared/schemas/plan";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
-import { ErrorNote } from "../../components/status";
-import { TextArea, TextField } from "../../components/TextField";
-import { useUpdatePlan } from "../../lib/plans";
-
-const schema = planUpdate.pick({ name: true, description: true });
+import type { PlanRow } from "../../../shared/schemas/plan";
+import { whenOpened } from "../../components/whenOpened";
 
 export interface PlanDialogProps {
   plan: PlanRow;
@@ -16,45 +7,4 @@ export interface PlanDialogProps {
   onOpenChange: (open: boolean) => void;
 }
 
-/** Name and description of a plan; its inputs are changed in the workspace. */
-export function RenameDialog({ plan, open, onOpenChange }: PlanDialogProps) {
-  const update = useUpdatePlan();
-  const form = useForm<z.infer<typeof schema>>({
-    resolver: zodResolver(schema),
-    values: { name: plan.name, description: plan.description },
-    resetOptions: { keepDirtyValues: true },
-  });
-  const submit = form.handleSubmit((values) =>
-    update.mutate({ id: plan.id, version: plan.version, ...values }, { onSuccess: () => onOpenChange(false) }),
-  );
-  return (
-    <Dialog
-      open={open}
-      onOpenChange={onOpenChange}
-      title="Name and description"
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="rename-plan" kind="primary" disabled={update.isPending}>
-            Save
-          </Button>
-        </>
-      }
-    >
-      <form id="rename-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="Name"
-          error={form.formState.errors.name && "A name of 1 to 120 characters"}
-          {...form.register("name")}
-        />
-        <TextArea
-          label="Description"
-          hint="What the step does and why, for those who find this plan later."
-          error={form.formState.errors.description && "At most 2000 characters"}
-          {...form.register("description")}
-        />
-        {update.error && <ErrorNote doing="Not saved" error={update.error} />}
-      </form>
-    </Dialog>
-  );
-}
+export const RenameDialog = whenOpened<PlanDialogProps>(() => import("./Rename"));

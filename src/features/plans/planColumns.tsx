@@ -35,7 +35,8 @@ export const planColumns: readonly Column<PlanRow>[] = [
   {
     id: "metals",
     header: "metals",
-    width: "34%",
+    width: "30%",
+    wrap: true,
     value: metalsText,
     cell: (plan) => <MetalLine metals={plan.latest.inputs.metals} />,
   },
@@ -58,7 +59,7 @@ export const planColumns: readonly Column<PlanRow>[] = [
   {
     id: "saved",
     header: "saved",
-    width: "12.5em",
+    width: "12.4em",
     align: "right",
     filtered: false,
     wide: true,

@@ -1,0 +1,78 @@
+import { zodResolver } from "@hookform/resolvers/zod";
+import { Controller, useForm } from "react-hook-form";
+import type { z } from "zod";
+import { planCreate } from "../../../shared/schemas/plan";
+import { Button } from "../../components/Button";
+import { Dialog } from "../../components/Dialog";
+import { Select } from "../../components/Select";
+import { ErrorNote } from "../../components/status";
+import { TextField } from "../../components/TextField";
+import { useDuplicatePlan } from "../../lib/plans";
+import { selectProject, useProject } from "../../lib/project";
+import type { DuplicateDialogProps } from "./DuplicateDialog";
+
+const schema = planCreate.pick({ name: true, projectId: true });
+
+/** A copy of the latest inputs under a name of its own, in this or another project. */
+export default function Duplicate({ plan, open, onOpenChange, onCopied }: DuplicateDialogProps) {
+  const duplicate = useDuplicatePlan();
+  const { projects = [] } = useProject();
+  const form = useForm<z.infer<typeof schema>>({
+    resolver: zodResolver(schema),
+    values: { name: `${plan.name}, copy`.slice(0, 120), projectId: plan.projectId },
+    resetOptions: { keepDirtyValues: true },
+  });
+  const submit = form.handleSubmit((values) =>
+    duplicate.mutate(
+      { id: plan.id, ...values },
+      {
+        onSuccess: (copy) => {
+          selectProject(copy.projectId);
+          onCopied(copy);
+          onOpenChange(false);
+          form.reset();
+        },
+      },
+    ),
+  );
+  return (
+    <Dialog
+      open={open}
+      onOpenChange={onOpenChange}
+      title={`Duplicate ${plan.name}`}
+      description={`The copy starts with the inputs of revision ${plan.latest.number} as its revision 1.`}
+      footer={
+        <>
+          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
+          <Button type="submit" form="duplicate-plan" kind="primary" disabled={duplicate.isPending}>
+            Duplicate
+          </Button>
+        </>
+      }
+    >
+      <form id="duplicate-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
+        <TextField
+          label="Name of the copy"
+          error={form.formState.errors.name && "A name of 1 to 120 characters"}
+          {...form.register("name")}
+        />
+        {projects.length > 1 && (
+          <Controller
+            control={form.control}
+            name="projectId"
+            render={({ field }) => (
+              <Select
+                label="Project"
+                layout="stacked"
+                value={field.value}
+                onChange={field.onChange}
+                options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
+              />
+            )}
+          />
+        )}
+        {duplicate.error && <ErrorNote doing="Not duplicated" error={duplicate.error} />}
+      </form>
+    </Dialog>
+  );
+}
