@@ -11,6 +11,7 @@ import { memberRoutes } from "./features/members/routes";
 import { planRoutes } from "./features/plans/routes";
 import { projectRoutes } from "./features/projects/routes";
 import { solverRoutes } from "./features/solver/routes";
+import { speciesEditRoutes } from "./features/speciesEdits/routes";
 import { clientFiles, noSuchFile } from "./http/clientFiles";
 import { errorHandler, unknownRoute } from "./http/errorHandler";
 import { mountRoutes, type Route } from "./http/route";
@@ -24,6 +25,7 @@ const features = [
   invitationRoutes,
   mailboxRoutes,
   chemistryRoutes,
+  speciesEditRoutes,
   solverRoutes,
   projectRoutes,
   planRoutes,

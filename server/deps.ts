@@ -1,10 +1,10 @@
 import type { Logger } from "pino";
 import type { Outcome } from "../shared/outcome";
-import type { ChemicalTables } from "../shared/schemas/chemistry";
 import type { Solution } from "../shared/solution";
 import type { ChemicalData } from "../shared/species/chemicalData";
 import type { Config } from "./config";
 import type { Db } from "./db/open";
+import type { Chemistry } from "./features/chemistry/library";
 import type { Sessions } from "./features/auth/sessions";
 import type { Mailer } from "./features/mailbox/mailer";
 
@@ -16,10 +16,6 @@ export interface Deps {
   log: Logger;
   sessions: Sessions;
   mailer: Mailer;
-  chemistry: {
-    /** the library this server ships, as the database keeps it */
-    current: ChemicalTables;
-    data: ChemicalData;
-  };
+  chemistry: Chemistry;
   solve: (problem: unknown, data: ChemicalData) => Outcome<Solution>;
 }

@@ -2,9 +2,7 @@ import { createServer, type Server } from "node:http";
 import type { AddressInfo } from "node:net";
 import { join } from "node:path";
 import type { Logger } from "pino";
-import { valueOf } from "../shared/outcome";
 import { solve } from "../shared/solve";
-import { libraryFrom } from "../shared/species/library";
 import { createApp } from "./app";
 import { readTables } from "./chemistry/readTables";
 import type { Config } from "./config";
@@ -12,6 +10,7 @@ import { migrateDatabase } from "./db/migrate";
 import { openDatabase } from "./db/open";
 import { createSessions } from "./features/auth/sessions";
 import { createMailer } from "./features/mailbox/mailer";
+import { createChemistry } from "./features/chemistry/library";
 import { keepVersion, keptVersion } from "./features/chemistry/service";
 import { findByEmail } from "./features/members/service";
 import { demoAccounts } from "./demo/accounts";
@@ -42,7 +41,8 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
   const https = config.appUrl.startsWith("https:");
   const sessions = createSessions(db, { https, days: config.sessionDays });
   const mailer = createMailer(db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock });
-  const chemistry = { current, data: valueOf(libraryFrom(current)) };
+  const chemistry = createChemistry(db, current, clock());
+  for (const { edit, why } of chemistry.unfit) log.warn({ species: edit.speciesId, why }, "library edit left out");
   const app = createApp(
     { db, config, clock, log, sessions, mailer, chemistry, solve },
     join(projectRoot, "dist/client"),

@@ -6,3 +6,4 @@ export { mails } from "../features/mailbox/schema";
 export { invitations, users } from "../features/members/schema";
 export { planRevisions, plans } from "../features/plans/schema";
 export { projects } from "../features/projects/schema";
+export { speciesEdits } from "../features/speciesEdits/schema";

@@ -96,4 +96,8 @@ export interface PlanRow {
   updatedAt: string;
   revisionCount: number;
   latest: RevisionRow;
+  /** the library changed since the latest revision in species that it may use; it keeps its own until it is saved again */
+  dataOutdated: boolean;
+  /** which ones */
+  changedSpecies: string[];
 }

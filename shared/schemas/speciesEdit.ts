@@ -40,6 +40,8 @@ export interface SpeciesEditRow {
   author: string;
   createdAt: string; // ISO 8601
   inForce: boolean;
+  /** why it is left out although nobody took it back: the library shipped since does not take it */
+  unfit: string | null;
   /** 1, or 2 once it was taken back */
   version: number;
   revertedAt: string | null;

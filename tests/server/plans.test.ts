@@ -48,6 +48,8 @@ test("a plan comes back as it was made: every field, author, moment and data ver
     createdAt: at,
     updatedAt: at,
     revisionCount: 1,
+    dataOutdated: false,
+    changedSpecies: [],
     latest: {
       planId: made.id,
       number: 1,
@@ -192,4 +194,42 @@ test("lists are filtered by project and archive, newest change first", async () 
   expect(await names("?archived=all&limit=1&offset=1")).toEqual(["one"]);
   expect((await admin.get("/api/plans?archived=all&limit=1")).body).toMatchObject({ total: 2, limit: 1, offset: 0 });
   await admin.get("/api/plans?archived=perhaps").expect(400);
+});
+
+test("the record of a plan says who changed what and why, and how the plan stood before", async () => {
+  const { as, now } = await testServer();
+  const [metallurgist, admin] = [await as("metallurgist"), await as("admin")];
+  const { id, latest } = await planOf(metallurgist);
+  const path = `/api/plans/${id}`;
+  now("2026-05-05T06:07:08.000Z");
+  const change = { name: "tank 4", reason: "renumbered" };
+  await admin.patch(path).set("If-Match", "1").send(change).expect(200);
+  await metallurgist.post(`${path}/revisions`).send({ note: "second thoughts", inputs: latest.inputs }).expect(201);
+  const { body } = await admin.get(`${path}/history`).expect(200);
+  expect(body).toMatchObject({
+    total: 3,
+    rows: [
+      {
+        version: 3,
+        author: "The metallurgist",
+        reason: "second thoughts",
+        changes: [{ path: "revision", old: 1, new: 2 }],
+      },
+      {
+        version: 2,
+        action: "change",
+        at: "2026-05-05T06:07:08.000Z",
+        author: "The admin",
+        reason: "renumbered",
+        changes: [{ path: "name", old: "tank 3", new: "tank 4" }],
+      },
+      { version: 1, action: "create", author: "The metallurgist", changes: [] },
+    ],
+  });
+  const then = await admin.get(`${path}/history/1`).expect(200);
+  expect(then.body).toMatchObject({ name: "tank 3", revision: 1, version: 1 });
+  const stale = await metallurgist.patch(path).set("If-Match", "1").send({ name: "mine" }).expect(412);
+  expect((stale.body as { difference: unknown }).difference).toEqual([
+    { path: "name", base: "tank 3", yours: "mine", theirs: "tank 4" },
+  ]);
 });

@@ -14,8 +14,9 @@ import { users } from "../../server/db/schema";
 import type { Deps } from "../../server/deps";
 import { hashPassword } from "../../server/features/auth/passwords";
 import { createSessions } from "../../server/features/auth/sessions";
-import { createMailer } from "../../server/features/mailbox/mailer";
+import { createChemistry } from "../../server/features/chemistry/library";
 import { keepVersion } from "../../server/features/chemistry/service";
+import { createMailer } from "../../server/features/mailbox/mailer";
 import { valueOf } from "../../shared/outcome";
 import { memberRoles, type MemberRole } from "../../shared/schemas/member";
 import { solve } from "../../shared/solve";
@@ -105,7 +106,7 @@ export async function testServer({
     log: pino({ level: "silent" }),
     sessions,
     mailer: createMailer(open.db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock: now }),
-    chemistry: { current: tables, data: library },
+    chemistry: createChemistry(open.db, tables, clock),
     solve,
   };
   const app = createApp(deps, clientFolder);

@@ -1,17 +1,23 @@
 import { z } from "zod";
+import type { ChemistryAnswer } from "../../../shared/schemas/speciesEdit";
 import type { Deps } from "../../deps";
 import { ok } from "../../http/answer";
 import { route } from "../../http/route";
 import { tagOf } from "../../http/version";
-import { keptVersion } from "./service";
+import { keptAnswer } from "./service";
 
 export const chemistryRoutes = ({ db, chemistry }: Deps) => [
   route({
     method: "GET",
     path: "/api/chemistry",
     roles: "signed-in",
-    handle: () =>
-      ok(chemistry.current, { ETag: tagOf(chemistry.current.version), "Cache-Control": "private, no-cache" }),
+    handle: () => {
+      const { current, curated, edited } = chemistry;
+      const answer: ChemistryAnswer = { ...current, curatedVersion: curated.version, edited: [...edited] };
+      // Taking an edit back brings an older version again, with other marks: both stand in the tag.
+      const marks = edited.reduce((sum, { version }) => sum + version, 0);
+      return ok(answer, { ETag: tagOf(`${current.version}.${marks}`), "Cache-Control": "private, no-cache" });
+    },
   }),
   route({
     method: "GET",
@@ -19,7 +25,7 @@ export const chemistryRoutes = ({ db, chemistry }: Deps) => [
     roles: "signed-in",
     params: z.object({ id: z.string().min(1) }),
     handle: ({ params }) =>
-      ok(keptVersion(db, params.id), {
+      ok(keptAnswer(db, params.id), {
         ETag: tagOf(params.id),
         "Cache-Control": "private, max-age=31536000, immutable",
       }),

@@ -1,4 +1,5 @@
 import { index, integer, primaryKey, real, sqliteTable, text } from "drizzle-orm/sqlite-core";
+import type { EditedSpecies } from "../../../shared/schemas/speciesEdit";
 import { grades, ionClasses, phases, type TableName } from "../../../shared/schemas/chemistry";
 
 /** One row a version of the library, never changed: revisions of plans point at it. */
@@ -6,6 +7,10 @@ export const chemistryVersions = sqliteTable("chemistry_versions", {
   /** content hash of the tables */
   id: text("id").primaryKey(),
   createdAt: text("created_at").notNull(),
+  /** the library as shipped that it rests on; null: it is one */
+  curatedVersion: text("curated_version"),
+  /** rows that were not as shipped then */
+  edited: text("edited", { mode: "json" }).$type<EditedSpecies[]>().notNull().default([]),
 });
 
 const version = () =>

@@ -1,5 +1,6 @@
 import { and, asc, eq } from "drizzle-orm";
 import { chemicalTables, tableFiles, type ChemicalTables, type TableName } from "../../../shared/schemas/chemistry";
+import type { ChemistryAnswer, EditedSpecies } from "../../../shared/schemas/speciesEdit";
 import type { Db } from "../../db/open";
 import { Refusal } from "../../http/refusal";
 import { chemistryVersions, libraryRows, speciesRows } from "./schema";
@@ -12,14 +13,22 @@ function inChunks<Row>(rows: readonly Row[], insert: (chunk: Row[]) => void): vo
   for (let start = 0; start < rows.length; start += 500) insert(rows.slice(start, start + 500));
 }
 
+/** What a version rests on, beside its rows. */
+export interface About {
+  curatedVersion: string;
+  edited: EditedSpecies[];
+}
+
 /** Puts a version of the library into the database unless it is there; older versions stay, revisions of plans use them.
  *  @returns whether it was new */
-export function keepVersion(db: Db, tables: ChemicalTables, now: Date): boolean {
+export function keepVersion(db: Db, tables: ChemicalTables, now: Date, about: Partial<About> = {}): boolean {
   const { version } = tables;
   return db.transaction((tx) => {
     const id = tx.select().from(chemistryVersions).where(eq(chemistryVersions.id, version)).get();
     if (id) return false;
-    tx.insert(chemistryVersions).values({ id: version, createdAt: now.toISOString() }).run();
+    tx.insert(chemistryVersions)
+      .values({ id: version, createdAt: now.toISOString(), ...about })
+      .run();
     inChunks(
       tables.species.map((row, position) => ({ version, position, ...row })),
       (chunk) => tx.insert(speciesRows).values(chunk).run(),
@@ -58,4 +67,11 @@ export function keptVersion(db: Db, version: string): ChemicalTables {
   const tables = tablesOf(db, version);
   if (!tables) throw new Refusal("NOT_FOUND", "id", `There is no version ${version} of the chemistry library here.`);
   return tables;
+}
+
+/** As `keptVersion`, with what it rested on. */
+export function keptAnswer(db: Db, version: string): ChemistryAnswer {
+  const tables = keptVersion(db, version);
+  const about = db.select().from(chemistryVersions).where(eq(chemistryVersions.id, version)).get();
+  return { ...tables, curatedVersion: about?.curatedVersion ?? version, edited: about?.edited ?? [] };
 }

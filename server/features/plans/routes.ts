@@ -1,13 +1,16 @@
 import { z } from "zod";
 import { pageQuery, planDuplicate, plansQuery } from "../../../shared/schemas/api";
+import { withReason } from "../../../shared/schemas/history";
 import type { Member } from "../../../shared/schemas/member";
 import { planCreate, planUpdate, revisionCreate, type PlanRow } from "../../../shared/schemas/plan";
 import type { Deps } from "../../deps";
 import { created, ok, type Answer } from "../../http/answer";
 import { page } from "../../http/pages";
 import { route } from "../../http/route";
-import { ifMatch, requiredVersion, tagOf } from "../../http/version";
-import { listPlans, listRevisions, planOf, revisionOf } from "./rows";
+import { ifMatch, requiredVersion, versionHeaders } from "../../http/version";
+import { historyRoutes } from "../history/routes";
+import { outdatedSpecies } from "./outdated";
+import { keptPlan, listPlans, listRevisions, planOf, revisionOf, storedPlan } from "./rows";
 import { addRevision, createPlan, duplicatePlan, updatePlan, type Writing } from "./service";
 
 const writers = ["metallurgist", "admin"] as const;
@@ -15,13 +18,15 @@ const byId = z.object({ id: z.string().min(1) });
 const byNumber = byId.extend({ number: z.coerce.number().int().min(1) });
 
 const tagged = (answer: (body: unknown, headers: Record<string, string>) => Answer, plan: PlanRow) =>
-  answer(plan, { ETag: tagOf(plan.version) });
+  answer(plan, versionHeaders(plan.version));
 
 export function planRoutes({ db, clock, chemistry }: Deps) {
+  const outdated = outdatedSpecies(chemistry);
   const writing = (user: Member): Writing => ({
     authorId: user.id,
     now: clock(),
     dataVersion: chemistry.current.version,
+    outdated,
   });
   return [
     route({
@@ -30,7 +35,7 @@ export function planRoutes({ db, clock, chemistry }: Deps) {
       roles: "signed-in",
       query: plansQuery,
       handle: ({ query }) => {
-        const { rows, total } = listPlans(db, query);
+        const { rows, total } = listPlans(db, query, outdated);
         return ok(page(rows, total, query));
       },
     }),
@@ -46,16 +51,16 @@ export function planRoutes({ db, clock, chemistry }: Deps) {
       path: "/api/plans/:id",
       roles: "signed-in",
       params: byId,
-      handle: ({ params }) => tagged(ok, planOf(db, params.id)),
+      handle: ({ params }) => tagged(ok, planOf(db, params.id, outdated)),
     }),
     route({
       method: "PATCH",
       path: "/api/plans/:id",
       roles: writers,
       params: byId,
-      body: planUpdate,
-      handle: ({ params, body, req }) =>
-        tagged(ok, updatePlan(db, params.id, requiredVersion(req.get("if-match")), body, clock())),
+      body: z.intersection(planUpdate, withReason),
+      handle: ({ params, body, user, req }) =>
+        tagged(ok, updatePlan(db, params.id, requiredVersion(req.get("if-match")), body, writing(user))),
     }),
     route({
       method: "POST",
@@ -91,6 +96,13 @@ export function planRoutes({ db, clock, chemistry }: Deps) {
       roles: "signed-in",
       params: byNumber,
       handle: ({ params }) => ok(revisionOf(db, params.id, params.number)),
+    }),
+    ...historyRoutes({
+      db,
+      entity: "plan",
+      path: "/api/plans",
+      roles: "signed-in",
+      kept: (id) => keptPlan(storedPlan(db, id)),
     }),
   ];
 }

@@ -4,8 +4,10 @@ import type { plansQuery } from "../../../shared/schemas/api";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
 import type { Db } from "../../db/open";
 import { Refusal } from "../../http/refusal";
+import type { Kept } from "../history/service";
 import { users } from "../members/schema";
 import { projects } from "../projects/schema";
+import type { OutdatedSpecies } from "./outdated";
 import { planRevisions, plans } from "./schema";
 
 const revisionColumns = {
@@ -30,13 +32,20 @@ const selectPlans = (db: Db) =>
     .innerJoin(users, eq(users.id, planRevisions.authorId));
 type Selected = NonNullable<ReturnType<ReturnType<typeof selectPlans>["get"]>>;
 
-const asRow = ({ plan, latest, projectName, siteName }: Selected): PlanRow => ({
+type StoredPlan = Omit<PlanRow, "dataOutdated" | "changedSpecies">;
+
+const stored = ({ plan, latest, projectName, siteName }: Selected): StoredPlan => ({
   ...plan,
   projectName,
   siteName,
   revisionCount: latest.number,
   latest,
 });
+
+function shown(plan: StoredPlan, outdated: OutdatedSpecies): PlanRow {
+  const changed = outdated(plan.latest);
+  return { ...plan, dataOutdated: changed === null || changed.length > 0, changedSpecies: changed ?? [] };
+}
 
 type Query = z.output<typeof plansQuery>;
 
@@ -48,7 +57,7 @@ function filterOf({ projectId, archived }: Query): SQL | undefined {
 }
 
 /** Newest change first. */
-export function listPlans(db: Db, query: Query): { rows: PlanRow[]; total: number } {
+export function listPlans(db: Db, query: Query, outdated: OutdatedSpecies): { rows: PlanRow[]; total: number } {
   const filter = filterOf(query);
   const rows = selectPlans(db)
     .where(filter)
@@ -57,22 +66,35 @@ export function listPlans(db: Db, query: Query): { rows: PlanRow[]; total: numbe
     .offset(query.offset)
     .all();
   const total = db.select({ n: count() }).from(plans).where(filter).get()?.n ?? 0;
-  return { rows: rows.map(asRow), total };
+  return { rows: rows.map((row) => shown(stored(row), outdated)), total };
 }
 
 /** @throws Refusal NOT_FOUND */
-export function planOf(db: Db, id: string): PlanRow {
+export function storedPlan(db: Db, id: string): StoredPlan {
   const found = selectPlans(db).where(eq(plans.id, id)).get();
   if (!found) throw new Refusal("NOT_FOUND", "id", `There is no plan ${id}.`);
-  return asRow(found);
+  return stored(found);
 }
+
+/** As `storedPlan`, with what has changed in the library since.
+ *  @throws Refusal NOT_FOUND */
+export const planOf = (db: Db, id: string, outdated: OutdatedSpecies): PlanRow => shown(storedPlan(db, id), outdated);
+
+/** What the history keeps of a plan; the revisions themselves are never changed. */
+export const keptPlan = ({ name, description, archived, revisionCount, version }: StoredPlan): Kept => ({
+  name,
+  description,
+  archived,
+  revision: revisionCount,
+  version,
+});
 
 const selectRevisions = (db: Db) =>
   db.select(revisionColumns).from(planRevisions).innerJoin(users, eq(users.id, planRevisions.authorId));
 
 /** Newest first. */
 export function listRevisions(db: Db, planId: string, { limit, offset }: { limit: number; offset: number }) {
-  const total = planOf(db, planId).revisionCount;
+  const total = storedPlan(db, planId).revisionCount;
   const rows: RevisionRow[] = selectRevisions(db)
     .where(eq(planRevisions.planId, planId))
     .orderBy(desc(planRevisions.number))

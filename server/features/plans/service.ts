@@ -10,16 +10,16 @@ import type {
   RevisionRow,
 } from "../../../shared/schemas/plan";
 import type { Db } from "../../db/open";
-import { Refusal } from "../../http/refusal";
+import { recordWrite, requireSeen, type Author } from "../history/service";
 import { projectOf } from "../projects/service";
-import { planOf, revisionOf } from "./rows";
+import type { OutdatedSpecies } from "./outdated";
+import { keptPlan, planOf, revisionOf, storedPlan } from "./rows";
 import { planRevisions, plans } from "./schema";
 
 /** Who writes, when, and with which version of the chemistry library. */
-export interface Writing {
-  authorId: string;
-  now: Date;
+export interface Writing extends Author {
   dataVersion: string;
+  outdated: OutdatedSpecies;
 }
 
 interface NewPlan {
@@ -39,7 +39,9 @@ function insertPlan(db: Db, { note, inputs, ...plan }: NewPlan, writing: Writing
       .values({ id, ...plan, createdAt: at, updatedAt: at })
       .run();
     insertRevision(tx, { planId: id, number: 1, note, inputs }, writing);
-    return planOf(tx, id);
+    const after = keptPlan(storedPlan(tx, id));
+    recordWrite(tx, { entity: "plan", id, action: "create", before: null, after, reason: note }, writing);
+    return planOf(tx, id, writing.outdated);
   });
 }
 
@@ -65,7 +67,7 @@ export function duplicatePlan(
   { name, projectId }: z.output<typeof planDuplicate>,
   writing: Writing,
 ): PlanRow {
-  const source = planOf(db, id);
+  const source = storedPlan(db, id);
   const project = projectOf(db, projectId ?? source.projectId);
   const values: NewPlan = {
     projectId: project.id,
@@ -78,27 +80,38 @@ export function duplicatePlan(
   return insertPlan(db, values, writing);
 }
 
-/** Raises the version, if it still is the one the writer saw.
- *  @throws Refusal STALE with the current row beside it */
-function change(db: Db, id: string, seen: number, now: Date, values: z.output<typeof planUpdate> = {}): void {
-  const current = planOf(db, id);
-  if (current.version === seen) {
-    const set = { ...values, version: seen + 1, updatedAt: now.toISOString() };
-    db.update(plans)
-      .set(set)
-      .where(and(eq(plans.id, id), eq(plans.version, seen)))
-      .run();
-    return;
-  }
-  const message = `The plan is at version ${current.version} by now, you changed version ${seen}.`;
-  throw new Refusal("STALE", "If-Match", message, { current });
+/** Raises the version, if it still is the one the writer saw, and puts the write on record.
+ *  @throws Refusal STALE with the current row and the difference beside it */
+function change(
+  db: Db,
+  id: string,
+  seen: number,
+  { reason, write, ...yours }: z.output<typeof planUpdate> & { reason: string; write?: () => void },
+  writing: Writing,
+): void {
+  const current = planOf(db, id, writing.outdated);
+  const before = keptPlan(current);
+  requireSeen(db, { entity: "plan", what: "The plan", current, fields: before, seen, yours });
+  db.update(plans)
+    .set({ ...yours, version: seen + 1, updatedAt: writing.now.toISOString() })
+    .where(and(eq(plans.id, id), eq(plans.version, seen)))
+    .run();
+  write?.();
+  const after = keptPlan(storedPlan(db, id));
+  recordWrite(db, { entity: "plan", id, action: "change", before, after, reason }, writing);
 }
 
 /** @throws Refusal NOT_FOUND, STALE */
-export function updatePlan(db: Db, id: string, seen: number, values: z.output<typeof planUpdate>, now: Date): PlanRow {
+export function updatePlan(
+  db: Db,
+  id: string,
+  seen: number,
+  values: z.output<typeof planUpdate> & { reason: string },
+  writing: Writing,
+): PlanRow {
   return db.transaction((tx) => {
-    change(tx, id, seen, now, values);
-    return planOf(tx, id);
+    change(tx, id, seen, values, writing);
+    return planOf(tx, id, writing.outdated);
   });
 }
 
@@ -112,10 +125,10 @@ export function addRevision(
   writing: Writing,
 ): RevisionRow {
   return db.transaction((tx) => {
-    const current = planOf(tx, planId);
-    change(tx, planId, seen ?? current.version, writing.now);
+    const current = storedPlan(tx, planId);
     const number = current.revisionCount + 1;
-    insertRevision(tx, { planId, number, note, inputs }, writing);
+    const write = () => insertRevision(tx, { planId, number, note, inputs }, writing);
+    change(tx, planId, seen ?? current.version, { reason: note, write }, writing);
     return revisionOf(tx, planId, number);
   });
 }
