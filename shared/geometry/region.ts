@@ -1,4 +1,5 @@
 import { areaOf, type Convex } from "./convex";
+import { flipped, turn, type Line } from "./line";
 import { lineClasses, type LineClass } from "./lineClasses";
 
 /** A stretch of a region's border: part of one edge of one piece, walked with the region on the left. */
@@ -108,27 +109,22 @@ function border(c: LineClass, base: number, owner: Groups, vertex: Groups, halve
   }
 }
 
-const direction = (h: Half, pieces: readonly Convex[]): number => {
-  const line = pieces[h.piece]!.lines[h.edge]!;
-  return Math.atan2(-line[1], line[2]);
-};
+/** Which of two lines is met first by a ray that starts along the way back and turns clockwise; the way back itself last. */
+function firstClockwise(back: Line, a: Line, b: Line): number {
+  const half = (o: Line): number => {
+    const side = turn(back, o);
+    return side < 0 ? 0 : side > 0 ? 2 : back[1] * o[1] + back[2] * o[2] < 0 ? 1 : 3;
+  };
+  return half(a) - half(b) || turn(a, b);
+}
 
-/** Where several stretches leave one point, the next is the first met turning clockwise from where we came. */
+/** Where several stretches leave one point, the next is the first met turning clockwise from where we came: the other side
+ *  of the same wedge of ground. A region that meets itself in a point is walked through it, wedge by wedge. Exact. */
 function following(h: Half, leaving: readonly Half[], pieces: readonly Convex[]): Half {
   if (leaving.length === 1) return leaving[0]!;
-  const back = direction(h, pieces) + Math.PI;
-  let best = leaving[0]!;
-  let least = Infinity;
-  for (const o of leaving) {
-    if (o.used) continue;
-    let angle = (back - direction(o, pieces)) % (2 * Math.PI);
-    if (angle <= 1e-12) angle += 2 * Math.PI;
-    if (angle < least) {
-      least = angle;
-      best = o;
-    }
-  }
-  return best;
+  const lineOf = (s: Half): Line => pieces[s.piece]!.lines[s.edge]!;
+  const back = flipped(lineOf(h));
+  return leaving.reduce((best, o) => (firstClockwise(back, lineOf(o), lineOf(best)) < 0 ? o : best));
 }
 
 const signedArea = (loop: readonly Stretch[]): number => {
@@ -158,11 +154,10 @@ function loopsOf(pieces: readonly Convex[], owner: Groups, halves: readonly Half
     const loop: Stretch[] = [];
     let h = first;
     do {
+      if (h.used) throw new Error("border stretches that close no loop: the pieces overlap");
       h.used = true;
       loop.push(h);
-      const next = following(h, leaving.get(h.end) ?? [], pieces);
-      if (next === undefined || (next.used && next !== first)) break;
-      h = next;
+      h = following(h, leaving.get(h.end)!, pieces);
     } while (h !== first);
     found.get(owner.of(first.piece))!.loops.push(loop);
   }

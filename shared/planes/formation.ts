@@ -11,16 +11,19 @@ export interface Formation {
   readonly ligands: readonly (readonly [component: string, count: number])[];
 }
 
-/** Smallest factor that makes every number whole: pentlandite is written with 4.5 iron. */
-function wholeFactor(numbers: readonly number[]): number {
+/** Smallest factor that makes every number whole: pentlandite is written with 4.5 iron.
+ *  @param numbers  atoms and groups of a formula unit     @returns  1 to 12, null where none will do
+ *  @source  arithmetic     @example wholeFactor([4.5, 4.5, 8]) // => 2 */
+export function wholeFactor(numbers: readonly number[]): number | null {
   for (let f = 1; f <= 12; f++) if (numbers.every((n) => Math.abs(n * f - Math.round(n * f)) < 1e-9)) return f;
-  throw new Error(`no small factor makes ${numbers.join(", ")} whole`);
+  return null;
 }
 
 /** Plane of a species per formula unit: k + x pH + y E is its free energy less that of its H2O, H^+ and e^-, at the given
  *  total activity of the main element. With nu atoms a dissolved species carries RT ln(a / nu).
  *  @param species  holds `main`     @param main  element or ligand group     @param activity  total, > 0     @param ligands  numbers of the other components
  *  @param basis  prices at T     @returns  snapped plane; `atoms` = nu (times the factor that makes the formula whole)
+ *  @throws Error where its atoms come in fractions finer than a twelfth (prepare refuses such rows)
  *  @source  docs/method.md, step 2: sp = nu M + l L + o H2O + (h - 2o) H^+ + (h - 2o - z) e^- */
 export function formationOf(
   species: Species,
@@ -31,6 +34,7 @@ export function formationOf(
 ): Formation {
   const { composition, charge, phase, id } = species;
   const factor = wholeFactor(Object.values(composition));
+  if (factor === null) throw new Error(`no small factor makes the atoms of ${id} whole`);
   const atoms = composition[main]!;
   const oxygen = composition["O"] ?? 0;
   const protons = (composition["H"] ?? 0) - 2 * oxygen;

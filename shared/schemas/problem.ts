@@ -32,21 +32,26 @@ const ownSpecies = z.preprocess(
 );
 
 const positive = z.number().positive();
-const range = z
-  .tuple([z.number(), z.number()])
-  .refine(([lo, hi]) => lo < hi, { message: "the lower end must stand below the upper end" });
+/** A side of the frame: within what any liquor could be asked about, and not thinner than a reading can tell. */
+const range = (low: number, high: number, least: number) => {
+  const end = z.number().min(low).max(high);
+  return z
+    .tuple([end, end])
+    .refine(([lo, hi]) => lo < hi, { message: "the lower end must stand below the upper end" })
+    .refine(([lo, hi]) => !(lo < hi) || hi - lo >= least, { message: `the ends must stand at least ${least} apart` });
+};
 
 export const metalInput = z
-  .object({
+  .strictObject({
     element: z.string().min(1),
     requirement: z.enum(requirements),
     role: z.enum(roles).optional(),
     /** what the liquor must carry (target), the most that may dissolve (gangue), the most that may remain (won out) */
     activity: positive.max(100).optional(),
     /** tenor in g/L instead of an activity; molality x gamma becomes the activity */
-    gPerL: positive.max(1000).optional(),
+    gPerL: positive.min(1e-12).max(1000).optional(),
     /** activity coefficient for gPerL; 1 when absent */
-    gamma: positive.max(100).optional(),
+    gamma: positive.min(1e-6).max(100).optional(),
   })
   .refine((m) => (m.activity === undefined) !== (m.gPerL === undefined), {
     message: "give either activity or gPerL, not both and not neither",
@@ -55,7 +60,7 @@ export const metalInput = z
 
 export const componentTotal = z.object({ component: z.string().min(1), activity: positive.max(100) });
 
-export const frameSchema = z.object({ pH: range, Eh: range });
+export const frameSchema = z.object({ pH: range(-10, 30, 0.01), Eh: range(-10, 10, 0.001) });
 export const waterSchema = z.object({
   /** which lines bound windows; the band is always drawn */
   bound: z.enum(["both", "upper", "lower", "none"]),
@@ -64,14 +69,16 @@ export const waterSchema = z.object({
   /** overpotential of hydrogen on the named cementing metal, V, lowers the lower line */
   hydrogenV: z.number().min(0).max(2).optional(),
 });
-export const controlBandSchema = z.object({ pH: positive.max(5), Eh: positive.max(1) });
+/** how far a real loop strays, to either side */
+export const controlBandSchema = z.object({ pH: positive.min(0.001).max(5), Eh: positive.min(0.0001).max(1) });
 
-/** The solver's question. Same body for the CLI, POST /api/solve, the browser and a frozen revision. Potentials in V vs SHE at T. */
-export const problemSchema = z.object({
+/** The solver's question. Same body for the CLI, POST /api/solve, the browser and a frozen revision. Potentials in V vs SHE at T.
+ *  A key it does not know is refused, so that a misspelt option cannot pass for its default. */
+export const problemSchema = z.strictObject({
   temperatureC: z.number().min(TEMPERATURE_RANGE_C.min).max(TEMPERATURE_RANGE_C.max),
   metals: z.array(metalInput).min(1).max(16),
-  ligands: z.array(componentTotal),
-  others: z.array(componentTotal).optional(),
+  ligands: z.array(componentTotal.strict()),
+  others: z.array(componentTotal.strict()).optional(),
   sulfateReduction: z.boolean().optional(),
   solidsBasis: z.enum(solidsBases).optional(),
   /** minerals named for the feed: stay in whatever the basis says */
@@ -83,9 +90,9 @@ export const problemSchema = z.object({
   putBack: z.array(z.string()).optional(),
   only: z.array(z.string()).optional(),
   species: z.array(ownSpecies).optional(),
-  frame: frameSchema,
-  water: waterSchema.optional(),
-  controlBand: controlBandSchema,
+  frame: frameSchema.strict(),
+  water: waterSchema.strict().optional(),
+  controlBand: controlBandSchema.strict(),
 });
 export type Problem = z.infer<typeof problemSchema>;
 export type MetalInput = z.infer<typeof metalInput>;

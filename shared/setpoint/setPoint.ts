@@ -8,7 +8,8 @@ export interface BorderSegment extends Segment {
 }
 
 /** The set point of one window. Where a couple of the liquor sets Eh, the middle of the largest box of control bands;
- *  else Eh is a mixed potential: the margin counts pH alone, Eh is a range and keeps one band from its ends where it can.
+ *  else Eh is a mixed potential: the margin counts pH alone, Eh is a range. Then the set point stands on the widest chord
+ *  along pH, or as much higher or lower as keeps one band from the ends of that range, in the middle of the chord there.
  *  @param border  in control bands, region on the left     @param band  pH and V     @param coupleAt  couple at a point, or null
  *  @returns  set point in pH and V; null for an empty border     @source  docs/method.md, step 6 */
 export function setPointOf(
@@ -30,22 +31,24 @@ export function setPointOf(
     };
   }
   const chord = widestChord(border) ?? deepest;
-  const range = chordAt(border, chord.u).find(([lo, hi]) => chord.v >= lo - 1e-9 && chord.v <= hi + 1e-9) ?? [
-    chord.v,
-    chord.v,
-  ];
-  const v =
-    range[1] - range[0] > 2 ? Math.min(Math.max(chord.v, range[0] + 1), range[1] - 1) : (range[0] + range[1]) / 2;
+  const [low, high] = rangeThrough(border, chord.u, chord.v);
+  const v = high - low > 2 ? Math.min(Math.max(chord.v, low + 1), high - 1) : (low + high) / 2;
   const [left, right] = pHReach(border, chord.u, v);
+  const u = chord.u + (right.way - left.way) / 2; // the middle again, at the Eh just chosen
+  const range = rangeThrough(border, u, v);
   return {
-    pH: chord.u * band.pH,
+    pH: u * band.pH,
     Eh: v * band.Eh,
-    margin: Math.min(left.way, right.way),
+    margin: (left.way + right.way) / 2,
     mixedPotential: true,
     EhRange: [range[0] * band.Eh, range[1] * band.Eh],
-    cutByFrame: (left.way <= right.way + 1e-6 && left.frame) || (right.way <= left.way + 1e-6 && right.frame),
+    cutByFrame: left.frame || right.frame,
   };
 }
+
+/** The stretch of v that holds a point of the region, at its u. */
+const rangeThrough = (border: readonly BorderSegment[], u: number, v: number): readonly [number, number] =>
+  chordAt(border, u).find(([lo, hi]) => v >= lo - 1e-9 && v <= hi + 1e-9) ?? [v, v];
 
 /** Nearest border to the left and right of a point at its v. */
 function pHReach(border: readonly BorderSegment[], u: number, v: number): [Hit, Hit] {

@@ -1,14 +1,13 @@
 import { FRAME_SIDES, type LigandCell } from "../fields/ligandCells";
 import type { MetalFields } from "../fields/fields";
-import type { Convex } from "../geometry/convex";
-import { valueAt } from "../geometry/line";
+import { sameLine } from "../geometry/line";
 import type { Region, Stretch } from "../geometry/region";
 import { balance, reactionText } from "../reactions/balance";
 import { clearances, widest, type Segment } from "../setpoint/segments";
 import type { Limit, Point } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
+import { acrossLigandEdge } from "./ligandEdge";
 import { meaningOf, type EdgeMeaning, type WindowPiece } from "./pieces";
-import { fulfils } from "./requirement";
 
 export interface Ground {
   readonly data: ChemicalData;
@@ -26,54 +25,34 @@ interface RawLimit {
   readonly to: Point;
 }
 
-const contains = (piece: Convex, x: number, y: number): boolean => piece.lines.every((l) => valueAt(l, x, y) >= 0);
-
-/** A ligand-cell edge on a window's border: a metal changes state right on it. Look just across. */
-function acrossLigandEdge(ground: Ground, s: Stretch): Shut {
-  const { piece } = ground.pieces[s.piece]!;
-  const line = piece.lines[s.edge]!;
-  const size = Math.hypot(line[1], line[2]);
-  const step = 1e-7 / size;
-  const x = (s.from[0] + s.to[0]) / 2;
-  const y = (s.from[1] + s.to[1]) / 2;
-  const speciesAt = (m: MetalFields, dx: number, dy: number): number | undefined => {
-    for (const [c, cell] of ground.cells.entries())
-      if (contains(cell.piece, x + dx, y + dy))
-        return m.cells[c]!.pieces.find((f) => contains(f.piece, x + dx, y + dy))?.plane;
-    return undefined;
-  };
-  for (const [i, m] of ground.metals.entries()) {
-    const inside = speciesAt(m, line[1] * step, line[2] * step);
-    const outside = speciesAt(m, -line[1] * step, -line[2] * step);
-    if (inside !== undefined && outside !== undefined && !fulfils(m.metal.requirement, m.states[outside]!))
-      return { kind: "metal", metal: i, inside, outside };
-  }
-  throw new Error(`no metal changes state across the ligand edge at pH ${x}, ${y} V`);
-}
-
 /** The border of a region as limits, stretches of one line with one meaning joined. */
 function rawLimits(ground: Ground, loop: readonly Stretch[]): RawLimit[] {
   const out: RawLimit[] = [];
   for (const s of loop) {
-    const tag = ground.pieces[s.piece]!.piece.tags[s.edge]!;
-    const read = meaningOf(tag);
-    const meaning = read.kind === "ligand" ? acrossLigandEdge(ground, s) : read;
-    const last = out.at(-1);
-    if (last && continues(ground, last, meaning, s)) out[out.length - 1] = { ...last, to: s.to };
-    else out.push({ meaning, piece: s.piece, edge: s.edge, from: s.from, to: s.to });
+    for (const part of meant(ground, s)) {
+      const last = out.at(-1);
+      if (last && continues(ground, last, part)) out[out.length - 1] = { ...last, to: part.to };
+      else out.push(part);
+    }
   }
   const first = out[0];
   const last = out.at(-1);
-  if (first && last && first !== last && continues(ground, last, first.meaning, first))
+  if (first && last && first !== last && continues(ground, last, first))
     return [{ ...last, to: first.to }, ...out.slice(1, -1)];
   return out;
 }
 
-function continues(ground: Ground, last: RawLimit, meaning: Shut, s: { piece: number; edge: number }): boolean {
-  if (JSON.stringify(last.meaning) !== JSON.stringify(meaning)) return false;
-  const a = ground.pieces[last.piece]!.piece.lines[last.edge]!;
-  const b = ground.pieces[s.piece]!.piece.lines[s.edge]!;
-  return a[1] * b[2] === a[2] * b[1] && a[0] * b[1] === a[1] * b[0] && a[0] * b[2] === a[2] * b[0];
+function meant(ground: Ground, { piece, edge, from, to }: Stretch): RawLimit[] {
+  const { lines, tags } = ground.pieces[piece]!.piece;
+  const meaning = meaningOf(tags[edge]!);
+  if (meaning.kind !== "ligand") return [{ meaning, piece, edge, from, to }];
+  return acrossLigandEdge(ground.metals, lines[edge]!, from, to).map((part) => ({ ...part, piece, edge }));
+}
+
+function continues(ground: Ground, last: RawLimit, next: RawLimit): boolean {
+  if (JSON.stringify(last.meaning) !== JSON.stringify(next.meaning)) return false;
+  const lineOf = (l: RawLimit) => ground.pieces[l.piece]!.piece.lines[l.edge]!;
+  return sameLine(lineOf(last), lineOf(next));
 }
 
 export interface BorderLoops {

@@ -61,7 +61,9 @@ export function windowPieces(
   const out: WindowPiece[] = [];
   cells.forEach((cell, c) => {
     let pieces: Convex[] = [cell.piece];
-    for (const { line, tag } of bounds) pieces = pieces.flatMap((p) => clip(p, line, tag) ?? []);
+    // where a water line runs along a ligand edge it is the water that shuts
+    for (const { line, tag } of bounds)
+      pieces = pieces.flatMap((p) => clip(p, line, tag, (edge) => p.tags[edge] === LIGAND_EDGE) ?? []);
     for (let m = 0; m < metals.length && pieces.length > 0; m++) {
       const { metal, states, cells: perCell } = metals[m]!;
       const all = perCell[c]!.pieces;
