@@ -1,32 +1,9 @@
-import type { PlanInputs } from "../schemas/plan";
-import { SULFIDE_SULFUR } from "../selection/components";
+import { reagentById } from "../reach/reagents";
+import type { Caution, HazardContext } from "./context";
+import { limitsText } from "./exposure";
+import { chlorine, organicWithOxidant, oxygen } from "./oxidantRules";
 
-/** What the rules look at: nothing but the plan's inputs and where its set point stands. */
-export interface HazardContext {
-  temperatureC: number;
-  /** components that have a total: ligands and others */
-  components: readonly string[];
-  metals: readonly { element: string; requirement: string }[];
-  feedMinerals: readonly string[];
-  dosed: readonly string[];
-  /** sulfide sulfur is in the plan: its couple is on, or it has a total of its own */
-  sulfideSulfur: boolean;
-  /** null while no window is open: a rule about the set point's pH then waits, one about acid does not */
-  setPoint: { pH: number; Eh: number } | null;
-}
-
-export type CautionCode = "HCN" | "ARSINE" | "HYDROGEN" | "H2S" | "NH3";
-
-export interface Caution {
-  code: CautionCode;
-  /** as it would be typed; the screen typesets it */
-  agents: string[];
-  text: string;
-  /** US exposure values as recorded in December 2026; null for agents without one */
-  limits: string | null;
-  /** asks the user to name the procedure it runs under before it counts as read */
-  confirm: string | null;
-}
+export { hazardContext, type Caution, type CautionCode, type HazardContext } from "./context";
 
 /** pH at and above which a cyanide liquor keeps most of its cyanide from leaving as HCN, and below which a named procedure is asked for. */
 export const HCN_PH = 10.5;
@@ -57,7 +34,7 @@ function hydrogenCyanide(c: HazardContext): Caution[] {
       text:
         "Cyanide is in this liquor and the set point stands below pH 10.5, where cyanide leaves as HCN gas. Never acidify it; check pH before mixing streams or draining to a common sump." +
         (low ? " Cyanide destruction runs in this range, under a procedure of its own." : ""),
-      limits: "HCN: NIOSH 4.7 ppm short-term (skin), OSHA 10 ppm (skin), IDLH 50 ppm (from memory).",
+      limits: limitsText("HCN"),
       confirm: low ? "This set point runs under a named procedure" : null,
     },
   ];
@@ -65,27 +42,34 @@ function hydrogenCyanide(c: HazardContext): Caution[] {
 
 const list = (words: string[]): string => words.join(" and ");
 
-/** (b) Zinc, iron or aluminium as cementing metal in acid: arsine and stibine with arsenic or antimony; hydrogen anyway. */
+const cementingReagents: Readonly<Record<string, string>> = { "zinc-dust": "Zn", "iron-scrap": "Fe", aluminium: "Al" };
+
+/** Elements of a feed mineral, read off its id. */
+const holds = (id: string, element: string): boolean => new RegExp(`${element}(?![a-z])`).test(id.split("(s")[0] ?? id);
+
+/** (b) Zinc, iron or aluminium as cementing metal in acid: arsine and stibine with arsenic or antimony; hydrogen anyway. The metal is one
+ *  that the plan keeps dissolved while another is won as metal, or a reagent in use. */
 function cementation(c: HazardContext): Caution[] {
-  const cements = c.metals.some((m) => m.requirement === "metal");
-  const carriers = c.metals
-    .filter((m) => m.requirement === "dissolved" && m.element in cementing)
-    .map((m) => m.element);
-  if (!cements || carriers.length === 0) return [];
+  const wins = c.metals.some((m) => m.requirement === "metal");
+  const dissolving = c.metals.filter((m) => wins && m.requirement === "dissolved").map((m) => m.element);
+  const added = (c.circuit.reagents ?? []).flatMap((r) => cementingReagents[r] ?? []);
+  const carriers = [...new Set([...dissolving, ...added])].filter((e) => e in cementing);
+  if (carriers.length === 0) return [];
   if (c.setPoint !== null && c.setPoint.pH >= 7) return [];
   const named = carriers.map((e) => cementing[e] ?? e).join(" or ");
   const present = Object.keys(hydrides).filter(
-    (e) => c.components.includes(e) || c.metals.some((m) => m.element === e),
+    (e) =>
+      c.components.includes(e) || c.metals.some((m) => m.element === e) || c.feedMinerals.some((id) => holds(id, e)),
   );
+  const agents = (present.length === 0 ? Object.keys(hydrides) : present).map((e) => `${e}H3`);
   const arsine: Caution = {
     code: "ARSINE",
-    agents: (present.length === 0 ? Object.keys(hydrides) : present).map((e) => `${e}H3`),
+    agents,
     text:
       present.length === 0
         ? `Cementing with ${named} in acid makes arsine or stibine where the liquor holds arsenic or antimony above detection. This plan names neither: look at the assay before the test.`
         : `Cementing with ${named} in acid, with ${list(present.map((e) => hydrides[e]?.element ?? e))} in the plan: fresh hydrogen makes ${list(present.map((e) => hydrides[e]?.gas ?? e))}. Arsine has no useful odour warning.`,
-    limits:
-      "AsH3: NIOSH ceiling 0.002 mg/m3 (15 min), OSHA 0.05 ppm, IDLH 3 ppm (from memory). SbH3: NIOSH 0.1 ppm, OSHA 0.1 ppm, IDLH 5 ppm.",
+    limits: agents.map(limitsText).join(" "),
     confirm: null,
   };
   const hydrogen: Caution = {
@@ -94,7 +78,7 @@ function cementation(c: HazardContext): Caution[] {
     text:
       `The cementing metal (${named}) also makes hydrogen from the liquor: vent it, and keep ignition away.` +
       (carriers.includes("Zn") ? " Zinc dust is combustible, and wet dust makes hydrogen in the drum." : ""),
-    limits: "H2: flammable from 4 to 75 % by volume in air (from memory).",
+    limits: limitsText("H2"),
     confirm: null,
   };
   return [arsine, hydrogen];
@@ -105,19 +89,21 @@ function hydrogenSulfide(c: HazardContext): Caution[] {
   const minerals = c.feedMinerals.filter(isSulfideMineral);
   if (minerals.length === 0 && !c.sulfideSulfur) return [];
   if (c.setPoint === null || c.setPoint.pH >= 4) return [];
-  if (c.dosed.some((d) => oxidants.has(d))) return [];
+  if (c.dosed.some((d) => oxidants.has(d)) || (c.circuit.reagents ?? []).some(isOxidant)) return [];
   return [
     {
       code: "H2S",
       agents: ["H2S"],
       text: `${minerals.length > 0 ? "A sulfide mineral" : "Sulfide"} meets acid below pH 4 with no oxidant dosed: H2S leaves the slurry, and dulls the sense of smell.`,
-      limits: "H2S: NIOSH ceiling 10 ppm (10 min), OSHA ceiling 20 ppm, peak 50 ppm (10 min), IDLH 100 ppm.",
+      limits: limitsText("H2S"),
       confirm: null,
     },
   ];
 }
 /** as defaults.csv names what is dosed */
 const oxidants: ReadonlySet<string> = new Set(["persulfate", "chlorate", "peroxide", "nitrate"]);
+/** Air alone does not count: a slurry that takes sulfide acid can be short of oxygen. */
+const isOxidant = (id: string): boolean => id !== "air" && reagentById.get(id)?.kind === "oxidant";
 
 /** (e) Ammonia above pH 9.5 and warmer than 40 C. */
 function ammonia(c: HazardContext): Caution[] {
@@ -127,7 +113,7 @@ function ammonia(c: HazardContext): Caution[] {
       code: "NH3",
       agents: ["NH3"],
       text: "Ammonia above pH 9.5 and 40 C strips from the liquor: closed vessels and a scrubber; eyes first.",
-      limits: "NH3: NIOSH 25 ppm, short-term 35 ppm, OSHA 50 ppm, IDLH 300 ppm.",
+      limits: limitsText("NH3"),
       confirm: null,
     },
   ];
@@ -140,27 +126,8 @@ export const cautionsFor = (context: HazardContext): Caution[] => [
   ...hydrogenCyanide(context),
   ...cementation(context),
   ...hydrogenSulfide(context),
+  ...chlorine(context),
   ...ammonia(context),
+  ...organicWithOxidant(context),
+  ...oxygen(context),
 ];
-
-/** The part of a plan that the rules look at. */
-export function hazardContext(
-  inputs: Pick<
-    PlanInputs,
-    "temperatureC" | "ligands" | "others" | "metals" | "feedMinerals" | "dosed" | "sulfateReduction" | "preset"
-  >,
-  setPoint: { pH: number; Eh: number } | null,
-): HazardContext {
-  const components = [...inputs.ligands, ...inputs.others].map((c) => c.component);
-  return {
-    temperatureC: inputs.temperatureC,
-    components,
-    metals: inputs.metals.map(({ element, requirement }) => ({ element, requirement })),
-    feedMinerals: inputs.feedMinerals,
-    dosed: inputs.dosed,
-    sulfideSulfur:
-      components.includes(SULFIDE_SULFUR) ||
-      (components.includes("S") && (inputs.sulfateReduction || inputs.preset === "sulfate_sulfide")),
-    setPoint: setPoint && { pH: setPoint.pH, Eh: setPoint.Eh },
-  };
-}

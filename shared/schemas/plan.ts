@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { circuitSchema } from "./circuit";
 import {
   componentTotal,
   controlBandSchema,
@@ -55,6 +56,8 @@ export const planInputs = z.object({
   frame: frameSchema,
   water: waterSchema,
   controlBand: controlBandSchema,
+  /** for the caution rules alone; the solver does not see it */
+  circuit: circuitSchema.optional(),
 });
 export type PlanInputs = z.infer<typeof planInputs>;
 

@@ -10,6 +10,7 @@ const quiet: HazardContext = {
   feedMinerals: [],
   dosed: [],
   sulfideSulfur: false,
+  circuit: {},
   setPoint: { pH: 2, Eh: 0.6 },
 };
 const codes = (change: Partial<HazardContext>) => cautionsFor({ ...quiet, ...change }).map((c) => c.code);
@@ -65,6 +66,18 @@ describe("(b) zinc, iron or aluminium as cementing metal", () => {
     expect(codes({ ...purification, setPoint: null })).toEqual(["ARSINE", "HYDROGEN"]);
     expect(codes({ ...purification, ...at(11) })).toEqual([]);
   });
+  test("arsenic or antimony of a feed mineral counts", () => {
+    const feed = (id: string) => cautionsFor({ ...quiet, ...purification, feedMinerals: [id] })[0]!.agents;
+    expect(feed("FeAsS(s,arsenopyrite)")).toEqual(["AsH3"]);
+    expect(feed("Sb2S3(s,stibnite)")).toEqual(["SbH3"]);
+    expect(feed("Ag2S(s,acanthite)")).toEqual(["AsH3", "SbH3"]); // neither: the assay is asked for
+  });
+  test("a cementing metal in use counts though the plan does not name it", () => {
+    const copper = { metals: [{ element: "Cu", requirement: "metal" }], ...at(2) };
+    expect(codes(copper)).toEqual([]);
+    expect(codes({ ...copper, circuit: { reagents: ["iron-scrap"] } })).toEqual(["ARSINE", "HYDROGEN"]);
+    expect(codes({ ...copper, circuit: { reagents: ["ferric", "air"] } })).toEqual([]);
+  });
   test("a dissolved metal that cements nothing is silent", () => {
     expect(
       codes({
@@ -90,6 +103,10 @@ describe("(c) sulfide in acid", () => {
     expect(codes({ sulfideSulfur: true, dosed: ["peroxide"] })).toEqual([]);
     expect(codes({ sulfideSulfur: true, dosed: ["sulfite"] })).toEqual(["H2S"]);
   });
+  test("an oxidant in use silences it, air alone does not", () => {
+    expect(codes({ sulfideSulfur: true, circuit: { reagents: ["ferric"] } })).toEqual([]);
+    expect(codes({ sulfideSulfur: true, circuit: { reagents: ["air", "zinc-dust"] } })).toContain("H2S");
+  });
   test.each([
     ["CuFeS2(s)", true],
     ["FeAsS(s,arsenopyrite)", true],
@@ -101,6 +118,48 @@ describe("(c) sulfide in acid", () => {
     ["KFe3(SO4)2(OH)6(s,jarosite)", false],
     ["CaSiO3(s,wollastonite)", false],
   ])("%s is a sulfide: %s", (id, answer) => expect(isSulfideMineral(id)).toBe(answer));
+});
+
+describe("(d) chlorine", () => {
+  const brine = { components: ["Cl"] };
+  const spot = (pH: number, Eh: number) => ({ setPoint: { pH, Eh } });
+  test("chloride, above 1 V, below pH 3: all three are needed", () => {
+    expect(codes({ ...brine, ...spot(2.9, 1.01) })).toEqual(["CHLORINE"]);
+    expect(codes({ ...brine, ...spot(3, 1.2) })).toEqual([]);
+    expect(codes({ ...brine, ...spot(1, 1) })).toEqual([]);
+    expect(codes({ ...spot(1, 1.2) })).toEqual([]);
+  });
+  test("cathode powder in hydrochloric acid makes chlorine at any potential", () => {
+    const [caution] = cautionsFor({ ...quiet, ...brine, ...spot(0.5, 0.6), feedMinerals: ["LiCoO2(s)"] });
+    expect(caution!.text).toMatch(/LiCoO2 in the feed/);
+    expect(caution!.limits).toMatch(/NIOSH 0\.5 ppm ceiling \(15 min\)/);
+  });
+});
+
+describe("(f) oxidant where extraction organic is in the circuit", () => {
+  test("a dosed oxidant or one in use, with organic only", () => {
+    const circuit = { sxOrganic: true };
+    expect(codes({ dosed: ["chlorate"], circuit })).toEqual(["ORGANIC"]);
+    expect(codes({ circuit: { ...circuit, reagents: ["permanganate"] } })).toEqual(["ORGANIC"]);
+    expect(codes({ dosed: ["chlorate"] })).toEqual([]);
+    expect(codes({ circuit })).toEqual([]);
+  });
+  test("air and ferric iron are in every such circuit, a reductant oxidises nothing", () =>
+    expect(codes({ circuit: { sxOrganic: true, reagents: ["air", "ferric", "sulfite"] }, dosed: ["sulfite"] })).toEqual(
+      [],
+    ));
+  test("the oxidants are named once each", () =>
+    expect(
+      cautionsFor({ ...quiet, dosed: ["peroxide"], circuit: { sxOrganic: true, reagents: ["peroxide"] } })[0]!.agents,
+    ).toEqual(["H2O2"]));
+});
+
+describe("(g) oxygen", () => {
+  test("above 100 kPa it warns, at 100 kPa it does not", () => {
+    expect(codes({ circuit: { oxygenKPa: 100 } })).toEqual([]);
+    expect(codes({ circuit: { oxygenKPa: 101 } })).toEqual(["OXYGEN"]);
+    expect(cautionsFor({ ...quiet, circuit: { oxygenKPa: 650 } })[0]!.text).toMatch(/650 kPa.*titanium/);
+  });
 });
 
 describe("(e) ammonia", () => {
@@ -155,6 +214,7 @@ test("the context is read from a plan: totals of ligands and others, sulfide whe
     feedMinerals: ["ZnO(s)"],
     dosed: ["peroxide"],
     sulfideSulfur: true,
+    circuit: {},
     setPoint: { pH: 4.5, Eh: 0 },
   });
 });
