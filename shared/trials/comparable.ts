@@ -1,0 +1,102 @@
+import { measure } from "../entry/measure";
+import type { Interval } from "../entry/interval";
+import { liquorContext } from "../metallurgy/account/liquor";
+import { say } from "../metallurgy/account/words";
+import { gammaOf } from "../plan/toProblem";
+import type { CampaignStage } from "../schemas/campaign";
+import type { SolutionAssay } from "../schemas/entry";
+import type { PlanInputs } from "../schemas/plan";
+import type { Trial } from "../schemas/trial";
+import type { LigandTotal } from "../schemas/trialRecord";
+import type { ChemicalData } from "../species/chemicalData";
+
+/** How far a trial may stand from the plan before its place on the plan's map means little: common practice, no source. */
+const MOST_KELVIN = 5;
+const MOST_FACTOR = 3;
+
+export interface Comparability {
+  /** false: drawn open and counted apart */
+  readonly comparable: boolean;
+  /** why not, each with both values */
+  readonly reasons: readonly string[];
+  /** what could not be compared, and is therefore not held against the trial */
+  readonly unknown: readonly string[];
+}
+
+/** Where two intervals come closest, how far apart they are as a factor. */
+const factorBetween = (a: Interval, b: number): number => (b < a.lo ? a.lo / b : b > a.hi ? b / a.hi : 1);
+
+const tenorIn = (
+  assays: readonly SolutionAssay[],
+  trial: Trial,
+  metal: string,
+  data: ChemicalData,
+  when: "start" | "end",
+) => {
+  const entry = assays.find(({ analyte }) => analyte === metal)?.value;
+  const found = entry && measure(entry, "solutionAssay", liquorContext(trial, metal, data.molarMass, when));
+  return found?.kind === "value" ? found.value : null;
+};
+
+/** Tenor the plan stands for: in g/L as entered; else what the trial was laid out on; else the activity over its gamma. In a
+ *  cementation the plan's activity is what may be left, so that only the trial's own planned tenor counts. */
+function plannedTenor(trial: Trial, target: string, inputs: PlanInputs, data: ChemicalData): number | null {
+  const line = inputs.metals.find((m) => m.element === target);
+  if (trial.kind === "leach" && line?.entry === "gPerL") return line.value;
+  const own = measure(trial.planned.tenor, "solutionAssay", liquorContext(trial, target, data.molarMass, "end"));
+  if (own.kind === "value") return own.value.lo;
+  const mass = data.molarMass.get(target);
+  if (trial.kind !== "leach" || line === undefined || mass === undefined) return null;
+  return (line.value / gammaOf(data, line, inputs.ionicStrength, inputs.temperatureC)) * mass;
+}
+
+const ligandIn = (list: readonly LigandTotal[], component: string, data: ChemicalData): Interval | null => {
+  const entry = list.find((l) => l.component === component)?.value;
+  const found = entry && measure(entry, "solutionAssay", { molarMass: data.molarMass.get(component) ?? null });
+  return found?.kind === "value" ? found.value : null;
+};
+
+/** Whether a trial may be judged on a plan's map: within 5 K, and within a factor 3 in the target's tenor and in each ligand's
+ *  total. A plan's totals are activities; where the trial was laid out on a total of its own, that one counts.
+ *  @param trial  record     @param temperatureC  measured, C; null where not recorded     @param stage  its stage
+ *  @param inputs  of the revision shown     @param data  library     @returns  the verdict with its reasons
+ *  @source  common practice, no source */
+export function comparable(
+  trial: Trial,
+  temperatureC: number | null,
+  stage: CampaignStage,
+  inputs: PlanInputs,
+  data: ChemicalData,
+): Comparability {
+  const reasons: string[] = [];
+  const unknown: string[] = [];
+  if (temperatureC === null) unknown.push("temperature not recorded");
+  else if (Math.abs(temperatureC - inputs.temperatureC) > MOST_KELVIN)
+    reasons.push(`${say(temperatureC)} °C, the plan ${say(inputs.temperatureC)} °C: more than ${MOST_KELVIN} K apart`);
+
+  const { target } = stage;
+  const [assays, when] =
+    trial.kind === "leach"
+      ? ([trial.products.finalAssays, "end"] as const)
+      : ([trial.charge.liquorAssays, "start"] as const);
+  const tenor = tenorIn(assays, trial, target, data, when);
+  const wanted = plannedTenor(trial, target, inputs, data);
+  if (tenor === null || wanted === null)
+    unknown.push(`${target} tenor ${tenor === null ? "not assayed" : "not planned"}`);
+  else if (factorBetween(tenor, wanted) > MOST_FACTOR)
+    reasons.push(
+      `${target} ${say(tenor.lo, 3)} g/L, the plan ${say(wanted, 3)} g/L: more than a factor ${MOST_FACTOR} apart`,
+    );
+
+  for (const { component, activity } of inputs.ligands) {
+    const found = ligandIn(trial.measured.ligands, component, data);
+    const mass = data.molarMass.get(component) ?? Number.NaN;
+    const laidOut = ligandIn(trial.planned.ligands, component, data)?.lo ?? activity * mass;
+    if (found === null || Number.isNaN(laidOut)) unknown.push(`${component} total not measured`);
+    else if (factorBetween(found, laidOut) > MOST_FACTOR)
+      reasons.push(
+        `${component} ${say(found.lo / mass, 3)} mol/L, the plan ${say(laidOut / mass, 3)} mol/L: more than a factor ${MOST_FACTOR} apart`,
+      );
+  }
+  return { comparable: reasons.length === 0, reasons, unknown };
+}

@@ -1,0 +1,72 @@
+import { describe, expect, test } from "vitest";
+import { demoPlans } from "../../../server/demo/plans";
+import type { TrialInput } from "../../../shared/schemas/trial";
+import { comparable } from "../../../shared/trials/comparable";
+import { chemistry } from "../../support/chemistry";
+import { assays, trialOf, typed } from "../../support/trials";
+
+const plan = (id: string) => demoPlans.find((p) => p.id === id)!.revisions.at(-1)!.inputs;
+const heap = plan("demo-oxide-heap"); // 25 C, Cu 0.02 as activity, S 0.1
+const stage = { code: "OX", name: "oxide leach", target: "Cu", gangue: "Fe" };
+const judged = (record: Partial<TrialInput>, T: number | null = 25, inputs = heap) =>
+  comparable(trialOf(record), T, stage, inputs, chemistry());
+const final = (Cu: string): Partial<TrialInput> => ({ products: { finalAssays: assays({ Cu }) } });
+const sulfate = (S: string) => ({ ligands: [{ component: "S", value: typed(S) }] });
+
+describe("temperature", () => {
+  test("5 K is near enough, more is not", () => {
+    expect(judged({}, 30).comparable).toBe(true);
+    expect(judged({}, 30.1)).toMatchObject({
+      comparable: false,
+      reasons: ["30.1 °C, the plan 25 °C: more than 5 K apart"],
+    });
+  });
+  test("not recorded is not held against the trial, but said", () => {
+    expect(judged({}, null).unknown).toContain("temperature not recorded");
+  });
+});
+
+describe("tenor", () => {
+  test("against the plan's activity by its gamma: 0.02 is 1.271 g/L", () => {
+    expect(judged(final("3.8 g/L")).comparable).toBe(true);
+    expect(judged(final("3.9 g/L")).reasons).toEqual(["Cu 3.9 g/L, the plan 1.27 g/L: more than a factor 3 apart"]);
+    expect(judged(final("0.40 g/L")).comparable).toBe(false);
+  });
+  test("against the tenor the trial was laid out on, where it has one", () => {
+    const record = { ...final("3.9 g/L"), planned: { tenor: typed("4 g/L") } };
+    expect(judged(record).comparable).toBe(true);
+  });
+  test("against g/L as entered, before both", () => {
+    const inputs = {
+      ...heap,
+      metals: heap.metals.map((m) => (m.element === "Cu" ? { ...m, entry: "gPerL" as const, value: 1 } : m)),
+    };
+    expect(judged({ ...final("3.9 g/L"), planned: { tenor: typed("4 g/L") } }, 25, inputs).comparable).toBe(false);
+  });
+  test("a censored tenor counts by its nearer end", () => {
+    expect(judged(final("<0.9 g/L")).comparable).toBe(true);
+    expect(judged(final("<0.3 g/L")).comparable).toBe(false);
+  });
+});
+
+test("ligands: the total the trial was laid out on counts before the plan's activity", () => {
+  expect(judged({ measured: sulfate("0.35 mol/L") }).reasons).toEqual([
+    "S 0.35 mol/L, the plan 0.1 mol/L: more than a factor 3 apart",
+  ]);
+  expect(judged({ measured: sulfate("0.35 mol/L"), planned: sulfate("0.3 mol/L") }).comparable).toBe(true);
+  expect(judged({}).unknown).toContain("S total not measured");
+});
+
+test("in a cementation the starting tenor counts, and never what may be left", () => {
+  const cement = { code: "CD", name: "zinc dust", target: "Cd", gangue: null };
+  const record = (Cd: string): Partial<TrialInput> => ({
+    kind: "cementation",
+    stage: "CD",
+    planned: { tenor: typed("400 mg/L") },
+    charge: { liquorAssays: assays({ Cd }) },
+    products: { finalAssays: assays({ Cd: "0.2 mg/L" }) },
+  });
+  const run = (Cd: string) => comparable(trialOf(record(Cd)), 55, cement, plan("demo-zinc-dust"), chemistry());
+  expect(run("380 mg/L").comparable).toBe(true);
+  expect(run("100 mg/L").comparable).toBe(false);
+});
