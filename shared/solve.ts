@@ -12,6 +12,7 @@ import type { ChemicalData } from "./species/chemicalData";
 import { warningsOf } from "./warnings";
 import { conflictsOf } from "./windows/conflicts";
 import { limitOf, loopsOf, pointsOf, segmentOf, type Ground } from "./windows/limits";
+import { isSliver } from "./windows/pieces";
 import { shutGroundOf } from "./windows/shutGround";
 
 export interface SolveOptions {
@@ -30,7 +31,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
   const { prepared, basis, cells, metals, bounds, pieces } = analysed.value;
   const { problem, data } = prepared;
   const ground: Ground = { data, cells, metals, pieces };
-  const regions = connect(pieces.map((p) => p.piece));
+  const regions = connect(pieces.map((p) => p.piece)).filter((r) => r.pieces.some((i) => !isSliver(pieces[i]!.piece)));
   const windows = regions.map((region) => windowOf(ground, region, prepared, basis)); // 6: limits, set point
   windows.sort((a, b) => b.setPoint.margin - a.setPoint.margin || b.area - a.area);
 

@@ -41,12 +41,13 @@ export function ligandNumbers(
 
 const byMain = new WeakMap<ChemicalData, Map<string, Species[]>>();
 
-/** All species that hold a component, in the order of the tables; indexed once per library. */
+/** All species that hold a component, in the order of their ids, so that no tie hangs on the order of a table; indexed once
+ *  per library. */
 export function speciesHolding(data: ChemicalData, component: string): readonly Species[] {
   let index = byMain.get(data);
   if (!index) {
     index = new Map();
-    for (const species of data.species.values()) {
+    for (const species of [...data.species.values()].sort((a, b) => (a.id < b.id ? -1 : 1))) {
       for (const part of Object.keys(species.composition)) {
         const list = index.get(part);
         if (list) list.push(species);

@@ -1,6 +1,6 @@
 import { LIGAND_EDGE, type LigandCell } from "../fields/ligandCells";
 import type { MetalFields } from "../fields/fields";
-import { clip, type Convex } from "../geometry/convex";
+import { areaOf, clip, type Convex } from "../geometry/convex";
 import type { Line } from "../geometry/line";
 import { fulfils } from "./requirement";
 
@@ -52,7 +52,7 @@ const apart = (a: Convex, b: Convex): boolean =>
 
 /** Where all metals are as required: per ligand cell, the intersection of each metal's fulfilled fields.
  *  @param cells  ligand cells     @param metals  fields of each metal over the same cells     @param bounds  water lines that bind
- *  @returns  convex pieces with disjoint interiors     @source  docs/method.md, step 5 */
+ *  @returns  convex pieces with disjoint interiors; none where all of them are slivers     @source  docs/method.md, step 5 */
 export function windowPieces(
   cells: readonly LigandCell[],
   metals: readonly MetalFields[],
@@ -73,8 +73,13 @@ export function windowPieces(
     }
     for (const piece of pieces) out.push({ piece, cell: c });
   });
-  return out;
+  return out.some((p) => !isSliver(p.piece)) ? out : [];
 }
+
+/** Two limits that differ by less than the grid can tell leave ground that is none: thinner than 1e-9 pH on average.
+ *  @param piece  convex     @returns  true for such a hair */
+export const isSliver = (piece: Convex): boolean =>
+  areaOf(piece) < 1e-9 * (Math.max(...piece.y) - Math.min(...piece.y));
 
 /** Part of a piece inside one field; only edges against other fields cut, the cell's own are the piece's already. */
 function within(piece: Convex, field: Convex, species: number, metal: number): Convex | null {

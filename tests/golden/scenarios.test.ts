@@ -4,7 +4,7 @@ import type { Problem, Requirement } from "../../shared/schemas/problem";
 import { speciesAt } from "../../shared/setpoint/crosscut";
 import { library, solved, wideFrame, band } from "../support/solver";
 import { presetChoice } from "../support/presets";
-import { borderValue, insideWindows, lineThroughWindows, overlapsBox, containsBox, type Axis } from "../support/read";
+import { borderValues, insideWindows, lineThroughWindows, overlapsBox, containsBox, type Axis } from "../support/read";
 
 /** Known answers, each with its source and argument in the file (copied from published ranges, hand calculation or brute
  *  force on the tables, as its `basis` says). Companions are not solved yet. */
@@ -75,9 +75,8 @@ describe.each(solvable.map((s) => [`${s.id} ${s.title}`, s] as const))("%s", (_,
         expect(e.one_of).toContain(speciesAt(solution, e.pH, e.E).find((s) => s.metal === e.metal)?.species);
         break;
       case "border": {
-        const value = borderValue(solution, e.metal, e.between, e.at, e.axis);
-        expect(value).not.toBeNull();
-        expect(Math.abs(value! - e.value)).toBeLessThanOrEqual(e.tol);
+        const values = borderValues(solution, e.metal, e.between, e.at, e.axis); // a field may touch another twice
+        expect(Math.min(...values.map((v) => Math.abs(v - e.value)))).toBeLessThanOrEqual(e.tol);
         break;
       }
       case "window_contains":

@@ -70,14 +70,14 @@ export function lineThroughWindows(solution: Solution, along: Axis, level: numbe
   return [Math.min(...hits), Math.max(...hits)];
 }
 
-/** Where two named fields of a metal touch along a line, read at the given pH (E): the value on the other axis. */
-export function borderValue(
+/** Where two named fields of a metal touch along a line, read at the given pH (E): the values on the other axis. */
+export function borderValues(
   solution: Solution,
   metal: string,
   [first, second]: readonly [string, string],
   at: { pH?: number; E?: number },
   axis: Axis,
-): number | null {
+): number[] {
   const [other, level] = axis === "pH" ? ([1, at.E!] as const) : ([0, at.pH!] as const);
   const along = axis === "pH" ? 0 : 1;
   const ends = (species: string): number[] =>
@@ -91,5 +91,5 @@ export function borderValue(
         }),
       );
   const others = ends(second);
-  return ends(first).find((x) => others.some((y) => Math.abs(x - y) < 1e-9)) ?? null;
+  return ends(first).filter((x) => others.some((y) => Math.abs(x - y) < 1e-9));
 }
