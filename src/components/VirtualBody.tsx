@@ -1,5 +1,5 @@
 import { useVirtualizer } from "@tanstack/react-virtual";
-import { useEffect, useRef } from "react";
+import { useEffect } from "react";
 import type { TableBodyProps } from "./tableBody";
 
 /** Only the rows in sight are in the page; two empty rows keep the place of the others. */
@@ -11,6 +11,8 @@ export function VirtualBody({ count, row, rowHeight, headHeight, box, startAt, r
     estimateSize: () => rowHeight,
     overscan: 12,
     scrollPaddingStart: headHeight + 4,
+    // An address may name a row far down: it stands a few rows under the headings when the table opens.
+    initialOffset: Math.max(0, startAt - 5) * rowHeight,
   });
   const items = virtualizer.getVirtualItems();
   const first = items[0]?.index ?? 0;
@@ -19,13 +21,6 @@ export function VirtualBody({ count, row, rowHeight, headHeight, box, startAt, r
   useEffect(() => {
     reveal.current = (index) => virtualizer.scrollToIndex(index);
   }, [reveal, virtualizer]);
-
-  const arrived = useRef(false);
-  useEffect(() => {
-    if (arrived.current || startAt < 0) return;
-    arrived.current = true;
-    if (startAt > 10) virtualizer.scrollToIndex(startAt, { align: "center" });
-  }, [startAt, virtualizer]);
 
   return (
     <>
@@ -38,6 +33,6 @@ export function VirtualBody({ count, row, rowHeight, headHeight, box, startAt, r
 
 const Gap = ({ height }: { height: number }) => (
   <tr aria-hidden>
-    <td colSpan={99} style={{ height, padding: 0 }} />
+    <td style={{ height, padding: 0 }} />
   </tr>
 );

@@ -57,8 +57,8 @@ export const speciesColumns: readonly Column<SpeciesRow>[] = [
     filtered: false,
     wide: true,
   },
-  { id: "grade", header: "grade", width: "3.4rem", value: (row) => row.grade, filtered: false },
-  { id: "source", header: "source", width: "5.4rem", value: (row) => row.source, wide: true },
+  { id: "grade", header: "grade", width: "4rem", value: (row) => row.grade, filtered: false },
+  { id: "source", header: "source", width: "5.9rem", value: (row) => row.source, wide: true },
 ];
 
 const number = (id: keyof SpeciesRow, unit: string): Column<SpeciesRow> => ({
