@@ -24,6 +24,8 @@ export interface SelectProps<Value extends string> {
   disabled?: boolean;
   readOnly?: boolean;
   layout?: "row" | "stacked" | "bare";
+  /** its place in a grid, by which the grid's keys find it */
+  cell?: string;
   className?: string;
 }
 
@@ -47,6 +49,7 @@ export function Select<Value extends string>(props: SelectProps<Value>) {
         id={id}
         aria-label={label}
         aria-invalid={Boolean(error)}
+        data-cell={props.cell}
         className={classes(
           "inline-flex h-6 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
           layout === "stacked" && "h-8! w-full",

@@ -1,11 +1,14 @@
+import { useMemo } from "react";
 import { speciesAt } from "../../shared/setpoint/crosscut";
 import type { Point, Solution } from "../../shared/solution";
 import { SpeciesName } from "../components/Formula";
 import { MetalName } from "../components/MetalLine";
-import { classes } from "../lib/classes";
 import { fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
+import { useThemeColours } from "../lib/theme";
 import { type CursorStore, useCursor } from "./cursor";
+import { hatchesOf, metalColour, shuts } from "./metalStyle";
+import { Swatch } from "./Swatch";
 import type { MapMetal } from "./view";
 
 /** Names every metal's species at the cursor, in one fixed place; without a cursor, at the point the crosscuts run through. */
@@ -24,6 +27,8 @@ export function ReadOut({
   rest: { at: Point; words: string } | null;
 }) {
   const cursor = useCursor(store);
+  const colours = useThemeColours();
+  const hatches = useMemo(() => hatchesOf(metals), [metals]);
   const at = cursor ?? rest?.at ?? null;
   const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
   const shut = here && metals.some((m) => here.get(m.element)?.fulfilled === false);
@@ -50,16 +55,22 @@ export function ReadOut({
             {metals.map((metal) => {
               const found = here?.get(metal.element);
               return (
-                <span key={metal.element} className="whitespace-nowrap">
-                  <MetalName {...metal} />{" "}
+                <span key={metal.element} className="inline-flex items-baseline gap-1 whitespace-nowrap">
+                  {found && shuts(metal) && (
+                    <Swatch
+                      small
+                      className="relative top-px"
+                      hatch={found.fulfilled ? null : (hatches.get(metal.element) ?? null)}
+                      fill={found.fulfilled ? colours.tint : "none"}
+                      colour={metalColour(metal, { colours })}
+                      title={
+                        found.fulfilled ? `${metal.element} is as required` : `${metal.element} is not as required`
+                      }
+                    />
+                  )}
+                  <MetalName {...metal} />
                   {found ? (
-                    <span
-                      className={classes(
-                        !found.fulfilled && "underline decoration-wavy decoration-1 underline-offset-2",
-                      )}
-                    >
-                      <SpeciesName id={found.species} withPhase />
-                    </span>
+                    <SpeciesName id={found.species} withPhase />
                   ) : (
                     <span className="text-muted">off the map</span>
                   )}

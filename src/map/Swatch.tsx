@@ -2,11 +2,28 @@ import { useId } from "react";
 import type { Hatch } from "./metalStyle";
 
 /** The hatch of a metal as it stands on the map, for a legend; empty where the metal shuts nothing. */
-export function Swatch({ hatch, colour, className }: { hatch: Hatch | null; colour: string; className?: string }) {
+export function Swatch({
+  hatch,
+  colour,
+  fill = "none",
+  small = false,
+  title,
+  className,
+}: {
+  hatch: Hatch | null;
+  colour: string;
+  /** ground without a hatch */
+  fill?: string;
+  small?: boolean;
+  title?: string;
+  className?: string;
+}) {
   const id = useId();
-  const size = hatch ? Math.min(hatch.size, 8) : 8;
+  const size = hatch ? Math.min(hatch.size, small ? 5 : 8) : 8;
+  const [width, height] = small ? [14, 10] : [24, 14];
   return (
-    <svg width={24} height={14} aria-hidden className={className}>
+    <svg width={width} height={height} className={className} {...(title ? { role: "img" } : { "aria-hidden": true })}>
+      {title && <title>{title}</title>}
       {hatch && (
         <defs>
           <pattern id={id} width={size} height={size} patternUnits="userSpaceOnUse">
@@ -14,7 +31,7 @@ export function Swatch({ hatch, colour, className }: { hatch: Hatch | null; colo
           </pattern>
         </defs>
       )}
-      <rect x={0.5} y={0.5} width={23} height={13} fill={hatch ? `url(#${id})` : "none"} stroke={colour} />
+      <rect x={0.5} y={0.5} width={width - 1} height={height - 1} fill={hatch ? `url(#${id})` : fill} stroke={colour} />
     </svg>
   );
 }

@@ -1,4 +1,5 @@
 import { lazy, Suspense, useCallback, useMemo, useRef, useState } from "react";
+import { Button } from "../components/Button";
 import { Loading } from "../components/status";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
@@ -9,6 +10,7 @@ import { mapFigure } from "./figure";
 import { haloStyle } from "./texts";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
+import { afterRelayout } from "./zoom";
 
 const Plot = lazy(() => import("./Plot"));
 
@@ -29,13 +31,12 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
   const size = useSize(holder);
   const { frame, scale } = view;
   const [zoom, setZoom] = useState<{ of: string; frame: Frame } | null>(null);
+  const [resets, setResets] = useState(0);
   // A zoom belongs to one frame on one scale; the axes go back when either changes, and so must this.
   const zoomOf = [frame.pH, frame.Eh, scale.unit, scale.short].flat().join(" ");
   const visible = zoom?.of === zoomOf ? zoom.frame : frame;
-  const { alongPH, reachShown } = {
-    alongPH: view.layers.crosscuts && content.through !== null,
-    reachShown: view.layers.reach,
-  };
+  const crosscuts = view.layers.crosscuts && content.through !== null;
+  const { reach } = view.layers;
 
   const sheet = useMemo(
     () =>
@@ -43,36 +44,24 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
       sheetBoxes(size.width, size.height, {
         metals: view.metals.length,
         reagents: content.reaches.length,
-        crosscuts: alongPH,
-        reach: reachShown,
+        crosscuts,
+        reach,
       }),
-    [size, view.metals.length, content.reaches.length, alongPH, reachShown],
+    [size, view.metals.length, content.reaches.length, crosscuts, reach],
   );
-  const figure = useMemo(
-    () => sheet && mapFigure(content, sheet, { ...view, visible }),
-    [content, sheet, view, visible],
-  );
+  const figure = useMemo(() => {
+    if (!sheet) return null;
+    const made = mapFigure(content, sheet, { ...view, visible });
+    // Plotly keeps a zoom while this text stands; one more reset is another text.
+    return { ...made, layout: { ...made.layout, uirevision: `${made.layout.uirevision} ${resets}` } };
+  }, [content, sheet, view, visible, resets]);
 
   const onRelayout = useCallback(
-    (change: Record<string, unknown>) => {
-      const reset = change["xaxis.autorange"] === true || change["yaxis.autorange"] === true;
+    (change: Record<string, unknown>) =>
       setZoom((old) => {
-        const from = old?.of === zoomOf ? old.frame : frame;
-        const read = (axis: "xaxis" | "yaxis", unchanged: readonly [number, number], back: (v: number) => number) => {
-          const [lo, hi] = [change[`${axis}.range[0]`], change[`${axis}.range[1]`]];
-          return typeof lo === "number" && typeof hi === "number"
-            ? ([back(lo), back(hi)] as [number, number])
-            : unchanged;
-        };
-        const next: Frame = reset
-          ? frame
-          : {
-              pH: [...read("xaxis", from.pH, (v) => v)],
-              Eh: [...read("yaxis", from.Eh, (v) => scale.fromShown(v))],
-            };
-        return { of: zoomOf, frame: next };
-      });
-    },
+        const next = afterRelayout(change, old?.of === zoomOf ? old.frame : frame, frame, scale);
+        return next && { of: zoomOf, frame: next };
+      }),
     [zoomOf, frame, scale],
   );
   const onDrawn = useCallback(() => {
@@ -95,6 +84,19 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
           <Suspense fallback={<Loading label="Opening the map" />}>
             <Plot figure={figure} onRelayout={onRelayout} onDrawn={onDrawn} />
           </Suspense>
+          {visible !== frame && (
+            <Button
+              kind="quiet"
+              className="no-print absolute! h-auto! text-xs!"
+              style={{ left: 8, bottom: sheet.map.y0 - 40 }}
+              onClick={() => {
+                setZoom(null);
+                setResets((n) => n + 1);
+              }}
+            >
+              whole frame
+            </Button>
+          )}
           <Cursor
             sheet={sheet}
             visible={visible}

@@ -5,7 +5,7 @@ import { alongEhNames, alongPHNames, crosscutTraces, stripHeads, type StripSizes
 import { boundaryTraces } from "./traces/fields";
 import { groundTrace, openGroundTraces, shutGroundTraces, windowOutlineTraces } from "./traces/ground";
 import { equilibriumTraces, hydrogenCyanideTraces, otherBasisTraces, waterTraces } from "./traces/lines";
-import { hydrogenCyanideName, nameTraces, otherBasisName } from "./traces/names";
+import { nameTraces } from "./traces/names";
 import { reachHeads, reachTraces } from "./traces/reachBars";
 import { setPointTraces } from "./traces/setPoint";
 import { type MapView, MONO } from "./view";
@@ -21,7 +21,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
   const { layers } = view;
   const setPoint = solution.windows[view.window]?.setPoint ?? null;
   const reagents = content.reaches.map((r) => r.reagent);
-  return [
+  const all = [
     groundTrace(view),
     ...openGroundTraces(solution, view),
     ...shutGroundTraces(content.shut, view),
@@ -32,8 +32,6 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     ...(layers.otherBasis && content.moved ? otherBasisTraces(content.moved.limits, view) : []),
     ...windowOutlineTraces(solution, view),
     ...(layers.setPoint ? setPointTraces(setPoint, layers.crosscuts ? through : null, view) : []),
-    ...(layers.otherBasis && content.moved ? otherBasisName(content.moved.limits, content.moved.basis, view) : []),
-    ...(layers.hazard && content.cyanide ? hydrogenCyanideName(view) : []),
     ...nameTraces(content, sheet, view),
     ...(sheet.alongPH && through
       ? [
@@ -43,6 +41,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
       : []),
     ...(sheet.reach ? reachTraces(content.reaches, view) : []),
   ];
+  return all.filter((t) => t.x.length > 0);
 }
 
 function annotations(content: MapContent, sheet: Sheet, view: MapView): PlotAnnotation[] {
@@ -112,6 +111,8 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
     tickcolor: colours.ink,
     tickfont: { family: MONO, size: 12, color: colours.ink },
     layer: "above traces",
+    tickangle: 0,
+    ticklabeloverflow: "allow",
   };
   const range = (bounds: readonly [number, number]): [number, number] => [
     scale.toShown(bounds[0]),
@@ -126,6 +127,8 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
     ticks: "outside",
     ticklen: 4,
     tickcolor: "rgba(0,0,0,0)",
+    tickangle: 0,
+    ticklabeloverflow: "allow",
     tickfont: { family: MONO, size: 11, color: colours.ink },
   };
   const heads = stripHeads(content.crosscuts, view);

@@ -16,14 +16,14 @@ export interface PlotTrace {
   name: string;
   x: Coordinate[];
   y: Coordinate[];
-  mode: "lines" | "markers" | "text";
+  mode: "lines" | "lines+markers" | "text";
   xaxis?: "x" | "x2" | "x3";
   yaxis?: "y" | "y2";
   line?: { color: string; width: number; dash?: string; shape?: "linear"; simplify?: boolean };
   fill?: "toself" | "none";
   fillcolor?: string;
   fillpattern?: PatternFill;
-  marker?: { color: string; size: number; symbol: string; line?: { color: string; width: number } };
+  marker?: { color: string; size: number[]; symbol: string; line: { width: number } };
   text?: string[];
   textposition?: "middle center";
   textfont?: { color: string[]; size: number[] };
@@ -76,6 +76,8 @@ export interface PlotAxis {
   tickvals?: number[];
   ticktext?: string[];
   tickangle?: number;
+  /** "allow" spares Plotly measuring every label */
+  ticklabeloverflow?: "allow";
 }
 
 export interface PlotLayout {

@@ -9,8 +9,10 @@ export interface Box {
 
 export interface LabelWish {
   id: string;
-  /** convex pieces that make up the field, in px */
+  /** pieces that make up the field, in px */
   pieces: readonly (readonly Pixel[])[];
+  /** parts of the pieces where the name must not stand */
+  holes?: readonly (readonly Pixel[])[];
   width: number;
   height: number;
 }
@@ -24,20 +26,18 @@ const GROWTH = [1, 1.25, 1.6, 2.1, 2.8] as const;
 
 const overlaps = (a: Box, b: Box): boolean => a.x0 < b.x1 && b.x0 < a.x1 && a.y0 < b.y1 && b.y0 < a.y1;
 
+/** Even-odd, for rings of any shape. */
 function inside(ring: readonly Pixel[], x: number, y: number): boolean {
-  let side = 0;
-  for (let i = 0; i < ring.length; i++) {
-    const a = ring[i] as Pixel;
-    const b = ring[(i + 1) % ring.length] as Pixel;
-    const cross = (b[0] - a[0]) * (y - a[1]) - (b[1] - a[1]) * (x - a[0]);
-    if (cross === 0) continue;
-    if (side === 0) side = Math.sign(cross);
-    else if (Math.sign(cross) !== side) return false;
+  let odd = false;
+  for (let i = 0, j = ring.length - 1; i < ring.length; j = i++) {
+    const [ax, ay] = ring[i] as Pixel;
+    const [bx, by] = ring[j] as Pixel;
+    if (ay > y !== by > y && x < ax + ((y - ay) / (by - ay)) * (bx - ax)) odd = !odd;
   }
-  return true;
+  return odd;
 }
 
-/** Clips a convex polygon to a box (Sutherland and Hodgman 1974). */
+/** Clips a polygon to a box (Sutherland and Hodgman 1974). */
 export function clipToBox(ring: readonly Pixel[], { x0, y0, x1, y1 }: Box): Pixel[] {
   const cut = (points: readonly Pixel[], axis: 0 | 1, bound: number, keep: 1 | -1): Pixel[] =>
     points.flatMap((a, i) => {
@@ -133,7 +133,9 @@ function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonl
   const pieces = wish.pieces.map((ring) => clipToBox(ring, view)).filter((ring) => ring.length >= 3);
   if (pieces.length === 0) return null;
   const bounds = pieces.map(boundsOf);
+  const holes = wish.holes ?? [];
   const within = ([x, y]: Pixel) =>
+    !holes.some((ring) => inside(ring, x, y)) &&
     pieces.some((ring, i) => {
       const b = bounds[i] as Box;
       return x >= b.x0 && x <= b.x1 && y >= b.y0 && y <= b.y1 && inside(ring, x, y);

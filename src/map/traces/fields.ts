@@ -26,19 +26,27 @@ export function boundariesByMetal(fields: readonly Field[], frame: MapView["fram
   );
 }
 
-/** Predominance boundaries, one trace a metal, weighted by role; gangue and target above the watched. */
+/** Predominance boundaries weighted by role, the target's on top. Metals that are drawn alike share a trace: each trace costs at
+ *  every step of a drag. */
 export function boundaryTraces(lines: ReadonlyMap<string, readonly (readonly Point[])[]>, view: MapView): PlotTrace[] {
-  const order = { watched: 0, gangue: 1, target: 2 };
-  return [...view.metals]
-    .sort((a, b) => order[a.role] - order[b.role])
-    .map((metal) =>
-      trace({
-        uid: `fields-${metal.element}`,
-        name: `Field boundaries of ${metal.element}`,
-        mode: "lines",
-        line: { color: metalColour(metal, view), ...style[metal.role] },
-        opacity: emphasis(metal.element, view),
-        ...lineCoordinates(lines.get(metal.element) ?? [], view.scale.toShown),
-      }),
-    );
+  return (["watched", "gangue", "target"] as const).flatMap((role) =>
+    [false, true].flatMap((aside) => {
+      const metals = view.metals.filter((m) => m.role === role && emphasis(m.element, view) < 1 === aside);
+      const [first] = metals;
+      if (!first) return [];
+      return [
+        trace({
+          uid: `fields-${role}${aside ? "-aside" : ""}`,
+          name: `Field boundaries of ${metals.map((m) => m.element).join(", ")}`,
+          mode: "lines",
+          line: { color: metalColour(first, view), ...style[role] },
+          opacity: emphasis(first.element, view),
+          ...lineCoordinates(
+            metals.flatMap((m) => lines.get(m.element) ?? []),
+            view.scale.toShown,
+          ),
+        }),
+      ];
+    }),
+  );
 }

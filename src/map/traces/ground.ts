@@ -56,7 +56,7 @@ export function openGroundTraces(solution: Pick<Solution, "windows">, view: MapV
       line: { color: "rgba(0,0,0,0)", width: 0 },
       fill: "toself",
       fillcolor: view.colours.tint,
-      opacity: view.plain ? 0.55 : i === view.window ? 1 : 0.6,
+      opacity: i === view.window ? 1 : 0.6,
       ...ringCoordinates(window.polygons, view.scale.toShown),
     }),
   );

@@ -6,17 +6,22 @@ import { lineCoordinates, ringCoordinates } from "../geometry/rings";
 import { type PlotTrace, trace } from "../plotTypes";
 import type { MapView } from "../view";
 
-/** The stability lines of water, dashed, across the frame. */
+/** The stability lines of water, oxygen's and hydrogen's at 1 bar, dashed across the frame. */
 export function waterTraces(solution: Pick<Solution, "waterLines">, view: MapView): PlotTrace[] {
-  return solution.waterLines.map(({ which, intercept, slope }) =>
+  return [
     trace({
-      uid: `water-${which}`,
-      name: which === "oxygen" ? "Oxygen line, 1 bar" : "Hydrogen line, 1 bar",
+      uid: "water",
+      name: "Oxygen and hydrogen lines, 1 bar",
       mode: "lines",
       line: { color: view.colours.water, width: 1.3, dash: "8px,5px" },
-      ...lineCoordinates([view.frame.pH.map((pH): Point => [pH, intercept + slope * pH])], view.scale.toShown),
+      ...lineCoordinates(
+        solution.waterLines.map(({ intercept, slope }) =>
+          view.frame.pH.map((pH): Point => [pH, intercept + slope * pH]),
+        ),
+        view.scale.toShown,
+      ),
     }),
-  );
+  ];
 }
 
 /** Equilibrium lines of reagents against pH, every activity one and E0 of 25 C: a thin reminder, not a promise. */

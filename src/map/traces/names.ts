@@ -54,8 +54,9 @@ function windowWishes(
   toPixel: (pH: number, Eh: number) => Pixel,
 ): Wish[] {
   return solution.windows.map((window, i): Wish => {
-    // The name stands in the box of the window's outer rings; a slanted window may push it aside, never out of the map.
-    const pieces = window.polygons.map(({ outer }) => outer.map(([pH, Eh]) => toPixel(pH, Eh)));
+    const ring = (points: readonly Point[]) => points.map(([pH, Eh]) => toPixel(pH, Eh));
+    const pieces = window.polygons.map(({ outer }) => ring(outer));
+    const holes = window.polygons.flatMap((polygon) => polygon.holes.map(ring));
     const words = [`Window ${windowName(i)}`];
     if (!window.controllable) words.push("narrower than the control bands");
     else if (window.setPoint.cutByFrame) words.push("cut by the frame");
@@ -63,6 +64,7 @@ function windowWishes(
     return {
       id: `window ${i}`,
       pieces,
+      holes,
       width: longest + 8,
       height: words.length > 1 ? 32 : 18,
       html: `<b>${words[0]}</b>${words[1] ? `<br><span style="font-size:10px">${words[1]}</span>` : ""}`,
@@ -97,6 +99,12 @@ export function nameTraces(content: MapContent, sheet: Sheet, view: MapView): Pl
     ),
     ...(content.moved && view.layers.otherBasis ? content.moved.limits.flatMap((l) => segments([l.from, l.to])) : []),
   ];
+  const fixed = [...otherBasisName(content, view), ...hydrogenCyanideName(content, view)];
+  for (const text of fixed) {
+    const [x, y] = toPixel(text.x, view.scale.fromShown(text.y));
+    const half = (text.html.length * 0.6 * text.size) / 2 + 4;
+    taken.push({ x0: x - half, y0: y - 9, x1: x + half, y1: y + 9 });
+  }
   const placed = placeLabels(wishes, inSight, taken, lines);
   const texts = wishes.flatMap((wish) => {
     const spot = placed.get(wish.id);
@@ -113,39 +121,42 @@ export function nameTraces(content: MapContent, sheet: Sheet, view: MapView): Pl
   });
   const on = (lit: boolean) => texts.filter((t) => t.lit === lit).map((t) => t.text);
   return [
-    textTrace("names-on-sheet", "Names on shut ground", on(false)),
+    textTrace("names-on-sheet", "Names on shut ground", [...on(false), ...fixed]),
     textTrace("names-on-lit", "Names on open ground", on(true)),
   ];
 }
 
 /** Name on the thin edge of the other solids basis, at its longest stretch: the solid that forms there and the basis. */
-export function otherBasisName(moved: readonly Limit[], basis: string, view: MapView): PlotTrace[] {
+function otherBasisName({ moved }: Pick<MapContent, "moved">, view: MapView): PlacedText[] {
+  if (!moved || !view.layers.otherBasis) return [];
   const length = ({ from, to }: Limit) => Math.hypot(to[0] - from[0], 10 * (to[1] - from[1]));
-  const longest = [...moved].sort((a, b) => length(b) - length(a))[0];
+  const longest = [...moved.limits].sort((a, b) => length(b) - length(a))[0];
   if (!longest) return [];
   const solid = [longest.inside, longest.outside].find((s) => s !== undefined && speciesParts(s).phase === "s");
   const what = solid === undefined ? "" : speciesParts(solid).form || speciesHtml(solid, SMALL_SIZE).html;
-  const text: PlacedText = {
-    html: [what, basis].filter(Boolean).join(", "),
-    x: (longest.from[0] + longest.to[0]) / 2,
-    y: view.scale.toShown((longest.from[1] + longest.to[1]) / 2),
-    colour: view.colours.verdigris,
-    size: SMALL_SIZE,
-  };
-  return [textTrace("basis-name-on-sheet", "Name of the other solids basis", [text])];
+  return [
+    {
+      html: [what, moved.basis].filter(Boolean).join(", "),
+      x: (longest.from[0] + longest.to[0]) / 2,
+      y: view.scale.toShown((longest.from[1] + longest.to[1]) / 2),
+      colour: view.colours.verdigris,
+      size: SMALL_SIZE,
+    },
+  ];
 }
 
 /** Words on the edge of the HCN region, at the top of the map. */
-export function hydrogenCyanideName(view: MapView): PlotTrace[] {
+function hydrogenCyanideName({ cyanide }: Pick<MapContent, "cyanide">, view: MapView): PlacedText[] {
   const [lo, hi] = view.visible.pH;
   const edge = Math.min(HCN_PH, hi);
-  if (edge <= lo) return [];
-  const text: PlacedText = {
-    html: "HCN below pH 10.5",
-    x: edge - 0.13 * (hi - lo) > lo ? edge - 0.13 * (hi - lo) : (lo + edge) / 2,
-    y: view.scale.toShown(view.visible.Eh[1] - 0.035 * (view.visible.Eh[1] - view.visible.Eh[0])),
-    colour: view.colours.signal,
-    size: SIZE,
-  };
-  return [textTrace("hcn-name-on-sheet", "HCN region", [text])];
+  if (!cyanide || !view.layers.hazard || edge <= lo) return [];
+  return [
+    {
+      html: "HCN below pH 10.5",
+      x: edge - 0.13 * (hi - lo) > lo ? edge - 0.13 * (hi - lo) : (lo + edge) / 2,
+      y: view.scale.toShown(view.visible.Eh[1] - 0.035 * (view.visible.Eh[1] - view.visible.Eh[0])),
+      colour: view.colours.signal,
+      size: SIZE,
+    },
+  ];
 }

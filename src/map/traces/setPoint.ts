@@ -38,22 +38,23 @@ export function setPointTraces(
     [at.pH + band.pH, at.Eh + band.Eh],
     [at.pH - band.pH, at.Eh + band.Eh],
   ];
+  const outline = ringCoordinates([{ outer: box, holes: [] }], scale.toShown);
   return [
     ...(guide ? [guide] : []),
-    trace({
-      uid: "band",
-      name: "Control bands",
-      mode: "lines",
-      line: { color: colours.verdigris, width: 1.8 },
-      ...ringCoordinates([{ outer: box, holes: [] }], scale.toShown),
-    }),
+    // One trace: the corners of the box carry no mark, the point behind the gap does.
     trace({
       uid: "set-point",
-      name: "Set point",
-      mode: "markers",
-      marker: { color: colours.verdigris, size: 8, symbol: "circle" },
-      x: [at.pH],
-      y: [scale.toShown(at.Eh)],
+      name: "Set point in its control bands",
+      mode: "lines+markers",
+      line: { color: colours.verdigris, width: 1.8 },
+      marker: {
+        color: colours.verdigris,
+        size: [...outline.x.map(() => 0), 0, 8],
+        symbol: "circle",
+        line: { width: 0 },
+      },
+      x: [...outline.x, null, at.pH],
+      y: [...outline.y, null, scale.toShown(at.Eh)],
     }),
   ];
 }

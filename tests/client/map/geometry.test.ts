@@ -5,7 +5,8 @@ import { boundaryLines, chained } from "../../../src/map/geometry/boundaries";
 import { clipToBox, placeLabels, type Pixel } from "../../../src/map/geometry/labels";
 import { isLit } from "../../../src/map/geometry/lit";
 import { lineCoordinates, ringCoordinates, signedArea2 } from "../../../src/map/geometry/rings";
-import { fields, solution } from "./fixture";
+import { afterRelayout } from "../../../src/map/zoom";
+import { fields, millivolts, solution } from "./fixture";
 
 const square = (x0: number, x1: number): Point[] => [
   [x0, x0],
@@ -164,6 +165,25 @@ describe("names in the fields", () => {
   });
   test("a name may lie across the seam of two pieces", () =>
     expect(placeLabels([wish("a", block(0, 0, 40, 40), block(40, 0, 80, 40))], view, []).has("a")).toBe(true));
+  test("a name keeps out of a hole in its field", () => {
+    const hole = block(60, 0, 340, 300);
+    const at = placeLabels([{ ...wish("a", block(0, 0, 400, 300)), width: 40, holes: [hole] }], view, []).get("a")!;
+    expect(at[0] + 20 <= 60 || at[0] - 20 >= 340).toBe(true);
+  });
+  test("a field with a bay takes a name beside the bay, not across it", () => {
+    const bay: Pixel[] = [
+      [0, 0],
+      [400, 0],
+      [400, 300],
+      [220, 300],
+      [220, 60],
+      [180, 60],
+      [180, 300],
+      [0, 300],
+    ];
+    const at = placeLabels([{ ...wish("a", bay), height: 80 }], view, []).get("a")!;
+    expect(at[0] + 30 <= 180 || at[0] - 30 >= 220).toBe(true);
+  });
   test("names do not cover each other, nor what is already there", () => {
     const placed = placeLabels([wish("a", block(0, 0, 400, 40)), wish("b", block(0, 0, 400, 40))], view, [
       { x0: 0, y0: 0, x1: 120, y1: 40 },
@@ -231,5 +251,27 @@ describe("the sheet", () => {
     expect(pH).toBeCloseTo(5.1);
     expect(Eh).toBeCloseTo(0.58);
     expect(toPixel(1, 1.2)).toEqual([box.x0, box.y0]);
+  });
+});
+
+describe("what is in sight after a zoom", () => {
+  const frame = solution.frame;
+  const after = (change: Record<string, unknown>, from = frame) => afterRelayout(change, from, frame, millivolts);
+  test("ranges come in either notation, potentials back from the shown scale", () => {
+    expect(after({ "xaxis.range[0]": 2, "xaxis.range[1]": 4, "yaxis.range": [0, 300] })).toEqual({
+      pH: [2, 4],
+      Eh: [0.2, 0.5],
+    });
+  });
+  test("an axis that did not move keeps its range", () =>
+    expect(after({ "xaxis.range[0]": 2, "xaxis.range[1]": 4 }, { pH: [0, 9], Eh: [0.1, 0.2] })).toEqual({
+      pH: [2, 4],
+      Eh: [0.1, 0.2],
+    }));
+  test("the whole frame is no zoom", () => {
+    expect(
+      after({ "xaxis.range[0]": 0, "xaxis.range[1]": 10, "yaxis.range[0]": -200, "yaxis.range[1]": 800 }),
+    ).toBeNull();
+    expect(after({ "xaxis.autorange": true })).toBeNull();
   });
 });

@@ -70,18 +70,22 @@ describe("shut and open ground", () => {
 });
 
 describe("lines", () => {
-  test("field boundaries come one trace a metal, the target heavier than the watched", () => {
+  test("field boundaries are weighted by role, the target heavier than the watched", () => {
     const lines = boundariesByMetal(solution.fields, solution.frame);
     const watched = view.metals.map((m) => (m.element === "Fe" ? { ...m, role: "watched" as const } : m));
     const traces = boundaryTraces(lines, { ...view, metals: watched });
-    expect(byUid(traces, "fields-Zn").line!.width).toBeGreaterThan(byUid(traces, "fields-Fe").line!.width);
-    expect(byUid(traces, "fields-Zn").x.every((x) => x === null || Math.abs(x - 6) < 1e-9)).toBe(true);
+    expect(byUid(traces, "fields-target").line!.width).toBeGreaterThan(byUid(traces, "fields-watched").line!.width);
+    expect(byUid(traces, "fields-target").x.every((x) => x === null || Math.abs(x - 6) < 1e-9)).toBe(true);
+    const one = boundaryTraces(lines, { ...view, focus: "Zn" });
+    expect(byUid(one, "fields-target").opacity).toBe(1);
+    expect(byUid(one, "fields-gangue-aside").opacity).toBeLessThan(0.5);
   });
   test("water lines run from side to side of the frame", () => {
     const [oxygen] = waterTraces(solution, view);
-    expect(oxygen!.x).toEqual([0, 10]);
+    expect(oxygen!.x).toEqual([0, 10, null, 0, 10]);
     expect(oxygen!.y[0]).toBeCloseTo((1.2 - 0.2) * 1000);
     expect(oxygen!.y[1]).toBeCloseTo((1.2 - 0.66 - 0.2) * 1000);
+    expect(oxygen!.y[3]).toBeCloseTo(-200);
   });
   test("HCN ends at pH 10.5, or at the frame without an edge line", () => {
     const wide = hydrogenCyanideTraces({ ...view, frame: { pH: [9, 13], Eh: [0, 1] } });
@@ -105,8 +109,11 @@ describe("lines", () => {
 
 describe("set point", () => {
   test("its box is two control bands wide and high, on the chosen scale", () => {
-    const band = byUid(setPointTraces({ pH: 5, Eh: 0.5 }, [5, 0.5], view), "band");
-    expect(Math.max(...band.x.map(Number)) - Math.min(...band.x.map(Number))).toBeCloseTo(0.3);
+    const band = byUid(setPointTraces({ pH: 5, Eh: 0.5 }, [5, 0.5], view), "set-point");
+    const x = band.x.filter((v) => v !== null);
+    expect(Math.max(...x) - Math.min(...x)).toBeCloseTo(0.3);
+    expect(band.marker!.size.filter((size) => size > 0)).toHaveLength(1);
+    expect([x.at(-1), shown(band).at(-1)]).toEqual([5, 300]);
     expect(Math.max(...shown(band)) - Math.min(...shown(band))).toBeCloseTo(60);
   });
   test("without a window the lines stay and box and point go", () =>
@@ -150,7 +157,8 @@ describe("the figure", () => {
     const hatched = byUid(figure.data, "cut-pH-Zn").x.filter((x) => x !== null);
     expect([Math.min(...hatched), Math.max(...hatched)]).toEqual([6, 10]);
   });
-  test("along Eh at pH 1 iron is as required throughout", () => expect(byUid(figure.data, "cut-Eh-Fe").x).toEqual([]));
+  test("along Eh at pH 1 iron is as required throughout", () =>
+    expect(byUid(figure.data, "cut-Eh-Fe")).toBeUndefined());
   test("ranges and names are on the chosen scale, and the axis says which", () => {
     expect(figure.layout.yaxis.range).toEqual([-200, 800]);
     expect(figure.layout.annotations.map((a) => a.text)).toContain("Eh / mV vs Ag/AgCl");
@@ -189,7 +197,6 @@ describe("the figure", () => {
       "shut-Zn",
       "shut-Fe",
       "outline-0",
-      "names-on-sheet",
       "names-on-lit",
     ]);
     expect([bare.layout.xaxis2, bare.layout.xaxis3, bare.layout.yaxis2]).toEqual([undefined, undefined, undefined]);

@@ -13,6 +13,7 @@ import { Note, SectionHead } from "../../../components/text";
 import { lixiviantName } from "../../../lib/planWords";
 import { addTotal, removeTotal, setPreset, setTotal, toggleIn } from "../model/edit";
 import { useAsking } from "./context";
+import { Fold } from "./Fold";
 import { Refusal } from "./Refusal";
 
 /** What dissolves: the liquor's ligands and their totals. */
@@ -55,10 +56,9 @@ export function LixiviantSection() {
         </Check>
       )}
       {note !== "" && (
-        <details className="text-sm text-muted">
-          <summary className="w-fit">About this liquor</summary>
+        <Fold title="About this liquor" className="text-muted">
           <FormulaText text={note} />
-        </details>
+        </Fold>
       )}
       <Dosed />
     </section>
@@ -143,10 +143,13 @@ function Dosed() {
   const { inputs, edit, data, readOnly } = useAsking();
   const names = [...new Set(data.tables.defaults.flatMap(({ when }) => /unless_dosed:(\w+)/.exec(when)?.[1] ?? []))];
   return (
-    <details className="text-sm">
-      <summary className="w-fit text-muted">
-        {inputs.dosed.length === 0 ? "No metastable reagent is dosed" : `Dosed: ${inputs.dosed.join(", ")}`}
-      </summary>
+    <Fold
+      title={
+        <span className="text-muted">
+          {inputs.dosed.length === 0 ? "No metastable reagent is dosed" : `Dosed: ${inputs.dosed.join(", ")}`}
+        </span>
+      }
+    >
       <Note>Their species last long enough to count only while they are fed.</Note>
       {names.map((name) => (
         <Check
@@ -158,6 +161,6 @@ function Dosed() {
           {name}
         </Check>
       ))}
-    </details>
+    </Fold>
   );
 }

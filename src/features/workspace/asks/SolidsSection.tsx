@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import { type PlanInputs } from "../../../../shared/schemas/plan";
 import { solidsBases } from "../../../../shared/schemas/problem";
 import { speciesHolding } from "../../../../shared/selection/components";
@@ -12,6 +12,7 @@ import { TextField } from "../../../components/TextField";
 import { Note, SectionHead } from "../../../components/text";
 import { leaveOut, noLongerPutBack, putBack, toggleIn } from "../model/edit";
 import { useAsking } from "./context";
+import { Fold } from "./Fold";
 import { Refusal } from "./Refusal";
 
 const meaning: Readonly<Record<PlanInputs["solidsBasis"], string>> = {
@@ -40,6 +41,8 @@ export function SolidsSection() {
         {meaning[inputs.solidsBasis]}
       </Note>
       <FeedMinerals />
+      <Refusal path="leftOut" />
+      <Refusal path="putBack" />
       <LeftOut />
     </section>
   );
@@ -50,15 +53,18 @@ const item = "hairline flex items-baseline justify-between gap-2 py-0.5";
 
 function FeedMinerals() {
   const { inputs, edit, data, readOnly } = useAsking();
-  const minerals = inputs.metals
-    .flatMap((m) => speciesHolding(data, m.element))
-    .filter((s) => s.phase === "s" && Object.keys(s.composition).length > 1 && !inputs.feedMinerals.includes(s.id));
-  const options = [...new Map(minerals.map((s) => [s.id, s])).values()].map((s) => ({
-    value: s.id,
-    label: <SpeciesName id={s.id} />,
-    text: `${s.name} ${s.id}`,
-    note: s.name,
-  }));
+  const { metals, feedMinerals } = inputs;
+  const options = useMemo(() => {
+    const minerals = metals
+      .flatMap((m) => speciesHolding(data, m.element))
+      .filter((s) => s.phase === "s" && Object.keys(s.composition).length > 1 && !feedMinerals.includes(s.id));
+    return [...new Map(minerals.map((s) => [s.id, s])).values()].map((s) => ({
+      value: s.id,
+      label: <SpeciesName id={s.id} />,
+      text: `${s.name} ${s.id}`,
+      note: s.name,
+    }));
+  }, [metals, feedMinerals, data]);
   return (
     <div className="mt-1">
       {inputs.feedMinerals.length > 0 && (
@@ -97,11 +103,10 @@ function LeftOut() {
   // A species of two metals is refused once for each of them.
   const all = [...new Map((solution?.leftOut ?? []).map((l) => [l.species, l])).values()];
   return (
-    <details className="mt-1">
-      <summary className="w-fit text-sm">
-        {all.length === 0 ? "No species is left out" : `${all.length} species left out, with reasons`}
-      </summary>
-      <Refusal path="leftOut" />
+    <Fold
+      className="mt-1"
+      title={all.length === 0 ? "No species is left out" : `${all.length} species left out, with reasons`}
+    >
       {!readOnly && <LeaveOneOut />}
       <ul className={list} aria-label="Species left out">
         {all
@@ -122,7 +127,6 @@ function LeftOut() {
             </li>
           ))}
       </ul>
-      <Refusal path="putBack" />
       {inputs.putBack.length > 0 && (
         <ul className={list} aria-label="Species put back">
           {inputs.putBack.map((id) => (
@@ -139,7 +143,7 @@ function LeftOut() {
           ))}
         </ul>
       )}
-    </details>
+    </Fold>
   );
 }
 
