@@ -1,0 +1,135 @@
+import type { Analysis } from "../analysis";
+import { LN10 } from "../constants";
+import type { Convex } from "../geometry/convex";
+import { valueAt, type Line } from "../geometry/line";
+import { formationOf } from "../planes/formation";
+import { STEPS_PER_JOULE, type Basis } from "../planes/grid";
+import { SULFIDE_SULFUR } from "../selection/components";
+
+/** Gases whose pressure over the liquor follows from its metals and ligands. */
+export const hazardGases = ["HCN", "H2S", "AsH3", "SbH3", "Cl2", "NH3", "H2"] as const;
+export type HazardGas = (typeof hazardGases)[number];
+
+/** The element or group a gas takes from the liquor; hydrogen needs nothing but water. */
+const carrier: Readonly<Record<HazardGas, string | null>> = {
+  HCN: "CN",
+  H2S: "S",
+  AsH3: "As",
+  SbH3: "Sb",
+  Cl2: "Cl",
+  NH3: "NH3",
+  H2: null,
+};
+
+/** A convex piece of the frame on which R T ln p is linear: value of `line` over `scale`, in steps of the grid. */
+export interface PressurePiece {
+  readonly piece: Convex;
+  readonly line: Line;
+  readonly scale: number;
+}
+
+/** Equilibrium pressure of one gas over the frame. */
+export interface GasPressure {
+  readonly gas: HazardGas;
+  /** R T in steps of the grid */
+  readonly thermal: number;
+  readonly pieces: readonly PressurePiece[];
+  /** what stands for the gas's element in the plan: component or metal, and its total activity; null for hydrogen */
+  readonly of: { readonly component: string; readonly activity: number } | null;
+}
+
+const id = (gas: HazardGas): string => `${gas}(g)`;
+
+/** From a ligand: each cell's potential times the atoms the gas holds, less the gas itself. */
+function overLigand(analysis: Analysis, gas: HazardGas, main: string, component: string): PressurePiece[] {
+  const { basis, cells, prepared } = analysis;
+  const { plane } = formationOf(gasSpecies(analysis, gas), main, 1, [], basis);
+  return cells.flatMap(({ piece, holders }) => {
+    const held = holders.get(component)?.potential;
+    if (held === undefined) throw new Error(`${component} of ${prepared.problem.temperatureC} C holds no cell`);
+    const n = plane.atoms;
+    return [{ piece, line: [n * held.k - plane.k, n * held.x - plane.x, n * held.y - plane.y], scale: 1 }];
+  });
+}
+
+/** From a metal of the plan: the ruling species' plane per atom. */
+function overMetal(analysis: Analysis, gas: HazardGas, element: string): PressurePiece[] {
+  const metal = analysis.metals.find((m) => m.metal.element === element);
+  const { plane: g } = formationOf(gasSpecies(analysis, gas), element, 1, [], analysis.basis);
+  return (metal?.cells ?? []).flatMap(({ planes, pieces }) =>
+    pieces.flatMap(({ plane, piece }) => {
+      const p = planes[plane];
+      if (p === undefined) return [];
+      const line: Line = [g.atoms * p.k - p.atoms * g.k, g.atoms * p.x - p.atoms * g.x, g.atoms * p.y - p.atoms * g.y];
+      return [{ piece, line, scale: p.atoms }];
+    }),
+  );
+}
+
+function gasSpecies({ prepared }: Analysis, gas: HazardGas) {
+  const species = prepared.data.species.get(id(gas));
+  if (species === undefined) throw new Error(`the library holds no ${id(gas)}`);
+  return species;
+}
+
+/** 2 H^+ + 2 e^- = H2: the gas's own energy cancels against the electron's. */
+const hydrogen = (basis: Basis): Line => [0, -2 * basis.proton, -2 * basis.electron];
+
+/** Where sulfide could come from: its own pool, or the one pool of sulfur. */
+function sulfurOf({ prepared }: Analysis): string | null {
+  const totals = prepared.components.map((c) => c.component);
+  if (totals.includes(SULFIDE_SULFUR)) return SULFIDE_SULFUR;
+  return prepared.sulfateReduction && totals.includes("S") ? "S" : null;
+}
+
+/** Equilibrium partial pressure of a gas over the plan's liquor at every point of the frame, R T ln p = sum of the potentials of its parts
+ *  less G of the gas: linear on each ligand cell (or field of arsenic or antimony), so the pieces are exact. The totals are those of the
+ *  plan: a liquor that has lost its gas, or a vessel that is swept, stands lower; a dead corner may stand there.
+ *  @param analysis  of the plan     @param gas  one of hazardGases
+ *  @returns  pieces that cover the frame, or in words why the plan gives no pressure
+ *  @source  docs/method.md, hazards; the same planes as fields and cells */
+export function gasPressure(analysis: Analysis, gas: HazardGas): GasPressure | { readonly absent: string } {
+  const { basis, cells, prepared } = analysis;
+  const thermal = basis.thermal * STEPS_PER_JOULE;
+  const main = carrier[gas];
+  if (main === null)
+    return {
+      gas,
+      thermal,
+      of: null,
+      pieces: cells.map(({ piece }) => ({ piece, line: hydrogen(basis), scale: 1 })),
+    };
+  const metal = prepared.metals.find((m) => m.element === main);
+  if (metal !== undefined)
+    return { gas, thermal, of: { component: main, activity: metal.activity }, pieces: overMetal(analysis, gas, main) };
+  const component = gas === "H2S" ? sulfurOf(analysis) : main;
+  const total = prepared.components.find((c) => c.component === component);
+  if (component === null || total === undefined) return { absent: `the plan holds no ${missing[gas]}` };
+  const of = { component, activity: total.activity };
+  return { gas, thermal, of, pieces: overLigand(analysis, gas, main, component) };
+}
+
+const missing: Readonly<Record<HazardGas, string>> = {
+  HCN: "cyanide",
+  H2S: "sulfide sulfur",
+  AsH3: "arsenic among its metals",
+  SbH3: "antimony among its metals",
+  Cl2: "chloride",
+  NH3: "ammonia",
+  H2: "water",
+};
+
+/** The pressure at one point.
+ *  @param pressure  of a gas     @param pH, Eh  V vs SHE at T     @returns  bar; null outside the frame
+ *  @source  as `gasPressure` */
+export function pressureAt({ pieces, thermal }: GasPressure, pH: number, Eh: number): number | null {
+  const here = pieces.find(({ piece }) => piece.lines.every((l) => valueAt(l, pH, Eh) >= 0));
+  return here === undefined ? null : Math.exp(valueAt(here.line, pH, Eh) / here.scale / thermal);
+}
+
+/** log10 of a pressure as a line on one piece: k + x pH + y Eh.
+ *  @param pressure  of a gas     @param piece  one of its pieces     @returns  coefficients for p in bar     @source  arithmetic */
+export const logPressureLine = ({ thermal }: GasPressure, { line, scale }: PressurePiece): Line => {
+  const unit = thermal * scale * LN10;
+  return [line[0] / unit, line[1] / unit, line[2] / unit];
+};
