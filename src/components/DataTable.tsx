@@ -14,11 +14,17 @@ export interface DataTableProps<Row extends object> {
   /** words that must all stand in a row; typed beside the table's other filters */
   filter?: string;
   initialSort?: Sort;
+  /** sorting done elsewhere, as by the server: the rows come in this order, and a heading asks for another */
+  sorted?: { by: Sort; onSort: (sort: Sort) => void };
   selectedKey?: string | undefined;
   /** follows the arrow keys and clicks */
   onSelect?: (row: Row) => void;
   /** Enter or double click; a single click where there is no `onSelect` */
   onOpen?: (row: Row) => void;
+  /** the row under the pointer, null when it leaves */
+  onHover?: (row: Row | null) => void;
+  /** a row pointed at elsewhere, as on a map */
+  hoveredKey?: string | null;
   /** stands in place of the rows when the filter leaves none */
   empty?: ReactNode;
   /** height of a row in px; rows never wrap */
@@ -38,7 +44,11 @@ const none = () => undefined;
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const { caption, rows, columns, rowKey, filter = "", initialSort, selectedKey } = props;
   const { onSelect, onOpen, empty, rowHeight = 28, muted, className, onShown = none, Body = PlainBody } = props;
-  const { shown, sorting, setSorting } = useTableModel(rows, columns, rowKey, filter, initialSort);
+  const model = useTableModel(rows, columns, rowKey, filter, initialSort);
+  const { onHover, hoveredKey, sorted: given } = props;
+  const shown = given ? rows : model.shown;
+  const sort = given ? given.by : model.sorting[0];
+  const setSort = given ? given.onSort : (next: Sort) => model.setSorting([{ ...next, desc: next.desc ?? false }]);
   const headHeight = columns.some((column) => column.unit) ? 40 : 26;
   const box = useRef<HTMLDivElement>(null);
   const [reached, setReached] = useState<string | null>(null);
@@ -98,9 +108,11 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           (onSelect ?? onOpen)?.(row);
         }}
         onDoubleClick={() => onOpen?.(row)}
+        onPointerEnter={onHover && (() => onHover(row))}
         className={classes(
           "border-b border-rule -outline-offset-2!",
           interactive && "cursor-pointer hover:bg-tint/50",
+          key === hoveredKey && "bg-tint/50",
           selected && "bg-tint!",
           muted?.(row) && "text-muted",
         )}
@@ -127,15 +139,13 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
               <Heading
                 key={column.id}
                 column={column}
-                sorted={sorting[0]?.id === column.id ? (sorting[0].desc ? "descending" : "ascending") : undefined}
-                onSort={() =>
-                  setSorting([{ id: column.id, desc: sorting[0]?.id === column.id ? !sorting[0].desc : false }])
-                }
+                sorted={sort?.id === column.id ? (sort.desc ? "descending" : "ascending") : undefined}
+                onSort={() => setSort({ id: column.id, desc: sort?.id === column.id ? !sort.desc : false })}
               />
             ))}
           </tr>
         </thead>
-        <tbody onKeyDown={interactive ? onKeyDown : undefined}>
+        <tbody onKeyDown={interactive ? onKeyDown : undefined} onPointerLeave={onHover && (() => onHover(null))}>
           <Body
             count={shown.length}
             startAt={at}

@@ -120,6 +120,8 @@ export function savedAt(iso: string, now: Date = new Date()): string {
   if (days === 1) return `yesterday ${clock.format(at)}`;
   return day.format(at);
 }
+/** "09:42" */
+export const clockTime = (at: number | Date): string => clock.format(at);
 export const fullTime = (iso: string): string => `${day.format(new Date(iso))}, ${clock.format(new Date(iso))}`;
 
 const startOfDay = (d: Date) => new Date(d.getFullYear(), d.getMonth(), d.getDate()).getTime();

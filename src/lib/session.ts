@@ -32,11 +32,13 @@ const may = {
   manageMembers: ["admin"],
 } as const satisfies Record<string, readonly MemberRole[]>;
 
+export type Permission = keyof typeof may;
+
 /** Mirrors the server's roles: a control nobody may use is not shown. The server decides. */
-export function useMay(action: keyof typeof may): boolean {
-  const { user } = useSession();
-  return (may[action] as readonly MemberRole[]).includes(user.role);
-}
+export const mayDo = (role: MemberRole, action: Permission): boolean =>
+  (may[action] as readonly MemberRole[]).includes(role);
+
+export const useMay = (action: Permission): boolean => mayDo(useSession().user.role, action);
 
 function useEnter<Body>(path: string) {
   const client = useQueryClient();

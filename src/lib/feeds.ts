@@ -1,0 +1,57 @@
+import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import type { z } from "zod";
+import type { feedCreate, FeedRow, feedUpdate } from "../../shared/schemas/feed";
+import { api } from "./api";
+import { allRows, queryString } from "./pages";
+import { keys } from "./queries";
+
+const at = (id: string) => `/feeds/${encodeURIComponent(id)}`;
+
+export type DeletedFilter = "false" | "true";
+
+export const useFeeds = (projectId: string | undefined, deleted: DeletedFilter = "false") =>
+  useQuery({
+    queryKey: keys.feedList(projectId ?? "", deleted),
+    queryFn: ({ signal }) => allRows<FeedRow>(`/feeds${queryString({ projectId, deleted })}`, signal),
+    enabled: projectId !== undefined,
+  });
+
+export const useFeed = (id: string | undefined) =>
+  useQuery({
+    queryKey: keys.feed(id ?? ""),
+    queryFn: ({ signal }) => api.get<FeedRow>(at(id ?? ""), { signal }),
+    enabled: id !== undefined,
+  });
+
+function useFeedMutation<Variables>(mutationFn: (variables: Variables) => Promise<FeedRow>) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn,
+    onSuccess: (feed) => {
+      client.setQueryData(keys.feed(feed.id), feed);
+      void client.invalidateQueries({ queryKey: keys.feeds });
+      // heads and moisture enter every account of its trials
+      void client.invalidateQueries({ queryKey: keys.trials });
+      void client.invalidateQueries({ queryKey: keys.campaigns });
+    },
+  });
+}
+
+export const useCreateFeed = () =>
+  useFeedMutation((body: z.input<typeof feedCreate>) => api.post<FeedRow>("/feeds", body));
+
+export const useUpdateFeed = () =>
+  useFeedMutation(
+    ({ id, version, ...body }: z.input<typeof feedUpdate> & { id: string; version: number; reason?: string }) =>
+      api.patch<FeedRow>(at(id), body, { ifMatch: version }),
+  );
+
+export const useDeleteFeed = () =>
+  useFeedMutation(({ id, version, reason }: { id: string; version: number; reason: string }) =>
+    api.delete<FeedRow>(`${at(id)}${queryString({ reason })}`, { ifMatch: version }),
+  );
+
+export const useRestoreFeed = () =>
+  useFeedMutation(({ id, version }: { id: string; version: number }) =>
+    api.post<FeedRow>(`${at(id)}/restore`, {}, { ifMatch: version }),
+  );
