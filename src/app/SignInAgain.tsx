@@ -13,6 +13,7 @@ export function SignInAgain() {
     <Dialog
       open={ended}
       onOpenChange={() => undefined}
+      fixed
       title="Sign in again"
       description="Your session has ended. Nothing on the page is lost; what was being saved can be saved again afterwards."
       width={420}

@@ -13,10 +13,21 @@ export interface DialogProps {
   footer?: ReactNode;
   /** pixels */
   width?: number;
+  /** cannot be closed, only answered */
+  fixed?: boolean;
 }
 
 /** A sheet laid over the page; Escape or a press outside closes it. */
-export function Dialog({ open, onOpenChange, title, description, children, footer, width = 520 }: DialogProps) {
+export function Dialog({
+  open,
+  onOpenChange,
+  title,
+  description,
+  children,
+  footer,
+  width = 520,
+  fixed = false,
+}: DialogProps) {
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
@@ -28,9 +39,11 @@ export function Dialog({ open, onOpenChange, title, description, children, foote
         >
           <div className="flex items-baseline justify-between gap-4 border-b border-ink px-5 pt-4 pb-2">
             <Radix.Title className="font-mono text-lg font-bold">{title}</Radix.Title>
-            <Radix.Close className="text-sm text-muted underline decoration-rule underline-offset-4 hover:text-ink">
-              Close
-            </Radix.Close>
+            {!fixed && (
+              <Radix.Close className="text-sm text-muted underline decoration-rule underline-offset-4 hover:text-ink">
+                Close
+              </Radix.Close>
+            )}
           </div>
           <div className="min-h-0 overflow-y-auto px-5 py-4">
             {description !== undefined && (

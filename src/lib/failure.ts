@@ -42,5 +42,9 @@ export const fromBody = (status: number, body: unknown): ApiFailure =>
 const isApiError = (body: unknown): body is ApiError =>
   typeof body === "object" && body !== null && "error" in body && typeof (body as ApiError).error?.message === "string";
 
-export const messageOf = (error: unknown): string =>
-  error instanceof Error ? error.message : "Something unexpected went wrong.";
+/** One sentence for people. */
+export function messageOf(error: unknown): string {
+  if (error instanceof ApiFailure && error.code === "NOT_SIGNED_IN")
+    return "Your session had ended. Sign in, then try once more.";
+  return error instanceof Error ? error.message : "Something unexpected went wrong.";
+}

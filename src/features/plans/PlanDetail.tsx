@@ -14,7 +14,16 @@ import { RenameDialog } from "./RenameDialog";
 import { RevisionsDialog } from "./RevisionsDialog";
 
 /** The plan in hand: what it asks, how it came to ask that, and what can be done with it. */
-export function PlanDetail({ plan, onCopied }: { plan: PlanRow; onCopied: (copy: PlanRow) => void }) {
+export function PlanDetail({
+  plan,
+  onCopied,
+  onShelved,
+}: {
+  plan: PlanRow;
+  onCopied: (copy: PlanRow) => void;
+  /** archived or taken back: the plan as it stands now */
+  onShelved: (plan: PlanRow) => void;
+}) {
   const mayWrite = useMay("writePlans");
   const update = useUpdatePlan();
   const [dialog, setDialog] = useState<"rename" | "duplicate" | "revisions" | null>(null);
@@ -38,7 +47,12 @@ export function PlanDetail({ plan, onCopied }: { plan: PlanRow; onCopied: (copy:
             <Button onClick={() => setDialog("rename")}>Rename</Button>
             <Button
               disabled={update.isPending}
-              onClick={() => update.mutate({ id: plan.id, version: plan.version, archived: !plan.archived })}
+              onClick={() =>
+                update.mutate(
+                  { id: plan.id, version: plan.version, archived: !plan.archived },
+                  { onSuccess: onShelved },
+                )
+              }
             >
               {plan.archived ? "Take back" : "Archive"}
             </Button>

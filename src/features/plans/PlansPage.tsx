@@ -5,10 +5,10 @@ import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { DataTable } from "../../components/DataTable";
 import { SearchField } from "../../components/SearchField";
-import { ErrorNote, Loading } from "../../components/status";
+import { ErrorNote, Loading, Status } from "../../components/status";
 import { Empty, Note } from "../../components/text";
 import { counted } from "../../lib/format";
-import { usePlans, type ArchivedFilter } from "../../lib/plans";
+import { usePlans, useUpdatePlan, type ArchivedFilter } from "../../lib/plans";
 import { useProject } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
@@ -30,6 +30,7 @@ export default function PlansPage() {
   const [archived, setArchived] = useState<ArchivedFilter>("false");
   const [filter, setFilter] = useState("");
   const [chosen, setChosen] = useState<string>();
+  const [shelved, setShelved] = useState<PlanRow | null>(null);
   const [dialog, setDialog] = useState<"plan" | "project" | null>(null);
   const plans = usePlans(project?.id, archived);
   const navigate = useNavigate();
@@ -46,7 +47,7 @@ export default function PlansPage() {
             : ""}
         </Note>
         <span className="flex-1" />
-        {mayWrite && (
+        {mayWrite && projects?.length !== 0 && (
           <>
             <Button onClick={() => setDialog("project")}>New project</Button>
             {project && <Button onClick={() => setDialog("plan")}>New plan</Button>}
@@ -79,8 +80,17 @@ export default function PlansPage() {
                 value={filter}
                 onChange={setFilter}
               />
-              <Segmented label="Which plans" value={archived} onChange={setArchived} options={shelves} />
+              <Segmented
+                label="Which plans"
+                value={archived}
+                onChange={(next) => {
+                  setArchived(next);
+                  setShelved(null);
+                }}
+                options={shelves}
+              />
             </div>
+            {shelved && <Shelved key={shelved.version} plan={shelved} onDone={() => setShelved(null)} />}
             {plans.error ? (
               <ErrorNote doing="The plans could not be read" error={plans.error} retry={() => void plans.refetch()} />
             ) : !plans.data ? (
@@ -97,7 +107,14 @@ export default function PlansPage() {
               />
             )}
           </section>
-          {selected && <PlanDetail key={selected.id} plan={selected} onCopied={(plan) => setChosen(plan.id)} />}
+          {selected && (
+            <PlanDetail
+              key={selected.id}
+              plan={selected}
+              onCopied={(plan) => setChosen(plan.id)}
+              onShelved={setShelved}
+            />
+          )}
         </div>
       )}
       <CreateProjectDialog open={dialog === "project"} onOpenChange={close} />
@@ -105,6 +122,24 @@ export default function PlansPage() {
         <CreatePlanDialog open={dialog === "plan"} onOpenChange={close} projects={projects} projectId={project.id} />
       )}
     </>
+  );
+}
+
+/** What was just done to a plan that has left the list, and the way back. */
+function Shelved({ plan, onDone }: { plan: PlanRow; onDone: () => void }) {
+  const update = useUpdatePlan();
+  const undo = () =>
+    update.mutate({ id: plan.id, version: plan.version, archived: !plan.archived }, { onSuccess: onDone });
+  return (
+    <div className="hairline flex flex-wrap items-baseline gap-x-4 pb-1">
+      <Status>
+        {plan.name} {plan.archived ? "is archived." : "stands among the current plans again."}
+      </Status>
+      <Button kind="quiet" className="h-auto!" disabled={update.isPending} onClick={undo}>
+        Undo
+      </Button>
+      {update.error && <ErrorNote error={update.error} />}
+    </div>
   );
 }
 
