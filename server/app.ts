@@ -3,7 +3,9 @@ import express, { type Express } from "express";
 import { pinoHttp } from "pino-http";
 import type { Deps } from "./deps";
 import { authRoutes } from "./features/auth/routes";
+import { campaignRoutes } from "./features/campaigns/routes";
 import { chemistryRoutes } from "./features/chemistry/routes";
+import { feedRoutes } from "./features/feeds/routes";
 import { healthRoutes } from "./features/health/routes";
 import { mailboxRoutes } from "./features/mailbox/routes";
 import { invitationRoutes } from "./features/members/invitationRoutes";
@@ -12,6 +14,7 @@ import { planRoutes } from "./features/plans/routes";
 import { projectRoutes } from "./features/projects/routes";
 import { solverRoutes } from "./features/solver/routes";
 import { speciesEditRoutes } from "./features/speciesEdits/routes";
+import { trialRoutes } from "./features/trials/routes";
 import { clientFiles, noSuchFile } from "./http/clientFiles";
 import { errorHandler, unknownRoute } from "./http/errorHandler";
 import { mountRoutes, type Route } from "./http/route";
@@ -29,6 +32,9 @@ const features = [
   solverRoutes,
   projectRoutes,
   planRoutes,
+  feedRoutes,
+  campaignRoutes,
+  trialRoutes,
 ];
 
 /** Every route of the API with its roles. */

@@ -13,6 +13,8 @@ import { createMailer } from "./features/mailbox/mailer";
 import { createChemistry } from "./features/chemistry/library";
 import { keepVersion, keptVersion } from "./features/chemistry/service";
 import { findByEmail } from "./features/members/service";
+import { refreshOutdatedFigures } from "./features/trials/refresh";
+import { workingsOf } from "./features/trials/workedOut";
 import { demoAccounts } from "./demo/accounts";
 import { seedDemoOnFirstRun } from "./demo/seed";
 import { projectRoot } from "./root";
@@ -43,6 +45,8 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
   const mailer = createMailer(db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock });
   const chemistry = createChemistry(db, current, clock());
   for (const { edit, why } of chemistry.unfit) log.warn({ species: edit.speciesId, why }, "library edit left out");
+  const refreshed = refreshOutdatedFigures(db, workingsOf(chemistry));
+  if (refreshed > 0) log.info({ trials: refreshed }, "figures worked out anew");
   const app = createApp(
     { db, config, clock, log, sessions, mailer, chemistry, solve },
     join(projectRoot, "dist/client"),

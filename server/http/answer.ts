@@ -2,6 +2,8 @@
 export interface Answer {
   status: number;
   body?: unknown;
+  /** text sent piece by piece, in place of a body */
+  stream?: Iterable<string>;
   headers: Record<string, string>;
 }
 
@@ -9,6 +11,11 @@ export const ok = (body: unknown, headers: Record<string, string> = {}): Answer 
 export const created = (body: unknown, headers: Record<string, string> = {}): Answer => ({
   status: 201,
   body,
+  headers,
+});
+export const streamed = (stream: Iterable<string>, headers: Record<string, string>): Answer => ({
+  status: 200,
+  stream,
   headers,
 });
 export const noContent = (): Answer => ({ status: 204, headers: {} });

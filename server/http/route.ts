@@ -1,3 +1,5 @@
+import { Readable } from "node:stream";
+import { pipeline } from "node:stream/promises";
 import { Router, type Request, type RequestHandler, type Response } from "express";
 import type { z } from "zod";
 import { memberRoles, type Member, type MemberRole } from "../../shared/schemas/member";
@@ -76,9 +78,15 @@ function parse(schema: z.ZodType | undefined, value: unknown): unknown {
   return parsed.data;
 }
 
-function send(res: Response, { status, body, headers }: Answer): void {
+/** Whoever asked may leave before the end. */
+function unlessGone(error: NodeJS.ErrnoException): void {
+  if (error.code !== "ERR_STREAM_PREMATURE_CLOSE") throw error;
+}
+
+async function send(res: Response, { status, body, stream, headers }: Answer): Promise<void> {
   res.status(status).set(headers);
-  if (body === undefined) res.end();
+  if (stream) await pipeline(Readable.from(stream), res).catch(unlessGone);
+  else if (body === undefined) res.end();
   else res.json(body);
 }
 
@@ -93,7 +101,7 @@ export function mountRoutes(routes: readonly Route[]): Router {
       const params = parse(schemas.params, req.params);
       const query = parse(schemas.query, req.query);
       const body = parse(schemas.body, req.body ?? {});
-      send(res, await handle({ params, query, body, user, req, res }));
+      await send(res, await handle({ params, query, body, user, req, res }));
     });
   }
   return router;

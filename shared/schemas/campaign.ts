@@ -47,6 +47,10 @@ export const campaignsQuery = pageQuery.extend({
   projectId: z.string().min(1).optional(),
   planId: z.string().min(1).optional(),
   deleted: z.enum(["true", "false", "all"]).default("false"),
+  /** part of a code, a title or the question */
+  search: z.string().trim().max(80).optional(),
+  sort: z.enum(["code", "title", "updatedAt", "trialCount"]).default("updatedAt"),
+  order: z.enum(["asc", "desc"]).default("desc"),
 });
 
 export type CampaignCreate = z.output<typeof campaignCreate>;

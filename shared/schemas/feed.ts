@@ -68,6 +68,10 @@ export const feedUpdate = z
 export const feedsQuery = pageQuery.extend({
   projectId: z.string().min(1).optional(),
   deleted: z.enum(["true", "false", "all"]).default("false"),
+  /** part of a name or the description */
+  search: z.string().trim().max(80).optional(),
+  sort: z.enum(["name", "updatedAt", "trialCount"]).default("name"),
+  order: z.enum(["asc", "desc"]).default("asc"),
 });
 
 export type FeedCreate = z.output<typeof feedCreate>;

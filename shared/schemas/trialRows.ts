@@ -1,5 +1,7 @@
 import { z } from "zod";
+import type { CampaignRow } from "./campaign";
 import { trialsQuery, type TrialFigures, type TrialKind, type TrialRow, type TrialStatus } from "./trial";
+import type { Charge, Measured, Planned, Products } from "./trialRecord";
 
 /** The parts of a trial that a list does not carry: GET /api/trials/:id has them. */
 export type TrialRecordPart = "planned" | "measured" | "charge" | "samples" | "products";
@@ -22,27 +24,33 @@ export const mapTrialsQuery = z.object({
   scope: z.enum(["plan", "project"]).default("plan"),
 });
 
+/** What decides whether a trial may be judged on a plan's map (trials/comparable.ts); of the assays the stage's target alone. */
+export interface ComparedTrial {
+  kind: TrialKind;
+  planned: Pick<Planned, "tenor" | "ligands">;
+  measured: Pick<Measured, "ligands">;
+  charge: Pick<Charge, "liquorAssays" | "liquorDensity">;
+  products: Pick<Products, "finalAssays" | "liquorDensity">;
+}
+
 /** A trial as a point on the map, and the line of the table beside it. */
 export interface MapTrial {
   id: string;
   code: string;
   campaignId: string;
-  campaignCode: string;
-  /** the plan and revision the campaign was laid out on */
-  planRevision: number;
   stage: string;
-  kind: TrialKind;
   status: TrialStatus;
   feedId: string;
-  /** of the stage's target in the liquor, g/L; null where it was not assayed */
-  tenor: number | null;
-  /** totals as measured, else as planned */
-  ligands: { component: string; value: number; unit: string }[];
+  feedName: string;
+  startedAt: string | null;
+  /** reference electrode of its ORP; null without */
+  electrode: string | null;
+  compared: ComparedTrial;
   figures: TrialFigures;
 }
 export interface MapTrials {
   rows: MapTrial[];
-  campaigns: { id: string; code: string; title: string; planId: string; planRevision: number }[];
+  campaigns: Pick<CampaignRow, "id" | "code" | "title" | "planId" | "planRevision" | "stages">[];
 }
 
 /** What a file of trials holds a line of: trials with their figures, or their readings, or their assays as typed. */

@@ -6,7 +6,7 @@ import { gammaOf } from "../plan/toProblem";
 import type { CampaignStage } from "../schemas/campaign";
 import type { SolutionAssay } from "../schemas/entry";
 import type { PlanInputs } from "../schemas/plan";
-import type { Trial } from "../schemas/trial";
+import type { ComparedTrial } from "../schemas/trialRows";
 import type { LigandTotal } from "../schemas/trialRecord";
 import type { ChemicalData } from "../species/chemicalData";
 
@@ -28,7 +28,7 @@ const factorBetween = (a: Interval, b: number): number => (b < a.lo ? a.lo / b :
 
 const tenorIn = (
   assays: readonly SolutionAssay[],
-  trial: Trial,
+  trial: ComparedTrial,
   metal: string,
   data: ChemicalData,
   when: "start" | "end",
@@ -40,7 +40,7 @@ const tenorIn = (
 
 /** Tenor the plan stands for: in g/L as entered; else what the trial was laid out on; else the activity over its gamma. In a
  *  cementation the plan's activity is what may be left, so that only the trial's own planned tenor counts. */
-function plannedTenor(trial: Trial, target: string, inputs: PlanInputs, data: ChemicalData): number | null {
+function plannedTenor(trial: ComparedTrial, target: string, inputs: PlanInputs, data: ChemicalData): number | null {
   const line = inputs.metals.find((m) => m.element === target);
   if (trial.kind === "leach" && line?.entry === "gPerL") return line.value;
   const own = measure(trial.planned.tenor, "solutionAssay", liquorContext(trial, target, data.molarMass, "end"));
@@ -62,7 +62,7 @@ const ligandIn = (list: readonly LigandTotal[], component: string, data: Chemica
  *  @param inputs  of the revision shown     @param data  library     @returns  the verdict with its reasons
  *  @source  common practice, no source */
 export function comparable(
-  trial: Trial,
+  trial: ComparedTrial,
   temperatureC: number | null,
   stage: CampaignStage,
   inputs: PlanInputs,

@@ -70,9 +70,9 @@ export function listPlans(db: Db, query: Query, outdated: OutdatedSpecies): { ro
 }
 
 /** @throws Refusal NOT_FOUND */
-export function storedPlan(db: Db, id: string): StoredPlan {
+export function storedPlan(db: Db, id: string, path = "id"): StoredPlan {
   const found = selectPlans(db).where(eq(plans.id, id)).get();
-  if (!found) throw new Refusal("NOT_FOUND", "id", `There is no plan ${id}.`);
+  if (!found) throw new Refusal("NOT_FOUND", path, `There is no plan ${id}.`);
   return stored(found);
 }
 
@@ -105,9 +105,9 @@ export function listRevisions(db: Db, planId: string, { limit, offset }: { limit
 }
 
 /** @throws Refusal NOT_FOUND */
-export function revisionOf(db: Db, planId: string, number: number): RevisionRow {
+export function revisionOf(db: Db, planId: string, number: number, path = "number"): RevisionRow {
   const wanted = and(eq(planRevisions.planId, planId), eq(planRevisions.number, number));
   const found = selectRevisions(db).where(wanted).get();
-  if (!found) throw new Refusal("NOT_FOUND", "number", `Plan ${planId} has no revision ${number}.`);
+  if (!found) throw new Refusal("NOT_FOUND", path, `Plan ${planId} has no revision ${number}.`);
   return found;
 }

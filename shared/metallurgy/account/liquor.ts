@@ -36,7 +36,7 @@ const massOrNull = (formula: string, masses: MolarMasses): number | null => {
 
 /** Density and molar mass that ppm and mol/L of a trial's liquors go by. */
 export function liquorContext(
-  trial: Trial,
+  trial: { charge: Pick<Trial["charge"], "liquorDensity">; products: Pick<Trial["products"], "liquorDensity"> },
   analyte: string,
   masses: MolarMasses,
   when: "start" | "end",

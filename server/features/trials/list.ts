@@ -1,0 +1,66 @@
+import { and, asc, count, eq, sql, type SQL } from "drizzle-orm";
+import type { SQLiteColumn } from "drizzle-orm/sqlite-core";
+import type { z } from "zod";
+import type { trialSorts, trialsQuery } from "../../../shared/schemas/trial";
+import type { TrialListRow } from "../../../shared/schemas/trialRows";
+import type { Db } from "../../db/open";
+import { deletedIs, holds, isOf, ordered } from "../../http/listing";
+import { listRowsOf } from "./rows";
+import { trials } from "./schema";
+
+const sorts: Record<(typeof trialSorts)[number], SQLiteColumn> = {
+  code: trials.codeKey,
+  status: trials.status,
+  stage: trials.stage,
+  operator: trials.operator,
+  startedAt: trials.startedMs,
+  updatedAt: trials.updatedAt,
+  recoveryPct: trials.recoveryPct,
+  gangueDissolvedPct: trials.gangueDissolvedPct,
+  selectivityPct: trials.selectivityPct,
+  accountabilityPct: trials.accountabilityPct,
+  acidPerTonne: trials.acidPerTonne,
+  reagentPerKg: trials.reagentPerKg,
+  pH: trials.pH,
+  Eh: trials.Eh,
+  temperatureC: trials.temperatureC,
+};
+
+/** What a list and its export have in common. */
+export type TrialFilter = Omit<z.output<typeof trialsQuery>, "limit" | "offset">;
+
+/** Trials of a deleted campaign show when the campaign is asked for, and nowhere else. */
+const ofLiveCampaign = sql`${trials.campaignId} not in (select id from campaigns where deleted_at is not null)`;
+
+function filterOf(query: TrialFilter): SQL | undefined {
+  return and(
+    query.campaignId === undefined ? ofLiveCampaign : eq(trials.campaignId, query.campaignId),
+    isOf(trials.projectId, query.projectId),
+    isOf(trials.feedId, query.feedId),
+    isOf(trials.kind, query.kind),
+    isOf(trials.stage, query.stage),
+    isOf(trials.status, query.status),
+    deletedIs(trials.deletedAt, query.deleted),
+    holds(query.search, [trials.code, trials.operator, trials.notes]),
+  );
+}
+
+/** Ids of the trials that a query asks for, in its order: the rest of a row is fetched for those that are shown alone. */
+export const trialIds = (db: Db, query: TrialFilter) =>
+  db
+    .select({ id: trials.id })
+    .from(trials)
+    .where(filterOf(query))
+    .orderBy(ordered(sorts[query.sort], query.order), asc(trials.id));
+
+export function listTrials(db: Db, query: z.output<typeof trialsQuery>): { rows: TrialListRow[]; total: number } {
+  const ids = trialIds(db, query).limit(query.limit).offset(query.offset).all();
+  const total = db.select({ n: count() }).from(trials).where(filterOf(query)).get()?.n ?? 0;
+  return {
+    rows: listRowsOf(
+      db,
+      ids.map(({ id }) => id),
+    ),
+    total,
+  };
+}

@@ -1,0 +1,72 @@
+import { electrodeSeries, type ElectrodeSeries } from "../../../shared/electrodes/series";
+import { formulaVersion } from "../../../shared/metallurgy/formulaVersion";
+import type { MolarMasses } from "../../../shared/metallurgy/molarMass";
+import type { CampaignStage } from "../../../shared/schemas/campaign";
+import type { SolutionAssay } from "../../../shared/schemas/entry";
+import type { Feed } from "../../../shared/schemas/feed";
+import type { Trial, TrialFigures } from "../../../shared/schemas/trial";
+import type { ComparedTrial } from "../../../shared/schemas/trialRows";
+import { trialFigures } from "../../../shared/trials/figures";
+import { measuredPoint } from "../../../shared/trials/measuredPoint";
+import type { Chemistry } from "../chemistry/library";
+import type { trials } from "./schema";
+
+/** What figures need beside the records. */
+export interface Workings {
+  masses: MolarMasses;
+  electrodes: readonly ElectrodeSeries[];
+}
+export const workingsOf = ({ data, current }: Chemistry): Workings => ({
+  masses: data.molarMass,
+  electrodes: electrodeSeries(current),
+});
+
+const ofTarget = (assays: readonly SolutionAssay[], { target }: CampaignStage) =>
+  assays.filter(({ analyte }) => analyte === target);
+
+const comparedOf = ({ kind, planned, measured, charge, products }: Trial, stage: CampaignStage): ComparedTrial => ({
+  kind,
+  planned: { tenor: planned.tenor, ligands: planned.ligands },
+  measured: { ligands: measured.ligands },
+  charge: { liquorAssays: ofTarget(charge.liquorAssays, stage), liquorDensity: charge.liquorDensity },
+  products: { finalAssays: ofTarget(products.finalAssays, stage), liquorDensity: products.liquorDensity },
+});
+
+type Stored = typeof trials.$inferSelect;
+type FigureColumns = Omit<TrialFigures, "recoveryRangePct"> & Pick<Stored, "recoveryLow" | "recoveryHigh">;
+export type WorkedOut = FigureColumns & Pick<Stored, "electrode" | "compared" | "formulaVersion">;
+
+/** Everything that is stored of a trial beside its record. An interval open to one side is not stored: it says too little. */
+export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, { masses, electrodes }: Workings): WorkedOut {
+  const { recoveryRangePct, ...figures } = trialFigures(trial, feed, stage, masses, electrodes);
+  const [low, high] = recoveryRangePct ?? [null, null];
+  const closed = Number.isFinite(low) && Number.isFinite(high);
+  return {
+    ...figures,
+    recoveryLow: closed ? low : null,
+    recoveryHigh: closed ? high : null,
+    electrode: measuredPoint(trial, electrodes).point?.electrode ?? null,
+    compared: comparedOf(trial, stage),
+    formulaVersion,
+  };
+}
+
+/** The figures as the API has them. */
+export function figuresOf({ recoveryLow, recoveryHigh, ...stored }: FigureColumns): TrialFigures {
+  return {
+    recoveryPct: stored.recoveryPct,
+    recoveryRangePct: recoveryLow === null || recoveryHigh === null ? null : [recoveryLow, recoveryHigh],
+    recoveryBasis: stored.recoveryBasis,
+    gangueDissolvedPct: stored.gangueDissolvedPct,
+    selectivityPct: stored.selectivityPct,
+    accountabilityPct: stored.accountabilityPct,
+    acidPerTonne: stored.acidPerTonne,
+    reagentPerKg: stored.reagentPerKg,
+    pH: stored.pH,
+    pHCooled: stored.pHCooled,
+    Eh: stored.Eh,
+    EhUncertainty: stored.EhUncertainty,
+    temperatureC: stored.temperatureC,
+    flags: stored.flags,
+  };
+}
