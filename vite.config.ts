@@ -1,9 +1,11 @@
 import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
+import { loadEnv } from "vite";
 import { compression } from "vite-plugin-compression2";
 import { defineConfig } from "vitest/config";
 
-const apiPort = process.env.PORT ?? "5180";
+/** Where `npm run dev` finds the server: the environment, else .env, else the server's own default. */
+const apiPort = loadEnv("development", import.meta.dirname, "PORT").PORT ?? "5180";
 
 export default defineConfig({
   plugins: [

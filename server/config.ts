@@ -47,6 +47,9 @@ export interface Config {
 /** Every setting that is wrong, in one message. */
 export class ConfigError extends Error {}
 
+/** A password inside an address is nobody's business on the console. */
+const withoutSecret = (value: string) => value.replace(/:[^:@/]+@/, ":...@");
+
 /** The settings from the environment; an empty variable counts as absent.
  *  @throws ConfigError that names every variable that is wrong, its value and its bound */
 export function readConfig(env: Record<string, string | undefined>): Config {
@@ -55,7 +58,7 @@ export function readConfig(env: Record<string, string | undefined>): Config {
   if (!parsed.success) {
     const lines = parsed.error.issues.map(({ path, message }) => {
       const name = String(path[0]);
-      return `  ${name}=${given[name]}: ${message}`;
+      return `  ${name}=${withoutSecret(given[name] ?? "")}: ${message}`;
     });
     throw new ConfigError(`These settings are wrong (see .env.example):\n${lines.join("\n")}`);
   }

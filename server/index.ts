@@ -1,4 +1,4 @@
-import { existsSync } from "node:fs";
+import { existsSync, statSync } from "node:fs";
 import { join } from "node:path";
 import pino from "pino";
 import { ConfigError, readConfig } from "./config";
@@ -30,8 +30,8 @@ function inWords(error: unknown): string | null {
 }
 
 async function main(): Promise<void> {
-  const envFile = join(projectRoot, ".env");
-  if (existsSync(envFile)) process.loadEnvFile(envFile);
+  const envFile = join(projectRoot, process.env.ENV_FILE ?? ".env");
+  if (existsSync(envFile) && statSync(envFile).isFile()) process.loadEnvFile(envFile);
   const config = readConfig(process.env);
   const running = await startServer(config, pino({ level: config.logLevel }));
   announce(running);

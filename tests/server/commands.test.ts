@@ -1,8 +1,8 @@
 import { spawn } from "node:child_process";
 import { once } from "node:events";
 import { statSync, writeFileSync } from "node:fs";
-import { join } from "node:path";
-import { expect, onTestFinished, test } from "vitest";
+import { join, relative } from "node:path";
+import { expect, onTestFinished, test, vi } from "vitest";
 import { projectRoot } from "../../server/root";
 import { valueOf } from "../../shared/outcome";
 import { solve } from "../../shared/solve";
@@ -22,7 +22,7 @@ function start(script: string, args: string[], env: Record<string, string> = {})
     ["--import", tsx.replace("cli.mjs", "loader.mjs"), join(projectRoot, script), ...args],
     {
       cwd: projectRoot,
-      env: { PATH: process.env.PATH, ...env },
+      env: { PATH: process.env.PATH, ENV_FILE: "", ...env },
     },
   );
   const ended: Ended = { code: null, out: "", err: "" };
@@ -76,8 +76,11 @@ test("solve refuses a file that is not there and an empty command line in the sa
   }
 });
 
+// A process takes its time to start on a machine that does other things as well; waiting longer hides nothing.
+vi.setConfig({ testTimeout: 120_000 });
+
 async function announced(server: ReturnType<typeof start>): Promise<string> {
-  const deadline = Date.now() + 15_000;
+  const deadline = Date.now() + 60_000;
   while (Date.now() < deadline) {
     const url = /listens on (\S+)\n(?:.*\n)*\n/.exec(server.ended.out)?.[1];
     if (url !== undefined) return url;
@@ -105,6 +108,17 @@ test("the server says address and demo accounts, stops on a signal, and a second
   second.child.kill("SIGINT");
   expect(await second.end).toMatchObject({ code: 0, err: "" });
   expect(statSync(DATABASE_PATH)).toMatchObject({ mtimeMs, size });
+});
+
+test("settings may stand in a file, and the environment wins over it", async () => {
+  const folder = temporaryFolder();
+  const file = join(folder, "site.env");
+  writeFileSync(file, `DATABASE_PATH=${join(folder, "site.db")}\nPORT=many\nLOG_LEVEL=silent\nSEED_DEMO=0\n`);
+  const server = start("server/index.ts", [], { ENV_FILE: relative(projectRoot, file), PORT: "0" });
+  await announced(server);
+  expect(server.ended.out).not.toContain("Demo accounts");
+  server.child.kill("SIGTERM");
+  expect(await server.end).toMatchObject({ code: 0, err: "" });
 });
 
 test("wrong settings stop the start with one readable message", async () => {

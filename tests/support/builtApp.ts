@@ -34,7 +34,8 @@ function addressOf(server: ChildProcess): Promise<string> {
 export default async function setup({ provide }: TestProject): Promise<() => Promise<void>> {
   if (!existsSync(bundle)) throw new Error("The application is not built: npm run build.");
   const folder = mkdtempSync(join(tmpdir(), "gangueway-e2e-"));
-  const env = { PATH: process.env.PATH, DATABASE_PATH: join(folder, "e2e.db"), PORT: "0", LOG_LEVEL: "error" };
+  const settings = { ENV_FILE: "", DATABASE_PATH: join(folder, "e2e.db"), PORT: "0", LOG_LEVEL: "error" };
+  const env = { PATH: process.env.PATH, ...settings };
   const server = spawn(process.execPath, [bundle], { cwd: projectRoot, env, stdio: ["ignore", "pipe", "pipe"] });
   provide("baseUrl", await addressOf(server));
   return async () => {
