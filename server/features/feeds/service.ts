@@ -103,7 +103,8 @@ export const deleteFeed = (db: Db, id: string, seen: number, reason: string, aut
       reason,
       check: (_tx, { name, trialCount }) => {
         if (trialCount === 0) return;
-        const message = `Feed ${name} has ${trialCount} trials: their accounts rest on it. Delete them or give them another feed.`;
+        const those = trialCount === 1 ? "a trial" : `${trialCount} trials`;
+        const message = `Feed ${name} has ${those}, whose accounts rest on it: delete them or give them another feed.`;
         throw new Refusal("CONFLICT", "trialCount", message);
       },
     },
