@@ -111,9 +111,10 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         onPointerEnter={onHover && (() => onHover(row))}
         className={classes(
           "border-b border-rule -outline-offset-2!",
-          interactive && "cursor-pointer hover:bg-tint/50",
+          interactive && "cursor-pointer hover:bg-tint/30",
           key === hoveredKey && "bg-tint/50",
-          selected && "bg-tint!",
+          // thinned, so that copper keeps its contrast on it
+          selected && "bg-tint/60!",
           muted?.(row) && "text-muted",
         )}
       >

@@ -64,9 +64,9 @@ export function SpeciesTemperature({ data, id }: { data: ChemicalData; id: strin
           { header: "T", unit: "°C", number: true, width: "4em", cell: ({ stop }) => stop },
           { header: "G", unit: "kJ/mol", number: true, width: "8em", cell: ({ energy }) => fixed(energy.G / 1000, 2) },
           {
-            header: "",
+            header: "trusted",
             cell: ({ energy }) =>
-              energy.warning === null ? "" : <span className="text-muted">outside the trusted range</span>,
+              energy.warning === null ? "yes" : <span className="text-muted">no, outside the range</span>,
           },
         ]}
       />

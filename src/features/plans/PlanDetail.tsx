@@ -1,6 +1,7 @@
 import { useState } from "react";
 import type { PlanMetal, PlanRow } from "../../../shared/schemas/plan";
 import { Button, ButtonLink } from "../../components/Button";
+import { Term } from "../../components/Help";
 import { MetalName } from "../../components/MetalLine";
 import { Quantity } from "../../components/Quantity";
 import { ErrorNote } from "../../components/status";
@@ -83,7 +84,7 @@ export function PlanDetail({
         <span className="font-sans">{lixiviantName[inputs.preset]}</span>
       </Row>
       <Row label="Liquor">{celsius(inputs.temperatureC)}</Row>
-      <Row label="Solids">
+      <Row label={<Term word="solidsBasis">Solids</Term>}>
         <span className="font-sans">{solidsBasisWord[inputs.solidsBasis]}</span>
       </Row>
 
@@ -106,10 +107,14 @@ export function PlanDetail({
   );
 }
 
-export function Amount({ metal }: { metal: PlanMetal }) {
+const amountTerm = { carry: "carry", "at most": "atMost", "leave at most": "leaveAtMost", at: "watched" } as const;
+
+function Amount({ metal }: { metal: PlanMetal }) {
   return (
     <>
-      <span className="font-sans text-sm text-muted">{amountWord(metal)} </span>
+      <span className="font-sans text-sm text-muted">
+        <Term word={amountTerm[amountWord(metal)]}>{amountWord(metal)}</Term>{" "}
+      </span>
       <Quantity value={metal.value} {...(metal.entry === "gPerL" ? { unit: "g/L", figures: 3 } : {})} />
     </>
   );
