@@ -119,12 +119,20 @@ const missing: Readonly<Record<HazardGas, string>> = {
   H2: "water",
 };
 
+/** log10 of the pressure at one point: what is far below any limit would be no number in bar.
+ *  @param pressure  of a gas     @param pH, Eh  V vs SHE at T     @returns  for p in bar; null outside the frame
+ *  @source  as `gasPressure` */
+export function logPressureAt(pressure: GasPressure, pH: number, Eh: number): number | null {
+  const here = pressure.pieces.find(({ piece }) => piece.lines.every((l) => valueAt(l, pH, Eh) >= 0));
+  return here === undefined ? null : valueAt(logPressureLine(pressure, here), pH, Eh);
+}
+
 /** The pressure at one point.
  *  @param pressure  of a gas     @param pH, Eh  V vs SHE at T     @returns  bar; null outside the frame
  *  @source  as `gasPressure` */
-export function pressureAt({ pieces, thermal }: GasPressure, pH: number, Eh: number): number | null {
-  const here = pieces.find(({ piece }) => piece.lines.every((l) => valueAt(l, pH, Eh) >= 0));
-  return here === undefined ? null : Math.exp(valueAt(here.line, pH, Eh) / here.scale / thermal);
+export function pressureAt(pressure: GasPressure, pH: number, Eh: number): number | null {
+  const log = logPressureAt(pressure, pH, Eh);
+  return log === null ? null : 10 ** log;
 }
 
 /** log10 of a pressure as a line on one piece: k + x pH + y Eh.
