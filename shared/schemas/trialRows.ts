@@ -31,6 +31,8 @@ export interface ComparedTrial {
   measured: Pick<Measured, "ligands">;
   charge: Pick<Charge, "liquorAssays" | "liquorDensity">;
   products: Pick<Products, "finalAssays" | "liquorDensity">;
+  /** g/L of the target had all of it dissolved (trials/couldCarry.ts); null where that is not known */
+  couldCarry?: number | null;
 }
 
 /** A trial as a point on the map, and the line of the table beside it. */

@@ -56,11 +56,20 @@ const ligandIn = (list: readonly LigandTotal[], component: string, data: Chemica
   return found?.kind === "value" ? found.value : null;
 };
 
+/** What stands against the plan's tenor: in a leach what the liquor could carry, so that a poor recovery does not excuse itself,
+ *  else what it does carry; in a cementation what it carried at the start. */
+function tenorOf(trial: ComparedTrial, target: string, data: ChemicalData): Interval | null {
+  if (trial.kind === "cementation") return tenorIn(trial.charge.liquorAssays, trial, target, data, "start");
+  const { couldCarry } = trial;
+  if (couldCarry !== undefined && couldCarry !== null) return { lo: couldCarry, hi: couldCarry };
+  return tenorIn(trial.products.finalAssays, trial, target, data, "end");
+}
+
 /** Whether a trial may be judged on a plan's map: within 5 K, and within a factor 3 in the target's tenor and in each ligand's
  *  total. A plan's totals are activities; where the trial was laid out on a total of its own, that one counts.
  *  @param trial  record     @param temperatureC  measured, C; null where not recorded     @param stage  its stage
  *  @param inputs  of the revision shown     @param data  library     @returns  the verdict with its reasons
- *  @source  common practice, no source */
+ *  @source  common practice, no source; docs/decisions/0009-comparable-trials.md */
 export function comparable(
   trial: ComparedTrial,
   temperatureC: number | null,
@@ -75,11 +84,7 @@ export function comparable(
     reasons.push(`${say(temperatureC)} °C, the plan ${say(inputs.temperatureC)} °C: more than ${MOST_KELVIN} K apart`);
 
   const { target } = stage;
-  const [assays, when] =
-    trial.kind === "leach"
-      ? ([trial.products.finalAssays, "end"] as const)
-      : ([trial.charge.liquorAssays, "start"] as const);
-  const tenor = tenorIn(assays, trial, target, data, when);
+  const tenor = tenorOf(trial, target, data);
   const wanted = plannedTenor(trial, target, inputs, data);
   if (tenor === null || wanted === null)
     unknown.push(`${target} tenor ${tenor === null ? "not assayed" : "not planned"}`);

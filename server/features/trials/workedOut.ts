@@ -6,6 +6,7 @@ import type { SolutionAssay } from "../../../shared/schemas/entry";
 import type { Feed } from "../../../shared/schemas/feed";
 import type { Trial, TrialFigures } from "../../../shared/schemas/trial";
 import type { ComparedTrial } from "../../../shared/schemas/trialRows";
+import { couldCarry } from "../../../shared/trials/couldCarry";
 import { trialFigures } from "../../../shared/trials/figures";
 import { measuredPoint } from "../../../shared/trials/measuredPoint";
 import type { Chemistry } from "../chemistry/library";
@@ -24,13 +25,17 @@ export const workingsOf = ({ data, current }: Chemistry): Workings => ({
 const ofTarget = (assays: readonly SolutionAssay[], { target }: CampaignStage) =>
   assays.filter(({ analyte }) => analyte === target);
 
-const comparedOf = ({ kind, planned, measured, charge, products }: Trial, stage: CampaignStage): ComparedTrial => ({
-  kind,
-  planned: { tenor: planned.tenor, ligands: planned.ligands },
-  measured: { ligands: measured.ligands },
-  charge: { liquorAssays: ofTarget(charge.liquorAssays, stage), liquorDensity: charge.liquorDensity },
-  products: { finalAssays: ofTarget(products.finalAssays, stage), liquorDensity: products.liquorDensity },
-});
+const comparedOf = (trial: Trial, feed: Feed, stage: CampaignStage, masses: MolarMasses): ComparedTrial => {
+  const { kind, planned, measured, charge, products } = trial;
+  return {
+    kind,
+    planned: { tenor: planned.tenor, ligands: planned.ligands },
+    measured: { ligands: measured.ligands },
+    charge: { liquorAssays: ofTarget(charge.liquorAssays, stage), liquorDensity: charge.liquorDensity },
+    products: { finalAssays: ofTarget(products.finalAssays, stage), liquorDensity: products.liquorDensity },
+    couldCarry: couldCarry(trial, feed, stage.target, masses),
+  };
+};
 
 type Stored = typeof trials.$inferSelect;
 type FigureColumns = Omit<TrialFigures, "recoveryRangePct"> & Pick<Stored, "recoveryLow" | "recoveryHigh">;
@@ -46,7 +51,7 @@ export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, { mass
     recoveryLow: closed ? low : null,
     recoveryHigh: closed ? high : null,
     electrode: measuredPoint(trial, electrodes).point?.electrode ?? null,
-    compared: comparedOf(trial, stage),
+    compared: comparedOf(trial, feed, stage, masses),
     formulaVersion,
   };
 }

@@ -10,7 +10,7 @@ export type AccountFlagCode =
   | "ACCOUNT_LOW" // less metal found than fed
   | "ACCOUNT_HIGH"
   | "BASES_APART" // solution and residue tell different stories
-  | "BEYOND_BOUNDS" // a recovery under 0 or over 100 %
+  | "BEYOND_BOUNDS" // a recovery under 0 or over 100 % by more than two standard deviations
   | "CENSORED"
   | "ASSUMED"
   | "WITHDRAWN"; // samples took a large part of the liquor
@@ -107,7 +107,7 @@ export function accountFlags(
   trial: Trial,
   metal: string,
   accountability: Figure,
-  bases: readonly (Figure & { readonly id: string; readonly name: string })[],
+  bases: readonly (Figure & { readonly id: string; readonly name: string; readonly error: number | null })[],
   head: number | null,
   vessel: RecordedVessel | null,
 ): AccountFlag[] {
@@ -119,12 +119,12 @@ export function accountFlags(
   return [
     ...(accountability.value ? closureFlag(trial, metal, accountability.value, head) : []),
     ...(bySolution && byResidue ? basesApart(bySolution, byResidue) : []),
-    ...bases.flatMap(({ name, value }) =>
-      value !== null && (value.hi < 0 || value.lo > 100)
+    ...bases.flatMap(({ name, value, error }) =>
+      value !== null && (value.hi < -2 * (error ?? 0) || value.lo > 100 + 2 * (error ?? 0))
         ? list(
             "BEYOND_BOUNDS",
             [`${sayRange(value, 4)} % by ${name}`],
-            (t) => `${t}: no recovery lies outside 0 to 100 %`,
+            (t) => `${t}: further outside 0 to 100 % than measuring errors explain`,
           )
         : [],
     ),

@@ -2,8 +2,9 @@ import { describe, expect, test } from "vitest";
 import { demoPlans } from "../../../server/demo/plans";
 import type { TrialInput } from "../../../shared/schemas/trial";
 import { comparable } from "../../../shared/trials/comparable";
+import { couldCarry } from "../../../shared/trials/couldCarry";
 import { chemistry } from "../../support/chemistry";
-import { assays, trialOf, typed } from "../../support/trials";
+import { assays, feedOf, trialOf, typed } from "../../support/trials";
 
 const plan = (id: string) => demoPlans.find((p) => p.id === id)!.revisions.at(-1)!.inputs;
 const heap = plan("demo-oxide-heap"); // 25 C, Cu 0.02 as activity, S 0.1
@@ -46,6 +47,37 @@ describe("tenor", () => {
   test("a censored tenor counts by its nearer end", () => {
     expect(judged(final("<0.9 g/L")).comparable).toBe(true);
     expect(judged(final("<0.3 g/L")).comparable).toBe(false);
+  });
+});
+
+describe("a leach that recovered little", () => {
+  const feed = feedOf({ Cu: "0.92 %" });
+  const record = {
+    charge: { dryMass: typed("500 g"), liquorVolume: typed("1 L") },
+    products: { finalAssays: assays({ Cu: "0.3 g/L" }) },
+    planned: { tenor: typed("4.1 g/L") },
+  };
+  const trial = trialOf(record);
+  const carried = couldCarry(trial, feed, "Cu", chemistry().molarMass);
+  test("is held to what its liquor could carry, so that its failure does not excuse it", () => {
+    expect(carried).toBeCloseTo(4.6, 10);
+    expect(comparable({ ...trial, couldCarry: carried }, 25, stage, heap, chemistry()).comparable).toBe(true);
+    expect(comparable(trial, 25, stage, heap, chemistry()).comparable).toBe(false);
+  });
+  test("what the lixiviant brought counts, and water of the charge thins it", () => {
+    const more = trialOf({
+      charge: {
+        wetMass: typed("520 g"),
+        dryMass: typed("500 g"),
+        liquorVolume: typed("1 L"),
+        liquorAssays: assays({ Cu: "1 g/L" }),
+      },
+    });
+    expect(couldCarry(more, feed, "Cu", chemistry().molarMass)).toBeCloseTo(5.6 / 1.02, 10);
+  });
+  test("without head or charge it is not known", () => {
+    expect(couldCarry(trial, feedOf({}), "Cu", chemistry().molarMass)).toBeNull();
+    expect(couldCarry(trialOf({}), feed, "Cu", chemistry().molarMass)).toBeNull();
   });
 });
 
