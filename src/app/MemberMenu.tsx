@@ -33,7 +33,7 @@ export function MemberMenu() {
         </div>
         <MenuSeparator />
         <MenuLabel>Theme</MenuLabel>
-        <MenuChoice value={preferences.theme} onChange={(theme) => change({ theme })} options={themes} />
+        <MenuChoice stays value={preferences.theme} onChange={(theme) => change({ theme })} options={themes} />
         <MenuSeparator />
         <MenuItem onSelect={() => setScaleOpen(true)} note={label}>
           Potential scale …

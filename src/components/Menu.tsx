@@ -64,9 +64,12 @@ export function MenuChoice<Value extends string>({
   value,
   onChange,
   options,
+  stays = false,
 }: {
   value: Value;
   onChange: (value: Value) => void;
+  /** the menu stays open, so that one sees what the choice does */
+  stays?: boolean;
   options: readonly { value: Value; label: ReactNode }[];
 }) {
   return (
@@ -76,7 +79,7 @@ export function MenuChoice<Value extends string>({
           key={option.value}
           value={option.value}
           className={classes(item, option.value === value && "font-bold")}
-          onSelect={(event) => event.preventDefault()}
+          onSelect={(event) => stays && event.preventDefault()}
         >
           <span>{option.label}</span>
           {option.value === value && <span className="text-sm font-normal text-verdigris">chosen</span>}

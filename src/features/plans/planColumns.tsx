@@ -35,7 +35,7 @@ export const planColumns: readonly Column<PlanRow>[] = [
   {
     id: "metals",
     header: "metals",
-    width: "30%",
+    width: "26%",
     wrap: true,
     value: metalsText,
     cell: (plan) => <MetalLine metals={plan.latest.inputs.metals} />,
