@@ -185,9 +185,9 @@ export const unusualTrial: Omit<TrialCreate, "campaignId" | "feedId"> = {
 export const bareTrial: Omit<TrialInput, "campaignId" | "feedId"> = { code: "NL-08", kind: "leach", stage: "NL" };
 
 const made = async <Row>(client: Agent, path: string, values: object): Promise<Row> => {
-  const { body, status, text } = await client.post(path).send(values);
-  if (status !== 201) expect.fail(`POST ${path}: ${text}`);
-  return body as Row;
+  const answer = await client.post(path).send(values);
+  if (answer.status !== 201) expect.fail(`POST ${path}: ${answer.text}`);
+  return answer.body as Row;
 };
 
 export interface Bench {
