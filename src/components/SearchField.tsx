@@ -15,21 +15,32 @@ export function SearchField({
   className?: string;
 }) {
   return (
-    <input
-      type="search"
-      aria-label={label}
-      placeholder={placeholder}
-      value={value}
-      autoComplete="off"
-      spellCheck={false}
-      onChange={(event) => onChange(event.target.value)}
-      onKeyDown={(event) => {
-        if (event.key === "Escape" && value !== "") {
-          event.stopPropagation();
-          onChange("");
-        }
-      }}
-      className={classes("h-7 w-60 rounded-sm border border-muted bg-sheet px-2 text-base", className)}
-    />
+    <span className={classes("relative inline-block w-60", className)}>
+      <input
+        type="search"
+        aria-label={label}
+        placeholder={placeholder}
+        value={value}
+        autoComplete="off"
+        spellCheck={false}
+        onChange={(event) => onChange(event.target.value)}
+        onKeyDown={(event) => {
+          if (event.key === "Escape" && value !== "") {
+            event.stopPropagation();
+            onChange("");
+          }
+        }}
+        className="h-7 w-full rounded-sm border border-muted bg-sheet pr-12 pl-2 text-base [&::-webkit-search-cancel-button]:hidden"
+      />
+      {value !== "" && (
+        <button
+          type="button"
+          onClick={() => onChange("")}
+          className="absolute inset-y-0 right-0 rounded-sm px-2 text-sm text-muted hover:text-ink"
+        >
+          clear
+        </button>
+      )}
+    </span>
   );
 }
