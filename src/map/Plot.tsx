@@ -8,7 +8,8 @@ const Plotted = createPlotlyComponent(Plotly);
 
 const config = {
   displayModeBar: false,
-  doubleClick: "reset",
+  // The map resets itself: a redraw between two clicks would make Plotly see two single ones.
+  doubleClick: false,
   scrollZoom: true,
   responsive: false,
   showTips: false,

@@ -5,9 +5,8 @@ import { SpeciesName } from "../components/Formula";
 import { MetalName } from "../components/MetalLine";
 import { fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
-import { useThemeColours } from "../lib/theme";
 import { type CursorStore, useCursor } from "./cursor";
-import { hatchesOf, metalColour, shuts } from "./metalStyle";
+import { cssMetalColour, hatchesOf, shuts } from "./metalStyle";
 import { Swatch } from "./Swatch";
 import type { MapMetal } from "./view";
 
@@ -27,7 +26,6 @@ export function ReadOut({
   rest: { at: Point; words: string } | null;
 }) {
   const cursor = useCursor(store);
-  const colours = useThemeColours();
   const hatches = useMemo(() => hatchesOf(metals), [metals]);
   const at = cursor ?? rest?.at ?? null;
   const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
@@ -61,8 +59,8 @@ export function ReadOut({
                       small
                       className="relative top-px"
                       hatch={found.fulfilled ? null : (hatches.get(metal.element) ?? null)}
-                      fill={found.fulfilled ? colours.tint : "none"}
-                      colour={metalColour(metal, { colours })}
+                      fill={found.fulfilled ? "var(--color-tint)" : "none"}
+                      colour={cssMetalColour(metal)}
                       title={
                         found.fulfilled ? `${metal.element} is as required` : `${metal.element} is not as required`
                       }

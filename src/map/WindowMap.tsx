@@ -64,6 +64,10 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
       }),
     [zoomOf, frame, scale],
   );
+  const reset = useCallback(() => {
+    setZoom(null);
+    setResets((n) => n + 1);
+  }, []);
   const onDrawn = useCallback(() => {
     if (holder.current) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
   }, []);
@@ -89,10 +93,7 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
               kind="quiet"
               className="no-print absolute! h-auto! text-xs!"
               style={{ left: 8, bottom: sheet.map.y0 - 40 }}
-              onClick={() => {
-                setZoom(null);
-                setResets((n) => n + 1);
-              }}
+              onClick={reset}
             >
               whole frame
             </Button>
@@ -104,6 +105,7 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
             store={cursor}
             holder={holder}
             onPick={onPick}
+            onReset={reset}
           />
         </>
       ) : null}

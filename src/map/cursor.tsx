@@ -29,21 +29,27 @@ interface CursorProps {
   store: CursorStore;
   holder: RefObject<HTMLDivElement | null>;
   onPick: (at: Point | null) => void;
+  /** a double click: back to the whole frame */
+  onReset: () => void;
 }
 
+/** A second click within this time, ms, makes a double click, and then the first one meant nothing. */
+const DOUBLE = 280;
+
 /** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them; a click or Enter picks the point, Escape lets it go. */
-export function Cursor({ sheet, visible, through, store, holder, onPick }: CursorProps) {
+export function Cursor({ sheet, visible, through, store, holder, onPick, onReset }: CursorProps) {
   const upright = useRef<HTMLDivElement>(null);
   const level = useRef<HTMLDivElement>(null);
-  const now = useRef({ sheet, visible, through, onPick });
+  const now = useRef({ sheet, visible, through, onPick, onReset });
   useEffect(() => {
-    now.current = { sheet, visible, through, onPick };
+    now.current = { sheet, visible, through, onPick, onReset };
   });
 
   useEffect(() => {
     const element = holder.current;
     if (!element) return;
     let frame = 0;
+    let click = 0;
     let pressed: { x: number; y: number } | null = null;
     const place = (at: Point | null) => {
       const { sheet: s, visible: v } = now.current;
@@ -94,7 +100,18 @@ export function Cursor({ sheet, visible, through, store, holder, onPick }: Curso
       const still = pressed && Math.hypot(event.clientX - pressed.x, event.clientY - pressed.y) < 4;
       pressed = null;
       const at = still ? pointAt(event) : null;
-      if (at) now.current.onPick(at);
+      if (!at) return;
+      // Counted here: Plotly lays a sheet over the page while a button is down, and the browser's own double click goes there.
+      if (click !== 0) {
+        clearTimeout(click);
+        click = 0;
+        now.current.onReset();
+        return;
+      }
+      click = window.setTimeout(() => {
+        click = 0;
+        now.current.onPick(at);
+      }, DOUBLE);
     };
     const onKey = (event: KeyboardEvent) => {
       const step = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] }[event.key];
@@ -124,6 +141,7 @@ export function Cursor({ sheet, visible, through, store, holder, onPick }: Curso
     element.addEventListener("keydown", onKey);
     return () => {
       cancelAnimationFrame(frame);
+      clearTimeout(click);
       element.removeEventListener("pointermove", onMove, true);
       element.removeEventListener("pointerleave", onLeave);
       element.removeEventListener("pointerdown", onDown, true);

@@ -1,3 +1,4 @@
+import type { ThemeColours } from "../lib/theme";
 import type { PatternFill } from "./plotTypes";
 import type { MapMetal, MapView } from "./view";
 
@@ -41,11 +42,17 @@ export function hatchesOf(metals: readonly MapMetal[]): Map<string, Hatch> {
   );
 }
 
-const roleColour = (role: MapMetal["role"], view: Pick<MapView, "colours">): string =>
-  role === "target" ? view.colours.copper : role === "gangue" ? view.colours.ink : view.colours.muted;
+type RoleColours = Pick<ThemeColours, "copper" | "ink" | "muted">;
 
 /** Colour of a metal's lines and names. */
-export const metalColour = (metal: MapMetal, view: Pick<MapView, "colours">): string => roleColour(metal.role, view);
+export const metalColour = ({ role }: Pick<MapMetal, "role">, { colours }: { colours: RoleColours }): string =>
+  role === "target" ? colours.copper : role === "gangue" ? colours.ink : colours.muted;
+
+/** The same for what stands outside Plotly and can follow the style sheet, on paper too. */
+export const cssMetalColour = (metal: Pick<MapMetal, "role">): string =>
+  metalColour(metal, {
+    colours: { copper: "var(--color-copper)", ink: "var(--color-ink)", muted: "var(--color-muted)" },
+  });
 
 /** 1 for the metal in focus or without a focus, else what steps back. */
 export const emphasis = (element: string, view: Pick<MapView, "focus">): number =>

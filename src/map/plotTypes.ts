@@ -23,7 +23,7 @@ export interface PlotTrace {
   fill?: "toself" | "none";
   fillcolor?: string;
   fillpattern?: PatternFill;
-  marker?: { color: string; size: number[]; symbol: string; line: { width: number } };
+  marker?: { color: string; size: number[]; symbol: string; opacity: number; line: { width: number } };
   text?: string[];
   textposition?: "middle center";
   textfont?: { color: string[]; size: number[] };

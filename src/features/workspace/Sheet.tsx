@@ -4,14 +4,14 @@ import type { ReactNode } from "react";
  *  answers in two columns below it. Paper: map, then answers and asks. */
 export function Sheet({ asks, map, answers }: { asks: ReactNode; map: ReactNode; answers: ReactNode }) {
   return (
-    <div className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(560px,62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:block">
-      <div className="order-2 border-r border-rule pr-4 pl-5 pt-3 pb-8 lg:order-1 lg:min-h-0 lg:overflow-y-auto print:border-0 print:columns-2">
+    <div className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(560px,62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:flex print:flex-col">
+      <div className="order-2 border-r border-rule pr-4 pl-5 pt-3 pb-8 lg:order-1 lg:min-h-0 lg:overflow-y-auto print:order-3 print:border-0 print:columns-2 print:[&_section]:break-inside-avoid">
         {asks}
       </div>
-      <div className="order-1 col-span-2 flex min-h-0 flex-col border-b border-rule lg:order-2 lg:col-span-1 lg:border-b-0 print:h-[640px] print:w-[690px]">
+      <div className="order-1 col-span-2 flex min-h-0 flex-col border-b border-rule lg:order-2 lg:col-span-1 lg:border-b-0 print:order-1 print:h-[640px] print:w-[690px] print:flex-none">
         {map}
       </div>
-      <div className="order-3 pr-5 pl-4 pt-3 pb-8 lg:min-h-0 lg:overflow-y-auto lg:border-l lg:border-rule print:border-0 print:columns-2">
+      <div className="order-3 pr-5 pl-4 pt-3 pb-8 lg:min-h-0 lg:overflow-y-auto lg:border-l lg:border-rule print:order-2 print:border-0 print:columns-2 print:[&_li]:break-inside-avoid">
         {answers}
       </div>
     </div>

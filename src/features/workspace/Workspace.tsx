@@ -88,11 +88,12 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
       solution,
       failure,
       scale,
-      readOnly: frozen !== null,
+      // on paper a control is only its value
+      readOnly: frozen !== null || printing,
       focus,
       onFocus: setFocus,
     }),
-    [inputs, draft.edit, draft.settle, data, solution, failure, scale, frozen, focus],
+    [inputs, draft.edit, draft.settle, data, solution, failure, scale, frozen, printing, focus],
   );
 
   const map = useMapModel({

@@ -51,6 +51,7 @@ export function setPointTraces(
         color: colours.verdigris,
         size: [...outline.x.map(() => 0), 0, 8],
         symbol: "circle",
+        opacity: 1,
         line: { width: 0 },
       },
       x: [...outline.x, null, at.pH],

@@ -3,7 +3,6 @@ import type { Limit } from "../../../shared/solution";
 import { allowedEh, limitSentences, sideOf } from "../../../src/features/workspace/model/limitWords";
 import { window as fixture } from "../map/fixture";
 
-const band = { pH: 0.15, Eh: 0.03 };
 const naming = {
   metalName: (e: string) => ({ Zn: "zinc", Fe: "iron", Cu: "copper" })[e] ?? e,
   stateOf: (_: string, species: string) =>
@@ -24,19 +23,18 @@ const limit = (parts: Partial<Limit>): Limit => ({
   ...parts,
 });
 const words = (...limits: Limit[]) =>
-  limitSentences({ ...fixture, limits }, band, naming).map(
+  limitSentences({ ...fixture, limits }, naming).map(
     (s) => `${s.side}: ${s.what}, ${s.distance?.toFixed(2) ?? "-"} ${s.axis}`,
   );
 const electron = (coefficient: number) => [{ species: "e^-", formula: "e^-", coefficient }];
 
 describe("the side of a limit", () => {
-  test("is where its outward normal points, weighed in control bands", () => {
-    expect(sideOf({ line: [-4, 1, 0] }, band)).toBe("low pH");
-    expect(sideOf({ line: [6, -1, 0] }, band)).toBe("high pH");
-    expect(sideOf({ line: [1, 0, -1] }, band)).toBe("high Eh");
-    // 0.2 V a pH unit: one band of pH moves the line by 30 mV, one band of Eh; steeper counts as a pH side
-    expect(sideOf({ line: [-1, 0.19, 1] }, band)).toBe("low Eh");
-    expect(sideOf({ line: [-1, 0.21, 1] }, band)).toBe("low pH");
+  test("is where its outward normal points; a slanted line is held by potential, a steep one by pH", () => {
+    expect(sideOf({ line: [-4, 1, 0] })).toBe("low pH");
+    expect(sideOf({ line: [6, -1, 0] })).toBe("high pH");
+    expect(sideOf({ line: [1, 0, -1] })).toBe("high Eh");
+    expect(sideOf({ line: [-1, 0.21, 1] })).toBe("low Eh");
+    expect(sideOf({ line: [-1, 1.2, 1] })).toBe("low pH");
   });
 });
 
@@ -76,8 +74,31 @@ describe("what happens there, in words", () => {
     ).toEqual(["high Eh: copper is oxidised and dissolves, 0.20 Eh"]));
   test("a dissolved metal goes to metal", () =>
     expect(
-      words(limit({ metal: "Cu", inside: "CuSO4(aq)", outside: "Cu(s)", line: [-0.2, 0, 1], distanceEh: -0.1 })),
+      words(
+        limit({
+          metal: "Cu",
+          inside: "CuSO4(aq)",
+          outside: "Cu(s)",
+          line: [-0.2, 0, 1],
+          distanceEh: -0.1,
+          reactionTerms: electron(-2),
+        }),
+      ),
     ).toEqual(["low Eh: copper goes to metal, 0.10 Eh"]));
+  test("manganese is oxidised and precipitates; a compound may be oxidised to another", () =>
+    expect(
+      words(
+        limit({ metal: "Mn", inside: "Mn^2+(aq)", outside: "MnO2(s)", line: [1, 0, -1], reactionTerms: electron(2) }),
+        limit({
+          metal: "Cu",
+          inside: "Cu2O(s)",
+          outside: "CuO(s)",
+          line: [1, 0, -1],
+          distance: 7,
+          reactionTerms: electron(2),
+        }),
+      ),
+    ).toEqual(["high Eh: Mn is oxidised and precipitates, - Eh", "high Eh: copper is oxidised to a compound, - Eh"]));
   test("water and frame say what they are, and the frame comes last", () =>
     expect(
       words(
@@ -95,7 +116,7 @@ describe("what happens there, in words", () => {
       distancePH: -1,
     });
     const far = limit({ metal: "Fe", inside: "FeOOH(s)", outside: "FeSO4^+(aq)", distance: 8, reaction: "b" });
-    const [sentence, ...rest] = limitSentences({ ...fixture, limits: [far, near] }, band, naming);
+    const [sentence, ...rest] = limitSentences({ ...fixture, limits: [far, near] }, naming);
     expect(rest).toEqual([]);
     expect(sentence!.limit).toBe(near);
     expect(sentence!.others).toEqual([far]);

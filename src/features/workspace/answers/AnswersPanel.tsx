@@ -49,7 +49,7 @@ export function AnswersPanel(props: AnswersProps) {
         <>
           <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />
           {cautions.length > 0 && said}
-          <LimitsBlock window={window} name={name} band={inputs.controlBand} naming={naming} scale={scale} />
+          <LimitsBlock window={window} name={name} naming={naming} scale={scale} />
         </>
       ) : (
         <>

@@ -3,7 +3,7 @@ import { type Reagent, reagents } from "../../../../shared/reach/reagents";
 import type { PresetName } from "../../../../shared/schemas/plan";
 import { Button } from "../../../components/Button";
 import { Check } from "../../../components/choice";
-import { FormulaText } from "../../../components/FormulaText";
+import { Formula } from "../../../components/Formula";
 
 /** Picks the reagents whose reach is drawn; those common in the liquor stand first. */
 export function ChooseReagents({
@@ -24,7 +24,7 @@ export function ChooseReagents({
       <legend className="pt-1 font-mono text-xs font-bold">{title}</legend>
       {list.map((r) => (
         <Check key={r.id} label={r.name} checked={value.includes(r.id)} onChange={() => toggle(r.id)}>
-          <FormulaText text={r.name} /> <span className="text-sm text-muted">{r.kind}</span>
+          <Formula formula={r.name} /> <span className="text-sm text-muted">{r.kind}</span>
         </Check>
       ))}
     </fieldset>
@@ -32,7 +32,7 @@ export function ChooseReagents({
   return (
     <Popover.Root>
       <Popover.Trigger asChild>
-        <Button kind="quiet" className="h-auto! font-normal!">
+        <Button kind="quiet" className="no-print h-auto! font-normal!">
           choose
         </Button>
       </Popover.Trigger>

@@ -11,13 +11,11 @@ import { Reaction } from "./Reaction";
 export function LimitsBlock({
   window,
   name,
-  band,
   naming,
   scale,
 }: {
   window: Window;
   name: string;
-  band: { pH: number; Eh: number };
   naming: Naming;
   scale: PotentialScale;
 }) {
@@ -25,7 +23,7 @@ export function LimitsBlock({
     <section aria-label={`What shuts window ${name}`} className="mt-4">
       <SectionHead aside={<Term word="windowLimit">limits</Term>}>What shuts window {name}</SectionHead>
       <ul>
-        {limitSentences(window, band, naming).map((sentence) => (
+        {limitSentences(window, naming).map((sentence) => (
           <Sentence key={`${sentence.side} ${sentence.what}`} sentence={sentence} scale={scale} />
         ))}
       </ul>

@@ -47,10 +47,14 @@ export function ReachBlock({
                 <span className="font-mono whitespace-nowrap">{range(reach, scale)}</span>
               </div>
               <div className="text-sm text-muted">
-                {verdict && verdictWords[verdict]}
-                {reach.reached === null && reach.equilibrium !== null && (
-                  <> · equilibrium {scale.format(reach.equilibrium)}, from E0 only</>
-                )}
+                {[
+                  verdict && verdictWords[verdict],
+                  reach.reached === null &&
+                    reach.equilibrium !== null &&
+                    `equilibrium ${scale.format(reach.equilibrium)}, from E0 only`,
+                ]
+                  .filter(Boolean)
+                  .join("; ")}
               </div>
             </li>
           );
@@ -72,7 +76,7 @@ function range({ reached }: Reach, scale: PotentialScale): string {
 function Name({ reach: { reagent, equilibrium }, scale }: { reach: Reach; scale: PotentialScale }) {
   const { couple } = reagent;
   return (
-    <Help title={reagent.name} trigger={<FormulaText text={reagent.name} />}>
+    <Help title={reagent.name} trigger={<Formula formula={reagent.name} />}>
       <p>
         {reagent.kind}: <FormulaText text={reagent.note} />.
       </p>

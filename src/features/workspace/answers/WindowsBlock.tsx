@@ -72,7 +72,7 @@ export function ConflictsBlock({
             <li key={set.map((c) => c.metal).join()} className="hairline py-1">
               {set.length === 1 && set[0] ? (
                 <>
-                  <b>{metalName(set[0].metal)}</b> is nowhere {requirementWord[set[0].requirement]} on this map.
+                  Nowhere on this map is <b>{metalName(set[0].metal)}</b> {requirementWord[set[0].requirement]}.
                 </>
               ) : (
                 <>

@@ -33,7 +33,7 @@ export function LixiviantSection() {
         options={presetNames.map((preset) => ({
           value: preset,
           label: lixiviantName[preset],
-          note: presetCaution[preset],
+          note: <FormulaText text={presetCaution[preset]} />,
         }))}
       />
       {inputs.ligands.map(({ component, activity }) => (

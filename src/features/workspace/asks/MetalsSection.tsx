@@ -8,8 +8,7 @@ import { classes } from "../../../lib/classes";
 import { inputTextExact, withUnit } from "../../../lib/format";
 import { metalOptions } from "../../../lib/metals";
 import { amountWord, requirementWord } from "../../../lib/planWords";
-import { useThemeColours } from "../../../lib/theme";
-import { hatchesOf, metalColour, shuts } from "../../../map/metalStyle";
+import { cssMetalColour, hatchesOf, shuts } from "../../../map/metalStyle";
 import { Swatch } from "../../../map/Swatch";
 import { addMetal } from "../model/edit";
 import { useAsking } from "./context";
@@ -62,7 +61,6 @@ const amount = (m: PlanMetal): string =>
 
 function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean; onToggle: () => void }) {
   const { inputs, focus, onFocus } = useAsking();
-  const colours = useThemeColours();
   const hatch = hatchesOf(inputs.metals).get(metal.element) ?? null;
   const focused = focus === metal.element;
   const number = inputs.metals.indexOf(metal) + 1;
@@ -76,7 +74,7 @@ function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean;
         onClick={() => onFocus(focused ? null : metal.element)}
         className={classes("relative top-0.5 shrink-0", focused && "outline-2 outline-offset-1 outline-verdigris")}
       >
-        <Swatch hatch={shuts(metal) ? hatch : null} colour={metalColour(metal, { colours })} />
+        <Swatch hatch={shuts(metal) ? hatch : null} colour={cssMetalColour(metal)} />
       </button>
       <button
         type="button"

@@ -2,9 +2,10 @@ import { useState } from "react";
 import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import { Button } from "../../../components/Button";
 import { Dialog } from "../../../components/Dialog";
+import { PlainTable } from "../../../components/PlainTable";
 import { ErrorNote } from "../../../components/status";
 import { TextArea } from "../../../components/TextField";
-import { Note, Row } from "../../../components/text";
+import { Note } from "../../../components/text";
 import { ApiFailure } from "../../../lib/failure";
 import { planChanges } from "../../../lib/planChanges";
 import { useSaveRevision } from "../../../lib/plans";
@@ -56,6 +57,7 @@ export function SaveDialog({
         if (!next) save.reset();
         onOpenChange(next);
       }}
+      width={640}
       title={`Save revision ${plan.latest.number + 1}`}
       description="A revision freezes these inputs and the chemistry data they were solved with."
       footer={
@@ -98,15 +100,19 @@ export function SaveDialog({
         {changes.length === 0 ? (
           <Note>Nothing has changed since revision {plan.latest.number}.</Note>
         ) : (
-          changes.map(({ what, from, to }) => (
-            <Row key={what} label={what}>
-              <span className="font-sans text-sm">
-                <span className="text-muted">{from ?? "not there"}</span>
-                <span className="mx-1 font-mono">→</span>
-                {to ?? "taken out"}
-              </span>
-            </Row>
-          ))
+          <PlainTable
+            caption={`What changes from revision ${plan.latest.number}`}
+            rowKey={(change) => change.what}
+            rows={changes}
+            columns={[
+              { header: "what", cell: (c) => <b>{c.what}</b> },
+              {
+                header: `revision ${plan.latest.number}`,
+                cell: (c) => <span className="text-muted">{c.from ?? "not there"}</span>,
+              },
+              { header: "now", cell: (c) => c.to ?? <span className="text-muted">taken out</span> },
+            ]}
+          />
         )}
       </div>
       {save.error && <ErrorNote className="mt-3" doing="Not saved; nothing is lost" error={save.error} />}

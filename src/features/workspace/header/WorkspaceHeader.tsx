@@ -22,17 +22,16 @@ export interface HeaderProps {
 export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, onOpen }: HeaderProps) {
   const { latest } = plan;
   return (
-    <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5">
-      <h1 className="text-lg">{plan.name}</h1>
-      <p className="min-w-0 text-sm text-muted" title={`${fullTime(latest.createdAt)} by ${latest.author}`}>
-        revision {latest.number}, saved {savedAt(latest.createdAt)} by {latest.author}
-        {plan.invented && ", invented data"}
-        {plan.archived && <b>, archived</b>}
+    <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
+      <h1 className="truncate text-lg">{plan.name}</h1>
+      <p
+        className="min-w-0 flex-1 truncate text-sm text-muted"
+        title={`${fullTime(latest.createdAt)} by ${latest.author}. ${latest.note}`}
+      >
+        <Saved plan={plan} draft={draft} mayWrite={mayWrite} />
       </p>
-      <Unsaved plan={plan} draft={draft} mayWrite={mayWrite} />
       {exporting && <Status tone={exporting.bad ? "bad" : "quiet"}>{exporting.text}</Status>}
-      <span className="flex-1" />
-      <span className="no-print flex gap-2">
+      <span className="no-print flex shrink-0 gap-2">
         <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl Z">
           Undo
         </Button>
@@ -85,29 +84,40 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
   );
 }
 
-function Unsaved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "mayWrite">) {
-  if (!draft.changed) return null;
-  const behind = draft.basedOn < plan.latest.number;
+/** What is saved, and what of the plan in hand is not. */
+function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "mayWrite">) {
+  const { latest } = plan;
+  const tail = (
+    <>
+      {plan.invented && ", invented data"}
+      {plan.archived && <b>, archived</b>}
+    </>
+  );
+  if (!draft.changed)
+    return (
+      <>
+        revision {latest.number}, saved {savedAt(latest.createdAt)} by {latest.author}
+        {tail}
+        {latest.note !== "" && ` · ${latest.note}`}
+      </>
+    );
+  const back = (
+    <button
+      type="button"
+      className="no-print underline decoration-rule underline-offset-4 hover:decoration-ink"
+      onClick={() => draft.take(latest)}
+    >
+      go back to revision {latest.number}
+    </button>
+  );
   return (
-    <Status>
-      <b className="text-ink">
-        {mayWrite ? "Unsaved changes" : "Changed here only: your role looks and tries, a metallurgist saves"}
-      </b>
-      {draft.kept
-        ? mayWrite
-          ? ", kept in this browser"
-          : ""
-        : ", and this browser keeps nothing when the page closes"}
-      {behind && `; revision ${plan.latest.number} was saved since you began from ${draft.basedOn}`}
-      {" · "}
-      <button
-        type="button"
-        className="no-print underline decoration-rule underline-offset-4 hover:decoration-ink"
-        onClick={() => draft.take(plan.latest)}
-      >
-        go back to revision {plan.latest.number}
-      </button>
-    </Status>
+    <span role="status">
+      <b className="text-ink">{mayWrite ? "Unsaved changes" : "Tried here only"}</b>
+      {mayWrite ? `, from revision ${draft.basedOn}` : ": your role looks and tries, a metallurgist saves"}
+      {!draft.kept && ", and this browser keeps nothing when the page closes"}
+      {draft.basedOn < latest.number && <b className="text-signal">; revision {latest.number} was saved meanwhile</b>}
+      {tail} · {back}
+    </span>
   );
 }
 

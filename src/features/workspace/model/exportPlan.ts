@@ -32,7 +32,7 @@ export function captionLines({ plan, state, inputs, solution, model, dataVersion
   });
   const totals = [...inputs.ligands, ...inputs.others].map((c) => `${c.component} ${significant(c.activity)}`);
   return [
-    `${state}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
+    `${state.charAt(0).toUpperCase()}${state.slice(1)}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
     `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (total activities ${totals.join(", ")})` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
     `activities: ${metals.join("; ")}`,
     `Eh vs ${model.view.scale.short}. What can happen, not how fast. Screening only.`,
@@ -48,7 +48,7 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
     case "solution":
       return saveJson(`${stem}-solution.json`, e.solution);
     case "csv": {
-      const { header, rows } = limitsTable(e.solution.windows, e.inputs.controlBand);
+      const { header, rows } = limitsTable(e.solution.windows);
       // The mark in front makes spreadsheets read UTF-8.
       return saveFile(
         `${stem}-limits.csv`,

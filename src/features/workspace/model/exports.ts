@@ -37,17 +37,14 @@ const header = [
 ] as const;
 
 /** Every limit of every window as a table; potentials in V vs SHE whatever the screen shows. */
-export function limitsTable(
-  windows: readonly Window[],
-  band: { pH: number; Eh: number },
-): { header: string[]; rows: (string | number | null)[][] } {
+export function limitsTable(windows: readonly Window[]): { header: string[]; rows: (string | number | null)[][] } {
   return {
     header: [...header],
     rows: windows.flatMap((window, i) =>
       window.limits.map((l) => [
         windowName(i),
         l.kind,
-        l.kind === "metal" ? sideOf(l, band) : (l.side ?? sideOf(l, band)),
+        l.kind === "metal" ? sideOf(l) : (l.side ?? sideOf(l)),
         l.metal ?? null,
         l.inside ?? null,
         l.outside ?? null,

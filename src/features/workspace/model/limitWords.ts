@@ -16,34 +16,28 @@ export interface LimitSentence {
   others: Limit[];
 }
 
-/** Which side of the window a limit closes: its outward normal, weighed in control bands. */
-export function sideOf(limit: Pick<Limit, "line">, band: { pH: number; Eh: number }): Side {
-  const [, x, y] = limit.line;
+/** Which side of the window a limit closes: its outward normal. Lines that slope less than 1 V a pH unit transfer electrons and are
+ *  held by potential; what is steeper is held by pH. */
+export function sideOf({ line: [, x, y] }: Pick<Limit, "line">): Side {
   // k + x pH + y Eh is positive inside, so the way out is (-x, -y).
-  const [u, v] = [-x * band.pH, -y * band.Eh];
-  if (Math.abs(u) >= Math.abs(v)) return u > 0 ? "high pH" : "low pH";
-  return v > 0 ? "high Eh" : "low Eh";
+  if (Math.abs(x) > Math.abs(y)) return x < 0 ? "high pH" : "low pH";
+  return y < 0 ? "high Eh" : "low Eh";
 }
 
 const electrons = (limit: Limit): number =>
   limit.reactionTerms?.find((t) => t.species === "e^-" || t.formula === "e^-")?.coefficient ?? 0;
 
-/** What the metal does when the limit is passed. */
-function verb(inside: State | undefined, outside: State | undefined, limit: Limit, side: Side): string {
-  const moves = electrons(limit) !== 0;
+/** What the metal does when the limit is passed; electrons on the left mean that it is reduced. */
+function verb(inside: State | undefined, outside: State | undefined, limit: Limit): string {
+  const e = electrons(limit);
+  const turns = e < 0 ? "is reduced" : e > 0 ? "is oxidised" : null;
   if (outside === "dissolved") {
-    if (inside === "dissolved")
-      return moves ? (side === "low Eh" ? "is reduced" : "is oxidised") : "changes its complex";
-    if (!moves) return "dissolves";
-    return side === "low Eh"
-      ? "is reduced and dissolves"
-      : side === "high Eh"
-        ? "is oxidised and dissolves"
-        : "dissolves";
+    if (inside === "dissolved") return turns ?? "changes its complex";
+    return turns === null ? "dissolves" : `${turns} and dissolves`;
   }
   if (outside === "metal") return "goes to metal";
-  if (inside === "metal") return side === "low Eh" ? "turns to a compound" : "is oxidised to a compound";
-  return inside === "dissolved" ? "precipitates" : "changes its compound";
+  if (inside === "dissolved") return turns === null ? "precipitates" : `${turns} and precipitates`;
+  return turns === null ? "changes its compound" : `${turns} to a compound`;
 }
 
 export interface Naming {
@@ -52,7 +46,7 @@ export interface Naming {
   stateOf: (metal: string, species: string) => State | undefined;
 }
 
-function what(limit: Limit, side: Side, { metalName, stateOf }: Naming): string {
+function what(limit: Limit, { metalName, stateOf }: Naming): string {
   switch (limit.kind) {
     case "water":
       return limit.side === "hydrogen" ? "water gives hydrogen" : "water gives oxygen";
@@ -63,18 +57,18 @@ function what(limit: Limit, side: Side, { metalName, stateOf }: Naming): string 
     case "metal": {
       const metal = limit.metal ?? "";
       const state = (species: string | undefined) => (species === undefined ? undefined : stateOf(metal, species));
-      return `${metalName(metal)} ${verb(state(limit.inside), state(limit.outside), limit, side)}`;
+      return `${metalName(metal)} ${verb(state(limit.inside), state(limit.outside), limit)}`;
     }
   }
 }
 
 /** What shuts a window, one sentence a side and verb, nearest first; the frame comes last, since it shuts nothing. */
-export function limitSentences(window: Window, band: { pH: number; Eh: number }, naming: Naming): LimitSentence[] {
+export function limitSentences(window: Window, naming: Naming): LimitSentence[] {
   const bySentence = new Map<string, LimitSentence>();
   const near = [...window.limits].sort((a, b) => a.distance - b.distance);
   for (const limit of near) {
-    const side = sideOf(limit, band);
-    const words = what(limit, side, naming);
+    const side = sideOf(limit);
+    const words = what(limit, naming);
     const known = bySentence.get(`${side} ${words}`);
     if (known) {
       known.others.push(limit);
@@ -85,7 +79,7 @@ export function limitSentences(window: Window, band: { pH: number; Eh: number },
       side,
       what: words,
       axis,
-      distance: along(window.limits, side, words, axis, band, naming, limit),
+      distance: along(window.limits, side, words, axis, naming, limit),
       bands: limit.distance,
       limit,
       others: [],
@@ -101,12 +95,11 @@ function along(
   side: Side,
   words: string,
   axis: "pH" | "Eh",
-  band: { pH: number; Eh: number },
   naming: Naming,
   first: Limit,
 ): number | null {
   const ahead = limits
-    .filter((l) => l === first || (sideOf(l, band) === side && what(l, side, naming) === words))
+    .filter((l) => l === first || (sideOf(l) === side && what(l, naming) === words))
     .map((l) => (axis === "pH" ? l.distancePH : l.distanceEh))
     .filter((d) => d !== null)
     .map(Math.abs);
