@@ -3,7 +3,9 @@ import { fail, ok, type Outcome } from "../outcome";
 import { problemSchema, type MetalInput, type Problem, type Requirement } from "../schemas/problem";
 import type { ChemicalData, Species } from "../species/chemicalData";
 import { withSpecies } from "../species/library";
+import { energiesAt } from "../gibbs/energies";
 import { wholeFactor } from "../planes/formation";
+import { kelvin } from "../units";
 import { chooseSpecies } from "./choose";
 import { componentKind, SULFIDE_SULFUR } from "./components";
 
@@ -90,8 +92,9 @@ export function prepare(input: unknown, library: ChemicalData): Outcome<Prepared
 /** Largest |G| of a species that the grid of planes holds exactly with all its atoms, kJ/mol. */
 const LARGEST_G = 1e5;
 
-/** A row the problem brings along must fit the exact grid of planes: its atoms in small fractions, its energy in bounds. */
-function ownSpeciesFit({ species = [] }: Problem, data: ChemicalData): Outcome<null> {
+/** A row the problem brings along must fit the exact grid of planes, its atoms in small fractions, its energy in bounds; and
+ *  there must be a way to take it to the temperature. */
+function ownSpeciesFit({ species = [], temperatureC }: Problem, data: ChemicalData): Outcome<null> {
   for (const [i, { id, dGf_kJ, composition }] of species.entries()) {
     if (!(Math.abs(dGf_kJ) <= LARGEST_G))
       return fail(
@@ -105,8 +108,23 @@ function ownSpeciesFit({ species = [] }: Problem, data: ChemicalData): Outcome<n
         `species.${i}.composition`,
         `${id}: fractions of an atom no finer than a twelfth; got ${composition}`,
       );
+    if (!reaches(data, temperatureC, id))
+      return fail(
+        "BAD_DATA",
+        `species.${i}.S_J`,
+        `${id} needs its entropy: without one it is counted from simpler species, and here there are none, or it is one of them itself`,
+      );
   }
   return ok(null);
+}
+
+/** Whether the energy of a species can be worked out: a row without entropy is held against others, which may lead back to it. */
+function reaches(data: ChemicalData, temperatureC: number, id: string): boolean {
+  try {
+    return Number.isFinite(energiesAt(data, kelvin(temperatureC)).of(id).G);
+  } catch {
+    return false;
+  }
 }
 
 function preparedMetal(metal: MetalInput, species: readonly Species[], data: ChemicalData): PreparedMetal {

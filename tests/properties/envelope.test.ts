@@ -35,7 +35,7 @@ describe("the lower envelope", () => {
         for (const o of owners) expect(lowest).toContain(nameOf(planes[o.plane]!));
         if (lowest.size === 1) expect(owners.length).toBe(1);
       }),
-      runs(4000),
+      runs(1500),
     ));
 
   test("gives equal planes to the first of them", () =>
@@ -44,7 +44,7 @@ describe("the lower envelope", () => {
         for (const { plane } of lowerEnvelope(planes, cell))
           expect(planes.findIndex((p) => nameOf(p) === nameOf(planes[plane]!))).toBe(plane);
       }),
-      runs(1000),
+      runs(600),
     ));
 
   test("covers the cell once", () =>
@@ -53,7 +53,7 @@ describe("the lower envelope", () => {
         const area = lowerEnvelope(planes, cell).reduce((sum, c) => sum + areaOf(c.piece), 0);
         expect(area).toBeCloseTo(100, 9);
       }),
-      runs(2000),
+      runs(800),
     ));
 
   test("has mutual neighbours", () =>
@@ -64,7 +64,7 @@ describe("the lower envelope", () => {
           for (const tag of piece.tags)
             if (tag >= 0) expect(cells.find((c) => c.plane === tag)?.piece.tags ?? []).toContain(plane);
       }),
-      runs(4000),
+      runs(1500),
     ));
 
   test("names one neighbour an edge, and each neighbour once", () =>
@@ -72,7 +72,7 @@ describe("the lower envelope", () => {
       fc.property(planeSet, (planes) => {
         for (const { piece } of lowerEnvelope(planes, cell)) expect(new Set(piece.tags).size).toBe(piece.tags.length);
       }),
-      runs(2000),
+      runs(800),
     ));
 
   test("does not depend on the order of the planes", () =>
@@ -81,6 +81,6 @@ describe("the lower envelope", () => {
         const turned = [...planes.slice(k), ...planes.slice(0, k)].reverse();
         expect(neighboursByName(turned)).toEqual(neighboursByName(planes));
       }),
-      runs(2000),
+      runs(800),
     ));
 });

@@ -66,7 +66,7 @@ describe("connect", () => {
         for (const { from, to } of regions[0]!.outer)
           expect(([0, 1] as const).some((axis) => Math.abs(from[axis]) === 4 && from[axis] === to[axis])).toBe(true);
       }),
-      runs(500),
+      runs(100),
     ));
 
   test("joins any choice of the pieces as their shared edges say, and never across a point", () =>
@@ -77,7 +77,7 @@ describe("connect", () => {
         expectRegions(pieces, regions);
         expect(regions.length).toBe(pieces.length === 0 ? 0 : components(pieces));
       }),
-      runs(2000),
+      runs(350),
     ));
 
   test("does not depend on the order of the pieces", () =>
@@ -91,6 +91,6 @@ describe("connect", () => {
             .sort((a, b) => a[0]! - b[0]! || a[1]! - b[1]! || a[2]! - b[2]!);
         expect(shapes(turned)).toEqual(shapes(pieces));
       }),
-      runs(800),
+      runs(250),
     ));
 });

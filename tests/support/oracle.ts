@@ -23,6 +23,8 @@ export interface Standing {
 
 export interface Oracle {
   readonly problem: Problem;
+  /** the cheapest species of a metal, and what the next one costs more, J/mol */
+  cheapest(metal: string, pH: number, Eh: number): Standing & { lead: number };
   /** every species of a metal, cheapest first */
   standings(metal: string, pH: number, Eh: number): Standing[];
   /** chemical potential of any term of a reaction at a point, J/mol: H^+, e^-, water, gases at 1 bar, holders and the metals' species
@@ -134,6 +136,20 @@ export function oracleFor(problem: Problem, library: ChemicalData): Oracle {
 
   return {
     problem,
+    cheapest(metal, pH, Eh) {
+      const holders = holdersAt(pH, Eh);
+      let best: Counted | null = null;
+      let found = { energy: Infinity, moved: 0 };
+      let next = Infinity;
+      for (const c of ofMetal.get(metal)!) {
+        const f = formation(c, holders, pH, Eh);
+        if (f.energy < found.energy) {
+          next = found.energy;
+          [best, found] = [c, f];
+        } else next = Math.min(next, f.energy);
+      }
+      return { species: best!.species, state: stateOf(best!.species), ...found, lead: next - found.energy };
+    },
     standings(metal, pH, Eh) {
       const holders = holdersAt(pH, Eh);
       return ofMetal
