@@ -1,7 +1,7 @@
 import { massRatio, type MolarMasses } from "./molarMass";
 
 /** kg H2SO4 per kg, by the reaction named.
- *  @param masses  g/mol     @returns  kg/kg of the metal or mineral     @source  stoichiometry (practice brief, 3.6)
+ *  @param masses  g/mol     @returns  kg/kg of the metal or mineral     @source  stoichiometry; practice-checks.json, F11
  *  @example acidFactors(chemistry().molarMass).perCopperOxide // => 1.543
  *  @example acidFactors(chemistry().molarMass).returnedByJarosite // => 1.756 */
 export const acidFactors = (masses: MolarMasses) => ({
@@ -50,7 +50,7 @@ export interface AcidBalance {
  *  is the gangue's. Net after solvent extraction is gross less what extraction gives back with the copper.
  *  @param used  g H2SO4 used up     @param dryOre  g     @param copper  g dissolved from oxides
  *  @param jarositeIron  g Fe precipitated as jarosite     @param ferrousOxidised  g Fe     @param masses  g/mol
- *  @returns  kg H2SO4 per t dry ore     @source  practice brief, 3.6; always say which one is quoted
+ *  @returns  kg H2SO4 per t dry ore     @source  practice-checks.json, F10; always say which one is quoted
  *  @example acidBalance(28.138, 1000, 6.9, 1.2, 0, chemistry().molarMass).gangue // => 19.596 */
 export function acidBalance(
   used: number,

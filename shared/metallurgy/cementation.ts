@@ -7,7 +7,7 @@ export const cementationElectrons: Readonly<Record<string, number>> = {
 }; // prettier-ignore
 
 /** Metal won from a liquor: 100 (1 - V_f c_f / (V_0 c_0)).
- *  @param before, after  L and g/L     @returns  %     @source  practice brief, 3.9
+ *  @param before, after  L and g/L     @returns  %     @source  definition; worked in practice-checks.json, F15
  *  @example cementationRecovery([2, 1.85], [1.985, 0.042]) // => 97.747 */
 export const cementationRecovery = (
   before: readonly [volume: number, assay: number],
@@ -42,7 +42,7 @@ export const acidDemand = (cementing: string, masses: MolarMasses): number =>
 
 /** Cementing metal that everything removed takes by stoichiometry.
  *  @param removed  g or g/L by element     @param cementing  element     @param masses  g/mol     @returns  same unit as removed
- *  @source  sum of the stoichiometric ratios (practice brief, 3.9)
+ *  @source  sum of the stoichiometric ratios (practice-checks.json, F16)
  *  @example theoreticalMetal({ Cu: 0.45, Cd: 0.38, Co: 0.018, Ni: 0.012 }, "Zn", chemistry().molarMass) // => 0.7173 */
 export const theoreticalMetal = (
   removed: Readonly<Record<string, number>>,

@@ -34,7 +34,7 @@ export const withdrawnMetal = (withdrawals: readonly Withdrawal[]): number =>
  *  liquor that is judged. With equal make-up V_n = V_0; without, V_n = V_0 - sum v_i. Negative where metal left the solution.
  *  @param vessel  start and withdrawals     @param finalVolume  L in the vessel at the end     @param finalAssay  g/L
  *  @returns  g; rises with every assay of the vessel, falls with those of the lixiviant and the make-up
- *  @source  mass balance over the vessel (practice brief, 3.1)
+ *  @source  mass balance over the vessel (practice-checks.json, F01 to F03)
  *  @example dissolvedMetal({ volume: 0.8, assay: 0, withdrawals: [] }, 0.8, 3.95) // => 3.16 */
 export const dissolvedMetal = (vessel: Vessel, finalVolume: number, finalAssay: number): number =>
   finalVolume * finalAssay + withdrawnMetal(vessel.withdrawals) - vessel.volume * vessel.assay;
@@ -50,7 +50,7 @@ export const dissolvedAtEachSample = ({ volume, assay, withdrawals }: Vessel): n
 
 /** Metal in solution from what was filtered off: M = V_f c_f + V_w c_w + samples - V_0 c_0.
  *  @param vessel  start and withdrawals     @param filtrate, wash  L and g/L     @returns  g
- *  @source  mass balance (practice brief, 3.3); differs from `dissolvedMetal` by hold-up and volume error
+ *  @source  mass balance (practice-checks.json, F07); differs from `dissolvedMetal` by hold-up and volume error
  *  @example dissolvedInFiltrate({ volume: 0, assay: 0, withdrawals: [] }, [0.712, 3.95], [0.6, 0.558]) // => 3.1472 */
 export const dissolvedInFiltrate = (
   vessel: Vessel,

@@ -13,7 +13,7 @@ export interface Pulp {
 
 /** Densities and ratios of a pulp: 1 / rho_p = S / rho_s + (1 - S) / rho_l.
  *  @param solids  g/g of pulp, 0 to 1     @param solidDensity, liquorDensity  kg/L     @returns  as named
- *  @source  volumes added up (practice brief, 3.12)
+ *  @source  volumes added up (practice-checks.json, F25)
  *  @example pulpOf(0.35, 2.72, 1.035).density // => 1.3215
  *  @example pulpOf(0.35, 2.72, 1.035).liquorPerKg // => 1.7943 */
 export function pulpOf(solids: number, solidDensity: number, liquorDensity: number): Pulp {

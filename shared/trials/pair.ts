@@ -68,7 +68,7 @@ function cautionsOf(left: Side, right: Side, stages: readonly StagePair[]): stri
 
 /** Two campaigns side by side, stage by stage.
  *  @param left, right  each with its trials     @returns  differences of means, right less left, and what stands in the way of reading them
- *  @source  block by feed, same electrode scale, same revision (practice brief, 8) */
+ *  @source  common practice, no source: compare within a feed, on one electrode scale, against one revision */
 export function campaignPair(left: Side, right: Side): CampaignPair {
   const [a, b] = [campaignSummary(left.campaign, left.trials), campaignSummary(right.campaign, right.trials)];
   const codes = [...new Set([...a, ...b].map((s) => s.stage.code))];

@@ -117,7 +117,7 @@ function dosedMetal({ measured }: Trial): Cementing {
  *  metal ratio, excess and where the consumed metal went. Hydrogen is made where acid is left, and arsine or stibine where
  *  arsenic or antimony is about: site procedures and licensed practice decide.
  *  @param trial  record     @param metal  won     @param masses  g/mol     @param errors  relative     @returns  g, %, kg/kg
- *  @source  practice brief, 3.9: recovery = 100 (1 - V_f c_f / (V_0 c_0)), ratio = consumed / won, excess = ratio / stoichiometry */
+ *  @source  docs/accounts.md; practice-checks.json, F15 and F16: recovery = 100 (1 - V_f c_f / (V_0 c_0)), ratio = consumed / won, excess = ratio / stoichiometry */
 export function cementationAccount(
   trial: Trial,
   metal: string,

@@ -16,7 +16,7 @@ export interface ConsumedShare {
 /** Where the consumed cementing metal went: metals won, ferric iron, free acid, and the rest.
  *  @param trial  record; ferric iron as `Fe(III)`, free acid as `H2SO4` in the assays     @param cementing  element
  *  @param consumed  g     @param won  g of each metal     @param masses  g/mol     @returns  g, the unexplained last
- *  @source  practice brief, 3.9 */
+ *  @source  practice-checks.json, F15 */
 export function consumedSplit(
   trial: Trial,
   cementing: string,

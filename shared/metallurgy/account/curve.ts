@@ -9,7 +9,7 @@ export interface CurvePoint {
 }
 
 /** Extraction at every sample, the liquor of the sample itself still in the vessel.
- *  @param vessel  as recorded     @param feed  g of metal     @returns  one point a sample     @source  practice brief, 3.1 */
+ *  @param vessel  as recorded     @param feed  g of metal     @returns  one point a sample     @source  practice-checks.json, F04 */
 export const extractionCurve = (vessel: RecordedVessel, feed: Interval): CurvePoint[] =>
   vessel.taken.map(({ hours, assay }, i) => {
     const before = { ...vessel, taken: vessel.taken.slice(0, i) };

@@ -27,7 +27,7 @@ const LOOSE = { metals: ["Au", "Ag", "Pd", "Pt"], belowGrade: 10e-6, range: [90,
 const TIGHT = [95, 105] as const;
 
 /** Range an account should close in: 95 to 105 %, 90 to 110 % for gold and its like under 10 g/t.
- *  @param metal  element     @param head  g/g     @returns  %     @source  common practice, no source (practice brief, 3.4)
+ *  @param metal  element     @param head  g/g     @returns  %     @source  common practice, no source
  *  @example closingRange("Zn", 0.5)[0] // => 95 */
 export const closingRange = (metal: string, head: number | null): readonly [lo: number, hi: number] =>
   head !== null && LOOSE.metals.includes(metal) && head < LOOSE.belowGrade ? LOOSE.range : TIGHT;
@@ -41,7 +41,7 @@ const hottest = (trial: Trial): number =>
     ),
   );
 
-/** What makes an account find too little, as seen in spreadsheets and benches (practice brief, 1 and 3). */
+/** What makes an account find too little, as seen in spreadsheets and benches: common practice, no source. */
 function causesOfLow(trial: Trial): string[] {
   const { products } = trial;
   const seen = [

@@ -63,7 +63,7 @@ function basis(
  *  extraction at every sample; and what stands out. Censored assays give intervals. Nothing is thrown: what is not there is
  *  listed as missing.
  *  @param trial, feed  records     @param metal  element     @param masses  g/mol     @param errors  relative, for the error of each basis
- *  @returns  masses in g, recoveries in %, heads in g/g     @source  practice brief, 3.1 to 3.5 and 3.14 */
+ *  @returns  masses in g, recoveries in %, heads in g/g     @source  docs/accounts.md; practice-checks.json, F01 to F09 and F29 */
 export function metalAccount(
   trial: Trial,
   feed: Feed,

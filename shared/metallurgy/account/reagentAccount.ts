@@ -70,7 +70,7 @@ const ledgerOf = ({ used, missing }: Figure): Ledger => {
 /** Reagents of a trial: added, left and consumed, per tonne of dry feed and per kg of metal; always both and always said which.
  *  @param trial, feed  records; the solids count in a leach only
  *  @param metal  dissolved or won, with how much: g, from the metal's own account     @param masses  g/mol
- *  @returns  g as pure, kg/t, kg/kg; what is missing is listed     @source  practice brief, 3.6, 3.8, 3.10 */
+ *  @returns  g as pure, kg/t, kg/kg; what is missing is listed     @source  docs/accounts.md; practice-checks.json, F10 and F18 */
 export function reagentAccount(
   trial: Trial,
   feed: Feed,

@@ -71,7 +71,7 @@ const untitrated = (volume: number, available: number, vessel: number): Interval
 
 /** One reagent from what was put in to what was left: initial liquor, doses and make-up, less the final liquor and the samples.
  *  @param trial  record     @param reagent  as doses and assays name it     @param water  g that came with the solids
- *  @param masses  g/mol     @returns  g as pure     @source  practice brief, 3.6 and 3.8 */
+ *  @param masses  g/mol     @returns  g as pure     @source  docs/accounts.md; practice-checks.json, F10 and F18 */
 export function reagentUse(trial: Trial, reagent: string, water: number, masses: MolarMasses): ReagentUse {
   const inStart = trial.charge.liquorAssays.some(({ analyte }) => analyte === reagent);
   const inDoses = trial.measured.doses.some((d) => d.reagent === reagent);

@@ -21,7 +21,7 @@ const launder: Partial<TrialInput> = {
   },
 };
 
-describe("copper on iron (practice brief, 3.9; computed from the definition)", () => {
+describe("copper on iron (practice-checks.json, F15; computed from the definition)", () => {
   const a = account(launder);
   test("recovery, ratio, excess", () => {
     expect(a.bases.find((b) => b.id === "solution")?.value?.lo).toBeCloseTo(97.7468, 3);
@@ -67,7 +67,7 @@ test("ferric not assayed at the end: from none to all of it", () => {
   expect(rest.hi - rest.lo).toBeCloseTo(0.6 + 3 * 0.569429, 3);
 });
 
-test("zinc dust: theory counts every metal removed (practice brief, 3.9)", () => {
+test("zinc dust: theory counts every metal removed (practice-checks.json, F16)", () => {
   const start = { Cu: "0.450 g/L", Cd: "380 mg/L", Co: "18 mg/L", Ni: "12 mg/L", Zn: "140 g/L" };
   const end = { Cu: "0 mg/L", Cd: "0 mg/L", Co: "0 mg/L", Ni: "0 mg/L", Zn: "141 g/L" };
   const a = account(

@@ -14,7 +14,7 @@ const exact = (i: { lo: number; hi: number } | null) => {
   return i!.lo;
 };
 
-describe("the example of the trade (practice brief, 3.1 to 3.4 and 3.14; computed from the definition)", () => {
+describe("the example of the trade (practice-checks.json, F01 to F07 and F29; computed from the definition)", () => {
   const a = account(exampleRecord());
 
   test("calculated head first, all bases side by side", () => {

@@ -28,7 +28,7 @@ const heap = (withAcid = true): Partial<TrialInput> => ({
   products: { finalAssays: assays({ H2SO4: "3.10 g/L" }) },
 });
 
-describe("acid (practice brief, 3.6 and 3.10; computed from the definition)", () => {
+describe("acid (practice-checks.json, F10; computed from the definition)", () => {
   const a = account(heap());
   const acid = a.rows.find((r) => r.reagent === "H2SO4")!;
   test("added 33.41, consumed 28.138 kg/t, 4.08 kg per kg of copper", () => {
