@@ -195,6 +195,14 @@ describe("regions", () => {
     for (const [pH] of isoLines.flat()) expect(pH).toBeCloseTo(10.65, 1);
   });
 
+  test.each([[0.002, 9.9, 10.1], [0.01, 10.5, 10.7]])("over %d mol/L of cyanide 50 ppm lie between pH %d and %d: gold plants run from 10 (practice, R10)", (total, lo, hi) => {
+    const { isoLines } = regionAbove(pressure(liquor({ CN: total }), "HCN"), usualThreshold.HCN.bar);
+    for (const [pH] of isoLines.flat()) {
+      expect(pH).toBeGreaterThan(lo);
+      expect(pH).toBeLessThan(hi);
+    }
+  }); // prettier-ignore
+
   test("log10 p is a line on each piece", () => {
     const p = pressure(liquor({}), "H2");
     const [k, x, y] = logPressureLine(p, p.pieces[0]!);
