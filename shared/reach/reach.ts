@@ -1,6 +1,8 @@
 import { FARADAY, GAS_CONSTANT, LN10 } from "../constants";
 import type { PlanInputs, PresetName } from "../schemas/plan";
+import type { ChemicalData } from "../species/chemicalData";
 import { kelvin } from "../units";
+import { type EquilibriumLine, equilibriumLine } from "./equilibrium";
 import { type Couple, type Reagent, reagents } from "./reagents";
 
 /** Nernst line of a couple with every activity one: E0 - (R T ln 10 / F)(h / n) pH, E0 held at its 25 C value.
@@ -40,49 +42,31 @@ const usual: Record<PresetName, readonly string[]> = {
   water: ["air", "ferric", "peroxide"],
 };
 
+/** One reagent of the map: what it commonly shows in the liquor, and where its couple would stand. */
 export interface Reach {
   reagent: Reagent;
   /** V vs SHE; null where no range is on record for this liquor */
-  reached: readonly [lo: number, hi: number | null] | null;
-  /** V vs SHE at the pH asked; null without a couple */
-  equilibrium: number | null;
+  practical: readonly [lo: number, hi: number | null] | null;
+  /** null without a couple */
+  line: EquilibriumLine | null;
 }
 
-/** What each reagent named can bring the slurry to at one pH, in the order of the table.
- *  @param ids  reagent ids     @param pH  where the equilibrium is read     @returns  V vs SHE */
-export function reachAt(ids: readonly string[], preset: PresetName, pH: number, temperatureC: number): Reach[] {
-  return reagents
+/** What the reagents named can bring a liquor to, in the order of the table.
+ *  @param data  the library     @param ids  reagent ids     @param preset, temperatureC  of the liquor, C     @returns  V vs SHE at T */
+export const reachesOf = (
+  data: ChemicalData,
+  ids: readonly string[],
+  preset: PresetName,
+  temperatureC: number,
+): Reach[] =>
+  reagents
     .filter((r) => ids.includes(r.id))
     .map((reagent) => ({
       reagent,
-      reached: reagent.reached && reagent.reachedIn.includes(preset) ? reagent.reached : null,
-      equilibrium: reagent.couple ? equilibriumEh(reagent.couple, pH, temperatureC) : null,
+      practical: reagent.reached && reagent.reachedIn.includes(preset) ? reagent.reached : null,
+      line: equilibriumLine(data, reagent, temperatureC),
     }));
-}
 
-/** holds: the practical range spans the set point; inside: it enters the window but not at the set point; short: it does not get that far;
- *  beyond: it goes past the window; equilibrium-only: no practical range on record for the liquor. */
-export type ReachVerdict = "holds" | "inside" | "short" | "beyond" | "equilibrium-only" | "unknown";
-
-/** How a practical range stands to the potentials a window allows at the set point's pH. An oxidant is short when its range ends below
- *  the window, a reductant when its range ends above it.
- *  @param allowed  V vs SHE, lower and upper end of the window on that line     @param target  V vs SHE
- *  @returns  a verdict, and the overlap of range and window in V vs SHE */
-export function judgeReach(
-  reach: Reach,
-  allowed: readonly [number, number],
-  target: number,
-): { verdict: ReachVerdict; overlap: [number, number] | null } {
-  if (reach.reached === null)
-    return { verdict: reach.equilibrium === null ? "unknown" : "equilibrium-only", overlap: null };
-  const [lo, hi] = [reach.reached[0], reach.reached[1] ?? Number.POSITIVE_INFINITY];
-  const below = hi < allowed[0];
-  if (below || lo > allowed[1]) {
-    const oxidises = reach.reagent.kind === "oxidant";
-    return { verdict: below === oxidises ? "short" : "beyond", overlap: null };
-  }
-  return {
-    verdict: target >= lo && target <= hi ? "holds" : "inside",
-    overlap: [Math.max(lo, allowed[0]), Math.min(hi, allowed[1])],
-  };
-}
+/** Where the couple of a reagent would stand at a pH with every activity one, V vs SHE; null without a couple. */
+export const standsAt = ({ line }: Pick<Reach, "line">, pH: number): number | null =>
+  line && line.intercept + line.slope * pH;

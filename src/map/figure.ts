@@ -20,7 +20,6 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
   const { solution, through } = content;
   const { layers } = view;
   const setPoint = solution.windows[view.window]?.setPoint ?? null;
-  const reagents = content.reaches.map((r) => r.reagent);
   const all = [
     groundTrace(view),
     ...openGroundTraces(solution, view),
@@ -28,7 +27,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     ...(layers.hazard && content.cyanide ? hydrogenCyanideTraces(view) : []),
     ...(layers.boundaries ? boundaryTraces(content.boundaries, view) : []),
     ...(layers.water ? waterTraces(solution, view) : []),
-    ...(layers.equilibriumLines ? equilibriumTraces(reagents, solution.temperatureC, view) : []),
+    ...(layers.equilibriumLines ? equilibriumTraces(content.reaches, view) : []),
     ...(layers.otherBasis && content.moved ? otherBasisTraces(content.moved.limits, view) : []),
     ...windowOutlineTraces(solution, view),
     ...(layers.setPoint ? setPointTraces(setPoint, layers.crosscuts ? through : null, view) : []),
@@ -39,7 +38,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
           ...alongPHNames(content.crosscuts, view, stripSizes(sheet, view)),
         ]
       : []),
-    ...(sheet.reach ? reachTraces(content.reaches, view) : []),
+    ...(sheet.reach ? reachTraces(content.reaches, through?.[0] ?? view.frame.pH[0], view) : []),
   ];
   return all.filter((t) => t.x.length > 0);
 }

@@ -35,7 +35,7 @@ export const layerWords: Readonly<Record<LayerName, string>> = {
   setPoint: "Set point and band",
   crosscuts: "Crosscuts",
   reach: "Reach bars",
-  equilibriumLines: "Reagent equilibria, E0 only",
+  equilibriumLines: "Reagents’ equilibria",
   otherBasis: "Other solids basis",
   hazard: "Hazard regions",
 };

@@ -190,6 +190,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
                 chosen={chosen}
                 onChoose={setWindow}
                 reaches={map.reaches}
+                pH={map.through[0]}
                 chooseReagents={<ChooseReagents preset={inputs.preset} value={reagents} onChange={choose} />}
                 procedures={draft.procedures}
                 onProcedure={draft.nameProcedure}

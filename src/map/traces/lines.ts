@@ -1,6 +1,5 @@
 import { HCN_PH } from "../../../shared/hazards/rules";
-import { equilibriumEh } from "../../../shared/reach/reach";
-import type { Reagent } from "../../../shared/reach/reagents";
+import { type Reach, standsAt } from "../../../shared/reach/reach";
 import type { Limit, Point, Solution } from "../../../shared/solution";
 import { lineCoordinates, ringCoordinates } from "../geometry/rings";
 import { type PlotTrace, trace } from "../plotTypes";
@@ -24,21 +23,18 @@ export function waterTraces(solution: Pick<Solution, "waterLines">, view: MapVie
   ];
 }
 
-/** Equilibrium lines of reagents against pH, every activity one and E0 of 25 C: a thin reminder, not a promise. */
-export function equilibriumTraces(chosen: readonly Reagent[], temperatureC: number, view: MapView): PlotTrace[] {
-  return chosen.flatMap(({ id, name, couple }) =>
-    couple === undefined
+/** Equilibrium lines of reagents against pH, every activity one: a thin reminder, not a promise. */
+export function equilibriumTraces(reaches: readonly Reach[], view: MapView): PlotTrace[] {
+  return reaches.flatMap((reach) =>
+    reach.line === null
       ? []
       : [
           trace({
-            uid: `equilibrium-${id}`,
-            name: `${name}, equilibrium from E0 only`,
+            uid: `equilibrium-${reach.reagent.id}`,
+            name: `${reach.reagent.name}, equilibrium with every activity one`,
             mode: "lines",
             line: { color: view.colours.water, width: 0.9, dash: "2px,3px" },
-            ...lineCoordinates(
-              [view.frame.pH.map((pH): Point => [pH, equilibriumEh(couple, pH, temperatureC)])],
-              view.scale.toShown,
-            ),
+            ...lineCoordinates([view.frame.pH.map((pH): Point => [pH, standsAt(reach, pH) ?? 0])], view.scale.toShown),
           }),
         ],
   );

@@ -1,4 +1,4 @@
-import type { Reach } from "../../../shared/reach/reach";
+import { type Reach, standsAt } from "../../../shared/reach/reach";
 import { formulaHtml } from "../../../shared/species/typeset";
 import { type Coordinate, type PlotTrace, trace } from "../plotTypes";
 import type { MapView } from "../view";
@@ -7,7 +7,7 @@ const beside = { xaxis: "x3", yaxis: "y" } as const;
 const inside = (Eh: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, Eh));
 
 /** Bars beside the Eh axis: the practical range solid, a thin line on to the couple's equilibrium at the set point's pH. */
-export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace[] {
+export function reachTraces(reaches: readonly Reach[], pH: number, view: MapView): PlotTrace[] {
   const { toShown } = view.scale;
   const range = view.frame.Eh;
   const solid: { x: Coordinate[]; y: Coordinate[] } = { x: [], y: [] };
@@ -21,9 +21,10 @@ export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace
     into.y.push(null);
   };
   const barb = 0.02 * (range[1] - range[0]);
-  reaches.forEach(({ reached, equilibrium }, i) => {
+  reaches.forEach((reach, i) => {
     const x = i + 0.5;
-    const bar = reached && ([reached[0], reached[1] ?? range[1]] as const);
+    const equilibrium = standsAt(reach, pH);
+    const bar = reach.practical && ([reach.practical[0], reach.practical[1] ?? range[1]] as const);
     if (bar)
       push(
         solid,
@@ -48,7 +49,7 @@ export function reachTraces(reaches: readonly Reach[], view: MapView): PlotTrace
   return [
     trace({
       uid: "reach-thin",
-      name: "Equilibrium of the couple, E0 only",
+      name: "Equilibrium of the couple, every activity one",
       mode: "lines",
       ...beside,
       ...thin,

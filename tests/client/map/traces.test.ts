@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
-import { reachAt } from "../../../shared/reach/reach";
+import type { Reach } from "../../../shared/reach/reach";
+import { reagentById } from "../../../shared/reach/reagents";
 import { sheetBoxes } from "../../../src/map/boxes";
 import { mapContent } from "../../../src/map/content";
 import { mapFigure } from "../../../src/map/figure";
@@ -15,6 +16,11 @@ import { setPointTraces } from "../../../src/map/traces/setPoint";
 import type { MapMetal } from "../../../src/map/view";
 import { solution, view, window } from "./fixture";
 
+const air: Reach = {
+  reagent: reagentById.get("air")!,
+  practical: [0.45, 0.75],
+  line: { intercept: 1.2, slope: -0.066, from: "library" },
+};
 const shut = new Map(solution.shut!.map((s) => [s.metal, s.polygons]));
 const sheet = sheetBoxes(740, 640, { metals: 2, reagents: 2, crosscuts: true, reach: true });
 const content = mapContent({
@@ -22,7 +28,7 @@ const content = mapContent({
   solution,
   other: null,
   through: [1, 0.5],
-  reaches: reachAt(["air", "ferric"], "sulfate", 1, 60),
+  reaches: [air, { ...air, reagent: reagentById.get("ferric")! }],
   cyanide: false,
 });
 const byUid = (traces: PlotTrace[], uid: string) => traces.find((t) => t.uid === uid)!;
@@ -121,17 +127,16 @@ describe("set point", () => {
 });
 
 describe("reach bars", () => {
-  const [air] = reachAt(["air"], "sulfate", 5, 60);
   test("solid over the practical range, thin from its end on to the equilibrium, inside the frame", () => {
-    const [thin, solid] = reachTraces([air!], view);
+    const [thin, solid] = reachTraces([air], 5, view);
     shown(solid!).forEach((v, i) => expect(v).toBeCloseTo(([0.45, 0.75][i]! - 0.2) * 1000));
     expect(shown(solid!)).toHaveLength(2);
-    expect(Math.max(...shown(thin!))).toBeCloseTo((air!.equilibrium! - 0.2) * 1000);
+    expect(Math.max(...shown(thin!))).toBeCloseTo((1.2 - 5 * 0.066 - 0.2) * 1000);
     expect(thin!.line!.width).toBeLessThan(solid!.line!.width);
   });
   test("on the map the equilibrium is capped level; beyond it an arrow points on", () => {
     const wings = (equilibrium: number) => {
-      const [thin] = reachTraces([{ ...air!, equilibrium }], view);
+      const [thin] = reachTraces([{ ...air, line: { intercept: equilibrium, slope: 0, from: "library" } }], 5, view);
       const at = thin!.x.flatMap((x, i) => (x !== null && Math.abs(x - 0.5) > 0.1 ? [thin!.y[i]!] : []));
       return { tip: Math.max(...shown(thin!)), wings: at };
     };

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import type { Limit } from "../../../shared/solution";
-import { allowedEh, limitSentences, sideOf } from "../../../src/features/workspace/model/limitWords";
+import { limitSentences, sideOf } from "../../../src/features/workspace/model/limitWords";
 import { window as fixture } from "../map/fixture";
 
 const naming = {
@@ -120,14 +120,5 @@ describe("what happens there, in words", () => {
     expect(rest).toEqual([]);
     expect(sentence!.limit).toBe(near);
     expect(sentence!.others).toEqual([far]);
-  });
-});
-
-describe("potentials a window allows at its set point", () => {
-  test("run from edge to edge on the line through it", () => expect(allowedEh(fixture)).toEqual([0, 1]));
-  test("stop at a hole above or below", () => {
-    const at = (Eh: number) => allowedEh({ ...fixture, setPoint: { ...fixture.setPoint, pH: 3, Eh } });
-    expect(at(0.2)).toEqual([0, 0.4]);
-    expect(at(0.9)).toEqual([0.6, 1]);
   });
 });

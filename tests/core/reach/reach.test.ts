@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
-import { equilibriumEh, judgeReach, reachAt, usualReagents } from "../../../shared/reach/reach";
+import { library as data } from "../../support/solver";
+import { equilibriumEh, reachesOf, standsAt, usualReagents } from "../../../shared/reach/reach";
 import { reagentById, reagents } from "../../../shared/reach/reagents";
 
 describe("equilibrium potential of a couple", () => {
@@ -34,10 +35,21 @@ describe("the table of reagents", () => {
     }
   });
 
-  test("a practical range read in acid is not claimed for a cyanide liquor", () => {
-    const [air] = reachAt(["air"], "cyanide", 10.5, 25);
-    expect(air!.reached).toBeNull();
-    expect(air!.equilibrium).toBeCloseTo(1.229 - 0.05916 * 10.5, 3);
+  test("a practical range read in acid is not claimed for a cyanide liquor; the couple still stands somewhere", () => {
+    const [air] = reachesOf(data, ["air"], "cyanide", 25);
+    expect(air!.practical).toBeNull();
+    expect(standsAt(air!, 10.5)).toBeCloseTo(1.229 - 0.05916 * 10.5, 3);
+    expect(reachesOf(data, ["air"], "sulfate", 25)[0]!.practical).toEqual([0.45, 0.75]);
+  });
+
+  test("reagents come in the order of the table, unknown ids leave nothing", () => {
+    const ids = reachesOf(data, ["zinc-dust", "nonsense", "air"], "sulfate", 60).map((r) => r.reagent.id);
+    expect(ids).toEqual(["air", "zinc-dust"]);
+  });
+
+  test("a reagent without a couple stands nowhere", () => {
+    const [sugar] = reachesOf(data, ["organic"], "sulfate", 60);
+    expect(standsAt(sugar!, 2)).toBeNull();
   });
 
   test("zinc purification shows zinc dust, a leach the usual oxidants", () => {
@@ -47,23 +59,5 @@ describe("the table of reagents", () => {
       "zinc-dust",
     ]);
     expect(usualReagents({ preset: "sulfate", metals: [metal("Zn", "dissolved")] })).toContain("air");
-  });
-});
-
-describe("the verdict on a practical range", () => {
-  const reach = (id: string) => reachAt([id], "sulfate", 5, 60)[0]!;
-  test("air, 0.45 to 0.75 V, holds a set point at 0.58 V and shares 0.45 to 0.75 V with the window", () => {
-    expect(judgeReach(reach("air"), [0.4, 0.86], 0.58)).toEqual({ verdict: "holds", overlap: [0.45, 0.75] });
-  });
-  test("it enters a window without holding the set point", () => {
-    expect(judgeReach(reach("air"), [0.7, 1.0], 0.85)).toEqual({ verdict: "inside", overlap: [0.7, 0.75] });
-  });
-  test("an oxidant below the window falls short, a reductant below it goes beyond", () => {
-    expect(judgeReach(reach("air"), [0.9, 1.0], 0.95).verdict).toBe("short");
-    expect(judgeReach(reach("sulfite"), [0.9, 1.0], 0.95).verdict).toBe("beyond");
-    expect(judgeReach(reach("sulfite"), [-0.2, 0.1], 0).verdict).toBe("short");
-  });
-  test("an open upper end reaches as far up as the window does", () => {
-    expect(judgeReach(reach("permanganate"), [0.8, 1.4], 1.2)).toEqual({ verdict: "holds", overlap: [1.0, 1.4] });
   });
 });

@@ -22,6 +22,8 @@ export interface AnswersProps {
   chosen: number;
   onChoose: (index: number) => void;
   reaches: readonly Reach[];
+  /** where the crosscuts run, and the equilibria are read */
+  pH: number;
   chooseReagents: React.ReactNode;
   procedures: Readonly<Record<string, string>>;
   onProcedure: (code: string, procedure: string) => void;
@@ -57,7 +59,15 @@ export function AnswersPanel(props: AnswersProps) {
           {cautions.length > 0 && said}
         </>
       )}
-      <ReachBlock reaches={reaches} window={window} scale={scale} choose={props.chooseReagents} />
+      <ReachBlock
+        reaches={reaches}
+        window={window}
+        data={data}
+        liquor={inputs}
+        pH={props.pH}
+        scale={scale}
+        choose={props.chooseReagents}
+      />
       <WarningsBlock warnings={solution.warnings} />
       {cautions.length === 0 && said}
     </>

@@ -1,36 +1,55 @@
-import { judgeReach, type Reach, type ReachVerdict } from "../../../../shared/reach/reach";
+import { type Reach, standsAt } from "../../../../shared/reach/reach";
+import { type ReachAnswer, reachOf } from "../../../../shared/reach/verdict";
+import type { PresetName } from "../../../../shared/schemas/plan";
 import type { Window } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
 import { Help, Term } from "../../../components/Help";
 import { Note, SectionHead } from "../../../components/text";
-import { fixed } from "../../../lib/format";
+import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
-import { allowedEh } from "../model/limitWords";
 
-const verdictWords: Readonly<Record<ReachVerdict, string>> = {
-  holds: "holds the set point",
-  inside: "enters the window, not the set point",
-  short: "does not reach the window",
-  beyond: "goes past the window",
-  "equilibrium-only": "no practical range on record for this liquor",
-  unknown: "no range and no couple on record",
-};
+/** The verdict in words, potentials on the member's scale. */
+function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialScale): string {
+  const off = differenceText(shortMV ?? 0, scale);
+  switch (verdict) {
+    case "reachable":
+      return "reaches the set point";
+    case "partly":
+      return shortMV === 0 || side === null
+        ? `serves the set point, but may go ${side === "below" ? "below" : "above"} the window`
+        : `enters the window and stays ${off} ${side} the set point`;
+    case "not reachable":
+      return `stays ${off} ${side ?? "outside"} the window`;
+    case "not on record":
+      return "no practical range on record for this liquor";
+  }
+}
+
+const differenceText = (mV: number, scale: PotentialScale): string =>
+  withUnit(fixed(scale.differenceToShown(mV / 1000), scale.digits), scale.unit);
 
 /** What each reagent brings the slurry to, and whether that is inside the window. */
 export function ReachBlock({
   reaches,
   window,
+  data,
+  liquor,
+  pH,
   scale,
   choose,
 }: {
   reaches: readonly Reach[];
   window: Window | null;
+  data: ChemicalData;
+  liquor: { preset: PresetName; temperatureC: number };
+  /** where the equilibria are read */
+  pH: number;
   scale: PotentialScale;
   /** the control that picks reagents */
   choose: React.ReactNode;
 }) {
-  const allowed = window && allowedEh(window);
   return (
     <section aria-label="Reach" className="mt-4">
       <SectionHead aside={choose}>
@@ -39,19 +58,19 @@ export function ReachBlock({
       {reaches.length === 0 && <Note className="py-1">No reagent is chosen.</Note>}
       <ul>
         {reaches.map((reach) => {
-          const verdict = window && allowed ? judgeReach(reach, allowed, window.setPoint.Eh).verdict : null;
+          const equilibrium = standsAt(reach, pH);
           return (
             <li key={reach.reagent.id} className="hairline py-1">
               <div className="flex items-baseline justify-between gap-3">
-                <Name reach={reach} scale={scale} />
+                <Name reach={reach} equilibrium={equilibrium} scale={scale} />
                 <span className="font-mono whitespace-nowrap">{range(reach, scale)}</span>
               </div>
               <div className="text-sm text-muted">
                 {[
-                  verdict && verdictWords[verdict],
-                  reach.reached === null &&
-                    reach.equilibrium !== null &&
-                    `equilibrium ${scale.format(reach.equilibrium)}, from E0 only`,
+                  window && verdictText(reachOf(data, reach.reagent, window, liquor), scale),
+                  reach.practical === null &&
+                    equilibrium !== null &&
+                    `its couple would stand at ${scale.format(equilibrium)}`,
                 ]
                   .filter(Boolean)
                   .join("; ")}
@@ -64,29 +83,35 @@ export function ReachBlock({
   );
 }
 
-function range({ reached }: Reach, scale: PotentialScale): string {
-  if (reached === null) return "";
-  const [lo, hi] = reached;
+function range({ practical }: Reach, scale: PotentialScale): string {
+  if (practical === null) return "";
+  const [lo, hi] = practical;
   return hi === null
     ? `${scale.format(lo)} and more`
     : `${fixed(scale.toShown(lo), scale.digits)} … ${scale.format(hi)}`;
 }
 
 /** The reagent's name, which opens what is known about it and from where. */
-function Name({ reach: { reagent, equilibrium }, scale }: { reach: Reach; scale: PotentialScale }) {
+function Name({
+  reach: { reagent, line },
+  equilibrium,
+  scale,
+}: {
+  reach: Reach;
+  equilibrium: number | null;
+  scale: PotentialScale;
+}) {
   const { couple } = reagent;
   return (
     <Help title={reagent.name} trigger={<Formula formula={reagent.name} />}>
       <p>
-        {reagent.kind}: <FormulaText text={reagent.note} />.
+        {reagent.kind}: <FormulaText text={reagent.note} />. <FormulaText text={reagent.hazard} />.
       </p>
-      {couple && (
+      {couple && equilibrium !== null && (
         <p>
-          Couple <Formula formula={couple.oxidised} />/<Formula formula={couple.reduced} />, E0 {fixed(couple.E0, 3)} V
-          vs SHE.
-          {equilibrium !== null && (
-            <> With every activity one it would stand at {scale.format(equilibrium)} here; E0 is that of 25 °C.</>
-          )}
+          Thin line: <Formula formula={couple.oxidised} />/<Formula formula={couple.reduced} /> would stand at{" "}
+          {scale.format(equilibrium)} here with every activity one,{" "}
+          {line?.from === "library" ? "E0 at this temperature" : "E0 of 25 °C"}. A slurry seldom shows it.
         </p>
       )}
       <p className="text-muted">{reagent.source}</p>

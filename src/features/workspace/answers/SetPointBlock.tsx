@@ -33,7 +33,7 @@ export function SetPointBlock({
         <span className="ml-5 whitespace-nowrap">{scale.format(at.Eh)}</span>
       </p>
       <Note>
-        vs {scale.electrode}. <ProbeReading Eh={at.Eh} data={data} />
+        vs {scale.electrode}. <ProbeReading Eh={at.Eh} data={data} /> {scale.remark}
       </Note>
       <Row
         className="mt-1"

@@ -1,4 +1,4 @@
-import type { Limit, Point, SetPoint, State, Window } from "../../../../shared/solution";
+import type { Limit, SetPoint, State, Window } from "../../../../shared/solution";
 
 export type Side = "low pH" | "high pH" | "low Eh" | "high Eh";
 
@@ -104,21 +104,6 @@ function along(
     .filter((d) => d !== null)
     .map(Math.abs);
   return ahead.length > 0 ? Math.min(...ahead) : null;
-}
-
-/** The potentials a window allows on the line through its set point. */
-export function allowedEh(window: Window): [number, number] {
-  const { pH, Eh } = window.setPoint;
-  const crossings: number[] = [];
-  for (const { outer, holes } of window.polygons)
-    for (const ring of [outer, ...holes])
-      ring.forEach(([x0, y0], i) => {
-        const [x1, y1] = ring[(i + 1) % ring.length] as Point;
-        if (x0 > pH !== x1 > pH) crossings.push(y0 + ((pH - x0) / (x1 - x0)) * (y1 - y0));
-      });
-  const above = crossings.filter((v) => v >= Eh);
-  const below = crossings.filter((v) => v <= Eh);
-  return [below.length > 0 ? Math.max(...below) : window.Eh[0], above.length > 0 ? Math.min(...above) : window.Eh[1]];
 }
 
 /** How the margin reads: bands of pH alone where Eh is a mixed potential. */

@@ -1,5 +1,5 @@
 import { useMemo } from "react";
-import { type Reach, reachAt } from "../../../../shared/reach/reach";
+import { type Reach, reachesOf } from "../../../../shared/reach/reach";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Point, Solution } from "../../../../shared/solution";
@@ -54,8 +54,8 @@ export function useMapModel(w: Wishes): MapModel | null {
     [pinned, setPoint, frame],
   );
   const reaches = useMemo(
-    () => reachAt(reagents, preset, through[0], temperatureC),
-    [reagents, preset, through, temperatureC],
+    () => reachesOf(data, reagents, preset, temperatureC),
+    [data, reagents, preset, temperatureC],
   );
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
   const content = useMemo(
