@@ -191,7 +191,8 @@ export function reactionDesk(data: ChemicalData, input: unknown): Outcome<DeskAn
   if (!read.ok) return read;
   const { species, assumed } = read.value;
   const single = reactionAtT(data, { species, temperatureC });
-  if (!single.ok) return single;
+  // What was typed as text is wrong in the text.
+  if (!single.ok) return given === undefined ? fail(single.error.code, "reaction", single.error.message) : single;
   const rows = series === undefined ? ok(undefined) : reactionSeries(data, species, series);
   if (!rows.ok) return rows;
   return ok({ ...single.value, assumed, ...(rows.value === undefined ? {} : { series: rows.value }) });

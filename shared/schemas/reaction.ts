@@ -21,7 +21,11 @@ export const reactionInput = z
     species: z
       .record(
         z.string().min(1),
-        z.number().refine((n) => n !== 0, { message: "a coefficient must not be zero" }),
+        z
+          .number()
+          .min(-1e6)
+          .max(1e6)
+          .refine((n) => n !== 0, { message: "a coefficient must not be zero" }),
       )
       .refine((s) => Object.keys(s).length > 0, { message: "a reaction needs species" })
       .optional(),

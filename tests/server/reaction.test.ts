@@ -19,7 +19,7 @@ describe("POST /api/reaction", () => {
     expect(Object.keys(body as object).slice(0, 3)).toEqual(["dG_kJ", "logK", "E0_V"]);
   });
   test.each([
-    [{ reaction: "Cu^2+ = Cu", temperatureC: 25 }, "UNBALANCED", "species"],
+    [{ reaction: "Cu^2+ = Cu", temperatureC: 25 }, "UNBALANCED", "reaction"],
     [{ reaction: "FeOOH + 3 H^+ = Fe^3+ + 2 H2O", temperatureC: 25 }, "AMBIGUOUS_SPECIES", "reaction"],
     [{ ...question, temperatureC: 900 }, "OUT_OF_RANGE", "temperatureC"],
   ])("refuses %j with 400 and the desk's own words", async (body, code, path) => {

@@ -140,9 +140,11 @@ describe("what is refused", () => {
       path: "species",
       message: "the right-hand side is off in charge by -1",
     });
-    expect(refusal({ reaction: "Fe2O3 + 6 H^+ = Fe^3+ + 3 H2O", temperatureC: 25 }).message).toBe(
-      "the right-hand side is off in Fe by -1, charge by -3",
-    );
+    expect(refusal({ reaction: "Fe2O3 + 6 H^+ = Fe^3+ + 3 H2O", temperatureC: 25 })).toEqual({
+      code: "UNBALANCED",
+      path: "reaction",
+      message: "the right-hand side is off in Fe by -1, charge by -3",
+    });
   });
   test("an unknown id, with what may have been meant", () => {
     const error = refusal({ species: { "Cu2+(aq)": -1, "Cu(s)": 1 }, temperatureC: 25 });

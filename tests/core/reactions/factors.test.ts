@@ -91,7 +91,7 @@ const neutralising = (base: NonNullable<Start["base"]>) => {
   return perMetal(q, "base") / perMetal(q, "acid", "made");
 };
 
-/** Every factor of the practice brief that stoichiometry gives, from a balanced reaction. */
+/** Every factor of practice-checks.json that stoichiometry gives, from a balanced reaction. */
 const factors: [id: string, key: string, value: () => number][] = [
   ["F11", "H2SO4_per_Cu_oxide_or_SX", () => acidOf(tenorite)],
   ["F11", "returned_goethite_or_hematite", () => perMetal(goethite, "acid", "made")],
@@ -153,7 +153,7 @@ const factors: [id: string, key: string, value: () => number][] = [
   ["F62", "As3_H2O2", () => perMetal(arsenite, "oxidant")],
 ]; // prettier-ignore
 
-describe("factors of the practice brief", () => {
+describe("factors of practice", () => {
   test.each(factors)("%s %s", (id, key, value) => {
     const check = practiceCheck(id);
     expect(Math.abs(value() - check.expected(key))).toBeLessThanOrEqual(check.within(key));
