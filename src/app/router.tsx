@@ -31,6 +31,7 @@ export const router = createBrowserRouter([
       screen("chemistry/:speciesId", () => import("../features/chemistry/ChemistryPage")),
       screen("feeds", () => import("../features/feeds/FeedsPage")),
       screen("feeds/:feedId", () => import("../features/feeds/FeedPage")),
+      screen("trials/:trialId", () => import("../features/trials/TrialPage")),
       screen("members", () => import("../features/members/MembersPage")),
       screen("mailbox", () => import("../features/mailbox/MailboxPage")),
       screen("*", () => import("./NotFoundPage")),

@@ -73,7 +73,7 @@ export function EntryField(props: EntryFieldProps) {
               message === null ? "border-rule hover:border-muted" : "border-signal",
             )}
           />
-          <span className="inline-block min-w-[4.5ch]">
+          <span className="inline-flex w-19">
             <UnitSelect
               label={`Unit of ${label}`}
               units={unitsOf(quantity)}

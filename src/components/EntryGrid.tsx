@@ -9,6 +9,8 @@ export interface EntryGridProps<Row> {
   caption: string;
   /** what a row is called in messages: "reading" */
   rowName: string;
+  /** what this row is called, where a number says too little: "Final liquor" */
+  rowLabel?: (row: Row) => string;
   rows: readonly Row[];
   columns: readonly GridColumn<Row>[];
   onChange: (rows: Row[]) => void;
@@ -29,7 +31,7 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
   const [said, setSaid] = useState("");
   const removable = blank !== undefined && !readOnly;
   const shown = removable ? [...rows, blank(rows)] : rows;
-  const problems = [
+  const here = [
     ...(props.problems ?? []),
     ...rows.flatMap((row, r) =>
       columns.flatMap((column) => {
@@ -38,6 +40,12 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
       }),
     ),
   ];
+  // The record's own check may say the same of the same cell.
+  const problems = here.filter((p, i) => here.findIndex((q) => q.row === p.row && q.message === p.message) === i);
+  const named = (r: number) => {
+    const row = shown[r];
+    return props.rowLabel && row !== undefined ? props.rowLabel(row) : `${rowName} ${r + 1}`;
+  };
   const wrong = new Set(problems.map((p) => `${p.row} ${p.column}`));
 
   const put = (r: number, row: Row) => {
@@ -125,7 +133,7 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
                     row={row}
                     index={r}
                     place={`${r} ${c}`}
-                    label={`${rowName} ${r + 1}, ${column.label}`}
+                    label={`${named(r)}, ${column.label}`}
                     wrong={wrong.has(`${r} ${column.id}`)}
                     readOnly={readOnly}
                     onChange={(next) => put(r, next)}
@@ -167,7 +175,7 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
         <ul role="alert" className="pt-1 text-sm text-signal">
           {problems.map((p) => (
             <li key={`${p.row} ${p.column} ${p.message}`}>
-              {rowName} {p.row + 1}: {p.message}
+              {named(p.row)}: {p.message}
             </li>
           ))}
         </ul>

@@ -33,7 +33,7 @@ export function PlainTable<Row>({
         <tr>
           {columns.map((column) => (
             <th
-              key={column.header}
+              key={headerText(column)}
               scope="col"
               style={{ width: column.width }}
               className={classes(
@@ -51,7 +51,7 @@ export function PlainTable<Row>({
           <tr key={rowKey(row)} className="border-b border-rule align-baseline">
             {columns.map((column) => (
               <td
-                key={column.header}
+                key={headerText(column)}
                 className={classes("px-2 py-1 first:pl-0 last:pr-0", side(column), column.number && "font-mono")}
               >
                 {column.cell(row)}

@@ -2,6 +2,7 @@ import type { FeedRow } from "../../../shared/schemas/feed";
 import { readEntry, type Entry } from "../../../shared/entry/readEntry";
 import { Button } from "../../components/Button";
 import { SpeciesName } from "../../components/Formula";
+import { FormulaText } from "../../components/FormulaText";
 import { ErrorNote } from "../../components/status";
 import { Note, Row, SectionHead } from "../../components/text";
 import { useRestoreFeed } from "../../lib/feeds";
@@ -68,7 +69,7 @@ export function FeedDetail({ feed, onOpen }: { feed: FeedRow; onOpen: () => void
         <Note className="py-1">Some shares add up to more than 100 %.</Note>
       )}
       <SectionHead className="mt-5">As received</SectionHead>
-      <Row label="Gangue carbonate, as CaCO3">{typed(feed.carbonate)}</Row>
+      <Row label={<FormulaText text="Gangue carbonate, as CaCO3" />}>{typed(feed.carbonate)}</Row>
       <Row label="Moisture, of the wet mass">{typed(feed.moisture)}</Row>
       <Row label="P80">{typed(feed.p80)}</Row>
       <Row label="Density of the solids">{typed(feed.solidDensity)}</Row>

@@ -158,7 +158,7 @@ function FeedEditor({ feed }: { feed: FeedRow }) {
           <SectionHead className="mt-4">As received</SectionHead>
           {(
             [
-              ["carbonate", "Gangue carbonate, as CaCO3", "share"],
+              ["carbonate", <FormulaText text="Gangue carbonate, as CaCO3" />, "share"],
               ["moisture", "Moisture, of the wet mass", "share"],
               ["p80", "P80", "size"],
               ["solidDensity", "Density of the solids", "density"],
@@ -166,8 +166,8 @@ function FeedEditor({ feed }: { feed: FeedRow }) {
           ).map(([key, label, quantity]) => (
             <EntryField
               key={key}
-              label={label}
-              labelText={<FormulaText text={label} />}
+              label={feedWords(key)}
+              labelText={label}
               quantity={quantity}
               value={values[key]}
               onChange={(entry) => set(key, entry)}

@@ -25,7 +25,7 @@ const columns = (data: ChemicalData | undefined, heads: readonly HeadAssay[]): G
     kind: "shown",
     header: "in the library",
     label: "in the library",
-    width: "13em",
+    width: "18em",
     show: ({ mineral }) => {
       const row = data?.species.get(mineral)?.row;
       if (row)
@@ -52,7 +52,7 @@ const columns = (data: ChemicalData | undefined, heads: readonly HeadAssay[]): G
   {
     id: "share",
     kind: "text",
-    header: "share of that metal",
+    header: "its share",
     label: "share of that metal",
     under: "%",
     width: "9em",

@@ -1,0 +1,57 @@
+import { gammaOf } from "../../../../shared/plan/toProblem";
+import type { CampaignStage } from "../../../../shared/schemas/campaign";
+import type { Planned } from "../../../../shared/schemas/trialRecord";
+import type { Solution } from "../../../../shared/solution";
+import { fixed, inputTextExact, withUnit } from "../../../lib/format";
+import type { SolvedRevision } from "../../../lib/solvedRevision";
+import type { TrialValues } from "./trialValues";
+
+/** Set points one can lay a trial out on. */
+export const windowChoices = ({ windows }: Solution): { value: string; label: string; words: string }[] =>
+  windows.map(({ setPoint }, i) => ({
+    value: String(i),
+    label: `window ${String.fromCharCode(65 + (i % 26))}`,
+    words: `pH ${fixed(setPoint.pH, 2)}, ${withUnit(fixed(setPoint.Eh, 2), "V")} vs SHE`,
+  }));
+
+const typed = (x: number, figures = 3) => inputTextExact(Number(x.toPrecision(figures)), 2);
+
+/** Planned conditions from the plan: temperature, the set point of a window, the totals of its ligands and the tenor its target
+ *  carries. The potential goes in against SHE; the bench reads it against its own electrode. What was planned by hand and the plan
+ *  says nothing of stays. */
+export function plannedFromPlan(
+  trial: TrialValues,
+  { inputs, data, solution }: SolvedRevision,
+  window: number,
+  stage: CampaignStage | null,
+): Planned {
+  const at = solution?.windows[window]?.setPoint;
+  const { planned } = trial;
+  const line = trial.kind === "leach" ? inputs.metals.find((m) => m.element === stage?.target) : undefined;
+  const mass = stage ? data.molarMass.get(stage.target) : undefined;
+  const tenor =
+    line === undefined
+      ? null
+      : line.entry === "gPerL"
+        ? line.value
+        : mass === undefined
+          ? null
+          : (line.value / gammaOf(data, line, inputs.ionicStrength, inputs.temperatureC)) * mass;
+  return {
+    ...planned,
+    temperature: { text: String(inputs.temperatureC), unit: "C" },
+    ...(at && {
+      pH: { text: at.pH.toFixed(2), unit: "pH" },
+      orp: {
+        value: { text: String(Math.round(at.Eh * 1000)), unit: "mV" },
+        electrode: "SHE",
+        electrodeTemperature: { text: "", unit: "C" },
+      },
+    }),
+    ...(tenor !== null && { tenor: { text: typed(tenor), unit: "g/L" } }),
+    ligands: inputs.ligands.map(({ component, activity }) => ({
+      component,
+      value: { text: typed(activity), unit: "mol/L" },
+    })),
+  };
+}

@@ -1,0 +1,69 @@
+import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import type { z } from "zod";
+import type { campaignCreate, CampaignRow, campaignUpdate } from "../../shared/schemas/campaign";
+import type { CampaignPairAnswer, CampaignSummaryAnswer } from "../../shared/schemas/campaignSummary";
+import { api } from "./api";
+import { allRows, queryString } from "./pages";
+import { keys } from "./queries";
+
+const at = (id: string) => `/campaigns/${encodeURIComponent(id)}`;
+
+export const useCampaigns = (projectId: string | undefined, deleted: "false" | "true" = "false") =>
+  useQuery({
+    queryKey: keys.campaignList(projectId ?? "", deleted),
+    queryFn: ({ signal }) => allRows<CampaignRow>(`/campaigns${queryString({ projectId, deleted })}`, signal),
+    enabled: projectId !== undefined,
+  });
+
+export const useCampaign = (id: string | undefined) =>
+  useQuery({
+    queryKey: keys.campaign(id ?? ""),
+    queryFn: ({ signal }) => api.get<CampaignRow>(at(id ?? ""), { signal }),
+    enabled: id !== undefined,
+  });
+
+export const useCampaignSummary = (id: string, enabled = true) =>
+  useQuery({
+    queryKey: keys.campaignSummary(id),
+    queryFn: ({ signal }) => api.get<CampaignSummaryAnswer>(`${at(id)}/summary`, { signal }),
+    enabled,
+  });
+
+export const useCampaignPair = (a: string, b: string) =>
+  useQuery({
+    queryKey: keys.campaignPair(a, b),
+    queryFn: ({ signal }) => api.get<CampaignPairAnswer>(`/campaigns/pair${queryString({ a, b })}`, { signal }),
+    enabled: a !== "" && b !== "",
+  });
+
+function useCampaignMutation<Variables>(mutationFn: (variables: Variables) => Promise<CampaignRow>) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn,
+    onSuccess: (campaign) => {
+      client.setQueryData(keys.campaign(campaign.id), campaign);
+      void client.invalidateQueries({ queryKey: keys.campaigns });
+      // target and gangue of its stages enter the figures of its trials
+      void client.invalidateQueries({ queryKey: keys.trials });
+    },
+  });
+}
+
+export const useCreateCampaign = () =>
+  useCampaignMutation((body: z.input<typeof campaignCreate>) => api.post<CampaignRow>("/campaigns", body));
+
+export const useUpdateCampaign = () =>
+  useCampaignMutation(
+    ({ id, version, ...body }: z.input<typeof campaignUpdate> & { id: string; version: number; reason?: string }) =>
+      api.patch<CampaignRow>(at(id), body, { ifMatch: version }),
+  );
+
+export const useDeleteCampaign = () =>
+  useCampaignMutation(({ id, version, reason }: { id: string; version: number; reason: string }) =>
+    api.delete<CampaignRow>(`${at(id)}${queryString({ reason })}`, { ifMatch: version }),
+  );
+
+export const useRestoreCampaign = () =>
+  useCampaignMutation(({ id, version }: { id: string; version: number }) =>
+    api.post<CampaignRow>(`${at(id)}/restore`, {}, { ifMatch: version }),
+  );
