@@ -1,3 +1,4 @@
+import { FARADAY } from "../constants";
 import { davies, daviesSlope } from "../activity/davies";
 import type { PlanInputs, PlanMetal, PresetName } from "../schemas/plan";
 import type { Problem } from "../schemas/problem";
@@ -5,16 +6,24 @@ import { kelvin } from "../units";
 import { SULFIDE_SULFUR } from "../selection/components";
 import type { ChemicalData } from "../species/chemicalData";
 
-/** Charge of the simple ion a tenor's gamma is meant for: the divalent one where there is one, else the lowest.
- *  @param data  library     @param element  metal     @returns  charge number, 0 without a simple ion */
+/** Eh of an acid leach with air in it, V: by it the simple ion is chosen that the liquor holds. */
+const AERATED = 0.7;
+
+/** Charge of the simple ion a tenor's gamma is meant for: of the ions of the element alone the one that is stable at 0.7 V and 25 C,
+ *  Fe^2+, Cu^2+, Ag^+, Cr^3+.
+ *  @param data  library     @param element  metal     @returns  charge number, 0 without a simple ion
+ *  @source  lowest dGf - z F E; common practice, no source, for the Eh
+ *  @example simpleIonCharge(chemistry(), "Ag") // => 1 */
 export function simpleIonCharge(data: ChemicalData, element: string): number {
-  const charges = [...data.species.values()]
-    .filter(
-      (s) =>
-        s.phase === "aq" && s.charge !== 0 && Object.keys(s.composition).length === 1 && s.composition[element] === 1,
-    )
-    .map((s) => s.charge);
-  return charges.includes(2) ? 2 : charges.length > 0 ? Math.min(...charges) : 0;
+  let charge = 0;
+  let least = Infinity;
+  for (const s of data.species.values()) {
+    if (s.phase !== "aq" || s.charge === 0 || Object.keys(s.composition).length > 1 || s.composition[element] !== 1)
+      continue;
+    const cost = s.row.dGf_kJ * 1000 - s.charge * FARADAY * AERATED;
+    if (cost < least) [charge, least] = [s.charge, cost];
+  }
+  return charge;
 }
 
 /** Activity coefficient of a metal line of a plan: 1, Davies at the plan's ionic strength, or typed.
@@ -37,10 +46,13 @@ export function presetLeavesOut(data: ChemicalData, preset: PresetName, fullSulf
 
 /** The solver's question behind a plan.
  *  @param inputs  of a revision or a draft     @param data  library     @returns  a problem; the solver validates it
- *  @source  presets.csv for what the lixiviant leaves out; the plan's own list and what it puts back come after */
+ *  @source  presets.csv for what the lixiviant leaves out, but for minerals of the feed, what is put back, and reagents dosed;
+ *           the plan's own list comes last */
 export function toProblem(inputs: PlanInputs, data: ChemicalData): Problem {
   const fullSulfur = inputs.sulfateReduction || inputs.ligands.some((l) => l.component === SULFIDE_SULFUR);
-  const kept = new Set([...inputs.putBack, ...inputs.feedMinerals]);
+  const dosed = new Set(inputs.dosed.map((reagent) => `unless_dosed:${reagent}`));
+  const reagents = data.tables.defaults.filter((r) => dosed.has(r.when)).map((r) => r.id);
+  const kept = new Set([...inputs.putBack, ...inputs.feedMinerals, ...reagents]);
   const leftOut = new Set([
     ...presetLeavesOut(data, inputs.preset, fullSulfur).filter((id) => data.species.has(id) && !kept.has(id)),
     ...inputs.leftOut.map((l) => l.species),
