@@ -1,7 +1,10 @@
+import { useState } from "react";
 import { Check } from "../../../components/choice";
-import { PotentialScaleFields } from "../../../components/PotentialScale";
-import { SectionHead } from "../../../components/text";
+import { Button } from "../../../components/Button";
+import { PotentialScaleDialog } from "../../../components/PotentialScaleDialog";
+import { Row, SectionHead } from "../../../components/text";
 import { type LayerName, layerNames, type Layers, layerWords } from "../../../map/view";
+import { useAsking } from "./context";
 
 /** What the map shows; remembered for the member, not for the plan. */
 export function LayersSection({
@@ -15,6 +18,8 @@ export function LayersSection({
   plain: boolean;
   onPlain: (plain: boolean) => void;
 }) {
+  const { inputs, scale } = useAsking();
+  const [scaleOpen, setScaleOpen] = useState(false);
   return (
     <section aria-label="On the map" className="mt-5">
       <SectionHead aside="remembered for you">On the map</SectionHead>
@@ -26,7 +31,12 @@ export function LayersSection({
           {layerWords[name]}
         </Check>
       ))}
-      <PotentialScaleFields />
+      <Row label="Potentials in" className="mt-1">
+        <Button kind="quiet" className="h-auto!" onClick={() => setScaleOpen(true)}>
+          {scale.label}
+        </Button>
+      </Row>
+      <PotentialScaleDialog open={scaleOpen} onOpenChange={setScaleOpen} liquorC={inputs.temperatureC} />
     </section>
   );
 }

@@ -173,7 +173,7 @@ export function BandsSection() {
   const { controlBand: band } = inputs;
   return (
     <section aria-label="Control bands" className="mt-5">
-      <SectionHead aside={<Term word="controlBand">how well the loop holds</Term>}>Control bands</SectionHead>
+      <SectionHead aside={<Term word="controlBand">of the loop</Term>}>Control bands</SectionHead>
       <NumberField
         label="Control band of pH"
         labelText="pH ±"
