@@ -25,7 +25,7 @@ export default tseslint.config(
   { files: ["src/**/*.{ts,tsx}"], ...reactHooks.configs.flat["recommended-latest"] },
   { files: ["server/tools/**", "tests/bench/**", "tests/tools/**"], rules: { "no-console": "off" } },
   // A response's body is `any` there, and goes straight into expect().
-  { files: ["tests/server/**"], rules: { "@typescript-eslint/no-unsafe-assignment": "off" } },
+  { files: ["tests/server/**", "tests/support/**"], rules: { "@typescript-eslint/no-unsafe-assignment": "off" } },
   { files: ["**/*.{js,mjs,cjs}"], ...tseslint.configs.disableTypeChecked },
   forbid(
     "shared",
