@@ -38,6 +38,22 @@ export const planMetal = z.object({
 });
 export type PlanMetal = z.infer<typeof planMetal>;
 
+const rising = z
+  .tuple([z.number(), z.number()])
+  .refine(([lo, hi]) => lo <= hi, { message: "the range must rise" });
+
+/** Ranges over which a window is to hold; the solver itself does not see them. */
+export const holdRanges = z.object({
+  temperatureC: rising
+    .refine(([lo, hi]) => lo >= TEMPERATURE_RANGE_C.min && hi <= TEMPERATURE_RANGE_C.max, {
+      message: `the temperatures must lie in ${TEMPERATURE_RANGE_C.min} to ${TEMPERATURE_RANGE_C.max} C`,
+    })
+    .optional(),
+  /** activity by element */
+  activities: z.record(z.string(), rising.refine(([lo]) => lo > 0, { message: "an activity must be above 0" })).optional(),
+});
+export type HoldRanges = z.infer<typeof holdRanges>;
+
 /** Everything a plan asks; a revision freezes it. */
 export const planInputs = z.object({
   temperatureC: z.number().min(TEMPERATURE_RANGE_C.min).max(TEMPERATURE_RANGE_C.max),
@@ -58,6 +74,10 @@ export const planInputs = z.object({
   controlBand: controlBandSchema,
   /** for the caution rules alone; the solver does not see it */
   circuit: circuitSchema.optional(),
+  /** over which the window is to hold; absent: only what the plan says */
+  ranges: holdRanges.optional(),
+  /** a set point placed by hand, V vs SHE; absent: the deepest point of the window */
+  heldSetPoint: z.object({ pH: z.number(), Eh: z.number() }).optional(),
 });
 export type PlanInputs = z.infer<typeof planInputs>;
 

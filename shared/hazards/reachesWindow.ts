@@ -1,0 +1,32 @@
+import type { Outline, Point } from "../solution";
+
+/** Whether a point lies inside an outline, its holes left out: crossing number. */
+function holds({ outer, holes }: Outline, [x, y]: Point): boolean {
+  let inside = false;
+  for (const ring of [outer, ...holes])
+    ring.forEach(([ax, ay], i) => {
+      const [bx, by] = ring[(i + 1) % ring.length] ?? [ax, ay];
+      if (ay > y !== by > y && x < ax + ((y - ay) / (by - ay)) * (bx - ax)) inside = !inside;
+    });
+  return inside;
+}
+
+const sidesOf = ({ outer, holes }: Outline): [Point, Point][] =>
+  [outer, ...holes].flatMap((ring) => ring.map((p, i): [Point, Point] => [p, ring[(i + 1) % ring.length] ?? p]));
+
+const turn = (a: Point, b: Point, c: Point): number => (b[0] - a[0]) * (c[1] - a[1]) - (b[1] - a[1]) * (c[0] - a[0]);
+
+/** Two sides that truly cross; those that only touch share no ground. */
+const cross = ([a, b]: [Point, Point], [c, d]: [Point, Point]): boolean =>
+  turn(a, b, c) * turn(a, b, d) < 0 && turn(c, d, a) * turn(c, d, b) < 0;
+
+/** Whether a region and a window share ground.
+ *  @param region, window  outlines with holes in (pH, Eh)     @returns  true where they overlap; touching alone does not count
+ *  @source  corners inside the other, or sides that cross */
+export function sharesGround(region: readonly Outline[], window: readonly Outline[]): boolean {
+  const meets = (a: Outline, b: Outline): boolean =>
+    a.outer.some((p) => holds(b, p)) ||
+    b.outer.some((p) => holds(a, p)) ||
+    sidesOf(a).some((s) => sidesOf(b).some((t) => cross(s, t)));
+  return region.some((r) => window.some((w) => meets(r, w)));
+}
