@@ -38,13 +38,13 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
   const { tables, version } = readTables();
   if (keepVersion(db, tables, clock())) log.info({ version }, "chemistry library written to the database");
   const current = keptVersion(db, version);
-  if (config.seedDemo && (await seedDemoOnFirstRun(db, version))) log.info("demo data written");
 
   const https = config.appUrl.startsWith("https:");
   const sessions = createSessions(db, { https, days: config.sessionDays });
   const mailer = createMailer(db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock });
   const chemistry = createChemistry(db, current, clock());
   for (const { edit, why } of chemistry.unfit) log.warn({ species: edit.speciesId, why }, "library edit left out");
+  if (config.seedDemo && (await seedDemoOnFirstRun(db, chemistry))) log.info("demo data written");
   const refreshed = refreshOutdatedFigures(db, workingsOf(chemistry));
   if (refreshed > 0) log.info({ trials: refreshed }, "figures worked out anew");
   const app = createApp(

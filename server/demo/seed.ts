@@ -1,12 +1,15 @@
 import type { Db } from "../db/open";
 import { planRevisions, plans, projects, users } from "../db/schema";
 import { hashPassword } from "../features/auth/passwords";
+import type { Chemistry } from "../features/chemistry/library";
 import { anyMember } from "../features/members/service";
 import { demoAccounts, demoPassword } from "./accounts";
 import { demoPlans, demoProjects, demoSite } from "./plans";
+import { seedDemoRecords } from "./records";
 
 /** Writes the demo's rows, each under its own fixed id; a row that is there, whoever changed it since, stays as it is. */
-export async function seedDemo(db: Db, dataVersion: string): Promise<void> {
+export async function seedDemo(db: Db, chemistry: Chemistry): Promise<void> {
+  const dataVersion = chemistry.current.version;
   const createdAt = "2026-08-31T07:00:00.000Z";
   const passwordHash = await hashPassword(demoPassword);
   const people = demoAccounts.map((person) => ({ ...person, passwordHash, preferences: {}, createdAt }));
@@ -33,13 +36,14 @@ export async function seedDemo(db: Db, dataVersion: string): Promise<void> {
           .run();
       });
     }
+    seedDemoRecords(tx, chemistry);
   });
 }
 
 /** The demo belongs into an empty database only: beside real members its known passwords would be a hole.
  *  @returns whether it was written */
-export async function seedDemoOnFirstRun(db: Db, dataVersion: string): Promise<boolean> {
+export async function seedDemoOnFirstRun(db: Db, chemistry: Chemistry): Promise<boolean> {
   if (anyMember(db)) return false;
-  await seedDemo(db, dataVersion);
+  await seedDemo(db, chemistry);
   return true;
 }

@@ -1,12 +1,23 @@
 import { eq } from "drizzle-orm";
 import { expect, test } from "vitest";
 import type { OpenDatabase } from "../../server/db/open";
-import { planRevisions, plans, projects, users } from "../../server/db/schema";
+import {
+  campaigns,
+  feeds,
+  history,
+  planRevisions,
+  plans,
+  projects,
+  trialRecords,
+  trials,
+  users,
+} from "../../server/db/schema";
 import { demoAccounts, demoPassword } from "../../server/demo/accounts";
 import { demoPlans } from "../../server/demo/plans";
 import { seedDemo, seedDemoOnFirstRun } from "../../server/demo/seed";
 import { valueOf } from "../../shared/outcome";
 import { toProblem } from "../../shared/plan/toProblem";
+import type { CampaignSummaryAnswer } from "../../shared/schemas/campaignSummary";
 import { planInputs } from "../../shared/schemas/plan";
 import { memberRoles } from "../../shared/schemas/member";
 import { solve } from "../../shared/solve";
@@ -18,11 +29,16 @@ const everything = ({ db }: OpenDatabase) => ({
   projects: db.select().from(projects).all(),
   plans: db.select().from(plans).all(),
   revisions: db.select().from(planRevisions).all(),
+  feeds: db.select().from(feeds).all(),
+  campaigns: db.select().from(campaigns).all(),
+  trials: db.select().from(trials).all(),
+  records: db.select().from(trialRecords).all(),
+  history: db.select().from(history).all(),
 });
 
 test("an empty database gets one account a role, plans with revisions, and everything says that it is invented", async () => {
   const server = await testServer({ members: false });
-  expect(await seedDemoOnFirstRun(server.db, tables.version)).toBe(true);
+  expect(await seedDemoOnFirstRun(server.db, server.deps.chemistry)).toBe(true);
   const rows = everything(server);
   expect(rows.users.map(({ role }) => role).sort()).toEqual([...memberRoles].sort());
   expect([...rows.projects, ...rows.plans].every(({ invented }) => invented)).toBe(true);
@@ -40,10 +56,34 @@ test("an empty database gets one account a role, plans with revisions, and every
   }
 });
 
+test("the demo has campaigns and trials with figures, all marked as invented, as if the bench had typed them", async () => {
+  const server = await testServer({ members: false });
+  await seedDemo(server.db, server.deps.chemistry);
+  const rows = everything(server);
+  expect(rows.campaigns.length).toBeGreaterThanOrEqual(4);
+  expect(rows.trials.length).toBeGreaterThanOrEqual(60);
+  expect(new Set(rows.trials.map(({ feedId }) => feedId)).size).toBeGreaterThanOrEqual(2);
+  const marked = [...rows.feeds, ...rows.campaigns, ...rows.trials];
+  expect(marked.every(({ invented }) => invented)).toBe(true);
+  const closed = rows.trials.flatMap(({ accountabilityPct }) => accountabilityPct ?? []);
+  const within = closed.filter((percent) => percent >= 95 && percent <= 105).length;
+  expect(within / closed.length).toBeGreaterThan(0.75);
+  const created = rows.history.filter(({ action, entity }) => action === "create" && entity === "trial");
+  expect(created.length).toBe(rows.trials.length);
+  const demoAdmin = { email: "admin@tarnhollow.example", password: demoPassword };
+  await server.anyone.post("/api/session").send(demoAdmin).expect(200);
+  for (const { id } of rows.campaigns) {
+    const { body } = await server.anyone.get(`/api/campaigns/${id}/summary`).expect(200);
+    const { plan, stages } = body as CampaignSummaryAnswer;
+    expect(plan).toMatchObject({ failure: null, dataVersion: tables.version });
+    expect(stages.every(({ recovery }) => recovery !== null)).toBe(true);
+  }
+});
+
 test("the sign-in page is told the demo's accounts while they are there, and nobody who is signed in", async () => {
   const server = await testServer({ members: false });
   expect((await server.anyone.get("/api/session").expect(200)).body).not.toHaveProperty("demo");
-  await seedDemo(server.db, tables.version);
+  await seedDemo(server.db, server.deps.chemistry);
   const { body } = await server.anyone.get("/api/session").expect(200);
   expect(body).toEqual({
     user: null,
@@ -72,11 +112,17 @@ test("every revision of the demo opens a window that its loops can hold", () => 
 
 test("seeding twice changes nothing, not even what was edited or archived since", async () => {
   const server = await testServer({ members: false });
-  await seedDemo(server.db, tables.version);
+  await seedDemo(server.db, server.deps.chemistry);
   server.db.update(plans).set({ name: "Renamed", archived: true }).where(eq(plans.id, "demo-neutral-leach")).run();
+  server.db
+    .update(trials)
+    .set({ deletedAt: "2026-10-01T00:00:00.000Z" })
+    .where(eq(trials.campaignId, "demo-campaign-nl-1"))
+    .run();
+  server.db.update(feeds).set({ name: "Renamed" }).run();
   server.db.update(users).set({ passwordHash: "changed" }).where(eq(users.id, "demo-admin")).run();
   const before = everything(server);
-  await seedDemo(server.db, tables.version);
+  await seedDemo(server.db, server.deps.chemistry);
   expect(everything(server)).toEqual(before);
 });
 
@@ -88,12 +134,12 @@ test("real members and plans are not touched, and beside them the demo is not wr
   const plan = { projectId, name: "Neutral leach, second tank", inputs: unusualInputs };
   await metallurgist.post("/api/plans").send(plan).expect(201);
   const before = everything(server);
-  expect(await seedDemoOnFirstRun(server.db, tables.version)).toBe(false);
+  expect(await seedDemoOnFirstRun(server.db, server.deps.chemistry)).toBe(false);
   expect(everything(server)).toEqual(before);
 
-  await seedDemo(server.db, tables.version);
+  await seedDemo(server.db, server.deps.chemistry);
   const after = everything(server);
-  for (const name of ["users", "projects", "plans", "revisions"] as const) {
+  for (const name of Object.keys(before) as (keyof typeof before)[]) {
     for (const row of before[name]) expect(after[name]).toContainEqual(row);
     expect(after[name].length).toBeGreaterThan(before[name].length);
   }

@@ -6,13 +6,14 @@ import { expect, test } from "vitest";
 import { migrateDatabase } from "../../server/db/migrate";
 import { openDatabase, type OpenDatabase } from "../../server/db/open";
 import * as schema from "../../server/db/schema";
+import { createChemistry } from "../../server/features/chemistry/library";
 import { seedDemo } from "../../server/demo/seed";
 import { projectRoot } from "../../server/root";
 import { tables, temporaryFolder, testDatabase } from "../support/testServer";
 
 async function filledDatabase(): Promise<OpenDatabase> {
   const open = testDatabase();
-  await seedDemo(open.db, tables.version);
+  await seedDemo(open.db, createChemistry(open.db, tables, new Date("2026-01-01T00:00:00Z")));
   open.db.insert(schema.sessions).values({ id: "s1", userId: "demo-admin", expiresAt: 4_000_000_000 }).run();
   return open;
 }

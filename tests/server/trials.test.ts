@@ -293,7 +293,7 @@ test("figures move with their formula version alone: changed on purpose? raise f
   const { as } = await testServer();
   const { addTrial } = await bench(await as("metallurgist"));
   const { figures } = await addTrial();
-  const rounded = Object.entries<unknown>(figures).map(([key, value]): [string, unknown] => [
+  const rounded = Object.entries({ ...figures } as Record<string, unknown>).map(([key, value]): [string, unknown] => [
     key,
     typeof value === "number" ? Number(value.toPrecision(8)) : value,
   ]);

@@ -1,0 +1,40 @@
+import { eq } from "drizzle-orm";
+import { electrodeSeries } from "../../shared/electrodes/series";
+import { campaignCreate } from "../../shared/schemas/campaign";
+import { feedCreate } from "../../shared/schemas/feed";
+import { trialCreate } from "../../shared/schemas/trial";
+import type { Db } from "../db/open";
+import { campaigns, feeds, trials } from "../db/schema";
+import { createCampaign } from "../features/campaigns/service";
+import type { Chemistry } from "../features/chemistry/library";
+import { createFeed } from "../features/feeds/service";
+import { createTrial } from "../features/trials/service";
+import { workingsOf } from "../features/trials/workedOut";
+import { demoCampaigns } from "./trials/campaigns";
+import { demoFeeds } from "./trials/feeds";
+import { demoTrials } from "./trials/trials";
+
+const metallurgist = { authorId: "demo-metallurgist", role: "metallurgist" } as const;
+/** Trials are typed by the bench; approved ones need the rights of who approved them. */
+const bench = { authorId: "demo-technician", role: "metallurgist" } as const;
+const before = new Date("2026-09-25T06:00:00.000Z");
+
+/** Feeds, campaigns and trials of the demo, through the same doors as everybody's; a row that is there stays as it is. */
+export function seedDemoRecords(db: Db, chemistry: Chemistry): void {
+  const there = (table: typeof feeds | typeof campaigns | typeof trials, id: string) =>
+    db.select({ id: table.id }).from(table).where(eq(table.id, id)).get() !== undefined;
+  for (const { id, ...values } of demoFeeds) {
+    if (!there(feeds, id)) createFeed(db, feedCreate.parse(values), { ...metallurgist, now: before }, { id });
+  }
+  for (const { id, ...values } of demoCampaigns) {
+    if (!there(campaigns, id))
+      createCampaign(db, campaignCreate.parse(values), { ...metallurgist, now: before }, { id });
+  }
+  const workings = workingsOf(chemistry);
+  for (const { id, ...values } of demoTrials(electrodeSeries(chemistry.current))) {
+    if (there(trials, id)) continue;
+    const now = values.endedAt ?? values.startedAt;
+    const writer = { ...bench, now: now ? new Date(now) : before };
+    createTrial(db, workings, trialCreate.parse(values), writer, { id });
+  }
+}
