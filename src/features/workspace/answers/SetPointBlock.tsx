@@ -1,4 +1,3 @@
-import { electrodeSeries } from "../../../../shared/electrodes/series";
 import { fromSHE } from "../../../../shared/electrodes/convert";
 import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -33,7 +32,7 @@ export function SetPointBlock({
         <span className="ml-5 whitespace-nowrap">{scale.format(at.Eh)}</span>
       </p>
       <Note>
-        vs {scale.electrode}. <ProbeReading Eh={at.Eh} data={data} /> {scale.remark}
+        vs {scale.electrode}. <ProbeReading Eh={at.Eh} data={data} scale={scale} /> {scale.remark}
       </Note>
       <Row
         className="mt-1"
@@ -75,13 +74,11 @@ export function SetPointBlock({
   );
 }
 
-/** What an instrument would show: the member's electrode, else the common one, and on which scale that is. */
-function ProbeReading({ Eh, data }: { Eh: number; data: ChemicalData }) {
-  const [{ potentialScale, electrodeTemperatureC }] = usePreferences();
-  if (potentialScale !== "SHE") {
-    return <>That is {withUnit(fixed(Eh, 2), "V")} vs SHE.</>;
-  }
-  const probe = electrodeSeries(data.tables).find((s) => s.id === potentialScale) ?? usualProbe(data);
+/** On SHE: what a common probe would show. On an electrode's own scale: what that is on SHE. */
+function ProbeReading({ Eh, data, scale }: { Eh: number; data: ChemicalData; scale: PotentialScale }) {
+  const [{ electrodeTemperatureC }] = usePreferences();
+  if (scale.short !== "SHE") return <>That is {withUnit(fixed(Eh, 2), "V")} vs SHE.</>;
+  const probe = usualProbe(data);
   if (!probe) return null;
   const tC = electrodeTemperatureC ?? 25;
   const reading = fromSHE(Eh, probe, tC);

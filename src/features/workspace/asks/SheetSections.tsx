@@ -149,7 +149,7 @@ export function WaterSection() {
       <SectionHead aside="always drawn">Water band</SectionHead>
       <Select
         label="Which water lines bound windows"
-        labelText="Bounds windows"
+        labelText="Bounded by"
         readOnly={readOnly}
         value={water.bound}
         onChange={(bound) => set({ bound })}
