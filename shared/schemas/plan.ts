@@ -38,9 +38,7 @@ export const planMetal = z.object({
 });
 export type PlanMetal = z.infer<typeof planMetal>;
 
-const rising = z
-  .tuple([z.number(), z.number()])
-  .refine(([lo, hi]) => lo <= hi, { message: "the range must rise" });
+const rising = z.tuple([z.number(), z.number()]).refine(([lo, hi]) => lo <= hi, { message: "the range must rise" });
 
 /** Ranges over which a window is to hold; the solver itself does not see them. */
 export const holdRanges = z.object({
@@ -50,7 +48,12 @@ export const holdRanges = z.object({
     })
     .optional(),
   /** activity by element */
-  activities: z.record(z.string(), rising.refine(([lo]) => lo > 0, { message: "an activity must be above 0" })).optional(),
+  activities: z
+    .record(
+      z.string(),
+      rising.refine(([lo]) => lo > 0, { message: "an activity must be above 0" }),
+    )
+    .optional(),
 });
 export type HoldRanges = z.infer<typeof holdRanges>;
 

@@ -63,6 +63,12 @@ export const glossary = {
     title: "Window",
     text: ["A connected piece of open ground: inside it every metal is as required."],
   },
+  robustWindow: {
+    title: "Window over ranges",
+    text: [
+      "The ground that stays open whatever temperature and activities do within the ranges stated here. It is drawn as an inner outline, with a deepest point of its own.",
+    ],
+  },
   windowLimit: {
     title: "Window limit",
     text: ["One edge of a window: the metal and the reaction that shuts it there."],

@@ -88,5 +88,14 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
   compare(changes, "Bounded by", water(before), water(after));
   const band = (i: PlanInputs) => `pH ±${fixed(i.controlBand.pH, 2)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
   compare(changes, "Control bands", band(before), band(after));
+  const hold = (i: PlanInputs) => {
+    const { temperatureC: t, activities = {} } = i.ranges ?? {};
+    const each = Object.entries(activities).map(([e, [lo, hi]]) => `${e} ${significant(lo)} to ${significant(hi)}`);
+    return [...(t ? [withUnit(rangeText(t, 1), "°C")] : []), ...each].join(", ") || "nothing";
+  };
+  compare(changes, "Hold over", hold(before), hold(after));
+  const held = ({ heldSetPoint: at }: PlanInputs) =>
+    at ? `pH ${fixed(at.pH, 2)}, ${fixed(at.Eh, 3)} V vs SHE, by hand` : "deepest point";
+  compare(changes, "Set point", held(before), held(after));
   return changes;
 }

@@ -7,6 +7,7 @@ import { sheetBoxes } from "./boxes";
 import type { MapContent } from "./content";
 import { Cursor, type CursorStore } from "./cursor";
 import { mapFigure } from "./figure";
+import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import { haloStyle } from "./texts";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
@@ -23,10 +24,12 @@ export interface WindowMapProps {
   onPick: (at: Point | null) => void;
   /** what a screen reader says of it */
   label: string;
+  /** the set point, where it can be moved by hand */
+  handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
 }
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure. */
-export function WindowMap({ content, view, cursor, onPick, label }: WindowMapProps) {
+export function WindowMap({ content, view, cursor, onPick, label, handle }: WindowMapProps) {
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
   const { frame, scale } = view;
@@ -107,6 +110,7 @@ export function WindowMap({ content, view, cursor, onPick, label }: WindowMapPro
             onPick={onPick}
             onReset={reset}
           />
+          {handle && view.layers.setPoint && <SetPointHandle sheet={sheet} visible={visible} {...handle} />}
         </>
       ) : null}
     </div>

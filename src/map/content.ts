@@ -1,9 +1,11 @@
+import type { HazardRegion } from "../../shared/hazards/regions";
 import type { Reach } from "../../shared/reach/reach";
 import { crosscut } from "../../shared/setpoint/crosscut";
 import type { Limit, Outline, Point, Solution } from "../../shared/solution";
 import type { Crosscut } from "./traces/crosscuts";
 import { boundariesByMetal } from "./traces/fields";
 import { movedLimits } from "./traces/lines";
+import type { ShownRange } from "./traces/practice";
 import type { MapMetal } from "./view";
 
 /** Everything a map shows, worked out before the view comes in, so that a theme or a zoom redoes none of it. */
@@ -19,6 +21,11 @@ export interface MapContent {
   moved: { basis: string; limits: readonly Limit[] } | null;
   /** cyanide has a total: the HCN region is drawn */
   cyanide: boolean;
+  /** what holds over the plan's ranges */
+  robust: readonly Outline[];
+  /** gases whose region is drawn */
+  gases: readonly HazardRegion[];
+  practice: readonly ShownRange[];
 }
 
 export interface ContentWishes {
@@ -31,9 +38,13 @@ export interface ContentWishes {
   through: Point | null;
   reaches: readonly Reach[];
   cyanide: boolean;
+  robust?: readonly Outline[];
+  gases?: readonly HazardRegion[];
+  practice?: readonly ShownRange[];
 }
 
-export function mapContent({ metals, solution, other, through, reaches, cyanide }: ContentWishes): MapContent {
+export function mapContent(wishes: ContentWishes): MapContent {
+  const { metals, solution, other, through, reaches, cyanide, robust = [], gases = [], practice = [] } = wishes;
   return {
     solution,
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
@@ -50,5 +61,8 @@ export function mapContent({ metals, solution, other, through, reaches, cyanide 
     reaches,
     moved: other && { basis: other.basis, limits: movedLimits(solution, other.solution) },
     cyanide,
+    robust,
+    gases,
+    practice,
   };
 }

@@ -93,7 +93,11 @@ export function Cursor({ sheet, visible, through, store, holder, onPick, onReset
     };
     const onMove = (event: PointerEvent) => show(pointAt(event));
     const onLeave = () => show(null);
+    // The handle of the set point lies on the map and answers for itself.
+    const onHandle = (event: Event) =>
+      event.target instanceof Element && event.target.closest("[data-handle]") !== null;
     const onDown = (event: PointerEvent) => {
+      if (onHandle(event)) return;
       pressed = event.button === 0 ? { x: event.clientX, y: event.clientY } : null;
     };
     const onUp = (event: PointerEvent) => {
@@ -114,6 +118,7 @@ export function Cursor({ sheet, visible, through, store, holder, onPick, onReset
       }, DOUBLE);
     };
     const onKey = (event: KeyboardEvent) => {
+      if (onHandle(event)) return;
       const step = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] }[event.key];
       const { visible: v, through: t } = now.current;
       if (step) {

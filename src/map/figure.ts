@@ -3,10 +3,13 @@ import type { MapContent } from "./content";
 import type { Figure, PlotAnnotation, PlotAxis, PlotLayout, PlotTrace } from "./plotTypes";
 import { alongEhNames, alongPHNames, crosscutTraces, stripHeads, type StripSizes } from "./traces/crosscuts";
 import { boundaryTraces } from "./traces/fields";
+import { gasTraces } from "./traces/gases";
 import { groundTrace, openGroundTraces, shutGroundTraces, windowOutlineTraces } from "./traces/ground";
 import { equilibriumTraces, hydrogenCyanideTraces, otherBasisTraces, waterTraces } from "./traces/lines";
 import { nameTraces } from "./traces/names";
+import { practiceTraces } from "./traces/practice";
 import { reachHeads, reachTraces } from "./traces/reachBars";
+import { robustTraces } from "./traces/robust";
 import { setPointTraces } from "./traces/setPoint";
 import { type MapView, MONO } from "./view";
 
@@ -25,11 +28,14 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     ...openGroundTraces(solution, view),
     ...shutGroundTraces(content.shut, view),
     ...(layers.hazard && content.cyanide ? hydrogenCyanideTraces(view) : []),
+    ...(layers.hazard ? gasTraces(content.gases, view) : []),
     ...(layers.boundaries ? boundaryTraces(content.boundaries, view) : []),
     ...(layers.water ? waterTraces(solution, view) : []),
     ...(layers.equilibriumLines ? equilibriumTraces(content.reaches, view) : []),
     ...(layers.otherBasis && content.moved ? otherBasisTraces(content.moved.limits, view) : []),
     ...windowOutlineTraces(solution, view),
+    ...robustTraces(content.robust, view),
+    ...(layers.practice ? practiceTraces(content.practice, view) : []),
     ...(layers.setPoint ? setPointTraces(setPoint, layers.crosscuts ? through : null, view) : []),
     ...nameTraces(content, sheet, view),
     ...(sheet.alongPH && through

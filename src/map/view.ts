@@ -24,6 +24,7 @@ export const layerNames = [
   "equilibriumLines",
   "otherBasis",
   "hazard",
+  "practice",
 ] as const;
 export type LayerName = (typeof layerNames)[number];
 export type Layers = Readonly<Record<LayerName, boolean>>;
@@ -38,6 +39,7 @@ export const layerWords: Readonly<Record<LayerName, string>> = {
   equilibriumLines: "Reagents’ equilibria",
   otherBasis: "Other solids basis",
   hazard: "Hazard regions",
+  practice: "Published practice",
 };
 
 export const defaultLayers: Layers = {
@@ -50,6 +52,7 @@ export const defaultLayers: Layers = {
   equilibriumLines: false,
   otherBasis: true,
   hazard: true,
+  practice: false,
 };
 
 /** Everything that decides how a solution is drawn, none of it what is drawn. */

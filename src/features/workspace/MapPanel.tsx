@@ -1,6 +1,7 @@
 import type { PlanInputs } from "../../../shared/schemas/plan";
 import type { Point } from "../../../shared/solution";
 import { Button } from "../../components/Button";
+import { fixed } from "../../lib/format";
 import type { PotentialScale } from "../../lib/potential";
 import { solidsBasisWord } from "../../lib/planWords";
 import type { CursorStore } from "../../map/cursor";
@@ -18,14 +19,19 @@ export interface MapPanelProps {
   pinned: Point | null;
   onPin: (at: Point | null) => void;
   cursor: CursorStore;
+  /** moves the set point by hand; absent where the plan is only looked at */
+  onMoveSetPoint?: ((at: Point) => void) | undefined;
+  onSettle: () => void;
 }
 
 /** The middle: what stands under the cursor, and the map. */
-export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor }: MapPanelProps) {
+export function MapPanel(props: MapPanelProps) {
+  const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle } = props;
   const { content, view, metals, through } = model;
   const { solution } = content;
   const { plain, focus, window: chosen } = view;
   const hasWindow = solution.windows.length > 0;
+  const setPoint = solution.windows[chosen]?.setPoint;
   const where = pinned
     ? "at the pinned point"
     : hasWindow
@@ -65,6 +71,16 @@ export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin
           view={view}
           cursor={cursor}
           onPick={onPin}
+          handle={
+            setPoint && onMoveSetPoint
+              ? {
+                  at: [setPoint.pH, setPoint.Eh],
+                  label: `Set point, pH ${fixed(setPoint.pH, 2)}, ${scale.format(setPoint.Eh)}, margin ${fixed(setPoint.margin, 1)} control bands`,
+                  onMove: onMoveSetPoint,
+                  onSettle,
+                }
+              : null
+          }
           label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
         />
       </div>

@@ -13,16 +13,20 @@ import { printColours, useThemeColours } from "../../lib/theme";
 import { CursorStore } from "../../map/cursor";
 import { AnswersPanel } from "./answers/AnswersPanel";
 import { ChooseReagents } from "./answers/ChooseReagents";
+import { GasLayers, PracticeList } from "./asks/GasLayers";
 import { AsksPanel } from "./asks/AsksPanel";
 import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
 import { type ExportKind, FrozenBanner, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./MapPanel";
+import { applyOpening, holdSetPoint } from "./model/adviceEdit";
 import { exportPlan } from "./model/exportPlan";
+import { useAdvice, useRobust } from "./model/useAsked";
 import { useDraft } from "./model/useDraft";
 import { useKeys } from "./model/useKeys";
 import { useMapModel } from "./model/useMapModel";
 import { useMapSettings, useReagents } from "./model/useMapSettings";
+import { useAnalysis, useGases, useHeld } from "./model/usePoint";
 import { usePrinting } from "./model/usePrinting";
 import { useSolved } from "./model/useSolved";
 import { dropDraft, keepDraft } from "./model/draftShelf";
@@ -41,7 +45,11 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const mayWrite = useMay("writePlans");
   const draft = useDraft(plan.id, plan.latest);
   const inputs = frozen ? frozen.inputs : draft.inputs;
-  const { problem, solution, failure } = useSolved(inputs, data);
+  const { problem, solution: solved, failure } = useSolved(inputs, data);
+  const analysis = useAnalysis(problem, data);
+  const { solution, held } = useHeld(inputs, solved, analysis);
+  const advice = useAdvice(problem, data, failure === null && solution?.windows.length === 0);
+  const robust = useRobust(problem, inputs.ranges, data);
   const scale = usePotentialScale(inputs.temperatureC);
   const theme = useThemeColours();
   const printing = usePrinting();
@@ -55,7 +63,16 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const [exporting, setExporting] = useState<{ text: string; bad: boolean } | null>(null);
   const focus = inputs.metals.some((m) => m.element === wantedFocus) ? wantedFocus : null;
   const count = solution?.windows.length ?? 0;
-  const chosen = Math.min(wantedWindow, Math.max(0, count - 1));
+  const chosen = held?.index ?? Math.min(wantedWindow, Math.max(0, count - 1));
+  const { gases, choose: chooseGas } = useGases(analysis, solution?.windows[chosen] ?? null);
+  const drawnGases = useMemo(() => gases?.map.regions.filter((r) => gases.shown.has(r.gas)) ?? [], [gases]);
+  const robustOutlines = useMemo(() => (robust.state === "there" ? robust.value.windows : []), [robust]);
+
+  function chooseWindow(index: number) {
+    setWindow(index);
+    // A point held elsewhere would bring its own window back.
+    if (held && held.index !== index && frozen === null) draft.edit(holdSetPoint(null));
+  }
 
   useKeys([
     { key: "z", ctrl: true, shift: false, run: draft.undo },
@@ -64,7 +81,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     { key: "s", ctrl: true, run: () => mayWrite && !frozen && draft.changed && setDialog("save") },
     { key: "f", run: () => setPlain(!plain) },
     { key: "r", run: () => setDialog("revisions") },
-    { key: "w", run: () => count > 1 && setWindow((chosen + 1) % count) },
+    { key: "w", run: () => count > 1 && chooseWindow((chosen + 1) % count) },
     { key: "?", run: () => setDialog("keys") },
     ...["0", "escape"].map((key) => ({
       key,
@@ -109,7 +126,12 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     chosen,
     pinned,
     reagents,
+    robust: robustOutlines,
+    gases: drawnGases,
   });
+  const { edit } = draft;
+  const mayMove = frozen === null;
+  const moveSetPoint = useCallback((at: Point) => edit(holdSetPoint(at), "set point"), [edit]);
 
   const unconfirmed = cautionsFor(hazardContext(inputs, solution?.windows[chosen]?.setPoint ?? null))
     .filter((c) => c.confirm !== null && (draft.procedures[c.code] ?? "").trim() === "")
@@ -153,7 +175,20 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
         />
       )}
       <Sheet
-        asks={<AsksPanel layers={layers} onLayer={setLayer} plain={plain} onPlain={setPlain} />}
+        asks={
+          <AsksPanel
+            layers={layers}
+            onLayer={setLayer}
+            plain={plain}
+            onPlain={setPlain}
+            more={
+              <>
+                {layers.practice && map && <PracticeList ranges={map.practice} />}
+                {layers.hazard && gases && <GasLayers gases={gases} onChoose={chooseGas} />}
+              </>
+            }
+          />
+        }
         map={
           map ? (
             <MapPanel
@@ -165,6 +200,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
               pinned={pinned}
               onPin={setPinned}
               cursor={cursor}
+              onMoveSetPoint={mayMove ? moveSetPoint : undefined}
+              onSettle={draft.settle}
             />
           ) : null
         }
@@ -188,12 +225,19 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
                 data={data}
                 scale={scale}
                 chosen={chosen}
-                onChoose={setWindow}
+                onChoose={chooseWindow}
                 reaches={map.reaches}
                 pH={map.through[0]}
                 chooseReagents={<ChooseReagents preset={inputs.preset} value={reagents} onChange={choose} />}
                 procedures={draft.procedures}
                 onProcedure={draft.nameProcedure}
+                problem={problem}
+                advice={advice}
+                robust={robust}
+                held={held}
+                gases={gases}
+                onApply={mayMove ? (opening) => edit(applyOpening(opening)) : undefined}
+                onLetGo={mayMove ? () => edit(holdSetPoint(null)) : undefined}
               />
             )}
           </>

@@ -4,6 +4,8 @@ import { mapPixels, type Sheet } from "../boxes";
 import { isLit } from "../geometry/lit";
 import { type Box, type LabelWish, type Pixel, placeLabels, type Segment } from "../geometry/labels";
 import type { MapContent } from "../content";
+import { gasNames } from "./gases";
+import { practiceNames } from "./practice";
 import { metalColour } from "../metalStyle";
 import type { PlotTrace } from "../plotTypes";
 import { speciesHtml, speciesParts } from "../speciesText";
@@ -99,7 +101,12 @@ export function nameTraces(content: MapContent, sheet: Sheet, view: MapView): Pl
     ),
     ...(content.moved && view.layers.otherBasis ? content.moved.limits.flatMap((l) => segments([l.from, l.to])) : []),
   ];
-  const fixed = [...otherBasisName(content, view), ...hydrogenCyanideName(content, view)];
+  const fixed = [
+    ...otherBasisName(content, view),
+    ...hydrogenCyanideName(content, view),
+    ...(view.layers.hazard ? gasNames(content.gases, view) : []),
+    ...(view.layers.practice ? practiceNames(content.practice, view) : []),
+  ];
   for (const text of fixed) {
     const [x, y] = toPixel(text.x, view.scale.fromShown(text.y));
     const half = (text.html.length * 0.6 * text.size) / 2 + 4;

@@ -1,17 +1,31 @@
+import { Link } from "react-router-dom";
+import type { Advice, Opening } from "../../../../shared/advice/openings";
+import type { Robust } from "../../../../shared/advice/robust";
 import { cautionsFor, hazardContext } from "../../../../shared/hazards/rules";
 import type { Reach } from "../../../../shared/reach/reach";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { HeldSetPoint } from "../../../../shared/setpoint/held";
 import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import { windowName } from "../../../map/view";
 import { namingOf } from "../model/exports";
+import type { Awaited } from "../model/useAsked";
+import type { Gases } from "../model/usePoint";
 import { CautionsBlock } from "./CautionsBlock";
+import { CouplesBlock } from "./CouplesBlock";
+import { FieldsBlock } from "./FieldsBlock";
+import { GasBlock } from "./GasBlock";
 import { LimitsBlock } from "./LimitsBlock";
+import { NoWindowBlock } from "./NoWindowBlock";
+import { OverallBlock } from "./OverallBlock";
 import { ReachBlock } from "./ReachBlock";
+import { RobustBlock } from "./RobustBlock";
 import { SetPointBlock } from "./SetPointBlock";
+import { FreeAcidRow, HeldNote } from "./SetPointMore";
 import { WarningsBlock } from "./WarningsBlock";
-import { ConflictsBlock, WindowsBlock } from "./WindowsBlock";
+import { WindowsBlock } from "./WindowsBlock";
 
 export interface AnswersProps {
   inputs: PlanInputs;
@@ -27,11 +41,19 @@ export interface AnswersProps {
   chooseReagents: React.ReactNode;
   procedures: Readonly<Record<string, string>>;
   onProcedure: (code: string, procedure: string) => void;
+  problem: Problem;
+  advice: Awaited<Advice>;
+  robust: Awaited<Robust>;
+  held: HeldSetPoint | null;
+  gases: Gases | null;
+  /** both absent where the plan is only looked at */
+  onApply?: ((opening: Opening) => void) | undefined;
+  onLetGo?: (() => void) | undefined;
 }
 
 /** The right side: where to run, what shuts the window, what reaches it, and what to beware of. */
 export function AnswersPanel(props: AnswersProps) {
-  const { inputs, solution, data, scale, chosen, onChoose, reaches } = props;
+  const { inputs, solution, data, scale, chosen, onChoose, reaches, problem, held, gases } = props;
   const window = solution.windows[chosen] ?? null;
   const naming = namingOf(data, solution);
   const name = windowName(chosen);
@@ -50,12 +72,22 @@ export function AnswersPanel(props: AnswersProps) {
       {window ? (
         <>
           <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />
+          {held && <HeldNote held={held} naming={naming} {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})} />}
+          <FreeAcidRow at={window.setPoint} inputs={inputs} data={data} />
           {cautions.length > 0 && said}
           <LimitsBlock window={window} name={name} naming={naming} scale={scale} />
+          <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
         </>
       ) : (
         <>
-          <ConflictsBlock solution={solution} metalName={naming.metalName} />
+          <NoWindowBlock
+            solution={solution}
+            inputs={inputs}
+            metalName={naming.metalName}
+            advice={props.advice}
+            scale={scale}
+            {...(props.onApply ? { onApply: props.onApply } : {})}
+          />
           {cautions.length > 0 && said}
         </>
       )}
@@ -68,8 +100,15 @@ export function AnswersPanel(props: AnswersProps) {
         scale={scale}
         choose={props.chooseReagents}
       />
+      <CouplesBlock problem={problem} data={data} pH={props.pH} scale={scale} />
+      {window && <OverallBlock problem={problem} inputs={inputs} solution={solution} window={window} data={data} />}
+      {gases && <GasBlock gases={gases} />}
       <WarningsBlock warnings={solution.warnings} />
+      <FieldsBlock solution={solution} data={data} />
       {cautions.length === 0 && said}
+      <p className="no-print mt-5 text-sm">
+        <Link to="/method">How this is worked out</Link>
+      </p>
     </>
   );
 }

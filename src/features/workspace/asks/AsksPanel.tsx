@@ -1,4 +1,6 @@
+import type { ReactNode } from "react";
 import type { LayerName, Layers } from "../../../map/view";
+import { HoldOverSection } from "./HoldOverSection";
 import { LayersSection } from "./LayersSection";
 import { LixiviantSection } from "./LixiviantSection";
 import { MetalsSection } from "./MetalsSection";
@@ -11,6 +13,8 @@ export function AsksPanel(props: {
   onLayer: (name: LayerName, on: boolean) => void;
   plain: boolean;
   onPlain: (plain: boolean) => void;
+  /** what the layers show, and which of it */
+  more?: ReactNode;
 }) {
   return (
     <>
@@ -21,8 +25,10 @@ export function AsksPanel(props: {
       <FrameSection />
       <WaterSection />
       <BandsSection />
+      <HoldOverSection />
       <div className="no-print">
         <LayersSection {...props} />
+        {props.more}
       </div>
     </>
   );

@@ -1,9 +1,13 @@
+import { saturationPressure } from "../../../../shared/gibbs/water";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
+import { TEMPERATURE_RANGE_C } from "../../../../shared/schemas/problem";
+import { kelvin } from "../../../../shared/units";
 import { Term } from "../../../components/Help";
 import { NumberField } from "../../../components/NumberField";
 import { Select } from "../../../components/Select";
 import { Slider } from "../../../components/Slider";
 import { Note, SectionHead } from "../../../components/text";
+import { withUnit } from "../../../lib/format";
 import { waterBoundWord } from "../../../lib/planWords";
 import { useAsking } from "./context";
 import { Refusal } from "./Refusal";
@@ -18,9 +22,9 @@ export function TemperatureSection() {
         labelText="Liquor"
         unit="°C"
         min={0}
-        max={150}
+        max={TEMPERATURE_RANGE_C.max}
         step={1}
-        marks={[25, 60, 100]}
+        marks={[25, 60, 100, 150, 200]}
         value={inputs.temperatureC}
         show={(t) => String(t)}
         readOnly={readOnly}
@@ -28,6 +32,15 @@ export function TemperatureSection() {
         onCommit={settle}
         width={6}
       />
+      {inputs.temperatureC > 100 && (
+        <Note className="py-1">
+          Saturation pressure of water{" "}
+          <span className="font-mono whitespace-nowrap">
+            {withUnit((saturationPressure(kelvin(inputs.temperatureC)) / 1e5).toFixed(2), "bar")}
+          </span>
+          , absolute: the vessel is closed, and every gas pressure is absolute too.
+        </Note>
+      )}
       <Refusal path="temperatureC" />
     </section>
   );

@@ -1,12 +1,15 @@
 import { useMemo } from "react";
+import type { HazardRegion } from "../../../../shared/hazards/regions";
 import { type Reach, reachesOf } from "../../../../shared/reach/reach";
+import { rangesFor } from "../../../../shared/practice/ranges";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
-import type { Point, Solution } from "../../../../shared/solution";
+import type { Outline, Point, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ThemeColours } from "../../../lib/theme";
 import { type MapContent, mapContent } from "../../../map/content";
+import type { ShownRange } from "../../../map/traces/practice";
 import type { Layers, MapMetal, MapView } from "../../../map/view";
 import { useOtherBasis } from "./useSolved";
 
@@ -15,6 +18,8 @@ export interface MapModel {
   view: Omit<MapView, "visible">;
   metals: readonly MapMetal[];
   reaches: readonly Reach[];
+  /** published ranges that fit the plan; empty while the layer is off */
+  practice: readonly ShownRange[];
   /** the point the crosscuts run through */
   through: Point;
 }
@@ -33,13 +38,19 @@ interface Wishes {
   chosen: number;
   pinned: Point | null;
   reagents: readonly string[];
+  /** what holds over the plan's ranges */
+  robust: readonly Outline[];
+  /** gases to be drawn */
+  gases: readonly HazardRegion[];
 }
 
+const NONE: readonly ShownRange[] = [];
 const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
 
 /** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
 export function useMapModel(w: Wishes): MapModel | null {
   const { inputs, problem, solution, data, scale, colours, layers, plain, focus, chosen, pinned, reagents } = w;
+  const { robust, gases } = w;
   const { metals: planMetals, controlBand, preset } = inputs;
   const frame = solution?.frame ?? inputs.frame;
   const temperatureC = solution?.temperatureC ?? inputs.temperatureC;
@@ -57,17 +68,22 @@ export function useMapModel(w: Wishes): MapModel | null {
     () => reachesOf(data, reagents, preset, temperatureC),
     [data, reagents, preset, temperatureC],
   );
+  const elements = planMetals.map((m) => m.element).join();
+  const practice = useMemo(
+    () => (layers.practice ? rangesFor({ preset, elements: elements.split(","), temperatureC }) : NONE),
+    [layers.practice, preset, elements, temperatureC],
+  );
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
   const content = useMemo(
-    () => solution && mapContent({ metals, solution, other, through, reaches, cyanide }),
-    [metals, solution, other, through, reaches, cyanide],
+    () => solution && mapContent({ metals, solution, other, through, reaches, cyanide, robust, gases, practice }),
+    [metals, solution, other, through, reaches, cyanide, robust, gases, practice],
   );
   const view = useMemo(
     () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
     [metals, frame, controlBand, scale, colours, plain, focus, layers, chosen],
   );
   return useMemo(
-    () => content && { content, view, metals, reaches, through },
-    [content, view, metals, reaches, through],
+    () => content && { content, view, metals, reaches, practice, through },
+    [content, view, metals, reaches, practice, through],
   );
 }

@@ -26,11 +26,13 @@ class LastGood {
 /** Solves the plan in hand, at once and here: some milliseconds, so there is nothing to wait for. */
 export function useSolved(inputs: PlanInputs, data: ChemicalData): Solved {
   const [last] = useState(() => new LastGood());
+  // Inputs that the solver does not see, such as a set point under the hand, leave the question the same object.
+  const asked = useMemo(() => JSON.stringify(toProblem(inputs, data)), [inputs, data]);
   return useMemo(() => {
-    const problem = toProblem(inputs, data);
+    const problem = JSON.parse(asked) as Problem;
     const outcome = solve(problem, data, { shutGround: true });
     return { problem, solution: last.take(outcome), failure: outcome.ok ? null : outcome.error };
-  }, [inputs, data, last]);
+  }, [asked, data, last]);
 }
 
 export type Basis = PlanInputs["solidsBasis"];

@@ -1,0 +1,228 @@
+import { Fragment } from "react";
+import type { Advice, ConflictGap, Opening } from "../../../../shared/advice/openings";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Requirement } from "../../../../shared/schemas/problem";
+import type { Solution } from "../../../../shared/solution";
+import { Button } from "../../../components/Button";
+import { Formula } from "../../../components/Formula";
+import { Progress } from "../../../components/status";
+import { Note, SectionHead } from "../../../components/text";
+import { celsius, fixed, significant, withUnit } from "../../../lib/format";
+import { requirementWord } from "../../../lib/planWords";
+import type { PotentialScale } from "../../../lib/potential";
+import type { Awaited } from "../model/useAsked";
+
+type Conflict = readonly { metal: string; requirement: Requirement }[];
+
+export interface NoWindowProps {
+  solution: Pick<Solution, "conflicts">;
+  inputs: Pick<PlanInputs, "metals">;
+  metalName: (element: string) => string;
+  advice: Awaited<Advice>;
+  scale: PotentialScale;
+  /** absent where the plan is only looked at */
+  onApply?: (opening: Opening) => void;
+}
+
+/** No window: which requirements cannot hold together, how far apart they stand, and the smallest change that opens one. */
+export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onApply }: NoWindowProps) {
+  const gaps = advice.state === "there" ? advice.value.gaps : [];
+  return (
+    <section aria-label="No window">
+      <SectionHead>No window is open</SectionHead>
+      {solution.conflicts.length === 0 ? (
+        <p className="py-1">The frame and the water lines leave no ground where all metals are as required.</p>
+      ) : (
+        <ul>
+          {solution.conflicts.map((set) => {
+            const key = set.map((c) => c.metal).join();
+            const gap = gaps.find((g) => g.metals.join() === key);
+            return (
+              <li key={key} className="hairline py-1">
+                <ConflictWords set={set} metalName={metalName} />
+                {gap && <GapWords gap={gap} scale={scale} />}
+              </li>
+            );
+          })}
+        </ul>
+      )}
+      <div className="mt-4">
+        <SectionHead aside="smallest change, one at a time">What would open one</SectionHead>
+        {advice.state === "waiting" && (
+          <div role="status" className="py-2 text-sm text-muted">
+            Looking for the smallest change of each number that opens a window …
+            <Progress />
+          </div>
+        )}
+        {advice.state === "failed" && (
+          <p role="alert" className="py-1 text-sm">
+            The search failed: {advice.message}. Move a number and watch the map.
+          </p>
+        )}
+        {advice.state === "there" && (
+          <Openings openings={advice.value.openings} inputs={inputs} metalName={metalName} onApply={onApply} />
+        )}
+      </div>
+    </section>
+  );
+}
+
+function ConflictWords({ set, metalName }: { set: Conflict; metalName: (element: string) => string }) {
+  const [only] = set;
+  if (set.length === 1 && only)
+    return (
+      <>
+        Nowhere on this map is <b>{metalName(only.metal)}</b> {requirementWord[only.requirement]}.
+      </>
+    );
+  return (
+    <>
+      {set.map((c, i) => (
+        <Fragment key={c.metal}>
+          {i > 0 && (i === set.length - 1 ? " and " : ", ")}
+          <b>{metalName(c.metal)}</b> {requirementWord[c.requirement]}
+        </Fragment>
+      ))}{" "}
+      cannot hold together.
+    </>
+  );
+}
+
+/** "Their grounds stand 0.62 pH apart at one Eh, and 0.21 V apart at one pH." */
+function GapWords({ gap: { gap, metals }, scale }: { gap: ConflictGap; scale: PotentialScale }) {
+  if (gap === null)
+    return metals.length > 2 ? (
+      <Note>Any two of them can; it is the {metals.length} together that leave no ground.</Note>
+    ) : null;
+  const pH = gap.pH === null ? null : `${withUnit(fixed(gap.pH, 2), "pH")} apart at one Eh`;
+  const volts = withUnit(fixed(scale.differenceToShown(gap.Eh ?? 0), scale.digits), scale.unit);
+  const Eh = gap.Eh === null ? null : `${volts} apart at one pH`;
+  const parts = [pH, Eh].filter((part) => part !== null);
+  return (
+    <Note>
+      {parts.length === 0
+        ? "Their grounds share neither a pH nor an Eh."
+        : `Their grounds stand ${parts.join(", and ")}.`}
+      {pH === null && Eh !== null && " No Eh meets both."}
+      {Eh === null && pH !== null && " No pH meets both."}
+    </Note>
+  );
+}
+
+const order = (o: Opening): number => (o.to === null ? 1 : 0);
+
+function Openings({
+  openings,
+  inputs,
+  metalName,
+  onApply,
+}: {
+  openings: readonly Opening[];
+  inputs: Pick<PlanInputs, "metals">;
+  metalName: (element: string) => string;
+  onApply: ((opening: Opening) => void) | undefined;
+}) {
+  const helpful = openings.some((o) => o.to !== null);
+  return (
+    <>
+      {!helpful && (
+        <p className="py-1">
+          No single number opens a window, as far as was looked. Two may together, or another lixiviant or requirement.
+        </p>
+      )}
+      <ul>
+        {[...openings]
+          .sort((a, b) => order(a) - order(b))
+          .map((opening) => (
+            <li key={`${opening.change} ${opening.of ?? ""}`} className="hairline py-1">
+              <div className="flex items-baseline justify-between gap-3">
+                <span className="min-w-0">
+                  <Subject opening={opening} metalName={metalName} />
+                </span>
+                {opening.to !== null && onApply && (
+                  <Button className="h-6! px-2!" onClick={() => onApply(opening)}>
+                    {actionWords(opening, inputs)}
+                  </Button>
+                )}
+              </div>
+              <div className="text-sm text-muted">
+                {opening.to === null ? (
+                  <>none opens a window; looked over {opening.searched}</>
+                ) : (
+                  <>
+                    from <Amount opening={opening} of={opening.from} inputs={inputs} /> to{" "}
+                    <Amount opening={opening} of={opening.to} inputs={inputs} />
+                    {typeof opening.to === "number" && <FactorWords opening={opening} />}
+                  </>
+                )}
+              </div>
+            </li>
+          ))}
+      </ul>
+      <Note className="py-1">
+        Each change by itself; the number is the first at which a window exists, and is narrow there. Give it more for a
+        margin.
+      </Note>
+    </>
+  );
+}
+
+function Subject({ opening, metalName }: { opening: Opening; metalName: (element: string) => string }) {
+  switch (opening.change) {
+    case "activity":
+      return <b>{metalName(opening.of ?? "")}</b>;
+    case "ligand":
+      return (
+        <b>
+          Total of <Formula formula={opening.of ?? ""} className="font-mono" />
+        </b>
+      );
+    case "temperature":
+      return <b>Temperature</b>;
+    case "solidsBasis":
+      return <b>Solids basis</b>;
+  }
+}
+
+const unitOf = ({ change, of }: Opening, { metals }: Pick<PlanInputs, "metals">): string | null =>
+  change === "activity" && metals.find((m) => m.element === of)?.entry === "gPerL" ? "g/L" : null;
+
+function Amount({
+  opening,
+  of,
+  inputs,
+}: {
+  opening: Opening;
+  of: number | string;
+  inputs: Pick<PlanInputs, "metals">;
+}) {
+  if (typeof of === "string") return <b className="font-normal text-ink">{of}</b>;
+  const text = opening.change === "temperature" ? celsius(of, 1) : significant(of, 3);
+  const unit = unitOf(opening, inputs);
+  return <span className="font-mono whitespace-nowrap">{unit ? withUnit(text, unit) : text}</span>;
+}
+
+/** How much that is: 40 times less, 12 K warmer. */
+function FactorWords({ opening: { change, from, to } }: { opening: Opening }) {
+  if (typeof from !== "number" || typeof to !== "number") return null;
+  if (change === "temperature")
+    return (
+      <>
+        , {fixed(Math.abs(to - from), 1)} K {to > from ? "warmer" : "colder"}
+      </>
+    );
+  const times = to > from ? to / from : from / to;
+  return (
+    <>
+      , {times < 10 ? fixed(times, 1) : significant(times, 2)} times {to > from ? "more" : "less"}
+    </>
+  );
+}
+
+function actionWords(opening: Opening, inputs: Pick<PlanInputs, "metals">): string {
+  const { change, to } = opening;
+  if (typeof to === "string") return `Take ${to}`;
+  if (change === "temperature") return `Set ${celsius(to ?? 0, 1)}`;
+  const unit = unitOf(opening, inputs);
+  return `Set ${withUnit(significant(to ?? 0, 3), unit ?? "")}`.trim();
+}

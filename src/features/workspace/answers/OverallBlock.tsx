@@ -1,0 +1,43 @@
+import { lazy, Suspense } from "react";
+import { Link } from "react-router-dom";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Solution, Window } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { Loading } from "../../../components/status";
+import { SectionHead } from "../../../components/text";
+import { Fold } from "../asks/Fold";
+
+const OverallList = lazy(() => import("./OverallList"));
+
+/** The balanced overall reactions at the set point, worked out when somebody looks. */
+export function OverallBlock({
+  window,
+  ...rest
+}: {
+  problem: Problem;
+  inputs: PlanInputs;
+  solution: Solution;
+  window: Window;
+  data: ChemicalData;
+}) {
+  const { inputs } = rest;
+  const feed = inputs.feedMinerals.length;
+  return (
+    <section aria-label="Overall reactions" className="mt-4">
+      <SectionHead aside={<Link to="/reactions">any reaction</Link>}>Overall reactions</SectionHead>
+      <Fold
+        className="pt-1"
+        title={
+          feed === 0
+            ? "From the plan’s metals"
+            : `From ${feed === 1 ? "the feed mineral" : `${feed} feed minerals`} and the metals`
+        }
+      >
+        <Suspense fallback={<Loading label="Balancing" />}>
+          <OverallList {...rest} setPoint={window.setPoint} />
+        </Suspense>
+      </Fold>
+    </section>
+  );
+}

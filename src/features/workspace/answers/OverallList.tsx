@@ -1,0 +1,157 @@
+import { useDeferredValue, useMemo, useState } from "react";
+import { reagentById } from "../../../../shared/reach/reagents";
+import { overallReaction } from "../../../../shared/reactions/atSetPoint";
+import type { Demand } from "../../../../shared/reactions/demand";
+import { type RedoxReagent, redoxReagents } from "../../../../shared/reactions/redoxReagents";
+import type { PlanInputs, PresetName } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { SetPoint, Solution } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { Formula, SpeciesName } from "../../../components/Formula";
+import { FormulaText } from "../../../components/FormulaText";
+import { PlainTable } from "../../../components/PlainTable";
+import { Quantity } from "../../../components/Quantity";
+import { Select, type SelectOption } from "../../../components/Select";
+import { Note } from "../../../components/text";
+import { celsius, fixed, significant } from "../../../lib/format";
+import { Reaction } from "./Reaction";
+
+interface OverallProps {
+  problem: Problem;
+  inputs: PlanInputs;
+  solution: Solution;
+  setPoint: SetPoint;
+  data: ChemicalData;
+}
+
+/** What a reaction may start from: the feed's minerals, what is to be won as metal as it stands in the liquor, the metals themselves. */
+export function startsOf({ inputs, solution, data }: Pick<OverallProps, "inputs" | "solution" | "data">): string[] {
+  const ions = inputs.metals
+    .filter((m) => m.requirement === "metal")
+    .flatMap((m) => solution.fields.filter((f) => f.metal === m.element && f.state === "dissolved"))
+    .map((f) => f.species);
+  const metals = inputs.metals.map((m) => `${m.element}(s)`).filter((id) => data.species.has(id));
+  return [...new Set([...inputs.feedMinerals, ...ions, ...metals])];
+}
+
+const usualOxidant: Partial<Record<PresetName, string>> = { chloride: "cupric-chloride" };
+
+/** The usual reagent for so many electrons: air, or the first cementing metal that the liquor can take. */
+export function usualRedox(electrons: number, preset: PresetName, metals: readonly string[]): string | null {
+  if (electrons === 0) return null;
+  if (electrons > 0) return usualOxidant[preset] ?? "air";
+  return metals.includes("Zn") || preset === "cyanide" ? "zinc-dust" : "iron-scrap";
+}
+
+export default function OverallList(props: OverallProps) {
+  const starts = startsOf(props);
+  if (starts.length === 0) return <Note className="py-1">Name a feed mineral to see what it takes.</Note>;
+  return (
+    <>
+      <ul>
+        {starts.map((from) => (
+          <Overall key={from} from={from} {...props} />
+        ))}
+      </ul>
+      <Note className="py-1">
+        What rules at the set point is the product. log K says how far, never how fast; feed, gangue and losses take
+        more than the reaction does.
+      </Note>
+    </>
+  );
+}
+
+const nameOf = (r: RedoxReagent): string => reagentById.get(r.id)?.name ?? r.used;
+
+function Overall({ from, problem, inputs, setPoint, data }: OverallProps & { from: string }) {
+  const [chosen, setChosen] = useState<string | null>(null);
+  const pH = useDeferredValue(setPoint.pH);
+  const Eh = useDeferredValue(setPoint.Eh);
+  const bare = useMemo(() => overallReaction(problem, data, { from, at: { pH, Eh } }), [problem, data, from, pH, Eh]);
+  const electrons = bare.ok ? bare.value.electrons : 0;
+  const elements = inputs.metals.map((m) => m.element);
+  const redox = chosen ?? usualRedox(electrons, inputs.preset, elements) ?? "open";
+  const outcome = useMemo(
+    () => (redox === "open" || !bare.ok ? bare : overallReaction(problem, data, { from, at: { pH, Eh }, redox })),
+    [bare, problem, data, from, pH, Eh, redox],
+  );
+  const options: SelectOption<string>[] = [
+    { value: "open", label: "none: electrons stay" },
+    ...redoxReagents
+      .filter((r) => (electrons > 0 ? r.role === "oxidant" : r.role !== "oxidant"))
+      .map((r) => ({ value: r.id, label: <Formula formula={nameOf(r)} />, text: nameOf(r), note: r.role })),
+  ];
+  return (
+    <li className="hairline py-1.5">
+      <div className="font-bold">
+        <SpeciesName id={from} withPhase />
+      </div>
+      {bare.ok && electrons !== 0 && (
+        <Select
+          label={`What ${electrons > 0 ? "takes" : "gives"} the electrons of ${from}`}
+          labelText={electrons > 0 ? "oxidant" : "reductant"}
+          value={redox}
+          onChange={setChosen}
+          options={options}
+        />
+      )}
+      {outcome.ok ? (
+        <>
+          <p className="py-1 leading-relaxed">
+            <Reaction terms={outcome.value.terms} />
+          </p>
+          {outcome.value.demand.length > 0 && <DemandTable demand={outcome.value.demand} metal={outcome.value.metal} />}
+          <p className="pt-1 text-sm text-muted">
+            log K {fixed(outcome.value.energetics.logK, 1)} at {celsius(problem.temperatureC)}
+            {outcome.value.energetics.grade && <>, worst grade {outcome.value.energetics.grade}</>}
+            {outcome.value.assumed.map((a) => (
+              <span key={a.component}>
+                ; <Formula formula={a.component} /> taken at {significant(a.activity, 1)}
+              </span>
+            ))}
+            .
+          </p>
+          {outcome.value.energetics.warnings.map((warning) => (
+            <p key={warning} className="text-sm">
+              <FormulaText text={warning} />
+            </p>
+          ))}
+        </>
+      ) : (
+        <p className="text-sm text-muted">
+          <FormulaText text={outcome.error.message} />.
+        </p>
+      )}
+    </li>
+  );
+}
+
+function DemandTable({ demand, metal }: { demand: readonly Demand[]; metal: string | null }) {
+  const short = (x: number) => <Quantity value={x} figures={3} />;
+  return (
+    <PlainTable<Demand>
+      caption="Reagents of the reaction"
+      className="text-xs"
+      rows={demand}
+      rowKey={(row) => `${row.role} ${row.formula} ${row.direction}`}
+      columns={[
+        {
+          header: "reagent",
+          cell: (row) => (
+            <>
+              <Formula formula={row.formula} />
+              {row.direction === "made" && <span className="text-muted"> made</span>}
+            </>
+          ),
+        },
+        { header: "mol/mol", number: true, cell: (row) => short(row.molPerMol) },
+        {
+          header: metal ? `kg/kg ${metal}` : "kg/kg",
+          number: true,
+          cell: (row) => (row.kgPerKgMetal === null ? "" : short(row.kgPerKgMetal)),
+        },
+        { header: "kg/t", number: true, cell: (row) => short(row.kgPerTonne) },
+      ]}
+    />
+  );
+}

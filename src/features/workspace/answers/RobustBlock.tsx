@@ -1,0 +1,88 @@
+import type { Robust } from "../../../../shared/advice/robust";
+import { Progress } from "../../../components/status";
+import { Note, Row, SectionHead } from "../../../components/text";
+import { celsius, fixed, significant, withUnit } from "../../../lib/format";
+import type { PotentialScale } from "../../../lib/potential";
+import type { Awaited } from "../model/useAsked";
+
+/** The window that holds over all the ranges, its set point, and what was checked for it. */
+export function RobustBlock({
+  robust,
+  scale,
+  metalName,
+}: {
+  robust: Awaited<Robust>;
+  scale: PotentialScale;
+  metalName: (element: string) => string;
+}) {
+  if (robust.state === "none") return null;
+  return (
+    <section aria-label="Over the ranges" className="mt-4">
+      <SectionHead aside="inner outline">Over the ranges</SectionHead>
+      {robust.state === "waiting" && (
+        <div role="status" className="py-2 text-sm text-muted">
+          Solving over the ranges …
+          <Progress />
+        </div>
+      )}
+      {robust.state === "failed" && (
+        <p role="alert" className="py-1 text-sm text-signal">
+          Not solved: {robust.message}.
+        </p>
+      )}
+      {robust.state === "there" && <Found robust={robust.value} scale={scale} metalName={metalName} />}
+    </section>
+  );
+}
+
+function Found({
+  robust: { windows, checked },
+  scale,
+  metalName,
+}: {
+  robust: Robust;
+  scale: PotentialScale;
+  metalName: (element: string) => string;
+}) {
+  const best = [...windows].sort((a, b) => b.setPoint.margin - a.setPoint.margin)[0];
+  return (
+    <>
+      {best ? (
+        <>
+          <Row label="Deepest point">
+            pH {fixed(best.setPoint.pH, 2)}, {scale.format(best.setPoint.Eh)}
+          </Row>
+          <Row label="Margin there">
+            <b>{withUnit(fixed(best.setPoint.margin, 1), "control bands")}</b>
+          </Row>
+          {windows.length > 1 && <Note>{windows.length} pieces hold; this is the deepest.</Note>}
+        </>
+      ) : (
+        <p className="py-1">
+          <b>No point holds over all of it.</b> Narrow a range, or widen what is asked.
+        </p>
+      )}
+      <Note className="py-1">{checkedWords(checked, metalName)}</Note>
+    </>
+  );
+}
+
+/** What was looked at, so that nobody takes it for more. */
+export function checkedWords(
+  { temperatures, settled, activities }: Robust["checked"],
+  metalName: (element: string) => string,
+): string {
+  const [first, last] = [temperatures[0] ?? 0, temperatures.at(-1) ?? 0];
+  const heat =
+    temperatures.length === 1
+      ? `Solved at ${celsius(first, 1)}.`
+      : `Solved at ${temperatures.length} temperatures from ${celsius(first, 1)} to ${celsius(last, 1)}; ${
+          settled
+            ? "twice as many moved no corner by more than 0.001 pH and 1 mV."
+            : "its corners still moved when that was the most to be tried: take it with care."
+        }`;
+  const each = activities.map(({ metal, at, why }) => `${metalName(metal)} at ${significant(at)} (${why})`);
+  return each.length === 0
+    ? heat
+    : `${heat} Of each activity range the worse end alone is solved, since the ground shrinks all the way to it: ${each.join("; ")}. The margin counts pH and Eh.`;
+}

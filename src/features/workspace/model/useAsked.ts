@@ -1,0 +1,90 @@
+import { useEffect, useMemo, useState } from "react";
+import type { Advice } from "../../../../shared/advice/openings";
+import type { Ranges, Robust } from "../../../../shared/advice/robust";
+import type { Outcome } from "../../../../shared/outcome";
+import type { HoldRanges } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { Asker } from "../../../workers/asker";
+
+/** An answer from the worker: not asked for, on its way, there, or failed. */
+export type Awaited<Value> =
+  { state: "none" } | { state: "waiting" } | { state: "there"; value: Value } | { state: "failed"; message: string };
+
+/** Long enough that a hand on a slider asks once. */
+const PAUSE = 350;
+
+/** Asks once the inputs rest; what is on its way when they move on is given up. `key` says what the question depends on. */
+function useAsked<Value>(
+  data: ChemicalData,
+  key: string | null,
+  ask: (asker: Asker, key: string, signal: AbortSignal) => Promise<Outcome<Value>>,
+): Awaited<Value> {
+  const asker = useMemo(() => new Asker(data.tables), [data]);
+  const [answer, setAnswer] = useState<{ key: string; of: Asker; result: Awaited<Value> } | null>(null);
+  useEffect(() => () => asker.end(), [asker]);
+  useEffect(() => {
+    if (key === null) return;
+    const giveUp = new AbortController();
+    const timer = setTimeout(() => {
+      ask(asker, key, giveUp.signal).then(
+        (outcome) =>
+          setAnswer({
+            key,
+            of: asker,
+            result: outcome.ok
+              ? { state: "there", value: outcome.value }
+              : { state: "failed", message: outcome.error.message },
+          }),
+        (error: unknown) => {
+          if (giveUp.signal.aborted) return;
+          const message = error instanceof Error ? error.message : String(error);
+          setAnswer({ key, of: asker, result: { state: "failed", message } });
+        },
+      );
+    }, PAUSE);
+    return () => {
+      clearTimeout(timer);
+      giveUp.abort();
+    };
+  }, [asker, key, ask]);
+  if (key === null) return { state: "none" };
+  return answer !== null && answer.key === key && answer.of === asker ? answer.result : { state: "waiting" };
+}
+
+const askAdvice = (asker: Asker, key: string, signal: AbortSignal) =>
+  asker.ask<"advice">({ kind: "advice", problem: JSON.parse(key) as Problem }, signal);
+
+/** What would open a window; asked for only while there is none. */
+export function useAdvice(problem: Problem, data: ChemicalData, wanted: boolean): Awaited<Advice> {
+  const key = useMemo(() => (wanted ? JSON.stringify(problem) : null), [problem, wanted]);
+  return useAsked(data, key, askAdvice);
+}
+
+/** Ranges of the plan as the core takes them: of metals that the plan still has. */
+export function rangesOf(ranges: HoldRanges | undefined, elements: readonly string[]): Ranges | null {
+  const { temperatureC, activities = {} } = ranges ?? {};
+  const known = Object.entries(activities).filter(([element]) => elements.includes(element));
+  if (temperatureC === undefined && known.length === 0) return null;
+  return {
+    ...(temperatureC === undefined ? {} : { temperatureC }),
+    ...(known.length === 0 ? {} : { activities: Object.fromEntries(known) }),
+  };
+}
+
+const askRobust = (asker: Asker, key: string, signal: AbortSignal) => {
+  const { problem, ranges } = JSON.parse(key) as { problem: Problem; ranges: Ranges };
+  return asker.ask<"robust">({ kind: "robust", problem, ranges }, signal);
+};
+
+/** The window that holds over the plan's ranges; asked for only where it has some. */
+export function useRobust(problem: Problem, ranges: HoldRanges | undefined, data: ChemicalData): Awaited<Robust> {
+  const key = useMemo(() => {
+    const over = rangesOf(
+      ranges,
+      problem.metals.filter((m) => m.requirement !== "free").map((m) => m.element),
+    );
+    return over && JSON.stringify({ problem, ranges: over });
+  }, [problem, ranges]);
+  return useAsked(data, key, askRobust);
+}

@@ -1,0 +1,65 @@
+import type { Frame } from "../../../shared/schemas/problem";
+import { boxOf, type PublishedRange } from "../../../shared/practice/ranges";
+import { ringCoordinates } from "../geometry/rings";
+import { type PlotTrace, trace } from "../plotTypes";
+import type { PlacedText } from "../texts";
+import type { MapView } from "../view";
+
+/** A published range that the map shows. */
+export interface ShownRange {
+  range: PublishedRange;
+  /** the plan's temperature lies within 5 C of the range's */
+  atTemperature: boolean;
+}
+
+const corners = ({ pH, Eh }: Frame): [number, number][] => [
+  [pH[0], Eh[0]],
+  [pH[1], Eh[0]],
+  [pH[1], Eh[1]],
+  [pH[0], Eh[1]],
+];
+
+/** Published operating ranges as outlined boxes: drawn through where the plan's temperature fits, dotted where it does not. An axis the
+ *  source does not speak of spans the frame. */
+export function practiceTraces(ranges: readonly ShownRange[], view: MapView): PlotTrace[] {
+  return [true, false].map((fits) =>
+    trace({
+      uid: `practice-${fits ? "here" : "elsewhere"}`,
+      name: fits ? "Published practice" : "Published practice at another temperature",
+      mode: "lines",
+      line: { color: view.colours.muted, width: 1.3, dash: fits ? "solid" : "2px,3px" },
+      ...ringCoordinates(
+        ranges
+          .filter((r) => r.atTemperature === fits)
+          .flatMap(({ range }) => {
+            const box = boxOf(range, view.frame);
+            return box ? [{ outer: corners(box), holes: [] }] : [];
+          }),
+        view.scale.toShown,
+      ),
+    }),
+  );
+}
+
+/** Ids at the upper left corners, one below the other where boxes share a corner. */
+export function practiceNames(ranges: readonly ShownRange[], view: MapView): PlacedText[] {
+  const [lo, hi] = view.visible.Eh;
+  const [left, right] = view.visible.pH;
+  const taken = new Map<string, number>();
+  return ranges.flatMap(({ range }) => {
+    const box = boxOf(range, view.visible);
+    if (!box) return [];
+    const key = `${box.pH[0].toFixed(1)} ${box.Eh[1].toFixed(2)}`;
+    const row = taken.get(key) ?? 0;
+    taken.set(key, row + 1);
+    return [
+      {
+        html: range.id,
+        x: box.pH[0] + 0.025 * (right - left),
+        y: view.scale.toShown(box.Eh[1] - (0.03 + 0.04 * row) * (hi - lo)),
+        colour: view.colours.muted,
+        size: 10,
+      },
+    ];
+  });
+}
