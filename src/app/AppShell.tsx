@@ -9,6 +9,7 @@ import { SignInAgain } from "./SignInAgain";
 const places = [
   { to: "/plans", name: "Plans" },
   { to: "/chemistry", name: "Chemistry" },
+  { to: "/reactions", name: "Reactions" },
 ] as const;
 
 /** The line at the top of every screen: where one is, where one can go, who one is. The screen below fills the rest. */
