@@ -46,7 +46,14 @@ export default defineConfig({
       },
       {
         extends: true,
-        test: { name: "server", environment: "node", include: ["tests/server/**/*.test.ts"], testTimeout: 20_000 },
+        test: {
+          name: "server",
+          environment: "node",
+          include: ["tests/server/**/*.test.ts"],
+          testTimeout: 20_000,
+          // Every test has an application and a database of its own; the modules may be loaded once a worker.
+          isolate: false,
+        },
       },
       {
         extends: true,
