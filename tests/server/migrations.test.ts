@@ -81,6 +81,47 @@ test("a migration that fails half way leaves the file as it was", async () => {
   expect(open.db.select().from(schema.sessions).all()).toHaveLength(1);
 });
 
+/** The shipped migrations up to and with the one of that number. */
+function migrationsUpTo(last: number): string {
+  const folder = join(temporaryFolder(), "drizzle");
+  cpSync(join(projectRoot, "drizzle"), folder, { recursive: true });
+  const journalPath = join(folder, "meta/_journal.json");
+  const journal = JSON.parse(readFileSync(journalPath, "utf8")) as { entries: { idx: number }[] };
+  const entries = journal.entries.filter(({ idx }) => idx <= last);
+  writeFileSync(journalPath, JSON.stringify({ ...journal, entries }));
+  return folder;
+}
+
+test("a database of the first release comes to the newest schema with its members, plans and library", () => {
+  const open = openDatabase(join(temporaryFolder(), "first.db"));
+  expect(migrateDatabase(open, migrationsUpTo(0)).ran).toBe(1);
+  const run = (statement: string, ...values: unknown[]) => open.raw.prepare(statement).run(...values);
+  run("insert into chemistry_versions (id, created_at) values ('v1', '2026-09-01')");
+  run(
+    "insert into users (id, email, name, role, password_hash, preferences, created_at) values ('u', 'a@b.example', 'A', 'admin', 'x', '{}', '2026-09-01')",
+  );
+  run(
+    "insert into projects (id, site_name, name, invented, created_at) values ('p', 'North', 'Calcine', 0, '2026-09-01')",
+  );
+  run(
+    "insert into plans (id, project_id, name, description, created_at, updated_at) values ('n', 'p', 'tank', '', '2026-09-01', '2026-09-01')",
+  );
+  run(
+    "insert into plan_revisions (plan_id, number, note, author_id, created_at, data_version, inputs) values ('n', 1, '', 'u', '2026-09-01', 'v1', '{}')",
+  );
+  const { ran, backup } = migrateDatabase(open);
+  expect(ran).toBeGreaterThanOrEqual(3);
+  expect(backup && existsSync(backup)).toBeTruthy();
+  const { db } = open;
+  expect(db.select().from(schema.users).all()).toMatchObject([{ id: "u", name: "A", version: 1, disabledAt: null }]);
+  expect(db.select().from(schema.chemistryVersions).all()).toMatchObject([
+    { id: "v1", curatedVersion: null, edited: [] },
+  ]);
+  expect(db.select().from(schema.planRevisions).all()).toMatchObject([{ planId: "n", number: 1, dataVersion: "v1" }]);
+  expect(db.select().from(schema.trials).all()).toEqual([]);
+  open.raw.close();
+});
+
 test("a second start migrates nothing and copies nothing", async () => {
   const open = await filledDatabase();
   expect(migrateDatabase(open)).toEqual({ ran: 0, backup: null });
