@@ -2,18 +2,25 @@ import { Suspense } from "react";
 import { NavLink, Outlet } from "react-router-dom";
 import { Loading } from "../components/status";
 import { classes } from "../lib/classes";
+import { mayDo, useSession, type Permission } from "../lib/session";
 import { MemberMenu } from "./MemberMenu";
 import { Place } from "./Place";
 import { SignInAgain } from "./SignInAgain";
 
-const places = [
+const places: readonly { to: string; name: string; needs?: Permission }[] = [
   { to: "/plans", name: "Plans" },
+  { to: "/bench", name: "Bench" },
+  { to: "/campaigns", name: "Campaigns" },
+  { to: "/feeds", name: "Feeds" },
   { to: "/chemistry", name: "Chemistry" },
   { to: "/reactions", name: "Reactions" },
-] as const;
+  { to: "/members", name: "Members", needs: "manageMembers" },
+];
 
 /** The line at the top of every screen: where one is, where one can go, who one is. The screen below fills the rest. */
 export function AppShell() {
+  const { user } = useSession();
+  const open = places.filter(({ needs }) => needs === undefined || mayDo(user.role, needs));
   return (
     <div className="flex h-dvh flex-col print:h-auto">
       <a
@@ -28,7 +35,7 @@ export function AppShell() {
         </NavLink>
         <Place />
         <nav aria-label="Places" className="flex gap-5">
-          {places.map(({ to, name }) => (
+          {open.map(({ to, name }) => (
             <NavLink
               key={to}
               to={to}

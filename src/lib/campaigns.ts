@@ -1,4 +1,4 @@
-import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import { queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
 import type { campaignCreate, CampaignRow, campaignUpdate } from "../../shared/schemas/campaign";
 import type { CampaignPairAnswer, CampaignSummaryAnswer } from "../../shared/schemas/campaignSummary";
@@ -22,12 +22,12 @@ export const useCampaign = (id: string | undefined) =>
     enabled: id !== undefined,
   });
 
-export const useCampaignSummary = (id: string, enabled = true) =>
-  useQuery({
+export const campaignSummaryQuery = (id: string) =>
+  queryOptions({
     queryKey: keys.campaignSummary(id),
     queryFn: ({ signal }) => api.get<CampaignSummaryAnswer>(`${at(id)}/summary`, { signal }),
-    enabled,
   });
+export const useCampaignSummary = (id: string) => useQuery(campaignSummaryQuery(id));
 
 export const useCampaignPair = (a: string, b: string) =>
   useQuery({

@@ -64,6 +64,9 @@ export const significant = (x: number, figures = 2): string => {
 
 export const withUnit = (text: string, unit?: string): string => (unit ? `${text}${THIN_SPACE}${unit}` : text);
 
+/** "88.4 %" in running text, where it must not break: the space is narrow and holds. */
+export const percent = (x: number, digits: number): string => `${fixed(x, digits)}${NARROW_NO_BREAK}%`;
+
 export const celsius = (t: number, digits = 0): string => withUnit(fixed(t, digits), "°C");
 
 export type Parsed = { ok: true; value: number } | { ok: false; message: string };

@@ -1,4 +1,4 @@
-import { useSyncExternalStore } from "react";
+import { useEffect, useSyncExternalStore } from "react";
 import type { ProjectRow } from "../../shared/schemas/api";
 import { useProjects } from "./plans";
 
@@ -36,4 +36,9 @@ export function useProject(): { project: ProjectRow | undefined; projects: Proje
   const id = useSyncExternalStore(subscribe, read);
   const { data: projects } = useProjects();
   return { projects, project: projects?.find((p) => p.id === id) ?? projects?.[0] };
+}
+
+/** A screen of one record: its project becomes the one in hand, so that the way back leads to its own lists. */
+export function useProjectOf(projectId: string): void {
+  useEffect(() => selectProject(projectId), [projectId]);
 }

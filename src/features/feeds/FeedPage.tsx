@@ -14,6 +14,7 @@ import { TextArea, TextField } from "../../components/TextField";
 import { useChemistry } from "../../lib/chemistry";
 import { useDeleteFeed, useFeed, useRestoreFeed, useUpdateFeed } from "../../lib/feeds";
 import { counted } from "../../lib/format";
+import { useProjectOf } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
 import { useRecordDraft } from "../../lib/useRecordDraft";
@@ -42,6 +43,7 @@ export default function FeedPage() {
 /** Head assays, minerals and the rest of one feed. What is typed is kept in the browser until it is saved. */
 function FeedEditor({ feed }: { feed: FeedRow }) {
   const navigate = useNavigate();
+  useProjectOf(feed.projectId);
   const mayWrite = useMay("review");
   const update = useUpdateFeed();
   const remove = useDeleteFeed();

@@ -6,6 +6,7 @@ import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { ConflictDialog } from "../../components/ConflictDialog";
 import { Tabs } from "../../components/choice";
 import { useFeed } from "../../lib/feeds";
+import { useProjectOf } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { useSolvedRevision } from "../../lib/solvedRevision";
 import { useSaveKeys } from "../../lib/useSaveKeys";
@@ -27,6 +28,7 @@ interface TrialEditorProps {
 /** Record and accounts of one trial; what is typed is kept in this browser until the server has it. */
 export function TrialEditor({ trial, campaign, data }: TrialEditorProps) {
   const mayWrite = useMay("writeBench");
+  useProjectOf(campaign.projectId);
   const [search, setSearch] = useSearchParams();
   const [dialog, setDialog] = useState<TrialDialog | null>(null);
   const draft = useTrialDraft(trial);

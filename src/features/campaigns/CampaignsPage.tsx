@@ -1,0 +1,142 @@
+import { useQueries } from "@tanstack/react-query";
+import { useMemo, useState } from "react";
+import { useNavigate } from "react-router-dom";
+import type { CampaignRow } from "../../../shared/schemas/campaign";
+import { Button } from "../../components/Button";
+import { Segmented } from "../../components/choice";
+import { DataTable } from "../../components/DataTable";
+import { SearchField } from "../../components/SearchField";
+import { ErrorNote, Loading } from "../../components/status";
+import { tableCsv } from "../../components/tableModel";
+import { Empty, Note } from "../../components/text";
+import { campaignSummaryQuery, useCampaigns } from "../../lib/campaigns";
+import { downloadText } from "../../lib/csv";
+import { counted } from "../../lib/format";
+import { useProject } from "../../lib/project";
+import { useMay } from "../../lib/session";
+import { usePageTitle } from "../../lib/title";
+import { CampaignDetail } from "./CampaignDetail";
+import { CreateCampaignDialog } from "./CreateCampaignDialog";
+import { exportedStageColumns, stageColumns } from "./stageColumns";
+import { stageRows, type StageRow } from "./stageRows";
+
+const shelves = [
+  { value: "false", label: "Current" },
+  { value: "true", label: "Deleted" },
+] as const;
+type Shelf = (typeof shelves)[number]["value"];
+
+/** The campaigns of one project, a line a stage: how many, what came out, inside and outside; beside them the one in hand. */
+export default function CampaignsPage() {
+  usePageTitle("Campaigns");
+  const mayWrite = useMay("review");
+  const { project } = useProject();
+  const navigate = useNavigate();
+  const [deleted, setDeleted] = useState<Shelf>("false");
+  const [filter, setFilter] = useState("");
+  const [chosen, setChosen] = useState<string>();
+  const [creating, setCreating] = useState(false);
+  const [shown, setShown] = useState<readonly StageRow[]>([]);
+  const campaigns = useCampaigns(project?.id, deleted);
+  const summaries = useSummaries(campaigns.data);
+  const rows = useMemo(() => stageRows(campaigns.data ?? [], summaries), [campaigns.data, summaries]);
+  const selected = rows.find(({ key }) => key === chosen) ?? shown[0] ?? rows[0];
+  const open = ({ id }: CampaignRow) => void navigate(`/campaigns/${id}`);
+  const create = mayWrite && project && (
+    <Button kind="primary" onClick={() => setCreating(true)}>
+      New campaign
+    </Button>
+  );
+  return (
+    <>
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
+        <h1 className="text-lg">Campaigns</h1>
+        <Note>
+          {campaigns.data &&
+            `${counted(campaigns.data.length, deleted === "true" ? "deleted campaign" : "campaign")} in this project`}
+        </Note>
+        <span className="flex-1" />
+        <Button
+          disabled={shown.length === 0}
+          onClick={() => downloadText("gangueway-campaigns.csv", tableCsv(shown, exportedStageColumns))}
+        >
+          Export CSV
+        </Button>
+        {create}
+      </div>
+      <div className="flex min-h-0 flex-1">
+        <section aria-label="Campaigns of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
+          <div className="flex flex-wrap items-center gap-4 pb-2">
+            <SearchField
+              label="Filter campaigns"
+              placeholder="code, title, stage, metal"
+              value={filter}
+              onChange={setFilter}
+            />
+            <Segmented label="Which campaigns" value={deleted} onChange={setDeleted} options={shelves} />
+          </div>
+          {campaigns.error ? (
+            <ErrorNote
+              doing="The campaigns could not be read"
+              error={campaigns.error}
+              retry={() => void campaigns.refetch()}
+            />
+          ) : !campaigns.data ? (
+            <Loading label="Reading the campaigns" />
+          ) : campaigns.data.length === 0 ? (
+            deleted === "true" ? (
+              <Empty title="Nothing deleted">A deleted campaign keeps its trials and can be restored.</Empty>
+            ) : (
+              <Empty title="No campaign yet" action={create}>
+                A campaign tries one question on the ground: trials laid out on a revision of a plan, stage by stage.
+                {!mayWrite && " A metallurgist makes the first one."}
+              </Empty>
+            )
+          ) : (
+            <>
+              <DataTable
+                caption="Campaigns, a line a stage"
+                rows={rows}
+                columns={stageColumns}
+                rowKey={({ key }) => key}
+                filter={filter}
+                initialSort={{ id: "campaign" }}
+                selectedKey={selected?.key}
+                onSelect={({ key }) => setChosen(key)}
+                onOpen={({ campaign }) => open(campaign)}
+                onShown={setShown}
+                rowHeight={48}
+                className="min-h-0 flex-1"
+                empty={`No campaign matches “${filter}”.`}
+              />
+              <Note className="py-2">
+                Mean over the trials that have the figure, range below it; rejected trials are left out. Reagent: acid,
+                or cementing metal, consumed per kg of target. Inside and outside: by the plan revision of each
+                campaign.
+              </Note>
+            </>
+          )}
+        </section>
+        {selected && (
+          <CampaignDetail
+            key={selected.campaign.id}
+            campaign={selected.campaign}
+            summary={summaries.get(selected.campaign.id) ?? null}
+            others={campaigns.data ?? []}
+          />
+        )}
+      </div>
+      {project && (
+        <CreateCampaignDialog open={creating} onOpenChange={setCreating} projectId={project.id} onCreated={open} />
+      )}
+    </>
+  );
+}
+
+/** The summaries that have come so far, by campaign. */
+function useSummaries(campaigns: readonly CampaignRow[] | undefined) {
+  return useQueries({
+    queries: (campaigns ?? []).filter(({ deletedAt }) => deletedAt === null).map(({ id }) => campaignSummaryQuery(id)),
+    combine: (results) => new Map(results.flatMap(({ data }) => (data ? [[data.campaign.id, data] as const] : []))),
+  });
+}

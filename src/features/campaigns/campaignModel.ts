@@ -1,0 +1,63 @@
+import {
+  campaignUpdate,
+  type CampaignCreate,
+  type CampaignRow,
+  type CampaignStage,
+} from "../../../shared/schemas/campaign";
+import type { PlanInputs } from "../../../shared/schemas/plan";
+import type { Problem } from "../../lib/recordDraft";
+
+export type CampaignValues = Omit<CampaignCreate, "projectId">;
+
+export const campaignValues = ({
+  code,
+  title,
+  question,
+  planId,
+  planRevision,
+  notes,
+  stages,
+}: CampaignRow): CampaignValues => ({ code, title, question, planId, planRevision, notes, stages });
+
+export function campaignProblems(changed: Partial<CampaignValues>): Problem[] {
+  const parsed = campaignUpdate.safeParse(changed);
+  if (parsed.success) return [];
+  return parsed.error.issues.map(({ path, message }) => ({
+    path: path.join("."),
+    message: typeof path[1] === "number" && message.startsWith("Too small") ? `${String(path[2])} is missing` : message,
+  }));
+}
+
+/** A first stage guessed from the plan: its target against the gangue that must stay solid. */
+export function stageFromPlan({ metals }: Pick<PlanInputs, "metals">): CampaignStage {
+  const target = metals.find(({ role }) => role === "target");
+  const gangue = metals.find(({ role }) => role === "gangue");
+  const won = target?.requirement === "metal";
+  return {
+    code: won ? "C" : "L",
+    name: won ? "cementation" : "leach",
+    target: target?.element ?? metals[0]?.element ?? "",
+    gangue: won ? null : (gangue?.element ?? null),
+  };
+}
+
+const fields: Readonly<Record<string, string>> = {
+  code: "code",
+  title: "title",
+  question: "question",
+  planId: "plan",
+  planRevision: "plan revision",
+  notes: "notes",
+  stages: "stages",
+  name: "name",
+  target: "target",
+  gangue: "gangue",
+  deletedAt: "deleted",
+};
+
+/** "stages.1.target" → "stage 2, target" */
+export function campaignWords(path: string): string {
+  const [first = "", index, field] = path.split(".");
+  if (first !== "stages" || index === undefined) return fields[first] ?? first;
+  return field === undefined ? `stage ${Number(index) + 1}` : `stage ${Number(index) + 1}, ${fields[field] ?? field}`;
+}
