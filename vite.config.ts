@@ -42,6 +42,8 @@ export default defineConfig({
           environment: "node",
           include: ["tests/{core,golden,properties,cases}/**/*.test.ts"],
           testTimeout: 30_000,
+          // Pure functions: nothing to keep apart.
+          isolate: false,
         },
       },
       {
