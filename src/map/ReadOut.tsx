@@ -5,7 +5,7 @@ import { SpeciesName } from "../components/Formula";
 import { MetalName } from "../components/MetalLine";
 import { fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
-import { type CursorStore, useCursor } from "./cursor";
+import { type CursorStore, useCursor } from "./cursorStore";
 import { cssMetalColour, hatchesOf, shuts } from "./metalStyle";
 import { Swatch } from "./Swatch";
 import type { MapMetal } from "./view";

@@ -1,22 +1,24 @@
-import { lazy, Suspense, useCallback, useMemo, useRef, useState } from "react";
+import { useCallback, useMemo, useRef, useState } from "react";
 import { Button } from "../components/Button";
-import { Loading } from "../components/status";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import { sheetBoxes } from "./boxes";
-import type { MapContent } from "./content";
-import { Cursor, type CursorStore } from "./cursor";
+import { type ContentWishes, mapContent } from "./content";
+import { Cursor } from "./cursor";
+import type { CursorStore } from "./cursorStore";
 import { mapFigure } from "./figure";
+<<<<<<< Updated upstream
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
+=======
+import Plot from "./Plot";
+>>>>>>> Stashed changes
 import { haloStyle } from "./texts";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
 import { afterRelayout } from "./zoom";
 
-const Plot = lazy(() => import("./Plot"));
-
 export interface WindowMapProps {
-  content: MapContent;
+  asked: ContentWishes;
   /** how to draw it; what is in sight is the map's own affair */
   view: Omit<MapView, "visible">;
   cursor: CursorStore;
@@ -28,8 +30,15 @@ export interface WindowMapProps {
   handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
 }
 
+<<<<<<< Updated upstream
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure. */
 export function WindowMap({ content, view, cursor, onPick, label, handle }: WindowMapProps) {
+=======
+/** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
+ *  It brings Plotly along: import it late. */
+export default function WindowMap({ asked, view, cursor, onPick, label }: WindowMapProps) {
+  const content = useMemo(() => mapContent(asked), [asked]);
+>>>>>>> Stashed changes
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
   const { frame, scale } = view;
@@ -88,9 +97,7 @@ export function WindowMap({ content, view, cursor, onPick, label, handle }: Wind
       <style>{haloStyle("var(--color-sheet)", "var(--color-tint)")}</style>
       {figure && sheet ? (
         <>
-          <Suspense fallback={<Loading label="Opening the map" />}>
-            <Plot figure={figure} onRelayout={onRelayout} onDrawn={onDrawn} />
-          </Suspense>
+          <Plot figure={figure} onRelayout={onRelayout} onDrawn={onDrawn} />
           {visible !== frame && (
             <Button
               kind="quiet"

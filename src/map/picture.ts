@@ -3,6 +3,7 @@ import bold from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-700-norm
 import { sheetBoxes } from "./boxes";
 import type { MapContent } from "./content";
 import { mapFigure } from "./figure";
+import { picture } from "./Plot";
 import type { Figure } from "./plotTypes";
 import { haloStyle } from "./texts";
 import { type MapView, MONO } from "./view";
@@ -66,7 +67,6 @@ const asDataUrl = async (url: string): Promise<string> => {
 
 /** The figure as SVG text that stands alone: fonts and halos written into it. */
 async function standaloneSvg(figure: Figure, view: Omit<MapView, "visible">): Promise<string> {
-  const { picture } = await import("./Plot");
   const url = await picture(figure);
   const svg = decodeURIComponent(url.slice(url.indexOf(",") + 1));
   const faces = await Promise.all(

@@ -1,14 +1,23 @@
+import { lazy, Suspense } from "react";
 import type { PlanInputs } from "../../../shared/schemas/plan";
 import type { Point } from "../../../shared/solution";
 import { Button } from "../../components/Button";
+<<<<<<< Updated upstream
 import { fixed } from "../../lib/format";
+=======
+import { Loading } from "../../components/status";
+>>>>>>> Stashed changes
 import type { PotentialScale } from "../../lib/potential";
 import { solidsBasisWord } from "../../lib/planWords";
-import type { CursorStore } from "../../map/cursor";
+import type { CursorStore } from "../../map/cursorStore";
 import { ReadOut } from "../../map/ReadOut";
 import { windowName } from "../../map/view";
-import { WindowMap } from "../../map/WindowMap";
 import type { MapModel } from "./model/useMapModel";
+
+const loadMap = () => import("../../map/WindowMap");
+const WindowMap = lazy(loadMap);
+// Plotly is the largest file there is: it comes in while the plan and the chemistry are read. A failure shows when the map is due.
+void loadMap().catch(() => undefined);
 
 export interface MapPanelProps {
   model: MapModel;
@@ -25,10 +34,16 @@ export interface MapPanelProps {
 }
 
 /** The middle: what stands under the cursor, and the map. */
+<<<<<<< Updated upstream
 export function MapPanel(props: MapPanelProps) {
   const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle } = props;
   const { content, view, metals, through } = model;
   const { solution } = content;
+=======
+export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor }: MapPanelProps) {
+  const { asked, view, metals, through } = model;
+  const { solution } = asked;
+>>>>>>> Stashed changes
   const { plain, focus, window: chosen } = view;
   const hasWindow = solution.windows.length > 0;
   const setPoint = solution.windows[chosen]?.setPoint;
@@ -66,6 +81,7 @@ export function MapPanel(props: MapPanelProps) {
         </div>
       </div>
       <div className="min-h-0 flex-1 px-2 pb-2">
+<<<<<<< Updated upstream
         <WindowMap
           content={content}
           view={view}
@@ -83,6 +99,17 @@ export function MapPanel(props: MapPanelProps) {
           }
           label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
         />
+=======
+        <Suspense fallback={<Loading label="Opening the map" />}>
+          <WindowMap
+            asked={asked}
+            view={view}
+            cursor={cursor}
+            onPick={onPin}
+            label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
+          />
+        </Suspense>
+>>>>>>> Stashed changes
       </div>
     </div>
   );

@@ -10,7 +10,7 @@ import { messageOf } from "../../lib/failure";
 import { usePotentialScale } from "../../lib/potential";
 import { useMay } from "../../lib/session";
 import { printColours, useThemeColours } from "../../lib/theme";
-import { CursorStore } from "../../map/cursor";
+import { CursorStore } from "../../map/cursorStore";
 import { AnswersPanel } from "./answers/AnswersPanel";
 import { ChooseReagents } from "./answers/ChooseReagents";
 import { GasLayers, PracticeList } from "./asks/GasLayers";
@@ -19,9 +19,12 @@ import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
 import { type ExportKind, FrozenBanner, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./MapPanel";
+<<<<<<< Updated upstream
 import { applyOpening, holdSetPoint } from "./model/adviceEdit";
 import { exportPlan } from "./model/exportPlan";
 import { useAdvice, useRobust } from "./model/useAsked";
+=======
+>>>>>>> Stashed changes
 import { useDraft } from "./model/useDraft";
 import { useKeys } from "./model/useKeys";
 import { useMapModel } from "./model/useMapModel";
@@ -146,10 +149,14 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
         : draft.changed
           ? `draft on revision ${draft.basedOn}`
           : `revision ${plan.latest.number}`;
-      exportPlan(kind, { plan, state, inputs, problem, solution, model: map, dataVersion: data.version }).then(
-        () => setExporting(null),
-        (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
-      );
+      import("./model/exportPlan")
+        .then(({ exportPlan }) =>
+          exportPlan(kind, { plan, state, inputs, problem, solution, model: map, dataVersion: data.version }),
+        )
+        .then(
+          () => setExporting(null),
+          (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
+        );
     },
     [solution, map, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version],
   );

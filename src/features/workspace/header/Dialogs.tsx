@@ -1,14 +1,16 @@
+import { useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
-import { Confirm } from "../../../components/Dialog";
-import { ErrorNote } from "../../../components/status";
-import { useUpdatePlan } from "../../../lib/plans";
+import { whenOpened } from "../../../components/whenOpened";
 import { DuplicateDialog } from "../../plans/DuplicateDialog";
-import { RenameDialog } from "../../plans/RenameDialog";
+import { type PlanDialogProps, RenameDialog } from "../../plans/RenameDialog";
 import { RevisionsDialog } from "../../plans/RevisionsDialog";
 import type { DraftInHand } from "../model/useDraft";
-import { KeysDialog } from "./KeysDialog";
-import { SaveDialog } from "./SaveDialog";
+import type { SaveDialogProps } from "./SaveDialog";
+
+const ArchiveDialog = whenOpened<PlanDialogProps>(() => import("./ArchiveDialog"));
+const KeysDialog = whenOpened<{ open: boolean; onOpenChange: (open: boolean) => void }>(() => import("./KeysDialog"));
+const SaveDialog = whenOpened<SaveDialogProps>(() => import("./SaveDialog"));
 
 export type DialogName = "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys";
 
@@ -31,14 +33,14 @@ export function Dialogs({
   onRestore: (revision: RevisionRow) => void;
 }) {
   const navigate = useNavigate();
-  const update = useUpdatePlan();
+  const [note, setNote] = useState("");
   const show = (name: DialogName) => ({
     open: open === name,
     onOpenChange: (next: boolean) => onOpen(next ? name : null),
   });
   return (
     <>
-      <SaveDialog {...show("save")} plan={plan} draft={draft} unconfirmed={unconfirmed} />
+      <SaveDialog {...show("save")} {...{ plan, draft, unconfirmed, note }} onNote={setNote} />
       <RevisionsDialog
         {...show("revisions")}
         plan={plan}
@@ -51,25 +53,7 @@ export function Dialogs({
       <RenameDialog {...show("rename")} plan={plan} />
       <DuplicateDialog {...show("duplicate")} plan={plan} onCopied={(copy) => void navigate(`/plans/${copy.id}`)} />
       <KeysDialog {...show("keys")} />
-      <Confirm
-        {...show("archive")}
-        title={plan.archived ? `Take ${plan.name} back from the archive` : `Archive ${plan.name}`}
-        description={
-          plan.archived
-            ? "It stands among the plans of its project again."
-            : "It leaves the list of plans; nothing is deleted, and it can be taken back."
-        }
-        action={plan.archived ? "Take back" : "Archive"}
-        busy={update.isPending}
-        onConfirm={() =>
-          update.mutate(
-            { id: plan.id, version: plan.version, archived: !plan.archived },
-            { onSuccess: () => onOpen(null) },
-          )
-        }
-      >
-        {update.error && <ErrorNote doing="Not changed" error={update.error} />}
-      </Confirm>
+      <ArchiveDialog {...show("archive")} plan={plan} />
     </>
   );
 }

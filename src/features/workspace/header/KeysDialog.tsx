@@ -17,7 +17,7 @@ const keys: readonly (readonly [string, string])[] = [
   ["?", "this list"],
 ];
 
-export function KeysDialog(props: { open: boolean; onOpenChange: (open: boolean) => void }) {
+export default function KeysDialog(props: { open: boolean; onOpenChange: (open: boolean) => void }) {
   return (
     <Dialog {...props} title="Keys" width={560}>
       {keys.map(([key, what]) => (

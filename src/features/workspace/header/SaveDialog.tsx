@@ -1,4 +1,3 @@
-import { useState } from "react";
 import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import { Button } from "../../../components/Button";
 import { Dialog } from "../../../components/Dialog";
@@ -13,22 +12,20 @@ import type { DraftInHand } from "../model/useDraft";
 
 const LONGEST = 500;
 
-/** Asks for a note and shows what the revision will change, then saves the inputs in hand. */
-export function SaveDialog({
-  plan,
-  draft,
-  open,
-  onOpenChange,
-  unconfirmed,
-}: {
+export interface SaveDialogProps {
   plan: PlanRow;
   draft: DraftInHand;
   open: boolean;
   onOpenChange: (open: boolean) => void;
+  /** kept by the caller, so that a dialog closed by a slip loses no words */
+  note: string;
+  onNote: (note: string) => void;
   /** cautions that ask for a procedure nobody has named */
   unconfirmed: readonly string[];
-}) {
-  const [note, setNote] = useState("");
+}
+
+/** Asks for a note and shows what the revision will change, then saves the inputs in hand. */
+export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNote, unconfirmed }: SaveDialogProps) {
   const save = useSaveRevision();
   const { inputs, procedures } = draft;
   const changes = planChanges(plan.latest.inputs, inputs);
@@ -43,7 +40,7 @@ export function SaveDialog({
       {
         onSuccess: (revision: RevisionRow) => {
           draft.saved(revision);
-          setNote("");
+          onNote("");
           onOpenChange(false);
         },
       },
@@ -86,7 +83,7 @@ export function SaveDialog({
           label="Note"
           hint="Why: for whoever asks later. It may stay empty."
           value={note}
-          onChange={(event) => setNote(event.target.value)}
+          onChange={(event) => onNote(event.target.value)}
           error={whole.length > LONGEST ? `${whole.length} characters; at most ${LONGEST}` : null}
         />
       </form>

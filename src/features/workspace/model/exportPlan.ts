@@ -4,6 +4,7 @@ import type { Solution } from "../../../../shared/solution";
 import { toCsv } from "../../../lib/csv";
 import { celsius, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
+import { mapContent } from "../../../map/content";
 import { captionedFigure, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
 import { fileStem, limitsTable } from "./exports";
@@ -57,7 +58,7 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
     }
     case "png":
     case "svg": {
-      const figure = captionedFigure(e.model.content, e.model.view, e.plan.name, captionLines(e));
+      const figure = captionedFigure(mapContent(e.model.asked), e.model.view, e.plan.name, captionLines(e));
       return saveFile(`${stem}-map.${kind}`, await mapPicture(figure, e.model.view, kind));
     }
   }

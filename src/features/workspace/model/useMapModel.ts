@@ -8,13 +8,18 @@ import type { Outline, Point, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ThemeColours } from "../../../lib/theme";
+<<<<<<< Updated upstream
 import { type MapContent, mapContent } from "../../../map/content";
 import type { ShownRange } from "../../../map/traces/practice";
+=======
+import type { ContentWishes } from "../../../map/content";
+>>>>>>> Stashed changes
 import type { Layers, MapMetal, MapView } from "../../../map/view";
 import { useOtherBasis } from "./useSolved";
 
 export interface MapModel {
-  content: MapContent;
+  /** what the map shows of the plan; worked out where it is drawn */
+  asked: ContentWishes;
   view: Omit<MapView, "visible">;
   metals: readonly MapMetal[];
   reaches: readonly Reach[];
@@ -74,16 +79,26 @@ export function useMapModel(w: Wishes): MapModel | null {
     [layers.practice, preset, elements, temperatureC],
   );
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
+<<<<<<< Updated upstream
   const content = useMemo(
     () => solution && mapContent({ metals, solution, other, through, reaches, cyanide, robust, gases, practice }),
     [metals, solution, other, through, reaches, cyanide, robust, gases, practice],
+=======
+  const asked = useMemo(
+    () => solution && { metals, solution, other, through, reaches, cyanide },
+    [metals, solution, other, through, reaches, cyanide],
+>>>>>>> Stashed changes
   );
   const view = useMemo(
     () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
     [metals, frame, controlBand, scale, colours, plain, focus, layers, chosen],
   );
+<<<<<<< Updated upstream
   return useMemo(
     () => content && { content, view, metals, reaches, practice, through },
     [content, view, metals, reaches, practice, through],
   );
+=======
+  return useMemo(() => asked && { asked, view, metals, reaches, through }, [asked, view, metals, reaches, through]);
+>>>>>>> Stashed changes
 }
