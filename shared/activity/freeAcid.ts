@@ -25,7 +25,7 @@ export interface FreeAcid {
  *  @param data  library, for pK2 at T     @param pH  -log10 of the hydrogen ion's activity     @param sulfate  total, mol/L, above 0
  *  @param temperatureC  C, 0 to 250     @returns  g/L H2SO4 with what it rests on; OUT_OF_RANGE
  *  @source  mass action, Davies 1962; indicative: a real liquor's free acid is titrated
- *  @example valueOf(freeAcid(chemistry(), 1.5, 0.5, 25)).withinDavies // => false */
+ *  @example Number(valueOf(freeAcid(chemistry(), 1.5, 0.5, 25)).withinDavies) // => 0 */
 export function freeAcid(data: ChemicalData, pH: number, sulfate: number, temperatureC: number): Outcome<FreeAcid> {
   if (!(sulfate > 0)) return fail("OUT_OF_RANGE", "sulfate", `total sulfate ${sulfate} mol/L; it must be above 0`);
   const T = kelvin(temperatureC);
