@@ -7,11 +7,8 @@ import { type ContentWishes, mapContent } from "./content";
 import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
 import { mapFigure } from "./figure";
-<<<<<<< Updated upstream
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
-=======
 import Plot from "./Plot";
->>>>>>> Stashed changes
 import { haloStyle } from "./texts";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
@@ -30,15 +27,10 @@ export interface WindowMapProps {
   handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
 }
 
-<<<<<<< Updated upstream
-/** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure. */
-export function WindowMap({ content, view, cursor, onPick, label, handle }: WindowMapProps) {
-=======
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
  *  It brings Plotly along: import it late. */
-export default function WindowMap({ asked, view, cursor, onPick, label }: WindowMapProps) {
+export default function WindowMap({ asked, view, cursor, onPick, label, handle }: WindowMapProps) {
   const content = useMemo(() => mapContent(asked), [asked]);
->>>>>>> Stashed changes
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
   const { frame, scale } = view;

@@ -2,11 +2,8 @@ import { lazy, Suspense } from "react";
 import type { PlanInputs } from "../../../shared/schemas/plan";
 import type { Point } from "../../../shared/solution";
 import { Button } from "../../components/Button";
-<<<<<<< Updated upstream
-import { fixed } from "../../lib/format";
-=======
 import { Loading } from "../../components/status";
->>>>>>> Stashed changes
+import { fixed } from "../../lib/format";
 import type { PotentialScale } from "../../lib/potential";
 import { solidsBasisWord } from "../../lib/planWords";
 import type { CursorStore } from "../../map/cursorStore";
@@ -34,16 +31,10 @@ export interface MapPanelProps {
 }
 
 /** The middle: what stands under the cursor, and the map. */
-<<<<<<< Updated upstream
 export function MapPanel(props: MapPanelProps) {
   const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle } = props;
-  const { content, view, metals, through } = model;
-  const { solution } = content;
-=======
-export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor }: MapPanelProps) {
   const { asked, view, metals, through } = model;
   const { solution } = asked;
->>>>>>> Stashed changes
   const { plain, focus, window: chosen } = view;
   const hasWindow = solution.windows.length > 0;
   const setPoint = solution.windows[chosen]?.setPoint;
@@ -81,35 +72,25 @@ export function MapPanel({ model, inputs, scale, onPlain, onFocus, pinned, onPin
         </div>
       </div>
       <div className="min-h-0 flex-1 px-2 pb-2">
-<<<<<<< Updated upstream
-        <WindowMap
-          content={content}
-          view={view}
-          cursor={cursor}
-          onPick={onPin}
-          handle={
-            setPoint && onMoveSetPoint
-              ? {
-                  at: [setPoint.pH, setPoint.Eh],
-                  label: `Set point, pH ${fixed(setPoint.pH, 2)}, ${scale.format(setPoint.Eh)}, margin ${fixed(setPoint.margin, 1)} control bands`,
-                  onMove: onMoveSetPoint,
-                  onSettle,
-                }
-              : null
-          }
-          label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
-        />
-=======
         <Suspense fallback={<Loading label="Opening the map" />}>
           <WindowMap
             asked={asked}
             view={view}
             cursor={cursor}
             onPick={onPin}
+            handle={
+              setPoint && onMoveSetPoint
+                ? {
+                    at: [setPoint.pH, setPoint.Eh],
+                    label: `Set point, pH ${fixed(setPoint.pH, 2)}, ${scale.format(setPoint.Eh)}, margin ${fixed(setPoint.margin, 1)} control bands`,
+                    onMove: onMoveSetPoint,
+                    onSettle,
+                  }
+                : null
+            }
             label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, Enter pins the crosscuts there, Escape lets go.`}
           />
         </Suspense>
->>>>>>> Stashed changes
       </div>
     </div>
   );

@@ -19,12 +19,8 @@ import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
 import { type ExportKind, FrozenBanner, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./MapPanel";
-<<<<<<< Updated upstream
 import { applyOpening, holdSetPoint } from "./model/adviceEdit";
-import { exportPlan } from "./model/exportPlan";
 import { useAdvice, useRobust } from "./model/useAsked";
-=======
->>>>>>> Stashed changes
 import { useDraft } from "./model/useDraft";
 import { useKeys } from "./model/useKeys";
 import { useMapModel } from "./model/useMapModel";

@@ -8,12 +8,8 @@ import type { Outline, Point, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ThemeColours } from "../../../lib/theme";
-<<<<<<< Updated upstream
-import { type MapContent, mapContent } from "../../../map/content";
-import type { ShownRange } from "../../../map/traces/practice";
-=======
 import type { ContentWishes } from "../../../map/content";
->>>>>>> Stashed changes
+import type { ShownRange } from "../../../map/traces/practice";
 import type { Layers, MapMetal, MapView } from "../../../map/view";
 import { useOtherBasis } from "./useSolved";
 
@@ -73,32 +69,25 @@ export function useMapModel(w: Wishes): MapModel | null {
     () => reachesOf(data, reagents, preset, temperatureC),
     [data, reagents, preset, temperatureC],
   );
-  const elements = planMetals.map((m) => m.element).join();
+  const elements = planMetals
+    .filter((m) => m.requirement !== "free")
+    .map((m) => m.element)
+    .join();
   const practice = useMemo(
     () => (layers.practice ? rangesFor({ preset, elements: elements.split(","), temperatureC }) : NONE),
     [layers.practice, preset, elements, temperatureC],
   );
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
-<<<<<<< Updated upstream
-  const content = useMemo(
-    () => solution && mapContent({ metals, solution, other, through, reaches, cyanide, robust, gases, practice }),
-    [metals, solution, other, through, reaches, cyanide, robust, gases, practice],
-=======
   const asked = useMemo(
-    () => solution && { metals, solution, other, through, reaches, cyanide },
-    [metals, solution, other, through, reaches, cyanide],
->>>>>>> Stashed changes
+    () => solution && { metals, solution, other, through, reaches, cyanide, robust, gases, practice },
+    [metals, solution, other, through, reaches, cyanide, robust, gases, practice],
   );
   const view = useMemo(
     () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
     [metals, frame, controlBand, scale, colours, plain, focus, layers, chosen],
   );
-<<<<<<< Updated upstream
   return useMemo(
-    () => content && { content, view, metals, reaches, practice, through },
-    [content, view, metals, reaches, practice, through],
+    () => asked && { asked, view, metals, reaches, practice, through },
+    [asked, view, metals, reaches, practice, through],
   );
-=======
-  return useMemo(() => asked && { asked, view, metals, reaches, through }, [asked, view, metals, reaches, through]);
->>>>>>> Stashed changes
 }
