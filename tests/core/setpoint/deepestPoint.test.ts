@@ -94,6 +94,8 @@ describe("ridges among teeth and turns, where brute force can only tell to a hun
 describe("against brute force", () => {
   const shapes: [string, Segment[]][] = [
     ["an arrowhead", loop([[0, 0], [10, 5], [0, 10], [3, 5]])],
+    ["a thin slanted wall", [...loop(rectangle(0, 0, 12, 12)), ...hole([[2.8, 3.2], [3.2, 2.8], [9.2, 8.8], [8.8, 9.2]])]],
+    ["a slanted wall from one side", loop([[0, 0], [12, 0], [12, 9], [3, 4.8], [3, 5.2], [12, 9.6], [12, 12], [0, 12]])],
     ["two slanted holes", [...loop(rectangle(0, 0, 12, 8)), ...hole([[2, 2], [5, 3], [4, 6]]), ...hole([[7, 1], [10, 4], [8, 6]])]],
     ["a saw", loop([[0, 0], [11, 0], [10, 5], [9, 2], [8, 5.5], [6, 1.5], [5, 4.8], [3, 2.2], [1, 6]])],
   ]; // prettier-ignore

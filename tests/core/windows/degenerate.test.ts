@@ -156,6 +156,20 @@ describe("edges that coincide", () => {
   });
 });
 
+test("a side of the frame along which several species follow each other is one limit, wherever the walk begins", () => {
+  const names = ["b", "c", "a", "d"]; // the walk begins in the piece of the id that comes first, in the middle of the side
+  const stack = names.map((name, n) => aq(name, -[0, 3, 5, 6][n]! * 4000, 0, 2 - n));
+  const solution = checked(
+    invented({ Cu: { requirement: "dissolved", species: [...stack, solid("corner", -1e5, 2)] } }),
+  );
+  expect(new Set(solution.fields.map((f) => f.species)).size).toBeGreaterThanOrEqual(4);
+  const sides = solution.windows
+    .flatMap((w) => w.limits)
+    .filter((l) => l.kind === "frame")
+    .map((l) => l.side);
+  expect(sides.length).toBe(new Set(sides).size);
+});
+
 test("several windows, in the order of their margins", () => {
   // dissolved where pH < 2, 4 to 7 and > 12
   const strips = [
