@@ -20,13 +20,18 @@ const turn = (a: Point, b: Point, c: Point): number => (b[0] - a[0]) * (c[1] - a
 const cross = ([a, b]: [Point, Point], [c, d]: [Point, Point]): boolean =>
   turn(a, b, c) * turn(a, b, d) < 0 && turn(c, d, a) * turn(c, d, b) < 0;
 
+/** A point just inside each side: outlines run with their ground on the left. */
+const inner = (outline: Outline): Point[] =>
+  sidesOf(outline).map(([[ax, ay], [bx, by]]) => [(ax + bx) / 2 - 1e-7 * (by - ay), (ay + by) / 2 + 1e-7 * (bx - ax)]);
+
 /** Whether a region and a window share ground.
- *  @param region, window  outlines with holes in (pH, Eh)     @returns  true where they overlap; touching alone does not count
- *  @source  corners inside the other, or sides that cross */
+ *  @param region, window  outlines with holes in (pH, Eh), counter-clockwise, holes clockwise
+ *  @returns  true where they overlap; touching alone does not count
+ *  @source  points just inside each side that lie in the other, or sides that cross */
 export function sharesGround(region: readonly Outline[], window: readonly Outline[]): boolean {
   const meets = (a: Outline, b: Outline): boolean =>
-    a.outer.some((p) => holds(b, p)) ||
-    b.outer.some((p) => holds(a, p)) ||
+    inner(a).some((p) => holds(b, p)) ||
+    inner(b).some((p) => holds(a, p)) ||
     sidesOf(a).some((s) => sidesOf(b).some((t) => cross(s, t)));
   return region.some((r) => window.some((w) => meets(r, w)));
 }

@@ -64,7 +64,7 @@ function Desk({ data }: { data: ChemicalData }) {
     setParams({ reaction, t: String(T) }, { replace: true });
   };
   return (
-    <div className="grid gap-x-8 gap-y-5 px-5 py-4 lg:grid-cols-[320px_minmax(0,1fr)]">
+    <div className="grid gap-x-8 gap-y-5 px-5 py-4 md:grid-cols-[290px_minmax(0,1fr)]">
       <section aria-label="The reaction">
         <h1 className="mb-3 text-lg">Reactions</h1>
         <form
@@ -79,7 +79,6 @@ function Desk({ data }: { data: ChemicalData }) {
             maxLength={1000}
             spellCheck={false}
             autoComplete="off"
-            className="font-mono"
             onChange={(event) => setText(event.target.value)}
             error={outcome.ok || text.trim() !== asked ? null : "Not worked out; the reason stands with the answer."}
             hint="Ions as Cu^2+, electrons as e^-; a phase where a formula has several: CuO(s), O2(g). Mineral names do too."
@@ -148,7 +147,7 @@ function Desk({ data }: { data: ChemicalData }) {
       ) : (
         <section aria-label="Answer">
           <p role="alert" className="measure border-l-4 border-signal bg-sheet px-3 py-2">
-            <b>No answer.</b> <FormulaText text={outcome.error.message} />.
+            <b>No answer:</b> <FormulaText text={outcome.error.message} />.
           </p>
         </section>
       )}

@@ -19,7 +19,7 @@ const corners = ({ pH, Eh }: Frame): [number, number][] => [
   [pH[0], Eh[1]],
 ];
 
-/** Published operating ranges as outlined boxes: drawn through where the plan's temperature fits, dotted where it does not. An axis the
+/** Published operating ranges as outlined boxes: dash and dot where the plan's temperature fits, dotted where it does not. An axis the
  *  source does not speak of spans the frame. */
 export function practiceTraces(ranges: readonly ShownRange[], view: MapView): PlotTrace[] {
   return [true, false].map((fits) =>
@@ -27,7 +27,7 @@ export function practiceTraces(ranges: readonly ShownRange[], view: MapView): Pl
       uid: `practice-${fits ? "here" : "elsewhere"}`,
       name: fits ? "Published practice" : "Published practice at another temperature",
       mode: "lines",
-      line: { color: view.colours.muted, width: 1.3, dash: fits ? "solid" : "2px,3px" },
+      line: { color: view.colours.muted, width: 1.3, dash: fits ? "9px,3px,2px,3px" : "2px,3px" },
       ...ringCoordinates(
         ranges
           .filter((r) => r.atTemperature === fits)

@@ -47,7 +47,7 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
         </ul>
       )}
       <div className="mt-4">
-        <SectionHead aside="smallest change, one at a time">What would open one</SectionHead>
+        <SectionHead aside="one at a time">What would open one</SectionHead>
         {advice.state === "waiting" && (
           <div role="status" className="py-2 text-sm text-muted">
             Looking for the smallest change of each number that opens a window …
@@ -159,10 +159,12 @@ function Openings({
             </li>
           ))}
       </ul>
-      <Note className="py-1">
-        Each change by itself; the number is the first at which a window exists, and is narrow there. Give it more for a
-        margin.
-      </Note>
+      {helpful && (
+        <Note className="py-1">
+          The smallest change of each by itself; the number is the first at which a window exists, and is narrow there.
+          Give it more for a margin.
+        </Note>
+      )}
     </>
   );
 }

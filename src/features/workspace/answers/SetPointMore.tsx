@@ -32,7 +32,7 @@ export function HeldNote({
       {inside ? (
         nearest ? (
           <>
-            Nearest limit: <b>{nearest.side}</b>, {nearest.what}.
+            Nearest limit{window.setPoint.mixedPotential && " along pH"}: <b>{nearest.side}</b>, {nearest.what}.
           </>
         ) : (
           "No limit lies along pH here."
