@@ -17,24 +17,32 @@ import { demoTrials } from "./trials/trials";
 const metallurgist = { authorId: "demo-metallurgist", role: "metallurgist" } as const;
 /** Trials are typed by the bench; approved ones need the rights of who approved them. */
 const bench = { authorId: "demo-technician", role: "metallurgist" } as const;
-const before = new Date("2026-09-25T06:00:00.000Z");
+const sampled = new Date("2026-09-21T07:00:00.000Z");
+const day = 86_400_000;
 
 /** Feeds, campaigns and trials of the demo, through the same doors as everybody's; a row that is there stays as it is. */
 export function seedDemoRecords(db: Db, chemistry: Chemistry): void {
   const there = (table: typeof feeds | typeof campaigns | typeof trials, id: string) =>
     db.select({ id: table.id }).from(table).where(eq(table.id, id)).get() !== undefined;
   for (const { id, ...values } of demoFeeds) {
-    if (!there(feeds, id)) createFeed(db, feedCreate.parse(values), { ...metallurgist, now: before }, { id });
+    if (!there(feeds, id)) createFeed(db, feedCreate.parse(values), { ...metallurgist, now: sampled }, { id });
   }
+  const typed = demoTrials(electrodeSeries(chemistry.current));
   for (const { id, ...values } of demoCampaigns) {
+    const starts = typed.flatMap(({ campaignId, startedAt }) =>
+      campaignId === id && startedAt ? Date.parse(startedAt) : [],
+    );
+    const laidOut = new Date(Math.min(...starts) - day);
     if (!there(campaigns, id))
-      createCampaign(db, campaignCreate.parse(values), { ...metallurgist, now: before }, { id });
+      createCampaign(db, campaignCreate.parse(values), { ...metallurgist, now: laidOut }, { id });
   }
   const workings = workingsOf(chemistry);
-  for (const { id, ...values } of demoTrials(electrodeSeries(chemistry.current))) {
+  let now = sampled;
+  for (const { id, ...values } of typed) {
     if (there(trials, id)) continue;
-    const now = values.endedAt ?? values.startedAt;
-    const writer = { ...bench, now: now ? new Date(now) : before };
+    // One that is only planned was typed after the one before it.
+    now = new Date(values.endedAt ?? values.startedAt ?? now);
+    const writer = { ...bench, now };
     createTrial(db, workings, trialCreate.parse(values), writer, { id });
   }
 }

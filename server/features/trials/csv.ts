@@ -5,6 +5,7 @@ import { measuredPoint } from "../../../shared/trials/measuredPoint";
 import type { Db } from "../../db/open";
 import { byteOrderMark, csvLine, type Cell } from "../../http/csv";
 import { campaigns } from "../campaigns/schema";
+import { feeds } from "../feeds/schema";
 import { projects } from "../projects/schema";
 import { trialColumns, type ExportedTrial, type Stream } from "./csvColumns";
 import { assayHeader, assayLines, readingHeader, readingLines } from "./csvLines";
@@ -49,6 +50,14 @@ function exported(db: Db, ids: readonly string[], { electrodes }: Workings): Exp
       .all()
       .map((campaign) => [campaign.id, campaign]),
   );
+  const feedsById = new Map(
+    db
+      .select({ id: feeds.id, heads: feeds.heads, moisture: feeds.moisture })
+      .from(feeds)
+      .where(inArray(feeds.id, [...new Set(rows.map(({ feedId }) => feedId))]))
+      .all()
+      .map((feed) => [feed.id, feed]),
+  );
   const repeated = rows.flatMap(({ replicateOf }) => replicateOf ?? []);
   const codes = new Map(
     db
@@ -62,6 +71,7 @@ function exported(db: Db, ids: readonly string[], { electrodes }: Workings): Exp
     ...trial,
     projectName: of.get(trial.campaignId)?.projectName ?? "",
     stageOf: of.get(trial.campaignId)?.stages.find(({ code }) => code === trial.stage) ?? null,
+    feedOf: feedsById.get(trial.feedId) ?? null,
     replicateOfCode: trial.replicateOf === null ? null : (codes.get(trial.replicateOf) ?? null),
     conversion: measuredPoint(trial, electrodes).point?.conversion ?? null,
   }));

@@ -1,5 +1,7 @@
 import type { Entry } from "../../../shared/entry/readEntry";
+import { headOf } from "../../../shared/metallurgy/account/solids";
 import type { CampaignStage } from "../../../shared/schemas/campaign";
+import type { FeedRow } from "../../../shared/schemas/feed";
 import type { TrialRow } from "../../../shared/schemas/trial";
 import type { Cell } from "../../http/csv";
 
@@ -7,6 +9,7 @@ import type { Cell } from "../../http/csv";
 export interface ExportedTrial extends TrialRow {
   projectName: string;
   stageOf: CampaignStage | null;
+  feedOf: Pick<FeedRow, "heads" | "moisture"> | null;
   replicateOfCode: string | null;
   electrode: string | null;
   /** "450 mV + 207 mV (Ag/AgCl, 3 mol/L KCl at 25 °C) = 657 mV vs SHE" */
@@ -65,6 +68,15 @@ const figures: Column[][] = [
   plain("what stands out", (t) => t.figures.flags.join("; ")),
   plain("formula version", (t) => t.formulaVersion),
 ];
+
+/** What of the feed the figures rest on. */
+const feed: Column[][] = [
+  typed("head assay of the target metal", (t) => headOf(assaysOf(t, t.stageOf?.target))?.value),
+  typed("head assay of the gangue metal", (t) => headOf(assaysOf(t, t.stageOf?.gangue))?.value),
+  typed("moisture of the feed", (t) => t.feedOf?.moisture),
+];
+const assaysOf = ({ feedOf }: ExportedTrial, metal: string | null | undefined) =>
+  feedOf?.heads.filter(({ element }) => element === metal) ?? [];
 
 const planned: Column[][] = [
   typed("planned temperature", (t) => t.planned.temperature),
@@ -126,5 +138,5 @@ export function trialColumns(analytes: Record<Stream, readonly string[]>): Colum
       typed(`${stream}, ${analyte}`, (t) => streams[stream](t).find((assay) => assay.analyte === analyte)?.value),
     ),
   );
-  return [...identity, ...figures, ...planned, ...recorded].flat().concat(assays, record.flat());
+  return [...identity, ...figures, ...feed, ...planned, ...recorded].flat().concat(assays, record.flat());
 }

@@ -11,6 +11,7 @@ import { trialRecords, trials } from "./schema";
 import { figuresOf } from "./workedOut";
 
 type StoredTrial = typeof trials.$inferSelect;
+type LightTrial = Omit<StoredTrial, "compared">;
 type StoredRecord = Omit<typeof trialRecords.$inferSelect, "trialId">;
 
 /** What is joined to a trial. */
@@ -20,7 +21,7 @@ interface Joined {
 }
 
 /** The light row of a trial, as its table holds it, in the words of the API. */
-const light = (trial: StoredTrial, { campaignCode, feedName }: Joined) => ({
+const light = (trial: LightTrial, { campaignCode, feedName }: Joined) => ({
   id: trial.id,
   campaignId: trial.campaignId,
   campaignCode,
@@ -85,12 +86,13 @@ export function trialsOf(
   return inOrder(ids, rows);
 }
 
+const { compared: _compared, ...lightColumns } = getTableColumns(trials);
 const repeated = alias(trials, "repeated");
 
 /** Trials without their records, in the order of the ids. */
 export function listRowsOf(db: Db, ids: readonly string[]): TrialListRow[] {
   const found = db
-    .select({ trial: trials, campaignCode: campaigns.code, feedName: feeds.name, replicateOfCode: repeated.code })
+    .select({ trial: lightColumns, campaignCode: campaigns.code, feedName: feeds.name, replicateOfCode: repeated.code })
     .from(trials)
     .innerJoin(campaigns, eq(campaigns.id, trials.campaignId))
     .innerJoin(feeds, eq(feeds.id, trials.feedId))

@@ -1,6 +1,6 @@
 import type { Interval } from "../../entry/interval";
 import { readEntry } from "../../entry/readEntry";
-import type { Feed } from "../../schemas/feed";
+import type { Feed, HeadAssay } from "../../schemas/feed";
 import type { Trial } from "../../schemas/trial";
 import { dryMass, waterWithFeed } from "../moisture";
 import type { Ledger } from "./ledger";
@@ -37,12 +37,17 @@ export function chargedSolids({ charge }: Trial, feed: Feed, ledger: Ledger): Ch
     : { dry: dryMass(wet, moisture), water: waterWithFeed(wet, moisture) };
 }
 
+/** The head assay accounts use: the marked one, else the only one.
+ *  @param assays  of one element     @returns  undefined where none can be told */
+export const headOf = <Assay extends Pick<HeadAssay, "head">>(assays: readonly Assay[]): Assay | undefined =>
+  assays.find(({ head }) => head) ?? (assays.length === 1 ? assays[0] : undefined);
+
 /** Measured head of a metal: the assay marked as the head, or the only one there is.
  *  @param feed  record     @param metal  element     @param ledger  notes     @returns  g/g; null while missing, with the reason */
 export function measuredHead(feed: Feed, metal: string, ledger: Ledger): Interval | null {
   const label = `head assay, ${metal}`;
   const of = feed.heads.map((head, i) => ({ ...head, i })).filter(({ element }) => element === metal);
-  const chosen = of.find(({ head }) => head) ?? (of.length === 1 ? of[0] : undefined);
+  const chosen = headOf(of);
   if (chosen !== undefined) return ledger.take(`feed.heads.${chosen.i}`, label, chosen.value, "solidAssay");
   return ledger.miss(
     "feed.heads",
