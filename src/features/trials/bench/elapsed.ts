@@ -1,0 +1,23 @@
+import { numberIn } from "../../../../shared/entry/measure";
+import type { Entry } from "../../../../shared/entry/readEntry";
+
+/** Whole minutes since the start; null before it, or without one. */
+export function minutesSince(startedAt: string | null, now: Date): number | null {
+  if (startedAt === null) return null;
+  const minutes = Math.floor((now.getTime() - Date.parse(startedAt)) / 60_000);
+  return Number.isFinite(minutes) && minutes >= 0 ? minutes : null;
+}
+
+/** "2 h 12 min", "48 min", "3 d 4 h" */
+export function elapsed(minutes: number): string {
+  const whole = Math.round(minutes);
+  if (whole < 60) return `${whole} min`;
+  if (whole < 2 * 24 * 60) return `${Math.floor(whole / 60)} h ${String(whole % 60).padStart(2, "0")} min`;
+  return `${Math.floor(whole / 1440)} d ${Math.floor((whole % 1440) / 60)} h`;
+}
+
+/** A typed time as minutes; null where it is blank or no number. */
+export function minutesOf(at: Entry): number | null {
+  const hours = numberIn(at, "time");
+  return hours === null ? null : hours * 60;
+}
