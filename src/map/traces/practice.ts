@@ -41,7 +41,7 @@ export function practiceTraces(ranges: readonly ShownRange[], view: MapView): Pl
   );
 }
 
-/** Ids at the upper left corners, one below the other where boxes share a corner. */
+/** Ids at the lower left corners, one above the other where boxes share a corner. */
 export function practiceNames(ranges: readonly ShownRange[], view: MapView): PlacedText[] {
   const [lo, hi] = view.visible.Eh;
   const [left, right] = view.visible.pH;
@@ -49,14 +49,14 @@ export function practiceNames(ranges: readonly ShownRange[], view: MapView): Pla
   return ranges.flatMap(({ range }) => {
     const box = boxOf(range, view.visible);
     if (!box) return [];
-    const key = `${box.pH[0].toFixed(1)} ${box.Eh[1].toFixed(2)}`;
+    const key = `${box.pH[0].toFixed(1)} ${box.Eh[0].toFixed(2)}`;
     const row = taken.get(key) ?? 0;
     taken.set(key, row + 1);
     return [
       {
         html: range.id,
         x: box.pH[0] + 0.025 * (right - left),
-        y: view.scale.toShown(box.Eh[1] - (0.03 + 0.04 * row) * (hi - lo)),
+        y: view.scale.toShown(box.Eh[0] + (0.03 + 0.04 * row) * (hi - lo)),
         colour: view.colours.muted,
         size: 10,
       },

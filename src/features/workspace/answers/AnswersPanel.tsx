@@ -16,7 +16,7 @@ import type { Gases } from "../model/usePoint";
 import { CautionsBlock } from "./CautionsBlock";
 import { CouplesBlock } from "./CouplesBlock";
 import { FieldsBlock } from "./FieldsBlock";
-import { GasBlock } from "./GasBlock";
+import { GasBlock, reachedAtSetPoint } from "./GasBlock";
 import { LimitsBlock } from "./LimitsBlock";
 import { NoWindowBlock } from "./NoWindowBlock";
 import { OverallBlock } from "./OverallBlock";
@@ -58,6 +58,7 @@ export function AnswersPanel(props: AnswersProps) {
   const naming = namingOf(data, solution);
   const name = windowName(chosen);
   const cautions = cautionsFor(hazardContext(inputs, window?.setPoint ?? null));
+  const urgent = window !== null && gases !== null && reachedAtSetPoint(gases);
   const said = (
     <CautionsBlock
       cautions={cautions}
@@ -75,6 +76,7 @@ export function AnswersPanel(props: AnswersProps) {
           {held && <HeldNote held={held} naming={naming} {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})} />}
           <FreeAcidRow at={window.setPoint} inputs={inputs} data={data} />
           {cautions.length > 0 && said}
+          {gases && urgent && <GasBlock gases={gases} />}
           <LimitsBlock window={window} name={name} naming={naming} scale={scale} />
           <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
         </>
@@ -102,7 +104,7 @@ export function AnswersPanel(props: AnswersProps) {
       />
       <CouplesBlock problem={problem} data={data} pH={props.pH} scale={scale} />
       {window && <OverallBlock problem={problem} inputs={inputs} solution={solution} window={window} data={data} />}
-      {gases && <GasBlock gases={gases} />}
+      {gases && !urgent && <GasBlock gases={gases} />}
       <WarningsBlock warnings={solution.warnings} />
       <FieldsBlock solution={solution} data={data} />
       {cautions.length === 0 && said}

@@ -14,6 +14,9 @@ const NOTHING = 1e-12;
 const reached = ({ atSetPoint, threshold }: HazardRegion): boolean =>
   atSetPoint !== null && atSetPoint >= threshold.bar;
 
+/** A gas stands at its threshold at the set point: its caution then belongs beside it. */
+export const reachedAtSetPoint = ({ map }: Gases): boolean => map.regions.some(reached);
+
 /** Equilibrium pressures at the set point; where one reaches its threshold, or its region reaches the window, the caution with exposure
  *  values stands beside it. */
 export function GasBlock({ gases: { map, reaching } }: { gases: Gases }) {

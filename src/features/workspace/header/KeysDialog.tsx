@@ -13,6 +13,10 @@ const keys: readonly (readonly [string, string])[] = [
   ["arrow keys, on the map", "move the cursor; with Shift five times as far"],
   ["Enter or a click, on the map", "pin the crosscuts there"],
   ["drag, on the map", "zoom in; with Shift move the map; a double click goes back to the frame"],
+  [
+    "drag, on the set point",
+    "move it by hand; arrow keys while it has the focus do the same, with Shift five times as far",
+  ],
   ["arrow keys, in a number", "step it; with Shift ten times as far"],
   ["?", "this list"],
 ];
