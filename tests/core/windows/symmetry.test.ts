@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { FARADAY, GAS_CONSTANT, LN10 } from "../../../shared/constants";
-import type { Problem } from "../../../shared/schemas/problem";
+import type { Frame, Problem } from "../../../shared/schemas/problem";
 import type { Species } from "../../../shared/species/chemicalData";
 import { speciesOfMetal } from "../../support/oracleSpecies";
 import { randomProblem } from "../../support/problems";
@@ -62,7 +62,7 @@ describe("what cannot change an answer does not", () => {
     const random = seeded(6);
     for (const p of some(25, 20261206)) {
       const { pH, Eh } = p.frame;
-      const inner = { pH: [pH[0] + 0.21 * (pH[1] - pH[0]), pH[1] - 0.13 * (pH[1] - pH[0])], Eh: [Eh[0] + 0.08 * (Eh[1] - Eh[0]), Eh[1] - 0.3 * (Eh[1] - Eh[0])] }; // prettier-ignore
+      const inner: Frame = { pH: [pH[0] + 0.21 * (pH[1] - pH[0]), pH[1] - 0.13 * (pH[1] - pH[0])], Eh: [Eh[0] + 0.08 * (Eh[1] - Eh[0]), Eh[1] - 0.3 * (Eh[1] - Eh[0])] }; // prettier-ignore
       const [whole, part] = [solved(p), solved({ ...p, frame: inner })];
       for (let i = 0; i < 60; i++) {
         const at = [random.between(...inner.pH), random.between(...inner.Eh)] as const;
