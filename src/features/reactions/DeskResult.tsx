@@ -87,7 +87,12 @@ export function DeskResult({ answer, fine }: { answer: DeskAnswer; fine: readonl
           { header: "species", cell: (row) => <SpeciesName id={row.species} withPhase /> },
           { header: "grade", cell: (row) => row.grade },
           { header: "temperature model", cell: (row) => row.model },
-          { header: "trusted", cell: (row) => `${celsius(row.trusted[0])} to ${celsius(row.trusted[1])}` },
+          {
+            header: "trusted",
+            cell: (row) => (
+              <span className="whitespace-nowrap">{`${row.trusted[0]} to ${celsius(row.trusted[1])}`}</span>
+            ),
+          },
           { header: "source", cell: (row) => row.source },
         ]}
       />

@@ -41,22 +41,24 @@ export function practiceTraces(ranges: readonly ShownRange[], view: MapView): Pl
   );
 }
 
-/** Ids at the lower left corners, one above the other where boxes share a corner. */
+/** Ids at the lower left corners, one above the other where they would meet. */
 export function practiceNames(ranges: readonly ShownRange[], view: MapView): PlacedText[] {
   const [lo, hi] = view.visible.Eh;
   const [left, right] = view.visible.pH;
-  const taken = new Map<string, number>();
+  const taken: { x: number; y: number }[] = [];
+  const [wide, high] = [0.06 * (right - left), 0.04 * (hi - lo)];
   return ranges.flatMap(({ range }) => {
     const box = boxOf(range, view.visible);
     if (!box) return [];
-    const key = `${box.pH[0].toFixed(1)} ${box.Eh[0].toFixed(2)}`;
-    const row = taken.get(key) ?? 0;
-    taken.set(key, row + 1);
+    const x = box.pH[0] + 0.025 * (right - left);
+    let y = box.Eh[0] + 0.03 * (hi - lo);
+    while (taken.some((t) => Math.abs(t.x - x) < wide && Math.abs(t.y - y) < 0.99 * high)) y += high;
+    taken.push({ x, y });
     return [
       {
         html: range.id,
-        x: box.pH[0] + 0.025 * (right - left),
-        y: view.scale.toShown(box.Eh[0] + (0.03 + 0.04 * row) * (hi - lo)),
+        x,
+        y: view.scale.toShown(y),
         colour: view.colours.muted,
         size: 10,
       },

@@ -40,7 +40,7 @@ export function FieldsBlock({ solution, data }: { solution: Solution; data: Chem
                 <span className="text-muted">grade {row.grade}</span>
               </div>
               <div className="text-muted">
-                {row.model}, {celsius(row.trusted[0])} to {celsius(row.trusted[1])}
+                {row.model}, {row.trusted[0]} to {celsius(row.trusted[1])}
               </div>
               {row.warning !== null && (
                 <div>
