@@ -39,6 +39,11 @@ export interface PageOptions extends BrowserContextOptions {
   expected?: number[];
 }
 
+/** `path`: where to start; the start page unless given. */
+export interface SignedInOptions extends PageOptions {
+  path?: string;
+}
+
 /** A page of a fresh browser context (1280x800 unless given), not signed in. */
 export async function openPage({ expected = [], ...options }: PageOptions = {}): Promise<OpenPage> {
   const baseUrl = inject("baseUrl");
@@ -66,13 +71,17 @@ export async function openPage({ expected = [], ...options }: PageOptions = {}):
   return { page, baseUrl, complaints };
 }
 
-/** A page signed in with the demo account of a role, on the start page. */
-export async function openPageAs(role: MemberRole, options: PageOptions = {}): Promise<OpenPage> {
+/** A page signed in with the demo account of a role, whose preferences are those of a new member. */
+export async function openPageAs(
+  role: MemberRole,
+  { path = "/", ...options }: SignedInOptions = {},
+): Promise<OpenPage> {
   const opened = await openPage(options);
+  const { request } = opened.page.context();
   const email = demoAccounts.find((account) => account.role === role)?.email;
-  const data = { email, password: demoPassword };
-  const answer = await opened.page.context().request.post("/api/session", { data });
+  const answer = await request.post("/api/session", { data: { email, password: demoPassword } });
   expect(answer.status()).toBe(200);
-  await opened.page.goto("/");
+  expect((await request.put("/api/me/preferences", { data: {} })).status()).toBe(200);
+  await opened.page.goto(path);
   return opened;
 }

@@ -1,0 +1,165 @@
+import type { Locator, Page } from "playwright-core";
+import { shownNumber } from "./shownNumber";
+
+export interface ShownLimit {
+  /** "low pH iron dissolves" */
+  what: string;
+  /** along the axis of its side, in pH or on the scale shown */
+  distance: number;
+  reaction: string;
+}
+
+export interface Answers {
+  pH: number;
+  Eh: number;
+  /** with its unit */
+  EhText: string;
+  limits: ShownLimit[];
+}
+
+export interface DrawnTrace {
+  uid: string;
+  name: string;
+  fillcolor: string;
+  hatched: boolean;
+  x: (number | null)[];
+  y: (number | null)[];
+}
+
+/** Plotly hangs the figure and its axes on the element it draws in. */
+interface PlotlyElement extends HTMLElement {
+  data: { uid: string; name: string; fillcolor?: string; fillpattern?: { shape?: string }; x: []; y: [] }[];
+  layout: { annotations: { text: string }[] };
+  _fullLayout: Record<"xaxis" | "yaxis", { _offset: number; d2p: (value: number) => number }>;
+}
+
+/** A plan on the table: left asks, middle shows, right answers. */
+export class WorkspaceScreen {
+  constructor(readonly page: Page) {}
+
+  private readonly plot = () => this.page.locator(".js-plotly-plot");
+  readonly readOut = () => this.page.getByTestId("read-out");
+  readonly header = () => this.page.locator("main").getByRole("heading", { level: 1 }).locator("..");
+  readonly cautions = () => this.page.getByRole("region", { name: "Cautions" });
+  readonly asks = (name: string) => this.page.getByRole("region", { name, exact: true });
+  readonly number = (label: string) => this.page.getByRole("spinbutton", { name: label, exact: true });
+  readonly button = (name: string) => this.page.getByRole("button", { name, exact: true });
+
+  async drawn(): Promise<void> {
+    await this.page.locator("[data-testid=window-map][data-drawn] .scatterlayer .trace").first().waitFor();
+  }
+
+  /** What the right side says of the window in hand. */
+  async answers(): Promise<Answers> {
+    const [pH = "", EhText = ""] = await this.page.getByTestId("set-point").locator("span").allInnerTexts();
+    const items = this.page.getByRole("region", { name: /^What shuts window/ }).locator("ul > li");
+    const texts = await items.evaluateAll((all) =>
+      all.map((li) => {
+        const [head, why] = li.children;
+        return [head?.children[0], head?.children[1], why].map((e) => (e as HTMLElement | undefined)?.innerText ?? "");
+      }),
+    );
+    const limits = texts.map(([what = "", distance = "", reaction = ""]) => ({
+      what: what.replace(/\s+/g, " "),
+      distance: shownNumber(distance),
+      reaction: reaction.replace(/\s+/g, " "),
+    }));
+    return { pH: shownNumber(pH), Eh: shownNumber(EhText), EhText, limits };
+  }
+
+  traces(): Promise<DrawnTrace[]> {
+    return this.plot().evaluate((element) =>
+      (element as PlotlyElement).data.map(({ uid, name, fillcolor = "", fillpattern, x, y }) => ({
+        uid,
+        name,
+        fillcolor,
+        hatched: Boolean(fillpattern?.shape),
+        x: [...x],
+        y: [...y],
+      })),
+    );
+  }
+
+  async trace(uid: string): Promise<DrawnTrace | undefined> {
+    return (await this.traces()).find((t) => t.uid === uid);
+  }
+
+  /** Which metals' ground is hatched. */
+  async shutGround(): Promise<string[]> {
+    return (await this.traces()).filter((t) => t.hatched && t.uid.startsWith("shut-")).map((t) => t.uid);
+  }
+
+  /** "Fe Fe(OH)3(s) ferrihydrite" for each metal of the read-out, typesetting taken off. */
+  speciesRead(): Promise<string[]> {
+    const metals = this.readOut().locator(":scope > span:last-child > span");
+    return metals.evaluateAll((all) =>
+      all.map((metal) => {
+        const words = [...metal.children].filter((e) => e.tagName !== "svg").map((e) => e.textContent.trim());
+        return words.join(" ");
+      }),
+    );
+  }
+
+  axisWords(): Promise<string[]> {
+    return this.plot().evaluate((element) => (element as PlotlyElement).layout.annotations.map((a) => a.text));
+  }
+
+  /** Moves the mouse to a point of the map; Eh on the scale shown. */
+  async pointAt(pH: number, Eh: number): Promise<void> {
+    const [x, y] = await this.plot().evaluate(
+      (element, [pH, Eh]) => {
+        const box = element.getBoundingClientRect();
+        const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
+        return [box.left + xaxis._offset + xaxis.d2p(pH), box.top + yaxis._offset + yaxis.d2p(Eh)] as const;
+      },
+      [pH, Eh] as const,
+    );
+    await this.page.mouse.move(x, y);
+  }
+
+  /** Drags a slider's thumb by some pixels; what `whileHeld` reads, it reads before the hand lets go. */
+  async drag<Seen>(label: string, dx: number, whileHeld: () => Promise<Seen>): Promise<Seen> {
+    const thumb = this.page.getByRole("slider", { name: `${label}, slider`, exact: true });
+    await thumb.scrollIntoViewIfNeeded();
+    const box = await thumb.boundingBox();
+    if (!box) throw new Error(`The slider of ${label} is not on the screen.`);
+    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+    await this.page.mouse.move(x, y);
+    await this.page.mouse.down();
+    await this.page.mouse.move(x + dx, y, { steps: 4 });
+    const seen = await whileHeld();
+    await this.page.mouse.up();
+    return seen;
+  }
+
+  /** Opens a metal's line, where role, requirement and amount are set. */
+  async openMetal(element: string): Promise<Locator> {
+    await this.asks("Metals")
+      .getByRole("button", { name: new RegExp(`^${element}\\b`) })
+      .click();
+    return this.page.getByRole("group", { name: `Metal ${element}` });
+  }
+
+  async chooseBasis(basis: "feed" | "fresh" | "aged"): Promise<void> {
+    await this.page.getByRole("radio", { name: basis, exact: true }).click();
+  }
+
+  async type(label: string, text: string): Promise<void> {
+    await this.number(label).fill(text);
+    await this.number(label).press("Enter");
+  }
+
+  /** A command behind the word More. */
+  async command(name: string): Promise<void> {
+    await this.button("More commands").click();
+    await this.page.getByRole("menuitem", { name }).click();
+  }
+
+  async saveRevision(note: string): Promise<void> {
+    await this.button("Save revision").click();
+    const dialog = this.page.getByRole("dialog");
+    await dialog.getByLabel("Note").fill(note);
+    await dialog.getByRole("button", { name: "Save revision" }).click();
+    await dialog.waitFor({ state: "detached" });
+  }
+}

@@ -1,0 +1,43 @@
+import { expect, test } from "vitest";
+import { openPageAs } from "../support/browser";
+import { PlansScreen } from "./pages/plans";
+import { WorkspaceScreen } from "./pages/workspace";
+
+for (const role of ["technician", "manager"] as const) {
+  test(`a ${role} opens a plan and tries what they like, is told that it cannot be saved, and is refused by the server`, async () => {
+    const { page } = await openPageAs(role, { path: "/plans", expected: [403] });
+    const plans = new PlansScreen(page);
+    await plans.row("Neutral leach, second tank").waitFor();
+    expect(await plans.writeControls()).toEqual([]);
+    await plans.open("Neutral leach, second tank");
+    const plan = new WorkspaceScreen(page);
+    await plan.drawn();
+
+    const before = await plan.answers();
+    await plan.drag("Temperature of the liquor", 50, () => expect.poll(() => plan.answers()).not.toEqual(before));
+    await plan.header().getByText("Tried here only: your role looks and tries, a metallurgist saves").waitFor();
+    expect(await plan.button("Save revision").count()).toBe(0);
+    await page.keyboard.press("Control+s");
+    expect(await page.getByRole("dialog").count()).toBe(0);
+    await plan.button("More commands").click();
+    const commands = await page.getByRole("menuitem").allInnerTexts();
+    expect(commands.length).toBeGreaterThan(3);
+    expect(commands.filter((c) => /name|duplicate|archive/i.test(c))).toEqual([]);
+    await page.keyboard.press("Escape");
+
+    const answers = await page.evaluate(async () => {
+      const at = "/api/plans/demo-neutral-leach";
+      const plan = (await (await fetch(at)).json()) as { version: number; latest: { inputs: object } };
+      const send = async (method: string, path: string, body: object) => {
+        const headers = { "content-type": "application/json", "if-match": `"${plan.version}"` };
+        return (await fetch(path, { method, headers, body: JSON.stringify(body) })).status;
+      };
+      return [
+        await send("POST", `${at}/revisions`, { note: "", inputs: plan.latest.inputs }),
+        await send("PATCH", at, { name: "Renamed" }),
+        await send("POST", `${at}/duplicate`, { name: "Copy", projectId: "demo-calcine" }),
+      ];
+    });
+    expect(answers).toEqual([403, 403, 403]);
+  });
+}
