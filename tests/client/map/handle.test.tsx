@@ -6,7 +6,7 @@ import { sheetBoxes } from "../../../src/map/boxes";
 import { SetPointHandle } from "../../../src/map/handle";
 
 const sheet = sheetBoxes(800, 600, { metals: 2, reagents: 0, crosscuts: true, reach: false });
-const visible = { pH: [0, 10], Eh: [0, 1] } as { pH: [number, number]; Eh: [number, number] };
+const visible: { pH: [number, number]; Eh: [number, number] } = { pH: [0, 10], Eh: [0, 1] };
 function stage(at: Point = [5, 0.5]) {
   const onMove = vi.fn<(at: Point) => void>();
   const onSettle = vi.fn();
