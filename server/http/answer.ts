@@ -2,6 +2,8 @@
 export interface Answer {
   status: number;
   body?: unknown;
+  /** the body as JSON text, where it was written already */
+  json?: string;
   /** text sent piece by piece, in place of a body */
   stream?: Iterable<string>;
   headers: Record<string, string>;
@@ -13,6 +15,7 @@ export const created = (body: unknown, headers: Record<string, string> = {}): An
   body,
   headers,
 });
+export const okJson = (json: string): Answer => ({ status: 200, json, headers: {} });
 export const streamed = (stream: Iterable<string>, headers: Record<string, string>): Answer => ({
   status: 200,
   stream,

@@ -7,7 +7,7 @@ import { campaignPair } from "../../../shared/trials/pair";
 import { campaignSummary, type SummarisedTrial } from "../../../shared/trials/summary";
 import type { Db } from "../../db/open";
 import { storedPlan } from "../plans/rows";
-import { pointsOf } from "../trials/map";
+import { pointsOf } from "../trials/points";
 import { campaignOf } from "./rows";
 import type { RevisionSolver, SolvedRevision } from "./solved";
 

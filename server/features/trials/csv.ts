@@ -86,9 +86,7 @@ export function* trialsCsv(
   workings: Workings,
   { lines, ...filter }: z.output<typeof trialsCsvQuery>,
 ): Generator<string> {
-  const ids = trialIds(db, filter)
-    .all()
-    .map(({ id }) => id);
+  const ids = trialIds(db, filter);
   const columns = trialColumns(lines === "trials" ? analytesOf(db, ids) : noAnalytes);
   const [header, linesOf] = {
     trials: [

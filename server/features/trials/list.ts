@@ -38,8 +38,8 @@ function inCampaigns(campaign: SQL, { campaignId, projectId }: TrialFilter): SQL
 
 const told = { true: sql`is not null`, false: sql`is null` };
 
-/** @param walk  the rows are wanted in an order that an index has, and most rows fit: the plus signs keep the database from
- *    gathering all that fit and sorting them, so that it stops at the end of the page */
+/** @param walk  the page is walked to along the index of the sorted column: the plus signs keep the database from gathering all
+ *    that fit and sorting them */
 function filterOf(query: TrialFilter, walk = false): SQL | undefined {
   const [campaign, deletedAt] = walk
     ? [sql`+${trials.campaignId}`, sql`+${trials.deletedAt}`]
@@ -55,24 +55,38 @@ function filterOf(query: TrialFilter, walk = false): SQL | undefined {
   );
 }
 
-const manyFit = ({ campaignId, deleted }: TrialFilter) => campaignId === undefined && deleted !== "true";
+const thenById = (query: TrialFilter) => (query.order === "asc" ? asc(trials.id) : desc(trials.id));
 
 /** Ids of the trials that a query asks for, in its order: the rest of a row is fetched for those that are shown alone. */
-export const trialIds = (db: Db, query: TrialFilter) =>
+const idsOf = (db: Db, query: TrialFilter, walk: boolean) =>
   db
     .select({ id: trials.id })
     .from(trials)
-    .where(filterOf(query, manyFit(query)))
-    .orderBy(ordered(sorts[query.sort], query.order), query.order === "asc" ? asc(trials.id) : desc(trials.id));
+    .where(filterOf(query, walk))
+    .orderBy(ordered(sorts[query.sort], query.order), thenById(query));
+
+const plain = (rows: { id: string }[]) => rows.map(({ id }) => id);
+
+/** All of them. */
+export const trialIds = (db: Db, query: TrialFilter): string[] => plain(idsOf(db, query, false).all());
+
+/** Are the indexes of the sorted columns enough to say what fits? Then a page is walked to and the rest counted; else every row
+ *  must be looked at once, and only once. */
+const indexed = ({ campaignId, feedId, kind, stage, status, search, deleted }: TrialFilter) =>
+  [campaignId, feedId, kind, stage, status, search || undefined].every((asked) => asked === undefined) &&
+  deleted !== "true";
+
+function pageOf(db: Db, query: z.output<typeof trialsQuery>): { ids: string[]; total: number } {
+  const { limit, offset } = query;
+  if (!indexed(query)) {
+    const all = trialIds(db, query);
+    return { ids: all.slice(offset, offset + limit), total: all.length };
+  }
+  const total = db.select({ n: count() }).from(trials).where(filterOf(query)).get()?.n ?? 0;
+  return { ids: plain(idsOf(db, query, true).limit(limit).offset(offset).all()), total };
+}
 
 export function listTrials(db: Db, query: z.output<typeof trialsQuery>): { rows: TrialListRow[]; total: number } {
-  const ids = trialIds(db, query).limit(query.limit).offset(query.offset).all();
-  const total = db.select({ n: count() }).from(trials).where(filterOf(query)).get()?.n ?? 0;
-  return {
-    rows: listRowsOf(
-      db,
-      ids.map(({ id }) => id),
-    ),
-    total,
-  };
+  const { ids, total } = pageOf(db, query);
+  return { rows: listRowsOf(db, ids), total };
 }

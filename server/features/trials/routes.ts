@@ -3,7 +3,7 @@ import { reasonRequired } from "../../../shared/schemas/history";
 import { trialCreate, trialsQuery, trialUpdate } from "../../../shared/schemas/trial";
 import { mapTrialsQuery, trialsCsvQuery } from "../../../shared/schemas/trialRows";
 import type { Deps } from "../../deps";
-import { ok, streamed } from "../../http/answer";
+import { ok, okJson, streamed } from "../../http/answer";
 import { page } from "../../http/pages";
 import { createdRow, okRow, recordWriteRoutes, writerOf } from "../../http/recordRoutes";
 import { route } from "../../http/route";
@@ -52,7 +52,7 @@ export function trialRoutes({ db, clock, chemistry }: Deps) {
       roles: "signed-in",
       params: byId,
       query: mapTrialsQuery,
-      handle: ({ params, query }) => ok(mapTrials(db, params.id, query)),
+      handle: ({ params, query }) => okJson(mapTrials(db, params.id, query)),
     }),
     route({
       method: "POST",
