@@ -5,7 +5,6 @@ import type { ChemicalData, Species } from "../../shared/species/chemicalData";
 
 const inert = new Set(["H", "O"]);
 const lixiviantElements = ["S", "N", "C", "Cl", "F", "P"];
-const partnerElements = ["K", "Na", "Li", "Mg", "Ca", "Si"];
 
 export const metalsOfLibrary = (data: ChemicalData): string[] =>
   [...data.components]
@@ -74,5 +73,3 @@ export function speciesOfComponent(component: string, p: Problem, data: Chemical
       !isLeftOut(s.id, p, data),
   );
 }
-
-export { partnerElements };
