@@ -1,9 +1,12 @@
 import { useVirtualizer } from "@tanstack/react-virtual";
-import { useEffect } from "react";
+import { useEffect, useState } from "react";
 import type { TableBodyProps } from "./tableBody";
 
 /** Only the rows in sight are in the page; two empty rows keep the place of the others. */
 export function VirtualBody({ count, row, rowHeight, headHeight, box, startAt, reveal }: TableBodyProps) {
+  // The box is attached after its rows are: only the second drawing finds it.
+  const [, attached] = useState(false);
+  useEffect(() => attached(true), []);
   // eslint-disable-next-line react-hooks/incompatible-library
   const virtualizer = useVirtualizer({
     count,

@@ -19,16 +19,19 @@ const config = {
 export interface PlotProps {
   figure: Figure;
   onRelayout: (change: Record<string, unknown>) => void;
+  /** the axes move under the hand, before they settle */
+  onRelayouting?: (change: Record<string, unknown>) => void;
   onDrawn: () => void;
 }
 
-export default function Plot({ figure, onRelayout, onDrawn }: PlotProps) {
+export default function Plot({ figure, onRelayout, onRelayouting, onDrawn }: PlotProps) {
   return (
     <Plotted
       data={figure.data}
       layout={figure.layout}
       config={config}
       onRelayout={onRelayout as (event: unknown) => void}
+      onRelayouting={onRelayouting as ((event: unknown) => void) | undefined}
       onInitialized={onDrawn}
       onUpdate={onDrawn}
       style={{ width: figure.layout.width, height: figure.layout.height }}

@@ -1,8 +1,8 @@
-import { useCallback, useMemo, useRef, useState } from "react";
+import { useCallback, useLayoutEffect, useMemo, useRef, useState } from "react";
 import { Button } from "../components/Button";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
-import { sheetBoxes } from "./boxes";
+import { mapPixels, sheetBoxes } from "./boxes";
 import { type ContentWishes, mapContent } from "./content";
 import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
@@ -10,9 +10,10 @@ import { mapFigure } from "./figure";
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import Plot from "./Plot";
 import { haloStyle } from "./texts";
+import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
-import { afterRelayout } from "./zoom";
+import { afterRelayout, MovingView } from "./zoom";
 
 export interface WindowMapProps {
   asked: ContentWishes;
@@ -25,11 +26,13 @@ export interface WindowMapProps {
   label: string;
   /** the set point, where it can be moved by hand */
   handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
+  /** trials painted over the map */
+  trials?: ShownTrials | null;
 }
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
  *  It brings Plotly along: import it late. */
-export default function WindowMap({ asked, view, cursor, onPick, label, handle }: WindowMapProps) {
+export default function WindowMap({ asked, view, cursor, onPick, label, handle, trials }: WindowMapProps) {
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
@@ -68,6 +71,22 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle }
       }),
     [zoomOf, frame, scale],
   );
+  const [live] = useState(() => new MovingView());
+  const onRelayouting = useCallback(
+    (change: Record<string, unknown>) => live.set(afterRelayout(change, visible, frame, scale) ?? frame),
+    [live, visible, frame, scale],
+  );
+  // The axes have settled: from here on what is in sight is told by the state.
+  useLayoutEffect(() => live.set(null), [live, visible]);
+  const pick = useCallback(
+    (at: Point | null) => {
+      const pixels = sheet && at && mapPixels(sheet, visible);
+      const mark = pixels && trials && nearestMark(trials.marks, pixels.toPixel, ...pixels.toPixel(at[0], at[1]));
+      if (mark) trials.onOpen(mark.id);
+      else onPick(at);
+    },
+    [sheet, visible, trials, onPick],
+  );
   const reset = useCallback(() => {
     setZoom(null);
     setResets((n) => n + 1);
@@ -89,7 +108,17 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle }
       <style>{haloStyle("var(--color-sheet)", "var(--color-tint)")}</style>
       {figure && sheet ? (
         <>
-          <Plot figure={figure} onRelayout={onRelayout} onDrawn={onDrawn} />
+          <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} onDrawn={onDrawn} />
+          {trials && view.layers.trials && (
+            <TrialsLayer
+              {...trials}
+              sheet={sheet}
+              visible={visible}
+              live={live}
+              colours={view.colours}
+              holder={holder}
+            />
+          )}
           {visible !== frame && (
             <Button
               kind="quiet"
@@ -106,7 +135,7 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle }
             through={content.through}
             store={cursor}
             holder={holder}
-            onPick={onPick}
+            onPick={pick}
             onReset={reset}
           />
           {handle && view.layers.setPoint && <SetPointHandle sheet={sheet} visible={visible} {...handle} />}

@@ -6,6 +6,7 @@ import type { Crosscut } from "./traces/crosscuts";
 import { boundariesByMetal } from "./traces/fields";
 import { movedLimits } from "./traces/lines";
 import type { ShownRange } from "./traces/practice";
+import type { ColourScale, TrialMark } from "./trialMarks";
 import type { MapMetal } from "./view";
 
 /** Everything a map shows, worked out before the view comes in, so that a theme or a zoom redoes none of it. */
@@ -26,6 +27,7 @@ export interface MapContent {
   /** gases whose region is drawn */
   gases: readonly HazardRegion[];
   practice: readonly ShownRange[];
+  trials: { marks: readonly TrialMark[]; scale: ColourScale } | null;
 }
 
 export interface ContentWishes {
@@ -41,10 +43,12 @@ export interface ContentWishes {
   robust?: readonly Outline[];
   gases?: readonly HazardRegion[];
   practice?: readonly ShownRange[];
+  trials?: MapContent["trials"];
 }
 
 export function mapContent(wishes: ContentWishes): MapContent {
   const { metals, solution, other, through, reaches, cyanide, robust = [], gases = [], practice = [] } = wishes;
+  const { trials = null } = wishes;
   return {
     solution,
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
@@ -64,5 +68,6 @@ export function mapContent(wishes: ContentWishes): MapContent {
     robust,
     gases,
     practice,
+    trials,
   };
 }

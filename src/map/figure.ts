@@ -11,6 +11,7 @@ import { practiceTraces } from "./traces/practice";
 import { reachHeads, reachTraces } from "./traces/reachBars";
 import { robustTraces } from "./traces/robust";
 import { setPointTraces } from "./traces/setPoint";
+import { trialTraces } from "./traces/trials";
 import { type MapView, MONO } from "./view";
 
 const stripSizes = ({ map }: Sheet, { visible }: MapView): StripSizes => ({
@@ -38,6 +39,9 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     ...(layers.practice ? practiceTraces(content.practice, view) : []),
     ...(layers.setPoint ? setPointTraces(setPoint, layers.crosscuts ? through : null, view) : []),
     ...nameTraces(content, sheet, view),
+    ...(view.traceTrials && layers.trials && content.trials
+      ? trialTraces(content.trials.marks, content.trials.scale, view)
+      : []),
     ...(sheet.alongPH && through
       ? [
           ...crosscutTraces(content.crosscuts, through, view),

@@ -26,7 +26,7 @@ export function captionedFigure(
     crosscuts: crosscuts && content.through !== null,
     reach,
   });
-  const { data, layout } = mapFigure(content, sheet, { ...view, visible: view.frame });
+  const { data, layout } = mapFigure(content, sheet, { ...view, visible: view.frame, traceTrials: true });
   const [head, foot] = [30, LINE * caption.length + 18];
   const words = (text: string, y: number, size: number, color: string) => ({
     text,

@@ -16,14 +16,20 @@ export interface PlotTrace {
   name: string;
   x: Coordinate[];
   y: Coordinate[];
-  mode: "lines" | "lines+markers" | "text";
+  mode: "lines" | "lines+markers" | "markers" | "text";
   xaxis?: "x" | "x2" | "x3";
   yaxis?: "y" | "y2";
   line?: { color: string; width: number; dash?: string; shape?: "linear"; simplify?: boolean };
   fill?: "toself" | "none";
   fillcolor?: string;
   fillpattern?: PatternFill;
-  marker?: { color: string; size: number[]; symbol: string; opacity: number; line: { width: number } };
+  marker?: {
+    color: string | string[];
+    size: number[];
+    symbol: string | string[];
+    opacity: number;
+    line: { width: number; color?: string };
+  };
   text?: string[];
   textposition?: "middle center";
   textfont?: { color: string[]; size: number[] };

@@ -25,6 +25,7 @@ export const layerNames = [
   "otherBasis",
   "hazard",
   "practice",
+  "trials",
 ] as const;
 export type LayerName = (typeof layerNames)[number];
 export type Layers = Readonly<Record<LayerName, boolean>>;
@@ -40,6 +41,7 @@ export const layerWords: Readonly<Record<LayerName, string>> = {
   otherBasis: "Other solids basis",
   hazard: "Hazard regions",
   practice: "Published practice",
+  trials: "Trials",
 };
 
 export const defaultLayers: Layers = {
@@ -53,6 +55,7 @@ export const defaultLayers: Layers = {
   otherBasis: true,
   hazard: true,
   practice: false,
+  trials: true,
 };
 
 /** Everything that decides how a solution is drawn, none of it what is drawn. */
@@ -71,6 +74,8 @@ export interface MapView {
   layers: Layers;
   /** index into solution.windows */
   window: number;
+  /** trials as traces of the figure, for a picture; on the screen they are painted over it */
+  traceTrials?: boolean;
 }
 
 export const MONO = "JetBrains Mono, Gangueway Signs, ui-monospace, monospace";

@@ -29,3 +29,19 @@ export function afterRelayout(
   const next: Frame = { pH: x ?? from.pH, Eh: y ? [scale.fromShown(y[0]), scale.fromShown(y[1])] : from.Eh };
   return near(next.pH, frame.pH) && near(next.Eh, frame.Eh) ? null : next;
 }
+
+/** What is in sight while the axes move under the hand, outside React's state; null once they rest. */
+export class MovingView {
+  private frame: Frame | null = null;
+  private readonly listeners = new Set<() => void>();
+  readonly get = (): Frame | null => this.frame;
+  readonly set = (frame: Frame | null): void => {
+    if (frame === this.frame) return;
+    this.frame = frame;
+    this.listeners.forEach((tell) => tell());
+  };
+  readonly subscribe = (tell: () => void): (() => void) => {
+    this.listeners.add(tell);
+    return () => void this.listeners.delete(tell);
+  };
+}

@@ -2,7 +2,7 @@ import type { CampaignSummaryAnswer } from "../../../shared/schemas/campaignSumm
 import type { StageSummary } from "../../../shared/trials/summary";
 import { Note, Remark, SectionHead } from "../../components/text";
 import { counted } from "../../lib/format";
-import { countWords, tallySentence } from "./words";
+import { countWords, tallySentence } from "../../lib/tallyWords";
 
 /** Stage by stage, in words: what the trials gave inside and outside, and what is counted apart. */
 export function CampaignVerdict({ summary }: { summary: CampaignSummaryAnswer }) {

@@ -4,7 +4,7 @@ import type { StageSummary } from "../../../shared/trials/summary";
 import { PlainTable, type PlainColumn } from "../../components/PlainTable";
 import { fixed } from "../../lib/format";
 import { difference } from "./compareModel";
-import { rangeOf } from "./words";
+import { rangeOf } from "../../lib/tallyWords";
 
 interface Line {
   key: string;

@@ -4,7 +4,7 @@ import type { Spread } from "../../../shared/trials/spread";
 import type { Column } from "../../components/tableModel";
 import { fixed } from "../../lib/format";
 import type { StageRow } from "./stageRows";
-import { rangeOf } from "./words";
+import { rangeOf } from "../../lib/tallyWords";
 
 const spread = (
   id: string,

@@ -8,6 +8,7 @@ import type { PotentialScale } from "../../lib/potential";
 import { solidsBasisWord } from "../../lib/planWords";
 import type { CursorStore } from "../../map/cursorStore";
 import { ReadOut } from "../../map/ReadOut";
+import type { ShownTrials } from "../../map/TrialsLayer";
 import { windowName } from "../../map/view";
 import type { MapModel } from "./model/useMapModel";
 
@@ -28,11 +29,12 @@ export interface MapPanelProps {
   /** moves the set point by hand; absent where the plan is only looked at */
   onMoveSetPoint?: ((at: Point) => void) | undefined;
   onSettle: () => void;
+  trials: ShownTrials | null;
 }
 
 /** The middle: what stands under the cursor, and the map. */
 export function MapPanel(props: MapPanelProps) {
-  const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle } = props;
+  const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle, trials } = props;
   const { asked, view, metals, through } = model;
   const { solution } = asked;
   const { plain, focus, window: chosen } = view;
@@ -78,6 +80,7 @@ export function MapPanel(props: MapPanelProps) {
             view={view}
             cursor={cursor}
             onPick={onPin}
+            trials={trials}
             handle={
               setPoint && onMoveSetPoint
                 ? {

@@ -30,6 +30,8 @@ import { usePrinting } from "./model/usePrinting";
 import { useSolved } from "./model/useSolved";
 import { dropDraft, keepDraft } from "./model/draftShelf";
 import { Sheet } from "./Sheet";
+import { AnswersOrTrials } from "../trials/planTrials/AnswersOrTrials";
+import { usePlanTrials } from "../trials/planTrials/usePlanTrials";
 
 export interface WorkspaceProps {
   plan: PlanRow;
@@ -112,6 +114,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     [inputs, draft.edit, draft.settle, data, solution, failure, scale, frozen, printing, focus],
   );
 
+  const trials = usePlanTrials(plan.id, inputs, solution, data, layers.trials);
+  const shownTrials = trials.shown;
   const map = useMapModel({
     inputs,
     problem,
@@ -147,14 +151,22 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
           : `revision ${plan.latest.number}`;
       import("./model/exportPlan")
         .then(({ exportPlan }) =>
-          exportPlan(kind, { plan, state, inputs, problem, solution, model: map, dataVersion: data.version }),
+          exportPlan(kind, {
+            plan,
+            state,
+            inputs,
+            problem,
+            solution,
+            model: { ...map, asked: { ...map.asked, trials: shownTrials } },
+            dataVersion: data.version,
+          }),
         )
         .then(
           () => setExporting(null),
           (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
         );
     },
-    [solution, map, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version],
+    [solution, map, shownTrials, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version],
   );
 
   function restore(revision: RevisionRow) {
@@ -205,11 +217,12 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
               cursor={cursor}
               onMoveSetPoint={mayMove ? moveSetPoint : undefined}
               onSettle={draft.settle}
+              trials={shownTrials}
             />
           ) : null
         }
         answers={
-          <>
+          <AnswersOrTrials trials={layers.trials ? trials : null} scale={scale}>
             {failure && (
               <Remark className="mb-3 border-signal!">
                 <p role="alert">
@@ -243,7 +256,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
                 onLetGo={mayMove ? () => edit(holdSetPoint(null)) : undefined}
               />
             )}
-          </>
+          </AnswersOrTrials>
         }
       />
       <Dialogs

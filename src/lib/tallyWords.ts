@@ -1,6 +1,6 @@
-import type { Spread } from "../../../shared/trials/spread";
-import type { Count, Tally } from "../../../shared/trials/tally";
-import { counted, fixed, percent } from "../../lib/format";
+import type { Spread } from "../../shared/trials/spread";
+import type { Count, Tally } from "../../shared/trials/tally";
+import { counted, fixed, percent } from "./format";
 
 /** "75.0–90.4", for under a mean; "" where there is one value or none. */
 export const rangeOf = (spread: Spread | null, digits: number): string =>

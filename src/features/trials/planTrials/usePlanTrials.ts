@@ -1,0 +1,97 @@
+import { useCallback, useDeferredValue, useMemo, useState } from "react";
+import { useNavigate } from "react-router-dom";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { MapTrials } from "../../../../shared/schemas/trialRows";
+import type { Solution } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { placedTrials, type PlacedTrial } from "../../../lib/judgedTrials";
+import { useMapTrials } from "../../../lib/trials";
+import { colourScale, type ColourScale, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
+import { TrialStore } from "../../../map/trialStore";
+import type { ShownTrials } from "../../../map/TrialsLayer";
+import { marksOf, stageMarkers, type Colouring } from "./planTrialsModel";
+
+export interface PlanTrials {
+  /** undefined while they are read, or while the layer is off */
+  answer: MapTrials | undefined;
+  error: unknown;
+  retry: () => void;
+  scope: "plan" | "project";
+  setScope: (scope: "plan" | "project") => void;
+  hidden: ReadonlySet<string>;
+  toggle: (campaignId: string) => void;
+  colouring: Colouring;
+  setColouring: (colouring: Colouring) => void;
+  /** judged against what the map shows, hidden campaigns left out */
+  trials: readonly PlacedTrial[];
+  marks: readonly TrialMark[];
+  markers: ReadonlyMap<string, MarkSymbol>;
+  scale: ColourScale;
+  store: TrialStore;
+  /** for the map */
+  shown: ShownTrials | null;
+  open: (id: string) => void;
+}
+
+const NONE: readonly PlacedTrial[] = [];
+
+/** The trials of a plan's map: read once, judged against the solution in hand, coloured and filtered.
+ *  @param enabled  the layer is on     @param solution  of what the map shows, draft or revision */
+export function usePlanTrials(
+  planId: string,
+  inputs: PlanInputs,
+  solution: Solution | null,
+  data: ChemicalData,
+  enabled: boolean,
+): PlanTrials {
+  const navigate = useNavigate();
+  const [scope, setScope] = useState<"plan" | "project">("plan");
+  const [hidden, setHidden] = useState<ReadonlySet<string>>(() => new Set());
+  const [colouring, setColouring] = useState<Colouring>("recoveryPct");
+  const [store] = useState(() => new TrialStore());
+  const query = useMapTrials(planId, scope, enabled);
+  const answer = enabled ? query.data : undefined;
+
+  // A drag of the plan moves at once; two thousand verdicts follow when there is time.
+  const ground = useDeferredValue(useMemo(() => ({ inputs, solution, data }), [inputs, solution, data]));
+  const judged = useMemo(() => (answer ? placedTrials(answer, () => ground) : NONE), [answer, ground]);
+  const trials = useMemo(
+    () => (hidden.size === 0 ? judged : judged.filter(({ campaignId }) => !hidden.has(campaignId))),
+    [judged, hidden],
+  );
+  const markers = useMemo(() => stageMarkers(answer?.campaigns ?? []), [answer]);
+  const marks = useMemo(() => marksOf(trials, markers, colouring), [trials, markers, colouring]);
+  const scale = useMemo(() => colourScale(marks.map(({ value }) => value)), [marks]);
+  const open = useCallback((id: string) => void navigate(`/trials/${id}`), [navigate]);
+  const shown = useMemo(
+    () => (marks.length === 0 ? null : { marks, scale, store, onOpen: open }),
+    [marks, scale, store, open],
+  );
+  const toggle = useCallback(
+    (id: string) =>
+      setHidden((old) => {
+        const next = new Set(old);
+        if (!next.delete(id)) next.add(id);
+        return next;
+      }),
+    [],
+  );
+  return {
+    answer,
+    error: query.error,
+    retry: () => void query.refetch(),
+    scope,
+    setScope,
+    hidden,
+    toggle,
+    colouring,
+    setColouring,
+    trials,
+    marks,
+    markers,
+    scale,
+    store,
+    shown,
+    open,
+  };
+}
