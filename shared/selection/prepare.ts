@@ -49,6 +49,15 @@ function shown(value: unknown): string {
   return text.length > 80 ? `${text.slice(0, 77)}...` : text;
 }
 
+/** A number beyond its bound, in words with the sign that states the bound exactly. */
+function boundOf(issue: z.core.$ZodIssue): string | null {
+  if (issue.code === "too_big" && issue.origin === "number")
+    return `must be ${issue.inclusive ? "at most" : "below"} ${String(issue.maximum)}`;
+  if (issue.code === "too_small" && issue.origin === "number")
+    return `must be ${issue.inclusive ? "at least" : "above"} ${String(issue.minimum)}`;
+  return null;
+}
+
 /** The first complaint of zod as a failure with path, bound and value. */
 export function failureOf(error: z.ZodError, input: unknown): Outcome<never> {
   const issue = error.issues[0]!;
@@ -56,7 +65,11 @@ export function failureOf(error: z.ZodError, input: unknown): Outcome<never> {
   const keys = [...issue.path, ...unknown];
   const outside = (issue.code === "too_small" || issue.code === "too_big") && issue.origin === "number";
   const got = shown(valueAt(input, keys));
-  return fail(outside ? "OUT_OF_RANGE" : "INVALID_INPUT", keys.map(String).join("."), `${issue.message}; got ${got}`);
+  return fail(
+    outside ? "OUT_OF_RANGE" : "INVALID_INPUT",
+    keys.map(String).join("."),
+    `${boundOf(issue) ?? issue.message}; got ${got}`,
+  );
 }
 
 /** Validates a problem and chooses the species that count.
