@@ -55,35 +55,44 @@ function filterOf(query: TrialFilter, walk = false): SQL | undefined {
   );
 }
 
-const thenById = (query: TrialFilter) => (query.order === "asc" ? asc(trials.id) : desc(trials.id));
+const orderOf = ({ sort, order }: TrialFilter): [SQL, SQL] => [
+  ordered(sorts[sort], order),
+  order === "asc" ? asc(trials.id) : desc(trials.id),
+];
 
-/** Ids of the trials that a query asks for, in its order: the rest of a row is fetched for those that are shown alone. */
-const idsOf = (db: Db, query: TrialFilter, walk: boolean) =>
+/** Ids of all trials that a query asks for, in its order. */
+export const trialIds = (db: Db, query: TrialFilter): string[] =>
   db
     .select({ id: trials.id })
     .from(trials)
-    .where(filterOf(query, walk))
-    .orderBy(ordered(sorts[query.sort], query.order), thenById(query));
-
-const plain = (rows: { id: string }[]) => rows.map(({ id }) => id);
-
-/** All of them. */
-export const trialIds = (db: Db, query: TrialFilter): string[] => plain(idsOf(db, query, false).all());
+    .where(filterOf(query))
+    .orderBy(...orderOf(query))
+    .all()
+    .map(({ id }) => id);
 
 /** Are the indexes of the sorted columns enough to say what fits? Then a page is walked to and the rest counted; else every row
- *  must be looked at once, and only once. */
+ *  must be looked at, and that once: counting goes along. */
 const indexed = ({ campaignId, feedId, kind, stage, status, search, deleted }: TrialFilter) =>
   [campaignId, feedId, kind, stage, status, search || undefined].every((asked) => asked === undefined) &&
   deleted !== "true";
 
+const countOf = (db: Db, query: TrialFilter): number =>
+  db.select({ n: count() }).from(trials).where(filterOf(query)).get()?.n ?? 0;
+
+/** Ids of one page: the rest of a row is fetched for those that are shown alone. */
 function pageOf(db: Db, query: z.output<typeof trialsQuery>): { ids: string[]; total: number } {
-  const { limit, offset } = query;
-  if (!indexed(query)) {
-    const all = trialIds(db, query);
-    return { ids: all.slice(offset, offset + limit), total: all.length };
-  }
-  const total = db.select({ n: count() }).from(trials).where(filterOf(query)).get()?.n ?? 0;
-  return { ids: plain(idsOf(db, query, true).limit(limit).offset(offset).all()), total };
+  const walk = indexed(query);
+  const found = db
+    .select({ id: trials.id, total: walk ? sql<null>`null` : sql<number>`count(*) over ()` })
+    .from(trials)
+    .where(filterOf(query, walk))
+    .orderBy(...orderOf(query))
+    .limit(query.limit)
+    .offset(query.offset)
+    .all();
+  // An empty first page says that nothing fits; one past the end says nothing.
+  const none = found.length === 0 && query.offset === 0;
+  return { ids: found.map(({ id }) => id), total: none ? 0 : (found[0]?.total ?? countOf(db, query)) };
 }
 
 export function listTrials(db: Db, query: z.output<typeof trialsQuery>): { rows: TrialListRow[]; total: number } {

@@ -4,7 +4,7 @@ import type { TrialStatus } from "../../../shared/schemas/trial";
 import type { Db } from "../../db/open";
 import { feeds } from "../feeds/schema";
 import { trials } from "./schema";
-import { figuresOf } from "./workedOut";
+import { numbersOf } from "./workedOut";
 
 /** A row as SQLite gives it: JSON columns as text, yes and no as 1 and 0. */
 type Stored = Omit<typeof trials.$inferSelect, "flags" | "compared" | "pHCooled"> & {
@@ -41,8 +41,8 @@ export function pointsJson(db: Db, campaignIds: readonly string[]): string {
     const { id, code, campaignId, stage, status, feedId, startedAt, electrode, compared, flags } = stored;
     const feedName = names.get(feedId) ?? "";
     const light = JSON.stringify({ id, code, campaignId, stage, status, feedId, feedName, startedAt, electrode });
-    const { flags: _, ...figures } = figuresOf({ ...stored, pHCooled: stored.pHCooled === 1, flags: [] });
-    return `${light.slice(0, -1)},"compared":${compared},"figures":${JSON.stringify(figures).slice(0, -1)},"flags":${flags}}}`;
+    const figures = JSON.stringify(numbersOf(stored));
+    return `${light.slice(0, -1)},"compared":${compared},"figures":${figures.slice(0, -1)},"flags":${flags}}}`;
   });
   return `[${points.join(",")}]`;
 }

@@ -56,8 +56,11 @@ export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, { mass
   };
 }
 
-/** The figures as the API has them. */
-export function figuresOf({ recoveryLow, recoveryHigh, ...stored }: FigureColumns): TrialFigures {
+type NumberColumns = Omit<FigureColumns, "flags" | "pHCooled"> & { pHCooled: boolean | 0 | 1 };
+
+/** The figures as the API has them, but for the flags. */
+export function numbersOf(stored: NumberColumns): Omit<TrialFigures, "flags"> {
+  const { recoveryLow, recoveryHigh } = stored;
   return {
     recoveryPct: stored.recoveryPct,
     recoveryRangePct: recoveryLow === null || recoveryHigh === null ? null : [recoveryLow, recoveryHigh],
@@ -68,10 +71,11 @@ export function figuresOf({ recoveryLow, recoveryHigh, ...stored }: FigureColumn
     acidPerTonne: stored.acidPerTonne,
     reagentPerKg: stored.reagentPerKg,
     pH: stored.pH,
-    pHCooled: stored.pHCooled,
+    pHCooled: Boolean(stored.pHCooled),
     Eh: stored.Eh,
     EhUncertainty: stored.EhUncertainty,
     temperatureC: stored.temperatureC,
-    flags: stored.flags,
   };
 }
+
+export const figuresOf = (stored: FigureColumns): TrialFigures => ({ ...numbersOf(stored), flags: stored.flags });
