@@ -1,4 +1,4 @@
-import { statSync } from "node:fs";
+import { existsSync, statSync } from "node:fs";
 import { join } from "node:path";
 import { AxeBuilder } from "@axe-core/playwright";
 import { expect, test } from "vitest";
@@ -47,7 +47,12 @@ test("the first page fetches at most 250 kB of compressed JavaScript, and not th
     if (pathname.endsWith(".js")) scripts.add(pathname);
   });
   await page.goto("/plans", { waitUntil: "networkidle" });
-  const sizes = [...scripts].map((path) => statSync(join(projectRoot, "dist/client", `${path}.gz`)).size);
+  // a script too small to be worth packing is sent, and counted, as it is
+  const sizeOf = (path: string): number => {
+    const file = join(projectRoot, "dist/client", path);
+    return statSync(existsSync(`${file}.gz`) ? `${file}.gz` : file).size;
+  };
+  const sizes = [...scripts].map(sizeOf);
   const total = sizes.reduce((sum, size) => sum + size, 0);
   expect([...scripts].filter((path) => path.includes("plotly"))).toEqual([]);
   expect(total).toBeGreaterThan(50_000);
