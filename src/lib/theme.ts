@@ -64,11 +64,6 @@ export const printColours: ThemeColours = {
   signal: "#000000",
 };
 
-export const fonts = {
-  sans: '"Atkinson Hyperlegible Next", "Gangueway Signs", system-ui, sans-serif',
-  mono: '"JetBrains Mono", "Gangueway Signs", ui-monospace, monospace',
-} as const;
-
 const darkQuery = () => window.matchMedia("(prefers-color-scheme: dark)");
 
 export const resolveTheme = (theme: Theme): ResolvedTheme =>

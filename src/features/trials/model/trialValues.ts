@@ -45,10 +45,6 @@ export function nextReading(readings: readonly TrialReading[]): TrialReading {
   };
 }
 
-/** Nothing of it was read: such a row need not be kept. */
-export const isEmptyReading = ({ at, temperature, pH, orp, note }: TrialReading): boolean =>
-  [at, temperature, pH.value, pH.temperature, orp.value].every(isBlank) && note.trim() === "";
-
 export function nextSample(samples: readonly Sample[]): Sample {
   const last = samples.at(-1);
   return {
