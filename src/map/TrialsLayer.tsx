@@ -1,8 +1,8 @@
-import { useEffect, useLayoutEffect, useMemo, useRef, type RefObject } from "react";
+import { useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from "react";
 import type { Frame } from "../../shared/schemas/problem";
 import type { ThemeColours } from "../lib/theme";
 import { mapPixels, type Sheet } from "./boxes";
-import { paintTrials } from "./paintTrials";
+import { TrialPainter } from "./paintTrials";
 import type { ColourScale, TrialMark } from "./trialMarks";
 import { inBrush, type TrialStore, useTold } from "./trialStore";
 
@@ -51,6 +51,7 @@ export function nearestMark(
 /** Trials painted over the map on a canvas of their own: a drag of the plan redraws them in a few milliseconds, and they cost the
  *  figure below nothing. Shift and drag brushes; a ring marks the trial under the pointer, here or in the table. */
 export function TrialsLayer({ marks, scale, store, onOpen, sheet, visible, live, colours, holder }: TrialsLayerProps) {
+  const [painter] = useState(() => new TrialPainter());
   const canvas = useRef<HTMLCanvasElement>(null);
   const ring = useRef<HTMLDivElement>(null);
   const box = useRef<HTMLDivElement>(null);
@@ -67,45 +68,57 @@ export function TrialsLayer({ marks, scale, store, onOpen, sheet, visible, live,
     now.current = { marks, scale, sheet, visible, colours, brushed, brush, byId, onOpen };
   });
 
-  const draw = useRef<() => void>(() => undefined);
+  const drawn = useRef<readonly unknown[]>([]);
+  const draw = useRef({ all: () => {}, ring: () => {} });
   useLayoutEffect(() => {
-    draw.current = () => {
-      const { sheet: s, ...p } = now.current;
+    const pixelsNow = () => mapPixels(now.current.sheet, live.get() ?? now.current.visible);
+    const drawRing = () => {
+      const at = now.current.byId.get(store.hovered.get() ?? "");
+      const { toPixel, box: b } = pixelsNow();
+      const [x, y] = at ? toPixel(at.pH, at.Eh) : [-1, -1];
+      const inside = at && x >= b.x0 && x <= b.x1 && y >= b.y0 && y <= b.y1;
+      Object.assign(ring.current?.style ?? {}, {
+        visibility: inside ? "visible" : "hidden",
+        transform: `translate(${x}px, ${y}px)`,
+      });
+    };
+    const drawBox = () => {
+      const b = now.current.brush;
+      const { toPixel } = pixelsNow();
+      const [x0, y1] = b ? toPixel(b.pH[0], b.Eh[0]) : [0, 0];
+      const [x1, y0] = b ? toPixel(b.pH[1], b.Eh[1]) : [0, 0];
+      Object.assign(box.current?.style ?? {}, {
+        visibility: b ? "visible" : "hidden",
+        transform: `translate(${x0}px, ${y0}px)`,
+        width: `${x1 - x0}px`,
+        height: `${y1 - y0}px`,
+      });
+    };
+    const drawMarks = () => {
       const element = canvas.current;
       const context = element?.getContext("2d");
       if (!element || !context) return;
+      const { sheet: s, ...rest } = now.current;
       const ratio = window.devicePixelRatio || 1;
+      const { pH, Eh } = live.get() ?? rest.visible;
+      // Axes that come to rest tell the same frame twice.
+      const of = [rest.marks, rest.scale, rest.colours, rest.brushed, s, ratio, ...pH, ...Eh];
+      if (of.every((part, i) => part === drawn.current[i])) return;
+      drawn.current = of;
       const [w, h] = [Math.round(s.width * ratio), Math.round(s.height * ratio)];
       if (element.width !== w || element.height !== h) Object.assign(element, { width: w, height: h });
-      context.setTransform(ratio, 0, 0, ratio, 0, 0);
-      const pixels = mapPixels(s, live.get() ?? p.visible);
-      paintTrials(context, s, { ...p, toPixel: pixels.toPixel, box: pixels.box });
-      const hovered = p.byId.get(store.hovered.get() ?? "");
-      if (ring.current) {
-        const [x, y] = hovered ? pixels.toPixel(hovered.pH, hovered.Eh) : [0, 0];
-        const inside = hovered && x >= pixels.box.x0 && x <= pixels.box.x1 && y >= pixels.box.y0 && y <= pixels.box.y1;
-        Object.assign(ring.current.style, {
-          visibility: inside ? "visible" : "hidden",
-          transform: `translate(${x}px, ${y}px)`,
-        });
-      }
-      if (box.current) {
-        const b = p.brush;
-        const [x0, y1] = b ? pixels.toPixel(b.pH[0], b.Eh[0]) : [0, 0];
-        const [x1, y0] = b ? pixels.toPixel(b.pH[1], b.Eh[1]) : [0, 0];
-        Object.assign(box.current.style, {
-          visibility: b ? "visible" : "hidden",
-          transform: `translate(${x0}px, ${y0}px)`,
-          width: `${x1 - x0}px`,
-          height: `${y1 - y0}px`,
-        });
-      }
+      painter.paint(context, s, ratio, { ...rest, ...pixelsNow() });
     };
-    draw.current();
-  }, [marks, scale, sheet, visible, colours, brushed, brush, byId, live, store]);
+    const drawAll = () => {
+      drawMarks();
+      drawBox();
+      drawRing();
+    };
+    draw.current = { all: drawAll, ring: drawRing };
+    drawAll();
+  }, [marks, scale, sheet, visible, colours, brushed, brush, byId, live, store, painter]);
   useEffect(() => {
-    const again = () => draw.current();
-    const stop = [live.subscribe(again), store.hovered.subscribe(again)];
+    const stop = [live.subscribe(() => draw.current.all()), store.hovered.subscribe(() => draw.current.ring())];
     return () => stop.forEach((end) => end());
   }, [live, store]);
 

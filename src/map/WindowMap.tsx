@@ -1,4 +1,4 @@
-import { useCallback, useLayoutEffect, useMemo, useRef, useState } from "react";
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { Button } from "../components/Button";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
@@ -29,6 +29,9 @@ export interface WindowMapProps {
   /** trials painted over the map */
   trials?: ShownTrials | null;
 }
+
+/** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
+const REST = 160;
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
  *  It brings Plotly along: import it late. */
@@ -63,21 +66,30 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
     return { ...made, layout: { ...made.layout, uirevision: `${made.layout.uirevision} ${resets}` } };
   }, [content, sheet, view, visible, resets]);
 
-  const onRelayout = useCallback(
-    (change: Record<string, unknown>) =>
-      setZoom((old) => {
-        const next = afterRelayout(change, old?.of === zoomOf ? old.frame : frame, frame, scale);
-        return next && { of: zoomOf, frame: next };
-      }),
-    [zoomOf, frame, scale],
-  );
   const [live] = useState(() => new MovingView());
-  const onRelayouting = useCallback(
-    (change: Record<string, unknown>) => live.set(afterRelayout(change, visible, frame, scale) ?? frame),
+  const rest = useRef(0);
+  useEffect(() => () => clearTimeout(rest.current), []);
+  const moved = useCallback(
+    (change: Record<string, unknown>) => afterRelayout(change, live.get() ?? visible, frame, scale),
     [live, visible, frame, scale],
   );
-  // The axes have settled: from here on what is in sight is told by the state.
-  useLayoutEffect(() => live.set(null), [live, visible]);
+  const onRelayouting = useCallback(
+    (change: Record<string, unknown>) => live.set(moved(change) ?? frame),
+    [live, moved, frame],
+  );
+  // Names are placed anew, and the figure drawn anew, when the hand rests: a wheel would else wait for it at every notch.
+  const onRelayout = useCallback(
+    (change: Record<string, unknown>) => {
+      const next = moved(change);
+      live.set(next ?? frame);
+      clearTimeout(rest.current);
+      rest.current = window.setTimeout(() => {
+        setZoom(next && { of: zoomOf, frame: next });
+        requestAnimationFrame(() => live.set(null));
+      }, REST);
+    },
+    [live, moved, frame, zoomOf],
+  );
   const pick = useCallback(
     (at: Point | null) => {
       const pixels = sheet && at && mapPixels(sheet, visible);
@@ -88,9 +100,11 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
     [sheet, visible, trials, onPick],
   );
   const reset = useCallback(() => {
+    clearTimeout(rest.current);
+    live.set(null);
     setZoom(null);
     setResets((n) => n + 1);
-  }, []);
+  }, [live]);
   const onDrawn = useCallback(() => {
     if (holder.current) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
   }, []);

@@ -1,4 +1,4 @@
-import { useMemo, useState } from "react";
+import { useDeferredValue, useMemo, useState } from "react";
 import { Link } from "react-router-dom";
 import { Button } from "../../../components/Button";
 import { Check, Segmented } from "../../../components/choice";
@@ -127,7 +127,8 @@ const columnsOf = (scale: PotentialScale): readonly Column<PlacedTrial>[] => [
 /** The trials as rows: pointing at a row rings its point, pointing at a point lights its row; a brush on the map narrows the table. */
 function LinkedTable({ trials: { trials, store, open }, scale }: { trials: PlanTrials; scale: PotentialScale }) {
   const hovered = useTold(store.hovered);
-  const brush = useTold(store.brush);
+  // The box follows the hand; the rows follow the box when there is time.
+  const brush = useDeferredValue(useTold(store.brush));
   const brushing = useTold(store.brushing);
   const [chosen, setChosen] = useState<string>();
   const columns = useMemo(() => columnsOf(scale), [scale]);
