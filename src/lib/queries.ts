@@ -8,6 +8,7 @@ export const keys = {
   preferences: ["me", "preferences"] as const,
   chemistry: ["chemistry"] as const,
   chemistryVersion: (version: string) => ["chemistry", version] as const,
+  speciesEdits: (species: string) => ["chemistry", "edits", species] as const,
   projects: ["projects"] as const,
   plans: ["plans"] as const,
   planList: (projectId: string, archived: string) => ["plans", "list", projectId, archived] as const,

@@ -10,6 +10,7 @@ import { ElectrodesTab } from "./ElectrodesTab";
 import { LeftOutTab } from "./LeftOutTab";
 import { PresetsTab } from "./PresetsTab";
 import { SourcesTab } from "./SourcesTab";
+import { AddSpecies } from "../speciesEdits/AddSpecies";
 import { SpeciesTab } from "./SpeciesTab";
 
 const shelves = ["species", "components", "lixiviants", "left-out", "electrodes", "sources"] as const;
@@ -43,7 +44,7 @@ export default function ChemistryPage() {
   const data = chemistry.data;
   return (
     <>
-      <div className="flex flex-wrap items-baseline gap-x-4 border-b border-rule px-5 py-2">
+      <div className="flex flex-wrap items-center gap-x-4 border-b border-rule px-5 py-2">
         <h1 className="text-lg">Chemistry</h1>
         <Note>
           {counted(data.species.size, "species", "species")}, {counted(data.tables.references.length, "source")}. Data
@@ -53,6 +54,8 @@ export default function ChemistryPage() {
           </span>
           ; a saved revision of a plan keeps the version it used.
         </Note>
+        <span className="flex-1" />
+        <AddSpecies data={data} />
       </div>
       <Tabs
         label="Tables of the library"

@@ -8,6 +8,7 @@ import { Note, Row, SectionHead } from "../../components/text";
 import { fixed, MINUS, withUnit } from "../../lib/format";
 import { lixiviantName } from "../../lib/planWords";
 import type { PresetName } from "../../../shared/schemas/plan";
+import { SpeciesEdits } from "../speciesEdits/SpeciesEdits";
 import { whenText } from "./leftOutWords";
 import { phaseWord } from "./phases";
 import { SpeciesTemperature } from "./SpeciesTemperature";
@@ -69,6 +70,7 @@ export function SpeciesDetail({ data, id }: { data: ChemicalData; id: string }) 
         </p>
       )}
 
+      <SpeciesEdits data={data} id={id} />
       <SpeciesTemperature data={data} id={id} />
       <InPlans data={data} id={id} />
     </aside>

@@ -12,9 +12,10 @@ import { tableCsv } from "../../components/tableModel";
 import { Note, Remark } from "../../components/text";
 import { VirtualBody } from "../../components/VirtualBody";
 import { downloadText } from "../../lib/csv";
+import { useEditedSpecies } from "../../lib/speciesEdits";
 import { phaseWord } from "./phases";
 import { SpeciesDetail } from "./SpeciesDetail";
-import { exportedColumns, speciesColumns } from "./speciesColumns";
+import { exportedColumns, markedColumns } from "./speciesColumns";
 
 type PhaseFilter = SpeciesRow["phase"] | "all";
 const phaseFilters = [
@@ -52,6 +53,8 @@ export function SpeciesTab({ data }: { data: ChemicalData }) {
       ),
     [data, element, phase],
   );
+  const edited = useEditedSpecies().data;
+  const columns = useMemo(() => markedColumns(edited), [edited]);
   const unknown = speciesId !== undefined && !data.species.has(speciesId);
   const id = speciesId !== undefined && !unknown ? speciesId : shown[0]?.id;
 
@@ -97,7 +100,7 @@ export function SpeciesTab({ data }: { data: ChemicalData }) {
         <DataTable
           caption="Species of the library, at 298.15 K and 1 bar"
           rows={rows}
-          columns={speciesColumns}
+          columns={columns}
           rowKey={(row) => row.id}
           filter={find}
           selectedKey={id}

@@ -1,4 +1,5 @@
 import type { SpeciesRow } from "../../../shared/schemas/chemistry";
+import type { EditedSpecies } from "../../../shared/schemas/speciesEdit";
 import { Formula } from "../../components/Formula";
 import type { Column } from "../../components/tableModel";
 import { phaseWord } from "./phases";
@@ -82,3 +83,23 @@ export const exportedColumns: readonly Column<SpeciesRow>[] = [
   number("Cp_Tmax_K", "K"),
   ...(["ion_class", "grade", "source", "note"] as const).map(text),
 ];
+
+/** The same with a word on rows that are not as shipped. */
+export const markedColumns = (edited: ReadonlyMap<string, EditedSpecies> | undefined): readonly Column<SpeciesRow>[] =>
+  speciesColumns.map((column) =>
+    column.id !== "name"
+      ? column
+      : {
+          ...column,
+          cell: (row) => {
+            const state = edited?.get(row.id)?.state;
+            const word = state === "added" ? "added here" : state === "overridden" ? "overridden here" : null;
+            return (
+              <>
+                {word !== null && <b className="text-verdigris">{word} </b>}
+                {row.name}
+              </>
+            );
+          },
+        },
+  );

@@ -1,6 +1,7 @@
 import { useState } from "react";
 import type { PlanMetal, PlanRow } from "../../../shared/schemas/plan";
 import { Button, ButtonLink } from "../../components/Button";
+import { DataChanged } from "../../components/DataChanged";
 import { Term } from "../../components/Help";
 import { MetalName } from "../../components/MetalLine";
 import { Quantity } from "../../components/Quantity";
@@ -37,6 +38,7 @@ export function PlanDetail({
     >
       <h2 className="text-lg">{plan.name}</h2>
       {plan.invented && <Note>Invented data, for demonstration.</Note>}
+      <DataChanged plan={plan} className="mt-2" />
       {plan.description !== "" && <p className="mt-1">{plan.description}</p>}
       <div className="mt-3 flex flex-wrap gap-2">
         <ButtonLink to={`/plans/${plan.id}`} kind="primary">

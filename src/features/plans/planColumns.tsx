@@ -28,6 +28,9 @@ export const planColumns: readonly Column<PlanRow>[] = [
         <div className="truncate text-sm text-muted">
           {plan.invented && "invented"}
           {plan.archived && (plan.invented ? ", archived" : "archived")}
+          {plan.dataOutdated && (
+            <b className="text-ink">{plan.invented || plan.archived ? ", " : ""}chemistry changed</b>
+          )}
         </div>
       </>
     ),

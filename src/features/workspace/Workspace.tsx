@@ -4,6 +4,7 @@ import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
 import type { Point } from "../../../shared/solution";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
+import { DataChanged } from "../../components/DataChanged";
 import { FormulaText } from "../../components/FormulaText";
 import { Remark } from "../../components/text";
 import { messageOf } from "../../lib/failure";
@@ -223,6 +224,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
         }
         answers={
           <AnswersOrTrials trials={layers.trials ? trials : null} scale={scale}>
+            {frozen === null && <DataChanged plan={plan} className="mb-3" />}
             {failure && (
               <Remark className="mb-3 border-signal!">
                 <p role="alert">
