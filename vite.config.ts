@@ -20,6 +20,13 @@ const withoutJsonSchema: Plugin = {
   },
 };
 
+/** Modules of src/lib and src/components that nearly every page is made of. */
+const parts = [
+  "api|chemistry|classes|failure|format|glossary|metals|pages|planWords|plans|potential|queries|title|units",
+  "Button|Caution|ComponentName|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
+  "choice|status|text|useLate|whenOpened",
+];
+
 export default defineConfig({
   plugins: [
     react(),
@@ -40,10 +47,25 @@ export default defineConfig({
             { name: "react", test: /node_modules[\\/](react|react-dom|scheduler)[\\/]/, priority: 2 },
             // The app loads Plotly with import(); named so that the size check and the browser tests can point at it.
             { name: "plotly", test: /node_modules[\\/](plotly\.js|react-plotly\.js)/, priority: 1 },
-            // One file compresses better than the ten that pages share in part, and is kept by the browser for all of them.
+            // What only the map needs comes with Plotly.
+            {
+              name: "map",
+              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|TrialsLayer|WindowMap|zoom)\.)/,
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
+            // What nearly every page is made of: one file compresses better than twenty small ones.
+            {
+              name: "parts",
+              test: new RegExp(`src[\\\\/](lib|components)[\\\\/](${parts.join("|")})\\.`),
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
+            // Sliders and rows of choices, the controls a page shows at once. Menus, lists, popovers and dialogs come when they are opened,
+            // and bring what they need.
             {
               name: "controls",
-              test: /node_modules[\\/](@?radix-ui|@floating-ui|react-remove-scroll|aria-hidden)/,
+              test: /@radix-ui[\\/](primitive|react-(primitive|context|compose-refs|slot|collection|direction|id|roving-focus|presence|slider|toggle|toggle-group|tabs|use-[a-z-]+))[\\/]/,
               priority: 1,
             },
             { name: "queries", test: /node_modules[\\/]@tanstack[\\/](query-core|react-query)[\\/]/, priority: 1 },

@@ -1,5 +1,5 @@
 import { Dialog as Radix } from "radix-ui";
-import type { ReactNode } from "react";
+import { useRef, type ReactNode } from "react";
 import { Button } from "./Button";
 
 export interface DialogProps {
@@ -28,6 +28,7 @@ export function Dialog({
   width = 520,
   fixed = false,
 }: DialogProps) {
+  const opener = useRef<Element | null>(null);
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
@@ -35,6 +36,14 @@ export function Dialog({
         <Radix.Content
           className="fixed top-[8vh] left-1/2 z-50 flex max-h-[84vh] w-[calc(100vw-32px)] -translate-x-1/2 flex-col border border-ink bg-paper text-base text-ink"
           style={{ maxWidth: width }}
+          // Opened from anywhere, not by a trigger of its own: whoever had the focus gets it back.
+          onOpenAutoFocus={() => {
+            opener.current = document.activeElement;
+          }}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            if (opener.current instanceof HTMLElement) opener.current.focus();
+          }}
           {...(description === undefined ? { "aria-describedby": undefined } : {})}
         >
           <div className="flex items-baseline justify-between gap-4 border-b border-ink px-5 pt-4 pb-2">

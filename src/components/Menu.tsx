@@ -1,34 +1,71 @@
-import { DropdownMenu } from "radix-ui";
-import type { ReactNode } from "react";
+import { Slot } from "radix-ui";
+import { createContext, use, useEffect, useRef, useState, type ReactElement, type ReactNode } from "react";
 import { classes } from "../lib/classes";
+import type { MenuParts } from "./MenuList";
+import { lateFailure, useLate } from "./useLate";
+
+const loadList = () => import("./MenuList");
 
 const item =
   "flex cursor-pointer items-baseline justify-between gap-6 px-3 py-1.5 outline-none data-[highlighted]:bg-tint data-[disabled]:cursor-not-allowed data-[disabled]:opacity-50";
 
-/** A list of commands under the word that opens it. `trigger` is one focusable element. */
-export function Menu({
-  trigger,
-  children,
-  align = "end",
-}: {
-  trigger: ReactNode;
+export interface MenuProps {
+  /** one button */
+  trigger: ReactElement;
   children: ReactNode;
   align?: "start" | "end";
-}) {
+}
+
+/** A list of commands under the word that opens it; the list is fetched when a hand comes near. */
+export function Menu({ trigger, children, align = "end" }: MenuProps) {
+  const button = useRef<HTMLElement>(null);
+  const [byKeyboard, setByKeyboard] = useState(false);
+  const { Part: List, failed, open, close, near } = useLate(loadList);
+
+  // The open list has a trigger of its own; with it goes the focus.
+  const wasOpen = useRef(false);
+  useEffect(() => {
+    if (wasOpen.current && !List) button.current?.focus({ preventScroll: true });
+    wasOpen.current = List !== null;
+  }, [List]);
+
+  if (List)
+    return (
+      <List trigger={trigger} align={align} onClose={close} byKeyboard={byKeyboard}>
+        {children}
+      </List>
+    );
+  const ask = (keyboard: boolean) => {
+    setByKeyboard(keyboard);
+    open();
+  };
   return (
-    <DropdownMenu.Root>
-      <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content
-          align={align}
-          sideOffset={4}
-          className="z-50 max-h-[80vh] min-w-48 overflow-y-auto border border-ink bg-paper py-1 text-base text-ink"
-        >
-          {children}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
-    </DropdownMenu.Root>
+    <Slot.Root
+      ref={button}
+      aria-haspopup="menu"
+      aria-expanded={false}
+      // a click without a count comes from Enter or the space bar
+      onClick={(event) => ask(event.detail === 0)}
+      onKeyDown={(event) => {
+        if (event.key !== "ArrowDown") return;
+        event.preventDefault();
+        ask(true);
+      }}
+      {...near}
+      {...(failed ? { title: lateFailure } : {})}
+    >
+      {trigger}
+    </Slot.Root>
   );
+}
+
+/** What an open list is made of; it comes with the list. */
+export const MenuPartsContext = createContext<MenuParts | null>(null);
+
+function useParts(): MenuParts {
+  const parts = use(MenuPartsContext);
+  if (!parts) throw new Error("A menu's lines stand inside a Menu.");
+  return parts;
 }
 
 export function MenuItem({
@@ -45,19 +82,24 @@ export function MenuItem({
   note?: ReactNode;
   danger?: boolean;
 }) {
+  const { Item } = useParts();
   return (
-    <DropdownMenu.Item className={classes(item, danger && "text-signal")} disabled={disabled} onSelect={onSelect}>
+    <Item className={classes(item, danger && "text-signal")} disabled={disabled ?? false} onSelect={onSelect}>
       <span>{children}</span>
       {note !== undefined && <span className="text-sm text-muted">{note}</span>}
-    </DropdownMenu.Item>
+    </Item>
   );
 }
 
 export function MenuLabel({ children }: { children: ReactNode }) {
-  return <DropdownMenu.Label className="px-3 pt-2 pb-1 font-mono text-xs font-bold">{children}</DropdownMenu.Label>;
+  const { Label } = useParts();
+  return <Label className="px-3 pt-2 pb-1 font-mono text-xs font-bold">{children}</Label>;
 }
 
-export const MenuSeparator = () => <DropdownMenu.Separator className="my-1 h-px bg-rule" />;
+export function MenuSeparator() {
+  const { Separator } = useParts();
+  return <Separator className="my-1 h-px bg-rule" />;
+}
 
 /** One of several; the chosen one says so in words. */
 export function MenuChoice<Value extends string>({
@@ -72,10 +114,11 @@ export function MenuChoice<Value extends string>({
   stays?: boolean;
   options: readonly { value: Value; label: ReactNode }[];
 }) {
+  const { RadioGroup, RadioItem } = useParts();
   return (
-    <DropdownMenu.RadioGroup value={value} onValueChange={(next) => onChange(next as Value)}>
+    <RadioGroup value={value} onValueChange={(next) => onChange(next as Value)}>
       {options.map((option) => (
-        <DropdownMenu.RadioItem
+        <RadioItem
           key={option.value}
           value={option.value}
           className={classes(item, option.value === value && "font-bold")}
@@ -83,8 +126,8 @@ export function MenuChoice<Value extends string>({
         >
           <span>{option.label}</span>
           {option.value === value && <span className="text-sm font-normal text-verdigris">chosen</span>}
-        </DropdownMenu.RadioItem>
+        </RadioItem>
       ))}
-    </DropdownMenu.RadioGroup>
+    </RadioGroup>
   );
 }

@@ -1,6 +1,8 @@
-import { Select as Radix } from "radix-ui";
-import { useId, useState, type ReactNode } from "react";
+import { useEffect, useId, useRef, type KeyboardEvent, type ReactNode } from "react";
 import { classes } from "../lib/classes";
+import { lateFailure, useLate } from "./useLate";
+
+const loadList = () => import("./SelectList");
 
 export interface SelectOption<Value extends string> {
   value: Value;
@@ -29,66 +31,71 @@ export interface SelectProps<Value extends string> {
   className?: string;
 }
 
-/** One of a list, with room for a line that says what each choice means. */
+const opensList = (event: KeyboardEvent) => event.key === "ArrowDown" || event.key === "ArrowUp";
+
+/** One of a list, with room for a line that says what each choice means. Closed it is a button that says what is chosen; the list
+ *  is fetched when a hand comes near. */
 export function Select<Value extends string>(props: SelectProps<Value>) {
-  const { label, labelText, value, onChange, options, placeholder, hint, error, disabled, layout = "row" } = props;
+  const { label, labelText, value, onChange, options, placeholder, hint, disabled, layout = "row" } = props;
   const id = useId();
-  const [open, setOpen] = useState(false);
+  const button = useRef<HTMLButtonElement>(null);
+  const { Part: List, failed, open, close, near } = useLate(loadList);
+  const error = props.error ?? (failed ? lateFailure : null);
   const chosen = options.find((option) => option.value === value);
-  const control = props.readOnly ? (
-    <span className="font-sans">{chosen?.label ?? "none"}</span>
-  ) : (
-    <Radix.Root
-      value={value}
-      onValueChange={(next) => onChange(next as Value)}
-      open={open}
-      onOpenChange={setOpen}
-      disabled={disabled ?? false}
-    >
-      <Radix.Trigger
-        id={id}
-        aria-label={label}
-        aria-invalid={Boolean(error)}
-        data-cell={props.cell}
-        className={classes(
-          "inline-flex h-6 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
-          layout === "stacked" && "h-8! w-full",
-          error ? "border-signal" : "border-rule hover:border-muted",
-        )}
-      >
-        <span className="truncate">
-          <Radix.Value placeholder={placeholder ?? "choose"}>{chosen?.label}</Radix.Value>
-        </span>
+
+  // The open list has a trigger of its own; with it goes the focus.
+  const wasOpen = useRef(false);
+  useEffect(() => {
+    if (wasOpen.current && !List) button.current?.focus({ preventScroll: true });
+    wasOpen.current = List !== null;
+  }, [List]);
+
+  const look = {
+    id,
+    type: "button",
+    disabled: disabled ?? false,
+    "aria-label": label,
+    "aria-invalid": Boolean(error),
+    "data-cell": props.cell,
+    className: classes(
+      "inline-flex h-6 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
+      layout === "stacked" && "h-8! w-full",
+      error ? "border-signal" : "border-rule hover:border-muted",
+    ),
+    children: (
+      <>
+        <span className="truncate">{chosen?.label ?? placeholder ?? "choose"}</span>
         <span aria-hidden className="font-mono text-xs text-muted">
           ▾
         </span>
-      </Radix.Trigger>
-      {/* closed, the list would still be drawn, out of sight, at every step of a drag elsewhere */}
-      {open && (
-        <Radix.Portal>
-          <Radix.Content
-            position="popper"
-            sideOffset={2}
-            className="z-50 max-h-[min(340px,var(--radix-select-content-available-height))] max-w-[420px] min-w-(--radix-select-trigger-width) border border-ink bg-paper text-base text-ink"
-          >
-            <Radix.Viewport className="py-1">
-              {options.map((option) => (
-                <Radix.Item
-                  key={option.value}
-                  value={option.value}
-                  disabled={option.disabled ?? false}
-                  {...(option.text === undefined ? {} : { textValue: option.text })}
-                  className="cursor-pointer px-3 py-1 outline-none data-[disabled]:opacity-50 data-[highlighted]:bg-tint data-[state=checked]:font-bold"
-                >
-                  <Radix.ItemText>{option.label}</Radix.ItemText>
-                  {option.note !== undefined && <div className="text-sm font-normal text-muted">{option.note}</div>}
-                </Radix.Item>
-              ))}
-            </Radix.Viewport>
-          </Radix.Content>
-        </Radix.Portal>
-      )}
-    </Radix.Root>
+      </>
+    ),
+  } as const;
+  const control = props.readOnly ? (
+    <span className="font-sans">{chosen?.label ?? "none"}</span>
+  ) : List ? (
+    <List
+      trigger={<button {...look} />}
+      value={value}
+      onChange={(next) => onChange(next as Value)}
+      options={options}
+      onClose={close}
+    />
+  ) : (
+    <button
+      {...look}
+      ref={button}
+      role="combobox"
+      aria-expanded={false}
+      aria-haspopup="listbox"
+      onClick={open}
+      onKeyDown={(event) => {
+        if (!opensList(event)) return;
+        event.preventDefault();
+        open();
+      }}
+      {...near}
+    />
   );
   const below = (
     <>

@@ -36,3 +36,44 @@ test("plans, a plan on the table and the chemistry are free of grave accessibili
   await page.locator("html[data-theme=light]").waitFor();
   expect(await graveFaults(page)).toEqual([]);
 }, 120_000);
+
+test("lists, menus and help are worked by keys alone, and give the focus back", async () => {
+  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const focused = () =>
+    page.evaluate(() => document.activeElement?.getAttribute("aria-label") ?? document.activeElement?.textContent);
+
+  await plan.button("More commands").focus();
+  await page.keyboard.press("Enter");
+  await expect.poll(focused).toBe("Name and description");
+  await page.keyboard.press("ArrowDown");
+  expect(await focused()).toBe("Duplicate");
+  await page.keyboard.press("Escape");
+  await expect.poll(focused).toBe("More commands");
+  await page.keyboard.press("ArrowDown");
+  await expect.poll(focused).toBe("Name and description");
+  await page.keyboard.press("Enter");
+  await page.getByRole("dialog").getByLabel("Name").waitFor();
+  await page.keyboard.press("Escape");
+  await expect.poll(focused).toBe("More commands");
+
+  const liquor = page.getByRole("combobox", { name: "Lixiviant" });
+  const before = await plan.answers();
+  await liquor.focus();
+  await page.keyboard.press("ArrowDown");
+  await page.getByRole("option", { name: "sulfate", exact: false, selected: true }).waitFor();
+  await page.keyboard.press("ArrowDown");
+  await page.keyboard.press("ArrowDown");
+  await page.keyboard.press("Enter");
+  await expect.poll(focused).toBe("Lixiviant");
+  expect(await liquor.innerText()).not.toMatch(/^sulfate\n/);
+  await expect.poll(() => plan.answers()).not.toEqual(before);
+
+  await page.getByRole("button", { name: "Solids basis: what is this?" }).focus();
+  await page.keyboard.press("Enter");
+  await page.getByRole("dialog").getByText("Solids basis", { exact: true }).waitFor();
+  await page.keyboard.press("Escape");
+  await expect.poll(focused).toBe("Solids basis: what is this?");
+  expect(await page.getByRole("dialog").count()).toBe(0);
+});

@@ -1,10 +1,7 @@
-import { existsSync, statSync } from "node:fs";
-import { join } from "node:path";
 import { AxeBuilder } from "@axe-core/playwright";
 import { expect, test } from "vitest";
 import { demoAccounts } from "../../server/demo/accounts";
-import { projectRoot } from "../../server/root";
-import { openPage, openPageAs } from "../support/browser";
+import { openPage } from "../support/browser";
 
 test("the sign-in page names the demo's accounts and is free of accessibility faults", async () => {
   const { page } = await openPage();
@@ -37,24 +34,4 @@ test("a wrong password is told in words and keeps what was typed", async () => {
   await page.getByRole("button", { name: "Sign in" }).click();
   await page.getByText("No member has this e-mail address with this password.").waitFor();
   expect(await page.getByLabel("E-mail").inputValue()).toBe("metallurgist@tarnhollow.example");
-});
-
-test("the first page fetches at most 250 kB of compressed JavaScript, and not the plot", async () => {
-  const { page } = await openPageAs("metallurgist");
-  const scripts = new Set<string>();
-  page.on("response", (response) => {
-    const { pathname } = new URL(response.url());
-    if (pathname.endsWith(".js")) scripts.add(pathname);
-  });
-  await page.goto("/plans", { waitUntil: "networkidle" });
-  // a script too small to be worth packing is sent, and counted, as it is
-  const sizeOf = (path: string): number => {
-    const file = join(projectRoot, "dist/client", path);
-    return statSync(existsSync(`${file}.gz`) ? `${file}.gz` : file).size;
-  };
-  const sizes = [...scripts].map(sizeOf);
-  const total = sizes.reduce((sum, size) => sum + size, 0);
-  expect([...scripts].filter((path) => path.includes("plotly"))).toEqual([]);
-  expect(total).toBeGreaterThan(50_000);
-  expect(total).toBeLessThan(250_000);
 });

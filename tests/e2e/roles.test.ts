@@ -20,6 +20,7 @@ for (const role of ["technician", "manager"] as const) {
     await page.keyboard.press("Control+s");
     expect(await page.getByRole("dialog").count()).toBe(0);
     await plan.button("More commands").click();
+    await page.getByRole("menuitem", { name: "Print" }).waitFor();
     const commands = await page.getByRole("menuitem").allInnerTexts();
     expect(commands.length).toBeGreaterThan(3);
     expect(commands.filter((c) => /name|duplicate|archive/i.test(c))).toEqual([]);

@@ -1,7 +1,8 @@
 import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import { toProblem } from "../../shared/plan/toProblem";
-import { publishedRanges, RANGE_MARGIN } from "../../shared/practice/ranges";
+import { RANGE_MARGIN } from "../../shared/practice/box";
+import { publishedRanges } from "../../shared/practice/ranges";
 import { planInputs, type PlanInputs } from "../../shared/schemas/plan";
 import type { Solution, Window } from "../../shared/solution";
 import { containsBox, overlapsBox } from "../support/read";

@@ -1,5 +1,6 @@
 import type { Frame } from "../../../shared/schemas/problem";
-import { boxOf, type PublishedRange } from "../../../shared/practice/ranges";
+import { boxOf } from "../../../shared/practice/box";
+import type { PublishedRange } from "../../../shared/practice/ranges";
 import { ringCoordinates } from "../geometry/rings";
 import { type PlotTrace, trace } from "../plotTypes";
 import type { PlacedText } from "../texts";

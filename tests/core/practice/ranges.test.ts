@@ -1,6 +1,7 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
-import { boxOf, publishedRanges, rangesFor } from "../../../shared/practice/ranges";
+import { boxOf } from "../../../shared/practice/box";
+import { publishedRanges, rangesFor } from "../../../shared/practice/ranges";
 import { presetNames } from "../../../shared/schemas/plan";
 import { library } from "../../support/solver";
 

@@ -1,9 +1,12 @@
-import { useState, type ReactNode } from "react";
+import { lazy, Suspense, useState, type ReactNode } from "react";
 import { Tabs } from "../../../components/choice";
+import { Loading } from "../../../components/status";
 import type { PotentialScale } from "../../../lib/potential";
 import { Tried } from "./Tried";
-import { TrialsPanel } from "./TrialsPanel";
 import type { PlanTrials } from "./usePlanTrials";
+
+// The table comes in with the first look at it.
+const TrialsPanel = lazy(async () => ({ default: (await import("./TrialsPanel")).TrialsPanel }));
 
 /** The right side of a plan: what it answers, and what was tried on it. */
 export function AnswersOrTrials({
@@ -39,7 +42,11 @@ export function AnswersOrTrials({
         {
           value: "trials",
           label: count > 0 ? `Trials, ${count}` : "Trials",
-          content: <TrialsPanel trials={trials} scale={scale} />,
+          content: (
+            <Suspense fallback={<Loading label="Opening the trials" />}>
+              <TrialsPanel trials={trials} scale={scale} />
+            </Suspense>
+          ),
         },
       ]}
     />

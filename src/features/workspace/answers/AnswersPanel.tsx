@@ -1,3 +1,4 @@
+import { lazy, Suspense } from "react";
 import { Link } from "react-router-dom";
 import type { Advice, Opening } from "../../../../shared/advice/openings";
 import type { Robust } from "../../../../shared/advice/robust";
@@ -8,6 +9,7 @@ import type { Problem } from "../../../../shared/schemas/problem";
 import type { HeldSetPoint } from "../../../../shared/setpoint/held";
 import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { Loading } from "../../../components/status";
 import type { PotentialScale } from "../../../lib/potential";
 import { windowName } from "../../../map/view";
 import { namingOf } from "../model/exports";
@@ -18,14 +20,16 @@ import { CouplesBlock } from "./CouplesBlock";
 import { FieldsBlock } from "./FieldsBlock";
 import { GasBlock, reachedAtSetPoint } from "./GasBlock";
 import { LimitsBlock } from "./LimitsBlock";
-import { NoWindowBlock } from "./NoWindowBlock";
 import { OverallBlock } from "./OverallBlock";
 import { ReachBlock } from "./ReachBlock";
-import { RobustBlock } from "./RobustBlock";
 import { SetPointBlock } from "./SetPointBlock";
 import { FreeAcidRow, HeldNote } from "./SetPointMore";
 import { WarningsBlock } from "./WarningsBlock";
 import { WindowsBlock } from "./WindowsBlock";
+
+// Most plans have a window, and few hold over ranges.
+const RobustBlock = lazy(async () => ({ default: (await import("./RobustBlock")).RobustBlock }));
+const NoWindowBlock = lazy(async () => ({ default: (await import("./NoWindowBlock")).NoWindowBlock }));
 
 export interface AnswersProps {
   inputs: PlanInputs;
@@ -78,18 +82,24 @@ export function AnswersPanel(props: AnswersProps) {
           {cautions.length > 0 && said}
           {gases && urgent && <GasBlock gases={gases} />}
           <LimitsBlock window={window} name={name} naming={naming} scale={scale} />
-          <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
+          {props.robust.state !== "none" && (
+            <Suspense fallback={null}>
+              <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
+            </Suspense>
+          )}
         </>
       ) : (
         <>
-          <NoWindowBlock
-            solution={solution}
-            inputs={inputs}
-            metalName={naming.metalName}
-            advice={props.advice}
-            scale={scale}
-            {...(props.onApply ? { onApply: props.onApply } : {})}
-          />
+          <Suspense fallback={<Loading label="No window is open" />}>
+            <NoWindowBlock
+              solution={solution}
+              inputs={inputs}
+              metalName={naming.metalName}
+              advice={props.advice}
+              scale={scale}
+              {...(props.onApply ? { onApply: props.onApply } : {})}
+            />
+          </Suspense>
           {cautions.length > 0 && said}
         </>
       )}

@@ -1,9 +1,12 @@
-import { Popover } from "radix-ui";
+import { useRef } from "react";
 import { type Reagent, reagents } from "../../../../shared/reach/reagents";
 import type { PresetName } from "../../../../shared/schemas/plan";
 import { Button } from "../../../components/Button";
 import { Check } from "../../../components/choice";
 import { Formula } from "../../../components/Formula";
+import { lateFailure, useLate } from "../../../components/useLate";
+
+const loadSheet = () => import("../../../components/PopoverSheet");
 
 /** Picks the reagents whose reach is drawn; those common in the liquor stand first. */
 export function ChooseReagents({
@@ -16,6 +19,8 @@ export function ChooseReagents({
   /** null goes back to what is usual */
   onChange: (ids: string[] | null) => void;
 }) {
+  const button = useRef<HTMLButtonElement>(null);
+  const { Part: Sheet, failed, open, close, near } = useLate(loadSheet);
   const common = reagents.filter((r) => r.usedIn.includes(preset));
   const others = reagents.filter((r) => !r.usedIn.includes(preset));
   const toggle = (id: string) => onChange(value.includes(id) ? value.filter((x) => x !== id) : [...value, id]);
@@ -30,19 +35,21 @@ export function ChooseReagents({
     </fieldset>
   );
   return (
-    <Popover.Root>
-      <Popover.Trigger asChild>
-        <Button kind="quiet" className="no-print h-auto! font-normal!">
-          choose
-        </Button>
-      </Popover.Trigger>
-      <Popover.Portal>
-        <Popover.Content
-          align="end"
-          sideOffset={6}
-          collisionPadding={12}
-          className="z-50 max-h-[60vh] w-[300px] overflow-y-auto border border-ink bg-paper px-4 py-2 text-base text-ink"
-        >
+    <>
+      <Button
+        ref={button}
+        kind="quiet"
+        className="no-print h-auto! font-normal!"
+        aria-haspopup="dialog"
+        aria-expanded={Sheet !== null}
+        title={failed ? lateFailure : undefined}
+        onClick={Sheet ? close : open}
+        {...near}
+      >
+        choose
+      </Button>
+      {Sheet && (
+        <Sheet anchor={button} onClose={close} align="end" className="max-h-[60vh] w-[300px] overflow-y-auto px-4 py-2">
           <div className="flex items-baseline justify-between">
             <p className="font-mono text-sm font-bold">Reach of</p>
             <Button kind="quiet" onClick={() => onChange(null)}>
@@ -51,8 +58,8 @@ export function ChooseReagents({
           </div>
           {group("common in this liquor", common)}
           {group("others", others)}
-        </Popover.Content>
-      </Popover.Portal>
-    </Popover.Root>
+        </Sheet>
+      )}
+    </>
   );
 }

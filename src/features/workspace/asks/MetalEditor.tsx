@@ -28,7 +28,15 @@ const capital = (word: string) => word.charAt(0).toUpperCase() + word.slice(1);
 const explains = { carry: "carry", "at most": "atMost", "leave at most": "leaveAtMost", at: "watched" } as const;
 
 /** Role, requirement and amount of one metal. */
-export function MetalEditor({ metal, index, onRemoved }: { metal: PlanMetal; index: number; onRemoved: () => void }) {
+export default function MetalEditor({
+  metal,
+  index,
+  onRemoved,
+}: {
+  metal: PlanMetal;
+  index: number;
+  onRemoved: () => void;
+}) {
   const { inputs, edit, settle, readOnly } = useAsking();
   const about = `${metal.element} amount`;
   const change = (part: Partial<PlanMetal>, gesture?: string) => edit(setMetal(index, part), gesture);

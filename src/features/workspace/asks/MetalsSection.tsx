@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { lazy, Suspense, useState } from "react";
 import type { PlanMetal } from "../../../../shared/schemas/plan";
 import { MetalName } from "../../../components/MetalLine";
 import { Select } from "../../../components/Select";
@@ -12,8 +12,12 @@ import { cssMetalColour, hatchesOf, shuts } from "../../../map/metalStyle";
 import { Swatch } from "../../../map/Swatch";
 import { addMetal } from "../model/edit";
 import { useAsking } from "./context";
-import { MetalEditor } from "./MetalEditor";
 import { Refusal } from "./Refusal";
+
+const loadEditor = () => import("./MetalEditor");
+const MetalEditor = lazy(loadEditor);
+/** A hand comes near. */
+const fetchEditor = () => void loadEditor().catch(() => undefined);
 
 /** The metals of the step: what each must be, and how much of it. The list is the map's legend as well. */
 export function MetalsSection() {
@@ -32,7 +36,11 @@ export function MetalsSection() {
               open={open === metal.element}
               onToggle={() => setOpen((was) => (was === metal.element ? null : metal.element))}
             />
-            {open === metal.element && <MetalEditor metal={metal} index={i} onRemoved={() => setOpen(null)} />}
+            {open === metal.element && (
+              <Suspense fallback={null}>
+                <MetalEditor metal={metal} index={i} onRemoved={() => setOpen(null)} />
+              </Suspense>
+            )}
           </li>
         ))}
       </ul>
@@ -80,6 +88,8 @@ function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean;
         type="button"
         aria-expanded={open}
         onClick={onToggle}
+        onPointerEnter={fetchEditor}
+        onFocus={fetchEditor}
         className="flex min-w-0 flex-1 flex-wrap items-baseline justify-between gap-x-2 text-left hover:underline"
       >
         <span className="whitespace-nowrap">

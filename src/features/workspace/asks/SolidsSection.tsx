@@ -1,19 +1,20 @@
-import { useMemo, useState } from "react";
+import { lazy, Suspense, useMemo } from "react";
 import { type PlanInputs } from "../../../../shared/schemas/plan";
 import { solidsBases } from "../../../../shared/schemas/problem";
 import { speciesHolding } from "../../../../shared/selection/components";
 import { Button } from "../../../components/Button";
 import { Segmented } from "../../../components/choice";
 import { SpeciesName } from "../../../components/Formula";
-import { FormulaText } from "../../../components/FormulaText";
 import { Term } from "../../../components/Help";
 import { Select } from "../../../components/Select";
-import { TextField } from "../../../components/TextField";
 import { Note, SectionHead } from "../../../components/text";
-import { leaveOut, noLongerPutBack, putBack, toggleIn } from "../model/edit";
+import { toggleIn } from "../model/edit";
 import { useAsking } from "./context";
 import { Fold } from "./Fold";
+import { line, lineList } from "./look";
 import { Refusal } from "./Refusal";
+
+const LeftOutList = lazy(() => import("./LeftOutList"));
 
 const meaning: Readonly<Record<PlanInputs["solidsBasis"], string>> = {
   feed: "The minerals named for the feed count; products as those that form in hours.",
@@ -48,9 +49,6 @@ export function SolidsSection() {
   );
 }
 
-const list = "text-sm";
-const item = "hairline flex items-baseline justify-between gap-2 py-0.5";
-
 function FeedMinerals() {
   const { inputs, edit, data, readOnly } = useAsking();
   const { metals, feedMinerals } = inputs;
@@ -68,9 +66,9 @@ function FeedMinerals() {
   return (
     <div className="mt-1">
       {inputs.feedMinerals.length > 0 && (
-        <ul className={list} aria-label="Feed minerals">
+        <ul className={lineList} aria-label="Feed minerals">
           {inputs.feedMinerals.map((id) => (
-            <li key={id} className={item}>
+            <li key={id} className={line}>
               <span>
                 <SpeciesName id={id} /> <span className="text-muted">in the feed</span>
               </span>
@@ -98,97 +96,14 @@ function FeedMinerals() {
 }
 
 function LeftOut() {
-  const { inputs, edit, solution, readOnly } = useAsking();
-  const own = new Map(inputs.leftOut.map((l) => [l.species, l.reason]));
+  const { solution } = useAsking();
   // A species of two metals is refused once for each of them.
-  const all = [...new Map((solution?.leftOut ?? []).map((l) => [l.species, l])).values()];
+  const count = new Set((solution?.leftOut ?? []).map((l) => l.species)).size;
   return (
-    <Fold
-      className="mt-1"
-      title={all.length === 0 ? "No species is left out" : `${all.length} species left out, with reasons`}
-    >
-      {!readOnly && <LeaveOneOut />}
-      <ul className={list} aria-label="Species left out">
-        {all
-          .sort((a, b) => Number(own.has(b.species)) - Number(own.has(a.species)))
-          .map(({ species, reason }) => (
-            <li key={species} className={item}>
-              <span className="min-w-0">
-                <SpeciesName id={species} withPhase />{" "}
-                <span className="text-muted">
-                  <FormulaText text={own.get(species) ?? reason} />
-                </span>
-              </span>
-              {!readOnly && !reason.includes("second metal") && !reason.endsWith("has no total") && (
-                <Button kind="quiet" className="h-auto! shrink-0" onClick={() => edit(putBack(species))}>
-                  put back
-                </Button>
-              )}
-            </li>
-          ))}
-      </ul>
-      {inputs.putBack.length > 0 && (
-        <ul className={list} aria-label="Species put back">
-          {inputs.putBack.map((id) => (
-            <li key={id} className={item}>
-              <span>
-                <SpeciesName id={id} withPhase /> <span className="text-muted">put back by the plan</span>
-              </span>
-              {!readOnly && (
-                <Button kind="quiet" className="h-auto!" onClick={() => edit(noLongerPutBack(id))}>
-                  undo
-                </Button>
-              )}
-            </li>
-          ))}
-        </ul>
-      )}
+    <Fold className="mt-1" title={count === 0 ? "No species is left out" : `${count} species left out, with reasons`}>
+      <Suspense fallback={null}>
+        <LeftOutList />
+      </Suspense>
     </Fold>
-  );
-}
-
-/** A species that rules a field can be left out, once somebody says why. */
-function LeaveOneOut() {
-  const { edit, solution } = useAsking();
-  const [species, setSpecies] = useState("");
-  const [reason, setReason] = useState("");
-  const ruling = [...new Set((solution?.fields ?? []).map((f) => f.species))].sort();
-  return (
-    <div className="py-1">
-      <Select
-        label="Leave out a species that rules a field"
-        labelText={<span className="text-muted">Leave one out</span>}
-        value={species}
-        onChange={setSpecies}
-        options={ruling.map((id) => ({ value: id, label: <SpeciesName id={id} withPhase />, text: id }))}
-      />
-      {species !== "" && (
-        <form
-          className="mt-1"
-          onSubmit={(event) => {
-            event.preventDefault();
-            if (reason.trim() === "") return;
-            edit(leaveOut(species, reason.trim()));
-            setSpecies("");
-            setReason("");
-          }}
-        >
-          <TextField
-            label="Why it does not count here"
-            value={reason}
-            maxLength={200}
-            onChange={(event) => setReason(event.target.value)}
-          />
-          <div className="mt-1 flex gap-3">
-            <Button type="submit" disabled={reason.trim() === ""}>
-              Leave out
-            </Button>
-            <Button kind="quiet" onClick={() => setSpecies("")}>
-              cancel
-            </Button>
-          </div>
-        </form>
-      )}
-    </div>
   );
 }

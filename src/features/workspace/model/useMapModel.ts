@@ -1,7 +1,6 @@
 import { useMemo } from "react";
 import type { HazardRegion } from "../../../../shared/hazards/regions";
 import { type Reach, reachesOf } from "../../../../shared/reach/reach";
-import { rangesFor } from "../../../../shared/practice/ranges";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Outline, Point, Solution } from "../../../../shared/solution";
@@ -11,6 +10,7 @@ import type { ThemeColours } from "../../../lib/theme";
 import type { ContentWishes } from "../../../map/content";
 import type { ShownRange } from "../../../map/traces/practice";
 import type { Layers, MapMetal, MapView } from "../../../map/view";
+import { usePractice } from "./usePractice";
 import { useOtherBasis } from "./useSolved";
 
 export interface MapModel {
@@ -45,7 +45,6 @@ interface Wishes {
   gases: readonly HazardRegion[];
 }
 
-const NONE: readonly ShownRange[] = [];
 const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
 
 /** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
@@ -69,14 +68,7 @@ export function useMapModel(w: Wishes): MapModel | null {
     () => reachesOf(data, reagents, preset, temperatureC),
     [data, reagents, preset, temperatureC],
   );
-  const elements = planMetals
-    .filter((m) => m.requirement !== "free")
-    .map((m) => m.element)
-    .join();
-  const practice = useMemo(
-    () => (layers.practice ? rangesFor({ preset, elements: elements.split(","), temperatureC }) : NONE),
-    [layers.practice, preset, elements, temperatureC],
-  );
+  const practice = usePractice(layers.practice, { preset, metals: planMetals, temperatureC });
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
   const asked = useMemo(
     () => solution && { metals, solution, other, through, reaches, cyanide, robust, gases, practice },
