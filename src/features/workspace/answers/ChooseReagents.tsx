@@ -49,7 +49,12 @@ export function ChooseReagents({
         choose
       </Button>
       {Sheet && (
-        <Sheet anchor={button} onClose={close} align="end" className="max-h-[60vh] w-[300px] overflow-y-auto px-4 py-2">
+        <Sheet
+          anchor={button}
+          onClose={close}
+          align="end"
+          className="max-h-[min(60vh,var(--radix-popover-content-available-height))] w-[300px] overflow-y-auto px-4 py-2"
+        >
           <div className="flex items-baseline justify-between">
             <p className="font-mono text-sm font-bold">Reach of</p>
             <Button kind="quiet" onClick={() => onChange(null)}>
