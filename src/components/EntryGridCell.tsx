@@ -65,7 +65,7 @@ export function EntryCell<Row>({ column, row, index, place, label, wrong, readOn
       </td>
     );
   return (
-    <td className={classes("p-0", suffix !== undefined && "whitespace-nowrap")}>
+    <td className="p-0">
       <input
         type="text"
         data-cell={place}
@@ -87,13 +87,13 @@ export function EntryCell<Row>({ column, row, index, place, label, wrong, readOn
           onChange(before.current);
         }}
         className={classes(
-          "h-6.5 border-0 bg-transparent px-1 focus:bg-sheet pointer-coarse:h-10",
-          suffix === undefined ? "w-full" : "w-[calc(100%-4.5ch)]",
+          "block h-6.5 border-0 bg-transparent px-1 focus:bg-sheet pointer-coarse:h-10",
+          "w-full",
           column.words ? "text-left" : "text-right font-mono",
           wrong && "text-signal outline-1 -outline-offset-1 outline-signal",
         )}
       />
-      {suffix}
+      {suffix !== undefined && <span className="-mt-1 block pr-1 pb-0.5 text-right leading-3">{suffix}</span>}
     </td>
   );
 }

@@ -10,7 +10,7 @@ export function valueText(value: unknown): string {
   if (typeof value === "string" || typeof value === "number") return String(value);
   if (Array.isArray(value)) return value.length === 0 ? "none" : value.map(valueText).join(", ");
   if (typeof value !== "object") return "";
-  if (isEntry(value)) return value.text.trim() === "" ? "empty" : `${value.text} ${unitText(value.unit)}`;
+  if (isEntry(value)) return value.text.trim() === "" ? "empty" : `${value.text} ${unitText(value.unit)}`.trim();
   const parts = Object.values(value)
     .map(valueText)
     .filter((part) => part !== "empty" && part !== "none" && part !== "no");

@@ -2,6 +2,7 @@ import { useQueries } from "@tanstack/react-query";
 import { useMemo, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { CampaignRow } from "../../../shared/schemas/campaign";
+import type { CampaignSummaryAnswer } from "../../../shared/schemas/campaignSummary";
 import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { DataTable } from "../../components/DataTable";
@@ -133,10 +134,15 @@ export default function CampaignsPage() {
   );
 }
 
+/** One function for good: another one at every drawing would make another map of the same answers. */
+const byCampaign = (results: readonly { data: CampaignSummaryAnswer | undefined }[]) =>
+  new Map(results.flatMap(({ data }) => (data ? [[data.campaign.id, data] as const] : [])));
+
 /** The summaries that have come so far, by campaign. */
 function useSummaries(campaigns: readonly CampaignRow[] | undefined) {
-  return useQueries({
-    queries: (campaigns ?? []).filter(({ deletedAt }) => deletedAt === null).map(({ id }) => campaignSummaryQuery(id)),
-    combine: (results) => new Map(results.flatMap(({ data }) => (data ? [[data.campaign.id, data] as const] : []))),
-  });
+  const queries = useMemo(
+    () => (campaigns ?? []).filter(({ deletedAt }) => deletedAt === null).map(({ id }) => campaignSummaryQuery(id)),
+    [campaigns],
+  );
+  return useQueries({ queries, combine: byCampaign });
 }

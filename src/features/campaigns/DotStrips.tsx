@@ -49,7 +49,7 @@ export function DotStrips({
   return (
     <svg
       viewBox={`0 0 ${width} ${bottom + FOOT}`}
-      className="w-full font-mono text-[12px]"
+      className="w-full max-w-[720px] font-mono text-[12px]"
       role="group"
       aria-label={axisName}
     >

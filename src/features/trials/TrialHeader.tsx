@@ -34,15 +34,16 @@ export function TrialHeader({ trial, draft, feed, readOnly, onDialog }: TrialHea
   };
   const primary = draft.changed.length > 0;
   return (
-    <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-      <h1 className="text-lg">{values.code || "no code"}</h1>
-      <span className="min-w-0 text-sm text-muted">
+    <div className="flex flex-wrap items-center gap-x-3 gap-y-2 border-b border-rule px-5 py-2 lg:flex-nowrap">
+      <h1 className="text-lg whitespace-nowrap">{values.code || "no code"}</h1>
+      <span className="min-w-0 truncate text-sm text-muted">
         {stage?.name ?? values.stage}, {feed?.name ?? trial.feedName}, campaign{" "}
         <Link to={`/campaigns/${campaign.id}`}>{campaign.code}</Link>.{" "}
         <b className="text-ink">{statusWords[values.status]}</b>
       </span>
-      <DraftStatus draft={draft} />
-      <span className="flex-1" />
+      <span className="min-w-0 flex-1 truncate">
+        <DraftStatus draft={draft} />
+      </span>
       {steps.map((step) => (
         <Button
           key={step.label}

@@ -24,7 +24,7 @@ import { BenchBand } from "./BenchBand";
 import { BigButton } from "./BigField";
 import { readingIn } from "./benchModel";
 import { emptyForm, useBenchForm } from "./benchShelf";
-import { minutesSince } from "./elapsed";
+import { minutesSince, timeEntry } from "./elapsed";
 import { EntryLog } from "./EntryLog";
 import { ReadingPanel } from "./ReadingPanel";
 import { DosePanel, NotePanel, SamplePanel } from "./TaskPanels";
@@ -168,7 +168,7 @@ export function Bench({ trial, campaign, data }: { trial: TrialRow; campaign: Ca
               <ReadingPanel
                 {...shared}
                 onKeep={() =>
-                  keep(withReading(readingIn(probe, minutes)), {
+                  keep(withReading(readingIn(probe, minutes, last?.at.unit)), {
                     ...emptyForm,
                     electrode: probe.electrode,
                     electrodeTemperature: probe.electrodeTemperature,
@@ -205,8 +205,7 @@ export function Bench({ trial, campaign, data }: { trial: TrialRow; campaign: Ca
               <NotePanel
                 {...shared}
                 onKeep={(note) => {
-                  const now = minutes === null ? "" : String(minutes);
-                  keep((t) => withReading({ ...nextReading([]), at: { text: now, unit: "min" }, note })(t), {
+                  keep(withReading({ ...nextReading([]), at: timeEntry("", minutes, last?.at.unit), note }), {
                     note: "",
                   });
                   setTask("reading");

@@ -39,7 +39,7 @@ export function ReadingPanel({ form, change, minutes, busy, onKeep }: ReadingPan
   const [pressed, setPressed] = useState(false);
   const [choosing, setChoosing] = useState(false);
   const { readings } = values.measured;
-  const reading = readingIn(form, minutes);
+  const reading = readingIn(form, minutes, readings.at(-1)?.at.unit);
   const problems = benchProblems(reading);
   const shown = (name: BenchField) =>
     problems[name] !== undefined && (pressed || (name !== field && hasText(form[name]))) ? problems[name] : undefined;

@@ -7,7 +7,7 @@ import { useRecording } from "../record/context";
 import { BigButton, BigField } from "./BigField";
 import { hasText, typed } from "./benchModel";
 import type { BenchForm } from "./benchShelf";
-import { elapsed } from "./elapsed";
+import { elapsed, timeEntry } from "./elapsed";
 import { Keypad } from "./Keypad";
 
 interface TaskProps {
@@ -16,11 +16,6 @@ interface TaskProps {
   minutes: number | null;
   busy: boolean;
 }
-
-const at = (form: BenchForm, minutes: number | null) => ({
-  text: hasText(form.at) ? form.at : minutes === null ? "" : String(minutes),
-  unit: "min",
-});
 
 const reasons = ["pH control", "ORP control", "top-up", "initial"] as const;
 
@@ -42,7 +37,7 @@ export function DosePanel({ form, change, minutes, busy, onKeep }: TaskProps & {
   const keep = () => {
     setPressed(true);
     if (problem !== null) return;
-    onKeep({ ...base, amount, at: at(form, minutes), reason });
+    onKeep({ ...base, amount, at: timeEntry(form.at, minutes, values.measured.doses.at(-1)?.at.unit), reason });
   };
   return (
     <>
@@ -119,7 +114,7 @@ export function SamplePanel({ form, change, minutes, busy, onKeep }: TaskProps &
   const keep = () => {
     setPressed(true);
     if (problem !== null || makeUpProblem !== null) return;
-    onKeep({ ...nextSample(samples), at: at(form, minutes), volume, makeUpVolume: makeUp });
+    onKeep({ ...nextSample(samples), at: timeEntry(form.at, minutes, last?.at.unit), volume, makeUpVolume: makeUp });
   };
   return (
     <>

@@ -9,13 +9,15 @@ import { electrodeName } from "../model/electrodes";
 import { orpOf } from "../model/orp";
 import { isBlank, type TrialValues } from "../model/trialValues";
 import type { BenchForm } from "./benchShelf";
+import { timeEntry } from "./elapsed";
 
 export type BenchField = "pH" | "pHTemperature" | "orp" | "electrodeTemperature" | "temperature" | "at";
 
-/** The reading that stands in the fields. @param minutes  since the start, where no time was typed */
-export function readingIn(form: BenchForm, minutes: number | null): TrialReading {
+/** The reading that stands in the fields.
+ *  @param minutes  since the start, where no time was typed     @param unit  of time, as the record has it so far */
+export function readingIn(form: BenchForm, minutes: number | null, unit?: string): TrialReading {
   return {
-    at: { text: form.at.trim() !== "" ? form.at : minutes === null ? "" : String(minutes), unit: "min" },
+    at: timeEntry(form.at, minutes, unit),
     temperature: { text: form.temperature, unit: "C" },
     pH: {
       value: { text: form.pH, unit: "pH" },

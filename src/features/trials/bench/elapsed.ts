@@ -16,6 +16,16 @@ export function elapsed(minutes: number): string {
   return `${Math.floor(whole / 1440)} d ${Math.floor((whole % 1440) / 60)} h`;
 }
 
+/** The time a reading is kept at: what was typed, in minutes; else now, in the unit the record has used so far.
+ *  @param minutes  since the start; null before it */
+export function timeEntry(typed: string, minutes: number | null, unit: string | undefined): Entry {
+  if (typed.trim() !== "") return { text: typed, unit: "min" };
+  if (minutes === null) return { text: "", unit: unit ?? "min" };
+  if (unit === "h") return { text: (minutes / 60).toFixed(2), unit };
+  if (unit === "d") return { text: (minutes / 1440).toFixed(3), unit };
+  return { text: String(minutes), unit: "min" };
+}
+
 /** A typed time as minutes; null where it is blank or no number. */
 export function minutesOf(at: Entry): number | null {
   const hours = numberIn(at, "time");

@@ -1,4 +1,5 @@
 import type { SolidAssay, SolutionAssay } from "../../../../shared/schemas/entry";
+import { commonUnit, relabelled, typedIn } from "./columnUnit";
 import type { TrialValues } from "./trialValues";
 
 type Assay = SolutionAssay | SolidAssay;
@@ -105,24 +106,20 @@ export const analytesOf = <A extends Assay>(lines: readonly AssayLine<A>[], expe
 ];
 
 /** The unit most of a column was typed in; `usual` while it is empty. */
-export function columnUnit<A extends Assay>(lines: readonly AssayLine<A>[], analyte: string, usual: string): string {
-  const counts = new Map<string, number>();
-  for (const { assays } of lines)
-    for (const { analyte: name, value } of assays)
-      if (name === analyte && value.text.trim() !== "") counts.set(value.unit, (counts.get(value.unit) ?? 0) + 1);
-  return [...counts].sort((a, b) => b[1] - a[1])[0]?.[0] ?? usual;
-}
+export const columnUnit = <A extends Assay>(lines: readonly AssayLine<A>[], analyte: string, usual: string): string =>
+  commonUnit(
+    lines.flatMap(({ assays }) => assays.filter((a) => a.analyte === analyte).map(({ value }) => value)),
+    usual,
+  );
 
 /** One cell typed: an empty one takes its assay out, for a blank is no assay. */
 export function withAssay<A extends Assay>(assays: readonly A[], analyte: string, text: string, unit: string): A[] {
   const at = assays.findIndex((a) => a.analyte === analyte);
   if (text === "") return assays.filter((_, i) => i !== at);
   if (at < 0) return [...assays, { analyte, value: { text, unit }, method: "" } as A];
-  return assays.map((a, i) =>
-    i === at ? { ...a, value: { text, unit: a.value.text === "" ? unit : a.value.unit } } : a,
-  );
+  return assays.map((a, i) => (i === at ? { ...a, value: typedIn(a.value, text, unit) } : a));
 }
 
-/** Another unit for a whole column: the numbers stay as they were typed. */
-export const withUnit = <A extends Assay>(assays: readonly A[], analyte: string, unit: string): A[] =>
-  assays.map((a) => (a.analyte === analyte ? { ...a, value: { ...a.value, unit } } : a));
+/** Another unit for a column: the numbers stay as they were typed, and what had a unit of its own keeps it. */
+export const withUnit = <A extends Assay>(assays: readonly A[], analyte: string, from: string, to: string): A[] =>
+  assays.map((a) => (a.analyte === analyte ? { ...a, value: relabelled(a.value, from, to) } : a));

@@ -6,8 +6,8 @@ import { EntryGrid } from "../../../components/EntryGrid";
 import type { GridColumn } from "../../../components/entryGridModel";
 import { Formula } from "../../../components/Formula";
 import { UnitSelect } from "../../../components/UnitSelect";
-import { unitText } from "../../../lib/units";
 import { analytesOf, columnUnit, withAssay, withUnit, type AssayLine } from "../model/liquors";
+import { otherUnit } from "../model/columnUnit";
 import type { TrialValues } from "../model/trialValues";
 import { useRecording } from "./context";
 
@@ -63,7 +63,7 @@ export function AssayMatrix<A extends SolutionAssay | SolidAssay>(props: AssayMa
             onChange={(chosen) => {
               setWished((old) => ({ ...old, [analyte]: chosen }));
               edit((t) =>
-                linesOf(t).reduce((trial, line) => line.put(trial, withUnit(line.assays, analyte, chosen)), t),
+                linesOf(t).reduce((trial, line) => line.put(trial, withUnit(line.assays, analyte, unit, chosen)), t),
               );
             }}
           />
@@ -75,12 +75,7 @@ export function AssayMatrix<A extends SolutionAssay | SolidAssay>(props: AssayMa
           const assay = assayOn(line);
           return assay ? refusalOf(assay.value, quantity) : null;
         },
-        suffix: (line) => {
-          const own = assayOn(line)?.value;
-          return own && own.text.trim() !== "" && own.unit !== unit ? (
-            <span className="font-mono text-xs text-muted">{unitText(own.unit)}</span>
-          ) : undefined;
-        },
+        suffix: (line) => otherUnit(assayOn(line)?.value, unit),
       };
     }),
   ];

@@ -2,6 +2,7 @@ import { useState } from "react";
 import { judge } from "../../../../shared/trials/judge";
 import { EntryGrid } from "../../../components/EntryGrid";
 import { Note } from "../../../components/text";
+import { commonUnit, relabelled } from "../model/columnUnit";
 import { isBlank, nextReading } from "../model/trialValues";
 import { rowProblems, useRecording } from "./context";
 import { readingColumns } from "./readingColumns";
@@ -20,8 +21,15 @@ const columnOf = (rest: string): string =>
 export function ReadingsSection() {
   const { values, edit, problems, readOnly, electrodes, solved } = useRecording();
   const { readings } = values.measured;
-  const [timeUnit, setTimeUnit] = useState(readings.at(-1)?.at.unit ?? "h");
-  const [orpUnit, setOrpUnit] = useState(readings.at(-1)?.orp.value.unit ?? "mV");
+  const [wished, setWished] = useState({ time: "h", orp: "mV" });
+  const timeUnit = commonUnit(
+    readings.map(({ at }) => at),
+    wished.time,
+  );
+  const orpUnit = commonUnit(
+    readings.map(({ orp }) => orp.value),
+    wished.orp,
+  );
   const put = (next: typeof readings) =>
     edit((t) => ({ ...t, measured: { ...t.measured, readings: next } }), "measured.readings");
   const columns = readingColumns({
@@ -30,12 +38,12 @@ export function ReadingsSection() {
     orpUnit,
     readOnly,
     onTimeUnit: (unit) => {
-      setTimeUnit(unit);
-      put(readings.map((r) => ({ ...r, at: { ...r.at, unit } })));
+      setWished((old) => ({ ...old, time: unit }));
+      put(readings.map((r) => ({ ...r, at: relabelled(r.at, timeUnit, unit) })));
     },
     onOrpUnit: (unit) => {
-      setOrpUnit(unit);
-      put(readings.map((r) => ({ ...r, orp: { ...r.orp, value: { ...r.orp.value, unit } } })));
+      setWished((old) => ({ ...old, orp: unit }));
+      put(readings.map((r) => ({ ...r, orp: { ...r.orp, value: relabelled(r.orp.value, orpUnit, unit) } })));
     },
     place: (pH, Eh, EhUncertainty) => {
       if (!solved?.solution) return "";

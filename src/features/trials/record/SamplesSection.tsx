@@ -1,12 +1,12 @@
 import { useState } from "react";
 import { unitsOf, type QuantityName } from "../../../../shared/entry/quantities";
-import type { Entry } from "../../../../shared/entry/readEntry";
 import { refusalOf } from "../../../../shared/schemas/entry";
 import type { Sample } from "../../../../shared/schemas/trialRecord";
 import { EntryGrid } from "../../../components/EntryGrid";
 import type { GridColumn } from "../../../components/entryGridModel";
 import { UnitSelect } from "../../../components/UnitSelect";
 import { Note } from "../../../components/text";
+import { commonUnit, otherUnit, relabelled, typedIn } from "../model/columnUnit";
 import { nextSample } from "../model/trialValues";
 import { rowProblems, useRecording } from "./context";
 import { Section } from "./Section";
@@ -23,15 +23,14 @@ const fields: readonly { key: Field; header: string; quantity: QuantityName; usu
 export function SamplesSection() {
   const { values, edit, problems, readOnly } = useRecording();
   const { samples } = values;
-  const [units, setUnits] = useState<Record<Field, string>>(() => {
-    const last = samples.at(-1);
-    return Object.fromEntries(fields.map(({ key, usual }) => [key, last?.[key].unit ?? usual])) as Record<
-      Field,
-      string
-    >;
-  });
+  const [wished, setWished] = useState<Partial<Record<Field, string>>>({});
+  const unitOf = ({ key, usual }: { key: Field; usual: string }) =>
+    commonUnit(
+      samples.map((s) => s[key]),
+      wished[key] ?? usual,
+    );
   const put = (next: Sample[]) => edit((t) => ({ ...t, samples: next }), "samples");
-  const columns = fields.map(({ key, header, quantity, width }): GridColumn<Sample> => ({
+  const columns = fields.map(({ key, header, quantity, width, usual }): GridColumn<Sample> => ({
     id: key,
     kind: "text",
     header,
@@ -41,19 +40,18 @@ export function SamplesSection() {
       <UnitSelect
         label={`Unit of ${header}`}
         units={unitsOf(quantity)}
-        value={units[key]}
+        value={unitOf({ key, usual })}
         readOnly={readOnly}
         onChange={(unit) => {
-          setUnits((old) => ({ ...old, [key]: unit }));
-          put(samples.map((s) => ({ ...s, [key]: { ...s[key], unit } })));
+          const from = unitOf({ key, usual });
+          setWished((old) => ({ ...old, [key]: unit }));
+          put(samples.map((s) => ({ ...s, [key]: relabelled(s[key], from, unit) })));
         }}
       />
     ),
     get: (s) => s[key].text,
-    set: (s, text) => {
-      const before: Entry = s[key];
-      return { ...s, [key]: { text, unit: before.text === "" ? units[key] : before.unit } };
-    },
+    set: (s, text) => ({ ...s, [key]: typedIn(s[key], text, unitOf({ key, usual })) }),
+    suffix: (s) => otherUnit(s[key], unitOf({ key, usual })),
     problem: (s) => refusalOf(s[key], quantity),
   }));
   return (

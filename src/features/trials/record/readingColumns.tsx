@@ -6,6 +6,7 @@ import type { GridColumn } from "../../../components/entryGridModel";
 import { UnitSelect } from "../../../components/UnitSelect";
 import { fixed, withUnit } from "../../../lib/format";
 import { electrodeOptions } from "../model/electrodes";
+import { otherUnit, typedIn } from "../model/columnUnit";
 import { orpOf } from "../model/orp";
 import { isBlank } from "../model/trialValues";
 
@@ -41,7 +42,8 @@ export function readingColumns(w: ReadingColumnWishes): GridColumn<TrialReading>
       ),
       width: "4.4em",
       get: (r) => r.at.text,
-      set: (r, text) => ({ ...r, at: { text, unit: r.at.text === "" ? w.timeUnit : r.at.unit } }),
+      set: (r, text) => ({ ...r, at: typedIn(r.at, text, w.timeUnit) }),
+      suffix: (r) => otherUnit(r.at, w.timeUnit),
       problem: (r) => refusalOf(r.at, "time"),
     },
     {
@@ -101,10 +103,8 @@ export function readingColumns(w: ReadingColumnWishes): GridColumn<TrialReading>
       ),
       width: "5em",
       get: (r) => r.orp.value.text,
-      set: (r, text) => ({
-        ...r,
-        orp: { ...r.orp, value: { text, unit: r.orp.value.text === "" ? w.orpUnit : r.orp.value.unit } },
-      }),
+      set: (r, text) => ({ ...r, orp: { ...r.orp, value: typedIn(r.orp.value, text, w.orpUnit) } }),
+      suffix: (r) => otherUnit(r.orp.value, w.orpUnit),
       problem: (r) => refusalOf(r.orp.value, "potential"),
     },
     {
