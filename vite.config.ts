@@ -50,7 +50,7 @@ export default defineConfig({
             // What only the map needs comes with Plotly.
             {
               name: "map",
-              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|TrialsLayer|WindowMap|zoom)\.)/,
+              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|TrialsLayer|WindowMap|zoom)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },

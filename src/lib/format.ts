@@ -1,21 +1,16 @@
-/** Numbers as they stand on the page: true minus, thin space before a unit, fixed digits so that columns align. */
-export const MINUS = "\u2212";
-export const THIN_SPACE = "\u2009";
-export const NARROW_NO_BREAK = "\u202f";
+import { significantPlain, trueMinus, withUnit } from "../../shared/words/numbers";
 
-const trueMinus = (text: string) => text.replace("-", MINUS);
-const withoutNegativeZero = (text: string) => (/^-0(\.0*)?$/.test(text) ? text.slice(1) : text);
-
-/** `fixed(-0.204, 2)` → "−0.20" */
-export const fixed = (x: number, digits: number): string => trueMinus(withoutNegativeZero(x.toFixed(digits)));
-
-/** With a sign on both sides of zero: "+0.12", "−0.12". */
-export const signed = (x: number, digits: number): string => {
-  const text = fixed(x, digits);
-  return text.startsWith(MINUS) || Number(x.toFixed(digits)) === 0 ? text : `+${text}`;
-};
-
-const plainRange = (x: number) => x === 0 || (Math.abs(x) >= 0.01 && Math.abs(x) < 1e4);
+export {
+  celsius,
+  fixed,
+  MINUS,
+  percent,
+  scientificParts,
+  significant,
+  signed,
+  THIN_SPACE,
+  withUnit,
+} from "../../shared/words/numbers";
 
 /** As an input shows it, in characters that can be typed again: 0.50, 12.5, 8.0e-2, 1.0e-5. */
 export const inputText = (x: number, figures = 2): string => {
@@ -28,46 +23,6 @@ export const inputTextExact = (x: number, figures = 2): string => {
   const typed = Number(x.toPrecision(6)).toExponential().replace(/e.*/, "").replace(/[-.]/g, "").length;
   return inputText(x, Math.max(figures, typed));
 };
-
-function significantPlain(x: number, figures: number): string {
-  const magnitude = Math.floor(Math.log10(Math.abs(x)));
-  return x.toFixed(Math.max(0, figures - 1 - magnitude));
-}
-
-export interface ScientificParts {
-  sign: string;
-  mantissa: string;
-  /** null where the number stands plain */
-  exponent: string | null;
-}
-
-/** Mantissa and exponent for typesetting in prose (see components/Quantity). */
-export function scientificParts(x: number, figures = 2): ScientificParts {
-  if (plainRange(x)) {
-    return {
-      sign: x < 0 ? MINUS : "",
-      mantissa: x === 0 ? "0" : significantPlain(Math.abs(x), figures),
-      exponent: null,
-    };
-  }
-  const [mantissa = "", exponent = "0"] = Math.abs(x)
-    .toExponential(figures - 1)
-    .split("e");
-  return { sign: x < 0 ? MINUS : "", mantissa, exponent: trueMinus(exponent.replace("+", "")) };
-}
-
-/** Plain text with significant figures: "0.50", "1.0e−5". */
-export const significant = (x: number, figures = 2): string => {
-  const { sign, mantissa, exponent } = scientificParts(x, figures);
-  return `${sign}${mantissa}${exponent === null ? "" : `e${exponent}`}`;
-};
-
-export const withUnit = (text: string, unit?: string): string => (unit ? `${text}${THIN_SPACE}${unit}` : text);
-
-/** "88.4 %" in running text, where it must not break: the space is narrow and holds. */
-export const percent = (x: number, digits: number): string => `${fixed(x, digits)}${NARROW_NO_BREAK}%`;
-
-export const celsius = (t: number, digits = 0): string => withUnit(fixed(t, digits), "°C");
 
 export type Parsed = { ok: true; value: number } | { ok: false; message: string };
 

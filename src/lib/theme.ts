@@ -1,4 +1,5 @@
 import { useSyncExternalStore } from "react";
+import { lightPalette } from "../../shared/drawing/palette";
 
 export type Theme = "system" | "light" | "dark";
 export type ResolvedTheme = "light" | "dark";
@@ -22,19 +23,7 @@ export interface ThemeColours {
 const result = ["#f0e4c8", "#e0b873", "#c98a4b", "#8f5b4a", "#4b2e4b"] as const;
 
 export const themeColours: Record<ResolvedTheme, ThemeColours> = {
-  light: {
-    paper: "#f5f8f4",
-    sheet: "#ffffff",
-    ink: "#13231f",
-    muted: "#5a6b64",
-    rule: "#c6d1ca",
-    verdigris: "#14735f",
-    tint: "#d3ede3",
-    copper: "#ad4e17",
-    water: "#3e6e9e",
-    signal: "#bf1e2e",
-    result,
-  },
+  light: { ...lightPalette, result },
   dark: {
     paper: "#0f1a17",
     sheet: "#14231f",

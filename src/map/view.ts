@@ -80,5 +80,4 @@ export interface MapView {
 
 export const MONO = "JetBrains Mono, Gangueway Signs, ui-monospace, monospace";
 
-/** Windows are called A, B, C ... in the order of the solution. */
-export const windowName = (index: number): string => String.fromCharCode(65 + (index % 26));
+export { windowName } from "../../shared/windows/limitWords";

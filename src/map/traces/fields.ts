@@ -1,15 +1,10 @@
 import type { Field, Point } from "../../../shared/solution";
-import { boundaryLines } from "../geometry/boundaries";
+import { boundaryStyle } from "../../../shared/drawing/hatches";
+import { boundaryLines } from "../../../shared/drawing/boundaries";
 import { lineCoordinates } from "../geometry/rings";
 import { emphasis, metalColour } from "../metalStyle";
 import { type PlotTrace, trace } from "../plotTypes";
 import type { MapView } from "../view";
-
-const style = {
-  target: { width: 1.7, dash: "solid" },
-  gangue: { width: 1.5, dash: "solid" },
-  watched: { width: 1, dash: "5px,3px" },
-} as const;
 
 /** Lines between the fields of every metal, worked out once a solution and kept while the view changes.
  *  @returns  polylines by metal, V vs SHE */
@@ -39,7 +34,7 @@ export function boundaryTraces(lines: ReadonlyMap<string, readonly (readonly Poi
           uid: `fields-${role}${aside ? "-aside" : ""}`,
           name: `Field boundaries of ${metals.map((m) => m.element).join(", ")}`,
           mode: "lines",
-          line: { color: metalColour(first, view), ...style[role] },
+          line: { color: metalColour(first, view), ...boundaryStyle[role] },
           opacity: emphasis(first.element, view),
           ...lineCoordinates(
             metals.flatMap((m) => lines.get(m.element) ?? []),

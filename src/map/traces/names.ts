@@ -1,14 +1,15 @@
 import type { Field, Limit, Point, Solution } from "../../../shared/solution";
 import { HCN_PH } from "../../../shared/hazards/rules";
+import { speciesParts } from "../../../shared/species/parts";
 import { mapPixels, type Sheet } from "../boxes";
-import { isLit } from "../geometry/lit";
-import { type Box, type LabelWish, type Pixel, placeLabels, type Segment } from "../geometry/labels";
+import { isLit } from "../../../shared/drawing/lit";
+import { type Box, type LabelWish, type Pixel, placeLabels, type Segment } from "../../../shared/drawing/labels";
 import type { MapContent } from "../content";
 import { gasNames } from "./gases";
 import { practiceNames } from "./practice";
 import { metalColour } from "../metalStyle";
 import type { PlotTrace } from "../plotTypes";
-import { speciesHtml, speciesParts } from "../speciesText";
+import { speciesHtml } from "../speciesText";
 import { type PlacedText, textTrace } from "../texts";
 import { type MapView, windowName } from "../view";
 

@@ -1,9 +1,9 @@
 import { describe, expect, test } from "vitest";
 import type { Field, Point } from "../../../shared/solution";
 import { sheetBoxes, domains, mapPixels } from "../../../src/map/boxes";
-import { boundaryLines, chained } from "../../../src/map/geometry/boundaries";
-import { clipToBox, placeLabels, type Pixel } from "../../../src/map/geometry/labels";
-import { isLit } from "../../../src/map/geometry/lit";
+import { boundaryLines, chained } from "../../../shared/drawing/boundaries";
+import { clipToBox, placeLabels, type Pixel } from "../../../shared/drawing/labels";
+import { isLit } from "../../../shared/drawing/lit";
 import { lineCoordinates, ringCoordinates, signedArea2 } from "../../../src/map/geometry/rings";
 import { afterRelayout } from "../../../src/map/zoom";
 import { fields, millivolts, solution } from "./fixture";

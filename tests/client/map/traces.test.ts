@@ -4,7 +4,7 @@ import { reagentById } from "../../../shared/reach/reagents";
 import { sheetBoxes } from "../../../src/map/boxes";
 import { mapContent } from "../../../src/map/content";
 import { mapFigure } from "../../../src/map/figure";
-import { isLit } from "../../../src/map/geometry/lit";
+import { isLit } from "../../../shared/drawing/lit";
 import { hatchesOf } from "../../../src/map/metalStyle";
 import type { PlotTrace } from "../../../src/map/plotTypes";
 import { speciesHtml } from "../../../src/map/speciesText";

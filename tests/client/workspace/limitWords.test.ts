@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import type { Limit } from "../../../shared/solution";
-import { limitSentences, sideOf } from "../../../src/features/workspace/model/limitWords";
+import { limitSentences, sideOf } from "../../../shared/windows/limitWords";
 import { window as fixture } from "../map/fixture";
 
 const naming = {

@@ -1,10 +1,10 @@
 import type { Limit, Window } from "../../../../shared/solution";
+import { type LimitSentence, limitSentences, type Naming } from "../../../../shared/windows/limitWords";
 import { SpeciesName } from "../../../components/Formula";
 import { Term } from "../../../components/Help";
 import { SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
-import { type LimitSentence, limitSentences, type Naming } from "../model/limitWords";
 import { Reaction } from "./Reaction";
 
 /** Each way out of the window: what happens there, by which reaction, and how far it is. */

@@ -1,13 +1,13 @@
 import { fromSHE } from "../../../../shared/electrodes/convert";
 import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { marginWords } from "../../../../shared/windows/limitWords";
 import { SpeciesName } from "../../../components/Formula";
 import { Term } from "../../../components/Help";
 import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import { usePreferences } from "../../../lib/preferences";
-import { marginWords } from "../model/limitWords";
 import { usualProbe } from "../model/exports";
 
 /** Where to run, in figures one can read across the room, and how sure the loop can be of staying there. */

@@ -3,11 +3,11 @@ import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { HeldSetPoint } from "../../../../shared/setpoint/held";
 import type { SetPoint } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { limitSentences, marginWords, type Naming } from "../../../../shared/windows/limitWords";
 import { Button } from "../../../components/Button";
 import { Help } from "../../../components/Help";
 import { Note, Row } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
-import { limitSentences, marginWords, type Naming } from "../model/limitWords";
 
 /** Below this pH a glass electrode is an index only, and the loop is run on free acid. */
 export const FREE_ACID_BELOW = 1.5;

@@ -1,8 +1,8 @@
 import { electrodeSeries } from "../../../../shared/electrodes/series";
-import type { Solution, Window } from "../../../../shared/solution";
+import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { windowName } from "../../../map/view";
-import { type Naming, sideOf } from "./limitWords";
+import { sideOf } from "../../../../shared/windows/limitWords";
 
 /** A name for files: letters, digits and hyphens. */
 export const fileStem = (name: string): string =>
@@ -10,14 +10,6 @@ export const fileStem = (name: string): string =>
     .toLowerCase()
     .replace(/[^a-z0-9]+/g, "-")
     .replace(/^-|-$/g, "") || "plan";
-
-export const namingOf = (data: ChemicalData, solution: Pick<Solution, "fields">): Naming => {
-  const states = new Map(solution.fields.map((f) => [`${f.metal} ${f.species}`, f.state]));
-  return {
-    metalName: (element) => data.tables.elements.find((e) => e.symbol === element)?.name ?? element,
-    stateOf: (metal, species) => states.get(`${metal} ${species}`),
-  };
-};
 
 const header = [
   "window",

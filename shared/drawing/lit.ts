@@ -1,4 +1,4 @@
-import type { Point, Solution } from "../../../shared/solution";
+import type { Point, Solution } from "../solution";
 
 /** Whether a point lies in open ground: every metal there as required. Even-odd, so holes are shut. */
 export function isLit(windows: Solution["windows"], pH: number, Eh: number): boolean {

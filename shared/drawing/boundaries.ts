@@ -1,5 +1,5 @@
-import type { Frame } from "../../../shared/schemas/problem";
-import type { Field, Point } from "../../../shared/solution";
+import type { Frame } from "../schemas/problem";
+import type { Field, Point } from "../solution";
 
 /** Drawing tolerances in units of the frame: corners of neighbours are computed apart and agree to rounding only. */
 const SAME_PLACE = 1e-7;

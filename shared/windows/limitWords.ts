@@ -1,4 +1,5 @@
-import type { Limit, SetPoint, State, Window } from "../../../../shared/solution";
+import type { Limit, SetPoint, Solution, State, Window } from "../solution";
+import type { ChemicalData } from "../species/chemicalData";
 
 export type Side = "low pH" | "high pH" | "low Eh" | "high Eh";
 
@@ -45,6 +46,16 @@ export interface Naming {
   metalName: (element: string) => string;
   stateOf: (metal: string, species: string) => State | undefined;
 }
+
+/** Names of elements and states of fields, for the sentences.
+ *  @param data  library     @param solution  whose fields say the state of each species     @returns  both as functions */
+export const namingOf = (data: ChemicalData, solution: Pick<Solution, "fields">): Naming => {
+  const states = new Map(solution.fields.map((f) => [`${f.metal} ${f.species}`, f.state]));
+  return {
+    metalName: (element) => data.tables.elements.find((e) => e.symbol === element)?.name ?? element,
+    stateOf: (metal, species) => states.get(`${metal} ${species}`),
+  };
+};
 
 function what(limit: Limit, { metalName, stateOf }: Naming): string {
   switch (limit.kind) {
@@ -108,3 +119,6 @@ function along(
 
 /** How the margin reads: bands of pH alone where Eh is a mixed potential. */
 export const marginWords = (setPoint: SetPoint): string => (setPoint.mixedPotential ? "bands of pH" : "control bands");
+
+/** Windows are called A, B, C ... in the order of the solution. */
+export const windowName = (index: number): string => String.fromCharCode(65 + (index % 26));
