@@ -1,5 +1,6 @@
 import { analyse } from "../analysis";
-import { clip, type Convex } from "../geometry/convex";
+import type { Convex } from "../geometry/convex";
+import { common as commonGround } from "../geometry/overlay";
 import { connect, type Region } from "../geometry/region";
 import { ok, fail, type Outcome } from "../outcome";
 import { TEMPERATURE_RANGE_C, type Problem } from "../schemas/problem";
@@ -82,7 +83,7 @@ export function robustWindow(problem: Problem, ranges: Ranges, data: ChemicalDat
     for (const t of temperatures) {
       const pieces = solveAt(t);
       if (!pieces.ok) return pieces;
-      common = common === null ? pieces.value : common.flatMap((a) => pieces.value.flatMap((b) => meet(a, b) ?? []));
+      common = common === null ? pieces.value : commonGround(common, pieces.value);
     }
     const shapes = common ?? [];
     const regions = connect(shapes);
@@ -110,17 +111,6 @@ function badRange({ temperatureC, activities = {} }: Ranges): Outcome<never> | n
     if (!(lo > 0 && lo <= hi))
       return fail("OUT_OF_RANGE", `activities.${metal}`, `${lo} to ${hi}; must be above 0 and rise`);
   return null;
-}
-
-const INNER = -1000;
-
-function meet(a: Convex, b: Convex): Convex | null {
-  let part: Convex | null = a;
-  for (const line of b.lines) {
-    part = clip(part, line, INNER);
-    if (part === null) return null;
-  }
-  return part;
 }
 
 /** Every corner of one set of outlines has a corner of the other within reach, both ways. */
