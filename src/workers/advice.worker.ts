@@ -5,7 +5,8 @@ import { ok, valueOf } from "../../shared/outcome";
 import type { Problem } from "../../shared/schemas/problem";
 import type { ChemicalData } from "../../shared/species/chemicalData";
 import { libraryFrom } from "../../shared/species/library";
-import type { Answer, Answers, Question } from "./messages";
+import { sweep } from "../../shared/whatif/sweep";
+import type { Answer, Answers, Question, Telling } from "./messages";
 
 // The questions that take longer than a frame, away from the page. The functions are the solver's own.
 let data: ChemicalData | null = null;
@@ -16,14 +17,24 @@ function adviceOf(problem: Problem, library: ChemicalData): Answers["advice"] {
   return ok({ ...advice.value, openings: advice.value.openings.map((o) => tidied(o, library)) });
 }
 
-function answer(question: Exclude<Question, { kind: "tables" }>): Answer {
+type Asked = Exclude<Question, { kind: "tables" }>;
+
+function valueFor(question: Asked, library: ChemicalData): Answers[keyof Answers] {
+  const tell = (share: number) => self.postMessage({ id: question.id, share } satisfies Telling);
+  switch (question.kind) {
+    case "advice":
+      return adviceOf(question.problem, library);
+    case "robust":
+      return robustWindow(question.problem, question.ranges, library);
+    case "sweep":
+      return sweep(question.inputs, question.wish, library, tell);
+  }
+}
+
+function answer(question: Asked): Answer {
   if (data === null) return { id: question.id, failed: "the library has not arrived" };
   try {
-    const value =
-      question.kind === "advice"
-        ? adviceOf(question.problem, data)
-        : robustWindow(question.problem, question.ranges, data);
-    return { id: question.id, value };
+    return { id: question.id, value: valueFor(question, data) };
   } catch (error) {
     return { id: question.id, failed: error instanceof Error ? error.message : String(error) };
   }

@@ -1,5 +1,5 @@
 import type { ChemicalTables } from "../../shared/schemas/chemistry";
-import type { Answer, Answers, Question } from "./messages";
+import type { Answer, Answers, Question, Telling } from "./messages";
 
 type Asked<Kind extends keyof Answers> = Omit<Extract<Question, { kind: Kind }>, "id">;
 
@@ -18,8 +18,13 @@ export class Asker {
     this.make = make;
   }
 
-  /** @returns  the answer; rejects with what went wrong in the worker, or with the signal's reason */
-  ask<Kind extends keyof Answers>(question: Asked<Kind>, signal: AbortSignal): Promise<Answers[Kind]> {
+  /** @param tell  told the share that is done, where the worker says so
+   *  @returns  the answer; rejects with what went wrong in the worker, or with the signal's reason */
+  ask<Kind extends keyof Answers>(
+    question: Asked<Kind>,
+    signal: AbortSignal,
+    tell?: (share: number) => void,
+  ): Promise<Answers[Kind]> {
     const id = ++this.serial;
     const worker = this.ready();
     return new Promise((resolve, reject) => {
@@ -28,8 +33,9 @@ export class Asker {
         worker.removeEventListener("error", onError);
         signal.removeEventListener("abort", onAbort);
       };
-      const onMessage = ({ data }: MessageEvent<Answer>) => {
+      const onMessage = ({ data }: MessageEvent<Answer | Telling>) => {
         if (data.id !== id) return;
+        if ("share" in data) return tell?.(data.share);
         done();
         if ("failed" in data) reject(new Error(data.failed));
         else resolve(data.value as Answers[Kind]);

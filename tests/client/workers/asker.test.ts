@@ -62,3 +62,16 @@ test("what went wrong inside comes out in words", async () => {
   made[0]?.answer({ id: idOf(made[0].told[1]), failed: "no such table" });
   await expect(asked).rejects.toThrow("no such table");
 });
+
+test("the share that is done is told on the way, of its own question only", async () => {
+  const { made, asker } = stage();
+  const told: number[] = [];
+  const asked = asker.ask<"advice">({ kind: "advice", problem }, new AbortController().signal, (x) => told.push(x));
+  const id = idOf(made[0]?.told[1]);
+  made[0]?.answer({ id, share: 0.25 });
+  made[0]?.answer({ id: id + 1, share: 0.9 });
+  made[0]?.answer({ id, share: 0.5 });
+  made[0]?.answer({ id, value: "done" });
+  await expect(asked).resolves.toBe("done");
+  expect(told).toEqual([0.25, 0.5]);
+});

@@ -9,16 +9,20 @@ import { Asker } from "../../../workers/asker";
 
 /** An answer from the worker: not asked for, on its way, there, or failed. */
 export type Awaited<Value> =
-  { state: "none" } | { state: "waiting" } | { state: "there"; value: Value } | { state: "failed"; message: string };
+  | { state: "none" }
+  /** `share`: what is done of it, 0 to 1, where the worker says so */
+  | { state: "waiting"; share?: number }
+  | { state: "there"; value: Value }
+  | { state: "failed"; message: string };
 
 /** Long enough that a hand on a slider asks once. */
 const PAUSE = 350;
 
 /** Asks once the inputs rest; what is on its way when they move on is given up. `key` says what the question depends on. */
-function useAsked<Value>(
+export function useAsked<Value>(
   data: ChemicalData,
   key: string | null,
-  ask: (asker: Asker, key: string, signal: AbortSignal) => Promise<Outcome<Value>>,
+  ask: (asker: Asker, key: string, signal: AbortSignal, tell: (share: number) => void) => Promise<Outcome<Value>>,
 ): Awaited<Value> {
   const asker = useMemo(() => new Asker(data.tables), [data]);
   const [answer, setAnswer] = useState<{ key: string; of: Asker; result: Awaited<Value> } | null>(null);
@@ -27,7 +31,8 @@ function useAsked<Value>(
     if (key === null) return;
     const giveUp = new AbortController();
     const timer = setTimeout(() => {
-      ask(asker, key, giveUp.signal).then(
+      const tell = (share: number) => setAnswer({ key, of: asker, result: { state: "waiting", share } });
+      ask(asker, key, giveUp.signal, tell).then(
         (outcome) =>
           setAnswer({
             key,
