@@ -1,6 +1,6 @@
 import { FARADAY } from "../constants";
 import { davies, daviesSlope } from "../activity/davies";
-import type { PlanInputs, PlanMetal, PresetName } from "../schemas/plan";
+import type { PlanInputs, PlanMetal, PlanTotal, PresetName } from "../schemas/plan";
 import type { Problem } from "../schemas/problem";
 import { kelvin } from "../units";
 import { SULFIDE_SULFUR } from "../selection/components";
@@ -44,6 +44,8 @@ export function presetLeavesOut(data: ChemicalData, preset: PresetName, fullSulf
   return (row?.exclude_ids ?? "").split(";").filter((id) => id !== "");
 }
 
+const total = ({ component, activity }: PlanTotal) => ({ component, activity });
+
 /** The solver's question behind a plan.
  *  @param inputs  of a revision or a draft     @param data  library     @returns  a problem; the solver validates it
  *  @source  presets.csv for what the lixiviant leaves out, but for minerals of the feed, what is put back, and reagents dosed;
@@ -67,8 +69,8 @@ export function toProblem(inputs: PlanInputs, data: ChemicalData): Problem {
         ? { activity: m.value }
         : { gPerL: m.value, gamma: gammaOf(data, m, inputs.ionicStrength, inputs.temperatureC) }),
     })),
-    ligands: inputs.ligands,
-    others: inputs.others,
+    ligands: inputs.ligands.map(total),
+    others: inputs.others.map(total),
     sulfateReduction: inputs.sulfateReduction,
     solidsBasis: inputs.solidsBasis,
     feedMinerals: inputs.feedMinerals,

@@ -1,9 +1,10 @@
 import { ok, type Outcome } from "../outcome";
 import type { Problem } from "../schemas/problem";
-import { componentKind, SULFIDE_SULFUR, sulfurComponent } from "../selection/components";
-import type { ChemicalData, Species } from "../species/chemicalData";
+import { SULFIDE_SULFUR } from "../selection/components";
+import type { ChemicalData } from "../species/chemicalData";
 import { unknownSpecies } from "./names";
 import { overallOf, type OverallQuestion, type OverallReaction } from "./overall";
+import { isLigand, namedProducts, partsOf } from "./products";
 import { redoxReagentById } from "./redoxReagents";
 import { standingAt, type Standing } from "./standing";
 
@@ -11,7 +12,8 @@ export interface SetPointQuestion extends Partial<Pick<OverallQuestion, "redox" 
   /** species id: feed mineral, metal, or ion of the liquor */
   readonly from: string;
   readonly at: { readonly pH: number; readonly Eh: number };
-  /** products chosen by hand, component -> id, in place of what rules at the set point: `{ "S(sulfide)": "SO4^2-(aq)" }` */
+  /** products chosen by hand, component -> id, in place of what rules at the set point: `{ "S(sulfide)": "SO4^2-(aq)" }`; the cementing
+   *  metal's element among them */
   readonly products?: Readonly<Record<string, string>>;
 }
 
@@ -21,16 +23,6 @@ export interface OverallAtSetPoint extends OverallReaction {
   readonly assumed: Standing["assumed"];
 }
 
-const partsOf = (species: Species | undefined, sulfateReduction: boolean): string[] =>
-  Object.keys(species?.composition ?? {})
-    .filter((c) => c !== "H" && c !== "O")
-    .map((c) => (c === "S" && species ? sulfurComponent(species, sulfateReduction) : c));
-
-const isLigand = (data: ChemicalData, component: string): boolean => {
-  const kind = componentKind(data, component);
-  return kind === "ligand" || kind === "partner";
-};
-
 /** A product chosen by hand may take sulfide sulfur to sulfate where the plan would not. */
 const takesSulfideUp = (data: ChemicalData, products: ReadonlyMap<string, string>): boolean =>
   partsOf(data.species.get(products.get(SULFIDE_SULFUR) ?? ""), false).includes("S");
@@ -39,7 +31,8 @@ const takesSulfideUp = (data: ChemicalData, products: ReadonlyMap<string, string
  *  the liquor's own ligands; a cementing metal becomes what its element is there.
  *  @param problem  a plan's question     @param data  the library
  *  @param asked  start and set point, and what the user chooses: redox reagent, acid (by the lixiviant unless named), base, metal, products
- *  @returns  as `overallOf`, with the products found and the activities assumed for what the plan does not name
+ *  @returns  as `overallOf`, with the products found and the activities assumed for what the plan does not name; INVALID_INPUT for a
+ *    product that cannot be one (`products.ts`)
  *  @source  docs/method.md, step 8. While sulfate is not reduced a sulfide's sulfur stops at sulfur or H2S, above 150 C at sulfate */
 export function overallReaction(
   problem: Problem,
@@ -55,17 +48,19 @@ export function overallReaction(
   if (!bare.ok) return bare;
   const { sulfateReduction } = bare.value;
   const parts = partsOf(from, sulfateReduction);
-  const named = asked.products ?? {};
-  const wanted = parts.filter((c) => named[c] === undefined);
-  const standing = standingAt(problem, data, asked.at, [...wanted, ...(cementing === undefined ? [] : [cementing])]);
+  const chosen = namedProducts(data, from, asked.products ?? {}, { parts, cementing, sulfateReduction });
+  if (!chosen.ok) return chosen;
+  const { named, brings } = chosen.value;
+  const wanted = [...parts, ...(cementing === undefined ? [] : [cementing])].filter((c) => !named.has(c));
+  const standing = standingAt(problem, data, asked.at, [...wanted, ...brings]);
   if (!standing.ok) return standing;
   const { species, assumed } = standing.value;
   const products = new Map<string, string>();
   for (const component of parts) {
-    const id = named[component] ?? species.get(component);
+    const id = named.get(component) ?? species.get(component);
     if (id !== undefined) products.set(component, id);
   }
-  const redoxMade = cementing === undefined ? undefined : species.get(cementing);
+  const redoxMade = cementing === undefined ? undefined : (named.get(cementing) ?? species.get(cementing));
   const oneSulfur = sulfateReduction || takesSulfideUp(data, products);
   // Ligands that the products (or the cementing metal's) take up come as the liquor holds them.
   const made = [...products.values(), ...(redoxMade === undefined ? [] : [redoxMade])];

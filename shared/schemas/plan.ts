@@ -57,13 +57,29 @@ export const holdRanges = z.object({
 });
 export type HoldRanges = z.infer<typeof holdRanges>;
 
+/** A total of the liquor: mol/L is what counts, and what it was typed in is how it is shown. */
+export const planTotal = componentTotal.extend({ unit: z.literal("g/L").optional() });
+export type PlanTotal = z.infer<typeof planTotal>;
+
+/** A control band typed in g/L of free acid: the pH band beside it is its conversion at this pH, made when it was typed. */
+export const freeAcidBand = z.object({ gPerL: z.number().positive().max(500), atPH: z.number().min(-2).max(1.5) });
+export type FreeAcidBand = z.infer<typeof freeAcidBand>;
+
+/** How an overall reaction is to be written, by what it starts from: products by component, and what closes its electrons. */
+export const overallChoice = z.object({
+  products: z.record(z.string(), z.string()).optional(),
+  /** an id of reactions/redoxReagents.ts, or "open": electrons stay */
+  redox: z.string().optional(),
+});
+export type OverallChoice = z.infer<typeof overallChoice>;
+
 /** Everything a plan asks; a revision freezes it. */
 export const planInputs = z.object({
   temperatureC: z.number().min(TEMPERATURE_RANGE_C.min).max(TEMPERATURE_RANGE_C.max),
   preset: z.enum(presetNames),
   metals: z.array(planMetal).min(1).max(16),
-  ligands: z.array(componentTotal),
-  others: z.array(componentTotal),
+  ligands: z.array(planTotal),
+  others: z.array(planTotal),
   /** mol/kg, for Davies; null: gamma 1 */
   ionicStrength: z.number().positive().max(20).nullable(),
   sulfateReduction: z.boolean(),
@@ -75,6 +91,10 @@ export const planInputs = z.object({
   frame: frameSchema,
   water: waterSchema,
   controlBand: controlBandSchema,
+  /** absent: the band of pH was typed as pH */
+  freeAcidBand: freeAcidBand.optional(),
+  /** choices for overall reactions, by species id of the start; the window does not see them */
+  overall: z.record(z.string(), overallChoice).optional(),
   /** for the caution rules alone; the solver does not see it */
   circuit: circuitSchema.optional(),
   /** over which the window is to hold; absent: only what the plan says */

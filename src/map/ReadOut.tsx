@@ -1,7 +1,9 @@
 import { useMemo } from "react";
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../shared/activity/freeAcid";
 import { speciesAt } from "../../shared/setpoint/crosscut";
 import type { Point, Solution } from "../../shared/solution";
 import { SpeciesName } from "../components/Formula";
+import { AcidAmount } from "../components/AcidAmount";
 import { MetalName } from "../components/MetalLine";
 import { fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
@@ -17,6 +19,7 @@ export function ReadOut({
   metals,
   scale,
   rest,
+  freeAcid,
 }: {
   store: CursorStore;
   solution: Solution;
@@ -24,6 +27,8 @@ export function ReadOut({
   scale: PotentialScale;
   /** what is read while nobody points at the map */
   rest: { at: Point; words: string } | null;
+  /** of a sulfate liquor */
+  freeAcid?: FreeAcidCurve | null;
 }) {
   const cursor = useCursor(store);
   const hatches = useMemo(() => hatchesOf(metals), [metals]);
@@ -42,6 +47,7 @@ export function ReadOut({
         <>
           <span className="font-mono whitespace-nowrap">
             pH {fixed(at[0], 2)}
+            {freeAcid && at[0] < FREE_ACID_BELOW && <AcidHere curve={freeAcid} pH={at[0]} />}
             <span className="mx-2">{scale.format(at[1])}</span>
             <span className="text-muted">vs {scale.short}</span>
           </span>
@@ -83,5 +89,16 @@ export function ReadOut({
         </span>
       )}
     </div>
+  );
+}
+
+/** What pH 1 means in the words of the plant; nothing where the sulfate of the liquor could not balance so much. */
+function AcidHere({ curve, pH }: { curve: FreeAcidCurve; pH: number }) {
+  const { gPerL, withinSulfate } = curve.at(pH);
+  if (!withinSulfate) return null;
+  return (
+    <span className="ml-2 text-muted" title="Free acid by pK2 of bisulfate and Davies: indicative, control on a titration">
+      <AcidAmount gPerL={gPerL} />
+    </span>
   );
 }

@@ -56,8 +56,9 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
         reagents: content.reaches.length,
         crosscuts,
         reach,
+        freeAcid: content.freeAcid !== null,
       }),
-    [size, view.metals.length, content.reaches.length, crosscuts, reach],
+    [size, view.metals.length, content.reaches.length, crosscuts, reach, content.freeAcid],
   );
   const figure = useMemo(() => {
     if (!sheet) return null;
@@ -137,7 +138,7 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
             <Button
               kind="quiet"
               className="no-print absolute! h-auto! text-xs!"
-              style={{ left: 8, bottom: sheet.map.y0 - 40 }}
+              style={{ left: 8, bottom: sheet.map.y0 - (content.freeAcid ? 60 : 40) }}
               onClick={reset}
             >
               whole frame

@@ -21,28 +21,31 @@ export interface SheetWishes {
   reagents: number;
   crosscuts: boolean;
   reach: boolean;
+  /** a second row under the pH axis */
+  freeAcid?: boolean;
 }
 
 const LEFT = 62;
 const TOP = 22;
 const RIGHT = 6;
-const AXIS_BELOW = 42;
+const AXIS = { plain: 42, withFreeAcid: 60 };
 const STRIP = { row: 22, column: 24 };
 const REACH_COLUMN = 18;
 const GAP = 14;
 
 /** Where everything stands; strips keep their thickness whatever the sheet's size, the map takes the rest.
  *  @param width, height  of the whole figure, px     @returns  boxes in px from the figure's lower left corner */
-export function sheetBoxes(width: number, height: number, { metals, reagents, crosscuts, reach }: SheetWishes): Sheet {
+export function sheetBoxes(width: number, height: number, { metals, reagents, crosscuts, reach, freeAcid = false }: SheetWishes): Sheet {
   const columns = crosscuts ? metals * STRIP.column : 0;
   const rows = crosscuts ? metals * STRIP.row : 0;
+  const axisBelow = freeAcid ? AXIS.withFreeAcid : AXIS.plain;
   const bars = reach && reagents > 0 ? reagents * REACH_COLUMN : 0;
-  const margin = { l: LEFT, r: RIGHT, t: TOP, b: crosscuts ? 6 : AXIS_BELOW, pad: 0 as const };
+  const margin = { l: LEFT, r: RIGHT, t: TOP, b: crosscuts ? 6 : axisBelow, pad: 0 as const };
   const mapRight = Math.max(
     LEFT + 120,
     width - RIGHT - columns - (columns > 0 ? GAP : 0) - bars - (bars > 0 ? GAP : 0),
   );
-  const mapBottom = Math.min(height - TOP - 120, crosscuts ? margin.b + rows + AXIS_BELOW : AXIS_BELOW);
+  const mapBottom = Math.min(height - TOP - 120, crosscuts ? margin.b + rows + axisBelow : axisBelow);
   const map = { x0: LEFT, x1: mapRight, y0: mapBottom, y1: height - TOP };
   const barsLeft = mapRight + GAP;
   const columnsLeft = bars > 0 ? barsLeft + bars + GAP : mapRight + GAP;

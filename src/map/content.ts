@@ -1,3 +1,4 @@
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../shared/activity/freeAcid";
 import type { HazardRegion } from "../../shared/hazards/regions";
 import type { Reach } from "../../shared/reach/reach";
 import { crosscut } from "../../shared/setpoint/crosscut";
@@ -28,6 +29,8 @@ export interface MapContent {
   gases: readonly HazardRegion[];
   practice: readonly ShownRange[];
   trials: { marks: readonly TrialMark[]; scale: ColourScale } | null;
+  /** free acid against pH, where the frame holds a pH at which it counts; null elsewhere and without sulfate */
+  freeAcid: FreeAcidCurve | null;
 }
 
 export interface ContentWishes {
@@ -44,11 +47,12 @@ export interface ContentWishes {
   gases?: readonly HazardRegion[];
   practice?: readonly ShownRange[];
   trials?: MapContent["trials"];
+  freeAcid?: FreeAcidCurve | null;
 }
 
 export function mapContent(wishes: ContentWishes): MapContent {
   const { metals, solution, other, through, reaches, cyanide, robust = [], gases = [], practice = [] } = wishes;
-  const { trials = null } = wishes;
+  const { trials = null, freeAcid = null } = wishes;
   return {
     solution,
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
@@ -69,5 +73,6 @@ export function mapContent(wishes: ContentWishes): MapContent {
     gases,
     practice,
     trials,
+    freeAcid: solution.frame.pH[0] < FREE_ACID_BELOW ? freeAcid : null,
   };
 }

@@ -1,6 +1,7 @@
 import { domains, type Sheet } from "./boxes";
 import type { MapContent } from "./content";
 import type { Figure, PlotAnnotation, PlotAxis, PlotLayout, PlotTrace } from "./plotTypes";
+import { acidRow } from "./traces/acidAxis";
 import { alongEhNames, alongPHNames, crosscutTraces, stripHeads, type StripSizes } from "./traces/crosscuts";
 import { boundaryTraces } from "./traces/fields";
 import { gasTraces } from "./traces/gases";
@@ -140,6 +141,7 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
     ticklabeloverflow: "allow",
     tickfont: { family: MONO, size: 11, color: colours.ink },
   };
+  const acid = acidRow(content.freeAcid, sheet, view);
   const heads = stripHeads(content.crosscuts, view);
   const rows = content.crosscuts.length;
   const layout: PlotLayout = {
@@ -164,7 +166,8 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
       nticks: 9,
       tickformat: scale.unit === "V" ? ".1f" : "d",
     },
-    annotations: annotations(content, sheet, view),
+    annotations: [...annotations(content, sheet, view), ...acid.annotations],
+    shapes: acid.shapes,
   };
   if (sheet.alongPH)
     layout.yaxis2 = { ...bare, ...heads, domain: domains(sheet, sheet.alongPH).y, range: [rows, 0], anchor: "x" };

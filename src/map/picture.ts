@@ -25,6 +25,7 @@ export function captionedFigure(
     reagents: content.reaches.length,
     crosscuts: crosscuts && content.through !== null,
     reach,
+    freeAcid: content.freeAcid !== null,
   });
   const { data, layout } = mapFigure(content, sheet, { ...view, visible: view.frame, traceTrials: true });
   const [head, foot] = [30, LINE * caption.length + 18];

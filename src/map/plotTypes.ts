@@ -59,6 +59,17 @@ export interface PlotAnnotation {
   yshift?: number;
 }
 
+export interface PlotShape {
+  type: "line";
+  xref: string;
+  yref: string;
+  x0: number;
+  x1: number;
+  y0: number;
+  y1: number;
+  line: { color: string; width: number };
+}
+
 export interface PlotAxis {
   domain: [number, number];
   range: [number, number];
@@ -105,6 +116,7 @@ export interface PlotLayout {
   xaxis3?: PlotAxis;
   yaxis2?: PlotAxis;
   annotations: PlotAnnotation[];
+  shapes?: PlotShape[];
 }
 
 export interface Figure {

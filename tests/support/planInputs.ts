@@ -24,7 +24,7 @@ export const unusualInputs: PlanInputs = {
       gamma: null,
     },
   ],
-  ligands: [{ component: "NH3", activity: 1.75 }],
+  ligands: [{ component: "NH3", activity: 1.75, unit: "g/L" }],
   others: [{ component: "K", activity: 0.05 }],
   ionicStrength: 0.35,
   sulfateReduction: true,
@@ -36,4 +36,6 @@ export const unusualInputs: PlanInputs = {
   frame: { pH: [7.5, 12.5], Eh: [-0.75, 0.65] },
   water: { bound: "upper", oxygenV: 0.3, hydrogenV: 0.7 },
   controlBand: { pH: 0.25, Eh: 0.045 },
+  freeAcidBand: { gPerL: 2.5, atPH: 0.85 },
+  overall: { "CuO(s)": { products: { Cu: "Cu^2+(aq)" }, redox: "open" } },
 };

@@ -1,4 +1,5 @@
 import { useMemo } from "react";
+import type { FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { HazardRegion } from "../../../../shared/hazards/regions";
 import { type Reach, reachesOf } from "../../../../shared/reach/reach";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
@@ -43,6 +44,8 @@ interface Wishes {
   robust: readonly Outline[];
   /** gases to be drawn */
   gases: readonly HazardRegion[];
+  /** of a sulfate liquor */
+  freeAcid: FreeAcidCurve | null;
 }
 
 const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
@@ -50,7 +53,7 @@ const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
 /** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
 export function useMapModel(w: Wishes): MapModel | null {
   const { inputs, problem, solution, data, scale, colours, layers, plain, focus, chosen, pinned, reagents } = w;
-  const { robust, gases } = w;
+  const { robust, gases, freeAcid } = w;
   const { metals: planMetals, controlBand, preset } = inputs;
   const frame = solution?.frame ?? inputs.frame;
   const temperatureC = solution?.temperatureC ?? inputs.temperatureC;
@@ -71,8 +74,8 @@ export function useMapModel(w: Wishes): MapModel | null {
   const practice = usePractice(layers.practice, { preset, metals: planMetals, temperatureC });
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
   const asked = useMemo(
-    () => solution && { metals, solution, other, through, reaches, cyanide, robust, gases, practice },
-    [metals, solution, other, through, reaches, cyanide, robust, gases, practice],
+    () => solution && { metals, solution, other, through, reaches, cyanide, robust, gases, practice, freeAcid },
+    [metals, solution, other, through, reaches, cyanide, robust, gases, practice, freeAcid],
   );
   const view = useMemo(
     () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
