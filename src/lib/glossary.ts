@@ -31,7 +31,21 @@ export const glossary = {
   activity: {
     title: "Activity",
     text: [
-      "Effective molality. A tenor in g/L becomes an activity as molality times the activity coefficient gamma: 1 unless you say otherwise, Davies up to an ionic strength of 0.5, or typed.",
+      "Effective molality, a number without a unit. A tenor in g/L becomes an activity as molality times the activity coefficient gamma: 1 unless you say otherwise, Davies up to an ionic strength of 0.5, or typed.",
+    ],
+  },
+  total: {
+    title: "Total",
+    text: [
+      "All of a ligand or other component in the liquor, whatever it is bound to, in mol/L or g/L. It counts as an activity: molality with an activity coefficient of 1, a litre of liquor taken for a kilogram of water.",
+      "In g/L each is weighed as the trade does: sulfate as SO4, carbonate as CO3, cyanide as CN, glycine as the acid.",
+    ],
+  },
+  freeAcidBand: {
+    title: "Band of free acid",
+    text: [
+      "Below pH 1.5 a sulfate loop is run on free acid by titration. A band in g/L is turned into pH at the set point: more acid is the shorter way in pH, less acid the longer. The margin counts the longer one on both sides, so it is never made out larger than it is.",
+      "The conversion rests on the second dissociation of sulfuric acid and on activity coefficients by Davies, and is indicative beyond an ionic strength of 0.5.",
     ],
   },
   solidsBasis: {

@@ -1,4 +1,4 @@
-import type { PlanInputs, PlanMetal } from "../../shared/schemas/plan";
+import type { OverallChoice, PlanInputs, PlanMetal, PlanTotal } from "../../shared/schemas/plan";
 import { celsius, fixed, MINUS, significant, withUnit } from "./format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord, waterBoundWord } from "./planWords";
 
@@ -45,14 +45,15 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
   const changes: PlanChange[] = [];
   compareKeyed(changes, before.metals, after.metals, (m) => m.element, metalText);
   compare(changes, "Lixiviant", lixiviantName[before.preset], lixiviantName[after.preset]);
-  const total = (c: { activity: number }) => significant(c.activity, 3);
+  const total = (c: PlanTotal) =>
+    withUnit(significant(c.activity, 3), "mol/L") + (c.unit === "g/L" ? ", typed in g/L" : "");
   compareKeyed(
     changes,
     before.ligands,
     after.ligands,
     (c) => c.component,
     total,
-    (k) => `${k}, total activity`,
+    (k) => `${k}, total`,
   );
   compareKeyed(
     changes,
@@ -60,7 +61,7 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
     after.others,
     (c) => c.component,
     total,
-    (k) => `${k}, total activity`,
+    (k) => `${k}, total`,
   );
   const ionic = (i: PlanInputs) =>
     i.ionicStrength === null ? "not given" : withUnit(significant(i.ionicStrength), "mol/kg");
@@ -86,7 +87,10 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
     (i.water.oxygenV ? `, oxygen +${fixed(i.water.oxygenV, 2)} V` : "") +
     (i.water.hydrogenV ? `, hydrogen ${MINUS}${fixed(i.water.hydrogenV, 2)} V` : "");
   compare(changes, "Bounded by", water(before), water(after));
-  const band = (i: PlanInputs) => `pH ±${fixed(i.controlBand.pH, 2)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
+  const acidBand = ({ freeAcidBand: b }: PlanInputs) =>
+    b ? ` (free acid ±${withUnit(significant(b.gPerL), "g/L")} at pH ${fixed(b.atPH, 2)})` : "";
+  const band = (i: PlanInputs) =>
+    `pH ±${fixed(i.controlBand.pH, 2)}${acidBand(i)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
   compare(changes, "Control bands", band(before), band(after));
   const hold = (i: PlanInputs) => {
     const { temperatureC: t, activities = {} } = i.ranges ?? {};
@@ -97,5 +101,19 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
   const held = ({ heldSetPoint: at }: PlanInputs) =>
     at ? `pH ${fixed(at.pH, 2)}, ${fixed(at.Eh, 3)} V vs SHE, by hand` : "deepest point";
   compare(changes, "Set point", held(before), held(after));
+  compareKeyed(
+    changes,
+    Object.entries(before.overall ?? {}),
+    Object.entries(after.overall ?? {}),
+    ([from]) => from,
+    ([, choice]) => overallText(choice),
+    (from) => `Overall reaction of ${from}`,
+  );
   return changes;
 }
+
+const overallText = ({ products = {}, redox }: OverallChoice): string =>
+  [
+    ...Object.entries(products).map(([component, id]) => `${component} to ${id}`),
+    ...(redox === undefined ? [] : [redox === "open" ? "electrons left open" : `electrons by ${redox}`]),
+  ].join(", ");

@@ -61,7 +61,7 @@ test("says what changed, from what, to what, in the order of the panels", () => 
     { what: "Zn", from: "target, dissolved, carry 0.080", to: "target, dissolved, carry 120\u2009g/L" },
     { what: "Fe", from: "gangue, solid, at most 1.0e\u22125", to: null },
     { what: "Cu", from: null, to: "watched, free, at 1.0e\u22123" },
-    { what: "S, total activity", from: "0.500", to: null },
+    { what: "S, total", from: "0.500\u2009mol/L", to: null },
     { what: "Temperature", from: "25.0\u2009°C", to: "60.0\u2009°C" },
     { what: "Solids basis", from: "aged, most stable", to: "fresh, form in hours" },
     { what: "Left out: ZnO(s)", from: null, to: "slow" },

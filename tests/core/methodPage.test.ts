@@ -1,5 +1,6 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
+import { acidBand, freeAcid } from "../../shared/activity/freeAcid";
 import { analyse } from "../../shared/analysis";
 import { FARADAY, GAS_CONSTANT, LN10 } from "../../shared/constants";
 import { difference } from "../../shared/geometry/envelope";
@@ -115,4 +116,13 @@ test("section 6: a triangle, a rectangle, a couple", () => {
   const mg = 0.1 * 1000 * library.molarMass.get("Fe")!;
   says(`Iron at 0.1 is ${mg.toFixed(0)} mg/L; the scarcer form has 10 mg/L where the ratio is ${(mg / 10).toFixed(0)}`);
   says(`that is ${((RT(25) / FARADAY) * Math.log(mg / 10)).toFixed(4)} V from E0`);
+});
+
+test("free acid: a band of 2 g/L at pH 0.8 in half-molar sulfate", () => {
+  const { low, high, counted } = valueOf(acidBand(library, 2, 0.8, 0.5, 25));
+  says(
+    `At pH 0.80 free acid is ${valueOf(freeAcid(library, 0.8, 0.5, 25)).gPerL.toFixed(2)} g/L; +2 and -2 g/L stand at pH ${(0.8 - low).toFixed(3)} and ${(0.8 + high).toFixed(3)}: -${low.toFixed(3)} and +${high.toFixed(3)}, and ${counted.toFixed(3)} counts.`,
+  );
+  const record = readFileSync("docs/decisions/0014-bands-of-free-acid.md", "utf8");
+  expect(record).toContain(`-${low.toFixed(3)} and +${high.toFixed(3)} pH for 2 g/L at pH 0.8`);
 });

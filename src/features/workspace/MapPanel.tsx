@@ -55,6 +55,7 @@ export function MapPanel(props: MapPanelProps) {
             metals={metals}
             scale={scale}
             rest={{ at: through, words: where }}
+            freeAcid={asked.freeAcid ?? null}
           />
         </div>
         <div className="no-print flex shrink-0 gap-3 leading-none">

@@ -1,5 +1,6 @@
 import { useCallback, useMemo, useState } from "react";
 import { useNavigate } from "react-router-dom";
+import { freeAcidOf } from "../../../shared/plan/freeAcidOf";
 import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
 import type { Point } from "../../../shared/solution";
@@ -98,6 +99,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     })),
   ]);
 
+  const setPoint = solution?.windows[chosen]?.setPoint ?? null;
   const asking = useMemo(
     () => ({
       inputs,
@@ -106,15 +108,18 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
       data,
       solution,
       failure,
+      setPoint,
       scale,
       // on paper a control is only its value
       readOnly: frozen !== null || printing,
       focus,
       onFocus: setFocus,
     }),
-    [inputs, draft.edit, draft.settle, data, solution, failure, scale, frozen, printing, focus],
+    [inputs, draft.edit, draft.settle, data, solution, failure, setPoint, scale, frozen, printing, focus],
   );
 
+  const { ligands, temperatureC } = inputs;
+  const freeAcid = useMemo(() => freeAcidOf(data, { ligands, temperatureC }), [data, ligands, temperatureC]);
   const trials = usePlanTrials(plan.id, inputs, solution, data, layers.trials);
   const shownTrials = trials.shown;
   const map = useMapModel({
@@ -132,6 +137,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     reagents,
     robust: robustOutlines,
     gases: drawnGases,
+    freeAcid,
   });
   const { edit } = draft;
   const mayMove = frozen === null;
@@ -254,7 +260,9 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
                 robust={robust}
                 held={held}
                 gases={gases}
+                freeAcid={freeAcid}
                 onApply={mayMove ? (opening) => edit(applyOpening(opening)) : undefined}
+                onInputs={mayMove ? edit : undefined}
                 onLetGo={mayMove ? () => edit(holdSetPoint(null)) : undefined}
               />
             )}

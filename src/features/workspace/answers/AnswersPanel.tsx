@@ -1,5 +1,6 @@
 import { lazy, Suspense } from "react";
 import { Link } from "react-router-dom";
+import type { FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { Advice, Opening } from "../../../../shared/advice/openings";
 import type { Robust } from "../../../../shared/advice/robust";
 import { cautionsFor, hazardContext } from "../../../../shared/hazards/rules";
@@ -13,6 +14,7 @@ import { namingOf } from "../../../../shared/windows/limitWords";
 import { Loading } from "../../../components/status";
 import type { PotentialScale } from "../../../lib/potential";
 import { windowName } from "../../../map/view";
+import type { Edit } from "../model/edit";
 import type { Awaited } from "../model/useAsked";
 import type { Gases } from "../model/usePoint";
 import { CautionsBlock } from "./CautionsBlock";
@@ -50,9 +52,13 @@ export interface AnswersProps {
   robust: Awaited<Robust>;
   held: HeldSetPoint | null;
   gases: Gases | null;
+  /** free acid against pH of a sulfate liquor */
+  freeAcid: FreeAcidCurve | null;
   /** both absent where the plan is only looked at */
   onApply?: ((opening: Opening) => void) | undefined;
   onLetGo?: (() => void) | undefined;
+  /** any other change of the plan */
+  onInputs?: ((edit: Edit) => void) | undefined;
 }
 
 /** The right side: where to run, what shuts the window, what reaches it, and what to beware of. */
@@ -78,10 +84,10 @@ export function AnswersPanel(props: AnswersProps) {
         <>
           <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />
           {held && <HeldNote held={held} naming={naming} {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})} />}
-          <FreeAcidRow at={window.setPoint} inputs={inputs} data={data} />
+          <FreeAcidRow at={window.setPoint} inputs={inputs} curve={props.freeAcid} />
           {cautions.length > 0 && said}
           {gases && urgent && <GasBlock gases={gases} />}
-          <LimitsBlock window={window} name={name} naming={naming} scale={scale} />
+          <LimitsBlock window={window} name={name} naming={naming} scale={scale} freeAcid={props.freeAcid} />
           {props.robust.state !== "none" && (
             <Suspense fallback={null}>
               <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
@@ -113,7 +119,16 @@ export function AnswersPanel(props: AnswersProps) {
         choose={props.chooseReagents}
       />
       <CouplesBlock problem={problem} data={data} pH={props.pH} scale={scale} />
-      {window && <OverallBlock problem={problem} inputs={inputs} solution={solution} window={window} data={data} />}
+      {window && (
+        <OverallBlock
+          problem={problem}
+          inputs={inputs}
+          solution={solution}
+          window={window}
+          data={data}
+          onInputs={props.onInputs}
+        />
+      )}
       {gases && !urgent && <GasBlock gases={gases} />}
       <WarningsBlock warnings={solution.warnings} />
       <FieldsBlock solution={solution} data={data} />

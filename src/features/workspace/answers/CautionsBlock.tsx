@@ -7,6 +7,7 @@ import { Check } from "../../../components/choice";
 import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
 import { Fragment } from "react";
+import { MethodLink } from "../../../components/SourceLink";
 import { TextField } from "../../../components/TextField";
 
 /** Cautions that this set point calls for, with the liquor's usual one; the deference wording stands with the last. */
@@ -49,6 +50,9 @@ export function CautionsBlock({
         </Caution>
       ))}
       <Caution limits={quoted}>{presetCaution[preset]}</Caution>
+      <p className="text-xs text-muted">
+        When a caution is called for, and by what: <MethodLink to="hazards">the rules</MethodLink>.
+      </p>
     </section>
   );
 }

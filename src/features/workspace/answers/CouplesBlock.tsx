@@ -2,7 +2,7 @@ import { useDeferredValue, useMemo } from "react";
 import { liquorCouples, type LiquorCouple } from "../../../../shared/reach/liquorCouples";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { SpeciesName } from "../../../components/Formula";
+import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { Note } from "../../../components/text";
 import { fixed, significant, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
@@ -33,13 +33,18 @@ export function CouplesBlock({
     `${fixed(scale.toShown(lo), scale.digits)} … ${scale.format(hi)}`;
   return (
     <>
-      <p className="pt-2 text-sm text-muted">The liquor’s own couples at pH {fixed(at, 2)}, from 1 : 100 to 100 : 1</p>
+      <p className="pt-2 text-sm text-muted">
+        The liquor’s own couples at pH {fixed(at, 2)}, from <span className="whitespace-nowrap">1 : 100</span> to{" "}
+        <span className="whitespace-nowrap">100 : 1</span>
+        {" · "}
+        <MethodLink to="reach" />
+      </p>
       <ul>
         {couples.map((couple) => (
           <li key={`${couple.reduced} ${couple.oxidised}`} className="hairline py-1">
             <div className="flex items-baseline justify-between gap-3">
               <span>
-                <SpeciesName id={couple.oxidised} /> / <SpeciesName id={couple.reduced} />
+                <SpeciesLink id={couple.oxidised} /> / <SpeciesLink id={couple.reduced} />
               </span>
               <span className="font-mono whitespace-nowrap">{couple.held ? range(couple.held) : "none"}</span>
             </div>
@@ -71,7 +76,7 @@ function Why({
           {solids.map((s, i) => (
             <span key={s.species}>
               {i > 0 && ", "}
-              <SpeciesName id={s.species} />
+              <SpeciesLink id={s.species} />
             </span>
           ))}
         </>

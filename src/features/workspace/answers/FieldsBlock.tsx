@@ -4,8 +4,8 @@ import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { kelvin } from "../../../../shared/units";
 import { FormulaText } from "../../../components/FormulaText";
-import { SpeciesName } from "../../../components/Formula";
 import { Term } from "../../../components/Help";
+import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { celsius } from "../../../lib/format";
 import { Fold } from "../asks/Fold";
@@ -23,7 +23,15 @@ export function FieldsBlock({ solution, data }: { solution: Solution; data: Chem
   const doubtful = rows.filter((r) => r.warning !== null).length;
   return (
     <section aria-label="Fields drawn" className="mt-4">
-      <SectionHead aside={<Term word="trustedRange">trusted range</Term>}>Fields drawn</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            <Term word="trustedRange">trusted range</Term> · <MethodLink to="trustedRange" />
+          </>
+        }
+      >
+        Fields drawn
+      </SectionHead>
       <Fold
         className="pt-1"
         title={
@@ -36,8 +44,8 @@ export function FieldsBlock({ solution, data }: { solution: Solution; data: Chem
           {rows.map((row) => (
             <li key={row.id} className="hairline py-1">
               <div className="flex items-baseline justify-between gap-3">
-                <SpeciesName id={row.id} withPhase />
-                <span className="text-muted">grade {row.grade}</span>
+                <SpeciesLink id={row.id} withPhase />
+                <MethodLink to="grades">grade {row.grade}</MethodLink>
               </div>
               <div className="text-muted">
                 {row.model}, {row.trusted[0]} to {celsius(row.trusted[1])}

@@ -4,6 +4,7 @@ import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
 import { Help } from "../../../components/Help";
 import { Quantity } from "../../../components/Quantity";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
 import type { Gases } from "../model/usePoint";
@@ -25,7 +26,13 @@ export function GasBlock({ gases: { map, reaching } }: { gases: Gases }) {
   const quiet = map.regions.filter((r) => !speaking.includes(r));
   return (
     <section aria-label="Gas over the liquor" className="mt-4" data-testid="gases">
-      <SectionHead aside={map.saturationBar === null ? "equilibrium" : "equilibrium, absolute"}>
+      <SectionHead
+        aside={
+          <>
+            {map.saturationBar === null ? "equilibrium" : "equilibrium, absolute"} · <MethodLink to="hazards" />
+          </>
+        }
+      >
         Gas over the liquor
       </SectionHead>
       {map.saturationBar !== null && (

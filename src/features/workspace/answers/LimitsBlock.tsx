@@ -1,7 +1,9 @@
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { Limit, Window } from "../../../../shared/solution";
 import { type LimitSentence, limitSentences, type Naming } from "../../../../shared/windows/limitWords";
-import { SpeciesName } from "../../../components/Formula";
+import { AcidAmount } from "../../../components/AcidAmount";
 import { Term } from "../../../components/Help";
+import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
@@ -13,25 +15,50 @@ export function LimitsBlock({
   name,
   naming,
   scale,
+  freeAcid = null,
 }: {
   window: Window;
   name: string;
   naming: Naming;
   scale: PotentialScale;
+  /** of a sulfate liquor */
+  freeAcid?: FreeAcidCurve | null;
 }) {
   return (
     <section aria-label={`What shuts window ${name}`} className="mt-4">
-      <SectionHead aside={<Term word="windowLimit">limits</Term>}>What shuts window {name}</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            <Term word="windowLimit">limits</Term> · <MethodLink to="windows" />
+          </>
+        }
+      >
+        What shuts window {name}
+      </SectionHead>
       <ul>
         {limitSentences(window, naming).map((sentence) => (
-          <Sentence key={`${sentence.side} ${sentence.what}`} sentence={sentence} scale={scale} />
+          <Sentence
+            key={`${sentence.side} ${sentence.what}`}
+            sentence={sentence}
+            scale={scale}
+            acid={acidTo(sentence, window, freeAcid)}
+          />
         ))}
       </ul>
     </section>
   );
 }
 
-function Sentence({ sentence, scale }: { sentence: LimitSentence; scale: PotentialScale }) {
+/** g/L of free acid from the set point to a limit along pH, where both stand low enough for it to be said; more acid above zero. */
+function acidTo({ axis, distance, side }: LimitSentence, { setPoint }: Window, curve: FreeAcidCurve | null) {
+  if (curve === null || axis !== "pH" || distance === null) return null;
+  const pH = setPoint.pH + (side === "low pH" ? -distance : distance);
+  if (Math.min(pH, setPoint.pH) >= FREE_ACID_BELOW) return null;
+  const [here, there] = [curve.at(setPoint.pH), curve.at(pH)];
+  return here.withinSulfate && there.withinSulfate ? there.gPerL - here.gPerL : null;
+}
+
+function Sentence({ sentence, scale, acid }: { sentence: LimitSentence; scale: PotentialScale; acid: number | null }) {
   const { side, what, limit, others } = sentence;
   const further = others.filter((o) => o.reaction !== limit.reaction);
   return (
@@ -42,6 +69,11 @@ function Sentence({ sentence, scale }: { sentence: LimitSentence; scale: Potenti
         </span>
         <Distance sentence={sentence} scale={scale} />
       </div>
+      {acid !== null && (
+        <div className="text-sm text-muted">
+          <AcidAmount gPerL={Math.abs(acid)} /> {acid > 0 ? "more" : "less"} free acid, by the same reckoning
+        </div>
+      )}
       <Why limit={limit} />
       {further.length > 0 && (
         <details className="text-sm text-muted">
@@ -81,7 +113,7 @@ function Why({ limit }: { limit: Limit }) {
         <Reaction terms={limit.reactionTerms} />
       ) : limit.inside && limit.outside ? (
         <>
-          <SpeciesName id={limit.inside} /> <span className="font-mono">→</span> <SpeciesName id={limit.outside} />
+          <SpeciesLink id={limit.inside} /> <span className="font-mono">→</span> <SpeciesLink id={limit.outside} />
         </>
       ) : null}
     </div>

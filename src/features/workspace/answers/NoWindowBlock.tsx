@@ -6,6 +6,7 @@ import type { Solution } from "../../../../shared/solution";
 import { Button } from "../../../components/Button";
 import { Formula } from "../../../components/Formula";
 import { Progress } from "../../../components/status";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
 import { requirementWord } from "../../../lib/planWords";
@@ -29,7 +30,7 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
   const gaps = advice.state === "there" ? advice.value.gaps : [];
   return (
     <section aria-label="No window">
-      <SectionHead>No window is open</SectionHead>
+      <SectionHead aside={<MethodLink to="noWindow" />}>No window is open</SectionHead>
       {solution.conflicts.length === 0 ? (
         <p className="py-1">The frame and the water lines leave no ground where all metals are as required.</p>
       ) : (
@@ -47,7 +48,15 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
         </ul>
       )}
       <div className="mt-4">
-        <SectionHead aside="one at a time">What would open one</SectionHead>
+        <SectionHead
+          aside={
+            <>
+              one at a time · <MethodLink to="opens" />
+            </>
+          }
+        >
+          What would open one
+        </SectionHead>
         {advice.state === "waiting" && (
           <div role="status" className="py-2 text-sm text-muted">
             Looking for the smallest change of each number that opens a window …

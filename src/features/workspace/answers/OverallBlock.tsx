@@ -5,8 +5,10 @@ import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution, Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Loading } from "../../../components/status";
+import { MethodLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { Fold } from "../asks/Fold";
+import type { Edit } from "../model/edit";
 
 const OverallList = lazy(() => import("./OverallList"));
 
@@ -20,12 +22,22 @@ export function OverallBlock({
   solution: Solution;
   window: Window;
   data: ChemicalData;
+  /** absent where the plan is only looked at */
+  onInputs?: ((edit: Edit) => void) | undefined;
 }) {
   const { inputs } = rest;
   const feed = inputs.feedMinerals.length;
   return (
     <section aria-label="Overall reactions" className="mt-4">
-      <SectionHead aside={<Link to="/reactions">any reaction</Link>}>Overall reactions</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            <Link to="/reactions">any reaction</Link> · <MethodLink to="overall" />
+          </>
+        }
+      >
+        Overall reactions
+      </SectionHead>
       <Fold
         className="pt-1"
         title={

@@ -1,4 +1,4 @@
-import { useDeferredValue, useMemo, useState } from "react";
+import { useDeferredValue, useMemo } from "react";
 import { reagentById } from "../../../../shared/reach/reagents";
 import { overallReaction } from "../../../../shared/reactions/atSetPoint";
 import type { Demand } from "../../../../shared/reactions/demand";
@@ -14,6 +14,9 @@ import { Quantity } from "../../../components/Quantity";
 import { Select, type SelectOption } from "../../../components/Select";
 import { Note } from "../../../components/text";
 import { celsius, fixed, significant } from "../../../lib/format";
+import type { Edit } from "../model/edit";
+import { chooseProduct, chooseRedox } from "../model/overallEdit";
+import { Products } from "./Products";
 import { Reaction } from "./Reaction";
 
 interface OverallProps {
@@ -22,6 +25,7 @@ interface OverallProps {
   solution: Solution;
   setPoint: SetPoint;
   data: ChemicalData;
+  onInputs?: ((edit: Edit) => void) | undefined;
 }
 
 /** What a reaction may start from: the feed's minerals, what is to be won as metal as it stands in the liquor, the metals themselves. */
@@ -54,8 +58,9 @@ export default function OverallList(props: OverallProps) {
         ))}
       </ul>
       <Note className="py-1">
-        What rules at the set point is the product. log K says how far, never how fast; feed, gangue and losses take
-        more than the reaction does.
+        What rules at the set point is the product unless another is chosen, as where a hydroxide or a jarosite comes
+        out before the stable oxide, or sulfur lasts where sulfate would be stable. log K says how far, never how fast;
+        feed, gangue and losses take more than the reaction does.
       </Note>
     </>
   );
@@ -63,17 +68,25 @@ export default function OverallList(props: OverallProps) {
 
 const nameOf = (r: RedoxReagent): string => reagentById.get(r.id)?.name ?? r.used;
 
-function Overall({ from, problem, inputs, setPoint, data }: OverallProps & { from: string }) {
-  const [chosen, setChosen] = useState<string | null>(null);
+function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallProps & { from: string }) {
+  const { products, redox: chosen } = inputs.overall?.[from] ?? {};
   const pH = useDeferredValue(setPoint.pH);
   const Eh = useDeferredValue(setPoint.Eh);
-  const bare = useMemo(() => overallReaction(problem, data, { from, at: { pH, Eh } }), [problem, data, from, pH, Eh]);
+  const standing = useMemo(
+    () => overallReaction(problem, data, { from, at: { pH, Eh } }),
+    [problem, data, from, pH, Eh],
+  );
+  const asked = useMemo(() => ({ from, at: { pH, Eh }, ...(products ? { products } : {}) }), [from, pH, Eh, products]);
+  const bare = useMemo(
+    () => (products ? overallReaction(problem, data, asked) : standing),
+    [products, standing, problem, data, asked],
+  );
   const electrons = bare.ok ? bare.value.electrons : 0;
   const elements = inputs.metals.map((m) => m.element);
   const redox = chosen ?? usualRedox(electrons, inputs.preset, elements) ?? "open";
   const outcome = useMemo(
-    () => (redox === "open" || !bare.ok ? bare : overallReaction(problem, data, { from, at: { pH, Eh }, redox })),
-    [bare, problem, data, from, pH, Eh, redox],
+    () => (redox === "open" || !bare.ok ? bare : overallReaction(problem, data, { ...asked, redox })),
+    [bare, problem, data, asked, redox],
   );
   const options: SelectOption<string>[] = [
     { value: "open", label: "none: electrons stay" },
@@ -90,11 +103,19 @@ function Overall({ from, problem, inputs, setPoint, data }: OverallProps & { fro
         <Select
           label={`What ${electrons > 0 ? "takes" : "gives"} the electrons of ${from}`}
           labelText={electrons > 0 ? "oxidant" : "reductant"}
+          readOnly={onInputs === undefined}
           value={redox}
-          onChange={setChosen}
+          onChange={(next) => onInputs?.(chooseRedox(from, next))}
           options={options}
         />
       )}
+      <Products
+        {...{ from, data, redox }}
+        sulfateReduction={problem.sulfateReduction ?? problem.temperatureC >= 150}
+        standing={standing.ok ? standing.value : null}
+        chosen={products ?? {}}
+        onChoose={onInputs && ((component, product) => onInputs(chooseProduct(from, component, product)))}
+      />
       {outcome.ok ? (
         <>
           <p className="py-1 leading-relaxed">
@@ -118,7 +139,8 @@ function Overall({ from, problem, inputs, setPoint, data }: OverallProps & { fro
           ))}
         </>
       ) : (
-        <p className="text-sm text-muted">
+        <p className={products ? "border-l-4 border-ink pl-3 text-sm" : "text-sm text-muted"} role="status">
+          {products && <b>This cannot be written. </b>}
           <FormulaText text={outcome.error.message} />.
         </p>
       )}

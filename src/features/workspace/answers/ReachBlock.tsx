@@ -6,6 +6,7 @@ import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
 import { Help, Term } from "../../../components/Help";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
@@ -114,7 +115,9 @@ function Name({
           {line?.from === "library" ? "E0 at this temperature" : "E0 of 25 °C"}. A slurry seldom shows it.
         </p>
       )}
-      <p className="text-muted">{reagent.source}</p>
+      <p className="text-muted">
+        {reagent.source}. <MethodLink to="reach">How reach is judged</MethodLink>
+      </p>
     </Help>
   );
 }

@@ -1,5 +1,6 @@
 import { Fragment } from "react";
 import type { ReactionTerm } from "../../../../shared/solution";
+import { Link } from "react-router-dom";
 import { Formula } from "../../../components/Formula";
 import { fixed } from "../../../lib/format";
 
@@ -12,13 +13,23 @@ function Half({ terms }: { terms: readonly ReactionTerm[] }) {
       {i > 0 && " + "}
       <span className="whitespace-nowrap">
         {amount(term.coefficient)}
-        <Formula formula={term.formula} />
+        {term.species === "e^-" ? (
+          <Formula formula={term.formula} />
+        ) : (
+          <Link
+            to={`/chemistry/${encodeURIComponent(term.species)}`}
+            title={`${term.species}: its row of the library`}
+            className="no-underline hover:underline"
+          >
+            <Formula formula={term.formula} />
+          </Link>
+        )}
       </span>
     </Fragment>
   ));
 }
 
-/** A balanced reaction, typeset, from the window's side to what lies beyond. */
+/** A balanced reaction, typeset, from the window's side to what lies beyond; each species leads to its row of the library. */
 export function Reaction({ terms }: { terms: readonly ReactionTerm[] }) {
   return (
     <span className="font-sans">

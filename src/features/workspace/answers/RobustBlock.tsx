@@ -1,5 +1,6 @@
 import type { Robust } from "../../../../shared/advice/robust";
 import { Progress } from "../../../components/status";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
@@ -18,7 +19,15 @@ export function RobustBlock({
   if (robust.state === "none") return null;
   return (
     <section aria-label="Over the ranges" className="mt-4">
-      <SectionHead aside="inner outline">Over the ranges</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            inner outline · <MethodLink to="overRanges" />
+          </>
+        }
+      >
+        Over the ranges
+      </SectionHead>
       {robust.state === "waiting" && (
         <div role="status" className="py-2 text-sm text-muted">
           Solving over the ranges …

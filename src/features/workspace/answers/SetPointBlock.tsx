@@ -4,6 +4,7 @@ import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { marginWords } from "../../../../shared/windows/limitWords";
 import { SpeciesName } from "../../../components/Formula";
 import { Term } from "../../../components/Help";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
@@ -26,7 +27,15 @@ export function SetPointBlock({
   const ends = at.EhRange;
   return (
     <section aria-label="Set point">
-      <SectionHead aside={name}>Set point</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            {name} · <MethodLink to="setPoint" />
+          </>
+        }
+      >
+        Set point
+      </SectionHead>
       <p className="pt-1 font-mono text-xl font-bold" data-testid="set-point">
         <span className="whitespace-nowrap">pH {fixed(at.pH, 2)}</span>
         <span className="ml-5 whitespace-nowrap">{scale.format(at.Eh)}</span>
@@ -51,7 +60,8 @@ export function SetPointBlock({
       {at.mixedPotential ? (
         <Note className="py-1">
           No couple of this liquor holds both forms above about 10&#8239;mg/L, so Eh is a{" "}
-          <Term word="mixedPotential">mixed potential</Term>: a trend, and the margin counts pH alone.
+          <Term word="mixedPotential">mixed potential</Term>: a trend, and the margin counts pH alone (
+          <MethodLink to="mixedPotential">why</MethodLink>).
           {ends && (
             <>
               {" "}

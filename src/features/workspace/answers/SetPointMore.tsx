@@ -1,16 +1,15 @@
-import { freeAcid } from "../../../../shared/activity/freeAcid";
+import { DAVIES_LIMIT } from "../../../../shared/activity/davies";
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { HeldSetPoint } from "../../../../shared/setpoint/held";
 import type { SetPoint } from "../../../../shared/solution";
-import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { limitSentences, marginWords, type Naming } from "../../../../shared/windows/limitWords";
+import { AcidAmount } from "../../../components/AcidAmount";
 import { Button } from "../../../components/Button";
 import { Help } from "../../../components/Help";
+import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row } from "../../../components/text";
-import { celsius, fixed, withUnit } from "../../../lib/format";
-
-/** Below this pH a glass electrode is an index only, and the loop is run on free acid. */
-export const FREE_ACID_BELOW = 1.5;
+import { celsius, fixed } from "../../../lib/format";
 
 /** A set point placed by hand: what is nearest, and the way back. */
 export function HeldNote({
@@ -58,17 +57,14 @@ export function HeldNote({
 export function FreeAcidRow({
   at,
   inputs,
-  data,
+  curve,
 }: {
   at: Pick<SetPoint, "pH">;
-  inputs: Pick<PlanInputs, "ligands" | "temperatureC">;
-  data: ChemicalData;
+  inputs: Pick<PlanInputs, "temperatureC">;
+  curve: FreeAcidCurve | null;
 }) {
-  const sulfate = inputs.ligands.find((l) => l.component === "S")?.activity;
-  if (at.pH >= FREE_ACID_BELOW || sulfate === undefined) return null;
-  const acid = freeAcid(data, at.pH, sulfate, inputs.temperatureC);
-  if (!acid.ok) return null;
-  const { gPerL, withinDavies, ionicStrength } = acid.value;
+  if (at.pH >= FREE_ACID_BELOW || curve === null) return null;
+  const { gPerL, ionicStrength, withinDavies, withinSulfate } = curve.at(at.pH);
   return (
     <>
       <Row
@@ -76,18 +72,29 @@ export function FreeAcidRow({
           <Help title="Free acid" trigger="Free acid">
             <p>
               H⁺ and the proton of bisulfate at {celsius(inputs.temperatureC)} and this total of sulfate, counted as
-              sulfuric acid; activity coefficients by Davies, here at an ionic strength of {fixed(ionicStrength, 2)}
-              mol/kg. Titrate it: this is the order of things, not a reading.
+              sulfuric acid. It rests on the second dissociation of sulfuric acid at this temperature and on activity
+              coefficients by Davies, here at an ionic strength of {fixed(ionicStrength, 2)} mol/kg; they are meant for
+              up to {DAVIES_LIMIT} and held at their value there.
+            </p>
+            <p>Sulfate bound by metals is not taken off. Titrate it: this is the order of things, not a reading.</p>
+            <p>
+              <MethodLink to="freeAcid">The method, free acid</MethodLink>
             </p>
           </Help>
         }
       >
-        {withUnit(`about ${gPerL < 10 ? fixed(gPerL, 1) : fixed(gPerL, 0)}`, "g/L H₂SO₄")}
+        <AcidAmount gPerL={gPerL} />
       </Row>
-      {!withinDavies && (
+      {!withinSulfate ? (
         <Note>
-          Indicative: the ionic strength is beyond what the activity coefficients hold for. Control on a titration.
+          That is more acid than this total of sulfate balances: raise the total, or read the pH as out of reach.
         </Note>
+      ) : (
+        !withinDavies && (
+          <Note>
+            Indicative: the ionic strength is beyond what the activity coefficients hold for. Control on a titration.
+          </Note>
+        )
       )}
     </>
   );

@@ -1,6 +1,7 @@
 import type { SolutionWarning } from "../../../../shared/solution";
-import { SpeciesName } from "../../../components/Formula";
+import type { Source } from "../../../lib/sources";
 import { FormulaText } from "../../../components/FormulaText";
+import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 
 const heads: Readonly<Record<SolutionWarning["code"], string>> = {
@@ -9,6 +10,15 @@ const heads: Readonly<Record<SolutionWarning["code"], string>> = {
   METASTABLE: "metastable",
   KINETICS: "slow",
   SATURATION_PRESSURE: "under pressure",
+};
+
+/** Where the method says why. */
+const grounds: Readonly<Record<SolutionWarning["code"], Source>> = {
+  TEMPERATURE_TRUST: "trustedRange",
+  LIGAND_DRAWN_DOWN: "drawnDown",
+  METASTABLE: "solidsBasis",
+  KINETICS: "slow",
+  SATURATION_PRESSURE: "saturation",
 };
 
 /** What to know before trusting the picture. */
@@ -20,9 +30,9 @@ export function WarningsBlock({ warnings }: { warnings: readonly SolutionWarning
       <ul>
         {warnings.map((w, i) => (
           <li key={i} className="hairline py-1 text-sm">
-            <b>{w.species ? <SpeciesName id={w.species} withPhase /> : (w.metal ?? "The plan")}</b>, {heads[w.code]}:{" "}
+            <b>{w.species ? <SpeciesLink id={w.species} withPhase /> : (w.metal ?? "The plan")}</b>, {heads[w.code]}:{" "}
             <span className="text-muted">
-              <FormulaText text={w.text} />
+              <FormulaText text={w.text} /> (<MethodLink to={grounds[w.code]} />)
             </span>
           </li>
         ))}

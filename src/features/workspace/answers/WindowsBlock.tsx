@@ -1,4 +1,5 @@
 import type { Solution } from "../../../../shared/solution";
+import { MethodLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { classes } from "../../../lib/classes";
 import { fixed } from "../../../lib/format";
@@ -20,7 +21,15 @@ export function WindowsBlock({
   if (solution.windows.length < 2) return null;
   return (
     <section aria-label="Windows" className="mb-4">
-      <SectionHead aside="deepest first">{solution.windows.length} windows are open</SectionHead>
+      <SectionHead
+        aside={
+          <>
+            deepest first · <MethodLink to="windows" />
+          </>
+        }
+      >
+        {solution.windows.length} windows are open
+      </SectionHead>
       <ul>
         {solution.windows.map((window, i) => (
           <li key={i} className="hairline">

@@ -1,17 +1,14 @@
 import { presetCaution } from "../../../../shared/hazards/presetCautions";
 import { presetNames } from "../../../../shared/schemas/plan";
 import { componentKind, SULFIDE_SULFUR } from "../../../../shared/selection/components";
-import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { Button } from "../../../components/Button";
 import { Check } from "../../../components/choice";
-import { ComponentName } from "../../../components/ComponentName";
 import { FormulaText } from "../../../components/FormulaText";
 import { Term } from "../../../components/Help";
 import { Select } from "../../../components/Select";
-import { LogSlider } from "../../../components/Slider";
 import { Note, SectionHead } from "../../../components/text";
 import { lixiviantName } from "../../../lib/planWords";
-import { addTotal, removeTotal, setPreset, setTotal, toggleIn } from "../model/edit";
+import { addTotal, setPreset, toggleIn } from "../model/edit";
+import { componentLabel, Total } from "./Total";
 import { useAsking } from "./context";
 import { Fold } from "./Fold";
 import { Refusal } from "./Refusal";
@@ -23,7 +20,7 @@ export function LixiviantSection() {
   const sulfur = inputs.ligands.some((l) => l.component === "S");
   return (
     <section aria-label="Lixiviant" className="mt-5">
-      <SectionHead aside={<Term word="activity">activities</Term>}>Lixiviant</SectionHead>
+      <SectionHead aside={<Term word="total">totals</Term>}>Lixiviant</SectionHead>
       <Select
         label="Lixiviant"
         labelText="Liquor"
@@ -36,12 +33,12 @@ export function LixiviantSection() {
           note: <FormulaText text={presetCaution[preset]} />,
         }))}
       />
-      {inputs.ligands.map(({ component, activity }) => (
-        <Total key={component} list="ligands" component={component} activity={activity} />
+      {inputs.ligands.map((total) => (
+        <Total key={total.component} list="ligands" {...total} />
       ))}
       <Refusal path="ligands" />
-      {inputs.others.map(({ component, activity }) => (
-        <Total key={component} list="others" component={component} activity={activity} />
+      {inputs.others.map((total) => (
+        <Total key={total.component} list="others" {...total} />
       ))}
       <Refusal path="others" />
       {!readOnly && <AddComponent />}
@@ -68,46 +65,6 @@ export function LixiviantSection() {
 /** With the couple on, sulfur is one pool: a sulfide total of its own goes. */
 const onePool = (p: { ligands: { component: string; activity: number }[] }, on: boolean) =>
   on ? { ligands: p.ligands.filter((l) => l.component !== SULFIDE_SULFUR) } : {};
-
-const componentLabel = (data: ChemicalData, component: string, reduced: boolean) => {
-  if (component === SULFIDE_SULFUR) return <>S sulfide</>;
-  if (component === "S") return <>{reduced ? "S sulfur, all" : "S sulfate"}</>;
-  return <ComponentName data={data} component={component} />;
-};
-
-function Total({ list, component, activity }: { list: "ligands" | "others"; component: string; activity: number }) {
-  const { inputs, edit, settle, data, readOnly } = useAsking();
-  return (
-    <div className="group relative">
-      <LogSlider
-        label={`Total of ${component}`}
-        labelText={
-          <>
-            {componentLabel(data, component, inputs.sulfateReduction)}
-            {!readOnly && (
-              <Button
-                kind="quiet"
-                className="ml-2 h-auto! text-xs! font-normal! text-muted"
-                aria-label={`Remove ${component} from the liquor`}
-                onClick={() => edit(removeTotal(list, component))}
-              >
-                remove
-              </Button>
-            )}
-          </>
-        }
-        value={activity}
-        min={1e-4}
-        max={10}
-        typedMax={100}
-        readOnly={readOnly}
-        onChange={(value) => edit(setTotal(list, component, value), `total ${component}`)}
-        onCommit={settle}
-        width={8}
-      />
-    </div>
-  );
-}
 
 function AddComponent() {
   const { inputs, edit, data } = useAsking();

@@ -10,6 +10,7 @@ import { Note, SectionHead } from "../../../components/text";
 import { withUnit } from "../../../lib/format";
 import { waterBoundWord } from "../../../lib/planWords";
 import { useAsking } from "./context";
+import { PHBand } from "./PHBand";
 import { Refusal } from "./Refusal";
 
 export function TemperatureSection() {
@@ -187,18 +188,7 @@ export function BandsSection() {
   return (
     <section aria-label="Control bands" className="mt-5">
       <SectionHead aside={<Term word="controlBand">of the loop</Term>}>Control bands</SectionHead>
-      <NumberField
-        label="Control band of pH"
-        labelText="pH ±"
-        value={band.pH}
-        above={0}
-        max={5}
-        step={0.05}
-        width={6}
-        show={(x) => x.toFixed(2)}
-        readOnly={readOnly}
-        onCommit={(pH) => edit((p) => ({ ...p, controlBand: { ...p.controlBand, pH } }))}
-      />
+      <PHBand />
       <NumberField
         label="Control band of Eh"
         labelText="Eh ±"

@@ -1,7 +1,7 @@
 import { createContext, useContext } from "react";
 import type { Failure } from "../../../../shared/outcome";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
-import type { Solution } from "../../../../shared/solution";
+import type { SetPoint, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import type { Edit } from "../model/edit";
@@ -14,6 +14,8 @@ export interface Asking {
   data: ChemicalData;
   solution: Solution | null;
   failure: Failure | null;
+  /** of the window in hand */
+  setPoint: SetPoint | null;
   scale: PotentialScale;
   /** a frozen revision is looked at, not changed */
   readOnly: boolean;

@@ -1,5 +1,4 @@
-import type { PlanInputs, PlanMetal, PresetName } from "../../../../shared/schemas/plan";
-import type { ComponentTotal } from "../../../../shared/schemas/problem";
+import type { FreeAcidBand, PlanInputs, PlanMetal, PlanTotal, PresetName } from "../../../../shared/schemas/plan";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { presetLigands } from "../../../lib/newPlan";
 
@@ -54,10 +53,30 @@ export const setPreset =
 type List = "ligands" | "others";
 export const setTotal =
   (list: List, component: string, activity: number): Edit =>
-  (p) => ({ ...p, [list]: p[list].map((c) => (c.component === component ? { component, activity } : c)) });
+  (p) => ({ ...p, [list]: p[list].map((c) => (c.component === component ? { ...c, activity } : c)) });
+
+/** How a total is typed and shown; what counts stays the same mol/L. */
+export const setTotalUnit =
+  (list: List, component: string, unit: "mol/L" | "g/L"): Edit =>
+  (p) => ({
+    ...p,
+    [list]: p[list].map(({ unit: _old, ...c }) =>
+      c.component !== component ? (_old ? { ...c, unit: _old } : c) : unit === "g/L" ? { ...c, unit } : c,
+    ),
+  });
+
+/** A band of pH typed as pH. */
+export const setPHBand =
+  (pH: number): Edit =>
+  ({ freeAcidBand: _old, ...p }) => ({ ...p, controlBand: { ...p.controlBand, pH } });
+
+/** A band typed as free acid, with what it is in pH where it was converted. */
+export const setAcidBand =
+  (freeAcidBand: FreeAcidBand, counted: number): Edit =>
+  (p) => ({ ...p, freeAcidBand, controlBand: { ...p.controlBand, pH: Number(counted.toFixed(4)) } });
 
 export const addTotal =
-  (list: List, total: ComponentTotal): Edit =>
+  (list: List, total: PlanTotal): Edit =>
   (p) => ({ ...p, [list]: [...p[list], total] });
 
 export const removeTotal =

@@ -1,8 +1,9 @@
+import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
 import type { PlanInputs, PlanRow } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
 import { toCsv } from "../../../lib/csv";
-import { celsius, significant } from "../../../lib/format";
+import { celsius, fixed, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
 import { mapContent } from "../../../map/content";
 import { captionedFigure, mapPicture } from "../../../map/picture";
@@ -32,10 +33,17 @@ export function captionLines({ plan, state, inputs, solution, model, dataVersion
     return `${metal} ${asks}${significant(activity)}`;
   });
   const totals = [...inputs.ligands, ...inputs.others].map((c) => `${c.component} ${significant(c.activity)}`);
+  const { freeAcid } = model.asked;
+  const pH = solution.windows[model.view.window]?.setPoint.pH;
+  const acid =
+    freeAcid && pH !== undefined && pH < FREE_ACID_BELOW
+      ? `set point pH ${fixed(pH, 2)}, about ${fixed(freeAcid.at(pH).gPerL, 0)} g/L free acid by pK2 and Davies, indicative`
+      : null;
   return [
     `${state.charAt(0).toUpperCase()}${state.slice(1)}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
-    `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (total activities ${totals.join(", ")})` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
+    `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (totals ${totals.join(", ")} mol/L)` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
     `activities: ${metals.join("; ")}`,
+    ...(acid === null ? [] : [acid]),
     `Eh vs ${model.view.scale.short}. What can happen, not how fast. Screening only.`,
   ];
 }
@@ -49,7 +57,7 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
     case "solution":
       return saveJson(`${stem}-solution.json`, e.solution);
     case "csv": {
-      const { header, rows } = limitsTable(e.solution.windows);
+      const { header, rows } = limitsTable(e.solution.windows, e.model.asked.freeAcid);
       // The mark in front makes spreadsheets read UTF-8.
       return saveFile(
         `${stem}-limits.csv`,

@@ -1,3 +1,4 @@
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import { electrodeSeries } from "../../../../shared/electrodes/series";
 import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -27,11 +28,21 @@ const header = [
   "distance_pH",
   "distance_Eh_V",
 ] as const;
+/** Of a sulfate liquor: blank where pH is 1.5 or more, and where the sulfate would not balance so much acid. */
+const acidHeader = ["set_point_free_acid_g_per_L", "from_free_acid_g_per_L", "to_free_acid_g_per_L"] as const;
 
 /** Every limit of every window as a table; potentials in V vs SHE whatever the screen shows. */
-export function limitsTable(windows: readonly Window[]): { header: string[]; rows: (string | number | null)[][] } {
+export function limitsTable(
+  windows: readonly Window[],
+  freeAcid: FreeAcidCurve | null = null,
+): { header: string[]; rows: (string | number | null)[][] } {
+  const acidAt = (pH: number): number | null => {
+    if (freeAcid === null || pH >= FREE_ACID_BELOW) return null;
+    const { gPerL, withinSulfate } = freeAcid.at(pH);
+    return withinSulfate ? gPerL : null;
+  };
   return {
-    header: [...header],
+    header: [...header, ...(freeAcid === null ? [] : acidHeader)],
     rows: windows.flatMap((window, i) =>
       window.limits.map((l) => [
         windowName(i),
@@ -48,6 +59,7 @@ export function limitsTable(windows: readonly Window[]): { header: string[]; row
         l.distance,
         l.distancePH,
         l.distanceEh,
+        ...(freeAcid === null ? [] : [acidAt(window.setPoint.pH), acidAt(l.from[0]), acidAt(l.to[0])]),
       ]),
     ),
   };
