@@ -30,6 +30,8 @@ export interface FreeAcidCurve {
   readonly at: (pH: number) => FreeAcid;
   /** pH of a free acid in g/L; null at or below nothing, and beyond what the sulfate balances */
   readonly pHOf: (gPerL: number) => number | null;
+  /** g/L: the sulfate of the liquor balances no more */
+  readonly most: number;
 }
 
 /** The curve of free acid against pH of a sulfate liquor: bisulfate in equilibrium with hydrogen ion and sulfate at the total given,
@@ -91,7 +93,7 @@ export function freeAcidCurve(data: ChemicalData, sulfate: number, temperatureC:
     });
     return -Math.log10(hydrogen * g1);
   }
-  return ok({ at, pHOf });
+  return ok({ at, pHOf, most: sulfate * H2SO4_G_PER_MOL });
 }
 
 /** Free acid of a sulfate liquor at one pH.

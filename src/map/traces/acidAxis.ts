@@ -13,7 +13,7 @@ const LINE = 24;
 const TICK = 29;
 const NUMBERS = 30;
 /** px from one number to the next */
-const GAP = 24;
+const GAP = 19;
 const TITLE = "free acid, g/L H<sub>2</sub>SO<sub>4</sub>";
 const TITLE_WIDTH = 150;
 
@@ -51,7 +51,7 @@ export function acidRow(
   const { muted } = view.colours;
   const end = Math.min(p1, FREE_ACID_BELOW);
   // Beside the row where there is room, else over its own right end, whose numbers give way.
-  const titleAt = Math.min((end - p0) * pxPerPH + 8, width - TITLE_WIDTH);
+  const titleAt = Math.min((end - p0) * pxPerPH + 12, width - TITLE_WIDTH);
   const shown = ticks.filter((t) => (t.pH - p0) * pxPerPH < titleAt - 8);
   const down = (px: number) => -px / (map.y1 - map.y0);
   const line = (x0: number, x1: number, y0: number, y1: number): PlotShape => ({
@@ -80,7 +80,12 @@ export function acidRow(
       word(TITLE, p0 + titleAt / pxPerPH, "left"),
     ],
     shapes: [
-      line(Math.max(p0, Math.min(first.pH, p0 + titleAt / pxPerPH)), Math.min(end, p0 + (titleAt - 8) / pxPerPH), LINE, LINE),
+      line(
+        Math.max(p0, Math.min(first.pH, p0 + titleAt / pxPerPH)),
+        Math.min(end, p0 + (titleAt - 8) / pxPerPH),
+        LINE,
+        LINE,
+      ),
       ...shown.map((t) => line(t.pH, t.pH, LINE, TICK)),
     ],
   };

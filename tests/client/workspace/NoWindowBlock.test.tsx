@@ -1,5 +1,6 @@
 import "../setup";
 import { fireEvent, render, screen } from "@testing-library/react";
+import { MemoryRouter } from "react-router-dom";
 import { expect, test, vi } from "vitest";
 import type { Advice, Opening } from "../../../shared/advice/openings";
 import { NoWindowBlock } from "../../../src/features/workspace/answers/NoWindowBlock";
@@ -38,9 +39,11 @@ const props = {
   scale: potentialScale("mV"),
 };
 
+const renderLinked = (block: React.ReactElement) => render(<MemoryRouter>{block}</MemoryRouter>);
+
 test("says which requirements clash, by how much, and offers what helps first", () => {
   const onApply = vi.fn();
-  render(<NoWindowBlock {...props} advice={{ state: "there", value: advice }} onApply={onApply} />);
+  renderLinked(<NoWindowBlock {...props} advice={{ state: "there", value: advice }} onApply={onApply} />);
   const section = screen.getByRole("region", { name: "No window" });
   expect(section.textContent).toContain("zinc dissolved and iron solid cannot hold together.");
   expect(section.textContent).toMatch(/0\.46.pH apart at one Eh\. No pH meets both\./);
@@ -52,13 +55,17 @@ test("says which requirements clash, by how much, and offers what helps first", 
 });
 
 test("says that it looks, and that it failed", () => {
-  const { rerender } = render(<NoWindowBlock {...props} advice={{ state: "waiting" }} />);
+  const { rerender } = renderLinked(<NoWindowBlock {...props} advice={{ state: "waiting" }} />);
   expect(screen.getByRole("status").textContent).toContain("Looking for the smallest change");
-  rerender(<NoWindowBlock {...props} advice={{ state: "failed", message: "no worker" }} />);
+  rerender(
+    <MemoryRouter>
+      <NoWindowBlock {...props} advice={{ state: "failed", message: "no worker" }} />
+    </MemoryRouter>,
+  );
   expect(screen.getByRole("alert").textContent).toContain("no worker");
 });
 
 test("offers no action where the plan is only looked at", () => {
-  render(<NoWindowBlock {...props} advice={{ state: "there", value: advice }} />);
+  renderLinked(<NoWindowBlock {...props} advice={{ state: "there", value: advice }} />);
   expect(screen.queryByRole("button")).toBeNull();
 });

@@ -69,12 +69,12 @@ function Sentence({ sentence, scale, acid }: { sentence: LimitSentence; scale: P
         </span>
         <Distance sentence={sentence} scale={scale} />
       </div>
+      <Why limit={limit} />
       {acid !== null && (
         <div className="text-sm text-muted">
           <AcidAmount gPerL={Math.abs(acid)} /> {acid > 0 ? "more" : "less"} free acid, by the same reckoning
         </div>
       )}
-      <Why limit={limit} />
       {further.length > 0 && (
         <details className="text-sm text-muted">
           <summary className="w-fit">

@@ -1,5 +1,4 @@
 import { lazy, Suspense } from "react";
-import { Link } from "react-router-dom";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution, Window } from "../../../../shared/solution";
@@ -29,15 +28,7 @@ export function OverallBlock({
   const feed = inputs.feedMinerals.length;
   return (
     <section aria-label="Overall reactions" className="mt-4">
-      <SectionHead
-        aside={
-          <>
-            <Link to="/reactions">any reaction</Link> · <MethodLink to="overall" />
-          </>
-        }
-      >
-        Overall reactions
-      </SectionHead>
+      <SectionHead aside={<MethodLink to="overall" />}>Overall reactions</SectionHead>
       <Fold
         className="pt-1"
         title={

@@ -1,4 +1,5 @@
 import { useDeferredValue, useMemo } from "react";
+import { Link } from "react-router-dom";
 import { reagentById } from "../../../../shared/reach/reagents";
 import { overallReaction } from "../../../../shared/reactions/atSetPoint";
 import type { Demand } from "../../../../shared/reactions/demand";
@@ -60,7 +61,7 @@ export default function OverallList(props: OverallProps) {
       <Note className="py-1">
         What rules at the set point is the product unless another is chosen, as where a hydroxide or a jarosite comes
         out before the stable oxide, or sulfur lasts where sulfate would be stable. log K says how far, never how fast;
-        feed, gangue and losses take more than the reaction does.
+        feed, gangue and losses take more than the reaction does. <Link to="/reactions">Any other reaction</Link>
       </Note>
     </>
   );

@@ -83,11 +83,18 @@ export function FreeAcidRow({
           </Help>
         }
       >
-        <AcidAmount gPerL={gPerL} />
+        {withinSulfate ? (
+          <AcidAmount gPerL={gPerL} />
+        ) : (
+          <>
+            over <AcidAmount gPerL={curve.most} sure />
+          </>
+        )}
       </Row>
       {!withinSulfate ? (
         <Note>
-          That is more acid than this total of sulfate balances: raise the total, or read the pH as out of reach.
+          This pH takes more acid than this total of sulfate balances, since acid brings its own sulfate: raise the
+          total.
         </Note>
       ) : (
         !withinDavies && (

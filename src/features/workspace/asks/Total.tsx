@@ -26,7 +26,7 @@ export function Total({ list, component, activity, unit }: PlanTotal & { list: "
   const inGrams = unit === "g/L";
   const perMole = inGrams ? gramsPerMole(data, component, inputs.sulfateReduction) : 1;
   const formula = weighedAs(component, inputs.sulfateReduction);
-  const quiet = "ml-2 h-auto! text-xs! font-normal! text-muted";
+  const quiet = "mr-3 h-auto! text-xs! font-normal! text-muted";
   return (
     <LogSlider
       label={`Total of ${component}`}
@@ -39,7 +39,7 @@ export function Total({ list, component, activity, unit }: PlanTotal & { list: "
             </span>
           )}
           {!readOnly && (
-            <>
+            <span className="block leading-none">
               <Button
                 kind="quiet"
                 className={quiet}
@@ -57,7 +57,7 @@ export function Total({ list, component, activity, unit }: PlanTotal & { list: "
               >
                 remove
               </Button>
-            </>
+            </span>
           )}
         </>
       }
