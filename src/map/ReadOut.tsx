@@ -97,7 +97,10 @@ function AcidHere({ curve, pH }: { curve: FreeAcidCurve; pH: number }) {
   const { gPerL, withinSulfate } = curve.at(pH);
   if (!withinSulfate) return null;
   return (
-    <span className="ml-2 text-muted" title="Free acid by pK2 of bisulfate and Davies: indicative, control on a titration">
+    <span
+      className="ml-2 text-muted"
+      title="Free acid by pK2 of bisulfate and Davies: indicative, control on a titration"
+    >
       <AcidAmount gPerL={gPerL} />
     </span>
   );

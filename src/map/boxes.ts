@@ -35,7 +35,11 @@ const GAP = 14;
 
 /** Where everything stands; strips keep their thickness whatever the sheet's size, the map takes the rest.
  *  @param width, height  of the whole figure, px     @returns  boxes in px from the figure's lower left corner */
-export function sheetBoxes(width: number, height: number, { metals, reagents, crosscuts, reach, freeAcid = false }: SheetWishes): Sheet {
+export function sheetBoxes(
+  width: number,
+  height: number,
+  { metals, reagents, crosscuts, reach, freeAcid = false }: SheetWishes,
+): Sheet {
   const columns = crosscuts ? metals * STRIP.column : 0;
   const rows = crosscuts ? metals * STRIP.row : 0;
   const axisBelow = freeAcid ? AXIS.withFreeAcid : AXIS.plain;

@@ -35,7 +35,7 @@ describe("what a line of the plan screen rests on is there", () => {
 });
 
 describe("links between documents", () => {
-  test.each(all)("%s: each leads to a document, and to a part of it that is there", async (document) => {
+  test.each(all)("%s: each leads to a document, and to a part of it that is there", (document) => {
     for (const [, href = ""] of read(document).matchAll(/\]\(([^)\s]+)\)/g)) {
       if (/^[a-z]+:|\.(png|svg)$/.test(href)) continue;
       const to = resolved(document, href);
