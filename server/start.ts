@@ -16,7 +16,7 @@ import { findByEmail } from "./features/members/service";
 import { refreshOutdatedFigures } from "./features/trials/refresh";
 import { workingsOf } from "./features/trials/workedOut";
 import { demoAccounts } from "./demo/accounts";
-import { seedDemoOnFirstRun } from "./demo/seed";
+import { seedDemoAtStart } from "./demo/seed";
 import { projectRoot } from "./root";
 
 export interface Running {
@@ -44,7 +44,8 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
   const mailer = createMailer(db, { smtpUrl: config.smtpUrl, from: config.mailFrom, clock });
   const chemistry = createChemistry(db, current, clock());
   for (const { edit, why } of chemistry.unfit) log.warn({ species: edit.speciesId, why }, "library edit left out");
-  if (config.seedDemo && (await seedDemoOnFirstRun(db, chemistry))) log.info("demo data written");
+  const seeded = config.seedDemo ? await seedDemoAtStart(db, chemistry) : 0;
+  if (seeded !== 0) log.info({ rows: seeded }, "demo data written");
   const refreshed = refreshOutdatedFigures(db, workingsOf(chemistry));
   if (refreshed > 0) log.info({ trials: refreshed }, "figures worked out anew");
   const app = createApp(

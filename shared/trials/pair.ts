@@ -3,6 +3,7 @@ import { campaignSummary, type StageSummary, type SummarisedTrial } from "./summ
 
 export interface Side {
   readonly campaign: Pick<CampaignRow, "id" | "code" | "title" | "planId" | "planRevision" | "stages">;
+  /** their electrodes as a sentence should name them */
   readonly trials: readonly SummarisedTrial[];
 }
 
@@ -48,7 +49,7 @@ function cautionsOf(left: Side, right: Side, stages: readonly StagePair[]): stri
     !sameSet(probesL, probesR) &&
       probesL.size > 0 &&
       probesR.size > 0 &&
-      `Read against different electrodes (${list(probesL)}; ${list(probesR)}); all are converted to SHE.`,
+      `Read against different electrodes (${left.campaign.code}: ${list(probesL)}; ${right.campaign.code}: ${list(probesR)}); all are converted to SHE.`,
     ...stages.flatMap(({ code, left: l, right: r }) => {
       const [a, b] = [l?.recovery?.n ?? 0, r?.recovery?.n ?? 0];
       if (!l || !r) return [`Stage ${code} stands in one campaign only.`];

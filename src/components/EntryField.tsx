@@ -18,6 +18,8 @@ export interface EntryFieldProps {
   error?: string | null | undefined;
   hint?: ReactNode;
   readOnly?: boolean;
+  /** said of an empty one that cannot be typed in */
+  emptyText?: string;
   /** of the input, in characters */
   width?: number;
   className?: string;
@@ -27,6 +29,7 @@ export interface EntryFieldProps {
  *  converted; what it cannot be is said beside it. */
 export function EntryField(props: EntryFieldProps) {
   const { label, labelText, quantity, value, onChange, hint, readOnly = false, width = 9, className } = props;
+  const { emptyText = "not measured" } = props;
   const id = useId();
   const [left, setLeft] = useState(true);
   const message = props.error ?? (left ? refusalOf(value, quantity) : null);
@@ -37,7 +40,7 @@ export function EntryField(props: EntryFieldProps) {
         <span className="min-w-0">{labelText ?? label}</span>
         <span className="font-mono whitespace-nowrap">
           {value.text.trim() === "" ? (
-            <span className="font-sans text-muted">not measured</span>
+            <span className="font-sans text-muted">{emptyText}</span>
           ) : (
             `${value.text} ${unitText(value.unit)}`
           )}

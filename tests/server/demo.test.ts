@@ -1,4 +1,4 @@
-import { eq } from "drizzle-orm";
+import { eq, inArray } from "drizzle-orm";
 import { expect, test } from "vitest";
 import type { OpenDatabase } from "../../server/db/open";
 import {
@@ -14,7 +14,11 @@ import {
 } from "../../server/db/schema";
 import { demoAccounts, demoPassword } from "../../server/demo/accounts";
 import { demoPlans } from "../../server/demo/plans";
-import { seedDemo, seedDemoOnFirstRun } from "../../server/demo/seed";
+import { seedDemo, seedDemoAtStart } from "../../server/demo/seed";
+import { demoCampaigns } from "../../server/demo/trials/campaigns";
+import { demoFeeds } from "../../server/demo/trials/feeds";
+import { demoTrials } from "../../server/demo/trials/trials";
+import { electrodeSeries } from "../../shared/electrodes/series";
 import { valueOf } from "../../shared/outcome";
 import { toProblem } from "../../shared/plan/toProblem";
 import type { CampaignSummaryAnswer } from "../../shared/schemas/campaignSummary";
@@ -38,8 +42,12 @@ const everything = ({ db }: OpenDatabase) => ({
 
 test("an empty database gets one account a role, plans with revisions, and everything says that it is invented", async () => {
   const server = await testServer({ members: false });
-  expect(await seedDemoOnFirstRun(server.db, server.deps.chemistry)).toBe(true);
+  expect(await seedDemoAtStart(server.db, server.deps.chemistry)).toBe("whole");
   const rows = everything(server);
+  const invented = [demoFeeds, demoCampaigns, demoTrials(electrodeSeries(tables))];
+  expect([rows.feeds, rows.campaigns, rows.trials].map(({ length }) => length)).toEqual(
+    invented.map(({ length }) => length),
+  );
   expect(rows.users.map(({ role }) => role).sort()).toEqual([...memberRoles].sort());
   expect([...rows.projects, ...rows.plans].every(({ invented }) => invented)).toBe(true);
   expect(rows.projects.every(({ siteName }) => siteName.includes("invented"))).toBe(true);
@@ -126,6 +134,43 @@ test("seeding twice changes nothing, not even what was edited or archived since"
   expect(everything(server)).toEqual(before);
 });
 
+test("a database with an earlier demo gets what was invented since, and keeps every edit, deletion and account as it is", async () => {
+  const server = await testServer({ members: false });
+  const { db, deps } = server;
+  await seedDemo(db, deps.chemistry);
+  const latest = everything(server);
+  // As it was before two campaigns and a plan were invented, and edited since.
+  const [gone, shut] = ["demo-campaign-ox-1", "demo-campaign-zd-1"];
+  const lost = latest.trials.filter(({ campaignId }) => campaignId === gone || campaignId === shut).map(({ id }) => id);
+  db.delete(trialRecords).where(inArray(trialRecords.trialId, lost)).run();
+  db.update(trials).set({ replicateOf: null }).where(inArray(trials.id, lost)).run();
+  db.delete(trials).where(inArray(trials.id, lost)).run();
+  db.delete(campaigns)
+    .where(inArray(campaigns.id, [gone, shut]))
+    .run();
+  db.update(campaigns).set({ title: "Ours now", version: 2 }).where(eq(campaigns.id, "demo-campaign-nl-1")).run();
+  db.update(users).set({ disabledAt: "2026-10-01T00:00:00.000Z" }).where(eq(users.id, "demo-manager")).run();
+  // A campaign of the members' own has taken the code of one.
+  const login = { email: "metallurgist@tarnhollow.example", password: demoPassword };
+  await server.anyone.post("/api/session").send(login).expect(200);
+  const [first] = demoCampaigns;
+  const own = { ...first, id: undefined, code: "ZD-1", title: "Members' own" };
+  await server.anyone.post("/api/campaigns").send(own).expect(201);
+  const before = everything(server);
+
+  const added = await seedDemoAtStart(db, deps.chemistry);
+  const after = everything(server);
+  for (const name of Object.keys(before) as (keyof typeof before)[])
+    for (const row of before[name]) expect(after[name]).toContainEqual(row);
+  expect(after.users).toEqual(before.users);
+  const back = latest.trials.filter(({ campaignId }) => campaignId === gone).length;
+  expect(added).toBe(1 + back);
+  expect(after.campaigns.length).toBe(before.campaigns.length + 1);
+  expect(after.trials.length).toBe(before.trials.length + back);
+  expect(await seedDemoAtStart(db, deps.chemistry)).toBe(0);
+  expect(everything(server)).toEqual(after);
+});
+
 test("real members and plans are not touched, and beside them the demo is not written of itself", async () => {
   const server = await testServer();
   const metallurgist = await server.as("metallurgist");
@@ -134,7 +179,7 @@ test("real members and plans are not touched, and beside them the demo is not wr
   const plan = { projectId, name: "Neutral leach, second tank", inputs: unusualInputs };
   await metallurgist.post("/api/plans").send(plan).expect(201);
   const before = everything(server);
-  expect(await seedDemoOnFirstRun(server.db, server.deps.chemistry)).toBe(false);
+  expect(await seedDemoAtStart(server.db, server.deps.chemistry)).toBe(0);
   expect(everything(server)).toEqual(before);
 
   await seedDemo(server.db, server.deps.chemistry);

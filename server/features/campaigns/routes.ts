@@ -36,7 +36,7 @@ export function campaignRoutes(deps: Deps) {
       path: `${path}/pair`,
       roles: "signed-in",
       query: campaignPairQuery,
-      handle: ({ query }) => ok(pairOf(db, solved, query)),
+      handle: ({ query }) => ok(pairOf(db, solved, workingsOf(chemistry), query)),
     }),
     route({
       method: "POST",

@@ -1,3 +1,4 @@
+import type { ElectrodeSeries } from "../../../shared/electrodes/series";
 import type { CampaignRow, CampaignStage } from "../../../shared/schemas/campaign";
 import type { CampaignPairAnswer, CampaignSummaryAnswer, SummaryHead } from "../../../shared/schemas/campaignSummary";
 import type { MapTrial } from "../../../shared/schemas/trialRows";
@@ -8,6 +9,7 @@ import { campaignSummary, type SummarisedTrial } from "../../../shared/trials/su
 import type { Db } from "../../db/open";
 import { storedPlan } from "../plans/rows";
 import { pointsOf } from "../trials/points";
+import type { Workings } from "../trials/workedOut";
 import { campaignOf } from "./rows";
 import type { RevisionSolver, SolvedRevision } from "./solved";
 
@@ -81,9 +83,23 @@ export function summaryOf(db: Db, solved: RevisionSolver, id: string): CampaignS
   return { ...head, stages: campaignSummary(campaign, trials) };
 }
 
+/** "Ag/AgCl 3 mol/L KCl" for its id, so that a list of electrodes parts them by commas. */
+const withNames = (side: Side, electrodes: readonly ElectrodeSeries[]): Side => {
+  const names = new Map(electrodes.map(({ id, label }) => [id, label.replace(", ", " ")]));
+  const named = (id: string | null) => (id === null ? null : (names.get(id) ?? id));
+  return { ...side, trials: side.trials.map((trial) => ({ ...trial, electrode: named(trial.electrode) })) };
+};
+
 /** @throws Refusal NOT_FOUND */
-export function pairOf(db: Db, solved: RevisionSolver, { a, b }: { a: string; b: string }): CampaignPairAnswer {
-  const [left, right] = [sideOf(db, solved, a, "a"), sideOf(db, solved, b, "b")];
+export function pairOf(
+  db: Db,
+  solved: RevisionSolver,
+  { electrodes }: Pick<Workings, "electrodes">,
+  { a, b }: { a: string; b: string },
+): CampaignPairAnswer {
+  const [left, right] = [sideOf(db, solved, a, "a"), sideOf(db, solved, b, "b")].map((side) =>
+    withNames(side, electrodes),
+  ) as [Side, Side];
   const { stages, cautions } = campaignPair(left, right);
   return { left: left.head, right: right.head, stages, cautions };
 }

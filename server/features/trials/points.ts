@@ -1,51 +1,32 @@
 import { sql } from "drizzle-orm";
 import type { MapTrial } from "../../../shared/schemas/trialRows";
-import type { TrialStatus } from "../../../shared/schemas/trial";
 import type { Db } from "../../db/open";
 import { feeds } from "../feeds/schema";
 import { trials } from "./schema";
-import { numbersOf } from "./workedOut";
 
-/** A row as SQLite gives it: JSON columns as text, yes and no as 1 and 0. */
-type Stored = Omit<typeof trials.$inferSelect, "flags" | "compared" | "pHCooled"> & {
-  flags: string;
-  compared: string;
-  pHCooled: 0 | 1;
-  status: TrialStatus;
-};
-
-const select = (campaignIds: readonly string[]) => sql`
-  select ${trials.id}, ${trials.code}, ${trials.campaignId} campaignId, ${trials.stage}, ${trials.status},
-    ${trials.feedId} feedId, ${trials.startedAt} startedAt, ${trials.electrode}, ${trials.compared}, ${trials.flags},
-    ${trials.recoveryPct} recoveryPct, ${trials.recoveryLow} recoveryLow, ${trials.recoveryHigh} recoveryHigh,
-    ${trials.recoveryBasis} recoveryBasis, ${trials.gangueDissolvedPct} gangueDissolvedPct,
-    ${trials.selectivityPct} selectivityPct, ${trials.accountabilityPct} accountabilityPct,
-    ${trials.acidPerTonne} acidPerTonne, ${trials.reagentPerKg} reagentPerKg, ${trials.pH} pH, ${trials.pHCooled} pHCooled,
-    ${trials.Eh} Eh, ${trials.EhUncertainty} EhUncertainty, ${trials.temperatureC} temperatureC
-  from ${trials}
+/** A `MapTrial` a line, written by the database: its JSON keeps every number to the last digit, and a line of text is far quicker
+ *  read than two dozen columns. Figures are those of `numbersOf` with the flags. */
+const lines = (campaignIds: readonly string[]) => sql`
+  select json_object(
+    'id', ${trials.id}, 'code', ${trials.code}, 'campaignId', ${trials.campaignId}, 'stage', ${trials.stage},
+    'status', ${trials.status}, 'feedId', ${trials.feedId}, 'feedName', ${feeds.name}, 'startedAt', ${trials.startedAt},
+    'electrode', ${trials.electrode}, 'compared', json(${trials.compared}), 'figures', json_object(
+      'recoveryPct', ${trials.recoveryPct},
+      'recoveryRangePct', iif(${trials.recoveryLow} is null or ${trials.recoveryHigh} is null,
+        json('null'), json_array(${trials.recoveryLow}, ${trials.recoveryHigh})),
+      'recoveryBasis', ${trials.recoveryBasis}, 'gangueDissolvedPct', ${trials.gangueDissolvedPct},
+      'selectivityPct', ${trials.selectivityPct}, 'accountabilityPct', ${trials.accountabilityPct},
+      'acidPerTonne', ${trials.acidPerTonne}, 'reagentPerKg', ${trials.reagentPerKg}, 'pH', ${trials.pH},
+      'pHCooled', json(iif(${trials.pHCooled}, 'true', 'false')), 'Eh', ${trials.Eh},
+      'EhUncertainty', ${trials.EhUncertainty}, 'temperatureC', ${trials.temperatureC}, 'flags', json(${trials.flags})))
+  from ${trials} join ${feeds} on ${feeds.id} = ${trials.feedId}
   where ${trials.campaignId} in (select value from json_each(${JSON.stringify(campaignIds)})) and ${trials.deletedAt} is null
   order by ${trials.codeKey}, ${trials.id}`;
 
 /** The trials of some campaigns as points, without their records.
- *  @returns  `MapTrial[]` as JSON text. A map asks for thousands: what is JSON in the table goes out as it stands, neither read nor
- *    written again, which halves the time. */
-export function pointsJson(db: Db, campaignIds: readonly string[]): string {
-  const names = new Map(
-    db
-      .select({ id: feeds.id, name: feeds.name })
-      .from(feeds)
-      .all()
-      .map((feed) => [feed.id, feed.name]),
-  );
-  const points = db.all<Stored>(select(campaignIds)).map((stored) => {
-    const { id, code, campaignId, stage, status, feedId, startedAt, electrode, compared, flags } = stored;
-    const feedName = names.get(feedId) ?? "";
-    const light = JSON.stringify({ id, code, campaignId, stage, status, feedId, feedName, startedAt, electrode });
-    const figures = JSON.stringify(numbersOf(stored));
-    return `${light.slice(0, -1)},"compared":${compared},"figures":${figures.slice(0, -1)},"flags":${flags}}}`;
-  });
-  return `[${points.join(",")}]`;
-}
+ *  @returns  `MapTrial[]` as JSON text */
+export const pointsJson = (db: Db, campaignIds: readonly string[]): string =>
+  `[${db.values<[line: string]>(lines(campaignIds)).join(",")}]`;
 
 export const pointsOf = (db: Db, campaignIds: readonly string[]): MapTrial[] =>
   JSON.parse(pointsJson(db, campaignIds)) as MapTrial[];

@@ -7,13 +7,14 @@ import { Select } from "../../components/Select";
 import { ErrorNote, Loading } from "../../components/status";
 import { Empty, Note, Remark, SectionHead } from "../../components/text";
 import { useCampaignPair, useCampaigns } from "../../lib/campaigns";
+import { downloadText } from "../../lib/csv";
 import { counted } from "../../lib/format";
 import { placedTrials } from "../../lib/judgedTrials";
 import { useProject } from "../../lib/project";
 import { useSolvedRevision } from "../../lib/solvedRevision";
 import { usePageTitle } from "../../lib/title";
 import { useCampaignTrials } from "../../lib/trials";
-import { differenceSentences, feedStrips, windowSentences, type Measure } from "./compareModel";
+import { differenceSentences, feedStrips, pairCsv, windowSentences, type Measure } from "./compareModel";
 import { DotStrips } from "./DotStrips";
 import { PairTable } from "./PairTable";
 
@@ -65,6 +66,15 @@ export default function ComparePage() {
             swap
           </Button>
           {choose("b", "Second campaign", b)}
+          <Button
+            disabled={data === undefined}
+            onClick={() =>
+              data &&
+              downloadText(`gangueway-${data.left.campaign.code}-${data.right.campaign.code}.csv`, pairCsv(data))
+            }
+          >
+            Export CSV
+          </Button>
           <Button onClick={() => window.print()}>Print</Button>
         </span>
       </div>

@@ -1,7 +1,10 @@
+import type { CampaignPairAnswer } from "../../../shared/schemas/campaignSummary";
 import { spreadOf, type Spread } from "../../../shared/trials/spread";
 import type { Count } from "../../../shared/trials/tally";
 import { fixed, MINUS, percent } from "../../lib/format";
 import type { PlacedTrial } from "../../lib/judgedTrials";
+import { tableCsv } from "../../components/tableModel";
+import { exportedStageColumns } from "./stageColumns";
 
 export const measures = ["recoveryPct", "gangueDissolvedPct", "selectivityPct"] as const;
 export type Measure = (typeof measures)[number];
@@ -161,3 +164,17 @@ export function percentAxis(values: readonly number[]): { lo: number; hi: number
 /** "+1.2", "−3.4" */
 export const difference = (x: number | null, digits = 1): string =>
   x === null ? "" : x < 0 ? `${MINUS}${fixed(-x, digits)}` : `+${fixed(x, digits)}`;
+
+/** Both campaigns, a line a stage: every mean with its n and its ends, and the revision it is judged against. */
+export const pairCsv = ({ left, right, stages }: CampaignPairAnswer): string =>
+  tableCsv(
+    stages.flatMap((stage) =>
+      (["left", "right"] as const).flatMap((side) => {
+        const { campaign, plan } = { left, right }[side];
+        const summary = stage[side];
+        const of = { ...campaign, planName: plan.name, planRevision: plan.revision };
+        return summary ? [{ campaign: of, stage: summary.stage, summary }] : [];
+      }),
+    ),
+    exportedStageColumns,
+  );

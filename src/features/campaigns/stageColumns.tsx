@@ -94,7 +94,7 @@ export const stageColumns: readonly Column<StageRow>[] = [
   number("apart", "other", (s) => s.places.apart.n, { width: "4.2em", wide: true }),
 ];
 
-const ends = (name: string, unit: string, of: (s: StageSummary) => Spread | null): Column<StageRow>[] =>
+const ends = (name: string, unit: string, of: (s: StageSummary) => Spread | null): Column<Exported>[] =>
   (["n", "mean", "min", "max"] as const).map((end) => ({
     id: `${name} ${end}`,
     header: end === "n" ? `${name}, n` : `${name}, ${end}`,
@@ -102,8 +102,13 @@ const ends = (name: string, unit: string, of: (s: StageSummary) => Spread | null
     value: ({ summary }) => (summary ? (of(summary)?.[end] ?? null) : null),
   }));
 
+/** What a file says of a stage's campaign. */
+type Exported = Pick<StageRow, "stage" | "summary"> & {
+  campaign: Pick<StageRow["campaign"], "code" | "title" | "planName" | "planRevision">;
+};
+
 /** The same in a file: every mean with its n and its ends. */
-export const exportedStageColumns: readonly Column<StageRow>[] = [
+export const exportedStageColumns: readonly Column<Exported>[] = [
   { id: "campaign", header: "campaign", value: ({ campaign }) => campaign.code },
   { id: "title", header: "title", value: ({ campaign }) => campaign.title },
   { id: "plan", header: "plan", value: ({ campaign }) => `${campaign.planName}, revision ${campaign.planRevision}` },

@@ -69,12 +69,12 @@ export const trialColumns = (
   }),
   ...(leach ? [figure("acidPerTonne", "acid", "kg/t", 0, "4.4em", { wide: true })] : []),
   ...(cementation ? [figure("reagentPerKg", "dust", "kg/kg", 2, "4.8em", { wide: true })] : []),
-  figure("pH", "pH", "", 2, "4em", {
+  figure("pH", "pH", "", 2, "4.4em", {
     cell: ({ figures: { pH, pHCooled } }) =>
       pH === null ? null : (
         <span title={pHCooled ? "pH of a cooled sample, not corrected" : undefined}>
           {fixed(pH, 2)}
-          {pHCooled && "*"}
+          {pHCooled && <span className="inline-block w-0">*</span>}
         </span>
       ),
   }),

@@ -4,13 +4,14 @@ import type { TrialListRow } from "../../../shared/schemas/trialRows";
 import { ButtonLink } from "../../components/Button";
 import { ErrorNote, Loading } from "../../components/status";
 import { Empty, Note, SectionHead } from "../../components/text";
+import { classes } from "../../lib/classes";
 import { shelved } from "../../lib/draftShelf";
 import { fullTime, savedAt } from "../../lib/format";
 import { useProject } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
-import { useAllTrials } from "../../lib/trials";
-import { elapsed, minutesSince } from "./bench/elapsed";
+import { useAllTrials, useTrial } from "../../lib/trials";
+import { elapsed, minutesSince, overdue } from "./bench/elapsed";
 import { useNow } from "./bench/useNow";
 
 const groups: readonly { status: TrialStatus; title: string; empty: string }[] = [
@@ -87,6 +88,9 @@ function Group({ status, title, empty, projectId, kept }: GroupProps) {
 
 function Tile({ trial, kept }: { trial: TrialListRow; kept: boolean }) {
   const minutes = minutesSince(trial.startedAt, useNow(30_000));
+  // The list carries no records; what runs is opened next anyway.
+  const record = useTrial(trial.status === "running" ? trial.id : undefined).data;
+  const late = record ? overdue(record.planned.duration, minutes) : null;
   const { pH, Eh, temperatureC } = trial.figures;
   return (
     <li className="hairline">
@@ -107,9 +111,12 @@ function Tile({ trial, kept }: { trial: TrialListRow; kept: boolean }) {
         </span>
         <span className="text-right text-lg">
           {trial.status === "running" ? (
-            <span className="font-mono font-bold text-verdigris">
-              {minutes === null ? "running" : elapsed(minutes)}
-            </span>
+            <>
+              <span className={classes("font-mono font-bold", late === null ? "text-verdigris" : "text-signal")}>
+                {minutes === null ? "running" : elapsed(minutes)}
+              </span>
+              {late !== null && <span className="block text-base font-bold text-signal">{late}</span>}
+            </>
           ) : trial.startedAt === null ? (
             <span className="text-muted">not started</span>
           ) : (

@@ -1,6 +1,7 @@
 import { numberIn } from "../../../../shared/entry/measure";
 import { plannedOnElectrode } from "./benchModel";
-import { elapsed, minutesOf } from "./elapsed";
+import { classes } from "../../../lib/classes";
+import { elapsed, minutesOf, overdue } from "./elapsed";
 import { useRecording } from "../record/context";
 
 /** How long it runs, when it was read last, and what the plan wants, on the electrode in hand. */
@@ -24,13 +25,24 @@ export function BenchBand({
     planned.temperature.text !== "" && `${planned.temperature.text} °C`,
     planned.duration.text !== "" && `${planned.duration.text} ${planned.duration.unit} in all`,
   ].filter(Boolean);
+  const late = status === "running" ? overdue(planned.duration, minutes) : null;
   return (
-    <div className="flex flex-wrap items-end justify-between gap-x-8 gap-y-1 border-b border-verdigris bg-tint px-5 py-3">
+    <div
+      className={classes(
+        "flex flex-wrap items-end justify-between gap-x-8 gap-y-1 border-b px-5 py-3",
+        late === null ? "border-verdigris bg-tint" : "border-signal",
+      )}
+    >
       <div>
         <p className="text-base">
           {status === "running" ? "Running for" : status === "planned" ? "Planned" : "Ran for"}
         </p>
-        <p className="font-mono text-[32px] leading-9 font-bold text-verdigris">
+        <p
+          className={classes(
+            "font-mono text-[32px] leading-9 font-bold",
+            late === null ? "text-verdigris" : "text-signal",
+          )}
+        >
           {status === "planned"
             ? "not started"
             : minutes === null
@@ -39,6 +51,11 @@ export function BenchBand({
                 ? elapsed(minutes)
                 : ran(values)}
         </p>
+        {late !== null && (
+          <p role="status" className="text-lg font-bold text-signal">
+            {late}: end the trial, or write down why it runs on.
+          </p>
+        )}
       </div>
       <div className="text-right text-lg">
         <p>{wants.length > 0 ? `Wanted: ${wants.join(", ")}` : "No conditions planned"}</p>

@@ -1,11 +1,10 @@
 import type { TrialRow } from "../../../../shared/schemas/trial";
-import { judge } from "../../../../shared/trials/judge";
 import { Formula } from "../../../components/Formula";
 import { PlainTable } from "../../../components/PlainTable";
 import { fixed } from "../../../lib/format";
 import { orpOf } from "../model/orp";
-import { isBlank } from "../model/trialValues";
 import { useRecording } from "../record/context";
+import { placeSaid } from "./benchModel";
 import { elapsed, minutesOf } from "./elapsed";
 
 interface Line {
@@ -19,6 +18,9 @@ interface Line {
   here: boolean;
 }
 
+/** "pH 0.21 below its planned 2.20" */
+const offWords = (sentence: string): string => sentence.replace(/^[^:]*: /, "").replace(/\.$/, "");
+
 /** Everything kept so far, newest first: readings, doses, samples in one list. */
 export function EntryLog({ saved }: { saved: TrialRow }) {
   const { values, electrodes, solved } = useRecording();
@@ -26,10 +28,8 @@ export function EntryLog({ saved }: { saved: TrialRow }) {
   const lines: Line[] = [
     ...readings.map((r, i): Line => {
       const orp = orpOf(r, electrodes);
-      const verdict =
-        orp.kind === "read" && !isBlank(r.pH.value) && solved?.solution
-          ? judge(orp.point, solved.solution, solved.inputs.controlBand).verdict
-          : null;
+      const said = placeSaid(r, values, electrodes, solved);
+      const off = said?.held?.tone === "bad";
       return {
         key: `reading ${i}`,
         minutes: minutesOf(r.at),
@@ -38,8 +38,14 @@ export function EntryLog({ saved }: { saved: TrialRow }) {
         T: r.temperature.text,
         remark: (
           <>
-            {verdict === "outside" && <b className="text-signal">outside the window</b>}
-            {verdict === "outside" && r.note !== "" && ", "}
+            {off && <b className="text-signal">{offWords(said?.held?.text ?? "")}</b>}
+            {said && !said.inside && (
+              <span className={said.laidOutside ? "text-muted" : ""}>
+                {off && "; "}
+                {said.laidOutside ? "outside the window, as laid out" : "outside the window"}
+              </span>
+            )}
+            {(off || said?.inside === false) && r.note !== "" && ", "}
             {r.note}
           </>
         ),

@@ -1,17 +1,15 @@
 import { useState } from "react";
-import { judge } from "../../../../shared/trials/judge";
 import { Dialog } from "../../../components/Dialog";
 import { fixed, withUnit } from "../../../lib/format";
 import { electrodeName, electrodeOptions } from "../model/electrodes";
 import { orpOf } from "../model/orp";
-import { placeWords } from "../model/placeWords";
-import { isBlank } from "../model/trialValues";
 import { useRecording } from "../record/context";
 import { BigButton, BigField } from "./BigField";
 import {
   benchProblems,
   hasText,
   pHSaid,
+  placeSaid,
   readingIn,
   stepFromLast,
   temperatureSaid,
@@ -44,10 +42,7 @@ export function ReadingPanel({ form, change, minutes, busy, onKeep }: ReadingPan
   const shown = (name: BenchField) =>
     problems[name] !== undefined && (pressed || (name !== field && hasText(form[name]))) ? problems[name] : undefined;
   const orp = orpOf(reading, electrodes);
-  const place: Said | null =
-    orp.kind === "read" && !isBlank(reading.pH.value) && solved?.solution
-      ? placeWords(judge(orp.point, solved.solution, solved.inputs.controlBand), solved.inputs)
-      : null;
+  const said = placeSaid(reading, values, electrodes, solved);
   const order: BenchField[] = form.cooled
     ? ["pH", "pHTemperature", "orp", "electrodeTemperature", "temperature", "at"]
     : ["pH", "orp", "electrodeTemperature", "temperature", "at"];
@@ -91,7 +86,7 @@ export function ReadingPanel({ form, change, minutes, busy, onKeep }: ReadingPan
       <div className="space-y-3">
         {big("pH", "pH", {
           aside: form.cooled ? "of a cooled sample" : "in the pulp",
-          said: [pHSaid(form, readings), place],
+          said: [pHSaid(form, readings), said?.held ?? null, said?.place ?? null],
         })}
         <div className="grid grid-cols-2 gap-3">
           <BigButton pressed={form.cooled} onClick={() => change({ cooled: !form.cooled })}>

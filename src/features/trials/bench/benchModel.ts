@@ -4,9 +4,13 @@ import { numberIn } from "../../../../shared/entry/measure";
 import { readEntry } from "../../../../shared/entry/readEntry";
 import { refusalOf } from "../../../../shared/schemas/entry";
 import type { TrialReading } from "../../../../shared/schemas/trialRecord";
+import { judge } from "../../../../shared/trials/judge";
 import { fixed, signed, withUnit } from "../../../lib/format";
+import type { SolvedRevision } from "../../../lib/solvedRevision";
+import { deviationWords, plannedOutside, plannedPoint } from "../model/deviationWords";
 import { electrodeName } from "../model/electrodes";
 import { orpOf } from "../model/orp";
+import { placeWords } from "../model/placeWords";
 import { isBlank, type TrialValues } from "../model/trialValues";
 import type { BenchForm } from "./benchShelf";
 import { timeEntry } from "./elapsed";
@@ -55,6 +59,26 @@ export const lastWith = (
   readings: readonly TrialReading[],
   has: (r: TrialReading) => boolean,
 ): TrialReading | undefined => readings.findLast(has);
+
+/** What a reading that has a place says of itself: held where it was laid out or not, and inside or outside of the window. */
+export function placeSaid(
+  reading: TrialReading,
+  { planned }: Pick<TrialValues, "planned">,
+  electrodes: readonly ElectrodeSeries[],
+  solved: SolvedRevision | undefined,
+): { held: Said | null; place: Said; inside: boolean; laidOutside: boolean } | null {
+  const orp = orpOf(reading, electrodes);
+  if (orp.kind !== "read" || isBlank(reading.pH.value) || !solved?.solution) return null;
+  const wanted = plannedPoint(planned, electrodes);
+  const judgement = judge(orp.point, solved.solution, solved.inputs.controlBand);
+  const laidOutside = plannedOutside(wanted, orp.point, solved);
+  return {
+    held: deviationWords(orp.point, wanted, solved.inputs.controlBand),
+    place: placeWords(judgement, solved.inputs, laidOutside),
+    inside: judgement.verdict !== "outside",
+    laidOutside,
+  };
+}
 
 export interface Said {
   text: string;
@@ -107,16 +131,8 @@ export function plannedOnElectrode(
   electrode: string | null,
   electrodeC: number,
 ): string | null {
-  const planned: TrialReading = {
-    at: { text: "", unit: "h" },
-    temperature: trial.planned.temperature,
-    pH: { value: { text: "", unit: "pH" }, temperature: { text: "", unit: "C" }, cooledSample: false },
-    orp: trial.planned.orp,
-    note: "",
-  };
-  const found = orpOf(planned, electrodes);
-  if (found.kind !== "read") return null;
-  const { Eh } = found.point;
+  const { Eh } = plannedPoint(trial.planned, electrodes);
+  if (Eh === null) return null;
   const series = electrodes.find(({ id }) => id === electrode);
   if (!series) return `${withUnit(fixed(Eh * 1000, 0), "mV")} vs SHE`;
   const read = fromSHE(Eh, series, electrodeC);

@@ -1,5 +1,6 @@
 import { numberIn } from "../../../../shared/entry/measure";
 import type { Entry } from "../../../../shared/entry/readEntry";
+import { withUnit } from "../../../lib/format";
 
 /** Whole minutes since the start; null before it, or without one. */
 export function minutesSince(startedAt: string | null, now: Date): number | null {
@@ -24,6 +25,18 @@ export function timeEntry(typed: string, minutes: number | null, unit: string | 
   if (unit === "h") return { text: (minutes / 60).toFixed(2), unit };
   if (unit === "d") return { text: (minutes / 1440).toFixed(3), unit };
   return { text: String(minutes), unit: "min" };
+}
+
+/** A tenth over is the bench's own slack; a trial beyond it was forgotten or goes another way than it was laid out. */
+const SLACK = 0.1;
+
+/** How far a running trial is past the end it was laid out for: "21 d 16 h past its planned 6.0 h".
+ *  @param planned  duration as typed     @param minutes  since the start
+ *  @returns  null while it runs as planned     @source  the slack: common practice, no source */
+export function overdue(planned: Entry, minutes: number | null): string | null {
+  const wanted = minutesOf(planned);
+  if (wanted === null || minutes === null || minutes <= wanted * (1 + SLACK)) return null;
+  return `${elapsed(minutes - wanted)} past its planned ${withUnit(planned.text.trim(), planned.unit)}`;
 }
 
 /** A typed time as minutes; null where it is blank or no number. */

@@ -25,8 +25,13 @@ export interface PlaceSentence {
   tone: "good" | "bad" | "quiet";
 }
 
-/** Where a measured point stands, in a sentence with a distance: "Inside window A, 1.9 control bands from where Fe is no longer solid." */
-export function placeWords(judgement: Judgement, inputs: Pick<PlanInputs, "metals">): PlaceSentence {
+/** Where a measured point stands, in a sentence with a distance: "Inside window A, 1.9 control bands from where Fe is no longer solid."
+ *  @param laidOutside  the trial was planned outside on purpose: being there is no fault of it */
+export function placeWords(
+  judgement: Judgement,
+  inputs: Pick<PlanInputs, "metals">,
+  laidOutside = false,
+): PlaceSentence {
   const { verdict, window, unsure, nearest } = judgement;
   if (verdict === "off the map") return { text: "Beyond the frame the plan was solved in: not judged.", tone: "quiet" };
   if (nearest === null) return { text: "The plan has no window: outside everywhere.", tone: "bad" };
@@ -40,5 +45,8 @@ export function placeWords(judgement: Judgement, inputs: Pick<PlanInputs, "metal
     };
   return verdict === "inside"
     ? { text: `Inside ${name}, ${bands} from ${limit}.`, tone: "good" }
-    : { text: `Outside, ${bands} beyond ${limit === "a limit" ? "a limit" : limit} (${name}).`, tone: "bad" };
+    : {
+        text: `Outside${laidOutside ? " as it was laid out" : ""}, ${bands} beyond ${limit} (${name}).`,
+        tone: laidOutside ? "quiet" : "bad",
+      };
 }

@@ -77,6 +77,7 @@ export function PlannedSection() {
               onChange={(entry) => put({ [key]: entry }, key)}
               error={problemAt(problems, `planned.${key}`)}
               readOnly={readOnly}
+              emptyText="not planned"
             />
           ))}
           <EntryField
@@ -86,6 +87,7 @@ export function PlannedSection() {
             onChange={(value) => put({ orp: { ...planned.orp, value } }, "orp")}
             error={problemAt(problems, "planned.orp.value")}
             readOnly={readOnly}
+            emptyText="not planned"
           />
           <Select
             label="against"
@@ -108,6 +110,7 @@ export function PlannedSection() {
               onChange={(entry) => put({ [key]: entry }, key)}
               error={problemAt(problems, `planned.${key}`)}
               readOnly={readOnly}
+              emptyText="not planned"
             />
           ))}
           <div className="pt-3">

@@ -4,6 +4,7 @@ import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { classes } from "../../../lib/classes";
 import { fixed, withUnit } from "../../../lib/format";
 import { usePotentialScale } from "../../../lib/potential";
+import { deviationWords, plannedOutside, plannedPoint } from "../model/deviationWords";
 import { placeWords } from "../model/placeWords";
 import { sectionOf } from "../model/trialWords";
 import { standingOf } from "../model/workings";
@@ -30,7 +31,10 @@ export function StandingPanel() {
   const { figures, missing, point, pointMissing, judgement, comparability } = standing;
   const pct = (x: number | null, digits = 1) =>
     x === null ? <span className="font-sans text-muted">open</span> : withUnit(fixed(x, digits), "%");
-  const place = judgement && solved ? placeWords(judgement, solved.inputs) : null;
+  const wanted = plannedPoint(values.planned, electrodes);
+  const place =
+    judgement && point && solved ? placeWords(judgement, solved.inputs, plannedOutside(wanted, point, solved)) : null;
+  const held = point && solved ? deviationWords(point, wanted, solved.inputs.controlBand) : null;
   return (
     <>
       <SectionHead aside={figures.recoveryBasis ?? undefined}>So far</SectionHead>
@@ -86,6 +90,7 @@ export function StandingPanel() {
             {point.conversion}.
           </Note>
           {place && <p className={classes("pt-1", toneClass[place.tone])}>{place.text}</p>}
+          {held && <p className={classes("pt-1", held.tone === "bad" ? "text-ink" : "text-muted")}>{held.text}</p>}
           {point.marks.map(({ mark, text }) => (
             <Note key={mark}>{text}</Note>
           ))}
