@@ -101,6 +101,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         data-key={key}
         aria-rowindex={index + 2}
         aria-selected={onSelect ? selected : undefined}
+        data-hovered={key === hoveredKey ? "" : undefined}
         tabIndex={interactive ? (tabStop ? 0 : -1) : undefined}
         style={{ height: rowHeight }}
         onClick={() => {

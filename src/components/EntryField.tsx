@@ -2,6 +2,7 @@ import { useId, useState, type ReactNode } from "react";
 import { quantities, unitsOf, type QuantityName } from "../../shared/entry/quantities";
 import { readEntry, type Entry } from "../../shared/entry/readEntry";
 import { refusalOf } from "../../shared/schemas/entry";
+import { afterPress } from "../lib/afterPress";
 import { classes } from "../lib/classes";
 import { unitText } from "../lib/units";
 import { UnitSelect } from "./UnitSelect";
@@ -69,7 +70,7 @@ export function EntryField(props: EntryFieldProps) {
               setLeft(false);
               event.target.select();
             }}
-            onBlur={() => setLeft(true)}
+            onBlur={() => afterPress(() => setLeft(true))}
             style={{ width: `${width}ch` }}
             className={classes(
               "h-6 rounded-sm border bg-sheet px-1 text-right font-mono text-base pointer-coarse:h-9",

@@ -9,7 +9,7 @@ interface Shared {
 
 // What may only be read is text, not a box that looks as if it could be typed in.
 const box =
-  "block w-full rounded-sm border bg-sheet px-2 text-base disabled:opacity-60 [&[readonly]]:resize-none [&[readonly]]:border-transparent [&[readonly]]:bg-transparent [&[readonly]]:px-0";
+  "block w-full rounded-sm border bg-sheet px-2 text-base disabled:opacity-60 [&[readonly]]:resize-none [&[readonly]]:border-transparent [&[readonly]]:bg-transparent [&[readonly]]:px-0 [&[readonly]]:py-0 [&[readonly]]:h-auto";
 const edge = (error: unknown) => (error ? "border-signal" : "border-muted");
 
 function Frame({

@@ -214,6 +214,7 @@ export function TrialsLayer({ marks, scale, store, onOpen, sheet, visible, live,
       <div
         ref={ring}
         aria-hidden
+        data-testid="trial-ring"
         className="no-print pointer-events-none absolute -top-2.5 -left-2.5 h-5 w-5 rounded-full border-2 border-ink"
         style={{ visibility: "hidden" }}
       />

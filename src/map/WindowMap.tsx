@@ -100,6 +100,12 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
     },
     [sheet, visible, trials, onPick],
   );
+  // A trial run at the set point lies under its handle: a press that moves nothing means the trial.
+  const openAt = (x: number, y: number) => {
+    const pixels = sheet && mapPixels(sheet, visible);
+    const mark = pixels && trials && nearestMark(trials.marks, pixels.toPixel, x, y);
+    if (mark) trials.onOpen(mark.id);
+  };
   const reset = useCallback(() => {
     clearTimeout(rest.current);
     live.set(null);
@@ -153,7 +159,9 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
             onPick={pick}
             onReset={reset}
           />
-          {handle && view.layers.setPoint && <SetPointHandle sheet={sheet} visible={visible} {...handle} />}
+          {handle && view.layers.setPoint && (
+            <SetPointHandle sheet={sheet} visible={visible} {...handle} onPress={openAt} />
+          )}
         </>
       ) : null}
     </div>

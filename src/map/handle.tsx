@@ -12,6 +12,8 @@ export interface SetPointHandleProps {
   onMove: (at: Point) => void;
   /** the hand let go, or the keys rest */
   onSettle: () => void;
+  /** pressed and let go without a move: px on the sheet */
+  onPress?: (x: number, y: number) => void;
 }
 
 const STEP = { pH: 0.02, Eh: 0.005 };
@@ -23,8 +25,8 @@ const moves: Readonly<Record<string, readonly [number, number]>> = {
 };
 
 /** Lies over the set point and is taken by mouse, finger or arrow keys. Wider than the mark, so that a finger finds it. */
-export function SetPointHandle({ sheet, visible, at, label, onMove, onSettle }: SetPointHandleProps) {
-  const grip = useRef<{ dx: number; dy: number } | null>(null);
+export function SetPointHandle({ sheet, visible, at, label, onMove, onSettle, onPress }: SetPointHandleProps) {
+  const grip = useRef<{ dx: number; dy: number; moved: boolean } | null>(null);
   const frame = useRef(0);
   useEffect(() => () => cancelAnimationFrame(frame.current), []);
   const { toPixel, toPoint, box } = mapPixels(sheet, visible);
@@ -45,20 +47,24 @@ export function SetPointHandle({ sheet, visible, at, label, onMove, onSettle }: 
       onPointerDown={(event) => {
         if (event.button !== 0) return;
         event.currentTarget.setPointerCapture(event.pointerId);
-        grip.current = { dx: event.clientX - x, dy: event.clientY - y };
+        grip.current = { dx: event.clientX - x, dy: event.clientY - y, moved: false };
       }}
       onPointerMove={(event) => {
         const held = grip.current;
         if (!held) return;
         const [px, py] = [event.clientX - held.dx, event.clientY - held.dy];
         if (Math.hypot(px - x, py - y) < 1) return;
+        held.moved = true;
         cancelAnimationFrame(frame.current);
         frame.current = requestAnimationFrame(() => onMove(clamped(px, py)));
       }}
-      onPointerUp={() => {
-        if (!grip.current) return;
+      onPointerUp={(event) => {
+        const held = grip.current;
+        if (!held) return;
         grip.current = null;
         onSettle();
+        const outline = event.currentTarget.offsetParent?.getBoundingClientRect();
+        if (!held.moved && outline) onPress?.(event.clientX - outline.left, event.clientY - outline.top);
       }}
       onPointerCancel={() => {
         grip.current = null;

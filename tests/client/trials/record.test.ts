@@ -136,7 +136,7 @@ describe("at the bench", () => {
     expect(benchProblems(readingIn(form, 132))).toEqual({});
     expect(benchProblems(readingIn({ ...form, electrode: null }, 132)).electrode).toContain("Name the electrode");
     expect(benchProblems(readingIn({ ...form, pH: "<4" }, 132)).pH).toContain("limit");
-    expect(benchProblems(readingIn(emptyForm, 132)).none).toBe("Nothing is typed yet");
+    expect(benchProblems(readingIn({ ...emptyForm, electrodeTemperature: "" }, 132)).none).toBe("Nothing is typed yet");
   });
   test("a jump from the last reading is told on one scale, whatever each was read against", () => {
     expect(stepFromLast(at("386"), [at("371")], electrodes)).toBe("15 mV higher than the last reading");

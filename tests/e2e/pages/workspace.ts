@@ -104,9 +104,9 @@ export class WorkspaceScreen {
     return this.plot().evaluate((element) => (element as PlotlyElement).layout.annotations.map((a) => a.text));
   }
 
-  /** Moves the mouse to a point of the map; Eh on the scale shown. */
-  async pointAt(pH: number, Eh: number): Promise<void> {
-    const [x, y] = await this.plot().evaluate(
+  /** Where a point of the map stands on the page; Eh on the scale shown. */
+  pixelOf(pH: number, Eh: number): Promise<readonly [x: number, y: number]> {
+    return this.plot().evaluate(
       (element, [pH, Eh]) => {
         const box = element.getBoundingClientRect();
         const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
@@ -114,7 +114,11 @@ export class WorkspaceScreen {
       },
       [pH, Eh] as const,
     );
-    await this.page.mouse.move(x, y);
+  }
+
+  /** Moves the mouse to a point of the map. */
+  async pointAt(pH: number, Eh: number): Promise<void> {
+    await this.page.mouse.move(...(await this.pixelOf(pH, Eh)));
   }
 
   /** Drags a slider's thumb by some pixels; what `whileHeld` reads, it reads before the hand lets go. */

@@ -56,8 +56,7 @@ export function Bench({ trial, campaign, data }: { trial: TrialRow; campaign: Ca
   const probe = {
     ...form,
     electrode: form.electrode ?? last?.orp.electrode ?? null,
-    electrodeTemperature:
-      form.electrodeTemperature === "" ? (last?.orp.electrodeTemperature.text ?? "") : form.electrodeTemperature,
+    electrodeTemperature: form.electrodeTemperature ?? last?.orp.electrodeTemperature.text ?? "",
   };
   const keep = (next: (t: TrialValues) => TrialValues, cleared: Partial<typeof form>) => {
     edit(next);
@@ -167,11 +166,11 @@ export function Bench({ trial, campaign, data }: { trial: TrialRow; campaign: Ca
             {task === "reading" && (
               <ReadingPanel
                 {...shared}
+                carried={form.electrodeTemperature === null}
                 onKeep={() =>
                   keep(withReading(readingIn(probe, minutes, last?.at.unit)), {
                     ...emptyForm,
                     electrode: probe.electrode,
-                    electrodeTemperature: probe.electrodeTemperature,
                     amount: form.amount,
                     volume: form.volume,
                     makeUp: form.makeUp,

@@ -53,7 +53,7 @@ export function BenchBand({
         </p>
         {late !== null && (
           <p role="status" className="text-lg font-bold text-signal">
-            {late}: end the trial, or write down why it runs on.
+            {late}
           </p>
         )}
       </div>
@@ -65,6 +65,7 @@ export function BenchBand({
               ? "last reading just now"
               : `last reading ${elapsed(minutes - last)} ago`
             : `${measured.readings.length} ${measured.readings.length === 1 ? "reading" : "readings"}`}
+          {late !== null && "; end the trial, or note why it runs on"}
         </p>
       </div>
     </div>

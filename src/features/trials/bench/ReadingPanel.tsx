@@ -17,12 +17,14 @@ import {
   type BenchField,
   type Said,
 } from "./benchModel";
-import type { BenchForm } from "./benchShelf";
+import type { BenchForm, FilledForm } from "./benchShelf";
 import { elapsed } from "./elapsed";
 import { Keypad } from "./Keypad";
 
 interface ReadingPanelProps {
-  form: BenchForm;
+  form: FilledForm;
+  /** the electrode's temperature is that of the last reading: the first key types anew */
+  carried: boolean;
   change: (part: Partial<BenchForm>) => void;
   /** since the start, now */
   minutes: number | null;
@@ -31,7 +33,7 @@ interface ReadingPanelProps {
 }
 
 /** pH, ORP and temperature in big digits; what they mean stands under them before they are kept. */
-export function ReadingPanel({ form, change, minutes, busy, onKeep }: ReadingPanelProps) {
+export function ReadingPanel({ form, carried, change, minutes, busy, onKeep }: ReadingPanelProps) {
   const { values, electrodes, solved } = useRecording();
   const [field, setField] = useState<BenchField>("pH");
   const [pressed, setPressed] = useState(false);
@@ -130,7 +132,13 @@ export function ReadingPanel({ form, change, minutes, busy, onKeep }: ReadingPan
         )}
       </div>
       <div>
-        <Keypad onKey={(key) => change({ [field]: typed(form[field], key) })} onNext={next} />
+        <Keypad
+          onKey={(key) => {
+            const anew = field === "electrodeTemperature" && carried && key !== "delete";
+            change({ [field]: typed(anew ? "" : form[field], key) });
+          }}
+          onNext={next}
+        />
         <BigButton primary className="mt-2 min-h-[76px] w-full text-[21px]!" disabled={busy} onClick={keep}>
           Keep reading
         </BigButton>

@@ -12,14 +12,14 @@ import { electrodeName } from "../model/electrodes";
 import { orpOf } from "../model/orp";
 import { placeWords } from "../model/placeWords";
 import { isBlank, type TrialValues } from "../model/trialValues";
-import type { BenchForm } from "./benchShelf";
+import type { BenchForm, FilledForm } from "./benchShelf";
 import { timeEntry } from "./elapsed";
 
 export type BenchField = "pH" | "pHTemperature" | "orp" | "electrodeTemperature" | "temperature" | "at";
 
 /** The reading that stands in the fields.
  *  @param minutes  since the start, where no time was typed     @param unit  of time, as the record has it so far */
-export function readingIn(form: BenchForm, minutes: number | null, unit?: string): TrialReading {
+export function readingIn(form: FilledForm, minutes: number | null, unit?: string): TrialReading {
   return {
     at: timeEntry(form.at, minutes, unit),
     temperature: { text: form.temperature, unit: "C" },

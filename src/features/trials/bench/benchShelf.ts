@@ -7,7 +7,8 @@ export interface BenchForm {
   cooled: boolean;
   orp: string;
   electrode: string | null;
-  electrodeTemperature: string;
+  /** null: as at the last reading; empty: as the pulp */
+  electrodeTemperature: string | null;
   temperature: string;
   /** minutes since the start; empty: now */
   at: string;
@@ -23,7 +24,7 @@ export const emptyForm: BenchForm = {
   cooled: false,
   orp: "",
   electrode: null,
-  electrodeTemperature: "",
+  electrodeTemperature: null,
   temperature: "",
   at: "",
   amount: "",
@@ -42,6 +43,9 @@ function read(trialId: string): BenchForm {
     return emptyForm;
   }
 }
+
+/** With what the last reading leaves in the vessel filled in. */
+export type FilledForm = BenchForm & { electrodeTemperature: string };
 
 /** The half-typed entry of one trial, kept through a reload. */
 export function useBenchForm(trialId: string) {

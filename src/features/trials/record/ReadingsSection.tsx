@@ -55,7 +55,11 @@ export function ReadingsSection() {
     (r) => !isBlank(r.orp.value) && hotter(r.orp.electrodeTemperature.text || r.temperature.text),
   );
   return (
-    <Section id="readings" title="Readings" aside="Enter goes down, Ctrl+D repeats, a block can be pasted">
+    <Section
+      id="readings"
+      title="Readings"
+      aside={readOnly ? undefined : "Enter goes down, Ctrl+D repeats, a block can be pasted"}
+    >
       <EntryGrid
         caption="Readings"
         rowName="reading"

@@ -86,15 +86,17 @@ export function TrialSection({ id }: { id: string }) {
         {instant("startedAt", "Started")}
         {instant("endedAt", "Ended")}
       </div>
-      <TextArea
-        className="mt-3"
-        label="Notes"
-        rows={2}
-        maxLength={4000}
-        readOnly={readOnly}
-        value={values.notes}
-        onChange={(event) => set("notes", event.target.value)}
-      />
+      {(!readOnly || values.notes !== "") && (
+        <TextArea
+          className="mt-3"
+          label="Notes"
+          rows={2}
+          maxLength={4000}
+          readOnly={readOnly}
+          value={values.notes}
+          onChange={(event) => set("notes", event.target.value)}
+        />
+      )}
     </Section>
   );
 }
