@@ -32,7 +32,7 @@ test("a metallurgist lays a trial out on the set point of the campaign's plan", 
   story.code = await sheet.field("trial", "Code").inputValue();
   expect(story.code).toBe("NL-1-23");
   await sheet.button("Take the set point of Neutral leach, second tank").click();
-  const setPoint = solved(demoInputs(planId)).windows[0]!.setPoint!;
+  const setPoint = solved(demoInputs(planId)).windows[0]!.setPoint;
   await expect.poll(() => sheet.field("planned", "pH").inputValue()).toBe(setPoint.pH.toFixed(2));
   expect(Number(await sheet.field("planned", "ORP").inputValue())).toBe(Math.round(setPoint.Eh * 1000));
   await sheet.field("planned", "Tenor of Zn, final liquor").fill("84");
