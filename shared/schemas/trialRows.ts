@@ -33,6 +33,8 @@ export interface ComparedTrial {
   products: Pick<Products, "finalAssays" | "liquorDensity">;
   /** g/L of the target had all of it dissolved (trials/couldCarry.ts); null where that is not known */
   couldCarry?: number | null;
+  /** g/L H2SO4 titrated in the final liquor (trials/trialAcid.ts); null where it was not */
+  freeAcid?: number | null;
 }
 
 /** A trial as a point on the map, and the line of the table beside it. */

@@ -2,7 +2,10 @@ import { parse } from "csv-parse/sync";
 import type { Agent } from "supertest";
 import { expect, test } from "vitest";
 import { csvLine } from "../../server/http/csv";
+import { freeAcid } from "../../shared/activity/freeAcid";
 import { formulaVersion } from "../../shared/metallurgy/formulaVersion";
+import { valueOf } from "../../shared/outcome";
+import { chemistry } from "../support/chemistry";
 import { bench, typed, unusualTrial } from "../support/records";
 import { testServer } from "../support/testServer";
 
@@ -69,6 +72,26 @@ test("a file of trials has units, electrodes, what was typed and what was worked
     "trial id": id,
   });
   expect(rows[1]?.["potential, as read and converted"]).toMatch(/^412 mV \+ 207 mV .* = 619 mV vs SHE$/);
+});
+
+test("below pH 1.5 the file gives the free acid titrated, that by pH, and the difference; above, neither", async () => {
+  const { as } = await testServer();
+  const metallurgist = await as("metallurgist");
+  const { addTrial } = await bench(metallurgist);
+  const { measured } = unusualTrial;
+  const readings = measured.readings.map((r) => ({ ...r, pH: { ...r.pH, value: typed("1.20", "pH") } }));
+  await addTrial({ code: "NL-01" });
+  await addTrial({ code: "NL-02", measured: { ...measured, readings } });
+  const { rows } = await file(metallurgist, { sort: "code", order: "asc" });
+  const acid = (row: Line | undefined) =>
+    ["titrated", "by pH, indicative"].map((by) => row?.[`free acid at a pH below 1.5, ${by} / g/L H2SO4`] ?? "");
+  expect(acid(rows[0])).toEqual(["", ""]);
+  const [titrated, byPH] = acid(rows[1]).map(Number) as [number, number];
+  expect(titrated).toBe(2);
+  // of the cooled sample the pH was read in, not of the pulp
+  const expected = valueOf(freeAcid(chemistry(), 1.2, 1.3, 25)).gPerL;
+  expect(byPH).toBeCloseTo(expected, 9);
+  expect(Number(rows[1]?.["free acid, titrated less by pH / g/L H2SO4"])).toBeCloseTo(2 - expected, 9);
 });
 
 test("text that a spreadsheet would run as a formula is kept text; negative numbers stay numbers", async () => {

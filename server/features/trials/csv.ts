@@ -2,6 +2,7 @@ import { eq, inArray, sql } from "drizzle-orm";
 import type { z } from "zod";
 import type { trialsCsvQuery } from "../../../shared/schemas/trialRows";
 import { measuredPoint } from "../../../shared/trials/measuredPoint";
+import { titratedAcid, trialAcid } from "../../../shared/trials/trialAcid";
 import type { Db } from "../../db/open";
 import { byteOrderMark, csvLine, type Cell } from "../../http/csv";
 import { campaigns } from "../campaigns/schema";
@@ -39,7 +40,7 @@ function analytesOf(db: Db, ids: readonly string[]): Record<Stream, string[]> {
 }
 
 /** Everything a line needs that stands in other rows. */
-function exported(db: Db, ids: readonly string[], { electrodes }: Workings): ExportedTrial[] {
+function exported(db: Db, ids: readonly string[], { electrodes, masses, data }: Workings): ExportedTrial[] {
   const rows = trialsOf(db, ids);
   const of = new Map(
     db
@@ -67,14 +68,19 @@ function exported(db: Db, ids: readonly string[], { electrodes }: Workings): Exp
       .all()
       .map(({ id, code }) => [id, code]),
   );
-  return rows.map((trial) => ({
-    ...trial,
-    projectName: of.get(trial.campaignId)?.projectName ?? "",
-    stageOf: of.get(trial.campaignId)?.stages.find(({ code }) => code === trial.stage) ?? null,
-    feedOf: feedsById.get(trial.feedId) ?? null,
-    replicateOfCode: trial.replicateOf === null ? null : (codes.get(trial.replicateOf) ?? null),
-    conversion: measuredPoint(trial, electrodes).point?.conversion ?? null,
-  }));
+  return rows
+    .map((trial) => ({ trial, point: measuredPoint(trial, electrodes).point }))
+    .map(({ trial, point }) => ({
+      ...trial,
+      projectName: of.get(trial.campaignId)?.projectName ?? "",
+      stageOf: of.get(trial.campaignId)?.stages.find(({ code }) => code === trial.stage) ?? null,
+      feedOf: feedsById.get(trial.feedId) ?? null,
+      replicateOfCode: trial.replicateOf === null ? null : (codes.get(trial.replicateOf) ?? null),
+      conversion: point?.conversion ?? null,
+      acid:
+        point &&
+        trialAcid(trial, { pH: point.pH, temperatureC: point.pHTemperatureC }, titratedAcid(trial, masses), null, data),
+    }));
 }
 
 /** How many trials are read at a time: the database is not held while a slow reader takes the file. */

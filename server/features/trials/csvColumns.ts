@@ -3,6 +3,7 @@ import { headOf } from "../../../shared/metallurgy/account/solids";
 import type { CampaignStage } from "../../../shared/schemas/campaign";
 import type { FeedRow } from "../../../shared/schemas/feed";
 import type { TrialRow } from "../../../shared/schemas/trial";
+import type { TrialAcid } from "../../../shared/trials/trialAcid";
 import type { Cell } from "../../http/csv";
 
 /** A trial as exports read it. */
@@ -14,6 +15,8 @@ export interface ExportedTrial extends TrialRow {
   electrode: string | null;
   /** "450 mV + 207 mV (Ag/AgCl, 3 mol/L KCl at 25 °C) = 657 mV vs SHE" */
   conversion: string | null;
+  /** below pH 1.5: what was titrated, and what the pH stands for by the trial's own sulfate */
+  acid: TrialAcid | null;
   formulaVersion: string;
 }
 
@@ -60,6 +63,9 @@ const figures: Column[][] = [
   plain("acid or cementing metal / kg per kg", (t) => t.figures.reagentPerKg),
   plain("pH", (t) => t.figures.pH),
   plain("pH of a cooled sample", (t) => t.figures.pHCooled),
+  plain("free acid at a pH below 1.5, titrated / g/L H2SO4", (t) => t.acid?.titrated ?? null),
+  plain("free acid at a pH below 1.5, by pH, indicative / g/L H2SO4", (t) => t.acid?.byPH ?? null),
+  plain("free acid, titrated less by pH / g/L H2SO4", (t) => t.acid?.difference ?? null),
   plain("Eh / V vs SHE", (t) => t.figures.Eh),
   plain("Eh uncertainty / +- V", (t) => t.figures.EhUncertainty),
   plain("reference electrode", (t) => t.electrode),

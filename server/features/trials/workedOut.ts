@@ -6,8 +6,10 @@ import type { SolutionAssay } from "../../../shared/schemas/entry";
 import type { Feed } from "../../../shared/schemas/feed";
 import type { Trial, TrialFigures } from "../../../shared/schemas/trial";
 import type { ComparedTrial } from "../../../shared/schemas/trialRows";
+import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { couldCarry } from "../../../shared/trials/couldCarry";
 import { trialFigures } from "../../../shared/trials/figures";
+import { titratedAcid } from "../../../shared/trials/trialAcid";
 import { measuredPoint } from "../../../shared/trials/measuredPoint";
 import type { Chemistry } from "../chemistry/library";
 import type { trials } from "./schema";
@@ -16,10 +18,12 @@ import type { trials } from "./schema";
 export interface Workings {
   masses: MolarMasses;
   electrodes: readonly ElectrodeSeries[];
+  data: ChemicalData;
 }
 export const workingsOf = ({ data, current }: Chemistry): Workings => ({
   masses: data.molarMass,
   electrodes: electrodeSeries(current),
+  data,
 });
 
 const ofTarget = (assays: readonly SolutionAssay[], { target }: CampaignStage) =>
@@ -34,6 +38,7 @@ const comparedOf = (trial: Trial, feed: Feed, stage: CampaignStage, masses: Mola
     charge: { liquorAssays: ofTarget(charge.liquorAssays, stage), liquorDensity: charge.liquorDensity },
     products: { finalAssays: ofTarget(products.finalAssays, stage), liquorDensity: products.liquorDensity },
     couldCarry: couldCarry(trial, feed, stage.target, masses),
+    freeAcid: titratedAcid(trial, masses),
   };
 };
 

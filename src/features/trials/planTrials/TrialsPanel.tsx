@@ -1,5 +1,8 @@
 import { useDeferredValue, useMemo, useState } from "react";
 import { Link } from "react-router-dom";
+import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
+import type { TrialAcid } from "../../../../shared/trials/trialAcid";
+import { acidFigures } from "../../../components/AcidAmount";
 import { Button } from "../../../components/Button";
 import { Check, Segmented } from "../../../components/choice";
 import { DataTable } from "../../../components/DataTable";
@@ -7,7 +10,7 @@ import { ErrorNote, Loading } from "../../../components/status";
 import type { Column } from "../../../components/tableModel";
 import { Empty, Note, SectionHead } from "../../../components/text";
 import { VirtualBody } from "../../../components/VirtualBody";
-import { fixed } from "../../../lib/format";
+import { fixed, signed } from "../../../lib/format";
 import type { PlacedTrial } from "../../../lib/judgedTrials";
 import type { PotentialScale } from "../../../lib/potential";
 import { inBrush, useTold } from "../../../map/trialStore";
@@ -76,7 +79,11 @@ export function TrialsPanel({ trials, scale }: { trials: PlanTrials; scale: Pote
   );
 }
 
-const columnsOf = (scale: PotentialScale): readonly Column<PlacedTrial>[] => [
+const columnsOf = (
+  scale: PotentialScale,
+  trials: readonly PlacedTrial[],
+  acidOf: (trial: PlacedTrial) => TrialAcid | null,
+): readonly Column<PlacedTrial>[] => [
   {
     id: "code",
     header: "trial",
@@ -88,7 +95,7 @@ const columnsOf = (scale: PotentialScale): readonly Column<PlacedTrial>[] => [
     header: "rec.",
     unit: "%",
     digits: 0,
-    width: "3.6em",
+    width: "3.2em",
     filtered: false,
     value: (t) => t.figures.recoveryPct,
   },
@@ -97,14 +104,29 @@ const columnsOf = (scale: PotentialScale): readonly Column<PlacedTrial>[] => [
     header: "gang.",
     unit: "%",
     digits: 1,
-    width: "4.2em",
+    width: "3.8em",
     filtered: false,
     value: (t) => t.figures.gangueDissolvedPct,
   },
   {
+    id: "pH",
+    header: acidic(trials) ? "pH · acid" : "pH",
+    ...(acidic(trials) ? { unit: "g/L" } : {}),
+    digits: 2,
+    width: acidic(trials) ? "6.2em" : "3.4em",
+    filtered: false,
+    value: (t) => t.figures.pH,
+    cell: (t) => (
+      <>
+        {t.figures.pH !== null && fixed(t.figures.pH, 2)}
+        <Acid acid={acidOf(t)} />
+      </>
+    ),
+  },
+  {
     id: "place",
     header: "is",
-    width: "5em",
+    width: "3.2em",
     value: (t) => t.count,
     cell: (t) => (
       <span
@@ -118,20 +140,46 @@ const columnsOf = (scale: PotentialScale): readonly Column<PlacedTrial>[] => [
               ? "other"
               : t.count === "rejected"
                 ? "rej."
-                : "no place"}
+                : "none"}
       </span>
     ),
   },
 ];
 
+const acidic = (trials: readonly PlacedTrial[]): boolean =>
+  trials.some(({ figures: { pH } }) => pH !== null && pH < FREE_ACID_BELOW);
+
+/** Free acid as titrated, below pH 1.5; what the pH stands for, and the difference, behind it. */
+function Acid({ acid }: { acid: TrialAcid | null }) {
+  if (acid === null) return null;
+  const { titrated, byPH, difference } = acid;
+  const words = [
+    titrated === null ? "not titrated" : `titrated ${acidFigures(titrated)} g/L H2SO4`,
+    byPH === null ? "by pH not known" : `about ${acidFigures(byPH)} g/L by pH, indicative`,
+    ...(difference === null ? [] : [`titration less pH ${signed(difference, 1)} g/L, neither corrected`]),
+  ].join("; ");
+  return (
+    <span title={words} aria-label={words} role="text" className="text-muted">
+      {" · "}
+      {titrated === null ? (byPH === null ? "?" : `~${acidFigures(byPH)}`) : acidFigures(titrated)}
+    </span>
+  );
+}
+
 /** The trials as rows: pointing at a row rings its point, pointing at a point lights its row; a brush on the map narrows the table. */
-function LinkedTable({ trials: { trials, store, open }, scale }: { trials: PlanTrials; scale: PotentialScale }) {
+function LinkedTable({
+  trials: { trials, store, open, acidOf },
+  scale,
+}: {
+  trials: PlanTrials;
+  scale: PotentialScale;
+}) {
   const hovered = useTold(store.hovered);
   // The box follows the hand; the rows follow the box when there is time.
   const brush = useDeferredValue(useTold(store.brush));
   const brushing = useTold(store.brushing);
   const [chosen, setChosen] = useState<string>();
-  const columns = useMemo(() => columnsOf(scale), [scale]);
+  const columns = useMemo(() => columnsOf(scale, trials, acidOf), [scale, trials, acidOf]);
   const rows = useMemo(
     () =>
       brush === null

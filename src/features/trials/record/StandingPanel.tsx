@@ -8,6 +8,7 @@ import { deviationWords, plannedOutside, plannedPoint } from "../model/deviation
 import { placeWords } from "../model/placeWords";
 import { sectionOf } from "../model/trialWords";
 import { standingOf } from "../model/workings";
+import { AcidNote, trialAcidOf } from "./AcidNote";
 import { useRecording } from "./context";
 
 const toneClass = { good: "text-verdigris", bad: "text-ink font-bold", quiet: "text-muted" } as const;
@@ -31,6 +32,7 @@ export function StandingPanel() {
   const { figures, missing, point, pointMissing, judgement, comparability } = standing;
   const pct = (x: number | null, digits = 1) =>
     x === null ? <span className="font-sans text-muted">open</span> : withUnit(fixed(x, digits), "%");
+  const acid = trialAcidOf(record, point, data, solved?.inputs);
   const wanted = plannedPoint(values.planned, electrodes);
   const place =
     judgement && point && solved ? placeWords(judgement, solved.inputs, plannedOutside(wanted, point, solved)) : null;
@@ -89,6 +91,7 @@ export function StandingPanel() {
             {point.EhUncertainty > 0 && `, ±${withUnit(fixed(point.EhUncertainty * 1000, 0), "mV")}`}.{" "}
             {point.conversion}.
           </Note>
+          {acid && <AcidNote acid={acid} />}
           {place && <p className={classes("pt-1", toneClass[place.tone])}>{place.text}</p>}
           {held && <p className={classes("pt-1", held.tone === "bad" ? "text-ink" : "text-muted")}>{held.text}</p>}
           {point.marks.map(({ mark, text }) => (
