@@ -15,6 +15,7 @@ import { projectRoutes } from "./features/projects/routes";
 import { solverRoutes } from "./features/solver/routes";
 import { speciesEditRoutes } from "./features/speciesEdits/routes";
 import { trialRoutes } from "./features/trials/routes";
+import { windowSheetRoutes } from "./features/windowSheet/routes";
 import { clientFiles, noSuchFile } from "./http/clientFiles";
 import { errorHandler, unknownRoute } from "./http/errorHandler";
 import { mountRoutes, type Route } from "./http/route";
@@ -32,6 +33,7 @@ const features = [
   solverRoutes,
   projectRoutes,
   planRoutes,
+  windowSheetRoutes,
   feedRoutes,
   campaignRoutes,
   trialRoutes,

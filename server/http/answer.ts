@@ -4,6 +4,8 @@ export interface Answer {
   body?: unknown;
   /** the body as JSON text, where it was written already */
   json?: string;
+  /** a file as it stands */
+  bytes?: Buffer;
   /** text sent piece by piece, in place of a body */
   stream?: Iterable<string>;
   headers: Record<string, string>;
@@ -21,4 +23,5 @@ export const streamed = (stream: Iterable<string>, headers: Record<string, strin
   stream,
   headers,
 });
+export const file = (bytes: Buffer, headers: Record<string, string>): Answer => ({ status: 200, bytes, headers });
 export const noContent = (): Answer => ({ status: 204, headers: {} });

@@ -83,9 +83,10 @@ function unlessGone(error: NodeJS.ErrnoException): void {
   if (error.code !== "ERR_STREAM_PREMATURE_CLOSE") throw error;
 }
 
-async function send(res: Response, { status, body, json, stream, headers }: Answer): Promise<void> {
+async function send(res: Response, { status, body, json, bytes, stream, headers }: Answer): Promise<void> {
   res.status(status).set(headers);
   if (stream) await pipeline(Readable.from(stream), res).catch(unlessGone);
+  else if (bytes) res.end(bytes);
   else if (json !== undefined) res.type("json").send(json);
   else if (body === undefined) res.end();
   else res.json(body);

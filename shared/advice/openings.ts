@@ -50,10 +50,13 @@ export function adviceFor(input: unknown, data: ChemicalData): Outcome<Advice> {
   const { conflicts, windows } = solved.value;
   if (windows.length > 0) return ok({ conflicts, gaps: [], openings: [] });
   const problem = input as Problem;
-  return ok({ conflicts, gaps: gapsOf(problem, data, conflicts), openings: openingsOf(problem, data) });
+  return ok({ conflicts, gaps: adviceGaps(problem, data, conflicts), openings: openingsOf(problem, data) });
 }
 
-function gapsOf(problem: Problem, data: ChemicalData, conflicts: Solution["conflicts"]): ConflictGap[] {
+/** How far the grounds of conflicting requirements stand apart.
+ *  @param problem, data, conflicts  of one solution without a window     @returns  a gap for each pair; null for other sets
+ *  @source  geometry of exact pieces (gap.ts) */
+export function adviceGaps(problem: Problem, data: ChemicalData, conflicts: Solution["conflicts"]): ConflictGap[] {
   const analysed = analyse(problem, data);
   if (!analysed.ok) return [];
   const { cells, metals, bounds } = analysed.value;

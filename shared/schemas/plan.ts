@@ -117,6 +117,12 @@ export const planUpdate = z.object({
 });
 export const revisionCreate = z.object({ note: z.string().trim().max(500), inputs: planInputs });
 
+/** The scale beside SHE on a window sheet: an electrode of electrodes.csv, and its temperature, C; the liquor's unless given. */
+export const windowSheetQuery = z.object({
+  electrode: z.string().min(1).max(40).optional(),
+  electrodeC: z.coerce.number().min(0).max(100).optional(),
+});
+
 /** As the server answers. */
 export interface RevisionRow {
   planId: string;

@@ -1,3 +1,4 @@
+import type { SolutionWarning } from "../solution";
 import type { PlanInputs, PlanMetal, PresetName } from "../schemas/plan";
 import type { Requirement } from "../schemas/problem";
 
@@ -44,4 +45,13 @@ export const waterBoundWord: Readonly<Record<PlanInputs["water"]["bound"], strin
   upper: "the oxygen line",
   lower: "the hydrogen line",
   none: "no water line",
+};
+
+/** What a warning of the solution is about. */
+export const warningWord: Readonly<Record<SolutionWarning["code"], string>> = {
+  TEMPERATURE_TRUST: "beyond its trusted temperature",
+  LIGAND_DRAWN_DOWN: "a ligand would be drawn down",
+  METASTABLE: "metastable",
+  KINETICS: "slow",
+  SATURATION_PRESSURE: "under pressure",
 };

@@ -3,14 +3,7 @@ import type { Source } from "../../../lib/sources";
 import { FormulaText } from "../../../components/FormulaText";
 import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
-
-const heads: Readonly<Record<SolutionWarning["code"], string>> = {
-  TEMPERATURE_TRUST: "beyond its trusted temperature",
-  LIGAND_DRAWN_DOWN: "a ligand would be drawn down",
-  METASTABLE: "metastable",
-  KINETICS: "slow",
-  SATURATION_PRESSURE: "under pressure",
-};
+import { warningWord } from "../../../lib/planWords";
 
 /** Where the method says why. */
 const grounds: Readonly<Record<SolutionWarning["code"], Source>> = {
@@ -30,7 +23,8 @@ export function WarningsBlock({ warnings }: { warnings: readonly SolutionWarning
       <ul>
         {warnings.map((w, i) => (
           <li key={i} className="hairline py-1 text-sm">
-            <b>{w.species ? <SpeciesLink id={w.species} withPhase /> : (w.metal ?? "The plan")}</b>, {heads[w.code]}:{" "}
+            <b>{w.species ? <SpeciesLink id={w.species} withPhase /> : (w.metal ?? "The plan")}</b>,{" "}
+            {warningWord[w.code]}:{" "}
             <span className="text-muted">
               <FormulaText text={w.text} /> (<MethodLink to={grounds[w.code]} />)
             </span>

@@ -1,0 +1,138 @@
+import { adviceGaps, type ConflictGap } from "../../../shared/advice/openings";
+import { freeAcid } from "../../../shared/activity/freeAcid";
+import { analyse } from "../../../shared/analysis";
+import { referencePotential } from "../../../shared/electrodes/convert";
+import { electrodeSeries } from "../../../shared/electrodes/series";
+import { energiesAt } from "../../../shared/gibbs/energies";
+import { sharesGround } from "../../../shared/hazards/reachesWindow";
+import { hazardRegions, type HazardMap, type HazardRegion } from "../../../shared/hazards/regions";
+import { cautionsFor, hazardContext, type Caution } from "../../../shared/hazards/rules";
+import { toProblem } from "../../../shared/plan/toProblem";
+import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
+import { heldSetPoint, type HeldSetPoint } from "../../../shared/setpoint/held";
+import { solve } from "../../../shared/solve";
+import type { Solution, Window } from "../../../shared/solution";
+import type { ChemicalData } from "../../../shared/species/chemicalData";
+import { kelvin } from "../../../shared/units";
+import { limitSentences, namingOf, type LimitSentence, type Naming } from "../../../shared/windows/limitWords";
+import { celsius } from "../../../shared/words/numbers";
+
+/** A reference electrode beside the SHE scale. */
+export interface ProbeScale {
+  /** "Ag/AgCl, 3 mol/L KCl" */
+  label: string;
+  /** C, of the electrode */
+  temperatureC: number;
+  /** V vs SHE */
+  offset: number;
+  /** what its table leaves open; null inside it */
+  remark: string | null;
+}
+
+/** How the energy of a species on the sheet is known. */
+export interface GradedSpecies {
+  id: string;
+  grade: string;
+  /** it stands on a limit of the window */
+  limits: boolean;
+}
+
+/** Everything one window sheet says, worked out by the core with the library that the revision froze. */
+export interface SheetWork {
+  plan: Pick<PlanRow, "name" | "projectName" | "siteName" | "invented" | "revisionCount">;
+  revision: RevisionRow;
+  /** the library the revision froze */
+  data: ChemicalData;
+  solution: Solution;
+  naming: Naming;
+  /** index into the windows; the one of a held set point, else the best */
+  chosen: number;
+  window: Window | null;
+  held: HeldSetPoint | null;
+  sentences: readonly LimitSentence[];
+  gaps: readonly ConflictGap[];
+  hazards: HazardMap | null;
+  /** gases whose region shares ground with the window, or, without one, lies in the frame */
+  drawnGases: readonly HazardRegion[];
+  cautions: readonly Caution[];
+  species: readonly GradedSpecies[];
+  /** g/L of H2SO4 beside a pH no electrode holds; null elsewhere */
+  freeAcidGPerL: number | null;
+  probe: ProbeScale | null;
+}
+
+const probeRemark = {
+  table: null,
+  borrowed: "its change with temperature is borrowed from the standard Ag/AgCl electrode",
+  extrapolated: "its potential is carried on beyond its table",
+} as const;
+
+/** @returns  null for SHE and for an electrode that the library does not know at that temperature */
+export function probeScale(data: ChemicalData, id: string | undefined, temperatureC: number): ProbeScale | null {
+  const series = electrodeSeries(data.tables).find((s) => s.id === id);
+  const found = series && referencePotential(series, temperatureC);
+  if (!series || !found?.ok) return null;
+  const { E, basis, uncertainty } = found.value;
+  const why = probeRemark[basis];
+  const remark = why && `${series.label} at ${celsius(temperatureC)}: ${why}, ±${Math.round(uncertainty * 1000)} mV.`;
+  return { label: series.label, temperatureC, offset: E, remark };
+}
+
+/** Below this pH a glass electrode is an index only, and the loop is run on free acid. */
+const FREE_ACID_BELOW = 1.5;
+
+function freeAcidAt(data: ChemicalData, { inputs }: RevisionRow, window: Window | null): number | null {
+  const sulfate = inputs.ligands.find((l) => l.component === "S")?.activity;
+  if (!window || window.setPoint.pH >= FREE_ACID_BELOW || sulfate === undefined) return null;
+  const acid = freeAcid(data, window.setPoint.pH, sulfate, inputs.temperatureC);
+  return acid.ok ? acid.value.gPerL : null;
+}
+
+function gradesOf(data: ChemicalData, { fields, temperatureC }: Solution, window: Window | null): GradedSpecies[] {
+  const limits = new Set(window?.limits.flatMap((l) => [l.inside, l.outside]));
+  const energies = energiesAt(data, kelvin(temperatureC));
+  return [...new Set(fields.map((f) => f.species))]
+    .map((id) => ({ id, grade: data.species.get(id)?.row.grade ?? "C", limits: limits.has(id), of: energies.of(id) }))
+    .sort((a, b) => Number(b.limits) - Number(a.limits) || (a.id < b.id ? -1 : 1))
+    .map(({ id, grade, limits: on }) => ({ id, grade, limits: on }));
+}
+
+/** Solves a revision once more and gathers what its sheet says.
+ *  @returns  the work; a failure where the inputs cannot be solved with the library */
+export function workOf(plan: SheetWork["plan"], revision: RevisionRow, data: ChemicalData, probe: ProbeScale | null) {
+  const { inputs } = revision;
+  const problem = toProblem(inputs, data);
+  const solved = solve(problem, data, { shutGround: true });
+  if (!solved.ok) return solved;
+  const analysed = analyse(problem, data);
+  if (!analysed.ok) return analysed;
+  const at = inputs.heldSetPoint;
+  const held = at ? heldSetPoint(analysed.value, solved.value, [at.pH, at.Eh], inputs.controlBand) : null;
+  const windows = solved.value.windows.map((w, i) => (i === held?.index ? held.window : w));
+  const solution = { ...solved.value, windows };
+  const chosen = held?.index ?? 0;
+  const window = windows[chosen] ?? null;
+  const setPoint = window?.setPoint ?? null;
+  const regions = hazardRegions(analysed.value, { setPoint });
+  const hazards = regions.ok ? regions.value : null;
+  const naming = namingOf(data, solution);
+  const work: SheetWork = {
+    plan,
+    revision,
+    data,
+    solution,
+    naming,
+    chosen,
+    window,
+    held,
+    sentences: window ? limitSentences(window, naming) : [],
+    gaps: window ? [] : adviceGaps(problem, data, solution.conflicts),
+    hazards,
+    drawnGases: hazards?.regions.filter((r) => window && sharesGround(r.region, window.polygons)) ?? [],
+    cautions: cautionsFor(hazardContext(inputs, setPoint)),
+    species: gradesOf(data, solution, window),
+    freeAcidGPerL: freeAcidAt(data, revision, window),
+    probe,
+  };
+  return { ok: true as const, value: work };
+}
