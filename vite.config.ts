@@ -57,7 +57,7 @@ export default defineConfig({
             // What nearly every page is made of: one file compresses better than twenty small ones.
             {
               name: "parts",
-              test: new RegExp(`src[\\\\/](lib|components)[\\\\/](${parts.join("|")})\\.`),
+              test: new RegExp(`src[\\\\/](lib|components)[\\\\/](${parts.join("|")})\\.|shared[\\\\/]words[\\\\/]`),
               includeDependenciesRecursively: false,
               priority: 1,
             },

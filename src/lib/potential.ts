@@ -29,11 +29,14 @@ export interface PotentialScale {
   format: (voltsVsShe: number) => string;
   /** "+0.16 V": a difference with its sign */
   formatDifference: (volts: number) => string;
+  /** the electrode by its id, and its temperature, C; null on SHE */
+  reference: { id: string; temperatureC: number } | null;
   /** what adds to the error of the reading ("potential carried on beyond its table, ±5 mV"), or why SHE is shown instead */
   remark: string | null;
 }
 
 interface Reference {
+  reference?: PotentialScale["reference"];
   electrode: string;
   short: string;
   /** potential against SHE at the electrode's own temperature, V */
@@ -45,7 +48,7 @@ const she: Reference = { electrode: "SHE", short: "SHE", offset: 0, remark: null
 
 export function potentialScale(
   unit: PotentialUnit,
-  { electrode, short, offset, remark }: Reference = she,
+  { reference = null, electrode, short, offset, remark }: Reference = she,
 ): PotentialScale {
   const factor = unit === "mV" ? 1000 : 1;
   const digits = unit === "mV" ? 0 : 2;
@@ -54,6 +57,7 @@ export function potentialScale(
     unit,
     electrode,
     short,
+    reference,
     remark,
     label: `${unit} vs ${short}`,
     digits,
@@ -86,6 +90,7 @@ function referenceOf(series: ElectrodeSeries, tC: number): Reference {
   const { E, basis, uncertainty } = found.value;
   const why = basisRemark[basis];
   return {
+    reference: { id: series.id, temperatureC: tC },
     electrode: `${series.label}, at ${celsius(tC)}`,
     short: shortElectrode(series.label),
     offset: E,

@@ -44,12 +44,17 @@ export function metalSays(metal: PlanMetal, { solution, naming }: SheetWork, bri
 
 const inSans = (inline: Inline): Inline => piecesOf(inline).map((piece): Piece => ({ ...piece, face: "sans" }));
 
+/** The band of pH as it was typed: in pH, or as free acid. */
+function bandSays({ controlBand: { pH, Eh }, freeAcidBand: acid }: SheetWork["revision"]["inputs"]): string {
+  const typed = acid ? ` (free acid ±${withUnit(fixed(acid.gPerL, 1), "g/L")} at pH ${fixed(acid.atPH, 2)})` : "";
+  return `pH ±${fixed(pH, 2)}${typed}, Eh ±${volts(Eh, 3)}`;
+}
+
 /** The set point in large figures, and what it is worth. */
 export function setPointSays(work: SheetWork): { figures: Inline[]; notes: Inline[] } {
-  const { window, held, probe, solution, chosen, revision, freeAcidGPerL } = work;
+  const { window, held, probe, solution, chosen, revision, acid } = work;
   if (!window) return { figures: [], notes: [] };
   const at = window.setPoint;
-  const band = revision.inputs.controlBand;
   const notes: Inline[] = [];
   if (probe)
     notes.push([
@@ -61,7 +66,7 @@ export function setPointSays(work: SheetWork): { figures: Inline[]; notes: Inlin
   notes.push([
     "Margin ",
     bold(`${fixed(at.margin, 1)} ${marginWords(at)}`),
-    `. A band is pH ±${fixed(band.pH, 2)}, Eh ±${volts(band.Eh, 3)}: the box on the map.`,
+    `. A band is ${bandSays(revision.inputs)}: the box on the map.`,
   ]);
   if (!window.controllable) notes.push(bold("Narrower than the control bands: not a usable target with this loop."));
   if (at.cutByFrame) notes.push("Cut by the frame: the window may be wider than the map.");
@@ -72,11 +77,15 @@ export function setPointSays(work: SheetWork): { figures: Inline[]; notes: Inlin
     ]);
   else if (at.couple)
     notes.push(["Eh is set by ", speciesName(at.couple[1]), " over ", speciesName(at.couple[0]), "."]);
-  if (freeAcidGPerL !== null)
+  if (acid !== null)
     notes.push([
-      "Free acid about ",
-      bold(withUnit(fixed(freeAcidGPerL, freeAcidGPerL < 10 ? 1 : 0), "g/L")),
-      " ",
+      "Free acid ",
+      bold(
+        acid.withinSulfate
+          ? `about ${withUnit(fixed(acid.gPerL, acid.gPerL < 10 ? 1 : 0), "g/L")}`
+          : "more than the sulfate balances",
+      ),
+      " as ",
       formula("H2SO4"),
       ": titrate it, a glass electrode is an index only here.",
     ]);
@@ -163,7 +172,7 @@ export function inputsSay({ revision: { inputs }, data }: SheetWork): [string, I
       (water.oxygenV ? `, oxygen +${volts(water.oxygenV)}` : "") +
       (water.hydrogenV ? `, hydrogen ${signedMinus(-water.hydrogenV, 2)} V` : ""),
   ]);
-  said.push(["Control bands", `pH ±${fixed(inputs.controlBand.pH, 2)}, Eh ±${volts(inputs.controlBand.Eh, 3)}`]);
+  said.push(["Control bands", bandSays(inputs)]);
   const { temperatureC: T, activities = {} } = inputs.ranges ?? {};
   const over: Inline[] = [
     ...(T ? [`${fixed(T[0], 1)} to ${celsius(T[1], 1)}`] : []),

@@ -1,5 +1,5 @@
 import { adviceGaps, type ConflictGap } from "../../../shared/advice/openings";
-import { freeAcid } from "../../../shared/activity/freeAcid";
+import { freeAcid, FREE_ACID_BELOW, type FreeAcid } from "../../../shared/activity/freeAcid";
 import { analyse } from "../../../shared/analysis";
 import { referencePotential } from "../../../shared/electrodes/convert";
 import { electrodeSeries } from "../../../shared/electrodes/series";
@@ -56,8 +56,8 @@ export interface SheetWork {
   drawnGases: readonly HazardRegion[];
   cautions: readonly Caution[];
   species: readonly GradedSpecies[];
-  /** g/L of H2SO4 beside a pH no electrode holds; null elsewhere */
-  freeAcidGPerL: number | null;
+  /** beside a pH no electrode holds; null elsewhere */
+  acid: FreeAcid | null;
   probe: ProbeScale | null;
 }
 
@@ -78,14 +78,11 @@ export function probeScale(data: ChemicalData, id: string | undefined, temperatu
   return { label: series.label, temperatureC, offset: E, remark };
 }
 
-/** Below this pH a glass electrode is an index only, and the loop is run on free acid. */
-const FREE_ACID_BELOW = 1.5;
-
-function freeAcidAt(data: ChemicalData, { inputs }: RevisionRow, window: Window | null): number | null {
+function freeAcidAt(data: ChemicalData, { inputs }: RevisionRow, window: Window | null): FreeAcid | null {
   const sulfate = inputs.ligands.find((l) => l.component === "S")?.activity;
   if (!window || window.setPoint.pH >= FREE_ACID_BELOW || sulfate === undefined) return null;
   const acid = freeAcid(data, window.setPoint.pH, sulfate, inputs.temperatureC);
-  return acid.ok ? acid.value.gPerL : null;
+  return acid.ok ? acid.value : null;
 }
 
 function gradesOf(data: ChemicalData, { fields, temperatureC }: Solution, window: Window | null): GradedSpecies[] {
@@ -131,7 +128,7 @@ export function workOf(plan: SheetWork["plan"], revision: RevisionRow, data: Che
     drawnGases: hazards?.regions.filter((r) => window && sharesGround(r.region, window.polygons)) ?? [],
     cautions: cautionsFor(hazardContext(inputs, setPoint)),
     species: gradesOf(data, solution, window),
-    freeAcidGPerL: freeAcidAt(data, revision, window),
+    acid: freeAcidAt(data, revision, window),
     probe,
   };
   return { ok: true as const, value: work };

@@ -161,6 +161,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
           exportPlan(kind, {
             plan,
             state,
+            revision: frozen?.number ?? plan.latest.number,
+            scale,
             inputs,
             problem,
             solution,
@@ -169,11 +171,19 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
           }),
         )
         .then(
-          () => setExporting(null),
+          () =>
+            setExporting(
+              kind === "sheet" && !frozen && draft.changed
+                ? {
+                    text: `The sheet is that of revision ${plan.latest.number}, without the unsaved changes.`,
+                    bad: false,
+                  }
+                : null,
+            ),
           (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
         );
     },
-    [solution, map, shownTrials, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version],
+    [solution, map, shownTrials, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version, scale],
   );
 
   function restore(revision: RevisionRow) {
@@ -185,7 +195,13 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   return (
     <AskingContext value={asking}>
       {frozen ? (
-        <FrozenBanner {...frozen} plan={plan} onRestore={() => restore(frozen)} />
+        <FrozenBanner
+          {...frozen}
+          plan={plan}
+          exporting={exporting}
+          onSheet={() => onExport("sheet")}
+          onRestore={() => restore(frozen)}
+        />
       ) : (
         <WorkspaceHeader
           plan={plan}

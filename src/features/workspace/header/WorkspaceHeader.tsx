@@ -6,7 +6,7 @@ import { Status } from "../../../components/status";
 import { fullTime, savedAt } from "../../../lib/format";
 import type { DraftInHand } from "../model/useDraft";
 
-export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv";
+export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv" | "windows" | "polygons" | "sheet";
 
 export interface HeaderProps {
   plan: PlanRow;
@@ -58,6 +58,9 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
             </>
           )}
           <MenuLabel>Export</MenuLabel>
+          <MenuItem onSelect={() => onExport("sheet")} note={draft.changed ? "PDF, as saved" : "PDF"}>
+            Window sheet, revision {plan.latest.number}
+          </MenuItem>
           <MenuItem onSelect={() => onExport("png")} note="PNG">
             Picture of the map
           </MenuItem>
@@ -66,6 +69,12 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
           </MenuItem>
           <MenuItem onSelect={() => onExport("csv")} note="CSV">
             Limits of the windows
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("windows")} note="CSV">
+            Windows and their set points
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("polygons")} note="CSV">
+            Polygons of the map
           </MenuItem>
           <MenuItem onSelect={() => onExport("problem")} note="JSON">
             Problem, for the solver
@@ -129,6 +138,8 @@ export function FrozenBanner({
   createdAt,
   note,
   dataVersion,
+  exporting,
+  onSheet,
   onRestore,
 }: {
   plan: PlanRow;
@@ -137,6 +148,8 @@ export function FrozenBanner({
   createdAt: string;
   note: string;
   dataVersion: string;
+  exporting: HeaderProps["exporting"];
+  onSheet: () => void;
   onRestore: () => void;
 }) {
   return (
@@ -147,7 +160,9 @@ export function FrozenBanner({
         <span className="font-mono">{dataVersion.slice(0, 12)}</span>. Nothing changes here.
         {note !== "" && <span className="text-muted"> {note}</span>}
       </p>
+      {exporting && <Status tone={exporting.bad ? "bad" : "quiet"}>{exporting.text}</Status>}
       <span className="no-print flex gap-2">
+        <Button onClick={onSheet}>Window sheet</Button>
         <Button onClick={onRestore}>Restore as draft</Button>
         <Link to={`/plans/${plan.id}`} className="self-center text-sm underline underline-offset-4">
           Back to the plan

@@ -2,20 +2,25 @@ import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
 import type { PlanInputs, PlanRow } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
+import { api } from "../../../lib/api";
 import { toCsv } from "../../../lib/csv";
 import { celsius, fixed, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
+import type { PotentialScale } from "../../../lib/potential";
 import { mapContent } from "../../../map/content";
 import { captionedFigure, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
-import { fileStem, limitsTable } from "./exports";
+import { fileStem, limitsTable, polygonsTable, type Table, windowsTable } from "./exports";
 import { saveFile, saveJson } from "./saveFile";
 import type { MapModel } from "./useMapModel";
 
 export interface Exported {
-  plan: Pick<PlanRow, "name" | "invented">;
+  plan: Pick<PlanRow, "id" | "name" | "invented">;
   /** "revision 3" or "draft on revision 3" */
   state: string;
+  /** the saved one that is shown, or that the draft stands on */
+  revision: number;
+  scale: Pick<PotentialScale, "reference">;
   inputs: PlanInputs;
   problem: Problem;
   solution: Solution;
@@ -48,6 +53,10 @@ export function captionLines({ plan, state, inputs, solution, model, dataVersion
   ];
 }
 
+// The mark in front makes spreadsheets read UTF-8.
+const saveTable = (name: string, { header, rows }: Table): void =>
+  saveFile(name, new Blob(["\ufeff", toCsv(header, rows)], { type: "text/csv;charset=utf-8" }));
+
 /** Writes one export as a file. */
 export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
   const stem = fileStem(e.plan.name);
@@ -56,13 +65,17 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
       return saveJson(`${stem}-problem.json`, e.problem);
     case "solution":
       return saveJson(`${stem}-solution.json`, e.solution);
-    case "csv": {
-      const { header, rows } = limitsTable(e.solution.windows, e.model.asked.freeAcid);
-      // The mark in front makes spreadsheets read UTF-8.
-      return saveFile(
-        `${stem}-limits.csv`,
-        new Blob(["\ufeff", toCsv(header, rows)], { type: "text/csv;charset=utf-8" }),
-      );
+    case "csv":
+      return saveTable(`${stem}-limits.csv`, limitsTable(e.solution.windows, e.model.asked.freeAcid));
+    case "windows":
+      return saveTable(`${stem}-windows.csv`, windowsTable(e.solution));
+    case "polygons":
+      return saveTable(`${stem}-polygons.csv`, polygonsTable(e.solution));
+    case "sheet": {
+      const { reference } = e.scale;
+      const query = reference ? `?electrode=${reference.id}&electrodeC=${reference.temperatureC}` : "";
+      const path = `/plans/${encodeURIComponent(e.plan.id)}/revisions/${e.revision}/window-sheet.pdf${query}`;
+      return saveFile(`${stem}-window-sheet-revision-${e.revision}.pdf`, await api.file(path));
     }
     case "png":
     case "svg": {
