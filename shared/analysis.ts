@@ -2,6 +2,7 @@ import { fieldsOf, type MetalFields } from "./fields/fields";
 import { frameTag, ligandCells, type LigandCell } from "./fields/ligandCells";
 import { rectangle } from "./geometry/convex";
 import { energiesAt } from "./gibbs/energies";
+import { excludedGround, type HazardGround } from "./hazards/excluded";
 import { ok, type Outcome } from "./outcome";
 import { basisAt, hydrogenLine, oxygenLine, type Basis } from "./planes/grid";
 import { prepare, type Prepared } from "./selection/prepare";
@@ -16,6 +17,8 @@ export interface Analysis {
   readonly cells: readonly LigandCell[];
   readonly metals: readonly MetalFields[];
   readonly bounds: readonly Bound[];
+  /** ground of the hazards kept out */
+  readonly hazards: readonly HazardGround[];
   readonly pieces: readonly WindowPiece[];
 }
 
@@ -32,8 +35,9 @@ export function analyse(input: unknown, library: ChemicalData): Outcome<Analysis
   const cells = ligandCells(components, frame, basis); // 3 where every ligand's potential is linear
   const metals = prepared.value.metals.map((m) => fieldsOf(m, cells, basis, sulfateReduction)); // 4 who rules where
   const bounds = waterBounds(prepared.value, basis);
-  const pieces = windowPieces(cells, metals, bounds); // 5 where all metals are as required
-  return ok({ prepared: prepared.value, basis, cells, metals, bounds, pieces });
+  const hazards = excludedGround({ prepared: prepared.value, basis, cells, metals });
+  const pieces = windowPieces(cells, metals, bounds, hazards); // 5 where all metals are as required and no hazard stands
+  return ok({ prepared: prepared.value, basis, cells, metals, bounds, hazards, pieces });
 }
 
 /** Which water lines bind: as asked, else both, but only oxygen's where a metal is to be won as metal (hydrogen is then a

@@ -1,3 +1,4 @@
+import type { HazardGas } from "./hazards/gases";
 import type { Requirement } from "./schemas/problem";
 
 /** What the solver answers (docs/solver.md). Potentials in V vs SHE at T; polygons counter-clockwise in (pH, Eh). */
@@ -21,10 +22,26 @@ export interface ReactionTerm {
 
 export type LimitKind = "metal" | "water" | "frame" | "hazard";
 
+/** A gas kept out of windows: where its equilibrium pressure reaches `bar`, or below a pH. */
+export type ExcludedGas =
+  { gas: HazardGas; bar: number; pHAtLeast?: undefined } | { gas: HazardGas; pHAtLeast: number; bar?: undefined };
+
+/** What a window must do: carry a metal as required, or keep a gas out. */
+export type Demand =
+  | { metal: string; requirement: Requirement; gas?: undefined }
+  | (ExcludedGas & { metal?: undefined; requirement?: undefined });
+
+/** The name of a demand: element or gas. */
+export const demandName = (d: Demand): string => d.metal ?? d.gas;
+
 export interface Limit {
   kind: LimitKind;
   metal?: string;
-  /** species of the metal on the window's side and beyond the limit */
+  /** hazard limits: the gas, and the pressure in bar or the pH that may not be passed */
+  gas?: HazardGas;
+  bar?: number;
+  pHAtLeast?: number;
+  /** species of the metal on the window's side and beyond the limit; for a hazard what carries the gas, and the gas */
   inside?: string;
   outside?: string;
   /** balanced, as text; `reactionTerms` for typesetting */
@@ -101,7 +118,7 @@ export interface Solution {
   windows: Window[];
   /** of the best window (largest margin), null without a window */
   setPoint: SetPoint | null;
-  conflicts: { metal: string; requirement: Requirement }[][];
+  conflicts: Demand[][];
   leftOut: { species: string; reason: string }[];
   warnings: SolutionWarning[];
   waterLines: WaterLine[];

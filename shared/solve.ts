@@ -28,9 +28,9 @@ export interface SolveOptions {
 export function solve(input: unknown, library: ChemicalData, options: SolveOptions = {}): Outcome<Solution> {
   const analysed = analyse(input, library); // 1 to 5: energies, planes, ligand cells, fields, window pieces
   if (!analysed.ok) return analysed;
-  const { prepared, basis, cells, metals, bounds, pieces } = analysed.value;
+  const { prepared, basis, cells, metals, bounds, hazards, pieces } = analysed.value;
   const { problem, data } = prepared;
-  const ground: Ground = { data, cells, metals, pieces };
+  const ground: Ground = { data, cells, metals, hazards, pieces };
   const regions = connect(pieces.map((p) => p.piece)).filter((r) => r.pieces.some((i) => !isSliver(pieces[i]!.piece)));
   const windows = regions.map((region) => windowOf(ground, region, prepared, basis)); // 6: limits, set point
   windows.sort((a, b) => b.setPoint.margin - a.setPoint.margin || b.area - a.area);
@@ -41,7 +41,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
     fields,
     windows,
     setPoint: windows[0]?.setPoint ?? null,
-    conflicts: windows.length === 0 ? conflictsOf(cells, metals, bounds) : [],
+    conflicts: windows.length === 0 ? conflictsOf(cells, metals, bounds, hazards) : [],
     leftOut: [...prepared.leftOut],
     warnings: warningsOf(prepared, metals, fields, basis.energies),
     waterLines: waterLines(basis),

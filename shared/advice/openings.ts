@@ -1,16 +1,19 @@
 import { analyse } from "../analysis";
+import { askedOf } from "../hazards/excluded";
 import { ok, type Outcome } from "../outcome";
 import { solidsBases, TEMPERATURE_RANGE_C, type Problem } from "../schemas/problem";
 import { solve } from "../solve";
-import type { Solution } from "../solution";
+import { demandName, type Demand, type Solution } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
 import { windowPieces } from "../windows/pieces";
 import { gapBetween, type Gap } from "./gap";
+import { nearest, stepsOf, type OnProgress, type Walk } from "./search";
 
 /** One thing that could be changed to open a window, and the smallest change that does; `to` null: none does. */
 export interface Opening {
-  readonly change: "activity" | "ligand" | "temperature" | "solidsBasis";
-  /** metal or component, for activity and ligand */
+  /** the last two are the threshold (bar) or the pH of a hazard kept out: told so that the hazard is named, never to be followed blindly */
+  readonly change: "activity" | "ligand" | "temperature" | "solidsBasis" | "hazardPressure" | "hazardPH";
+  /** metal, component or gas */
   readonly of?: string;
   readonly from: number | string;
   /** just past the root: a window exists here */
@@ -22,8 +25,9 @@ export interface Opening {
 }
 
 export interface ConflictGap {
-  readonly metals: readonly string[];
-  /** of a pair; null for single requirements and larger sets */
+  /** metals and gases of the conflict, in its order */
+  readonly members: readonly string[];
+  /** of a pair; null for single demands and larger sets */
   readonly gap: Gap | null;
 }
 
@@ -36,21 +40,24 @@ export interface Advice {
 const DECADES = 8;
 const STEPS_PER_DECADE = 4;
 const KELVIN_STEP = 2.5;
-/** a root is narrowed to this: decades of activity, or kelvin */
-const RESOLUTION = 1e-4;
+const PH_STEP = 0.25;
+/** lowest pH rule and highest pressure that a problem can state */
+const LEAST_PH_RULE = 7;
+const MOST_BAR = 1e4;
 
 /** Why a problem has no window and what would open one: the gaps of conflicting pairs, and for each single activity,
- *  ligand total, the temperature and the solids basis the smallest change that opens a window.
- *  @param input  problem     @param data  library     @returns  advice; openings are empty where there is a window already
+ *  ligand total, the temperature, the solids basis and each hazard kept out the smallest change that opens a window.
+ *  @param input  problem     @param data  library     @param onProgress  steps of the search done, and in all
+ *  @returns  advice; openings are empty where there is a window already
  *  @source  docs/method.md: outward search in even steps, then bisection on the existence of a window; between two steps
  *           an opening narrower than a step can be missed, and `searched` says how far and how finely it looked */
-export function adviceFor(input: unknown, data: ChemicalData): Outcome<Advice> {
+export function adviceFor(input: unknown, data: ChemicalData, onProgress?: OnProgress): Outcome<Advice> {
   const solved = solve(input, data);
   if (!solved.ok) return solved;
   const { conflicts, windows } = solved.value;
   if (windows.length > 0) return ok({ conflicts, gaps: [], openings: [] });
   const problem = input as Problem;
-  return ok({ conflicts, gaps: adviceGaps(problem, data, conflicts), openings: openingsOf(problem, data) });
+  return ok({ conflicts, gaps: adviceGaps(problem, data, conflicts), openings: openingsOf(problem, data, onProgress) });
 }
 
 /** How far the grounds of conflicting requirements stand apart.
@@ -59,16 +66,17 @@ export function adviceFor(input: unknown, data: ChemicalData): Outcome<Advice> {
 export function adviceGaps(problem: Problem, data: ChemicalData, conflicts: Solution["conflicts"]): ConflictGap[] {
   const analysed = analyse(problem, data);
   if (!analysed.ok) return [];
-  const { cells, metals, bounds } = analysed.value;
-  const regionOf = (metal: string) =>
+  const { cells, metals, bounds, hazards } = analysed.value;
+  const groundOf = (demand: Demand) =>
     windowPieces(
       cells,
-      metals.filter((m) => m.metal.element === metal),
+      metals.filter((m) => m.metal.element === demand.metal),
       bounds,
+      hazards.filter((h) => h.gas === demand.gas),
     ).map((p) => p.piece);
   return conflicts.map((set) => ({
-    metals: set.map((s) => s.metal),
-    gap: set.length === 2 ? gapBetween(regionOf(set[0]!.metal), regionOf(set[1]!.metal)) : null,
+    members: set.map(demandName),
+    gap: set.length === 2 ? gapBetween(groundOf(set[0]!), groundOf(set[1]!)) : null,
   }));
 }
 
@@ -77,35 +85,24 @@ const opens = (problem: Problem, data: ChemicalData): boolean => {
   return analysed.ok && analysed.value.pieces.length > 0;
 };
 
-/** Smallest |x - from| at which `test` holds, looking outward in steps to both ends, then bisecting to the resolution. */
-function nearest(test: (x: number) => boolean, from: number, low: number, high: number, step: number): number | null {
-  for (let k = 1; from + k * step <= high + step || from - k * step >= low - step; k++) {
-    let best: number | null = null;
-    for (const side of [-1, 1]) {
-      const outer = Math.min(high, Math.max(low, from + side * k * step));
-      const inner = Math.min(high, Math.max(low, from + side * (k - 1) * step));
-      if (outer === inner || !test(outer)) continue;
-      let [no, yes] = [inner, outer];
-      while (Math.abs(yes - no) > RESOLUTION) {
-        const mid = (no + yes) / 2;
-        if (test(mid)) yes = mid;
-        else no = mid;
-      }
-      if (best === null || Math.abs(yes - from) < Math.abs(best - from)) best = yes;
-    }
-    if (best !== null) return best;
-  }
-  return null;
+/** A number that can be changed: how the problem looks with it at a place of the walk, and what that place is called. */
+interface Knob {
+  readonly base: Omit<Opening, "to" | "problem">;
+  readonly walk: Walk;
+  readonly at: (x: number) => Problem;
+  readonly value: (x: number) => number;
 }
 
-function openingsOf(problem: Problem, data: ChemicalData): Opening[] {
-  const out: Opening[] = [];
-  const found = (base: Omit<Opening, "to" | "problem">, to: number | string | null, changed: Problem | null): void => {
-    out.push(changed === null || to === null ? { ...base, to: null } : { ...base, to, problem: changed });
-  };
-  const span = `${DECADES} decades either way, in quarter decades`;
-  problem.metals.forEach((m, i) => {
-    if (m.requirement === "free") return;
+const power = (log: number): number => 10 ** log;
+const span = `${DECADES} decades either way, in quarter decades`;
+const decades = (from: number, high: number): Walk => {
+  const log = Math.log10(from);
+  return { from: log, low: log - DECADES, high: Math.min(high, log + DECADES), step: 1 / STEPS_PER_DECADE };
+};
+
+const metalKnobs = (problem: Problem): Knob[] =>
+  problem.metals.flatMap((m, i) => {
+    if (m.requirement === "free") return [];
     const from = m.activity ?? m.gPerL!;
     const at = (log: number): Problem => ({
       ...problem,
@@ -113,50 +110,81 @@ function openingsOf(problem: Problem, data: ChemicalData): Opening[] {
         k !== i ? o : m.activity === undefined ? { ...o, gPerL: 10 ** log } : { ...o, activity: 10 ** log },
       ),
     });
-    const log = Math.log10(from);
-    const top = m.activity === undefined ? 3 : 2;
-    const to = nearest(
-      (x) => opens(at(x), data),
-      log,
-      log - DECADES,
-      Math.min(top, log + DECADES),
-      1 / STEPS_PER_DECADE,
-    );
-    found(
-      { change: "activity", of: m.element, from, searched: span },
-      to === null ? null : 10 ** to,
-      to === null ? null : at(to),
-    );
+    const base = { change: "activity", of: m.element, from, searched: span } as const;
+    return [{ base, walk: decades(from, m.activity === undefined ? 3 : 2), at, value: power }];
   });
-  problem.ligands.forEach((l, i) => {
-    const at = (log: number): Problem => ({
+
+const ligandKnobs = (problem: Problem): Knob[] =>
+  problem.ligands.map((l, i) => ({
+    base: { change: "ligand", of: l.component, from: l.activity, searched: span },
+    walk: decades(l.activity, 2),
+    at: (log) => ({
       ...problem,
       ligands: problem.ligands.map((o, k) => (k === i ? { ...o, activity: 10 ** log } : o)),
-    });
-    const log = Math.log10(l.activity);
-    const to = nearest((x) => opens(at(x), data), log, log - DECADES, Math.min(2, log + DECADES), 1 / STEPS_PER_DECADE);
-    found(
-      { change: "ligand", of: l.component, from: l.activity, searched: span },
-      to === null ? null : 10 ** to,
-      to === null ? null : at(to),
-    );
-  });
-  const atT = (temperatureC: number): Problem => ({ ...problem, temperatureC });
+    }),
+    value: power,
+  }));
+
+function temperatureKnob(problem: Problem): Knob {
   const { min, max } = TEMPERATURE_RANGE_C;
-  const T = nearest((x) => opens(atT(x), data), problem.temperatureC, min, max, KELVIN_STEP);
-  found(
-    { change: "temperature", from: problem.temperatureC, searched: `${min} to ${max} C in steps of ${KELVIN_STEP} K` },
-    T,
-    T === null ? null : atT(T),
-  );
-  if (problem.solidsBasis !== undefined) {
-    const to =
-      solidsBases.find((b) => b !== problem.solidsBasis && opens({ ...problem, solidsBasis: b }, data)) ?? null;
-    found(
-      { change: "solidsBasis", from: problem.solidsBasis, searched: "all three" },
-      to,
-      to === null ? null : { ...problem, solidsBasis: to },
+  const from = problem.temperatureC;
+  return {
+    base: { change: "temperature", from, searched: `${min} to ${max} C in steps of ${KELVIN_STEP} K` },
+    walk: { from, low: min, high: max, step: KELVIN_STEP },
+    at: (temperatureC) => ({ ...problem, temperatureC }),
+    value: (x) => x,
+  };
+}
+
+/** A hazard kept out gives way in one direction only: a higher pressure, a lower pH. */
+const hazardKnobs = (problem: Problem): Knob[] =>
+  (problem.excludedHazards ?? []).map((h, i): Knob => {
+    const { gas, bar, pHAtLeast } = askedOf(h);
+    const become = (change: { bar: number } | { pHAtLeast: number }): Problem => ({
+      ...problem,
+      excludedHazards: problem.excludedHazards!.map((o, k) => (k === i ? { gas, ...change } : o)),
+    });
+    if (bar === undefined) {
+      const searched = `down to pH ${LEAST_PH_RULE}, in steps of ${PH_STEP}`;
+      return {
+        base: { change: "hazardPH", of: gas, from: pHAtLeast, searched },
+        walk: { from: pHAtLeast, low: LEAST_PH_RULE, high: pHAtLeast, step: PH_STEP },
+        at: (x) => become({ pHAtLeast: x }),
+        value: (x) => x,
+      };
+    }
+    const log = Math.log10(bar);
+    const high = Math.min(Math.log10(MOST_BAR), log + DECADES);
+    return {
+      base: { change: "hazardPressure", of: gas, from: bar, searched: `${DECADES} decades up, in quarter decades` },
+      walk: { from: log, low: log, high, step: 1 / STEPS_PER_DECADE },
+      at: (x) => become({ bar: power(x) }),
+      value: power,
+    };
+  });
+
+function openingsOf(problem: Problem, data: ChemicalData, onProgress?: OnProgress): Opening[] {
+  const knobs = [...metalKnobs(problem), ...ligandKnobs(problem), temperatureKnob(problem), ...hazardKnobs(problem)];
+  const total = knobs.reduce((sum, { walk }) => sum + stepsOf(walk), 0);
+  let before = 0;
+  const openings = knobs.map(({ base, walk, at, value }): Opening => {
+    let steps = 0;
+    const to = nearest(
+      (x) => opens(at(x), data),
+      walk,
+      () => onProgress?.(before + ++steps, total),
     );
-  }
-  return out;
+    before += stepsOf(walk);
+    onProgress?.(before, total);
+    return to === null ? { ...base, to } : { ...base, to: value(to), problem: at(to) };
+  });
+  return [...openings, ...basisOpening(problem, data)];
+}
+
+function basisOpening(problem: Problem, data: ChemicalData): Opening[] {
+  const from = problem.solidsBasis;
+  if (from === undefined) return [];
+  const to = solidsBases.find((b) => b !== from && opens({ ...problem, solidsBasis: b }, data));
+  const base = { change: "solidsBasis", from, searched: "all three" } as const;
+  return [to === undefined ? { ...base, to: null } : { ...base, to, problem: { ...problem, solidsBasis: to } }];
 }

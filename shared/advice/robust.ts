@@ -3,10 +3,12 @@ import type { Convex } from "../geometry/convex";
 import { common as commonGround } from "../geometry/overlay";
 import { connect, type Region } from "../geometry/region";
 import { ok, fail, type Outcome } from "../outcome";
-import { TEMPERATURE_RANGE_C, type Problem } from "../schemas/problem";
+import type { HazardGas } from "../hazards/gases";
+import { TEMPERATURE_RANGE_C, type Problem, type Requirement } from "../schemas/problem";
 import { deepestPoint } from "../setpoint/deepestPoint";
 import type { Outline, Point } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
+import type { OnProgress } from "./search";
 import { outlinesOf } from "../windows/shutGround";
 
 /** Ranges over which a window is to hold. */
@@ -38,27 +40,31 @@ const MOST_TEMPERATURES = 65;
  *  Activities by monotony: a dissolved species' potential rises by RT/nu ln a, solids do not move, so raising a shrinks
  *  where the metal is dissolved and widens where it is solid, metal or compound; the worse end alone is solved.
  *  Temperature is refined by halving until no edge moves over 0.001 pH and 1 mV, or 65 temperatures.
+ *  An element whose gas is kept out is worst at its higher end where it is free: more of it gives more gas; where it is to be solid
+ *  its window lies in fields whose pressure does not depend on the activity.
  *  @param problem  validated by the solver     @param ranges  C; activities by element, low and high     @param data  library
+ *  @param onProgress  temperatures solved, and the most there can be
  *  @returns  outlines with set points (margin in control bands), and what was checked
  *  @source  docs/method.md, step 7 */
-export function robustWindow(problem: Problem, ranges: Ranges, data: ChemicalData): Outcome<Robust> {
+export function robustWindow(
+  problem: Problem,
+  ranges: Ranges,
+  data: ChemicalData,
+  onProgress?: OnProgress,
+): Outcome<Robust> {
   const bad = badRange(ranges);
   if (bad) return bad;
   const activities: { metal: string; at: number; why: string }[] = [];
+  const gives = new Set((problem.excludedHazards ?? []).map((h) => hydrideOf[h.gas] ?? ""));
   const worst: Problem = {
     ...problem,
     metals: problem.metals.map((m) => {
       const range = ranges.activities?.[m.element];
-      if (!range || m.requirement === "free") return m;
-      const dissolved = m.requirement === "dissolved";
-      const at = dissolved ? range[1] : range[0];
-      activities.push({
-        metal: m.element,
-        at,
-        why: dissolved
-          ? "dissolved: the more it must carry, the smaller its ground"
-          : `${m.requirement}: the less may stay dissolved, the smaller its ground`,
-      });
+      const gasKept = gives.has(m.element);
+      if (!range || (m.requirement === "free" && !gasKept)) return m;
+      const high = m.requirement === "dissolved" || m.requirement === "free";
+      const at = high ? range[1] : range[0];
+      activities.push({ metal: m.element, at, why: whyWorst(m.requirement) });
       return { element: m.element, requirement: m.requirement, ...(m.role ? { role: m.role } : {}), activity: at };
     }),
   };
@@ -71,6 +77,7 @@ export function robustWindow(problem: Problem, ranges: Ranges, data: ChemicalDat
     if (!analysed.ok) return analysed;
     const pieces = analysed.value.pieces.map((p) => p.piece);
     piecesAt.set(temperatureC, pieces);
+    onProgress?.(piecesAt.size, low === high ? 1 : MOST_TEMPERATURES);
     return ok(pieces);
   };
   let count = low === high ? 1 : 3;
@@ -98,6 +105,15 @@ export function robustWindow(problem: Problem, ranges: Ranges, data: ChemicalDat
     before = outlines;
     count = 2 * count - 1;
   }
+}
+
+const hydrideOf: Partial<Record<HazardGas, string>> = { AsH3: "As", SbH3: "Sb" };
+
+function whyWorst(requirement: Requirement): string {
+  if (requirement === "dissolved") return "dissolved: the more it must carry, the smaller its ground";
+  if (requirement === "free")
+    return "free, and its gas is kept out: the more there is, the wider the ground the gas takes";
+  return `${requirement}: the less may stay dissolved, the smaller its ground`;
 }
 
 function badRange({ temperatureC, activities = {} }: Ranges): Outcome<never> | null {

@@ -14,6 +14,8 @@ function away(to: number, from: number, change: Opening["change"]): number {
  *  @source  the solver: the rounded number is solved before it is offered */
 export function tidied(opening: Opening, data: ChemicalData): Opening {
   const { problem, change, of, from, to } = opening;
+  // a hazard's threshold is told, not offered
+  if (change === "hazardPressure" || change === "hazardPH") return opening;
   if (problem === undefined || typeof to !== "number" || typeof from !== "number") return opening;
   const rounded = away(to, from, change);
   const next =

@@ -5,10 +5,12 @@ import { valueAt, type Line } from "../geometry/line";
 import { formationOf } from "../planes/formation";
 import { STEPS_PER_JOULE, type Basis } from "../planes/grid";
 import { SULFIDE_SULFUR } from "../selection/components";
+import { hazardGases, type HazardGas } from "./gases";
 
-/** Gases whose pressure over the liquor follows from its metals and ligands. */
-export const hazardGases = ["HCN", "H2S", "AsH3", "SbH3", "Cl2", "NH3", "H2"] as const;
-export type HazardGas = (typeof hazardGases)[number];
+export { hazardGases, type HazardGas };
+
+/** What pressures rest on: a problem as far as ligand cells and fields. */
+export type Liquor = Pick<Analysis, "prepared" | "basis" | "cells" | "metals">;
 
 /** The element or group a gas takes from the liquor; hydrogen needs nothing but water. */
 const carrier: Readonly<Record<HazardGas, string | null>> = {
@@ -24,6 +26,9 @@ const carrier: Readonly<Record<HazardGas, string | null>> = {
 /** A convex piece of the frame on which R T ln p is linear: value of `line` over `scale`, in steps of the grid. */
 export interface PressurePiece {
   readonly piece: Convex;
+  /** ligand cell it lies in, and where a metal carries the gas its ruling species there, as an index */
+  readonly cell: number;
+  readonly plane: number | null;
   readonly line: Line;
   readonly scale: number;
 }
@@ -41,32 +46,38 @@ export interface GasPressure {
 const id = (gas: HazardGas): string => `${gas}(g)`;
 
 /** From a ligand: each cell's potential times the atoms the gas holds, less the gas itself. */
-function overLigand(analysis: Analysis, gas: HazardGas, main: string, component: string): PressurePiece[] {
+function overLigand(analysis: Liquor, gas: HazardGas, main: string, component: string): PressurePiece[] {
   const { basis, cells, prepared } = analysis;
   const { plane } = formationOf(gasSpecies(analysis, gas), main, 1, [], basis);
-  return cells.flatMap(({ piece, holders }) => {
+  return cells.flatMap(({ piece, holders }, cell) => {
     const held = holders.get(component)?.potential;
     if (held === undefined) throw new Error(`${component} of ${prepared.problem.temperatureC} C holds no cell`);
     const n = plane.atoms;
-    return [{ piece, line: [n * held.k - plane.k, n * held.x - plane.x, n * held.y - plane.y], scale: 1 }];
+    const line: Line = [n * held.k - plane.k, n * held.x - plane.x, n * held.y - plane.y];
+    return [{ piece, cell, plane: null, line, scale: 1 }];
   });
 }
 
 /** From a metal of the plan: the ruling species' plane per atom. */
-function overMetal(analysis: Analysis, gas: HazardGas, element: string): PressurePiece[] {
+function overMetal(analysis: Liquor, gas: HazardGas, element: string): PressurePiece[] {
   const metal = analysis.metals.find((m) => m.metal.element === element);
   const { plane: g } = formationOf(gasSpecies(analysis, gas), element, 1, [], analysis.basis);
-  return (metal?.cells ?? []).flatMap(({ planes, pieces }) =>
+  return (metal?.cells ?? []).flatMap(({ planes, pieces }, cell) =>
     pieces.flatMap(({ plane, piece }) => {
       const p = planes[plane];
       if (p === undefined) return [];
       const line: Line = [g.atoms * p.k - p.atoms * g.k, g.atoms * p.x - p.atoms * g.x, g.atoms * p.y - p.atoms * g.y];
-      return [{ piece, line, scale: p.atoms }];
+      return [{ piece, cell, plane, line, scale: p.atoms }];
     }),
   );
 }
 
-function gasSpecies({ prepared }: Analysis, gas: HazardGas) {
+/** What stands for a gas's element in a problem that can give it off: a component, a metal, or nothing but water.
+ *  @param liquor  of the problem     @param gas  one of hazardGases     @returns  component or element; null for hydrogen */
+export const carrierOf = (liquor: Liquor, gas: HazardGas): string | null =>
+  gas === "H2S" ? sulfurOf(liquor) : carrier[gas];
+
+function gasSpecies({ prepared }: Liquor, gas: HazardGas) {
   const species = prepared.data.species.get(id(gas));
   if (species === undefined) throw new Error(`the library holds no ${id(gas)}`);
   return species;
@@ -76,7 +87,7 @@ function gasSpecies({ prepared }: Analysis, gas: HazardGas) {
 const hydrogen = (basis: Basis): Line => [0, -2 * basis.proton, -2 * basis.electron];
 
 /** Where sulfide could come from: its own pool, or the one pool of sulfur. */
-function sulfurOf({ prepared }: Analysis): string | null {
+function sulfurOf({ prepared }: Liquor): string | null {
   const totals = prepared.components.map((c) => c.component);
   if (totals.includes(SULFIDE_SULFUR)) return SULFIDE_SULFUR;
   return prepared.sulfateReduction && totals.includes("S") ? "S" : null;
@@ -88,7 +99,7 @@ function sulfurOf({ prepared }: Analysis): string | null {
  *  @param analysis  of the plan     @param gas  one of hazardGases
  *  @returns  pieces that cover the frame, or in words why the plan gives no pressure
  *  @source  docs/method.md, hazards; the same planes as fields and cells */
-export function gasPressure(analysis: Analysis, gas: HazardGas): GasPressure | { readonly absent: string } {
+export function gasPressure(analysis: Liquor, gas: HazardGas): GasPressure | { readonly absent: string } {
   const { basis, cells, prepared } = analysis;
   const thermal = basis.thermal * STEPS_PER_JOULE;
   const main = carrier[gas];
@@ -97,7 +108,7 @@ export function gasPressure(analysis: Analysis, gas: HazardGas): GasPressure | {
       gas,
       thermal,
       of: null,
-      pieces: cells.map(({ piece }) => ({ piece, line: hydrogen(basis), scale: 1 })),
+      pieces: cells.map(({ piece }, cell) => ({ piece, cell, plane: null, line: hydrogen(basis), scale: 1 })),
     };
   const metal = prepared.metals.find((m) => m.element === main);
   if (metal !== undefined)
@@ -118,6 +129,16 @@ const missing: Readonly<Record<HazardGas, string>> = {
   NH3: "ammonia",
   H2: "water",
 };
+
+/** How far R T ln p stands above a threshold on one piece, in steps of the grid times `scale`. The threshold is rounded to the grid once, so
+ *  that the heights of neighbouring pieces agree exactly on what they share.
+ *  @param pressure  of a gas     @param piece  one of its pieces     @param bar  threshold, above zero
+ *  @returns  a line, at least zero where the pressure reaches the threshold     @source  arithmetic */
+export const heightOver = ({ thermal }: GasPressure, { line, scale }: PressurePiece, bar: number): Line => [
+  line[0] - scale * Math.round(thermal * Math.log(bar)),
+  line[1],
+  line[2],
+];
 
 /** log10 of the pressure at one point: what is far below any limit would be no number in bar.
  *  @param pressure  of a gas     @param pH, Eh  V vs SHE at T     @returns  for p in bar; null outside the frame

@@ -6,32 +6,11 @@ import { fail, ok, type Outcome } from "../outcome";
 import type { Outline, Point } from "../solution";
 import { kelvin } from "../units";
 import { outlinesOf } from "../windows/shutGround";
-import { DEFERENCE, EXPOSURE_RECORDED, exposureOf, limitsText } from "./exposure";
-import { gasPressure, hazardGases, pressureAt, type GasPressure, type HazardGas } from "./pressures";
+import { DEFERENCE, EXPOSURE_RECORDED, limitsText } from "./exposure";
+import { gasPressure, hazardGases, heightOver, pressureAt, type GasPressure, type HazardGas } from "./pressures";
+import { usualThreshold, type Threshold } from "./thresholds";
 
-/** One ppm by volume at one atmosphere, bar. */
-const PPM = 1.01325e-6;
-
-export interface Threshold {
-  readonly bar: number;
-  /** "50 ppm, immediately dangerous (IDLH)" */
-  readonly words: string;
-}
-
-/** Thresholds of the map unless the user names others: what NIOSH calls immediately dangerous to life or health, as a partial pressure at
- *  one atmosphere; for hydrogen the lower flammable limit.
- *  @source  hazards/exposure.ts */
-export const usualThreshold: Readonly<Record<HazardGas, Threshold>> = Object.fromEntries(
-  hazardGases.map((gas): [HazardGas, Threshold] => {
-    const row = exposureOf.get(gas);
-    if (row?.flammable) {
-      const [low] = row.flammable;
-      return [gas, { bar: low * 1e4 * PPM, words: `${low} % by volume, lower flammable limit` }];
-    }
-    const ppm = row?.limits.find((l) => l.authority === "IDLH" && l.unit === "ppm")?.value ?? 1;
-    return [gas, { bar: ppm * PPM, words: `${ppm} ppm, immediately dangerous to life or health (IDLH)` }];
-  }),
-) as Record<HazardGas, Threshold>;
+export { usualThreshold };
 
 export interface HazardRegion {
   readonly gas: HazardGas;
@@ -64,9 +43,9 @@ const ISO_TAG = 2 ** 40;
 
 /** The part of each piece where the pressure reaches the threshold. */
 function above(pressure: GasPressure, bar: number): Convex[] {
-  const level = pressure.thermal * Math.log(bar);
-  return pressure.pieces.flatMap(({ piece, line: [k, x, y], scale }) => {
-    const height = k - Math.round(level * scale);
+  return pressure.pieces.flatMap((part) => {
+    const { piece } = part;
+    const [height, x, y] = heightOver(pressure, part, bar);
     if (x === 0 && y === 0) return height >= 0 ? [piece] : []; // the same pressure all over the piece
     return clip(piece, [height, x, y], ISO_TAG) ?? [];
   });

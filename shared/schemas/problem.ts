@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { hazardGases } from "../hazards/gases";
 import { speciesRow } from "./chemistry";
 
 export const roles = ["target", "gangue", "watched"] as const;
@@ -72,6 +73,29 @@ export const waterSchema = z.object({
 /** how far a real loop strays, to either side */
 export const controlBandSchema = z.object({ pH: positive.min(0.001).max(5), Eh: positive.min(0.0001).max(1) });
 
+/** A gas whose ground is kept out of windows: where its equilibrium pressure over the liquor reaches `bar` (absent: the usual threshold of
+ *  hazards/thresholds.ts), or, for HCN, below the pH a site never goes under. */
+export const excludedHazard = z
+  .strictObject({
+    gas: z.enum(hazardGases),
+    bar: positive.min(1e-30).max(1e4).optional(),
+    pHAtLeast: z.number().min(7).max(14).optional(),
+  })
+  .refine((h) => h.bar === undefined || h.pHAtLeast === undefined, {
+    message: "give either bar or pHAtLeast, not both",
+    path: ["pHAtLeast"],
+  })
+  .refine((h) => h.pHAtLeast === undefined || h.gas === "HCN", {
+    message: "a pH rule is for HCN alone; other gases are kept out by a pressure in bar",
+    path: ["pHAtLeast"],
+  });
+export type ExcludedHazard = z.infer<typeof excludedHazard>;
+export const excludedHazards = z.array(excludedHazard).superRefine((list, context) => {
+  for (const [i, { gas }] of list.entries())
+    if (list.findIndex((h) => h.gas === gas) < i)
+      context.addIssue({ code: "custom", path: [i, "gas"], message: `${gas} is kept out twice` });
+});
+
 /** The solver's question. Same body for the CLI, POST /api/solve, the browser and a frozen revision. Potentials in V vs SHE at T.
  *  A key it does not know is refused, so that a misspelt option cannot pass for its default. */
 export const problemSchema = z.strictObject({
@@ -92,6 +116,8 @@ export const problemSchema = z.strictObject({
   species: z.array(ownSpecies).optional(),
   frame: frameSchema.strict(),
   water: waterSchema.strict().optional(),
+  /** gases whose ground windows keep out of; absent: none */
+  excludedHazards: excludedHazards.optional(),
   controlBand: controlBandSchema.strict(),
 });
 export type Problem = z.infer<typeof problemSchema>;

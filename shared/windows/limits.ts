@@ -2,6 +2,7 @@ import { FRAME_SIDES, type LigandCell } from "../fields/ligandCells";
 import type { MetalFields } from "../fields/fields";
 import { sameLine } from "../geometry/line";
 import type { Region, Stretch } from "../geometry/region";
+import type { HazardGround } from "../hazards/excluded";
 import { balance, reactionText } from "../reactions/balance";
 import { clearances, widest, type Segment } from "../setpoint/segments";
 import type { Limit, Point } from "../solution";
@@ -13,6 +14,7 @@ export interface Ground {
   readonly data: ChemicalData;
   readonly cells: readonly LigandCell[];
   readonly metals: readonly MetalFields[];
+  readonly hazards: readonly HazardGround[];
   readonly pieces: readonly WindowPiece[];
 }
 
@@ -103,6 +105,7 @@ export function limitOf(ground: Ground, raw: RawLimit, at: Point, band: { pH: nu
   const { meaning } = raw;
   if (meaning.kind === "frame") return { kind: "frame", side: FRAME_SIDES[meaning.side]!, ...common };
   if (meaning.kind === "water") return { kind: "water", side: meaning.side, ...waterReaction(meaning.side), ...common };
+  if (meaning.kind === "hazard") return { kind: "hazard", ...hazardOf(ground, meaning, cell), ...common };
   const metal = ground.metals[meaning.metal]!;
   const inside = metal.formations[meaning.inside]!.species.id;
   const outside = metal.formations[meaning.outside]!.species.id;
@@ -132,6 +135,27 @@ function metalReaction(data: ChemicalData, inside: string, outside: string, hold
     known.set(key, reaction);
   }
   return reaction;
+}
+
+/** The gas kept out, what carries it there, and the reaction that frees it. */
+function hazardOf(
+  { data, cells, metals, hazards }: Ground,
+  { hazard, plane }: Extract<EdgeMeaning, { kind: "hazard" }>,
+  cell: number,
+): Omit<Limit, "kind" | "line" | "from" | "to" | "distance" | "distancePH" | "distanceEh"> {
+  const { gas, asked, carrier } = hazards[hazard]!;
+  const outside = `${gas}(g)`;
+  if (carrier === null) return { ...asked, outside, ...waterReaction("hydrogen") };
+  const { holders } = cells[cell]!;
+  const metal = metals.find((m) => m.metal.element === carrier);
+  if (metal === undefined || plane === null) {
+    const inside = holders.get(carrier)!.species.id;
+    const main = carrier.startsWith("S(") ? "S" : carrier;
+    return { ...asked, inside, outside, ...metalReaction(data, inside, outside, [], main) };
+  }
+  const inside = metal.formations[plane]!.species.id;
+  const others = [...holders.values()].map((h) => h.species.id);
+  return { ...asked, inside, outside, ...metalReaction(data, inside, outside, others, carrier) };
 }
 
 const WATER_TERMS = {

@@ -1,7 +1,8 @@
 import { LIGAND_EDGE, type LigandCell } from "../fields/ligandCells";
 import type { MetalFields } from "../fields/fields";
 import { areaOf, clip, type Convex } from "../geometry/convex";
-import type { Line } from "../geometry/line";
+import { flipped, type Line } from "../geometry/line";
+import type { HazardGround, HazardPart } from "../hazards/excluded";
 import { fulfils } from "./requirement";
 
 /** What an edge of a window piece is, packed in its tag: frame sides and ligand-cell edges keep theirs (negative). */
@@ -9,12 +10,15 @@ export type EdgeMeaning =
   | { readonly kind: "frame"; readonly side: number }
   | { readonly kind: "ligand" }
   | { readonly kind: "water"; readonly side: "oxygen" | "hydrogen" }
+  | { readonly kind: "hazard"; readonly hazard: number; readonly plane: number | null }
   | { readonly kind: "metal"; readonly metal: number; readonly inside: number; readonly outside: number };
 
 const SPECIES = 4096;
 const WATER = SPECIES * SPECIES * 64;
 export const OXYGEN_TAG = WATER;
 export const HYDROGEN_TAG = WATER + 1;
+const HAZARD = WATER + 2;
+const hazardTag = (hazard: number, plane: number | null): number => HAZARD + hazard * SPECIES + (plane ?? SPECIES - 1);
 const metalTag = (metal: number, inside: number, outside: number): number =>
   (metal * SPECIES + inside) * SPECIES + outside;
 
@@ -23,6 +27,14 @@ const metalTag = (metal: number, inside: number, outside: number): number =>
 export function meaningOf(tag: number): EdgeMeaning {
   if (tag === LIGAND_EDGE) return { kind: "ligand" };
   if (tag < 0) return { kind: "frame", side: -1 - tag };
+  if (tag >= HAZARD) {
+    const plane = (tag - HAZARD) % SPECIES;
+    return {
+      kind: "hazard",
+      hazard: Math.floor((tag - HAZARD) / SPECIES),
+      plane: plane === SPECIES - 1 ? null : plane,
+    };
+  }
   if (tag >= WATER) return { kind: "water", side: tag === OXYGEN_TAG ? "oxygen" : "hydrogen" };
   return {
     kind: "metal",
@@ -50,13 +62,16 @@ const apart = (a: Convex, b: Convex): boolean =>
   Math.min(...a.y) > Math.max(...b.y) ||
   Math.max(...a.y) < Math.min(...b.y);
 
-/** Where all metals are as required: per ligand cell, the intersection of each metal's fulfilled fields.
+/** Where all metals are as required and no excluded hazard stands: per ligand cell, the intersection of each metal's fulfilled fields, less
+ *  the hazards' ground.
  *  @param cells  ligand cells     @param metals  fields of each metal over the same cells     @param bounds  water lines that bind
+ *  @param hazards  ground kept out
  *  @returns  convex pieces with disjoint interiors; none where all of them are slivers     @source  docs/method.md, step 5 */
 export function windowPieces(
   cells: readonly LigandCell[],
   metals: readonly MetalFields[],
   bounds: readonly Bound[],
+  hazards: readonly HazardGround[] = [],
 ): WindowPiece[] {
   const out: WindowPiece[] = [];
   cells.forEach((cell, c) => {
@@ -70,6 +85,10 @@ export function windowPieces(
       const fulfilled = all.filter((f) => fulfils(metal.requirement, states[f.plane]!));
       if (fulfilled.length === all.length) continue;
       pieces = pieces.flatMap((p) => fulfilled.flatMap((f) => within(p, f.piece, f.plane, m) ?? []));
+    }
+    for (let h = 0; h < hazards.length && pieces.length > 0; h++) {
+      const parts = hazards[h]!.cells[c]!;
+      if (parts.length > 0) pieces = pieces.flatMap((p) => parts.flatMap((part) => clearOf(p, part, h) ?? []));
     }
     for (const piece of pieces) out.push({ piece, cell: c });
   });
@@ -92,4 +111,19 @@ function within(piece: Convex, field: Convex, species: number, metal: number): C
     if (part === null) return null;
   }
   return part;
+}
+
+/** Part of a piece inside one part of a hazard's cell and clear of the hazard. Edges between two parts become plain inner edges: pressure
+ *  does not jump there, so what one side shuts along them the other shuts too, and a hazard's line that runs along one takes its name. */
+function clearOf(piece: Convex, { field, height, plane }: HazardPart, hazard: number): Convex | null {
+  let part: Convex | null = piece;
+  if (field !== null) {
+    if (apart(piece, field)) return null;
+    for (let e = 0; e < field.lines.length && part !== null; e++)
+      if (field.tags[e]! >= 0) part = clip(part, field.lines[e]!, LIGAND_EDGE);
+    if (part === null) return null;
+  }
+  if (height[1] === 0 && height[2] === 0) return height[0] < 0 ? part : null;
+  const here = part;
+  return clip(here, flipped(height), hazardTag(hazard, plane), (edge) => here.tags[edge] === LIGAND_EDGE);
 }

@@ -25,7 +25,7 @@ export function expectInvariants(problem: Problem, solution: Solution, library: 
 function groundOf(problem: Problem, library: ChemicalData): boolean {
   const bound = problem.metals.some((m) => m.requirement === "metal") ? ("upper" as const) : ("both" as const);
   const metals = problem.metals.map((m) => ({ ...m, requirement: "free" as const }));
-  return piecesOf({ ...problem, metals, water: problem.water ?? { bound } }, library).length > 0;
+  return piecesOf({ ...problem, excludedHazards: [], metals, water: problem.water ?? { bound } }, library).length > 0;
 }
 
 const near = (a: Point, b: Point): boolean => Math.abs(a[0] - b[0]) < 1e-8 && Math.abs(a[1] - b[1]) < 1e-8;
