@@ -126,5 +126,7 @@ export interface Solution {
   metals: { metal: string; requirement: Requirement; activity: number; gPerL?: number; gamma?: number }[];
   /** ground shut by each metal: the union of its fields that are not as required, outlines with holes; on request only */
   shut?: { metal: string; polygons: Outline[] }[];
+  /** ground of each hazard kept out, where it has some inside the frame; on request only */
+  kept?: (ExcludedGas & { polygons: Outline[] })[];
   frame: { pH: [number, number]; Eh: [number, number] };
 }

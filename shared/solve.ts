@@ -13,10 +13,10 @@ import { warningsOf } from "./warnings";
 import { conflictsOf } from "./windows/conflicts";
 import { limitOf, loopsOf, pointsOf, segmentOf, type Ground } from "./windows/limits";
 import { isSliver } from "./windows/pieces";
-import { shutGroundOf } from "./windows/shutGround";
+import { keptGroundOf, shutGroundOf } from "./windows/shutGround";
 
 export interface SolveOptions {
-  /** also outline the ground each metal shuts, for the map */
+  /** also outline the ground each metal shuts, and that of each hazard kept out, for the map */
   readonly shutGround?: boolean;
 }
 
@@ -52,6 +52,9 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
       ...(gPerL === undefined ? {} : { gPerL, gamma: gamma ?? 1 }),
     })),
     ...(options.shutGround ? { shut: metals.map((m) => ({ metal: m.metal.element, polygons: shutGroundOf(m) })) } : {}),
+    ...(options.shutGround && hazards.length > 0
+      ? { kept: hazards.map((h) => ({ ...h.asked, polygons: keptGroundOf(h, cells) })) }
+      : {}),
     frame: problem.frame,
   });
 }

@@ -1,3 +1,4 @@
+import { HCN_PH } from "../../shared/hazards/words";
 import type { PlanInputs, PlanMetal } from "../../shared/schemas/plan";
 
 /** Everything at this site is invented; the numbers are of the usual size for such circuits and stand for no plant. */
@@ -81,6 +82,7 @@ const cyanideLeach: PlanInputs = {
   ),
   ligands: [{ component: "CN", activity: 0.01 }],
   frame: { pH: [9, 13], Eh: [-0.8, 0.6] },
+  excludedHazards: [{ gas: "HCN", pHAtLeast: HCN_PH }],
 };
 
 const ammoniaLeach: PlanInputs = {

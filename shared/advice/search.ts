@@ -20,7 +20,7 @@ export const stepsOf = ({ from, low, high, step }: Walk): number =>
 /** Smallest |x - from| at which `test` holds, looking outward in steps to both ends, then bisecting to 1e-4.
  *  @param test  asked at many x     @param walk  from where, how far     @param onStep  called after each step outward
  *  @returns  x just past the root; null where no step holds     @source  even steps, then bisection
- *  @example nearest((x) => x >= 1.5, { from: 1, low: 0, high: 4, step: 1 })?.toFixed(3) // => "1.500" */
+ *  @example nearest((x) => x >= 1.5, { from: 1, low: 0, high: 4, step: 1 }) // => 1.500 */
 export function nearest(test: (x: number) => boolean, walk: Walk, onStep?: () => void): number | null {
   const { from, low, high, step } = walk;
   for (let k = 1; k <= stepsOf(walk); k++) {

@@ -3,8 +3,8 @@ import type { Line } from "../geometry/line";
 import type { ExcludedHazard } from "../schemas/problem";
 import type { ExcludedGas } from "../solution";
 import type { HazardGas } from "./gases";
-import { carrierOf, gasPressure, heightOver, type Liquor } from "./pressures";
-import { pressureWords, usualThreshold } from "./thresholds";
+import { gasPressure, heightOver, type Liquor } from "./pressures";
+import { usualThreshold } from "./thresholds";
 
 /** A convex part of a ligand cell on which a hazard's edge is one line: the hazard stands where `height` is at least zero. */
 export interface HazardPart {
@@ -60,21 +60,7 @@ export function excludedGround(liquor: Liquor): HazardGround[] {
       return cell !== undefined && parts.some((p) => reaches(p, p.field ?? cell)) ? parts : [];
     });
     if (touched.some((parts) => parts.length > 0))
-      out.push({ gas: hazard.gas, asked, carrier: carrierOf(liquor, hazard.gas), cells: touched });
+      out.push({ gas: hazard.gas, asked, carrier: pressure.of?.component ?? null, cells: touched });
   }
   return out;
 }
-
-/** What is kept, in words: "HCN below 50 ppm over the liquor", "pH at or above 10.5 against HCN".
- *  @param asked  an exclusion     @returns  a phrase
- *  @example keptWords({ gas: "HCN", pHAtLeast: 10.5 }) // => "pH at or above 10.5 against HCN" */
-export const keptWords = ({ gas, bar, pHAtLeast }: ExcludedGas): string =>
-  bar === undefined
-    ? `pH at or above ${pHAtLeast} against ${gas}`
-    : `${gas} below ${pressureWords(bar)} over the liquor`;
-
-/** What happens beyond the edge: "HCN reaches 50 ppm over the liquor", "HCN: pH falls below 10.5".
- *  @param asked  an exclusion     @returns  a phrase
- *  @example beyondWords({ gas: "H2", bar: 0.5 }) // => "H2 reaches 0.5 bar over the liquor" */
-export const beyondWords = ({ gas, bar, pHAtLeast }: ExcludedGas): string =>
-  bar === undefined ? `${gas}: pH falls below ${pHAtLeast}` : `${gas} reaches ${pressureWords(bar)} over the liquor`;

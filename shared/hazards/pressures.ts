@@ -72,11 +72,6 @@ function overMetal(analysis: Liquor, gas: HazardGas, element: string): PressureP
   );
 }
 
-/** What stands for a gas's element in a problem that can give it off: a component, a metal, or nothing but water.
- *  @param liquor  of the problem     @param gas  one of hazardGases     @returns  component or element; null for hydrogen */
-export const carrierOf = (liquor: Liquor, gas: HazardGas): string | null =>
-  gas === "H2S" ? sulfurOf(liquor) : carrier[gas];
-
 function gasSpecies({ prepared }: Liquor, gas: HazardGas) {
   const species = prepared.data.species.get(id(gas));
   if (species === undefined) throw new Error(`the library holds no ${id(gas)}`);
@@ -86,38 +81,60 @@ function gasSpecies({ prepared }: Liquor, gas: HazardGas) {
 /** 2 H^+ + 2 e^- = H2: the gas's own energy cancels against the electron's. */
 const hydrogen = (basis: Basis): Line => [0, -2 * basis.proton, -2 * basis.electron];
 
-/** Where sulfide could come from: its own pool, or the one pool of sulfur. */
-function sulfurOf({ prepared }: Liquor): string | null {
-  const totals = prepared.components.map((c) => c.component);
-  if (totals.includes(SULFIDE_SULFUR)) return SULFIDE_SULFUR;
-  return prepared.sulfateReduction && totals.includes("S") ? "S" : null;
+/** Totals that decide which gases a liquor can give off. */
+export interface GasSources {
+  readonly components: readonly string[];
+  readonly metals: readonly string[];
+  /** sulfate reduction: one pool of sulfur */
+  readonly onePool: boolean;
+}
+
+const sourcesOf = ({ prepared }: Liquor): GasSources => ({
+  components: prepared.components.map((c) => c.component),
+  metals: prepared.metals.map((m) => m.element),
+  onePool: prepared.sulfateReduction,
+});
+
+/** What stands for a gas's element in a liquor: a component, a metal, or nothing but water; or, in words, why there is nothing.
+ *  @param sources  totals of the problem     @param gas  one of hazardGases
+ *  @returns  `carrier`, null for hydrogen; or `absent` */
+export function carrierOf(
+  { components, metals, onePool }: GasSources,
+  gas: HazardGas,
+): { readonly carrier: string | null } | { readonly absent: string } {
+  const main = carrier[gas];
+  if (main === null || metals.includes(main)) return { carrier: main };
+  const own = gas === "H2S" && (!onePool || components.includes(SULFIDE_SULFUR)) ? SULFIDE_SULFUR : main;
+  return components.includes(own) ? { carrier: own } : { absent: `the plan holds no ${missing[gas]}` };
 }
 
 /** Equilibrium partial pressure of a gas over the plan's liquor at every point of the frame, R T ln p = sum of the potentials of its parts
  *  less G of the gas: linear on each ligand cell (or field of arsenic or antimony), so the pieces are exact. The totals are those of the
  *  plan: a liquor that has lost its gas, or a vessel that is swept, stands lower; a dead corner may stand there.
- *  @param analysis  of the plan     @param gas  one of hazardGases
+ *  @param liquor  of the plan     @param gas  one of hazardGases
  *  @returns  pieces that cover the frame, or in words why the plan gives no pressure
  *  @source  docs/method.md, hazards; the same planes as fields and cells */
-export function gasPressure(analysis: Liquor, gas: HazardGas): GasPressure | { readonly absent: string } {
-  const { basis, cells, prepared } = analysis;
+export function gasPressure(liquor: Liquor, gas: HazardGas): GasPressure | { readonly absent: string } {
+  const { basis, cells, prepared } = liquor;
   const thermal = basis.thermal * STEPS_PER_JOULE;
-  const main = carrier[gas];
-  if (main === null)
+  const found = carrierOf(sourcesOf(liquor), gas);
+  if ("absent" in found) return found;
+  const { carrier: source } = found;
+  if (source === null) {
+    const pieces = cells.map(({ piece }, cell) => ({ piece, cell, plane: null, line: hydrogen(basis), scale: 1 }));
+    return { gas, thermal, of: null, pieces };
+  }
+  const metal = prepared.metals.find((m) => m.element === source);
+  if (metal !== undefined)
     return {
       gas,
       thermal,
-      of: null,
-      pieces: cells.map(({ piece }, cell) => ({ piece, cell, plane: null, line: hydrogen(basis), scale: 1 })),
+      of: { component: source, activity: metal.activity },
+      pieces: overMetal(liquor, gas, source),
     };
-  const metal = prepared.metals.find((m) => m.element === main);
-  if (metal !== undefined)
-    return { gas, thermal, of: { component: main, activity: metal.activity }, pieces: overMetal(analysis, gas, main) };
-  const component = gas === "H2S" ? sulfurOf(analysis) : main;
-  const total = prepared.components.find((c) => c.component === component);
-  if (component === null || total === undefined) return { absent: `the plan holds no ${missing[gas]}` };
-  const of = { component, activity: total.activity };
-  return { gas, thermal, of, pieces: overLigand(analysis, gas, main, component) };
+  const activity = prepared.components.find((c) => c.component === source)?.activity ?? 0;
+  const main = source === SULFIDE_SULFUR ? "S" : source;
+  return { gas, thermal, of: { component: source, activity }, pieces: overLigand(liquor, gas, main, source) };
 }
 
 const missing: Readonly<Record<HazardGas, string>> = {

@@ -1,12 +1,12 @@
 import { reagentById } from "../reach/reagents";
 import type { Caution, HazardContext } from "./context";
 import { limitsText } from "./exposure";
+import { HCN_PH } from "./words";
 import { chlorine, organicWithOxidant, oxygen } from "./oxidantRules";
 
 export { hazardContext, type Caution, type CautionCode, type HazardContext } from "./context";
 
-/** pH at and above which a cyanide liquor keeps most of its cyanide from leaving as HCN, and below which a named procedure is asked for. */
-export const HCN_PH = 10.5;
+/** pH below which a named procedure is asked for. */
 export const HCN_CONFIRM_PH = 10.0;
 
 const cementing: Readonly<Record<string, string>> = { Zn: "zinc", Fe: "iron", Al: "aluminium" };

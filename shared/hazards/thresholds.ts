@@ -1,8 +1,6 @@
 import { exposureOf } from "./exposure";
 import { hazardGases, type HazardGas } from "./gases";
-
-/** One ppm by volume at one atmosphere, bar. */
-export const PPM = 1.01325e-6;
+import { PPM } from "./words";
 
 export interface Threshold {
   readonly bar: number;
@@ -24,12 +22,3 @@ export const usualThreshold: Readonly<Record<HazardGas, Threshold>> = Object.fro
     return [gas, { bar: ppm * PPM, words: `${ppm} ppm, immediately dangerous to life or health (IDLH)` }];
   }),
 ) as Record<HazardGas, Threshold>;
-
-/** A pressure as one reads it off a gas monitor: ppm at one atmosphere, from a tenth of a bar on in bar.
- *  @param bar  above zero     @returns  three figures with the unit
- *  @example pressureWords(50 * 1.01325e-6) // => "50 ppm"
- *  @example pressureWords(1.5) // => "1.5 bar" */
-export function pressureWords(bar: number): string {
-  const three = (x: number): string => String(Number(x.toPrecision(3)));
-  return bar < 0.1 ? `${three(bar / PPM)} ppm` : `${three(bar)} bar`;
-}

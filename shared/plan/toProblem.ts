@@ -80,5 +80,6 @@ export function toProblem(inputs: PlanInputs, data: ChemicalData): Problem {
     frame: inputs.frame,
     water: inputs.water,
     controlBand: inputs.controlBand,
+    ...(inputs.excludedHazards?.length ? { excludedHazards: inputs.excludedHazards } : {}),
   };
 }

@@ -3,6 +3,7 @@ import { circuitSchema } from "./circuit";
 import {
   componentTotal,
   controlBandSchema,
+  excludedHazards,
   frameSchema,
   requirements,
   roles,
@@ -95,6 +96,8 @@ export const planInputs = z.object({
   freeAcidBand: freeAcidBand.optional(),
   /** choices for overall reactions, by species id of the start; the window does not see them */
   overall: z.record(z.string(), overallChoice).optional(),
+  /** gases whose ground windows keep out of; absent in plans from before there were any: none */
+  excludedHazards: excludedHazards.optional(),
   /** for the caution rules alone; the solver does not see it */
   circuit: circuitSchema.optional(),
   /** over which the window is to hold; absent: only what the plan says */

@@ -1,3 +1,4 @@
+import { beyondWords } from "../hazards/words";
 import type { Limit, SetPoint, Solution, State, Window } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
 
@@ -57,6 +58,14 @@ export const namingOf = (data: ChemicalData, solution: Pick<Solution, "fields">)
   };
 };
 
+/** What stands beyond a hazard's limit: "HCN reaches 50 ppm over the liquor (kept out)".
+ *  @param limit  of kind hazard     @returns  a phrase */
+export function hazardWords({ gas, bar, pHAtLeast }: Pick<Limit, "gas" | "bar" | "pHAtLeast">): string {
+  if (gas === undefined) return "a hazard is kept out";
+  const beyond = pHAtLeast === undefined ? beyondWords({ gas, bar: bar ?? 0 }) : beyondWords({ gas, pHAtLeast });
+  return `${beyond} (kept out)`;
+}
+
 function what(limit: Limit, { metalName, stateOf }: Naming): string {
   switch (limit.kind) {
     case "water":
@@ -64,7 +73,7 @@ function what(limit: Limit, { metalName, stateOf }: Naming): string {
     case "frame":
       return "the frame ends here, not the window";
     case "hazard":
-      return "a hazard is kept out";
+      return hazardWords(limit);
     case "metal": {
       const metal = limit.metal ?? "";
       const state = (species: string | undefined) => (species === undefined ? undefined : stateOf(metal, species));

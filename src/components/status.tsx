@@ -51,7 +51,7 @@ export function Loading({ label = "Reading" }: { label?: string }) {
 }
 
 /** A moving hairline while the end is unknown, a growing one when `share` (0 to 1) is given. */
-export function Progress({ share }: { share?: number }) {
+export function Progress({ share, label }: { share?: number; label?: string }) {
   return (
     <div className="mt-2 h-px w-48 overflow-hidden bg-rule" aria-hidden={share === undefined}>
       <div
@@ -61,6 +61,7 @@ export function Progress({ share }: { share?: number }) {
           ? {}
           : {
               role: "progressbar",
+              "aria-label": label,
               "aria-valuenow": Math.round(share * 100),
               "aria-valuemin": 0,
               "aria-valuemax": 100,

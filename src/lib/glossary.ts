@@ -83,6 +83,13 @@ export const glossary = {
       "The ground that stays open whatever temperature and activities do within the ranges stated here. It is drawn as an inner outline, with a deepest point of its own.",
     ],
   },
+  excludedHazard: {
+    title: "Kept out",
+    text: [
+      "Windows stay clear of ground where this gas would stand over the liquor: where its equilibrium pressure reaches the limit stated, as in a closed headspace. For HCN a site may state the pH it never goes below instead; its edge then cuts the window, counts in the margin, and is named among the limits.",
+      "A line on a map protects nobody. Local codes, exposure limits in force, the site's procedures and licensed practice decide; gas detection and ventilation are theirs.",
+    ],
+  },
   windowLimit: {
     title: "Window limit",
     text: ["One edge of a window: the metal and the reaction that shuts it there."],

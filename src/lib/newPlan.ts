@@ -1,5 +1,6 @@
 import type { PlanInputs, PlanMetal, PresetName } from "../../shared/schemas/plan";
-import type { ComponentTotal, Frame } from "../../shared/schemas/problem";
+import { HCN_PH } from "../../shared/hazards/words";
+import type { ComponentTotal, ExcludedHazard, Frame } from "../../shared/schemas/problem";
 import type { ChemicalData } from "../../shared/species/chemicalData";
 
 /** Totals a lixiviant preset starts from, as presets.csv gives them. */
@@ -9,6 +10,10 @@ export const presetLigands = (data: ChemicalData, preset: PresetName): Component
       ? [{ component: row.component, activity: row.total_activity }]
       : [],
   );
+
+/** A cyanide liquor is kept at pH 10.5 or above, so that its cyanide does not leave as HCN; a site may set another rule.
+ *  @source  common practice (hazards/rules.ts) */
+export const cyanideRule: ExcludedHazard = { gas: "HCN", pHAtLeast: HCN_PH };
 
 /** What happens to the target in the step that is planned. */
 export const steps = ["leach", "cementation", "precipitation"] as const;
@@ -85,5 +90,6 @@ export function newPlanInputs({ step, preset, target, other, temperatureC }: New
     // reduction: hydrogen is a loss there, not a limit
     water: { bound: step === "cementation" ? "none" : "both" },
     controlBand: { pH: 0.15, Eh: 0.03 },
+    ...(preset === "cyanide" ? { excludedHazards: [cyanideRule] } : {}),
   };
 }

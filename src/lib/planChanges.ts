@@ -1,3 +1,5 @@
+import { askedOf } from "../../shared/hazards/excluded";
+import { keptWords } from "../../shared/hazards/words";
 import type { OverallChoice, PlanInputs, PlanMetal, PlanTotal } from "../../shared/schemas/plan";
 import { celsius, fixed, MINUS, significant, withUnit } from "./format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord, waterBoundWord } from "./planWords";
@@ -92,6 +94,14 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
   const band = (i: PlanInputs) =>
     `pH ±${fixed(i.controlBand.pH, 2)}${acidBand(i)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
   compare(changes, "Control bands", band(before), band(after));
+  compareKeyed(
+    changes,
+    before.excludedHazards ?? [],
+    after.excludedHazards ?? [],
+    (h) => h.gas,
+    (h) => keptWords(askedOf(h)),
+    (gas) => `Kept out of windows: ${gas}`,
+  );
   const hold = (i: PlanInputs) => {
     const { temperatureC: t, activities = {} } = i.ranges ?? {};
     const each = Object.entries(activities).map(([e, [lo, hi]]) => `${e} ${significant(lo)} to ${significant(hi)}`);

@@ -2,8 +2,11 @@ import { useMemo } from "react";
 import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../shared/activity/freeAcid";
 import { speciesAt } from "../../shared/setpoint/crosscut";
 import type { Point, Solution } from "../../shared/solution";
+import { keptWords } from "../../shared/hazards/words";
+import { keptAt } from "../../shared/windows/shutGround";
 import { SpeciesName } from "../components/Formula";
 import { AcidAmount } from "../components/AcidAmount";
+import { FormulaText } from "../components/FormulaText";
 import { MetalName } from "../components/MetalLine";
 import { fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
@@ -34,7 +37,8 @@ export function ReadOut({
   const hatches = useMemo(() => hatchesOf(metals), [metals]);
   const at = cursor ?? rest?.at ?? null;
   const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
-  const shut = here && metals.some((m) => here.get(m.element)?.fulfilled === false);
+  const kept = at ? keptAt(solution, at) : [];
+  const shut = here && (kept.length > 0 || metals.some((m) => here.get(m.element)?.fulfilled === false));
   return (
     <div
       role="status"
@@ -55,6 +59,11 @@ export function ReadOut({
             {cursor ? "under the cursor" : rest?.words}
             {shut !== null && <>: {shut ? "shut" : "open"}</>}
           </span>
+          {kept.length > 0 && (
+            <span className="text-signal">
+              <FormulaText text={kept.map(keptWords).join("; ")} />: not here
+            </span>
+          )}
           <span className="flex basis-full flex-wrap gap-x-4">
             {metals.map((metal) => {
               const found = here?.get(metal.element);

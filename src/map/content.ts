@@ -21,7 +21,9 @@ export interface MapContent {
   reaches: readonly Reach[];
   /** edges that the other solids basis would move, with its name */
   moved: { basis: string; limits: readonly Limit[] } | null;
-  /** cyanide has a total: the HCN region is drawn */
+  /** ground of hazards kept out of the windows */
+  kept: NonNullable<Solution["kept"]>;
+  /** cyanide has a total and HCN is not kept out anyway: its region is drawn */
   cyanide: boolean;
   /** what holds over the plan's ranges */
   robust: readonly Outline[];
@@ -68,7 +70,8 @@ export function mapContent(wishes: ContentWishes): MapContent {
           })),
     reaches,
     moved: other && { basis: other.basis, limits: movedLimits(solution, other.solution) },
-    cyanide,
+    kept: solution.kept ?? [],
+    cyanide: cyanide && !solution.kept?.some((k) => k.gas === "HCN"),
     robust,
     gases,
     practice,

@@ -8,6 +8,7 @@ import { gasTraces } from "./traces/gases";
 import { groundTrace, openGroundTraces, shutGroundTraces, windowOutlineTraces } from "./traces/ground";
 import { equilibriumTraces, hydrogenCyanideTraces, otherBasisTraces, waterTraces } from "./traces/lines";
 import { nameTraces } from "./traces/names";
+import { keptTraces } from "./traces/kept";
 import { practiceTraces } from "./traces/practice";
 import { reachHeads, reachTraces } from "./traces/reachBars";
 import { robustTraces } from "./traces/robust";
@@ -29,6 +30,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     groundTrace(view),
     ...openGroundTraces(solution, view),
     ...shutGroundTraces(content.shut, view),
+    ...keptTraces(content.kept, view),
     ...(layers.hazard && content.cyanide ? hydrogenCyanideTraces(view) : []),
     ...(layers.hazard ? gasTraces(content.gases, view) : []),
     ...(layers.boundaries ? boundaryTraces(content.boundaries, view) : []),

@@ -1,5 +1,6 @@
 import { adviceFor } from "../../shared/advice/openings";
 import { robustWindow } from "../../shared/advice/robust";
+import type { OnProgress } from "../../shared/advice/search";
 import { tidied } from "../../shared/advice/tidy";
 import { ok, valueOf } from "../../shared/outcome";
 import type { Problem } from "../../shared/schemas/problem";
@@ -11,8 +12,21 @@ import type { Answer, Answers, Question, Telling } from "./messages";
 // The questions that take longer than a frame, away from the page. The functions are the solver's own.
 let data: ChemicalData | null = null;
 
-function adviceOf(problem: Problem, library: ChemicalData): Answers["advice"] {
-  const advice = adviceFor(problem, library);
+/** A step a tenth of a second is enough for a bar; more would only fill the page's queue. */
+const APART = 100;
+
+function teller(id: number): OnProgress {
+  let last = 0;
+  return (done, total) => {
+    const now = performance.now();
+    if (now - last < APART) return;
+    last = now;
+    self.postMessage({ id, done, total } satisfies Telling);
+  };
+}
+
+function adviceOf(problem: Problem, library: ChemicalData, tell: OnProgress): Answers["advice"] {
+  const advice = adviceFor(problem, library, tell);
   if (!advice.ok) return advice;
   return ok({ ...advice.value, openings: advice.value.openings.map((o) => tidied(o, library)) });
 }
@@ -20,14 +34,14 @@ function adviceOf(problem: Problem, library: ChemicalData): Answers["advice"] {
 type Asked = Exclude<Question, { kind: "tables" }>;
 
 function valueFor(question: Asked, library: ChemicalData): Answers[keyof Answers] {
-  const tell = (share: number) => self.postMessage({ id: question.id, share } satisfies Telling);
+  const tell = teller(question.id);
   switch (question.kind) {
     case "advice":
-      return adviceOf(question.problem, library);
+      return adviceOf(question.problem, library, tell);
     case "robust":
-      return robustWindow(question.problem, question.ranges, library);
+      return robustWindow(question.problem, question.ranges, library, tell);
     case "sweep":
-      return sweep(question.inputs, question.wish, library, tell);
+      return sweep(question.inputs, question.wish, library, (share) => tell(share, 1));
   }
 }
 

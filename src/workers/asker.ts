@@ -1,6 +1,13 @@
 import type { ChemicalTables } from "../../shared/schemas/chemistry";
 import type { Answer, Answers, Question, Telling } from "./messages";
 
+/** Steps of a search: done, and in all (at most, where it may end early). */
+export interface Steps {
+  readonly done: number;
+  readonly total: number;
+}
+export type Tell = (share: number, steps: Steps) => void;
+
 type Asked<Kind extends keyof Answers> = Omit<Extract<Question, { kind: Kind }>, "id">;
 
 const start = (): Worker => new Worker(new URL("./advice.worker.ts", import.meta.url), { type: "module" });
@@ -18,13 +25,9 @@ export class Asker {
     this.make = make;
   }
 
-  /** @param tell  told the share that is done, where the worker says so
+  /** @param tell  told the share that is done, 0 to 1, and the steps it is made of, where the worker says so
    *  @returns  the answer; rejects with what went wrong in the worker, or with the signal's reason */
-  ask<Kind extends keyof Answers>(
-    question: Asked<Kind>,
-    signal: AbortSignal,
-    tell?: (share: number) => void,
-  ): Promise<Answers[Kind]> {
+  ask<Kind extends keyof Answers>(question: Asked<Kind>, signal: AbortSignal, tell?: Tell): Promise<Answers[Kind]> {
     const id = ++this.serial;
     const worker = this.ready();
     return new Promise((resolve, reject) => {
@@ -35,7 +38,7 @@ export class Asker {
       };
       const onMessage = ({ data }: MessageEvent<Answer | Telling>) => {
         if (data.id !== id) return;
-        if ("share" in data) return tell?.(data.share);
+        if ("total" in data) return tell?.(data.done / data.total, { done: data.done, total: data.total });
         done();
         if ("failed" in data) reject(new Error(data.failed));
         else resolve(data.value as Answers[Kind]);

@@ -19,6 +19,6 @@ export interface Answers {
   sweep: Outcome<Sweep>;
 }
 
-/** While it works, the worker may say which share is done, 0 to 1. */
-export type Telling = { id: number; share: number };
+/** While it works, the worker may say how far it is: steps done of steps in all. */
+export type Telling = { id: number; done: number; total: number };
 export type Answer = { id: number; value: Answers[keyof Answers] } | { id: number; failed: string };

@@ -67,6 +67,7 @@ describe("the keys documented are those of the code", () => {
       ...Object.keys(shape),
       ...Object.keys(shape.metals.element.shape),
       ...Object.keys(shape.water.unwrap().shape).filter((k) => k === "bound"),
+      ...Object.keys(shape.excludedHazards.unwrap().element.shape),
     ];
     expect([...named(problemPart)].sort()).toEqual([...new Set(keys)].sort());
     for (const key of ["oxygenV", "hydrogenV", "component"]) expect(page).toContain(key);

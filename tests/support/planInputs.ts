@@ -38,4 +38,5 @@ export const unusualInputs: PlanInputs = {
   controlBand: { pH: 0.25, Eh: 0.045 },
   freeAcidBand: { gPerL: 2.5, atPH: 0.85 },
   overall: { "CuO(s)": { products: { Cu: "Cu^2+(aq)" }, redox: "open" } },
+  excludedHazards: [{ gas: "NH3", bar: 0.0125 }],
 };

@@ -3,7 +3,7 @@ import { useNavigate } from "react-router-dom";
 import { freeAcidOf } from "../../../shared/plan/freeAcidOf";
 import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
-import type { Point } from "../../../shared/solution";
+import type { Outline, Point } from "../../../shared/solution";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { DataChanged } from "../../components/DataChanged";
 import { FormulaText } from "../../components/FormulaText";
@@ -42,6 +42,8 @@ export interface WorkspaceProps {
   data: ChemicalData;
 }
 
+const NONE: readonly Outline[] = [];
+
 /** A plan on the table: left asks, middle shows, right answers. */
 export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const navigate = useNavigate();
@@ -69,7 +71,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const chosen = held?.index ?? Math.min(wantedWindow, Math.max(0, count - 1));
   const { gases, choose: chooseGas } = useGases(analysis, solution?.windows[chosen] ?? null);
   const drawnGases = useMemo(() => gases?.map.regions.filter((r) => gases.shown.has(r.gas)) ?? [], [gases]);
-  const robustOutlines = useMemo(() => (robust.state === "there" ? robust.value.windows : []), [robust]);
+  // the same empty list at every step of a search, so that the map stands still meanwhile
+  const robustOutlines = robust.state === "there" ? robust.value.windows : NONE;
 
   function chooseWindow(index: number) {
     setWindow(index);

@@ -1,4 +1,4 @@
-import { HCN_PH } from "../../../shared/hazards/rules";
+import { HCN_PH } from "../../../shared/hazards/words";
 import { type Reach, standsAt } from "../../../shared/reach/reach";
 import type { Limit, Point, Solution } from "../../../shared/solution";
 import { lineCoordinates, ringCoordinates } from "../geometry/rings";

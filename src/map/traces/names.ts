@@ -1,11 +1,12 @@
 import type { Field, Limit, Point, Solution } from "../../../shared/solution";
-import { HCN_PH } from "../../../shared/hazards/rules";
+import { HCN_PH } from "../../../shared/hazards/words";
 import { speciesParts } from "../../../shared/species/parts";
 import { mapPixels, type Sheet } from "../boxes";
 import { isLit } from "../../../shared/drawing/lit";
 import { type Box, type LabelWish, type Pixel, placeLabels, type Segment } from "../../../shared/drawing/labels";
 import type { MapContent } from "../content";
 import { gasNames } from "./gases";
+import { keptNames } from "./kept";
 import { practiceNames } from "./practice";
 import { metalColour } from "../metalStyle";
 import type { PlotTrace } from "../plotTypes";
@@ -105,6 +106,7 @@ export function nameTraces(content: MapContent, sheet: Sheet, view: MapView): Pl
   const fixed = [
     ...otherBasisName(content, view),
     ...hydrogenCyanideName(content, view),
+    ...keptNames(content.kept, view),
     ...(view.layers.hazard ? gasNames(content.gases, view) : []),
     ...(view.layers.practice ? practiceNames(content.practice, view) : []),
   ];

@@ -65,13 +65,18 @@ test("what went wrong inside comes out in words", async () => {
 
 test("the share that is done is told on the way, of its own question only", async () => {
   const { made, asker } = stage();
-  const told: number[] = [];
-  const asked = asker.ask<"advice">({ kind: "advice", problem }, new AbortController().signal, (x) => told.push(x));
+  const told: unknown[] = [];
+  const asked = asker.ask<"advice">({ kind: "advice", problem }, new AbortController().signal, (x, steps) =>
+    told.push([x, steps]),
+  );
   const id = idOf(made[0]?.told[1]);
-  made[0]?.answer({ id, share: 0.25 });
-  made[0]?.answer({ id: id + 1, share: 0.9 });
-  made[0]?.answer({ id, share: 0.5 });
+  made[0]?.answer({ id, done: 1, total: 4 });
+  made[0]?.answer({ id: id + 1, done: 9, total: 10 });
+  made[0]?.answer({ id, done: 2, total: 4 });
   made[0]?.answer({ id, value: "done" });
   await expect(asked).resolves.toBe("done");
-  expect(told).toEqual([0.25, 0.5]);
+  expect(told).toEqual([
+    [0.25, { done: 1, total: 4 }],
+    [0.5, { done: 2, total: 4 }],
+  ]);
 });

@@ -1,5 +1,5 @@
 import "../setup";
-import { fireEvent, render, screen } from "@testing-library/react";
+import { act, fireEvent, render, screen } from "@testing-library/react";
 import { MemoryRouter } from "react-router-dom";
 import { expect, test, vi } from "vitest";
 import type { Advice, Opening } from "../../../shared/advice/openings";
@@ -10,7 +10,7 @@ const iron: Opening = { change: "activity", of: "Fe", from: 1e-9, to: 2e-8, sear
 const heat: Opening = { change: "temperature", from: 60, to: null, searched: "0 to 250 C" };
 const advice: Advice = {
   conflicts: [],
-  gaps: [{ metals: ["Zn", "Fe"], gap: { pH: 0.46, Eh: null } }],
+  gaps: [{ members: ["Zn", "Fe"], gap: { pH: 0.46, Eh: null } }],
   openings: [heat, iron],
 };
 const props = {
@@ -54,14 +54,39 @@ test("says which requirements clash, by how much, and offers what helps first", 
   expect(onApply).toHaveBeenCalledWith(iron);
 });
 
-test("says that it looks, and that it failed", () => {
-  const { rerender } = renderLinked(<NoWindowBlock {...props} advice={{ state: "waiting" }} />);
-  expect(screen.getByRole("status").textContent).toContain("Looking for the smallest change");
-  rerender(
-    <MemoryRouter>
-      <NoWindowBlock {...props} advice={{ state: "failed", message: "no worker" }} />
-    </MemoryRouter>,
+test("names a hazard kept out among what clashes, tells where its limit would have to stand, and offers no button for it", () => {
+  const hazard: Opening = { change: "hazardPH", of: "HCN", from: 10.5, to: 9.8123, searched: "down to pH 7" };
+  const conflicts = [[{ metal: "Zn", requirement: "dissolved" as const }, { gas: "HCN" as const, pHAtLeast: 10.5 }]]; // prettier-ignore
+  const value = { ...advice, gaps: [{ members: ["Zn", "HCN"], gap: { pH: 0.7, Eh: null } }], openings: [hazard] };
+  renderLinked(
+    <NoWindowBlock {...props} solution={{ conflicts }} advice={{ state: "there", value }} onApply={vi.fn()} />,
   );
+  const text = screen.getByRole("region", { name: "No window" }).textContent;
+  expect(text).toContain("zinc dissolved and pH at or above 10.5 against HCN cannot hold together.");
+  expect(text).toContain("0.70");
+  expect(text).toContain("from pH 10.50 to pH 9.81. Told so that you know what stands in the way");
+  expect(text).toContain("No single number opens a window");
+  expect(screen.queryByRole("button", { name: /Set/ })).toBeNull();
+});
+
+test("says that it looks, after a second how far it is, can be stopped, and that it failed", () => {
+  vi.useFakeTimers();
+  const stop = vi.fn();
+  const again = vi.fn();
+  const progress = { share: 0.25, steps: { done: 30, total: 120 } };
+  const { rerender } = renderLinked(<NoWindowBlock {...props} advice={{ state: "waiting", ...progress, stop }} />);
+  expect(screen.getByRole("status").textContent).toContain("Looking for the smallest change");
+  expect(screen.queryByRole("progressbar")).toBeNull();
+  act(() => vi.advanceTimersByTime(1100));
+  vi.useRealTimers();
+  expect(screen.getByRole("progressbar").getAttribute("aria-valuenow")).toBe("25");
+  expect(screen.getByText("step 30 of 120 at most")).toBeTruthy();
+  fireEvent.click(screen.getByRole("button", { name: /^Stop/ }));
+  expect(stop).toHaveBeenCalled();
+  rerender(<NoWindowBlock {...props} advice={{ state: "stopped", again }} />);
+  fireEvent.click(screen.getByRole("button", { name: "start again" }));
+  expect(again).toHaveBeenCalled();
+  rerender(<NoWindowBlock {...props} advice={{ state: "failed", message: "no worker" }} />);
   expect(screen.getByRole("alert").textContent).toContain("no worker");
 });
 

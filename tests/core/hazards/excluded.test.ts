@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { beyondWords, keptWords } from "../../../shared/hazards/excluded";
 import { hazardGases } from "../../../shared/hazards/gases";
 import { usualThreshold } from "../../../shared/hazards/thresholds";
+import { beyondWords, keptWords } from "../../../shared/hazards/words";
 import { requirements, type ExcludedHazard, type Problem } from "../../../shared/schemas/problem";
 import { solve } from "../../../shared/solve";
 import type { Demand } from "../../../shared/solution";

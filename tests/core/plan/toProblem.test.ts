@@ -30,6 +30,7 @@ describe("the question behind a plan", () => {
       frame: { pH: [7.5, 12.5], Eh: [-0.75, 0.65] },
       water: { bound: "upper", oxygenV: 0.3, hydrogenV: 0.7 },
       controlBand: { pH: 0.25, Eh: 0.045 },
+      excludedHazards: [{ gas: "NH3", bar: 0.0125 }],
     });
   });
 

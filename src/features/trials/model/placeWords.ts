@@ -12,7 +12,9 @@ export function limitName(limit: Limit, { metals }: Pick<PlanInputs, "metals">):
     case "frame":
       return "the edge of the frame";
     case "hazard":
-      return "the edge of a hazard";
+      return limit.gas === undefined
+        ? "the edge of a hazard"
+        : `where ${limit.pHAtLeast === undefined ? `${limit.gas} reaches its limit` : `pH falls below ${limit.pHAtLeast} (${limit.gas})`}`;
     case "metal": {
       const metal = metals.find(({ element }) => element === limit.metal);
       return metal ? `where ${metal.element} is no longer ${requirementWord[metal.requirement]}` : "a limit";

@@ -1,19 +1,20 @@
 import { Fragment } from "react";
 import type { Advice, ConflictGap, Opening } from "../../../../shared/advice/openings";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
-import type { Requirement } from "../../../../shared/schemas/problem";
-import type { Solution } from "../../../../shared/solution";
+import { keptWords, pressureWords } from "../../../../shared/hazards/words";
+import { type Demand, demandName, type Solution } from "../../../../shared/solution";
 import { Button } from "../../../components/Button";
 import { Formula } from "../../../components/Formula";
-import { Progress } from "../../../components/status";
 import { MethodLink } from "../../../components/SourceLink";
+import { FormulaText } from "../../../components/FormulaText";
 import { Note, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
 import { requirementWord } from "../../../lib/planWords";
 import type { PotentialScale } from "../../../lib/potential";
 import type { Awaited } from "../model/useAsked";
+import { Stopped, Working } from "./Working";
 
-type Conflict = readonly { metal: string; requirement: Requirement }[];
+type Conflict = readonly Demand[];
 
 export interface NoWindowProps {
   solution: Pick<Solution, "conflicts">;
@@ -36,8 +37,8 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
       ) : (
         <ul>
           {solution.conflicts.map((set) => {
-            const key = set.map((c) => c.metal).join();
-            const gap = gaps.find((g) => g.metals.join() === key);
+            const key = set.map(demandName).join();
+            const gap = gaps.find((g) => g.members.join() === key);
             return (
               <li key={key} className="hairline py-1">
                 <ConflictWords set={set} metalName={metalName} />
@@ -58,11 +59,13 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
           What would open one
         </SectionHead>
         {advice.state === "waiting" && (
-          <div role="status" className="py-2 text-sm text-muted">
-            Looking for the smallest change of each number that opens a window …
-            <Progress />
-          </div>
+          <Working
+            awaited={advice}
+            doing="Looking for the smallest change of each number that opens a window"
+            words={({ done, total }) => `step ${done} of ${total} at most`}
+          />
         )}
+        {advice.state === "stopped" && <Stopped again={advice.again}>The search was stopped.</Stopped>}
         {advice.state === "failed" && (
           <p role="alert" className="py-1 text-sm">
             The search failed: {advice.message}. Move a number and watch the map.
@@ -81,15 +84,16 @@ function ConflictWords({ set, metalName }: { set: Conflict; metalName: (element:
   if (set.length === 1 && only)
     return (
       <>
-        Nowhere on this map is <b>{metalName(only.metal)}</b> {requirementWord[only.requirement]}.
+        Nowhere on this map is{" "}
+        {only.gas === undefined ? <DemandWords demand={only} metalName={metalName} /> : <KeptWords demand={only} />}.
       </>
     );
   return (
     <>
       {set.map((c, i) => (
-        <Fragment key={c.metal}>
+        <Fragment key={demandName(c)}>
           {i > 0 && (i === set.length - 1 ? " and " : ", ")}
-          <b>{metalName(c.metal)}</b> {requirementWord[c.requirement]}
+          <DemandWords demand={c} metalName={metalName} />
         </Fragment>
       ))}{" "}
       cannot hold together.
@@ -97,11 +101,27 @@ function ConflictWords({ set, metalName }: { set: Conflict; metalName: (element:
   );
 }
 
+/** "zinc dissolved", or for a hazard "HCN below 50 ppm over the liquor". */
+function DemandWords({ demand, metalName }: { demand: Demand; metalName: (element: string) => string }) {
+  if (demand.gas !== undefined) return <KeptWords demand={demand} />;
+  return (
+    <>
+      <b>{metalName(demand.metal)}</b> {requirementWord[demand.requirement]}
+    </>
+  );
+}
+
+const KeptWords = ({ demand }: { demand: Extract<Demand, { metal?: undefined }> }) => (
+  <b>
+    <FormulaText text={keptWords(demand)} />
+  </b>
+);
+
 /** "Their grounds stand 0.62 pH apart at one Eh, and 0.21 V apart at one pH." */
-function GapWords({ gap: { gap, metals }, scale }: { gap: ConflictGap; scale: PotentialScale }) {
+function GapWords({ gap: { gap, members }, scale }: { gap: ConflictGap; scale: PotentialScale }) {
   if (gap === null)
-    return metals.length > 2 ? (
-      <Note>Any two of them can; it is the {metals.length} together that leave no ground.</Note>
+    return members.length > 2 ? (
+      <Note>Any two of them can; it is the {members.length} together that leave no ground.</Note>
     ) : null;
   const pH = gap.pH === null ? null : `${withUnit(fixed(gap.pH, 2), "pH")} apart at one Eh`;
   const volts = withUnit(fixed(scale.differenceToShown(gap.Eh ?? 0), scale.digits), scale.unit);
@@ -118,7 +138,10 @@ function GapWords({ gap: { gap, metals }, scale }: { gap: ConflictGap; scale: Po
   );
 }
 
-const order = (o: Opening): number => (o.to === null ? 1 : 0);
+const isHazard = ({ change }: Opening): boolean => change === "hazardPressure" || change === "hazardPH";
+
+/** What helps comes first, and a hazard's own limit after it. */
+const order = (o: Opening): number => (o.to === null ? 2 : isHazard(o) ? 1 : 0);
 
 function Openings({
   openings,
@@ -131,7 +154,7 @@ function Openings({
   metalName: (element: string) => string;
   onApply: ((opening: Opening) => void) | undefined;
 }) {
-  const helpful = openings.some((o) => o.to !== null);
+  const helpful = openings.some((o) => o.to !== null && !isHazard(o));
   return (
     <>
       {!helpful && (
@@ -148,7 +171,7 @@ function Openings({
                 <span className="min-w-0">
                   <Subject opening={opening} metalName={metalName} />
                 </span>
-                {opening.to !== null && onApply && (
+                {opening.to !== null && onApply && !isHazard(opening) && (
                   <Button className="h-6! px-2!" onClick={() => onApply(opening)}>
                     {actionWords(opening, inputs)}
                   </Button>
@@ -161,7 +184,13 @@ function Openings({
                   <>
                     from <Amount opening={opening} of={opening.from} inputs={inputs} /> to{" "}
                     <Amount opening={opening} of={opening.to} inputs={inputs} />
-                    {typeof opening.to === "number" && <FactorWords opening={opening} />}
+                    {typeof opening.to === "number" && !isHazard(opening) && <FactorWords opening={opening} />}
+                    {isHazard(opening) && (
+                      <>
+                        . Told so that you know what stands in the way: this limit protects people and is changed by
+                        hand, under your site’s procedure, or not at all
+                      </>
+                    )}
                   </>
                 )}
               </div>
@@ -192,6 +221,13 @@ function Subject({ opening, metalName }: { opening: Opening; metalName: (element
       return <b>Temperature</b>;
     case "solidsBasis":
       return <b>Solids basis</b>;
+    case "hazardPressure":
+    case "hazardPH":
+      return (
+        <b>
+          Limit against <Formula formula={opening.of ?? ""} />
+        </b>
+      );
   }
 }
 
@@ -207,6 +243,10 @@ function Amount({
   of: number | string;
   inputs: Pick<PlanInputs, "metals">;
 }) {
+  if (opening.change === "hazardPressure" && typeof of === "number")
+    return <span className="font-mono whitespace-nowrap">{pressureWords(of)}</span>;
+  if (opening.change === "hazardPH" && typeof of === "number")
+    return <span className="font-mono whitespace-nowrap">pH {fixed(of, 2)}</span>;
   if (typeof of === "string") return <b className="font-normal text-ink">{of}</b>;
   const text = opening.change === "temperature" ? celsius(of, 1) : significant(of, 3);
   const unit = unitOf(opening, inputs);

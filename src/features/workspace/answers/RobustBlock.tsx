@@ -1,10 +1,10 @@
 import type { Robust } from "../../../../shared/advice/robust";
-import { Progress } from "../../../components/status";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import type { Awaited } from "../model/useAsked";
+import { Stopped, Working } from "./Working";
 
 /** The window that holds over all the ranges, its set point, and what was checked for it. */
 export function RobustBlock({
@@ -29,11 +29,13 @@ export function RobustBlock({
         Over the ranges
       </SectionHead>
       {robust.state === "waiting" && (
-        <div role="status" className="py-2 text-sm text-muted">
-          Solving over the ranges …
-          <Progress />
-        </div>
+        <Working
+          awaited={robust}
+          doing="Solving over the ranges"
+          words={({ done, total }) => `${done} temperatures solved, at most ${total}`}
+        />
       )}
+      {robust.state === "stopped" && <Stopped again={robust.again}>The ranges were not solved to the end.</Stopped>}
       {robust.state === "failed" && (
         <p role="alert" className="py-1 text-sm text-signal">
           Not solved: {robust.message}.

@@ -1,4 +1,4 @@
-import type { ReactNode } from "react";
+import { lazy, type ReactNode, Suspense } from "react";
 import type { LayerName, Layers } from "../../../map/view";
 import { HoldOverSection } from "./HoldOverSection";
 import { LayersSection } from "./LayersSection";
@@ -6,6 +6,8 @@ import { LixiviantSection } from "./LixiviantSection";
 import { MetalsSection } from "./MetalsSection";
 import { BandsSection, FrameSection, TemperatureSection, WaterSection } from "./SheetSections";
 import { SolidsSection } from "./SolidsSection";
+
+const KeptOutSection = lazy(async () => ({ default: (await import("./KeptOutSection")).KeptOutSection }));
 
 /** The left side: everything the plan asks, and what the map shows of it. */
 export function AsksPanel(props: {
@@ -24,6 +26,9 @@ export function AsksPanel(props: {
       <SolidsSection />
       <FrameSection />
       <WaterSection />
+      <Suspense fallback={null}>
+        <KeptOutSection />
+      </Suspense>
       <BandsSection />
       <HoldOverSection />
       <div className="no-print">

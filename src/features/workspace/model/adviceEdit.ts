@@ -19,6 +19,10 @@ export const applyOpening =
           : p;
       case "temperature":
         return typeof to === "number" ? { ...p, temperatureC: to } : p;
+      // a limit set for people's safety is changed by hand, never taken from a search
+      case "hazardPressure":
+      case "hazardPH":
+        return p;
       case "solidsBasis": {
         const basis = solidsBases.find((b) => b === to);
         return basis ? { ...p, solidsBasis: basis } : p;

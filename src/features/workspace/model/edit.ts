@@ -1,6 +1,8 @@
 import type { FreeAcidBand, PlanInputs, PlanMetal, PlanTotal, PresetName } from "../../../../shared/schemas/plan";
+import type { HazardGas } from "../../../../shared/hazards/gases";
+import type { ExcludedHazard } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { presetLigands } from "../../../lib/newPlan";
+import { cyanideRule, presetLigands } from "../../../lib/newPlan";
 
 /** A change of a plan's inputs, as a function of them. */
 export type Edit = (inputs: PlanInputs) => PlanInputs;
@@ -48,7 +50,14 @@ export const setPreset =
     preset,
     ligands: presetLigands(data, preset),
     sulfateReduction: preset === "sulfate_sulfide",
+    ...withCyanideRule(p, preset === "cyanide"),
   });
+
+/** Cyanide comes in with its pH rule, unless the plan already says how HCN is kept out. */
+const withCyanideRule = ({ excludedHazards = [] }: PlanInputs, cyanide: boolean): Partial<PlanInputs> =>
+  cyanide && !excludedHazards.some((h) => h.gas === "HCN")
+    ? { excludedHazards: [...excludedHazards, cyanideRule] }
+    : {};
 
 type List = "ligands" | "others";
 export const setTotal =
@@ -77,11 +86,33 @@ export const setAcidBand =
 
 export const addTotal =
   (list: List, total: PlanTotal): Edit =>
-  (p) => ({ ...p, [list]: [...p[list], total] });
+  (p) => ({ ...p, [list]: [...p[list], total], ...withCyanideRule(p, total.component === "CN") });
 
 export const removeTotal =
   (list: List, component: string): Edit =>
   (p) => ({ ...p, [list]: p[list].filter((c) => c.component !== component) });
+
+/** Keeps a gas out of windows, or says anew how; its place in the list stays. */
+export const keepOut =
+  (hazard: ExcludedHazard): Edit =>
+  (p) => {
+    const { excludedHazards: list = [] } = p;
+    return {
+      ...p,
+      excludedHazards: list.some((h) => h.gas === hazard.gas)
+        ? list.map((h) => (h.gas === hazard.gas ? hazard : h))
+        : [...list, hazard],
+    };
+  };
+
+/** No longer kept out; a plan that keeps nothing out carries no list. */
+export const letIn =
+  (gas: HazardGas): Edit =>
+  (p) => {
+    const { excludedHazards: list = [], ...rest } = p;
+    const left = list.filter((h) => h.gas !== gas);
+    return left.length > 0 ? { ...rest, excludedHazards: left } : rest;
+  };
 
 export const leaveOut =
   (species: string, reason: string): Edit =>

@@ -3,7 +3,7 @@ import { electrodeSeries } from "../../../../shared/electrodes/series";
 import type { Outline, Point, Solution, Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { windowName } from "../../../map/view";
-import { sideOf } from "../../../../shared/windows/limitWords";
+import { hazardWords, sideOf } from "../../../../shared/windows/limitWords";
 
 /** A name for files: letters, digits and hyphens. */
 export const fileStem = (name: string): string =>
@@ -33,6 +33,7 @@ const header = [
   "distance_bands",
   "distance_pH",
   "distance_Eh_V",
+  "kept_out",
 ] as const;
 /** Of a sulfate liquor: blank where pH is 1.5 or more, and where the sulfate would not balance so much acid. */
 const acidHeader = ["set_point_free_acid_g_per_L", "from_free_acid_g_per_L", "to_free_acid_g_per_L"] as const;
@@ -62,6 +63,7 @@ export function limitsTable(windows: readonly Window[], freeAcid: FreeAcidCurve 
         l.distance,
         l.distancePH,
         l.distanceEh,
+        l.kind === "hazard" ? hazardWords(l) : null,
         ...(freeAcid === null ? [] : [acidAt(window.setPoint.pH), acidAt(l.from[0]), acidAt(l.to[0])]),
       ]),
     ),

@@ -1,17 +1,19 @@
-import { useEffect, useMemo, useState } from "react";
+import { useCallback, useEffect, useMemo, useState } from "react";
 import type { Advice } from "../../../../shared/advice/openings";
 import type { Ranges, Robust } from "../../../../shared/advice/robust";
 import type { Outcome } from "../../../../shared/outcome";
 import type { HoldRanges } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { Asker } from "../../../workers/asker";
+import { Asker, type Steps, type Tell } from "../../../workers/asker";
 
-/** An answer from the worker: not asked for, on its way, there, or failed. */
+/** An answer from the worker: not asked for, on its way (how far, and the way to stop it), stopped by hand (and the way to ask again), there,
+ *  or failed. */
 export type Awaited<Value> =
   | { state: "none" }
-  /** `share`: what is done of it, 0 to 1, where the worker says so */
-  | { state: "waiting"; share?: number }
+  /** `share`: what is done of it, 0 to 1, and the steps it is made of, where the worker says so */
+  | { state: "waiting"; share?: number; steps?: Steps; stop?: () => void }
+  | { state: "stopped"; again: () => void }
   | { state: "there"; value: Value }
   | { state: "failed"; message: string };
 
@@ -22,16 +24,17 @@ const PAUSE = 350;
 export function useAsked<Value>(
   data: ChemicalData,
   key: string | null,
-  ask: (asker: Asker, key: string, signal: AbortSignal, tell: (share: number) => void) => Promise<Outcome<Value>>,
+  ask: (asker: Asker, key: string, signal: AbortSignal, tell: Tell) => Promise<Outcome<Value>>,
 ): Awaited<Value> {
   const asker = useMemo(() => new Asker(data.tables), [data]);
   const [answer, setAnswer] = useState<{ key: string; of: Asker; result: Awaited<Value> } | null>(null);
+  const [stopped, setStopped] = useState<string | null>(null);
   useEffect(() => () => asker.end(), [asker]);
   useEffect(() => {
-    if (key === null) return;
+    if (key === null || key === stopped) return;
     const giveUp = new AbortController();
     const timer = setTimeout(() => {
-      const tell = (share: number) => setAnswer({ key, of: asker, result: { state: "waiting", share } });
+      const tell: Tell = (share, steps) => setAnswer({ key, of: asker, result: { state: "waiting", share, steps } });
       ask(asker, key, giveUp.signal, tell).then(
         (outcome) =>
           setAnswer({
@@ -52,13 +55,20 @@ export function useAsked<Value>(
       clearTimeout(timer);
       giveUp.abort();
     };
-  }, [asker, key, ask]);
-  if (key === null) return { state: "none" };
-  return answer !== null && answer.key === key && answer.of === asker ? answer.result : { state: "waiting" };
+  }, [asker, key, ask, stopped]);
+  const stop = useCallback(() => setStopped(key), [key]);
+  const again = useCallback(() => setStopped(null), []);
+  return useMemo(() => {
+    if (key === null) return { state: "none" };
+    const known = answer !== null && answer.key === key && answer.of === asker ? answer.result : null;
+    if (known !== null && known.state !== "waiting") return known;
+    if (stopped === key) return { state: "stopped", again };
+    return { ...(known ?? { state: "waiting" }), stop };
+  }, [key, answer, asker, stopped, again, stop]);
 }
 
-const askAdvice = (asker: Asker, key: string, signal: AbortSignal) =>
-  asker.ask<"advice">({ kind: "advice", problem: JSON.parse(key) as Problem }, signal);
+const askAdvice = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) =>
+  asker.ask<"advice">({ kind: "advice", problem: JSON.parse(key) as Problem }, signal, tell);
 
 /** What would open a window; asked for only while there is none. */
 export function useAdvice(problem: Problem, data: ChemicalData, wanted: boolean): Awaited<Advice> {
@@ -77,9 +87,9 @@ export function rangesOf(ranges: HoldRanges | undefined, elements: readonly stri
   };
 }
 
-const askRobust = (asker: Asker, key: string, signal: AbortSignal) => {
+const askRobust = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) => {
   const { problem, ranges } = JSON.parse(key) as { problem: Problem; ranges: Ranges };
-  return asker.ask<"robust">({ kind: "robust", problem, ranges }, signal);
+  return asker.ask<"robust">({ kind: "robust", problem, ranges }, signal, tell);
 };
 
 /** The window that holds over the plan's ranges; asked for only where it has some. */
