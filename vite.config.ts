@@ -68,6 +68,13 @@ export default defineConfig({
               test: /@radix-ui[\\/](primitive|react-(primitive|context|compose-refs|slot|collection|direction|id|roving-focus|presence|slider|toggle|toggle-group|tabs|use-[a-z-]+))[\\/]/,
               priority: 1,
             },
+            // The solver and what it says: asked for together wherever a plan is solved, on the page and in its worker.
+            {
+              name: "solver",
+              test: /node_modules[\\/]robust-predicates|shared[\\/](analysis|solve|warnings|fields[\\/]|geometry[\\/]|gibbs[\\/]|hazards[\\/](?!gases|words|presetCautions)|planes[\\/]|selection[\\/]|setpoint[\\/]|windows[\\/]|reach[\\/](reagents|oxidants|reductants|liquors|verdict|equilibrium)|plan[\\/]toProblem|activity[\\/](davies|debyeHuckel)|species[\\/](library|checkSpecies|reaction|tables)\.|reactions[\\/](balance|wholeNumbers|desk|redoxReagents|elements|names|readReaction))/,
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
             { name: "queries", test: /node_modules[\\/]@tanstack[\\/](query-core|react-query)[\\/]/, priority: 1 },
           ],
         },

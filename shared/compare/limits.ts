@@ -18,7 +18,9 @@ export interface LimitMove {
 
 type Axis = 0 | 1;
 const keyOf = (limit: Limit): string =>
-  [limit.kind, limit.metal ?? "", sideOf(limit), limit.kind === "metal" ? "" : (limit.side ?? "")].join("\n");
+  [limit.kind, limit.metal ?? limit.gas ?? "", sideOf(limit), limit.kind === "metal" ? "" : (limit.side ?? "")].join(
+    "\n",
+  );
 
 function grouped(limits: readonly Limit[]): Map<string, Limit[]> {
   const out = new Map<string, Limit[]>();

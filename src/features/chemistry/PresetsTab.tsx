@@ -7,7 +7,7 @@ import { SpeciesName } from "../../components/Formula";
 import { FormulaText } from "../../components/FormulaText";
 import { Quantity } from "../../components/Quantity";
 import { Note, Row, SectionHead } from "../../components/text";
-import { presetLigands } from "../../lib/newPlan";
+import { presetLigands } from "../../lib/presetLigands";
 import { lixiviantName } from "../../lib/planWords";
 
 /** What each lixiviant brings into a plan: ligand totals to start from, species it leaves out, and its caution. */

@@ -1,13 +1,12 @@
-import { lazy, type ReactNode, Suspense } from "react";
+import type { ReactNode } from "react";
 import type { LayerName, Layers } from "../../../map/view";
 import { HoldOverSection } from "./HoldOverSection";
+import { KeptOutSection } from "./KeptOutSection";
 import { LayersSection } from "./LayersSection";
 import { LixiviantSection } from "./LixiviantSection";
 import { MetalsSection } from "./MetalsSection";
 import { BandsSection, FrameSection, TemperatureSection, WaterSection } from "./SheetSections";
 import { SolidsSection } from "./SolidsSection";
-
-const KeptOutSection = lazy(async () => ({ default: (await import("./KeptOutSection")).KeptOutSection }));
 
 /** The left side: everything the plan asks, and what the map shows of it. */
 export function AsksPanel(props: {
@@ -26,9 +25,7 @@ export function AsksPanel(props: {
       <SolidsSection />
       <FrameSection />
       <WaterSection />
-      <Suspense fallback={null}>
-        <KeptOutSection />
-      </Suspense>
+      <KeptOutSection />
       <BandsSection />
       <HoldOverSection />
       <div className="no-print">

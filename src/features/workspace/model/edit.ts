@@ -2,7 +2,7 @@ import type { FreeAcidBand, PlanInputs, PlanMetal, PlanTotal, PresetName } from 
 import type { HazardGas } from "../../../../shared/hazards/gases";
 import type { ExcludedHazard } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { cyanideRule, presetLigands } from "../../../lib/newPlan";
+import { cyanideRule, presetLigands } from "../../../lib/presetLigands";
 
 /** A change of a plan's inputs, as a function of them. */
 export type Edit = (inputs: PlanInputs) => PlanInputs;
