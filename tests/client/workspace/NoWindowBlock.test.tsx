@@ -4,6 +4,7 @@ import { MemoryRouter } from "react-router-dom";
 import { expect, test, vi } from "vitest";
 import type { Advice, Opening } from "../../../shared/advice/openings";
 import { NoWindowBlock } from "../../../src/features/workspace/answers/NoWindowBlock";
+import type { Awaited } from "../../../src/features/workspace/model/useAsked";
 import { potentialScale } from "../../../src/lib/potential";
 
 const iron: Opening = { change: "activity", of: "Fe", from: 1e-9, to: 2e-8, searched: "8 decades" };
@@ -77,16 +78,21 @@ test("says that it looks, after a second how far it is, can be stopped, and that
   const { rerender } = renderLinked(<NoWindowBlock {...props} advice={{ state: "waiting", ...progress, stop }} />);
   expect(screen.getByRole("status").textContent).toContain("Looking for the smallest change");
   expect(screen.queryByRole("progressbar")).toBeNull();
-  act(() => vi.advanceTimersByTime(1100));
+  act(() => void vi.advanceTimersByTime(1100));
   vi.useRealTimers();
   expect(screen.getByRole("progressbar").getAttribute("aria-valuenow")).toBe("25");
   expect(screen.getByText("step 30 of 120 at most")).toBeTruthy();
   fireEvent.click(screen.getByRole("button", { name: /^Stop/ }));
   expect(stop).toHaveBeenCalled();
-  rerender(<NoWindowBlock {...props} advice={{ state: "stopped", again }} />);
+  const shown = (advice: Awaited<Advice>) => (
+    <MemoryRouter>
+      <NoWindowBlock {...props} advice={advice} />
+    </MemoryRouter>
+  );
+  rerender(shown({ state: "stopped", again }));
   fireEvent.click(screen.getByRole("button", { name: "start again" }));
   expect(again).toHaveBeenCalled();
-  rerender(<NoWindowBlock {...props} advice={{ state: "failed", message: "no worker" }} />);
+  rerender(shown({ state: "failed", message: "no worker" }));
   expect(screen.getByRole("alert").textContent).toContain("no worker");
 });
 
