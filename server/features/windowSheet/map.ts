@@ -2,7 +2,7 @@ import { boundaryLines } from "../../../shared/drawing/boundaries";
 import { boundaryStyle, hatchesOf, hatchWeight, type Hatch } from "../../../shared/drawing/hatches";
 import { clipToBox, type Box, type Pixel } from "../../../shared/drawing/labels";
 import { lightPalette } from "../../../shared/drawing/palette";
-import { HCN_PH } from "../../../shared/hazards/rules";
+import { HCN_PH, pressureWords } from "../../../shared/hazards/words";
 import type { Point } from "../../../shared/solution";
 import { fixed } from "../../../shared/words/numbers";
 import { drawAxes } from "./axes";
@@ -121,10 +121,22 @@ interface Mark {
 }
 
 /** Where gas leaves the liquor, in the signal colour and nothing else: sparse hatching, an edge, and its name. */
-function drawHazards(plane: Plane, { revision, drawnGases }: SheetWork): Mark[] {
+function drawHazards(plane: Plane, { revision, solution, drawnGases }: SheetWork): Mark[] {
   const { pen, box, frame } = plane;
   const marks: Mark[] = [];
-  if (revision.inputs.ligands.some((l) => l.component === "CN") && frame.pH[0] < HCN_PH) {
+  const { kept = [] } = solution;
+  const sparse: Hatch = { shape: "|", size: 16, solidity: 0.07 };
+  kept.forEach((k, i) => {
+    plane.within(k.polygons, () => drawHatch(pen, sparse, box, lightPalette.signal, 0.55));
+    plane.outlines(k.polygons);
+    plane.stroke(1.6, "signal");
+    const rule = k.bar === undefined ? `pH ${k.pHAtLeast}` : pressureWords(k.bar);
+    const right = Math.max(...k.polygons.flatMap(({ outer }) => outer.map(([pH]) => plane.px(pH))));
+    const x = Math.min(box.x1 - 60, Math.max(box.x0 + 60, right - 60));
+    marks.push({ text: [formula(k.gas), ` kept out, ${rule}`], x, y: box.y0 + 9 + 11 * i, colour: "signal" });
+  });
+  const keepsHCN = kept.some((k) => k.gas === "HCN");
+  if (!keepsHCN && revision.inputs.ligands.some((l) => l.component === "CN") && frame.pH[0] < HCN_PH) {
     const edge = Math.min(HCN_PH, frame.pH[1]);
     const [lo, hi] = frame.Eh;
     const region: Point[] = [
@@ -133,7 +145,6 @@ function drawHazards(plane: Plane, { revision, drawnGases }: SheetWork): Mark[] 
       [edge, hi],
       [frame.pH[0], hi],
     ];
-    const sparse: Hatch = { shape: "|", size: 16, solidity: 0.07 };
     plane.within([{ outer: region, holes: [] }], () => drawHatch(pen, sparse, box, lightPalette.signal, 0.55));
     plane.trace(region.slice(1, 3));
     plane.stroke(1.6, "signal");

@@ -1,5 +1,8 @@
 import { presetCaution } from "../../../shared/hazards/presetCautions";
+import { askedOf } from "../../../shared/hazards/excluded";
+import { keptWords } from "../../../shared/hazards/words";
 import type { PlanMetal } from "../../../shared/schemas/plan";
+import { demandName } from "../../../shared/solution";
 import type { LimitSentence } from "../../../shared/windows/limitWords";
 import { marginWords, windowName } from "../../../shared/windows/limitWords";
 import { componentWord } from "../../../shared/words/componentWord";
@@ -120,7 +123,7 @@ export function limitSays({ side, what, limit, others, axis, distance, bands }: 
     distance === null ? "not straight ahead" : axis === "pH" ? `${fixed(distance, 2)} pH` : millivolts(distance);
   return [
     bold(side),
-    what,
+    limit.kind === "hazard" ? prose(what) : what,
     [joined(reactions.slice(0, 2), "; "), more > 0 ? `; and ${more} more in the plan` : ""],
     way,
     fixed(bands, 1),
@@ -132,10 +135,14 @@ export function conflictSays({ solution, naming, gaps }: SheetWork): Inline[] {
   if (solution.conflicts.length === 0)
     return ["The frame and the water lines leave no ground where all metals are as required."];
   return solution.conflicts.map((set): Inline => {
-    const each = set.map((c): Inline => [bold(naming.metalName(c.metal)), ` ${requirementWord[c.requirement]}`]);
+    const each = set.map((c): Inline =>
+      c.gas === undefined
+        ? [bold(naming.metalName(c.metal)), ` ${requirementWord[c.requirement]}`]
+        : prose(keptWords(c)),
+    );
     const [only] = set;
     if (set.length === 1 && only) return ["Nowhere on this map is ", each, "."];
-    const gap = gaps.find((g) => g.metals.join() === set.map((c) => c.metal).join())?.gap;
+    const gap = gaps.find((g) => g.members.join() === set.map(demandName).join())?.gap;
     const apart = [
       (gap?.pH ?? null) === null ? null : `${fixed(gap?.pH ?? 0, 2)} pH at one Eh`,
       (gap?.Eh ?? null) === null ? null : `${volts(gap?.Eh ?? 0)} at one pH`,
@@ -172,6 +179,8 @@ export function inputsSay({ revision: { inputs }, data }: SheetWork): [string, I
       (water.oxygenV ? `, oxygen +${volts(water.oxygenV)}` : "") +
       (water.hydrogenV ? `, hydrogen ${signedMinus(-water.hydrogenV, 2)} V` : ""),
   ]);
+  if (inputs.excludedHazards?.length)
+    said.push(["Kept out of windows", joined(inputs.excludedHazards.map((h) => prose(keptWords(askedOf(h)))))]);
   said.push(["Control bands", bandSays(inputs)]);
   const { temperatureC: T, activities = {} } = inputs.ranges ?? {};
   const over: Inline[] = [
