@@ -5,6 +5,7 @@ import type { Deps } from "./deps";
 import { authRoutes } from "./features/auth/routes";
 import { campaignRoutes } from "./features/campaigns/routes";
 import { chemistryRoutes } from "./features/chemistry/routes";
+import { commentRoutes } from "./features/comments/routes";
 import { feedRoutes } from "./features/feeds/routes";
 import { healthRoutes } from "./features/health/routes";
 import { mailboxRoutes } from "./features/mailbox/routes";
@@ -34,6 +35,7 @@ const features = [
   projectRoutes,
   planRoutes,
   windowSheetRoutes,
+  commentRoutes,
   feedRoutes,
   campaignRoutes,
   trialRoutes,

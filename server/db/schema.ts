@@ -2,6 +2,7 @@
 export { sessions } from "../features/auth/schema";
 export { campaigns } from "../features/campaigns/schema";
 export { chemistryVersions, libraryRows, speciesRows } from "../features/chemistry/schema";
+export { comments } from "../features/comments/schema";
 export { feeds } from "../features/feeds/schema";
 export { history } from "../features/history/schema";
 export { mails } from "../features/mailbox/schema";

@@ -38,6 +38,8 @@ export const plansQuery = pageQuery.extend({
 export const planDuplicate = z.object({
   name: z.string().trim().min(1).max(120).optional(),
   projectId: z.string().min(1).optional(),
+  /** the latest inputs alone, or every revision with its author, note and moment */
+  revisions: z.enum(["latest", "all"]).default("latest"),
 });
 
 /** The body of a refused write whose version is no longer the row's: what stands there now comes along. */

@@ -150,6 +150,8 @@ export interface PlanRow {
   createdAt: string;
   updatedAt: string;
   revisionCount: number;
+  /** those taken back not counted */
+  commentCount: number;
   latest: RevisionRow;
   /** the library changed since the latest revision in species that it may use; it keeps its own until it is saved again */
   dataOutdated: boolean;

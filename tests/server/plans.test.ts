@@ -48,6 +48,7 @@ test("a plan comes back as it was made: every field, author, moment and data ver
     createdAt: at,
     updatedAt: at,
     revisionCount: 1,
+    commentCount: 0,
     dataOutdated: false,
     changedSpecies: [],
     latest: {
@@ -176,6 +177,47 @@ test("a copy holds the latest inputs and says where they come from", async () =>
   const other = await projectOf(metallurgist);
   const named = await metallurgist.post(path).send({ name: "tank 9", projectId: other.id }).expect(201);
   expect(named.body).toMatchObject({ name: "tank 9", projectId: other.id, version: 1, revisionCount: 1 });
+});
+
+test("a copy in another project may take every revision along, and says where it comes from", async () => {
+  const { as, now } = await testServer();
+  const metallurgist = await as("metallurgist");
+  const made = await planOf(metallurgist);
+  now("2026-06-01T00:00:00.000Z");
+  const inputs = { ...unusualInputs, temperatureC: 12 };
+  await (await as("admin")).post(`/api/plans/${made.id}/revisions`).send({ note: "Colder.", inputs }).expect(201);
+  now("2026-07-01T00:00:00.000Z");
+  const other = (
+    await metallurgist.post("/api/projects").send({ siteName: "South works", name: "Trial mill" }).expect(201)
+  ).body as ProjectRow;
+  const path = `/api/plans/${made.id}/duplicate`;
+  const copied = await metallurgist
+    .post(path)
+    .send({ name: "tank 9", projectId: other.id, revisions: "all" })
+    .expect(201);
+  const copy = copied.body as PlanRow;
+  expect(copy).toMatchObject({ name: "tank 9", projectId: other.id, revisionCount: 2, version: 1 });
+  expect(copy.description).toBe(
+    "Only for the second shift.\n\nCopied from “tank 3”, revision 2, of North works / Second stage.",
+  );
+  const rows = rowsOf<RevisionRow>(await metallurgist.get(`/api/plans/${copy.id}/revisions`).expect(200));
+  const own = rowsOf<RevisionRow>(await metallurgist.get(`/api/plans/${made.id}/revisions`).expect(200));
+  expect(rows).toEqual(own.map((row) => ({ ...row, planId: copy.id })));
+  const { body } = await metallurgist.get(`/api/plans/${copy.id}/history`).expect(200);
+  expect(body).toMatchObject({
+    rows: [{ reason: "Copied from “tank 3”, revision 2, of North works / Second stage." }],
+  });
+
+  const latest = await metallurgist.post(path).send({ name: "tank 10", projectId: other.id }).expect(201);
+  expect((latest.body as PlanRow).latest).toMatchObject({
+    number: 1,
+    inputs,
+    note: "Copied from “tank 3”, revision 2, of North works / Second stage.",
+  });
+  const clash = await metallurgist.post(path).send({ name: "Tank 9", projectId: other.id }).expect(409);
+  expect(clash.body).toMatchObject({ error: { code: "CONFLICT", path: "name" } });
+  expect((clash.body as { error: { message: string } }).error.message).toContain("“Tank 9”");
+  await (await as("technician")).post(path).send({ name: "tank 11" }).expect(403);
 });
 
 test("lists are filtered by project and archive, newest change first", async () => {

@@ -2,7 +2,7 @@ import { index, integer, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { historyActions, type FieldChange } from "../../../shared/schemas/history";
 import { users } from "../members/schema";
 
-export const historyEntities = ["feed", "campaign", "trial", "plan", "member"] as const;
+export const historyEntities = ["feed", "campaign", "trial", "plan", "member", "comment"] as const;
 export type HistoryEntity = (typeof historyEntities)[number];
 
 /** Every write to an editable row: who, when, what stood there, what changed, why. Added to, never changed. */

@@ -23,9 +23,17 @@ const revisionColumns = {
 /** Revisions are numbered without gaps and never deleted: the highest number is also how many there are. */
 const highestNumber = sql`(select max(number) from plan_revisions where plan_id = ${plans.id})`;
 
+const commentCount = sql<number>`(select count(*) from comments c where c.plan_id = ${plans.id} and c.deleted_at is null)`;
+
 const selectPlans = (db: Db) =>
   db
-    .select({ plan: plans, projectName: projects.name, siteName: projects.siteName, latest: revisionColumns })
+    .select({
+      plan: plans,
+      commentCount,
+      projectName: projects.name,
+      siteName: projects.siteName,
+      latest: revisionColumns,
+    })
     .from(plans)
     .innerJoin(projects, eq(projects.id, plans.projectId))
     .innerJoin(planRevisions, and(eq(planRevisions.planId, plans.id), eq(planRevisions.number, highestNumber)))
@@ -34,11 +42,12 @@ type Selected = NonNullable<ReturnType<ReturnType<typeof selectPlans>["get"]>>;
 
 type StoredPlan = Omit<PlanRow, "dataOutdated" | "changedSpecies">;
 
-const stored = ({ plan, latest, projectName, siteName }: Selected): StoredPlan => ({
+const stored = ({ plan, latest, commentCount, projectName, siteName }: Selected): StoredPlan => ({
   ...plan,
   projectName,
   siteName,
   revisionCount: latest.number,
+  commentCount,
   latest,
 });
 

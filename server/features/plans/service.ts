@@ -1,4 +1,4 @@
-import { and, eq } from "drizzle-orm";
+import { and, eq, sql } from "drizzle-orm";
 import type { z } from "zod";
 import type { planDuplicate } from "../../../shared/schemas/api";
 import type {
@@ -10,6 +10,7 @@ import type {
   RevisionRow,
 } from "../../../shared/schemas/plan";
 import type { Db } from "../../db/open";
+import { Refusal } from "../../http/refusal";
 import { recordWrite, requireSeen, type Author } from "../history/service";
 import { projectOf } from "../projects/service";
 import type { OutdatedSpecies } from "./outdated";
@@ -31,19 +32,28 @@ interface NewPlan {
   invented: boolean;
 }
 
-function insertPlan(db: Db, { note, inputs, ...plan }: NewPlan, writing: Writing): PlanRow {
+/** @param history  a plan whose revisions the new one takes over; without it the inputs are revision 1 */
+function insertPlan(db: Db, { note, inputs, ...plan }: NewPlan, writing: Writing, history?: string): PlanRow {
   const id = crypto.randomUUID();
   const at = writing.now.toISOString();
   return db.transaction((tx) => {
     tx.insert(plans)
       .values({ id, ...plan, createdAt: at, updatedAt: at })
       .run();
-    insertRevision(tx, { planId: id, number: 1, note, inputs }, writing);
+    const past = history === undefined ? [] : revisionsFor(tx, history);
+    if (past.length === 0) insertRevision(tx, { planId: id, number: 1, note, inputs }, writing);
+    else
+      tx.insert(planRevisions)
+        .values(past.map((revision) => ({ ...revision, planId: id })))
+        .run();
     const after = keptPlan(storedPlan(tx, id));
     recordWrite(tx, { entity: "plan", id, action: "create", before: null, after, reason: note }, writing);
     return planOf(tx, id, writing.outdated);
   });
 }
+
+const revisionsFor = (db: Db, planId: string) =>
+  db.select().from(planRevisions).where(eq(planRevisions.planId, planId)).orderBy(planRevisions.number).all();
 
 function insertRevision(
   db: Db,
@@ -60,24 +70,45 @@ export function createPlan(db: Db, values: z.output<typeof planCreate>, writing:
   return insertPlan(db, { ...values, note: "", invented }, writing);
 }
 
-/** A new plan whose first revision holds the latest inputs of another. What stems from invented data stays marked. */
+/** Refuses a name that a plan of the project bears already: two of one name cannot be told apart in a list.
+ *  @throws Refusal CONFLICT */
+function requireFreeName(db: Db, projectId: string, name: string): void {
+  const same = and(eq(plans.projectId, projectId), eq(sql`lower(${plans.name})`, name.toLowerCase()));
+  const found = db.select({ archived: plans.archived }).from(plans).where(same).get();
+  if (!found) return;
+  const where = found.archived ? ", in the archive" : "";
+  throw new Refusal(
+    "CONFLICT",
+    "name",
+    `The project has a plan “${name}” already${where}: give the copy another name.`,
+  );
+}
+
+/** A new plan that begins with what another holds: its latest inputs as revision 1, or all its revisions with author, note, moment and
+ *  data version. What stems from invented data stays marked; where the copy comes from stands in its first note and on record.
+ *  @throws Refusal NOT_FOUND; CONFLICT where the name asked for is taken in that project */
 export function duplicatePlan(
   db: Db,
   id: string,
-  { name, projectId }: z.output<typeof planDuplicate>,
+  { name, projectId, revisions }: z.output<typeof planDuplicate>,
   writing: Writing,
 ): PlanRow {
   const source = storedPlan(db, id);
   const project = projectOf(db, projectId ?? source.projectId);
+  if (name !== undefined) requireFreeName(db, project.id, name);
+  const from = `Copied from “${source.name}”, revision ${source.latest.number}`;
+  const where = project.id === source.projectId ? "" : `, of ${source.siteName} / ${source.projectName}`;
+  const note = `${from}${where}.`;
   const values: NewPlan = {
     projectId: project.id,
     name: name ?? `${source.name.slice(0, 113)} (copy)`,
-    description: source.description,
+    // Revisions that are taken over keep their own notes.
+    description: revisions === "all" ? `${source.description}\n\n${note}`.trim().slice(0, 2000) : source.description,
     inputs: source.latest.inputs,
-    note: `Copied from “${source.name}”, revision ${source.latest.number}.`,
+    note,
     invented: source.invented || project.invented,
   };
-  return insertPlan(db, values, writing);
+  return insertPlan(db, values, writing, revisions === "all" ? source.id : undefined);
 }
 
 /** Raises the version, if it still is the one the writer saw, and puts the write on record.
