@@ -35,6 +35,8 @@ export interface ComparedTrial {
   couldCarry?: number | null;
   /** g/L H2SO4 titrated in the final liquor (trials/trialAcid.ts); null where it was not */
   freeAcid?: number | null;
+  /** where it is to stand (trials/plannedPoint.ts), V vs SHE; null where pH or ORP is not planned */
+  plannedAt?: { pH: number; Eh: number; temperatureC: number | null } | null;
 }
 
 /** A trial as a point on the map, and the line of the table beside it. */

@@ -14,6 +14,10 @@ import type { ChemicalData } from "../species/chemicalData";
 const MOST_KELVIN = 5;
 const MOST_FACTOR = 3;
 
+/** Whether two temperatures count as one.
+ *  @param a, b  C     @source  common practice, no source */
+export const sameTemperature = (a: number, b: number): boolean => Math.abs(a - b) <= MOST_KELVIN;
+
 export interface Comparability {
   /** false: drawn open and counted apart */
   readonly comparable: boolean;
@@ -80,7 +84,7 @@ export function comparable(
   const reasons: string[] = [];
   const unknown: string[] = [];
   if (temperatureC === null) unknown.push("temperature not recorded");
-  else if (Math.abs(temperatureC - inputs.temperatureC) > MOST_KELVIN)
+  else if (!sameTemperature(temperatureC, inputs.temperatureC))
     reasons.push(`${say(temperatureC)} °C, the plan ${say(inputs.temperatureC)} °C: more than ${MOST_KELVIN} K apart`);
 
   const { target } = stage;

@@ -100,6 +100,13 @@ export const glossary = {
       "Hatched ground is shut: the metal with that hatch is not as required. Ground that no metal shuts is open, and makes the window.",
     ],
   },
+  nextTrials: {
+    title: "Next trials",
+    text: [
+      "The largest untried gaps of the window: each point stands as far as can be, in control bands, from every comparable trial tried or planned and from the points proposed before it.",
+      "They keep away from the window’s limits, so that a loop can hold them. Rejected trials and trials under other conditions do not count.",
+    ],
+  },
   crosscut: {
     title: "Crosscut",
     text: ["The state of every metal along one line through the set point: along pH at its Eh, or along Eh at its pH."],

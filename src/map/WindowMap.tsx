@@ -10,6 +10,8 @@ import { mapFigure } from "./figure";
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import Plot from "./Plot";
 import { haloStyle } from "./texts";
+import type { ProposalStore } from "./proposalStore";
+import { ProposalsLayer } from "./ProposalsLayer";
 import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
@@ -28,6 +30,8 @@ export interface WindowMapProps {
   handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
   /** trials painted over the map */
   trials?: ShownTrials | null;
+  /** next trials, numbered, movable */
+  proposals?: ProposalStore;
 }
 
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
@@ -35,7 +39,7 @@ const REST = 160;
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
  *  It brings Plotly along: import it late. */
-export default function WindowMap({ asked, view, cursor, onPick, label, handle, trials }: WindowMapProps) {
+export default function WindowMap({ asked, view, cursor, onPick, label, handle, trials, proposals }: WindowMapProps) {
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
@@ -162,6 +166,7 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
           {handle && view.layers.setPoint && (
             <SetPointHandle sheet={sheet} visible={visible} {...handle} onPress={openAt} />
           )}
+          {proposals && <ProposalsLayer store={proposals} sheet={sheet} visible={visible} live={live} />}
         </>
       ) : null}
     </div>

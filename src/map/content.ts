@@ -6,6 +6,7 @@ import type { Limit, Outline, Point, Solution } from "../../shared/solution";
 import type { Crosscut } from "./traces/crosscuts";
 import { boundariesByMetal } from "./traces/fields";
 import { movedLimits } from "./traces/lines";
+import type { ProposedMark } from "./proposalStore";
 import type { ShownRange } from "./traces/practice";
 import type { ColourScale, TrialMark } from "./trialMarks";
 import type { MapMetal } from "./view";
@@ -33,6 +34,8 @@ export interface MapContent {
   trials: { marks: readonly TrialMark[]; scale: ColourScale } | null;
   /** free acid against pH, where the frame holds a pH at which it counts; null elsewhere and without sulfate */
   freeAcid: FreeAcidCurve | null;
+  /** next trials, for a picture */
+  proposals: readonly ProposedMark[];
 }
 
 export interface ContentWishes {
@@ -50,11 +53,12 @@ export interface ContentWishes {
   practice?: readonly ShownRange[];
   trials?: MapContent["trials"];
   freeAcid?: FreeAcidCurve | null;
+  proposals?: readonly ProposedMark[];
 }
 
 export function mapContent(wishes: ContentWishes): MapContent {
   const { metals, solution, other, through, reaches, cyanide, robust = [], gases = [], practice = [] } = wishes;
-  const { trials = null, freeAcid = null } = wishes;
+  const { trials = null, freeAcid = null, proposals = [] } = wishes;
   return {
     solution,
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
@@ -77,5 +81,6 @@ export function mapContent(wishes: ContentWishes): MapContent {
     practice,
     trials,
     freeAcid: solution.frame.pH[0] < FREE_ACID_BELOW ? freeAcid : null,
+    proposals,
   };
 }

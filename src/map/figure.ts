@@ -9,6 +9,7 @@ import { groundTrace, openGroundTraces, shutGroundTraces, windowOutlineTraces } 
 import { equilibriumTraces, hydrogenCyanideTraces, otherBasisTraces, waterTraces } from "./traces/lines";
 import { nameTraces } from "./traces/names";
 import { keptTraces } from "./traces/kept";
+import { proposalTraces } from "./traces/proposals";
 import { practiceTraces } from "./traces/practice";
 import { reachHeads, reachTraces } from "./traces/reachBars";
 import { robustTraces } from "./traces/robust";
@@ -45,6 +46,7 @@ export function mapTraces(content: MapContent, sheet: Sheet, view: MapView): Plo
     ...(view.traceTrials && layers.trials && content.trials
       ? trialTraces(content.trials.marks, content.trials.scale, view)
       : []),
+    ...(view.traceTrials ? proposalTraces(content.proposals, view) : []),
     ...(sheet.alongPH && through
       ? [
           ...crosscutTraces(content.crosscuts, through, view),

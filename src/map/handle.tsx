@@ -16,8 +16,8 @@ export interface SetPointHandleProps {
   onPress?: (x: number, y: number) => void;
 }
 
-const STEP = { pH: 0.02, Eh: 0.005 };
-const moves: Readonly<Record<string, readonly [number, number]>> = {
+export const STEP = { pH: 0.02, Eh: 0.005 };
+export const moves: Readonly<Record<string, readonly [number, number]>> = {
   ArrowLeft: [-1, 0],
   ArrowRight: [1, 0],
   ArrowUp: [0, 1],

@@ -6,7 +6,7 @@ export interface Brushed {
   Eh: readonly [number, number];
 }
 
-class Value<T> {
+export class Value<T> {
   private readonly listeners = new Set<() => void>();
   constructor(private value: T) {}
   readonly get = (): T => this.value;

@@ -303,7 +303,7 @@ test("figures move with their formula version alone: changed on purpose? raise f
     accountabilityPct: 99.592832,
     acidPerTonne: 1370.6149,
     flags: [],
-    formulaVersion: "2",
+    formulaVersion: "3",
     gangueDissolvedPct: -0.17527473,
     pH: 4.35,
     pHCooled: true,

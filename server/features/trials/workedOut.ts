@@ -11,6 +11,7 @@ import { couldCarry } from "../../../shared/trials/couldCarry";
 import { trialFigures } from "../../../shared/trials/figures";
 import { titratedAcid } from "../../../shared/trials/trialAcid";
 import { measuredPoint } from "../../../shared/trials/measuredPoint";
+import { plannedPoint } from "../../../shared/trials/plannedPoint";
 import type { Chemistry } from "../chemistry/library";
 import type { trials } from "./schema";
 
@@ -29,7 +30,12 @@ export const workingsOf = ({ data, current }: Chemistry): Workings => ({
 const ofTarget = (assays: readonly SolutionAssay[], { target }: CampaignStage) =>
   assays.filter(({ analyte }) => analyte === target);
 
-const comparedOf = (trial: Trial, feed: Feed, stage: CampaignStage, masses: MolarMasses): ComparedTrial => {
+const comparedOf = (
+  trial: Trial,
+  feed: Feed,
+  stage: CampaignStage,
+  { masses, electrodes }: Workings,
+): ComparedTrial => {
   const { kind, planned, measured, charge, products } = trial;
   return {
     kind,
@@ -39,6 +45,7 @@ const comparedOf = (trial: Trial, feed: Feed, stage: CampaignStage, masses: Mola
     products: { finalAssays: ofTarget(products.finalAssays, stage), liquorDensity: products.liquorDensity },
     couldCarry: couldCarry(trial, feed, stage.target, masses),
     freeAcid: titratedAcid(trial, masses),
+    plannedAt: plannedPoint(trial, electrodes),
   };
 };
 
@@ -47,7 +54,8 @@ type FigureColumns = Omit<TrialFigures, "recoveryRangePct"> & Pick<Stored, "reco
 export type WorkedOut = FigureColumns & Pick<Stored, "electrode" | "compared" | "formulaVersion">;
 
 /** Everything that is stored of a trial beside its record. An interval open to one side is not stored: it says too little. */
-export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, { masses, electrodes }: Workings): WorkedOut {
+export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, workings: Workings): WorkedOut {
+  const { masses, electrodes } = workings;
   const { recoveryRangePct, ...figures } = trialFigures(trial, feed, stage, masses, electrodes);
   const [low, high] = recoveryRangePct ?? [null, null];
   const closed = Number.isFinite(low) && Number.isFinite(high);
@@ -56,7 +64,7 @@ export function workedOut(trial: Trial, feed: Feed, stage: CampaignStage, { mass
     recoveryLow: closed ? low : null,
     recoveryHigh: closed ? high : null,
     electrode: measuredPoint(trial, electrodes).point?.electrode ?? null,
-    compared: comparedOf(trial, feed, stage, masses),
+    compared: comparedOf(trial, feed, stage, workings),
     formulaVersion,
   };
 }

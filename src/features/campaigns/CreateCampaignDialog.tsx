@@ -8,7 +8,7 @@ import { Note } from "../../components/text";
 import { TextArea, TextField } from "../../components/TextField";
 import { useCreateCampaign } from "../../lib/campaigns";
 import { usePlans } from "../../lib/plans";
-import { stageFromPlan } from "./campaignModel";
+import { stageFromPlan } from "../../lib/stageFromPlan";
 
 interface CreateCampaignDialogProps {
   open: boolean;

@@ -1,10 +1,4 @@
-import {
-  campaignUpdate,
-  type CampaignCreate,
-  type CampaignRow,
-  type CampaignStage,
-} from "../../../shared/schemas/campaign";
-import type { PlanInputs } from "../../../shared/schemas/plan";
+import { campaignUpdate, type CampaignCreate, type CampaignRow } from "../../../shared/schemas/campaign";
 import type { Problem } from "../../lib/recordDraft";
 
 export type CampaignValues = Omit<CampaignCreate, "projectId">;
@@ -26,19 +20,6 @@ export function campaignProblems(changed: Partial<CampaignValues>): Problem[] {
     path: path.join("."),
     message: typeof path[1] === "number" && message.startsWith("Too small") ? `${String(path[2])} is missing` : message,
   }));
-}
-
-/** A first stage guessed from the plan: its target against the gangue that must stay solid. */
-export function stageFromPlan({ metals }: Pick<PlanInputs, "metals">): CampaignStage {
-  const target = metals.find(({ role }) => role === "target");
-  const gangue = metals.find(({ role }) => role === "gangue");
-  const won = target?.requirement === "metal";
-  return {
-    code: won ? "C" : "L",
-    name: won ? "cementation" : "leach",
-    target: target?.element ?? metals[0]?.element ?? "",
-    gangue: won ? null : (gangue?.element ?? null),
-  };
 }
 
 const fields: Readonly<Record<string, string>> = {

@@ -8,6 +8,7 @@ import type { PotentialScale } from "../../lib/potential";
 import { solidsBasisWord } from "../../lib/planWords";
 import type { CursorStore } from "../../map/cursorStore";
 import { ReadOut } from "../../map/ReadOut";
+import type { ProposalStore } from "../../map/proposalStore";
 import type { ShownTrials } from "../../map/TrialsLayer";
 import { windowName } from "../../map/view";
 import type { MapModel } from "./model/useMapModel";
@@ -30,11 +31,13 @@ export interface MapPanelProps {
   onMoveSetPoint?: ((at: Point) => void) | undefined;
   onSettle: () => void;
   trials: ShownTrials | null;
+  proposals: ProposalStore;
 }
 
 /** The middle: what stands under the cursor, and the map. */
 export function MapPanel(props: MapPanelProps) {
-  const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle, trials } = props;
+  const { model, inputs, scale, onPlain, onFocus, pinned, onPin, cursor, onMoveSetPoint, onSettle, trials, proposals } =
+    props;
   const { asked, view, metals, through } = model;
   const { solution } = asked;
   const { plain, focus, window: chosen } = view;
@@ -82,6 +85,7 @@ export function MapPanel(props: MapPanelProps) {
             cursor={cursor}
             onPick={onPin}
             trials={trials}
+            proposals={proposals}
             handle={
               setPoint && onMoveSetPoint
                 ? {

@@ -13,6 +13,8 @@ import { usePotentialScale } from "../../lib/potential";
 import { useMay } from "../../lib/session";
 import { printColours, useThemeColours } from "../../lib/theme";
 import { CursorStore } from "../../map/cursorStore";
+import { ProposalStore } from "../../map/proposalStore";
+import { useTold } from "../../map/trialStore";
 import { AnswersPanel } from "./answers/AnswersPanel";
 import { ChooseReagents } from "./answers/ChooseReagents";
 import { GasLayers, PracticeList } from "./asks/GasLayers";
@@ -32,6 +34,7 @@ import { usePrinting } from "./model/usePrinting";
 import { useSolved } from "./model/useSolved";
 import { dropDraft, keepDraft } from "./model/draftShelf";
 import { Sheet } from "./Sheet";
+import { NextTrials } from "../trials/nextTrials/NextTrials";
 import { AnswersOrTrials } from "../trials/planTrials/AnswersOrTrials";
 import { usePlanTrials } from "../trials/planTrials/usePlanTrials";
 
@@ -61,6 +64,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const { layers, setLayer, plain, setPlain } = useMapSettings();
   const { reagents, choose } = useReagents(plan.id, inputs);
   const [cursor] = useState(() => new CursorStore());
+  const [proposals] = useState(() => new ProposalStore());
+  const proposing = useTold(proposals.asked) !== null;
   const [wantedFocus, setFocus] = useState<string | null>(null);
   const [wantedWindow, setWindow] = useState(0);
   const [pinned, setPinned] = useState<Point | null>(null);
@@ -123,7 +128,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
 
   const { ligands, temperatureC } = inputs;
   const freeAcid = useMemo(() => freeAcidOf(data, { ligands, temperatureC }), [data, ligands, temperatureC]);
-  const trials = usePlanTrials(plan.id, inputs, solution, data, layers.trials);
+  const trials = usePlanTrials(plan.id, inputs, solution, data, layers.trials || proposing);
   const shownTrials = trials.shown;
   const map = useMapModel({
     inputs,
@@ -169,7 +174,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
             inputs,
             problem,
             solution,
-            model: { ...map, asked: { ...map.asked, trials: shownTrials } },
+            model: { ...map, asked: { ...map.asked, trials: shownTrials, proposals: proposals.marks.get() } },
             dataVersion: data.version,
           }),
         )
@@ -186,7 +191,20 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
           (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
         );
     },
-    [solution, map, shownTrials, frozen, draft.changed, draft.basedOn, plan, inputs, problem, data.version, scale],
+    [
+      solution,
+      map,
+      shownTrials,
+      proposals,
+      frozen,
+      draft.changed,
+      draft.basedOn,
+      plan,
+      inputs,
+      problem,
+      data.version,
+      scale,
+    ],
   );
 
   function restore(revision: RevisionRow) {
@@ -244,11 +262,29 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
               onMoveSetPoint={mayMove ? moveSetPoint : undefined}
               onSettle={draft.settle}
               trials={shownTrials}
+              proposals={proposals}
             />
           ) : null
         }
         answers={
-          <AnswersOrTrials trials={layers.trials ? trials : null} scale={scale}>
+          <AnswersOrTrials
+            trials={layers.trials ? trials : null}
+            scale={scale}
+            next={
+              solution &&
+              count > 0 && (
+                <NextTrials
+                  store={proposals}
+                  plan={plan}
+                  revision={frozen?.number ?? plan.latest.number}
+                  unsaved={frozen === null && draft.changed}
+                  {...{ inputs, solution, data, chosen, trials, scale }}
+                  reaches={map?.reaches ?? []}
+                  procedures={draft.procedures}
+                />
+              )
+            }
+          >
             {frozen === null && <DataChanged plan={plan} className="mb-3" />}
             {failure && (
               <Remark className="mb-3 border-signal!">

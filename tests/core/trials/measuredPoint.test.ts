@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { electrodeSeries } from "../../../shared/electrodes/series";
 import { lastTemperature, measuredPoint } from "../../../shared/trials/measuredPoint";
+import { plannedPoint } from "../../../shared/trials/plannedPoint";
 import type { TrialInput } from "../../../shared/schemas/trial";
 import { chemistry } from "../../support/chemistry";
 import { trialOf, typed } from "../../support/trials";
@@ -99,5 +100,19 @@ describe("what cannot be placed says why", () => {
     expect(at({ pH: { value: typed("2 pH") }, orp: { value: typed("0,657 V"), electrode: "SHE" } }).point?.Eh).toBe(
       0.657,
     );
+  });
+});
+
+describe("where a planned trial is to stand", () => {
+  const plan = (planned: TrialInput["planned"]) => plannedPoint(trialOf({ planned }), electrodes);
+  test("its ORP on the SHE scale by the electrode it was planned against", () => {
+    const orp = { value: typed("380 mV"), electrode: "AGCL-3M", electrodeTemperature: typed("25 C") };
+    const at = plan({ temperature: typed("60 C"), pH: typed("4.8 pH"), orp });
+    expect(at).toMatchObject({ pH: 4.8, temperatureC: 60 });
+    expect(at?.Eh).toBeCloseTo(0.587, 9);
+  });
+  test("nowhere without pH or without a potential", () => {
+    expect(plan({ pH: typed("4.8 pH") })).toBeNull();
+    expect(plan({ orp: { value: typed("380 mV"), electrode: "SHE" } })).toBeNull();
   });
 });

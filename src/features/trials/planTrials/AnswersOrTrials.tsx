@@ -12,15 +12,24 @@ const TrialsPanel = lazy(async () => ({ default: (await import("./TrialsPanel"))
 export function AnswersOrTrials({
   trials,
   scale,
+  next,
   children,
 }: {
   /** null while the layer is off */
   trials: PlanTrials | null;
   scale: PotentialScale;
+  /** what to try next; stands below either */
+  next: ReactNode;
   children: ReactNode;
 }) {
   const [shown, setShown] = useState<"answers" | "trials">("answers");
-  if (trials === null) return <>{children}</>;
+  if (trials === null)
+    return (
+      <>
+        {children}
+        {next}
+      </>
+    );
   const count = trials.trials.length;
   return (
     <Tabs
@@ -36,6 +45,7 @@ export function AnswersOrTrials({
             <>
               {children}
               <Tried trials={trials} onTable={() => setShown("trials")} />
+              {next}
             </>
           ),
         },
@@ -45,6 +55,7 @@ export function AnswersOrTrials({
           content: (
             <Suspense fallback={<Loading label="Opening the trials" />}>
               <TrialsPanel trials={trials} scale={scale} />
+              {next}
             </Suspense>
           ),
         },
