@@ -1,11 +1,31 @@
-import { useRef, type ReactNode } from "react";
-import { glossary, type GlossaryWord } from "../lib/glossary";
+import { useRef, type ComponentType, type ReactNode } from "react";
+import { glossaryTitles, type GlossaryWord } from "../lib/glossaryTitles";
+import type { PopoverSheetProps } from "./PopoverSheet";
 import { lateFailure, useLate } from "./useLate";
 
-const loadSheet = () => import("./PopoverSheet");
+type SheetProps = PopoverSheetProps & { title: string; word?: GlossaryWord };
+const loadSheet = (): Promise<{ default: ComponentType<SheetProps> }> => import("./HelpSheet");
 
 /** Help at the point of use: the word itself opens it, marked by a dotted line. */
-export function Help({ title, children, trigger }: { title: string; children: ReactNode; trigger?: ReactNode }) {
+export function Help(props: { title: string; children: ReactNode; trigger?: ReactNode }) {
+  return <HelpButton {...props} />;
+}
+
+/** A word of the product with its meaning behind it: <Term word="margin" />. */
+export function Term({ word, children }: { word: GlossaryWord; children?: ReactNode }) {
+  const title = glossaryTitles[word];
+  return <HelpButton title={title} trigger={children ?? title.toLowerCase()} word={word} />;
+}
+
+interface HelpButtonProps {
+  title: string;
+  trigger?: ReactNode;
+  /** its meaning comes with the sheet */
+  word?: GlossaryWord;
+  children?: ReactNode;
+}
+
+function HelpButton({ title, trigger, word, children }: HelpButtonProps) {
   const button = useRef<HTMLButtonElement>(null);
   const { Part: Sheet, failed, open, close, near } = useLate(loadSheet);
   return (
@@ -24,23 +44,16 @@ export function Help({ title, children, trigger }: { title: string; children: Re
         {trigger ?? title}
       </button>
       {Sheet && (
-        <Sheet anchor={button} onClose={close} className="max-w-[340px] px-4 py-3">
-          <p className="mb-1 font-mono text-sm font-bold">{title}</p>
-          <div className="space-y-2 text-sm">{children}</div>
+        <Sheet
+          anchor={button}
+          onClose={close}
+          className="max-w-[340px] px-4 py-3"
+          title={title}
+          {...(word === undefined ? {} : { word })}
+        >
+          {children}
         </Sheet>
       )}
     </>
-  );
-}
-
-/** A word of the product with its meaning behind it: <Term word="margin" />. */
-export function Term({ word, children }: { word: GlossaryWord; children?: ReactNode }) {
-  const { title, text } = glossary[word];
-  return (
-    <Help title={title} trigger={children ?? title.toLowerCase()}>
-      {text.map((paragraph) => (
-        <p key={paragraph}>{paragraph}</p>
-      ))}
-    </Help>
   );
 }

@@ -81,3 +81,35 @@ export function newPlanInputs({ step, preset, target, other, temperatureC }: New
     ...(preset === "cyanide" ? { excludedHazards: [cyanideRule] } : {}),
   };
 }
+
+/** A metal as the user takes it over from a feed. */
+export interface FeedLine {
+  element: string;
+  role: PlanMetal["role"];
+  gPerL: number;
+}
+
+export interface FeedPlan {
+  preset: PresetName;
+  temperatureC: number;
+  lines: readonly FeedLine[];
+  minerals: readonly string[];
+}
+
+/** The first question of a leach of a feed: its metals at the tenors taken over, its minerals named. */
+export function feedPlanInputs({ preset, temperatureC, lines, minerals }: FeedPlan, data: ChemicalData): PlanInputs {
+  const base = newPlanInputs(
+    { step: "leach", preset, target: lines[0]?.element ?? "", other: null, temperatureC },
+    data,
+  );
+  const metals = lines.map(({ element, role, gPerL }): PlanMetal => ({
+    element,
+    role,
+    requirement: role === "gangue" ? "solid" : role === "target" ? "dissolved" : "free",
+    entry: "gPerL",
+    value: gPerL,
+    gammaFrom: "one",
+    gamma: null,
+  }));
+  return { ...base, metals, feedMinerals: [...minerals] };
+}

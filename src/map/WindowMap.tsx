@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { Button } from "../components/Button";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
@@ -11,11 +11,12 @@ import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import Plot from "./Plot";
 import { haloStyle } from "./texts";
 import type { ProposalStore } from "./proposalStore";
-import { ProposalsLayer } from "./ProposalsLayer";
 import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
 import { useSize } from "./useSize";
 import type { MapView } from "./view";
 import { afterRelayout, MovingView } from "./zoom";
+
+const ProposalsLayer = lazy(async () => ({ default: (await import("./ProposalsLayer")).ProposalsLayer }));
 
 export interface WindowMapProps {
   asked: ContentWishes;
@@ -31,7 +32,7 @@ export interface WindowMapProps {
   /** trials painted over the map */
   trials?: ShownTrials | null;
   /** next trials, numbered, movable */
-  proposals?: ProposalStore;
+  proposals?: ProposalStore | null;
 }
 
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
@@ -166,7 +167,11 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
           {handle && view.layers.setPoint && (
             <SetPointHandle sheet={sheet} visible={visible} {...handle} onPress={openAt} />
           )}
-          {proposals && <ProposalsLayer store={proposals} sheet={sheet} visible={visible} live={live} />}
+          {proposals && (
+            <Suspense fallback={null}>
+              <ProposalsLayer store={proposals} sheet={sheet} visible={visible} live={live} />
+            </Suspense>
+          )}
         </>
       ) : null}
     </div>

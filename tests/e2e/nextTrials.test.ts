@@ -60,7 +60,7 @@ test("a metallurgist asks for next trials, drops one, moves one by keys, plans t
     expect(t.notes).toMatch(/^Proposed\. /);
   }
   await block.getByRole("button", { name: "Undo" }).click();
-  await expect.poll(async () => (await planned()).length).toBe(before.length);
+  await expect.poll(async () => (await planned()).length, { timeout: 15_000 }).toBe(before.length);
 });
 
 test("whoever may not plan sees the proposals and no button", async () => {

@@ -1,6 +1,6 @@
 import type { FeedRow } from "../../../shared/schemas/feed";
 import { readEntry, type Entry } from "../../../shared/entry/readEntry";
-import { Button } from "../../components/Button";
+import { Button, ButtonLink } from "../../components/Button";
 import { SpeciesName } from "../../components/Formula";
 import { FormulaText } from "../../components/FormulaText";
 import { ErrorNote } from "../../components/status";
@@ -14,6 +14,7 @@ import { headsOf, placedShares } from "./feedModel";
 /** The feed in hand, as one reads it before a trial. */
 export function FeedDetail({ feed, onOpen }: { feed: FeedRow; onOpen: () => void }) {
   const mayWrite = useMay("review");
+  const mayPlan = useMay("writePlans");
   const restore = useRestoreFeed();
   const heads = headsOf(feed.heads);
   return (
@@ -26,9 +27,12 @@ export function FeedDetail({ feed, onOpen }: { feed: FeedRow; onOpen: () => void
       {feed.description !== "" && <p className="mt-1">{feed.description}</p>}
       <div className="mt-3 flex flex-wrap gap-2">
         {feed.deletedAt === null ? (
-          <Button kind="primary" onClick={onOpen}>
-            {mayWrite ? "Open to edit" : "Open"}
-          </Button>
+          <>
+            <Button kind="primary" onClick={onOpen}>
+              {mayWrite ? "Open to edit" : "Open"}
+            </Button>
+            {mayPlan && <ButtonLink to={`/plans?feed=${encodeURIComponent(feed.id)}`}>Plan a leach of it</ButtonLink>}
+          </>
         ) : (
           mayWrite && (
             <Button disabled={restore.isPending} onClick={() => restore.mutate(feed)}>

@@ -1,79 +1,33 @@
-import { zodResolver } from "@hookform/resolvers/zod";
-import { Controller, useForm, useWatch } from "react-hook-form";
-import { useNavigate } from "react-router-dom";
-import { z } from "zod";
-import { presetCaution } from "../../../shared/hazards/presetCautions";
-import { planCreate, planInputs, presetNames } from "../../../shared/schemas/plan";
+import { useState } from "react";
+import type { FeedRow } from "../../../shared/schemas/feed";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { Button } from "../../components/Button";
-import { Caution } from "../../components/Caution";
 import { Segmented } from "../../components/choice";
 import { Dialog } from "../../components/Dialog";
-import { NumberField } from "../../components/NumberField";
-import { Select } from "../../components/Select";
 import { ErrorNote, Loading } from "../../components/status";
-import { Note } from "../../components/text";
-import { TextField } from "../../components/TextField";
 import { useChemistry } from "../../lib/chemistry";
-import { metalOptions } from "../../lib/metals";
-import { newPlanInputs, steps, type Step } from "../../lib/newPlan";
-import { useCreatePlan } from "../../lib/plans";
-import { lixiviantName } from "../../lib/planWords";
-import { selectProject } from "../../lib/project";
+import { useFeeds } from "../../lib/feeds";
 import type { CreatePlanDialogProps } from "./CreatePlanDialog";
+import { FromFeed } from "./FromFeed";
+import { FromMetal } from "./FromMetal";
 
-const schema = planCreate.pick({ projectId: true, name: true }).extend({
-  step: z.enum(steps),
-  preset: z.enum(presetNames),
-  target: z.string().min(1),
-  other: z.string(),
-  temperatureC: planInputs.shape.temperatureC,
-});
-type Values = z.infer<typeof schema>;
-
-const stepLabel: Record<Step, string> = { leach: "Leach", cementation: "Cementation", precipitation: "Precipitation" };
-const stepNote: Record<Step, string> = {
-  leach: "The target dissolves; gangue stays solid.",
-  cementation: "The target drops out as metal on the dust or scrap of a less noble one, which dissolves.",
-  precipitation: "The target leaves the liquor as a compound; what is carried on stays dissolved.",
-};
-const targetLabel: Record<Step, string> = {
-  leach: "Metal to dissolve",
-  cementation: "Metal to cement",
-  precipitation: "Metal to precipitate",
-};
-const otherLabel: Record<Step, string> = {
-  leach: "Metal to leave solid",
-  cementation: "Cementing metal",
-  precipitation: "Metal to keep dissolved",
-};
-
-/** The few things a plan cannot do without; everything else is set on the map. */
+/** A new plan, from a feed's assays or from a metal and a lixiviant. */
 export default function CreatePlan(props: CreatePlanDialogProps) {
   const chemistry = useChemistry();
+  const feeds = useFeeds(props.projectId);
+  const error = chemistry.error ?? feeds.error;
+  if (!error && chemistry.data && feeds.data) return <Start {...props} data={chemistry.data} feeds={feeds.data} />;
   return (
-    <Dialog
-      open={props.open}
-      onOpenChange={props.onOpenChange}
-      title="New plan"
-      width={620}
-      footer={
-        <>
-          <Button onClick={() => props.onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="new-plan" kind="primary" disabled={!chemistry.data}>
-            Create and open
-          </Button>
-        </>
-      }
-    >
-      {chemistry.error ? (
+    <Dialog open={props.open} onOpenChange={props.onOpenChange} title="New plan" width={620}>
+      {error ? (
         <ErrorNote
-          doing="The chemistry library could not be read"
-          error={chemistry.error}
-          retry={() => void chemistry.refetch()}
+          doing={chemistry.error ? "The chemistry library could not be read" : "The feeds could not be read"}
+          error={error}
+          retry={() => {
+            void chemistry.refetch();
+            void feeds.refetch();
+          }}
         />
-      ) : chemistry.data ? (
-        <Form {...props} data={chemistry.data} />
       ) : (
         <Loading label="Reading the chemistry library" />
       )}
@@ -81,134 +35,45 @@ export default function CreatePlan(props: CreatePlanDialogProps) {
   );
 }
 
-function Form({ data, projects, projectId, onOpenChange }: CreatePlanDialogProps & { data: ChemicalData }) {
-  const navigate = useNavigate();
-  const create = useCreatePlan();
-  const form = useForm<Values>({
-    resolver: zodResolver(schema),
-    defaultValues: { projectId, name: "", step: "leach", preset: "sulfate", target: "", other: "Fe", temperatureC: 25 },
-  });
-  const { errors } = form.formState;
-  const [step, preset, target] = useWatch({ control: form.control, name: ["step", "preset", "target"] });
-  const metals = metalOptions(data);
-  const submit = form.handleSubmit(({ projectId: project, name, other, ...rest }) =>
-    create.mutate(
-      { projectId: project, name, inputs: newPlanInputs({ ...rest, other: other === "none" ? null : other }, data) },
-      {
-        onSuccess: (plan) => {
-          selectProject(plan.projectId);
-          onOpenChange(false);
-          void navigate(`/plans/${plan.id}`);
-        },
-      },
-    ),
-  );
+function Start(props: CreatePlanDialogProps & { data: ChemicalData; feeds: readonly FeedRow[] }) {
+  const { open, onOpenChange, feeds, feedId } = props;
+  const [from, setFrom] = useState<"feed" | "metal">(feeds.length > 0 ? "feed" : "metal");
+  const [step, setStep] = useState<1 | 2>(1);
+  const feed = from === "feed";
   return (
-    <form id="new-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-      <TextField
-        label="Name"
-        placeholder="such as neutral leach, second tank"
-        autoFocus
-        error={errors.name && "A name of 1 to 120 characters"}
-        {...form.register("name")}
-      />
-      {projects.length > 1 && (
-        <Controller
-          control={form.control}
-          name="projectId"
-          render={({ field }) => (
-            <Select
-              label="Project"
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
-            />
-          )}
+    <Dialog
+      open={open}
+      onOpenChange={onOpenChange}
+      title={feed ? `New plan, step ${step} of 2` : "New plan"}
+      width={feed && step === 2 ? 760 : 620}
+      footer={
+        <>
+          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
+          {feed && step === 2 && <Button onClick={() => setStep(1)}>Back</Button>}
+          <Button type="submit" form="new-plan" kind="primary">
+            {feed && step === 1 ? "Next: its metals" : "Create and open"}
+          </Button>
+        </>
+      }
+    >
+      {step === 1 && (
+        <Segmented
+          label="Start from"
+          className="mb-4"
+          value={from}
+          onChange={setFrom}
+          options={[
+            {
+              value: "feed",
+              label: "From a feed’s assays",
+              disabled: feeds.length === 0,
+              ...(feeds.length === 0 ? { title: "This project has no feed yet: enter one under Feeds" } : {}),
+            },
+            { value: "metal", label: "From a metal and a lixiviant" },
+          ]}
         />
       )}
-      <Controller
-        control={form.control}
-        name="step"
-        render={({ field }) => (
-          <div>
-            <span className="mb-1 block text-sm">Step</span>
-            <Segmented
-              label="Step"
-              value={field.value}
-              onChange={(next) => {
-                field.onChange(next);
-                form.setValue(
-                  "other",
-                  next === "precipitation" ? "none" : next === "cementation" && target !== "Zn" ? "Zn" : "Fe",
-                );
-              }}
-              options={steps.map((value) => ({ value, label: stepLabel[value] }))}
-            />
-            <Note className="pt-1">{stepNote[step]}</Note>
-          </div>
-        )}
-      />
-      <div className="grid grid-cols-2 gap-4">
-        <Controller
-          control={form.control}
-          name="target"
-          render={({ field }) => (
-            <Select
-              label={targetLabel[step]}
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={metals}
-              error={errors.target && "Which metal is this plan about?"}
-            />
-          )}
-        />
-        <Controller
-          control={form.control}
-          name="other"
-          render={({ field }) => (
-            <Select
-              label={otherLabel[step]}
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={[{ value: "none", label: "none yet" }, ...metals.filter((m) => m.value !== target)]}
-            />
-          )}
-        />
-        <Controller
-          control={form.control}
-          name="preset"
-          render={({ field }) => (
-            <Select
-              label="Lixiviant"
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={presetNames.map((value) => ({ value, label: lixiviantName[value] }))}
-            />
-          )}
-        />
-        <Controller
-          control={form.control}
-          name="temperatureC"
-          render={({ field }) => (
-            <NumberField
-              label="Temperature of the liquor"
-              layout="stacked"
-              value={field.value}
-              onCommit={field.onChange}
-              unit="°C"
-              min={0}
-              max={150}
-              step={5}
-            />
-          )}
-        />
-      </div>
-      <Caution defer={false}>{presetCaution[preset]}</Caution>
-      {create.error && <ErrorNote doing="Not created" error={create.error} />}
-    </form>
+      {feed ? <FromFeed {...props} wanted={feedId} step={step} onStep={setStep} /> : <FromMetal {...props} />}
+    </Dialog>
   );
 }

@@ -6,6 +6,8 @@ export interface CreatePlanDialogProps {
   onOpenChange: (open: boolean) => void;
   projects: readonly ProjectRow[];
   projectId: string;
+  /** the feed to start from */
+  feedId?: string | undefined;
 }
 
 export const CreatePlanDialog = whenOpened<CreatePlanDialogProps>(() => import("./CreatePlan"));

@@ -1,5 +1,5 @@
 import { useState } from "react";
-import { useNavigate } from "react-router-dom";
+import { useNavigate, useSearchParams } from "react-router-dom";
 import type { PlanRow } from "../../../shared/schemas/plan";
 import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
@@ -31,11 +31,18 @@ export default function PlansPage() {
   const [filter, setFilter] = useState("");
   const [chosen, setChosen] = useState<string>();
   const [shelved, setShelved] = useState<PlanRow | null>(null);
-  const [dialog, setDialog] = useState<"plan" | "project" | null>(null);
+  // A feed's screen leads here with the feed in hand.
+  const [search, setSearch] = useSearchParams();
+  const feedId = search.get("feed") ?? undefined;
+  const [dialog, setDialog] = useState<"plan" | "project" | null>(feedId !== undefined && mayWrite ? "plan" : null);
   const plans = usePlans(project?.id, archived);
   const navigate = useNavigate();
   const selected = plans.data?.find((plan) => plan.id === chosen) ?? plans.data?.[0];
-  const close = (open: boolean) => !open && setDialog(null);
+  function close(open: boolean) {
+    if (open) return;
+    setDialog(null);
+    if (feedId !== undefined) setSearch({}, { replace: true });
+  }
 
   return (
     <>
@@ -119,7 +126,13 @@ export default function PlansPage() {
       )}
       <CreateProjectDialog open={dialog === "project"} onOpenChange={close} />
       {project && projects && (
-        <CreatePlanDialog open={dialog === "plan"} onOpenChange={close} projects={projects} projectId={project.id} />
+        <CreatePlanDialog
+          open={dialog === "plan"}
+          onOpenChange={close}
+          projects={projects}
+          projectId={project.id}
+          feedId={feedId}
+        />
       )}
     </>
   );

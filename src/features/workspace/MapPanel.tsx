@@ -31,7 +31,8 @@ export interface MapPanelProps {
   onMoveSetPoint?: ((at: Point) => void) | undefined;
   onSettle: () => void;
   trials: ShownTrials | null;
-  proposals: ProposalStore;
+  /** null while nobody asked */
+  proposals: ProposalStore | null;
 }
 
 /** The middle: what stands under the cursor, and the map. */

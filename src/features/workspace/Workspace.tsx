@@ -262,7 +262,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
               onMoveSetPoint={mayMove ? moveSetPoint : undefined}
               onSettle={draft.settle}
               trials={shownTrials}
-              proposals={proposals}
+              proposals={proposing ? proposals : null}
             />
           ) : null
         }
