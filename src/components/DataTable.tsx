@@ -159,7 +159,9 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           />
         </tbody>
       </table>
-      {shown.length === 0 && <div className="py-6 text-muted">{empty ?? "Nothing matches."}</div>}
+      {shown.length === 0 && (
+        <div className="py-6 text-muted">{empty ?? "Nothing matches. Take a word away, or clear the filter."}</div>
+      )}
     </div>
   );
 }

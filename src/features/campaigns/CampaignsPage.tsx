@@ -7,6 +7,7 @@ import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { DataTable } from "../../components/DataTable";
 import { SearchField } from "../../components/SearchField";
+import { NoProject } from "../../components/NoProject";
 import { ErrorNote, Loading } from "../../components/status";
 import { tableCsv } from "../../components/tableModel";
 import { Empty, Note } from "../../components/text";
@@ -31,7 +32,7 @@ type Shelf = (typeof shelves)[number]["value"];
 export default function CampaignsPage() {
   usePageTitle("Campaigns");
   const mayWrite = useMay("review");
-  const { project } = useProject();
+  const { project, projects } = useProject();
   const navigate = useNavigate();
   const [deleted, setDeleted] = useState<Shelf>("false");
   const [filter, setFilter] = useState("");
@@ -65,68 +66,74 @@ export default function CampaignsPage() {
         </Button>
         {create}
       </div>
-      <div className="flex min-h-0 flex-1">
-        <section aria-label="Campaigns of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
-          <div className="flex flex-wrap items-center gap-4 pb-2">
-            <SearchField
-              label="Filter campaigns"
-              placeholder="code, title, stage, metal"
-              value={filter}
-              onChange={setFilter}
-            />
-            <Segmented label="Which campaigns" value={deleted} onChange={setDeleted} options={shelves} />
-          </div>
-          {campaigns.error ? (
-            <ErrorNote
-              doing="The campaigns could not be read"
-              error={campaigns.error}
-              retry={() => void campaigns.refetch()}
-            />
-          ) : !campaigns.data ? (
-            <Loading label="Reading the campaigns" />
-          ) : campaigns.data.length === 0 ? (
-            deleted === "true" ? (
-              <Empty title="Nothing deleted">A deleted campaign keeps its trials and can be restored.</Empty>
-            ) : (
-              <Empty title="No campaign yet" action={create}>
-                A campaign tries one question on the ground: trials laid out on a revision of a plan, stage by stage.
-                {!mayWrite && " A metallurgist makes the first one."}
-              </Empty>
-            )
-          ) : (
-            <>
-              <DataTable
-                caption="Campaigns, a line a stage"
-                rows={rows}
-                columns={stageColumns}
-                rowKey={({ key }) => key}
-                filter={filter}
-                initialSort={{ id: "campaign" }}
-                selectedKey={selected?.key}
-                onSelect={({ key }) => setChosen(key)}
-                onOpen={({ campaign }) => open(campaign)}
-                onShown={setShown}
-                rowHeight={48}
-                className="min-h-0 flex-1"
-                empty={`No campaign matches “${filter}”.`}
+      {projects?.length === 0 ? (
+        <div className="px-5">
+          <NoProject />
+        </div>
+      ) : (
+        <div className="flex min-h-0 flex-1">
+          <section aria-label="Campaigns of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
+            <div className="flex flex-wrap items-center gap-4 pb-2">
+              <SearchField
+                label="Filter campaigns"
+                placeholder="code, title, stage, metal"
+                value={filter}
+                onChange={setFilter}
               />
-              <Note className="py-2">
-                Mean over the trials that have the figure, range below it; rejected trials are left out. Reagent: acid,
-                or cementing metal, consumed per kg of target. Inside and outside: by the plan revision of each
-                campaign.
-              </Note>
-            </>
+              <Segmented label="Which campaigns" value={deleted} onChange={setDeleted} options={shelves} />
+            </div>
+            {campaigns.error ? (
+              <ErrorNote
+                doing="The campaigns could not be read"
+                error={campaigns.error}
+                retry={() => void campaigns.refetch()}
+              />
+            ) : !campaigns.data ? (
+              <Loading label="Reading the campaigns" />
+            ) : campaigns.data.length === 0 ? (
+              deleted === "true" ? (
+                <Empty title="Nothing deleted">A deleted campaign keeps its trials and can be restored.</Empty>
+              ) : (
+                <Empty title="No campaign yet" action={create}>
+                  A campaign tries one question on the ground: trials laid out on a revision of a plan, stage by stage.
+                  {!mayWrite && " A metallurgist makes the first one."}
+                </Empty>
+              )
+            ) : (
+              <>
+                <DataTable
+                  caption="Campaigns, a line a stage"
+                  rows={rows}
+                  columns={stageColumns}
+                  rowKey={({ key }) => key}
+                  filter={filter}
+                  initialSort={{ id: "campaign" }}
+                  selectedKey={selected?.key}
+                  onSelect={({ key }) => setChosen(key)}
+                  onOpen={({ campaign }) => open(campaign)}
+                  onShown={setShown}
+                  rowHeight={48}
+                  className="min-h-0 flex-1"
+                  empty={`No campaign matches “${filter}”.`}
+                />
+                <Note className="py-2">
+                  Mean over the trials that have the figure, range below it; rejected trials are left out. Reagent:
+                  acid, or cementing metal, consumed per kg of target. Inside and outside: by the plan revision of each
+                  campaign.
+                </Note>
+              </>
+            )}
+          </section>
+          {selected && (
+            <CampaignDetail
+              key={selected.campaign.id}
+              campaign={selected.campaign}
+              summary={summaries.get(selected.campaign.id) ?? null}
+              others={campaigns.data ?? []}
+            />
           )}
-        </section>
-        {selected && (
-          <CampaignDetail
-            key={selected.campaign.id}
-            campaign={selected.campaign}
-            summary={summaries.get(selected.campaign.id) ?? null}
-            others={campaigns.data ?? []}
-          />
-        )}
-      </div>
+        </div>
+      )}
       {project && (
         <CreateCampaignDialog open={creating} onOpenChange={setCreating} projectId={project.id} onCreated={open} />
       )}

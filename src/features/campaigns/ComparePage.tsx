@@ -1,7 +1,7 @@
 import { useMemo, useState } from "react";
 import { Link, useSearchParams } from "react-router-dom";
 import type { CampaignPairAnswer } from "../../../shared/schemas/campaignSummary";
-import { Button } from "../../components/Button";
+import { Button, ButtonLink } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { Select } from "../../components/Select";
 import { ErrorNote, Loading } from "../../components/status";
@@ -80,7 +80,16 @@ export default function ComparePage() {
       </div>
       {a === "" || b === "" ? (
         <div className="px-5">
-          <Empty title="Which two campaigns?">Choose them above. The second is read against the first.</Empty>
+          {campaigns.length < 2 ? (
+            <Empty
+              title={campaigns.length === 0 ? "No campaign yet" : "Only one campaign yet"}
+              action={<ButtonLink to="/campaigns">To the campaigns</ButtonLink>}
+            >
+              Two of one project are read against each other; the next one makes a pair.
+            </Empty>
+          ) : (
+            <Empty title="Which two campaigns?">Choose them above. The second is read against the first.</Empty>
+          )}
         </div>
       ) : pair.error ? (
         <div className="measure p-5">
@@ -129,7 +138,9 @@ function Pair({ pair }: { pair: CampaignPairAnswer }) {
   if (!stage || !of)
     return (
       <div className="px-5">
-        <Empty title="Nothing to compare">Neither campaign has a stage with trials.</Empty>
+        <Empty title="Nothing to compare" action={<ButtonLink to="/trials/plan">Plan a trial</ButtonLink>}>
+          Neither campaign has a stage with trials.
+        </Empty>
       </div>
     );
   const leach = trials?.find((t) => t.stage === of.code)?.compared.kind !== "cementation";

@@ -5,6 +5,7 @@ import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { DataTable } from "../../components/DataTable";
 import { SearchField } from "../../components/SearchField";
+import { NoProject } from "../../components/NoProject";
 import { ErrorNote, Loading } from "../../components/status";
 import { Empty, Note } from "../../components/text";
 import { useFeeds, type DeletedFilter } from "../../lib/feeds";
@@ -25,7 +26,7 @@ const shelves = [
 export default function FeedsPage() {
   usePageTitle("Feeds");
   const mayWrite = useMay("review");
-  const { project } = useProject();
+  const { project, projects } = useProject();
   const navigate = useNavigate();
   const [deleted, setDeleted] = useState<DeletedFilter>("false");
   const [filter, setFilter] = useState("");
@@ -49,44 +50,50 @@ export default function FeedsPage() {
         <span className="flex-1" />
         {create}
       </div>
-      <div className="flex min-h-0 flex-1">
-        <section aria-label="Feeds of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
-          <div className="flex flex-wrap items-center gap-4 pb-2">
-            <SearchField label="Filter feeds" placeholder="name, element" value={filter} onChange={setFilter} />
-            <Segmented label="Which feeds" value={deleted} onChange={setDeleted} options={shelves} />
-          </div>
-          {feeds.error ? (
-            <ErrorNote doing="The feeds could not be read" error={feeds.error} retry={() => void feeds.refetch()} />
-          ) : !feeds.data ? (
-            <Loading label="Reading the feeds" />
-          ) : feeds.data.length === 0 ? (
-            deleted === "true" ? (
-              <Empty title="Nothing deleted">A deleted feed keeps its assays and can be restored.</Empty>
+      {projects?.length === 0 ? (
+        <div className="px-5">
+          <NoProject />
+        </div>
+      ) : (
+        <div className="flex min-h-0 flex-1">
+          <section aria-label="Feeds of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
+            <div className="flex flex-wrap items-center gap-4 pb-2">
+              <SearchField label="Filter feeds" placeholder="name, element" value={filter} onChange={setFilter} />
+              <Segmented label="Which feeds" value={deleted} onChange={setDeleted} options={shelves} />
+            </div>
+            {feeds.error ? (
+              <ErrorNote doing="The feeds could not be read" error={feeds.error} retry={() => void feeds.refetch()} />
+            ) : !feeds.data ? (
+              <Loading label="Reading the feeds" />
+            ) : feeds.data.length === 0 ? (
+              deleted === "true" ? (
+                <Empty title="Nothing deleted">A deleted feed keeps its assays and can be restored.</Empty>
+              ) : (
+                <Empty title="No feed yet" action={create}>
+                  A feed is what is leached: its head assays, which of them counts, and the minerals that hold each
+                  metal. Every account starts from it.{!mayWrite && " A metallurgist enters the first one."}
+                </Empty>
+              )
             ) : (
-              <Empty title="No feed yet" action={create}>
-                A feed is what is leached: its head assays, which of them counts, and the minerals that hold each metal.
-                Every account starts from it.{!mayWrite && " A metallurgist enters the first one."}
-              </Empty>
-            )
-          ) : (
-            <DataTable
-              caption="Feeds"
-              rows={feeds.data}
-              columns={feedColumns}
-              rowKey={({ id }) => id}
-              filter={filter}
-              initialSort={{ id: "name" }}
-              selectedKey={selected?.id}
-              onSelect={({ id }) => setChosen(id)}
-              onOpen={open}
-              rowHeight={48}
-              className="min-h-0 flex-1 pb-4"
-              empty={`No feed matches “${filter}”.`}
-            />
-          )}
-        </section>
-        {selected && <FeedDetail key={selected.id} feed={selected} onOpen={() => open(selected)} />}
-      </div>
+              <DataTable
+                caption="Feeds"
+                rows={feeds.data}
+                columns={feedColumns}
+                rowKey={({ id }) => id}
+                filter={filter}
+                initialSort={{ id: "name" }}
+                selectedKey={selected?.id}
+                onSelect={({ id }) => setChosen(id)}
+                onOpen={open}
+                rowHeight={48}
+                className="min-h-0 flex-1 pb-4"
+                empty={`No feed matches “${filter}”.`}
+              />
+            )}
+          </section>
+          {selected && <FeedDetail key={selected.id} feed={selected} onOpen={() => open(selected)} />}
+        </div>
+      )}
       {project && (
         <CreateFeedDialog open={creating} onOpenChange={setCreating} projectId={project.id} onCreated={open} />
       )}

@@ -183,7 +183,8 @@ function List({ plans, filter, archived, mayWrite, selected, onSelect, onOpen, o
           )
         }
       >
-        A plan asks one question: at which pH and potential is every metal as it should be in this step?
+        A plan asks one question: at which pH and potential is every metal as it should be in this step? It starts from
+        a feed’s assays, or from a metal and a lixiviant.
         {!mayWrite && " A metallurgist writes the first one."}
       </Empty>
     );

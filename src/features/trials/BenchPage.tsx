@@ -2,8 +2,9 @@ import { Link } from "react-router-dom";
 import type { TrialStatus } from "../../../shared/schemas/trial";
 import type { TrialListRow } from "../../../shared/schemas/trialRows";
 import { ButtonLink } from "../../components/Button";
+import { NoProject } from "../../components/NoProject";
 import { ErrorNote, Loading } from "../../components/status";
-import { Empty, Note, SectionHead } from "../../components/text";
+import { Note, SectionHead } from "../../components/text";
 import { classes } from "../../lib/classes";
 import { shelved } from "../../lib/draftShelf";
 import { fullTime, savedAt } from "../../lib/format";
@@ -15,16 +16,24 @@ import { elapsed, minutesSince, overdue } from "./bench/elapsed";
 import { useNow } from "./bench/useNow";
 
 const groups: readonly { status: TrialStatus; title: string; empty: string }[] = [
-  { status: "running", title: "Running", empty: "Nothing runs." },
-  { status: "planned", title: "Planned", empty: "Nothing is laid out." },
-  { status: "awaiting assay", title: "Waiting for assays", empty: "Nothing waits." },
+  { status: "running", title: "Running", empty: "Nothing runs. A planned trial starts with a tap." },
+  {
+    status: "planned",
+    title: "Planned",
+    empty: "Nothing is laid out. Plan a trial, above, or take over the next trials a plan proposes.",
+  },
+  {
+    status: "awaiting assay",
+    title: "Waiting for assays",
+    empty: "Nothing waits. A trial comes here when it is stopped and its samples are at the laboratory.",
+  },
 ];
 
 /** The trials a technician has in hand: running, planned, waiting; one tap opens one. */
 export default function BenchPage() {
   usePageTitle("Bench");
   const mayRecord = useMay("writeBench");
-  const { project } = useProject();
+  const { project, projects } = useProject();
   const kept = new Set(shelved("trial.").map((name) => name.slice("trial.".length)));
   return (
     <>
@@ -41,10 +50,10 @@ export default function BenchPage() {
         )}
       </div>
       <div className="px-5 pt-3 pb-12">
-        {project ? (
-          groups.map((group) => <Group key={group.status} {...group} projectId={project.id} kept={kept} />)
+        {project || !projects ? (
+          project && groups.map((group) => <Group key={group.status} {...group} projectId={project.id} kept={kept} />)
         ) : (
-          <Empty title="No project yet">A metallurgist makes the first one.</Empty>
+          <NoProject />
         )}
       </div>
     </>

@@ -2,6 +2,7 @@ import { useDeferredValue, useMemo } from "react";
 import { liquorCouples, type LiquorCouple } from "../../../../shared/reach/liquorCouples";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { Term } from "../../../components/Help";
 import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { Note } from "../../../components/text";
 import { fixed, significant, withUnit } from "../../../lib/format";
@@ -34,8 +35,8 @@ export function CouplesBlock({
   return (
     <>
       <p className="pt-2 text-sm text-muted">
-        The liquor’s own couples at pH {fixed(at, 2)}, from <span className="whitespace-nowrap">1 : 100</span> to{" "}
-        <span className="whitespace-nowrap">100 : 1</span>
+        <Term word="couples">The liquor’s own couples</Term> at pH {fixed(at, 2)}, from{" "}
+        <span className="whitespace-nowrap">1 : 100</span> to <span className="whitespace-nowrap">100 : 1</span>
         {" · "}
         <MethodLink to="reach" />
       </p>

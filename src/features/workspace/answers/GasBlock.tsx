@@ -2,7 +2,7 @@ import type { HazardRegion } from "../../../../shared/hazards/regions";
 import { Caution } from "../../../components/Caution";
 import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
-import { Help } from "../../../components/Help";
+import { Help, Term } from "../../../components/Help";
 import { Quantity } from "../../../components/Quantity";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
@@ -33,7 +33,7 @@ export function GasBlock({ gases: { map, reaching } }: { gases: Gases }) {
           </>
         }
       >
-        Gas over the liquor
+        <Term word="gasPressure">Gas over the liquor</Term>
       </SectionHead>
       {map.saturationBar !== null && (
         <Note className="py-1">

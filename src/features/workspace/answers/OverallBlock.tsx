@@ -5,6 +5,7 @@ import type { Solution, Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Loading } from "../../../components/status";
 import { MethodLink } from "../../../components/SourceLink";
+import { Term } from "../../../components/Help";
 import { SectionHead } from "../../../components/text";
 import { Fold } from "../asks/Fold";
 import type { Edit } from "../model/edit";
@@ -28,7 +29,9 @@ export function OverallBlock({
   const feed = inputs.feedMinerals.length;
   return (
     <section aria-label="Overall reactions" className="mt-4">
-      <SectionHead aside={<MethodLink to="overall" />}>Overall reactions</SectionHead>
+      <SectionHead aside={<MethodLink to="overall" />}>
+        <Term word="overallReaction">Overall reactions</Term>
+      </SectionHead>
       <Fold
         className="pt-1"
         title={

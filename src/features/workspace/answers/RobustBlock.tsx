@@ -1,4 +1,5 @@
 import type { Robust } from "../../../../shared/advice/robust";
+import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
@@ -22,7 +23,7 @@ export function RobustBlock({
       <SectionHead
         aside={
           <>
-            inner outline · <MethodLink to="overRanges" />
+            <Term word="robustWindow">inner outline</Term> · <MethodLink to="overRanges" />
           </>
         }
       >

@@ -34,7 +34,7 @@ export function SetPointBlock({
           </>
         }
       >
-        Set point
+        <Term word="setPoint">Set point</Term>
       </SectionHead>
       <p className="pt-1 font-mono text-xl font-bold" data-testid="set-point">
         <span className="whitespace-nowrap">pH {fixed(at.pH, 2)}</span>

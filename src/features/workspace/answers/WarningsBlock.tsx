@@ -2,6 +2,7 @@ import type { SolutionWarning } from "../../../../shared/solution";
 import type { Source } from "../../../lib/sources";
 import { FormulaText } from "../../../components/FormulaText";
 import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
+import { Term } from "../../../components/Help";
 import { SectionHead } from "../../../components/text";
 import { warningWord } from "../../../lib/planWords";
 
@@ -19,7 +20,9 @@ export function WarningsBlock({ warnings }: { warnings: readonly SolutionWarning
   if (warnings.length === 0) return null;
   return (
     <section aria-label="Before you trust this" className="mt-4">
-      <SectionHead>Before you trust this</SectionHead>
+      <SectionHead>
+        <Term word="warnings">Before you trust this</Term>
+      </SectionHead>
       <ul>
         {warnings.map((w, i) => (
           <li key={i} className="hairline py-1 text-sm">

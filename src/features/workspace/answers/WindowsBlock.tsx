@@ -1,4 +1,5 @@
 import type { Solution } from "../../../../shared/solution";
+import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { classes } from "../../../lib/classes";
@@ -24,7 +25,7 @@ export function WindowsBlock({
       <SectionHead
         aside={
           <>
-            deepest first · <MethodLink to="windows" />
+            <Term word="window">deepest first</Term> · <MethodLink to="windows" />
           </>
         }
       >

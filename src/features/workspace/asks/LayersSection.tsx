@@ -2,6 +2,7 @@ import { useState } from "react";
 import { Check } from "../../../components/choice";
 import { Button } from "../../../components/Button";
 import { PotentialScaleDialog } from "../../../components/PotentialScaleDialog";
+import { Term } from "../../../components/Help";
 import { Row, SectionHead } from "../../../components/text";
 import { type LayerName, layerNames, type Layers, layerWords } from "../../../map/view";
 import { useAsking } from "./context";
@@ -28,7 +29,7 @@ export function LayersSection({
       </Check>
       {layerNames.map((name) => (
         <Check key={name} checked={layers[name]} onChange={(on) => onLayer(name, on)}>
-          {layerWords[name]}
+          {name === "crosscuts" ? <Term word="crosscut">{layerWords[name]}</Term> : layerWords[name]}
         </Check>
       ))}
       <Row label="Potentials in" className="mt-1">

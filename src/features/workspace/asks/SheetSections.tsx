@@ -17,7 +17,7 @@ export function TemperatureSection() {
   const { inputs, edit, settle, readOnly } = useAsking();
   return (
     <section aria-label="Temperature" className="mt-5">
-      <SectionHead>Temperature</SectionHead>
+      <SectionHead aside={<Term word="liquorTemperature">what follows it</Term>}>Temperature</SectionHead>
       <Slider
         label="Temperature of the liquor"
         labelText="Liquor"
@@ -108,7 +108,9 @@ export function FrameSection() {
   const shown = (E: number) => scale.toShown(E);
   return (
     <section aria-label="Frame" className="mt-5">
-      <SectionHead aside={`Eh vs ${scale.short}`}>Frame</SectionHead>
+      <SectionHead aside={`Eh vs ${scale.short}`}>
+        <Term word="frame">Frame</Term>
+      </SectionHead>
       <Ends
         label="pH"
         value={pH}
@@ -160,7 +162,7 @@ export function WaterSection() {
   );
   return (
     <section aria-label="Water band" className="mt-5">
-      <SectionHead aside="always drawn">Water band</SectionHead>
+      <SectionHead aside={<Term word="waterBand">always drawn</Term>}>Water band</SectionHead>
       <Select
         label="Which water lines bound windows"
         labelText="Bounded by"

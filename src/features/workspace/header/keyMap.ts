@@ -1,0 +1,51 @@
+/** Every key and gesture of the plan's screen: what the dialog shows, and what a test holds against the code. */
+export const keyMap: readonly {
+  readonly place: string;
+  readonly keys: readonly (readonly [keys: string, what: string])[];
+}[] = [
+  {
+    place: "Anywhere on the plan",
+    keys: [
+      ["Ctrl Z", "undo"],
+      ["Ctrl Shift Z or Ctrl Y", "redo"],
+      ["Ctrl S", "save a revision"],
+      ["f", "all fields, or shut and open ground"],
+      ["1 to 9", "focus on a metal, in the order of the list; again: all metals"],
+      ["0 or Escape", "all metals again; the crosscuts back at the set point"],
+      ["w", "the next window"],
+      ["r", "revisions"],
+      ["?", "this list"],
+    ],
+  },
+  {
+    place: "On the map",
+    keys: [
+      ["arrow keys", "move the cursor; with Shift five times as far"],
+      ["Enter or a click", "pin the crosscuts there; on a trial: open it"],
+      ["wheel", "zoom at the pointer"],
+      ["drag", "zoom in on a box; a double click, or “whole frame”, goes back"],
+      ["Shift and drag", "move the map; where trials are shown: brush them"],
+    ],
+  },
+  {
+    place: "On the set point or a proposed trial",
+    keys: [
+      ["drag", "move it by hand"],
+      ["arrow keys", "the same by keys; with Shift five times as far"],
+    ],
+  },
+  {
+    place: "In a number",
+    keys: [
+      ["up and down", "step it; with Shift ten times as far"],
+      ["Enter", "take it; Escape brings the last good number back"],
+    ],
+  },
+  {
+    place: "In a table",
+    keys: [
+      ["up and down", "the row above or below"],
+      ["Enter or a double click", "open the row"],
+    ],
+  },
+];
