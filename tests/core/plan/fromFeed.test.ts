@@ -1,9 +1,23 @@
 import { describe, expect, test } from "vitest";
-import { headsOfFeed, likelyTarget, mineralsOfFeed, suggestedLines, tenorFromHead } from "../../../shared/plan/fromFeed";
+import {
+  headsOfFeed,
+  likelyTarget,
+  mineralsOfFeed,
+  suggestedLines,
+  tenorFromHead,
+} from "../../../shared/plan/fromFeed";
 import { feedOf, typed } from "../../support/trials";
 import { library } from "../../support/solver";
 
-const calcine = feedOf({ Zn: "56.2 %", Fe: "8.1 %", Cu: "0.42 %", Cd: "0.21 %", Pb: "1.3 %", Co: "25 g/t", SiO2: "3 %" });
+const calcine = feedOf({
+  Zn: "56.2 %",
+  Fe: "8.1 %",
+  Cu: "0.42 %",
+  Cd: "0.21 %",
+  Pb: "1.3 %",
+  Co: "25 g/t",
+  SiO2: "3 %",
+});
 const { heads } = headsOfFeed(calcine, library);
 
 describe("heads of a feed", () => {
@@ -32,7 +46,9 @@ describe("heads of a feed", () => {
     const [less] = headsOfFeed(feedOf({ Cd: "<0.01 %" }), library).heads;
     expect(less).toMatchObject({ element: "Cd", remark: "taken at its limit" });
     expect(less?.head).toBeCloseTo(1e-4, 12);
-    const blank = { heads: [{ element: "Cu", value: { text: "", unit: "%" }, method: "", laboratory: "", head: true }] };
+    const blank = {
+      heads: [{ element: "Cu", value: { text: "", unit: "%" }, method: "", laboratory: "", head: true }],
+    };
     expect(headsOfFeed(blank, library)).toEqual({ heads: [], skipped: [{ element: "Cu", why: "its assay is blank or cannot be read" }] }); // prettier-ignore
   });
 });
