@@ -7,7 +7,7 @@ export const lightPalette = {
   rule: "#c6d1ca",
   verdigris: "#14735f",
   tint: "#d3ede3",
-  copper: "#ad4e17",
-  water: "#3e6e9e",
+  copper: "#a84b15",
+  water: "#3a6a9a",
   signal: "#bf1e2e",
 } as const;

@@ -1,3 +1,4 @@
+import { LIMITS_ARE, SCREENING } from "./deference";
 /** US exposure values, as the agencies publish them. `fromMemory`: not re-read when recorded. */
 interface Limit {
   readonly authority: "NIOSH" | "OSHA" | "IDLH";
@@ -24,8 +25,7 @@ export interface ExposureLimits {
 export const EXPOSURE_RECORDED = "December 2026";
 
 /** Stands beside every caution, region and limit. */
-export const DEFERENCE =
-  "Screening information. It does not replace a hazard study, the safety data sheets, local law and exposure limits, or the judgement of a licensed engineer or industrial hygienist. Limits shown are US values as of the stated date; check the values in force where you work.";
+export const DEFERENCE = `${SCREENING} ${LIMITS_ARE}`;
 
 const niosh = (value: number, kind: Limit["kind"] = "average", more: Partial<Limit> = {}): Limit => ({
   ...{ authority: "NIOSH", kind, value, unit: "ppm" },

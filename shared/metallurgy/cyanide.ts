@@ -1,3 +1,4 @@
+import { protonatedShare } from "../activity/protonation";
 import { massRatio, type MolarMasses } from "./molarMass";
 
 /** Free acid makes HCN of cyanide: below pH 10.5 the usual caution stands beside every number here, and site procedures,
@@ -5,7 +6,7 @@ import { massRatio, type MolarMasses } from "./molarMass";
  *  @param pH  of the liquor at 25 C     @param pKa  9.21 at 25 C     @returns  %
  *  @source  acid-base equilibrium; pKa 9.21 as quoted from Lu et al. 2002, others give 9.2 to 9.5
  *  @example hcnShare(10.5) // => 4.88 */
-export const hcnShare = (pH: number, pKa = 9.21): number => 100 / (1 + 10 ** (pH - pKa));
+export const hcnShare = (pH: number, pKa = 9.21): number => 100 * protonatedShare(pH, pKa);
 
 /** Henry constant of HCN, K_H = exp(8205.7 / T - 25.323).
  *  @param T  K, 273 to 308     @returns  mol/(L atm)     @source  Ma, Dasgupta, Blackledge & Boss 2010, Environ. Sci. Technol. 44, 3028

@@ -1,10 +1,6 @@
 import type { ReactNode } from "react";
+import { LIMITS_ARE, SCREENING } from "../../shared/hazards/deference";
 import { FormulaText } from "./FormulaText";
-
-/** Stands with every caution: the product screens, it does not clear. */
-export const deference =
-  "Screening information. It does not replace a hazard study, the safety data sheets, local law and exposure limits, or the judgement of a licensed engineer or industrial hygienist.";
-const limitsNote = "Limits shown are US values as of the stated date; check the values in force where you work.";
 
 /** A caution beside the number that calls for it: a bar in the signal colour, text, and the deference wording.
  *  Formulas in plain text are typeset. */
@@ -27,8 +23,8 @@ export function Caution({
       <div>{typeof children === "string" ? <FormulaText text={children} /> : children}</div>
       {defer && (
         <p className="mt-1 text-xs text-muted">
-          {deference}
-          {limits && ` ${limitsNote}`}
+          {SCREENING}
+          {limits && ` ${LIMITS_ARE}`}
         </p>
       )}
     </aside>

@@ -20,7 +20,8 @@ export interface MenuListProps {
 export default function MenuList({ trigger, align, byKeyboard, onClose, children }: MenuListProps) {
   const entered = useRef(!byKeyboard);
   return (
-    <DropdownMenu.Root open onOpenChange={(open) => !open && onClose()}>
+    // A menu is no dialog: the page behind it stays in reach of screen readers, and of the pointer.
+    <DropdownMenu.Root modal={false} open onOpenChange={(open) => !open && onClose()}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
       <DropdownMenu.Portal>
         <DropdownMenu.Content

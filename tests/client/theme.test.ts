@@ -44,7 +44,7 @@ test.each(["light", "dark"] as const)("text of the %s theme keeps 4.5 : 1 on pap
   for (const text of ["ink", "muted", "verdigris", "copper", "water", "signal"] as const)
     for (const ground of ["paper", "sheet"] as const)
       expect(contrast(c[text], c[ground]), `${text} on ${ground}`).toBeGreaterThanOrEqual(4.5);
-  for (const text of ["ink", "muted", "verdigris"] as const)
+  for (const text of ["ink", "muted", "verdigris", "copper", "water", "signal"] as const)
     expect(contrast(c[text], c.tint), `${text} on tint`).toBeGreaterThanOrEqual(4.5);
   expect(contrast(c.paper, c.verdigris), "primary button").toBeGreaterThanOrEqual(4.5);
 });
