@@ -47,6 +47,23 @@ const pKw = csvRows("tests/golden/water.csv");
 const silver = csvRows("shared/data/electrodes.csv").filter((r) => r.id?.startsWith("AGCL-E0-"));
 const iron = (t: number) => -reactionG("Fe^3+(aq) + e^- = Fe^2+(aq)", t) / FARADAY;
 
+/** dE0/dT at 25 C, mV/K, isothermal; de Bethune, Licht and Swendeman, J. Electrochem. Soc. 106, 616 (1959), from memory. */
+const coefficients: readonly [couple: string, half: string, published: number][] = [
+  ["Zn^2+/Zn", "Zn^2+(aq) + 2 e^- = Zn(s)", 0.091],
+  ["Fe^2+/Fe", "Fe^2+(aq) + 2 e^- = Fe(s)", 0.052],
+  ["Cd^2+/Cd", "Cd^2+(aq) + 2 e^- = Cd(s)", -0.093],
+  ["Pb^2+/Pb", "Pb^2+(aq) + 2 e^- = Pb(s)", -0.451],
+  ["Cu^2+/Cu", "Cu^2+(aq) + 2 e^- = Cu(s)", 0.008],
+  ["Fe^3+/Fe^2+", "Fe^3+(aq) + e^- = Fe^2+(aq)", 1.188],
+  ["Ag^+/Ag", "Ag^+(aq) + e^- = Ag(s)", -1],
+  ["O2/H2O", "O2(g) + 4 H^+(aq) + 4 e^- = 2 H2O(l)", -0.846],
+  ["Cl2/Cl^-", "Cl2(g) + 2 e^- = 2 Cl^-(aq)", -1.26],
+];
+const slope = (half: string): number => {
+  const electrons = Math.abs(valueOf(parseReaction(half)).terms.get("e^-") ?? 1);
+  return (-1000 * (reactionG(half, 25.5) - reactionG(half, 24.5))) / (electrons * FARADAY);
+};
+
 const measured: Readonly<Record<string, () => number>> = {
   "pKw, library": () => Math.max(...pKw.map((r) => Math.abs(pK("H2O(l) = H^+(aq) + OH^-(aq)", Number(r.T_C)) - Number(r.pKw__IAPWSR11)))),
   "pKw, entropy correspondence alone": () => largest(steps(60, 200), (t) => pKByEntropy("OH^-(aq)", "H2O(l)", 1, t) - pKwater(kelvin(t))),
@@ -62,6 +79,7 @@ const measured: Readonly<Record<string, () => number>> = {
   }),
   "Ag/AgCl, mV": () => Math.max(...silver.map((r) => Math.abs((-1000 * reactionG("AgCl(s,chlorargyrite) + e^- = Ag(s) + Cl^-(aq)", Number(r.T_C))) / FARADAY - Number(r.E_mV)))),
   "oxygen line at 100 C, mV": () => Math.abs((-1000 * reactionG("O2(g) + 4 H^+(aq) + 4 e^- = 2 H2O(l)", 100)) / 4 / FARADAY - 1167),
+  "dE0/dT of nine couples, mV/K": () => Math.max(...coefficients.map(([, half, published]) => Math.abs(slope(half) - published))),
   "boiling of water, kJ/mol": () => Math.abs(reactionG("H2O(l) = H2O(g)", 100)) / 1000,
   "Kopp's rule, median, %": () => koppQuantile(0.5),
   "Kopp's rule, nine in ten below, %": () => koppQuantile(0.9),
@@ -78,6 +96,11 @@ describe("measured errors", () => {
     const printed = row?.at(-1) ?? "missing in docs/method.md";
     expect(`${name}: ${measure().toFixed(digits(printed))}`).toBe(`${name}: ${printed}`);
   });
+});
+
+test.each(coefficients)("dE0/dT of %s stands on the page with the published one", (couple, half, published) => {
+  const row = cells.find(([first, , , ...rest]) => first === couple && rest.length === 0);
+  expect(row).toEqual([couple, slope(half).toFixed(2), published.toFixed(3)]);
 });
 
 describe("worked examples", () => {
