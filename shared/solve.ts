@@ -9,7 +9,8 @@ import { coupleAt } from "./setpoint/couple";
 import { setPointOf } from "./setpoint/setPoint";
 import type { Field, Point, SetPoint, Solution, WaterLine, Window } from "./solution";
 import type { ChemicalData } from "./species/chemicalData";
-import { warningsOf } from "./warnings";
+import { relevantTo } from "./warnings/relevant";
+import { warningsOf } from "./warnings/warningsOf";
 import { conflictsOf } from "./windows/conflicts";
 import { limitOf, loopsOf, pointsOf, segmentOf, type Ground } from "./windows/limits";
 import { isSliver } from "./windows/pieces";
@@ -43,7 +44,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
     setPoint: windows[0]?.setPoint ?? null,
     conflicts: windows.length === 0 ? conflictsOf(cells, metals, bounds, hazards) : [],
     leftOut: [...prepared.leftOut],
-    warnings: warningsOf(prepared, metals, fields, basis.energies),
+    warnings: warningsOf(prepared, metals, fields, basis, relevantTo(problem, fields, windows, cells, pieces)),
     waterLines: waterLines(basis),
     metals: prepared.metals.map(({ element, requirement, activity, gPerL, gamma }) => ({
       metal: element,

@@ -75,7 +75,7 @@ const holds = (f: Field, pH: number, Eh: number): boolean =>
 
 /** Every metal's ruling species at a point of the frame, in the order of the problem.
  *  @param solution  solved     @param pH, Eh  V vs SHE at T     @returns  one entry a metal; none outside the frame */
-export function speciesAt(solution: Solution, pH: number, Eh: number): SpeciesHere[] {
+export function speciesAt(solution: Pick<Solution, "metals" | "fields">, pH: number, Eh: number): SpeciesHere[] {
   return solution.metals.flatMap(({ metal, requirement }) => {
     const f = solution.fields.find((g) => g.metal === metal && holds(g, pH, Eh));
     return f ? [{ metal, species: f.species, state: f.state, fulfilled: fulfils(requirement, f.state) }] : [];

@@ -1,25 +1,29 @@
-import type { MetalFields } from "./fields/fields";
-import type { Prepared } from "./selection/prepare";
-import type { Field, SolutionWarning } from "./solution";
-import type { EnergiesAtT } from "./species/chemicalData";
+import type { MetalFields } from "../fields/fields";
+import type { Prepared } from "../selection/prepare";
+import type { Basis } from "../planes/grid";
+import type { Field, SolutionWarning } from "../solution";
+import { kineticsWarnings } from "./kinetics";
+import { metastableWarnings } from "./metastable";
+import type { Relevant } from "./relevant";
 
 /** A ligand's total is not drawn down by the metals; beyond this share of it the plan says so (design, method step 3). */
 const DRAWN_DOWN_SHARE = 1 / 3;
 
-/** What the user must know before trusting the picture: fields that rest on a G outside its trusted range, ligands that
- *  the metals would use up, saturation pressure.
- *  @param prepared, metals, fields, energies  of one solution     @returns  sentences with a code
- *  @source  docs/method.md, steps 1 and 3 */
+/** What the user must know before trusting the picture: fields and ligand cells that rest on a G outside its trusted range, ligands that
+ *  the metals would use up, solids that time replaces, steps that are slow, saturation pressure.
+ *  @param prepared, metals, fields, basis, relevant  of one solution     @returns  sentences with a code
+ *  @source  docs/method.md, steps 1 and 3, warnings */
 export function warningsOf(
   prepared: Prepared,
   metals: readonly MetalFields[],
   fields: readonly Field[],
-  energies: EnergiesAtT,
+  basis: Basis,
+  relevant: Relevant,
 ): SolutionWarning[] {
   const warnings: SolutionWarning[] = [];
   const ruling = new Set(fields.map((f) => f.species));
-  for (const id of ruling) {
-    const { warning } = energies.of(id);
+  for (const id of new Set([...ruling, ...relevant.holders])) {
+    const { warning } = basis.energies.of(id);
     if (warning !== null) warnings.push({ code: "TEMPERATURE_TRUST", species: id, text: warning });
   }
   for (const { component, activity } of prepared.components) {
@@ -38,6 +42,11 @@ export function warningsOf(
         });
     }
   }
+  const states = new Map(fields.map((f) => [`${f.metal} ${f.species}`, f.state]));
+  warnings.push(
+    ...metastableWarnings(prepared, basis, relevant),
+    ...kineticsWarnings(prepared, relevant, (metal, id) => states.get(`${metal} ${id}`)),
+  );
   if (prepared.problem.temperatureC > 100)
     warnings.push({
       code: "SATURATION_PRESSURE",
