@@ -54,7 +54,7 @@ describe("METASTABLE", () => {
 describe("KINETICS", () => {
   test("iron's hydrolysis in acid, where a limit rests on it; not on the alkaline side", () => {
     expect(texts(neutral, "KINETICS")).toMatch(/iron hydrolyses over hours.*common practice, no source/);
-    const alkaline = { ...neutral, frame: { pH: [9, 13.5], Eh: [-0.2, 0.6] } };
+    const alkaline: Problem = { ...neutral, frame: { pH: [9, 13.5], Eh: [-0.2, 0.6] } };
     expect(texts(alkaline, "KINETICS")).not.toMatch(/hydrolyses/);
   });
 
