@@ -13,7 +13,7 @@ import { createMailer } from "./features/mailbox/mailer";
 import { createChemistry } from "./features/chemistry/library";
 import { keepVersion, keptVersion } from "./features/chemistry/service";
 import { findByEmail } from "./features/members/service";
-import { refreshOutdatedFigures } from "./features/trials/refresh";
+import { refreshOutdatedFigures, workOffDueLater } from "./features/trials/refresh";
 import { workingsOf } from "./features/trials/workedOut";
 import { demoAccounts } from "./demo/accounts";
 import { seedDemoAtStart } from "./demo/seed";
@@ -47,6 +47,7 @@ export async function startServer(config: Config, log: Logger): Promise<Running>
   const seeded = config.seedDemo ? await seedDemoAtStart(db, chemistry) : 0;
   if (seeded !== 0) log.info({ rows: seeded }, "demo data written");
   const refreshed = refreshOutdatedFigures(db, workingsOf(chemistry));
+  workOffDueLater(db, workingsOf(chemistry));
   if (refreshed > 0) log.info({ trials: refreshed }, "figures worked out anew");
   const app = createApp(
     { db, config, clock, log, sessions, mailer, chemistry, solve },

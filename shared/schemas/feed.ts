@@ -91,4 +91,6 @@ export interface FeedRow extends FeedCreate {
   updatedAt: string;
   deletedAt: string | null;
   trialCount: number;
+  /** trials whose figures still rest on what stood here before the last change: they are being worked out anew */
+  figuresDue: number;
 }

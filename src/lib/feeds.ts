@@ -1,4 +1,4 @@
-import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import { useMutation, useQuery, useQueryClient, type QueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
 import type { feedCreate, FeedRow, feedUpdate } from "../../shared/schemas/feed";
 import { api } from "./api";
@@ -16,12 +16,27 @@ export const useFeeds = (projectId: string | undefined, deleted: DeletedFilter =
     enabled: projectId !== undefined,
   });
 
-export const useFeed = (id: string | undefined) =>
-  useQuery({
+/** A feed; while figures of its trials are worked out anew it is asked again, and everything that shows them once they are. */
+export function useFeed(id: string | undefined) {
+  const client = useQueryClient();
+  return useQuery({
     queryKey: keys.feed(id ?? ""),
-    queryFn: ({ signal }) => api.get<FeedRow>(at(id ?? ""), { signal }),
+    queryFn: async ({ signal }) => {
+      const before = client.getQueryData<FeedRow>(keys.feed(id ?? ""));
+      const feed = await api.get<FeedRow>(at(id ?? ""), { signal });
+      if (before && before.figuresDue > 0 && feed.figuresDue === 0) invalidateFigures(client);
+      return feed;
+    },
     enabled: id !== undefined,
+    refetchInterval: ({ state }) => (state.data && state.data.figuresDue > 0 ? 700 : false),
   });
+}
+
+/** Heads and moisture enter every account of the feed's trials. */
+function invalidateFigures(client: QueryClient): void {
+  void client.invalidateQueries({ queryKey: keys.trials });
+  void client.invalidateQueries({ queryKey: keys.campaigns });
+}
 
 function useFeedMutation<Variables>(mutationFn: (variables: Variables) => Promise<FeedRow>) {
   const client = useQueryClient();
@@ -30,9 +45,7 @@ function useFeedMutation<Variables>(mutationFn: (variables: Variables) => Promis
     onSuccess: (feed) => {
       client.setQueryData(keys.feed(feed.id), feed);
       void client.invalidateQueries({ queryKey: keys.feeds });
-      // heads and moisture enter every account of its trials
-      void client.invalidateQueries({ queryKey: keys.trials });
-      void client.invalidateQueries({ queryKey: keys.campaigns });
+      invalidateFigures(client);
     },
   });
 }

@@ -23,6 +23,7 @@ test("a feed comes back as it was typed, every field, to every role", async () =
     updatedAt: at,
     deletedAt: null,
     trialCount: 0,
+    figuresDue: 0,
   };
   expect(feed).toEqual(wanted);
   const manager = await as("manager");

@@ -7,7 +7,7 @@ import { deleteRow, requireThere, restoreRow, writeRow, type RecordedTable } fro
 import { recordWrite, type Author } from "../history/service";
 import { revisionOf, storedPlan } from "../plans/rows";
 import { projectOf } from "../projects/service";
-import { refreshFigures } from "../trials/refresh";
+import { refreshFigures, workOffDueLater } from "../trials/refresh";
 import { trials } from "../trials/schema";
 import type { Workings } from "../trials/workedOut";
 import { campaignOf } from "./rows";
@@ -120,8 +120,9 @@ export const updateCampaign = (
         requireStagesKept(tx, id, next.stages);
       },
       then: (tx, _before, { code }) => {
-        if (yours.stages)
-          refreshFigures(tx, workings, { campaignId: id }, `Stages of campaign ${code} changed`, author);
+        if (!yours.stages) return;
+        const due = refreshFigures(tx, workings, { campaignId: id }, `Stages of campaign ${code} changed`, author);
+        if (due > 0) workOffDueLater(db, workings);
       },
     },
     author,

@@ -5,6 +5,7 @@ import type { Db } from "../../db/open";
 import { deletedIs, holds, isOf, ordered } from "../../http/listing";
 import { Refusal } from "../../http/refusal";
 import { projects } from "../projects/schema";
+import { figuresDue } from "../trials/refresh";
 import { feeds } from "./schema";
 
 const trialCount = sql<number>`(select count(*) from trials t where t.feed_id = ${feeds.id} and t.deleted_at is null)`;
@@ -16,7 +17,11 @@ const selectFeeds = (db: Db) =>
     .innerJoin(projects, eq(projects.id, feeds.projectId));
 type Selected = NonNullable<ReturnType<ReturnType<typeof selectFeeds>["get"]>>;
 
-const asRow = ({ feed, ...joined }: Selected): FeedRow => ({ ...feed, ...joined });
+const asRow = (db: Db, { feed, ...joined }: Selected): FeedRow => ({
+  ...feed,
+  ...joined,
+  figuresDue: figuresDue(db, feed.id),
+});
 
 type Query = z.output<typeof feedsQuery>;
 const sorts = { name: sql`${feeds.name} collate nocase`, updatedAt: feeds.updatedAt, trialCount } satisfies Record<
@@ -37,12 +42,12 @@ export function listFeeds(db: Db, query: Query): { rows: FeedRow[]; total: numbe
     .offset(query.offset)
     .all();
   const total = db.select({ n: count() }).from(feeds).where(filter).get()?.n ?? 0;
-  return { rows: rows.map(asRow), total };
+  return { rows: rows.map((row) => asRow(db, row)), total };
 }
 
 /** @param path  of the field that names it     @throws Refusal NOT_FOUND */
 export function feedOf(db: Db, id: string, path = "id"): FeedRow {
   const found = selectFeeds(db).where(eq(feeds.id, id)).get();
   if (!found) throw new Refusal("NOT_FOUND", path, `There is no feed ${id}.`);
-  return asRow(found);
+  return asRow(db, found);
 }

@@ -6,7 +6,7 @@ import { Refusal } from "../../http/refusal";
 import { deleteRow, requireThere, restoreRow, writeRow, type RecordedTable } from "../history/rowWrites";
 import { recordWrite, type Author } from "../history/service";
 import { projectOf } from "../projects/service";
-import { refreshFigures } from "../trials/refresh";
+import { refreshFigures, workOffDueLater } from "../trials/refresh";
 import type { Workings } from "../trials/workedOut";
 import { feedOf } from "./rows";
 import { feeds } from "./schema";
@@ -63,7 +63,7 @@ export function createFeed(db: Db, values: FeedCreate, author: Author, own?: { i
 
 const words = new Set(["name", "description", "minerals"]);
 
-/** Figures of its trials follow its head, moisture and the like.
+/** Figures of its trials follow its head, moisture and the like, those of many after the answer.
  *  @throws Refusal NOT_FOUND, STALE, CONFLICT */
 export const updateFeed = (
   db: Db,
@@ -86,7 +86,7 @@ export const updateFeed = (
       then: (tx, _before, feed) => {
         if (Object.keys(yours).every((key) => words.has(key))) return;
         const why = `Feed ${feed.name}: ${Object.keys(yours).join(", ")} changed${reason === "" ? "" : ` (${reason})`}`;
-        refreshFigures(tx, workings, { feedId: id }, why, author);
+        if (refreshFigures(tx, workings, { feedId: id }, why, author) > 0) workOffDueLater(db, workings);
       },
     },
     author,

@@ -230,7 +230,7 @@ function Pair({ pair }: { pair: CampaignPairAnswer }) {
           {left.plan.id === right.plan.id && left.plan.revision === right.plan.revision
             ? ""
             : ` and ${right.plan.name} revision ${right.plan.revision}`}
-          . Two assays of one filtrate are no two trials.
+          . A difference is that of the means before they are rounded. Two assays of one filtrate are no two trials.
         </Note>
       </div>
     </div>

@@ -66,7 +66,7 @@ export function DotStrips({
       </text>
       {feeds.map(({ feedId, feedName, strips }, i) => (
         <g key={feedId} transform={`translate(0 ${tops[i]})`}>
-          <text x={0} y={15} className="fill-ink font-bold">
+          <text x={0} y={15} strokeWidth={5} paintOrder="stroke" className="fill-ink stroke-paper font-bold">
             {feedName}
           </text>
           {strips.map((strip, k) => (

@@ -8,7 +8,7 @@ import { EntryField } from "../../components/EntryField";
 import { FormulaText } from "../../components/FormulaText";
 import { HistoryDialog } from "../../components/HistoryDialog";
 import { ReasonDialog } from "../../components/ReasonDialog";
-import { ErrorNote, Loading } from "../../components/status";
+import { ErrorNote, Loading, Status } from "../../components/status";
 import { Note, Remark, SectionHead } from "../../components/text";
 import { TextArea, TextField } from "../../components/TextField";
 import { useChemistry } from "../../lib/chemistry";
@@ -74,6 +74,9 @@ function FeedEditor({ feed }: { feed: FeedRow }) {
         </Link>
         <h1 className="text-lg">{values.name || "unnamed"}</h1>
         <DraftStatus draft={draft} />
+        {feed.figuresDue > 0 && (
+          <Status>figures of {counted(feed.figuresDue, "trial")} are being worked out anew …</Status>
+        )}
         <span className="flex-1" />
         {!readOnly && (
           <>

@@ -5,11 +5,18 @@ import { api } from "../../lib/api";
 import { allRows } from "../../lib/pages";
 import { keys } from "../../lib/queries";
 
+/** Others open accounts from their letters meanwhile: read anew whenever the page is opened. */
+const fresh = { staleTime: 0 };
+
 export const useMembers = () =>
-  useQuery({ queryKey: keys.members, queryFn: ({ signal }) => allRows<MemberRow>("/members", signal) });
+  useQuery({ queryKey: keys.members, queryFn: ({ signal }) => allRows<MemberRow>("/members", signal), ...fresh });
 
 export const useInvitations = () =>
-  useQuery({ queryKey: keys.invitations, queryFn: ({ signal }) => allRows<InvitationRow>("/invitations", signal) });
+  useQuery({
+    queryKey: keys.invitations,
+    queryFn: ({ signal }) => allRows<InvitationRow>("/invitations", signal),
+    ...fresh,
+  });
 
 function useMembersMutation<Variables, Answer>(mutationFn: (variables: Variables) => Promise<Answer>) {
   const client = useQueryClient();

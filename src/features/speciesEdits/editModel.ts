@@ -32,7 +32,7 @@ export const blankSpecies: SpeciesRow = {
   Cp_c: null,
   Cp_Tmax_K: null,
   ion_class: null,
-  grade: "B",
+  grade: "C",
   source: "",
   note: "",
 };
