@@ -47,6 +47,8 @@ interface Placed {
 }
 
 const C = (t: number) => `${say(t)} °C`;
+/** To a tenth: no electrode is known better. */
+const mV = (volts: number) => `${say(Math.round(volts * 10_000) / 10)} mV`;
 
 function eh(
   reading: TrialReading,
@@ -96,7 +98,7 @@ function eh(
     Eh: converted.value,
     EhUncertainty: Math.max(uncertainty, hot ? HOT_ERROR : 0),
     electrode: series.id,
-    conversion: `${shown} ${offset < 0 ? "\u2212" : "+"} ${say(Math.abs(offset) * 1000)} mV (${series.label} at ${C(at)}) = ${say(converted.value * 1000)} mV vs SHE`,
+    conversion: `${shown} ${offset < 0 ? "\u2212" : "+"} ${mV(Math.abs(offset))} (${series.label} at ${C(at)}) = ${mV(converted.value)} vs SHE`,
     marks,
   };
 }

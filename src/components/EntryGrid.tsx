@@ -48,6 +48,8 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
   };
   const wrong = new Set(problems.map((p) => `${p.row} ${p.column}`));
 
+  const firstTyped = columns.findIndex(({ kind }) => kind === "text");
+
   const put = (r: number, row: Row) => {
     const next = [...rows];
     next[r] = row;
@@ -122,7 +124,8 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
           </thead>
           <tbody>
             {shown.map((row, r) => (
-              <tr key={r} className="border-b border-rule">
+              // What the free row would begin with is no entry yet.
+              <tr key={r} className={classes("border-b border-rule", r >= rows.length && "text-muted")}>
                 {removable && (
                   <td className="pr-1 text-right font-mono text-xs text-muted">{r < rows.length ? r + 1 : ""}</td>
                 )}
@@ -134,6 +137,7 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
                     index={r}
                     place={`${r} ${c}`}
                     label={`${named(r)}, ${column.label}`}
+                    placeholder={r >= rows.length && c === firstTyped ? "new" : undefined}
                     wrong={wrong.has(`${r} ${column.id}`)}
                     readOnly={readOnly}
                     onChange={(next) => put(r, next)}

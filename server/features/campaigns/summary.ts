@@ -85,7 +85,7 @@ export function summaryOf(db: Db, solved: RevisionSolver, id: string): CampaignS
 
 /** "Ag/AgCl 3 mol/L KCl" for its id, so that a list of electrodes parts them by commas. */
 const withNames = (side: Side, electrodes: readonly ElectrodeSeries[]): Side => {
-  const names = new Map(electrodes.map(({ id, label }) => [id, label.replace(", ", " ")]));
+  const names = new Map(electrodes.map(({ id, label }) => [id, label.replaceAll(", ", " ")]));
   const named = (id: string | null) => (id === null ? null : (names.get(id) ?? id));
   return { ...side, trials: side.trials.map((trial) => ({ ...trial, electrode: named(trial.electrode) })) };
 };
