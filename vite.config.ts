@@ -125,8 +125,10 @@ export default defineConfig({
           globalSetup: ["tests/support/builtApp.ts"],
           // One browser at a time: the machines this runs on have two cores.
           fileParallelism: false,
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 60_000,
+          // A screen follows at once where nothing else runs; beside other work it may take a while.
+          expect: { poll: { timeout: 15_000 } },
         },
       },
     ],

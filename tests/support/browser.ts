@@ -50,7 +50,6 @@ export async function openPage({ expected = [], ...options }: PageOptions = {}):
   const context = await (
     await launched()
   ).newContext({ baseURL: baseUrl, viewport: { width: 1280, height: 800 }, ...options });
-  context.setDefaultTimeout(15_000);
   const page = await context.newPage();
   const complaints: string[] = [];
   const provoked = (text: string) => expected.some((status) => text.includes(`status of ${status}`));
