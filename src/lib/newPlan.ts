@@ -94,10 +94,15 @@ export interface FeedPlan {
   temperatureC: number;
   lines: readonly FeedLine[];
   minerals: readonly string[];
+  /** total of a sulfate liquor, mol/L; null: the preset's */
+  sulfate: number | null;
 }
 
 /** The first question of a leach of a feed: its metals at the tenors taken over, its minerals named. */
-export function feedPlanInputs({ preset, temperatureC, lines, minerals }: FeedPlan, data: ChemicalData): PlanInputs {
+export function feedPlanInputs(
+  { preset, temperatureC, lines, minerals, sulfate }: FeedPlan,
+  data: ChemicalData,
+): PlanInputs {
   const base = newPlanInputs(
     { step: "leach", preset, target: lines[0]?.element ?? "", other: null, temperatureC },
     data,
@@ -111,5 +116,6 @@ export function feedPlanInputs({ preset, temperatureC, lines, minerals }: FeedPl
     gammaFrom: "one",
     gamma: null,
   }));
-  return { ...base, metals, feedMinerals: [...minerals] };
+  const ligands = base.ligands.map((l) => (l.component === "S" && sulfate !== null ? { ...l, activity: sulfate } : l));
+  return { ...base, metals, ligands, feedMinerals: [...minerals] };
 }

@@ -3,6 +3,7 @@ import { toProblem } from "../../../shared/plan/toProblem";
 import type { PlanInputs } from "../../../shared/schemas/plan";
 import { roles } from "../../../shared/schemas/problem";
 import { solve } from "../../../shared/solve";
+import { marginWords } from "../../../shared/windows/limitWords";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { Check } from "../../components/choice";
 import { SpeciesName } from "../../components/Formula";
@@ -24,12 +25,24 @@ interface FeedMetalsProps {
   inputs: PlanInputs | null;
   data: ChemicalData;
   solidsPct: number;
+  /** of a sulfate liquor, mol/L; null in others */
+  sulfate: { total: number; typed: boolean; onChange: (total: number) => void } | null;
 }
 
 const asks = { target: "carry", gangue: "at most", watched: "at" } as const;
 
 /** The metals and minerals of a feed as lines of a plan, and the window they give. */
-export function FeedMetals({ lines, edit, minerals, without, onMineral, inputs, data, solidsPct }: FeedMetalsProps) {
+export function FeedMetals({
+  lines,
+  edit,
+  minerals,
+  without,
+  onMineral,
+  inputs,
+  data,
+  solidsPct,
+  sulfate,
+}: FeedMetalsProps) {
   return (
     <>
       <section aria-label="Metals of the plan">
@@ -41,6 +54,21 @@ export function FeedMetals({ lines, edit, minerals, without, onMineral, inputs, 
           Tenor = head × solids / (1 − solids) × extraction at {solidsPct} % w/w solids, a litre of liquor taken as a
           kilogram, gamma 1.
         </Note>
+        {sulfate && (
+          <NumberField
+            label="Sulfate, total"
+            value={sulfate.total}
+            show={(x) => inputText(x, 2)}
+            onCommit={sulfate.onChange}
+            unit="mol/L"
+            above={0}
+            max={100}
+            factor={1.05}
+            {...(sulfate.typed
+              ? {}
+              : { hint: "what the metals dissolved bring with them, or the preset’s where that is more" })}
+          />
+        )}
       </section>
       {(minerals.known.length > 0 || minerals.unknown.length > 0) && (
         <section aria-label="Minerals of the plan">
@@ -91,13 +119,15 @@ function MetalRow({
       <span className="w-24 font-mono text-sm" title={head.remark ?? "head assay"}>
         {head.typed}
       </span>
-      <Select
-        label={`Role of ${element}`}
-        layout="bare"
-        value={role}
-        onChange={(next) => edit({ role: next })}
-        options={roles.map((value) => ({ value, label: value }))}
-      />
+      <span className="w-24">
+        <Select
+          label={`Role of ${element}`}
+          layout="bare"
+          value={role}
+          onChange={(next) => edit({ role: next })}
+          options={roles.map((value) => ({ value, label: value }))}
+        />
+      </span>
       <NumberField
         label={`Extraction of ${element}`}
         layout="bare"
@@ -151,7 +181,7 @@ function Preview({ inputs, data }: { inputs: PlanInputs; data: ChemicalData }) {
         <>
           <b>{counted(windows.length, "window")}.</b> The best runs from pH {fixed(best.pH[0], 1)} to{" "}
           {fixed(best.pH[1], 1)} and {fixed(best.Eh[0], 2)} to {withUnit(fixed(best.Eh[1], 2), "V")} vs SHE; set point
-          pH {fixed(best.setPoint.pH, 2)}, margin {fixed(best.setPoint.margin, 1)} control bands.
+          pH {fixed(best.setPoint.pH, 2)}, margin {fixed(best.setPoint.margin, 1)} {marginWords(best.setPoint)}.
         </>
       ) : (
         <>

@@ -12,10 +12,11 @@ import { ErrorNote } from "../../components/status";
 import { Note } from "../../components/text";
 import { TextField } from "../../components/TextField";
 import { feedPlanInputs } from "../../lib/newPlan";
+import { presetLigands } from "../../lib/presetLigands";
 import { lixiviantName } from "../../lib/planWords";
 import type { CreatePlanDialogProps } from "./CreatePlanDialog";
 import { FeedMetals } from "./FeedMetals";
-import { lineOf, type LineEdits } from "./feedLines";
+import { lineOf, sulfateBrought, type LineEdits } from "./feedLines";
 import { useCreateAndOpen } from "./useCreateAndOpen";
 
 interface FromFeedProps extends CreatePlanDialogProps {
@@ -36,6 +37,7 @@ export function FromFeed({ data, feeds, wanted, projects, projectId, step, onSte
   const [solidsPct, setSolids] = useState(20);
   const [chosen, setTarget] = useState<string | null>(null);
   const [edits, setEdits] = useState<LineEdits>({});
+  const [typedSulfate, setSulfate] = useState<number | null>(null);
   const [without, setWithout] = useState<ReadonlySet<string>>(new Set());
   const feed = feeds.find(({ id }) => id === feedId);
   const found = useMemo(() => (feed ? headsOfFeed(feed, data) : { heads: [], skipped: [] }), [feed, data]);
@@ -49,14 +51,18 @@ export function FromFeed({ data, feeds, wanted, projects, projectId, step, onSte
         : suggestedLines(found.heads, target).map((s) => lineOf(s, found.heads, solidsPct / 100, edits[s.element])),
     [found.heads, target, solidsPct, edits],
   );
+  const sulfate = useMemo(() => {
+    const preset0 = presetLigands(data, preset).find((l) => l.component === "S");
+    return preset === "sulfate" && preset0 ? (typedSulfate ?? sulfateBrought(lines, data, preset0.activity)) : null;
+  }, [data, preset, lines, typedSulfate]);
   const inputs = useMemo(() => {
     const drawn = lines.filter((l) => l.drawn);
     if (drawn.length === 0) return null;
     return feedPlanInputs(
-      { preset, temperatureC, lines: drawn, minerals: minerals.known.filter((id) => !without.has(id)) },
+      { preset, temperatureC, lines: drawn, minerals: minerals.known.filter((id) => !without.has(id)), sulfate },
       data,
     );
-  }, [lines, preset, temperatureC, minerals, without, data]);
+  }, [lines, preset, temperatureC, minerals, without, sulfate, data]);
 
   function submit() {
     if (target === null || name.trim() === "") return;
@@ -164,6 +170,7 @@ export function FromFeed({ data, feeds, wanted, projects, projectId, step, onSte
           inputs={inputs}
           data={data}
           solidsPct={solidsPct}
+          sulfate={sulfate === null ? null : { total: sulfate, typed: typedSulfate !== null, onChange: setSulfate }}
         />
       )}
       {step === 2 && found.skipped.length > 0 && (

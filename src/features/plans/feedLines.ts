@@ -1,3 +1,4 @@
+import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { SUGGESTED_EXTRACTION, tenorFromHead, type HeadOf, type SuggestedLine } from "../../../shared/plan/fromFeed";
 
 /** A metal of the new plan as it stands in the table. */
@@ -32,4 +33,13 @@ export function lineOf(
     gPerL: edit.gPerL ?? Math.min(1000, Math.max(1e-9, tenor)),
     typedTenor: edit.gPerL !== undefined,
   };
+}
+
+/** Sulfate that comes with the metals dissolved, one to a metal, as MSO4; never less than the preset's total.
+ *  @returns  mol/L, two figures */
+export function sulfateBrought(lines: readonly ShownLine[], data: ChemicalData, least: number): number {
+  const brought = lines
+    .filter((l) => l.drawn && l.role !== "gangue")
+    .reduce((sum, { element, gPerL }) => sum + gPerL / (data.molarMass.get(element) ?? Infinity), 0);
+  return Math.min(100, Number(Math.max(least, brought).toPrecision(2)));
 }
