@@ -44,7 +44,7 @@ export default function ChemistryPage() {
   const data = chemistry.data;
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 border-b border-rule px-5 py-2">
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
         <h1 className="text-lg">Chemistry</h1>
         <Note>
           {counted(data.species.size, "species", "species")}, {counted(data.tables.references.length, "source")}. Data
@@ -52,7 +52,7 @@ export default function ChemistryPage() {
           <span className="font-mono text-ink" title={data.version}>
             {data.version.slice(0, 12)}
           </span>
-          ; a saved revision of a plan keeps the version it used.
+          <span className="max-lg:hidden">; a saved revision of a plan keeps the version it used</span>.
         </Note>
         <span className="flex-1" />
         <AddSpecies data={data} />

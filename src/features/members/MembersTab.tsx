@@ -15,7 +15,7 @@ const columns: readonly Column<MemberRow>[] = [
     value: (m) => m.name,
     cell: (m) => <span className="font-bold">{m.name}</span>,
   },
-  { id: "email", header: "e-mail", width: "38%", value: (m) => m.email },
+  { id: "email", header: "e-mail", width: "38%", wide: true, value: (m) => m.email },
   { id: "role", header: "role", width: "9em", value: (m) => m.role },
   { id: "state", header: "account", width: "6em", value: (m) => (m.disabled ? "closed" : "open") },
   {

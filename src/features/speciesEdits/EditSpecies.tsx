@@ -32,7 +32,7 @@ export default function EditSpecies({ data, id, version, open, onOpenChange, onS
   const before = id === null ? null : (data.species.get(id)?.row ?? null);
   const rule = id === null ? undefined : data.tables.extrapolation.find((r) => r.id === id);
   const add = useAddSpeciesEdit();
-  const [row, setRow] = useState<SpeciesRow>(before ? { ...before, source: "", note: before.note } : blankSpecies);
+  const [row, setRow] = useState<SpeciesRow>(before ? { ...before, source: "", note: "" } : blankSpecies);
   const [solid, setSolid] = useState("");
   const [citation, setCitation] = useState("");
   const [reason, setReason] = useState("");

@@ -44,65 +44,67 @@ export function TrialHeader({ trial, draft, feed, readOnly, onDialog }: TrialHea
       <span className="min-w-0 flex-1 truncate">
         <DraftStatus draft={draft} />
       </span>
-      {steps.map((step) => (
-        <Button
-          key={step.label}
-          kind={step.primary && !primary ? "primary" : "plain"}
-          disabled={busy}
-          onClick={() => take(step)}
-        >
-          {step.label}
-        </Button>
-      ))}
-      {trial.status === "approved" && mayReview && trial.deletedAt === null && (
-        <Button onClick={() => onDialog({ kind: "reopen" })}>Open again</Button>
-      )}
-      {trial.deletedAt !== null && mayWrite && (
-        <Button kind="primary" onClick={() => onDialog({ kind: "restore" })}>
-          Restore
-        </Button>
-      )}
-      {!readOnly && (
-        <>
-          <ButtonLink to={`/bench/${trial.id}`}>Bench</ButtonLink>
-          <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl+Z">
-            Undo
+      <span className="ml-auto flex flex-wrap justify-end gap-x-3 gap-y-2 lg:flex-nowrap">
+        {steps.map((step) => (
+          <Button
+            key={step.label}
+            kind={step.primary && !primary ? "primary" : "plain"}
+            disabled={busy}
+            onClick={() => take(step)}
+          >
+            {step.label}
           </Button>
-        </>
-      )}
-      <Menu trigger={<Button>More</Button>}>
+        ))}
+        {trial.status === "approved" && mayReview && trial.deletedAt === null && (
+          <Button onClick={() => onDialog({ kind: "reopen" })}>Open again</Button>
+        )}
+        {trial.deletedAt !== null && mayWrite && (
+          <Button kind="primary" onClick={() => onDialog({ kind: "restore" })}>
+            Restore
+          </Button>
+        )}
         {!readOnly && (
           <>
-            <MenuItem disabled={!draft.canRedo} onSelect={draft.redo} note="Ctrl+Shift+Z">
-              Redo
-            </MenuItem>
-            <MenuItem disabled={!primary} onSelect={draft.discard}>
-              Back to what is saved
-            </MenuItem>
-            <MenuSeparator />
+            <ButtonLink to={`/bench/${trial.id}`}>Bench</ButtonLink>
+            <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl+Z">
+              Undo
+            </Button>
           </>
         )}
-        <MenuItem onSelect={() => onDialog({ kind: "history" })}>History …</MenuItem>
-        <MenuItem onSelect={() => window.print()}>Print …</MenuItem>
+        <Menu trigger={<Button>More</Button>}>
+          {!readOnly && (
+            <>
+              <MenuItem disabled={!draft.canRedo} onSelect={draft.redo} note="Ctrl+Shift+Z">
+                Redo
+              </MenuItem>
+              <MenuItem disabled={!primary} onSelect={draft.discard}>
+                Back to what is saved
+              </MenuItem>
+              <MenuSeparator />
+            </>
+          )}
+          <MenuItem onSelect={() => onDialog({ kind: "history" })}>History …</MenuItem>
+          <MenuItem onSelect={() => window.print()}>Print …</MenuItem>
+          {!readOnly && (
+            <>
+              <MenuSeparator />
+              <MenuItem danger onSelect={() => onDialog({ kind: "delete" })}>
+                Delete …
+              </MenuItem>
+            </>
+          )}
+        </Menu>
         {!readOnly && (
-          <>
-            <MenuSeparator />
-            <MenuItem danger onSelect={() => onDialog({ kind: "delete" })}>
-              Delete …
-            </MenuItem>
-          </>
+          <Button
+            kind={primary ? "primary" : "plain"}
+            disabled={!primary || busy}
+            title="Ctrl+S"
+            onClick={() => void draft.save()}
+          >
+            {status === "waiting" ? "Try again" : "Save"}
+          </Button>
         )}
-      </Menu>
-      {!readOnly && (
-        <Button
-          kind={primary ? "primary" : "plain"}
-          disabled={!primary || busy}
-          title="Ctrl+S"
-          onClick={() => void draft.save()}
-        >
-          {status === "waiting" ? "Try again" : "Save"}
-        </Button>
-      )}
+      </span>
     </div>
   );
 }
