@@ -22,7 +22,7 @@ const withoutJsonSchema: Plugin = {
 
 /** Modules of src/lib and src/components that nearly every page is made of. */
 const parts = [
-  "api|chemistry|classes|failure|format|glossary|metals|pages|planWords|plans|potential|queries|title|units",
+  "api|chemistry|classes|failure|format|glossary|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units",
   "Button|Caution|ComponentName|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
   "choice|status|text|useLate|whenOpened",
 ];
@@ -50,7 +50,7 @@ export default defineConfig({
             // What only the map needs comes with Plotly.
             {
               name: "map",
-              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|TrialsLayer|WindowMap|zoom)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
+              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|paintTrials|TrialsLayer|WindowMap|zoom)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },
@@ -71,7 +71,7 @@ export default defineConfig({
             // The solver and what it says: asked for together wherever a plan is solved, on the page and in its worker.
             {
               name: "solver",
-              test: /node_modules[\\/]robust-predicates|shared[\\/](analysis|solve|warnings|fields[\\/]|geometry[\\/]|gibbs[\\/]|hazards[\\/](?!gases|words|presetCautions)|planes[\\/]|selection[\\/]|setpoint[\\/]|windows[\\/]|reach[\\/](reagents|oxidants|reductants|liquors|verdict|equilibrium)|plan[\\/]toProblem|activity[\\/](davies|debyeHuckel)|species[\\/](library|checkSpecies|reaction|tables)\.|reactions[\\/](balance|wholeNumbers|desk|redoxReagents|elements|names|readReaction))/,
+              test: /node_modules[\\/]robust-predicates|shared[\\/](analysis|solve|warnings|fields[\\/]|geometry[\\/]|gibbs[\\/]|hazards[\\/](?!gases|words|presetCautions)|planes[\\/]|selection[\\/]|setpoint[\\/]|windows[\\/]|reach[\\/](reagents|oxidants|reductants|liquors|verdict|equilibrium)|plan[\\/]toProblem|activity[\\/](davies|debyeHuckel)|species[\\/](library|checkSpecies|reaction|tables)\.|reactions[\\/](atTemperature|balance|wholeNumbers|redoxReagents|elements|names))/,
               includeDependenciesRecursively: false,
               priority: 1,
             },

@@ -1,5 +1,5 @@
 import { FARADAY, GAS_CONSTANT, LN10 } from "../constants";
-import { reactionAtT } from "../reactions/desk";
+import { reactionAtT } from "../reactions/atTemperature";
 import { redoxReagentById } from "../reactions/redoxReagents";
 import type { ChemicalData } from "../species/chemicalData";
 import { kelvin } from "../units";

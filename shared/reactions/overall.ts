@@ -6,7 +6,7 @@ import type { ChemicalData, Species } from "../species/chemicalData";
 import { kelvin } from "../units";
 import { reactionText } from "./balance";
 import { demandOf, madeBy, type Acid, type Amount, type Base, type Demand } from "./demand";
-import { reactionAtT, type ReactionAtT } from "./desk";
+import { reactionAtT, type ReactionAtT } from "./atTemperature";
 import { halfReaction, joined, withHydroxide, type Coefficients } from "./halfReaction";
 import { unknownSpecies } from "./names";
 import { redoxReagentById, type RedoxReagent } from "./redoxReagents";

@@ -27,6 +27,7 @@ export const router = createBrowserRouter([
       { index: true, element: <Navigate to="/plans" replace /> },
       screen("plans", () => import("../features/plans/PlansPage")),
       screen("plans/:planId", () => import("../features/workspace/WorkspacePage")),
+      screen("plans/:planId/compare", () => import("../features/workspace/compare/ComparePage")),
       screen("chemistry", () => import("../features/chemistry/ChemistryPage")),
       screen("chemistry/:speciesId", () => import("../features/chemistry/ChemistryPage")),
       screen("reactions", () => import("../features/reactions/ReactionsPage")),

@@ -2,7 +2,7 @@ import { electrodeSeries } from "../../shared/electrodes/series";
 import { useChemistry } from "../lib/chemistry";
 import { celsius, fixed, withUnit } from "../lib/format";
 import { usePotentialScale } from "../lib/potential";
-import { usePreferences } from "../lib/preferences";
+import { useScaleChoice } from "../lib/scaleChoice";
 import { Segmented } from "./choice";
 import { FormulaText } from "./FormulaText";
 import { NumberField } from "./NumberField";
@@ -12,7 +12,7 @@ import { Remark, Row } from "./text";
 /** The scale on which potentials are shown, remembered for the member: unit, electrode, and the electrode's temperature.
  *  @param liquorC  of the plan on the screen, where there is one */
 export function PotentialScaleFields({ liquorC }: { liquorC?: number }) {
-  const [preferences, change] = usePreferences();
+  const [preferences, change] = useScaleChoice();
   const { data } = useChemistry();
   const scale = usePotentialScale(liquorC);
   const series = data ? electrodeSeries(data.tables) : [];

@@ -3,7 +3,7 @@ import { referencePotential } from "../../shared/electrodes/convert";
 import { electrodeSeries, type ElectrodeSeries } from "../../shared/electrodes/series";
 import { useChemistry } from "./chemistry";
 import { celsius, fixed, signed, withUnit } from "./format";
-import { usePreferences } from "./preferences";
+import { useScaleChoice } from "./scaleChoice";
 
 export type PotentialUnit = "V" | "mV";
 
@@ -106,7 +106,7 @@ const roomC = 25;
 /** The member's potential scale; a stable object while nothing changes.
  *  @param liquorC  temperature of the liquor: where the electrode stands in it ("at the liquor's temperature") */
 export function usePotentialScale(liquorC: number = roomC): PotentialScale {
-  const [{ potentialUnit, potentialScale: chosen, electrodeTemperatureC }] = usePreferences();
+  const [{ potentialUnit, potentialScale: chosen, electrodeTemperatureC }] = useScaleChoice();
   const { data } = useChemistry(undefined, chosen !== "SHE");
   const tC = electrodeTemperatureC ?? liquorC;
   return useMemo(() => {

@@ -9,6 +9,7 @@ import type { CursorStore } from "./cursorStore";
 import { mapFigure } from "./figure";
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import Plot from "./Plot";
+import type { PlotTrace } from "./plotTypes";
 import { haloStyle } from "./texts";
 import type { ProposalStore } from "./proposalStore";
 import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
@@ -33,6 +34,11 @@ export interface WindowMapProps {
   trials?: ShownTrials | null;
   /** next trials, numbered, movable */
   proposals?: ProposalStore | null;
+  /** what is in sight, V vs SHE; null: the whole frame */
+  zoom: Frame | null;
+  onZoom: (to: Frame | null) => void;
+  /** traces of the caller's own over the figure, potentials on the shown scale */
+  overlay?: readonly PlotTrace[];
 }
 
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
@@ -40,16 +46,33 @@ const REST = 160;
 
 /** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
  *  It brings Plotly along: import it late. */
-export default function WindowMap({ asked, view, cursor, onPick, label, handle, trials, proposals }: WindowMapProps) {
+export default function WindowMap({
+  asked,
+  view,
+  cursor,
+  onPick,
+  label,
+  handle,
+  trials,
+  proposals,
+  zoom,
+  onZoom,
+  overlay,
+}: WindowMapProps) {
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
   const { frame, scale } = view;
-  const [zoom, setZoom] = useState<{ of: string; frame: Frame } | null>(null);
   const [resets, setResets] = useState(0);
-  // A zoom belongs to one frame on one scale; the axes go back when either changes, and so must this.
-  const zoomOf = [frame.pH, frame.Eh, scale.unit, scale.short].flat().join(" ");
-  const visible = zoom?.of === zoomOf ? zoom.frame : frame;
+  const visible = zoom ?? frame;
+  // A zoom belongs to one frame: another frame is seen whole.
+  const frameText = [frame.pH, frame.Eh].flat().join(" ");
+  const zoomedIn = useRef(frameText);
+  useEffect(() => {
+    if (zoomedIn.current === frameText) return;
+    zoomedIn.current = frameText;
+    onZoom(null);
+  }, [frameText, onZoom]);
   const crosscuts = view.layers.crosscuts && content.through !== null;
   const { reach } = view.layers;
 
@@ -69,8 +92,12 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
     if (!sheet) return null;
     const made = mapFigure(content, sheet, { ...view, visible });
     // Plotly keeps a zoom while this text stands; one more reset is another text.
-    return { ...made, layout: { ...made.layout, uirevision: `${made.layout.uirevision} ${resets}` } };
-  }, [content, sheet, view, visible, resets]);
+    return {
+      ...made,
+      data: overlay ? [...made.data, ...overlay] : made.data,
+      layout: { ...made.layout, uirevision: `${made.layout.uirevision} ${resets}` },
+    };
+  }, [content, sheet, view, visible, resets, overlay]);
 
   const [live] = useState(() => new MovingView());
   const rest = useRef(0);
@@ -90,11 +117,11 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
       live.set(next ?? frame);
       clearTimeout(rest.current);
       rest.current = window.setTimeout(() => {
-        setZoom(next && { of: zoomOf, frame: next });
+        onZoom(next);
         requestAnimationFrame(() => live.set(null));
       }, REST);
     },
-    [live, moved, frame, zoomOf],
+    [live, moved, frame, onZoom],
   );
   const pick = useCallback(
     (at: Point | null) => {
@@ -114,9 +141,9 @@ export default function WindowMap({ asked, view, cursor, onPick, label, handle, 
   const reset = useCallback(() => {
     clearTimeout(rest.current);
     live.set(null);
-    setZoom(null);
+    onZoom(null);
     setResets((n) => n + 1);
-  }, [live]);
+  }, [live, onZoom]);
   const onDrawn = useCallback(() => {
     if (holder.current) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
   }, []);

@@ -127,7 +127,10 @@ export function Cursor({ sheet, visible, through, store, holder, onPick, onReset
     element.addEventListener("pointerdown", onDown, true);
     window.addEventListener("pointerup", onUp, true);
     element.addEventListener("keydown", onKey);
+    // Two maps with one store move together.
+    const stop = store.subscribe(() => place(store.get()));
     return () => {
+      stop();
       cancelAnimationFrame(frame);
       clearTimeout(click);
       element.removeEventListener("pointermove", onMove, true);

@@ -111,7 +111,7 @@ function annotations(content: MapContent, sheet: Sheet, view: MapView): PlotAnno
 
 /** Axes, ranges and words around the map. `uirevision` changes with frame and scale only, so a zoom outlives every other change. */
 export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): PlotLayout {
-  const { frame, colours, scale } = view;
+  const { frame, visible, colours, scale } = view;
   const place = domains(sheet, sheet.map);
   const axis: Partial<PlotAxis> = {
     showgrid: false,
@@ -161,11 +161,11 @@ export function mapLayout(content: MapContent, sheet: Sheet, view: MapView): Plo
     uirevision: [frame.pH, frame.Eh, scale.unit, scale.short].flat().join(" "),
     font: { family: MONO, size: 12, color: colours.ink },
     hoverlabel: { font: { family: MONO, size: 12 } },
-    xaxis: { ...axis, domain: place.x, range: [frame.pH[0], frame.pH[1]], anchor: "y", nticks: 9 },
+    xaxis: { ...axis, domain: place.x, range: [visible.pH[0], visible.pH[1]], anchor: "y", nticks: 9 },
     yaxis: {
       ...axis,
       domain: place.y,
-      range: range(frame.Eh),
+      range: range(visible.Eh),
       anchor: "x",
       nticks: 9,
       tickformat: scale.unit === "V" ? ".1f" : "d",

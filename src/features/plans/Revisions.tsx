@@ -11,7 +11,7 @@ import type { RevisionsDialogProps } from "./RevisionsDialog";
 
 /** Every saved state of a plan, newest first, and what each changed from the one before. `onTake` brings the inputs of an
  *  earlier one back into the plan that is open; `onLook` opens it as it was, with the data it froze. */
-export default function Revisions({ plan, open, onOpenChange, onTake, onLook }: RevisionsDialogProps) {
+export default function Revisions({ plan, open, onOpenChange, onTake, onLook, onCompare }: RevisionsDialogProps) {
   const revisions = useRevisions(plan.id, open);
   const [number, setNumber] = useState<number>();
   const rows = revisions.data ?? [];
@@ -27,6 +27,9 @@ export default function Revisions({ plan, open, onOpenChange, onTake, onLook }: 
         shown &&
         (onLook ?? onTake) && (
           <>
+            {onCompare && (
+              <Button onClick={() => onCompare(shown)}>Compare revision {shown.number} with the plan</Button>
+            )}
             {onLook && <Button onClick={() => onLook(shown)}>Open revision {shown.number} as it was</Button>}
             {onTake && (
               <Button

@@ -9,6 +9,8 @@ export interface RevisionsDialogProps {
   onTake?: (revision: RevisionRow) => void;
   /** opens a revision as it was, with the data it froze */
   onLook?: (revision: RevisionRow) => void;
+  /** puts a revision beside the plan as it stands */
+  onCompare?: (revision: RevisionRow) => void;
 }
 
 export const RevisionsDialog = whenOpened<RevisionsDialogProps>(() => import("./Revisions"));

@@ -1,5 +1,5 @@
 import { lazy, Suspense, useMemo, useRef } from "react";
-import type { ReactionValues } from "../../../shared/reactions/desk";
+import type { ReactionValues } from "../../../shared/reactions/atTemperature";
 import { Loading } from "../../components/status";
 import { useThemeColours } from "../../lib/theme";
 import { useSize } from "../../map/useSize";

@@ -1,5 +1,6 @@
 import { useState } from "react";
-import type { DeskAnswer, ReactionValues, TermGrade } from "../../../shared/reactions/desk";
+import type { ReactionValues, TermGrade } from "../../../shared/reactions/atTemperature";
+import type { DeskAnswer } from "../../../shared/reactions/desk";
 import { Button } from "../../components/Button";
 import { Segmented } from "../../components/choice";
 import { SpeciesName } from "../../components/Formula";

@@ -1,4 +1,4 @@
-import type { ReactionValues } from "../../../shared/reactions/desk";
+import type { ReactionValues } from "../../../shared/reactions/atTemperature";
 import type { ThemeColours } from "../../lib/theme";
 import { type Figure, type PlotAxis, trace } from "../../map/plotTypes";
 import { MONO } from "../../map/view";

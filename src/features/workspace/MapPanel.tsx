@@ -1,5 +1,6 @@
 import { lazy, Suspense } from "react";
 import type { PlanInputs } from "../../../shared/schemas/plan";
+import type { Frame } from "../../../shared/schemas/problem";
 import type { Point } from "../../../shared/solution";
 import { Button } from "../../components/Button";
 import { Loading } from "../../components/status";
@@ -33,6 +34,9 @@ export interface MapPanelProps {
   trials: ShownTrials | null;
   /** null while nobody asked */
   proposals: ProposalStore | null;
+  /** what is in sight; null: the whole frame */
+  zoom: Frame | null;
+  onZoom: (to: Frame | null) => void;
 }
 
 /** The middle: what stands under the cursor, and the map. */
@@ -87,6 +91,8 @@ export function MapPanel(props: MapPanelProps) {
             onPick={onPin}
             trials={trials}
             proposals={proposals}
+            zoom={props.zoom}
+            onZoom={props.onZoom}
             handle={
               setPoint && onMoveSetPoint
                 ? {

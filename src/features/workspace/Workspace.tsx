@@ -1,4 +1,4 @@
-import { useCallback, useMemo, useState } from "react";
+import { lazy, Suspense, useCallback, useMemo, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import { freeAcidOf } from "../../../shared/plan/freeAcidOf";
 import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
@@ -8,7 +8,6 @@ import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { DataChanged } from "../../components/DataChanged";
 import { FormulaText } from "../../components/FormulaText";
 import { Remark } from "../../components/text";
-import { messageOf } from "../../lib/failure";
 import { usePotentialScale } from "../../lib/potential";
 import { useMay } from "../../lib/session";
 import { printColours, useThemeColours } from "../../lib/theme";
@@ -21,14 +20,18 @@ import { GasLayers, PracticeList } from "./asks/GasLayers";
 import { AsksPanel } from "./asks/AsksPanel";
 import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
-import { type ExportKind, FrozenBanner, WorkspaceHeader } from "./header/WorkspaceHeader";
+import { FrozenBanner, type Said, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./MapPanel";
+import { useLink } from "./address/useLink";
+import type { Opened } from "./address/useOpened";
 import { applyOpening, holdSetPoint } from "./model/adviceEdit";
+import { sameInputs } from "./model/history";
 import { useAdvice, useRobust } from "./model/useAsked";
+import { useExport } from "./model/useExport";
 import { useDraft } from "./model/useDraft";
-import { useKeys } from "./model/useKeys";
+import { useLook } from "./model/useLook";
+import { useWorkspaceKeys } from "./model/useWorkspaceKeys";
 import { useMapModel } from "./model/useMapModel";
-import { useMapSettings, useReagents } from "./model/useMapSettings";
 import { useAnalysis, useGases, useHeld } from "./model/usePoint";
 import { usePrinting } from "./model/usePrinting";
 import { useSolved } from "./model/useSolved";
@@ -38,21 +41,33 @@ import { NextTrials } from "../trials/nextTrials/NextTrials";
 import { AnswersOrTrials } from "../trials/planTrials/AnswersOrTrials";
 import { usePlanTrials } from "../trials/planTrials/usePlanTrials";
 
+const loadBanners = () => import("./address/LinkBanners");
+const ProposalBanner = lazy(async () => ({ default: (await loadBanners()).ProposalBanner }));
+const IgnoredBanner = lazy(async () => ({ default: (await loadBanners()).IgnoredBanner }));
+
 export interface WorkspaceProps {
   plan: PlanRow;
   /** a saved state that is looked at; without it the plan is worked on */
   frozen: RevisionRow | null;
   data: ChemicalData;
+  /** what the address brought */
+  start: Opened;
 }
 
 const NONE: readonly Outline[] = [];
 
 /** A plan on the table: left asks, middle shows, right answers. */
-export function Workspace({ plan, frozen, data }: WorkspaceProps) {
+export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const navigate = useNavigate();
   const mayWrite = useMay("writePlans");
   const draft = useDraft(plan.id, plan.latest);
-  const inputs = frozen ? frozen.inputs : draft.inputs;
+  const [proposal, setProposal] = useState(() =>
+    start.settings && !sameInputs(start.settings, draft.inputs) ? start.settings : null,
+  );
+  const [ignored, setIgnored] = useState(start.ignored);
+  const inputs = frozen?.inputs ?? proposal ?? draft.inputs;
+  const fixed = frozen !== null || proposal !== null;
+  const look = useLook(start.view, plan.id, inputs, proposal !== null);
   const { problem, solution: solved, failure } = useSolved(inputs, data);
   const analysis = useAnalysis(problem, data);
   const { solution, held } = useHeld(inputs, solved, analysis);
@@ -61,51 +76,38 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
   const scale = usePotentialScale(inputs.temperatureC);
   const theme = useThemeColours();
   const printing = usePrinting();
-  const { layers, setLayer, plain, setPlain } = useMapSettings();
-  const { reagents, choose } = useReagents(plan.id, inputs);
+  const { layers, setLayer, plain, setPlain } = look.map;
+  const { reagents, choose, focus, setFocus, setPinned } = look;
+  const { pin: pinned } = look.view;
   const [cursor] = useState(() => new CursorStore());
   const [proposals] = useState(() => new ProposalStore());
   const proposing = useTold(proposals.asked) !== null;
-  const [wantedFocus, setFocus] = useState<string | null>(null);
-  const [wantedWindow, setWindow] = useState(0);
-  const [pinned, setPinned] = useState<Point | null>(null);
   const [dialog, setDialog] = useState<DialogName | null>(null);
-  const [exporting, setExporting] = useState<{ text: string; bad: boolean } | null>(null);
-  const focus = inputs.metals.some((m) => m.element === wantedFocus) ? wantedFocus : null;
+  const [said, setSaid] = useState<Said | null>(null);
+  const link = useLink(plan, frozen, inputs, look.seen, setSaid);
   const count = solution?.windows.length ?? 0;
-  const chosen = held?.index ?? Math.min(wantedWindow, Math.max(0, count - 1));
-  const { gases, choose: chooseGas } = useGases(analysis, solution?.windows[chosen] ?? null);
+  const chosen = held?.index ?? Math.min(look.view.window, Math.max(0, count - 1));
+  const { gases, choose: chooseGas } = useGases(analysis, solution?.windows[chosen] ?? null, look.switched);
   const drawnGases = useMemo(() => gases?.map.regions.filter((r) => gases.shown.has(r.gas)) ?? [], [gases]);
   // the same empty list at every step of a search, so that the map stands still meanwhile
   const robustOutlines = robust.state === "there" ? robust.value.windows : NONE;
 
   function chooseWindow(index: number) {
-    setWindow(index);
+    look.setWindow(index);
     // A point held elsewhere would bring its own window back.
-    if (held && held.index !== index && frozen === null) draft.edit(holdSetPoint(null));
+    if (held && held.index !== index && !fixed) draft.edit(holdSetPoint(null));
   }
 
-  useKeys([
-    { key: "z", ctrl: true, shift: false, run: draft.undo },
-    { key: "z", ctrl: true, shift: true, run: draft.redo },
-    { key: "y", ctrl: true, run: draft.redo },
-    { key: "s", ctrl: true, run: () => mayWrite && !frozen && draft.changed && setDialog("save") },
-    { key: "f", run: () => setPlain(!plain) },
-    { key: "r", run: () => setDialog("revisions") },
-    { key: "w", run: () => count > 1 && chooseWindow((chosen + 1) % count) },
-    { key: "?", run: () => setDialog("keys") },
-    ...["0", "escape"].map((key) => ({
-      key,
-      run: () => {
-        setFocus(null);
-        setPinned(null);
-      },
-    })),
-    ...inputs.metals.slice(0, 9).map(({ element }, i) => ({
-      key: String(i + 1),
-      run: () => setFocus(focus === element ? null : element),
-    })),
-  ]);
+  useWorkspaceKeys(
+    draft,
+    look,
+    inputs.metals.map((m) => m.element),
+    fixed,
+    mayWrite,
+    { count, chosen, choose: chooseWindow },
+    setDialog,
+    link.copy,
+  );
 
   const setPoint = solution?.windows[chosen]?.setPoint ?? null;
   const asking = useMemo(
@@ -119,16 +121,24 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
       setPoint,
       scale,
       // on paper a control is only its value
-      readOnly: frozen !== null || printing,
+      readOnly: fixed || printing,
       focus,
       onFocus: setFocus,
     }),
-    [inputs, draft.edit, draft.settle, data, solution, failure, setPoint, scale, frozen, printing, focus],
+    [inputs, draft.edit, draft.settle, data, solution, failure, setPoint, scale, fixed, printing, focus, setFocus],
   );
 
   const { ligands, temperatureC } = inputs;
   const freeAcid = useMemo(() => freeAcidOf(data, { ligands, temperatureC }), [data, ligands, temperatureC]);
-  const trials = usePlanTrials(plan.id, inputs, solution, data, layers.trials || proposing);
+  const trials = usePlanTrials(
+    plan.id,
+    inputs,
+    solution,
+    data,
+    layers.trials || proposing,
+    look.trials,
+    look.lookAtTrials,
+  );
   const shownTrials = trials.shown;
   const map = useMapModel({
     inputs,
@@ -148,63 +158,28 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
     freeAcid,
   });
   const { edit } = draft;
-  const mayMove = frozen === null;
+  const mayMove = !fixed;
   const moveSetPoint = useCallback((at: Point) => edit(holdSetPoint(at), "set point"), [edit]);
 
   const unconfirmed = cautionsFor(hazardContext(inputs, solution?.windows[chosen]?.setPoint ?? null))
     .filter((c) => c.confirm !== null && (draft.procedures[c.code] ?? "").trim() === "")
     .map((c) => c.code);
 
-  const onExport = useCallback(
-    (kind: ExportKind) => {
-      if (!solution || !map) return;
-      setExporting({ text: "Making the file …", bad: false });
-      const state = frozen
-        ? `revision ${frozen.number}`
-        : draft.changed
-          ? `draft on revision ${draft.basedOn}`
-          : `revision ${plan.latest.number}`;
-      import("./model/exportPlan")
-        .then(({ exportPlan }) =>
-          exportPlan(kind, {
-            plan,
-            state,
-            revision: frozen?.number ?? plan.latest.number,
-            scale,
-            inputs,
-            problem,
-            solution,
-            model: { ...map, asked: { ...map.asked, trials: shownTrials, proposals: proposals.marks.get() } },
-            dataVersion: data.version,
-          }),
-        )
-        .then(
-          () =>
-            setExporting(
-              kind === "sheet" && !frozen && draft.changed
-                ? {
-                    text: `The sheet is that of revision ${plan.latest.number}, without the unsaved changes.`,
-                    bad: false,
-                  }
-                : null,
-            ),
-          (error: unknown) => setExporting({ text: `Not exported: ${messageOf(error)}`, bad: true }),
-        );
-    },
-    [
-      solution,
-      map,
-      shownTrials,
-      proposals,
-      frozen,
-      draft.changed,
-      draft.basedOn,
+  const onExport = useExport(
+    {
       plan,
+      frozen,
+      draft,
       inputs,
       problem,
-      data.version,
+      solution,
+      model: map,
+      trials: shownTrials,
+      proposals,
       scale,
-    ],
+      dataVersion: data.version,
+    },
+    setSaid,
   );
 
   function restore(revision: RevisionRow) {
@@ -215,22 +190,43 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
 
   return (
     <AskingContext value={asking}>
+      {ignored.length > 0 && (
+        <Suspense fallback={null}>
+          <IgnoredBanner ignored={ignored} onClose={() => setIgnored([])} />
+        </Suspense>
+      )}
       {frozen ? (
         <FrozenBanner
           {...frozen}
           plan={plan}
-          exporting={exporting}
-          onSheet={() => onExport("sheet")}
           onRestore={() => restore(frozen)}
+          onCopyLink={link.copy}
+          said={said}
+          onSheet={() => onExport("sheet")}
         />
+      ) : proposal ? (
+        <Suspense fallback={null}>
+          <ProposalBanner
+            plan={plan}
+            mine={draft.inputs}
+            unsaved={draft.changed}
+            settings={proposal}
+            onKeep={() => {
+              edit(() => proposal);
+              setProposal(null);
+            }}
+            onLeave={() => setProposal(null)}
+          />
+        </Suspense>
       ) : (
         <WorkspaceHeader
           plan={plan}
           draft={draft}
           mayWrite={mayWrite}
-          exporting={exporting}
+          said={said}
           onExport={onExport}
           onOpen={setDialog}
+          onCopyLink={link.copy}
         />
       )}
       <Sheet
@@ -263,6 +259,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
               onSettle={draft.settle}
               trials={shownTrials}
               proposals={proposing ? proposals : null}
+              zoom={look.view.visible}
+              onZoom={look.setZoom}
             />
           ) : null
         }
@@ -284,6 +282,8 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
                 />
               )
             }
+            shown={look.view.side}
+            onShow={look.setSide}
           >
             {frozen === null && <DataChanged plan={plan} className="mb-3" />}
             {failure && (
@@ -333,6 +333,7 @@ export function Workspace({ plan, frozen, data }: WorkspaceProps) {
         frozen={frozen !== null}
         onRestore={restore}
       />
+      {link.dialog}
     </AskingContext>
   );
 }

@@ -3,6 +3,7 @@ import { ErrorNote, Loading } from "../../components/status";
 import { useChemistry } from "../../lib/chemistry";
 import { usePlan, useRevisions } from "../../lib/plans";
 import { usePageTitle } from "../../lib/title";
+import { useOpened } from "./address/useOpened";
 import { Workspace } from "./Workspace";
 
 /** A plan, or with ?revision=n one of its saved states as it was, with the chemistry data it froze. */
@@ -16,6 +17,8 @@ export default function WorkspacePage() {
   const current = useChemistry(undefined, number === null);
   const past = useChemistry(frozen?.dataVersion, frozen !== null && frozen !== undefined);
   const chemistry = number === null ? current : past;
+  const of = `${planId} ${number ?? ""}`;
+  const opened = useOpened(of, plan.data, frozen);
   usePageTitle(plan.data?.name);
 
   const wrong =
@@ -37,11 +40,11 @@ export default function WorkspacePage() {
       </div>
     );
   }
-  if (!plan.data || !chemistry.data || frozen === undefined)
+  if (!plan.data || !chemistry.data || frozen === undefined || !opened)
     return (
       <div className="px-5">
         <Loading label="Opening the plan" />
       </div>
     );
-  return <Workspace key={`${planId} ${number ?? ""}`} plan={plan.data} frozen={frozen} data={chemistry.data} />;
+  return <Workspace key={of} plan={plan.data} frozen={frozen} data={chemistry.data} start={opened} />;
 }

@@ -9,7 +9,7 @@ const shown = (keyMap.find(({ place }) => place === "Anywhere on the plan")?.key
   .join(" | ");
 
 test("every key the plan's screen listens to stands in the list of keys, and every letter of the list is listened to", () => {
-  const source = readFileSync("src/features/workspace/Workspace.tsx", "utf8");
+  const source = readFileSync("src/features/workspace/model/useWorkspaceKeys.ts", "utf8");
   const listened = [...source.matchAll(/\{ key: "([^"]+)"(, ctrl: true)?/g)].map(([, key = "", ctrl]) =>
     ctrl === undefined ? key : `Ctrl ${key.toUpperCase()}`,
   );

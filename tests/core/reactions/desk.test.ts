@@ -2,7 +2,8 @@ import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { GAS_CONSTANT } from "../../../shared/constants";
 import { valueOf } from "../../../shared/outcome";
-import { reactionAtT, reactionDesk, reactionSeries } from "../../../shared/reactions/desk";
+import { reactionAtT } from "../../../shared/reactions/atTemperature";
+import { reactionDesk, reactionSeries } from "../../../shared/reactions/desk";
 import { readReaction } from "../../../shared/reactions/readReaction";
 import { chemistry } from "../../support/chemistry";
 

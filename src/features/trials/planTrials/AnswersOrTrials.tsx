@@ -1,4 +1,4 @@
-import { lazy, Suspense, useState, type ReactNode } from "react";
+import { lazy, Suspense, type ReactNode } from "react";
 import { Tabs } from "../../../components/choice";
 import { Loading } from "../../../components/status";
 import type { PotentialScale } from "../../../lib/potential";
@@ -13,6 +13,8 @@ export function AnswersOrTrials({
   trials,
   scale,
   next,
+  shown,
+  onShow,
   children,
 }: {
   /** null while the layer is off */
@@ -20,9 +22,10 @@ export function AnswersOrTrials({
   scale: PotentialScale;
   /** what to try next; stands below either */
   next: ReactNode;
+  shown: "answers" | "trials";
+  onShow: (side: "answers" | "trials") => void;
   children: ReactNode;
 }) {
-  const [shown, setShown] = useState<"answers" | "trials">("answers");
   if (trials === null)
     return (
       <>
@@ -36,7 +39,7 @@ export function AnswersOrTrials({
       label="Answers and trials"
       className="-mt-1 print:contents"
       value={shown}
-      onChange={setShown}
+      onChange={onShow}
       panels={[
         {
           value: "answers",
@@ -44,7 +47,7 @@ export function AnswersOrTrials({
           content: (
             <>
               {children}
-              <Tried trials={trials} onTable={() => setShown("trials")} />
+              <Tried trials={trials} onTable={() => onShow("trials")} />
               {next}
             </>
           ),

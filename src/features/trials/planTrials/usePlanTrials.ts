@@ -38,6 +38,14 @@ export interface PlanTrials {
 
 const NONE: readonly PlacedTrial[] = [];
 
+/** Which trials are looked at and what colours them. */
+export interface TrialLooks {
+  scope: "plan" | "project";
+  colouring: Colouring;
+  /** ids of campaigns */
+  hidden: readonly string[];
+}
+
 /** The trials of a plan's map: read once, judged against the solution in hand, coloured and filtered.
  *  @param enabled  the layer is on     @param solution  of what the map shows, draft or revision */
 export function usePlanTrials(
@@ -46,11 +54,12 @@ export function usePlanTrials(
   solution: Solution | null,
   data: ChemicalData,
   enabled: boolean,
+  looks: TrialLooks,
+  onLook: (part: Partial<TrialLooks>) => void,
 ): PlanTrials {
   const navigate = useNavigate();
-  const [scope, setScope] = useState<"plan" | "project">("plan");
-  const [hidden, setHidden] = useState<ReadonlySet<string>>(() => new Set());
-  const [colouring, setColouring] = useState<Colouring>("recoveryPct");
+  const { scope, colouring } = looks;
+  const hidden = useMemo(() => new Set(looks.hidden), [looks.hidden]);
   const [store] = useState(() => new TrialStore());
   const query = useMapTrials(planId, scope, enabled);
   const answer = enabled ? query.data : undefined;
@@ -79,14 +88,11 @@ export function usePlanTrials(
     },
     [ground],
   );
+  const setScope = useCallback((next: TrialLooks["scope"]) => onLook({ scope: next }), [onLook]);
+  const setColouring = useCallback((next: Colouring) => onLook({ colouring: next }), [onLook]);
   const toggle = useCallback(
-    (id: string) =>
-      setHidden((old) => {
-        const next = new Set(old);
-        if (!next.delete(id)) next.add(id);
-        return next;
-      }),
-    [],
+    (id: string) => onLook({ hidden: hidden.has(id) ? [...hidden].filter((h) => h !== id) : [...hidden, id] }),
+    [hidden, onLook],
   );
   return {
     answer,

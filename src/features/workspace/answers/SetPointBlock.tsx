@@ -8,7 +8,7 @@ import { MethodLink } from "../../../components/SourceLink";
 import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
-import { usePreferences } from "../../../lib/preferences";
+import { useScaleChoice } from "../../../lib/scaleChoice";
 import { usualProbe } from "../model/exports";
 
 /** Where to run, in figures one can read across the room, and how sure the loop can be of staying there. */
@@ -86,7 +86,7 @@ export function SetPointBlock({
 
 /** On SHE: what a common probe would show. On an electrode's own scale: what that is on SHE. */
 function ProbeReading({ Eh, data, scale }: { Eh: number; data: ChemicalData; scale: PotentialScale }) {
-  const [{ electrodeTemperatureC }] = usePreferences();
+  const [{ electrodeTemperatureC }] = useScaleChoice();
   if (scale.short !== "SHE") return <>That is {withUnit(fixed(Eh, 2), "V")} vs SHE.</>;
   const probe = usualProbe(data);
   if (!probe) return null;

@@ -49,6 +49,7 @@ export function Dialogs({
           onOpen(null);
           void navigate(`/plans/${plan.id}?revision=${revision.number}`);
         }}
+        onCompare={({ number }) => void navigate(`/plans/${plan.id}/compare?a=${number}&b=draft`)}
       />
       <RenameDialog {...show("rename")} plan={plan} />
       <DuplicateDialog {...show("duplicate")} plan={plan} onCopied={(copy) => void navigate(`/plans/${copy.id}`)} />

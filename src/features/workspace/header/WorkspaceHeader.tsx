@@ -1,6 +1,6 @@
 import { Link } from "react-router-dom";
 import type { PlanRow } from "../../../../shared/schemas/plan";
-import { Button } from "../../../components/Button";
+import { Button, ButtonLink } from "../../../components/Button";
 import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../../components/Menu";
 import { Status } from "../../../components/status";
 import { fullTime, savedAt } from "../../../lib/format";
@@ -8,18 +8,24 @@ import type { DraftInHand } from "../model/useDraft";
 
 export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv" | "windows" | "polygons" | "sheet";
 
+export interface Said {
+  text: string;
+  bad: boolean;
+}
+
 export interface HeaderProps {
   plan: PlanRow;
   draft: DraftInHand;
   mayWrite: boolean;
-  /** a word on the export that runs or failed */
-  exporting: { text: string; bad: boolean } | null;
+  /** a word on the command that runs, is done or failed */
+  said: Said | null;
   onExport: (kind: ExportKind) => void;
+  onCopyLink: () => void;
   onOpen: (dialog: "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys") => void;
 }
 
 /** The plan's name, what is saved of it and what is not, and the commands that concern the whole. */
-export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, onOpen }: HeaderProps) {
+export function WorkspaceHeader({ plan, draft, mayWrite, said, onExport, onCopyLink, onOpen }: HeaderProps) {
   const { latest } = plan;
   return (
     <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
@@ -30,7 +36,7 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
       >
         <Saved plan={plan} draft={draft} mayWrite={mayWrite} />
       </p>
-      {exporting && <Status tone={exporting.bad ? "bad" : "quiet"}>{exporting.text}</Status>}
+      {said && <Status tone={said.bad ? "bad" : "quiet"}>{said.text}</Status>}
       <span className="no-print flex shrink-0 gap-2">
         <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl Z">
           Undo
@@ -41,6 +47,9 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
         <Button onClick={() => onOpen("revisions")} title="r">
           Revisions
         </Button>
+        <ButtonLink to={compareAddress(plan, draft.changed)} title="Two states of the plan side by side">
+          Compare
+        </ButtonLink>
         {mayWrite && (
           <Button kind="primary" disabled={!draft.changed} onClick={() => onOpen("save")} title="Ctrl S">
             Save revision
@@ -57,6 +66,10 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
               <MenuSeparator />
             </>
           )}
+          <MenuItem onSelect={onCopyLink} note="l">
+            Copy link to what is seen
+          </MenuItem>
+          <MenuSeparator />
           <MenuLabel>Export</MenuLabel>
           <MenuItem onSelect={() => onExport("sheet")} note={draft.changed ? "PDF, as saved" : "PDF"}>
             Window sheet, revision {plan.latest.number}
@@ -92,6 +105,11 @@ export function WorkspaceHeader({ plan, draft, mayWrite, exporting, onExport, on
     </div>
   );
 }
+
+/** Unsaved changes against what is saved, else the last two revisions. */
+const compareAddress = ({ id, latest }: PlanRow, changed: boolean): string =>
+  `/plans/${id}/compare?` +
+  (changed || latest.number === 1 ? `a=${latest.number}&b=draft` : `a=${latest.number - 1}&b=${latest.number}`);
 
 /** What is saved, and what of the plan in hand is not. */
 function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "mayWrite">) {
@@ -138,9 +156,10 @@ export function FrozenBanner({
   createdAt,
   note,
   dataVersion,
-  exporting,
+  said,
   onSheet,
   onRestore,
+  onCopyLink,
 }: {
   plan: PlanRow;
   number: number;
@@ -148,9 +167,10 @@ export function FrozenBanner({
   createdAt: string;
   note: string;
   dataVersion: string;
-  exporting: HeaderProps["exporting"];
+  said: Said | null;
   onSheet: () => void;
   onRestore: () => void;
+  onCopyLink: () => void;
 }) {
   return (
     <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-ink bg-sheet px-5 py-1.5">
@@ -160,8 +180,11 @@ export function FrozenBanner({
         <span className="font-mono">{dataVersion.slice(0, 12)}</span>. Nothing changes here.
         {note !== "" && <span className="text-muted"> {note}</span>}
       </p>
-      {exporting && <Status tone={exporting.bad ? "bad" : "quiet"}>{exporting.text}</Status>}
+      {said && <Status tone={said.bad ? "bad" : "quiet"}>{said.text}</Status>}
       <span className="no-print flex gap-2">
+        <Button onClick={onCopyLink} title="l">
+          Copy link
+        </Button>
         <Button onClick={onSheet}>Window sheet</Button>
         <Button onClick={onRestore}>Restore as draft</Button>
         <Link to={`/plans/${plan.id}`} className="self-center text-sm underline underline-offset-4">

@@ -14,6 +14,7 @@ export const keyMap: readonly {
       ["0 or Escape", "all metals again; the crosscuts back at the set point"],
       ["w", "the next window"],
       ["r", "revisions"],
+      ["l", "copy a link to what is seen, unsaved settings included"],
       ["?", "this list"],
     ],
   },

@@ -8,7 +8,7 @@ import type { Problem } from "../../../../shared/schemas/problem";
 import { type HeldSetPoint, heldSetPoint } from "../../../../shared/setpoint/held";
 import type { Solution, Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { usePreferences } from "../../../lib/preferences";
+import type { useSwitches } from "./useMapSettings";
 
 /** The exact pieces behind the answer, for what is read at a point; null while the plan cannot be solved. */
 export function useAnalysis(problem: Problem, data: ChemicalData): Analysis | null {
@@ -45,14 +45,14 @@ export interface Gases {
   shown: ReadonlySet<HazardGas>;
 }
 
-const shelf = (gas: HazardGas) => `gas ${gas}`;
+const switchOf = (gas: HazardGas) => `gas ${gas}`;
 
 /** Gas over the liquor, by region and at the set point, and which gases the map draws. */
 export function useGases(
   analysis: Analysis | null,
   window: Window | null,
+  [switches, set]: ReturnType<typeof useSwitches>,
 ): { gases: Gases | null; choose: (gas: HazardGas, on: boolean) => void } {
-  const [{ layers }, change] = usePreferences();
   const polygons = window?.polygons;
   const { pH, Eh } = window?.setPoint ?? {};
   const map = useMemo(() => {
@@ -64,12 +64,9 @@ export function useGases(
   const gases = useMemo(() => {
     if (!map) return null;
     const reaching = new Set(map.regions.filter((r) => polygons && sharesGround(r.region, polygons)).map((r) => r.gas));
-    const shown = new Set(hazardGases.filter((gas) => layers[shelf(gas)] ?? reaching.has(gas)));
+    const shown = new Set(hazardGases.filter((gas) => switches[switchOf(gas)] ?? reaching.has(gas)));
     return { map, reaching, shown };
-  }, [map, polygons, layers]);
-  const choose = useCallback(
-    (gas: HazardGas, on: boolean) => change({ layers: { ...layers, [shelf(gas)]: on } }),
-    [change, layers],
-  );
+  }, [map, polygons, switches]);
+  const choose = useCallback((gas: HazardGas, on: boolean) => set(switchOf(gas), on), [set]);
   return { gases, choose };
 }

@@ -1,0 +1,82 @@
+import { useCallback } from "react";
+import type { PlanInputs, PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Solution } from "../../../../shared/solution";
+import { messageOf } from "../../../lib/failure";
+import type { PotentialScale } from "../../../lib/potential";
+import type { ProposalStore } from "../../../map/proposalStore";
+import type { ShownTrials } from "../../../map/TrialsLayer";
+import type { ExportKind, Said } from "../header/WorkspaceHeader";
+import type { DraftInHand } from "./useDraft";
+import type { MapModel } from "./useMapModel";
+
+interface OnTheTable {
+  plan: PlanRow;
+  frozen: RevisionRow | null;
+  draft: DraftInHand;
+  inputs: PlanInputs;
+  problem: Problem;
+  solution: Solution | null;
+  model: MapModel | null;
+  trials: ShownTrials | null;
+  proposals: ProposalStore;
+  scale: PotentialScale;
+  dataVersion: string;
+}
+
+/** Makes a file of what is on the table, and says how it goes. */
+export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
+  const { plan, frozen, draft, inputs, problem, solution, model, trials, proposals, scale, dataVersion } = table;
+  return useCallback(
+    (kind: ExportKind) => {
+      if (!solution || !model) return;
+      say({ text: "Making the file …", bad: false });
+      const state = frozen
+        ? `revision ${frozen.number}`
+        : draft.changed
+          ? `draft on revision ${draft.basedOn}`
+          : `revision ${plan.latest.number}`;
+      import("./exportPlan")
+        .then(({ exportPlan }) =>
+          exportPlan(kind, {
+            plan,
+            state,
+            revision: frozen?.number ?? plan.latest.number,
+            scale,
+            inputs,
+            problem,
+            solution,
+            model: { ...model, asked: { ...model.asked, trials, proposals: proposals.marks.get() } },
+            dataVersion,
+          }),
+        )
+        .then(
+          () =>
+            say(
+              kind === "sheet" && !frozen && draft.changed
+                ? {
+                    text: `The sheet is that of revision ${plan.latest.number}, without the unsaved changes.`,
+                    bad: false,
+                  }
+                : null,
+            ),
+          (error: unknown) => say({ text: `Not exported: ${messageOf(error)}`, bad: true }),
+        );
+    },
+    [
+      solution,
+      model,
+      trials,
+      proposals,
+      frozen,
+      draft.changed,
+      draft.basedOn,
+      plan,
+      inputs,
+      problem,
+      scale,
+      dataVersion,
+      say,
+    ],
+  );
+}
