@@ -1,7 +1,7 @@
-import { useDeferredValue, useMemo, useState } from "react";
+import { useCallback, useDeferredValue, useMemo, useState } from "react";
 import { Link } from "react-router-dom";
 import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
-import type { TrialAcid } from "../../../../shared/trials/trialAcid";
+import { trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
 import { acidFigures } from "../../../components/AcidAmount";
 import { Button } from "../../../components/Button";
 import { Check, Segmented } from "../../../components/choice";
@@ -168,7 +168,7 @@ function Acid({ acid }: { acid: TrialAcid | null }) {
 
 /** The trials as rows: pointing at a row rings its point, pointing at a point lights its row; a brush on the map narrows the table. */
 function LinkedTable({
-  trials: { trials, store, open, acidOf },
+  trials: { trials, store, open, ground },
   scale,
 }: {
   trials: PlanTrials;
@@ -179,6 +179,15 @@ function LinkedTable({
   const brush = useDeferredValue(useTold(store.brush));
   const brushing = useTold(store.brushing);
   const [chosen, setChosen] = useState<string>();
+  const acidOf = useCallback(
+    ({ compared, figures }: PlacedTrial) => {
+      const sulfate = ground.inputs.ligands.find(({ component }) => component === "S")?.activity ?? null;
+      // A cooled sample has a temperature of its own, which a point on the map does not carry.
+      const at = { pH: figures.pH, temperatureC: figures.pHCooled ? null : figures.temperatureC };
+      return trialAcid(compared, at, compared.freeAcid ?? null, sulfate, ground.data);
+    },
+    [ground],
+  );
   const columns = useMemo(() => columnsOf(scale, trials, acidOf), [scale, trials, acidOf]);
   const rows = useMemo(
     () =>

@@ -4,7 +4,6 @@ import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { MapTrials } from "../../../../shared/schemas/trialRows";
 import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
-import { trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
 import { placedTrials, type PlacedTrial } from "../../../lib/judgedTrials";
 import { useMapTrials } from "../../../lib/trials";
 import { colourScale, type ColourScale, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
@@ -32,8 +31,8 @@ export interface PlanTrials {
   /** for the map */
   shown: ShownTrials | null;
   open: (id: string) => void;
-  /** free acid of a trial whose pH is below 1.5 */
-  acidOf: (trial: PlacedTrial) => TrialAcid | null;
+  /** what they are judged against */
+  ground: { inputs: PlanInputs; data: ChemicalData };
 }
 
 const NONE: readonly PlacedTrial[] = [];
@@ -79,15 +78,6 @@ export function usePlanTrials(
     () => (marks.length === 0 ? null : { marks, scale, store, onOpen: open }),
     [marks, scale, store, open],
   );
-  const acidOf = useCallback(
-    ({ compared, figures }: PlacedTrial) => {
-      const sulfate = ground.inputs.ligands.find(({ component }) => component === "S")?.activity ?? null;
-      // A cooled sample has a temperature of its own, which a point on the map does not carry.
-      const at = { pH: figures.pH, temperatureC: figures.pHCooled ? null : figures.temperatureC };
-      return trialAcid(compared, at, compared.freeAcid ?? null, sulfate, ground.data);
-    },
-    [ground],
-  );
   const setScope = useCallback((next: TrialLooks["scope"]) => onLook({ scope: next }), [onLook]);
   const setColouring = useCallback((next: Colouring) => onLook({ colouring: next }), [onLook]);
   const toggle = useCallback(
@@ -111,6 +101,6 @@ export function usePlanTrials(
     store,
     shown,
     open,
-    acidOf,
+    ground,
   };
 }

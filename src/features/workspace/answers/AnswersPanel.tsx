@@ -1,6 +1,6 @@
 import { lazy, Suspense } from "react";
 import { Link } from "react-router-dom";
-import type { FreeAcidCurve } from "../../../../shared/activity/freeAcid";
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { Advice, Opening } from "../../../../shared/advice/openings";
 import type { Robust } from "../../../../shared/advice/robust";
 import { cautionsFor, hazardContext } from "../../../../shared/hazards/rules";
@@ -25,12 +25,13 @@ import { LimitsBlock } from "./LimitsBlock";
 import { OverallBlock } from "./OverallBlock";
 import { ReachBlock } from "./ReachBlock";
 import { SetPointBlock } from "./SetPointBlock";
-import { FreeAcidRow, HeldNote } from "./SetPointMore";
+import { HeldNote } from "./SetPointMore";
 import { WarningsBlock } from "./WarningsBlock";
 import { WindowsBlock } from "./WindowsBlock";
 
 // Most plans have a window, and few hold over ranges.
 const RobustBlock = lazy(async () => ({ default: (await import("./RobustBlock")).RobustBlock }));
+const FreeAcidRow = lazy(() => import("./FreeAcidRow"));
 const NoWindowBlock = lazy(async () => ({ default: (await import("./NoWindowBlock")).NoWindowBlock }));
 
 export interface AnswersProps {
@@ -84,7 +85,11 @@ export function AnswersPanel(props: AnswersProps) {
         <>
           <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />
           {held && <HeldNote held={held} naming={naming} {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})} />}
-          <FreeAcidRow at={window.setPoint} inputs={inputs} curve={props.freeAcid} />
+          {props.freeAcid && window.setPoint.pH < FREE_ACID_BELOW && (
+            <Suspense fallback={null}>
+              <FreeAcidRow at={window.setPoint} inputs={inputs} curve={props.freeAcid} />
+            </Suspense>
+          )}
           {cautions.length > 0 && said}
           {gases && urgent && <GasBlock gases={gases} />}
           <LimitsBlock window={window} name={name} naming={naming} scale={scale} freeAcid={props.freeAcid} />

@@ -1,153 +1,39 @@
-import { useMemo, useState } from "react";
-import { acidBand, FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
-import { freeAcidOf } from "../../../../shared/plan/freeAcidOf";
-import { Button } from "../../../components/Button";
-import { Segmented } from "../../../components/choice";
-import { FormulaText } from "../../../components/FormulaText";
-import { Term } from "../../../components/Help";
+import { lazy, Suspense } from "react";
+import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
 import { NumberField } from "../../../components/NumberField";
-import { MethodLink } from "../../../components/SourceLink";
-import { Note, Remark } from "../../../components/text";
-import { fixed, MINUS, withUnit } from "../../../lib/format";
-import { setAcidBand, setPHBand } from "../model/edit";
+import { setPHBand } from "../model/edit";
 import { useAsking } from "./context";
 
-const two = (x: number) => Number(x.toPrecision(2));
+// Few loops are run on free acid.
+const AcidPHBand = lazy(() => import("./AcidPHBand"));
 
 /** How closely pH is held: in pH, or below pH 1.5 in a sulfate liquor in g/L of free acid. */
 export function PHBand() {
-  const { inputs, edit, data, setPoint, readOnly } = useAsking();
-  const { controlBand, freeAcidBand } = inputs;
-  const { ligands, temperatureC } = inputs;
-  const curve = useMemo(() => freeAcidOf(data, { ligands, temperatureC }), [data, ligands, temperatureC]);
-  const low = setPoint !== null && setPoint.pH < FREE_ACID_BELOW && curve !== null;
-  const sulfate = ligands.find((l) => l.component === "S")?.activity ?? 0;
-  const [refused, setRefused] = useState<string | null>(null);
-  const convert = (gPerL: number, pH: number) => acidBand(data, gPerL, pH, sulfate, temperatureC);
-
-  /** What a band of free acid is where the set point stands; kept with the pH it was converted at. */
-  function take(gPerL: number) {
-    if (setPoint === null) return;
-    const atPH = Number(setPoint.pH.toFixed(3));
-    const band = convert(gPerL, atPH);
-    setRefused(band.ok ? null : band.error.message);
-    if (band.ok) edit(setAcidBand({ gPerL, atPH }, band.value.counted));
-  }
-  function toAcid() {
-    if (setPoint === null || curve === null) return;
-    const here = curve.at(setPoint.pH).gPerL;
-    const like = curve.at(setPoint.pH - controlBand.pH).gPerL - here;
-    take(two(Math.min(like, here / 4)));
-  }
+  const { inputs, setPoint } = useAsking();
+  const sulfate = inputs.ligands.some((l) => l.component === "S");
+  const low = setPoint !== null && setPoint.pH < FREE_ACID_BELOW && sulfate;
+  if (!low && !inputs.freeAcidBand) return <PlainPHBand />;
   return (
-    <>
-      {(low || freeAcidBand) && !readOnly && (
-        <Segmented
-          className="my-1"
-          label="What the band of pH is given in"
-          value={freeAcidBand ? "acid" : "pH"}
-          onChange={(kind) => (kind === "pH" ? edit(setPHBand(controlBand.pH)) : toAcid())}
-          options={[
-            { value: "pH", label: "pH" },
-            { value: "acid", label: "free acid, g/L", disabled: !low && !freeAcidBand },
-          ]}
-        />
-      )}
-      {freeAcidBand ? (
-        <AcidBand
-          {...{ ...freeAcidBand, take, convert, refused }}
-          pH={low ? setPoint.pH : null}
-          counted={controlBand.pH}
-        />
-      ) : (
-        <NumberField
-          label="Control band of pH"
-          labelText="pH ±"
-          value={controlBand.pH}
-          above={0}
-          max={5}
-          step={0.05}
-          width={6}
-          show={(x) => x.toFixed(2)}
-          readOnly={readOnly}
-          onCommit={(pH) => edit(setPHBand(pH))}
-        />
-      )}
-    </>
+    <Suspense fallback={<PlainPHBand />}>
+      <AcidPHBand low={low} />
+    </Suspense>
   );
 }
 
-/** The band as typed, what it is in pH on either side, and whether that still holds where the set point is now. */
-function AcidBand({
-  gPerL,
-  atPH,
-  pH,
-  counted,
-  take,
-  convert,
-  refused,
-}: {
-  gPerL: number;
-  atPH: number;
-  /** of the set point now; null where free acid is no measure of it */
-  pH: number | null;
-  counted: number;
-  take: (gPerL: number) => void;
-  convert: (gPerL: number, pH: number) => ReturnType<typeof acidBand>;
-  refused: string | null;
-}) {
-  const { readOnly } = useAsking();
-  const then = convert(gPerL, atPH);
-  const now = pH === null ? null : convert(gPerL, pH);
-  const strayed = now?.ok ? Math.abs(now.value.counted / counted - 1) > 0.02 : true;
+export function PlainPHBand() {
+  const { inputs, edit, readOnly } = useAsking();
   return (
-    <>
-      <NumberField
-        label="Control band of free acid"
-        labelText={<Term word="freeAcidBand">Free acid ±</Term>}
-        unit="g/L"
-        value={gPerL}
-        above={0}
-        max={500}
-        step={0.5}
-        width={6}
-        readOnly={readOnly || pH === null}
-        onCommit={take}
-        error={refused}
-      />
-      <Note className="py-1">
-        {then.ok && Math.abs(then.value.counted / counted - 1) < 0.02 ? (
-          <>
-            ±{withUnit(String(gPerL), "g/L")} is{" "}
-            <span className="font-mono whitespace-nowrap">
-              {MINUS}
-              {fixed(then.value.low, 2)}/+{fixed(then.value.high, 2)}
-            </span>{" "}
-            pH at pH {fixed(atPH, 2)}; the wider side counts, pH ±{fixed(counted, 2)}.
-          </>
-        ) : (
-          <>
-            pH ±{fixed(counted, 2)} counts, converted at pH {fixed(atPH, 2)} when it was typed.
-          </>
-        )}{" "}
-        <MethodLink to="freeAcid">Indicative</MethodLink>.
-      </Note>
-      {!readOnly && strayed && (
-        <Remark className="mb-1">
-          {pH === null ? (
-            <>The set point now stands where free acid is no measure of pH: give the band in pH.</>
-          ) : now?.ok ? (
-            <>
-              At the set point now, pH {fixed(pH, 2)}, it is pH ±{fixed(now.value.counted, 2)}.{" "}
-              <Button kind="quiet" className="h-auto!" onClick={() => take(gPerL)}>
-                convert there
-              </Button>
-            </>
-          ) : (
-            <FormulaText text={`At the set point now it cannot be converted: ${now?.error.message ?? ""}.`} />
-          )}
-        </Remark>
-      )}
-    </>
+    <NumberField
+      label="Control band of pH"
+      labelText="pH ±"
+      value={inputs.controlBand.pH}
+      above={0}
+      max={5}
+      step={0.05}
+      width={6}
+      show={(x) => x.toFixed(2)}
+      readOnly={readOnly}
+      onCommit={(pH) => edit(setPHBand(pH))}
+    />
   );
 }
