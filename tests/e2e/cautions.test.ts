@@ -33,6 +33,8 @@ test("cyanide below pH 10.5 is warned of beside the set point, and drawn on the 
   const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
+  await plan.button("No longer keep HCN out").click();
+  await expect.poll(() => plan.trace("hazard-hcn")).toBeDefined();
   const region = await plan.trace("hazard-hcn");
   expect(region?.hatched).toBe(true);
   expect(Math.max(...(region?.x ?? []).filter((x) => x !== null))).toBe(10.5);

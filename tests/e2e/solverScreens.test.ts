@@ -1,0 +1,96 @@
+import { expect, test } from "vitest";
+import { openPageAs } from "../support/browser";
+import { demoInputs, solved } from "./pages/core";
+import { WorkspaceScreen } from "./pages/workspace";
+
+const rule = { gas: "HCN", pHAtLeast: 10.5 };
+
+test("without a window the conflict is named, a change opens one in one action, and undo takes it back", async () => {
+  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  await plan.type("pH, to", "3.5"); // ferrihydrite dissolves below pH 4.06 here
+  const shut = page.getByRole("region", { name: "No window" });
+  await shut.getByText("Nowhere on this map is").waitFor();
+  expect(await shut.textContent()).toContain("Nowhere on this map is iron solid.");
+  const apply = shut.getByRole("button", { name: /^Set / }).first();
+  await apply.waitFor({ timeout: 60_000 });
+  await apply.click();
+  await shut.waitFor({ state: "detached" });
+  expect(await page.getByTestId("set-point").count()).toBe(1);
+  await plan.button("Undo").click();
+  await shut.getByText("Nowhere on this map is").waitFor();
+});
+
+test("what holds over a range of temperature is drawn inside the window, and what was checked is stated", async () => {
+  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const whole = await plan.trace("open-0");
+  await plan.button("Hold over a range of Temperature").click();
+  const over = page.getByRole("region", { name: "Over the ranges" });
+  await over.getByText("Deepest point").waitFor({ timeout: 60_000 });
+  await over.getByText(/temperatures/).waitFor();
+  await expect.poll(async () => (await plan.trace("robust"))?.x.length ?? 0).toBeGreaterThan(3);
+  const inner = (await plan.trace("robust"))!.x.filter((x) => x !== null);
+  const outer = whole!.x.filter((x) => x !== null);
+  expect(Math.min(...inner)).toBeGreaterThan(Math.min(...outer));
+  expect(Math.max(...inner)).toBeLessThan(Math.max(...outer));
+});
+
+test("published practice is off at first; switched on it names each range with its source", async () => {
+  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const practice = async () => (await plan.traces()).filter((t) => t.uid.startsWith("practice"));
+  expect(await practice()).toEqual([]);
+  await page.getByRole("checkbox", { name: "Published practice" }).check();
+  await expect.poll(async () => (await practice()).length).toBeGreaterThan(0);
+  const list = page.getByRole("list", { name: "Published ranges shown" });
+  await list.getByRole("button", { name: /zinc neutral leach/ }).click();
+  await page.getByRole("dialog").getByText(/The Extractive Metallurgy of Zinc/).waitFor(); // prettier-ignore
+  await page.keyboard.press("Escape");
+  await page.getByRole("checkbox", { name: "Published practice" }).uncheck();
+});
+
+test("HCN kept out is a limit by name; let in, the margin reaches its ground and the gas speaks with caution and deference", async () => {
+  const id = "demo-cyanide-leach";
+  const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const inputs = demoInputs(id);
+  expect(inputs.excludedHazards).toEqual([rule]);
+  const kept = await plan.answers();
+  expect(kept.limits.find((l) => l.what.startsWith("low pH"))).toMatchObject({ what: "low pH HCN: pH falls below 10.5 (kept out)" }); // prettier-ignore
+  expect(kept.pH).toBe(Number(solved(inputs).setPoint!.pH.toFixed(2)));
+  expect(Math.max(...(await plan.trace("kept-HCN"))!.x.filter((x) => x !== null))).toBe(10.5);
+  await plan.pointAt(9.6, 0.2);
+  await plan.readOut().getByText(/pH at or above 10.5 against/).waitFor(); // prettier-ignore
+  const gases = page.getByRole("region", { name: "Gas over the liquor" });
+  await gases.getByText(/closed headspace/).waitFor();
+  await gases.getByText(/does not replace a hazard study/).waitFor();
+  expect((await plan.trace("gas-HCN"))?.hatched).toBe(true);
+
+  await plan.button("No longer keep HCN out").click();
+  const free = { ...inputs, excludedHazards: [] };
+  await expect.poll(async () => (await plan.answers()).pH).toBe(Number(solved(free).setPoint!.pH.toFixed(2)));
+  expect((await plan.answers()).limits.some((l) => l.what.includes("kept out"))).toBe(false);
+  expect(await plan.trace("kept-HCN")).toBeUndefined();
+  await plan.button("Undo").click();
+  await expect.poll(async () => (await plan.answers()).pH).toBe(kept.pH);
+});
+
+test("the reaction desk works out what is typed and says what is wrong with what does not balance", async () => {
+  const { page } = await openPageAs("technician", { path: "/reactions" });
+  const field = page.getByRole("textbox", { name: "Reaction" });
+  await field.fill("Cu^2+ + Zn = Cu + Zn^2+");
+  await page.getByRole("button", { name: "Work it out" }).click();
+  await page
+    .getByText(/37\.\d/)
+    .first()
+    .waitFor(); // log K of 2 (0.337 + 0.763) / 0.05916
+  await field.fill("Cu^2+ + Zn = Cu");
+  await page.getByRole("button", { name: "Work it out" }).click();
+  await page.getByRole("alert").first().waitFor();
+  expect(await field.inputValue()).toBe("Cu^2+ + Zn = Cu");
+});
