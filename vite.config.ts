@@ -22,7 +22,7 @@ const withoutJsonSchema: Plugin = {
 
 /** Modules of src/lib and src/components that nearly every page is made of. */
 const parts = [
-  "api|chemistry|classes|failure|format|glossary|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units",
+  "api|chemistry|classes|failure|format|glossaryTitles|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units",
   "Button|Caution|ComponentName|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
   "choice|status|text|useLate|whenOpened",
 ];
