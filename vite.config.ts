@@ -50,7 +50,7 @@ export default defineConfig({
             // What only the map needs comes with Plotly.
             {
               name: "map",
-              test: /src[\\/]map[\\/](geometry[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|Plot|texts|paintTrials|TrialsLayer|WindowMap|zoom)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
+              test: /src[\\/]map[\\/](geometry[\\/]|names[\\/]|svg[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|LimitHover|Over|Plot|speciesText|texts|paintTrials|Touch|TrialsLayer|WindowMap)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },

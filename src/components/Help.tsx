@@ -47,6 +47,7 @@ function HelpButton({ title, trigger, word, children }: HelpButtonProps) {
         <Sheet
           anchor={button}
           onClose={close}
+          label={title}
           className="max-w-[340px] px-4 py-3"
           title={title}
           {...(word === undefined ? {} : { word })}

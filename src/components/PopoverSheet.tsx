@@ -5,18 +5,28 @@ export interface PopoverSheetProps {
   /** the control that opened it, beside which it stands and which gets the focus back */
   anchor: RefObject<HTMLElement | null>;
   onClose: () => void;
+  /** what it is, read aloud */
+  label: string;
   align?: "center" | "end";
   className: string;
   children: ReactNode;
 }
 
 /** A small sheet beside the control that opened it; Escape, or a press outside, closes it. */
-export default function PopoverSheet({ anchor, onClose, align = "center", className, children }: PopoverSheetProps) {
+export default function PopoverSheet({
+  anchor,
+  onClose,
+  label,
+  align = "center",
+  className,
+  children,
+}: PopoverSheetProps) {
   return (
     <Popover.Root open onOpenChange={(open) => !open && onClose()}>
       <Popover.Anchor virtualRef={anchor} />
       <Popover.Portal>
         <Popover.Content
+          aria-label={label}
           align={align}
           sideOffset={6}
           collisionPadding={12}

@@ -20,6 +20,7 @@ export function ReadOut({
   store,
   solution,
   metals,
+  all = metals,
   scale,
   rest,
   freeAcid,
@@ -27,6 +28,8 @@ export function ReadOut({
   store: CursorStore;
   solution: Solution;
   metals: readonly MapMetal[];
+  /** the plan's metals where not all are named: a hatch goes by its place among all, and ground is shut by any */
+  all?: readonly MapMetal[];
   scale: PotentialScale;
   /** what is read while nobody points at the map */
   rest: { at: Point; words: string } | null;
@@ -34,11 +37,11 @@ export function ReadOut({
   freeAcid?: FreeAcidCurve | null;
 }) {
   const cursor = useCursor(store);
-  const hatches = useMemo(() => hatchesOf(metals), [metals]);
+  const hatches = useMemo(() => hatchesOf(all), [all]);
   const at = cursor ?? rest?.at ?? null;
   const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
   const kept = at ? keptAt(solution, at) : [];
-  const shut = here && (kept.length > 0 || metals.some((m) => here.get(m.element)?.fulfilled === false));
+  const shut = here && (kept.length > 0 || all.some((m) => here.get(m.element)?.fulfilled === false));
   return (
     <div
       role="status"

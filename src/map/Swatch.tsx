@@ -19,7 +19,7 @@ export function Swatch({
   className?: string;
 }) {
   const id = useId();
-  const size = hatch ? Math.min(hatch.size, small ? 5 : 8) : 8;
+  const size = hatch ? Math.min(Math.round(hatch.size * (small ? 0.55 : 0.75)), small ? 8 : 14) : 8;
   const [width, height] = small ? [14, 10] : [24, 14];
   return (
     <svg width={width} height={height} className={className} {...(title ? { role: "img" } : { "aria-hidden": true })}>

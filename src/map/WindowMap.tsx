@@ -1,5 +1,4 @@
 import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
-import { Button } from "../components/Button";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import { mapPixels, sheetBoxes } from "./boxes";
@@ -7,36 +6,44 @@ import { type ContentWishes, mapContent } from "./content";
 import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
 import { mapFigure } from "./figure";
-import { SetPointHandle, type SetPointHandleProps } from "./handle";
+import type { SetPointHandleProps } from "./handle";
+import { LimitHover, type NamedLimit } from "./LimitHover";
+import type { LimitStore } from "./limitStore";
+import { Over } from "./Over";
 import Plot from "./Plot";
-import type { PlotTrace } from "./plotTypes";
-import { haloStyle } from "./texts";
 import type { ProposalStore } from "./proposalStore";
+import type { PlotTrace } from "./plotTypes";
+import { Touch } from "./Touch";
 import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
 import { useSize } from "./useSize";
-import type { MapView } from "./view";
+import { drawnMetals, type MapView } from "./view";
 import { afterRelayout, MovingView } from "./zoom";
 
 const ProposalsLayer = lazy(async () => ({ default: (await import("./ProposalsLayer")).ProposalsLayer }));
 
 export interface WindowMapProps {
   asked: ContentWishes;
-  /** how to draw it; what is in sight is the map's own affair */
-  view: Omit<MapView, "visible">;
+  /** how to draw it */
+  view: MapView;
+  /** what should be in sight from now on; null: the whole frame */
+  onSight: (frame: Frame | null) => void;
+  /** what a drag of the mouse does on the map */
+  dragMode?: "zoom" | "pan";
   cursor: CursorStore;
   /** a click or tap on the map; null lets the point go */
   onPick: (at: Point | null) => void;
-  /** what a screen reader says of it */
+  /** what a screen reader says of it, and the element that says more */
   label: string;
+  describedBy?: string;
   /** the set point, where it can be moved by hand */
   handle?: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
   /** trials painted over the map */
   trials?: ShownTrials | null;
   /** next trials, numbered, movable */
   proposals?: ProposalStore | null;
-  /** what is in sight, V vs SHE; null: the whole frame */
-  zoom: Frame | null;
-  onZoom: (to: Frame | null) => void;
+  /** limits of the windows in words, for the pointer */
+  limits?: readonly NamedLimit[];
+  limitStore?: LimitStore;
   /** traces of the caller's own over the figure, potentials on the shown scale */
   overlay?: readonly PlotTrace[];
 }
@@ -44,60 +51,39 @@ export interface WindowMapProps {
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
 const REST = 160;
 
-/** The window map: one Plotly figure of map, strips and reach bars, and over it the cursor, which never redraws the figure.
+/** The window map: one Plotly figure, over it names, strips and reach bars, and the cursor, which redraws neither.
  *  It brings Plotly along: import it late. */
-export default function WindowMap({
-  asked,
-  view,
-  cursor,
-  onPick,
-  label,
-  handle,
-  trials,
-  proposals,
-  zoom,
-  onZoom,
-  overlay,
-}: WindowMapProps) {
+export default function WindowMap(props: WindowMapProps) {
+  const { asked, view, onSight, dragMode, cursor, onPick, label, describedBy, handle, trials, proposals, overlay } =
+    props;
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
-  const { frame, scale } = view;
-  const [resets, setResets] = useState(0);
-  const visible = zoom ?? frame;
-  // A zoom belongs to one frame: another frame is seen whole.
-  const frameText = [frame.pH, frame.Eh].flat().join(" ");
-  const zoomedIn = useRef(frameText);
-  useEffect(() => {
-    if (zoomedIn.current === frameText) return;
-    zoomedIn.current = frameText;
-    onZoom(null);
-  }, [frameText, onZoom]);
+  const { frame, scale, visible } = view;
   const crosscuts = view.layers.crosscuts && content.through !== null;
+  const pinned = content.pinned !== null;
+  const freeAcid = content.freeAcid !== null;
   const { reach } = view.layers;
+  const metals = drawnMetals(view).length;
 
   const sheet = useMemo(
     () =>
       size &&
       sheetBoxes(size.width, size.height, {
-        metals: view.metals.length,
+        metals,
         reagents: content.reaches.length,
         crosscuts,
         reach,
-        freeAcid: content.freeAcid !== null,
+        freeAcid,
+        pinned,
       }),
-    [size, view.metals.length, content.reaches.length, crosscuts, reach, content.freeAcid],
+    [size, metals, content.reaches.length, crosscuts, reach, freeAcid, pinned],
   );
   const figure = useMemo(() => {
     if (!sheet) return null;
-    const made = mapFigure(content, sheet, { ...view, visible });
-    // Plotly keeps a zoom while this text stands; one more reset is another text.
-    return {
-      ...made,
-      data: overlay ? [...made.data, ...overlay] : made.data,
-      layout: { ...made.layout, uirevision: `${made.layout.uirevision} ${resets}` },
-    };
-  }, [content, sheet, view, visible, resets, overlay]);
+    const made = mapFigure(content, sheet, view, dragMode);
+    return overlay ? { ...made, data: [...made.data, ...overlay] } : made;
+  }, [content, sheet, view, dragMode, overlay]);
 
   const [live] = useState(() => new MovingView());
   const rest = useRef(0);
@@ -117,11 +103,19 @@ export default function WindowMap({
       live.set(next ?? frame);
       clearTimeout(rest.current);
       rest.current = window.setTimeout(() => {
-        onZoom(next);
+        onSight(next);
         requestAnimationFrame(() => live.set(null));
       }, REST);
     },
-    [live, moved, frame, onZoom],
+    [live, moved, frame, onSight],
+  );
+  const look = useCallback(
+    (next: Frame | null) => {
+      clearTimeout(rest.current);
+      live.set(null);
+      onSight(next);
+    },
+    [live, onSight],
   );
   const pick = useCallback(
     (at: Point | null) => {
@@ -133,17 +127,14 @@ export default function WindowMap({
     [sheet, visible, trials, onPick],
   );
   // A trial run at the set point lies under its handle: a press that moves nothing means the trial.
-  const openAt = (x: number, y: number) => {
-    const pixels = sheet && mapPixels(sheet, visible);
-    const mark = pixels && trials && nearestMark(trials.marks, pixels.toPixel, x, y);
-    if (mark) trials.onOpen(mark.id);
-  };
-  const reset = useCallback(() => {
-    clearTimeout(rest.current);
-    live.set(null);
-    onZoom(null);
-    setResets((n) => n + 1);
-  }, [live, onZoom]);
+  const openAt = useCallback(
+    (x: number, y: number) => {
+      const pixels = sheet && mapPixels(sheet, visible);
+      const mark = pixels && trials && nearestMark(trials.marks, pixels.toPixel, x, y);
+      if (mark) trials.onOpen(mark.id);
+    },
+    [sheet, visible, trials],
+  );
   const onDrawn = useCallback(() => {
     if (holder.current) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
   }, []);
@@ -154,14 +145,21 @@ export default function WindowMap({
       role="application"
       aria-roledescription="window map"
       aria-label={label}
+      aria-describedby={describedBy}
       tabIndex={0}
-      className="relative h-full w-full overflow-hidden"
+      className="relative h-full w-full touch-none overflow-hidden"
       data-testid="window-map"
     >
-      <style>{haloStyle("var(--color-sheet)", "var(--color-tint)")}</style>
       {figure && sheet ? (
         <>
           <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} onDrawn={onDrawn} />
+          <Over
+            content={content}
+            sheet={sheet}
+            view={view}
+            live={live}
+            handle={handle ? { ...handle, onPress: openAt } : null}
+          />
           {trials && view.layers.trials && (
             <TrialsLayer
               {...trials}
@@ -172,33 +170,32 @@ export default function WindowMap({
               holder={holder}
             />
           )}
-          {visible !== frame && (
-            <Button
-              kind="quiet"
-              className="no-print absolute! h-auto! text-xs!"
-              style={{ left: 8, bottom: sheet.map.y0 - (content.freeAcid ? 60 : 40) }}
-              onClick={reset}
-            >
-              whole frame
-            </Button>
+          {props.limits && props.limitStore && (
+            <LimitHover
+              limits={props.limits}
+              store={props.limitStore}
+              cursor={cursor}
+              sheet={sheet}
+              visible={visible}
+              colours={view.colours}
+            />
           )}
           <Cursor
             sheet={sheet}
             visible={visible}
+            frame={frame}
             through={content.through}
             store={cursor}
             holder={holder}
             onPick={pick}
-            onReset={reset}
+            onSight={look}
           />
-          {handle && view.layers.setPoint && (
-            <SetPointHandle sheet={sheet} visible={visible} {...handle} onPress={openAt} />
-          )}
           {proposals && (
             <Suspense fallback={null}>
               <ProposalsLayer store={proposals} sheet={sheet} visible={visible} live={live} />
             </Suspense>
           )}
+          <Touch sheet={sheet} visible={visible} frame={frame} holder={holder} onSight={look} />
         </>
       ) : null}
     </div>

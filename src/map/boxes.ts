@@ -16,6 +16,14 @@ export interface Sheet {
   alongEh: SheetBox | null;
 }
 
+/** From the figure's top, as SVG counts. */
+export const fromTop = ({ height }: Pick<Sheet, "height">, { x0, x1, y0, y1 }: SheetBox): SheetBox => ({
+  x0,
+  x1,
+  y0: height - y1,
+  y1: height - y0,
+});
+
 export interface SheetWishes {
   metals: number;
   reagents: number;
@@ -23,31 +31,38 @@ export interface SheetWishes {
   reach: boolean;
   /** a second row under the pH axis */
   freeAcid?: boolean;
+  /** a second pair of crosscuts, through a pinned point, beside the first */
+  pinned?: boolean;
 }
 
 const LEFT = 62;
 const TOP = 22;
 const RIGHT = 6;
 const AXIS = { plain: 42, withFreeAcid: 60 };
-const STRIP = { row: 22, column: 24 };
+/** Room beyond the strips for the distances to the limits. */
+const DISTANCES = 17;
 const REACH_COLUMN = 18;
 const GAP = 14;
 
+/** Thickness of a metal's strip: thinner where there are many metals, double where two points are compared. */
+export function stripThickness(metals: number, pinned: boolean): number {
+  const one = Math.min(22, Math.max(13, Math.floor(190 / Math.max(1, metals))));
+  return pinned ? Math.min(36, Math.round(1.6 * one)) : one;
+}
+
 /** Where everything stands; strips keep their thickness whatever the sheet's size, the map takes the rest.
  *  @param width, height  of the whole figure, px     @returns  boxes in px from the figure's lower left corner */
-export function sheetBoxes(
-  width: number,
-  height: number,
-  { metals, reagents, crosscuts, reach, freeAcid = false }: SheetWishes,
-): Sheet {
-  const columns = crosscuts ? metals * STRIP.column : 0;
-  const rows = crosscuts ? metals * STRIP.row : 0;
+export function sheetBoxes(width: number, height: number, wishes: SheetWishes): Sheet {
+  const { metals, reagents, crosscuts, reach, pinned = false, freeAcid = false } = wishes;
   const axisBelow = freeAcid ? AXIS.withFreeAcid : AXIS.plain;
+  const strip = stripThickness(metals, pinned);
+  const columns = crosscuts ? metals * strip : 0;
+  const rows = crosscuts ? metals * strip : 0;
   const bars = reach && reagents > 0 ? reagents * REACH_COLUMN : 0;
-  const margin = { l: LEFT, r: RIGHT, t: TOP, b: crosscuts ? 6 : axisBelow, pad: 0 as const };
+  const margin = { l: LEFT, r: RIGHT, t: TOP, b: crosscuts ? DISTANCES : axisBelow, pad: 0 as const };
   const mapRight = Math.max(
     LEFT + 120,
-    width - RIGHT - columns - (columns > 0 ? GAP : 0) - bars - (bars > 0 ? GAP : 0),
+    width - RIGHT - columns - (columns > 0 ? GAP + DISTANCES : 0) - bars - (bars > 0 ? GAP : 0),
   );
   const mapBottom = Math.min(height - TOP - 120, crosscuts ? margin.b + rows + axisBelow : axisBelow);
   const map = { x0: LEFT, x1: mapRight, y0: mapBottom, y1: height - TOP };

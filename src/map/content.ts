@@ -3,7 +3,7 @@ import type { HazardRegion } from "../../shared/hazards/regions";
 import type { Reach } from "../../shared/reach/reach";
 import { crosscut } from "../../shared/setpoint/crosscut";
 import type { Limit, Outline, Point, Solution } from "../../shared/solution";
-import type { Crosscut } from "./traces/crosscuts";
+import type { Crosscut } from "./svg/stripModel";
 import { boundariesByMetal } from "./traces/fields";
 import { movedLimits } from "./traces/lines";
 import type { ProposedMark } from "./proposalStore";
@@ -19,6 +19,8 @@ export interface MapContent {
   /** the point the crosscuts run through; null hides them */
   through: Point | null;
   crosscuts: readonly Crosscut[];
+  /** a second pair of crosscuts to compare, through a point elsewhere */
+  pinned: { through: Point; crosscuts: readonly Crosscut[] } | null;
   reaches: readonly Reach[];
   /** edges that the other solids basis would move, with its name */
   moved: { basis: string; limits: readonly Limit[] } | null;
@@ -44,8 +46,10 @@ export interface ContentWishes {
   solution: Solution;
   /** the same question on the other solids basis */
   other: { basis: string; solution: Solution } | null;
-  /** where the crosscuts run; the set point of the window in hand, or a point the user chose */
+  /** where the crosscuts run: the set point of the window in hand */
   through: Point | null;
+  /** a point the user pinned, to compare its crosscuts */
+  pinned?: Point | null;
   reaches: readonly Reach[];
   cyanide: boolean;
   robust?: readonly Outline[];
@@ -58,20 +62,20 @@ export interface ContentWishes {
 
 export function mapContent(wishes: ContentWishes): MapContent {
   const { metals, solution, other, through, reaches, cyanide, robust = [], gases = [], practice = [] } = wishes;
-  const { trials = null, freeAcid = null, proposals = [] } = wishes;
+  const { trials = null, pinned = null, freeAcid = null, proposals = [] } = wishes;
+  const cutsThrough = (at: Point) =>
+    metals.map((metal) => ({
+      metal,
+      alongPH: crosscut(solution, metal.element, "pH", at),
+      alongEh: crosscut(solution, metal.element, "Eh", at),
+    }));
   return {
     solution,
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
     boundaries: boundariesByMetal(solution.fields, solution.frame),
     through,
-    crosscuts:
-      through === null
-        ? []
-        : metals.map((metal) => ({
-            metal,
-            alongPH: crosscut(solution, metal.element, "pH", through),
-            alongEh: crosscut(solution, metal.element, "Eh", through),
-          })),
+    crosscuts: through === null ? [] : cutsThrough(through),
+    pinned: pinned && { through: pinned, crosscuts: cutsThrough(pinned) },
     reaches,
     moved: other && { basis: other.basis, limits: movedLimits(solution, other.solution) },
     kept: solution.kept ?? [],

@@ -3,6 +3,7 @@ import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import { mapPixels, type Sheet } from "./boxes";
 import type { CursorStore } from "./cursorStore";
+import { broughtInSight, zoomedRound } from "./zoom";
 
 interface CursorProps {
   sheet: Sheet;
@@ -12,20 +13,22 @@ interface CursorProps {
   store: CursorStore;
   holder: RefObject<HTMLDivElement | null>;
   onPick: (at: Point | null) => void;
-  /** a double click: back to the whole frame */
-  onReset: () => void;
+  frame: Frame;
+  /** keys zoom, a cursor that leaves the part in sight takes it along, a double click goes back to the whole frame */
+  onSight: (next: Frame | null) => void;
 }
 
 /** A second click within this time, ms, makes a double click, and then the first one meant nothing. */
 const DOUBLE = 280;
 
-/** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them; a click or Enter picks the point, Escape lets it go. */
-export function Cursor({ sheet, visible, through, store, holder, onPick, onReset }: CursorProps) {
+/** Two hairlines under the pointer across map and strips. Pointer and arrow keys move them, plus and minus zoom round them;
+ *  a click or Enter picks the point, Escape lets it go. */
+export function Cursor({ sheet, visible, frame, through, store, holder, onPick, onSight }: CursorProps) {
   const upright = useRef<HTMLDivElement>(null);
   const level = useRef<HTMLDivElement>(null);
-  const now = useRef({ sheet, visible, through, onPick, onReset });
+  const now = useRef({ sheet, visible, frame, through, onPick, onSight });
   useEffect(() => {
-    now.current = { sheet, visible, through, onPick, onReset };
+    now.current = { sheet, visible, frame, through, onPick, onSight };
   });
 
   useEffect(() => {
@@ -92,7 +95,7 @@ export function Cursor({ sheet, visible, through, store, holder, onPick, onReset
       if (click !== 0) {
         clearTimeout(click);
         click = 0;
-        now.current.onReset();
+        now.current.onSight(null);
         return;
       }
       click = window.setTimeout(() => {
@@ -103,16 +106,26 @@ export function Cursor({ sheet, visible, through, store, holder, onPick, onReset
     const onKey = (event: KeyboardEvent) => {
       if (onHandle(event)) return;
       const step = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] }[event.key];
-      const { visible: v, through: t } = now.current;
-      if (step) {
+      const { visible: v, frame: f, through: t } = now.current;
+      const zoom = { "+": 0.7, "=": 0.7, "-": 1 / 0.7, "−": 1 / 0.7 }[event.key];
+      if (event.ctrlKey || event.metaKey || event.altKey) return;
+      if (zoom !== undefined || event.key === "Home") {
+        event.preventDefault();
+        const about = store.get() ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
+        now.current.onSight(zoom === undefined ? null : zoomedRound(about, zoom, v, f));
+        show(store.get());
+      } else if (step) {
         event.preventDefault();
         const from = store.get() ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
         const fine = event.shiftKey ? 5 : 1;
         const clamp = (x: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, x));
-        show([
-          clamp(from[0] + (step[0] ?? 0) * 0.02 * fine, v.pH),
-          clamp(from[1] + (step[1] ?? 0) * 0.005 * fine, v.Eh),
-        ]);
+        const to: Point = [
+          clamp(from[0] + (step[0] ?? 0) * 0.02 * fine, f.pH),
+          clamp(from[1] + (step[1] ?? 0) * 0.005 * fine, f.Eh),
+        ];
+        const outside = to[0] < v.pH[0] || to[0] > v.pH[1] || to[1] < v.Eh[0] || to[1] > v.Eh[1];
+        if (outside) now.current.onSight(broughtInSight(to, v, f));
+        show(to);
       } else if (event.key === "Enter") {
         const at = store.get();
         if (at) now.current.onPick(at);

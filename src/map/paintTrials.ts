@@ -18,10 +18,10 @@ const corners: Readonly<Record<Exclude<MarkSymbol, "circle">, Corners>> = {
   hexagon: around(6, 0, 1.1),
 };
 
-/** The same outline as an SVG path round the origin, radius 5: for a legend. */
-export function symbolPath(symbol: MarkSymbol): string {
-  if (symbol === "circle") return "M-5,0a5,5 0 1,0 10,0a5,5 0 1,0 -10,0Z";
-  return `M${corners[symbol].map(([u, v]) => `${(5 * u).toFixed(2)},${(5 * v).toFixed(2)}`).join("L")}Z`;
+/** The same outline as an SVG path round the origin: for a picture, and at radius 5 for a legend. */
+export function symbolPath(symbol: MarkSymbol, r = 5): string {
+  if (symbol === "circle") return `M${-r},0a${r},${r} 0 1,0 ${2 * r},0a${r},${r} 0 1,0 ${-2 * r},0Z`;
+  return `M${corners[symbol].map(([u, v]) => `${(r * u).toFixed(2)},${(r * v).toFixed(2)}`).join("L")}Z`;
 }
 
 /** How one mark looks; two marks of one look are stamped with one stamp. */

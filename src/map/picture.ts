@@ -1,34 +1,49 @@
-import regular from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-400-normal.woff2?url";
 import bold from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-700-normal.woff2?url";
-import { sheetBoxes } from "./boxes";
+import regular from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-400-normal.woff2?url";
+import { createElement } from "react";
+import { flushSync } from "react-dom";
+import { createRoot } from "react-dom/client";
+import { sheetBoxes, type Sheet } from "./boxes";
 import type { MapContent } from "./content";
 import { mapFigure } from "./figure";
+import { placedNames } from "./names/placedNames";
 import { picture } from "./Plot";
 import type { Figure } from "./plotTypes";
-import { haloStyle } from "./texts";
-import { type MapView, MONO } from "./view";
+import { Overlay } from "./svg/Overlay";
+import { drawnMetals, type MapView, MONO } from "./view";
 
 const WIDTH = 1000;
 const HEIGHT = 860;
 const LINE = 16;
+const HEAD = 30;
 
-/** The map at one size for every screen, with what it rests on in the caption: a picture travels without its plan. */
-export function captionedFigure(
+/** A picture in the making: the figure with its caption, and what stands over it. */
+export interface Picture {
+  figure: Figure;
+  content: MapContent;
+  sheet: Sheet;
+  view: MapView;
+}
+
+/** The map at one size for every screen, as it is seen: part in sight, hidden metals, trials. With what it rests on in the caption,
+ *  since a picture travels without its plan. */
+export function captionedPicture(
   content: MapContent,
-  view: Omit<MapView, "visible">,
+  view: MapView,
   title: string,
   caption: readonly string[],
-): Figure {
+): Picture {
   const { crosscuts, reach } = view.layers;
   const sheet = sheetBoxes(WIDTH, HEIGHT, {
-    metals: view.metals.length,
+    metals: drawnMetals(view).length,
     reagents: content.reaches.length,
     crosscuts: crosscuts && content.through !== null,
     reach,
     freeAcid: content.freeAcid !== null,
+    pinned: content.pinned !== null,
   });
-  const { data, layout } = mapFigure(content, sheet, { ...view, visible: view.frame, traceTrials: true });
-  const [head, foot] = [30, LINE * caption.length + 18];
+  const { data, layout } = mapFigure(content, sheet, view);
+  const foot = LINE * caption.length + 18;
   const words = (text: string, y: number, size: number, color: string) => ({
     text,
     x: 0,
@@ -42,16 +57,15 @@ export function captionedFigure(
     align: "left" as const,
     font: { family: MONO, size, color },
   });
-  return {
+  const figure = {
     data,
     layout: {
       ...layout,
-      height: HEIGHT + head + foot,
-      margin: { ...layout.margin, t: layout.margin.t + head, b: layout.margin.b + foot },
+      height: HEIGHT + HEAD + foot,
+      margin: { ...layout.margin, t: layout.margin.t + HEAD, b: layout.margin.b + foot },
       paper_bgcolor: view.colours.paper,
       annotations: [
-        ...layout.annotations,
-        { ...words(`<b>${title}</b>`, 1, 15, view.colours.ink), yshift: head + 12 },
+        { ...words(`<b>${title}</b>`, 1, 15, view.colours.ink), yshift: HEAD + 16 },
         ...caption.map((line, i) => ({
           ...words(line, 0, 11, view.colours.muted),
           yshift: -layout.margin.b - 8 - i * LINE,
@@ -59,6 +73,25 @@ export function captionedFigure(
       ],
     },
   };
+  return { figure, content, sheet, view };
+}
+
+/** What stands over the figure, as SVG text moved below the title. */
+function overlaySvg({ content, sheet, view }: Picture): string {
+  const holder = document.createElement("div");
+  const root = createRoot(holder);
+  const trials =
+    view.layers.trials && content.trials ? { ...content.trials, colours: view.colours, brushed: null } : null;
+  flushSync(() =>
+    root.render(
+      createElement(Overlay, { content, sheet, view, names: placedNames(content, sheet, view), trials, picture: true }),
+    ),
+  );
+  const svg = holder.querySelector("svg");
+  svg?.setAttribute("y", String(HEAD));
+  const text = svg ? new XMLSerializer().serializeToString(svg) : "";
+  root.unmount();
+  return text;
 }
 
 const asDataUrl = async (url: string): Promise<string> => {
@@ -66,9 +99,9 @@ const asDataUrl = async (url: string): Promise<string> => {
   return `data:font/woff2;base64,${btoa(Array.from(bytes, (b) => String.fromCharCode(b)).join(""))}`;
 };
 
-/** The figure as SVG text that stands alone: fonts and halos written into it. */
-async function standaloneSvg(figure: Figure, view: Omit<MapView, "visible">): Promise<string> {
-  const url = await picture(figure);
+/** The picture as SVG text that stands alone: its fonts written into it. */
+async function standaloneSvg(wanted: Picture): Promise<string> {
+  const url = await picture(wanted.figure);
   const svg = decodeURIComponent(url.slice(url.indexOf(",") + 1));
   const faces = await Promise.all(
     (
@@ -81,8 +114,10 @@ async function standaloneSvg(figure: Figure, view: Omit<MapView, "visible">): Pr
         `@font-face{font-family:"JetBrains Mono";font-weight:${weight};src:url(${await asDataUrl(file)}) format("woff2")}`,
     ),
   );
-  const style = faces.join("") + haloStyle(view.colours.sheet, view.colours.tint);
-  return svg.replace(/(<svg[^>]*>)/, `$1<style>${style}</style>`);
+  const over = overlaySvg(wanted);
+  return svg
+    .replace(/(<svg[^>]*>)/, (tag) => `${tag}<style>${faces.join("")}</style>`)
+    .replace(/<\/svg>\s*$/, () => `${over}</svg>`);
 }
 
 async function rasterised(svg: string, width: number, height: number): Promise<Blob> {
@@ -101,8 +136,8 @@ async function rasterised(svg: string, width: number, height: number): Promise<B
 
 /** A picture of the map as a file.
  *  @throws Error when the browser cannot draw it */
-export async function mapPicture(figure: Figure, view: Omit<MapView, "visible">, format: "png" | "svg"): Promise<Blob> {
-  const svg = await standaloneSvg(figure, view);
+export async function mapPicture(wanted: Picture, format: "png" | "svg"): Promise<Blob> {
+  const svg = await standaloneSvg(wanted);
   if (format === "svg") return new Blob([svg], { type: "image/svg+xml" });
-  return rasterised(svg, figure.layout.width, figure.layout.height);
+  return rasterised(svg, wanted.figure.layout.width, wanted.figure.layout.height);
 }

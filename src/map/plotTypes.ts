@@ -16,9 +16,7 @@ export interface PlotTrace {
   name: string;
   x: Coordinate[];
   y: Coordinate[];
-  mode: "lines" | "lines+markers" | "markers" | "text";
-  xaxis?: "x" | "x2" | "x3";
-  yaxis?: "y" | "y2";
+  mode: "lines" | "lines+markers";
   line?: { color: string; width: number; dash?: string; shape?: "linear"; simplify?: boolean };
   fill?: "toself" | "none";
   fillcolor?: string;
@@ -30,9 +28,6 @@ export interface PlotTrace {
     opacity: number;
     line: { width: number; color?: string };
   };
-  text?: string[];
-  textposition?: "middle center";
-  textfont?: { color: string[]; size: number[] };
   opacity?: number;
   hoverinfo: "skip";
   showlegend: false;
@@ -57,17 +52,6 @@ export interface PlotAnnotation {
   opacity?: number;
   xshift?: number;
   yshift?: number;
-}
-
-export interface PlotShape {
-  type: "line";
-  xref: string;
-  yref: string;
-  x0: number;
-  x1: number;
-  y0: number;
-  y1: number;
-  line: { color: string; width: number };
 }
 
 export interface PlotAxis {
@@ -107,16 +91,12 @@ export interface PlotLayout {
   showlegend: false;
   hovermode: false;
   dragmode: "zoom" | "pan";
-  uirevision: string;
+  uirevision?: string;
   font: { family: string; size: number; color: string };
   hoverlabel: { font: { family: string; size: number } };
   xaxis: PlotAxis;
   yaxis: PlotAxis;
-  xaxis2?: PlotAxis;
-  xaxis3?: PlotAxis;
-  yaxis2?: PlotAxis;
   annotations: PlotAnnotation[];
-  shapes?: PlotShape[];
 }
 
 export interface Figure {

@@ -1,16 +1,20 @@
 import { needsPhase, speciesParts } from "../../shared/species/parts";
-import { formulaHtml, typeset } from "../../shared/species/typeset";
+import { type FormulaPart, typeset } from "../../shared/species/typeset";
 
 /** width of one character of the map's type, in ems */
 const ADVANCE = 0.6;
-const SMALL = 0.7;
+/** size of what stands below or above the line */
+export const SMALL = 0.7;
 
-/** A species' name for the map, and how wide it will stand.
- *  @param id  as in the tables     @param size  px     @returns  markup for Plotly and a width in px */
-export function speciesHtml(id: string, size: number): { html: string; width: number } {
+export const plainText = (text: string): FormulaPart[] => [{ text, kind: "plain" }];
+
+/** How wide a text will stand in the map's type, px. */
+export const textWidth = (parts: readonly FormulaPart[], size: number): number =>
+  parts.reduce((n, p) => n + p.text.length * (p.kind === "plain" ? 1 : SMALL), 0) * ADVANCE * size;
+
+/** A species' name for the map.
+ *  @param id  as in the tables     @returns  its parts, typeset; a neutral dissolved species says so */
+export function speciesText(id: string): FormulaPart[] {
   const parts = speciesParts(id);
-  const tail = needsPhase(parts) ? "(aq)" : "";
-  const set = typeset(parts.formula);
-  const letters = set.reduce((n, p) => n + p.text.length * (p.kind === "plain" ? 1 : SMALL), 0) + tail.length;
-  return { html: formulaHtml(parts.formula) + tail, width: letters * ADVANCE * size };
+  return [...typeset(parts.formula), ...(needsPhase(parts) ? plainText("(aq)") : [])];
 }

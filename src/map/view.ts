@@ -71,12 +71,22 @@ export interface MapView {
   plain: boolean;
   /** element in focus: the others step back */
   focus: string | null;
+  /** elements that are not drawn; they count in the windows all the same */
+  hidden: ReadonlySet<string>;
+  /** two metals that are compared: only they are drawn, and the fields named are those of both together */
+  pair: readonly [string, string] | null;
   layers: Layers;
   /** index into solution.windows */
   window: number;
-  /** trials as traces of the figure, for a picture; on the screen they are painted over it */
-  traceTrials?: boolean;
 }
+
+/** Whether a metal is drawn at all. */
+export const isDrawn = (element: string, { hidden, pair }: Pick<MapView, "hidden" | "pair">): boolean =>
+  pair === null ? !hidden.has(element) : pair.includes(element);
+
+/** The metals that are drawn, in the order of the plan. */
+export const drawnMetals = (view: Pick<MapView, "metals" | "hidden" | "pair">): MapMetal[] =>
+  view.metals.filter(({ element }) => isDrawn(element, view));
 
 export const MONO = "JetBrains Mono, Gangueway Signs, ui-monospace, monospace";
 

@@ -12,6 +12,7 @@ import { usePotentialScale } from "../../lib/potential";
 import { useMay } from "../../lib/session";
 import { printColours, useThemeColours } from "../../lib/theme";
 import { CursorStore } from "../../map/cursorStore";
+import { LimitStore } from "../../map/limitStore";
 import { ProposalStore } from "../../map/proposalStore";
 import { useTold } from "../../map/trialStore";
 import { AnswersPanel } from "./answers/AnswersPanel";
@@ -21,7 +22,7 @@ import { AsksPanel } from "./asks/AsksPanel";
 import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
 import { FrozenBanner, type Said, WorkspaceHeader } from "./header/WorkspaceHeader";
-import { MapPanel } from "./MapPanel";
+import { MapPanel } from "./map/MapPanel";
 import { useLink } from "./address/useLink";
 import type { Opened } from "./address/useOpened";
 import { applyOpening, holdSetPoint } from "./model/adviceEdit";
@@ -34,6 +35,7 @@ import { useWorkspaceKeys } from "./model/useWorkspaceKeys";
 import { useMapModel } from "./model/useMapModel";
 import { useAnalysis, useGases, useHeld } from "./model/usePoint";
 import { usePrinting } from "./model/usePrinting";
+import { useSight } from "./model/useSight";
 import { useSolved } from "./model/useSolved";
 import { dropDraft, keepDraft } from "./model/draftShelf";
 import { Sheet } from "./Sheet";
@@ -77,8 +79,9 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const theme = useThemeColours();
   const printing = usePrinting();
   const { layers, setLayer, plain, setPlain } = look.map;
-  const { reagents, choose, focus, setFocus, setPinned } = look;
-  const { pin: pinned } = look.view;
+  const { reagents, choose, focus, setFocus } = look;
+  const { sight, change: see } = useSight(inputs, look);
+  const [limitStore] = useState(() => new LimitStore());
   const [cursor] = useState(() => new CursorStore());
   const [proposals] = useState(() => new ProposalStore());
   const proposing = useTold(proposals.asked) !== null;
@@ -101,6 +104,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   useWorkspaceKeys(
     draft,
     look,
+    see,
     inputs.metals.map((m) => m.element),
     fixed,
     mayWrite,
@@ -149,9 +153,8 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
     colours: printing ? printColours : theme,
     layers,
     plain,
-    focus,
+    sight,
     chosen,
-    pinned,
     reagents,
     robust: robustOutlines,
     gases: drawnGases,
@@ -251,16 +254,15 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
               inputs={inputs}
               scale={scale}
               onPlain={setPlain}
-              onFocus={setFocus}
-              pinned={pinned}
-              onPin={setPinned}
+              data={data}
+              sight={sight}
+              change={see}
+              limitStore={limitStore}
               cursor={cursor}
               onMoveSetPoint={mayMove ? moveSetPoint : undefined}
               onSettle={draft.settle}
               trials={shownTrials}
               proposals={proposing ? proposals : null}
-              zoom={look.view.visible}
-              onZoom={look.setZoom}
             />
           ) : null
         }
@@ -315,6 +317,8 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
                 robust={robust}
                 held={held}
                 gases={gases}
+                analysis={analysis}
+                limitStore={limitStore}
                 freeAcid={freeAcid}
                 onApply={mayMove ? (opening) => edit(applyOpening(opening)) : undefined}
                 onInputs={mayMove ? edit : undefined}

@@ -4,7 +4,7 @@ import { boundaryLines } from "../../../shared/drawing/boundaries";
 import { lineCoordinates } from "../geometry/rings";
 import { emphasis, metalColour } from "../metalStyle";
 import { type PlotTrace, trace } from "../plotTypes";
-import type { MapView } from "../view";
+import { drawnMetals, type MapView } from "../view";
 
 /** Lines between the fields of every metal, worked out once a solution and kept while the view changes.
  *  @returns  polylines by metal, V vs SHE */
@@ -26,7 +26,7 @@ export function boundariesByMetal(fields: readonly Field[], frame: MapView["fram
 export function boundaryTraces(lines: ReadonlyMap<string, readonly (readonly Point[])[]>, view: MapView): PlotTrace[] {
   return (["watched", "gangue", "target"] as const).flatMap((role) =>
     [false, true].flatMap((aside) => {
-      const metals = view.metals.filter((m) => m.role === role && emphasis(m.element, view) < 1 === aside);
+      const metals = drawnMetals(view).filter((m) => m.role === role && emphasis(m.element, view) < 1 === aside);
       const [first] = metals;
       if (!first) return [];
       return [

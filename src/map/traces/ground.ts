@@ -2,48 +2,30 @@ import type { Outline, Solution } from "../../../shared/solution";
 import { ringCoordinates } from "../geometry/rings";
 import { hatchesOf, patternOf, shuts } from "../metalStyle";
 import { type PlotTrace, trace } from "../plotTypes";
-import { type MapView, windowName } from "../view";
-
-/** The sheet under everything, on which the map is drawn. */
-export function groundTrace({ frame, scale, colours }: MapView): PlotTrace {
-  const [[x0, x1], [y0, y1]] = [frame.pH, frame.Eh];
-  const outer: [number, number][] = [
-    [x0, y0],
-    [x1, y0],
-    [x1, y1],
-    [x0, y1],
-  ];
-  return trace({
-    uid: "ground",
-    name: "Ground",
-    mode: "lines",
-    line: { color: "rgba(0,0,0,0)", width: 0 },
-    fill: "toself",
-    fillcolor: colours.sheet,
-    ...ringCoordinates([{ outer, holes: [] }], scale.toShown),
-  });
-}
+import { drawnMetals, type MapView, windowName } from "../view";
 
 /** Shut ground: one `toself` trace a metal, hatched with that metal's pattern, holes wound the other way.
  *  @param shut  where each metal is not as required, V vs SHE; metals that shut nothing may be absent */
 export function shutGroundTraces(shut: ReadonlyMap<string, readonly Outline[]>, view: MapView): PlotTrace[] {
   if (view.plain) return [];
   const hatches = hatchesOf(view.metals);
-  return view.metals.filter(shuts).flatMap((metal) => {
-    const hatch = hatches.get(metal.element);
-    if (!hatch) return [];
-    return [
-      trace({
-        uid: `shut-${metal.element}`,
-        name: `${metal.element} not as required`,
-        mode: "lines",
-        line: { color: "rgba(0,0,0,0)", width: 0 },
-        fill: "toself",
-        fillpattern: patternOf(metal, hatch, view),
-        ...ringCoordinates(shut.get(metal.element) ?? [], view.scale.toShown),
-      }),
-    ];
-  });
+  return drawnMetals(view)
+    .filter(shuts)
+    .flatMap((metal) => {
+      const hatch = hatches.get(metal.element);
+      if (!hatch) return [];
+      return [
+        trace({
+          uid: `shut-${metal.element}`,
+          name: `${metal.element} not as required`,
+          mode: "lines",
+          line: { color: "rgba(0,0,0,0)", width: 0 },
+          fill: "toself",
+          fillpattern: patternOf(metal, hatch, view),
+          ...ringCoordinates(shut.get(metal.element) ?? [], view.scale.toShown),
+        }),
+      ];
+    });
 }
 
 /** Open ground, lit; the window chosen first, the others in a thinner light. */

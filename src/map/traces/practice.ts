@@ -3,7 +3,6 @@ import { boxOf } from "../../../shared/practice/box";
 import type { PublishedRange } from "../../../shared/practice/ranges";
 import { ringCoordinates } from "../geometry/rings";
 import { type PlotTrace, trace } from "../plotTypes";
-import type { PlacedText } from "../texts";
 import type { MapView } from "../view";
 
 /** A published range that the map shows. */
@@ -40,29 +39,4 @@ export function practiceTraces(ranges: readonly ShownRange[], view: MapView): Pl
       ),
     }),
   );
-}
-
-/** Ids at the lower left corners, one above the other where they would meet. */
-export function practiceNames(ranges: readonly ShownRange[], view: MapView): PlacedText[] {
-  const [lo, hi] = view.visible.Eh;
-  const [left, right] = view.visible.pH;
-  const taken: { x: number; y: number }[] = [];
-  const [wide, high] = [0.06 * (right - left), 0.04 * (hi - lo)];
-  return ranges.flatMap(({ range }) => {
-    const box = boxOf(range, view.visible);
-    if (!box) return [];
-    const x = box.pH[0] + 0.025 * (right - left);
-    let y = box.Eh[0] + 0.03 * (hi - lo);
-    while (taken.some((t) => Math.abs(t.x - x) < wide && Math.abs(t.y - y) < 0.99 * high)) y += high;
-    taken.push({ x, y });
-    return [
-      {
-        html: range.id,
-        x,
-        y: view.scale.toShown(y),
-        colour: view.colours.muted,
-        size: 10,
-      },
-    ];
-  });
 }

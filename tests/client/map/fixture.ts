@@ -107,6 +107,8 @@ export const view: MapView = {
   colours: themeColours.light,
   plain: false,
   focus: null,
+  hidden: new Set(),
+  pair: null,
   layers: defaultLayers,
   window: 0,
 };

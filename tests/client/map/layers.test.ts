@@ -1,8 +1,9 @@
 import { expect, test } from "vitest";
 import type { HazardRegion } from "../../../shared/hazards/regions";
 import type { PublishedRange } from "../../../shared/practice/ranges";
-import { gasNames, gasTraces } from "../../../src/map/traces/gases";
-import { practiceNames, practiceTraces } from "../../../src/map/traces/practice";
+import { gasNames, practiceNames } from "../../../src/map/names/anchoredNames";
+import { gasTraces } from "../../../src/map/traces/gases";
+import { practiceTraces } from "../../../src/map/traces/practice";
 import { robustTraces } from "../../../src/map/traces/robust";
 import { themeColours } from "../../../src/lib/theme";
 import { view } from "./fixture";
@@ -38,12 +39,11 @@ test("a gas is hatched and edged in the signal colour, and named on its edge", (
   expect(fill?.fillpattern?.fgcolor).toBe(themeColours.light.signal);
   expect(edge?.line?.color).toBe(themeColours.light.signal);
   const [name] = gasNames([region], view);
-  expect(name?.html).toContain("100 ppm");
-  expect(name?.html).not.toContain("IDLH");
+  expect(name?.parts.map((p) => p.text).join("")).toBe("H2S, 100 ppm");
 });
 
 test("a gas whose edge is out of sight has no name", () => {
-  expect(gasNames([{ ...region, isoLines: [] }], view)).toEqual([]);
+  expect(gasNames([{ ...region, isoLines: [] }], view).map((n) => n.places)).toEqual([[]]);
 });
 
 const range = { id: "R99", pH: [4.5, 5.4], Eh: null } as unknown as PublishedRange;
@@ -53,7 +53,7 @@ test("a published range is a box with its id; an axis it does not speak of spans
   expect(new Set(here?.x)).toEqual(new Set([4.5, 5.4]));
   expect(new Set(here?.y)).toEqual(new Set(view.frame.Eh.map(view.scale.toShown)));
   expect(elsewhere?.x).toEqual([]);
-  expect(practiceNames([{ range, atTemperature: true }], view).map((t) => t.html)).toEqual(["R99"]);
+  expect(practiceNames([{ range, atTemperature: true }], view).map((t) => t.parts[0]?.text)).toEqual(["R99"]);
 });
 
 test("what holds over the ranges is an outline without a fill", () => {

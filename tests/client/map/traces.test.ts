@@ -7,11 +7,13 @@ import { mapFigure } from "../../../src/map/figure";
 import { isLit } from "../../../shared/drawing/lit";
 import { hatchesOf } from "../../../src/map/metalStyle";
 import type { PlotTrace } from "../../../src/map/plotTypes";
-import { speciesHtml } from "../../../src/map/speciesText";
+import { placedNames } from "../../../src/map/names/placedNames";
+import { speciesText } from "../../../src/map/speciesText";
+import { reachBar } from "../../../src/map/svg/ReachBars";
+import { differingStretches, limitMarks } from "../../../src/map/svg/stripModel";
 import { boundariesByMetal, boundaryTraces } from "../../../src/map/traces/fields";
 import { openGroundTraces, shutGroundTraces, windowOutlineTraces } from "../../../src/map/traces/ground";
 import { hydrogenCyanideTraces, movedLimits, waterTraces } from "../../../src/map/traces/lines";
-import { reachTraces } from "../../../src/map/traces/reachBars";
 import { setPointTraces } from "../../../src/map/traces/setPoint";
 import type { MapMetal } from "../../../src/map/view";
 import { solution, view, window } from "./fixture";
@@ -51,6 +53,17 @@ describe("shut and open ground", () => {
   test("out of focus a metal's hatching steps back", () => {
     const [zinc, iron] = shutGroundTraces(shut, { ...view, focus: "Zn" });
     expect(zinc!.fillpattern!.fgopacity).toBeGreaterThan(3 * iron!.fillpattern!.fgopacity);
+  });
+  test("ten metals of whatever roles never share shape and spacing, nor do sixteen", () => {
+    const roles = ["target", "gangue", "watched"] as const;
+    for (let n = 0; n < 400; n++) {
+      const metals = Array.from({ length: n < 200 ? 10 : 16 }, (_, i) => ({
+        element: String(i),
+        role: roles[(n * (i + 3) * 7 + Math.floor((n * i) / 5)) % 3]!,
+      }));
+      const seen = [...hatchesOf(metals).values()].map((h) => `${h.shape} ${h.size}`);
+      expect(new Set(seen).size).toBe(metals.length);
+    }
   });
   test("metals of one role never share angle and spacing", () => {
     const metals = ["A", "B", "C", "D", "E", "F", "G"].map((element): MapMetal => ({
@@ -115,35 +128,48 @@ describe("lines", () => {
 
 describe("set point", () => {
   test("its box is two control bands wide and high, on the chosen scale", () => {
-    const band = byUid(setPointTraces({ pH: 5, Eh: 0.5 }, [5, 0.5], view), "set-point");
+    const band = byUid(setPointTraces({ pH: 5, Eh: 0.5 }, view), "set-point");
     const x = band.x.filter((v) => v !== null);
     expect(Math.max(...x) - Math.min(...x)).toBeCloseTo(0.3);
     expect(band.marker!.size.filter((size) => size > 0)).toHaveLength(1);
     expect([x.at(-1), shown(band).at(-1)]).toEqual([5, 300]);
     expect(Math.max(...shown(band)) - Math.min(...shown(band))).toBeCloseTo(60);
   });
-  test("without a window the lines stay and box and point go", () =>
-    expect(setPointTraces(null, [5, 0.5], view).map((t) => t.uid)).toEqual(["guides"]));
+  test("without a window there is none", () => expect(setPointTraces(null, view)).toEqual([]));
 });
 
 describe("reach bars", () => {
+  const bar = (equilibrium: number, slope = 0) =>
+    reachBar({ ...air, line: { intercept: equilibrium, slope, from: "library" } }, 5, view.frame.Eh);
   test("solid over the practical range, thin from its end on to the equilibrium, inside the frame", () => {
-    const [thin, solid] = reachTraces([air], 5, view);
-    shown(solid!).forEach((v, i) => expect(v).toBeCloseTo(([0.45, 0.75][i]! - 0.2) * 1000));
-    expect(shown(solid!)).toHaveLength(2);
-    expect(Math.max(...shown(thin!))).toBeCloseTo((1.2 - 5 * 0.066 - 0.2) * 1000);
-    expect(thin!.line!.width).toBeLessThan(solid!.line!.width);
+    const { solid, thin, cap } = bar(1.2, -0.066);
+    expect(solid).toEqual([0.45, 0.75]);
+    expect(thin![0]).toBe(0.75);
+    expect(thin![1]).toBeCloseTo(1.2 - 5 * 0.066);
+    expect(cap).toEqual({ at: thin![1], beyond: 0 });
   });
-  test("on the map the equilibrium is capped level; beyond it an arrow points on", () => {
-    const wings = (equilibrium: number) => {
-      const [thin] = reachTraces([{ ...air, line: { intercept: equilibrium, slope: 0, from: "library" } }], 5, view);
-      const at = thin!.x.flatMap((x, i) => (x !== null && Math.abs(x - 0.5) > 0.1 ? [thin!.y[i]!] : []));
-      return { tip: Math.max(...shown(thin!)), wings: at };
-    };
-    expect(wings(0.9)).toEqual({ tip: 700, wings: [700, 700] });
-    const beyond = wings(1.4);
-    expect(beyond.tip).toBe(800);
-    for (const y of beyond.wings) expect(y).toBeLessThan(800);
+  test("an equilibrium beyond what is in sight is an arrow at its end", () =>
+    expect(bar(1.4).cap).toEqual({ at: 1, beyond: 1 }));
+  test("an equilibrium inside the practical range needs no thin line", () => expect(bar(0.6).thin).toBeNull());
+});
+
+describe("crosscuts", () => {
+  test("the way to the nearest limit on either side, in pH and mV, with the metal that shuts", () => {
+    const eh = { ...window.limits[1]!, distancePH: null, distanceEh: -0.1234 };
+    const far = { ...window.limits[0]!, distancePH: 7 };
+    const marked = { ...window, limits: [...window.limits, eh, far] };
+    expect(limitMarks(marked, "pH").map((m) => [m.at, m.kind, m.metal, m.text])).toEqual([
+      [0, "frame", null, "−1.00\u2009pH"],
+      [2, "metal", "Fe", "+1.00\u2009pH"],
+    ]);
+    expect(limitMarks(marked, "Eh").map((m) => [m.metal, m.text])).toEqual([["Fe", "−123\u2009mV"]]);
+  });
+  test("two lines differ where a metal is something else on each", () => {
+    const part = (species: string, from: number, to: number) =>
+      ({ species, from, to, state: "dissolved", fulfilled: true }) as const;
+    const first = [part("a", 0, 4), part("b", 4, 10)];
+    expect(differingStretches(first, first)).toEqual([]);
+    expect(differingStretches(first, [part("a", 0, 2), part("c", 2, 5), part("b", 5, 10)])).toEqual([[2, 5]]);
   });
 });
 
@@ -153,42 +179,36 @@ describe("the figure", () => {
     expect(new Set(figure.data.map((t) => t.uid)).size).toBe(figure.data.length);
     for (const t of figure.data) expect([t.type, t.hoverinfo]).toEqual(["scatter", "skip"]);
   });
-  test("strips share the map's axes", () => {
-    expect(byUid(figure.data, "cut-pH-open")).toMatchObject({ xaxis: "x", yaxis: "y2" });
-    expect(byUid(figure.data, "cut-Eh-open")).toMatchObject({ xaxis: "x2", yaxis: "y" });
-    expect(byUid(figure.data, "reach-solid")).toMatchObject({ xaxis: "x3", yaxis: "y" });
-  });
-  test("along pH zinc is tinted to pH 6 and hatched beyond", () => {
-    const hatched = byUid(figure.data, "cut-pH-Zn").x.filter((x) => x !== null);
-    expect([Math.min(...hatched), Math.max(...hatched)]).toEqual([6, 10]);
-  });
-  test("along Eh at pH 1 iron is as required throughout", () =>
-    expect(byUid(figure.data, "cut-Eh-Fe")).toBeUndefined());
-  test("ranges and names are on the chosen scale, and the axis says which", () => {
+  test("ranges are on the chosen scale, and hold what is in sight", () => {
     expect(figure.layout.yaxis.range).toEqual([-200, 800]);
-    expect(figure.layout.annotations.map((a) => a.text)).toContain("Eh / mV vs Ag/AgCl");
+    const zoomed = mapFigure(content, sheet, { ...view, visible: { pH: [2, 4], Eh: [0.45, 0.7] } });
+    expect(zoomed.layout.xaxis.range).toEqual([2, 4]);
+    expect(zoomed.layout.yaxis.range).toEqual([250, expect.closeTo(500, 6)]);
   });
-  test("uirevision stands while the solution moves and changes with frame and scale", () => {
-    const moved = mapFigure({ ...content, solution: { ...solution, temperatureC: 70 } }, sheet, view);
-    expect(moved.layout.uirevision).toBe(figure.layout.uirevision);
-    expect(mapFigure(content, sheet, { ...view, frame: { pH: [0, 9], Eh: [0, 1] } }).layout.uirevision).not.toBe(
-      figure.layout.uirevision,
-    );
+  test("names stand in the fields, typeset, those on open ground told apart", () => {
+    const names = placedNames(content, sheet, view);
+    const plain = (id: string) => names.find((n) => n.id === id)?.lines.map((l) => l.parts.map((p) => p.text).join(""));
+    expect(plain("Zn ZnO(s)")).toEqual(["ZnO"]);
+    expect(plain("Fe FeOOH(s,goethite)")).toEqual(["FeOOH"]);
+    expect(plain("window 0")).toEqual(["Window A", "cut by the frame"]);
+    expect(names.find((n) => n.id === "Zn Zn^2+(aq)")?.lines[0]?.parts).toContainEqual({ text: "2+", kind: "sup" });
+    expect(new Set(names.map((n) => n.lit))).toEqual(new Set([true, false]));
+    for (const { pH, Eh, lit } of names) expect(isLit(solution.windows, pH, Eh)).toBe(lit);
   });
-  test("names stand in the fields, typeset, those on open ground apart", () => {
-    const names = figure.data.filter((t) => t.uid.startsWith("names-")).flatMap((t) => t.text!);
-    expect(names).toContain("<b>ZnO</b>");
-    expect(names).toContain("FeOOH");
-    expect(names.some((n) => n.includes("Window A") && n.includes("cut by the frame"))).toBe(true);
-    expect(names).toContain("<b>Zn<sup>2+</sup></b>");
-    for (const [uid, lit] of [
-      ["names-on-lit", true],
-      ["names-on-sheet", false],
-    ] as const) {
-      const { x, y } = byUid(figure.data, uid);
-      expect(x.length).toBeGreaterThan(0);
-      x.forEach((pH, i) => expect(isLit(solution.windows, pH!, view.scale.fromShown(y[i]!))).toBe(lit));
-    }
+  test("a metal that is hidden is not drawn, and counts in the window all the same", () => {
+    const bare = { ...view, hidden: new Set(["Fe"]) };
+    const uids = mapFigure(content, sheet, bare).data.map((t) => t.uid);
+    expect(uids).not.toContain("shut-Fe");
+    expect(uids).not.toContain("fields-gangue");
+    expect(uids).toContain("open-0");
+    expect(placedNames(content, sheet, bare).some((n) => n.id.startsWith("Fe "))).toBe(false);
+  });
+  test("of two that are compared every piece of ground says what both are", () => {
+    const names = placedNames(content, sheet, { ...view, pair: ["Zn", "Fe"] }).map((n) => n.id);
+    expect(names).toContain("Zn ZnO(s), Fe FeOOH(s,goethite)");
+    expect(names).toContain("Zn Zn^2+(aq), Fe Fe^2+(aq)");
+    expect(names).not.toContain("Zn ZnO(s), Fe Fe^2+(aq)");
+    expect(names).not.toContain("Zn ZnO(s)");
   });
   test("layers switched off leave nothing behind", () => {
     const off = Object.fromEntries(Object.keys(view.layers).map((k) => [k, false])) as typeof view.layers;
@@ -196,20 +216,16 @@ describe("the figure", () => {
       ...view,
       layers: off,
     });
-    expect(bare.data.map((t) => t.uid)).toEqual([
-      "ground",
-      "open-0",
-      "shut-Zn",
-      "shut-Fe",
-      "outline-0",
-      "names-on-lit",
-    ]);
-    expect([bare.layout.xaxis2, bare.layout.xaxis3, bare.layout.yaxis2]).toEqual([undefined, undefined, undefined]);
+    expect(bare.data.map((t) => t.uid)).toEqual(["open-0", "shut-Zn", "shut-Fe", "outline-0"]);
   });
 });
 
 test("a neutral dissolved species says that it is dissolved; ions and solids need not", () => {
-  expect(speciesHtml("FeSO4(aq)", 11).html).toBe("FeSO<sub>4</sub>(aq)");
-  expect(speciesHtml("Fe^3+(aq)", 11).html).toBe("Fe<sup>3+</sup>");
-  expect(speciesHtml("FeOOH(s,goethite)", 11).html).toBe("FeOOH");
+  const text = (id: string) =>
+    speciesText(id)
+      .map((p) => p.text)
+      .join("");
+  expect(text("FeSO4(aq)")).toBe("FeSO4(aq)");
+  expect(text("Fe^3+(aq)")).toBe("Fe3+");
+  expect(text("FeOOH(s,goethite)")).toBe("FeOOH");
 });

@@ -1,10 +1,8 @@
 import { describe, expect, test } from "vitest";
-import { potentialScale } from "../../../src/lib/potential";
 import { themeColours } from "../../../src/lib/theme";
 import { lookOf, placedMarks, symbolPath } from "../../../src/map/paintTrials";
 import { nearestMark } from "../../../src/map/TrialsLayer";
 import { colourScale, markSymbols, resultColour, type TrialMark } from "../../../src/map/trialMarks";
-import { trialTraces } from "../../../src/map/traces/trials";
 import { inBrush, TrialStore } from "../../../src/map/trialStore";
 
 const colours = themeColours.light;
@@ -48,25 +46,6 @@ describe("colour of a result", () => {
   });
 });
 
-describe("trials as traces", () => {
-  const view = { colours, scale: potentialScale("mV", { electrode: "x", short: "x", offset: 0.2, remark: null }) };
-  const traces = trialTraces(
-    [mark("a"), mark("b", { open: true, symbol: "square" }), mark("c", { cooled: true, symbol: "diamond" })],
-    scale,
-    view,
-  );
-  test("those under other conditions lie below and are open, in ink", () => {
-    expect(traces.map((t) => t.uid)).toEqual(["trials-apart", "trials"]);
-    expect(traces[0]?.marker).toMatchObject({ symbol: ["square-open"], color: colours.ink });
-  });
-  test("filled ones carry the colour of their result, a cooled sample a dot", () =>
-    expect(traces[1]?.marker).toMatchObject({
-      symbol: ["circle", "diamond-dot"],
-      color: [resultColour(80, scale, colours), resultColour(80, scale, colours)],
-    }));
-  test("potentials stand on the member's scale", () => expect(traces[1]?.y).toEqual([300, 300]));
-});
-
 describe("trials painted", () => {
   test("open under filled, those outside the brush under those inside", () => {
     const marks = [mark("a"), mark("b", { pH: 4, open: true }), mark("c", { pH: 6 })];
@@ -92,7 +71,7 @@ describe("trials painted", () => {
     expect(lookOf(mark("a", { open: true }), scale, colours).fill).toBeNull();
   });
   test("every marker has an outline of its own", () =>
-    expect(new Set(markSymbols.map(symbolPath)).size).toBe(markSymbols.length));
+    expect(new Set(markSymbols.map((symbol) => symbolPath(symbol))).size).toBe(markSymbols.length));
 });
 
 describe("trials under the hand", () => {

@@ -16,7 +16,8 @@ import { newPlanInputs } from "../../../src/lib/newPlan";
 import { planChanges } from "../../../src/lib/planChanges";
 import { potentialScale } from "../../../src/lib/potential";
 import { mapContent } from "../../../src/map/content";
-import { keptNames, keptTraces } from "../../../src/map/traces/kept";
+import { keptNames } from "../../../src/map/names/anchoredNames";
+import { keptTraces } from "../../../src/map/traces/kept";
 import { view } from "../map/fixture";
 import { library, solved } from "../../support/solver";
 
@@ -81,7 +82,8 @@ describe("in the answers", () => {
     const here = { ...view, frame: gold.frame, visible: gold.frame };
     const [, edge] = keptTraces(content.kept, here);
     expect(new Set(edge?.x.filter((x) => x !== null))).toEqual(new Set([10.5]));
-    expect(keptNames(content.kept, here)[0]?.html).toBe("HCN kept out, pH 10.5");
+    const [name] = keptNames(content, here);
+    expect(name?.parts.map((p) => p.text).join("")).toBe("HCN kept out, pH 10.5");
   });
 });
 

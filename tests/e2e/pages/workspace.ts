@@ -29,7 +29,6 @@ export interface DrawnTrace {
 /** Plotly hangs the figure and its axes on the element it draws in. */
 interface PlotlyElement extends HTMLElement {
   data: { uid: string; name: string; fillcolor?: string; fillpattern?: { shape?: string }; x: []; y: [] }[];
-  layout: { annotations: { text: string }[] };
   _fullLayout: Record<"xaxis" | "yaxis", { _offset: number; d2p: (value: number) => number }>;
 }
 
@@ -101,7 +100,7 @@ export class WorkspaceScreen {
   }
 
   axisWords(): Promise<string[]> {
-    return this.plot().evaluate((element) => (element as PlotlyElement).layout.annotations.map((a) => a.text));
+    return this.page.locator("[data-testid=map-overlay] [data-name^=axis]").allTextContents();
   }
 
   /** Where a point of the map stands on the page; Eh on the scale shown. */

@@ -1,7 +1,8 @@
-import { lazy, Suspense } from "react";
+import { lazy, Suspense, useMemo } from "react";
 import { Link } from "react-router-dom";
 import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { Advice, Opening } from "../../../../shared/advice/openings";
+import type { Analysis } from "../../../../shared/analysis";
 import type { Robust } from "../../../../shared/advice/robust";
 import { cautionsFor, hazardContext } from "../../../../shared/hazards/rules";
 import type { Reach } from "../../../../shared/reach/reach";
@@ -11,8 +12,10 @@ import type { HeldSetPoint } from "../../../../shared/setpoint/held";
 import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { namingOf } from "../../../../shared/windows/limitWords";
+import { later } from "../../../components/later";
 import { Loading } from "../../../components/status";
 import type { PotentialScale } from "../../../lib/potential";
+import type { LimitStore } from "../../../map/limitStore";
 import { windowName } from "../../../map/view";
 import type { Edit } from "../model/edit";
 import type { Awaited } from "../model/useAsked";
@@ -34,6 +37,15 @@ const RobustBlock = lazy(async () => ({ default: (await import("./RobustBlock"))
 const FreeAcidRow = lazy(() => import("./FreeAcidRow"));
 const NoWindowBlock = lazy(async () => ({ default: (await import("./NoWindowBlock")).NoWindowBlock }));
 
+// Set point and limits follow the hand at once; what takes longer to work out, or stands further down, a moment later.
+const Cautions = later(CautionsBlock);
+const Couples = later(CouplesBlock);
+const Fields = later(FieldsBlock);
+const Gas = later(GasBlock);
+const Overall = later(OverallBlock);
+const ReachLines = later(ReachBlock);
+const Warnings = later(WarningsBlock);
+
 export interface AnswersProps {
   inputs: PlanInputs;
   solution: Solution;
@@ -53,6 +65,9 @@ export interface AnswersProps {
   robust: Awaited<Robust>;
   held: HeldSetPoint | null;
   gases: Gases | null;
+  /** the exact pieces behind the answer */
+  analysis: Analysis | null;
+  limitStore: LimitStore;
   /** free acid against pH of a sulfate liquor */
   freeAcid: FreeAcidCurve | null;
   /** both absent where the plan is only looked at */
@@ -66,12 +81,12 @@ export interface AnswersProps {
 export function AnswersPanel(props: AnswersProps) {
   const { inputs, solution, data, scale, chosen, onChoose, reaches, problem, held, gases } = props;
   const window = solution.windows[chosen] ?? null;
-  const naming = namingOf(data, solution);
+  const naming = useMemo(() => namingOf(data, solution), [data, solution]);
   const name = windowName(chosen);
   const cautions = cautionsFor(hazardContext(inputs, window?.setPoint ?? null));
   const urgent = window !== null && gases !== null && reachedAtSetPoint(gases);
   const said = (
-    <CautionsBlock
+    <Cautions
       cautions={cautions}
       preset={inputs.preset}
       procedures={props.procedures}
@@ -91,8 +106,17 @@ export function AnswersPanel(props: AnswersProps) {
             </Suspense>
           )}
           {cautions.length > 0 && said}
-          {gases && urgent && <GasBlock gases={gases} />}
-          <LimitsBlock window={window} name={name} naming={naming} scale={scale} freeAcid={props.freeAcid} />
+          {gases && urgent && <Gas gases={gases} />}
+          <LimitsBlock
+            window={window}
+            name={name}
+            naming={naming}
+            scale={scale}
+            freeAcid={props.freeAcid}
+            analysis={props.analysis}
+            data={data}
+            limitStore={props.limitStore}
+          />
           {props.robust.state !== "none" && (
             <Suspense fallback={null}>
               <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
@@ -114,7 +138,7 @@ export function AnswersPanel(props: AnswersProps) {
           {cautions.length > 0 && said}
         </>
       )}
-      <ReachBlock
+      <ReachLines
         reaches={reaches}
         window={window}
         data={data}
@@ -123,9 +147,9 @@ export function AnswersPanel(props: AnswersProps) {
         scale={scale}
         choose={props.chooseReagents}
       />
-      <CouplesBlock problem={problem} data={data} pH={props.pH} scale={scale} />
+      <Couples problem={problem} data={data} pH={props.pH} scale={scale} />
       {window && (
-        <OverallBlock
+        <Overall
           problem={problem}
           inputs={inputs}
           solution={solution}
@@ -134,9 +158,9 @@ export function AnswersPanel(props: AnswersProps) {
           onInputs={props.onInputs}
         />
       )}
-      {gases && !urgent && <GasBlock gases={gases} />}
-      <WarningsBlock warnings={solution.warnings} />
-      <FieldsBlock solution={solution} data={data} />
+      {gases && !urgent && <Gas gases={gases} />}
+      <Warnings warnings={solution.warnings} />
+      <Fields solution={solution} data={data} />
       {cautions.length === 0 && said}
       <p className="no-print mt-5 text-sm">
         <Link to="/method">How this is worked out</Link>

@@ -52,6 +52,7 @@ export function ChooseReagents({
         <Sheet
           anchor={button}
           onClose={close}
+          label="Reagents whose reach is shown"
           align="end"
           className="max-h-[min(60vh,var(--radix-popover-content-available-height))] w-[300px] overflow-y-auto px-4 py-2"
         >

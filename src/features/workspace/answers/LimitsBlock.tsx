@@ -1,12 +1,20 @@
+import { useMemo, type ReactNode } from "react";
 import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
+import type { Analysis } from "../../../../shared/analysis";
 import type { Limit, Window } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { type LimitSentence, limitSentences, type Naming } from "../../../../shared/windows/limitWords";
 import { AcidAmount } from "../../../components/AcidAmount";
 import { Term } from "../../../components/Help";
 import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
+import { classes } from "../../../lib/classes";
 import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
+import type { LimitStore } from "../../../map/limitStore";
+import { useTold } from "../../../map/trialStore";
+import { limitKey } from "../model/limitKey";
+import { LimitMoves } from "./LimitMoves";
 import { Reaction } from "./Reaction";
 
 /** Each way out of the window: what happens there, by which reaction, and how far it is. */
@@ -16,6 +24,9 @@ export function LimitsBlock({
   naming,
   scale,
   freeAcid = null,
+  analysis,
+  data,
+  limitStore,
 }: {
   window: Window;
   name: string;
@@ -23,7 +34,13 @@ export function LimitsBlock({
   scale: PotentialScale;
   /** of a sulfate liquor */
   freeAcid?: FreeAcidCurve | null;
+  /** what the solution was read from; null while the plan cannot be solved */
+  analysis: Analysis | null;
+  data: ChemicalData;
+  /** which limit is pointed at, here or on the map */
+  limitStore: LimitStore;
 }) {
+  const sentences = useMemo(() => limitSentences(window, naming), [window, naming]);
   return (
     <section aria-label={`What shuts window ${name}`} className="mt-4">
       <SectionHead
@@ -36,12 +53,22 @@ export function LimitsBlock({
         What shuts window {name}
       </SectionHead>
       <ul>
-        {limitSentences(window, naming).map((sentence) => (
+        {sentences.map((sentence) => (
           <Sentence
             key={`${sentence.side} ${sentence.what}`}
             sentence={sentence}
             scale={scale}
             acid={acidTo(sentence, window, freeAcid)}
+            limitStore={limitStore}
+            moves={
+              analysis && (
+                <LimitMoves
+                  {...{ sentence, analysis, data, scale }}
+                  setPoint={window.setPoint}
+                  metalName={naming.metalName}
+                />
+              )
+            }
           />
         ))}
       </ul>
@@ -58,11 +85,29 @@ function acidTo({ axis, distance, side }: LimitSentence, { setPoint }: Window, c
   return here.withinSulfate && there.withinSulfate ? there.gPerL - here.gPerL : null;
 }
 
-function Sentence({ sentence, scale, acid }: { sentence: LimitSentence; scale: PotentialScale; acid: number | null }) {
+function Sentence({
+  sentence,
+  scale,
+  acid,
+  moves,
+  limitStore,
+}: {
+  sentence: LimitSentence;
+  scale: PotentialScale;
+  acid: number | null;
+  moves: ReactNode;
+  limitStore: LimitStore;
+}) {
+  const key = limitKey(sentence);
+  const pointed = useTold(limitStore.pointed) === key;
   const { side, what, limit, others } = sentence;
   const further = others.filter((o) => o.reaction !== limit.reaction);
   return (
-    <li className="hairline py-1">
+    <li
+      className={classes("hairline py-1", pointed && "bg-tint")}
+      onPointerEnter={() => limitStore.pointed.set(key)}
+      onPointerLeave={() => limitStore.pointed.set(null)}
+    >
       <div className="flex items-baseline justify-between gap-3">
         <span>
           <b>{side}</b> {what}
@@ -75,6 +120,7 @@ function Sentence({ sentence, scale, acid }: { sentence: LimitSentence; scale: P
           <AcidAmount gPerL={Math.abs(acid)} /> {acid > 0 ? "more" : "less"} free acid, by the same reckoning
         </div>
       )}
+      {moves}
       {further.length > 0 && (
         <details className="text-sm text-muted">
           <summary className="w-fit">

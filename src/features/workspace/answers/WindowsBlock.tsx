@@ -1,4 +1,5 @@
 import type { Solution } from "../../../../shared/solution";
+import { marginWords } from "../../../../shared/windows/limitWords";
 import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
@@ -44,9 +45,13 @@ export function WindowsBlock({
               )}
             >
               <span>
-                {windowName(i)}{" "}
+                <b>{windowName(i)}</b>{" "}
                 <span className="font-mono font-normal">
                   pH {fixed(window.pH[0], 2)} to {fixed(window.pH[1], 2)}
+                </span>
+                <span className="block text-sm font-normal text-muted">
+                  margin {fixed(window.setPoint.margin, 1)} {marginWords(window.setPoint)}
+                  {!window.controllable && ", narrower than the control bands"}
                 </span>
               </span>
               <span className="font-mono font-normal whitespace-nowrap">

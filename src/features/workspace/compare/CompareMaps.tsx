@@ -72,11 +72,10 @@ export function CompareMaps({ a, b, difference, scale, zoom, onZoom, shown, onSh
           <Suspense fallback={<Loading label="Opening the map" />}>
             <WindowMap
               asked={model.asked}
-              view={{ ...model.view, frame }}
+              view={{ ...model.view, frame, visible: zoom ?? frame }}
               cursor={cursor}
               onPick={nothing}
-              zoom={zoom}
-              onZoom={onZoom}
+              onSight={onZoom}
               label={`Window map of ${letter}, ${side.side.name}`}
             />
           </Suspense>
@@ -115,12 +114,11 @@ export function CompareMaps({ a, b, difference, scale, zoom, onZoom, shown, onSh
             <Suspense fallback={<Loading label="Opening the map" />}>
               <WindowMap
                 asked={third.asked}
-                view={third.view}
+                view={{ ...third.view, visible: zoom ?? third.view.frame }}
                 overlay={third.overlay}
                 cursor={cursor}
                 onPick={nothing}
-                zoom={zoom}
-                onZoom={onZoom}
+                onSight={onZoom}
                 label="Open ground of A and B laid over each other: kept, gained and lost"
               />
             </Suspense>

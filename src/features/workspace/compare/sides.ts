@@ -11,6 +11,7 @@ import { baseOf, decodeSettings } from "../address/settings";
 import { readDraft } from "../model/draftShelf";
 import { useMapModel } from "../model/useMapModel";
 import { useAnalysis, useHeld } from "../model/usePoint";
+import { wholeSight } from "../model/useSight";
 import { useSolved } from "../model/useSolved";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 
@@ -92,9 +93,8 @@ export function useSolvedSide({ inputs, data }: Side, scale: PotentialScale, col
     colours,
     layers: shown,
     plain,
-    focus: null,
+    sight: wholeSight,
     chosen,
-    pinned: null,
     reagents: NOTHING,
     robust: NOTHING,
     gases: NOTHING,

@@ -8,7 +8,7 @@ import { celsius, fixed, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
 import type { PotentialScale } from "../../../lib/potential";
 import { mapContent } from "../../../map/content";
-import { captionedFigure, mapPicture } from "../../../map/picture";
+import { captionedPicture, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
 import { fileStem, limitsTable, polygonsTable, type Table, windowsTable } from "./exports";
 import { saveFile, saveJson } from "./saveFile";
@@ -79,8 +79,8 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
     }
     case "png":
     case "svg": {
-      const figure = captionedFigure(mapContent(e.model.asked), e.model.view, e.plan.name, captionLines(e));
-      return saveFile(`${stem}-map.${kind}`, await mapPicture(figure, e.model.view, kind));
+      const wanted = captionedPicture(mapContent(e.model.asked), e.model.view, e.plan.name, captionLines(e));
+      return saveFile(`${stem}-map.${kind}`, await mapPicture(wanted, kind));
     }
   }
 }

@@ -12,12 +12,13 @@ import type { ContentWishes } from "../../../map/content";
 import type { ShownRange } from "../../../map/traces/practice";
 import type { Layers, MapMetal, MapView } from "../../../map/view";
 import { usePractice } from "./usePractice";
+import type { Sight } from "./useSight";
 import { useOtherBasis } from "./useSolved";
 
 export interface MapModel {
   /** what the map shows of the plan; worked out where it is drawn */
   asked: ContentWishes;
-  view: Omit<MapView, "visible">;
+  view: MapView;
   metals: readonly MapMetal[];
   reaches: readonly Reach[];
   /** published ranges that fit the plan; empty while the layer is off */
@@ -36,9 +37,8 @@ interface Wishes {
   colours: ThemeColours;
   layers: Layers;
   plain: boolean;
-  focus: string | null;
+  sight: Sight;
   chosen: number;
-  pinned: Point | null;
   reagents: readonly string[];
   /** what holds over the plan's ranges */
   robust: readonly Outline[];
@@ -52,8 +52,9 @@ const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
 
 /** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
 export function useMapModel(w: Wishes): MapModel | null {
-  const { inputs, problem, solution, data, scale, colours, layers, plain, focus, chosen, pinned, reagents } = w;
+  const { inputs, problem, solution, data, scale, colours, layers, plain, sight, chosen, reagents } = w;
   const { robust, gases, freeAcid } = w;
+  const { focus, hidden, pair, pinned, zoom } = sight;
   const { metals: planMetals, controlBand, preset } = inputs;
   const frame = solution?.frame ?? inputs.frame;
   const temperatureC = solution?.temperatureC ?? inputs.temperatureC;
@@ -64,8 +65,8 @@ export function useMapModel(w: Wishes): MapModel | null {
     [planMetals],
   );
   const through = useMemo(
-    (): Point => pinned ?? (setPoint ? [setPoint.pH, setPoint.Eh] : [middle(frame.pH), middle(frame.Eh)]),
-    [pinned, setPoint, frame],
+    (): Point => (setPoint ? [setPoint.pH, setPoint.Eh] : [middle(frame.pH), middle(frame.Eh)]),
+    [setPoint, frame],
   );
   const reaches = useMemo(
     () => reachesOf(data, reagents, preset, temperatureC),
@@ -74,12 +75,25 @@ export function useMapModel(w: Wishes): MapModel | null {
   const practice = usePractice(layers.practice, { preset, metals: planMetals, temperatureC });
   const cyanide = inputs.ligands.some((l) => l.component === "CN");
   const asked = useMemo(
-    () => solution && { metals, solution, other, through, reaches, cyanide, robust, gases, practice, freeAcid },
-    [metals, solution, other, through, reaches, cyanide, robust, gases, practice, freeAcid],
+    () => solution && { metals, solution, other, through, pinned, reaches, cyanide, robust, gases, practice, freeAcid },
+    [metals, solution, other, through, pinned, reaches, cyanide, robust, gases, practice, freeAcid],
   );
   const view = useMemo(
-    () => ({ metals, frame, controlBand, scale, colours, plain, focus, layers, window: chosen }),
-    [metals, frame, controlBand, scale, colours, plain, focus, layers, chosen],
+    (): MapView => ({
+      metals,
+      frame,
+      visible: zoom ?? frame,
+      controlBand,
+      scale,
+      colours,
+      plain,
+      focus,
+      hidden: new Set(hidden),
+      pair,
+      layers,
+      window: chosen,
+    }),
+    [metals, frame, zoom, controlBand, scale, colours, plain, focus, hidden, pair, layers, chosen],
   );
   return useMemo(
     () => asked && { asked, view, metals, reaches, practice, through },

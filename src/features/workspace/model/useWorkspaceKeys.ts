@@ -2,12 +2,14 @@ import type { DialogName } from "../header/Dialogs";
 import type { DraftInHand } from "./useDraft";
 import type { useLook } from "./useLook";
 import { useKeys } from "./useKeys";
+import type { SightInHand } from "./useSight";
 
 /** What the keyboard does on the plan's screen; KeysDialog names it all.
  *  @param fixed  the settings are only looked at     @param windows  how many there are, which is in hand, and how to take another */
 export function useWorkspaceKeys(
   draft: DraftInHand,
   look: ReturnType<typeof useLook>,
+  see: SightInHand["change"],
   elements: readonly string[],
   fixed: boolean,
   mayWrite: boolean,
@@ -16,7 +18,7 @@ export function useWorkspaceKeys(
   copyLink: () => void,
 ): void {
   const { count, chosen, choose } = windows;
-  const { focus, setFocus, setPinned, map } = look;
+  const { focus, setFocus, map } = look;
   useKeys([
     { key: "z", ctrl: true, shift: false, run: () => fixed || draft.undo() },
     { key: "z", ctrl: true, shift: true, run: () => fixed || draft.redo() },
@@ -29,10 +31,7 @@ export function useWorkspaceKeys(
     { key: "?", run: () => open("keys") },
     ...["0", "escape"].map((key) => ({
       key,
-      run: () => {
-        setFocus(null);
-        setPinned(null);
-      },
+      run: () => see({ focus: null, pair: null, pinned: null, ...(key === "0" ? { hidden: [] } : {}) }),
     })),
     ...elements.slice(0, 9).map((element, i) => ({
       key: String(i + 1),

@@ -1,0 +1,46 @@
+import { useMemo } from "react";
+import type { Analysis } from "../../../../shared/analysis";
+import type { SetPoint } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { limitMoves } from "../../../../shared/windows/limitMoves";
+import type { LimitSentence } from "../../../../shared/windows/limitWords";
+import { componentWord } from "../../../components/ComponentName";
+import { later } from "../../../components/later";
+import type { PotentialScale } from "../../../lib/potential";
+import { moveWords } from "../model/moveWords";
+
+interface LimitMovesProps {
+  sentence: LimitSentence;
+  setPoint: SetPoint;
+  analysis: Analysis;
+  data: ChemicalData;
+  metalName: (element: string) => string;
+  scale: PotentialScale;
+}
+
+/** As the liquor is entered: sulfur is sulfate while sulfate is not reduced. */
+function ligandName(data: ChemicalData, { prepared }: Analysis, component: string): string {
+  if (component === "S(sulfide)") return "sulfide";
+  if (component === "S" && !prepared.sulfateReduction) return "sulfate";
+  return component === "C" ? "carbonate" : componentWord(data, component);
+}
+
+/** What would move a limit, one thing at a time. */
+export const LimitMoves = later(function LimitMoves(props: LimitMovesProps) {
+  const { sentence, setPoint, analysis, data, metalName, scale } = props;
+  const words = useMemo(
+    () =>
+      moveWords(
+        sentence,
+        limitMoves(analysis, sentence.limit, setPoint),
+        { metalName, componentName: (component) => ligandName(data, analysis, component) },
+        scale,
+      ),
+    [sentence, setPoint, analysis, data, metalName, scale],
+  );
+  return words === null ? null : (
+    <p className="text-sm" data-testid="limit-moves">
+      {words}
+    </p>
+  );
+});

@@ -1,0 +1,179 @@
+import { lazy, Suspense, useCallback, useId, useMemo, useState } from "react";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
+import type { Frame } from "../../../../shared/schemas/problem";
+import type { Point } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
+import { namingOf } from "../../../../shared/windows/limitWords";
+import { SpeciesName } from "../../../components/Formula";
+import { MetalName } from "../../../components/MetalLine";
+import { Loading } from "../../../components/status";
+import { fixed } from "../../../lib/format";
+import type { PotentialScale } from "../../../lib/potential";
+import { solidsBasisWord } from "../../../lib/planWords";
+import type { CursorStore } from "../../../map/cursorStore";
+import type { LimitStore } from "../../../map/limitStore";
+import type { ProposalStore } from "../../../map/proposalStore";
+import { ReadOut } from "../../../map/ReadOut";
+import type { ShownTrials } from "../../../map/TrialsLayer";
+import { drawnMetals, windowName } from "../../../map/view";
+import type { MapModel } from "../model/useMapModel";
+import type { SightInHand } from "../model/useSight";
+import { MapAsText } from "./MapAsText";
+import { differences } from "./mapText";
+import { MapTools } from "./MapTools";
+import { namedLimits } from "./namedLimits";
+
+const loadMap = () => import("../../../map/WindowMap");
+const WindowMap = lazy(loadMap);
+// Plotly is the largest file there is: it comes in while the plan and the chemistry are read. A failure shows when the map is due.
+void loadMap().catch(() => undefined);
+
+export interface MapPanelProps extends SightInHand {
+  model: MapModel;
+  inputs: PlanInputs;
+  data: ChemicalData;
+  scale: PotentialScale;
+  onPlain: (plain: boolean) => void;
+  cursor: CursorStore;
+  limitStore: LimitStore;
+  /** moves the set point by hand; absent where the plan is only looked at */
+  onMoveSetPoint?: ((at: Point) => void) | undefined;
+  onSettle: () => void;
+  trials: ShownTrials | null;
+  /** null while nobody asked */
+  proposals: ProposalStore | null;
+}
+
+/** The middle: what stands under the cursor, the tools of the map, and the map. */
+export function MapPanel(props: MapPanelProps) {
+  const {
+    model,
+    inputs,
+    data,
+    scale,
+    onPlain,
+    sight,
+    change,
+    cursor,
+    limitStore,
+    onMoveSetPoint,
+    onSettle,
+    trials,
+    proposals,
+  } = props;
+  const { asked, view, metals, through } = model;
+  const { solution } = asked;
+  const { plain, window: chosen } = view;
+  const [moving, setMoving] = useState(false);
+  const [asText, setAsText] = useState(false);
+  const textId = useId();
+  const window = solution.windows[chosen];
+  const setPoint = window?.setPoint;
+  const naming = useMemo(() => namingOf(data, solution), [data, solution]);
+  const limits = useMemo(() => namedLimits(window, naming, scale), [window, naming, scale]);
+  const inWords = useMemo(
+    () => ({ solution, metals, scale, naming, chosen, through, sight }),
+    [solution, metals, scale, naming, chosen, through, sight],
+  );
+  const drawn = useMemo(() => drawnMetals(view), [view]);
+  const onSight = useCallback((zoom: Frame | null) => change({ zoom }), [change]);
+  const onPick = useCallback((pinned: Point | null) => change({ pinned }), [change]);
+  const where = setPoint ? `at the set point of window ${windowName(chosen)}` : "in the middle of the frame";
+  return (
+    <div className="flex min-h-0 flex-1 flex-col">
+      <div className="flex items-start gap-3 px-4 pt-2">
+        <div className="min-w-0 flex-1">
+          <ReadOut
+            store={cursor}
+            solution={solution}
+            metals={drawn}
+            all={metals}
+            scale={scale}
+            rest={{ at: through, words: where }}
+            freeAcid={asked.freeAcid ?? null}
+          />
+          {sight.pinned && (
+            <PinnedLine
+              differs={differences(solution, metals, through, sight.pinned)}
+              at={sight.pinned}
+              scale={scale}
+            />
+          )}
+        </div>
+        <MapTools
+          sight={sight}
+          change={change}
+          metals={metals}
+          frame={view.frame}
+          through={through}
+          plain={plain}
+          onPlain={onPlain}
+          moving={moving}
+          onMoving={setMoving}
+          asText={asText}
+          onAsText={setAsText}
+        />
+      </div>
+      <div className="relative min-h-0 flex-1 px-2 pb-2">
+        <MapAsText id={textId} open={asText} asked={inWords} />
+        <Suspense fallback={<Loading label="Opening the map" />}>
+          <WindowMap
+            asked={asked}
+            view={view}
+            onSight={onSight}
+            dragMode={moving ? "pan" : "zoom"}
+            cursor={cursor}
+            onPick={onPick}
+            trials={trials}
+            proposals={proposals}
+            limits={limits}
+            limitStore={limitStore}
+            handle={
+              setPoint && onMoveSetPoint
+                ? {
+                    at: [setPoint.pH, setPoint.Eh],
+                    label: `Set point, pH ${fixed(setPoint.pH, 2)}, ${scale.format(setPoint.Eh)}, margin ${fixed(setPoint.margin, 1)} control bands`,
+                    onMove: onMoveSetPoint,
+                    onSettle,
+                  }
+                : null
+            }
+            describedBy={textId}
+            label={`Window map of ${metals.map((m) => m.element).join(", ")}, solids ${solidsBasisWord[inputs.solidsBasis]}. Arrow keys move the cursor, plus and minus zoom, Home shows the whole frame, Enter pins a second pair of crosscuts there, Escape lets go.`}
+          />
+        </Suspense>
+      </div>
+    </div>
+  );
+}
+
+/** What is otherwise at the pinned point. */
+function PinnedLine({
+  differs,
+  at,
+  scale,
+}: {
+  differs: ReturnType<typeof differences>;
+  at: Point;
+  scale: PotentialScale;
+}) {
+  return (
+    <p className="flex flex-wrap gap-x-3 text-sm" data-testid="pinned-line">
+      <span className="font-mono whitespace-nowrap">
+        pinned pH {fixed(at[0], 2)}, {scale.format(at[1])}
+      </span>
+      {differs.length === 0 ? (
+        <span className="text-muted">every metal is the same there</span>
+      ) : (
+        differs.map(({ metal, there, turns }) => (
+          <span key={metal.element} className="whitespace-nowrap">
+            <MetalName {...metal} />{" "}
+            <span className={turns ? "font-bold" : undefined}>
+              <SpeciesName id={there} withPhase />
+            </span>
+          </span>
+        ))
+      )}
+    </p>
+  );
+}

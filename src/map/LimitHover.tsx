@@ -1,0 +1,114 @@
+import { type ReactNode, useEffect } from "react";
+import type { Frame } from "../../shared/schemas/problem";
+import type { Point } from "../../shared/solution";
+import type { ThemeColours } from "../lib/theme";
+import { mapPixels, type Sheet } from "./boxes";
+import { type CursorStore, useCursor } from "./cursorStore";
+import type { LimitStore } from "./limitStore";
+import { useTold } from "./trialStore";
+
+/** One edge of a window and what is said of it. */
+export interface NamedLimit {
+  /** the sentence it belongs to; several edges may share one */
+  key: string;
+  from: Point;
+  to: Point;
+  /** metal, reaction, distance */
+  words: ReactNode;
+}
+
+/** px from an edge that still mean it */
+const REACH = 7;
+
+function distanceTo(
+  [x, y]: readonly [number, number],
+  [ax, ay]: readonly [number, number],
+  [bx, by]: readonly [number, number],
+): number {
+  const [dx, dy] = [bx - ax, by - ay];
+  const t = Math.min(1, Math.max(0, ((x - ax) * dx + (y - ay) * dy) / (dx * dx + dy * dy || 1)));
+  return Math.hypot(ax + t * dx - x, ay + t * dy - y);
+}
+
+/** The edge nearest to a place, within a finger's reach of it. */
+export function nearestLimit(
+  limits: readonly NamedLimit[],
+  toPixel: (pH: number, Eh: number) => [number, number],
+  at: Point,
+): NamedLimit | null {
+  const here = toPixel(...at);
+  let best: NamedLimit | null = null;
+  let least = REACH;
+  for (const limit of limits) {
+    const distance = distanceTo(here, toPixel(...limit.from), toPixel(...limit.to));
+    if (distance < least) [best, least] = [limit, distance];
+  }
+  return best;
+}
+
+interface LimitHoverProps {
+  limits: readonly NamedLimit[];
+  store: LimitStore;
+  cursor: CursorStore;
+  sheet: Sheet;
+  visible: Frame;
+  colours: ThemeColours;
+}
+
+/** Names the window limit under the cursor and shows where it runs; one that is pointed at in the list is shown as well. */
+export function LimitHover({ limits, store, cursor, sheet, visible, colours }: LimitHoverProps) {
+  const at = useCursor(cursor);
+  const pointed = useTold(store.pointed);
+  const { toPixel, box } = mapPixels(sheet, visible);
+  const under = at && nearestLimit(limits, toPixel, at);
+  const key = under?.key ?? null;
+  const pointing = at !== null;
+  useEffect(() => {
+    if (pointing) store.pointed.set(key);
+  }, [store, key, pointing]);
+  useEffect(() => (pointing ? () => store.pointed.set(null) : undefined), [store, pointing]);
+
+  const shown = limits.filter((l) => l.key === (key ?? pointed));
+  if (shown.length === 0) return null;
+  const [x, y] = at ? toPixel(...at) : [0, 0];
+  const left = x < (box.x0 + box.x1) / 2;
+  const above = y > (box.y0 + box.y1) / 2;
+  return (
+    <>
+      <svg
+        aria-hidden
+        className="no-print pointer-events-none absolute top-0 left-0"
+        width={sheet.width}
+        height={sheet.height}
+        data-testid="limit-shown"
+      >
+        {shown.map(({ from, to }) => {
+          const [[x1, y1], [x2, y2]] = [toPixel(...from), toPixel(...to)];
+          return (
+            <line
+              key={`${x1} ${y1} ${x2} ${y2}`}
+              {...{ x1, y1, x2, y2 }}
+              stroke={colours.verdigris}
+              strokeWidth={6}
+              strokeLinecap="round"
+              opacity={0.45}
+            />
+          );
+        })}
+      </svg>
+      {under && (
+        <div
+          role="tooltip"
+          data-testid="limit-words"
+          className="no-print pointer-events-none absolute z-10 max-w-72 border border-ink bg-sheet px-2 py-1 text-sm"
+          style={{
+            [left ? "left" : "right"]: left ? x + 14 : sheet.width - x + 14,
+            [above ? "bottom" : "top"]: above ? sheet.height - y + 14 : y + 14,
+          }}
+        >
+          {under.words}
+        </div>
+      )}
+    </>
+  );
+}

@@ -1,0 +1,75 @@
+import { type Box, placeLabels, type Segment } from "../../../shared/drawing/labels";
+import { isLit } from "../../../shared/drawing/lit";
+import type { Point } from "../../../shared/solution";
+import { mapPixels, type Sheet } from "../boxes";
+import type { MapContent } from "../content";
+import { textWidth } from "../speciesText";
+import type { AnchoredText, PlacedText } from "../texts";
+import { isDrawn, type MapView } from "../view";
+import { gasNames, hydrogenCyanideNames, keptNames, otherBasisNames, practiceNames } from "./anchoredNames";
+import { fieldWishes, pairWishes, windowWishes } from "./fieldNames";
+
+/** Names inside the fields and windows, none over another; what finds no room is left to the read-out. */
+export function placedNames(content: MapContent, sheet: Sheet, view: MapView): PlacedText[] {
+  const { solution, boundaries } = content;
+  const { box, toPixel, toPoint } = mapPixels(sheet, view.visible);
+  const inSight: Box = { x0: box.x0 + 4, y0: box.y0 + 3, x1: box.x1 - 4, y1: box.y1 - 3 };
+  const taken: Box[] = [];
+  const at = solution.windows[view.window]?.setPoint;
+  if (at && view.layers.setPoint) {
+    const [x0, y1] = toPixel(at.pH - view.controlBand.pH, at.Eh - view.controlBand.Eh);
+    const [x1, y0] = toPixel(at.pH + view.controlBand.pH, at.Eh + view.controlBand.Eh);
+    taken.push({ x0: x0 - 3, y0: y0 - 3, x1: x1 + 3, y1: y1 + 3 });
+  }
+  const lit = (pH: number, Eh: number) => isLit(solution.windows, pH, Eh);
+
+  const anchored: AnchoredText[] = [
+    ...otherBasisNames(content, view),
+    ...hydrogenCyanideNames(content, view),
+    ...keptNames(content, view),
+    ...(view.layers.hazard ? gasNames(content.gases, view) : []),
+    ...(view.layers.practice ? practiceNames(content.practice, view) : []),
+  ];
+  const fixed = anchored.flatMap(({ id, parts, size, colour, places }): PlacedText[] => {
+    const [w, h] = [textWidth(parts, size) / 2 + 4, size * 0.8];
+    for (const [pH, Eh] of places) {
+      const [x, y] = toPixel(pH, Eh);
+      const own: Box = { x0: x - w, x1: x + w, y0: y - h, y1: y + h };
+      if (!within(own, inSight) || taken.some((other) => overlap(own, other))) continue;
+      taken.push(own);
+      return [{ id, lines: [{ parts, size }], pH, Eh, colour, lit: lit(pH, Eh) }];
+    }
+    return [];
+  });
+
+  const wishes = [
+    ...(view.plain && view.focus !== null ? [] : windowWishes(solution, view, toPixel)),
+    ...(!view.layers.labels
+      ? []
+      : view.pair
+        ? pairWishes(solution.fields, view, toPixel)
+        : fieldWishes(solution.fields, view, toPixel)),
+  ];
+  const segments = (line: readonly Point[]): Segment[] =>
+    line.slice(1).map((p, i): Segment => [toPixel(...(line[i] as Point)), toPixel(...p)]);
+  const drawn = [...boundaries].filter(([metal]) => isDrawn(metal, view));
+  const lines = [
+    ...drawn.flatMap(([, of]) => of.flatMap(segments)),
+    ...solution.windows.flatMap((w) => w.polygons.flatMap(({ outer }) => segments([...outer, outer[0] as Point]))),
+    ...solution.waterLines.flatMap(({ intercept, slope }) =>
+      segments(view.frame.pH.map((pH): Point => [pH, intercept + slope * pH])),
+    ),
+    ...(content.moved && view.layers.otherBasis ? content.moved.limits.flatMap((l) => segments([l.from, l.to])) : []),
+  ];
+  const placed = placeLabels(wishes, inSight, taken, lines);
+  const found = wishes.flatMap((wish): PlacedText[] => {
+    const spot = placed.get(wish.id);
+    if (!spot) return [];
+    const [pH, Eh] = toPoint(spot[0], spot[1]);
+    return [{ id: wish.id, lines: wish.lines, pH, Eh, colour: wish.colour, lit: lit(pH, Eh) }];
+  });
+  return [...fixed, ...found];
+}
+
+const overlap = (a: Box, b: Box): boolean => a.x0 < b.x1 && b.x0 < a.x1 && a.y0 < b.y1 && b.y0 < a.y1;
+const within = (a: Box, b: Box): boolean => a.x0 >= b.x0 && a.x1 <= b.x1 && a.y0 >= b.y0 && a.y1 <= b.y1;
