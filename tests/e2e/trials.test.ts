@@ -197,6 +197,7 @@ test("two who edit the same field are shown the difference, and neither loses wh
   await second.save();
   await first.page.keyboard.press("Control+s");
   const dialog = first.page.getByRole("dialog", { name: `Two versions of trial ${story.code}` });
+  await dialog.waitFor();
   const cells = await dialog.locator("tbody tr").first().locator("td").allInnerTexts();
   expect(cells.slice(1, 4).map((text) => /[\d.,]+/.exec(text)?.[0])).toEqual(["83,1", "84.5", "82.0"]);
   expect(await dialog.locator("tbody tr").count()).toBe(1);

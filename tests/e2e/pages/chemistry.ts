@@ -24,11 +24,9 @@ export class ChemistryScreen {
     return this.page.getByRole("complementary", { name: `Species ${id}`, exact: true });
   }
 
-  /** The number beside a label of the species in full. */
+  /** The number beside the first such label of the species in full; the edits below name their fields alike. */
   async value(id: string, label: string | RegExp): Promise<number> {
-    const row = this.detail(id)
-      .locator("div", { has: this.page.getByText(label) })
-      .last();
+    const row = this.detail(id).getByText(label).first().locator("xpath=..");
     return shownNumber(await row.innerText());
   }
 }
