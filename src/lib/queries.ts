@@ -15,6 +15,7 @@ export const keys = {
   plan: (id: string) => ["plans", id] as const,
   revisions: (id: string) => ["plans", id, "revisions"] as const,
   revision: (id: string, number: number) => ["plans", id, "revisions", number] as const,
+  comments: (planId: string) => ["comments", planId] as const,
   feeds: ["feeds"] as const,
   feedList: (projectId: string, deleted: string) => ["feeds", "list", projectId, deleted] as const,
   feed: (id: string) => ["feeds", id] as const,

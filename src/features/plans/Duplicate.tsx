@@ -1,25 +1,30 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { Controller, useForm } from "react-hook-form";
-import type { z } from "zod";
+import { z } from "zod";
 import { planCreate } from "../../../shared/schemas/plan";
 import { Button } from "../../components/Button";
 import { Dialog } from "../../components/Dialog";
 import { Select } from "../../components/Select";
 import { ErrorNote } from "../../components/status";
 import { TextField } from "../../components/TextField";
+import { ApiFailure } from "../../lib/failure";
 import { useDuplicatePlan } from "../../lib/plans";
 import { selectProject, useProject } from "../../lib/project";
 import type { DuplicateDialogProps } from "./DuplicateDialog";
 
-const schema = planCreate.pick({ name: true, projectId: true });
+const schema = planCreate.pick({ name: true, projectId: true }).extend({ revisions: z.enum(["latest", "all"]) });
 
-/** A copy of the latest inputs under a name of its own, in this or another project. */
+/** The server names the field it refuses: a name that is taken belongs under the name. */
+const aboutName = (error: unknown): string | null =>
+  error instanceof ApiFailure && error.path === "name" ? error.message : null;
+
+/** A copy under a name of its own, in this or another project: the latest inputs, or every revision. */
 export default function Duplicate({ plan, open, onOpenChange, onCopied }: DuplicateDialogProps) {
   const duplicate = useDuplicatePlan();
   const { projects = [] } = useProject();
   const form = useForm<z.infer<typeof schema>>({
     resolver: zodResolver(schema),
-    values: { name: `${plan.name}, copy`.slice(0, 120), projectId: plan.projectId },
+    values: { name: `${plan.name}, copy`.slice(0, 120), projectId: plan.projectId, revisions: "latest" },
     resetOptions: { keepDirtyValues: true },
   });
   const submit = form.handleSubmit((values) =>
@@ -40,7 +45,7 @@ export default function Duplicate({ plan, open, onOpenChange, onCopied }: Duplic
       open={open}
       onOpenChange={onOpenChange}
       title={`Duplicate ${plan.name}`}
-      description={`The copy starts with the inputs of revision ${plan.latest.number} as its revision 1.`}
+      description="A plan of its own from then on; it says where it comes from."
       footer={
         <>
           <Button onClick={() => onOpenChange(false)}>Cancel</Button>
@@ -53,7 +58,7 @@ export default function Duplicate({ plan, open, onOpenChange, onCopied }: Duplic
       <form id="duplicate-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
         <TextField
           label="Name of the copy"
-          error={form.formState.errors.name && "A name of 1 to 120 characters"}
+          error={form.formState.errors.name ? "A name of 1 to 120 characters" : aboutName(duplicate.error)}
           {...form.register("name")}
         />
         {projects.length > 1 && (
@@ -71,7 +76,25 @@ export default function Duplicate({ plan, open, onOpenChange, onCopied }: Duplic
             )}
           />
         )}
-        {duplicate.error && <ErrorNote doing="Not duplicated" error={duplicate.error} />}
+        {plan.revisionCount > 1 && (
+          <Controller
+            control={form.control}
+            name="revisions"
+            render={({ field }) => (
+              <Select
+                label="Takes along"
+                layout="stacked"
+                value={field.value}
+                onChange={field.onChange}
+                options={[
+                  { value: "latest", label: `the inputs of revision ${plan.latest.number}, as its revision 1` },
+                  { value: "all", label: `all ${plan.revisionCount} revisions, with their authors and notes` },
+                ]}
+              />
+            )}
+          />
+        )}
+        {duplicate.error && !aboutName(duplicate.error) && <ErrorNote doing="Not duplicated" error={duplicate.error} />}
       </form>
     </Dialog>
   );

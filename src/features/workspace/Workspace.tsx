@@ -7,6 +7,7 @@ import type { Outline, Point } from "../../../shared/solution";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { DataChanged } from "../../components/DataChanged";
 import { FormulaText } from "../../components/FormulaText";
+import { Loading } from "../../components/status";
 import { Remark } from "../../components/text";
 import { usePotentialScale } from "../../lib/potential";
 import { useMay } from "../../lib/session";
@@ -47,6 +48,8 @@ const loadBanners = () => import("./address/LinkBanners");
 const ProposalBanner = lazy(async () => ({ default: (await loadBanners()).ProposalBanner }));
 const IgnoredBanner = lazy(async () => ({ default: (await loadBanners()).IgnoredBanner }));
 
+const CommentsPanel = lazy(() => import("./comments/CommentsPanel"));
+
 export interface WorkspaceProps {
   plan: PlanRow;
   /** a saved state that is looked at; without it the plan is worked on */
@@ -85,6 +88,8 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const [cursor] = useState(() => new CursorStore());
   const [proposals] = useState(() => new ProposalStore());
   const proposing = useTold(proposals.asked) !== null;
+  const [talking, setTalking] = useState(false);
+  const toggleTalk = useCallback(() => setTalking((on) => !on), []);
   const [dialog, setDialog] = useState<DialogName | null>(null);
   const [said, setSaid] = useState<Said | null>(null);
   const link = useLink(plan, frozen, inputs, look.seen, setSaid);
@@ -111,6 +116,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
     { count, chosen, choose: chooseWindow },
     setDialog,
     link.copy,
+    toggleTalk,
   );
 
   const setPoint = solution?.windows[chosen]?.setPoint ?? null;
@@ -206,6 +212,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
           onCopyLink={link.copy}
           said={said}
           onSheet={() => onExport("sheet")}
+          onComments={toggleTalk}
         />
       ) : proposal ? (
         <Suspense fallback={null}>
@@ -228,6 +235,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
           mayWrite={mayWrite}
           said={said}
           onExport={onExport}
+          onComments={toggleTalk}
           onOpen={setDialog}
           onCopyLink={link.copy}
         />
@@ -267,65 +275,77 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
           ) : null
         }
         answers={
-          <AnswersOrTrials
-            trials={layers.trials ? trials : null}
-            scale={scale}
-            next={
-              solution &&
-              count > 0 && (
-                <NextTrials
-                  store={proposals}
-                  plan={plan}
-                  revision={frozen?.number ?? plan.latest.number}
-                  unsaved={frozen === null && draft.changed}
-                  {...{ inputs, solution, data, chosen, trials, scale }}
-                  reaches={map?.reaches ?? []}
-                  procedures={draft.procedures}
-                />
-              )
-            }
-            shown={look.view.side}
-            onShow={look.setSide}
-          >
-            {frozen === null && <DataChanged plan={plan} className="mb-3" />}
-            {failure && (
-              <Remark className="mb-3 border-signal!">
-                <p role="alert">
-                  <b>This cannot be solved.</b> <FormulaText text={failure.message} />.{" "}
-                  <span className="text-muted">
-                    At <span className="font-mono">{failure.path || "the plan"}</span>.
-                    {solution && " The map still shows the last answer; nothing you entered is lost."}
-                  </span>
-                </p>
-              </Remark>
-            )}
-            {solution && map && (
-              <AnswersPanel
-                inputs={inputs}
-                solution={solution}
-                data={data}
-                scale={scale}
-                chosen={chosen}
-                onChoose={chooseWindow}
-                reaches={map.reaches}
-                pH={map.through[0]}
-                chooseReagents={<ChooseReagents preset={inputs.preset} value={reagents} onChange={choose} />}
-                procedures={draft.procedures}
-                onProcedure={draft.nameProcedure}
-                problem={problem}
-                advice={advice}
-                robust={robust}
-                held={held}
-                gases={gases}
-                analysis={analysis}
-                limitStore={limitStore}
-                freeAcid={freeAcid}
-                onApply={mayMove ? (opening) => edit(applyOpening(opening)) : undefined}
-                onInputs={mayMove ? edit : undefined}
-                onLetGo={mayMove ? () => edit(holdSetPoint(null)) : undefined}
+          talking ? (
+            <Suspense fallback={<Loading label="Opening the comments" />}>
+              <CommentsPanel
+                {...{ plan, solution, data, chosen, scale }}
+                revision={frozen?.number ?? null}
+                through={map?.through ?? null}
+                onShow={setPinned}
+                onClose={toggleTalk}
               />
-            )}
-          </AnswersOrTrials>
+            </Suspense>
+          ) : (
+            <AnswersOrTrials
+              trials={layers.trials ? trials : null}
+              scale={scale}
+              next={
+                solution &&
+                count > 0 && (
+                  <NextTrials
+                    store={proposals}
+                    plan={plan}
+                    revision={frozen?.number ?? plan.latest.number}
+                    unsaved={frozen === null && draft.changed}
+                    {...{ inputs, solution, data, chosen, trials, scale }}
+                    reaches={map?.reaches ?? []}
+                    procedures={draft.procedures}
+                  />
+                )
+              }
+              shown={look.view.side}
+              onShow={look.setSide}
+            >
+              {frozen === null && <DataChanged plan={plan} className="mb-3" />}
+              {failure && (
+                <Remark className="mb-3 border-signal!">
+                  <p role="alert">
+                    <b>This cannot be solved.</b> <FormulaText text={failure.message} />.{" "}
+                    <span className="text-muted">
+                      At <span className="font-mono">{failure.path || "the plan"}</span>.
+                      {solution && " The map still shows the last answer; nothing you entered is lost."}
+                    </span>
+                  </p>
+                </Remark>
+              )}
+              {solution && map && (
+                <AnswersPanel
+                  inputs={inputs}
+                  solution={solution}
+                  data={data}
+                  scale={scale}
+                  chosen={chosen}
+                  onChoose={chooseWindow}
+                  reaches={map.reaches}
+                  pH={map.through[0]}
+                  chooseReagents={<ChooseReagents preset={inputs.preset} value={reagents} onChange={choose} />}
+                  procedures={draft.procedures}
+                  onProcedure={draft.nameProcedure}
+                  problem={problem}
+                  advice={advice}
+                  robust={robust}
+                  held={held}
+                  gases={gases}
+                  analysis={analysis}
+                  limitStore={limitStore}
+                  freeAcid={freeAcid}
+                  onApply={mayMove ? (opening) => edit(applyOpening(opening)) : undefined}
+                  onInputs={mayMove ? edit : undefined}
+                  onLetGo={mayMove ? () => edit(holdSetPoint(null)) : undefined}
+                />
+              )}
+            </AnswersOrTrials>
+          )
         }
       />
       <Dialogs

@@ -21,11 +21,22 @@ export interface HeaderProps {
   said: Said | null;
   onExport: (kind: ExportKind) => void;
   onCopyLink: () => void;
+  /** shows the comments, or the answers again */
+  onComments: () => void;
   onOpen: (dialog: "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys") => void;
 }
 
 /** The plan's name, what is saved of it and what is not, and the commands that concern the whole. */
-export function WorkspaceHeader({ plan, draft, mayWrite, said, onExport, onCopyLink, onOpen }: HeaderProps) {
+export function WorkspaceHeader({
+  plan,
+  draft,
+  mayWrite,
+  said,
+  onExport,
+  onCopyLink,
+  onComments,
+  onOpen,
+}: HeaderProps) {
   const { latest } = plan;
   return (
     <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
@@ -50,6 +61,7 @@ export function WorkspaceHeader({ plan, draft, mayWrite, said, onExport, onCopyL
         <ButtonLink to={compareAddress(plan, draft.changed)} title="Two states of the plan side by side">
           Compare
         </ButtonLink>
+        <CommentsButton count={plan.commentCount} onClick={onComments} />
         {mayWrite && (
           <Button kind="primary" disabled={!draft.changed} onClick={() => onOpen("save")} title="Ctrl S">
             Save revision
@@ -111,6 +123,12 @@ const compareAddress = ({ id, latest }: PlanRow, changed: boolean): string =>
   `/plans/${id}/compare?` +
   (changed || latest.number === 1 ? `a=${latest.number}&b=draft` : `a=${latest.number - 1}&b=${latest.number}`);
 
+const CommentsButton = ({ count, onClick }: { count: number; onClick: () => void }) => (
+  <Button onClick={onClick} title="c">
+    {count === 0 ? "Comments" : `Comments, ${count}`}
+  </Button>
+);
+
 /** What is saved, and what of the plan in hand is not. */
 function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "mayWrite">) {
   const { latest } = plan;
@@ -158,6 +176,7 @@ export function FrozenBanner({
   dataVersion,
   said,
   onSheet,
+  onComments,
   onRestore,
   onCopyLink,
 }: {
@@ -169,6 +188,7 @@ export function FrozenBanner({
   dataVersion: string;
   said: Said | null;
   onSheet: () => void;
+  onComments: () => void;
   onRestore: () => void;
   onCopyLink: () => void;
 }) {
@@ -185,6 +205,7 @@ export function FrozenBanner({
         <Button onClick={onCopyLink} title="l">
           Copy link
         </Button>
+        <CommentsButton count={plan.commentCount} onClick={onComments} />
         <Button onClick={onSheet}>Window sheet</Button>
         <Button onClick={onRestore}>Restore as draft</Button>
         <Link to={`/plans/${plan.id}`} className="self-center text-sm underline underline-offset-4">

@@ -14,6 +14,7 @@ export const keyMap: readonly {
       ["0 or Escape", "all metals again, nothing pinned; 0 draws hidden metals too"],
       ["w", "the next window"],
       ["r", "revisions"],
+      ["c", "comments, and back to the answers"],
       ["l", "copy a link to what is seen, unsaved settings included"],
       ["?", "this list"],
     ],

@@ -16,6 +16,7 @@ export function useWorkspaceKeys(
   windows: { count: number; chosen: number; choose: (index: number) => void },
   open: (dialog: DialogName) => void,
   copyLink: () => void,
+  comments: () => void,
 ): void {
   const { count, chosen, choose } = windows;
   const { focus, setFocus, map } = look;
@@ -26,6 +27,7 @@ export function useWorkspaceKeys(
     { key: "s", ctrl: true, run: () => mayWrite && !fixed && draft.changed && open("save") },
     { key: "f", run: () => map.setPlain(!map.plain) },
     { key: "r", run: () => open("revisions") },
+    { key: "c", run: comments },
     { key: "w", run: () => count > 1 && choose((chosen + 1) % count) },
     { key: "l", run: copyLink },
     { key: "?", run: () => open("keys") },
