@@ -32,7 +32,7 @@ test("a technician says something of a point of the map and rewords it; the mana
   await plan.header().getByRole("button", { name: "Comments, 1" }).waitFor();
   expect(await panel(page).getByLabel("New comment").inputValue()).toBe("");
 
-  await mine.getByRole("button", { name: "Reword" }).click();
+  await mine.getByRole("button", { name: "Reword", exact: true }).click();
   await mine.getByLabel("Your words").fill("Foam at the weir, again.");
   await mine.getByRole("button", { name: "Save" }).click();
   await mine.getByText("Foam at the weir, again.").waitFor();
@@ -50,7 +50,7 @@ test("a technician says something of a point of the map and rewords it; the mana
   await theirs.button("Comments, 1").click();
   const read = panel(other).getByRole("article", { name: /^Comment of Technician/ });
   await read.getByText("Foam at the weir, again.").waitFor();
-  expect(await read.getByRole("button", { name: "Reword" }).count()).toBe(0);
+  expect(await read.getByRole("button", { name: "Reword", exact: true }).count()).toBe(0);
   await panel(other).getByLabel("New comment").fill("Seen.");
   await panel(other).getByRole("combobox", { name: "About" }).click();
   await other.getByRole("option", { name: "revision 1" }).click();
@@ -83,7 +83,7 @@ test("words that were changed elsewhere meanwhile are shown before they are over
   const mine = panel(page).getByRole("article", { name: /^Comment of Metallurgist/ });
   await mine.getByText("Nickel plates on the probe.").waitFor();
 
-  await mine.getByRole("button", { name: "Reword" }).click();
+  await mine.getByRole("button", { name: "Reword", exact: true }).click();
   await mine.getByLabel("Your words").fill("Nickel plates on both probes.");
   const list = (await (await page.request.get("/api/plans/demo-ammonia-leach/comments")).json()) as {
     rows: { id: string }[];
@@ -99,7 +99,7 @@ test("words that were changed elsewhere meanwhile are shown before they are over
   expect(await mine.getByLabel("Your words").inputValue()).toBe("Nickel plates on both probes.");
   await mine.getByRole("button", { name: "Save" }).click();
   await mine.getByText("Nickel plates on both probes.").waitFor();
-  await mine.getByRole("button", { name: "Reword" }).waitFor();
+  await mine.getByRole("button", { name: "Reword", exact: true }).waitFor();
 }, 120_000);
 
 test("a plan goes to another project with all its revisions; a name that is taken there is told at the name", async () => {
