@@ -281,7 +281,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
                 {...{ plan, solution, data, chosen, scale }}
                 revision={frozen?.number ?? null}
                 through={map?.through ?? null}
-                onShow={setPinned}
+                onShow={look.setPinned}
                 onClose={toggleTalk}
               />
             </Suspense>
