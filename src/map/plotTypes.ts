@@ -16,7 +16,8 @@ export interface PlotTrace {
   name: string;
   x: Coordinate[];
   y: Coordinate[];
-  mode: "lines" | "lines+markers";
+  mode: "lines" | "lines+markers" | "markers";
+  yaxis?: "y" | "y2";
   line?: { color: string; width: number; dash?: string; shape?: "linear"; simplify?: boolean };
   fill?: "toself" | "none";
   fillcolor?: string;
@@ -96,6 +97,7 @@ export interface PlotLayout {
   hoverlabel: { font: { family: string; size: number } };
   xaxis: PlotAxis;
   yaxis: PlotAxis;
+  yaxis2?: PlotAxis;
   annotations: PlotAnnotation[];
 }
 

@@ -44,6 +44,8 @@ import { NextTrials } from "../trials/nextTrials/NextTrials";
 import { AnswersOrTrials } from "../trials/planTrials/AnswersOrTrials";
 import { usePlanTrials } from "../trials/planTrials/usePlanTrials";
 
+const loadFilm = () => import("./film/Film");
+const Film = lazy(async () => ({ default: (await loadFilm()).Film }));
 const loadBanners = () => import("./address/LinkBanners");
 const ProposalBanner = lazy(async () => ({ default: (await loadBanners()).ProposalBanner }));
 const IgnoredBanner = lazy(async () => ({ default: (await loadBanners()).IgnoredBanner }));
@@ -256,7 +258,17 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
           />
         }
         map={
-          map ? (
+          map && look.view.film ? (
+            <Suspense fallback={<Loading label="Opening the filmstrip" />}>
+              <Film
+                wish={look.view.film}
+                onWish={look.setFilm}
+                {...{ inputs, data, setPoint }}
+                metals={map.metals}
+                edit={fixed ? undefined : edit}
+              />
+            </Suspense>
+          ) : map ? (
             <MapPanel
               model={map}
               inputs={inputs}
@@ -271,6 +283,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
               onSettle={draft.settle}
               trials={shownTrials}
               proposals={proposing ? proposals : null}
+              onFilm={() => void loadFilm().then(({ firstFilm }) => look.setFilm(firstFilm(inputs)))}
             />
           ) : null
         }

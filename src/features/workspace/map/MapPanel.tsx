@@ -29,6 +29,8 @@ const WindowMap = lazy(loadMap);
 void loadMap().catch(() => undefined);
 
 export interface MapPanelProps extends SightInHand {
+  /** one setting varied, in place of the map */
+  onFilm: () => void;
   model: MapModel;
   inputs: PlanInputs;
   data: ChemicalData;
@@ -101,6 +103,7 @@ export function MapPanel(props: MapPanelProps) {
           )}
         </div>
         <MapTools
+          onFilm={props.onFilm}
           sight={sight}
           change={change}
           metals={metals}

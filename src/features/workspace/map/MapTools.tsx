@@ -19,6 +19,8 @@ export interface MapToolsProps extends SightInHand {
   onMoving: (moving: boolean) => void;
   asText: boolean;
   onAsText: (open: boolean) => void;
+  /** one setting varied, in place of the map */
+  onFilm: () => void;
 }
 
 /** Words over the map: which metals are drawn, what is in sight, and the map as text. */
@@ -53,6 +55,9 @@ export function MapTools(props: MapToolsProps) {
         {sight.pinned && <Word onClick={() => change({ pinned: null })}>unpin</Word>}
         <Word onClick={() => onAsText(!asText)} pressed={asText}>
           {asText ? "as a map" : "as text"}
+        </Word>
+        <Word onClick={props.onFilm} title="One setting varied: small maps and curves">
+          what if
         </Word>
         <Word onClick={() => onPlain(!plain)} title="Key f">
           {plain ? "shut and open ground" : "all fields"}
