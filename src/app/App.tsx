@@ -1,13 +1,11 @@
 import { QueryClientProvider, type QueryClient } from "@tanstack/react-query";
-import { useEffect, useState } from "react";
+import { useEffect } from "react";
 import { RouterProvider } from "react-router-dom";
 import { usePreferences } from "../lib/preferences";
-import { createQueryClient } from "../lib/queries";
 import { applyTheme } from "../lib/theme";
 import { router } from "./router";
 
-export function App() {
-  const [client] = useState<QueryClient>(createQueryClient);
+export function App({ client }: { client: QueryClient }) {
   return (
     <QueryClientProvider client={client}>
       <ThemeKeeper />

@@ -1,4 +1,4 @@
-import { useQuery } from "@tanstack/react-query";
+import { queryOptions, useQuery } from "@tanstack/react-query";
 import { valueOf } from "../../shared/outcome";
 import type { ChemicalTables } from "../../shared/schemas/chemistry";
 import type { ChemicalData } from "../../shared/species/chemicalData";
@@ -17,16 +17,16 @@ export function libraryOf(tables: ChemicalTables): ChemicalData {
   return made;
 }
 
-/** The chemistry library in force, or the version a revision froze. `data` is one stable object while the version stands. */
-export function useChemistry(version?: string, enabled = true) {
-  return useQuery({
+export const chemistryQuery = (version?: string) =>
+  queryOptions({
     queryKey: version === undefined ? keys.chemistry : keys.chemistryVersion(version),
     queryFn: ({ signal }) =>
       api.get<ChemicalTables>(version === undefined ? "/chemistry" : `/chemistry/versions/${version}`, { signal }),
-    enabled,
-    select: libraryOf,
     structuralSharing: false,
     staleTime: Infinity,
     gcTime: Infinity,
   });
-}
+
+/** The chemistry library in force, or the version a revision froze. `data` is one stable object while the version stands. */
+export const useChemistry = (version?: string, enabled = true) =>
+  useQuery({ ...chemistryQuery(version), enabled, select: libraryOf });

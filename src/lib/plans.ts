@@ -1,4 +1,4 @@
-import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import { queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
 import type { planDuplicate, projectCreate, ProjectRow } from "../../shared/schemas/api";
 import type { planCreate, planUpdate, PlanRow, revisionCreate, RevisionRow } from "../../shared/schemas/plan";
@@ -19,12 +19,12 @@ export const usePlans = (projectId: string | undefined, archived: ArchivedFilter
     enabled: projectId !== undefined,
   });
 
-export const usePlan = (id: string | undefined) =>
-  useQuery({
-    queryKey: keys.plan(id ?? ""),
-    queryFn: ({ signal }) => api.get<PlanRow>(`/plans/${encodeURIComponent(id ?? "")}`, { signal }),
-    enabled: id !== undefined,
+export const planQuery = (id: string) =>
+  queryOptions({
+    queryKey: keys.plan(id),
+    queryFn: ({ signal }) => api.get<PlanRow>(`/plans/${encodeURIComponent(id)}`, { signal }),
   });
+export const usePlan = (id: string | undefined) => useQuery({ ...planQuery(id ?? ""), enabled: id !== undefined });
 
 export const useRevisions = (planId: string, enabled = true) =>
   useQuery({

@@ -1,15 +1,15 @@
-import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import { queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import type { z } from "zod";
 import type { firstAdmin, Member, MemberRole, SessionAnswer, signIn } from "../../shared/schemas/member";
 import { api } from "./api";
 import { keys } from "./queries";
 
-export const useSessionQuery = () =>
-  useQuery({
-    queryKey: keys.session,
-    queryFn: ({ signal }) => api.get<SessionAnswer>("/session", { signal }),
-    staleTime: Infinity,
-  });
+export const sessionQuery = queryOptions({
+  queryKey: keys.session,
+  queryFn: ({ signal }) => api.get<SessionAnswer>("/session", { signal }),
+  staleTime: Infinity,
+});
+export const useSessionQuery = () => useQuery(sessionQuery);
 
 /** The signed-in member. Only below the gate, where there is one.
  *  @throws Error when nobody is signed in */
