@@ -14,6 +14,8 @@ export interface NumberFieldProps {
   /** allows the field to be empty */
   onClear?: () => void;
   unit?: string;
+  /** what the number is, drawn where a number with a unit has that */
+  noun?: string;
   min?: number;
   max?: number;
   /** a lower bound that is itself not allowed, such as 0 for an activity */
@@ -43,7 +45,7 @@ const tidy = (x: number) => Number(x.toPrecision(10));
 /** A number with its unit. Takes decimal comma and point, 1e-5 and a true minus; keeps what was typed when it is wrong
  *  and says what is wrong with it; Escape brings the last good number back. */
 export function NumberField(props: NumberFieldProps) {
-  const { label, labelText, hideLabel, value, onCommit, onClear, unit, min, max, above, hint, disabled } = props;
+  const { label, labelText, hideLabel, value, onCommit, onClear, unit, noun, min, max, above, hint, disabled } = props;
   const { step = 1, factor, show = inputTextExact, layout = "row", width = 9 } = props;
   const id = useId();
   const [draft, setDraft] = useState<string | null>(null);
@@ -128,7 +130,7 @@ export function NumberField(props: NumberFieldProps) {
           message !== null ? "border-signal" : "border-rule hover:border-muted",
         )}
       />
-      {unit && <span className="font-mono text-base text-muted">{unit}</span>}
+      {(unit ?? noun) && <span className="font-mono text-base text-muted">{unit ?? noun}</span>}
     </span>
   );
   const below = (

@@ -15,6 +15,8 @@ interface SliderBase {
   /** once, when the hand lets go or a number is typed: the place for a step of undo */
   onCommit?: (value: number) => void;
   unit?: string;
+  /** what a number without a unit is */
+  noun?: string;
   show?: (value: number) => string;
   hint?: ReactNode;
   readOnly?: boolean;
@@ -91,11 +93,27 @@ export function LogSlider({ stepsPerDecade = 20, typedMax, ...p }: LogSliderProp
 }
 
 function Entry(p: SliderBase & { min?: number; above?: number; step?: number; factor?: number }) {
-  const { label, labelText, value, onChange, onCommit, unit, min, max, above, step, factor, show, hint, readOnly } = p;
+  const {
+    label,
+    labelText,
+    value,
+    onChange,
+    onCommit,
+    unit,
+    noun,
+    min,
+    max,
+    above,
+    step,
+    factor,
+    show,
+    hint,
+    readOnly,
+  } = p;
   return (
     <NumberField
       className="border-b-0!"
-      {...{ label, labelText, value, unit, max, show, hint, readOnly, width: p.width ?? 9 }}
+      {...{ label, labelText, value, unit, noun, max, show, hint, readOnly, width: p.width ?? 9 }}
       {...(above === undefined ? { min } : { above })}
       {...(factor === undefined ? { step } : { factor })}
       onCommit={(x) => {

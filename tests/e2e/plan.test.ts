@@ -91,8 +91,10 @@ test("the read-out names every metal's species under the cursor; all fields are 
   await page.keyboard.press("f");
   await plan.button("shut and open ground").waitFor();
   await expect.poll(() => plan.shutGround()).toEqual([]);
+  await page.waitForURL(/plain=1/);
   await page.waitForLoadState("networkidle");
-  await page.reload();
+  // The bare address states no view: what the member chose last stands.
+  await page.goto(`/plans/${id}`);
   await plan.drawn();
   await plan.button("shut and open ground").waitFor();
   expect(await plan.shutGround()).toEqual([]);

@@ -74,7 +74,7 @@ export default function MetalEditor({
         readOnly={readOnly}
         {...(metal.entry === "gPerL"
           ? { min: 1e-4, max: 200, typedMax: 1000, unit: "g/L" }
-          : { min: 1e-8, max: 10, typedMax: 100, unit: "activity" })}
+          : { min: 1e-8, max: 10, typedMax: 100, noun: "activity" })}
         onChange={(value) => change({ value }, about)}
         onCommit={settle}
         width={8}
