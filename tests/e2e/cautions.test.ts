@@ -19,11 +19,11 @@ test("zinc-dust purification shows the cementation window with its caution, and 
   await plan.cautions().getByText("arsine or stibine where the liquor holds arsenic or antimony").waitFor();
   expect(await plan.cautions().getByText(deference).count()).toBe(1);
 
-  expect((await plan.trace("ground"))?.fillcolor).toBe(themeColours.light.sheet);
+  expect(await plan.ground()).toBe(themeColours.light.sheet);
   await plan.button("metallurgist").click();
   await page.getByRole("menuitemradio", { name: "Dark" }).click();
   await page.keyboard.press("Escape");
-  await expect.poll(async () => (await plan.trace("ground"))?.fillcolor).toBe(themeColours.dark.sheet);
+  await expect.poll(() => plan.ground()).toBe(themeColours.dark.sheet);
   const paper = await page.locator("html").evaluate((html) => getComputedStyle(html).backgroundColor);
   expect(paper).toBe("rgb(15, 26, 23)");
 });

@@ -29,7 +29,12 @@ export interface DrawnTrace {
 /** Plotly hangs the figure and its axes on the element it draws in. */
 interface PlotlyElement extends HTMLElement {
   data: { uid: string; name: string; fillcolor?: string; fillpattern?: { shape?: string }; x: []; y: [] }[];
-  _fullLayout: Record<"xaxis" | "yaxis", { _offset: number; d2p: (value: number) => number }>;
+  _fullLayout: Record<
+    "xaxis" | "yaxis",
+    { _offset: number; d2p: (value: number) => number; p2d: (px: number) => number }
+  > & {
+    plot_bgcolor: string;
+  };
 }
 
 /** A plan on the table: left asks, middle shows, right answers. */
@@ -81,6 +86,25 @@ export class WorkspaceScreen {
 
   async trace(uid: string): Promise<DrawnTrace | undefined> {
     return (await this.traces()).find((t) => t.uid === uid);
+  }
+
+  /** Colour of the map's ground. */
+  ground(): Promise<string> {
+    return this.plot().evaluate((element) => (element as PlotlyElement)._fullLayout.plot_bgcolor);
+  }
+
+  /** The second row under the pH axis: free acid, g/L, and the pH it stands at. */
+  acidTicks(): Promise<(readonly [gPerL: number, pH: number])[]> {
+    return this.plot().evaluate((element) => {
+      const left = element.getBoundingClientRect().left;
+      const { xaxis } = (element as PlotlyElement)._fullLayout;
+      return [...document.querySelectorAll("[data-testid=map-overlay] [data-acid] text:not([data-name])")].map(
+        (text) => {
+          const box = text.getBoundingClientRect();
+          return [Number(text.textContent), xaxis.p2d((box.left + box.right) / 2 - left - xaxis._offset)] as const;
+        },
+      );
+    });
   }
 
   /** Which metals' ground is hatched. */

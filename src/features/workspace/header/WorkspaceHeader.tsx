@@ -42,7 +42,7 @@ export function WorkspaceHeader({
     <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
       <h1 className="truncate text-lg">{plan.name}</h1>
       <p
-        className="min-w-0 flex-1 truncate text-sm text-muted"
+        className="min-w-64 flex-1 truncate text-sm text-muted"
         title={`${fullTime(latest.createdAt)} by ${latest.author}. ${latest.note}`}
       >
         <Saved plan={plan} draft={draft} mayWrite={mayWrite} />
@@ -157,11 +157,12 @@ function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "
   );
   return (
     <span role="status">
-      <b className="text-ink">{mayWrite ? "Unsaved changes" : "Tried here only"}</b>
+      {/* What one may press comes before what a narrow screen cuts off. */}
+      <b className="text-ink">{mayWrite ? "Unsaved changes" : "Tried here only"}</b> · {back}
       {mayWrite ? `, from revision ${draft.basedOn}` : ": your role looks and tries, a metallurgist saves"}
       {!draft.kept && ", and this browser keeps nothing when the page closes"}
       {draft.basedOn < latest.number && <b className="text-signal">; revision {latest.number} was saved meanwhile</b>}
-      {tail} · {back}
+      {tail}
     </span>
   );
 }
