@@ -103,7 +103,7 @@ test("what an overall reaction makes is chosen, re-balanced, refused where it ca
   await iron.getByRole("combobox", { name: "What Fe of Fe(s) becomes" }).click();
   await page.getByRole("option", { name: /KFe3/ }).click();
   await iron.getByText("chosen").waitFor();
-  await iron.getByText("K₂SO₄").or(iron.getByLabel("K₂SO₄")).first().waitFor(); // prettier-ignore
+  await iron.getByLabel("K2SO4", { exact: true }).first().waitFor();
   await page.reload();
   await sheet.drawn();
   await overall.getByText(/^From the feed mineral/).click();
