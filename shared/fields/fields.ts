@@ -23,6 +23,14 @@ export function stateOf(species: Species): State {
   return Object.keys(species.composition).length === 1 ? "metal" : "compound";
 }
 
+const known = new WeakMap<Species, State>();
+
+function knownState(species: Species): State {
+  let state = known.get(species);
+  if (state === undefined) known.set(species, (state = stateOf(species)));
+  return state;
+}
+
 /** Predominance fields of one metal: in every ligand cell the lower envelope of its species per mole of metal, each less
  *  the potentials of its ligands there. Across a cell's border the two planes of one species meet exactly on it.
  *  @param metal  chosen species and activity     @param cells  ligand cells     @param basis  prices at T
@@ -39,7 +47,7 @@ export function fieldsOf(
   return {
     metal,
     formations,
-    states: formations.map((f) => stateOf(f.species)),
+    states: formations.map((f) => knownState(f.species)),
     cells: cells.map((cell) => {
       const planes = formations.map((f) => planeIn(f, cell));
       return { planes, pieces: lowerEnvelope(planes, cell.piece) };
@@ -48,6 +56,7 @@ export function fieldsOf(
 }
 
 function planeIn({ plane, ligands }: Formation, cell: LigandCell): Plane {
+  if (ligands.length === 0) return plane;
   let { k, x, y } = plane;
   for (const [component, count] of ligands) {
     const { potential } = cell.holders.get(component)!;

@@ -14,7 +14,15 @@ export interface Convex {
 
 const EPS = Number.EPSILON;
 
-function corner(a: Line, b: Line): [x: number, y: number, ex: number, ey: number] {
+interface Corners {
+  readonly x: number[];
+  readonly y: number[];
+  readonly ex: number[];
+  readonly ey: number[];
+}
+
+/** Appends the crossing of two lines. */
+function addCorner({ x, y, ex, ey }: Corners, a: Line, b: Line): void {
   const p = a[1] * b[2];
   const q = b[1] * a[2];
   const det = p - q;
@@ -22,32 +30,24 @@ function corner(a: Line, b: Line): [x: number, y: number, ex: number, ey: number
   const u2 = b[2] * a[0];
   const v1 = b[1] * a[0];
   const v2 = a[1] * b[0];
-  const x = (u1 - u2) / det;
-  const y = (v1 - v2) / det;
+  const cx = (u1 - u2) / det;
+  const cy = (v1 - v2) / det;
   const size = Math.abs(det);
   const detError = Math.abs(p) + Math.abs(q);
-  const ex = (4 * EPS * (Math.abs(u1) + Math.abs(u2) + Math.abs(x) * detError)) / size;
-  const ey = (4 * EPS * (Math.abs(v1) + Math.abs(v2) + Math.abs(y) * detError)) / size;
-  return [x, y, ex, ey];
+  x.push(cx);
+  y.push(cy);
+  ex.push((4 * EPS * (Math.abs(u1) + Math.abs(u2) + Math.abs(cx) * detError)) / size);
+  ey.push((4 * EPS * (Math.abs(v1) + Math.abs(v2) + Math.abs(cy) * detError)) / size);
 }
 
 /** A piece from its cycle of lines.
  *  @param lines  counter-clockwise, positive inside, no redundant line     @param tags  one a line     @returns  the piece
  *  @source  Cramer's rule for the corners */
 export function convexOf(lines: readonly Line[], tags: readonly number[]): Convex {
+  const corners: Corners = { x: [], y: [], ex: [], ey: [] };
   const n = lines.length;
-  const x = new Array<number>(n);
-  const y = new Array<number>(n);
-  const ex = new Array<number>(n);
-  const ey = new Array<number>(n);
-  for (let i = 0; i < n; i++) {
-    const c = corner(lines[i]!, lines[i + 1 === n ? 0 : i + 1]!);
-    x[i] = c[0];
-    y[i] = c[1];
-    ex[i] = c[2];
-    ey[i] = c[3];
-  }
-  return { lines, tags, x, y, ex, ey };
+  for (let i = 0; i < n; i++) addCorner(corners, lines[i]!, lines[i + 1 === n ? 0 : i + 1]!);
+  return { lines, tags, x: corners.x, y: corners.y, ex: corners.ex, ey: corners.ey };
 }
 
 /** The rectangle of the frame; edges in the order low E, high pH, high E, low pH.
@@ -88,6 +88,9 @@ export function sideOfCorner(piece: Convex, i: number, h: Line): number {
   return coincides(h, a) || coincides(h, b) ? 0 : sideOfCrossing(h, a, b);
 }
 
+/** Scratch of `clip`, which calls nothing that clips. */
+const signs: number[] = [];
+
 /** The part of a piece where line h is >= 0, or null when no corner lies strictly inside it. An edge stays if one of its
  *  ends is strictly inside. Where h lies along an edge, `prefersNew(edge)` says whether the new tag replaces the old.
  *  @param piece  the piece     @param h  new bound     @param tag  of the new edge     @param prefersNew  tie rule, default keeps the old
@@ -97,7 +100,7 @@ export function clip(piece: Convex, h: Line, tag: number, prefersNew?: (edge: nu
   let anyInside = false;
   let anyOutside = false;
   let anyOn = false;
-  const sign = new Array<number>(n);
+  const sign = signs;
   for (let i = 0; i < n; i++) {
     const s = sideOfCorner(piece, i, h);
     sign[i] = s;
@@ -112,17 +115,23 @@ export function clip(piece: Convex, h: Line, tag: number, prefersNew?: (edge: nu
   while (!(sign[first]! > 0 && sign[first === 0 ? n - 1 : first - 1]! <= 0)) first++;
   const lines: Line[] = [];
   const tags: number[] = [];
+  const corners: Corners = { x: [], y: [], ex: [], ey: [] };
   let i = first; // edge i ends in corner i
   while (sign[i]! > 0) {
     lines.push(piece.lines[i]!);
     tags.push(piece.tags[i]!);
+    corners.x.push(piece.x[i]!);
+    corners.y.push(piece.y[i]!);
+    corners.ex.push(piece.ex[i]!);
+    corners.ey.push(piece.ey[i]!);
     i = i + 1 === n ? 0 : i + 1;
   }
-  lines.push(piece.lines[i]!); // begins strictly inside
-  tags.push(piece.tags[i]!);
-  lines.push(h);
-  tags.push(tag);
-  return convexOf(lines, tags);
+  const last = piece.lines[i]!; // begins strictly inside
+  lines.push(last, h);
+  tags.push(piece.tags[i]!, tag);
+  addCorner(corners, last, h);
+  addCorner(corners, h, lines[0]!);
+  return { lines, tags, x: corners.x, y: corners.y, ex: corners.ex, ey: corners.ey };
 }
 
 function retag(

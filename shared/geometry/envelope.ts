@@ -24,33 +24,35 @@ export const difference = (i: Plane, j: Plane): Line => [
   i.atoms * j.y - j.atoms * i.y,
 ];
 
-/** Planes that another plane undercuts at every corner by more than rounding can hide: they own no part of the cell. */
+/** Planes that another plane undercuts at every corner by more than rounding can hide: they own no part of the cell. A plane that undercuts
+ *  has the lower mean, and whoever undercuts it undercuts all that it does: taken from the lowest mean up, only those that stand are asked.
+ *  @returns  indices, ascending */
 function candidates(planes: readonly Plane[], cell: Convex): number[] {
   const corners = cell.x.length;
-  const heights = planes.map((p) => {
-    const h = new Array<number>(corners);
-    for (let c = 0; c < corners; c++) h[c] = (p.k + p.x * cell.x[c]! + p.y * cell.y[c]!) / p.atoms;
-    return h;
-  });
+  const count = planes.length;
+  const heights = new Float64Array(count * corners);
+  const means = new Float64Array(count);
+  for (let i = 0; i < count; i++) {
+    const p = planes[i]!;
+    let sum = 0;
+    for (let c = 0; c < corners; c++)
+      sum += heights[i * corners + c] = (p.k + p.x * cell.x[c]! + p.y * cell.y[c]!) / p.atoms;
+    means[i] = sum;
+  }
+  const order = Array.from({ length: count }, (_, i) => i).sort((a, b) => means[a]! - means[b]!);
   const slack = 16; // grid units: far above the rounding of a height, far below any chemistry
   const alive: number[] = [];
-  for (let i = 0; i < planes.length; i++) {
-    const own = heights[i]!;
+  for (const i of order) {
     let beaten = false;
-    for (let j = 0; j < planes.length && !beaten; j++) {
-      if (j === i) continue;
-      const other = heights[j]!;
+    for (let a = 0; a < alive.length && !beaten; a++) {
+      const j = alive[a]!;
       beaten = true;
-      for (let c = 0; c < corners; c++) {
-        if (!(other[c]! < own[c]! - slack)) {
-          beaten = false;
-          break;
-        }
-      }
+      for (let c = 0; c < corners && beaten; c++)
+        beaten = heights[j * corners + c]! < heights[i * corners + c]! - slack;
     }
     if (!beaten) alive.push(i);
   }
-  return alive;
+  return alive.sort((a, b) => a - b);
 }
 
 /** The lower envelope of planes over a convex cell: who is lowest where.

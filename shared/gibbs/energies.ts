@@ -3,22 +3,22 @@ import type { ChemicalData, EnergiesAtT, SpeciesEnergy } from "../species/chemic
 import { toCelsius, type Kelvin } from "../units";
 import { correspondenceIntegral, type Correspondence, type IonClass } from "./correspondence";
 import { gibbsShift } from "./heatCapacity";
-import { modelOf, type Model } from "./models";
+import { modelsOf, type Model } from "./models";
 
 /** What the core supports, K. */
 export const supported = { lo: 273.15, hi: 523.15 } as const;
 
 const celsius = (T: number): string => `${Number((T - 273.15).toFixed(2))}`;
 
-function warningAt(model: Model, formula: string, T: Kelvin): string | null {
-  const t = toCelsius(T);
+function warningAt(model: Model, t: number, inWords: string): string | null {
   const [lo, hi] = model.trusted;
   // Half a hundredth of a degree is no extrapolation: 25 C in kelvin and back.
   if (t >= lo - 0.005 && t <= hi + 0.005) return null;
+  const { formula } = model;
   if (model.kind !== "held" || model.hold !== "none")
-    return `${formula} at ${celsius(T)} C: Gibbs energy by "${model.label}", trusted from ${lo} to ${hi} C.`;
+    return `${formula} at ${inWords} C: Gibbs energy by "${model.label}", trusted from ${lo} to ${hi} C.`;
   const start = `${formula} has no temperature data: its energy of formation is held at its 25 C value and trusted near 25 C only`;
-  return t > 60 ? `${start}. Do not rely on it at ${celsius(T)} C.` : `${start}, not at ${celsius(T)} C.`;
+  return t > 60 ? `${start}. Do not rely on it at ${inWords} C.` : `${start}, not at ${inWords} C.`;
 }
 
 /** Standard Gibbs energies at one temperature: apparent, G(T) = G298 of formation less the integral of S dT, on the convention that
@@ -34,6 +34,9 @@ export function energiesAt(data: ChemicalData, T: Kelvin): EnergiesAtT {
   if (!(T >= supported.lo && T <= supported.hi))
     throw new RangeError(`T = ${T} K is outside ${supported.lo} to ${supported.hi} K`);
   const memo = new Map<string, SpeciesEnergy>();
+  const modelOf = modelsOf(data);
+  const t = toCelsius(T);
+  const inWords = celsius(T);
   const factors = new Map<IonClass, Correspondence>();
   const slope = LN10 * GAS_CONSTANT * T;
 
@@ -73,9 +76,8 @@ export function energiesAt(data: ChemicalData, T: Kelvin): EnergiesAtT {
     return energy;
   }
   function speciesEnergy(id: string): SpeciesEnergy {
-    const model = modelOf(data, id);
-    const formula = data.species.get(id)?.formula ?? id;
-    return { G: gibbs(model), model: model.label, trusted: model.trusted, warning: warningAt(model, formula, T) };
+    const model = modelOf(id);
+    return { G: gibbs(model), model: model.label, trusted: model.trusted, warning: warningAt(model, t, inWords) };
   }
   const electron = (): SpeciesEnergy => ({ ...of("H2(g)"), G: of("H2(g)").G / 2, model: "half of H2(g) less H^+" });
   return { T, of };

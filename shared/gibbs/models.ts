@@ -8,6 +8,7 @@ import { koppHeatCapacity, type HeatCapacity } from "./heatCapacity";
 
 interface Common {
   readonly id: string;
+  readonly formula: string;
   /** J/mol at 298.15 K */
   readonly G298: number;
   /** in a few words, for the screen */
@@ -35,11 +36,23 @@ const cache = new WeakMap<ChemicalData, Map<string, Model>>();
  *  @param data  the library     @param id  of a species in it     @returns  the model
  *  @throws Error where the id is unknown     @source  docs/method.md, section 1 */
 export function modelOf(data: ChemicalData, id: string): Model {
-  let models = cache.get(data);
-  if (models === undefined) cache.set(data, (models = new Map<string, Model>()));
+  const models = mapOf(data);
   let model = models.get(id);
   if (model === undefined) models.set(id, (model = build(data, id)));
   return model;
+}
+
+/** `modelOf` of one library, for many species in a row.
+ *  @param data  the library     @returns  id -> model, as `modelOf`     @source  as `modelOf` */
+export function modelsOf(data: ChemicalData): (id: string) => Model {
+  const models = mapOf(data);
+  return (id) => models.get(id) ?? modelOf(data, id);
+}
+
+function mapOf(data: ChemicalData): Map<string, Model> {
+  let models = cache.get(data);
+  if (models === undefined) cache.set(data, (models = new Map<string, Model>()));
+  return models;
 }
 
 function known(data: ChemicalData, id: string): Species {
@@ -56,10 +69,10 @@ const isComplex = ({ composition, formula }: Species): boolean => {
 
 function build(data: ChemicalData, id: string): Model {
   const species = known(data, id);
-  const { row, phase, charge } = species;
+  const { row, phase, charge, formula } = species;
   const G298 = standardG(species);
   if (id === "H^+(aq)")
-    return { kind: "zero", id, G298: 0, label: "zero by convention at every T", trusted: [0, trustedTo.end] };
+    return { kind: "zero", id, formula, G298: 0, label: "zero by convention at every T", trusted: [0, trustedTo.end] };
   if (anchors.has(id)) return anchored(data, species);
   if (row.S_J === null) return held(data, species);
   if (phase !== "aq") return ofHeatCapacity(species, row.S_J);
@@ -67,17 +80,17 @@ function build(data: ChemicalData, id: string): Model {
     const S = absoluteEntropy(row.S_J, charge);
     const to = isComplex(species) ? trustedTo.complex : trustedTo.ion;
     const label = `entropy correspondence, ${row.ion_class.replace("_", " ")}`;
-    return { kind: "correspondence", id, G298, label, trusted: [0, to], ionClass: row.ion_class, S, z: charge };
+    return { kind: "correspondence", id, formula, G298, label, trusted: [0, to], ionClass: row.ion_class, S, z: charge };
   }
   const to = isComplex(species) || row.Cp_J === null ? trustedTo.complex : trustedTo.neutral;
   const label =
     row.Cp_J === null ? "entropy held, neutral dissolved species" : "constant Cp, neutral dissolved species";
-  return { kind: "heatCapacity", id, G298, label, trusted: [0, to], S: row.S_J, cp: constant(row.Cp_J ?? 0) };
+  return { kind: "heatCapacity", id, formula, G298, label, trusted: [0, to], S: row.S_J, cp: constant(row.Cp_J ?? 0) };
 }
 
 function ofHeatCapacity(species: Species, S: number): Model {
   const { row, id, formula, phase } = species;
-  const common = { kind: "heatCapacity", id, G298: standardG(species), S } as const;
+  const common = { kind: "heatCapacity", id, formula, G298: standardG(species), S } as const;
   if (row.Cp_a !== null) {
     const Tmax = row.Cp_Tmax_K ?? Infinity;
     const to = Math.min(trustedTo.end, Tmax === Infinity ? trustedTo.solid : Math.round(Tmax - 273.15));
@@ -115,11 +128,11 @@ function anchored(data: ChemicalData, species: Species): Model {
   const G298 = standardG(species);
   const ownPK = (sign * (G298 - sumAt298(data, partners))) / (LN10 * GAS_CONSTANT * T_REFERENCE);
   const trusted = within(data, partners, ...anchor.trusted);
-  return { kind: "anchor", id: species.id, G298, label, trusted, partners, sign, pK, shift: ownPK - pK(T_REFERENCE) };
+  return { kind: "anchor", id: species.id, formula: species.formula, G298, label, trusted, partners, sign, pK, shift: ownPK - pK(T_REFERENCE) };
 }
 
 function held(data: ChemicalData, species: Species): Model {
-  const { id } = species;
+  const { id, formula } = species;
   const G298 = standardG(species);
   const rule = data.extrapolation.get(id);
   if (rule === undefined || rule.reaction === null) {
@@ -128,6 +141,7 @@ function held(data: ChemicalData, species: Species): Model {
     return {
       kind: "held",
       id,
+      formula,
       G298,
       label,
       trusted: [20, 30],
@@ -141,5 +155,5 @@ function held(data: ChemicalData, species: Species): Model {
     .map(([p, n]) => [p, -n] as const);
   const label = rule.hold === "logK" ? "log K of its reaction held" : "dG of its reaction held";
   const trusted = within(data, partners, 0, trustedTo.held);
-  return { kind: "held", id, G298, label, trusted, partners, hold: rule.hold, dG298: G298 - sumAt298(data, partners) };
+  return { kind: "held", id, formula, G298, label, trusted, partners, hold: rule.hold, dG298: G298 - sumAt298(data, partners) };
 }

@@ -19,6 +19,44 @@ export function wholeFactor(numbers: readonly number[]): number | null {
   return null;
 }
 
+/** What of a plane hangs on the formula alone. */
+interface Makeup {
+  readonly factor: number;
+  readonly atoms: number;
+  readonly oxygen: number;
+  readonly electrons: number;
+  readonly whole: { readonly atoms: number; readonly protons: number; readonly electrons: number };
+}
+
+const makeups = new WeakMap<Species, Map<string, Makeup>>();
+
+/** The makeup of a species over one main element, counted once. */
+function makeupOf(species: Species, main: string): Makeup {
+  let ofSpecies = makeups.get(species);
+  if (ofSpecies === undefined) makeups.set(species, (ofSpecies = new Map<string, Makeup>()));
+  let makeup = ofSpecies.get(main);
+  if (makeup === undefined) ofSpecies.set(main, (makeup = count(species, main)));
+  return makeup;
+}
+
+function count({ composition, charge, id }: Species, main: string): Makeup {
+  const factor = wholeFactor(Object.values(composition));
+  if (factor === null) throw new Error(`no small factor makes the atoms of ${id} whole`);
+  const atoms = composition[main]!;
+  const oxygen = composition["O"] ?? 0;
+  const protons = (composition["H"] ?? 0) - 2 * oxygen;
+  const electrons = protons - charge;
+  const [a, p, e] = [Math.round(factor * atoms), Math.round(factor * protons), Math.round(factor * electrons)];
+  return { factor, atoms, oxygen, electrons, whole: { atoms: a, protons: p, electrons: e } };
+}
+
+type Numbers = readonly (readonly [component: string, count: number])[];
+
+const wholeNumbers = (numbers: Numbers, factor: number): Numbers =>
+  factor === 1 && numbers.every(([, n]) => Number.isInteger(n))
+    ? numbers
+    : numbers.map(([c, n]) => [c, Math.round(factor * n)] as const);
+
 /** Plane of a species per formula unit: k + x pH + y E is its free energy less that of its H2O, H^+ and e^-, at the given
  *  total activity of the main element. With nu atoms a dissolved species carries RT ln(a / nu).
  *  @param species  holds `main`     @param main  element or ligand group     @param activity  total, > 0     @param ligands  numbers of the other components
@@ -29,27 +67,21 @@ export function formationOf(
   species: Species,
   main: string,
   activity: number,
-  ligands: readonly (readonly [string, number])[],
+  ligands: Numbers,
   basis: Basis,
 ): Formation {
-  const { composition, charge, phase, id } = species;
-  const factor = wholeFactor(Object.values(composition));
-  if (factor === null) throw new Error(`no small factor makes the atoms of ${id} whole`);
-  const atoms = composition[main]!;
-  const oxygen = composition["O"] ?? 0;
-  const protons = (composition["H"] ?? 0) - 2 * oxygen;
-  const electrons = protons - charge;
-  const dissolved = phase === "aq" ? basis.thermal * Math.log(activity / atoms) : 0;
-  const k = basis.energies.of(id).G + dissolved - oxygen * basis.water - electrons * basis.electronAtZero;
+  const { factor, atoms, oxygen, electrons, whole } = makeupOf(species, main);
+  const dissolved = species.phase === "aq" ? basis.thermal * Math.log(activity / atoms) : 0;
+  const k = basis.energies.of(species.id).G + dissolved - oxygen * basis.water - electrons * basis.electronAtZero;
   return {
     species,
     plane: {
       k: snap(factor * k),
-      x: Math.round(factor * protons) * basis.proton,
-      y: Math.round(factor * electrons) * basis.electron,
-      atoms: Math.round(factor * atoms),
+      x: whole.protons * basis.proton,
+      y: whole.electrons * basis.electron,
+      atoms: whole.atoms,
     },
-    ligands: ligands.map(([c, n]) => [c, Math.round(factor * n)] as const),
+    ligands: wholeNumbers(ligands, factor),
   };
 }
 

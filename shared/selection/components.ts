@@ -24,13 +24,23 @@ export function componentKind(data: ChemicalData, component: string): ComponentK
   return PARTNERS.has(component) ? "partner" : "metal";
 }
 
-/** Composition of a species without its main element, H and O, sulfur named by the pool it belongs to.
+type Numbers = readonly (readonly [component: string, count: number])[];
+
+const onePool = new WeakMap<Species, Map<string, Numbers>>();
+const twoPools = new WeakMap<Species, Map<string, Numbers>>();
+
+/** Composition of a species without its main element, H and O, sulfur named by the pool it belongs to; counted once a species.
  *  @returns  component -> atoms or groups */
-export function ligandNumbers(
-  species: Species,
-  main: string,
-  sulfateReduction: boolean,
-): [component: string, count: number][] {
+export function ligandNumbers(species: Species, main: string, sulfateReduction: boolean): Numbers {
+  const counted = sulfateReduction ? onePool : twoPools;
+  let ofSpecies = counted.get(species);
+  if (ofSpecies === undefined) counted.set(species, (ofSpecies = new Map<string, Numbers>()));
+  let numbers = ofSpecies.get(main);
+  if (numbers === undefined) ofSpecies.set(main, (numbers = countLigands(species, main, sulfateReduction)));
+  return numbers;
+}
+
+function countLigands(species: Species, main: string, sulfateReduction: boolean): Numbers {
   const out: [string, number][] = [];
   for (const [component, count] of Object.entries(species.composition)) {
     if (component === main || component === "H" || component === "O") continue;

@@ -1,7 +1,7 @@
 import type { Prepared } from "../selection/prepare";
 import { isSulfideMineral } from "../hazards/rules";
 import type { Limit, SolutionWarning, State } from "../solution";
-import { clauseOf } from "./metastable";
+import { noteOn } from "./metastable";
 import type { Relevant } from "./relevant";
 
 const NO_SOURCE = "common practice, no source";
@@ -62,6 +62,8 @@ const refractory: readonly { id: RegExp; text: string }[] = [
   },
 ];
 
+const onKinetics = noteOn(/\binert\b|\bslow|kinetically/i);
+
 /** What a limit's metal does there that practice knows to be slow. */
 function ofLimit(l: Limit, states: readonly (State | undefined)[], requirement: string | undefined): string | null {
   const won = requirement === "metal" && states.includes("dissolved");
@@ -108,7 +110,8 @@ export function kineticsWarnings(
     say({ species: id, metal }, refractory.find((r) => r.id.test(id))?.text ?? "");
   }
   for (const { metal, id } of species) {
-    const clause = clauseOf(data.species.get(id)?.row.note ?? "", /\binert\b|\bslow|kinetically/i);
+    const row = data.species.get(id);
+    const clause = row === undefined ? null : onKinetics(row);
     if (clause !== null) say({ species: id, metal }, `${clause} (note of the library)`);
   }
   return out;

@@ -28,12 +28,13 @@ export function warningsOf(
   }
   for (const { component, activity } of prepared.components) {
     for (const m of metals) {
-      const need = Math.max(
-        0,
-        ...m.formations
-          .filter((f) => f.species.phase === "aq" && ruling.has(f.species.id))
-          .map((f) => ((f.ligands.find(([c]) => c === component)?.[1] ?? 0) / f.plane.atoms) * m.metal.activity),
-      );
+      let need = 0;
+      for (const { species, ligands, plane } of m.formations) {
+        if (species.phase !== "aq" || ligands.length === 0) continue;
+        const count = ligands.find(([c]) => c === component)?.[1];
+        if (count !== undefined && ruling.has(species.id))
+          need = Math.max(need, (count / plane.atoms) * m.metal.activity);
+      }
       if (need > activity * DRAWN_DOWN_SHARE)
         warnings.push({
           code: "LIGAND_DRAWN_DOWN",

@@ -52,9 +52,22 @@ function meant(ground: Ground, { piece, edge, from, to }: Stretch): RawLimit[] {
 }
 
 function continues(ground: Ground, last: RawLimit, next: RawLimit): boolean {
-  if (JSON.stringify(last.meaning) !== JSON.stringify(next.meaning)) return false;
+  if (!sameMeaning(last.meaning, next.meaning)) return false;
   const lineOf = (l: RawLimit) => ground.pieces[l.piece]!.piece.lines[l.edge]!;
   return sameLine(lineOf(last), lineOf(next));
+}
+
+function sameMeaning(a: Shut, b: Shut): boolean {
+  switch (a.kind) {
+    case "frame":
+      return b.kind === "frame" && a.side === b.side;
+    case "water":
+      return b.kind === "water" && a.side === b.side;
+    case "hazard":
+      return b.kind === "hazard" && a.hazard === b.hazard && a.plane === b.plane;
+    case "metal":
+      return b.kind === "metal" && a.metal === b.metal && a.inside === b.inside && a.outside === b.outside;
+  }
 }
 
 export interface BorderLoops {
