@@ -21,8 +21,15 @@ interface Corners {
   readonly ey: number[];
 }
 
-/** Appends the crossing of two lines. */
-function addCorner({ x, y, ex, ey }: Corners, a: Line, b: Line): void {
+const room = (n: number): Corners => ({
+  x: new Array<number>(n),
+  y: new Array<number>(n),
+  ex: new Array<number>(n),
+  ey: new Array<number>(n),
+});
+
+/** Puts the crossing of two lines at place i. */
+function putCorner({ x, y, ex, ey }: Corners, i: number, a: Line, b: Line): void {
   const p = a[1] * b[2];
   const q = b[1] * a[2];
   const det = p - q;
@@ -34,19 +41,19 @@ function addCorner({ x, y, ex, ey }: Corners, a: Line, b: Line): void {
   const cy = (v1 - v2) / det;
   const size = Math.abs(det);
   const detError = Math.abs(p) + Math.abs(q);
-  x.push(cx);
-  y.push(cy);
-  ex.push((4 * EPS * (Math.abs(u1) + Math.abs(u2) + Math.abs(cx) * detError)) / size);
-  ey.push((4 * EPS * (Math.abs(v1) + Math.abs(v2) + Math.abs(cy) * detError)) / size);
+  x[i] = cx;
+  y[i] = cy;
+  ex[i] = (4 * EPS * (Math.abs(u1) + Math.abs(u2) + Math.abs(cx) * detError)) / size;
+  ey[i] = (4 * EPS * (Math.abs(v1) + Math.abs(v2) + Math.abs(cy) * detError)) / size;
 }
 
 /** A piece from its cycle of lines.
  *  @param lines  counter-clockwise, positive inside, no redundant line     @param tags  one a line     @returns  the piece
  *  @source  Cramer's rule for the corners */
 export function convexOf(lines: readonly Line[], tags: readonly number[]): Convex {
-  const corners: Corners = { x: [], y: [], ex: [], ey: [] };
   const n = lines.length;
-  for (let i = 0; i < n; i++) addCorner(corners, lines[i]!, lines[i + 1 === n ? 0 : i + 1]!);
+  const corners = room(n);
+  for (let i = 0; i < n; i++) putCorner(corners, i, lines[i]!, lines[i + 1 === n ? 0 : i + 1]!);
   return { lines, tags, x: corners.x, y: corners.y, ex: corners.ex, ey: corners.ey };
 }
 
@@ -97,40 +104,40 @@ const signs: number[] = [];
  *  @returns  the same object when nothing is cut     @source  half-plane clipping on the cycle of lines, signs exact */
 export function clip(piece: Convex, h: Line, tag: number, prefersNew?: (edge: number) => boolean): Convex | null {
   const n = piece.lines.length;
-  let anyInside = false;
+  let inside = 0;
   let anyOutside = false;
   let anyOn = false;
   const sign = signs;
   for (let i = 0; i < n; i++) {
     const s = sideOfCorner(piece, i, h);
     sign[i] = s;
-    if (s > 0) anyInside = true;
+    if (s > 0) inside++;
     else if (s < 0) anyOutside = true;
     else anyOn = true;
   }
-  if (!anyInside) return null;
+  if (inside === 0) return null;
   if (!anyOutside) return anyOn && prefersNew ? retag(piece, h, tag, sign, prefersNew) : piece;
   // strictly inside corners are contiguous on the cycle: edges first..last keep an end inside
-  let first = 0;
-  while (!(sign[first]! > 0 && sign[first === 0 ? n - 1 : first - 1]! <= 0)) first++;
-  const lines: Line[] = [];
-  const tags: number[] = [];
-  const corners: Corners = { x: [], y: [], ex: [], ey: [] };
-  let i = first; // edge i ends in corner i
-  while (sign[i]! > 0) {
-    lines.push(piece.lines[i]!);
-    tags.push(piece.tags[i]!);
-    corners.x.push(piece.x[i]!);
-    corners.y.push(piece.y[i]!);
-    corners.ex.push(piece.ex[i]!);
-    corners.ey.push(piece.ey[i]!);
+  let i = 0;
+  while (!(sign[i]! > 0 && sign[i === 0 ? n - 1 : i - 1]! <= 0)) i++;
+  const lines = new Array<Line>(inside + 2);
+  const tags = new Array<number>(inside + 2);
+  const corners = room(inside + 2);
+  for (let to = 0; to < inside; to++) {
+    lines[to] = piece.lines[i]!; // edge i ends in corner i
+    tags[to] = piece.tags[i]!;
+    corners.x[to] = piece.x[i]!;
+    corners.y[to] = piece.y[i]!;
+    corners.ex[to] = piece.ex[i]!;
+    corners.ey[to] = piece.ey[i]!;
     i = i + 1 === n ? 0 : i + 1;
   }
-  const last = piece.lines[i]!; // begins strictly inside
-  lines.push(last, h);
-  tags.push(piece.tags[i]!, tag);
-  addCorner(corners, last, h);
-  addCorner(corners, h, lines[0]!);
+  const last = (lines[inside] = piece.lines[i]!); // begins strictly inside
+  tags[inside] = piece.tags[i]!;
+  lines[inside + 1] = h;
+  tags[inside + 1] = tag;
+  putCorner(corners, inside, last, h);
+  putCorner(corners, inside + 1, h, lines[0]!);
   return { lines, tags, x: corners.x, y: corners.y, ex: corners.ex, ey: corners.ey };
 }
 

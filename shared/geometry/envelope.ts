@@ -24,35 +24,44 @@ export const difference = (i: Plane, j: Plane): Line => [
   i.atoms * j.y - j.atoms * i.y,
 ];
 
-/** Planes that another plane undercuts at every corner by more than rounding can hide: they own no part of the cell. A plane that undercuts
- *  has the lower mean, and whoever undercuts it undercuts all that it does: taken from the lowest mean up, only those that stand are asked.
+/** Scratch of `candidates`: heights of every plane at every corner. */
+let heights = new Float64Array(1024);
+
+const slack = 16; // grid units: far above the rounding of a height, far below any chemistry
+
+/** Whether plane j lies below plane i at every corner by more than rounding can hide. */
+function undercuts(j: number, i: number, corners: number): boolean {
+  const own = i * corners;
+  const other = j * corners;
+  for (let c = 0; c < corners; c++) if (!(heights[other + c]! < heights[own + c]! - slack)) return false;
+  return true;
+}
+
+/** Planes that no other plane undercuts at every corner; the rest own no part of the cell. Most fall to one that is lowest at some corner, so
+ *  those are asked first.
  *  @returns  indices, ascending */
 function candidates(planes: readonly Plane[], cell: Convex): number[] {
   const corners = cell.x.length;
   const count = planes.length;
-  const heights = new Float64Array(count * corners);
-  const means = new Float64Array(count);
+  if (heights.length < count * corners) heights = new Float64Array(2 * count * corners);
   for (let i = 0; i < count; i++) {
-    const p = planes[i]!;
-    let sum = 0;
-    for (let c = 0; c < corners; c++)
-      sum += heights[i * corners + c] = (p.k + p.x * cell.x[c]! + p.y * cell.y[c]!) / p.atoms;
-    means[i] = sum;
+    const { k, x, y, atoms } = planes[i]!;
+    for (let c = 0; c < corners; c++) heights[i * corners + c] = (k + x * cell.x[c]! + y * cell.y[c]!) / atoms;
   }
-  const order = Array.from({ length: count }, (_, i) => i).sort((a, b) => means[a]! - means[b]!);
-  const slack = 16; // grid units: far above the rounding of a height, far below any chemistry
+  const lowest: number[] = [];
+  for (let c = 0; c < corners; c++) {
+    let low = 0;
+    for (let i = 1; i < count; i++) if (heights[i * corners + c]! < heights[low * corners + c]!) low = i;
+    if (!lowest.includes(low)) lowest.push(low);
+  }
   const alive: number[] = [];
-  for (const i of order) {
+  for (let i = 0; i < count; i++) {
     let beaten = false;
-    for (let a = 0; a < alive.length && !beaten; a++) {
-      const j = alive[a]!;
-      beaten = true;
-      for (let c = 0; c < corners && beaten; c++)
-        beaten = heights[j * corners + c]! < heights[i * corners + c]! - slack;
-    }
+    for (let l = 0; l < lowest.length && !beaten; l++) beaten = undercuts(lowest[l]!, i, corners);
+    for (let j = 0; j < count && !beaten; j++) beaten = undercuts(j, i, corners);
     if (!beaten) alive.push(i);
   }
-  return alive.sort((a, b) => a - b);
+  return alive;
 }
 
 /** The lower envelope of planes over a convex cell: who is lowest where.
