@@ -67,17 +67,19 @@ function waterLines(basis: Basis): WaterLine[] {
   });
 }
 
-const drawnFields = (metals: readonly MetalFields[]): Field[] =>
-  metals.flatMap((m) =>
-    m.cells.flatMap((c) =>
-      c.pieces.map(({ plane, piece }) => ({
-        metal: m.metal.element,
-        species: m.formations[plane]!.species.id,
-        state: m.states[plane]!,
-        polygon: cornersOf(piece),
-      })),
-    ),
-  );
+function drawnFields(metals: readonly MetalFields[]): Field[] {
+  const fields: Field[] = [];
+  for (const { metal, formations, states, cells } of metals)
+    for (const { pieces } of cells)
+      for (const { plane, piece } of pieces)
+        fields.push({
+          metal: metal.element,
+          species: formations[plane]!.species.id,
+          state: states[plane]!,
+          polygon: cornersOf(piece),
+        });
+  return fields;
+}
 
 function windowOf(ground: Ground, region: Region, { problem, data }: Prepared, basis: Basis): Window {
   const band = problem.controlBand;

@@ -95,14 +95,17 @@ export function sideOfCorner(piece: Convex, i: number, h: Line): number {
   return coincides(h, a) || coincides(h, b) ? 0 : sideOfCrossing(h, a, b);
 }
 
+/** Whether a new line along an edge of a piece takes the edge's name. */
+export type PrefersNew = (edge: number, piece: Convex, h: Line, tag: number) => boolean;
+
 /** Scratch of `clip`, which calls nothing that clips. */
 const signs: number[] = [];
 
 /** The part of a piece where line h is >= 0, or null when no corner lies strictly inside it. An edge stays if one of its
- *  ends is strictly inside. Where h lies along an edge, `prefersNew(edge)` says whether the new tag replaces the old.
+ *  ends is strictly inside. Where h lies along an edge, `prefersNew` says whether the new tag replaces the old.
  *  @param piece  the piece     @param h  new bound     @param tag  of the new edge     @param prefersNew  tie rule, default keeps the old
  *  @returns  the same object when nothing is cut     @source  half-plane clipping on the cycle of lines, signs exact */
-export function clip(piece: Convex, h: Line, tag: number, prefersNew?: (edge: number) => boolean): Convex | null {
+export function clip(piece: Convex, h: Line, tag: number, prefersNew?: PrefersNew): Convex | null {
   const n = piece.lines.length;
   let inside = 0;
   let anyOutside = false;
@@ -146,12 +149,12 @@ function retag(
   h: Line,
   tag: number,
   sign: readonly number[],
-  prefersNew: (edge: number) => boolean,
+  prefersNew: PrefersNew,
 ): Convex {
   const n = piece.lines.length;
   for (let i = 0; i < n; i++) {
     const before = sign[i === 0 ? n - 1 : i - 1]!;
-    if (sign[i] === 0 && before === 0 && turn(piece.lines[i]!, h) === 0 && prefersNew(i)) {
+    if (sign[i] === 0 && before === 0 && turn(piece.lines[i]!, h) === 0 && prefersNew(i, piece, h, tag)) {
       return {
         ...piece,
         lines: piece.lines.map((l, k) => (k === i ? h : l)),

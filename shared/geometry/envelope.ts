@@ -1,4 +1,4 @@
-import { clip, type Convex } from "./convex";
+import { clip, type Convex, type PrefersNew } from "./convex";
 import type { Line } from "./line";
 
 /** A plane alpha + beta pH + gamma E on the snapped grid, of a species with `atoms` atoms of its main element. Heights are
@@ -73,6 +73,7 @@ function candidates(planes: readonly Plane[], cell: Convex): number[] {
 export function lowerEnvelope(planes: readonly Plane[], cell: Convex): EnvelopeCell[] {
   const alive = candidates(planes, cell);
   const cells: EnvelopeCell[] = [];
+  const prefers: PrefersNew = (edge, piece, d, j) => fallsFaster(planes, piece, edge, d, j);
   for (const i of alive) {
     let piece: Convex | null = cell;
     const p = planes[i]!;
@@ -85,8 +86,7 @@ export function lowerEnvelope(planes: readonly Plane[], cell: Convex): EnvelopeC
         if (piece === null) break;
         continue;
       }
-      const current: Convex = piece;
-      piece = clip(current, d, j, (edge) => fallsFaster(planes, current, edge, d, j));
+      piece = clip(piece, d, j, prefers);
       if (piece === null) break;
     }
     if (piece) cells.push({ plane: i, piece });

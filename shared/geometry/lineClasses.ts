@@ -90,7 +90,7 @@ interface End {
 function ranked(group: readonly Edge[], pieces: readonly Convex[]): LineClass {
   const line = group[0]!.line;
   const axis = Math.abs(line[1]) > Math.abs(line[2]) ? 1 : 2;
-  const size = Math.hypot(line[1], line[2]);
+  const size = Math.sqrt(line[1] * line[1] + line[2] * line[2]);
   const dx = line[2] / size;
   const dy = -line[1] / size;
   const ends: End[] = [];
@@ -112,19 +112,31 @@ function ranked(group: readonly Edge[], pieces: readonly Convex[]): LineClass {
       });
     }
   }
-  const { rank, places } = ranks(line, ends);
-  const edges = group.map((e, i) => {
-    const facing: 1 | -1 = Math.sign(e.line[axis]) === Math.sign(line[axis]) ? 1 : -1;
+  const { rank, places } = apart(ends) ?? ranks(line, ends);
+  const edges = group.map(({ piece, edge, line: own, before, after }, i) => {
+    const facing: 1 | -1 = Math.sign(own[axis]) === Math.sign(line[axis]) ? 1 : -1;
     const a = rank[2 * i]!;
     const b = rank[2 * i + 1]!;
-    return { ...e, facing, low: Math.min(a, b), high: Math.max(a, b) };
+    return { piece, edge, line: own, before, after, facing, low: Math.min(a, b), high: Math.max(a, b) };
   });
   return { line, edges, places };
 }
 
+interface Ranks {
+  readonly rank: readonly number[];
+  readonly places: readonly (readonly [number, number])[];
+}
+
+/** The ranks of a single edge whose ends lie clearly apart; null else. */
+function apart(ends: readonly End[]): Ranks | null {
+  const [p, q] = ends;
+  if (ends.length !== 2 || !p || !q || !(Math.abs(p.t - q.t) > p.error + q.error)) return null;
+  return p.t < q.t ? { rank: [0, 1], places: [p.place, q.place] } : { rank: [1, 0], places: [q.place, p.place] };
+}
+
 /** Ranks ends along their line. Floating point orders what its error bound allows; ends nearer than that are put in order,
  *  or found equal, exactly. */
-function ranks(line: Line, ends: readonly End[]): { rank: number[]; places: (readonly [number, number])[] } {
+function ranks(line: Line, ends: readonly End[]): Ranks {
   const sorted = ends.map((_, i) => i).sort((a, b) => ends[a]!.t - ends[b]!.t);
   const groups: number[][] = []; // equal ends, in order along the line
   let from = 0; // groups before this one lie clearly before the end in hand

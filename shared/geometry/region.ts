@@ -84,8 +84,12 @@ export function connect(pieces: readonly Convex[]): Region[] {
 /** Joins the owners of facing edges and collects what no facing edge covers. */
 function border(c: LineClass, base: number, owner: Groups, vertex: Groups, halves: Half[]): void {
   for (const e of c.edges) {
-    const facing = c.edges.filter((o) => o.facing !== e.facing && o.low < e.high && o.high > e.low);
-    facing.sort((a, b) => a.low - b.low);
+    const facing =
+      c.edges.length === 1
+        ? []
+        : c.edges
+            .filter((o) => o.facing !== e.facing && o.low < e.high && o.high > e.low)
+            .sort((a, b) => a.low - b.low);
     let at = e.low;
     const free: [number, number][] = [];
     for (const o of facing) {

@@ -67,11 +67,14 @@ export interface SpeciesHere {
   readonly fulfilled: boolean;
 }
 
-const holds = (f: Field, pH: number, Eh: number): boolean =>
-  f.polygon.every((p, i) => {
-    const q = f.polygon[i + 1 === f.polygon.length ? 0 : i + 1]!;
-    return (q[0] - p[0]) * (Eh - p[1]) - (q[1] - p[1]) * (pH - p[0]) >= -1e-12;
-  });
+function holds({ polygon }: Field, pH: number, Eh: number): boolean {
+  let p = polygon.at(-1);
+  for (const q of polygon) {
+    if (p !== undefined && !((q[0] - p[0]) * (Eh - p[1]) - (q[1] - p[1]) * (pH - p[0]) >= -1e-12)) return false;
+    p = q;
+  }
+  return true;
+}
 
 /** Every metal's ruling species at a point of the frame, in the order of the problem.
  *  @param solution  solved     @param pH, Eh  V vs SHE at T     @returns  one entry a metal; none outside the frame */

@@ -37,9 +37,10 @@ function isConvex(segments: readonly Segment[]): boolean {
   return segments.every((s, i) => {
     const t = segments[i + 1 === segments.length ? 0 : i + 1]!;
     const [sx, sy, tx, ty] = [s.bx - s.ax, s.by - s.ay, t.bx - t.ax, t.by - t.ay];
-    const size = Math.hypot(sx, sy) * Math.hypot(tx, ty);
+    const length = Math.sqrt(sx * sx + sy * sy);
+    const size = length * Math.sqrt(tx * tx + ty * ty);
     const joined = Math.abs(t.ax - s.bx) < 1e-9 && Math.abs(t.ay - s.by) < 1e-9;
-    return joined && Math.hypot(sx, sy) > 1e-6 && sx * ty - sy * tx >= -1e-12 * size;
+    return joined && length > 1e-6 && sx * ty - sy * tx >= -1e-12 * size;
   });
 }
 

@@ -43,11 +43,8 @@ export function warningsOf(
         });
     }
   }
-  const states = new Map(fields.map((f) => [`${f.metal} ${f.species}`, f.state]));
-  warnings.push(
-    ...metastableWarnings(prepared, basis, relevant),
-    ...kineticsWarnings(prepared, relevant, (metal, id) => states.get(`${metal} ${id}`)),
-  );
+  const stateOf = (metal: string, id: string) => fields.find((f) => f.species === id && f.metal === metal)?.state;
+  warnings.push(...metastableWarnings(prepared, basis, relevant), ...kineticsWarnings(prepared, relevant, stateOf));
   if (prepared.problem.temperatureC > 100)
     warnings.push({
       code: "SATURATION_PRESSURE",

@@ -56,11 +56,21 @@ export interface Bound {
   readonly tag: number;
 }
 
-const apart = (a: Convex, b: Convex): boolean =>
-  Math.min(...a.x) > Math.max(...b.x) ||
-  Math.max(...a.x) < Math.min(...b.x) ||
-  Math.min(...a.y) > Math.max(...b.y) ||
-  Math.max(...a.y) < Math.min(...b.y);
+/** Whether all of one list lies above, or all below, all of another. */
+function apartAlong(a: readonly number[], b: readonly number[]): boolean {
+  let [lowA, highA, lowB, highB] = [Infinity, -Infinity, Infinity, -Infinity];
+  for (const v of a) {
+    if (v < lowA) lowA = v;
+    if (v > highA) highA = v;
+  }
+  for (const v of b) {
+    if (v < lowB) lowB = v;
+    if (v > highB) highB = v;
+  }
+  return lowA > highB || highA < lowB;
+}
+
+const apart = (a: Convex, b: Convex): boolean => apartAlong(a.x, b.x) || apartAlong(a.y, b.y);
 
 /** Where all metals are as required and no excluded hazard stands: per ligand cell, the intersection of each metal's fulfilled fields, less
  *  the hazards' ground.
