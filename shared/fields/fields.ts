@@ -23,12 +23,13 @@ export function stateOf(species: Species): State {
   return Object.keys(species.composition).length === 1 ? "metal" : "compound";
 }
 
-const known = new WeakMap<Species, State>();
+const known = new WeakMap<readonly Species[], readonly State[]>();
 
-function knownState(species: Species): State {
-  let state = known.get(species);
-  if (state === undefined) known.set(species, (state = stateOf(species)));
-  return state;
+/** States of a choice of species, read once: `chooseSpecies` hands out the same choice again. */
+function statesOf(species: readonly Species[]): readonly State[] {
+  let states = known.get(species);
+  if (states === undefined) known.set(species, (states = species.map(stateOf)));
+  return states;
 }
 
 /** Predominance fields of one metal: in every ligand cell the lower envelope of its species per mole of metal, each less
@@ -47,7 +48,7 @@ export function fieldsOf(
   return {
     metal,
     formations,
-    states: formations.map((f) => knownState(f.species)),
+    states: statesOf(metal.species),
     cells: cells.map((cell) => {
       const planes = formations.map((f) => planeIn(f, cell));
       return { planes, pieces: lowerEnvelope(planes, cell.piece) };

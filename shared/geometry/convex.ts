@@ -144,13 +144,7 @@ export function clip(piece: Convex, h: Line, tag: number, prefersNew?: PrefersNe
   return { lines, tags, x: corners.x, y: corners.y, ex: corners.ex, ey: corners.ey };
 }
 
-function retag(
-  piece: Convex,
-  h: Line,
-  tag: number,
-  sign: readonly number[],
-  prefersNew: PrefersNew,
-): Convex {
+function retag(piece: Convex, h: Line, tag: number, sign: readonly number[], prefersNew: PrefersNew): Convex {
   const n = piece.lines.length;
   for (let i = 0; i < n; i++) {
     const before = sign[i === 0 ? n - 1 : i - 1]!;

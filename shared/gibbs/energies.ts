@@ -33,7 +33,7 @@ function warningAt(model: Model, t: number, inWords: string): string | null {
 export function energiesAt(data: ChemicalData, T: Kelvin): EnergiesAtT {
   if (!(T >= supported.lo && T <= supported.hi))
     throw new RangeError(`T = ${T} K is outside ${supported.lo} to ${supported.hi} K`);
-  const memo = new Map<string, SpeciesEnergy>();
+  const memo: (SpeciesEnergy | undefined)[] = [];
   const modelOf = modelsOf(data);
   const t = toCelsius(T);
   const inWords = celsius(T);
@@ -69,14 +69,15 @@ export function energiesAt(data: ChemicalData, T: Kelvin): EnergiesAtT {
     }
   }
   function of(id: string): SpeciesEnergy {
-    const before = memo.get(id);
+    if (id === "e^-") return electron();
+    const { place, model } = modelOf(id);
+    const before = memo[place];
     if (before !== undefined) return before;
-    const energy = id === "e^-" ? electron() : speciesEnergy(id);
-    memo.set(id, energy);
+    const energy = speciesEnergy(model);
+    memo[place] = energy;
     return energy;
   }
-  function speciesEnergy(id: string): SpeciesEnergy {
-    const model = modelOf(id);
+  function speciesEnergy(model: Model): SpeciesEnergy {
     return { G: gibbs(model), model: model.label, trusted: model.trusted, warning: warningAt(model, t, inWords) };
   }
   const electron = (): SpeciesEnergy => ({ ...of("H2(g)"), G: of("H2(g)").G / 2, model: "half of H2(g) less H^+" });

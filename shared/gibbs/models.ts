@@ -30,29 +30,32 @@ const trustedTo = { end: 250, ion: 200, solid: 200, kopp: 150, neutral: 150, com
 const constant = (a: number): HeatCapacity => ({ a, b: 0, c: 0, Tmax: Infinity });
 const standardG = (species: Species): number => species.row.dGf_kJ * 1000;
 
-const cache = new WeakMap<ChemicalData, Map<string, Model>>();
+/** A model with a number of its own within the library, from 0 in the order first asked for. */
+export interface Placed {
+  readonly place: number;
+  readonly model: Model;
+}
+
+const cache = new WeakMap<ChemicalData, Map<string, Placed>>();
 
 /** The temperature model of a species, worked out once for a library.
  *  @param data  the library     @param id  of a species in it     @returns  the model
  *  @throws Error where the id is unknown     @source  docs/method.md, section 1 */
-export function modelOf(data: ChemicalData, id: string): Model {
-  const models = mapOf(data);
-  let model = models.get(id);
-  if (model === undefined) models.set(id, (model = build(data, id)));
-  return model;
-}
+export const modelOf = (data: ChemicalData, id: string): Model => modelsOf(data)(id).model;
 
 /** `modelOf` of one library, for many species in a row.
- *  @param data  the library     @returns  id -> model, as `modelOf`     @source  as `modelOf` */
-export function modelsOf(data: ChemicalData): (id: string) => Model {
-  const models = mapOf(data);
-  return (id) => models.get(id) ?? modelOf(data, id);
-}
-
-function mapOf(data: ChemicalData): Map<string, Model> {
-  let models = cache.get(data);
-  if (models === undefined) cache.set(data, (models = new Map<string, Model>()));
-  return models;
+ *  @param data  the library     @returns  id -> model with its place; throws as `modelOf`     @source  as `modelOf` */
+export function modelsOf(data: ChemicalData): (id: string) => Placed {
+  const models = cache.get(data) ?? new Map<string, Placed>();
+  cache.set(data, models);
+  return (id) => {
+    const before = models.get(id);
+    if (before !== undefined) return before;
+    const model = build(data, id); // asks for its partners first
+    const placed = { place: models.size, model };
+    models.set(id, placed);
+    return placed;
+  };
 }
 
 function known(data: ChemicalData, id: string): Species {
@@ -80,7 +83,17 @@ function build(data: ChemicalData, id: string): Model {
     const S = absoluteEntropy(row.S_J, charge);
     const to = isComplex(species) ? trustedTo.complex : trustedTo.ion;
     const label = `entropy correspondence, ${row.ion_class.replace("_", " ")}`;
-    return { kind: "correspondence", id, formula, G298, label, trusted: [0, to], ionClass: row.ion_class, S, z: charge };
+    return {
+      kind: "correspondence",
+      id,
+      formula,
+      G298,
+      label,
+      trusted: [0, to],
+      ionClass: row.ion_class,
+      S,
+      z: charge,
+    };
   }
   const to = isComplex(species) || row.Cp_J === null ? trustedTo.complex : trustedTo.neutral;
   const label =
@@ -128,7 +141,18 @@ function anchored(data: ChemicalData, species: Species): Model {
   const G298 = standardG(species);
   const ownPK = (sign * (G298 - sumAt298(data, partners))) / (LN10 * GAS_CONSTANT * T_REFERENCE);
   const trusted = within(data, partners, ...anchor.trusted);
-  return { kind: "anchor", id: species.id, formula: species.formula, G298, label, trusted, partners, sign, pK, shift: ownPK - pK(T_REFERENCE) };
+  return {
+    kind: "anchor",
+    id: species.id,
+    formula: species.formula,
+    G298,
+    label,
+    trusted,
+    partners,
+    sign,
+    pK,
+    shift: ownPK - pK(T_REFERENCE),
+  };
 }
 
 function held(data: ChemicalData, species: Species): Model {
@@ -155,5 +179,15 @@ function held(data: ChemicalData, species: Species): Model {
     .map(([p, n]) => [p, -n] as const);
   const label = rule.hold === "logK" ? "log K of its reaction held" : "dG of its reaction held";
   const trusted = within(data, partners, 0, trustedTo.held);
-  return { kind: "held", id, formula, G298, label, trusted, partners, hold: rule.hold, dG298: G298 - sumAt298(data, partners) };
+  return {
+    kind: "held",
+    id,
+    formula,
+    G298,
+    label,
+    trusted,
+    partners,
+    hold: rule.hold,
+    dG298: G298 - sumAt298(data, partners),
+  };
 }

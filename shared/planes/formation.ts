@@ -52,10 +52,11 @@ function count({ composition, charge, id }: Species, main: string): Makeup {
 
 type Numbers = readonly (readonly [component: string, count: number])[];
 
-const wholeNumbers = (numbers: Numbers, factor: number): Numbers =>
-  factor === 1 && numbers.every(([, n]) => Number.isInteger(n))
-    ? numbers
-    : numbers.map(([c, n]) => [c, Math.round(factor * n)] as const);
+function wholeNumbers(numbers: Numbers, factor: number): Numbers {
+  let whole = factor === 1;
+  for (const [, n] of numbers) if (!Number.isInteger(n)) whole = false;
+  return whole ? numbers : numbers.map(([c, n]) => [c, Math.round(factor * n)] as const);
+}
 
 /** Plane of a species per formula unit: k + x pH + y E is its free energy less that of its H2O, H^+ and e^-, at the given
  *  total activity of the main element. With nu atoms a dissolved species carries RT ln(a / nu).

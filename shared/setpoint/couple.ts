@@ -1,7 +1,7 @@
 import type { LigandCell } from "../fields/ligandCells";
 import type { MetalFields } from "../fields/fields";
 import { valueAt } from "../geometry/line";
-import { STEPS_PER_JOULE, type Basis } from "../planes/grid";
+import { asLine, STEPS_PER_JOULE, type Basis } from "../planes/grid";
 import type { ChemicalData } from "../species/chemicalData";
 
 /** Below this in either form a couple sets no potential on platinum (practice brief, section 4: about 10 mg/L). */
@@ -24,22 +24,23 @@ export function coupleAt(
   let best: { pair: [string, string]; scarcer: number } | null = null;
   for (const { metal, formations, states, cells: perCell } of metals) {
     const { planes } = perCell[c]!;
-    const heights = planes.map(({ k, x, y, atoms }) => (k + x * at[0] + y * at[1]) / atoms);
     let floor = Infinity;
-    for (const height of heights) if (height < floor) floor = height;
+    for (const p of planes) floor = Math.min(floor, valueAt(asLine(p), at[0], at[1]) / p.atoms);
     const mgPerMol = 1000 * data.molarMass.get(metal.element)!;
     const byState = new Map<number, { id: string; mg: number }>();
-    formations.forEach((f, i) => {
-      if (states[i] !== "dissolved") return;
-      const excess = ((heights[i]! - floor) * f.plane.atoms) / STEPS_PER_JOULE / basis.thermal;
+    for (const [i, f] of formations.entries()) {
+      if (states[i] !== "dissolved") continue;
+      const p = planes[i]!;
+      const height = valueAt(asLine(p), at[0], at[1]) / p.atoms;
+      const excess = ((height - floor) * f.plane.atoms) / STEPS_PER_JOULE / basis.thermal;
       const mg = metal.activity * Math.exp(-excess) * mgPerMol;
-      if (!(mg >= COUPLE_MG_PER_L)) return;
+      if (!(mg >= COUPLE_MG_PER_L)) continue;
       let electrons = f.plane.y;
       for (const [component, n] of f.ligands) electrons -= n * cell.holders.get(component)!.potential.y;
       const oxidation = Math.round((-electrons / f.plane.atoms / basis.electron) * 12);
       const known = byState.get(oxidation);
       if (!known || known.mg < mg) byState.set(oxidation, { id: f.species.id, mg });
-    });
+    }
     if (byState.size < 2) continue;
     const rich = [...byState.entries()].sort((a, b) => b[1].mg - a[1].mg);
     const [low, high] = [rich[0]!, rich[1]!].sort((a, b) => a[0] - b[0]) as [(typeof rich)[0], (typeof rich)[0]];

@@ -18,8 +18,8 @@ const SAME = 1e-9;
  *  @source  widths of horizontal chords are linear in v between corner levels, so the widest stands at a level or on
  *           stretches between levels of equal width */
 export function widestChord(segments: readonly Segment[]): Deepest | null {
-  const chords = [...chordsBetweenLevels(segments)];
-  const margin = Math.max(...chords.map((c) => Math.max(c.below, c.above)));
+  const chords = chordsBetweenLevels(segments);
+  const margin = chords.reduce((most, c) => Math.max(most, c.below, c.above), -Infinity);
   const widest = chords.filter((c) => Math.max(c.below, c.above) > margin - SAME).map(widestPart);
   const ways = joined(widest);
   let best: { v: number; u: number; length: number } | null = null;
@@ -43,7 +43,8 @@ interface Chords {
 }
 
 /** The region between two neighbouring levels of corners: trapezoids, by the half-widths of their ends. */
-function* chordsBetweenLevels(segments: readonly Segment[]): Generator<Chords> {
+function chordsBetweenLevels(segments: readonly Segment[]): Chords[] {
+  const out: Chords[] = [];
   const levels = [...new Set(segments.flatMap((s) => [s.ay, s.by]))].sort((a, b) => a - b);
   for (let i = 0; i + 1 < levels.length; i++) {
     const [low, high] = [levels[i]!, levels[i + 1]!];
@@ -53,16 +54,17 @@ function* chordsBetweenLevels(segments: readonly Segment[]): Generator<Chords> {
       .sort((a, b) => a.low + a.high - b.low - b.high);
     for (let k = 0; k + 1 < sides.length; k += 2) {
       const [left, right] = [sides[k]!, sides[k + 1]!];
-      yield {
+      out.push({
         low,
         high,
         atLow: (left.low + right.low) / 2,
         atHigh: (left.high + right.high) / 2,
         below: (right.low - left.low) / 2,
         above: (right.high - left.high) / 2,
-      };
+      });
     }
   }
+  return out;
 }
 
 /** All of it where the ends are equally wide, else the wider end. */
