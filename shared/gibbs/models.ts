@@ -31,7 +31,7 @@ const constant = (a: number): HeatCapacity => ({ a, b: 0, c: 0, Tmax: Infinity }
 const standardG = (species: Species): number => species.row.dGf_kJ * 1000;
 
 /** A model with a number of its own within the library, from 0 in the order first asked for. */
-export interface Placed {
+interface Placed {
   readonly place: number;
   readonly model: Model;
 }
