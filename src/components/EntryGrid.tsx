@@ -48,8 +48,6 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
   };
   const wrong = new Set(problems.map((p) => `${p.row} ${p.column}`));
 
-  const firstTyped = columns.findIndex(({ kind }) => kind === "text");
-
   const put = (r: number, row: Row) => {
     const next = [...rows];
     next[r] = row;
@@ -113,6 +111,8 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
                   className={classes(
                     "border-b border-ink px-1 pb-0.5 font-mono text-xs font-bold",
                     leftOf(column) ? "text-left" : "text-right",
+                    // Over the words of its boxes, and clear of the number before it.
+                    column.kind === "choice" && !readOnly && "pl-2.5",
                   )}
                 >
                   {column.header}
@@ -127,7 +127,7 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
               // What the free row would begin with is no entry yet.
               <tr key={r} className={classes("border-b border-rule", r >= rows.length && "text-muted")}>
                 {removable && (
-                  <td className="pr-1 text-right font-mono text-xs text-muted">{r < rows.length ? r + 1 : ""}</td>
+                  <td className="pr-1 text-right font-mono text-xs text-muted">{r < rows.length ? r + 1 : "new"}</td>
                 )}
                 {columns.map((column, c) => (
                   <EntryCell
@@ -137,7 +137,6 @@ export function EntryGrid<Row>(props: EntryGridProps<Row>) {
                     index={r}
                     place={`${r} ${c}`}
                     label={`${named(r)}, ${column.label}`}
-                    placeholder={r >= rows.length && c === firstTyped ? "new" : undefined}
                     wrong={wrong.has(`${r} ${column.id}`)}
                     readOnly={readOnly}
                     onChange={(next) => put(r, next)}

@@ -13,25 +13,13 @@ interface EntryCellProps<Row> {
   /** "row column", by which the keys find it */
   place: string;
   label: string;
-  /** stands in an empty text cell */
-  placeholder?: string | undefined;
   wrong: boolean;
   readOnly: boolean;
   onChange: (row: Row) => void;
 }
 
 /** One cell of an EntryGrid. */
-export function EntryCell<Row>({
-  column,
-  row,
-  index,
-  place,
-  label,
-  wrong,
-  readOnly,
-  onChange,
-  placeholder,
-}: EntryCellProps<Row>) {
+export function EntryCell<Row>({ column, row, index, place, label, wrong, readOnly, onChange }: EntryCellProps<Row>) {
   const before = useRef<Row | null>(null);
   if (column.kind === "shown")
     return (
@@ -83,7 +71,6 @@ export function EntryCell<Row>({
         data-cell={place}
         aria-label={label}
         aria-invalid={wrong}
-        placeholder={placeholder}
         autoComplete="off"
         spellCheck={false}
         list={column.usual && listId(column.id)}
@@ -103,7 +90,6 @@ export function EntryCell<Row>({
           "block h-6.5 border-0 bg-transparent px-1 focus:bg-sheet pointer-coarse:h-10",
           "w-full",
           column.words ? "text-left" : "text-right font-mono",
-          "placeholder:font-sans placeholder:text-muted",
           wrong && "text-signal outline-1 -outline-offset-1 outline-signal",
         )}
       />

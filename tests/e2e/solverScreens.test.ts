@@ -5,10 +5,38 @@ import { WorkspaceScreen } from "./pages/workspace";
 
 const rule = { gas: "HCN", pHAtLeast: 10.5 };
 
-test("without a window the conflict is named, a change opens one in one action, and undo takes it back", async () => {
+test("practice is off until asked for; a range of temperature is drawn inside the window; without a window a change opens one", async () => {
   const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
+
+  // Published practice is off at first; switched on it names each range with its source.
+  const practice = async () => (await plan.traces()).filter((t) => t.uid.startsWith("practice"));
+  expect(await practice()).toEqual([]);
+  await page.getByRole("checkbox", { name: "Published practice" }).check();
+  await expect.poll(async () => (await practice()).length).toBeGreaterThan(0);
+  const list = page.getByRole("list", { name: "Published ranges shown" });
+  await list.getByRole("button", { name: /zinc neutral leach/ }).click();
+  await page.getByRole("dialog").getByText(/The Extractive Metallurgy of Zinc/).waitFor(); // prettier-ignore
+  await page.keyboard.press("Escape");
+  await page.getByRole("checkbox", { name: "Published practice" }).uncheck();
+  await expect.poll(practice).toEqual([]);
+
+  // What holds over a range of temperature is drawn inside the window, and what was checked is stated.
+  const whole = await plan.trace("open-0");
+  await plan.button("Hold over a range of Temperature").click();
+  const over = page.getByRole("region", { name: "Over the ranges" });
+  await over.getByText("Deepest point").waitFor({ timeout: 60_000 });
+  await over.getByText(/temperatures/).waitFor();
+  await expect.poll(async () => (await plan.trace("robust"))?.x.length ?? 0).toBeGreaterThan(3);
+  const inner = (await plan.trace("robust"))!.x.filter((x) => x !== null);
+  const outer = whole!.x.filter((x) => x !== null);
+  expect(Math.min(...inner)).toBeGreaterThan(Math.min(...outer));
+  expect(Math.max(...inner)).toBeLessThan(Math.max(...outer));
+  await plan.button("Undo").click();
+  await expect.poll(() => plan.trace("robust")).toBeUndefined();
+
+  // Without a window the conflict is named, a change opens one in one action, and undo takes it back.
   await plan.type("pH, to", "3.5"); // ferrihydrite dissolves below pH 4.06 here
   const shut = page.getByRole("region", { name: "No window" });
   await shut.getByText("Nowhere on this map is").waitFor();
@@ -20,37 +48,6 @@ test("without a window the conflict is named, a change opens one in one action, 
   expect(await page.getByTestId("set-point").count()).toBe(1);
   await plan.button("Undo").click();
   await shut.getByText("Nowhere on this map is").waitFor();
-});
-
-test("what holds over a range of temperature is drawn inside the window, and what was checked is stated", async () => {
-  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
-  const plan = new WorkspaceScreen(page);
-  await plan.drawn();
-  const whole = await plan.trace("open-0");
-  await plan.button("Hold over a range of Temperature").click();
-  const over = page.getByRole("region", { name: "Over the ranges" });
-  await over.getByText("Deepest point").waitFor({ timeout: 60_000 });
-  await over.getByText(/temperatures/).waitFor();
-  await expect.poll(async () => (await plan.trace("robust"))?.x.length ?? 0).toBeGreaterThan(3);
-  const inner = (await plan.trace("robust"))!.x.filter((x) => x !== null);
-  const outer = whole!.x.filter((x) => x !== null);
-  expect(Math.min(...inner)).toBeGreaterThan(Math.min(...outer));
-  expect(Math.max(...inner)).toBeLessThan(Math.max(...outer));
-});
-
-test("published practice is off at first; switched on it names each range with its source", async () => {
-  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
-  const plan = new WorkspaceScreen(page);
-  await plan.drawn();
-  const practice = async () => (await plan.traces()).filter((t) => t.uid.startsWith("practice"));
-  expect(await practice()).toEqual([]);
-  await page.getByRole("checkbox", { name: "Published practice" }).check();
-  await expect.poll(async () => (await practice()).length).toBeGreaterThan(0);
-  const list = page.getByRole("list", { name: "Published ranges shown" });
-  await list.getByRole("button", { name: /zinc neutral leach/ }).click();
-  await page.getByRole("dialog").getByText(/The Extractive Metallurgy of Zinc/).waitFor(); // prettier-ignore
-  await page.keyboard.press("Escape");
-  await page.getByRole("checkbox", { name: "Published practice" }).uncheck();
 });
 
 test("HCN kept out is a limit by name; let in, the margin reaches its ground and the gas speaks with caution and deference", async () => {

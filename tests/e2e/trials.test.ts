@@ -123,7 +123,7 @@ test("a technician records it at the bench: an ORP without its electrode is refu
   });
 });
 
-test("a metallurgist sees it on the map, judged, linked with its row both ways, and opens it with a click", async () => {
+test("a metallurgist sees it on the map, judged, linked with its row both ways, opens it with a click, and reads its account on every basis", async () => {
   const { page } = await openPageAs("metallurgist", { path: `/plans/${planId}` });
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
@@ -154,11 +154,10 @@ test("a metallurgist sees it on the map, judged, linked with its row both ways, 
   await expect.poll(() => table.locator("tr[data-hovered]").count()).toBe(1);
   await page.mouse.click(...at);
   await page.waitForURL(new RegExp(`/trials/${story.id}$`));
-});
 
-test("its account shows every basis side by side with the numbers in it, as the core works them out", async () => {
-  const { page } = await openPageAs("metallurgist", { path: `/trials/${story.id}?show=accounts` });
+  // Every basis stands there side by side with the numbers in it, as the core works them out.
   const trial = new TrialScreen(page);
+  await trial.tab("Accounts").click();
   await page.getByText(/of the Zn dissolved, by calculated head/).waitFor();
   const stored = await trial.stored();
   const feed = await page.evaluate(

@@ -156,7 +156,7 @@ export function readingColumns(w: ReadingColumnWishes): GridColumn<TrialReading>
       kind: "text",
       header: "note",
       label: "note",
-      width: "11em",
+      width: "clamp(8.5em, 12vw, 14em)",
       words: true,
       get: (r) => r.note,
       set: (r, note) => ({ ...r, note }),
