@@ -12,9 +12,10 @@ test("the sign-in page names the demo's accounts and is free of accessibility fa
 });
 
 test("every demo account signs in by a choice from the list, sees that the data are invented, and signs out", async () => {
+  const { page } = await openPage();
+  await page.goto("/");
+  // One after the other in the same browser, as at a shared bench.
   for (const { email, role, name } of demoAccounts) {
-    const { page } = await openPage();
-    await page.goto("/");
     await page.getByText(email).click();
     await page.getByRole("button", { name: "Sign in" }).click();
     await page.getByRole("heading", { name: "Plans" }).waitFor();
