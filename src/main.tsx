@@ -2,6 +2,7 @@ import { StrictMode } from "react";
 import { createRoot } from "react-dom/client";
 import { App } from "./app/App";
 import { headStart } from "./app/headStart";
+import { fetchScreen } from "./app/router";
 import { mirroredPreferences } from "./lib/preferences";
 import { createQueryClient } from "./lib/queries";
 import { applyTheme } from "./lib/theme";
@@ -11,6 +12,7 @@ import "./styles/index.css";
 applyTheme(mirroredPreferences().theme ?? "system")();
 
 const client = createQueryClient();
+fetchScreen(location.pathname);
 headStart(client, location);
 
 const root = document.getElementById("root");

@@ -1,50 +1,78 @@
-import { createBrowserRouter, Navigate, type RouteObject } from "react-router-dom";
-import { Gate } from "./Gate";
+import { Suspense } from "react";
+import { BrowserRouter, matchPath, Navigate, Route, Routes, useLocation } from "react-router-dom";
 import { Waiting } from "./AppShell";
-import { RouteError } from "./RouteError";
+import { Gate } from "./Gate";
+import { ScreenBoundary } from "./ScreenBoundary";
+import { lateScreen, type LateScreen } from "./screens";
 
-interface Screen {
-  default: React.ComponentType;
+const invitation = lateScreen(() => import("../features/invitation/InvitationPage"));
+const chemistry = lateScreen(() => import("../features/chemistry/ChemistryPage"));
+
+const screens: readonly (readonly [path: string, screen: LateScreen])[] = [
+  ["/plans", lateScreen(() => import("../features/plans/PlansPage"))],
+  ["/plans/:planId", lateScreen(() => import("../features/workspace/WorkspacePage"))],
+  ["/plans/:planId/compare", lateScreen(() => import("../features/workspace/compare/ComparePage"))],
+  ["/chemistry", chemistry],
+  ["/chemistry/:speciesId", chemistry],
+  ["/reactions", lateScreen(() => import("../features/reactions/ReactionsPage"))],
+  ["/method/*", lateScreen(() => import("../features/method/MethodPage"))],
+  ["/feeds", lateScreen(() => import("../features/feeds/FeedsPage"))],
+  ["/feeds/:feedId", lateScreen(() => import("../features/feeds/FeedPage"))],
+  ["/campaigns", lateScreen(() => import("../features/campaigns/CampaignsPage"))],
+  ["/campaigns/compare", lateScreen(() => import("../features/campaigns/ComparePage"))],
+  ["/campaigns/:campaignId", lateScreen(() => import("../features/campaigns/CampaignPage"))],
+  ["/campaigns/:campaignId/edit", lateScreen(() => import("../features/campaigns/CampaignEditPage"))],
+  ["/bench", lateScreen(() => import("../features/trials/BenchPage"))],
+  ["/bench/:trialId", lateScreen(() => import("../features/trials/BenchTrialPage"))],
+  ["/trials/plan", lateScreen(() => import("../features/trials/PlanTrialPage"))],
+  ["/trials/:trialId", lateScreen(() => import("../features/trials/TrialPage"))],
+  ["/members", lateScreen(() => import("../features/members/MembersPage"))],
+  ["/mailbox", lateScreen(() => import("../features/mailbox/MailboxPage"))],
+  ["*", lateScreen(() => import("./NotFoundPage"))],
+];
+
+/** Fetches the screen of an address while one is still asked who is there. Without an account it would come for nothing, but the
+ *  sign-in keeps the address and leads on to it. */
+export function fetchScreen(pathname: string): void {
+  if (matchPath("/invitation/:token", pathname)) return invitation.ahead();
+  screens.find(([path]) => matchPath(path, pathname))?.[1].ahead();
 }
 
-/** A screen in a chunk of its own, with its own error boundary. */
-const screen = (path: string, load: () => Promise<Screen>): RouteObject => ({
-  path,
-  lazy: async () => ({ Component: (await load()).default }),
-  ErrorBoundary: RouteError,
-  HydrateFallback: Waiting,
-});
+function Screen({ screen }: { screen: LateScreen }) {
+  const { key } = useLocation();
+  const { Part } = screen;
+  return (
+    <ScreenBoundary place={key} onError={screen.forget}>
+      <Suspense fallback={<Waiting />}>
+        <Part />
+      </Suspense>
+    </ScreenBoundary>
+  );
+}
 
-export const router = createBrowserRouter([
-  // Before the gate: whoever follows the link has no account yet.
-  screen("/invitation/:token", () => import("../features/invitation/InvitationPage")),
-  {
-    path: "/",
-    Component: Gate,
-    ErrorBoundary: RouteError,
-    HydrateFallback: Waiting,
-    children: [
-      { index: true, element: <Navigate to="/plans" replace /> },
-      screen("plans", () => import("../features/plans/PlansPage")),
-      screen("plans/:planId", () => import("../features/workspace/WorkspacePage")),
-      screen("plans/:planId/compare", () => import("../features/workspace/compare/ComparePage")),
-      screen("chemistry", () => import("../features/chemistry/ChemistryPage")),
-      screen("chemistry/:speciesId", () => import("../features/chemistry/ChemistryPage")),
-      screen("reactions", () => import("../features/reactions/ReactionsPage")),
-      screen("method/*", () => import("../features/method/MethodPage")),
-      screen("feeds", () => import("../features/feeds/FeedsPage")),
-      screen("feeds/:feedId", () => import("../features/feeds/FeedPage")),
-      screen("campaigns", () => import("../features/campaigns/CampaignsPage")),
-      screen("campaigns/compare", () => import("../features/campaigns/ComparePage")),
-      screen("campaigns/:campaignId", () => import("../features/campaigns/CampaignPage")),
-      screen("campaigns/:campaignId/edit", () => import("../features/campaigns/CampaignEditPage")),
-      screen("bench", () => import("../features/trials/BenchPage")),
-      screen("bench/:trialId", () => import("../features/trials/BenchTrialPage")),
-      screen("trials/plan", () => import("../features/trials/PlanTrialPage")),
-      screen("trials/:trialId", () => import("../features/trials/TrialPage")),
-      screen("members", () => import("../features/members/MembersPage")),
-      screen("mailbox", () => import("../features/mailbox/MailboxPage")),
-      screen("*", () => import("./NotFoundPage")),
-    ],
-  },
-]);
+/** The declarative router: its other half, loaders and actions, weighs more than the whole of what is used of it (docs/decisions/0020). */
+export function Router() {
+  return (
+    <BrowserRouter>
+      <Everything />
+    </BrowserRouter>
+  );
+}
+
+function Everything() {
+  const { key } = useLocation();
+  return (
+    <ScreenBoundary place={key}>
+      <Routes>
+        {/* Before the gate: whoever follows the link has no account yet. */}
+        <Route path="/invitation/:token" element={<Screen screen={invitation} />} />
+        <Route path="/" element={<Gate />}>
+          <Route index element={<Navigate to="/plans" replace />} />
+          {screens.map(([path, screen]) => (
+            <Route key={path} path={path} element={<Screen screen={screen} />} />
+          ))}
+        </Route>
+      </Routes>
+    </ScreenBoundary>
+  );
+}
