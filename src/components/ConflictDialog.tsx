@@ -1,11 +1,9 @@
 import { useState } from "react";
 import type { Conflict } from "../lib/merge";
 import { Button } from "./Button";
-import { Segmented } from "./choice";
+import { ConflictTable, type Whose } from "./ConflictTable";
 import { Dialog } from "./Dialog";
 import { valueText } from "./valueText";
-
-type Choice = "yours" | "theirs";
 
 /** Fields that two people changed to different things: each is decided, nothing is lost on the way. */
 export function ConflictDialog({
@@ -18,11 +16,11 @@ export function ConflictDialog({
   /** "trial NL-07" */
   what: string;
   words: (path: string) => string;
-  onResolve: (choices: Readonly<Record<string, Choice>>) => void;
+  onResolve: (choices: Readonly<Record<string, Whose>>) => void;
 }) {
-  const [choices, setChoices] = useState<Record<string, Choice>>({});
+  const [choices, setChoices] = useState<Record<string, Whose>>({});
   const [aside, setAside] = useState<readonly Conflict[] | null>(null);
-  const all = (choice: Choice) => setChoices(Object.fromEntries(conflicts.map(({ path }) => [path, choice])));
+  const all = (choice: Whose) => setChoices(Object.fromEntries(conflicts.map(({ path }) => [path, choice])));
   const open = conflicts.length > 0;
   const undecided = conflicts.filter(({ path }) => choices[path] === undefined).length;
   if (open && aside === conflicts)
@@ -61,38 +59,18 @@ export function ConflictDialog({
         </>
       }
     >
-      <table className="w-full table-fixed text-sm">
-        <thead>
-          <tr className="text-left font-mono text-xs">
-            <th className="w-[26%] border-b border-ink py-1 pr-3">field</th>
-            <th className="border-b border-ink py-1 pr-3">you both found</th>
-            <th className="border-b border-ink py-1 pr-3">yours</th>
-            <th className="border-b border-ink py-1 pr-3">theirs</th>
-            <th className="w-[138px] border-b border-ink py-1">keep</th>
-          </tr>
-        </thead>
-        <tbody>
-          {conflicts.map(({ path, base, yours, theirs }) => (
-            <tr key={path} className="border-b border-rule align-baseline">
-              <td className="py-1.5 pr-3">{words(path)}</td>
-              <td className="py-1.5 pr-3 font-mono break-words text-muted">{valueText(base)}</td>
-              <td className="py-1.5 pr-3 font-mono break-words">{valueText(yours)}</td>
-              <td className="py-1.5 pr-3 font-mono break-words">{valueText(theirs)}</td>
-              <td className="py-1.5">
-                <Segmented<Choice | "open">
-                  label={`Keep for ${words(path)}`}
-                  value={choices[path] ?? "open"}
-                  onChange={(choice) => choice !== "open" && setChoices((old) => ({ ...old, [path]: choice }))}
-                  options={[
-                    { value: "yours", label: "mine" },
-                    { value: "theirs", label: "theirs" },
-                  ]}
-                />
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
+      <ConflictTable
+        headers={["field", "you both found", "yours", "theirs"]}
+        rows={conflicts.map(({ path, base, yours, theirs }) => ({
+          path,
+          what: words(path),
+          base: valueText(base),
+          yours: valueText(yours),
+          theirs: valueText(theirs),
+        }))}
+        choices={choices}
+        onChoose={(path, choice) => setChoices((old) => ({ ...old, [path]: choice }))}
+      />
     </Dialog>
   );
 }

@@ -11,17 +11,43 @@ export interface PlanChange {
   to: string | null;
 }
 
-const metalText = (m: PlanMetal): string => {
+export const metalText = (m: PlanMetal): string => {
   const amount = m.entry === "gPerL" ? withUnit(significant(m.value, 3), "g/L") : significant(m.value);
   const gamma = m.gammaFrom === "typed" && m.gamma !== null ? `, gamma ${significant(m.gamma)}` : "";
   const davies = m.gammaFrom === "davies" ? ", gamma by Davies" : "";
   return `${m.role}, ${requirementWord[m.requirement]}, ${amountWord(m)} ${amount}${gamma}${davies}`;
 };
 
-const rangeText = ([lo, hi]: readonly [number, number], digits: number) =>
+export const rangeText = ([lo, hi]: readonly [number, number], digits: number) =>
   `${fixed(lo, digits)} to ${fixed(hi, digits)}`;
-const listText = (ids: readonly string[]) => (ids.length === 0 ? "none" : ids.join(", "));
-const onOff = (on: boolean) => (on ? "on" : "off");
+export const listText = (ids: readonly string[]) => (ids.length === 0 ? "none" : ids.join(", "));
+export const onOff = (on: boolean) => (on ? "on" : "off");
+
+export const totalText = (c: PlanTotal) =>
+  withUnit(significant(c.activity, 3), "mol/L") + (c.unit === "g/L" ? ", typed in g/L" : "");
+export const ionicText = (mol: number | null) => (mol === null ? "not given" : withUnit(significant(mol), "mol/kg"));
+export const acidBandText = ({ freeAcidBand: b }: Pick<PlanInputs, "freeAcidBand">) =>
+  b ? ` (free acid ±${withUnit(significant(b.gPerL), "g/L")} at pH ${fixed(b.atPH, 2)})` : "";
+export const heldText = (at: PlanInputs["heldSetPoint"]) =>
+  at ? `pH ${fixed(at.pH, 2)}, ${fixed(at.Eh, 3)} V vs SHE, by hand` : "deepest point";
+export const waterText = (water: PlanInputs["water"]) =>
+  waterBoundWord[water.bound] +
+  (water.oxygenV ? `, oxygen +${fixed(water.oxygenV, 2)} V` : "") +
+  (water.hydrogenV ? `, hydrogen ${MINUS}${fixed(water.hydrogenV, 2)} V` : "");
+/** What stands around the leach, for the cautions. */
+export const circuitText = ({ sxOrganic, oxygenKPa, reagents = [] }: NonNullable<PlanInputs["circuit"]>) =>
+  [
+    ...(sxOrganic === undefined ? [] : [`extraction organic ${sxOrganic ? "met" : "not met"}`]),
+    ...(oxygenKPa === undefined ? [] : [`oxygen at ${withUnit(significant(oxygenKPa), "kPa")}`]),
+    ...(reagents.length > 0 ? [`reagents ${listText(reagents)}`] : []),
+  ].join(", ") || "nothing said";
+
+/** The metals that both know, in the order of `one`. */
+const orderOf = (one: PlanInputs, other: PlanInputs) =>
+  one.metals
+    .map((m) => m.element)
+    .filter((e) => other.metals.some((m) => m.element === e))
+    .join(", ");
 
 /** Adds a change where the two texts differ. */
 function compare(changes: PlanChange[], what: string, from: string | null, to: string | null): void {
@@ -46,15 +72,14 @@ function compareKeyed<Item>(
 export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[] {
   const changes: PlanChange[] = [];
   compareKeyed(changes, before.metals, after.metals, (m) => m.element, metalText);
+  compare(changes, "Order of metals", orderOf(before, after), orderOf(after, before));
   compare(changes, "Lixiviant", lixiviantName[before.preset], lixiviantName[after.preset]);
-  const total = (c: PlanTotal) =>
-    withUnit(significant(c.activity, 3), "mol/L") + (c.unit === "g/L" ? ", typed in g/L" : "");
   compareKeyed(
     changes,
     before.ligands,
     after.ligands,
     (c) => c.component,
-    total,
+    totalText,
     (k) => `${k}, total`,
   );
   compareKeyed(
@@ -62,12 +87,10 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
     before.others,
     after.others,
     (c) => c.component,
-    total,
+    totalText,
     (k) => `${k}, total`,
   );
-  const ionic = (i: PlanInputs) =>
-    i.ionicStrength === null ? "not given" : withUnit(significant(i.ionicStrength), "mol/kg");
-  compare(changes, "Ionic strength", ionic(before), ionic(after));
+  compare(changes, "Ionic strength", ionicText(before.ionicStrength), ionicText(after.ionicStrength));
   compare(changes, "Sulfate reduction", onOff(before.sulfateReduction), onOff(after.sulfateReduction));
   compare(changes, "Temperature", celsius(before.temperatureC, 1), celsius(after.temperatureC, 1));
   compare(changes, "Solids basis", solidsBasisWord[before.solidsBasis], solidsBasisWord[after.solidsBasis]);
@@ -84,15 +107,9 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
   compare(changes, "Put back", listText(before.putBack), listText(after.putBack));
   const frame = (i: PlanInputs) => `pH ${rangeText(i.frame.pH, 1)}, Eh ${rangeText(i.frame.Eh, 2)} V vs SHE`;
   compare(changes, "Frame", frame(before), frame(after));
-  const water = (i: PlanInputs) =>
-    waterBoundWord[i.water.bound] +
-    (i.water.oxygenV ? `, oxygen +${fixed(i.water.oxygenV, 2)} V` : "") +
-    (i.water.hydrogenV ? `, hydrogen ${MINUS}${fixed(i.water.hydrogenV, 2)} V` : "");
-  compare(changes, "Bounded by", water(before), water(after));
-  const acidBand = ({ freeAcidBand: b }: PlanInputs) =>
-    b ? ` (free acid ±${withUnit(significant(b.gPerL), "g/L")} at pH ${fixed(b.atPH, 2)})` : "";
+  compare(changes, "Bounded by", waterText(before.water), waterText(after.water));
   const band = (i: PlanInputs) =>
-    `pH ±${fixed(i.controlBand.pH, 2)}${acidBand(i)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
+    `pH ±${fixed(i.controlBand.pH, 2)}${acidBandText(i)}, Eh ±${fixed(i.controlBand.Eh, 3)} V`;
   compare(changes, "Control bands", band(before), band(after));
   compareKeyed(
     changes,
@@ -108,9 +125,7 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
     return [...(t ? [withUnit(rangeText(t, 1), "°C")] : []), ...each].join(", ") || "nothing";
   };
   compare(changes, "Hold over", hold(before), hold(after));
-  const held = ({ heldSetPoint: at }: PlanInputs) =>
-    at ? `pH ${fixed(at.pH, 2)}, ${fixed(at.Eh, 3)} V vs SHE, by hand` : "deepest point";
-  compare(changes, "Set point", held(before), held(after));
+  compare(changes, "Set point", heldText(before.heldSetPoint), heldText(after.heldSetPoint));
   compareKeyed(
     changes,
     Object.entries(before.overall ?? {}),
@@ -119,6 +134,7 @@ export function planChanges(before: PlanInputs, after: PlanInputs): PlanChange[]
     ([, choice]) => overallText(choice),
     (from) => `Overall reaction of ${from}`,
   );
+  compare(changes, "Around the leach", circuitText(before.circuit ?? {}), circuitText(after.circuit ?? {}));
   return changes;
 }
 

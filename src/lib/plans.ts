@@ -24,7 +24,27 @@ export const planQuery = (id: string) =>
     queryKey: keys.plan(id),
     queryFn: ({ signal }) => api.get<PlanRow>(`/plans/${encodeURIComponent(id)}`, { signal }),
   });
-export const usePlan = (id: string | undefined) => useQuery({ ...planQuery(id ?? ""), enabled: id !== undefined });
+
+/** How often a plan that somebody works on is asked for again, ms: a colleague's revision is told of without a reload. */
+const WATCH_EVERY = 20_000;
+
+/** @param watched  asked for again while the page is in sight, and when somebody comes back to it */
+export const usePlan = (id: string | undefined, watched = false) =>
+  useQuery({
+    ...planQuery(id ?? ""),
+    enabled: id !== undefined,
+    refetchInterval: watched && WATCH_EVERY,
+    refetchOnWindowFocus: watched && "always",
+  });
+
+/** A saved revision never changes. */
+export const revisionQuery = (planId: string, number: number) =>
+  queryOptions({
+    queryKey: keys.revision(planId, number),
+    queryFn: ({ signal }) =>
+      api.get<RevisionRow>(`/plans/${encodeURIComponent(planId)}/revisions/${number}`, { signal }),
+    staleTime: Infinity,
+  });
 
 export const useRevisions = (planId: string, enabled = true) =>
   useQuery({
@@ -74,13 +94,9 @@ export const useUpdatePlan = () =>
     (plan) => plan,
   );
 
-/** Saves the inputs as the next revision of the plan. */
+/** Saves the inputs as the next revision of the plan; 412 STALE when somebody was faster. */
 export const useSaveRevision = () =>
   usePlanMutation(
-    ({ planId, version, ...body }: z.input<typeof revisionCreate> & { planId: string; version?: number }) =>
-      api.post<RevisionRow>(
-        `/plans/${encodeURIComponent(planId)}/revisions`,
-        body,
-        version === undefined ? {} : { ifMatch: version },
-      ),
+    ({ planId, version, ...body }: z.input<typeof revisionCreate> & { planId: string; version: number }) =>
+      api.post<RevisionRow>(`/plans/${encodeURIComponent(planId)}/revisions`, body, { ifMatch: version }),
   );

@@ -308,7 +308,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
                   <NextTrials
                     store={proposals}
                     plan={plan}
-                    revision={frozen?.number ?? plan.latest.number}
+                    revision={frozen?.number ?? draft.basedOn}
                     unsaved={frozen === null && draft.changed}
                     {...{ inputs, solution, data, chosen, trials, scale }}
                     reaches={map?.reaches ?? []}

@@ -11,7 +11,7 @@ export default function WorkspacePage() {
   const { planId = "" } = useParams();
   const [search] = useSearchParams();
   const number = search.get("revision");
-  const plan = usePlan(planId);
+  const plan = usePlan(planId, number === null);
   const revisions = useRevisions(planId, number !== null);
   const frozen = number === null ? null : revisions.data?.find((r) => String(r.number) === number);
   const current = useChemistry(undefined, number === null);
@@ -22,7 +22,8 @@ export default function WorkspacePage() {
   usePageTitle(plan.data?.name);
 
   const wrong =
-    plan.error ??
+    // A look that failed while the plan stands open takes nothing from the table.
+    (plan.data ? null : plan.error) ??
     (number === null ? null : revisions.error) ??
     chemistry.error ??
     (number !== null && revisions.data && !frozen ? new Error(`Revision ${number} does not exist.`) : null);

@@ -1,15 +1,16 @@
 import { describe, expect, test } from "vitest";
 import { history, type HistoryAction, sameInputs, startHistory } from "../../../src/features/workspace/model/history";
+import type { PlanInputs } from "../../../shared/schemas/plan";
 import { unusualInputs } from "../../support/planInputs";
 
 const at = (temperatureC: number) => ({ ...unusualInputs, temperatureC });
-const change = (t: number, time: number, about?: string): HistoryAction => ({
+const change = (t: number, time: number, about?: string): HistoryAction<PlanInputs> => ({
   type: "change",
-  inputs: at(t),
+  to: at(t),
   at: time,
   ...(about === undefined ? {} : { about }),
 });
-const run = (...actions: HistoryAction[]) => actions.reduce(history, startHistory(at(20)));
+const run = (...actions: HistoryAction<PlanInputs>[]) => actions.reduce(history, startHistory(at(20)));
 
 describe("undo and redo over all inputs", () => {
   test("one drag is one step", () => {
@@ -41,4 +42,12 @@ test("inputs are the same whatever the order of their keys, and not when a numbe
   expect(sameInputs(unusualInputs, turned)).toBe(true);
   expect(sameInputs(unusualInputs, at(99))).toBe(false);
   expect(sameInputs(unusualInputs, { ...unusualInputs, metals: [...unusualInputs.metals].reverse() })).toBe(false);
+});
+
+test("what holds of every state is changed in those undone as well", () => {
+  const state = run(change(30, 0), change(40, 1), { type: "undo" });
+  const next = history(state, { type: "every", change: (p) => ({ ...p, solidsBasis: "feed" as const }) });
+  expect(next.present).toMatchObject({ temperatureC: 30, solidsBasis: "feed" });
+  expect(history(next, { type: "redo" }).present).toMatchObject({ temperatureC: 40, solidsBasis: "feed" });
+  expect(history(next, { type: "undo" }).present).toMatchObject({ temperatureC: 20, solidsBasis: "feed" });
 });

@@ -6,13 +6,15 @@ import { DuplicateDialog } from "../../plans/DuplicateDialog";
 import { type PlanDialogProps, RenameDialog } from "../../plans/RenameDialog";
 import { RevisionsDialog } from "../../plans/RevisionsDialog";
 import type { DraftInHand } from "../model/useDraft";
+import type { DifferenceDialogProps } from "./DifferenceDialog";
 import type { SaveDialogProps } from "./SaveDialog";
 
 const ArchiveDialog = whenOpened<PlanDialogProps>(() => import("./ArchiveDialog"));
+const DifferenceDialog = whenOpened<DifferenceDialogProps>(() => import("./DifferenceDialog"));
 const KeysDialog = whenOpened<{ open: boolean; onOpenChange: (open: boolean) => void }>(() => import("./KeysDialog"));
 const SaveDialog = whenOpened<SaveDialogProps>(() => import("./SaveDialog"));
 
-export type DialogName = "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys";
+export type DialogName = "save" | "difference" | "revisions" | "rename" | "duplicate" | "archive" | "keys";
 
 /** Every dialog of the workspace; one is open at a time. */
 export function Dialogs({
@@ -38,9 +40,23 @@ export function Dialogs({
     open: open === name,
     onOpenChange: (next: boolean) => onOpen(next ? name : null),
   });
+  const overtaken = draft.basedOn < plan.latest.number;
+  // Who was overtaken sees the difference before anything is saved, and then goes on to save.
+  const difference = open === "difference" || (open === "save" && overtaken);
   return (
     <>
-      <SaveDialog {...show("save")} {...{ plan, draft, unconfirmed, note }} onNote={setNote} />
+      <DifferenceDialog
+        open={difference}
+        onOpenChange={() => onOpen(null)}
+        {...{ plan, draft }}
+        saving={open === "save"}
+      />
+      <SaveDialog
+        {...show("save")}
+        open={open === "save" && !overtaken}
+        {...{ plan, draft, unconfirmed, note }}
+        onNote={setNote}
+      />
       <RevisionsDialog
         {...show("revisions")}
         plan={plan}

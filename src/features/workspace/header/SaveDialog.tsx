@@ -1,3 +1,4 @@
+import { useQueryClient } from "@tanstack/react-query";
 import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import { Button } from "../../../components/Button";
 import { Dialog } from "../../../components/Dialog";
@@ -5,9 +6,10 @@ import { PlainTable } from "../../../components/PlainTable";
 import { ErrorNote } from "../../../components/status";
 import { TextArea } from "../../../components/TextField";
 import { Note } from "../../../components/text";
-import { ApiFailure } from "../../../lib/failure";
+import { staleAnswer } from "../../../lib/failure";
 import { planChanges } from "../../../lib/planChanges";
 import { useSaveRevision } from "../../../lib/plans";
+import { keys } from "../../../lib/queries";
 import type { DraftInHand } from "../model/useDraft";
 
 const LONGEST = 500;
@@ -32,12 +34,17 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
   const named = Object.entries(procedures).filter(([, p]) => p.trim() !== "");
   const procedureNote = named.map(([code, p]) => `${code} under procedure ${p.trim()}.`).join(" ");
   const whole = [note.trim(), procedureNote].filter((part) => part !== "").join(" ");
-  const stale = save.error instanceof ApiFailure && (save.error.status === 412 || save.error.status === 409);
+  const client = useQueryClient();
 
-  function run(overtake: boolean) {
+  function run() {
     save.mutate(
-      { planId: plan.id, note: whole, inputs, ...(overtake ? {} : { version: plan.version }) },
+      { planId: plan.id, note: whole, inputs, version: plan.version },
       {
+        // A revision saved meanwhile puts the difference in place of this dialog; the note is kept.
+        onError: (error) => {
+          const stale = staleAnswer<PlanRow>(error);
+          if (stale) client.setQueryData(keys.plan(plan.id), stale.current);
+        },
         onSuccess: (revision: RevisionRow) => {
           draft.saved(revision);
           onNote("");
@@ -60,7 +67,6 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
       footer={
         <>
           <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          {stale && <Button onClick={() => run(true)}>Save on top of it</Button>}
           <Button
             kind="primary"
             type="submit"
@@ -76,7 +82,7 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
         id="save-revision"
         onSubmit={(event) => {
           event.preventDefault();
-          run(false);
+          run();
         }}
       >
         <TextArea

@@ -1,3 +1,4 @@
+import { lazy, Suspense } from "react";
 import { Link } from "react-router-dom";
 import type { PlanRow } from "../../../../shared/schemas/plan";
 import { Button, ButtonLink } from "../../../components/Button";
@@ -5,6 +6,8 @@ import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../../components/Me
 import { Status } from "../../../components/status";
 import { fullTime, savedAt } from "../../../lib/format";
 import type { DraftInHand } from "../model/useDraft";
+
+const NewerRevision = lazy(async () => ({ default: (await import("./NewerRevision")).NewerRevision }));
 
 export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv" | "windows" | "polygons" | "sheet";
 
@@ -23,7 +26,7 @@ export interface HeaderProps {
   onCopyLink: () => void;
   /** shows the comments, or the answers again */
   onComments: () => void;
-  onOpen: (dialog: "save" | "revisions" | "rename" | "duplicate" | "archive" | "keys") => void;
+  onOpen: (dialog: "save" | "difference" | "revisions" | "rename" | "duplicate" | "archive" | "keys") => void;
 }
 
 /** The plan's name, what is saved of it and what is not, and the commands that concern the whole. */
@@ -38,7 +41,7 @@ export function WorkspaceHeader({
   onOpen,
 }: HeaderProps) {
   const { latest } = plan;
-  return (
+  const header = (
     <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
       <h1 className="truncate text-lg">{plan.name}</h1>
       <p
@@ -116,6 +119,20 @@ export function WorkspaceHeader({
       </span>
     </div>
   );
+  if (draft.basedOn >= latest.number) return header;
+  return (
+    <>
+      {header}
+      <Suspense fallback={null}>
+        <NewerRevision
+          latest={latest}
+          basedOn={draft.basedOn}
+          changed={draft.changed}
+          onDifference={() => onOpen("difference")}
+        />
+      </Suspense>
+    </>
+  );
 }
 
 /** Unsaved changes against what is saved, else the last two revisions. */
@@ -138,6 +155,13 @@ function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "
       {plan.archived && <b>, archived</b>}
     </>
   );
+  if (!draft.changed && draft.basedOn < latest.number)
+    return (
+      <>
+        revision {draft.basedOn}
+        {tail}
+      </>
+    );
   if (!draft.changed)
     return (
       <>
@@ -161,7 +185,6 @@ function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "
       <b className="text-ink">{mayWrite ? "Unsaved changes" : "Tried here only"}</b> · {back}
       {mayWrite ? `, from revision ${draft.basedOn}` : ": your role looks and tries, a metallurgist saves"}
       {!draft.kept && ", and this browser keeps nothing when the page closes"}
-      {draft.basedOn < latest.number && <b className="text-signal">; revision {latest.number} was saved meanwhile</b>}
       {tail}
     </span>
   );

@@ -1,17 +1,19 @@
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 
-/** Every state the inputs went through since the page was opened, and the one that stands. */
-export interface History {
-  past: readonly PlanInputs[];
-  present: PlanInputs;
-  future: readonly PlanInputs[];
+/** Every state gone through since the page was opened, and the one that stands. */
+export interface History<State> {
+  past: readonly State[];
+  present: State;
+  future: readonly State[];
   /** what the last change was about and when, so that one drag makes one step of undo; null closes it */
   open: { about: string; at: number } | null;
 }
 
-export type HistoryAction =
+export type HistoryAction<State> =
   /** `about` names a control that changes many times in one gesture; changes without it are steps of their own */
-  | { type: "change"; inputs: PlanInputs; about?: string; at: number }
+  | { type: "change"; to: State; about?: string; at: number }
+  /** what holds of every state, undone ones as well, changed in all */
+  | { type: "every"; change: (state: State) => State }
   | { type: "settle" }
   | { type: "undo" }
   | { type: "redo" };
@@ -20,17 +22,17 @@ const DEPTH = 200;
 /** a pause this long, ms, ends a gesture even when nobody said so */
 const PAUSE = 1200;
 
-export const startHistory = (present: PlanInputs, past: readonly PlanInputs[] = []): History => ({
+export const startHistory = <State>(present: State, past: readonly State[] = []): History<State> => ({
   past,
   present,
   future: [],
   open: null,
 });
 
-export function history(state: History, action: HistoryAction): History {
+export function history<State>(state: History<State>, action: HistoryAction<State>): History<State> {
   switch (action.type) {
     case "change": {
-      if (action.inputs === state.present) return state;
+      if (action.to === state.present) return state;
       const open = action.about === undefined ? null : { about: action.about, at: action.at };
       const goesOn =
         state.open !== null &&
@@ -38,8 +40,15 @@ export function history(state: History, action: HistoryAction): History {
         action.at - state.open.at < PAUSE &&
         state.past.length > 0;
       const past = goesOn ? state.past : [...state.past, state.present].slice(-DEPTH);
-      return { past, present: action.inputs, future: [], open };
+      return { past, present: action.to, future: [], open };
     }
+    case "every":
+      return {
+        past: state.past.map(action.change),
+        present: action.change(state.present),
+        future: state.future.map(action.change),
+        open: state.open,
+      };
     case "settle":
       return state.open === null ? state : { ...state, open: null };
     case "undo": {

@@ -4,6 +4,17 @@ import { type Draft, dropDraft, keepDraft, readDraft } from "./draftShelf";
 import type { Edit } from "./edit";
 import { history, sameInputs, startHistory } from "./history";
 
+/** A state of the inputs, and the revision it stands on. Undoing a merge so brings back what it stood on before. */
+interface Step {
+  inputs: PlanInputs;
+  base: Base;
+}
+/** `inputs` null: of an older revision that a kept draft names; the server has them */
+interface Base {
+  number: number;
+  inputs: PlanInputs | null;
+}
+
 export interface DraftInHand {
   inputs: PlanInputs;
   /** changes the inputs; `about` joins the changes of one gesture to one step of undo */
@@ -18,12 +29,16 @@ export interface DraftInHand {
   changed: boolean;
   /** the revision it started from; older than the latest when somebody saved meanwhile */
   basedOn: number;
+  /** what that revision said; null where only its number is known */
+  baseInputs: PlanInputs | null;
   /** false where this browser keeps nothing between visits */
   kept: boolean;
   procedures: Readonly<Record<string, string>>;
   nameProcedure: (code: string, procedure: string) => void;
   /** starts over from a revision, keeping the way back open */
   take: (revision: Pick<RevisionRow, "number" | "inputs">) => void;
+  /** goes on with these inputs on another revision: one step of undo, base and all */
+  moveTo: (revision: Pick<RevisionRow, "number" | "inputs">, inputs: PlanInputs) => void;
   /** the inputs in hand became a revision */
   saved: (revision: RevisionRow) => void;
 }
@@ -31,20 +46,16 @@ export interface DraftInHand {
 /** The inputs of a plan while somebody works on them: undo, redo, and a copy in the browser until they are saved. */
 export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
   const [start] = useState(() => ({ draft: readDraft(planId), latest }));
-  const [state, act] = useReducer(history, start, ({ draft }) =>
-    draft && !sameInputs(draft.inputs, latest.inputs)
-      ? startHistory(draft.inputs, [latest.inputs])
-      : startHistory(latest.inputs),
-  );
-  const [base, setBase] = useState<Pick<RevisionRow, "number" | "inputs">>(() =>
-    start.draft && !sameInputs(start.draft.inputs, latest.inputs)
-      ? { number: start.draft.basedOn, inputs: latest.inputs }
-      : latest,
-  );
+  const [state, act] = useReducer(history<Step>, start, ({ draft }) => {
+    const first = { inputs: latest.inputs, base: latest };
+    if (!draft || sameInputs(draft.inputs, latest.inputs)) return startHistory(first);
+    const base = draft.basedOn === latest.number ? latest : { number: draft.basedOn, inputs: null };
+    return startHistory<Step>({ inputs: draft.inputs, base }, [first]);
+  });
   const [procedures, setProcedures] = useState<Record<string, string>>(start.draft?.procedures ?? {});
   const [kept, setKept] = useState(true);
-  const inputs = state.present;
-  const changed = useMemo(() => !sameInputs(inputs, base.inputs), [inputs, base]);
+  const { inputs, base } = state.present;
+  const changed = useMemo(() => base.inputs === null || !sameInputs(inputs, base.inputs), [inputs, base]);
 
   // Written behind the hand, not under it: a drag would else write at every step.
   const pending = useRef<Draft | null>(null);
@@ -71,16 +82,23 @@ export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
     [planId],
   );
 
-  const present = useRef(inputs);
+  const present = useRef(state.present);
   useEffect(() => {
-    present.current = inputs;
-  }, [inputs]);
-  const edit = useCallback((change: Edit, about?: string) => {
-    const next = change(present.current);
+    present.current = state.present;
+  }, [state.present]);
+  const step = useCallback((to: Step, about?: string) => {
     // Two edits in one event build on each other, before React has drawn the first.
-    present.current = next;
-    act({ type: "change", inputs: next, at: performance.now(), ...(about === undefined ? {} : { about }) });
+    present.current = to;
+    act({ type: "change", to, at: performance.now(), ...(about === undefined ? {} : { about }) });
   }, []);
+  const edit = useCallback(
+    (change: Edit, about?: string) => {
+      const { inputs, base } = present.current;
+      const next = change(inputs);
+      if (next !== inputs) step({ inputs: next, base }, about);
+    },
+    [step],
+  );
   const settle = useCallback(() => act({ type: "settle" }), []);
   const undo = useCallback(() => act({ type: "undo" }), []);
   const redo = useCallback(() => act({ type: "redo" }), []);
@@ -88,8 +106,17 @@ export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
     (code: string, procedure: string) => setProcedures((old) => ({ ...old, [code]: procedure })),
     [],
   );
-  const take = useCallback((revision: Pick<RevisionRow, "number" | "inputs">) => edit(() => revision.inputs), [edit]);
-  const saved = useCallback((revision: RevisionRow) => setBase(revision), []);
+  const moveTo = useCallback((base: Base, inputs: PlanInputs) => step({ inputs, base }), [step]);
+  const take = useCallback(
+    (revision: Pick<RevisionRow, "number" | "inputs">) =>
+      // An older one is a change of the draft; nobody's later work is passed over by it.
+      step({ inputs: revision.inputs, base: revision.number === latest.number ? revision : present.current.base }),
+    [step, latest.number],
+  );
+  const saved = useCallback(
+    (revision: RevisionRow) => act({ type: "every", change: ({ inputs }) => ({ inputs, base: revision }) }),
+    [],
+  );
 
   return {
     inputs,
@@ -101,10 +128,12 @@ export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
     canRedo: state.future.length > 0,
     changed,
     basedOn: base.number,
+    baseInputs: base.inputs,
     kept,
     procedures,
     nameProcedure,
     take,
+    moveTo,
     saved,
   };
 }

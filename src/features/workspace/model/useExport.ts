@@ -35,7 +35,7 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
         ? `revision ${frozen.number}`
         : draft.changed
           ? `draft on revision ${draft.basedOn}`
-          : `revision ${plan.latest.number}`;
+          : `revision ${draft.basedOn}`;
       import("./exportPlan")
         .then(({ exportPlan }) =>
           exportPlan(kind, {
