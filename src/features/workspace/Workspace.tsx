@@ -67,7 +67,7 @@ const NONE: readonly Outline[] = [];
 export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const navigate = useNavigate();
   const mayWrite = useMay("writePlans");
-  const draft = useDraft(plan.id, plan.latest);
+  const draft = useDraft(plan.id, plan.latest, frozen === null);
   const [proposal, setProposal] = useState(() =>
     start.settings && !sameInputs(start.settings, draft.inputs) ? start.settings : null,
   );

@@ -43,8 +43,9 @@ export interface DraftInHand {
   saved: (revision: RevisionRow) => void;
 }
 
-/** The inputs of a plan while somebody works on them: undo, redo, and a copy in the browser until they are saved. */
-export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
+/** The inputs of a plan while somebody works on them: undo, redo, and a copy in the browser until they are saved.
+ *  @param keeps  false beside a saved state that is only looked at: what the browser keeps is then left alone */
+export function useDraft(planId: string, latest: RevisionRow, keeps = true): DraftInHand {
   const [start] = useState(() => ({ draft: readDraft(planId), latest }));
   const [state, act] = useReducer(history<Step>, start, ({ draft }) => {
     const first = { inputs: latest.inputs, base: latest };
@@ -60,6 +61,7 @@ export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
   // Written behind the hand, not under it: a drag would else write at every step.
   const pending = useRef<Draft | null>(null);
   useEffect(() => {
+    if (!keeps) return;
     pending.current = { basedOn: base.number, inputs, procedures };
     const nothing = !changed && Object.values(procedures).every((p) => p === "");
     const write = () => {
@@ -74,7 +76,7 @@ export function useDraft(planId: string, latest: RevisionRow): DraftInHand {
       clearTimeout(timer);
       window.removeEventListener("pagehide", write);
     };
-  }, [planId, base, inputs, procedures, changed]);
+  }, [planId, base, inputs, procedures, changed, keeps]);
   useEffect(
     () => () => {
       if (pending.current) keepDraft(planId, pending.current);
