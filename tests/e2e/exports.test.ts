@@ -31,7 +31,8 @@ test("a technician takes the window sheet of the saved revision; an electrode of
   expect(words).toContain("INVENTED DEMO DATA");
 
   await page.request.put("/api/me/preferences", { data: { potentialScale: "AGCL-3M", electrodeTemperatureC: 25 } });
-  await page.reload();
+  // The bare address states no scale: the member's own stands.
+  await page.goto(path);
   await plan.drawn();
   await page.getByText("Ag/AgCl, 3 mol/L KCl, at 25").first().waitFor();
   const second = readPdf((await fileOf(plan, "Window sheet, revision 3")).bytes);

@@ -15,7 +15,10 @@ for (const role of ["technician", "manager"] as const) {
 
     const before = await plan.answers();
     await plan.drag("Temperature of the liquor", 50, () => expect.poll(() => plan.answers()).not.toEqual(before));
-    await plan.header().getByText("Tried here only: your role looks and tries, a metallurgist saves").waitFor();
+    await plan
+      .header()
+      .getByText(/^Tried here only · go back to revision \d+; your role looks and tries, a metallurgist saves/)
+      .waitFor();
     expect(await plan.button("Save revision").count()).toBe(0);
     await page.keyboard.press("Control+s");
     expect(await page.getByRole("dialog").count()).toBe(0);

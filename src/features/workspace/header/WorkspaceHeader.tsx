@@ -183,7 +183,7 @@ function Saved({ plan, draft, mayWrite }: Pick<HeaderProps, "plan" | "draft" | "
     <span role="status">
       {/* What one may press comes before what a narrow screen cuts off. */}
       <b className="text-ink">{mayWrite ? "Unsaved changes" : "Tried here only"}</b> · {back}
-      {mayWrite ? `, from revision ${draft.basedOn}` : ": your role looks and tries, a metallurgist saves"}
+      {mayWrite ? `, from revision ${draft.basedOn}` : "; your role looks and tries, a metallurgist saves"}
       {!draft.kept && ", and this browser keeps nothing when the page closes"}
       {tail}
     </span>
