@@ -48,6 +48,9 @@ export const glossary: Readonly<Record<GlossaryWord, readonly string[]>> = {
     "Windows stay clear of ground where this gas would stand over the liquor: where its equilibrium pressure reaches the limit stated, as in a closed headspace. For HCN a site may state the pH it never goes below instead; its edge then cuts the window, counts in the margin, and is named among the limits.",
     "A line on a map protects nobody. Local codes, exposure limits in force, the site's procedures and licensed practice decide; gas detection and ventilation are theirs.",
   ],
+  circuit: [
+    "What stands around the vessel and no diagram shows: whether the liquor meets solvent extraction organic, the partial pressure of oxygen, the oxidants, reductants and cementing metals in use. Windows do not see it; the cautions do, and only what is named can be warned of.",
+  ],
   windowLimit: ["One edge of a window: the metal and the reaction that shuts it there."],
   shutGround: [
     "Hatched ground is shut: the metal with that hatch is not as required. Ground that no metal shuts is open, and makes the window.",

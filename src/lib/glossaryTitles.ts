@@ -15,6 +15,7 @@ export const glossaryTitles = {
   window: "Window",
   robustWindow: "Window over ranges",
   excludedHazard: "Kept out",
+  circuit: "Around the leach",
   windowLimit: "Window limit",
   shutGround: "Shut and open ground",
   nextTrials: "Next trials",

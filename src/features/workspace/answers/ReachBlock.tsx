@@ -11,6 +11,8 @@ import { Note, SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 
+const NO_RANGE = "no practical range on record for this liquor";
+
 /** The verdict in words, potentials on the member's scale. */
 function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialScale): string {
   const off = differenceText(shortMV ?? 0, scale);
@@ -24,7 +26,7 @@ function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialSc
     case "not reachable":
       return `stays ${off} ${side ?? "outside"} the window`;
     case "not on record":
-      return "no practical range on record for this liquor";
+      return NO_RANGE;
   }
 }
 
@@ -66,21 +68,38 @@ export function ReachBlock({
                 <Name reach={reach} equilibrium={equilibrium} scale={scale} />
                 <span className="font-mono whitespace-nowrap">{range(reach, scale)}</span>
               </div>
-              <div className="text-sm text-muted">
-                {[
-                  window && verdictText(reachOf(data, reach.reagent, window, liquor), scale),
-                  reach.practical === null &&
-                    equilibrium !== null &&
-                    `its couple would stand at ${scale.format(equilibrium)}`,
-                ]
-                  .filter(Boolean)
-                  .join("; ")}
+              <div className="text-sm">
+                {window
+                  ? verdictText(reachOf(data, reach.reagent, window, liquor), scale)
+                  : reach.practical === null && NO_RANGE}
+              </div>
+              {equilibrium !== null && <Equilibrium reach={reach} Eh={equilibrium} scale={scale} />}
+              <div className="mt-0.5 border-l-2 border-signal pl-2 text-sm text-muted">
+                <FormulaText text={reach.reagent.hazard} />
               </div>
             </li>
           );
         })}
       </ul>
     </section>
+  );
+}
+
+/** Where the couple would stand, second to what practice shows and said to be no reading. */
+function Equilibrium({ reach: { reagent, line }, Eh, scale }: { reach: Reach; Eh: number; scale: PotentialScale }) {
+  const { couple } = reagent;
+  return (
+    <div className="text-sm text-muted">
+      equilibrium
+      {couple && (
+        <>
+          {" of "}
+          <Formula formula={couple.oxidised} />/<Formula formula={couple.reduced} />
+        </>
+      )}
+      , every activity one: <span className="font-mono whitespace-nowrap">{scale.format(Eh)}</span>
+      {line?.from === "handbook" && <> (E0 of 25 °C)</>}; a slurry seldom shows it
+    </div>
   );
 }
 
@@ -106,7 +125,7 @@ function Name({
   return (
     <Help title={reagent.name} trigger={<Formula formula={reagent.name} />}>
       <p>
-        {reagent.kind}: <FormulaText text={reagent.note} />. <FormulaText text={reagent.hazard} />.
+        {reagent.kind}: <FormulaText text={reagent.note} />. Beside its work: <FormulaText text={reagent.hazard} />.
       </p>
       {couple && equilibrium !== null && (
         <p>

@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import type { LayerName, Layers } from "../../../map/view";
+import { AroundSection } from "./AroundSection";
 import { HoldOverSection } from "./HoldOverSection";
 import { KeptOutSection } from "./KeptOutSection";
 import { LayersSection } from "./LayersSection";
@@ -26,6 +27,7 @@ export function AsksPanel(props: {
       <FrameSection />
       <WaterSection />
       <KeptOutSection />
+      <AroundSection />
       <BandsSection />
       <HoldOverSection />
       <div className="no-print">
