@@ -2,7 +2,10 @@ import { lightPalette } from "../../../shared/drawing/palette";
 import { windowName } from "../../../shared/windows/limitWords";
 import { cells, gap, heading, mutedStyle, rows, stack, textBlock, textStyle, type Block, type Column } from "./blocks";
 import type { Pen } from "./pen";
-import { cautionsSay, conflictSays, gradesSay, inputsSay, limitSays, warningsSay } from "./says";
+import { inputsSay } from "./says/asked";
+import { cautionsSay } from "./says/cautions";
+import { gradesSay, warningsSay } from "./says/trust";
+import { conflictSays, limitSays } from "./says/window";
 import type { SheetWork } from "./work";
 
 const GUTTER = 16;

@@ -5,7 +5,8 @@ import { gap, heading, mutedStyle, rows, SIZES, SMALLEST, stack, textBlock, text
 import { drawHatch, UNIT } from "./plane";
 import type { Pen } from "./pen";
 import { roleColour } from "./roles";
-import { metalSays, setPointSays } from "./says";
+import { metalSays } from "./says/asked";
+import { setPointSays } from "./says/window";
 import type { SheetWork } from "./work";
 
 function keyRow(pen: Pen, work: SheetWork, index: number, size: number, width: number, brief: boolean): Block {
