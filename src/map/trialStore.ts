@@ -25,9 +25,12 @@ export class Value<T> {
 export class TrialStore {
   /** the trial under the pointer, on the map or in the table */
   readonly hovered = new Value<string | null>(null);
-  readonly brush = new Value<Brushed | null>(null);
+  readonly brush;
   /** true: the next drag on the map brushes, without a key held */
   readonly brushing = new Value(false);
+  constructor(brush: Brushed | null = null) {
+    this.brush = new Value(brush);
+  }
 }
 
 export const useTold = <T>(value: { subscribe: (tell: () => void) => () => void; get: () => T }): T =>

@@ -85,13 +85,14 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const printing = usePrinting();
   const { layers, setLayer, plain, setPlain } = look.map;
   const { reagents, choose, focus, setFocus } = look;
-  const { sight, change: see } = useSight(inputs, look);
+  const { sight, change: see } = useSight(inputs, look.view, look.change);
   const [limitStore] = useState(() => new LimitStore());
   const [cursor] = useState(() => new CursorStore());
   const [proposals] = useState(() => new ProposalStore());
   const proposing = useTold(proposals.asked) !== null;
-  const [talking, setTalking] = useState(false);
-  const toggleTalk = useCallback(() => setTalking((on) => !on), []);
+  const { comments: talking, asText } = look.view;
+  const changeLook = look.change;
+  const toggleTalk = useCallback(() => changeLook({ comments: !talking }), [changeLook, talking]);
   const [dialog, setDialog] = useState<DialogName | null>(null);
   const [said, setSaid] = useState<Said | null>(null);
   const link = useLink(plan, frozen, inputs, look.seen, setSaid);
@@ -277,6 +278,8 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
               data={data}
               sight={sight}
               change={see}
+              asText={asText}
+              onAsText={(open) => changeLook({ asText: open })}
               limitStore={limitStore}
               cursor={cursor}
               onMoveSetPoint={mayMove ? moveSetPoint : undefined}

@@ -1,4 +1,4 @@
-import { useCallback, useDeferredValue, useMemo, useState } from "react";
+import { useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { MapTrials } from "../../../../shared/schemas/trialRows";
@@ -7,7 +7,7 @@ import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { placedTrials, type PlacedTrial } from "../../../lib/judgedTrials";
 import { useMapTrials } from "../../../lib/trials";
 import { colourScale, type ColourScale, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
-import { TrialStore } from "../../../map/trialStore";
+import { type Brushed, TrialStore } from "../../../map/trialStore";
 import type { ShownTrials } from "../../../map/TrialsLayer";
 import { marksOf, stageMarkers, type Colouring } from "./planTrialsModel";
 
@@ -43,6 +43,8 @@ export interface TrialLooks {
   colouring: Colouring;
   /** ids of campaigns */
   hidden: readonly string[];
+  /** the box whose trials are listed; null: all of them */
+  brush: Brushed | null;
 }
 
 /** The trials of a plan's map: read once, judged against the solution in hand, coloured and filtered.
@@ -59,7 +61,8 @@ export function usePlanTrials(
   const navigate = useNavigate();
   const { scope, colouring } = looks;
   const hidden = useMemo(() => new Set(looks.hidden), [looks.hidden]);
-  const [store] = useState(() => new TrialStore());
+  const [store] = useState(() => new TrialStore(looks.brush));
+  useKeptBrush(store, looks.brush, onLook);
   const query = useMapTrials(planId, scope, enabled);
   const answer = enabled ? query.data : undefined;
 
@@ -103,4 +106,33 @@ export function usePlanTrials(
     open,
     ground,
   };
+}
+
+/** The box follows the hand by itself; what is kept of it follows when the hand rests, ms. */
+const BRUSH_RESTS = 200;
+
+/** Keeps the box of a brush with the other looks, and takes it from there when they change from outside. */
+function useKeptBrush(store: TrialStore, kept: Brushed | null, onLook: (part: Partial<TrialLooks>) => void): void {
+  const known = useRef(kept);
+  useEffect(() => {
+    if (kept === known.current) return;
+    known.current = kept;
+    store.brush.set(kept);
+  }, [store, kept]);
+  useEffect(() => {
+    let timer: number | undefined;
+    const stop = store.brush.subscribe(() => {
+      clearTimeout(timer);
+      timer = window.setTimeout(() => {
+        const brush = store.brush.get();
+        if (brush === known.current) return;
+        known.current = brush;
+        onLook({ brush });
+      }, BRUSH_RESTS);
+    });
+    return () => {
+      stop();
+      clearTimeout(timer);
+    };
+  }, [store, onLook]);
 }

@@ -56,10 +56,9 @@ const addressSchema = z.object({
   Eh: range(-10, 10),
   focus: z.string().min(1),
   hide: list,
-  pair: list.refine((x) => x.length === 2, { message: "names two metals" }),
+  pair: parts(",").pipe(z.tuple([z.string(), z.string()], { error: "names two metals" })),
   window: z.string().regex(/^[A-Z]$/, "is no window’s letter"),
   pin: point,
-  pin2: point,
   plain: z.enum(["0", "1"]),
   on: known,
   off: known,
@@ -69,6 +68,9 @@ const addressSchema = z.object({
   trials: z.literal("project"),
   colour: z.enum(["recovery", "gangue", "selectivity"]),
   without: list,
+  brush: parts(",").pipe(z.tuple([range(-10, 30), range(-10, 10)])),
+  comments: z.literal("1"),
+  text: z.literal("1"),
   vary: varied,
   over: parts("..").pipe(z.tuple([number, number])),
   frames: number.refine((n) => [5, 6, 7, 8, 9].includes(n), { message: "is not 5 to 9" }),
@@ -89,17 +91,16 @@ export function encodeView(view: PlanView): [string, string][] {
   const out: [string, string][] = [["view", "1"]];
   const add = (key: keyof Address, value: string | null | false) =>
     value !== null && value !== false && out.push([key, value]);
-  const { visible, film, scale } = view;
+  const { visible, film, scale, brush } = view;
   if (visible) {
     add("pH", spanText(visible.pH));
     add("Eh", spanText(visible.Eh));
   }
   add("focus", view.focus);
   add("hide", view.hidden.length > 0 && view.hidden.join(","));
-  add("pair", view.pair.length === 2 && view.pair.join(","));
+  add("pair", view.pair?.join(",") ?? null);
   add("window", view.window > 0 && String.fromCharCode(65 + (view.window % 26)));
   add("pin", view.pin && pointText(view.pin));
-  add("pin2", view.pin2 && pointText(view.pin2));
   add("plain", view.plain === true && "1");
   const switched = (wanted: boolean) =>
     Object.entries(view.layers ?? {})
@@ -117,6 +118,9 @@ export function encodeView(view: PlanView): [string, string][] {
   add("trials", view.trialsOf === "project" && "project");
   add("colour", view.colouredBy !== "recoveryPct" && colours[view.colouredBy]);
   add("without", view.without.length > 0 && view.without.join(","));
+  add("brush", brush && `${spanText(brush.pH)},${spanText(brush.Eh)}`);
+  add("comments", view.comments && "1");
+  add("text", view.asText && "1");
   if (film) {
     add("vary", film.vary.kind === "temperature" ? "temperature" : `${film.vary.kind}-${film.vary.of}`);
     add("over", spanText(film.range, figures));
@@ -175,12 +179,11 @@ export function decodeView(query: URLSearchParams, inputs: PlanInputs): DecodedV
       visible,
       focus: a.focus ?? null,
       hidden: a.hide ?? [],
-      pair: a.pair ?? [],
+      pair: a.pair ?? null,
       layers: stated ? layers : null,
       plain: stated ? a.plain === "1" : null,
       window: a.window ? a.window.charCodeAt(0) - 65 : 0,
       pin: a.pin ?? null,
-      pin2: a.pin2 ?? null,
       reagents: a.reach ?? null,
       scale: a.scale
         ? {
@@ -195,6 +198,9 @@ export function decodeView(query: URLSearchParams, inputs: PlanInputs): DecodedV
       trialsOf: a.trials ?? bareView.trialsOf,
       colouredBy: colouredBy ?? bareView.colouredBy,
       without: a.without ?? [],
+      brush: a.brush ? { pH: a.brush[0], Eh: a.brush[1] } : null,
+      comments: a.comments === "1",
+      asText: a.text === "1",
       film,
     },
   };

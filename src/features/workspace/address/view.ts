@@ -2,6 +2,7 @@ import type { Frame } from "../../../../shared/schemas/problem";
 import type { Point } from "../../../../shared/solution";
 import type { Varied } from "../../../../shared/whatif/vary";
 import type { ScaleChoice } from "../../../lib/scaleChoice";
+import type { Brushed } from "../../../map/trialStore";
 
 /** The filmstrip of one setting: what is varied, over which range, in how many small maps. */
 export interface FilmWish {
@@ -18,17 +19,15 @@ export interface PlanView {
   focus: string | null;
   /** elements left out of the drawing */
   hidden: readonly string[];
-  /** elements set against each other */
-  pair: readonly string[];
+  /** the two metals that alone are drawn, to be compared */
+  pair: readonly [string, string] | null;
   /** switches by layer ("labels") or gas ("gas HCN"); null: as the member has them */
   layers: Readonly<Record<string, boolean>> | null;
   plain: boolean | null;
   /** index of the window the answers speak of */
   window: number;
-  /** where the crosscuts run; null: through the set point */
+  /** where a second pair of crosscuts runs; the first runs through the set point */
   pin: Point | null;
-  /** where a second pair of crosscuts runs */
-  pin2: Point | null;
   /** reagents drawn; null: as chosen in this browser, else what is usual */
   reagents: readonly string[] | null;
   /** null: as the member has it */
@@ -38,6 +37,12 @@ export interface PlanView {
   colouredBy: "recoveryPct" | "gangueDissolvedPct" | "selectivityPct";
   /** campaigns whose trials are not drawn, by id */
   without: readonly string[];
+  /** the box of the map whose trials are listed; null: all of them */
+  brush: Brushed | null;
+  /** the comments stand in place of the answers */
+  comments: boolean;
+  /** the map stands as text */
+  asText: boolean;
   /** null: the map stands there */
   film: FilmWish | null;
 }
@@ -47,17 +52,19 @@ export const bareView: PlanView = {
   visible: null,
   focus: null,
   hidden: [],
-  pair: [],
+  pair: null,
   layers: null,
   plain: null,
   window: 0,
   pin: null,
-  pin2: null,
   reagents: null,
   scale: null,
   side: "answers",
   trialsOf: "plan",
   colouredBy: "recoveryPct",
   without: [],
+  brush: null,
+  comments: false,
+  asText: false,
   film: null,
 };

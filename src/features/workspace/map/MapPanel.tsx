@@ -36,6 +36,9 @@ export interface MapPanelProps extends SightInHand {
   data: ChemicalData;
   scale: PotentialScale;
   onPlain: (plain: boolean) => void;
+  /** the map stands as text */
+  asText: boolean;
+  onAsText: (open: boolean) => void;
   cursor: CursorStore;
   limitStore: LimitStore;
   /** moves the set point by hand; absent where the plan is only looked at */
@@ -56,6 +59,8 @@ export function MapPanel(props: MapPanelProps) {
     onPlain,
     sight,
     change,
+    asText,
+    onAsText,
     cursor,
     limitStore,
     onMoveSetPoint,
@@ -67,7 +72,6 @@ export function MapPanel(props: MapPanelProps) {
   const { solution } = asked;
   const { plain, window: chosen } = view;
   const [moving, setMoving] = useState(false);
-  const [asText, setAsText] = useState(false);
   const textId = useId();
   const window = solution.windows[chosen];
   const setPoint = window?.setPoint;
@@ -114,7 +118,7 @@ export function MapPanel(props: MapPanelProps) {
           moving={moving}
           onMoving={setMoving}
           asText={asText}
-          onAsText={setAsText}
+          onAsText={onAsText}
         />
       </div>
       <div className="relative min-h-0 flex-1 px-2 pb-2">

@@ -1,7 +1,6 @@
 import { useCallback, useMemo } from "react";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Point } from "../../../../shared/solution";
-import type { Frame } from "../../../../shared/schemas/problem";
 import type { TrialLooks } from "../../trials/planTrials/usePlanTrials";
 import { useAddress, useView } from "../address/useView";
 import type { FilmWish, PlanView } from "../address/view";
@@ -21,17 +20,18 @@ export function useLook(start: PlanView, planId: string, inputs: PlanInputs, set
   );
   useAddress(seen, own, settings);
 
-  const { focus: wantedFocus, trialsOf, colouredBy, without } = view;
+  const { focus: wantedFocus, trialsOf, colouredBy, without, brush } = view;
   const trials = useMemo<TrialLooks>(
-    () => ({ scope: trialsOf, colouring: colouredBy, hidden: without }),
-    [trialsOf, colouredBy, without],
+    () => ({ scope: trialsOf, colouring: colouredBy, hidden: without, brush }),
+    [trialsOf, colouredBy, without, brush],
   );
   const lookAtTrials = useCallback(
-    ({ scope, colouring, hidden }: Partial<TrialLooks>) =>
+    ({ scope, colouring, hidden, brush }: Partial<TrialLooks>) =>
       change({
         ...(scope && { trialsOf: scope }),
         ...(colouring && { colouredBy: colouring }),
         ...(hidden && { without: hidden }),
+        ...(brush !== undefined && { brush }),
       }),
     [change],
   );
@@ -39,6 +39,7 @@ export function useLook(start: PlanView, planId: string, inputs: PlanInputs, set
     /** everything seen, as an address states it */
     seen,
     view,
+    change,
     map,
     switched,
     ...reagents,
@@ -46,7 +47,6 @@ export function useLook(start: PlanView, planId: string, inputs: PlanInputs, set
     setFocus: useCallback((focus: string | null) => change({ focus }), [change]),
     setWindow: useCallback((window: number) => change({ window }), [change]),
     setPinned: useCallback((pin: Point | null) => change({ pin }), [change]),
-    setZoom: useCallback((visible: Frame | null) => change({ visible }), [change]),
     setSide: useCallback((side: PlanView["side"]) => change({ side }), [change]),
     setFilm: useCallback((film: FilmWish | null) => change({ film }), [change]),
     trials,

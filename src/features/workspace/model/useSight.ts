@@ -1,7 +1,9 @@
-import { useCallback, useMemo, useState } from "react";
+import { useCallback, useMemo } from "react";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Frame } from "../../../../shared/schemas/problem";
 import type { Point } from "../../../../shared/solution";
+import type { ChangeView } from "../address/useView";
+import type { PlanView } from "../address/view";
 
 /** What somebody looks at on the map; none of it belongs to the plan. */
 export interface Sight {
@@ -40,35 +42,24 @@ export interface SightInHand {
   change: (part: Partial<Sight>) => void;
 }
 
-/** The part that the address keeps (useLook). */
-export interface KeptLook {
-  focus: string | null;
-  view: { pin: Point | null; visible: Frame | null };
-  setFocus: (focus: string | null) => void;
-  setPinned: (at: Point | null) => void;
-  setZoom: (to: Frame | null) => void;
-}
-
-/** What the address keeps of it, and which metals are drawn. */
-export function useSight(inputs: Pick<PlanInputs, "metals" | "frame">, look: KeptLook): SightInHand {
-  const [drawn, setDrawn] = useState<Pick<Sight, "hidden" | "pair">>({ hidden: [], pair: null });
-  const { metals, frame } = inputs;
-  const { focus, setFocus, setPinned, setZoom } = look;
-  const { pin, visible } = look.view;
+/** What the view in the address says of it. */
+export function useSight(
+  { metals, frame }: Pick<PlanInputs, "metals" | "frame">,
+  { focus, hidden, pair, pin, visible }: PlanView,
+  changeView: ChangeView,
+): SightInHand {
   const sight = useMemo(
-    () => sightOf({ ...drawn, focus, pinned: pin, zoom: visible }, { metals, frame }),
-    [drawn, focus, pin, visible, metals, frame],
+    () => sightOf({ focus, hidden, pair, pinned: pin, zoom: visible }, { metals, frame }),
+    [focus, hidden, pair, pin, visible, metals, frame],
   );
   const change = useCallback(
-    (part: Partial<Sight>) => {
-      const { hidden, pair } = part;
-      if (part.focus !== undefined) setFocus(part.focus);
-      if (part.pinned !== undefined) setPinned(part.pinned);
-      if (part.zoom !== undefined) setZoom(part.zoom);
-      if (hidden !== undefined || pair !== undefined)
-        setDrawn((old) => ({ hidden: hidden ?? old.hidden, pair: pair === undefined ? old.pair : pair }));
-    },
-    [setFocus, setPinned, setZoom],
+    ({ pinned, zoom, ...part }: Partial<Sight>) =>
+      changeView({
+        ...part,
+        ...(pinned !== undefined && { pin: pinned }),
+        ...(zoom !== undefined && { visible: zoom }),
+      }),
+    [changeView],
   );
   return { sight, change };
 }

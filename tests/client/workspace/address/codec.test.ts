@@ -27,12 +27,11 @@ const view: fc.Arbitrary<PlanView> = fc.record<PlanView>({
   visible: fc.option(fc.record({ pH: rising(4, -2, 16), Eh: rising(4, -2, 3) })),
   focus: fc.option(fc.constantFrom(...elements)),
   hidden: fc.subarray(elements),
-  pair: fc.constantFrom([], [...elements]),
+  pair: fc.constantFrom(null, [elements[0]!, elements[1]!]),
   layers,
   plain: fc.boolean(),
   window: fc.integer({ min: 0, max: 25 }),
   pin: fc.option(point),
-  pin2: fc.option(point),
   reagents: fc.option(
     fc.uniqueArray(
       word.filter((w) => w !== "none"),
@@ -48,6 +47,9 @@ const view: fc.Arbitrary<PlanView> = fc.record<PlanView>({
   trialsOf: fc.constantFrom("plan" as const, "project" as const),
   colouredBy: fc.constantFrom("recoveryPct" as const, "gangueDissolvedPct" as const, "selectivityPct" as const),
   without: fc.uniqueArray(word, { maxLength: 3 }),
+  brush: fc.option(fc.record({ pH: rising(4, -2, 16), Eh: rising(4, -2, 3) })),
+  comments: fc.boolean(),
+  asText: fc.boolean(),
   film: fc.option(
     fc.oneof(
       fc.record({
@@ -102,6 +104,10 @@ describe("a view in an address", () => {
     ["hide=Cu,Au,Xx", "hide=Cu,Au,Xx (the plan has no Au, Xx)"],
     ["pin=three,0.4", "pin=three,0.4 (is not a number)"],
     ["pin=3", /^pin=3 \(/],
+    ["pair=Cu", /^pair=Cu \(/],
+    ["pair=Cu,Au", "pair=Cu,Au (the plan has no Au)"],
+    ["brush=2..4", /^brush=2..4 \(/],
+    ["brush=2..4,0.5..0.1", "brush=2..4,0.5..0.1 (does not rise within -10 to 10)"],
     ["on=fireworks", "on=fireworks (names no layer)"],
     ["window=AB", "window=AB (is no window’s letter)"],
     ["scale=furlong,SHE,25", /^scale=furlong,SHE,25 \(/],
@@ -121,7 +127,20 @@ describe("a view in an address", () => {
       fc.property(
         fc.array(
           fc.tuple(
-            fc.constantFrom("pH", "Eh", "pin", "on", "vary", "over", "scale", "reach", "hide", "window"),
+            fc.constantFrom(
+              "pH",
+              "Eh",
+              "pin",
+              "on",
+              "vary",
+              "over",
+              "scale",
+              "reach",
+              "hide",
+              "pair",
+              "brush",
+              "window",
+            ),
             fc.string(),
           ),
         ),
