@@ -123,8 +123,10 @@ export default defineConfig({
           environment: "node",
           include: ["tests/e2e/**/*.test.ts"],
           globalSetup: ["tests/support/builtApp.ts"],
-          // One browser at a time: the machines this runs on have two cores.
-          fileParallelism: false,
+          // Two files at a time, each with an application of its own: one waits for its screen while the other is drawn.
+          maxWorkers: 2,
+          // What the tests compare with, solver and chemistry, is loaded once a worker.
+          isolate: false,
           testTimeout: 120_000,
           hookTimeout: 60_000,
           // A screen follows at once where nothing else runs; beside other work it may take a while.

@@ -1,10 +1,15 @@
+import type { Page } from "playwright-core";
 import { expect, test } from "vitest";
-import { openPageAs } from "../support/browser";
+import { openPageAs, sharedPageAs, turnTo } from "../support/browser";
 import { WorkspaceScreen } from "./pages/workspace";
 
+const path = "/plans/demo-neutral-leach";
+const shared = sharedPageAs("metallurgist", {
+  path: `${path}?settings=3~temperatureC:85&focus=Zn&pH=2..7&Eh=0..1&hide=Xx`,
+});
+
 test("a link's settings are a proposal until they are kept, and its view is what is seen; what cannot be read is named", async () => {
-  const query = "settings=3~temperatureC:85&focus=Zn&pH=2..7&Eh=0..1&hide=Xx";
-  const { page } = await openPageAs("metallurgist", { path: `/plans/demo-neutral-leach?${query}` });
+  const { page } = shared();
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
   await page.getByText("hide=Xx (the plan has no Xx)").waitFor();
@@ -19,11 +24,12 @@ test("a link's settings are a proposal until they are kept, and its view is what
 });
 
 test("two revisions stand side by side with what was lost; a setting varied shows where a window opens, and a small map sets the plan", async () => {
-  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach/compare?a=1&b=2" });
+  const { page } = shared();
+  await turnTo(page, `${path}/compare?a=1&b=2`);
   await expect
     .poll(() => page.getByTestId("verdict").innerText())
     .toMatch(/less open ground than A: ground is only lost/);
-  await page.goto("/plans/demo-neutral-leach?view=1&vary=amount-Fe&over=1e-9..0.1");
+  await turnTo(page, `${path}?view=1&vary=amount-Fe&over=1e-9..0.1`);
   const plan = new WorkspaceScreen(page);
   const film = page.getByTestId("film");
   await film.getByText("a window opens").waitFor();
@@ -34,4 +40,72 @@ test("two revisions stand side by side with what was lost; a setting varied show
   await plan.drawn();
   await page.goBack();
   await film.waitFor();
+});
+
+/** What of a view shows: the figure, the words over it, the list beside it. */
+async function seen(page: Page) {
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const table = page.getByRole("grid", { name: "Trials on the map" });
+  return {
+    figure: await plan.traces(),
+    names: (await page.getByTestId("map-names").locator("[data-name]").allTextContents()).sort(),
+    tools: await page.getByRole("button", { name: /metals$|^as a|^as text$| with / }).allInnerTexts(),
+    pinned: await page.getByTestId("pinned-line").allInnerTexts(),
+    practice: await page.getByRole("list", { name: "Published ranges shown" }).allInnerTexts(),
+    rows: (await table.count()) > 0 ? await table.getAttribute("aria-rowcount") : null,
+    box: await page.getByText(/^\d+ in the box$/).allInnerTexts(),
+    colour: await page.getByRole("radio", { name: "gangue", checked: true }).count(),
+    comments: await page.getByRole("region", { name: "Comments" }).count(),
+    text: await page.getByRole("region", { name: "The map as text" }).allInnerTexts(),
+  };
+}
+
+test("whatever is seen of a plan comes back from its address, for somebody else as well", async () => {
+  const { page } = shared();
+  await turnTo(page, path);
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  const query = () => new URL(page.url()).searchParams;
+  await page.getByRole("tab", { name: /^Trials/ }).click();
+  await page.getByRole("radio", { name: "gangue" }).click();
+  await page.keyboard.down("Shift");
+  await plan.pointAt(4, 0.4);
+  await page.mouse.down();
+  await page.mouse.move(...(await plan.pixelOf(5.2, 0.9)), { steps: 3 });
+  await page.mouse.up();
+  await page.keyboard.up("Shift");
+  await page.getByText(/^\d+ in the box$/).waitFor();
+  await plan.button("metals").click();
+  await page.getByRole("checkbox", { name: "Draw Fe" }).uncheck();
+  await page.keyboard.press("Escape");
+  await page.getByRole("checkbox", { name: "Published practice" }).check();
+  await plan.pointAt(2.5, 0.2);
+  await page.mouse.down();
+  await page.mouse.up();
+  await page.getByTestId("pinned-line").waitFor();
+  await plan.button("Zoom in").click();
+  await expect.poll(() => [...query().keys()].sort()).toEqual(["Eh", "brush", "colour", "hide", "on", "pH", "pin", "side", "view"]); // prettier-ignore
+  const there = await seen(page);
+  expect(there.tools).toContain("3 of 4 metals");
+  expect([there.pinned.length, there.practice.length, there.box.length, there.colour]).toEqual([1, 1, 1, 1]);
+
+  const { page: other } = await openPageAs("manager", { path: `${path}${new URL(page.url()).search}` });
+  await expect.poll(() => seen(other)).toEqual(there);
+  expect(new URL(other.url()).search).toBe(new URL(page.url()).search);
+
+  // Two metals compared, the map as text, the comments in place of the answers.
+  await plan.button("3 of 4 metals").click();
+  await page
+    .getByRole("dialog")
+    .getByRole("button", { name: /compare/i })
+    .click();
+  await page.keyboard.press("Escape");
+  await plan.button("as text").click();
+  await page.keyboard.press("c");
+  await expect.poll(() => ["pair", "text", "comments"].every((key) => query().has(key))).toBe(true);
+  const talking = await seen(page);
+  expect([talking.comments, talking.text.length]).toEqual([1, 1]);
+  await turnTo(other, `${path}${new URL(page.url()).search}`);
+  await expect.poll(() => seen(other)).toEqual(talking);
 });

@@ -3,17 +3,31 @@ import { once } from "node:events";
 import { existsSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
+import { chromium } from "playwright-core";
 import type { TestProject } from "vitest/node";
 import { projectRoot } from "../../server/root";
+import { findChromium } from "../../server/tools/chromium.mjs";
 
 declare module "vitest" {
   interface ProvidedContext {
-    /** where the built application listens */
-    baseUrl: string;
+    /** where the built application listens: one of its own for each worker, so that files beside each other share no data */
+    baseUrls: string[];
+    /** where the one browser of all tests is reached */
+    chromium: string;
   }
 }
 
 const bundle = join(projectRoot, "dist/server.mjs");
+
+/** Without these the browser looks for its maker's servers. */
+const quiet = [
+  "--disable-gpu",
+  "--disable-quic",
+  "--no-first-run",
+  "--disable-background-networking",
+  "--disable-component-update",
+  "--disable-sync",
+];
 
 /** The address in what the server prints, once it listens. */
 function addressOf(server: ChildProcess): Promise<string> {
@@ -30,18 +44,34 @@ function addressOf(server: ChildProcess): Promise<string> {
   });
 }
 
-/** Starts the built application on a free port, with a fresh database and the demo, for all browser tests. */
-export default async function setup({ provide }: TestProject): Promise<() => Promise<void>> {
-  if (!existsSync(bundle)) throw new Error("The application is not built: npm run build.");
-  const folder = mkdtempSync(join(tmpdir(), "gangueway-e2e-"));
-  const settings = { ENV_FILE: "", DATABASE_PATH: join(folder, "e2e.db"), PORT: "0", LOG_LEVEL: "error" };
+/** The built application on a free port, with a fresh database and the demo. */
+function application(folder: string, name: string) {
+  const settings = { ENV_FILE: "", DATABASE_PATH: join(folder, `${name}.db`), PORT: "0", LOG_LEVEL: "error" };
   const env = { PATH: process.env.PATH, ...settings };
   const server = spawn(process.execPath, [bundle], { cwd: projectRoot, env, stdio: ["ignore", "pipe", "pipe"] });
-  provide("baseUrl", await addressOf(server));
-  return async () => {
+  const stop = async () => {
     const ended = once(server, "exit");
     server.kill("SIGTERM");
     await ended;
+  };
+  return { address: addressOf(server), stop };
+}
+
+/** Starts one application a worker, and the browser that all of them share. */
+export default async function setup(project: TestProject): Promise<() => Promise<void>> {
+  if (!existsSync(bundle)) throw new Error("The application is not built: npm run build.");
+  const executablePath = findChromium();
+  if (executablePath === undefined)
+    throw new Error("No Chromium: install one (Debian: apt-get install chromium) or name it in CHROMIUM_PATH.");
+  const folder = mkdtempSync(join(tmpdir(), "gangueway-e2e-"));
+  const workers = Math.max(1, Number(project.config.maxWorkers));
+  const applications = Array.from({ length: workers }, (_, i) => application(folder, `e2e-${i + 1}`));
+  const browser = await chromium.launchServer({ executablePath, args: quiet });
+  project.provide("baseUrls", await Promise.all(applications.map(({ address }) => address)));
+  project.provide("chromium", browser.wsEndpoint());
+  return async () => {
+    await browser.close();
+    await Promise.all(applications.map(({ stop }) => stop()));
     rmSync(folder, { recursive: true, force: true });
   };
 }
