@@ -66,4 +66,6 @@ export interface CampaignRow extends CampaignCreate {
   updatedAt: string;
   deletedAt: string | null;
   trialCount: number;
+  /** trials whose figures still rest on the stages before the last change: they are being worked out anew */
+  figuresDue: number;
 }

@@ -5,7 +5,7 @@ import { say } from "../metallurgy/account/words";
 import { gammaOf } from "../plan/toProblem";
 import type { CampaignStage } from "../schemas/campaign";
 import type { SolutionAssay } from "../schemas/entry";
-import type { PlanInputs } from "../schemas/plan";
+import type { PlanInputs, PlanMetal } from "../schemas/plan";
 import type { ComparedTrial } from "../schemas/trialRows";
 import type { LigandTotal } from "../schemas/trialRecord";
 import type { ChemicalData } from "../species/chemicalData";
@@ -42,16 +42,33 @@ const tenorIn = (
   return found?.kind === "value" ? found.value : null;
 };
 
-/** Tenor the plan stands for: in g/L as entered; else what the trial was laid out on; else the activity over its gamma. In a
+/** Up to here an activity at gamma 1 says the tenor within the factor allowed: at 0.02 mol/L of MSO4 (I = 0.08) Davies gives 0.40. */
+const DILUTE_MOL = 0.02;
+
+/** Tenor that a line of a plan stands for.
+ *  @param line  metal     @param inputs  of the revision     @param data  library
+ *  @returns  g/L: as entered, else the activity over its gamma; null where gamma was left at 1 and the activity is not dilute: in a
+ *            strong sulfate liquor it is a small part of the tenor, so that it says nothing of it
+ *  @source  common practice, no source; docs/decisions/0009-comparable-trials.md */
+export function tenorOfLine(
+  line: PlanMetal,
+  { ionicStrength, temperatureC }: Pick<PlanInputs, "ionicStrength" | "temperatureC">,
+  data: ChemicalData,
+): number | null {
+  if (line.entry === "gPerL") return line.value;
+  const mass = data.molarMass.get(line.element);
+  if (mass === undefined || (line.gammaFrom === "one" && line.value > DILUTE_MOL)) return null;
+  return (line.value / gammaOf(data, line, ionicStrength, temperatureC)) * mass;
+}
+
+/** Tenor the plan stands for: in g/L as entered; else what the trial was laid out on; else what its activity says. In a
  *  cementation the plan's activity is what may be left, so that only the trial's own planned tenor counts. */
 function plannedTenor(trial: ComparedTrial, target: string, inputs: PlanInputs, data: ChemicalData): number | null {
   const line = inputs.metals.find((m) => m.element === target);
   if (trial.kind === "leach" && line?.entry === "gPerL") return line.value;
   const own = measure(trial.planned.tenor, "solutionAssay", liquorContext(trial, target, data.molarMass, "end"));
   if (own.kind === "value") return own.value.lo;
-  const mass = data.molarMass.get(target);
-  if (trial.kind !== "leach" || line === undefined || mass === undefined) return null;
-  return (line.value / gammaOf(data, line, inputs.ionicStrength, inputs.temperatureC)) * mass;
+  return trial.kind === "leach" && line !== undefined ? tenorOfLine(line, inputs, data) : null;
 }
 
 const ligandIn = (list: readonly LigandTotal[], component: string, data: ChemicalData): Interval | null => {

@@ -15,12 +15,24 @@ export const useCampaigns = (projectId: string | undefined, deleted: "false" | "
     enabled: projectId !== undefined,
   });
 
-export const useCampaign = (id: string | undefined) =>
-  useQuery({
+/** A campaign; while figures of its trials are worked out anew it is asked again, and everything that shows them once they are. */
+export function useCampaign(id: string | undefined) {
+  const client = useQueryClient();
+  return useQuery({
     queryKey: keys.campaign(id ?? ""),
-    queryFn: ({ signal }) => api.get<CampaignRow>(at(id ?? ""), { signal }),
+    queryFn: async ({ signal }) => {
+      const before = client.getQueryData<CampaignRow>(keys.campaign(id ?? ""));
+      const campaign = await api.get<CampaignRow>(at(id ?? ""), { signal });
+      if (before && before.figuresDue > 0 && campaign.figuresDue === 0) {
+        void client.invalidateQueries({ queryKey: keys.trials });
+        void client.invalidateQueries({ queryKey: keys.campaignSummary(campaign.id) });
+      }
+      return campaign;
+    },
     enabled: id !== undefined,
+    refetchInterval: ({ state }) => (state.data && state.data.figuresDue > 0 ? 700 : false),
   });
+}
 
 export const campaignSummaryQuery = (id: string) =>
   queryOptions({

@@ -5,6 +5,7 @@ import { SetPointHandle, type SetPointHandleProps } from "./handle";
 import { placedNames } from "./names/placedNames";
 import { Names, Overlay } from "./svg/Overlay";
 import type { PlacedText } from "./texts";
+import type { TrialMark } from "./trialMarks";
 import { useRested } from "./useRested";
 import type { MapView } from "./view";
 import type { MovingView } from "./zoom";
@@ -18,16 +19,18 @@ export interface OverProps {
   content: MapContent;
   sheet: Sheet;
   view: MapView;
+  /** trials painted over the names */
+  marks: readonly TrialMark[];
   live: MovingView;
   handle: Omit<SetPointHandleProps, "sheet" | "visible"> | null;
 }
 
 /** What lies over the figure and moves with it while its axes move under the hand. */
-export function Over({ content, sheet, view, live, handle }: OverProps) {
+export function Over({ content, sheet, view, marks, live, handle }: OverProps) {
   const moving = useSyncExternalStore(live.subscribe, live.get);
-  const asked = useMemo(() => ({ content, sheet, view }), [content, sheet, view]);
+  const asked = useMemo(() => ({ content, sheet, view, marks }), [content, sheet, view, marks]);
   const rested = useRested(asked, NAMES_AFTER);
-  const names = useMemo(() => placedNames(rested.content, rested.sheet, rested.view), [rested]);
+  const names = useMemo(() => placedNames(rested.content, rested.sheet, rested.view, rested.marks), [rested]);
   const { visible } = view;
   const shown = useMemo(() => (moving ? { ...view, visible: moving } : view), [view, moving]);
   const namesIn = useMemo(

@@ -47,18 +47,18 @@ export function ReadOut({
       role="status"
       aria-label="Read-out"
       aria-live={cursor ? "off" : "polite"}
-      className="flex min-h-11 flex-wrap items-baseline gap-x-4 text-sm"
+      className="min-h-11 text-sm"
       data-testid="read-out"
     >
       {at ? (
         <>
-          <span className="font-mono whitespace-nowrap">
+          <span className="mr-4 font-mono whitespace-nowrap">
             pH {fixed(at[0], 2)}
             {freeAcid && at[0] < FREE_ACID_BELOW && <AcidHere curve={freeAcid} pH={at[0]} />}
             <span className="mx-2">{scale.format(at[1])}</span>
             <span className="text-muted">vs {scale.short}</span>
           </span>
-          <span className="text-muted">
+          <span className="mr-4 text-muted">
             {cursor ? "under the cursor" : rest?.words}
             {shut !== null && <>: {shut ? "shut" : "open"}</>}
           </span>
@@ -67,15 +67,16 @@ export function ReadOut({
               <FormulaText text={kept.map(keptWords).join("; ")} />: not here
             </span>
           )}
-          <span className="flex basis-full flex-wrap gap-x-4">
+          {/* Columns, so that what stands under the cursor changes no line, and the map below keeps its place. */}
+          <span className="clear-right grid grid-cols-[repeat(auto-fit,minmax(7.5rem,1fr))] gap-x-3">
             {metals.map((metal) => {
               const found = here?.get(metal.element);
               return (
-                <span key={metal.element} className="inline-flex items-baseline gap-1 whitespace-nowrap">
+                <span key={metal.element} className="truncate" title={found?.species}>
                   {found && shuts(metal) && (
                     <Swatch
                       small
-                      className="relative top-px"
+                      className="relative top-px mr-1 inline-block"
                       hatch={found.fulfilled ? null : (hatches.get(metal.element) ?? null)}
                       fill={found.fulfilled ? "var(--color-tint)" : "none"}
                       colour={cssMetalColour(metal)}
@@ -84,7 +85,7 @@ export function ReadOut({
                       }
                     />
                   )}
-                  <MetalName {...metal} />
+                  <MetalName {...metal} />{" "}
                   {found ? (
                     <SpeciesName id={found.species} withPhase />
                   ) : (

@@ -19,6 +19,8 @@ import { useSize } from "./useSize";
 import { drawnMetals, type MapView } from "./view";
 import { afterRelayout, MovingView } from "./zoom";
 
+const NO_MARKS: ShownTrials["marks"] = [];
+
 const ProposalsLayer = lazy(async () => ({ default: (await import("./ProposalsLayer")).ProposalsLayer }));
 
 export interface WindowMapProps {
@@ -157,6 +159,7 @@ export default function WindowMap(props: WindowMapProps) {
             content={content}
             sheet={sheet}
             view={view}
+            marks={trials?.marks ?? NO_MARKS}
             live={live}
             handle={handle ? { ...handle, onPress: openAt } : null}
           />

@@ -96,3 +96,22 @@ test("every field of the inputs is looked at", () => {
     expect(planChanges(inputs, changed), key).not.toEqual([]);
   }
 });
+
+test("a change that rounding would hide is told in full", () => {
+  const [zinc, iron] = inputs.metals as [PlanInputs["metals"][0], PlanInputs["metals"][0]];
+  const after: PlanInputs = {
+    ...inputs,
+    temperatureC: 25.04,
+    metals: [{ ...zinc, value: 0.0801 }, iron],
+    ligands: [{ component: "S", activity: 0.50004 }],
+    heldSetPoint: { pH: 5.101, Eh: 0.7104 },
+  };
+  const before: PlanInputs = { ...inputs, heldSetPoint: { pH: 5.1, Eh: 0.7101 } };
+  const said = planChanges(before, after).map(({ what, from, to }) => [what, from, to].join(" | "));
+  expect(said.map((line) => line.replaceAll("\u2009", " "))).toEqual([
+    "Zn | target, dissolved, carry 0.08 | target, dissolved, carry 0.0801",
+    "S, total | 0.5 mol/L | 0.50004 mol/L",
+    "Temperature | 25 °C | 25.04 °C",
+    "Set point | pH 5.1, 0.7101 V vs SHE, by hand | pH 5.101, 0.7104 V vs SHE, by hand",
+  ]);
+});

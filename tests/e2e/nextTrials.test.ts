@@ -63,11 +63,28 @@ test("a metallurgist asks for next trials, drops one, moves one by keys, plans t
   await expect.poll(async () => (await planned()).length, { timeout: 15_000 }).toBe(before.length);
 });
 
-test("whoever may not plan sees the proposals and no button", async () => {
+test("a technician plans them into a campaign that stands, and lays out no new one", async () => {
   const { page } = await openPageAs("technician", { path });
   await new WorkspaceScreen(page).drawn();
   const block = page.getByRole("region", { name: "Next trials" });
   await block.getByRole("button", { name: "Propose" }).click();
-  await block.getByText("A metallurgist turns them into planned trials.").waitFor();
+  await block.getByRole("button", { name: /^Plan these/ }).click();
+  const dialog = page.getByRole("dialog");
+  await dialog.getByRole("combobox", { name: "Campaign" }).click();
+  await page.getByRole("option").first().waitFor();
+  expect((await page.getByRole("option").allInnerTexts()).join()).not.toContain("a new campaign");
+  await page.keyboard.press("Escape");
+  await dialog.getByRole("button", { name: "Plan them" }).click();
+  await block.getByText(/trials planned in/).waitFor();
+  await block.getByRole("button", { name: "Undo" }).click();
+  await block.getByRole("button", { name: /^Plan these/ }).waitFor();
+});
+
+test("whoever may not plan sees the proposals and no button", async () => {
+  const { page } = await openPageAs("manager", { path });
+  await new WorkspaceScreen(page).drawn();
+  const block = page.getByRole("region", { name: "Next trials" });
+  await block.getByRole("button", { name: "Propose" }).click();
+  await block.getByText("Technicians and metallurgists turn them into planned trials.").waitFor();
   expect(await block.getByRole("button", { name: /^Plan/ }).count()).toBe(0);
 });

@@ -28,6 +28,7 @@ test("a campaign comes back as it was made, every field, to every role", async (
     updatedAt: at,
     deletedAt: null,
     trialCount: 0,
+    figuresDue: 0,
   };
   expect(campaign).toEqual(wanted);
   const technician = await as("technician");

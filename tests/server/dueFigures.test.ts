@@ -5,6 +5,7 @@ import { trialRecords } from "../../server/features/trials/schema";
 import { refreshOutdatedFigures, workOffDue, workOffDueLater } from "../../server/features/trials/refresh";
 import { workingsOf } from "../../server/features/trials/workedOut";
 import { formulaVersion } from "../../shared/metallurgy/formulaVersion";
+import type { CampaignRow } from "../../shared/schemas/campaign";
 import type { FeedRow } from "../../shared/schemas/feed";
 import { bench, typed, unusualFeed } from "../support/records";
 import { testServer } from "../support/testServer";
@@ -79,6 +80,21 @@ test("those of many are worked out after the answer, are counted meanwhile, and 
   expect(moved.map(({ entityId, reason }) => [entityId, reason])).toEqual([
     [first.id, `Feed ${feed.name}: heads changed (umpire)`],
   ]);
+});
+
+test("changed stages of a campaign say how many figures they made due, until none is", async () => {
+  const { metallurgist, first } = await many(130);
+  const campaign = `/api/campaigns/${first.campaignId}`;
+  const now = async () => (await metallurgist.get(campaign).expect(200)).body as CampaignRow;
+  const { version, stages, figuresDue } = await now();
+  expect(figuresDue).toBe(0);
+  const { body } = await metallurgist
+    .patch(campaign)
+    .set("If-Match", `"${version}"`)
+    .send({ stages: stages.map((stage) => ({ ...stage, gangue: null })) })
+    .expect(200);
+  expect((body as CampaignRow).figuresDue).toBe(130);
+  await expect.poll(async () => (await now()).figuresDue, { timeout: 15_000 }).toBe(0);
 });
 
 test("what was due when the server stopped is still due, is left to itself by a change of formulas, and is worked off", async () => {

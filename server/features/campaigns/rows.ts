@@ -6,6 +6,7 @@ import { deletedIs, holds, isOf, ordered } from "../../http/listing";
 import { Refusal } from "../../http/refusal";
 import { plans } from "../plans/schema";
 import { projects } from "../projects/schema";
+import { figuresDue } from "../trials/refresh";
 import { campaigns } from "./schema";
 
 const trialCount = sql<number>`(select count(*) from trials t where t.campaign_id = ${campaigns.id} and t.deleted_at is null)`;
@@ -18,7 +19,11 @@ const selectCampaigns = (db: Db) =>
     .innerJoin(plans, eq(plans.id, campaigns.planId));
 type Selected = NonNullable<ReturnType<ReturnType<typeof selectCampaigns>["get"]>>;
 
-const asRow = ({ campaign, ...joined }: Selected): CampaignRow => ({ ...campaign, ...joined });
+const asRow = (db: Db, { campaign, ...joined }: Selected): CampaignRow => ({
+  ...campaign,
+  ...joined,
+  figuresDue: figuresDue(db, { campaignId: campaign.id }),
+});
 
 type Query = z.output<typeof campaignsQuery>;
 const sorts = {
@@ -42,12 +47,12 @@ export function listCampaigns(db: Db, query: Query): { rows: CampaignRow[]; tota
     .offset(query.offset)
     .all();
   const total = db.select({ n: count() }).from(campaigns).where(filter).get()?.n ?? 0;
-  return { rows: rows.map(asRow), total };
+  return { rows: rows.map((row) => asRow(db, row)), total };
 }
 
 /** @param path  of the field that names it     @throws Refusal NOT_FOUND */
 export function campaignOf(db: Db, id: string, path = "id"): CampaignRow {
   const found = selectCampaigns(db).where(eq(campaigns.id, id)).get();
   if (!found) throw new Refusal("NOT_FOUND", path, `There is no campaign ${id}.`);
-  return asRow(found);
+  return asRow(db, found);
 }

@@ -20,7 +20,7 @@ type Selected = NonNullable<ReturnType<ReturnType<typeof selectFeeds>["get"]>>;
 const asRow = (db: Db, { feed, ...joined }: Selected): FeedRow => ({
   ...feed,
   ...joined,
-  figuresDue: figuresDue(db, feed.id),
+  figuresDue: figuresDue(db, { feedId: feed.id }),
 });
 
 type Query = z.output<typeof feedsQuery>;

@@ -145,14 +145,15 @@ export function workOffDueLater(db: Db, workings: Workings): void {
   setTimeout(on, 0);
 }
 
-/** How many trials of a feed show figures that are being worked out anew. Nothing is counted while nothing is worked on. */
-export function figuresDue(db: Db, feedId: string): number {
+/** How many trials of a feed or a campaign show figures that are being worked out anew. Nothing is counted while nothing is worked
+ *  on. */
+export function figuresDue(db: Db, of: { feedId: string } | { campaignId: string }): number {
   if (working.size === 0) return 0;
   return (
     db
       .select({ n: count() })
       .from(trials)
-      .where(and(eq(trials.feedId, feedId), isDue))
+      .where(and("feedId" in of ? eq(trials.feedId, of.feedId) : eq(trials.campaignId, of.campaignId), isDue))
       .get()?.n ?? 0
   );
 }

@@ -5,7 +5,7 @@ import { Button, ButtonLink } from "../../components/Button";
 import { HistoryDialog } from "../../components/HistoryDialog";
 import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../components/Menu";
 import { ReasonDialog } from "../../components/ReasonDialog";
-import { ErrorNote, Loading } from "../../components/status";
+import { ErrorNote, Loading, Status } from "../../components/status";
 import { Note, Remark, Row, SectionHead } from "../../components/text";
 import {
   useCampaign,
@@ -14,6 +14,7 @@ import {
   useDeleteCampaign,
   useRestoreCampaign,
 } from "../../lib/campaigns";
+import { counted } from "../../lib/format";
 import { useProjectOf } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
@@ -64,6 +65,9 @@ function Campaign({ campaign }: { campaign: CampaignRow }) {
         </Link>
         <h1 className="text-lg">{campaign.code}</h1>
         <span className="min-w-0 truncate">{campaign.title}</span>
+        {campaign.figuresDue > 0 && (
+          <Status>figures of {counted(campaign.figuresDue, "trial")} are being worked out anew …</Status>
+        )}
         <span className="flex-1" />
         <Menu trigger={<Button>Export</Button>}>
           <MenuLabel>As listed, all pages, CSV</MenuLabel>

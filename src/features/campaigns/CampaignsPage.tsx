@@ -44,11 +44,8 @@ export default function CampaignsPage() {
   const rows = useMemo(() => stageRows(campaigns.data ?? [], summaries), [campaigns.data, summaries]);
   const selected = rows.find(({ key }) => key === chosen) ?? shown[0] ?? rows[0];
   const open = ({ id }: CampaignRow) => void navigate(`/campaigns/${id}`);
-  const create = mayWrite && project && (
-    <Button kind="primary" onClick={() => setCreating(true)}>
-      New campaign
-    </Button>
-  );
+  // The list has a primary action of its own, beside it: opening what is chosen.
+  const create = mayWrite && project && <Button onClick={() => setCreating(true)}>New campaign</Button>;
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">

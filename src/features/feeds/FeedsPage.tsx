@@ -35,11 +35,8 @@ export default function FeedsPage() {
   const feeds = useFeeds(project?.id, deleted);
   const selected = feeds.data?.find(({ id }) => id === chosen) ?? feeds.data?.[0];
   const open = (feed: FeedRow) => void navigate(`/feeds/${feed.id}`);
-  const create = mayWrite && project && (
-    <Button kind="primary" onClick={() => setCreating(true)}>
-      New feed
-    </Button>
-  );
+  // The list has a primary action of its own, beside it: opening what is chosen.
+  const create = mayWrite && project && <Button onClick={() => setCreating(true)}>New feed</Button>;
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">

@@ -1,6 +1,8 @@
 import { useParams, useSearchParams } from "react-router-dom";
+import { ButtonLink } from "../../components/Button";
 import { ErrorNote, Loading } from "../../components/status";
 import { useChemistry } from "../../lib/chemistry";
+import { ApiFailure } from "../../lib/failure";
 import { usePlan, useRevisions } from "../../lib/plans";
 import { usePageTitle } from "../../lib/title";
 import { useOpened } from "./address/useOpened";
@@ -27,17 +29,28 @@ export default function WorkspacePage() {
     (number === null ? null : revisions.error) ??
     chemistry.error ??
     (number !== null && revisions.data && !frozen ? new Error(`Revision ${number} does not exist.`) : null);
+  // What is not there will not come by asking again.
+  const gone = !(wrong instanceof ApiFailure) || wrong.status === 404;
   if (wrong) {
     return (
       <div className="p-5">
         <ErrorNote
           doing="The plan could not be opened"
           error={wrong}
-          retry={() => {
-            void plan.refetch();
-            void chemistry.refetch();
-          }}
+          {...(gone
+            ? {}
+            : {
+                retry: () => {
+                  void plan.refetch();
+                  void chemistry.refetch();
+                },
+              })}
         />
+        <div className="pt-3">
+          <ButtonLink to={plan.data ? `/plans/${planId}` : "/plans"}>
+            {plan.data ? "To the plan as it stands" : "To the plans"}
+          </ButtonLink>
+        </div>
       </div>
     );
   }

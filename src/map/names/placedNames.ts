@@ -1,16 +1,29 @@
-import { type Box, placeLabels, type Segment } from "../../../shared/drawing/labels";
+import { type Box, type Pixel, placeLabels, type Segment } from "../../../shared/drawing/labels";
 import { isLit } from "../../../shared/drawing/lit";
 import type { Point } from "../../../shared/solution";
 import { mapPixels, type Sheet } from "../boxes";
 import type { MapContent } from "../content";
 import { textWidth } from "../speciesText";
+import type { TrialMark } from "../trialMarks";
 import type { AnchoredText, PlacedText } from "../texts";
 import { isDrawn, type MapView } from "../view";
 import { gasNames, hydrogenCyanideNames, keptNames, otherBasisNames, practiceNames } from "./anchoredNames";
 import { fieldWishes, pairWishes, windowWishes } from "./fieldNames";
 
-/** Names inside the fields and windows, none over another; what finds no room is left to the read-out. */
-export function placedNames(content: MapContent, sheet: Sheet, view: MapView): PlacedText[] {
+/** px from the middle of a trial's mark that a name should rather keep clear of */
+const MARK = 7;
+
+type Mark = Pick<TrialMark, "pH" | "Eh">;
+const NONE: readonly Mark[] = [];
+
+/** Names inside the fields and windows, none over another; what finds no room is left to the read-out.
+ *  @param marks  of trials painted over the names: a name goes where fewest cover it */
+export function placedNames(
+  content: MapContent,
+  sheet: Sheet,
+  view: MapView,
+  marks: readonly Mark[] = content.trials?.marks ?? NONE,
+): PlacedText[] {
   const { solution, boundaries } = content;
   const { box, toPixel, toPoint } = mapPixels(sheet, view.visible);
   const inSight: Box = { x0: box.x0 + 4, y0: box.y0 + 3, x1: box.x1 - 4, y1: box.y1 - 3 };
@@ -23,6 +36,7 @@ export function placedNames(content: MapContent, sheet: Sheet, view: MapView): P
   }
   const lit = (pH: number, Eh: number) => isLit(solution.windows, pH, Eh);
 
+  const covered = view.layers.trials ? cells(marks, toPixel) : [];
   const anchored: AnchoredText[] = [
     ...otherBasisNames(content, view),
     ...hydrogenCyanideNames(content, view),
@@ -32,14 +46,16 @@ export function placedNames(content: MapContent, sheet: Sheet, view: MapView): P
   ];
   const fixed = anchored.flatMap(({ id, parts, size, colour, places }): PlacedText[] => {
     const [w, h] = [textWidth(parts, size) / 2 + 4, size * 0.8];
-    for (const [pH, Eh] of places) {
+    const free = places.flatMap(([pH, Eh]) => {
       const [x, y] = toPixel(pH, Eh);
       const own: Box = { x0: x - w, x1: x + w, y0: y - h, y1: y + h };
-      if (!within(own, inSight) || taken.some((other) => overlap(own, other))) continue;
-      taken.push(own);
-      return [{ id, lines: [{ parts, size }], pH, Eh, colour, lit: lit(pH, Eh) }];
-    }
-    return [];
+      return within(own, inSight) && !taken.some((other) => overlap(own, other)) ? [{ pH, Eh, own }] : [];
+    });
+    const under = ({ own }: { own: Box }) => covered.some((mark) => overlap(own, mark));
+    const best = free.find((place) => !under(place)) ?? free[0];
+    if (!best) return [];
+    taken.push(best.own);
+    return [{ id, lines: [{ parts, size }], pH: best.pH, Eh: best.Eh, colour, lit: lit(best.pH, best.Eh) }];
   });
 
   const wishes = [
@@ -60,6 +76,10 @@ export function placedNames(content: MapContent, sheet: Sheet, view: MapView): P
       segments(view.frame.pH.map((pH): Point => [pH, intercept + slope * pH])),
     ),
     ...(content.moved && view.layers.otherBasis ? content.moved.limits.flatMap((l) => segments([l.from, l.to])) : []),
+    ...covered.map(({ x0, y0, x1, y1 }): Segment => [
+      [x0, y0],
+      [x1, y1],
+    ]),
   ];
   const placed = placeLabels(wishes, inSight, taken, lines);
   const found = wishes.flatMap((wish): PlacedText[] => {
@@ -69,6 +89,17 @@ export function placedNames(content: MapContent, sheet: Sheet, view: MapView): P
     return [{ id: wish.id, lines: wish.lines, pH, Eh, colour: wish.colour, lit: lit(pH, Eh) }];
   });
   return [...fixed, ...found];
+}
+
+/** Marks as boxes; of those that lie on one another, one. */
+function cells(marks: readonly Mark[], toPixel: (pH: number, Eh: number) => Pixel): Box[] {
+  const found = new Map<string, Box>();
+  for (const { pH, Eh } of marks) {
+    const [x, y] = toPixel(pH, Eh);
+    const cell = `${Math.round(x / MARK)} ${Math.round(y / MARK)}`;
+    if (!found.has(cell)) found.set(cell, { x0: x - MARK, y0: y - MARK, x1: x + MARK, y1: y + MARK });
+  }
+  return [...found.values()];
 }
 
 const overlap = (a: Box, b: Box): boolean => a.x0 < b.x1 && b.x0 < a.x1 && a.y0 < b.y1 && b.y0 < a.y1;

@@ -1,6 +1,8 @@
 import { describe, expect, test } from "vitest";
 import { electrodeSeries } from "../../../shared/electrodes/series";
+import type { Feed } from "../../../shared/schemas/feed";
 import { planInputs, type PlanInputs } from "../../../shared/schemas/plan";
+import type { TrialInput } from "../../../shared/schemas/trial";
 import { plannedPoint } from "../../../shared/trials/plannedPoint";
 import { namingOf } from "../../../shared/windows/limitWords";
 import {
@@ -13,11 +15,12 @@ import {
   sitesOf,
 } from "../../../src/features/trials/nextTrials/nextModel";
 import { orpAgainst, prefilled, trialsToPlan } from "../../../src/features/trials/nextTrials/planThese";
+import { plannedFromPlan } from "../../../src/features/trials/model/fromPlan";
 import { emptyTrial } from "../../../src/features/trials/plan/newTrial";
 import type { NextAsked } from "../../../src/map/proposalStore";
 import { loop } from "../../support/border";
 import { library } from "../../support/solver";
-import { trialOf, typed } from "../../support/trials";
+import { feedOf, trialOf, typed } from "../../support/trials";
 import { windowOf } from "../../support/windowOf";
 
 const unit = { pH: 1, Eh: 1 };
@@ -139,6 +142,18 @@ describe("turned into planned trials", () => {
     expect(conditions.ligands).toEqual([{ component: "CN", value: { text: "1.0e-2", unit: "mol/L" } }]);
     expect(from).toEqual({ temperature: "the plan", tenor: "the plan", ligands: "the plan", solids: "CN-07", duration: "CN-07" }); // prettier-ignore
     expect(prefilled(empty, plan, stage, null).conditions.solids.text).toBe("");
+  });
+
+  test("an activity without its gamma is no tenor: what the charge could carry is written, else nothing", () => {
+    const strong = { ...plan, inputs: { ...inputs, metals: [{ ...inputs.metals[0]!, element: "Zn", value: 0.08 }] } };
+    const zinc = { ...stage, target: "Zn" };
+    const tenor = (charge: TrialInput["charge"], feed: Feed | null) =>
+      plannedFromPlan({ ...empty, ...trialOf({ charge }) }, strong, 0, zinc, feed).tenor;
+    expect(tenor({}, feedOf({ Zn: "57.2 %" })).text).toBe("");
+    expect(prefilled(empty, strong, zinc, null).from).not.toHaveProperty("tenor");
+    const charge = { dryMass: typed("150 g"), liquorVolume: typed("1 L") };
+    expect(tenor(charge, feedOf({ Zn: "57.2 %" }))).toEqual(typed("85.8 g/L"));
+    expect(tenor(charge, null).text).toBe("");
   });
 
   test.each([

@@ -44,6 +44,30 @@ describe("tenor", () => {
     };
     expect(judged({ ...final("3.9 g/L"), planned: { tenor: typed("4 g/L") } }, 25, inputs).comparable).toBe(false);
   });
+  test("an activity at gamma 1 says nothing of the tenor of a strong liquor; with its gamma it does", () => {
+    const zinc = plan("demo-neutral-leach"); // 60 C, Zn 0.08 as activity: the liquor holds some 84 g/L
+    const neutral = { ...stage, target: "Zn" };
+    const of = (record: Partial<TrialInput>, gamma: number | null) =>
+      comparable(
+        trialOf(record),
+        60,
+        neutral,
+        {
+          ...zinc,
+          metals: zinc.metals.map((m) =>
+            m.element === "Zn" && gamma !== null ? { ...m, gammaFrom: "typed" as const, gamma } : m,
+          ),
+        },
+        chemistry(),
+      );
+    const record = { products: { finalAssays: assays({ Zn: "84 g/L" }) } };
+    expect(of(record, null)).toMatchObject({ comparable: true });
+    expect(of(record, null).unknown).toContain("Zn tenor not planned");
+    // 0.08 / 0.063 = 1.27 mol/L, 83 g/L
+    expect(of(record, 0.063).unknown).not.toContain("Zn tenor not planned");
+    expect(of(record, 0.063).comparable).toBe(true);
+    expect(of(record, 1).reasons).toEqual(["Zn 84 g/L, the plan 5.23 g/L: more than a factor 3 apart"]);
+  });
   test("a censored tenor counts by its nearer end", () => {
     expect(judged(final("<0.9 g/L")).comparable).toBe(true);
     expect(judged(final("<0.3 g/L")).comparable).toBe(false);

@@ -62,7 +62,7 @@ const spanWords = ([lo, hi]: readonly [number, number], scale: PotentialScale): 
 /** The proposed conditions with their reasons; each can be moved or set aside; all become planned trials in one action. */
 export default function NextList(props: NextListProps) {
   const { store, inputs, solution, data, chosen, trials, scale } = props;
-  const mayPlan = useMay("review");
+  const mayPlan = useMay("writeBench");
   const told = useTold(store.asked);
   const [moving, setMoving] = useState<number | null>(null);
   const [planning, setPlanning] = useState(false);
@@ -204,7 +204,9 @@ export default function NextList(props: NextListProps) {
           </Button>
         </div>
       )}
-      {points.length > 0 && !mayPlan && <Note className="pt-1">A metallurgist turns them into planned trials.</Note>}
+      {points.length > 0 && !mayPlan && (
+        <Note className="pt-1">Technicians and metallurgists turn them into planned trials.</Note>
+      )}
       <PlanThese
         open={planning}
         onOpenChange={setPlanning}

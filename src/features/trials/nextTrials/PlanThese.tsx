@@ -10,6 +10,7 @@ import { TextField } from "../../../components/TextField";
 import { useCampaigns } from "../../../lib/campaigns";
 import { useFeeds } from "../../../lib/feeds";
 import { usePreferences } from "../../../lib/preferences";
+import { useMay } from "../../../lib/session";
 import { stageFromPlan } from "../../../lib/stageFromPlan";
 import { useAllTrials, useTrial } from "../../../lib/trials";
 import { windowName } from "../../../map/view";
@@ -38,13 +39,21 @@ export default function PlanThese(props: PlanTheseProps) {
   const { open, onOpenChange, plan } = props;
   const campaigns = useCampaigns(plan.projectId);
   const feeds = useFeeds(plan.projectId);
+  // A campaign is a metallurgist's to lay out; into one that stands, whoever records at the bench may plan.
+  const mayLayOut = useMay("review");
   const error = campaigns.error ?? feeds.error;
-  if (!error && campaigns.data && feeds.data && feeds.data.length > 0)
-    return <Form {...props} campaigns={campaigns.data.filter((c) => c.planId === plan.id)} feeds={feeds.data} />;
+  const own = campaigns.data?.filter((c) => c.planId === plan.id) ?? [];
+  const nowhere = campaigns.data !== undefined && own.length === 0 && !mayLayOut;
+  if (!error && campaigns.data && !nowhere && feeds.data && feeds.data.length > 0)
+    return <Form {...props} campaigns={own} mayLayOut={mayLayOut} feeds={feeds.data} />;
   return (
     <Dialog open={open} onOpenChange={onOpenChange} title="Plan these trials">
       {error ? (
         <ErrorNote doing="The campaigns could not be read" error={error} retry={() => window.location.reload()} />
+      ) : nowhere ? (
+        <p>
+          No campaign stands on this plan yet. A metallurgist lays one out; then these can be planned in it from here.
+        </p>
       ) : feeds.data?.length === 0 ? (
         <>
           <p>A trial needs a feed: its account starts from the head assay. This project has none yet.</p>
@@ -60,7 +69,11 @@ export default function PlanThese(props: PlanTheseProps) {
 }
 
 function Form(
-  props: PlanTheseProps & { campaigns: readonly CampaignRow[]; feeds: readonly { id: string; name: string }[] },
+  props: PlanTheseProps & {
+    campaigns: readonly CampaignRow[];
+    mayLayOut: boolean;
+    feeds: readonly { id: string; name: string }[];
+  },
 ) {
   const { open, onOpenChange, onMade, plan, revision, unsaved, inputs, solution, data, proposals, campaigns, feeds } =
     props;
@@ -161,7 +174,7 @@ function Form(
             }}
             options={[
               ...campaigns.map(({ id, code, title }) => ({ value: id, label: `${code}, ${title}`, text: code })),
-              { value: NEW, label: "a new campaign" },
+              ...(props.mayLayOut ? [{ value: NEW, label: "a new campaign" }] : []),
             ]}
             hint={
               campaign && campaign.planRevision !== revision

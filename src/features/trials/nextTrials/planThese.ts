@@ -29,7 +29,7 @@ export function prefilled(
   stage: CampaignStage,
   last: Pick<TrialRow, "code" | "planned"> | null,
 ): Prefilled {
-  const { pH: _, orp: __, ...ofPlan } = plannedFromPlan(values, plan, 0, stage);
+  const { pH: _, orp: __, ...ofPlan } = plannedFromPlan(values, plan, 0, stage, null);
   const conditions: Conditions = { ...ofPlan };
   const from: Prefilled["from"] = {};
   for (const key of ["temperature", "tenor"] as const) if (!isBlank(conditions[key])) from[key] = "the plan";

@@ -19,7 +19,7 @@ type Field = "temperature" | "pH" | "freeAcid" | "tenor" | "duration" | "solids"
 
 /** What the trial is laid out on: by hand, or from the set point of the plan. */
 export function PlannedSection() {
-  const { values, edit, problems, readOnly, stage, solved, campaign, electrodes } = useRecording();
+  const { values, edit, problems, readOnly, stage, feed, solved, campaign, electrodes } = useRecording();
   const { planned } = values;
   const [choice, setChoice] = useState("0");
   const put = (change: Partial<Planned>, about: string) =>
@@ -55,7 +55,10 @@ export function PlannedSection() {
               )}
               <Button
                 onClick={() =>
-                  edit((t) => ({ ...t, planned: plannedFromPlan(t, solved, Number(choice), stage) }), "planned.take")
+                  edit(
+                    (t) => ({ ...t, planned: plannedFromPlan(t, solved, Number(choice), stage, feed) }),
+                    "planned.take",
+                  )
                 }
               >
                 Take the set point of {campaign.planName}

@@ -87,7 +87,7 @@ export function WorkspaceHeader({
           <MenuSeparator />
           <MenuLabel>Export</MenuLabel>
           <MenuItem onSelect={() => onExport("sheet")} note={draft.changed ? "PDF, as saved" : "PDF"}>
-            Window sheet, revision {plan.latest.number}
+            Window sheet, revision {draft.basedOn}
           </MenuItem>
           <MenuItem onSelect={() => onExport("png")} note="PNG">
             Picture of the map

@@ -17,7 +17,7 @@ export function MapAsText({ id, open, asked }: { id: string; open: boolean; aske
       {...(open ? { tabIndex: 0, role: "region", "aria-label": "The map as text" } : {})}
       className={
         open
-          ? "absolute inset-x-4 top-1 bottom-2 z-20 overflow-y-auto border border-ink bg-sheet px-4 py-3 text-sm xl:columns-2 xl:gap-8"
+          ? "absolute inset-x-2 top-1 bottom-2 z-20 overflow-y-auto border border-ink bg-sheet px-4 py-3 text-sm xl:columns-2 xl:gap-8"
           : "sr-only"
       }
     >

@@ -20,7 +20,7 @@ import type { MapModel } from "../model/useMapModel";
 import type { SightInHand } from "../model/useSight";
 import { MapAsText } from "./MapAsText";
 import { differences } from "./mapText";
-import { MapTools } from "./MapTools";
+import { MapTools, ZoomTools } from "./MapTools";
 import { namedLimits } from "./namedLimits";
 
 const loadMap = () => import("../../../map/WindowMap");
@@ -87,40 +87,42 @@ export function MapPanel(props: MapPanelProps) {
   const where = setPoint ? `at the set point of window ${windowName(chosen)}` : "in the middle of the frame";
   return (
     <div className="flex min-h-0 flex-1 flex-col">
-      <div className="flex items-start gap-3 px-4 pt-2">
-        <div className="min-w-0 flex-1">
-          <ReadOut
-            store={cursor}
-            solution={solution}
-            metals={drawn}
-            all={metals}
-            scale={scale}
-            rest={{ at: through, words: where }}
-            freeAcid={asked.freeAcid ?? null}
+      <div className="px-4 pt-2">
+        <div className="float-right ml-3">
+          <MapTools
+            onFilm={props.onFilm}
+            sight={sight}
+            change={change}
+            metals={metals}
+            plain={plain}
+            onPlain={onPlain}
+            asText={asText}
+            onAsText={onAsText}
           />
-          {sight.pinned && (
-            <PinnedLine
-              differs={differences(solution, metals, through, sight.pinned)}
-              at={sight.pinned}
-              scale={scale}
-            />
-          )}
         </div>
-        <MapTools
-          onFilm={props.onFilm}
+        <ReadOut
+          store={cursor}
+          solution={solution}
+          metals={drawn}
+          all={metals}
+          scale={scale}
+          rest={{ at: through, words: where }}
+          freeAcid={asked.freeAcid ?? null}
+        />
+        {sight.pinned && (
+          <PinnedLine differs={differences(solution, metals, through, sight.pinned)} at={sight.pinned} scale={scale} />
+        )}
+      </div>
+      {!asText && (
+        <ZoomTools
           sight={sight}
           change={change}
-          metals={metals}
           frame={view.frame}
           through={through}
-          plain={plain}
-          onPlain={onPlain}
           moving={moving}
           onMoving={setMoving}
-          asText={asText}
-          onAsText={onAsText}
         />
-      </div>
+      )}
       <div className="relative min-h-0 flex-1 px-2 pb-2">
         <MapAsText id={textId} open={asText} asked={inWords} />
         <Suspense fallback={<Loading label="Opening the map" />}>

@@ -1,6 +1,5 @@
 import { type CrosscutPart, crosscut, speciesAt } from "../../../../shared/setpoint/crosscut";
 import type { Point, Solution, State } from "../../../../shared/solution";
-import { formulaPlain } from "../../../../shared/species/typeset";
 import { speciesParts } from "../../../../shared/species/parts";
 import { limitSentences, marginWords, type Naming, windowName } from "../../../../shared/windows/limitWords";
 import { celsius, fixed, withUnit } from "../../../lib/format";
@@ -30,7 +29,7 @@ const phaseWord = { aq: "dissolved", s: "solid", l: "liquid", g: "gas" } as cons
 /** A species read aloud: "Fe(OH)3 solid, ferrihydrite". */
 function said(id: string): string {
   const { formula, phase, form } = speciesParts(id);
-  const words = [formulaPlain(formula), phaseWord[phase as keyof typeof phaseWord]].filter(Boolean).join(" ");
+  const words = [formula, phaseWord[phase as keyof typeof phaseWord]].filter(Boolean).join(" ");
   return form ? `${words}, ${form}` : words;
 }
 

@@ -41,7 +41,8 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
           exportPlan(kind, {
             plan,
             state,
-            revision: frozen?.number ?? plan.latest.number,
+            // with a newer revision saved meanwhile, still the one that is seen
+            revision: frozen?.number ?? draft.basedOn,
             scale,
             inputs,
             problem,
@@ -55,7 +56,7 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
             say(
               kind === "sheet" && !frozen && draft.changed
                 ? {
-                    text: `The sheet is that of revision ${plan.latest.number}, without the unsaved changes.`,
+                    text: `The sheet is that of revision ${draft.basedOn}, without the unsaved changes.`,
                     bad: false,
                   }
                 : null,
