@@ -1,4 +1,5 @@
-import { analyse } from "../analysis";
+import { analyse, type Analysis } from "../analysis";
+import type { Convex } from "../geometry/convex";
 import { askedOf } from "../hazards/excluded";
 import { ok, type Outcome } from "../outcome";
 import { solidsBases, TEMPERATURE_RANGE_C, type Problem } from "../schemas/problem";
@@ -24,10 +25,16 @@ export interface Opening {
   readonly searched: string;
 }
 
+/** What parts a set that cannot hold from ground where it could: another member, or, for a single demand, the edges of the map. */
+export type Across = "members" | "water" | "frame" | "frame and water";
+
 export interface ConflictGap {
   /** metals and gases of the conflict, in its order */
   readonly members: readonly string[];
-  /** of a pair; null for single demands and larger sets */
+  readonly across: Across;
+  /** of the members: the one that stands nearest to the ground the others have in common; null for a single demand */
+  readonly nearest: string | null;
+  /** null where a single demand holds nowhere */
   readonly gap: Gap | null;
 }
 
@@ -60,24 +67,71 @@ export function adviceFor(input: unknown, data: ChemicalData, onProgress?: OnPro
   return ok({ conflicts, gaps: adviceGaps(problem, data, conflicts), openings: openingsOf(problem, data, onProgress) });
 }
 
-/** How far the grounds of conflicting requirements stand apart.
- *  @param problem, data, conflicts  of one solution without a window     @returns  a gap for each pair; null for other sets
+/** As far as a search for a single demand's ground goes beyond the frame. */
+const WIDE = { pH: [-2, 16], Eh: [-3, 3] } as const;
+
+/** How far the grounds of conflicting requirements stand apart: in a set, the least gap of one member to the ground that the others have in
+ *  common; for a single demand, how far beyond the water lines or the frame its ground begins.
+ *  @param problem, data, conflicts  of one solution without a window     @returns  a gap for each set
  *  @source  geometry of exact pieces (gap.ts) */
 export function adviceGaps(problem: Problem, data: ChemicalData, conflicts: Solution["conflicts"]): ConflictGap[] {
   const analysed = analyse(problem, data);
   if (!analysed.ok) return [];
-  const { cells, metals, bounds, hazards } = analysed.value;
-  const groundOf = (demand: Demand) =>
+  const ground = groundIn(analysed.value);
+  return conflicts.map((set): ConflictGap => {
+    const members = set.map(demandName);
+    if (set.length === 1) return { members, nearest: null, ...beyond(set[0]!, problem, data, analysed.value) };
+    const gaps = set.map((demand, i) => ({
+      nearest: members[i]!,
+      gap: gapBetween(ground([demand]), ground(set.filter((other) => other !== demand))),
+    }));
+    const [least] = gaps.sort((a, b) => sizeOf(a.gap, problem) - sizeOf(b.gap, problem));
+    return { members, across: "members", nearest: least!.nearest, gap: least!.gap };
+  });
+}
+
+/** A gap in control bands, by its smaller way: what is nearest is what a loop has least to go to. */
+const sizeOf = ({ pH, Eh }: Gap, { controlBand }: Problem): number =>
+  Math.min((pH ?? Infinity) / controlBand.pH, (Eh ?? Infinity) / controlBand.Eh);
+
+/** Ground on which some demands hold together. @param waterBinds  false: the water lines are left aside */
+const groundIn =
+  ({ cells, metals, bounds, hazards }: Analysis) =>
+  (demands: readonly Demand[], waterBinds = true): Convex[] =>
     windowPieces(
       cells,
-      metals.filter((m) => m.metal.element === demand.metal),
-      bounds,
-      hazards.filter((h) => h.gas === demand.gas),
+      metals.filter((m) => demands.some((d) => d.metal === m.metal.element)),
+      waterBinds ? bounds : [],
+      hazards.filter((h) => demands.some((d) => d.gas !== undefined && d.gas === h.gas)),
     ).map((p) => p.piece);
-  return conflicts.map((set) => ({
-    members: set.map(demandName),
-    gap: set.length === 2 ? gapBetween(groundOf(set[0]!), groundOf(set[1]!)) : null,
-  }));
+
+/** Where a demand that holds nowhere on the map would hold: past the water lines, past the frame, or past both. */
+function beyond(
+  demand: Demand,
+  problem: Problem,
+  data: ChemicalData,
+  here: Analysis,
+): Pick<ConflictGap, "across" | "gap"> {
+  const allowed = groundIn(here)([]);
+  const { pH, Eh } = problem.frame;
+  const wide = analyse(
+    {
+      ...problem,
+      frame: {
+        pH: [Math.min(pH[0], WIDE.pH[0]), Math.max(pH[1], WIDE.pH[1])],
+        Eh: [Math.min(Eh[0], WIDE.Eh[0]), Math.max(Eh[1], WIDE.Eh[1])],
+      },
+    },
+    data,
+  );
+  const places: [Across, Convex[]][] = [
+    ["water", groundIn(here)([demand], false)],
+    ["frame", wide.ok ? groundIn(wide.value)([demand]) : []],
+    ["frame and water", wide.ok ? groundIn(wide.value)([demand], false) : []],
+  ];
+  const found = places.find(([, pieces]) => pieces.length > 0);
+  if (allowed.length === 0 || found === undefined) return { across: "frame and water", gap: null };
+  return { across: found[0], gap: gapBetween(found[1], allowed) };
 }
 
 const opens = (problem: Problem, data: ChemicalData): boolean => {

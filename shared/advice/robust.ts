@@ -1,15 +1,15 @@
-import { analyse } from "../analysis";
+import { analyse, type Analysis } from "../analysis";
 import type { Convex } from "../geometry/convex";
 import { common as commonGround } from "../geometry/overlay";
-import { connect, type Region } from "../geometry/region";
 import { ok, fail, type Outcome } from "../outcome";
 import type { HazardGas } from "../hazards/gases";
 import { TEMPERATURE_RANGE_C, type Problem, type Requirement } from "../schemas/problem";
-import { deepestPoint } from "../setpoint/deepestPoint";
-import type { Outline, Point } from "../solution";
+import { coupleAt } from "../setpoint/couple";
+import { setPointOf } from "../setpoint/setPoint";
+import type { Outline, Point, SetPoint } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
 import type { OnProgress } from "./search";
-import { outlinesOf } from "../windows/shutGround";
+import { borderMove, borderOf, ruleTemperatures, smoothStretches } from "./temperatures";
 
 /** Ranges over which a window is to hold. */
 export interface Ranges {
@@ -19,7 +19,8 @@ export interface Ranges {
 
 export interface RobustWindow extends Outline {
   readonly area: number;
-  readonly setPoint: { readonly pH: number; readonly Eh: number; readonly margin: number };
+  /** by the metric of the plan; a couple counts where it sets Eh at every temperature solved */
+  readonly setPoint: SetPoint;
 }
 
 export interface Robust {
@@ -27,25 +28,31 @@ export interface Robust {
   readonly checked: {
     /** C */
     readonly temperatures: readonly number[];
-    /** no edge moved further than 0.001 pH and 1 mV when the temperatures were doubled */
+    /** C, where the solids that count change: solved on both sides */
+    readonly rules: readonly number[];
+    /** between any two temperatures three more moved no edge by 0.001 pH or 1 mV */
     readonly settled: boolean;
     readonly activities: readonly { metal: string; at: number; why: string }[];
   };
 }
 
 const SETTLED: readonly [number, number] = [0.001, 0.001];
-const MOST_TEMPERATURES = 65;
+/** bisections in a row that must move nothing before a stretch is done */
+const QUIET = 2;
+const ON_FRAME = 1e-9;
+export const MOST_TEMPERATURES = 129;
 
 /** The window that holds over stated ranges of temperature and of each metal's activity.
  *  Activities by monotony: a dissolved species' potential rises by RT/nu ln a, solids do not move, so raising a shrinks
  *  where the metal is dissolved and widens where it is solid, metal or compound; the worse end alone is solved.
- *  Temperature is refined by halving until no edge moves over 0.001 pH and 1 mV, or 65 temperatures.
+ *  Temperatures: both ends and both sides of every rule of the tables, then each stretch between them is halved until neither its middle nor
+ *  the middles of its halves move an edge by 0.001 pH or 1 mV, or there are 129.
  *  An element whose gas is kept out is worst at its higher end where it is free: more of it gives more gas; where it is to be solid
  *  its window lies in fields whose pressure does not depend on the activity.
  *  @param problem  validated by the solver     @param ranges  C; activities by element, low and high     @param data  library
  *  @param onProgress  temperatures solved, and the most there can be
  *  @returns  outlines with set points (margin in control bands), and what was checked
- *  @source  docs/method.md, step 7 */
+ *  @source  docs/method.md, section 7 */
 export function robustWindow(
   problem: Problem,
   ranges: Ranges,
@@ -56,6 +63,8 @@ export function robustWindow(
   if (bad) return bad;
   const activities: { metal: string; at: number; why: string }[] = [];
   const gives = new Set((problem.excludedHazards ?? []).map((h) => hydrideOf[h.gas] ?? ""));
+  /** the least of each metal: what a couple must live on */
+  const least = new Map(Object.entries(ranges.activities ?? {}).map(([metal, [lo]]) => [metal, lo]));
   const worst: Problem = {
     ...problem,
     metals: problem.metals.map((m) => {
@@ -69,42 +78,69 @@ export function robustWindow(
     }),
   };
   const [low, high] = ranges.temperatureC ?? [problem.temperatureC, problem.temperatureC];
-  const piecesAt = new Map<number, readonly Convex[]>();
-  const solveAt = (temperatureC: number): Outcome<readonly Convex[]> => {
-    const known = piecesAt.get(temperatureC);
-    if (known) return ok(known);
+  const solved = new Map<number, Analysis>();
+  let ground: readonly Convex[] | null = null;
+  /** Takes one more temperature in; the failure where it cannot be solved. */
+  const take = (temperatureC: number): Outcome<null> => {
+    if (solved.has(temperatureC)) return ok(null);
     const analysed = analyse({ ...worst, temperatureC }, data);
     if (!analysed.ok) return analysed;
     const pieces = analysed.value.pieces.map((p) => p.piece);
-    piecesAt.set(temperatureC, pieces);
-    onProgress?.(piecesAt.size, low === high ? 1 : MOST_TEMPERATURES);
-    return ok(pieces);
+    ground = ground === null ? pieces : commonGround(ground, pieces);
+    solved.set(temperatureC, analysed.value);
+    onProgress?.(solved.size, low === high ? 1 : MOST_TEMPERATURES);
+    return ok(null);
   };
-  let count = low === high ? 1 : 3;
-  let before: readonly Outline[] | null = null;
-  for (;;) {
-    const temperatures = Array.from({ length: count }, (_, i) =>
-      count === 1 ? low : low + ((high - low) * i) / (count - 1),
-    );
-    let common: readonly Convex[] | null = null;
-    for (const t of temperatures) {
-      const pieces = solveAt(t);
-      if (!pieces.ok) return pieces;
-      common = common === null ? pieces.value : commonGround(common, pieces.value);
-    }
-    const shapes = common ?? [];
-    const regions = connect(shapes);
-    const outlines = outlinesOf(shapes, regions);
-    const settled = count === 1 || (before !== null && stayed(before, outlines));
-    if (settled || count >= MOST_TEMPERATURES) {
-      return ok({
-        windows: regions.map((r, i) => robustWindowOf(r, outlines[i]!, problem.controlBand)),
-        checked: { temperatures, settled, activities },
-      });
-    }
-    before = outlines;
-    count = 2 * count - 1;
+  const rules = ruleTemperatures(worst, data, low, high);
+  const stretches = low === high ? [] : smoothStretches(low, high, rules);
+  for (const t of low === high ? [low] : stretches.flat()) {
+    const taken = take(t);
+    if (!taken.ok) return taken;
   }
+  let border = borderOf(ground ?? []);
+  // breadth first, so that what is left undone at the end is spread over the range
+  let open = stretches.map(([from, to]) => ({ from, to, quiet: 0 }));
+  while (open.length > 0 && border.length > 0 && solved.size + open.length <= MOST_TEMPERATURES) {
+    const next: typeof open = [];
+    for (const { from, to, quiet } of open) {
+      const middle = (from + to) / 2;
+      const taken = take(middle);
+      if (!taken.ok) return taken;
+      const now = borderOf(ground ?? []);
+      const still = borderMove(border, now, SETTLED) < 1 ? quiet + 1 : 0;
+      border = now;
+      if (still < QUIET) next.push({ from, to: middle, quiet: still }, { from: middle, to, quiet: still });
+    }
+    open = next;
+  }
+  const analyses = [...solved.values()];
+  return ok({
+    windows: border.map((outline) => robustWindowOf(outline, problem, (at) => coupleOverAll(analyses, least, at))),
+    checked: {
+      temperatures: [...solved.keys()].sort((a, b) => a - b),
+      rules,
+      settled: open.length === 0 || border.length === 0,
+      activities,
+    },
+  });
+}
+
+/** The couple that sets Eh at a point at every temperature, each metal at the least it may carry; null where at one there is none. */
+function coupleOverAll(
+  analyses: readonly Analysis[],
+  least: ReadonlyMap<string, number>,
+  at: Point,
+): [string, string] | null {
+  let couple: [string, string] | null = null;
+  for (const { prepared, cells, metals, basis } of analyses) {
+    const poorest = metals.map((m) => ({
+      ...m,
+      metal: { ...m.metal, activity: least.get(m.metal.element) ?? m.metal.activity },
+    }));
+    couple = coupleAt(prepared.data, cells, poorest, basis, at);
+    if (couple === null) return null;
+  }
+  return couple;
 }
 
 const hydrideOf: Partial<Record<HazardGas, string>> = { AsH3: "As", SbH3: "Sb" };
@@ -129,28 +165,37 @@ function badRange({ temperatureC, activities = {} }: Ranges): Outcome<never> | n
   return null;
 }
 
-/** Every corner of one set of outlines has a corner of the other within reach, both ways. */
-function stayed(a: readonly Outline[], b: readonly Outline[]): boolean {
-  const corners = (list: readonly Outline[]): Point[] => list.flatMap((o) => [...o.outer, ...o.holes.flat()]);
-  const near = (p: Point, q: Point): boolean =>
-    Math.abs(p[0] - q[0]) < SETTLED[0] && Math.abs(p[1] - q[1]) < SETTLED[1];
-  const [ca, cb] = [corners(a), corners(b)];
-  return (
-    a.length === b.length && ca.every((p) => cb.some((q) => near(p, q))) && cb.every((q) => ca.some((p) => near(p, q)))
-  );
-}
-
-function robustWindowOf(region: Region, outline: Outline, band: Problem["controlBand"]): RobustWindow {
-  const segments = [outline.outer, ...outline.holes].flatMap((loop) =>
+function robustWindowOf(
+  outline: Outline,
+  problem: Problem,
+  coupleFor: (at: Point) => [string, string] | null,
+): RobustWindow {
+  const { controlBand: band, frame } = problem;
+  const onFrame = (p: Point, q: Point): boolean =>
+    ([0, 1] as const).some((axis) =>
+      (axis === 0 ? frame.pH : frame.Eh).some(
+        (side) => Math.abs(p[axis] - side) < ON_FRAME && Math.abs(q[axis] - side) < ON_FRAME,
+      ),
+    );
+  const loops = [outline.outer, ...outline.holes];
+  const segments = loops.flatMap((loop) =>
     loop.map((p, i) => {
       const q = loop[i + 1 === loop.length ? 0 : i + 1]!;
-      return { ax: p[0] / band.pH, ay: p[1] / band.Eh, bx: q[0] / band.pH, by: q[1] / band.Eh };
+      return {
+        ax: p[0] / band.pH,
+        ay: p[1] / band.Eh,
+        bx: q[0] / band.pH,
+        by: q[1] / band.Eh,
+        frame: onFrame(p, q),
+      };
     }),
   );
-  const deepest = deepestPoint(segments)!;
-  return {
-    ...outline,
-    area: region.area,
-    setPoint: { pH: deepest.u * band.pH, Eh: deepest.v * band.Eh, margin: deepest.margin },
-  };
+  const area = loops.reduce((sum, loop) => sum + signedArea(loop), 0);
+  return { ...outline, area, setPoint: setPointOf(segments, band, coupleFor)! };
 }
+
+const signedArea = (loop: readonly Point[]): number =>
+  loop.reduce((sum, p, i) => {
+    const q = loop[i + 1 === loop.length ? 0 : i + 1]!;
+    return sum + (p[0] * q[1] - q[0] * p[1]) / 2;
+  }, 0);

@@ -71,14 +71,20 @@ export function leavesOut(problem: Problem, data: ChemicalData): LeavesOut {
 
 const stagesOf = new WeakMap<ChemicalData, readonly number[]>();
 
-/** How many temperature limits of the rules lie at or below T: between two limits the rules do not change.
- *  @param data  library     @param temperatureC  C     @returns  a count */
-export function temperatureStage(data: ChemicalData, temperatureC: number): number {
+/** Every temperature at which a rule of the tables sets in or ends.
+ *  @param data  library     @returns  C, rising, each once     @source  defaults.csv and solids-basis.csv */
+export function temperatureLimits(data: ChemicalData): readonly number[] {
   let stages = stagesOf.get(data);
   if (!stages) {
     const limits = data.tables.defaults.flatMap((r) => [...r.when.matchAll(/T(?:<|>=)(-?[\d.]+)/g)].map((m) => +m[1]!));
-    stages = [...limits, ...data.tables.solidsBasis.flatMap((r) => r.below_C ?? [])];
+    const all = new Set([...limits, ...data.tables.solidsBasis.flatMap((r) => r.below_C ?? [])]);
+    stages = [...all].sort((a, b) => a - b);
     stagesOf.set(data, stages);
   }
-  return stages.filter((limit) => limit <= temperatureC).length;
+  return stages;
 }
+
+/** How many temperature limits of the rules lie at or below T: between two limits the rules do not change.
+ *  @param data  library     @param temperatureC  C     @returns  a count */
+export const temperatureStage = (data: ChemicalData, temperatureC: number): number =>
+  temperatureLimits(data).filter((limit) => limit <= temperatureC).length;

@@ -1,5 +1,6 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
+import { robustWindow } from "../../shared/advice/robust";
 import { acidBand, freeAcid } from "../../shared/activity/freeAcid";
 import { analyse } from "../../shared/analysis";
 import { FARADAY, GAS_CONSTANT, LN10 } from "../../shared/constants";
@@ -116,6 +117,28 @@ test("section 6: a triangle, a rectangle, a couple", () => {
   const mg = 0.1 * 1000 * library.molarMass.get("Fe")!;
   says(`Iron at 0.1 is ${mg.toFixed(0)} mg/L; the scarcer form has 10 mg/L where the ratio is ${(mg / 10).toFixed(0)}`);
   says(`that is ${((RT(25) / FARADAY) * Math.log(mg / 10)).toFixed(4)} V from E0`);
+});
+
+test("section 7: a limit that is worst just below a rule", () => {
+  const problem = (temperatureC: number): Problem => ({
+    temperatureC,
+    metals: [
+      { element: "Au", requirement: "dissolved", activity: 1e-5 },
+      { element: "Fe", role: "gangue", requirement: "solid", activity: 1e-6 },
+    ],
+    ligands: [{ component: "CN", activity: 0.01 }],
+    solidsBasis: "fresh",
+    frame: { pH: [9, 13], Eh: [-0.8, 0.6] },
+    excludedHazards: [{ gas: "HCN", pHAtLeast: 10.5 }],
+    controlBand: { pH: 0.15, Eh: 0.03 },
+  });
+  const high = (t: number) => solved(problem(t)).windows[0]!.pH[1].toFixed(3);
+  const { outside } = solved(problem(60)).windows[0]!.limits.find((l) => l.inside === "Fe(OH)3(s,ferrihydrite)" && l.outside?.includes("OH"))!; // prettier-ignore
+  expect(outside).toBe("Fe(OH)4^-(aq)");
+  says(`at 45 C ${high(45)}, at 60 C ${high(60)}, just below 70 C ${high(69.999999)}`);
+  expect(high(70)).toBe("13.000");
+  const robust = valueOf(robustWindow(problem(60), { temperatureC: [45, 75] }, library)).windows[0]!;
+  says(`From 45 to 75 C the window holds to ${Math.max(...robust.outer.map((p) => p[0])).toFixed(3)}`);
 });
 
 test("free acid: a band of 2 g/L at pH 0.8 in half-molar sulfate", () => {

@@ -125,7 +125,7 @@ describe("from a line of the plan to what it rests on", () => {
     await page.getByRole("heading", { level: 1, name: /^0008/ }).waitFor();
     await page.getByRole("link", { name: "Back to the method" }).click();
     await page.getByRole("navigation", { name: "Contents" }).getByRole("link", { name: "Free acid" }).click();
-    await expect.poll(() => page.url()).toMatch(/\/method#free-acid$/);
+    await expect.poll(() => page.url()).toMatch(/\/method#11-free-acid$/);
     await page.goto("/method/no-such-thing");
     await page.getByText("There is no such document").waitFor();
 

@@ -1,4 +1,5 @@
 import { readFileSync } from "node:fs";
+import { evaluate } from "mathjs";
 import { describe, expect, test } from "vitest";
 import { FARADAY, GAS_CONSTANT, LN10, T_REFERENCE } from "../../shared/constants";
 import { absoluteEntropy, correspondenceIntegral } from "../../shared/gibbs/correspondence";
@@ -68,6 +69,19 @@ const measured: Readonly<Record<string, () => number>> = {
   "pKw, library": () => Math.max(...pKw.map((r) => Math.abs(pK("H2O(l) = H^+(aq) + OH^-(aq)", Number(r.T_C)) - Number(r.pKw__IAPWSR11)))),
   "pKw, entropy correspondence alone": () => largest(steps(60, 200), (t) => pKByEntropy("OH^-(aq)", "H2O(l)", 1, t) - pKwater(kelvin(t))),
   "pK of HSO4^-, library": () => largest(steps(0, 200), (t) => pK("HSO4^-(aq) = H^+(aq) + SO4^2-(aq)", t) - published.pKBisulfate(kelvin(t))),
+  "pK of HSO4^-, library, Marshall and Jones (1966), the older equation (`checks.csv`)": () => largest(steps(25, 200), (t) => {
+    const T = kelvin(t); // checks.csv, pK2-HSO4-MJ66-*
+    return pK("HSO4^-(aq) = H^+(aq) + SO4^2-(aq)", t) + (56.889 - 19.8858 * Math.log10(T) - 2307.9 / T - 0.006473 * T);
+  }),
+  "pK of NH4^+ at 100 C, library": () => Math.abs(pK("NH4^+(aq) = H^+(aq) + NH3(aq)", 100) - 7.41),
+  "pK1 of CO2, library, Harned and Davis (1943), from memory": () => largest(steps(0, 50), (t) => {
+    const T = kelvin(t);
+    return pK("CO2(aq) + H2O(l) = H^+(aq) + HCO3^-(aq)", t) - (3404.71 / T - 14.8435 + 0.032786 * T);
+  }),
+  "pK2 of CO2, library, Harned and Scholes (1941), from memory": () => largest(steps(0, 50), (t) => {
+    const T = kelvin(t);
+    return pK("HCO3^-(aq) = H^+(aq) + CO3^2-(aq)", t) - (2902.39 / T - 6.498 + 0.02379 * T);
+  }),
   "pK of HSO4^-, entropy correspondence alone": () => largest(steps(25, 100), (t) => pKByEntropy("HSO4^-(aq)", "SO4^2-(aq)", -1, t) - published.pKBisulfate(kelvin(t))),
   "pK of NH4^+, library": () => largest(steps(0, 50), (t) => pK("NH4^+(aq) = H^+(aq) + NH3(aq)", t) - published.pKAmmonium(kelvin(t))),
   "pK1 of CO2, library": () => largest(steps(0, 90), (t) => pK("CO2(aq) + H2O(l) = H^+(aq) + HCO3^-(aq)", t) - published.pKCarbonicAcid(kelvin(t))),
@@ -92,7 +106,7 @@ const digits = (printed: string) => printed.split(".")[1]?.length ?? 0;
 
 describe("measured errors", () => {
   test.each(Object.entries(measured))("%s", (name, measure) => {
-    const row = cells.find(([first]) => first === name);
+    const row = cells.find(([first, against]) => first === name || `${first}, ${against}` === name);
     const printed = row?.at(-1) ?? "missing in docs/method.md";
     expect(`${name}: ${measure().toFixed(digits(printed))}`).toBe(`${name}: ${printed}`);
   });
@@ -110,6 +124,32 @@ describe("worked examples", () => {
     const energy = energiesAt(data, kelvin(Number(t)));
     expect((energy.of(id.replaceAll("`", "")).G / 1000).toFixed(digits(G))).toBe(G);
   });
+});
+
+describe("the working of each example", () => {
+  const bullets = new Map(
+    [...page.matchAll(/^- \*\*([^*]+)\*\*,[^`]*`[\s\S]*?(?=\n- |\n\n)/gm)].map(([text, rule = ""]) => [rule, text]),
+  );
+  const rules = cells.filter(([, id]) => id?.startsWith("`"));
+  test.each(rules)("%s", (rule = "", _id, _t, G = "") => {
+    const lines = [...(bullets.get(rule) ?? "").matchAll(/`([^`]+) = (-?[\d.]+)`/g)];
+    expect(lines.length, `${rule} has a working`).toBeGreaterThan(0);
+    for (const [, expression = "", result = ""] of lines) {
+      const value = Number(evaluate(expression.replaceAll(" x ", " * ").replaceAll(" ln(", " * ln(").replaceAll("ln(", "log(").replaceAll("+ * log", "+ log"))); // prettier-ignore
+      // one and a half in the last digit: the numbers put in are rounded
+      expect(Math.abs(value - Number(result)), `${expression} = ${value}`).toBeLessThanOrEqual(1.6 * 10 ** -digits(result)); // prettier-ignore
+    }
+    expect(lines.at(-1)?.[2]).toBe(G);
+  });
+  test("the integrals of the correspondence stand as the code has them", () => {
+    const { a, b, h } = correspondenceIntegral(data.tables.correspondence, "cation", kelvin(60));
+    expect(page).toContain(`are ${a.toFixed(2)}, ${b.toFixed(4)} and ${h.toFixed(2)}`);
+  });
+});
+
+test("sections are numbered one after the other", () => {
+  const numbers = [...page.matchAll(/^## (\d+)?/gm)].map(([, n]) => Number(n));
+  expect(numbers).toEqual(numbers.map((_, i) => i + 1));
 });
 
 test("the example of iron: E0(Fe^3+/Fe^2+) at 25, 100 and 150 C", () => {

@@ -7,7 +7,7 @@ export const documents: ReadonlyMap<string, () => Promise<string>> = new Map(
 );
 
 /** Where a link inside a document leads in the application; null where the application has no such place.
- *  @param from  the document it stands in     @param href  as written: `data.md#grades`, `#free-acid`, `decisions/0008-x.md` */
+ *  @param from  the document it stands in     @param href  as written: `data.md#grades`, `#11-free-acid`, `decisions/0008-x.md` */
 export function resolved(from: string, href: string): string | null {
   if (/^[a-z]+:/i.test(href)) return null;
   const [path = "", anchor] = href.split("#");

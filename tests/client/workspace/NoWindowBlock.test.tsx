@@ -11,7 +11,7 @@ const iron: Opening = { change: "activity", of: "Fe", from: 1e-9, to: 2e-8, sear
 const heat: Opening = { change: "temperature", from: 60, to: null, searched: "0 to 250 C" };
 const advice: Advice = {
   conflicts: [],
-  gaps: [{ members: ["Zn", "Fe"], gap: { pH: 0.46, Eh: null } }],
+  gaps: [{ members: ["Zn", "Fe"], across: "members", nearest: "Zn", gap: { pH: 0.46, Eh: null } }],
   openings: [heat, iron],
 };
 const props = {
@@ -50,15 +50,37 @@ test("says which requirements clash, by how much, and offers what helps first", 
   expect(section.textContent).toMatch(/0\.46.pH apart at one Eh\. No pH meets both\./);
   expect(section.textContent).toContain("20 times more");
   expect(section.textContent).toContain("none opens a window; looked over 0 to 250 C");
+  expect(section.textContent).toContain("Tenor of iron");
   expect(section.textContent?.indexOf("iron solid")).toBeLessThan(section.textContent?.indexOf("Temperature") ?? 0);
   fireEvent.click(screen.getByRole("button", { name: /Set 2\.00e.8.g\/L/ }));
   expect(onApply).toHaveBeenCalledWith(iron);
 });
 
+test("says how far beyond the water lines or the map a single demand would hold, and which of three stands nearest", () => {
+  const say = (members: string[], gap: Partial<Advice["gaps"][number]>): string => {
+    const conflicts = [members.map((metal) => ({ metal, requirement: "solid" as const }))];
+    const value: Advice = {
+      conflicts,
+      gaps: [{ members, across: "members", nearest: null, gap: { pH: null, Eh: 0.25 }, ...gap }],
+      openings: [],
+    };
+    const { container, unmount } = renderLinked(
+      <NoWindowBlock {...props} solution={{ conflicts }} advice={{ state: "there", value }} />,
+    );
+    const { textContent } = container;
+    unmount();
+    return textContent.replace(/\s+/g, " ");
+  };
+  expect(say(["Zn"], { across: "water" })).toContain("It would be beyond the water lines, 250 mV at one pH away. No Eh meets both."); // prettier-ignore
+  expect(say(["Zn"], { across: "frame", gap: { pH: 0.56, Eh: null } })).toContain("It would be beyond this map, 0.56 pH at one Eh away. No pH meets both."); // prettier-ignore
+  expect(say(["Zn"], { across: "frame and water", gap: null })).toContain("Nor is it anywhere within the widest map.");
+  expect(say(["Zn", "Fe", "Ni"], { nearest: "Fe" })).toContain("it is the 3 together that leave no ground. Nearest is iron: from the ground of the others 250 mV apart at one pH."); // prettier-ignore
+});
+
 test("names a hazard kept out among what clashes, tells where its limit would have to stand, and offers no button for it", () => {
   const hazard: Opening = { change: "hazardPH", of: "HCN", from: 10.5, to: 9.8123, searched: "down to pH 7" };
   const conflicts = [[{ metal: "Zn", requirement: "dissolved" as const }, { gas: "HCN" as const, pHAtLeast: 10.5 }]]; // prettier-ignore
-  const value = { ...advice, gaps: [{ members: ["Zn", "HCN"], gap: { pH: 0.7, Eh: null } }], openings: [hazard] };
+  const value = { ...advice, gaps: [{ members: ["Zn", "HCN"], across: "members" as const, nearest: "Zn", gap: { pH: 0.7, Eh: null } }], openings: [hazard] }; // prettier-ignore
   renderLinked(
     <NoWindowBlock {...props} solution={{ conflicts }} advice={{ state: "there", value }} onApply={vi.fn()} />,
   );

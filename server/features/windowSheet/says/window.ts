@@ -97,18 +97,33 @@ export function conflictSays({ solution, naming, gaps }: SheetWork): Inline[] {
         : prose(keptWords(c)),
     );
     const [only] = set;
-    if (set.length === 1 && only) return ["Nowhere on this map is ", each, "."];
-    const gap = gaps.find((g) => g.members.join() === set.map(demandName).join())?.gap;
-    const apart = [
-      (gap?.pH ?? null) === null ? null : `${fixed(gap?.pH ?? 0, 2)} pH at one Eh`,
-      (gap?.Eh ?? null) === null ? null : `${volts(gap?.Eh ?? 0)} at one pH`,
+    const found = gaps.find((g) => g.members.join() === set.map(demandName).join());
+    const gap = found?.gap ?? { pH: null, Eh: null };
+    const ways = [
+      gap.pH === null ? null : `${fixed(gap.pH, 2)} pH at one Eh`,
+      gap.Eh === null ? null : `${volts(gap.Eh)} at one pH`,
     ].filter((part) => part !== null);
+    if (set.length === 1 && only) {
+      const past = found && found.across !== "members" && ways.length > 0 ? beyondWord[found.across] : null;
+      return [
+        "Nowhere on this map is ",
+        each,
+        past === null ? "." : `: it would be ${past}, ${ways.join(", and ")} away.`,
+      ];
+    }
+    const nearest = set.length > 2 && found?.nearest ? ` (nearest: ${naming.metalName(found.nearest)})` : "";
     return [
       joined(each.slice(0, -1)),
       " and ",
       each.at(-1) ?? "",
       " cannot hold together",
-      apart.length > 0 ? `: their grounds stand ${apart.join(", and ")} apart.` : ".",
+      ways.length > 0 ? `: their grounds stand ${ways.join(", and ")} apart${nearest}.` : ".",
     ];
   });
 }
+
+const beyondWord = {
+  water: "beyond the water lines",
+  frame: "beyond the frame",
+  "frame and water": "beyond the frame and the water lines",
+} as const;

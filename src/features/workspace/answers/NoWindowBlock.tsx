@@ -42,7 +42,7 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
             return (
               <li key={key} className="hairline py-1">
                 <ConflictWords set={set} metalName={metalName} />
-                {gap && <GapWords gap={gap} scale={scale} />}
+                {gap && <GapWords gap={gap} scale={scale} metalName={metalName} />}
               </li>
             );
           })}
@@ -117,23 +117,47 @@ const KeptWords = ({ demand }: { demand: Extract<Demand, { metal?: undefined }> 
   </b>
 );
 
+const where: Readonly<Record<Exclude<ConflictGap["across"], "members">, string>> = {
+  water: "It would be beyond the water lines",
+  frame: "It would be beyond this map",
+  "frame and water": "It would be beyond this map and the water lines",
+};
+
 /** "Their grounds stand 0.62 pH apart at one Eh, and 0.21 V apart at one pH." */
-function GapWords({ gap: { gap, members }, scale }: { gap: ConflictGap; scale: PotentialScale }) {
+function GapWords({
+  gap: { gap, members, across, nearest },
+  scale,
+  metalName,
+}: {
+  gap: ConflictGap;
+  scale: PotentialScale;
+  metalName: (element: string) => string;
+}) {
+  const many = members.length > 2;
+  const together = many && <>Any two of them can; it is the {members.length} together that leave no ground. </>;
   if (gap === null)
-    return members.length > 2 ? (
-      <Note>Any two of them can; it is the {members.length} together that leave no ground.</Note>
-    ) : null;
-  const pH = gap.pH === null ? null : `${withUnit(fixed(gap.pH, 2), "pH")} apart at one Eh`;
+    return members.length === 1 ? <Note>Nor is it anywhere within the widest map.</Note> : <Note>{together}</Note>;
+  const apart = across === "members" ? "apart " : "";
+  const pH = gap.pH === null ? null : `${withUnit(fixed(gap.pH, 2), "pH")} ${apart}at one Eh`;
   const volts = withUnit(fixed(scale.differenceToShown(gap.Eh ?? 0), scale.digits), scale.unit);
-  const Eh = gap.Eh === null ? null : `${volts} apart at one pH`;
+  const Eh = gap.Eh === null ? null : `${volts} ${apart}at one pH`;
   const parts = [pH, Eh].filter((part) => part !== null);
+  const sentence =
+    across === "members"
+      ? parts.length === 0
+        ? "Their grounds share neither a pH nor an Eh."
+        : many && nearest !== null
+          ? `Nearest is ${metalName(nearest)}: from the ground of the others ${parts.join(", and ")}.`
+          : `Their grounds stand ${parts.join(", and ")}.`
+      : parts.length === 0
+        ? `${where[across]}, at another pH and another Eh.`
+        : `${where[across]}, ${parts.join(", and ")} away.`;
   return (
     <Note>
-      {parts.length === 0
-        ? "Their grounds share neither a pH nor an Eh."
-        : `Their grounds stand ${parts.join(", and ")}.`}
-      {pH === null && Eh !== null && " No Eh meets both."}
-      {Eh === null && pH !== null && " No pH meets both."}
+      {together}
+      {sentence}
+      {parts.length > 0 && pH === null && " No Eh meets both."}
+      {parts.length > 0 && Eh === null && " No pH meets both."}
     </Note>
   );
 }
@@ -169,7 +193,7 @@ function Openings({
             <li key={`${opening.change} ${opening.of ?? ""}`} className="hairline py-1">
               <div className="flex items-baseline justify-between gap-3">
                 <span className="min-w-0">
-                  <Subject opening={opening} metalName={metalName} />
+                  <Subject opening={opening} inputs={inputs} metalName={metalName} />
                 </span>
                 {opening.to !== null && onApply && !isHazard(opening) && (
                   <Button className="h-6! px-2!" onClick={() => onApply(opening)}>
@@ -207,10 +231,22 @@ function Openings({
   );
 }
 
-function Subject({ opening, metalName }: { opening: Opening; metalName: (element: string) => string }) {
+function Subject({
+  opening,
+  inputs,
+  metalName,
+}: {
+  opening: Opening;
+  inputs: Pick<PlanInputs, "metals">;
+  metalName: (element: string) => string;
+}) {
   switch (opening.change) {
     case "activity":
-      return <b>{metalName(opening.of ?? "")}</b>;
+      return (
+        <b>
+          {inGrams(opening, inputs) ? "Tenor" : "Activity"} of {metalName(opening.of ?? "")}
+        </b>
+      );
     case "ligand":
       return (
         <b>
@@ -231,8 +267,13 @@ function Subject({ opening, metalName }: { opening: Opening; metalName: (element
   }
 }
 
-const unitOf = ({ change, of }: Opening, { metals }: Pick<PlanInputs, "metals">): string | null =>
-  change === "activity" && metals.find((m) => m.element === of)?.entry === "gPerL" ? "g/L" : null;
+const inGrams = ({ of }: Opening, { metals }: Pick<PlanInputs, "metals">): boolean =>
+  metals.find((m) => m.element === of)?.entry === "gPerL";
+
+function unitOf(opening: Opening, inputs: Pick<PlanInputs, "metals">): string | null {
+  if (opening.change === "ligand") return "mol/L";
+  return opening.change === "activity" && inGrams(opening, inputs) ? "g/L" : null;
+}
 
 function Amount({
   opening,

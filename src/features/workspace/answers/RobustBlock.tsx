@@ -1,8 +1,9 @@
 import type { Robust } from "../../../../shared/advice/robust";
+import { marginWords } from "../../../../shared/windows/limitWords";
 import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
-import { celsius, fixed, significant, withUnit } from "../../../lib/format";
+import { celsius, fixed, significant } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import type { Awaited } from "../model/useAsked";
 import { Stopped, Working } from "./Working";
@@ -65,8 +66,14 @@ function Found({
             pH {fixed(best.setPoint.pH, 2)}, {scale.format(best.setPoint.Eh)}
           </Row>
           <Row label="Margin there">
-            <b>{withUnit(fixed(best.setPoint.margin, 1), "control bands")}</b>
+            <b>
+              {fixed(best.setPoint.margin, 1)} {marginWords(best.setPoint)}
+            </b>
           </Row>
+          {best.setPoint.mixedPotential && (
+            <Note>Not at every temperature of the range does a couple set Eh, so the margin counts pH alone.</Note>
+          )}
+          {best.setPoint.cutByFrame && <Note>Cut by the frame: it may hold further out.</Note>}
           {windows.length > 1 && <Note>{windows.length} pieces hold; this is the deepest.</Note>}
         </>
       ) : (
@@ -81,7 +88,7 @@ function Found({
 
 /** What was looked at, so that nobody takes it for more. */
 export function checkedWords(
-  { temperatures, settled, activities }: Robust["checked"],
+  { temperatures, rules, settled, activities }: Robust["checked"],
   metalName: (element: string) => string,
 ): string {
   const [first, last] = [temperatures[0] ?? 0, temperatures.at(-1) ?? 0];
@@ -90,11 +97,11 @@ export function checkedWords(
       ? `Solved at ${celsius(first, 1)}.`
       : `Solved at ${temperatures.length} temperatures from ${celsius(first, 1)} to ${celsius(last, 1)}; ${
           settled
-            ? "twice as many moved no corner by more than 0.001 pH and 1 mV."
-            : "its corners still moved when that was the most to be tried: take it with care."
-        }`;
+            ? "more between them moved no edge by 0.001 pH or 1 mV."
+            : "its edges still moved when that was the most to be tried: take it with care."
+        }${rules.length === 0 ? "" : ` The solids that count change at ${rules.map((t) => celsius(t)).join(" and ")}: solved on both sides.`}`;
   const each = activities.map(({ metal, at, why }) => `${metalName(metal)} at ${significant(at)} (${why})`);
   return each.length === 0
     ? heat
-    : `${heat} Of each activity range the worse end alone is solved, since the ground shrinks all the way to it: ${each.join("; ")}. The margin counts pH and Eh.`;
+    : `${heat} Of each activity range the worse end alone is solved, since the ground shrinks all the way to it: ${each.join("; ")}.`;
 }
