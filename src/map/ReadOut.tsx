@@ -68,7 +68,7 @@ export function ReadOut({
             </span>
           )}
           {/* Columns, so that what stands under the cursor changes no line, and the map below keeps its place. */}
-          <span className="clear-right grid grid-cols-[repeat(auto-fit,minmax(7.5rem,1fr))] gap-x-3">
+          <span className="clear-both grid grid-cols-[repeat(auto-fit,minmax(7.5rem,1fr))] gap-x-3">
             {metals.map((metal) => {
               const found = here?.get(metal.element);
               return (

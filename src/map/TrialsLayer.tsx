@@ -11,6 +11,8 @@ export interface ShownTrials {
   scale: ColourScale;
   store: TrialStore;
   onOpen: (id: string) => void;
+  /** what the marks mean, for a picture */
+  words: () => string;
 }
 
 /** What is in sight while Plotly still moves its axes; null between gestures. */

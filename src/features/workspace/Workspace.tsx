@@ -1,5 +1,5 @@
-import { lazy, Suspense, useCallback, useMemo, useState } from "react";
-import { useNavigate } from "react-router-dom";
+import { lazy, Suspense, useCallback, useEffect, useMemo, useState } from "react";
+import { useLocation, useNavigate } from "react-router-dom";
 import { freeAcidOf } from "../../../shared/plan/freeAcidOf";
 import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
@@ -25,7 +25,7 @@ import { Dialogs, type DialogName } from "./header/Dialogs";
 import { FrozenBanner, type Said, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./map/MapPanel";
 import { useLink } from "./address/useLink";
-import type { Opened } from "./address/useOpened";
+import { takesSettings, type Opened } from "./address/useOpened";
 import { applyOpening, holdSetPoint } from "./model/adviceEdit";
 import { sameInputs } from "./model/history";
 import { useAdvice, useRobust } from "./model/useAsked";
@@ -68,9 +68,13 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const navigate = useNavigate();
   const mayWrite = useMay("writePlans");
   const draft = useDraft(plan.id, plan.latest, frozen === null);
+  const taking = takesSettings(useLocation().state) ? start.settings : null;
   const [proposal, setProposal] = useState(() =>
-    start.settings && !sameInputs(start.settings, draft.inputs) ? start.settings : null,
+    start.settings && !taking && !sameInputs(start.settings, draft.inputs) ? start.settings : null,
   );
+  useEffect(() => {
+    if (taking) draft.edit((now) => (sameInputs(now, taking) ? now : taking));
+  }, [taking, draft.edit]);
   const [ignored, setIgnored] = useState(start.ignored);
   const inputs = frozen?.inputs ?? proposal ?? draft.inputs;
   const fixed = frozen !== null || proposal !== null;

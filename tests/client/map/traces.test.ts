@@ -195,6 +195,21 @@ describe("the figure", () => {
     expect(new Set(names.map((n) => n.lit))).toEqual(new Set([true, false]));
     for (const { pH, Eh, lit } of names) expect(isLit(solution.windows, pH, Eh)).toBe(lit);
   });
+  test("names keep clear of the marks of trials where there is room, and stay where there is none", () => {
+    const at = (marks: { pH: number; Eh: number }[], id: string) =>
+      placedNames(content, sheet, view, marks).find((n) => n.id === id)!;
+    const before = at([], "Zn Zn^2+(aq)");
+    const after = at([{ pH: before.pH, Eh: before.Eh }], "Zn Zn^2+(aq)");
+    expect([after.pH, after.Eh]).not.toEqual([before.pH, before.Eh]);
+    const { pH, Eh } = view.visible;
+    const everywhere = Array.from({ length: 60 * 60 }, (_, i) => ({
+      pH: pH[0] + ((pH[1] - pH[0]) * (i % 60)) / 59,
+      Eh: Eh[0] + ((Eh[1] - Eh[0]) * Math.floor(i / 60)) / 59,
+    }));
+    expect(placedNames(content, sheet, view, everywhere).map((n) => n.id)).toEqual(
+      placedNames(content, sheet, view, []).map((n) => n.id),
+    );
+  });
   test("a metal that is hidden is not drawn, and counts in the window all the same", () => {
     const bare = { ...view, hidden: new Set(["Fe"]) };
     const uids = mapFigure(content, sheet, bare).data.map((t) => t.uid);

@@ -1,6 +1,11 @@
 import { describe, expect, test } from "vitest";
 import type { MapTrials } from "../../../shared/schemas/trialRows";
-import { marksOf, stageMarkers, stageTallies } from "../../../src/features/trials/planTrials/planTrialsModel";
+import {
+  marksInWords,
+  marksOf,
+  stageMarkers,
+  stageTallies,
+} from "../../../src/features/trials/planTrials/planTrialsModel";
 import type { PlacedTrial } from "../../../src/lib/judgedTrials";
 import { tallySentence } from "../../../src/lib/tallyWords";
 
@@ -46,6 +51,14 @@ describe("trials on a plan's map", () => {
       [90, false],
       [80, true],
     ]);
+  });
+
+  test("a picture says what its marks mean", () => {
+    const markers = stageMarkers(campaigns);
+    const marks = marksOf([trial("inside", 90), trial("apart", 80)], markers, "recoveryPct");
+    expect(marksInWords(marks, { lo: 80, hi: 90 }, markers, "recoveryPct")).toBe(
+      "2 trials by recovery, pale 80 to dark 90 %; circle NL; open: other conditions",
+    );
   });
 
   test("inside and outside are told with n, and an n of its own where a figure is missing", () => {

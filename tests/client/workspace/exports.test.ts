@@ -1,5 +1,5 @@
 import { expect, test } from "vitest";
-import { polygonsTable, windowsTable } from "../../../src/features/workspace/model/exports";
+import { polygonsTable, windowsTable, withOrigin } from "../../../src/features/workspace/model/exports";
 import { toProblem } from "../../../shared/plan/toProblem";
 import { valueOf } from "../../../shared/outcome";
 import { solve } from "../../../shared/solve";
@@ -30,6 +30,13 @@ test("a file of windows holds extents, set point and margin of each, with units 
     controllable: "yes",
     cut_by_frame: "no",
   });
+});
+
+test("every line of a file says whose numbers it holds", () => {
+  const { header, rows } = withOrigin(windowsTable(solution), { plan: "Neutral leach", state: "revision 3" });
+  expect(header.slice(-2)).toEqual(["plan", "state"]);
+  for (const row of rows)
+    expect([row.length, ...row.slice(-2)]).toEqual([header.length, "Neutral leach", "revision 3"]);
 });
 
 test("a file of polygons gives back every corner the solver drew", () => {

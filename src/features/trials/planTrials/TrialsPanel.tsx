@@ -92,19 +92,19 @@ const columnsOf = (
   },
   {
     id: "recovery",
-    header: "rec.",
+    header: "rec",
     unit: "%",
     digits: 0,
-    width: "3.2em",
+    width: "32px",
     filtered: false,
     value: (t) => t.figures.recoveryPct,
   },
   {
     id: "gangue",
-    header: "gang.",
+    header: "gan",
     unit: "%",
     digits: 1,
-    width: "3.8em",
+    width: "38px",
     filtered: false,
     value: (t) => t.figures.gangueDissolvedPct,
   },
@@ -113,7 +113,7 @@ const columnsOf = (
     header: acidic(trials) ? "pH · acid" : "pH",
     ...(acidic(trials) ? { unit: "g/L" } : {}),
     digits: 2,
-    width: acidic(trials) ? "6.2em" : "3.4em",
+    width: acidic(trials) ? "84px" : "42px",
     filtered: false,
     value: (t) => t.figures.pH,
     cell: (t) => (
@@ -126,7 +126,7 @@ const columnsOf = (
   {
     id: "place",
     header: "is",
-    width: "3.2em",
+    width: "40px",
     value: (t) => t.count,
     cell: (t) => (
       <span
@@ -238,7 +238,8 @@ function LinkedTable({
         muted={({ count }) => count === "rejected"}
         Body={VirtualBody}
         rowHeight={26}
-        className="h-[300px]"
+        // The column is narrow; a code cut off names no trial.
+        className="h-[300px] [&_table]:text-xs! [&_td]:px-1 [&_th]:px-1"
         empty="No trial lies in the box."
       />
       <Note className="pt-1">

@@ -1,7 +1,8 @@
 import type { MapTrials } from "../../../../shared/schemas/trialRows";
 import { tally, type Tally } from "../../../../shared/trials/tally";
 import type { PlacedTrial } from "../../../lib/judgedTrials";
-import { markSymbols, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
+import { fixed } from "../../../lib/format";
+import { type ColourScale, markSymbols, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
 
 /** What the points are coloured by. */
 export const colourings = ["recoveryPct", "gangueDissolvedPct", "selectivityPct"] as const;
@@ -40,6 +41,21 @@ export const marksOf = (
       },
     ];
   });
+
+/** What the marks mean, for a picture that travels without its legend. */
+export function marksInWords(
+  marks: readonly TrialMark[],
+  { lo, hi }: ColourScale,
+  markers: ReadonlyMap<string, MarkSymbol>,
+  colouring: Colouring,
+): string {
+  const drawn = new Set(marks.map(({ symbol }) => symbol));
+  const stages = [...markers].filter(([, symbol]) => drawn.has(symbol)).map(([code, symbol]) => `${symbol} ${code}`);
+  const open = marks.some((m) => m.open) ? "; open: other conditions" : "";
+  const cooled = marks.some((m) => m.cooled) ? "; dotted: pH of a cooled sample" : "";
+  const unit = colouring === "selectivityPct" ? " points" : " %";
+  return `${marks.length} trials by ${colouringWords[colouring]}, pale ${fixed(lo, 0)} to dark ${fixed(hi, 0)}${unit}; ${stages.join(", ")}${open}${cooled}`;
+}
 
 export interface StageTally {
   code: string;

@@ -9,7 +9,7 @@ import { useMapTrials } from "../../../lib/trials";
 import { colourScale, type ColourScale, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
 import { type Brushed, TrialStore } from "../../../map/trialStore";
 import type { ShownTrials } from "../../../map/TrialsLayer";
-import { marksOf, stageMarkers, type Colouring } from "./planTrialsModel";
+import { marksInWords, marksOf, stageMarkers, type Colouring } from "./planTrialsModel";
 
 export interface PlanTrials {
   /** undefined while they are read, or while the layer is off */
@@ -78,8 +78,11 @@ export function usePlanTrials(
   const scale = useMemo(() => colourScale(marks.map(({ value }) => value)), [marks]);
   const open = useCallback((id: string) => void navigate(`/trials/${id}`), [navigate]);
   const shown = useMemo(
-    () => (marks.length === 0 ? null : { marks, scale, store, onOpen: open }),
-    [marks, scale, store, open],
+    () =>
+      marks.length === 0
+        ? null
+        : { marks, scale, store, onOpen: open, words: () => marksInWords(marks, scale, markers, colouring) },
+    [marks, scale, store, open, markers, colouring],
   );
   const setScope = useCallback((next: TrialLooks["scope"]) => onLook({ scope: next }), [onLook]);
   const setColouring = useCallback((next: Colouring) => onLook({ colouring: next }), [onLook]);

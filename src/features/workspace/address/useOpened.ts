@@ -13,6 +13,11 @@ export interface Opened {
   settings: PlanInputs | null;
 }
 
+/** State of a navigation whose settings were asked for already: they go into the draft at once. */
+export const TAKE_SETTINGS = { takeSettings: true };
+export const takesSettings = (state: unknown): boolean =>
+  typeof state === "object" && state !== null && "takeSettings" in state;
+
 const bare: Opened = { view: bareView, ignored: [], settings: null };
 
 /** Reads the address a plan is opened by, once for each plan and revision; null while that takes a moment.

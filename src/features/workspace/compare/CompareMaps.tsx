@@ -55,8 +55,8 @@ export function CompareMaps({ a, b, difference, scale, zoom, onZoom, shown, onSh
     const at: Point = window ? [window.setPoint.pH, window.setPoint.Eh] : middle(frame);
     return (
       <>
-        <div className="flex items-start gap-3 px-4 pt-2">
-          <h2 className="shrink-0 font-mono text-sm font-bold">
+        <div className="px-4 pt-2">
+          <h2 className="float-left mr-3 font-mono text-sm font-bold">
             {letter}
             <span className="ml-2 font-sans font-normal text-muted">{side.side.name}</span>
           </h2>

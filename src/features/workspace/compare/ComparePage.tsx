@@ -14,6 +14,7 @@ import { usePotentialScale } from "../../../lib/potential";
 import { useThemeColours } from "../../../lib/theme";
 import { usePageTitle } from "../../../lib/title";
 import { queryText } from "../address/codec";
+import { TAKE_SETTINGS } from "../address/useOpened";
 import { encodeSettings } from "../address/settings";
 import { ChangeB } from "./ChangeB";
 import { CompareMaps, type ShownMap } from "./CompareMaps";
@@ -119,8 +120,11 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
     const timer = setTimeout(() => changeLater.current({ b: encodeSettings(plan.latest, tried) }), 350);
     return () => clearTimeout(timer);
   }, [tried, plan.latest]);
+  // Asked for here, they need not be proposed there once more; Undo brings back what stood before.
   const take = (side: Side) =>
-    void navigate(`/plans/${plan.id}${queryText([["settings", encodeSettings(plan.latest, side.inputs)]])}`);
+    void navigate(`/plans/${plan.id}${queryText([["settings", encodeSettings(plan.latest, side.inputs)]])}`, {
+      state: TAKE_SETTINGS,
+    });
   const pair = { a: { side: a, solved: one }, b: { side: sideB, solved: two } };
   return (
     <>

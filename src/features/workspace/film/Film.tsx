@@ -96,7 +96,8 @@ export function Film({ wish, onWish, inputs, data, metals, setPoint, edit }: Fil
           max={9}
           width={2}
           onCommit={(n) => onWish({ ...wish, frames: Math.round(n) })}
-        />
+        />{" "}
+        <span>maps</span>
         <span className="flex-1" />
         <Button kind="quiet" className="h-auto!" onClick={() => onWish(null)}>
           back to the map

@@ -8,9 +8,10 @@ import { celsius, fixed, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
 import type { PotentialScale } from "../../../lib/potential";
 import { mapContent } from "../../../map/content";
+import { drawnMetals } from "../../../map/view";
 import { captionedPicture, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
-import { fileStem, limitsTable, polygonsTable, type Table, windowsTable } from "./exports";
+import { fileStem, limitsTable, polygonsTable, type Table, windowsTable, withOrigin } from "./exports";
 import { saveFile, saveJson } from "./saveFile";
 import type { MapModel } from "./useMapModel";
 
@@ -26,10 +27,15 @@ export interface Exported {
   solution: Solution;
   model: MapModel;
   dataVersion: string;
+  /** what the marks of trials mean; null while none is shown */
+  trialWords: string | null;
 }
 
 /** What a picture rests on: data, temperature, activities, basis; and whether it is invented. */
-export function captionLines({ plan, state, inputs, solution, model, dataVersion }: Exported): string[] {
+export function captionLines(exported: Exported): string[] {
+  const { plan, state, inputs, solution, model, dataVersion, trialWords } = exported;
+  const drawn = new Set(drawnMetals(model.view).map(({ element }) => element));
+  const unseen = inputs.metals.filter(({ element }) => !drawn.has(element)).map(({ element }) => element);
   const metals = solution.metals.map(({ metal, activity }) => {
     const line = inputs.metals.find((m) => m.element === metal);
     const asks = line
@@ -47,15 +53,23 @@ export function captionLines({ plan, state, inputs, solution, model, dataVersion
   return [
     `${state.charAt(0).toUpperCase()}${state.slice(1)}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
     `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (totals ${totals.join(", ")} mol/L)` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
-    `activities: ${metals.join("; ")}`,
+    `activities: ${metals.join("; ")}${unseen.length > 0 ? `; not drawn: ${unseen.join(", ")}` : ""}`,
+    ...(trialWords === null || !model.view.layers.trials ? [] : [trialWords]),
     ...(acid === null ? [] : [acid]),
     `Eh vs ${model.view.scale.short}. What can happen, not how fast. Screening only.`,
   ];
 }
 
 // The mark in front makes spreadsheets read UTF-8.
-const saveTable = (name: string, { header, rows }: Table): void =>
+function saveTable(name: string, table: Table, { plan, state, dataVersion, solution }: Exported): void {
+  const T: Record<string, number> = table.header.includes("temperature_C")
+    ? {}
+    : { temperature_C: solution.temperatureC };
+  const invented = plan.invented ? ", invented data" : "";
+  const origin = { plan: plan.name, state: `${state}${invented}`, ...T, chemistry_data: dataVersion.slice(0, 12) };
+  const { header, rows } = withOrigin(table, origin);
   saveFile(name, new Blob(["\ufeff", toCsv(header, rows)], { type: "text/csv;charset=utf-8" }));
+}
 
 /** Writes one export as a file. */
 export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
@@ -66,11 +80,11 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
     case "solution":
       return saveJson(`${stem}-solution.json`, e.solution);
     case "csv":
-      return saveTable(`${stem}-limits.csv`, limitsTable(e.solution.windows, e.model.asked.freeAcid));
+      return saveTable(`${stem}-limits.csv`, limitsTable(e.solution.windows, e.model.asked.freeAcid), e);
     case "windows":
-      return saveTable(`${stem}-windows.csv`, windowsTable(e.solution));
+      return saveTable(`${stem}-windows.csv`, windowsTable(e.solution), e);
     case "polygons":
-      return saveTable(`${stem}-polygons.csv`, polygonsTable(e.solution));
+      return saveTable(`${stem}-polygons.csv`, polygonsTable(e.solution), e);
     case "sheet": {
       const { reference } = e.scale;
       const query = reference ? `?electrode=${reference.id}&electrodeC=${reference.temperatureC}` : "";

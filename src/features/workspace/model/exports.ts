@@ -18,6 +18,12 @@ export interface Table {
   rows: (string | number | null)[][];
 }
 
+/** A file travels without its plan: every line says whose numbers it holds, so that tables may be put together. */
+export const withOrigin = ({ header, rows }: Table, origin: Readonly<Record<string, string | number>>): Table => ({
+  header: [...header, ...Object.keys(origin)],
+  rows: rows.map((row) => [...row, ...Object.values(origin)]),
+});
+
 const header = [
   "window",
   "kind",

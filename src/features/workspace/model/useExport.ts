@@ -49,6 +49,7 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
             solution,
             model: { ...model, asked: { ...model.asked, trials, proposals: proposals.marks.get() } },
             dataVersion,
+            trialWords: trials?.words() ?? null,
           }),
         )
         .then(
