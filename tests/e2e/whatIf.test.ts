@@ -42,6 +42,18 @@ test("two revisions stand side by side with what was lost; a setting varied show
   await film.waitFor();
 });
 
+test("B is taken into the plan from beside A in one step, which one Undo takes back", async () => {
+  const { page } = shared();
+  await turnTo(page, `${path}/compare?a=3&b=3~temperatureC:40`);
+  await page.getByRole("button", { name: "Take B into the plan" }).click();
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  await plan.header().getByText("Unsaved changes").waitFor();
+  await expect.poll(() => plan.number("Temperature of the liquor").inputValue()).toBe("40");
+  await plan.button("Undo").click();
+  await expect.poll(() => plan.number("Temperature of the liquor").inputValue()).toBe("60");
+});
+
 /** What of a view shows: the figure, the words over it, the list beside it. */
 async function seen(page: Page) {
   const plan = new WorkspaceScreen(page);

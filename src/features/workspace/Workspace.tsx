@@ -72,9 +72,10 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const [proposal, setProposal] = useState(() =>
     start.settings && !taking && !sameInputs(start.settings, draft.inputs) ? start.settings : null,
   );
+  const { edit } = draft;
   useEffect(() => {
-    if (taking) draft.edit((now) => (sameInputs(now, taking) ? now : taking));
-  }, [taking, draft.edit]);
+    if (taking) edit((now) => (sameInputs(now, taking) ? now : taking));
+  }, [taking, edit]);
   const [ignored, setIgnored] = useState(start.ignored);
   const inputs = frozen?.inputs ?? proposal ?? draft.inputs;
   const fixed = frozen !== null || proposal !== null;
@@ -173,7 +174,6 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
     gases: drawnGases,
     freeAcid,
   });
-  const { edit } = draft;
   const mayMove = !fixed;
   const moveSetPoint = useCallback((at: Point) => edit(holdSetPoint(at), "set point"), [edit]);
 
