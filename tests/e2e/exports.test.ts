@@ -4,6 +4,7 @@ import { expect, test } from "vitest";
 import { projectRoot } from "../../server/root";
 import type { Solution } from "../../shared/solution";
 import { openPageAs } from "../support/browser";
+import { savedPath } from "../support/download";
 import { readPdf } from "../support/pdf";
 import { WorkspaceScreen } from "./pages/workspace";
 
@@ -14,7 +15,7 @@ async function fileOf(plan: WorkspaceScreen, command: string): Promise<{ name: s
   const coming = plan.page.waitForEvent("download");
   await plan.command(command);
   const download = await coming;
-  const path = await download.path();
+  const path = await savedPath(download);
   return { name: download.suggestedFilename(), path, bytes: readFileSync(path) };
 }
 
@@ -79,6 +80,7 @@ test("the problem is a file that the command line solves as it is; windows, limi
   expect(windows[0]).toContain("set_point_Eh_V_SHE");
   expect(windows).toHaveLength(1 + solution.windows.length);
   const polygons = await lines("Polygons of the map");
-  expect(polygons[0]).toBe("what,metal,of,polygon,ring,corner,pH,Eh_V_SHE");
+  expect(polygons[0]).toBe("what,metal,of,polygon,ring,corner,pH,Eh_V_SHE,plan,state,temperature_C,chemistry_data");
+  expect(polygons[1]).toContain('"Neutral leach, second tank","revision 3, invented data",60,');
   expect(polygons.filter((l) => l.startsWith("window,")).length).toBe(solution.windows[0]?.polygons[0]?.outer.length);
 });

@@ -15,12 +15,19 @@ import { useAllTrials, useTrial } from "../../lib/trials";
 import { elapsed, minutesSince, overdue } from "./bench/elapsed";
 import { useNow } from "./bench/useNow";
 
-const groups: readonly { status: TrialStatus; title: string; empty: string }[] = [
+const groups: readonly {
+  status: TrialStatus;
+  title: string;
+  empty: string;
+  /** to those who cannot do what `empty` names */
+  toLookers?: string;
+}[] = [
   { status: "running", title: "Running", empty: "Nothing runs. A planned trial starts with a tap." },
   {
     status: "planned",
     title: "Planned",
     empty: "Nothing is laid out. Plan a trial, above, or take over the next trials a plan proposes.",
+    toLookers: "Nothing is laid out. Technicians and metallurgists plan trials.",
   },
   {
     status: "awaiting assay",
@@ -51,7 +58,16 @@ export default function BenchPage() {
       </div>
       <div className="px-5 pt-3 pb-12">
         {project || !projects ? (
-          project && groups.map((group) => <Group key={group.status} {...group} projectId={project.id} kept={kept} />)
+          project &&
+          groups.map(({ toLookers, ...group }) => (
+            <Group
+              key={group.status}
+              {...group}
+              empty={mayRecord ? group.empty : (toLookers ?? group.empty)}
+              projectId={project.id}
+              kept={kept}
+            />
+          ))
         ) : (
           <NoProject />
         )}

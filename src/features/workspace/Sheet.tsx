@@ -1,10 +1,24 @@
-import type { ReactNode } from "react";
+import type { CSSProperties, ReactNode } from "react";
 
 /** The workspace's three parts. Wide: asks, map, answers side by side, each scrolling by itself. Tablet: the map first, asks and
- *  answers in two columns below it. Paper: map, then answers and asks. */
-export function Sheet({ asks, map, answers }: { asks: ReactNode; map: ReactNode; answers: ReactNode }) {
+ *  answers in two columns below it; higher with more metals, whose strips would else eat it up. Paper: map, then answers and asks. */
+export function Sheet({
+  metals,
+  asks,
+  map,
+  answers,
+}: {
+  metals: number;
+  asks: ReactNode;
+  map: ReactNode;
+  answers: ReactNode;
+}) {
+  const height = { "--map": `${560 + 24 * Math.max(0, metals - 4)}px` } as CSSProperties;
   return (
-    <div className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(560px,62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:flex print:flex-col">
+    <div
+      style={height}
+      className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(var(--map),62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:flex print:flex-col"
+    >
       <div className="order-2 border-r border-rule pr-4 pl-5 pt-3 pb-8 lg:order-1 lg:min-h-0 lg:overflow-y-auto print:order-3 print:border-0 print:columns-2 print:[&_section]:break-inside-avoid">
         {asks}
       </div>

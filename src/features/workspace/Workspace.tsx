@@ -248,6 +248,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
         />
       )}
       <Sheet
+        metals={inputs.metals.length}
         asks={
           <AsksPanel
             layers={layers}

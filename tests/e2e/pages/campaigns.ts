@@ -1,6 +1,7 @@
 import { readFile } from "node:fs/promises";
 import { parse } from "csv-parse/sync";
 import type { Locator, Page } from "playwright-core";
+import { savedPath } from "../../support/download";
 
 /** The campaigns of a project, one of them, and two side by side. */
 export class CampaignsScreen {
@@ -22,7 +23,7 @@ export class CampaignsScreen {
   /** What a press of a button hands over as a file, read as a table. */
   async file(press: () => Promise<void>): Promise<{ name: string; rows: Record<string, string>[] }> {
     const [download] = await Promise.all([this.page.waitForEvent("download"), press()]);
-    const text = await readFile(await download.path(), "utf8");
+    const text = await readFile(await savedPath(download), "utf8");
     return { name: download.suggestedFilename(), rows: parse(text, { bom: true, columns: true }) };
   }
 }
