@@ -7,8 +7,8 @@ import type { CampaignStage } from "../schemas/campaign";
 import type { SolutionAssay } from "../schemas/entry";
 import type { PlanInputs, PlanMetal } from "../schemas/plan";
 import type { ComparedTrial } from "../schemas/trialRows";
-import type { LigandTotal } from "../schemas/trialRecord";
 import type { ChemicalData } from "../species/chemicalData";
+import { ligandTotalIn } from "./ligandTotal";
 
 /** How far a trial may stand from the plan before its place on the plan's map means little: common practice, no source. */
 const MOST_KELVIN = 5;
@@ -71,12 +71,6 @@ function plannedTenor(trial: ComparedTrial, target: string, inputs: PlanInputs, 
   return trial.kind === "leach" && line !== undefined ? tenorOfLine(line, inputs, data) : null;
 }
 
-const ligandIn = (list: readonly LigandTotal[], component: string, data: ChemicalData): Interval | null => {
-  const entry = list.find((l) => l.component === component)?.value;
-  const found = entry && measure(entry, "solutionAssay", { molarMass: data.molarMass.get(component) ?? null });
-  return found?.kind === "value" ? found.value : null;
-};
-
 /** What stands against the plan's tenor: in a leach what the liquor could carry, so that a poor recovery does not excuse itself,
  *  else what it does carry; in a cementation what it carried at the start. */
 function tenorOf(trial: ComparedTrial, target: string, data: ChemicalData): Interval | null {
@@ -115,13 +109,12 @@ export function comparable(
     );
 
   for (const { component, activity } of inputs.ligands) {
-    const found = ligandIn(trial.measured.ligands, component, data);
-    const mass = data.molarMass.get(component) ?? Number.NaN;
-    const laidOut = ligandIn(trial.planned.ligands, component, data)?.lo ?? activity * mass;
-    if (found === null || Number.isNaN(laidOut)) unknown.push(`${component} total not measured`);
+    const found = ligandTotalIn(trial.measured.ligands, component, data);
+    const laidOut = ligandTotalIn(trial.planned.ligands, component, data)?.lo ?? activity;
+    if (found === null) unknown.push(`${component} total not measured`);
     else if (factorBetween(found, laidOut) > MOST_FACTOR)
       reasons.push(
-        `${component} ${say(found.lo / mass, 3)} mol/L, the plan ${say(laidOut / mass, 3)} mol/L: more than a factor ${MOST_FACTOR} apart`,
+        `${component} ${say(found.lo, 3)} mol/L, the plan ${say(laidOut, 3)} mol/L: more than a factor ${MOST_FACTOR} apart`,
       );
   }
   return { comparable: reasons.length === 0, reasons, unknown };

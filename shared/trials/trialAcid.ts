@@ -5,6 +5,7 @@ import type { MolarMasses } from "../metallurgy/molarMass";
 import type { Trial } from "../schemas/trial";
 import type { LigandTotal } from "../schemas/trialRecord";
 import type { ChemicalData } from "../species/chemicalData";
+import { ligandTotalIn } from "./ligandTotal";
 
 /** Free acid of a trial whose pH is below 1.5: what the titration found, and what its pH stands for. */
 export interface TrialAcid {
@@ -33,11 +34,9 @@ export interface AcidTrial {
   readonly measured: { readonly ligands: readonly LigandTotal[] };
 }
 
-const sulfateIn = (list: readonly LigandTotal[], masses: MolarMasses): number | null => {
-  const entry = list.find(({ component }) => component === "S")?.value;
-  const mass = masses.get("S");
-  const grams = entry && mass !== undefined ? numberIn(entry, "solutionAssay", { molarMass: mass }) : null;
-  return grams === null || mass === undefined || grams <= 0 ? null : grams / mass;
+const sulfateIn = (list: readonly LigandTotal[], data: ChemicalData): number | null => {
+  const found = ligandTotalIn(list, "S", data);
+  return found !== null && found.lo === found.hi && found.lo > 0 ? found.lo : null;
 };
 
 /** What a pH below 1.5 of a trial is in free acid, beside what was titrated. Neither corrects the other.
@@ -54,8 +53,8 @@ export function trialAcid(
   const { pH, temperatureC } = at;
   if (pH === null || pH >= FREE_ACID_BELOW) return null;
   const candidates = [
-    ["measured", sulfateIn(trial.measured.ligands, data.molarMass)],
-    ["planned", sulfateIn(trial.planned.ligands, data.molarMass)],
+    ["measured", sulfateIn(trial.measured.ligands, data)],
+    ["planned", sulfateIn(trial.planned.ligands, data)],
     ["plan", planSulfate],
   ] as const;
   const [from, molPerL = null] = candidates.find(([, total]) => total !== null) ?? [];

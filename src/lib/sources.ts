@@ -19,6 +19,7 @@ export const sources = {
   freeAcid: ["method", "11-free-acid", "free acid"],
   saturation: ["method", "saturation-pressure", "saturation pressure"],
   slow: ["method", "what-is-slow", "what is slow"],
+  activity: ["method", "activity-not-concentration", "activity, not concentration"],
   grades: ["data", "grades", "grades"],
   solidsBasis: ["data", "the-tables", "the tables"],
 } as const satisfies Record<string, readonly [document: string, anchor: string, words: string]>;

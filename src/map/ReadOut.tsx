@@ -8,11 +8,12 @@ import { SpeciesName } from "../components/Formula";
 import { AcidAmount } from "../components/AcidAmount";
 import { FormulaText } from "../components/FormulaText";
 import { MetalName } from "../components/MetalLine";
-import { fixed } from "../lib/format";
+import { celsius, fixed } from "../lib/format";
 import type { PotentialScale } from "../lib/potential";
 import { type CursorStore, useCursor } from "./cursorStore";
 import { cssMetalColour, hatchesOf, shuts } from "./metalStyle";
 import { Swatch } from "./Swatch";
+import { BEYOND, isBeyond, type Trust } from "./trust";
 import type { MapMetal } from "./view";
 
 /** Names every metal's species at the cursor, in one fixed place; without a cursor, at the point the crosscuts run through. */
@@ -24,6 +25,7 @@ export function ReadOut({
   scale,
   rest,
   freeAcid,
+  trust,
 }: {
   store: CursorStore;
   solution: Solution;
@@ -35,12 +37,15 @@ export function ReadOut({
   rest: { at: Point; words: string } | null;
   /** of a sulfate liquor */
   freeAcid?: FreeAcidCurve | null;
+  /** how each species' energy reaches the temperature; those beyond what is trusted are marked */
+  trust?: Trust | undefined;
 }) {
   const cursor = useCursor(store);
   const hatches = useMemo(() => hatchesOf(all), [all]);
   const at = cursor ?? rest?.at ?? null;
   const here = at ? new Map(speciesAt(solution, at[0], at[1]).map((s) => [s.metal, s])) : null;
   const kept = at ? keptAt(solution, at) : [];
+  const beyond = useMemo(() => [...(trust?.keys() ?? [])].some((id) => isBeyond(trust, id)), [trust]);
   const shut = here && (kept.length > 0 || all.some((m) => here.get(m.element)?.fulfilled === false));
   return (
     <div
@@ -62,6 +67,14 @@ export function ReadOut({
             {cursor ? "under the cursor" : rest?.words}
             {shut !== null && <>: {shut ? "shut" : "open"}</>}
           </span>
+          {beyond && (
+            <span
+              className="text-muted"
+              title="The temperature is beyond what the model of this species is trusted for: Fields drawn lists model and range"
+            >
+              {BEYOND} beyond trusted T
+            </span>
+          )}
           {kept.length > 0 && (
             <span className="text-signal">
               <FormulaText text={kept.map(keptWords).join("; ")} />: not here
@@ -87,7 +100,10 @@ export function ReadOut({
                   )}
                   <MetalName {...metal} />{" "}
                   {found ? (
-                    <SpeciesName id={found.species} withPhase />
+                    <span title={trustWords(found.species, trust)}>
+                      <SpeciesName id={found.species} withPhase />
+                      {isBeyond(trust, found.species) && <sup>{BEYOND}</sup>}
+                    </span>
                   ) : (
                     <span className="text-muted">off the map</span>
                   )}
@@ -103,6 +119,12 @@ export function ReadOut({
       )}
     </div>
   );
+}
+
+/** "Cp polynomial, trusted 0 to 250 °C", or the whole warning. */
+function trustWords(species: string, trust: Trust | undefined): string | undefined {
+  const found = trust?.get(species);
+  return found && (found.warning ?? `${found.model}, trusted ${found.trusted[0]} to ${celsius(found.trusted[1])}`);
 }
 
 /** What pH 1 means in the words of the plant; nothing where the sulfate of the liquor could not balance so much. */

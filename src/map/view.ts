@@ -1,3 +1,4 @@
+import type { Trust } from "./trust";
 import type { Frame, Requirement } from "../../shared/schemas/problem";
 import type { PotentialScale } from "../lib/potential";
 import type { ThemeColours } from "../lib/theme";
@@ -78,6 +79,8 @@ export interface MapView {
   layers: Layers;
   /** index into solution.windows */
   window: number;
+  /** of the species that rule fields; without it none is marked */
+  trust?: Trust;
 }
 
 /** Whether a metal is drawn at all. */

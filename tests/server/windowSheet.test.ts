@@ -68,7 +68,8 @@ test("the sheet of a revision says what was asked, where to run, what shuts the 
   const { as, now } = await testServer();
   const made = await planOf(await as("metallurgist"));
   now("2026-06-01T23:30:00.000Z");
-  const revision = { note: "Peroxide in place of air.", inputs: { ...sheetInputs, temperatureC: 61.5 } };
+  const ligands = sheetInputs.ligands.map((l) => ({ ...l, unit: "g/L" as const }));
+  const revision = { note: "Peroxide in place of air.", inputs: { ...sheetInputs, ligands, temperatureC: 61.5 } };
   await (await as("admin")).post(`/api/plans/${made.id}/revisions`).send(revision).expect(201);
   const path = `/api/plans/${made.id}/revisions/2/window-sheet.pdf`;
   const first = await bytesOf(await as("metallurgist"), path);
@@ -91,8 +92,8 @@ test("the sheet of a revision says what was asked, where to run, what shuts the 
     "Fe iron, gangue, solid; at most 3.0×10−6 activity",
     "Cu copper, watched; at 2.0×10−3 activity",
     "61.5 °C, sulfate",
-    "S sulfur 0.450 (activity)",
-    "K potassium 0.0200 (activity)",
+    "S sulfate 0.450 mol/L (43.2 g/L as SO42−), taken as activity",
+    "K potassium 0.0200 mol/L, taken as activity",
     "fresh, form in hours",
     "ZnO(s)",
     "peroxide",

@@ -5,6 +5,7 @@ import { convexOverlap } from "../geometry/convexOverlap";
 import { metalColour } from "../metalStyle";
 import { plainText, speciesText, textWidth } from "../speciesText";
 import type { TextLine } from "../texts";
+import { BEYOND, isBeyond } from "../trust";
 import { drawnMetals, type MapMetal, type MapView, windowName } from "../view";
 
 export const NAME_SIZE = 11;
@@ -36,7 +37,7 @@ export function fieldWishes(fields: readonly Field[], view: MapView, toPixel: To
     .sort((a, b) => order[a.role] - order[b.role]);
   return metals.flatMap((metal) =>
     [...piecesBySpecies(fields, metal.element)].map(([species, pieces]): NameWish => {
-      const parts = speciesText(species);
+      const parts = marked(species, view);
       return {
         id: `${metal.element} ${species}`,
         pieces: pieces.map((p) => pixels(p, toPixel)),
@@ -49,9 +50,15 @@ export function fieldWishes(fields: readonly Field[], view: MapView, toPixel: To
   );
 }
 
-const named = (metal: MapMetal, species: string): FormulaPart[] => [
-  ...plainText(`${metal.element} `),
+/** A species' name, with a mark where its energy is beyond its trusted temperatures. */
+const marked = (species: string, { trust }: MapView): FormulaPart[] => [
   ...speciesText(species),
+  ...(isBeyond(trust, species) ? [{ text: BEYOND, kind: "sup" } as const] : []),
+];
+
+const named = (metal: MapMetal, species: string, view: MapView): FormulaPart[] => [
+  ...plainText(`${metal.element} `),
+  ...marked(species, view),
 ];
 
 /** Of two metals that are compared: what both are on each piece of ground, one above the other. */
@@ -63,7 +70,7 @@ export function pairWishes(fields: readonly Field[], view: MapView, toPixel: ToP
     others.flatMap(([b, more]): NameWish[] => {
       const shared = pieces.flatMap((p) => more.map((q) => convexOverlap(p, q))).filter((p) => p.length > 0);
       if (shared.length === 0) return [];
-      const lines = [named(first, a), named(second, b)].map((parts) => ({ parts, size: NAME_SIZE }));
+      const lines = [named(first, a, view), named(second, b, view)].map((parts) => ({ parts, size: NAME_SIZE }));
       return [
         {
           id: `${first.element} ${a}, ${second.element} ${b}`,

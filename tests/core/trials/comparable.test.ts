@@ -111,6 +111,11 @@ test("ligands: the total the trial was laid out on counts before the plan's acti
   ]);
   expect(judged({ measured: sulfate("0.35 mol/L"), planned: sulfate("0.3 mol/L") }).comparable).toBe(true);
   expect(judged({}).unknown).toContain("S total not measured");
+  // 9.606 g/L of sulfate is the plan's 0.1 mol/L; as sulfur it would be 0.3
+  expect(judged({ measured: sulfate("9.606 g/L"), planned: sulfate("0.1 mol/L") }).reasons).toEqual([]);
+  expect(judged({ measured: sulfate("33.6 g/L") }).reasons).toEqual([
+    "S 0.35 mol/L, the plan 0.1 mol/L: more than a factor 3 apart",
+  ]);
 });
 
 test("in a cementation the starting tenor counts, and never what may be left", () => {

@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { freeAcid } from "../../../shared/activity/freeAcid";
 import { valueOf } from "../../../shared/outcome";
+import { gramsPerMole } from "../../../shared/plan/totals";
 import { titratedAcid, trialAcid, type AcidTrial } from "../../../shared/trials/trialAcid";
 import { library as data } from "../../support/solver";
 
@@ -24,6 +25,12 @@ describe("free acid beside the pH of a trial", () => {
   test("the trial's own sulfate counts, measured before planned, the plan's last", () => {
     expect(trialAcid(trial([], total("0.3")), at(1.2), null, 0.5, data)!.sulfate?.from).toBe("planned");
     expect(trialAcid(trial([]), at(1.2), null, 0.5, data)!.sulfate).toEqual({ molPerL: 0.5, from: "plan" });
+  });
+  test("grams of a total are grams of sulfate, as in a plan: 48.03 g/L is half a mole a litre, not one and a half", () => {
+    const acid = trialAcid(trial(total("48.03", "g/L")), at(1.2), null, null, data)!;
+    expect(acid.sulfate!.molPerL).toBeCloseTo(0.5, 3);
+    expect(trialAcid(trial(total("48030", "mg/L")), at(1.2), null, null, data)!.sulfate!.molPerL).toBeCloseTo(0.5, 3);
+    expect(acid.sulfate!.molPerL).toBeCloseTo(48.03 / gramsPerMole(data, "S", false), 12);
   });
   test("what is not known stays open: no sulfate, no temperature, no titration", () => {
     expect(trialAcid(trial([]), at(1.2), 20, null, data)).toMatchObject({ titrated: 20, byPH: null, sulfate: null });

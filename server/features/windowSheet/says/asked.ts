@@ -1,7 +1,8 @@
 import { askedOf } from "../../../../shared/hazards/excluded";
 import { keptWords } from "../../../../shared/hazards/words";
-import type { PlanMetal } from "../../../../shared/schemas/plan";
-import { componentWord } from "../../../../shared/words/componentWord";
+import { gramsPerMole, weighedAs } from "../../../../shared/plan/totals";
+import type { PlanMetal, PlanTotal } from "../../../../shared/schemas/plan";
+import { ligandWord } from "../../../../shared/words/componentWord";
 import { celsius, fixed, withUnit } from "../../../../shared/words/numbers";
 import {
   amountWord,
@@ -44,14 +45,24 @@ export function bandSays({ controlBand: { pH, Eh }, freeAcidBand: acid }: SheetW
 
 /** What the plan asks beside its metals: label and value. */
 export function inputsSay({ revision: { inputs }, data }: SheetWork): [string, Inline][] {
-  const total = (c: { component: string; activity: number }): Inline => [
-    formula(c.component),
-    ` ${componentWord(data, c.component)} `,
-    quantity(c.activity, "", 3),
+  const total = ({ component, activity, unit }: PlanTotal): Inline => [
+    formula(component),
+    ` ${ligandWord(data, component, inputs.sulfateReduction)} `,
+    quantity(activity, "mol/L", 3),
+    unit === "g/L"
+      ? [
+          " (",
+          quantity(activity * gramsPerMole(data, component, inputs.sulfateReduction), "g/L", 3),
+          " as ",
+          formula(weighedAs(component, inputs.sulfateReduction)),
+          ")",
+        ]
+      : "",
   ];
   const said: [string, Inline][] = [["Liquor", [celsius(inputs.temperatureC, 1), `, ${lixiviantName[inputs.preset]}`]]];
-  if (inputs.ligands.length > 0) said.push(["Ligand totals", [joined(inputs.ligands.map(total)), " (activity)"]]);
-  if (inputs.others.length > 0) said.push(["Other totals", [joined(inputs.others.map(total)), " (activity)"]]);
+  if (inputs.ligands.length > 0)
+    said.push(["Ligand totals", [joined(inputs.ligands.map(total)), ", taken as activity"]]);
+  if (inputs.others.length > 0) said.push(["Other totals", [joined(inputs.others.map(total)), ", taken as activity"]]);
   if (inputs.ionicStrength !== null) said.push(["Ionic strength", quantity(inputs.ionicStrength, "mol/kg")]);
   said.push(["Solids", solidsBasisWord[inputs.solidsBasis]]);
   if (inputs.sulfateReduction) said.push(["Sulfate reduction", "on"]);

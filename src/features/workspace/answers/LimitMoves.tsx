@@ -4,7 +4,7 @@ import type { SetPoint } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { limitMoves } from "../../../../shared/windows/limitMoves";
 import type { LimitSentence } from "../../../../shared/windows/limitWords";
-import { componentWord } from "../../../components/ComponentName";
+import { ligandWord } from "../../../../shared/words/componentWord";
 import { later } from "../../../components/later";
 import type { PotentialScale } from "../../../lib/potential";
 import { moveWords } from "../model/moveWords";
@@ -18,13 +18,6 @@ interface LimitMovesProps {
   scale: PotentialScale;
 }
 
-/** As the liquor is entered: sulfur is sulfate while sulfate is not reduced. */
-function ligandName(data: ChemicalData, { prepared }: Analysis, component: string): string {
-  if (component === "S(sulfide)") return "sulfide";
-  if (component === "S" && !prepared.sulfateReduction) return "sulfate";
-  return component === "C" ? "carbonate" : componentWord(data, component);
-}
-
 /** What would move a limit, one thing at a time. */
 export const LimitMoves = later(function LimitMoves(props: LimitMovesProps) {
   const { sentence, setPoint, analysis, data, metalName, scale } = props;
@@ -33,7 +26,7 @@ export const LimitMoves = later(function LimitMoves(props: LimitMovesProps) {
       moveWords(
         sentence,
         limitMoves(analysis, sentence.limit, setPoint),
-        { metalName, componentName: (component) => ligandName(data, analysis, component) },
+        { metalName, componentName: (component) => ligandWord(data, component, analysis.prepared.sulfateReduction) },
         scale,
       ),
     [sentence, setPoint, analysis, data, metalName, scale],

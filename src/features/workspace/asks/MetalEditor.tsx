@@ -7,6 +7,7 @@ import { Segmented } from "../../../components/choice";
 import { Term } from "../../../components/Help";
 import { NumberField } from "../../../components/NumberField";
 import { Quantity } from "../../../components/Quantity";
+import { MethodLink } from "../../../components/SourceLink";
 import { Select } from "../../../components/Select";
 import { LogSlider } from "../../../components/Slider";
 import { Note, Remark } from "../../../components/text";
@@ -91,6 +92,7 @@ export default function MetalEditor({
           className="my-1"
         />
       )}
+      {metal.entry === "activity" && <AsTenor metal={metal} />}
       {metal.entry === "gPerL" && <Gamma metal={metal} change={change} />}
       <Refusal path={`metals.${index}`} />
       {!readOnly && (
@@ -125,6 +127,20 @@ const switched = (metal: PlanMetal, entry: PlanMetal["entry"]): Partial<PlanMeta
   const value = entry === "gPerL" ? metal.value * 60 : metal.value / 60;
   return { entry, value: Number(Math.min(1000, Math.max(1e-9, value)).toPrecision(2)) };
 };
+
+/** What total an activity stands for, which is not its own number of moles: gamma decides, and is not given here. */
+function AsTenor({ metal: { element, value } }: { metal: PlanMetal }) {
+  const { data } = useAsking();
+  const molar = data.molarMass.get(element);
+  if (molar === undefined) return null;
+  return (
+    <Note className="py-1">
+      An activity, not a total. At γ = 1 it is <Quantity value={value * molar} unit="g/L" /> of {element}; at γ = 0.1,{" "}
+      <Quantity value={value * molar * 10} unit="g/L" />. In sulfate liquors above 0.1 mol/L take 0.05 to 0.2 of the
+      tenor (<MethodLink to="activity">why</MethodLink>).
+    </Note>
+  );
+}
 
 /** From tenor to activity: which gamma, what it comes to, and what that gives. */
 function Gamma({ metal, change }: { metal: PlanMetal; change: (part: Partial<PlanMetal>) => void }) {

@@ -66,6 +66,7 @@ export function CompareMaps({ a, b, difference, scale, zoom, onZoom, shown, onSh
             metals={model.metals}
             scale={scale}
             rest={{ at, words: window ? "at its set point" : "in the middle of the frame" }}
+            trust={model.view.trust}
           />
         </div>
         <div className="min-h-0 flex-1 px-2 pb-1">

@@ -108,6 +108,7 @@ export function MapPanel(props: MapPanelProps) {
           scale={scale}
           rest={{ at: through, words: where }}
           freeAcid={asked.freeAcid ?? null}
+          trust={view.trust}
         />
         {sight.pinned && (
           <PinnedLine differs={differences(solution, metals, through, sight.pinned)} at={sight.pinned} scale={scale} />

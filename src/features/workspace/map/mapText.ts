@@ -38,6 +38,15 @@ const list = (parts: readonly string[]): string =>
 
 const upper = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
+/** Species of warnings on trust, once each. */
+function beyondText({ warnings, temperatureC }: Solution): string[] {
+  const ids = new Set(warnings.flatMap((w) => (w.code === "TEMPERATURE_TRUST" && w.species ? [w.species] : [])));
+  if (ids.size === 0) return [];
+  return [
+    `Beyond its trusted temperatures at ${celsius(temperatureC, 1)}, on or about a limit: ${list([...ids].map(said))}.`,
+  ];
+}
+
 /** The window map in words: what a reader who does not see it would ask. Windows, set point, limits, what every metal is there, and
  *  both crosscuts. */
 export function mapText({ solution, metals, scale, naming, chosen, through, sight }: Asked): MapText[] {
@@ -53,6 +62,7 @@ export function mapText({ solution, metals, scale, naming, chosen, through, sigh
     windows.length === 0
       ? "No window is open: nowhere are all metals as required."
       : `${windows.length === 1 ? "One window is" : `${windows.length} windows are`} open.`,
+    ...beyondText(solution),
     ...windows.map((w, i) => {
       const reach = `pH ${fixed(w.pH[0], 2)} to ${fixed(w.pH[1], 2)} and ${between(w.Eh)}`;
       const tight = w.controllable ? "" : ", narrower than the control bands";

@@ -10,6 +10,7 @@ import type { PotentialScale } from "../../../lib/potential";
 import type { ThemeColours } from "../../../lib/theme";
 import type { ContentWishes } from "../../../map/content";
 import type { ShownRange } from "../../../map/traces/practice";
+import { trustOf } from "../../../map/trust";
 import type { Layers, MapMetal, MapView } from "../../../map/view";
 import { usePractice } from "./usePractice";
 import type { Sight } from "./useSight";
@@ -78,6 +79,7 @@ export function useMapModel(w: Wishes): MapModel | null {
     () => solution && { metals, solution, other, through, pinned, reaches, cyanide, robust, gases, practice, freeAcid },
     [metals, solution, other, through, pinned, reaches, cyanide, robust, gases, practice, freeAcid],
   );
+  const trust = useMemo(() => (solution ? trustOf(solution, data) : undefined), [solution, data]);
   const view = useMemo(
     (): MapView => ({
       metals,
@@ -92,8 +94,9 @@ export function useMapModel(w: Wishes): MapModel | null {
       pair,
       layers,
       window: chosen,
+      ...(trust ? { trust } : {}),
     }),
-    [metals, frame, zoom, controlBand, scale, colours, plain, focus, hidden, pair, layers, chosen],
+    [metals, frame, zoom, controlBand, scale, colours, plain, focus, hidden, pair, layers, chosen, trust],
   );
   return useMemo(
     () => asked && { asked, view, metals, reaches, practice, through },

@@ -1,5 +1,7 @@
+import { weighedAs } from "../../../../shared/plan/totals";
 import { refusalOf } from "../../../../shared/schemas/entry";
 import type { LigandTotal } from "../../../../shared/schemas/trialRecord";
+import { Formula } from "../../../components/Formula";
 import type { GridColumn } from "../../../components/entryGridModel";
 
 export const nextLigand = (rows: readonly LigandTotal[]): LigandTotal => ({
@@ -7,7 +9,7 @@ export const nextLigand = (rows: readonly LigandTotal[]): LigandTotal => ({
   value: { text: "", unit: rows.at(-1)?.value.unit ?? "mol/L" },
 });
 
-/** Total of a ligand as the plan names it. @param expected  ligands of the plan */
+/** Total of a ligand as the plan names it, and what its grams are grams of. @param expected  ligands of the plan */
 export const ligandColumns = (expected: readonly string[]): GridColumn<LigandTotal>[] => [
   {
     id: "component",
@@ -41,5 +43,14 @@ export const ligandColumns = (expected: readonly string[]): GridColumn<LigandTot
     options: ["mol/L", "g/L", "mg/L"].map((unit) => ({ value: unit, label: unit })),
     get: (l) => l.value.unit,
     set: (l, unit) => ({ ...l, value: { ...l.value, unit } }),
+  },
+  {
+    id: "weighed",
+    kind: "shown",
+    header: "weighed as",
+    label: "weighed as",
+    width: "6em",
+    show: ({ component, value: { unit } }) =>
+      component.trim() === "" || unit === "mol/L" ? null : <Formula formula={weighedAs(component.trim(), false)} />,
   },
 ];
