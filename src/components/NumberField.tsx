@@ -119,6 +119,7 @@ export function NumberField(props: NumberFieldProps) {
         aria-describedby={describedBy || undefined}
         disabled={disabled}
         value={draft ?? shown}
+        data-typed={draft === null ? undefined : ""}
         onChange={(event) => setDraft(event.target.value)}
         onBlur={(event) => commit(event.target.value)}
         onFocus={(event) => event.target.select()}

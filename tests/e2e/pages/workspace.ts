@@ -26,12 +26,19 @@ export interface DrawnTrace {
   y: (number | null)[];
 }
 
+export interface PaintedName {
+  id: string;
+  box: { left: number; top: number; right: number; bottom: number; width: number; height: number };
+  pH: number;
+  Eh: number;
+}
+
 /** Plotly hangs the figure and its axes on the element it draws in. */
 interface PlotlyElement extends HTMLElement {
   data: { uid: string; name: string; fillcolor?: string; fillpattern?: { shape?: string }; x: []; y: [] }[];
   _fullLayout: Record<
     "xaxis" | "yaxis",
-    { _offset: number; d2p: (value: number) => number; p2d: (px: number) => number }
+    { _offset: number; _length: number; d2p: (value: number) => number; p2d: (px: number) => number }
   > & {
     plot_bgcolor: string;
   };
@@ -121,6 +128,60 @@ export class WorkspaceScreen {
         return words.join(" ");
       }),
     );
+  }
+
+  /** Names on the map as they are painted, once they rest: their boxes on the page, and what their middles point at. */
+  async names(): Promise<PaintedName[]> {
+    const read = () =>
+      this.plot().evaluate((element): PaintedName[] => {
+        const { left, top } = element.getBoundingClientRect();
+        const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
+        return [...document.querySelectorAll<SVGTextElement>("[data-testid=map-names] text[data-name]")].map((text) => {
+          // Without the halo, which may lie under another's.
+          const { x, y, width, height } = text.getBBox();
+          const to = text.getScreenCTM()!;
+          const box = {
+            left: x + to.e,
+            top: y + to.f,
+            right: x + width + to.e,
+            bottom: y + height + to.f,
+            width,
+            height,
+          };
+          return {
+            id: text.dataset.name ?? "",
+            box,
+            pH: xaxis.p2d((box.left + box.right) / 2 - left - xaxis._offset),
+            Eh: yaxis.p2d((box.top + box.bottom) / 2 - top - yaxis._offset),
+          };
+        });
+      });
+    let names = await read();
+    for (let still = 0; still < 2;) {
+      await this.page.waitForTimeout(130);
+      const next = await read();
+      still = JSON.stringify(next) === JSON.stringify(names) ? still + 1 : 0;
+      names = next;
+    }
+    return names;
+  }
+
+  /** Where the map lies on the page. */
+  mapBox(): Promise<Pick<DOMRect, "left" | "top" | "right" | "bottom">> {
+    return this.plot().evaluate((element) => {
+      const { left, top } = element.getBoundingClientRect();
+      const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
+      const [x, y] = [left + xaxis._offset, top + yaxis._offset];
+      return { left: x, top: y, right: x + xaxis._length, bottom: y + yaxis._length };
+    });
+  }
+
+  /** Pixels a unit of pH and of Eh takes. */
+  pixelsPer(): Promise<{ pH: number; Eh: number }> {
+    return this.plot().evaluate((element) => {
+      const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
+      return { pH: xaxis.d2p(1) - xaxis.d2p(0), Eh: yaxis.d2p(0) - yaxis.d2p(1) };
+    });
   }
 
   axisWords(): Promise<string[]> {

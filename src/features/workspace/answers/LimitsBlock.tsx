@@ -107,6 +107,8 @@ function Sentence({
       className={classes("hairline py-1", pointed && "bg-tint")}
       onPointerEnter={() => limitStore.pointed.set(key)}
       onPointerLeave={() => limitStore.pointed.set(null)}
+      onFocus={() => limitStore.pointed.set(key)}
+      onBlur={() => limitStore.pointed.set(null)}
     >
       <div className="flex items-baseline justify-between gap-3">
         <span>
