@@ -18,7 +18,7 @@ export interface SetPointQuestion extends Partial<Pick<OverallQuestion, "redox" 
 }
 
 export interface OverallAtSetPoint extends OverallReaction {
-  /** what each part of the start becomes, by component */
+  /** what each part of the start becomes, and a cementing metal's element, by component */
   readonly products: ReadonlyMap<string, string>;
   readonly assumed: Standing["assumed"];
 }
@@ -80,5 +80,7 @@ export function overallReaction(
     temperatureC: problem.temperatureC,
     pH: asked.at.pH,
   });
-  return overall.ok ? ok({ ...overall.value, products, assumed }) : overall;
+  if (!overall.ok) return overall;
+  if (cementing !== undefined && redoxMade !== undefined) products.set(cementing, redoxMade);
+  return ok({ ...overall.value, products, assumed });
 }

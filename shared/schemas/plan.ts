@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { hazardGases } from "../hazards/gases";
 import { circuitSchema } from "./circuit";
 import {
   componentTotal,
@@ -120,10 +121,19 @@ export const planUpdate = z.object({
 });
 export const revisionCreate = z.object({ note: z.string().trim().max(500), inputs: planInputs });
 
-/** The scale beside SHE on a window sheet: an electrode of electrodes.csv, and its temperature, C; the liquor's unless given. */
+/** What a window sheet shows beside the revision itself: a scale beside SHE (an electrode of electrodes.csv at its temperature, C; the
+ *  liquor's unless given), the window it speaks of (the best unless given; one that is not there gives the best), and the gases whose regions
+ *  are drawn, parted by commas (those that reach the window unless given). */
 export const windowSheetQuery = z.object({
   electrode: z.string().min(1).max(40).optional(),
   electrodeC: z.coerce.number().min(0).max(100).optional(),
+  window: z.coerce.number().int().min(0).max(999).optional(),
+  gases: z
+    .string()
+    .max(200)
+    .transform((text) => text.split(",").filter((gas) => gas !== ""))
+    .pipe(z.array(z.enum(hazardGases)))
+    .optional(),
 });
 
 /** As the server answers. */

@@ -5,6 +5,8 @@ import { expect, test } from "vitest";
 import { windowSheet } from "../../server/features/windowSheet/page";
 import { workOf } from "../../server/features/windowSheet/work";
 import { projectRoot } from "../../server/root";
+import { checkedWords } from "../../shared/advice/checkedWords";
+import { robustWindow } from "../../shared/advice/robust";
 import { fromSHE } from "../../shared/electrodes/convert";
 import { electrodeSeries } from "../../shared/electrodes/series";
 import { DEFERENCE } from "../../shared/hazards/exposure";
@@ -14,6 +16,7 @@ import type { ProjectRow } from "../../shared/schemas/api";
 import type { PlanInputs, PlanRow } from "../../shared/schemas/plan";
 import { solve } from "../../shared/solve";
 import type { Point } from "../../shared/solution";
+import { marginWords } from "../../shared/windows/limitWords";
 import { typeset } from "../../shared/species/typeset";
 import { fixed } from "../../shared/words/numbers";
 import { readPdf, type PdfText, type ReadPdf } from "../support/pdf";
@@ -40,7 +43,7 @@ const plain = (formula: string) =>
 
 /** A sheet of inputs, drawn without a server. */
 async function drawn(inputs: PlanInputs, plan = sheetPlan, note = "Peroxide in place of air."): Promise<ReadPdf> {
-  const work = valueOf(workOf(plan, { ...sheetRevision(tables.version, inputs), note }, library, null));
+  const work = valueOf(workOf(plan, { ...sheetRevision(tables.version, inputs), note }, library));
   return readPdf(await windowSheet(work));
 }
 
@@ -127,7 +130,7 @@ test("the file is the same bytes for the same data: asked twice, and in a proces
   server.now("2027-01-01T00:00:00.000Z");
   expect((await bytesOf(client, path)).equals(first)).toBe(true);
 
-  const work = valueOf(workOf(sheetPlan, sheetRevision(tables.version), library, null));
+  const work = valueOf(workOf(sheetPlan, sheetRevision(tables.version), library));
   const here = createHash("sha256")
     .update(await windowSheet(work))
     .digest("hex");
@@ -138,7 +141,7 @@ test("the file is the same bytes for the same data: asked twice, and in a proces
   });
   expect(elsewhere).toBe(here);
   const other = sheetRevision(tables.version, { ...sheetInputs, temperatureC: 57.6 });
-  const changed = await windowSheet(valueOf(workOf(sheetPlan, other, library, null)));
+  const changed = await windowSheet(valueOf(workOf(sheetPlan, other, library)));
   expect(createHash("sha256").update(changed).digest("hex")).not.toBe(here);
 });
 
@@ -161,30 +164,27 @@ test("an electrode stands beside SHE where one is asked for, and an unknown one 
   await client.get(`/api/plans/nothing/revisions/1/window-sheet.pdf`).expect(404);
 });
 
+/** Whether a closed path of the page has the shape of a ring in (pH, Eh), whatever the scales. */
+const outlineDrawn = ({ paths }: ReadPdf, ring: readonly Point[]): boolean => {
+  const [xs, ys] = [ring.map((p) => p[0]), ring.map((p) => -p[1])];
+  const size = (v: readonly number[]) => Math.max(...v) - Math.min(...v);
+  const want = ring.map(([x, y]) => [(x - Math.min(...xs)) / size(xs), (-y - Math.min(...ys)) / size(ys)] as const);
+  return paths.some((path) => {
+    if (path.length !== ring.length) return false;
+    const [px, py] = [path.map((p) => p[0]), path.map((p) => p[1])];
+    return path.every(([x, y], i) => {
+      const [u, v] = [(x - Math.min(...px)) / size(px), (y - Math.min(...py)) / size(py)];
+      return Math.hypot(u - want[i]![0], v - want[i]![1]) < 1e-3;
+    });
+  });
+};
 test("window, shut ground and boundaries are the solver's polygons, as vectors", async () => {
-  const { paths, clips } = await drawn(sheetInputs);
+  const sheet = await drawn(sheetInputs);
   const { windows, shut = [] } = solved(sheetInputs);
-  const shape = (points: readonly Point[]) => {
-    const [xs, ys] = [points.map((p) => p[0]), points.map((p) => p[1])];
-    const [x, y, w, h] = [
-      Math.min(...xs),
-      Math.min(...ys),
-      Math.max(...xs) - Math.min(...xs),
-      Math.max(...ys) - Math.min(...ys),
-    ];
-    return points.map((p): Point => [(p[0] - x) / w, (p[1] - y) / h]);
-  };
   const outlines = [...windows.flatMap((w) => w.polygons), ...shut.flatMap((s) => s.polygons)];
   expect(outlines.length).toBeGreaterThan(2);
-  for (const { outer } of outlines) {
-    const want = shape(outer.map(([pH, Eh]) => [pH, -Eh]));
-    const same = paths.some((path) => {
-      if (path.length !== want.length) return false;
-      return shape(path).every(([x, y], i) => Math.hypot(x - want[i]![0], y - want[i]![1]) < 1e-3);
-    });
-    expect(same, JSON.stringify(outer)).toBe(true);
-  }
-  expect(clips).toBe(shut.filter((s) => s.polygons.length > 0 && s.metal !== "Cu").length);
+  for (const { outer } of outlines) expect(outlineDrawn(sheet, outer), JSON.stringify(outer)).toBe(true);
+  expect(sheet.clips).toBe(shut.filter((s) => s.polygons.length > 0 && s.metal !== "Cu").length);
 });
 
 test("subscripts stand lower and charges higher, both smaller", async () => {
@@ -276,4 +276,105 @@ test("cyanide, a gas over the liquor and a set point by hand are told with their
   expect(words).toContain("This set point runs under a named procedure:");
   expect(words).toContain("IDLH 50 ppm");
   expect(texts.some((t) => t.text.includes("\ufffd"))).toBe(false);
+});
+
+const plain2 = (text: string) => text.replace(/[\u2009\u00a0]/g, " ");
+
+test("what holds over the plan's ranges is drawn inside the window, with its deepest point and what was checked", async () => {
+  const inputs: PlanInputs = { ...sheetInputs, ranges: { temperatureC: [50, 70], activities: { Fe: [1e-6, 1e-4] } } };
+  const problem = toProblem(inputs, library);
+  const robust = valueOf(robustWindow(problem, inputs.ranges!, library));
+  const [best] = robust.windows;
+  expect(robust.windows).toHaveLength(1);
+  const sheet = await drawn(inputs);
+  expect(outlineDrawn(sheet, best!.outer)).toBe(true);
+  expect(sheet.words).toContain("Over the ranges dashed inner outline");
+  expect(sheet.words).toContain(
+    `Deepest point pH ${fixed(best!.setPoint.pH, 2)}, ${fixed(best!.setPoint.Eh, 2)} V vs SHE, margin ${fixed(best!.setPoint.margin, 1)} ${marginWords(best!.setPoint)}`,
+  );
+  expect(sheet.words).toContain(plain2(checkedWords(robust.checked, (e) => (e === "Fe" ? "iron" : e))));
+  const without = await drawn(sheetInputs);
+  expect(without.words).not.toContain("Over the ranges");
+  expect(outlineDrawn(without, best!.outer)).toBe(false);
+  expect(collisions(sheet)).toEqual([]);
+});
+
+const dust: PlanInputs = {
+  ...sheetInputs,
+  temperatureC: 55,
+  metals: [
+    metal("Cd", "gangue", "metal", 1e-6),
+    metal("Zn", "target", "dissolved", 0.1),
+    metal("As", "watched", "free", 1e-4),
+  ],
+  feedMinerals: [],
+  dosed: [],
+  leftOut: [],
+  frame: { pH: [1, 7], Eh: [-1.2, 0.6] },
+  water: { bound: "upper" },
+};
+
+test("gases are drawn as asked; one that reaches the window is told of, drawn or not, and the deference stands with the cautions", async () => {
+  const { as } = await testServer();
+  const made = await planOf(await as("metallurgist"), dust);
+  const client = await as("technician");
+  const path = `/api/plans/${made.id}/revisions/1/window-sheet.pdf`;
+  const sheetOf = async (query: string) => readPdf(await bytesOf(client, `${path}${query}`));
+  const work = valueOf(workOf(sheetPlan, sheetRevision(tables.version, dust), library));
+  const reaching = work.reachingGases.map((g) => g.gas);
+  expect(reaching).toEqual(["AsH3", "H2"]);
+
+  const usual = await sheetOf("");
+  expect((await sheetOf("?gases=AsH3,H2")).clips).toBe(usual.clips);
+  const one = await sheetOf("?gases=H2");
+  const none = await sheetOf("?gases=");
+  expect([usual.clips - one.clips, one.clips - none.clips]).toEqual([1, 1]);
+  expect(one.words).toMatch(/AsH3: (at the set point it|part of the window) reaches 3 ppm[^.]*\(region not drawn\)/);
+  expect(usual.words).not.toContain("region not drawn");
+  for (const sheet of [usual, one, none]) {
+    expect(sheet.words).toContain("lower flammable limit");
+    expect(sheet.words).toContain("OSHA 0.05 ppm");
+    const [cautions, deference, foot] = ["Cautions", DEFERENCE, "Thermodynamics says what"].map((w) => sheet.words.indexOf(w)); // prettier-ignore
+    expect(cautions! >= 0 && cautions! < deference! && deference! < foot!).toBe(true);
+  }
+  const refused = await client.get(`${path}?gases=H2,CO`).expect(400);
+  expect(refused.body).toMatchObject({ error: { path: "gases.1" } });
+  expect(refused.body.error.message).toContain("CO");
+});
+
+test("a gas drawn that keeps off the window says so", async () => {
+  const inputs: PlanInputs = {
+    ...sheetInputs,
+    temperatureC: 25,
+    ligands: [{ component: "S", activity: 0.45 }, { component: "Cl", activity: 1 }], // prettier-ignore
+    frame: { pH: [0, 8], Eh: [-0.2, 1.6] },
+  };
+  const work = valueOf(workOf(sheetPlan, sheetRevision(tables.version, inputs), library, { gases: ["Cl2"] }));
+  expect(work.reachingGases.map((g) => g.gas)).not.toContain("Cl2");
+  const { words } = readPdf(await windowSheet(work));
+  expect(words).toMatch(/Cl2: outside the window the ground drawn reaches 10 ppm/);
+  expect(words).toContain("NIOSH 0.5 ppm ceiling");
+});
+
+test("overall reactions stand on the sheet as the plan chose them, with reagents per mole, per kg of metal and per tonne", async () => {
+  const inputs: PlanInputs = {
+    ...dust,
+    metals: dust.metals.slice(0, 2),
+    overall: { "Zn(s)": { redox: "peroxide" }, "CdSO4(aq)": { products: { Zn: "Zn^2+(aq)" } } },
+  };
+  const { words } = await drawn(inputs);
+  expect(words).toContain("Overall reactions at the set point mol/mol, kg/kg, kg/t of the start");
+  expect(words).toMatch(/CdSO4 \+ Zn → Cd \+ SO42− \+ Zn2\+ chosen: Zn2\+/);
+  expect(words).toMatch(/Zn dust: Zn 1\.00, 0\.582 kg\/kg Cd, 314 kg\/t; log K/); // practice, section 6: 0.582
+  expect(words).toMatch(/H2O2: H2SO4 1\.00, 1\.50 kg\/kg Zn, \d+ kg\/t; H2O2 1\.00, 0\.520 kg\/kg Zn, 520 kg\/t/);
+  const refused = { ...inputs, overall: { "CdSO4(aq)": { products: { Cd: "ZnO(s)" } } } };
+  expect((await drawn(refused)).words).toContain("Cannot be written: ZnO(s) holds no Cd");
+});
+
+test("the sheet speaks of the window asked for, and of the best where that one is not there", async () => {
+  const inputs: PlanInputs = { ...sheetInputs, metals: [metal("Zn", "target", "solid", 1e-4)], frame: { pH: [1, 14], Eh: [-1.2, 1.2] } }; // prettier-ignore
+  const { windows } = solved(inputs);
+  const of = (window: number) => valueOf(workOf(sheetPlan, sheetRevision(tables.version, inputs), library, { window }));
+  expect(of(99).window).toEqual(windows[0]);
+  windows.forEach((w, i) => expect(of(i).window).toEqual(w));
 });

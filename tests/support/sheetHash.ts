@@ -8,6 +8,6 @@ import { libraryFrom } from "../../shared/species/library";
 import { sheetPlan, sheetRevision } from "./sheetFixture";
 
 const { tables } = readTables();
-const work = workOf(sheetPlan, sheetRevision(tables.version), valueOf(libraryFrom(tables)), null);
+const work = workOf(sheetPlan, sheetRevision(tables.version), valueOf(libraryFrom(tables)));
 if (!work.ok) throw new Error(work.error.message);
 void windowSheet(work.value).then((bytes) => process.stdout.write(createHash("sha256").update(bytes).digest("hex")));

@@ -1,9 +1,12 @@
+import { DEFERENCE } from "../../../shared/hazards/exposure";
 import { lightPalette } from "../../../shared/drawing/palette";
 import { windowName } from "../../../shared/windows/limitWords";
 import { cells, gap, heading, mutedStyle, rows, stack, textBlock, textStyle, type Block, type Column } from "./blocks";
 import type { Pen } from "./pen";
 import { inputsSay } from "./says/asked";
 import { cautionsSay } from "./says/cautions";
+import { reactionsSay } from "./says/reactions";
+import { robustSays } from "./says/robust";
 import { gradesSay, warningsSay } from "./says/trust";
 import { conflictSays, limitSays } from "./says/window";
 import type { SheetWork } from "./work";
@@ -15,9 +18,19 @@ export interface Caps {
   limits: number;
   inputs: number;
   warnings: number;
+  reactions: number;
   exposure: boolean;
+  /** every species is named with its grade, not only those on a limit */
+  grades: boolean;
 }
-export const ALL: Caps = { limits: Infinity, inputs: Infinity, warnings: Infinity, exposure: true };
+export const ALL: Caps = {
+  limits: Infinity,
+  inputs: Infinity,
+  warnings: Infinity,
+  reactions: Infinity,
+  exposure: true,
+  grades: true,
+};
 
 const ledger: readonly Column[] = [
   { share: 0.085 },
@@ -62,10 +75,28 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
   const style = textStyle(size);
   const pair: readonly Column[] = [{ share: 0.27 }, { share: 0.73 }];
   const asked = inputsSay(work).map(([label, value]) => cells(pen, pair, [label, value], style, width));
-  const grades = gradesSay(work).map((text) => textBlock(pen, text, style, width));
+  const over = robustSays(work)?.map((text) => textBlock(pen, text, style, width));
+  const balanced = reactionsSay(work).map(({ reaction, demand }) =>
+    stack([textBlock(pen, reaction, style, width), textBlock(pen, demand, mutedStyle(size - 0.5), width)]),
+  );
+  const grades = gradesSay(work, !caps.grades).map((text) => textBlock(pen, text, style, width));
   return stack([
     heading(pen, "What was asked", "", size, width),
     rows(pen, asked, caps.inputs, size, width, "inputs"),
+    ...(over
+      ? [
+          gap(size * 0.8),
+          heading(pen, "Over the ranges", "dashed inner outline", size, width),
+          rows(pen, over, Infinity, size, width, "lines"),
+        ]
+      : []),
+    ...(balanced.length > 0
+      ? [
+          gap(size * 0.8),
+          heading(pen, "Overall reactions at the set point", "mol/mol, kg/kg, kg/t of the start", size, width),
+          rows(pen, balanced, caps.reactions, size, width, "reactions"),
+        ]
+      : []),
     gap(size * 0.8),
     heading(pen, "Data grades", "bold: on a limit of the window", size, width),
     rows(pen, grades, Infinity, size, width, "grades"),
@@ -97,6 +128,7 @@ function rightColumn(pen: Pen, work: SheetWork, size: number, width: number, cap
     ...(without
       ? [textBlock(pen, "Exposure values stand in the plan.", { ...textStyle(size), face: "bold" }, width)]
       : []),
+    textBlock(pen, DEFERENCE, mutedStyle(size - 0.9), width),
     ...(warnings.length > 0
       ? [
           gap(size * 0.6),

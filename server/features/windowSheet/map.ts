@@ -24,7 +24,7 @@ const gasHatches = ["/", "\\", "|", "-", "x", "+", "."] as const;
 /** The window map as vectors, from the solver's own polygons: hatching where a metal is not as required, windows lit, boundaries by role. */
 export function drawMap(pen: Pen, work: SheetWork, outside: Box): void {
   const { doc } = pen;
-  const { solution, revision, chosen, window, probe } = work;
+  const { solution, revision, chosen, window, probe, robust } = work;
   const { inputs } = revision;
   const { frame } = solution;
   const box: Box = {
@@ -80,6 +80,10 @@ export function drawMap(pen: Pen, work: SheetWork, outside: Box): void {
     plane.outlines(w.polygons);
     plane.stroke(w === window ? 2.8 : 1.5, "verdigris", w.controllable ? "solid" : "4px,3px");
   });
+  if (robust && "windows" in robust) {
+    plane.outlines(robust.windows);
+    plane.stroke(1.6, "verdigris", "7px,3px");
+  }
 
   const taken: Box[] = [];
   const own = window?.setPoint;

@@ -1,5 +1,4 @@
 import { lightPalette } from "../../../shared/drawing/palette";
-import { DEFERENCE } from "../../../shared/hazards/exposure";
 import { besideMap } from "./besideMap";
 import { ALL, belowMap, type Caps } from "./belowMap";
 import { gap, mutedStyle, SIZES, SMALLEST, stack, textBlock, textStyle, type Block } from "./blocks";
@@ -63,11 +62,10 @@ function footOf(pen: Pen, { plan, revision }: SheetWork): Block {
   const small = mutedStyle(6.4);
   const said: Inline = [
     {
-      text: "Thermodynamics says what can happen, not how fast. Potentials in V vs SHE at the liquor's temperature unless said otherwise; activities without unit. ",
+      text: "Thermodynamics says what can happen, not how fast. Potentials in V vs SHE at the liquor's temperature unless said otherwise; activities without unit.",
       face: "bold",
       colour: "ink",
     },
-    DEFERENCE,
   ];
   const which = `${plan.name}, revision ${revision.number}; chemistry data ${revision.dataVersion}; drawn by Gangueway from the solver's polygons.`;
   const body = stack([textBlock(pen, said, small, WIDTH), textBlock(pen, which, small, WIDTH)]);
@@ -84,20 +82,25 @@ function footOf(pen: Pen, { plan, revision }: SheetWork): Block {
 /** The largest type that fits whole, the map given up a little first; at the smallest type rows go, and the page says how many.
  *  @param room  for map and what stands below it     @param least  height of the map that its neighbour needs */
 function fitted(pen: Pen, work: SheetWork, room: number, least: number): { mapHeight: number; below: Block } {
-  for (const size of SIZES)
-    for (const mapHeight of [...MAP_HEIGHTS.filter((h) => h > least), least]) {
-      const below = belowMap(pen, work, size, WIDTH, ALL);
-      if (below.height <= room - mapHeight) return { mapHeight, below };
-    }
-  const caps: Caps = { ...ALL, limits: work.sentences.length + 1, inputs: 14 };
+  const heights = [...MAP_HEIGHTS.filter((h) => h > least), least];
+  for (const size of SIZES) {
+    const below = belowMap(pen, work, size, WIDTH, ALL);
+    const mapHeight = heights.find((h) => below.height <= room - h);
+    if (mapHeight !== undefined) return { mapHeight, below };
+  }
+  const caps: Caps = { ...ALL, limits: work.sentences.length + 1, inputs: 14, reactions: 5 };
   let below = belowMap(pen, work, SMALLEST, WIDTH, caps);
   while (below.height > room - least) {
-    if (caps.warnings > 3) caps.warnings = Math.min(caps.warnings, work.solution.warnings.length + 1) - 1;
+    if (caps.reactions > 3) caps.reactions--;
+    else if (caps.warnings > 3) caps.warnings = Math.min(caps.warnings, work.solution.warnings.length + 1) - 1;
     else if (caps.limits > 7) caps.limits--;
     else if (caps.exposure) caps.exposure = false;
     else if (caps.inputs > 7) caps.inputs--;
+    else if (caps.grades) caps.grades = false;
     else if (caps.limits > 4) caps.limits--;
+    else if (caps.reactions > 1) caps.reactions--;
     else if (caps.warnings > 1) caps.warnings--;
+    else if (caps.inputs > 4) caps.inputs--;
     else break;
     below = belowMap(pen, work, SMALLEST, WIDTH, caps);
   }

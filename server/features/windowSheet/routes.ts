@@ -32,7 +32,7 @@ export const windowSheetRoutes = ({ db, chemistry }: Deps) => [
         const message = `The library has no electrode ${query.electrode} at ${query.electrodeC ?? revision.inputs.temperatureC} C.`;
         throw new Refusal("INVALID_INPUT", "electrode", message);
       }
-      const work = workOf(plan, revision, data, probe);
+      const work = workOf(plan, revision, data, { probe, window: query.window, gases: query.gases });
       if (!work.ok) throw Refusal.from(work.error);
       return file(await windowSheet(work.value), {
         "Content-Type": "application/pdf",

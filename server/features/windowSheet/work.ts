@@ -1,14 +1,19 @@
 import { adviceGaps, type ConflictGap } from "../../../shared/advice/openings";
+import { robustWindow, type Robust } from "../../../shared/advice/robust";
 import { freeAcid, FREE_ACID_BELOW, type FreeAcid } from "../../../shared/activity/freeAcid";
 import { analyse } from "../../../shared/analysis";
 import { referencePotential } from "../../../shared/electrodes/convert";
 import { electrodeSeries } from "../../../shared/electrodes/series";
 import { energiesAt } from "../../../shared/gibbs/energies";
+import type { HazardGas } from "../../../shared/hazards/gases";
 import { sharesGround } from "../../../shared/hazards/reachesWindow";
 import { hazardRegions, type HazardMap, type HazardRegion } from "../../../shared/hazards/regions";
 import { cautionsFor, hazardContext, type Caution } from "../../../shared/hazards/rules";
 import { toProblem } from "../../../shared/plan/toProblem";
-import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
+import { rangesOf } from "../../../shared/plan/rangesOf";
+import { planReactions, type PlanReaction } from "../../../shared/reactions/ofPlan";
+import type { PlanInputs, PlanRow, RevisionRow } from "../../../shared/schemas/plan";
+import type { Problem } from "../../../shared/schemas/problem";
 import { heldSetPoint, type HeldSetPoint } from "../../../shared/setpoint/held";
 import { solve } from "../../../shared/solve";
 import type { Solution, Window } from "../../../shared/solution";
@@ -52,8 +57,14 @@ export interface SheetWork {
   sentences: readonly LimitSentence[];
   gaps: readonly ConflictGap[];
   hazards: HazardMap | null;
-  /** gases whose region shares ground with the window, or, without one, lies in the frame */
+  /** gases whose region is drawn: those asked for, else those that reach the window */
   drawnGases: readonly HazardRegion[];
+  /** gases whose region shares ground with the window: they are told of, drawn or not */
+  reachingGases: readonly HazardRegion[];
+  /** what holds over the ranges of the plan; null where it has none, or a failure in words */
+  robust: Robust | { failed: string } | null;
+  /** overall reactions at the set point as the plan's choices have them; none without a window */
+  reactions: readonly PlanReaction[];
   cautions: readonly Caution[];
   species: readonly GradedSpecies[];
   /** beside a pH no electrode holds; null elsewhere */
@@ -94,9 +105,29 @@ function gradesOf(data: ChemicalData, { fields, temperatureC }: Solution, window
     .map(({ id, grade, limits: on }) => ({ id, grade, limits: on }));
 }
 
+function robustOf(problem: Problem, { ranges }: PlanInputs, data: ChemicalData): SheetWork["robust"] {
+  const asking = problem.metals.filter((m) => m.requirement !== "free").map((m) => m.element);
+  const over = rangesOf(ranges, asking);
+  if (over === null) return null;
+  const found = robustWindow(problem, over, data);
+  return found.ok ? found.value : { failed: found.error.message };
+}
+
+/** What the sheet is asked to show beside the revision: all of it may be left out. */
+export interface SheetWishes {
+  probe?: ProbeScale | null | undefined;
+  window?: number | undefined;
+  gases?: readonly HazardGas[] | undefined;
+}
+
 /** Solves a revision once more and gathers what its sheet says.
  *  @returns  the work; a failure where the inputs cannot be solved with the library */
-export function workOf(plan: SheetWork["plan"], revision: RevisionRow, data: ChemicalData, probe: ProbeScale | null) {
+export function workOf(
+  plan: SheetWork["plan"],
+  revision: RevisionRow,
+  data: ChemicalData,
+  { probe = null, window: wanted = 0, gases }: SheetWishes = {},
+) {
   const { inputs } = revision;
   const problem = toProblem(inputs, data);
   const solved = solve(problem, data, { shutGround: true });
@@ -107,12 +138,13 @@ export function workOf(plan: SheetWork["plan"], revision: RevisionRow, data: Che
   const held = at ? heldSetPoint(analysed.value, solved.value, [at.pH, at.Eh], inputs.controlBand) : null;
   const windows = solved.value.windows.map((w, i) => (i === held?.index ? held.window : w));
   const solution = { ...solved.value, windows };
-  const chosen = held?.index ?? 0;
+  const chosen = held?.index ?? (wanted < windows.length ? wanted : 0);
   const window = windows[chosen] ?? null;
   const setPoint = window?.setPoint ?? null;
   const regions = hazardRegions(analysed.value, { setPoint });
   const hazards = regions.ok ? regions.value : null;
   const naming = namingOf(data, solution);
+  const reachingGases = hazards?.regions.filter((r) => window && sharesGround(r.region, window.polygons)) ?? [];
   const work: SheetWork = {
     plan,
     revision,
@@ -125,7 +157,10 @@ export function workOf(plan: SheetWork["plan"], revision: RevisionRow, data: Che
     sentences: window ? limitSentences(window, naming) : [],
     gaps: window ? [] : adviceGaps(problem, data, solution.conflicts),
     hazards,
-    drawnGases: hazards?.regions.filter((r) => window && sharesGround(r.region, window.polygons)) ?? [],
+    drawnGases: gases ? (hazards?.regions.filter((r) => gases.includes(r.gas)) ?? []) : reachingGases,
+    reachingGases,
+    robust: robustOf(problem, inputs, data),
+    reactions: setPoint ? planReactions(problem, data, inputs, solution, setPoint) : [],
     cautions: cautionsFor(hazardContext(inputs, setPoint)),
     species: gradesOf(data, solution, window),
     acid: freeAcidAt(data, revision, window),

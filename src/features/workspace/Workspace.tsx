@@ -193,7 +193,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
       trials: shownTrials,
       proposals,
       scale,
-      dataVersion: data.version,
+      data,
     },
     setSaid,
   );

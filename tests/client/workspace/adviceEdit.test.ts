@@ -7,7 +7,7 @@ import {
   setActivityRange,
   setTemperatureRange,
 } from "../../../src/features/workspace/model/adviceEdit";
-import { rangesOf } from "../../../src/features/workspace/model/useAsked";
+import { rangesOf } from "../../../shared/plan/rangesOf";
 import { planChanges } from "../../../src/lib/planChanges";
 import { unusualInputs as inputs } from "../../support/planInputs";
 import { library } from "../../support/solver";

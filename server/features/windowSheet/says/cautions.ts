@@ -1,4 +1,5 @@
 import { presetCaution } from "../../../../shared/hazards/presetCautions";
+import type { HazardRegion } from "../../../../shared/hazards/regions";
 import { fixed, withUnit } from "../../../../shared/words/numbers";
 import type { Inline } from "../pen";
 import type { SheetWork } from "../work";
@@ -18,8 +19,32 @@ export interface CautionSays {
   limits: Inline | null;
 }
 
-/** Cautions of the set point, gases that reach the window, and last the liquor's usual one. */
-export function cautionsSay({ cautions, drawnGases, revision, window, hazards }: SheetWork): CautionSays[] {
+function gasSays(g: HazardRegion, { reachingGases, drawnGases }: SheetWork, told: boolean): CautionSays {
+  const bar = g.atSetPoint;
+  const { words } = g.threshold;
+  const where =
+    bar !== null && bar >= g.threshold.bar
+      ? `: at the set point it reaches ${words}`
+      : reachingGases.includes(g)
+        ? `: part of the window reaches ${words}`
+        : `: outside the window the ground drawn reaches ${words}`;
+  return {
+    text: [
+      emboldened(formula(g.gas)),
+      bold(where),
+      drawnGases.includes(g) ? "" : " (region not drawn)",
+      "; at the set point ",
+      pressureSays(bar),
+      " in equilibrium. ",
+      told ? "" : prose(g.caution),
+    ],
+    limits: told || !g.limits ? null : prose(g.limits),
+  };
+}
+
+/** Cautions of the set point, gases that reach the window or are drawn, and last the liquor's usual one. */
+export function cautionsSay(work: SheetWork): CautionSays[] {
+  const { cautions, drawnGases, reachingGases, revision, window, hazards } = work;
   const agents = new Set(cautions.flatMap((c) => c.agents));
   const said: CautionSays[] = cautions.map((c) => ({
     text: [
@@ -30,26 +55,8 @@ export function cautionsSay({ cautions, drawnGases, revision, window, hazards }:
     ],
     limits: c.limits === null ? null : prose(c.limits),
   }));
-  for (const g of drawnGases) {
-    const bar = g.atSetPoint;
-    const reached = bar !== null && bar >= g.threshold.bar;
-    const here: Inline = pressureSays(bar);
-    said.push({
-      text: [
-        emboldened(formula(g.gas)),
-        bold(
-          reached
-            ? `: at the set point it reaches ${g.threshold.words}`
-            : `: part of the window reaches ${g.threshold.words}`,
-        ),
-        "; at the set point ",
-        here,
-        " in equilibrium. ",
-        agents.has(g.gas) ? "" : prose(g.caution),
-      ],
-      limits: agents.has(g.gas) || !g.limits ? null : prose(g.limits),
-    });
-  }
+  const others = drawnGases.filter((g) => !reachingGases.includes(g));
+  for (const g of [...reachingGases, ...others]) said.push(gasSays(g, work, agents.has(g.gas)));
   const saturationBar = hazards?.saturationBar ?? null;
   if (saturationBar !== null)
     said.push({

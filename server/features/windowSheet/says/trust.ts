@@ -11,11 +11,15 @@ const gradeMeans: Readonly<Record<string, string>> = {
   C: "unchecked, or derived from a stability constant",
 };
 
-/** Species that rule a field, gathered by grade; those on a limit of the window stand first and bold. */
-export function gradesSay({ species }: SheetWork): Inline[] {
+/** Species that rule a field, gathered by grade; those on a limit of the window stand first and bold.
+ *  @param brief  only those on a limit are named, the others counted */
+export function gradesSay({ species }: SheetWork, brief = false): Inline[] {
   return [...new Set(species.map((s) => s.grade))].sort().map((grade): Inline => {
     const of = species.filter((s) => s.grade === grade);
-    const names = of.map(({ id, limits }): Inline => (limits ? emboldened(speciesName(id)) : speciesName(id)));
+    const shown = brief ? of.filter((s) => s.limits) : of;
+    const names = shown.map(({ id, limits }): Inline => (limits ? emboldened(speciesName(id)) : speciesName(id)));
+    const more = of.length - shown.length;
+    if (more > 0) names.push(`${more} ${names.length > 0 ? "more " : ""}that limit nothing`);
     return [bold(grade), ` ${gradeMeans[grade] ?? ""}: `, joined(names)];
   });
 }

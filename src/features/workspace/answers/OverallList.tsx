@@ -1,10 +1,10 @@
 import { useDeferredValue, useMemo } from "react";
 import { Link } from "react-router-dom";
 import { reagentById } from "../../../../shared/reach/reagents";
-import { overallReaction } from "../../../../shared/reactions/atSetPoint";
 import type { Demand } from "../../../../shared/reactions/demand";
+import { planReaction, startsOf } from "../../../../shared/reactions/ofPlan";
 import { type RedoxReagent, redoxReagents } from "../../../../shared/reactions/redoxReagents";
-import type { PlanInputs, PresetName } from "../../../../shared/schemas/plan";
+import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { SetPoint, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -29,27 +29,8 @@ interface OverallProps {
   onInputs?: ((edit: Edit) => void) | undefined;
 }
 
-/** What a reaction may start from: the feed's minerals, what is to be won as metal as it stands in the liquor, the metals themselves. */
-export function startsOf({ inputs, solution, data }: Pick<OverallProps, "inputs" | "solution" | "data">): string[] {
-  const ions = inputs.metals
-    .filter((m) => m.requirement === "metal")
-    .flatMap((m) => solution.fields.filter((f) => f.metal === m.element && f.state === "dissolved"))
-    .map((f) => f.species);
-  const metals = inputs.metals.map((m) => `${m.element}(s)`).filter((id) => data.species.has(id));
-  return [...new Set([...inputs.feedMinerals, ...ions, ...metals])];
-}
-
-const usualOxidant: Partial<Record<PresetName, string>> = { chloride: "cupric-chloride" };
-
-/** The usual reagent for so many electrons: air, or the first cementing metal that the liquor can take. */
-export function usualRedox(electrons: number, preset: PresetName, metals: readonly string[]): string | null {
-  if (electrons === 0) return null;
-  if (electrons > 0) return usualOxidant[preset] ?? "air";
-  return metals.includes("Zn") || preset === "cyanide" ? "zinc-dust" : "iron-scrap";
-}
-
 export default function OverallList(props: OverallProps) {
-  const starts = startsOf(props);
+  const starts = startsOf(props.inputs, props.solution, props.data);
   if (starts.length === 0) return <Note className="py-1">Name a feed mineral to see what it takes.</Note>;
   return (
     <>
@@ -70,25 +51,14 @@ export default function OverallList(props: OverallProps) {
 const nameOf = (r: RedoxReagent): string => reagentById.get(r.id)?.name ?? r.used;
 
 function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallProps & { from: string }) {
-  const { products, redox: chosen } = inputs.overall?.[from] ?? {};
   const pH = useDeferredValue(setPoint.pH);
   const Eh = useDeferredValue(setPoint.Eh);
-  const standing = useMemo(
-    () => overallReaction(problem, data, { from, at: { pH, Eh } }),
-    [problem, data, from, pH, Eh],
+  const { overall, preset, metals } = inputs;
+  const { electrons, redox, chosen, rules, outcome } = useMemo(
+    () => planReaction(problem, data, { overall, preset, metals }, { pH, Eh }, from),
+    [problem, data, overall, preset, metals, pH, Eh, from],
   );
-  const asked = useMemo(() => ({ from, at: { pH, Eh }, ...(products ? { products } : {}) }), [from, pH, Eh, products]);
-  const bare = useMemo(
-    () => (products ? overallReaction(problem, data, asked) : standing),
-    [products, standing, problem, data, asked],
-  );
-  const electrons = bare.ok ? bare.value.electrons : 0;
-  const elements = inputs.metals.map((m) => m.element);
-  const redox = chosen ?? usualRedox(electrons, inputs.preset, elements) ?? "open";
-  const outcome = useMemo(
-    () => (redox === "open" || !bare.ok ? bare : overallReaction(problem, data, { ...asked, redox })),
-    [bare, problem, data, asked, redox],
-  );
+  const byHand = Object.keys(chosen).length > 0;
   const options: SelectOption<string>[] = [
     { value: "open", label: "none: electrons stay" },
     ...redoxReagents
@@ -100,7 +70,7 @@ function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallPro
       <div className="font-bold">
         <SpeciesName id={from} withPhase />
       </div>
-      {bare.ok && electrons !== 0 && (
+      {redox !== null && (
         <Select
           label={`What ${electrons > 0 ? "takes" : "gives"} the electrons of ${from}`}
           labelText={electrons > 0 ? "oxidant" : "reductant"}
@@ -111,10 +81,8 @@ function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallPro
         />
       )}
       <Products
-        {...{ from, data, redox }}
+        {...{ from, data, redox, rules, chosen }}
         sulfateReduction={problem.sulfateReduction ?? problem.temperatureC >= 150}
-        standing={standing.ok ? standing.value : null}
-        chosen={products ?? {}}
         onChoose={onInputs && ((component, product) => onInputs(chooseProduct(from, component, product)))}
       />
       {outcome.ok ? (
@@ -140,8 +108,8 @@ function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallPro
           ))}
         </>
       ) : (
-        <p className={products ? "border-l-4 border-ink pl-3 text-sm" : "text-sm text-muted"} role="status">
-          {products && <b>This cannot be written. </b>}
+        <p className={byHand ? "border-l-4 border-ink pl-3 text-sm" : "text-sm text-muted"} role="status">
+          {byHand && <b>This cannot be written. </b>}
           <FormulaText text={outcome.error.message} />.
         </p>
       )}

@@ -1,5 +1,4 @@
 import { useMemo } from "react";
-import type { OverallAtSetPoint } from "../../../../shared/reactions/atSetPoint";
 import { partsOf, productsFor } from "../../../../shared/reactions/products";
 import { redoxReagentById } from "../../../../shared/reactions/redoxReagents";
 import { SULFIDE_SULFUR } from "../../../../shared/selection/components";
@@ -12,9 +11,9 @@ interface ProductsProps {
   from: string;
   data: ChemicalData;
   sulfateReduction: boolean;
-  redox: string;
-  /** as it stands without any choice of hand, to say what rules */
-  standing: OverallAtSetPoint | null;
+  redox: string | null;
+  /** what each part becomes without any choice of hand */
+  rules: ReadonlyMap<string, string>;
   chosen: Readonly<Record<string, string>>;
   /** absent where the plan is only looked at */
   onChoose: ((component: string, product: string | null) => void) | undefined;
@@ -23,8 +22,8 @@ interface ProductsProps {
 const RULES = "as it stands";
 
 /** What each part of the start becomes: the species that rules at the set point, or another where that one is not what forms in practice. */
-export function Products({ from, data, sulfateReduction, redox, standing, chosen, onChoose }: ProductsProps) {
-  const cementing = redoxReagentById.get(redox);
+export function Products({ from, data, sulfateReduction, redox, rules, chosen, onChoose }: ProductsProps) {
+  const cementing = redoxReagentById.get(redox ?? "");
   const parts = useMemo(() => {
     const own = partsOf(data.species.get(from), sulfateReduction);
     const dust = cementing?.role === "cementing metal" ? cementing.sold?.formula : undefined;
@@ -36,7 +35,7 @@ export function Products({ from, data, sulfateReduction, redox, standing, chosen
     <Product
       key={component}
       {...{ from, data, sulfateReduction, component }}
-      rules={standing?.products.get(component)}
+      rules={rules.get(component)}
       value={chosen[component]}
       onChoose={onChoose}
     />

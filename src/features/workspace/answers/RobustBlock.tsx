@@ -1,9 +1,10 @@
+import { checkedWords } from "../../../../shared/advice/checkedWords";
 import type { Robust } from "../../../../shared/advice/robust";
 import { marginWords } from "../../../../shared/windows/limitWords";
 import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
-import { celsius, fixed, significant } from "../../../lib/format";
+import { fixed } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import type { Awaited } from "../model/useAsked";
 import { Stopped, Working } from "./Working";
@@ -84,24 +85,4 @@ function Found({
       <Note className="py-1">{checkedWords(checked, metalName)}</Note>
     </>
   );
-}
-
-/** What was looked at, so that nobody takes it for more. */
-export function checkedWords(
-  { temperatures, rules, settled, activities }: Robust["checked"],
-  metalName: (element: string) => string,
-): string {
-  const [first, last] = [temperatures[0] ?? 0, temperatures.at(-1) ?? 0];
-  const heat =
-    temperatures.length === 1
-      ? `Solved at ${celsius(first, 1)}.`
-      : `Solved at ${temperatures.length} temperatures from ${celsius(first, 1)} to ${celsius(last, 1)}; ${
-          settled
-            ? "more between them moved no edge by 0.001 pH or 1 mV."
-            : "its edges still moved when that was the most to be tried: take it with care."
-        }${rules.length === 0 ? "" : ` The solids that count change at ${rules.map((t) => celsius(t)).join(" and ")}: solved on both sides.`}`;
-  const each = activities.map(({ metal, at, why }) => `${metalName(metal)} at ${significant(at)} (${why})`);
-  return each.length === 0
-    ? heat
-    : `${heat} Of each activity range the worse end alone is solved, since the ground shrinks all the way to it: ${each.join("; ")}.`;
 }

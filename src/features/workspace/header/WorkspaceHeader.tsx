@@ -9,7 +9,8 @@ import type { DraftInHand } from "../model/useDraft";
 
 const NewerRevision = lazy(async () => ({ default: (await import("./NewerRevision")).NewerRevision }));
 
-export type ExportKind = "problem" | "solution" | "png" | "svg" | "csv" | "windows" | "polygons" | "sheet";
+export type ExportKind =
+  "problem" | "solution" | "plan" | "png" | "svg" | "csv" | "windows" | "polygons" | "reactions" | "sheet";
 
 export interface Said {
   text: string;
@@ -103,6 +104,12 @@ export function WorkspaceHeader({
           </MenuItem>
           <MenuItem onSelect={() => onExport("polygons")} note="CSV">
             Polygons of the map
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("reactions")} note="CSV">
+            Overall reactions and reagents
+          </MenuItem>
+          <MenuItem onSelect={() => onExport("plan")} note="JSON">
+            Plan with cautions and reactions
           </MenuItem>
           <MenuItem onSelect={() => onExport("problem")} note="JSON">
             Problem, for the solver

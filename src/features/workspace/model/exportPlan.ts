@@ -2,6 +2,7 @@ import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
 import type { PlanInputs, PlanRow } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { api } from "../../../lib/api";
 import { toCsv } from "../../../lib/csv";
 import { celsius, fixed, significant } from "../../../lib/format";
@@ -11,6 +12,7 @@ import { mapContent } from "../../../map/content";
 import { drawnMetals } from "../../../map/view";
 import { captionedPicture, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
+import { planFile, reactionsTable, sheetQuery } from "./exportReactions";
 import { fileStem, limitsTable, polygonsTable, type Table, windowsTable, withOrigin } from "./exports";
 import { saveFile, saveJson } from "./saveFile";
 import type { MapModel } from "./useMapModel";
@@ -26,14 +28,14 @@ export interface Exported {
   problem: Problem;
   solution: Solution;
   model: MapModel;
-  dataVersion: string;
+  data: ChemicalData;
   /** what the marks of trials mean; null while none is shown */
   trialWords: string | null;
 }
 
 /** What a picture rests on: data, temperature, activities, basis; and whether it is invented. */
 export function captionLines(exported: Exported): string[] {
-  const { plan, state, inputs, solution, model, dataVersion, trialWords } = exported;
+  const { plan, state, inputs, solution, model, data, trialWords } = exported;
   const drawn = new Set(drawnMetals(model.view).map(({ element }) => element));
   const unseen = inputs.metals.filter(({ element }) => !drawn.has(element)).map(({ element }) => element);
   const metals = solution.metals.map(({ metal, activity }) => {
@@ -51,7 +53,7 @@ export function captionLines(exported: Exported): string[] {
       ? `set point pH ${fixed(pH, 2)}, about ${fixed(freeAcid.at(pH).gPerL, 0)} g/L free acid by pK2 and Davies, indicative`
       : null;
   return [
-    `${state.charAt(0).toUpperCase()}${state.slice(1)}; chemistry data ${dataVersion.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
+    `${state.charAt(0).toUpperCase()}${state.slice(1)}; chemistry data ${data.version.slice(0, 12)}${plan.invented ? "; invented data" : ""}`,
     `${celsius(solution.temperatureC, 1)}, ${lixiviantName[inputs.preset]}${totals.length > 0 ? ` (totals ${totals.join(", ")} mol/L)` : ""}, solids ${solidsBasisWord[inputs.solidsBasis]}`,
     `activities: ${metals.join("; ")}${unseen.length > 0 ? `; not drawn: ${unseen.join(", ")}` : ""}`,
     ...(trialWords === null || !model.view.layers.trials ? [] : [trialWords]),
@@ -61,12 +63,12 @@ export function captionLines(exported: Exported): string[] {
 }
 
 // The mark in front makes spreadsheets read UTF-8.
-function saveTable(name: string, table: Table, { plan, state, dataVersion, solution }: Exported): void {
+function saveTable(name: string, table: Table, { plan, state, data, solution }: Exported): void {
   const T: Record<string, number> = table.header.includes("temperature_C")
     ? {}
     : { temperature_C: solution.temperatureC };
   const invented = plan.invented ? ", invented data" : "";
-  const origin = { plan: plan.name, state: `${state}${invented}`, ...T, chemistry_data: dataVersion.slice(0, 12) };
+  const origin = { plan: plan.name, state: `${state}${invented}`, ...T, chemistry_data: data.version.slice(0, 12) };
   const { header, rows } = withOrigin(table, origin);
   saveFile(name, new Blob(["\ufeff", toCsv(header, rows)], { type: "text/csv;charset=utf-8" }));
 }
@@ -85,10 +87,15 @@ export async function exportPlan(kind: ExportKind, e: Exported): Promise<void> {
       return saveTable(`${stem}-windows.csv`, windowsTable(e.solution), e);
     case "polygons":
       return saveTable(`${stem}-polygons.csv`, polygonsTable(e.solution), e);
+    case "reactions": {
+      const table = reactionsTable(e);
+      if (!table) throw new Error("There is no set point to write reactions at.");
+      return saveTable(`${stem}-reactions.csv`, table, e);
+    }
+    case "plan":
+      return saveJson(`${stem}-plan.json`, planFile(e));
     case "sheet": {
-      const { reference } = e.scale;
-      const query = reference ? `?electrode=${reference.id}&electrodeC=${reference.temperatureC}` : "";
-      const path = `/plans/${encodeURIComponent(e.plan.id)}/revisions/${e.revision}/window-sheet.pdf${query}`;
+      const path = `/plans/${encodeURIComponent(e.plan.id)}/revisions/${e.revision}/window-sheet.pdf${sheetQuery(e)}`;
       return saveFile(`${stem}-window-sheet-revision-${e.revision}.pdf`, await api.file(path));
     }
     case "png":

@@ -2,6 +2,7 @@ import { useCallback, useEffect, useMemo, useState } from "react";
 import type { Advice } from "../../../../shared/advice/openings";
 import type { Ranges, Robust } from "../../../../shared/advice/robust";
 import type { Outcome } from "../../../../shared/outcome";
+import { rangesOf } from "../../../../shared/plan/rangesOf";
 import type { HoldRanges } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -74,17 +75,6 @@ const askAdvice = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) =
 export function useAdvice(problem: Problem, data: ChemicalData, wanted: boolean): Awaited<Advice> {
   const key = useMemo(() => (wanted ? JSON.stringify(problem) : null), [problem, wanted]);
   return useAsked(data, key, askAdvice);
-}
-
-/** Ranges of the plan as the core takes them: of metals that the plan still has. */
-export function rangesOf(ranges: HoldRanges | undefined, elements: readonly string[]): Ranges | null {
-  const { temperatureC, activities = {} } = ranges ?? {};
-  const known = Object.entries(activities).filter(([element]) => elements.includes(element));
-  if (temperatureC === undefined && known.length === 0) return null;
-  return {
-    ...(temperatureC === undefined ? {} : { temperatureC }),
-    ...(known.length === 0 ? {} : { activities: Object.fromEntries(known) }),
-  };
 }
 
 const askRobust = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) => {

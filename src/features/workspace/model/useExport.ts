@@ -2,6 +2,7 @@ import { useCallback } from "react";
 import type { PlanInputs, PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
+import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { messageOf } from "../../../lib/failure";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ProposalStore } from "../../../map/proposalStore";
@@ -21,12 +22,12 @@ interface OnTheTable {
   trials: ShownTrials | null;
   proposals: ProposalStore;
   scale: PotentialScale;
-  dataVersion: string;
+  data: ChemicalData;
 }
 
 /** Makes a file of what is on the table, and says how it goes. */
 export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
-  const { plan, frozen, draft, inputs, problem, solution, model, trials, proposals, scale, dataVersion } = table;
+  const { plan, frozen, draft, inputs, problem, solution, model, trials, proposals, scale, data } = table;
   return useCallback(
     (kind: ExportKind) => {
       if (!solution || !model) return;
@@ -48,7 +49,7 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
             problem,
             solution,
             model: { ...model, asked: { ...model.asked, trials, proposals: proposals.marks.get() } },
-            dataVersion,
+            data,
             trialWords: trials?.words() ?? null,
           }),
         )
@@ -65,20 +66,6 @@ export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
           (error: unknown) => say({ text: `Not exported: ${messageOf(error)}`, bad: true }),
         );
     },
-    [
-      solution,
-      model,
-      trials,
-      proposals,
-      frozen,
-      draft.changed,
-      draft.basedOn,
-      plan,
-      inputs,
-      problem,
-      scale,
-      dataVersion,
-      say,
-    ],
+    [solution, model, trials, proposals, frozen, draft.changed, draft.basedOn, plan, inputs, problem, scale, data, say],
   );
 }
