@@ -338,8 +338,7 @@ test("gases are drawn as asked; one that reaches the window is told of, drawn or
     expect(cautions! >= 0 && cautions! < deference! && deference! < foot!).toBe(true);
   }
   const refused = await client.get(`${path}?gases=H2,CO`).expect(400);
-  expect(refused.body).toMatchObject({ error: { path: "gases.1" } });
-  expect(refused.body.error.message).toContain("CO");
+  expect(refused.body).toMatchObject({ error: { path: "gases.1", message: expect.stringContaining("CO") as string } });
 });
 
 test("a gas drawn that keeps off the window says so", async () => {
@@ -371,7 +370,7 @@ test("overall reactions stand on the sheet as the plan chose them, with reagents
   expect((await drawn(refused)).words).toContain("Cannot be written: ZnO(s) holds no Cd");
 });
 
-test("the sheet speaks of the window asked for, and of the best where that one is not there", async () => {
+test("the sheet speaks of the window asked for, and of the best where that one is not there", () => {
   const inputs: PlanInputs = { ...sheetInputs, metals: [metal("Zn", "target", "solid", 1e-4)], frame: { pH: [1, 14], Eh: [-1.2, 1.2] } }; // prettier-ignore
   const { windows } = solved(inputs);
   const of = (window: number) => valueOf(workOf(sheetPlan, sheetRevision(tables.version, inputs), library, { window }));
