@@ -72,7 +72,7 @@ export function ReadOut({
               className="text-muted"
               title="The temperature is beyond what the model of this species is trusted for: Fields drawn lists model and range"
             >
-              {BEYOND} beyond trusted T
+              {BEYOND} extrapolated
             </span>
           )}
           {kept.length > 0 && (

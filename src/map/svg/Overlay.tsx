@@ -37,7 +37,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
   const hatches = useMemo(() => hatchesOf(view.metals), [view.metals]);
   const patternOf = (element: string) => `${id}-${element}`;
   const window = content.solution.windows[view.window];
-  const { through, pinned } = content;
+  const { through, pinned, freeAcid } = content;
   const strips = {
     cuts: content.crosscuts,
     pinned: pinned && { cuts: pinned.crosscuts, through: pinned.through },
@@ -46,8 +46,8 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
     patternOf,
   };
   const marks = useMemo(
-    () => (window ? { pH: limitMarks(window, "pH"), Eh: limitMarks(window, "Eh") } : { pH: [], Eh: [] }),
-    [window],
+    () => (window ? { pH: limitMarks(window, "pH", freeAcid), Eh: limitMarks(window, "Eh") } : { pH: [], Eh: [] }),
+    [window, freeAcid],
   );
   return (
     <svg

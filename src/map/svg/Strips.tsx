@@ -169,7 +169,7 @@ function clear(mark: LimitMark, marks: readonly LimitMark[], at: (v: number) => 
   const here = at(mark.at);
   const other = marks.find((m) => m !== mark);
   if (!other) return here;
-  const room = upright ? 54 : 58;
+  const room = upright ? 54 : 10 + 3 * (mark.text.length + other.text.length);
   const gap = here - at(other.at);
   return Math.abs(gap) >= room ? here : here + (Math.sign(gap) * (room - Math.abs(gap))) / 2;
 }

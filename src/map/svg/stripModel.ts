@@ -1,6 +1,7 @@
+import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../shared/activity/freeAcid";
 import type { CrosscutPart } from "../../../shared/setpoint/crosscut";
 import type { Limit, Window } from "../../../shared/solution";
-import { signed, withUnit } from "../../../shared/words/numbers";
+import { fixed, signed, withUnit } from "../../../shared/words/numbers";
 import type { MapMetal } from "../view";
 
 /** What one metal is along both lines through a point, from low to high. */
@@ -26,10 +27,12 @@ export interface LimitMark {
 }
 
 /** The nearest limit on either side of the set point along one of its lines, with the way there.
- *  @param window  with its set point     @returns  none, one or two marks, low side first */
+ *  @param window  with its set point     @param freeAcid  of a sulfate liquor: a limit below pH 1.5 tells its g/L as well
+ *  @returns  none, one or two marks, low side first */
 export function limitMarks(
   { setPoint, limits }: Pick<Window, "setPoint" | "limits">,
   direction: Direction,
+  freeAcid: FreeAcidCurve | null = null,
 ): LimitMark[] {
   const along = limits.flatMap((limit) => {
     const distance = direction === "pH" ? limit.distancePH : limit.distanceEh;
@@ -41,16 +44,27 @@ export function limitMarks(
       .sort((a, b) => Math.abs(a.distance) - Math.abs(b.distance));
     if (!nearest) return [];
     const { limit, distance } = nearest;
+    const at = (direction === "pH" ? setPoint.pH : setPoint.Eh) + distance;
     return [
       {
-        at: (direction === "pH" ? setPoint.pH : setPoint.Eh) + distance,
+        at,
         distance,
         metal: limit.metal ?? null,
         kind: limit.kind,
-        text: direction === "pH" ? withUnit(signed(distance, 2), "pH") : withUnit(signed(1000 * distance, 0), "mV"),
+        text:
+          direction === "pH"
+            ? withUnit(signed(distance, 2), "pH") + acidThere(freeAcid, at)
+            : withUnit(signed(1000 * distance, 0), "mV"),
       },
     ];
   });
+}
+
+/** ", 25 g/L" where pH is no more than an index and the sulfate balances so much. */
+function acidThere(curve: FreeAcidCurve | null, pH: number): string {
+  if (curve === null || pH >= FREE_ACID_BELOW) return "";
+  const { gPerL, withinSulfate } = curve.at(pH);
+  return withinSulfate ? `, ${withUnit(fixed(gPerL, gPerL < 9.95 ? 1 : 0), "g/L")}` : "";
 }
 
 /** Where a metal is one thing along one line and another along the line beside it. */

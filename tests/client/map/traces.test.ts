@@ -1,4 +1,7 @@
 import { describe, expect, test } from "vitest";
+import { library } from "../../support/solver";
+import { valueOf } from "../../../shared/outcome";
+import { freeAcidCurve } from "../../../shared/activity/freeAcid";
 import type { Reach } from "../../../shared/reach/reach";
 import { reagentById } from "../../../shared/reach/reagents";
 import { sheetBoxes } from "../../../src/map/boxes";
@@ -162,6 +165,13 @@ describe("crosscuts", () => {
       [0, "frame", null, "−1.00\u2009pH"],
       [2, "metal", "Fe", "+1.00\u2009pH"],
     ]);
+    // in a sulfate liquor a limit below pH 1.5 is told in g/L too, as the curve has it
+    const curve = valueOf(freeAcidCurve(library, 0.5, 25));
+    const acid = { ...window, setPoint: { ...window.setPoint, pH: 1.8 }, limits: [{ ...window.limits[1]!, distancePH: -0.8 }] }; // prettier-ignore
+    expect(limitMarks(acid, "pH", curve)[0]!.text).toBe(`−0.80\u2009pH, ${curve.at(1).gPerL.toFixed(0)}\u2009g/L`);
+    expect(limitMarks({ ...acid, setPoint: { ...acid.setPoint, pH: 2.4 } }, "pH", curve)[0]!.text).toBe(
+      "−0.80\u2009pH",
+    );
     expect(limitMarks(marked, "Eh").map((m) => [m.metal, m.text])).toEqual([["Fe", "−123\u2009mV"]]);
   });
   test("two lines differ where a metal is something else on each", () => {

@@ -44,7 +44,7 @@ test("a field beyond its species' trusted temperatures is marked on the map and 
     unmount();
     return found;
   };
-  expect(shown(hot).text).toContain("† beyond trusted T");
+  expect(shown(hot).text).toContain("† extrapolated");
   expect(shown(hot).titles).toContainEqual(expect.stringMatching(/^ZnSO4 at 150 C: .*trusted from 0 to 100 C\.$/));
   expect(shown(at(60)).text).not.toContain("†");
   expect(shown(at(60)).titles).toContainEqual(expect.stringMatching(/trusted 0 to 100.°C$/));
