@@ -44,8 +44,13 @@ export default function CampaignsPage() {
   const rows = useMemo(() => stageRows(campaigns.data ?? [], summaries), [campaigns.data, summaries]);
   const selected = rows.find(({ key }) => key === chosen) ?? shown[0] ?? rows[0];
   const open = ({ id }: CampaignRow) => void navigate(`/campaigns/${id}`);
-  // The list has a primary action of its own, beside it: opening what is chosen.
-  const create = mayWrite && project && <Button onClick={() => setCreating(true)}>New campaign</Button>;
+  const create = (primary: boolean) =>
+    mayWrite &&
+    project && (
+      <Button kind={primary ? "primary" : "plain"} onClick={() => setCreating(true)}>
+        New campaign
+      </Button>
+    );
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
@@ -61,7 +66,8 @@ export default function CampaignsPage() {
         >
           Export CSV
         </Button>
-        {create}
+        {/* The list has a primary action of its own beside it: opening what is chosen. */}
+        {create(false)}
       </div>
       {projects?.length === 0 ? (
         <div className="px-5">
@@ -91,7 +97,7 @@ export default function CampaignsPage() {
               deleted === "true" ? (
                 <Empty title="Nothing deleted">A deleted campaign keeps its trials and can be restored.</Empty>
               ) : (
-                <Empty title="No campaign yet" action={create}>
+                <Empty title="No campaign yet" action={create(true)}>
                   A campaign tries one question on the ground: trials laid out on a revision of a plan, stage by stage.
                   {!mayWrite && " A metallurgist makes the first one."}
                 </Empty>

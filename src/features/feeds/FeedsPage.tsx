@@ -35,8 +35,13 @@ export default function FeedsPage() {
   const feeds = useFeeds(project?.id, deleted);
   const selected = feeds.data?.find(({ id }) => id === chosen) ?? feeds.data?.[0];
   const open = (feed: FeedRow) => void navigate(`/feeds/${feed.id}`);
-  // The list has a primary action of its own, beside it: opening what is chosen.
-  const create = mayWrite && project && <Button onClick={() => setCreating(true)}>New feed</Button>;
+  const create = (primary: boolean) =>
+    mayWrite &&
+    project && (
+      <Button kind={primary ? "primary" : "plain"} onClick={() => setCreating(true)}>
+        New feed
+      </Button>
+    );
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
@@ -45,7 +50,8 @@ export default function FeedsPage() {
           {feeds.data && `${counted(feeds.data.length, deleted === "true" ? "deleted feed" : "feed")} in this project`}
         </Note>
         <span className="flex-1" />
-        {create}
+        {/* The list has a primary action of its own beside it: opening what is chosen. */}
+        {create(false)}
       </div>
       {projects?.length === 0 ? (
         <div className="px-5">
@@ -66,7 +72,7 @@ export default function FeedsPage() {
               deleted === "true" ? (
                 <Empty title="Nothing deleted">A deleted feed keeps its assays and can be restored.</Empty>
               ) : (
-                <Empty title="No feed yet" action={create}>
+                <Empty title="No feed yet" action={create(true)}>
                   A feed is what is leached: its head assays, which of them counts, and the minerals that hold each
                   metal. Every account starts from it.{!mayWrite && " A metallurgist enters the first one."}
                 </Empty>

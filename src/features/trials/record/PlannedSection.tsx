@@ -1,5 +1,6 @@
 import { useState } from "react";
 import type { QuantityName } from "../../../../shared/entry/quantities";
+import { tenorOfLine } from "../../../../shared/trials/comparable";
 import type { Planned } from "../../../../shared/schemas/trialRecord";
 import { Button } from "../../../components/Button";
 import { EntryField } from "../../../components/EntryField";
@@ -19,7 +20,7 @@ type Field = "temperature" | "pH" | "freeAcid" | "tenor" | "duration" | "solids"
 
 /** What the trial is laid out on: by hand, or from the set point of the plan. */
 export function PlannedSection() {
-  const { values, edit, problems, readOnly, stage, feed, solved, campaign, electrodes } = useRecording();
+  const { values, edit, problems, readOnly, stage, feed, data, solved, campaign, electrodes } = useRecording();
   const { planned } = values;
   const [choice, setChoice] = useState("0");
   const put = (change: Partial<Planned>, about: string) =>
@@ -37,6 +38,8 @@ export function PlannedSection() {
     { key: "p80", label: "P80", quantity: "size" },
     { key: "duration", label: "Duration", quantity: "time" },
   ];
+  const line = solved?.inputs.metals.find(({ element }) => element === stage?.target);
+  const noTenor = values.kind === "leach" && line !== undefined && tenorOfLine(line, solved!.inputs, data) === null;
   const windows = solved?.solution ? windowChoices(solved.solution) : [];
   return (
     <Section id="planned" title="Planned conditions" aside={`plan revision ${campaign.planRevision}`}>
@@ -63,7 +66,10 @@ export function PlannedSection() {
               >
                 Take the set point of {campaign.planName}
               </Button>
-              <Note>{windows.find(({ value }) => value === choice)?.words}</Note>
+              <Note>
+                {windows.find(({ value }) => value === choice)?.words}
+                {noTenor && "; the tenor from the charge, since the plan gives an activity without its gamma"}
+              </Note>
             </>
           )}
         </div>
