@@ -22,7 +22,7 @@ const withoutJsonSchema: Plugin = {
 
 /** Modules of src/lib and src/components that nearly every page is made of. */
 const parts = [
-  "api|chemistry|classes|failure|format|glossaryTitles|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units",
+  "api|chemistry|classes|failure|format|glossaryTitles|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units|useRested",
   "Button|Caution|ComponentName|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
   "choice|status|text|useLate|whenOpened",
 ];
@@ -50,7 +50,7 @@ export default defineConfig({
             // What only the map needs comes with Plotly.
             {
               name: "map",
-              test: /src[\\/]map[\\/](geometry[\\/]|names[\\/]|svg[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|LimitHover|Over|Plot|speciesText|texts|paintTrials|Touch|TrialsLayer|WindowMap)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
+              test: /src[\\/]map[\\/](geometry[\\/]|names[\\/]|svg[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|LimitHover|Over|Plot|speciesText|texts|paintTrials|Touch|TrialsLayer|Under|WindowMap)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },

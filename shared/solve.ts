@@ -1,5 +1,5 @@
 import { ok, type Outcome } from "./outcome";
-import { analyse } from "./analysis";
+import { type Analysis, analyse } from "./analysis";
 import type { MetalFields } from "./fields/fields";
 import { cornersOf } from "./geometry/convex";
 import { connect, type Region } from "./geometry/region";
@@ -28,8 +28,13 @@ export interface SolveOptions {
  *  @source  docs/method.md, steps 1 to 6; interface in docs/solver.md */
 export function solve(input: unknown, library: ChemicalData, options: SolveOptions = {}): Outcome<Solution> {
   const analysed = analyse(input, library); // 1 to 5: energies, planes, ligand cells, fields, window pieces
-  if (!analysed.ok) return analysed;
-  const { prepared, basis, cells, metals, bounds, hazards, pieces } = analysed.value;
+  return analysed.ok ? ok(solutionOf(analysed.value, options)) : analysed;
+}
+
+/** The last step of `solve`, where the exact pieces are wanted as well: windows, limits, set points, warnings.
+ *  @param analysis  of the problem     @returns  the solution; it cannot fail     @source  docs/method.md, step 6 */
+export function solutionOf(analysis: Analysis, options: SolveOptions = {}): Solution {
+  const { prepared, basis, cells, metals, bounds, hazards, pieces } = analysis;
   const { problem, data } = prepared;
   const ground: Ground = { data, cells, metals, hazards, pieces };
   const regions = connect(pieces.map((p) => p.piece)).filter((r) => r.pieces.some((i) => !isSliver(pieces[i]!.piece)));
@@ -37,7 +42,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
   windows.sort((a, b) => b.setPoint.margin - a.setPoint.margin || b.area - a.area);
 
   const fields = drawnFields(metals);
-  return ok({
+  return {
     temperatureC: problem.temperatureC,
     fields,
     windows,
@@ -57,7 +62,7 @@ export function solve(input: unknown, library: ChemicalData, options: SolveOptio
       ? { kept: hazards.map((h) => ({ ...h.asked, polygons: keptGroundOf(h, cells) })) }
       : {}),
     frame: problem.frame,
-  });
+  };
 }
 
 function waterLines(basis: Basis): WaterLine[] {

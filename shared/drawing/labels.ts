@@ -128,8 +128,15 @@ interface Spot {
 const better = (a: Spot, b: Spot | null): boolean =>
   b === null || (a.crossed !== b.crossed ? a.crossed < b.crossed : a.room !== b.room ? a.room > b.room : a.far < b.far);
 
-/** Where one label fits: the lattice point that fewest lines cross, then with most room, then nearest the field's middle. */
-function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonly Segment[]): Pixel | null {
+/** Where one label fits: where it stood if it still fits there, else the lattice point that fewest lines cross, then with most room, then
+ *  nearest the field's middle. */
+function place(
+  wish: LabelWish,
+  view: Box,
+  taken: readonly Box[],
+  lines: readonly Segment[],
+  before: Pixel | undefined,
+): Pixel | null {
   const pieces = wish.pieces.map((ring) => clipToBox(ring, view)).filter((ring) => ring.length >= 3);
   if (pieces.length === 0) return null;
   const bounds = pieces.map(boundsOf);
@@ -142,6 +149,11 @@ function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonl
     });
   const fits = (x: number, y: number, growth: number) =>
     around(centredBox(x, y, wish.width * growth, wish.height * growth)).every(within);
+  const free = (x: number, y: number) => {
+    const own = centredBox(x, y, wish.width, wish.height);
+    return within([x, y]) && !taken.some((other) => overlaps(own, other)) && fits(x, y, 1);
+  };
+  if (before && free(...before)) return before;
   const box = boundsOf(pieces.flat());
   const [spareX, spareY] = [box.x1 - box.x0 - wish.width, box.y1 - box.y0 - wish.height];
   if (spareX < 0 || spareY < 0) return null;
@@ -151,8 +163,8 @@ function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonl
     let best: Spot | null = null;
     for (let x = Math.ceil((box.x0 + wish.width / 2) / stepX) * stepX; x <= box.x1 - wish.width / 2; x += stepX) {
       for (let y = Math.ceil((box.y0 + wish.height / 2) / stepY) * stepY; y <= box.y1 - wish.height / 2; y += stepY) {
+        if (!free(x, y)) continue;
         const own = centredBox(x, y, wish.width, wish.height);
-        if (!within([x, y]) || taken.some((other) => overlaps(own, other)) || !fits(x, y, 1)) continue;
         const crossed = near.reduce((n, [a, b]) => n + Number(crosses(a, b, own)), 0);
         if (best !== null && crossed > best.crossed) continue;
         let room = 0;
@@ -171,17 +183,19 @@ function place(wish: LabelWish, view: Box, taken: readonly Box[], lines: readonl
 /** Places labels in the order given, so that the weightier ones come first; what fits nowhere is left out.
  *  @param wishes  fields with the size of their names, px     @param view  the part of the map in sight, px
  *  @param taken  boxes no label may cover     @param lines  boundaries a name should rather not sit on, px
+ *  @param before  where labels stood: one that still fits there stays, which takes no search; for a moving map
  *  @returns  the middle of each label that fits, by id */
 export function placeLabels(
   wishes: readonly LabelWish[],
   view: Box,
   taken: readonly Box[],
   lines: readonly Segment[] = [],
+  before: ReadonlyMap<string, Pixel> = new Map(),
 ): Map<string, Pixel> {
   const boxes = [...taken];
   const placed = new Map<string, Pixel>();
   for (const wish of wishes) {
-    const at = place(wish, view, boxes, lines);
+    const at = place(wish, view, boxes, lines, before.get(wish.id));
     if (at === null) continue;
     placed.set(wish.id, at);
     boxes.push(centredBox(at[0], at[1], wish.width + 4, wish.height + 2));

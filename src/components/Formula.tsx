@@ -1,8 +1,8 @@
-import { Fragment } from "react";
+import { Fragment, memo } from "react";
 import { formulaPlain, typeset } from "../../shared/species/typeset";
 
 /** A chemical formula with true sub- and superscripts; read aloud as one word. */
-export function Formula({ formula, className }: { formula: string; className?: string }) {
+export const Formula = memo(function Formula({ formula, className }: { formula: string; className?: string }) {
   return (
     <span className={className} aria-label={formulaPlain(formula)} role="text" style={{ whiteSpace: "nowrap" }}>
       {typeset(formula).map(({ text, kind }, i) =>
@@ -16,7 +16,7 @@ export function Formula({ formula, className }: { formula: string; className?: s
       )}
     </span>
   );
-}
+});
 
 const phase = /\((aq|s|l|g)(?:,\s*([^)]*))?\)$/;
 

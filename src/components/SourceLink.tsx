@@ -1,4 +1,4 @@
-import type { ReactNode } from "react";
+import { memo, type ReactNode } from "react";
 import { Link } from "react-router-dom";
 import { type Source, sourcePath, sources } from "../lib/sources";
 import { SpeciesName } from "./Formula";
@@ -6,7 +6,7 @@ import { SpeciesName } from "./Formula";
 const quiet = "underline decoration-rule underline-offset-3 hover:decoration-ink";
 
 /** Leads to the paragraph of the method or the data that a line rests on. */
-export function MethodLink({ to, children }: { to: Source; children?: ReactNode }) {
+export const MethodLink = memo(function MethodLink({ to, children }: { to: Source; children?: ReactNode }) {
   const [document, , words] = sources[to];
   return (
     <Link
@@ -19,10 +19,10 @@ export function MethodLink({ to, children }: { to: Source; children?: ReactNode 
       {children ?? document}
     </Link>
   );
-}
+});
 
 /** A species' name that leads to its row of the library: values, source and grade. */
-export function SpeciesLink({ id, withPhase = false }: { id: string; withPhase?: boolean }) {
+export const SpeciesLink = memo(function SpeciesLink({ id, withPhase = false }: { id: string; withPhase?: boolean }) {
   return (
     <Link
       to={`/chemistry/${encodeURIComponent(id)}`}
@@ -32,4 +32,4 @@ export function SpeciesLink({ id, withPhase = false }: { id: string; withPhase?:
       <SpeciesName id={id} withPhase={withPhase} />
     </Link>
   );
-}
+});

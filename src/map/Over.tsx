@@ -2,16 +2,12 @@ import { useMemo, useSyncExternalStore } from "react";
 import type { Sheet } from "./boxes";
 import type { MapContent } from "./content";
 import { SetPointHandle, type SetPointHandleProps } from "./handle";
-import { placedNames } from "./names/placedNames";
+import { useNames } from "./names/useNames";
 import { Names, Overlay } from "./svg/Overlay";
 import type { PlacedText } from "./texts";
 import type { TrialMark } from "./trialMarks";
-import { useRested } from "./useRested";
 import type { MapView } from "./view";
 import type { MovingView } from "./zoom";
-
-/** Names may come so long after what they name, ms: placing them takes longer than the rest of a frame. */
-const NAMES_AFTER = 120;
 
 const NONE: readonly PlacedText[] = [];
 
@@ -29,13 +25,12 @@ export interface OverProps {
 export function Over({ content, sheet, view, marks, live, handle }: OverProps) {
   const moving = useSyncExternalStore(live.subscribe, live.get);
   const asked = useMemo(() => ({ content, sheet, view, marks }), [content, sheet, view, marks]);
-  const rested = useRested(asked, NAMES_AFTER);
-  const names = useMemo(() => placedNames(rested.content, rested.sheet, rested.view, rested.marks), [rested]);
+  const { names, of: named } = useNames(asked);
   const { visible } = view;
   const shown = useMemo(() => (moving ? { ...view, visible: moving } : view), [view, moving]);
   const namesIn = useMemo(
-    () => ({ visible: moving ?? visible, colours: rested.view.colours }),
-    [moving, visible, rested],
+    () => ({ visible: moving ?? visible, colours: named.view.colours }),
+    [moving, visible, named],
   );
   return (
     <>
@@ -50,7 +45,7 @@ export function Over({ content, sheet, view, marks, live, handle }: OverProps) {
         aria-hidden
         data-testid="map-names"
       >
-        <Names names={names} sheet={rested.sheet} view={namesIn} />
+        <Names names={names} sheet={named.sheet} view={namesIn} />
       </svg>
       {handle && view.layers.setPoint && <SetPointHandle sheet={sheet} visible={shown.visible} {...handle} />}
     </>

@@ -21,10 +21,9 @@ export interface PlotProps {
   onRelayout: (change: Record<string, unknown>) => void;
   /** the axes move under the hand, before they settle */
   onRelayouting?: (change: Record<string, unknown>) => void;
-  onDrawn: () => void;
 }
 
-export default function Plot({ figure, onRelayout, onRelayouting, onDrawn }: PlotProps) {
+export default function Plot({ figure, onRelayout, onRelayouting }: PlotProps) {
   return (
     <Plotted
       data={figure.data}
@@ -32,8 +31,6 @@ export default function Plot({ figure, onRelayout, onRelayouting, onDrawn }: Plo
       config={config}
       onRelayout={onRelayout as (event: unknown) => void}
       onRelayouting={onRelayouting as ((event: unknown) => void) | undefined}
-      onInitialized={onDrawn}
-      onUpdate={onDrawn}
       style={{ width: figure.layout.width, height: figure.layout.height }}
     />
   );

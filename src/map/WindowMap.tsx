@@ -1,19 +1,20 @@
-import { lazy, Suspense, useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { lazy, Suspense, useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import { mapPixels, sheetBoxes } from "./boxes";
 import { type ContentWishes, mapContent } from "./content";
 import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
-import { mapFigure } from "./figure";
+import { mapLayout, mapTraces } from "./figure";
 import type { SetPointHandleProps } from "./handle";
 import { LimitHover, type NamedLimit } from "./LimitHover";
 import type { LimitStore } from "./limitStore";
 import { Over } from "./Over";
 import Plot from "./Plot";
 import type { ProposalStore } from "./proposalStore";
-import type { PlotTrace } from "./plotTypes";
+import type { Figure, PlotLayout, PlotTrace } from "./plotTypes";
 import { Touch } from "./Touch";
+import { Under } from "./Under";
 import { nearestMark, type ShownTrials, TrialsLayer } from "./TrialsLayer";
 import { useSize } from "./useSize";
 import { drawnMetals, type MapView } from "./view";
@@ -53,15 +54,15 @@ export interface WindowMapProps {
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
 const REST = 160;
 
-/** The window map: one Plotly figure, over it names, strips and reach bars, and the cursor, which redraws neither.
- *  It brings Plotly along: import it late. */
+/** The window map: fields and windows as shapes, over them Plotly's axes, names, strips and reach bars, and the cursor, which redraws none
+ *  of them. It brings Plotly along: import it late. */
 export default function WindowMap(props: WindowMapProps) {
   const { asked, view, onSight, dragMode, cursor, onPick, label, describedBy, handle, trials, proposals, overlay } =
     props;
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
-  const { frame, scale, visible } = view;
+  const { frame, scale, visible, colours } = view;
   const crosscuts = view.layers.crosscuts && content.through !== null;
   const pinned = content.pinned !== null;
   const freeAcid = content.freeAcid !== null;
@@ -81,11 +82,18 @@ export default function WindowMap(props: WindowMapProps) {
       }),
     [size, metals, content.reaches.length, crosscuts, reach, freeAcid, pinned],
   );
-  const figure = useMemo(() => {
-    if (!sheet) return null;
-    const made = mapFigure(content, sheet, view, dragMode);
-    return overlay ? { ...made, data: [...made.data, ...overlay] } : made;
-  }, [content, sheet, view, dragMode, overlay]);
+  const traces = useMemo(() => [...mapTraces(content, view), ...(overlay ?? [])], [content, view, overlay]);
+  // The chart has nothing but the axes: while they say the same it is left alone.
+  const axes = useMemo(
+    () => sheet && JSON.stringify(mapLayout(sheet, { visible, scale, colours }, dragMode)),
+    [sheet, visible, scale, colours, dragMode],
+  );
+  const [rests, setRests] = useState(0);
+  const figure = useMemo(
+    (): Figure | null =>
+      axes === null ? null : { data: [], layout: { ...(JSON.parse(axes) as PlotLayout), datarevision: rests } },
+    [axes, rests],
+  );
 
   const [live] = useState(() => new MovingView());
   const rest = useRef(0);
@@ -98,7 +106,7 @@ export default function WindowMap(props: WindowMapProps) {
     (change: Record<string, unknown>) => live.set(moved(change) ?? frame),
     [live, moved, frame],
   );
-  // Names are placed anew, and the figure drawn anew, when the hand rests: a wheel would else wait for it at every notch.
+  // Names are placed anew, and the axes drawn anew, when the hand rests: a wheel would else wait for it at every notch.
   const onRelayout = useCallback(
     (change: Record<string, unknown>) => {
       const next = moved(change);
@@ -106,6 +114,8 @@ export default function WindowMap(props: WindowMapProps) {
       clearTimeout(rest.current);
       rest.current = window.setTimeout(() => {
         onSight(next);
+        // Drawn anew even where nothing changed: the chart may stand beyond the frame, where it is not let.
+        setRests((n) => n + 1);
         requestAnimationFrame(() => live.set(null));
       }, REST);
     },
@@ -137,9 +147,9 @@ export default function WindowMap(props: WindowMapProps) {
     },
     [sheet, visible, trials],
   );
-  const onDrawn = useCallback(() => {
-    if (holder.current) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
-  }, []);
+  useLayoutEffect(() => {
+    if (holder.current && figure) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
+  }, [traces, figure]);
 
   return (
     <div
@@ -154,7 +164,8 @@ export default function WindowMap(props: WindowMapProps) {
     >
       {figure && sheet ? (
         <>
-          <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} onDrawn={onDrawn} />
+          <Under traces={traces} sheet={sheet} view={view} live={live} />
+          <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} />
           <Over
             content={content}
             sheet={sheet}

@@ -1,6 +1,6 @@
 import { domains, type Sheet } from "./boxes";
 import type { MapContent } from "./content";
-import type { Figure, PlotAxis, PlotLayout, PlotTrace } from "./plotTypes";
+import type { PlotAxis, PlotLayout, PlotTrace } from "./plotTypes";
 import { boundaryTraces } from "./traces/fields";
 import { gasTraces } from "./traces/gases";
 import { openGroundTraces, shutGroundTraces, windowOutlineTraces } from "./traces/ground";
@@ -11,8 +11,8 @@ import { robustTraces } from "./traces/robust";
 import { setPointTraces } from "./traces/setPoint";
 import { type MapView, MONO } from "./view";
 
-/** Traces from the ground up: sheet, light, hatching, hazard, boundaries, lines, outline, set point. Names, strips and bars stand over
- *  them (svg/Overlay.tsx): each trace and each word costs the chart at every step of a drag. */
+/** Traces from the ground up: light, hatching, hazard, boundaries, lines, outline, set point. Drawn by svg/Shapes.tsx; names, strips and
+ *  bars stand over them (svg/Overlay.tsx). The chart has the axes. */
 export function mapTraces(content: MapContent, view: MapView): PlotTrace[] {
   const { solution } = content;
   const { layers } = view;
@@ -36,7 +36,11 @@ export function mapTraces(content: MapContent, view: MapView): PlotTrace[] {
 }
 
 /** Axes and their ranges: what is in sight. */
-export function mapLayout(sheet: Sheet, view: MapView, dragMode: PlotLayout["dragmode"] = "zoom"): PlotLayout {
+export function mapLayout(
+  sheet: Sheet,
+  view: Pick<MapView, "visible" | "colours" | "scale">,
+  dragMode: PlotLayout["dragmode"] = "zoom",
+): PlotLayout {
   const { visible, colours, scale } = view;
   const place = domains(sheet, sheet.map);
   const axis: Partial<PlotAxis> = {
@@ -64,7 +68,7 @@ export function mapLayout(sheet: Sheet, view: MapView, dragMode: PlotLayout["dra
     margin: sheet.margin,
     autosize: false,
     paper_bgcolor: "rgba(0,0,0,0)",
-    plot_bgcolor: colours.sheet,
+    plot_bgcolor: "rgba(0,0,0,0)",
     showlegend: false,
     hovermode: false,
     dragmode: dragMode,
@@ -88,13 +92,3 @@ function tickFormat(unit: string, span: number): string {
   if (unit !== "V") return span < 8 ? ".1f" : "d";
   return span < 0.08 ? ".3f" : span < 0.8 ? ".2f" : ".1f";
 }
-
-export const mapFigure = (
-  content: MapContent,
-  sheet: Sheet,
-  view: MapView,
-  dragMode?: PlotLayout["dragmode"],
-): Figure => ({
-  data: mapTraces(content, view),
-  layout: mapLayout(sheet, view, dragMode),
-});

@@ -1,15 +1,16 @@
 import bold from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-700-normal.woff2?url";
 import regular from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-400-normal.woff2?url";
-import { createElement } from "react";
+import { createElement, type ReactElement } from "react";
 import { flushSync } from "react-dom";
 import { createRoot } from "react-dom/client";
 import { sheetBoxes, type Sheet } from "./boxes";
 import type { MapContent } from "./content";
-import { mapFigure } from "./figure";
+import { mapLayout, mapTraces } from "./figure";
 import { placedNames } from "./names/placedNames";
 import { picture } from "./Plot";
 import type { Figure } from "./plotTypes";
 import { Overlay } from "./svg/Overlay";
+import { Shapes } from "./svg/Shapes";
 import { drawnMetals, type MapView, MONO } from "./view";
 
 const WIDTH = 1000;
@@ -17,7 +18,7 @@ const HEIGHT = 860;
 const LINE = 16;
 const HEAD = 30;
 
-/** A picture in the making: the figure with its caption, and what stands over it. */
+/** A picture in the making: the axes with the caption, and what stands under and over them. */
 export interface Picture {
   figure: Figure;
   content: MapContent;
@@ -42,7 +43,7 @@ export function captionedPicture(
     freeAcid: content.freeAcid !== null,
     pinned: content.pinned !== null,
   });
-  const { data, layout } = mapFigure(content, sheet, view);
+  const layout = mapLayout(sheet, view);
   const foot = LINE * caption.length + 18;
   const words = (text: string, y: number, size: number, color: string) => ({
     text,
@@ -58,12 +59,11 @@ export function captionedPicture(
     font: { family: MONO, size, color },
   });
   const figure = {
-    data,
+    data: [],
     layout: {
       ...layout,
       height: HEIGHT + HEAD + foot,
       margin: { ...layout.margin, t: layout.margin.t + HEAD, b: layout.margin.b + foot },
-      paper_bgcolor: view.colours.paper,
       annotations: [
         { ...words(`<b>${title}</b>`, 1, 15, view.colours.ink), yshift: HEAD + 16 },
         ...caption.map((line, i) => ({
@@ -76,22 +76,26 @@ export function captionedPicture(
   return { figure, content, sheet, view };
 }
 
-/** What stands over the figure, as SVG text moved below the title. */
-function overlaySvg({ content, sheet, view }: Picture): string {
+/** One of the map's drawings as SVG text, moved below the title. */
+function svgText(drawing: ReactElement): string {
   const holder = document.createElement("div");
   const root = createRoot(holder);
-  const trials =
-    view.layers.trials && content.trials ? { ...content.trials, colours: view.colours, brushed: null } : null;
-  flushSync(() =>
-    root.render(
-      createElement(Overlay, { content, sheet, view, names: placedNames(content, sheet, view), trials, picture: true }),
-    ),
-  );
+  flushSync(() => root.render(drawing));
   const svg = holder.querySelector("svg");
   svg?.setAttribute("y", String(HEAD));
   const text = svg ? new XMLSerializer().serializeToString(svg) : "";
   root.unmount();
   return text;
+}
+
+const underSvg = ({ content, sheet, view }: Picture): string =>
+  svgText(createElement(Shapes, { traces: mapTraces(content, view), sheet, visible: view.visible, view }));
+
+function overSvg({ content, sheet, view }: Picture): string {
+  const trials =
+    view.layers.trials && content.trials ? { ...content.trials, colours: view.colours, brushed: null } : null;
+  const names = placedNames(content, sheet, view);
+  return svgText(createElement(Overlay, { content, sheet, view, names, trials, picture: true }));
 }
 
 const asDataUrl = async (url: string): Promise<string> => {
@@ -114,10 +118,11 @@ async function standaloneSvg(wanted: Picture): Promise<string> {
         `@font-face{font-family:"JetBrains Mono";font-weight:${weight};src:url(${await asDataUrl(file)}) format("woff2")}`,
     ),
   );
-  const over = overlaySvg(wanted);
+  const { width, height } = wanted.figure.layout;
+  const paper = `<rect width="${width}" height="${height}" fill="${wanted.view.colours.paper}"/>`;
   return svg
-    .replace(/(<svg[^>]*>)/, (tag) => `${tag}<style>${faces.join("")}</style>`)
-    .replace(/<\/svg>\s*$/, () => `${over}</svg>`);
+    .replace(/(<svg[^>]*>)/, (tag) => `${tag}<style>${faces.join("")}</style>${paper}${underSvg(wanted)}`)
+    .replace(/<\/svg>\s*$/, () => `${overSvg(wanted)}</svg>`);
 }
 
 async function rasterised(svg: string, width: number, height: number): Promise<Blob> {

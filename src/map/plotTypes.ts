@@ -1,10 +1,9 @@
+import type { Hatch } from "../../shared/drawing/hatches";
+
 /** The few parts of Plotly's figure that the map uses, typed tightly; its own schema covers fifty chart kinds. */
 export type Coordinate = number | null;
 
-export interface PatternFill {
-  shape: string;
-  size: number;
-  solidity: number;
+export interface PatternFill extends Hatch {
   fgcolor: string;
   fgopacity: number;
   bgcolor: string;
@@ -99,6 +98,8 @@ export interface PlotLayout {
   yaxis: PlotAxis;
   yaxis2?: PlotAxis;
   annotations: PlotAnnotation[];
+  /** another number draws the same anew */
+  datarevision?: number;
 }
 
 export interface Figure {
@@ -106,7 +107,7 @@ export interface Figure {
   layout: PlotLayout;
 }
 
-/** What every trace of the map shares: no hover box, no legend, gaps kept. */
+/** What every trace shares: no hover box, no legend, gaps kept. */
 export const trace = (parts: Omit<PlotTrace, "type" | "hoverinfo" | "showlegend" | "connectgaps">): PlotTrace => ({
   type: "scatter",
   hoverinfo: "skip",

@@ -12,9 +12,16 @@ export const plainText = (text: string): FormulaPart[] => [{ text, kind: "plain"
 export const textWidth = (parts: readonly FormulaPart[], size: number): number =>
   parts.reduce((n, p) => n + p.text.length * (p.kind === "plain" ? 1 : SMALL), 0) * ADVANCE * size;
 
+/** Every name is set once: a map names the same few dozen species at each step of a drag. */
+const set = new Map<string, readonly FormulaPart[]>();
+
 /** A species' name for the map.
  *  @param id  as in the tables     @returns  its parts, typeset; a neutral dissolved species says so */
-export function speciesText(id: string): FormulaPart[] {
+export function speciesText(id: string): readonly FormulaPart[] {
+  const known = set.get(id);
+  if (known) return known;
   const parts = speciesParts(id);
-  return [...typeset(parts.formula), ...(needsPhase(parts) ? plainText("(aq)") : [])];
+  const text = [...typeset(parts.formula), ...(needsPhase(parts) ? plainText("(aq)") : [])];
+  set.set(id, text);
+  return text;
 }

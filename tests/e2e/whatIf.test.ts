@@ -59,8 +59,17 @@ async function seen(page: Page) {
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
   const table = page.getByRole("grid", { name: "Trials on the map" });
+  // Where the corners stand is compared apart: an address rounds what is in sight.
+  const traces = await plan.traces();
   return {
-    figure: await plan.traces(),
+    figure: traces.map(({ uid, name, fillcolor, hatched, x }) => ({
+      uid,
+      name,
+      fillcolor,
+      hatched,
+      corners: x.length,
+    })),
+    ticks: await page.locator("[data-testid=window-map] :is(.xtick, .ytick) text").allTextContents(),
     names: (await page.getByTestId("map-names").locator("[data-name]").allTextContents()).sort(),
     tools: await page.getByRole("button", { name: /metals$|^as a|^as text$| with / }).allInnerTexts(),
     pinned: await page.getByTestId("pinned-line").allInnerTexts(),
@@ -71,6 +80,18 @@ async function seen(page: Page) {
     comments: await page.getByRole("region", { name: "Comments" }).count(),
     text: await page.getByRole("region", { name: "The map as text" }).allInnerTexts(),
   };
+}
+
+/** Every corner of one figure within a thousandth of a pH or V of the other's. */
+async function expectSameGround(a: Page, b: Page) {
+  const [here, there] = await Promise.all([a, b].map((page) => new WorkspaceScreen(page).traces()));
+  for (const [i, { uid, x, y }] of (here ?? []).entries())
+    for (const [axis, values] of [x, y].entries())
+      for (const [k, value] of values.entries()) {
+        const other = there?.[i]?.[axis === 0 ? "x" : "y"][k] ?? null;
+        if (value === null) expect(other, uid).toBeNull();
+        else expect(Math.abs(value - (other ?? NaN)), uid).toBeLessThan(2e-3);
+      }
 }
 
 test("whatever is seen of a plan comes back from its address, for somebody else as well", async () => {
@@ -104,6 +125,7 @@ test("whatever is seen of a plan comes back from its address, for somebody else 
 
   const { page: other } = await openPageAs("manager", { path: `${path}${new URL(page.url()).search}` });
   await expect.poll(() => seen(other)).toEqual(there);
+  await expectSameGround(page, other);
   expect(new URL(other.url()).search).toBe(new URL(page.url()).search);
 
   // Two metals compared, the map as text, the comments in place of the answers.

@@ -27,7 +27,7 @@ export function Curve({ rows, name }: { rows: readonly ReactionValues[]; name: C
     >
       {figure && (
         <Suspense fallback={<Loading label="Drawing" />}>
-          <Plot figure={figure} onRelayout={nothing} onDrawn={nothing} />
+          <Plot figure={figure} onRelayout={nothing} />
         </Suspense>
       )}
     </div>

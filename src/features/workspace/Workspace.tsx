@@ -34,7 +34,7 @@ import { useDraft } from "./model/useDraft";
 import { useLook } from "./model/useLook";
 import { useWorkspaceKeys } from "./model/useWorkspaceKeys";
 import { useMapModel } from "./model/useMapModel";
-import { useAnalysis, useGases, useHeld } from "./model/usePoint";
+import { useGases, useHeld } from "./model/usePoint";
 import { usePrinting } from "./model/usePrinting";
 import { useSight } from "./model/useSight";
 import { useSolved } from "./model/useSolved";
@@ -80,8 +80,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const inputs = frozen?.inputs ?? proposal ?? draft.inputs;
   const fixed = frozen !== null || proposal !== null;
   const look = useLook(start.view, plan.id, inputs, proposal !== null);
-  const { problem, solution: solved, failure } = useSolved(inputs, data);
-  const analysis = useAnalysis(problem, data);
+  const { problem, solution: solved, analysis, failure } = useSolved(inputs, data);
   const { solution, held } = useHeld(inputs, solved, analysis);
   const advice = useAdvice(problem, data, failure === null && solution?.windows.length === 0);
   const robust = useRobust(problem, inputs.ranges, data);

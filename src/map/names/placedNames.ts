@@ -16,13 +16,19 @@ const MARK = 7;
 type Mark = Pick<TrialMark, "pH" | "Eh">;
 const NONE: readonly Mark[] = [];
 
-/** Names inside the fields and windows, none over another; what finds no room is left to the read-out.
- *  @param marks  of trials painted over the names: a name goes where fewest cover it */
+export interface NamingAround {
+  /** of trials painted over the names: a name goes where fewest cover it */
+  marks?: readonly Mark[];
+  /** names as they stood: those that still fit stay where they are */
+  before?: readonly PlacedText[];
+}
+
+/** Names inside the fields and windows, none over another; what finds no room is left to the read-out. */
 export function placedNames(
   content: MapContent,
   sheet: Sheet,
   view: MapView,
-  marks: readonly Mark[] = content.trials?.marks ?? NONE,
+  { marks = content.trials?.marks ?? NONE, before = [] }: NamingAround = {},
 ): PlacedText[] {
   const { solution, boundaries } = content;
   const { box, toPixel, toPoint } = mapPixels(sheet, view.visible);
@@ -81,7 +87,13 @@ export function placedNames(
       [x1, y1],
     ]),
   ];
-  const placed = placeLabels(wishes, inSight, taken, lines);
+  const placed = placeLabels(
+    wishes,
+    inSight,
+    taken,
+    lines,
+    new Map(before.map(({ id, pH, Eh }) => [id, toPixel(pH, Eh)])),
+  );
   const found = wishes.flatMap((wish): PlacedText[] => {
     const spot = placed.get(wish.id);
     if (!spot) return [];

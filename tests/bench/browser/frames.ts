@@ -16,11 +16,6 @@ export interface Frame {
   limits: string;
 }
 
-interface PlotElement extends HTMLElement {
-  data: { uid: string; x: (number | null)[]; y: (number | null)[] }[];
-  _fullLayout: Record<"xaxis" | "yaxis", { _offset: number; d2p: (value: number) => number }>;
-}
-
 /** The part of the page's window that the measurement needs. */
 interface Timed {
   frames: Frame[];
@@ -34,35 +29,35 @@ interface Timed {
 
 /** In the page: from the time stamp of every pointer move to the end of the task after the frame in which polygons, set point, its handle
  *  and the read-out had all followed.
- *  In the mode "redraw" the same figure is drawn again at every move, its data unchanged, and nothing else is done. */
-async function watch(plotlyChunk: string): Promise<void> {
+ *  In the mode "redraw" every shape of the same figure is drawn again at every move, its data unchanged, and nothing else is done. */
+function watch(): void {
   const timed = window as unknown as Timed;
-  const plot = document.querySelector(".js-plotly-plot") as PlotElement;
   const holder = document.querySelector("[data-testid=window-map]") as HTMLElement;
-  const chunk = (await import(plotlyChunk)) as Record<string, () => { redraw?: (plot: Element) => void }>;
-  const plotly = Object.values(chunk)
-    .map((part) => {
-      try {
-        return part();
-      } catch {
-        return {}; // another part of the chunk
+  const attributes = ["d", "x", "y", "width", "height", "x1", "x2", "y1", "y2", "cx", "cy", "transform"];
+  const redraw = () => {
+    for (const shape of holder.querySelectorAll("svg :is(path, rect, line, circle, text)"))
+      for (const name of attributes) {
+        const value = shape.getAttribute(name);
+        if (value === null) continue;
+        // set to what it was, an attribute may be passed over
+        shape.removeAttribute(name);
+        shape.setAttribute(name, value);
       }
-    })
-    .find((part) => typeof part.redraw === "function");
-  if (!plotly?.redraw) throw new Error("The chart library is not where it was.");
+  };
   timed.frames = [];
   timed.mode = "drag";
   const text = (selector: string) =>
     document.querySelector<HTMLElement>(selector)?.innerText.replace(/\s+/g, " ") ?? "";
   const seen = (wait: number): Frame => {
-    const at = plot.data.find((t) => t.uid === "set-point");
-    const { xaxis, yaxis } = plot._fullLayout;
+    const mark = document.querySelector("[data-trace=set-point] circle");
     const grip = document.querySelector<HTMLElement>("[data-handle]");
-    const polygons = plot.data.filter((t) => /^(fields|open|outline|shut)-/.test(t.uid)).map((t) => [t.uid, t.x, t.y]);
+    const paths = ["fields", "open", "outline", "shut"].flatMap((of) => [
+      ...document.querySelectorAll(`[data-trace^=${of}-] path`),
+    ]);
     return {
       wait,
-      polygons: JSON.stringify(polygons),
-      mark: at ? [xaxis._offset + xaxis.d2p(at.x.at(-1) ?? 0), yaxis._offset + yaxis.d2p(at.y.at(-1) ?? 0)] : null,
+      polygons: paths.map((path) => path.getAttribute("d")).join(),
+      mark: mark ? [Number(mark.getAttribute("cx")), Number(mark.getAttribute("cy"))] : null,
       handle: grip ? [parseFloat(grip.style.left), parseFloat(grip.style.top)] : null,
       answer: text("[data-testid=set-point]"),
       readOut: text("[data-testid=read-out] > span"),
@@ -100,20 +95,14 @@ async function watch(plotlyChunk: string): Promise<void> {
       timed.since ??= event.timeStamp;
       timed.overMap = event.target instanceof Element && event.target.closest("[data-testid=window-map]") !== null;
       if (timed.mode === "drag") return;
-      plotly.redraw?.(plot);
+      redraw();
       drawn();
     },
     { capture: true, passive: true },
   );
 }
 
-export async function watchFrames(page: Page): Promise<void> {
-  const chunk = await page.evaluate(
-    () => performance.getEntriesByType("resource").find(({ name }) => /plotly-.*\.js$/.test(name))?.name,
-  );
-  if (chunk === undefined) throw new Error("The page has not loaded its chart library.");
-  await page.evaluate(watch, chunk);
-}
+export const watchFrames = (page: Page): Promise<void> => page.evaluate(watch);
 
 export const setMode = (page: Page, mode: Timed["mode"]): Promise<void> =>
   page.evaluate((m) => void ((window as unknown as Timed).mode = m), mode);

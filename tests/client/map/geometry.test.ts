@@ -192,6 +192,21 @@ describe("names in the fields", () => {
     expect(Math.abs(a[0] - b[0]) >= 60 || Math.abs(a[1] - b[1]) >= 16).toBe(true);
     for (const p of [a, b]) expect(p[0] - 30).toBeGreaterThanOrEqual(120);
   });
+  test("a name stays where it stood while it fits there, and is placed anew when it no longer does", () => {
+    const stood = new Map([["a", [70, 40] as const]]);
+    const at = (x1: number) => placeLabels([wish("a", block(0, 0, x1, 300))], view, [], [], stood).get("a");
+    expect(at(400)).toEqual([70, 40]);
+    expect(at(400)).not.toEqual(placeLabels([wish("a", block(0, 0, 400, 300))], view, []).get("a"));
+    expect(at(90)![0] + 30).toBeLessThanOrEqual(90);
+    const beside = placeLabels(
+      [wish("a", block(0, 0, 400, 300))],
+      view,
+      [{ x0: 60, y0: 30, x1: 80, y1: 50 }],
+      [],
+      stood,
+    );
+    expect(beside.get("a")).not.toEqual([70, 40]);
+  });
   test("a name keeps off a line that crosses its field where it can", () => {
     const at = placeLabels(
       [wish("a", block(0, 0, 400, 300))],

@@ -33,15 +33,12 @@ export interface PaintedName {
   Eh: number;
 }
 
-/** Plotly hangs the figure and its axes on the element it draws in. */
+/** Plotly hangs its axes on the element it draws in. */
 interface PlotlyElement extends HTMLElement {
-  data: { uid: string; name: string; fillcolor?: string; fillpattern?: { shape?: string }; x: []; y: [] }[];
   _fullLayout: Record<
     "xaxis" | "yaxis",
     { _offset: number; _length: number; d2p: (value: number) => number; p2d: (px: number) => number }
-  > & {
-    plot_bgcolor: string;
-  };
+  >;
 }
 
 /** A plan on the table: left asks, middle shows, right answers. */
@@ -57,7 +54,7 @@ export class WorkspaceScreen {
   readonly button = (name: string) => this.page.getByRole("button", { name, exact: true });
 
   async drawn(): Promise<void> {
-    await this.page.locator("[data-testid=window-map][data-drawn] .scatterlayer .trace").first().waitFor();
+    await this.page.locator("[data-testid=window-map][data-drawn] .xtick text").first().waitFor();
   }
 
   /** What the right side says of the window in hand. */
@@ -79,16 +76,26 @@ export class WorkspaceScreen {
   }
 
   traces(): Promise<DrawnTrace[]> {
-    return this.plot().evaluate((element) =>
-      (element as PlotlyElement).data.map(({ uid, name, fillcolor = "", fillpattern, x, y }) => ({
-        uid,
-        name,
-        fillcolor,
-        hatched: Boolean(fillpattern?.shape),
-        x: [...x],
-        y: [...y],
-      })),
-    );
+    return this.plot().evaluate((element) => {
+      const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
+      const traces = document.querySelectorAll<SVGGElement>("[data-testid=map-shapes] [data-trace]");
+      return Array.from(traces, (trace) => {
+        const path = trace.querySelector("path");
+        const fill = path?.getAttribute("fill") ?? "none";
+        const parts = (path?.getAttribute("d") ?? "").split("M").filter((part) => part !== "");
+        const rings = parts.map((part) => part.split("L").map((pair) => pair.split(" ").map(Number)));
+        const gapped = (axis: 0 | 1, from: (px: number) => number) =>
+          rings.flatMap((ring, i) => [...(i > 0 ? [null] : []), ...ring.map((pair) => from(pair[axis] ?? NaN))]);
+        return {
+          uid: trace.dataset.trace ?? "",
+          name: trace.dataset.title ?? "",
+          fillcolor: fill === "none" || fill.startsWith("url") ? "" : fill,
+          hatched: fill.startsWith("url"),
+          x: gapped(0, (px) => xaxis.p2d(px - xaxis._offset)),
+          y: gapped(1, (px) => yaxis.p2d(px - yaxis._offset)),
+        };
+      });
+    });
   }
 
   async trace(uid: string): Promise<DrawnTrace | undefined> {
@@ -96,8 +103,8 @@ export class WorkspaceScreen {
   }
 
   /** Colour of the map's ground. */
-  ground(): Promise<string> {
-    return this.plot().evaluate((element) => (element as PlotlyElement)._fullLayout.plot_bgcolor);
+  async ground(): Promise<string> {
+    return (await this.page.locator("[data-testid=map-shapes] [data-ground]").getAttribute("fill")) ?? "";
   }
 
   /** The second row under the pH axis: free acid, g/L, and the pH it stands at. */

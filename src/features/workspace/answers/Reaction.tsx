@@ -1,4 +1,4 @@
-import { Fragment } from "react";
+import { Fragment, memo } from "react";
 import type { ReactionTerm } from "../../../../shared/solution";
 import { Link } from "react-router-dom";
 import { Formula } from "../../../components/Formula";
@@ -30,12 +30,23 @@ function Half({ terms }: { terms: readonly ReactionTerm[] }) {
 }
 
 /** A balanced reaction, typeset, from the window's side to what lies beyond; each species leads to its row of the library. */
-export function Reaction({ terms }: { terms: readonly ReactionTerm[] }) {
+export const Reaction = memo(function Reaction({ terms }: { terms: readonly ReactionTerm[] }) {
   return (
     <span className="font-sans">
       <Half terms={terms.filter((t) => t.coefficient < 0)} />
       <span className="font-mono"> → </span>
       <Half terms={terms.filter((t) => t.coefficient > 0)} />
     </span>
+  );
+}, sameReaction);
+
+/** Every solution brings terms of its own; most of them say the same. */
+function sameReaction(
+  { terms: a }: { terms: readonly ReactionTerm[] },
+  { terms: b }: { terms: readonly ReactionTerm[] },
+) {
+  return (
+    a.length === b.length &&
+    a.every((term, i) => term.species === b[i]?.species && term.coefficient === b[i]?.coefficient)
   );
 }

@@ -10,7 +10,7 @@ import type { Layers } from "../../../map/view";
 import { baseOf, decodeSettings } from "../address/settings";
 import { readDraft } from "../model/draftShelf";
 import { useMapModel } from "../model/useMapModel";
-import { useAnalysis, useHeld } from "../model/usePoint";
+import { useHeld } from "../model/usePoint";
 import { wholeSight } from "../model/useSight";
 import { useSolved } from "../model/useSolved";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -80,8 +80,7 @@ const shown: Layers = {
 
 /** One side solved, and its map. */
 export function useSolvedSide({ inputs, data }: Side, scale: PotentialScale, colours: ThemeColours, plain: boolean) {
-  const { problem, solution: solved, failure } = useSolved(inputs, data);
-  const analysis = useAnalysis(problem, data);
+  const { problem, solution: solved, analysis, failure } = useSolved(inputs, data);
   const { solution, held } = useHeld(inputs, solved, analysis);
   const chosen = held?.index ?? 0;
   const model = useMapModel({

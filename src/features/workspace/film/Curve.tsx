@@ -25,7 +25,7 @@ export function Curve({ sweep, inputs, here }: { sweep: Sweep; inputs: PlanInput
     <div ref={holder} role="img" aria-label={`Margin and open ground against ${name}`} style={{ height: HEIGHT }}>
       {figure && (
         <Suspense fallback={<Loading label="Drawing" />}>
-          <Plot figure={figure} onRelayout={nothing} onDrawn={nothing} />
+          <Plot figure={figure} onRelayout={nothing} />
         </Suspense>
       )}
     </div>

@@ -1,6 +1,6 @@
 import { useMemo } from "react";
 import { FormulaText } from "../../../components/FormulaText";
-import { useRested } from "../../../map/useRested";
+import { useRested } from "../../../lib/useRested";
 import { mapText } from "./mapText";
 
 /** The words may come so long after the map, ms. */

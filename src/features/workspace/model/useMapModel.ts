@@ -8,6 +8,7 @@ import type { Outline, Point, Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ThemeColours } from "../../../lib/theme";
+import { useRested } from "../../../lib/useRested";
 import type { ContentWishes } from "../../../map/content";
 import type { ShownRange } from "../../../map/traces/practice";
 import { trustOf } from "../../../map/trust";
@@ -49,6 +50,9 @@ interface Wishes {
   freeAcid: FreeAcidCurve | null;
 }
 
+/** ms: the thin edges of the other solids basis may stay so long behind the hand */
+const OTHER_BASIS_AFTER = 100;
+
 const middle = ([lo, hi]: readonly [number, number]) => (lo + hi) / 2;
 
 /** All that the map, its pictures and its read-out need; parts keep their identity while what they rest on stands. */
@@ -59,7 +63,8 @@ export function useMapModel(w: Wishes): MapModel | null {
   const { metals: planMetals, controlBand, preset } = inputs;
   const frame = solution?.frame ?? inputs.frame;
   const temperatureC = solution?.temperatureC ?? inputs.temperatureC;
-  const other = useOtherBasis(problem, data, layers.otherBasis && !plain);
+  const rested = useRested(problem, OTHER_BASIS_AFTER);
+  const other = useOtherBasis(rested, data, layers.otherBasis && !plain);
   const setPoint = solution?.windows[chosen]?.setPoint ?? null;
   const metals = useMemo(
     () => planMetals.map(({ element, role, requirement }) => ({ element, role, requirement })),

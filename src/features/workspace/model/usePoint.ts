@@ -1,22 +1,12 @@
 import { useCallback, useMemo } from "react";
-import { type Analysis, analyse } from "../../../../shared/analysis";
+import type { Analysis } from "../../../../shared/analysis";
 import { type HazardGas, hazardGases } from "../../../../shared/hazards/pressures";
 import { sharesGround } from "../../../../shared/hazards/reachesWindow";
 import { type HazardMap, hazardRegions } from "../../../../shared/hazards/regions";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
-import type { Problem } from "../../../../shared/schemas/problem";
 import { type HeldSetPoint, heldSetPoint } from "../../../../shared/setpoint/held";
 import type { Solution, Window } from "../../../../shared/solution";
-import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { useSwitches } from "./useMapSettings";
-
-/** The exact pieces behind the answer, for what is read at a point; null while the plan cannot be solved. */
-export function useAnalysis(problem: Problem, data: ChemicalData): Analysis | null {
-  return useMemo(() => {
-    const outcome = analyse(problem, data);
-    return outcome.ok ? outcome.value : null;
-  }, [problem, data]);
-}
 
 export interface Standing {
   /** with the held point in place of its window's deepest one */

@@ -1,24 +1,27 @@
 import { useMemo, useState } from "react";
+import { type Analysis, analyse } from "../../../../shared/analysis";
 import type { Failure, Outcome } from "../../../../shared/outcome";
 import { toProblem } from "../../../../shared/plan/toProblem";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
-import { solve } from "../../../../shared/solve";
+import { solutionOf, solve } from "../../../../shared/solve";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 
 export interface Solved {
   problem: Problem;
   /** of these inputs, or the last that could be solved while these cannot; null before any could */
   solution: Solution | null;
+  /** the exact pieces behind it, for what is read at a point; null while these inputs cannot be solved */
+  analysis: Analysis | null;
   failure: Failure | null;
 }
 
 /** Keeps the last answer that was one, so that a slip of the hand does not empty the screen. */
 class LastGood {
   private solution: Solution | null = null;
-  take(outcome: Outcome<Solution>): Solution | null {
-    if (outcome.ok) this.solution = outcome.value;
+  take(analysed: Outcome<Analysis>): Solution | null {
+    if (analysed.ok) this.solution = solutionOf(analysed.value, { shutGround: true });
     return this.solution;
   }
 }
@@ -30,8 +33,13 @@ export function useSolved(inputs: PlanInputs, data: ChemicalData): Solved {
   const asked = useMemo(() => JSON.stringify(toProblem(inputs, data)), [inputs, data]);
   return useMemo(() => {
     const problem = JSON.parse(asked) as Problem;
-    const outcome = solve(problem, data, { shutGround: true });
-    return { problem, solution: last.take(outcome), failure: outcome.ok ? null : outcome.error };
+    const analysed = analyse(problem, data);
+    return {
+      problem,
+      solution: last.take(analysed),
+      analysis: analysed.ok ? analysed.value : null,
+      failure: analysed.ok ? null : analysed.error,
+    };
   }, [asked, data, last]);
 }
 
