@@ -83,9 +83,17 @@ const usual: Readonly<Record<HazardGas, string>> = {
   H2: "Hydrogen: vent it high, keep ignition away; overpotential delays it and does not prevent it.",
 };
 
+/** Half of a total at a pKa, to the power of the atoms that the gas takes from it; hydrogen rests on none. */
+const overstated: Readonly<Record<HazardGas, string | null>> = {
+  ...{ HCN: "twice", H2S: "twice", AsH3: "twice", SbH3: "twice", Cl2: "four times", NH3: "twice" },
+  H2: null,
+};
+
 function caution(gas: HazardGas, { words }: Threshold, hot: boolean): string {
   const absolute = hot ? " Above 100 C the vessel is closed and gas pressures are absolute." : "";
-  return `Inside, the equilibrium pressure over this liquor reaches ${words}. It is what a closed headspace tends to, not a reading of the air, and near a pKa up to twice the true value. ${usual[gas]}${absolute}`;
+  const over = overstated[gas];
+  const share = over === null ? "" : `, and near a pKa up to ${over} the true value`;
+  return `Inside, the equilibrium pressure over this liquor reaches ${words}. It is what a closed headspace tends to, not a reading of the air${share}. ${usual[gas]}${absolute}`;
 }
 
 /** Hazard regions of a plan: per gas where its equilibrium pressure over the liquor reaches a threshold, with caution, deference, exposure

@@ -125,5 +125,13 @@ test("at least 20 published ranges are files, and of these at least 16 contain o
   expect(files.length).toBeGreaterThanOrEqual(20);
   expect(counts.contains + counts.overlaps).toBeGreaterThanOrEqual(16);
   expect(counts).toEqual({ contains: 25, overlaps: 3, neither: 3 });
+  const page = readFileSync(new URL("../../docs/data.md", import.meta.url), "utf8");
+  expect(page).toContain(
+    `${files.length} files, ${counts.contains} contain, ${counts.overlaps} overlap, ${counts.neither} neither.`,
+  );
+  for (const [, file] of files.filter(([, f]) => f.expected !== "contains"))
+    expect(page, "explained on the data page").toMatch(
+      new RegExp(`^\\| ${file.id} .*\\| ${file.expected} \\| .{30,}`, "m"),
+    );
   expect(files.filter(([, f]) => f.temperaturesC.some((T) => T > 150)).length).toBeGreaterThanOrEqual(1);
 });
