@@ -2,6 +2,7 @@ import { analyse, type Analysis } from "../analysis";
 import type { Convex } from "../geometry/convex";
 import { askedOf } from "../hazards/excluded";
 import { ok, type Outcome } from "../outcome";
+import { atTemperature, type Gammas } from "../plan/toProblem";
 import { solidsBases, TEMPERATURE_RANGE_C, type Problem } from "../schemas/problem";
 import { solve } from "../solve";
 import { demandName, type Demand, type Solution } from "../solution";
@@ -55,16 +56,26 @@ const MOST_BAR = 1e4;
 /** Why a problem has no window and what would open one: the gaps of conflicting pairs, and for each single activity,
  *  ligand total, the temperature, the solids basis and each hazard kept out the smallest change that opens a window.
  *  @param input  problem     @param data  library     @param onProgress  steps of the search done, and in all
+ *  @param gammas  of the plan: tenors by Davies become activities anew at every temperature tried
  *  @returns  advice; openings are empty where there is a window already
  *  @source  docs/method.md: outward search in even steps, then bisection on the existence of a window; between two steps
  *           an opening narrower than a step can be missed, and `searched` says how far and how finely it looked */
-export function adviceFor(input: unknown, data: ChemicalData, onProgress?: OnProgress): Outcome<Advice> {
+export function adviceFor(
+  input: unknown,
+  data: ChemicalData,
+  onProgress?: OnProgress,
+  gammas?: Gammas,
+): Outcome<Advice> {
   const solved = solve(input, data);
   if (!solved.ok) return solved;
   const { conflicts, windows } = solved.value;
   if (windows.length > 0) return ok({ conflicts, gaps: [], openings: [] });
   const problem = input as Problem;
-  return ok({ conflicts, gaps: adviceGaps(problem, data, conflicts), openings: openingsOf(problem, data, onProgress) });
+  return ok({
+    conflicts,
+    gaps: adviceGaps(problem, data, conflicts),
+    openings: openingsOf(problem, data, onProgress, gammas),
+  });
 }
 
 /** As far as a search for a single demand's ground goes beyond the frame. */
@@ -179,13 +190,13 @@ const ligandKnobs = (problem: Problem): Knob[] =>
     value: power,
   }));
 
-function temperatureKnob(problem: Problem): Knob {
+function temperatureKnob(problem: Problem, data: ChemicalData, gammas?: Gammas): Knob {
   const { min, max } = TEMPERATURE_RANGE_C;
   const from = problem.temperatureC;
   return {
     base: { change: "temperature", from, searched: `${min} to ${max} C in steps of ${KELVIN_STEP} K` },
     walk: { from, low: min, high: max, step: KELVIN_STEP },
-    at: (temperatureC) => ({ ...problem, temperatureC }),
+    at: atTemperature(problem, gammas, data),
     value: (x) => x,
   };
 }
@@ -217,8 +228,13 @@ const hazardKnobs = (problem: Problem): Knob[] =>
     };
   });
 
-function openingsOf(problem: Problem, data: ChemicalData, onProgress?: OnProgress): Opening[] {
-  const knobs = [...metalKnobs(problem), ...ligandKnobs(problem), temperatureKnob(problem), ...hazardKnobs(problem)];
+function openingsOf(problem: Problem, data: ChemicalData, onProgress?: OnProgress, gammas?: Gammas): Opening[] {
+  const knobs = [
+    ...metalKnobs(problem),
+    ...ligandKnobs(problem),
+    temperatureKnob(problem, data, gammas),
+    ...hazardKnobs(problem),
+  ];
   const total = knobs.reduce((sum, { walk }) => sum + stepsOf(walk), 0);
   let before = 0;
   const openings = knobs.map(({ base, walk, at, value }): Opening => {

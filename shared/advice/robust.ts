@@ -3,6 +3,7 @@ import type { Convex } from "../geometry/convex";
 import { common as commonGround } from "../geometry/overlay";
 import { ok, fail, type Outcome } from "../outcome";
 import type { HazardGas } from "../hazards/gases";
+import { atTemperature, type Gammas } from "../plan/toProblem";
 import { TEMPERATURE_RANGE_C, type Problem, type Requirement } from "../schemas/problem";
 import { coupleAt } from "../setpoint/couple";
 import { setPointOf } from "../setpoint/setPoint";
@@ -51,6 +52,7 @@ export const MOST_TEMPERATURES = 129;
  *  its window lies in fields whose pressure does not depend on the activity.
  *  @param problem  validated by the solver     @param ranges  C; activities by element, low and high     @param data  library
  *  @param onProgress  temperatures solved, and the most there can be
+ *  @param gammas  of the plan: tenors by Davies without a range become activities anew at every temperature
  *  @returns  outlines with set points (margin in control bands), and what was checked
  *  @source  docs/method.md, section 7 */
 export function robustWindow(
@@ -58,6 +60,7 @@ export function robustWindow(
   ranges: Ranges,
   data: ChemicalData,
   onProgress?: OnProgress,
+  gammas?: Gammas,
 ): Outcome<Robust> {
   const bad = badRange(ranges);
   if (bad) return bad;
@@ -78,12 +81,13 @@ export function robustWindow(
     }),
   };
   const [low, high] = ranges.temperatureC ?? [problem.temperatureC, problem.temperatureC];
+  const worstAt = atTemperature(worst, gammas, data);
   const solved = new Map<number, Analysis>();
   let ground: readonly Convex[] | null = null;
   /** Takes one more temperature in; the failure where it cannot be solved. */
   const take = (temperatureC: number): Outcome<null> => {
     if (solved.has(temperatureC)) return ok(null);
-    const analysed = analyse({ ...worst, temperatureC }, data);
+    const analysed = analyse(worstAt(temperatureC), data);
     if (!analysed.ok) return analysed;
     const pieces = analysed.value.pieces.map((p) => p.piece);
     ground = ground === null ? pieces : commonGround(ground, pieces);

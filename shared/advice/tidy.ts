@@ -1,5 +1,6 @@
 import { solve } from "../solve";
 import type { ChemicalData } from "../species/chemicalData";
+import { atTemperature, type Gammas } from "../plan/toProblem";
 import type { Opening } from "./openings";
 
 /** A number with three figures, or a temperature with one decimal, rounded away from where it came from. */
@@ -10,9 +11,9 @@ function away(to: number, from: number, change: Opening["change"]): number {
 }
 
 /** The opening with a number a person would type: a little further than the root, where a window is still open there; else as it was.
- *  @param opening  of `adviceFor`     @param data  library     @returns  the opening, its problem holding the tidy number
+ *  @param opening  of `adviceFor`     @param data  library     @param gammas  as `adviceFor`     @returns  the opening, its problem holding the tidy number
  *  @source  the solver: the rounded number is solved before it is offered */
-export function tidied(opening: Opening, data: ChemicalData): Opening {
+export function tidied(opening: Opening, data: ChemicalData, gammas?: Gammas): Opening {
   const { problem, change, of, from, to } = opening;
   // a hazard's threshold is told, not offered
   if (change === "hazardPressure" || change === "hazardPH") return opening;
@@ -20,7 +21,7 @@ export function tidied(opening: Opening, data: ChemicalData): Opening {
   const rounded = away(to, from, change);
   const next =
     change === "temperature"
-      ? { ...problem, temperatureC: rounded }
+      ? atTemperature(problem, gammas, data)(rounded)
       : change === "ligand"
         ? {
             ...problem,

@@ -36,6 +36,25 @@ export function gammaOf(data: ChemicalData, metal: PlanMetal, ionicStrength: num
   return 1;
 }
 
+/** What a problem needs of its plan to go to another temperature. */
+export type Gammas = Pick<PlanInputs, "metals" | "ionicStrength">;
+
+/** A plan's problem at another temperature: the activity coefficients by Davies follow it, all else stands.
+ *  @param problem  of `toProblem`     @param gammas  of the same plan; none: gamma stands     @param data  library
+ *  @returns  the problem at a temperature, C     @source  gammaOf */
+export const atTemperature =
+  (problem: Problem, gammas: Gammas | undefined, data: ChemicalData) =>
+  (temperatureC: number): Problem => ({
+    ...problem,
+    temperatureC,
+    metals: problem.metals.map((m) => {
+      const line = gammas?.metals.find((l) => l.element === m.element);
+      return line === undefined || m.gPerL === undefined
+        ? m
+        : { ...m, gamma: gammaOf(data, line, gammas?.ionicStrength ?? null, temperatureC) };
+    }),
+  });
+
 /** Species a lixiviant preset leaves out (presets.csv). Where sulfur is to change state after all, the list of the full
  *  sulfur preset stands in for that of sulfate. */
 export function presetLeavesOut(data: ChemicalData, preset: PresetName, fullSulfur: boolean): readonly string[] {

@@ -3,6 +3,7 @@ import { robustWindow } from "../../shared/advice/robust";
 import type { OnProgress } from "../../shared/advice/search";
 import { tidied } from "../../shared/advice/tidy";
 import { ok, valueOf } from "../../shared/outcome";
+import type { Gammas } from "../../shared/plan/toProblem";
 import type { Problem } from "../../shared/schemas/problem";
 import type { ChemicalData } from "../../shared/species/chemicalData";
 import { libraryFrom } from "../../shared/species/library";
@@ -25,10 +26,15 @@ function teller(id: number): OnProgress {
   };
 }
 
-function adviceOf(problem: Problem, library: ChemicalData, tell: OnProgress): Answers["advice"] {
-  const advice = adviceFor(problem, library, tell);
+function adviceOf(
+  problem: Problem,
+  gammas: Gammas | undefined,
+  library: ChemicalData,
+  tell: OnProgress,
+): Answers["advice"] {
+  const advice = adviceFor(problem, library, tell, gammas);
   if (!advice.ok) return advice;
-  return ok({ ...advice.value, openings: advice.value.openings.map((o) => tidied(o, library)) });
+  return ok({ ...advice.value, openings: advice.value.openings.map((o) => tidied(o, library, gammas)) });
 }
 
 type Asked = Exclude<Question, { kind: "tables" }>;
@@ -37,9 +43,9 @@ function valueFor(question: Asked, library: ChemicalData): Answers[keyof Answers
   const tell = teller(question.id);
   switch (question.kind) {
     case "advice":
-      return adviceOf(question.problem, library, tell);
+      return adviceOf(question.problem, question.gammas, library, tell);
     case "robust":
-      return robustWindow(question.problem, question.ranges, library, tell);
+      return robustWindow(question.problem, question.ranges, library, tell, question.gammas);
     case "sweep":
       return sweep(question.inputs, question.wish, library, (share) => tell(share, 1));
   }

@@ -82,8 +82,8 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const look = useLook(start.view, plan.id, inputs, proposal !== null);
   const { problem, solution: solved, analysis, failure } = useSolved(inputs, data);
   const { solution, held } = useHeld(inputs, solved, analysis);
-  const advice = useAdvice(problem, data, failure === null && solution?.windows.length === 0);
-  const robust = useRobust(problem, inputs.ranges, data);
+  const advice = useAdvice(problem, inputs, data, failure === null && solution?.windows.length === 0);
+  const robust = useRobust(problem, inputs, data);
   const scale = usePotentialScale(inputs.temperatureC);
   const theme = useThemeColours();
   const printing = usePrinting();

@@ -4,6 +4,7 @@ import type { Ranges, Robust } from "../../../../shared/advice/robust";
 import type { Outcome } from "../../../../shared/outcome";
 import { rangesOf } from "../../../../shared/plan/rangesOf";
 import type { HoldRanges } from "../../../../shared/schemas/plan";
+import type { Gammas } from "../../../../shared/plan/toProblem";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Asker, type Steps, type Tell } from "../../../workers/asker";
@@ -68,28 +69,39 @@ export function useAsked<Value>(
   }, [key, answer, asker, stopped, again, stop]);
 }
 
-const askAdvice = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) =>
-  asker.ask<"advice">({ kind: "advice", problem: JSON.parse(key) as Problem }, signal, tell);
+const askAdvice = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) => {
+  const { problem, gammas } = JSON.parse(key) as { problem: Problem; gammas: Gammas };
+  return asker.ask<"advice">({ kind: "advice", problem, gammas }, signal, tell);
+};
 
 /** What would open a window; asked for only while there is none. */
-export function useAdvice(problem: Problem, data: ChemicalData, wanted: boolean): Awaited<Advice> {
-  const key = useMemo(() => (wanted ? JSON.stringify(problem) : null), [problem, wanted]);
+export function useAdvice(problem: Problem, plan: Gammas, data: ChemicalData, wanted: boolean): Awaited<Advice> {
+  const { metals, ionicStrength } = plan;
+  const key = useMemo(
+    () => (wanted ? JSON.stringify({ problem, gammas: { metals, ionicStrength } }) : null),
+    [problem, metals, ionicStrength, wanted],
+  );
   return useAsked(data, key, askAdvice);
 }
 
 const askRobust = (asker: Asker, key: string, signal: AbortSignal, tell: Tell) => {
-  const { problem, ranges } = JSON.parse(key) as { problem: Problem; ranges: Ranges };
-  return asker.ask<"robust">({ kind: "robust", problem, ranges }, signal, tell);
+  const { problem, ranges, gammas } = JSON.parse(key) as { problem: Problem; ranges: Ranges; gammas: Gammas };
+  return asker.ask<"robust">({ kind: "robust", problem, ranges, gammas }, signal, tell);
 };
 
 /** The window that holds over the plan's ranges; asked for only where it has some. */
-export function useRobust(problem: Problem, ranges: HoldRanges | undefined, data: ChemicalData): Awaited<Robust> {
+export function useRobust(
+  problem: Problem,
+  plan: Gammas & { ranges?: HoldRanges | undefined },
+  data: ChemicalData,
+): Awaited<Robust> {
+  const { ranges, metals, ionicStrength } = plan;
   const key = useMemo(() => {
     const over = rangesOf(
       ranges,
       problem.metals.filter((m) => m.requirement !== "free").map((m) => m.element),
     );
-    return over && JSON.stringify({ problem, ranges: over });
-  }, [problem, ranges]);
+    return over && JSON.stringify({ problem, ranges: over, gammas: { metals, ionicStrength } });
+  }, [problem, ranges, metals, ionicStrength]);
   return useAsked(data, key, askRobust);
 }
