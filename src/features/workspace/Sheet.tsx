@@ -1,19 +1,20 @@
 import type { CSSProperties, ReactNode } from "react";
 
 /** The workspace's three parts. Wide: asks, map, answers side by side, each scrolling by itself. Tablet: the map first, asks and
- *  answers in two columns below it; higher with more metals, whose strips would else eat it up. Paper: map, then answers and asks. */
+ *  answers in two columns below it. Paper: map, then answers and asks.
+ *  @param room  px the middle wants on a tablet */
 export function Sheet({
-  metals,
+  room,
   asks,
   map,
   answers,
 }: {
-  metals: number;
+  room: number;
   asks: ReactNode;
   map: ReactNode;
   answers: ReactNode;
 }) {
-  const height = { "--map": `${560 + 24 * Math.max(0, metals - 4)}px` } as CSSProperties;
+  const height = { "--map": `${room}px` } as CSSProperties;
   return (
     <div
       style={height}

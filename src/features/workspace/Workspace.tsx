@@ -63,6 +63,11 @@ export interface WorkspaceProps {
 
 const NONE: readonly Outline[] = [];
 
+/** Small maps, curves and what opens and closes, on a tablet, px. */
+const FILM_ROOM = 780;
+/** Strips of many metals would else eat up the map. */
+const mapRoom = (metals: number): number => 560 + 24 * Math.max(0, metals - 4);
+
 /** A plan on the table: left asks, middle shows, right answers. */
 export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
   const navigate = useNavigate();
@@ -247,7 +252,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
         />
       )}
       <Sheet
-        metals={inputs.metals.length}
+        room={look.view.film ? FILM_ROOM : mapRoom(inputs.metals.length)}
         asks={
           <AsksPanel
             layers={layers}
