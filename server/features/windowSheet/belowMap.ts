@@ -79,7 +79,6 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
   const balanced = reactionsSay(work).map(({ reaction, demand }) =>
     stack([textBlock(pen, reaction, style, width), textBlock(pen, demand, mutedStyle(size - 0.5), width)]),
   );
-  const grades = gradesSay(work, !caps.grades).map((text) => textBlock(pen, text, style, width));
   return stack([
     heading(pen, "What was asked", "", size, width),
     rows(pen, asked, caps.inputs, size, width, "inputs"),
@@ -97,6 +96,12 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
           rows(pen, balanced, caps.reactions, size, width, "reactions"),
         ]
       : []),
+  ]);
+}
+
+function gradesBlock(pen: Pen, work: SheetWork, size: number, width: number, caps: Caps): Block {
+  const grades = gradesSay(work, !caps.grades).map((text) => textBlock(pen, text, textStyle(size), width));
+  return stack([
     gap(size * 0.8),
     heading(pen, "Data grades", "bold: on a limit of the window", size, width),
     rows(pen, grades, Infinity, size, width, "grades"),
@@ -143,8 +148,13 @@ function rightColumn(pen: Pen, work: SheetWork, size: number, width: number, cap
 export function belowMap(pen: Pen, work: SheetWork, size: number, width: number, caps: Caps): Block {
   const half = (width - GUTTER) / 2;
   const limits = limitsBlock(pen, work, size, width, caps);
-  const left = leftColumn(pen, work, size, half, caps);
-  const right = rightColumn(pen, work, size, half, caps);
+  const asked = leftColumn(pen, work, size, half, caps);
+  const cautions = rightColumn(pen, work, size, half, caps);
+  const grades = gradesBlock(pen, work, size, half, caps);
+  // where there is more room
+  const onTheLeft = asked.height <= cautions.height;
+  const left = onTheLeft ? stack([asked, grades]) : asked;
+  const right = onTheLeft ? cautions : stack([cautions, grades]);
   const top = limits.height + size;
   return {
     height: top + Math.max(left.height, right.height),
