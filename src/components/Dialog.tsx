@@ -13,6 +13,8 @@ export interface DialogProps {
   footer?: ReactNode;
   /** pixels */
   width?: number;
+  /** there is nothing in it to work, only to read: it has the focus itself, so that keys scroll it */
+  toRead?: boolean;
   /** cannot be closed, only answered */
   fixed?: boolean;
 }
@@ -26,6 +28,7 @@ export function Dialog({
   children,
   footer,
   width = 520,
+  toRead = false,
   fixed = false,
 }: DialogProps) {
   const opener = useRef<Element | null>(null);
@@ -54,7 +57,7 @@ export function Dialog({
               </Radix.Close>
             )}
           </div>
-          <div className="min-h-0 overflow-y-auto px-5 py-4">
+          <div className="min-h-0 overflow-y-auto px-5 py-4 -outline-offset-2" {...(toRead ? { tabIndex: 0 } : {})}>
             {description !== undefined && (
               <Radix.Description asChild>
                 <div className="mb-4 text-muted">{description}</div>

@@ -1,14 +1,15 @@
 import { expect, test } from "vitest";
 import { themeColours } from "../../src/lib/theme";
-import { openPageAs } from "../support/browser";
+import { sharedPageAs, turnTo } from "../support/browser";
 import { demoInputs, expectSetPoint } from "./pages/core";
 import { WorkspaceScreen } from "./pages/workspace";
 
+const shared = sharedPageAs("metallurgist", { path: "/plans/demo-zinc-dust" });
 const deference = "It does not replace a hazard study";
 
 test("zinc-dust purification shows the cementation window with its caution, and follows the theme", async () => {
   const id = "demo-zinc-dust";
-  const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
+  const { page } = shared();
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
   expectSetPoint(await plan.answers(), demoInputs(id));
@@ -30,7 +31,8 @@ test("zinc-dust purification shows the cementation window with its caution, and 
 
 test("cyanide below pH 10.5 is warned of beside the set point, and drawn on the map", async () => {
   const id = "demo-cyanide-leach";
-  const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
+  const { page } = shared();
+  await turnTo(page, `/plans/${id}`);
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
   await plan.button("No longer keep HCN out").click();

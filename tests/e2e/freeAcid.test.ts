@@ -2,28 +2,25 @@ import { describe, expect, test } from "vitest";
 import { acidBand, freeAcid, freeAcidCurve } from "../../shared/activity/freeAcid";
 import { valueOf } from "../../shared/outcome";
 import { chemistry } from "../support/chemistry";
-import { openPageAs } from "../support/browser";
+import { openPageAs, sharedPageAs, turnTo } from "../support/browser";
 import { shownNumber } from "./pages/shownNumber";
 import { WorkspaceScreen } from "./pages/workspace";
 
 const data = chemistry();
 const heap = "/plans/demo-oxide-heap";
 
-/** The heap with more sulfate and its set point held well below pH 1.5. */
-async function acidHeap(page: WorkspaceScreen["page"]) {
-  const sheet = new WorkspaceScreen(page);
-  await sheet.drawn();
-  await sheet.type("Total of S", "1");
-  await page.locator("[data-handle]").first().focus();
-  for (let i = 0; i < 8; i++) await page.keyboard.press("Shift+ArrowLeft");
-  await page.getByTestId("held").waitFor();
-  return sheet;
-}
+describe("on the plan screen of a heap,", () => {
+  const shared = sharedPageAs("metallurgist", { path: heap });
 
-describe("free acid on the plan screen", () => {
-  test("stands under the pH axis, under the cursor, at the set point and in the ledger, as the core reckons it", async () => {
-    const { page } = await openPageAs("metallurgist", { path: heap });
-    const sheet = await acidHeap(page);
+  test("free acid stands under the pH axis, under the cursor, at the set point and in the ledger, as the core reckons it; a band in g/L strays with the set point", async () => {
+    const { page } = shared();
+    const sheet = new WorkspaceScreen(page);
+    await sheet.drawn();
+    // More sulfate, and the set point held well below pH 1.5.
+    await sheet.type("Total of S", "1");
+    await page.locator("[data-handle]").first().focus();
+    for (let i = 0; i < 8; i++) await page.keyboard.press("Shift+ArrowLeft");
+    await page.getByTestId("held").waitFor();
     const { pH } = await sheet.answers();
     expect(pH).toBeLessThan(1.3);
     const here = valueOf(freeAcid(data, pH, 1, 25)).gPerL;
@@ -42,16 +39,12 @@ describe("free acid on the plan screen", () => {
     await expect.poll(() => sheet.readOut().innerText()).toMatch(/pH 0\.9\d?\s*about \d+\sg\/L/);
     await sheet.pointAt(3, 0.5);
     await expect.poll(() => sheet.readOut().innerText()).not.toMatch(/g\/L/);
-  });
 
-  test("a band given in g/L is shown on both sides in pH, the wider counts; it strays with the set point and is undone", async () => {
-    const { page } = await openPageAs("metallurgist", { path: heap });
-    const sheet = await acidHeap(page);
+    // A band given in g/L is shown on both sides in pH, the wider counts; it strays with the set point and is undone.
     const bands = sheet.asks("Control bands");
     await bands.getByRole("radio", { name: "free acid, g/L" }).click();
     await sheet.type("Control band of free acid", "5");
-    const { pH } = await sheet.answers();
-    const { counted } = valueOf(acidBand(data, 5, pH, 1, 25));
+    const { counted } = valueOf(acidBand(data, 5, (await sheet.answers()).pH, 1, 25));
     await expect.poll(() => bands.innerText()).toContain(`the wider side counts, pH ±${counted.toFixed(2)}`);
 
     await sheet.type("Control band of free acid", "400");
@@ -67,49 +60,49 @@ describe("free acid on the plan screen", () => {
     expect(Number(await sheet.number("Control band of pH").inputValue())).toBeCloseTo(counted, 1);
   });
 
-  test("there is none in a liquor without sulfate", async () => {
-    const { page } = await openPageAs("metallurgist", { path: "/plans/demo-cyanide-leach" });
+  test("what an overall reaction makes is chosen, re-balanced, refused where it cannot be, and kept with the plan", async () => {
+    const { page } = shared();
+    await turnTo(page, heap);
     const sheet = new WorkspaceScreen(page);
     await sheet.drawn();
-    expect(await sheet.axisWords()).not.toContain("free acid, g/L H2SO4");
+    const overall = page.getByRole("region", { name: "Overall reactions" });
+    await overall.getByText(/^From the feed mineral/).click();
+    const iron = overall.getByRole("listitem").filter({ hasText: "Fe becomes" });
+    await iron.getByRole("combobox", { name: "What Fe of Fe(s) becomes" }).click();
+    await page.getByRole("option", { name: /KFe3/ }).click();
+    await iron.getByText("chosen").waitFor();
+    await iron.getByLabel("K2SO4", { exact: true }).first().waitFor();
+    await page.reload();
+    await sheet.drawn();
+    await overall.getByText(/^From the feed mineral/).click();
+    await iron.getByText("chosen").waitFor();
+    await sheet.button("Save revision").click();
+    await page.getByRole("dialog").getByText(/Overall reaction of Fe/).waitFor(); // prettier-ignore
+    await page.keyboard.press("Escape");
   });
-});
 
-test("a total is given in g/L and comes back in mol/L; revisions say which was typed", async () => {
-  const { page } = await openPageAs("metallurgist", { path: "/plans/demo-neutral-leach" });
-  const sheet = new WorkspaceScreen(page);
-  await sheet.drawn();
-  await sheet.button("Give S in g/L").click();
-  expect(Number(await sheet.number("Total of S").inputValue())).toBeCloseTo(0.5 * 96.056, 2);
-  await sheet.type("Total of S", "96.056");
-  await page.reload();
-  await sheet.drawn();
-  expect(await sheet.number("Total of S").inputValue()).toBe("96.056");
-  await sheet.button("Give S in mol/L").click();
-  expect(Number(await sheet.number("Total of S").inputValue())).toBeCloseTo(1, 4);
-  await sheet.button("Undo").click();
-  await sheet.button("Give S in mol/L").waitFor();
-  await sheet.button("Save revision").click();
-  await page.getByRole("dialog").getByText(/mol\/L, typed in g\/L/).waitFor(); // prettier-ignore
-});
+  test("a total is given in g/L and comes back in mol/L; revisions say which was typed; there is no free acid without sulfate", async () => {
+    const { page } = shared();
+    const sheet = new WorkspaceScreen(page);
+    await turnTo(page, "/plans/demo-cyanide-leach");
+    await sheet.drawn();
+    expect(await sheet.axisWords()).not.toContain("free acid, g/L H2SO4");
 
-test("what an overall reaction makes is chosen, re-balanced, refused where it cannot be, and kept with the plan", async () => {
-  const { page } = await openPageAs("metallurgist", { path: heap });
-  const sheet = new WorkspaceScreen(page);
-  await sheet.drawn();
-  const overall = page.getByRole("region", { name: "Overall reactions" });
-  await overall.getByText(/^From the feed mineral/).click();
-  const iron = overall.getByRole("listitem").filter({ hasText: "Fe becomes" });
-  await iron.getByRole("combobox", { name: "What Fe of Fe(s) becomes" }).click();
-  await page.getByRole("option", { name: /KFe3/ }).click();
-  await iron.getByText("chosen").waitFor();
-  await iron.getByLabel("K2SO4", { exact: true }).first().waitFor();
-  await page.reload();
-  await sheet.drawn();
-  await overall.getByText(/^From the feed mineral/).click();
-  await iron.getByText("chosen").waitFor();
-  await sheet.button("Save revision").click();
-  await page.getByRole("dialog").getByText(/Overall reaction of Fe/).waitFor(); // prettier-ignore
+    await turnTo(page, "/plans/demo-neutral-leach");
+    await sheet.drawn();
+    await sheet.button("Give S in g/L").click();
+    expect(Number(await sheet.number("Total of S").inputValue())).toBeCloseTo(0.5 * 96.056, 2);
+    await sheet.type("Total of S", "96.056");
+    await page.reload();
+    await sheet.drawn();
+    expect(await sheet.number("Total of S").inputValue()).toBe("96.056");
+    await sheet.button("Give S in mol/L").click();
+    expect(Number(await sheet.number("Total of S").inputValue())).toBeCloseTo(1, 4);
+    await sheet.button("Undo").click();
+    await sheet.button("Give S in mol/L").waitFor();
+    await sheet.button("Save revision").click();
+    await page.getByRole("dialog").getByText(/mol\/L, typed in g\/L/).waitFor(); // prettier-ignore
+  });
 });
 
 describe("from a line of the plan to what it rests on", () => {
@@ -126,10 +119,10 @@ describe("from a line of the plan to what it rests on", () => {
     await page.getByRole("link", { name: "Back to the method" }).click();
     await page.getByRole("navigation", { name: "Contents" }).getByRole("link", { name: "Free acid" }).click();
     await expect.poll(() => page.url()).toMatch(/\/method#11-free-acid$/);
-    await page.goto("/method/no-such-thing");
+    await turnTo(page, "/method/no-such-thing");
     await page.getByText("There is no such document").waitFor();
 
-    await page.goto("/plans/demo-neutral-leach");
+    await turnTo(page, "/plans/demo-neutral-leach");
     await sheet.drawn();
     await page.getByText(/^\d+ species, /).click();
     await page.getByRole("region", { name: "Fields drawn" }).getByRole("link", { name: /ferrihydrite/ }).click(); // prettier-ignore

@@ -1,5 +1,5 @@
 import { expect, test } from "vitest";
-import { openPage, openPageAs } from "../support/browser";
+import { openPage, openPageAs, turnTo } from "../support/browser";
 import { demoInputs, expectSetPoint, speciesThere } from "./pages/core";
 import { PlansScreen } from "./pages/plans";
 import { SignInScreen } from "./pages/signIn";
@@ -69,7 +69,7 @@ test("a metallurgist opens the neutral leach and sees the window and what shuts 
   expect(Math.min(...numbers((await plan.trace("open-0"))?.x))).toBeCloseTo(await ironEdge(), 1);
 });
 
-test("the read-out names every metal's species under the cursor; all fields are one key away and remembered; potentials on another scale", async () => {
+test("the read-out names every metal's species under the cursor; all fields are one key away and remembered; potentials on another scale; a number that cannot be is told where it stands", async () => {
   const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
   const plan = new WorkspaceScreen(page);
   await plan.drawn();
@@ -120,11 +120,9 @@ test("the read-out names every metal's species under the cursor; all fields are 
   // Distances are differences: the same in millivolts, whatever the electrode; 0.01 V is the last figure shown on the other scale.
   const toOxygen = (answers: Answers) => answers.limits.find((l) => l.what.startsWith("high Eh"))?.distance ?? NaN;
   expect(Math.abs(toOxygen(onProbe) - 1000 * toOxygen(onSHE))).toBeLessThanOrEqual(5);
-});
 
-test("a number that cannot be is told in a sentence where it stands, and stays as it was typed", async () => {
-  const { page } = await openPageAs("metallurgist", { path: `/plans/${id}` });
-  const plan = new WorkspaceScreen(page);
+  // A number that cannot be is told in a sentence where it stands, and stays as it was typed.
+  await turnTo(page, `/plans/${id}`);
   await plan.drawn();
   const before = await plan.answers();
   const zinc = await plan.openMetal("Zn");

@@ -1,11 +1,13 @@
-import { expect, test } from "vitest";
-import { openPageAs } from "../support/browser";
+import { describe, expect, test } from "vitest";
+import { sharedPageAs, turnTo } from "../support/browser";
 import { PlansScreen } from "./pages/plans";
 import { WorkspaceScreen } from "./pages/workspace";
 
-for (const role of ["technician", "manager"] as const) {
-  test(`a ${role} opens a plan and tries what they like, is told that it cannot be saved, and is refused by the server`, async () => {
-    const { page } = await openPageAs(role, { path: "/plans", expected: [403] });
+describe.each(["technician", "manager"] as const)("a %s", (role) => {
+  const shared = sharedPageAs(role, { path: "/plans", expected: [403] });
+
+  test("opens a plan and tries what they like, is told that it cannot be saved, and is refused by the server", async () => {
+    const { page } = shared();
     const plans = new PlansScreen(page);
     await plans.row("Neutral leach, second tank").waitFor();
     expect(await plans.writeControls()).toEqual([]);
@@ -44,4 +46,20 @@ for (const role of ["technician", "manager"] as const) {
     });
     expect(answers).toEqual([403, 403, 403]);
   });
-}
+
+  test("has the reaction desk, which works out what is typed and says what is wrong with what does not balance", async () => {
+    const { page } = shared();
+    await turnTo(page, "/reactions");
+    const field = page.getByRole("textbox", { name: "Reaction" });
+    await field.fill("Cu^2+ + Zn = Cu + Zn^2+");
+    await page.getByRole("button", { name: "Work it out" }).click();
+    await page
+      .getByText(/37\.\d/)
+      .first()
+      .waitFor(); // log K of 2 (0.337 + 0.763) / 0.05916
+    await field.fill("Cu^2+ + Zn = Cu");
+    await page.getByRole("button", { name: "Work it out" }).click();
+    await page.getByRole("alert").first().waitFor();
+    expect(await field.inputValue()).toBe("Cu^2+ + Zn = Cu");
+  });
+});

@@ -178,7 +178,12 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
           shown={isShown(map) ? map : "difference"}
           onShow={(shown) => change({ map: shown })}
         />
-        <div className="px-5 pt-3 pb-8 lg:min-h-0 lg:overflow-y-auto" tabIndex={-1}>
+        <div
+          className="px-5 pt-3 pb-8 -outline-offset-2 lg:min-h-0 lg:overflow-y-auto"
+          role="region"
+          aria-label="The difference in words"
+          tabIndex={0}
+        >
           {trying && (
             <section aria-label="Settings of B" className="mb-4">
               <ChangeB inputs={sideB.inputs} start={b.inputs} onChange={setTried} />

@@ -78,8 +78,8 @@ function Difference({
       {...frame}
       description={
         <>
-          {latest.author} saved revision {latest.number} {savedAt(latest.createdAt)}
-          {latest.note === "" ? ", without a note" : `: “${latest.note}”`}.{" "}
+          {latest.author} saved revision {latest.number} ({savedAt(latest.createdAt)})
+          {latest.note === "" ? ", without a note." : `: “${latest.note}”${/[.!?]$/.test(latest.note) ? "" : "."}`}{" "}
           {draft.changed
             ? `Your changes are from revision ${draft.basedOn}. Cancel leaves them as they are; put together, they are one step that Undo takes back.`
             : `You changed nothing since revision ${draft.basedOn}.`}

@@ -4,7 +4,7 @@ import { keyMap } from "./keyMap";
 
 export default function KeysDialog(props: { open: boolean; onOpenChange: (open: boolean) => void }) {
   return (
-    <Dialog {...props} title="Keys" width={600}>
+    <Dialog {...props} title="Keys" width={600} toRead>
       {keyMap.map(({ place, keys }) => (
         <section key={place} aria-label={place} className="pb-4 last:pb-0">
           <SectionHead level={3}>{place}</SectionHead>
