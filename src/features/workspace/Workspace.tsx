@@ -22,7 +22,7 @@ import { GasLayers, PracticeList } from "./asks/GasLayers";
 import { AsksPanel } from "./asks/AsksPanel";
 import { AskingContext } from "./asks/context";
 import { Dialogs, type DialogName } from "./header/Dialogs";
-import { FrozenBanner, type Said, WorkspaceHeader } from "./header/WorkspaceHeader";
+import { type Said, WorkspaceHeader } from "./header/WorkspaceHeader";
 import { MapPanel } from "./map/MapPanel";
 import { useLink } from "./address/useLink";
 import { takesSettings, type Opened } from "./address/useOpened";
@@ -50,6 +50,7 @@ const loadBanners = () => import("./address/LinkBanners");
 const ProposalBanner = lazy(async () => ({ default: (await loadBanners()).ProposalBanner }));
 const IgnoredBanner = lazy(async () => ({ default: (await loadBanners()).IgnoredBanner }));
 
+const FrozenBanner = lazy(async () => ({ default: (await import("./header/FrozenBanner")).FrozenBanner }));
 const CommentsPanel = lazy(() => import("./comments/CommentsPanel"));
 
 export interface WorkspaceProps {
@@ -216,15 +217,17 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
         </Suspense>
       )}
       {frozen ? (
-        <FrozenBanner
-          {...frozen}
-          plan={plan}
-          onRestore={() => restore(frozen)}
-          onCopyLink={link.copy}
-          said={said}
-          onSheet={() => onExport("sheet")}
-          onComments={toggleTalk}
-        />
+        <Suspense fallback={<div className="min-h-11 shrink-0 border-b border-ink" />}>
+          <FrozenBanner
+            {...frozen}
+            plan={plan}
+            onRestore={() => restore(frozen)}
+            onCopyLink={link.copy}
+            said={said}
+            onSheet={() => onExport("sheet")}
+            onComments={toggleTalk}
+          />
+        </Suspense>
       ) : proposal ? (
         <Suspense fallback={null}>
           <ProposalBanner
