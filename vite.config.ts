@@ -47,10 +47,10 @@ export default defineConfig({
             { name: "react", test: /node_modules[\\/](react|react-dom|scheduler)[\\/]/, priority: 2 },
             // The app loads Plotly with import(); named so that the size check and the browser tests can point at it.
             { name: "plotly", test: /node_modules[\\/](plotly\.js|react-plotly\.js)/, priority: 1 },
-            // What only the map needs comes with Plotly.
+            // What only the map needs comes in one piece; Plotly follows when the map stands.
             {
               name: "map",
-              test: /src[\\/]map[\\/](geometry[\\/]|names[\\/]|svg[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|LimitHover|Over|Plot|speciesText|texts|paintTrials|Touch|TrialsLayer|Under|WindowMap)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
+              test: /src[\\/]map[\\/](geometry[\\/]|names[\\/]|svg[\\/]|traces[\\/]|(boxes|content|cursor|figure|handle|LimitHover|Over|speciesText|texts|paintTrials|Touch|TrialsLayer|Under|WindowMap)\.)|shared[\\/]drawing[\\/](boundaries|labels|lit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },

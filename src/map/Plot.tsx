@@ -35,7 +35,3 @@ export default function Plot({ figure, onRelayout, onRelayouting }: PlotProps) {
     />
   );
 }
-
-/** The same figure as an SVG data URL, drawn apart from the screen. */
-export const picture = ({ data, layout }: Figure): Promise<string> =>
-  Plotly.toImage({ data, layout }, { format: "svg", width: layout.width, height: layout.height });

@@ -10,7 +10,6 @@ import type { SetPointHandleProps } from "./handle";
 import { LimitHover, type NamedLimit } from "./LimitHover";
 import type { LimitStore } from "./limitStore";
 import { Over } from "./Over";
-import Plot from "./Plot";
 import type { ProposalStore } from "./proposalStore";
 import type { Figure, PlotLayout, PlotTrace } from "./plotTypes";
 import { Touch } from "./Touch";
@@ -22,6 +21,8 @@ import { afterRelayout, MovingView } from "./zoom";
 
 const NO_MARKS: ShownTrials["marks"] = [];
 
+/** The chart is the largest file there is, and nothing that is seen needs it. */
+const Plot = lazy(() => import("./Plot"));
 const ProposalsLayer = lazy(async () => ({ default: (await import("./ProposalsLayer")).ProposalsLayer }));
 
 export interface WindowMapProps {
@@ -54,15 +55,15 @@ export interface WindowMapProps {
 /** So long after the last move of a wheel or a drag the hand is taken to rest, ms. */
 const REST = 160;
 
-/** The window map: fields and windows as shapes, over them Plotly's axes, names, strips and reach bars, and the cursor, which redraws none
- *  of them. It brings Plotly along: import it late. */
+/** The window map: fields and windows as shapes, over them axes, names, strips and reach bars, and the cursor, which redraws none of them.
+ *  Between them lies Plotly, unseen, for zoom, pan and the wheel; it comes when the map stands. */
 export default function WindowMap(props: WindowMapProps) {
   const { asked, view, onSight, dragMode, cursor, onPick, label, describedBy, handle, trials, proposals, overlay } =
     props;
   const content = useMemo(() => mapContent(asked), [asked]);
   const holder = useRef<HTMLDivElement>(null);
   const size = useSize(holder);
-  const { frame, scale, visible, colours } = view;
+  const { frame, scale, visible } = view;
   const crosscuts = view.layers.crosscuts && content.through !== null;
   const pinned = content.pinned !== null;
   const freeAcid = content.freeAcid !== null;
@@ -83,10 +84,10 @@ export default function WindowMap(props: WindowMapProps) {
     [size, metals, content.reaches.length, crosscuts, reach, freeAcid, pinned],
   );
   const traces = useMemo(() => [...mapTraces(content, view), ...(overlay ?? [])], [content, view, overlay]);
-  // The chart has nothing but the axes: while they say the same it is left alone.
+  // The chart has nothing but the ranges: while they stay it is left alone.
   const axes = useMemo(
-    () => sheet && JSON.stringify(mapLayout(sheet, { visible, scale, colours }, dragMode)),
-    [sheet, visible, scale, colours, dragMode],
+    () => sheet && JSON.stringify(mapLayout(sheet, { visible, scale }, dragMode)),
+    [sheet, visible, scale, dragMode],
   );
   const [rests, setRests] = useState(0);
   const figure = useMemo(
@@ -148,8 +149,8 @@ export default function WindowMap(props: WindowMapProps) {
     [sheet, visible, trials],
   );
   useLayoutEffect(() => {
-    if (holder.current && figure) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
-  }, [traces, figure]);
+    if (holder.current && sheet) holder.current.dataset.drawn = String(Number(holder.current.dataset.drawn ?? 0) + 1);
+  }, [traces, sheet]);
 
   return (
     <div
@@ -165,7 +166,9 @@ export default function WindowMap(props: WindowMapProps) {
       {figure && sheet ? (
         <>
           <Under traces={traces} sheet={sheet} view={view} live={live} />
-          <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} />
+          <Suspense fallback={null}>
+            <Plot figure={figure} onRelayout={onRelayout} onRelayouting={onRelayouting} />
+          </Suspense>
           <Over
             content={content}
             sheet={sheet}

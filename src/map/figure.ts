@@ -11,8 +11,8 @@ import { robustTraces } from "./traces/robust";
 import { setPointTraces } from "./traces/setPoint";
 import { type MapView, MONO } from "./view";
 
-/** Traces from the ground up: light, hatching, hazard, boundaries, lines, outline, set point. Drawn by svg/Shapes.tsx; names, strips and
- *  bars stand over them (svg/Overlay.tsx). The chart has the axes. */
+/** Traces from the ground up: light, hatching, hazard, boundaries, lines, outline, set point. Drawn by svg/Shapes.tsx; axes, names,
+ *  strips and bars stand over them (svg/Overlay.tsx). */
 export function mapTraces(content: MapContent, view: MapView): PlotTrace[] {
   const { solution } = content;
   const { layers } = view;
@@ -35,28 +35,20 @@ export function mapTraces(content: MapContent, view: MapView): PlotTrace[] {
   return all.filter((t) => t.x.length > 0);
 }
 
-/** Axes and their ranges: what is in sight. */
+/** The chart under the hand: two axes without a line or a number, which zoom, pan and the wheel move.
+ *  The frame and its ticks are drawn with the rest (svg/Axes.tsx). */
 export function mapLayout(
   sheet: Sheet,
-  view: Pick<MapView, "visible" | "colours" | "scale">,
+  { visible, scale }: Pick<MapView, "visible" | "scale">,
   dragMode: PlotLayout["dragmode"] = "zoom",
 ): PlotLayout {
-  const { visible, colours, scale } = view;
   const place = domains(sheet, sheet.map);
   const axis: Partial<PlotAxis> = {
     showgrid: false,
     zeroline: false,
-    showline: true,
-    mirror: true,
-    linecolor: colours.ink,
-    linewidth: 1.2,
-    ticks: "outside",
-    ticklen: 5,
-    tickcolor: colours.ink,
-    tickfont: { family: MONO, size: 12, color: colours.ink },
-    layer: "above traces",
-    tickangle: 0,
-    ticklabeloverflow: "allow",
+    showline: false,
+    ticks: "",
+    showticklabels: false,
   };
   const range = (bounds: readonly [number, number]): [number, number] => [
     scale.toShown(bounds[0]),
@@ -72,23 +64,10 @@ export function mapLayout(
     showlegend: false,
     hovermode: false,
     dragmode: dragMode,
-    font: { family: MONO, size: 12, color: colours.ink },
+    font: { family: MONO, size: 12, color: "#000" },
     hoverlabel: { font: { family: MONO, size: 12 } },
-    xaxis: { ...axis, domain: place.x, range: [visible.pH[0], visible.pH[1]], anchor: "y", nticks: 9 },
-    yaxis: {
-      ...axis,
-      domain: place.y,
-      range: range(visible.Eh),
-      anchor: "x",
-      nticks: 9,
-      tickformat: tickFormat(scale.unit, scale.toShown(visible.Eh[1]) - scale.toShown(visible.Eh[0])),
-    },
+    xaxis: { ...axis, domain: place.x, range: [visible.pH[0], visible.pH[1]], anchor: "y" },
+    yaxis: { ...axis, domain: place.y, range: range(visible.Eh), anchor: "x" },
     annotations: [],
   };
-}
-
-/** Decimals that tell the ticks of a span apart. */
-function tickFormat(unit: string, span: number): string {
-  if (unit !== "V") return span < 8 ? ".1f" : "d";
-  return span < 0.08 ? ".3f" : span < 0.8 ? ".2f" : ".1f";
 }

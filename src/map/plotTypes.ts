@@ -67,6 +67,7 @@ export interface PlotAxis {
   linecolor?: string;
   linewidth?: number;
   ticks?: "outside" | "inside" | "";
+  showticklabels?: boolean;
   ticklen?: number;
   tickcolor?: string;
   tickfont?: { family: string; size: number; color: string };

@@ -1,13 +1,5 @@
-/** Plotly with the cartesian traces only; ships without types. The calls the map makes, and no others. */
+/** Plotly with the cartesian traces only; ships without types. It is only handed to react-plotly.js. */
 declare module "plotly.js-cartesian-dist-min" {
-  interface ImageWishes {
-    format: "png" | "svg";
-    width: number;
-    height: number;
-    scale?: number;
-  }
-  const Plotly: {
-    toImage(figure: { data: unknown[]; layout: unknown; config?: unknown }, wishes: ImageWishes): Promise<string>;
-  };
+  const Plotly: unknown;
   export default Plotly;
 }

@@ -124,7 +124,7 @@ async function measured(
   const cdp = await context.newCDPSession(page);
   await cdp.send("Performance.enable", { timeDomain: "threadTicks" });
   await page.goto(`/plans/${planId}`);
-  await page.locator("[data-testid=window-map][data-drawn] .xtick text").first().waitFor();
+  await page.locator("[data-testid=window-map][data-drawn] [data-axes]").first().waitFor();
   await page.waitForTimeout(2500);
   await watchFrames(page);
   const found = [];

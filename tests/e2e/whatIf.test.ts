@@ -69,7 +69,7 @@ async function seen(page: Page) {
       hatched,
       corners: x.length,
     })),
-    ticks: await page.locator("[data-testid=window-map] :is(.xtick, .ytick) text").allTextContents(),
+    ticks: await page.locator("[data-testid=window-map] [data-axes] text").allTextContents(),
     names: (await page.getByTestId("map-names").locator("[data-name]").allTextContents()).sort(),
     tools: await page.getByRole("button", { name: /metals$|^as a|^as text$| with / }).allInnerTexts(),
     pinned: await page.getByTestId("pinned-line").allInnerTexts(),

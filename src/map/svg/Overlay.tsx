@@ -8,6 +8,7 @@ import { plainText } from "../speciesText";
 import type { PlacedText } from "../texts";
 import { drawnMetals, type MapView } from "../view";
 import { AcidRow } from "./AcidRow";
+import { Axes } from "./Axes";
 import { HatchPattern } from "./HatchPattern";
 import { ProposalMarks } from "./ProposalMarks";
 import { ReachBars } from "./ReachBars";
@@ -28,8 +29,8 @@ export interface OverlayProps {
   picture?: boolean;
 }
 
-/** What stands over and beside the figure: names, axis words, crosscuts, reach. Drawn as shapes of its own, since the chart would lay
- *  out every word anew at each step of a drag. The same for the screen and for pictures. */
+/** What stands over and beside the map: axes, names, crosscuts, reach. Drawn as shapes of its own, since a chart would lay out every
+ *  word anew at each step of a drag. The same for the screen and for pictures. */
 export function Overlay({ content, sheet, view, names, trials, picture = false }: OverlayProps) {
   const id = useId().replace(/[^\w-]/g, "");
   const { colours, layers, scale } = view;
@@ -77,6 +78,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
           <rect x={box.x0} y={box.y0} width={box.x1 - box.x0} height={box.y1 - box.y0} />
         </clipPath>
       </defs>
+      <Axes sheet={sheet} visible={view.visible} scale={scale} colour={colours.ink} />
       <g clipPath={`url(#${id}-map)`}>
         {pinned && layers.crosscuts && <Pin at={toPixel(...pinned.through)} box={box} view={view} />}
         {layers.setPoint && layers.crosscuts && through && <Guides at={toPixel(...through)} box={box} view={view} />}

@@ -28,7 +28,7 @@ export async function openingsOf(app: BenchApp, path: string, times: number): Pr
           if (!entry.hadRecentInput) seen.shift += entry.value;
       }).observe({ type: "layout-shift", buffered: true });
       const look = () => {
-        if (document.querySelector("[data-drawn] .xtick text") && document.querySelector("[data-handle]"))
+        if (document.querySelector("[data-drawn] [data-axes]") && document.querySelector("[data-handle]"))
           seen.readyAt = performance.now();
         else requestAnimationFrame(look);
       };

@@ -54,7 +54,7 @@ export class WorkspaceScreen {
   readonly button = (name: string) => this.page.getByRole("button", { name, exact: true });
 
   async drawn(): Promise<void> {
-    await this.page.locator("[data-testid=window-map][data-drawn] .xtick text").first().waitFor();
+    await this.page.locator("[data-testid=window-map][data-drawn] .draglayer").waitFor({ state: "attached" });
   }
 
   /** What the right side says of the window in hand. */

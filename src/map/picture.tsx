@@ -1,29 +1,29 @@
 import bold from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-700-normal.woff2?url";
 import regular from "@fontsource/jetbrains-mono/files/jetbrains-mono-latin-400-normal.woff2?url";
-import { createElement, type ReactElement } from "react";
 import { flushSync } from "react-dom";
 import { createRoot } from "react-dom/client";
 import { sheetBoxes, type Sheet } from "./boxes";
 import type { MapContent } from "./content";
-import { mapLayout, mapTraces } from "./figure";
+import { mapTraces } from "./figure";
 import { placedNames } from "./names/placedNames";
-import { picture } from "./Plot";
-import type { Figure } from "./plotTypes";
+import { plainText } from "./speciesText";
 import { Overlay } from "./svg/Overlay";
 import { Shapes } from "./svg/Shapes";
-import { drawnMetals, type MapView, MONO } from "./view";
+import { SvgText } from "./svg/SvgText";
+import { drawnMetals, type MapView } from "./view";
 
 const WIDTH = 1000;
 const HEIGHT = 860;
 const LINE = 16;
 const HEAD = 30;
 
-/** A picture in the making: the axes with the caption, and what stands under and over them. */
+/** A picture in the making: the map with a title above and a caption below. */
 export interface Picture {
-  figure: Figure;
   content: MapContent;
   sheet: Sheet;
   view: MapView;
+  title: string;
+  caption: readonly string[];
 }
 
 /** The map at one size for every screen, as it is seen: part in sight, hidden metals, trials. With what it rests on in the caption,
@@ -43,59 +43,50 @@ export function captionedPicture(
     freeAcid: content.freeAcid !== null,
     pinned: content.pinned !== null,
   });
-  const layout = mapLayout(sheet, view);
-  const foot = LINE * caption.length + 18;
-  const words = (text: string, y: number, size: number, color: string) => ({
-    text,
-    x: 0,
-    y,
-    xref: "paper",
-    yref: "paper",
-    xanchor: "left" as const,
-    yanchor: "top" as const,
-    xshift: -layout.margin.l + 14,
-    showarrow: false as const,
-    align: "left" as const,
-    font: { family: MONO, size, color },
-  });
-  const figure = {
-    data: [],
-    layout: {
-      ...layout,
-      height: HEIGHT + HEAD + foot,
-      margin: { ...layout.margin, t: layout.margin.t + HEAD, b: layout.margin.b + foot },
-      annotations: [
-        { ...words(`<b>${title}</b>`, 1, 15, view.colours.ink), yshift: HEAD + 16 },
-        ...caption.map((line, i) => ({
-          ...words(line, 0, 11, view.colours.muted),
-          yshift: -layout.margin.b - 8 - i * LINE,
-        })),
-      ],
-    },
-  };
-  return { figure, content, sheet, view };
+  return { content, sheet, view, title, caption };
 }
 
-/** One of the map's drawings as SVG text, moved below the title. */
-function svgText(drawing: ReactElement): string {
-  const holder = document.createElement("div");
-  const root = createRoot(holder);
-  flushSync(() => root.render(drawing));
-  const svg = holder.querySelector("svg");
-  svg?.setAttribute("y", String(HEAD));
-  const text = svg ? new XMLSerializer().serializeToString(svg) : "";
-  root.unmount();
-  return text;
-}
+const heightOf = ({ caption }: Picture): number => HEIGHT + HEAD + LINE * caption.length + 18;
 
-const underSvg = ({ content, sheet, view }: Picture): string =>
-  svgText(createElement(Shapes, { traces: mapTraces(content, view), sheet, visible: view.visible, view }));
-
-function overSvg({ content, sheet, view }: Picture): string {
-  const trials =
-    view.layers.trials && content.trials ? { ...content.trials, colours: view.colours, brushed: null } : null;
-  const names = placedNames(content, sheet, view);
-  return svgText(createElement(Overlay, { content, sheet, view, names, trials, picture: true }));
+function Drawing({ wanted, style }: { wanted: Picture; style: string }) {
+  const { content, sheet, view, title, caption } = wanted;
+  const { colours } = view;
+  const height = heightOf(wanted);
+  const trials = view.layers.trials && content.trials ? { ...content.trials, colours, brushed: null } : null;
+  return (
+    <svg xmlns="http://www.w3.org/2000/svg" width={WIDTH} height={height} viewBox={`0 0 ${WIDTH} ${height}`}>
+      <style>{style}</style>
+      <rect width={WIDTH} height={height} fill={colours.paper} />
+      <SvgText
+        lines={[{ parts: plainText(title), size: 15, bold: true }]}
+        x={14}
+        y={26}
+        anchor="start"
+        colour={colours.ink}
+      />
+      <g transform={`translate(0 ${HEAD})`}>
+        <Shapes traces={mapTraces(content, view)} sheet={sheet} visible={view.visible} view={view} />
+        <Overlay
+          content={content}
+          sheet={sheet}
+          view={view}
+          names={placedNames(content, sheet, view)}
+          trials={trials}
+          picture
+        />
+      </g>
+      {caption.map((line, i) => (
+        <SvgText
+          key={line}
+          lines={[{ parts: plainText(line), size: 11 }]}
+          x={14}
+          y={HEIGHT + HEAD + 14 + i * LINE}
+          anchor="start"
+          colour={colours.muted}
+        />
+      ))}
+    </svg>
+  );
 }
 
 const asDataUrl = async (url: string): Promise<string> => {
@@ -105,8 +96,6 @@ const asDataUrl = async (url: string): Promise<string> => {
 
 /** The picture as SVG text that stands alone: its fonts written into it. */
 async function standaloneSvg(wanted: Picture): Promise<string> {
-  const url = await picture(wanted.figure);
-  const svg = decodeURIComponent(url.slice(url.indexOf(",") + 1));
   const faces = await Promise.all(
     (
       [
@@ -118,11 +107,13 @@ async function standaloneSvg(wanted: Picture): Promise<string> {
         `@font-face{font-family:"JetBrains Mono";font-weight:${weight};src:url(${await asDataUrl(file)}) format("woff2")}`,
     ),
   );
-  const { width, height } = wanted.figure.layout;
-  const paper = `<rect width="${width}" height="${height}" fill="${wanted.view.colours.paper}"/>`;
-  return svg
-    .replace(/(<svg[^>]*>)/, (tag) => `${tag}<style>${faces.join("")}</style>${paper}${underSvg(wanted)}`)
-    .replace(/<\/svg>\s*$/, () => `${overSvg(wanted)}</svg>`);
+  const holder = document.createElement("div");
+  const root = createRoot(holder);
+  flushSync(() => root.render(<Drawing wanted={wanted} style={faces.join("")} />));
+  const svg = holder.querySelector("svg");
+  const text = svg ? new XMLSerializer().serializeToString(svg) : "";
+  root.unmount();
+  return text;
 }
 
 async function rasterised(svg: string, width: number, height: number): Promise<Blob> {
@@ -144,5 +135,5 @@ async function rasterised(svg: string, width: number, height: number): Promise<B
 export async function mapPicture(wanted: Picture, format: "png" | "svg"): Promise<Blob> {
   const svg = await standaloneSvg(wanted);
   if (format === "svg") return new Blob([svg], { type: "image/svg+xml" });
-  return rasterised(svg, wanted.figure.layout.width, wanted.figure.layout.height);
+  return rasterised(svg, WIDTH, heightOf(wanted));
 }
