@@ -16,14 +16,16 @@ function compressed(path: string): number {
   return (statSync(`${file}.gz`, { throwIfNoEntry: false }) ?? statSync(file)).size;
 }
 
-/** Scripts that an address fetches, until the network rests. */
-async function scriptsOf(page: Page, path: string): Promise<string[]> {
+/** Scripts that an address fetches, until the network rests and what is waited for stands. */
+async function scriptsOf(page: Page, path: string, until: () => Promise<void> = async () => {}): Promise<string[]> {
   const scripts = new Set<string>();
   page.on("response", (response) => {
     const { pathname } = new URL(response.url());
     if (pathname.endsWith(".js")) scripts.add(pathname);
   });
   await page.goto(path, { waitUntil: "networkidle" });
+  await until();
+  await page.waitForLoadState("networkidle");
   return [...scripts];
 }
 
@@ -45,8 +47,7 @@ test("sign-in and plans fetch at most 250 kB of compressed JavaScript, and no pl
 
 test("a plan opened by its address fetches at most 250 kB of compressed JavaScript beside the plot", async () => {
   const { page } = await openPageAs("metallurgist", { path: "about:blank" });
-  const scripts = await scriptsOf(page, "/plans/demo-neutral-leach");
-  await new WorkspaceScreen(page).drawn();
+  const scripts = await scriptsOf(page, "/plans/demo-neutral-leach", () => new WorkspaceScreen(page).drawn());
   const plot = scripts.filter((path) => plotChunk.test(path));
   expect(total(plot)).toBeGreaterThan(400_000);
   expect(total(scripts) - total(plot)).toBeLessThanOrEqual(LIMIT);

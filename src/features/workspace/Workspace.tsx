@@ -5,7 +5,6 @@ import { cautionsFor, hazardContext } from "../../../shared/hazards/rules";
 import type { PlanRow, RevisionRow } from "../../../shared/schemas/plan";
 import type { Outline, Point } from "../../../shared/solution";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
-import { DataChanged } from "../../components/DataChanged";
 import { FormulaText } from "../../components/FormulaText";
 import { Loading } from "../../components/status";
 import { Remark } from "../../components/text";
@@ -51,6 +50,7 @@ const ProposalBanner = lazy(async () => ({ default: (await loadBanners()).Propos
 const IgnoredBanner = lazy(async () => ({ default: (await loadBanners()).IgnoredBanner }));
 
 const FrozenBanner = lazy(async () => ({ default: (await import("./header/FrozenBanner")).FrozenBanner }));
+const DataChanged = lazy(async () => ({ default: (await import("../../components/DataChanged")).DataChanged }));
 const CommentsPanel = lazy(() => import("./comments/CommentsPanel"));
 
 export interface WorkspaceProps {
@@ -334,7 +334,11 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
               shown={look.view.side}
               onShow={look.setSide}
             >
-              {frozen === null && <DataChanged plan={plan} className="mb-3" />}
+              {frozen === null && plan.dataOutdated && (
+                <Suspense fallback={null}>
+                  <DataChanged plan={plan} className="mb-3" />
+                </Suspense>
+              )}
               {failure && (
                 <Remark className="mb-3 border-signal!">
                   <p role="alert">

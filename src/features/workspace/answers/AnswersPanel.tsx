@@ -30,10 +30,10 @@ import { ReachBlock } from "./ReachBlock";
 import { SetPointBlock } from "./SetPointBlock";
 import { HeldNote } from "./SetPointMore";
 import { WarningsBlock } from "./WarningsBlock";
-import { WindowsBlock } from "./WindowsBlock";
 
 // Most plans have a window, and few hold over ranges.
 const RobustBlock = lazy(async () => ({ default: (await import("./RobustBlock")).RobustBlock }));
+const WindowsBlock = lazy(async () => ({ default: (await import("./WindowsBlock")).WindowsBlock }));
 const FreeAcidRow = lazy(() => import("./FreeAcidRow"));
 const NoWindowBlock = lazy(async () => ({ default: (await import("./NoWindowBlock")).NoWindowBlock }));
 
@@ -95,7 +95,11 @@ export function AnswersPanel(props: AnswersProps) {
   );
   return (
     <>
-      <WindowsBlock solution={solution} chosen={chosen} onChoose={onChoose} scale={scale} />
+      {solution.windows.length > 1 && (
+        <Suspense fallback={null}>
+          <WindowsBlock solution={solution} chosen={chosen} onChoose={onChoose} scale={scale} />
+        </Suspense>
+      )}
       {window ? (
         <>
           <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />

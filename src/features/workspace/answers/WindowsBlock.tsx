@@ -20,7 +20,6 @@ export function WindowsBlock({
   onChoose: (index: number) => void;
   scale: PotentialScale;
 }) {
-  if (solution.windows.length < 2) return null;
   return (
     <section aria-label="Windows" className="mb-4">
       <SectionHead

@@ -1,90 +1,46 @@
+import { lazy, Suspense } from "react";
 import { TEMPERATURE_RANGE_C } from "../../../../shared/schemas/problem";
 import { Button } from "../../../components/Button";
 import { Term } from "../../../components/Help";
-import { NumberField } from "../../../components/NumberField";
 import { Note, SectionHead } from "../../../components/text";
-import { inputTextExact } from "../../../lib/format";
 import { setActivityRange, setTemperatureRange } from "../model/adviceEdit";
 import { useAsking } from "./context";
+import type { RangeEntryProps } from "./RangeEntry";
 import { Refusal } from "./Refusal";
 
-type Range = readonly [number, number];
+// Most plans hold over nothing.
+const RangeEntry = lazy(() => import("./RangeEntry"));
 
 /** A range that is either not asked for, or has two ends. */
 function RangeRow({
-  label,
   range,
   start,
-  onChange,
-  ...field
-}: {
-  label: string;
-  range: Range | undefined;
+  ...entry
+}: Omit<RangeEntryProps, "range"> & {
+  range: RangeEntryProps["range"] | undefined;
   /** what it starts from when somebody asks for it */
   start: [number, number];
-  onChange: (range: [number, number] | null) => void;
-  unit?: string;
-  min?: number;
-  max?: number;
-  above?: number;
-  step?: number;
-  factor?: number;
 }) {
   const { readOnly } = useAsking();
-  if (range === undefined) {
-    if (readOnly) return null;
+  const { label, onChange } = entry;
+  if (range !== undefined)
     return (
-      <div className="hairline flex items-baseline justify-between gap-2 py-1">
-        <span>{label}</span>
-        <Button
-          kind="quiet"
-          className="h-auto!"
-          aria-label={`Hold over a range of ${label}`}
-          onClick={() => onChange(start)}
-        >
-          as it is
-        </Button>
-      </div>
+      <Suspense fallback={null}>
+        <RangeEntry {...entry} range={range} />
+      </Suspense>
     );
-  }
-  const [lo, hi] = range;
-  const { min, max, unit, ...steps } = field;
-  const shared = { ...steps, layout: "bare" as const, width: 7, readOnly, show: inputTextExact };
+  if (readOnly) return null;
   return (
-    <div className="hairline py-1">
-      <div className="flex items-baseline justify-between gap-2">
-        <span>{label}</span>
-        {!readOnly && (
-          <Button
-            kind="quiet"
-            className="h-auto!"
-            aria-label={`Let go of the range of ${label}`}
-            onClick={() => onChange(null)}
-          >
-            let go
-          </Button>
-        )}
-      </div>
-      <span className="flex flex-wrap items-baseline justify-end gap-x-1.5">
-        <NumberField
-          {...shared}
-          label={`${label}, held from`}
-          value={lo}
-          {...(min === undefined ? {} : { min })}
-          max={hi}
-          onCommit={(next) => onChange([next, hi])}
-        />
-        <span className="text-muted">to</span>
-        <NumberField
-          {...shared}
-          label={`${label}, held to`}
-          value={hi}
-          min={lo}
-          {...(max === undefined ? {} : { max })}
-          {...(unit === undefined ? {} : { unit })}
-          onCommit={(next) => onChange([lo, next])}
-        />
-      </span>
+    <div className="hairline flex items-baseline justify-between gap-2 py-1">
+      <span>{label}</span>
+      <Button
+        kind="quiet"
+        className="h-auto!"
+        aria-label={`Hold over a range of ${label}`}
+        onClick={() => onChange(start)}
+      >
+        as it is
+      </Button>
     </div>
   );
 }
