@@ -299,6 +299,17 @@ test("what holds over the plan's ranges is drawn inside the window, with its dee
   expect(collisions(sheet)).toEqual([]);
 });
 
+test("over ranges a tenor with gamma by Davies becomes an activity anew at every temperature, as on the screen", () => {
+  const zinc = metal("Zn", "target", "dissolved", 30, { entry: "gPerL", gammaFrom: "davies" });
+  const metals = sheetInputs.metals.map((m) => (m.element === "Zn" ? zinc : m));
+  const inputs: PlanInputs = { ...sheetInputs, metals, ionicStrength: 0.4, ranges: { temperatureC: [50, 70] } };
+  const { robust } = valueOf(workOf(sheetPlan, sheetRevision(tables.version, inputs), library));
+  const over = (plan?: PlanInputs) =>
+    valueOf(robustWindow(toProblem(inputs, library), { temperatureC: [50, 70] }, library, undefined, plan));
+  expect(robust).toEqual(over(inputs));
+  expect(robust).not.toEqual(over());
+});
+
 const dust: PlanInputs = {
   ...sheetInputs,
   temperatureC: 55,

@@ -105,11 +105,11 @@ function gradesOf(data: ChemicalData, { fields, temperatureC }: Solution, window
     .map(({ id, grade, limits: on }) => ({ id, grade, limits: on }));
 }
 
-function robustOf(problem: Problem, { ranges }: PlanInputs, data: ChemicalData): SheetWork["robust"] {
+function robustOf(problem: Problem, inputs: PlanInputs, data: ChemicalData): SheetWork["robust"] {
   const asking = problem.metals.filter((m) => m.requirement !== "free").map((m) => m.element);
-  const over = rangesOf(ranges, asking);
+  const over = rangesOf(inputs.ranges, asking);
   if (over === null) return null;
-  const found = robustWindow(problem, over, data);
+  const found = robustWindow(problem, over, data, undefined, inputs);
   return found.ok ? found.value : { failed: found.error.message };
 }
 
