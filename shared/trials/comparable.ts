@@ -45,6 +45,10 @@ const tenorIn = (
 /** Up to here an activity at gamma 1 says the tenor within the factor allowed: at 0.02 mol/L of MSO4 (I = 0.08) Davies gives 0.40. */
 const DILUTE_MOL = 0.02;
 
+/** Whether gamma is no more than the 1 that stands where nobody gave one. */
+const gammaLeftAtOne = ({ gammaFrom, gamma }: PlanMetal, ionicStrength: number | null): boolean =>
+  gammaFrom === "typed" ? gamma === null : gammaFrom === "one" || ionicStrength === null;
+
 /** Tenor that a line of a plan stands for.
  *  @param line  metal     @param inputs  of the revision     @param data  library
  *  @returns  g/L: as entered, else the activity over its gamma; null where gamma was left at 1 and the activity is not dilute: in a
@@ -57,7 +61,7 @@ export function tenorOfLine(
 ): number | null {
   if (line.entry === "gPerL") return line.value;
   const mass = data.molarMass.get(line.element);
-  if (mass === undefined || (line.gammaFrom === "one" && line.value > DILUTE_MOL)) return null;
+  if (mass === undefined || (gammaLeftAtOne(line, ionicStrength) && line.value > DILUTE_MOL)) return null;
   return (line.value / gammaOf(data, line, ionicStrength, temperatureC)) * mass;
 }
 

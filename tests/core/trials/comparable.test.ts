@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { demoPlans } from "../../../server/demo/plans";
 import type { TrialInput } from "../../../shared/schemas/trial";
-import { comparable } from "../../../shared/trials/comparable";
+import { comparable, tenorOfLine } from "../../../shared/trials/comparable";
 import { couldCarry } from "../../../shared/trials/couldCarry";
 import { chemistry } from "../../support/chemistry";
 import { assays, feedOf, trialOf, typed } from "../../support/trials";
@@ -67,6 +67,12 @@ describe("tenor", () => {
     expect(of(record, 0.063).unknown).not.toContain("Zn tenor not planned");
     expect(of(record, 0.063).comparable).toBe(true);
     expect(of(record, 1).reasons).toEqual(["Zn 84 g/L, the plan 5.23 g/L: more than a factor 3 apart"]);
+    // Davies without an ionic strength, and "typed" with nothing typed, are gamma 1 that nobody gave
+    const line = zinc.metals.find((m) => m.element === "Zn")!;
+    const says = (gammaFrom: "davies" | "typed", ionicStrength: number | null) =>
+      tenorOfLine({ ...line, gammaFrom, gamma: null }, { ...zinc, ionicStrength }, chemistry());
+    expect([says("davies", null), says("typed", 0.4)]).toEqual([null, null]);
+    expect(says("davies", 0.4)).toBeGreaterThan(5.23);
   });
   test("a censored tenor counts by its nearer end", () => {
     expect(judged(final("<0.9 g/L")).comparable).toBe(true);
