@@ -2,7 +2,7 @@ import Plotly from "plotly.js-cartesian-dist-min";
 import createPlotlyComponent from "react-plotly.js/factory";
 import type { Figure } from "./plotTypes";
 
-/** The one place where Plotly comes in; loaded late, with the map. The factory is needed: the package's default export
+/** The one place where Plotly comes in; loaded late, once the map stands. The factory is needed: the package's default export
  *  looks for a full Plotly that is not shipped. */
 const Plotted = createPlotlyComponent(Plotly);
 

@@ -42,6 +42,7 @@ export default function WorkspacePage() {
             : {
                 retry: () => {
                   void plan.refetch();
+                  if (number !== null) void revisions.refetch();
                   void chemistry.refetch();
                 },
               })}

@@ -47,6 +47,7 @@ export function useNames(asked: Named): { names: readonly PlacedText[]; of: Name
     () => () => {
       clearTimeout(following.current);
       clearTimeout(resting.current);
+      following.current = 0;
     },
     [],
   );

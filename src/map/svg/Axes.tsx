@@ -21,12 +21,12 @@ interface AxesProps {
 /** The frame of the map with its ticks and numbers, potentials on the shown scale. */
 export function Axes({ sheet, visible: { pH, Eh }, scale, colour }: AxesProps) {
   return (
-    <Frame sheet={sheet} p0={pH[0]} p1={pH[1]} e0={scale.toShown(Eh[0])} e1={scale.toShown(Eh[1])} colour={colour} />
+    <Border sheet={sheet} p0={pH[0]} p1={pH[1]} e0={scale.toShown(Eh[0])} e1={scale.toShown(Eh[1])} colour={colour} />
   );
 }
 
 /** Drawn again only where a number changed. */
-const Frame = memo(function Frame(props: {
+const Border = memo(function Border(props: {
   sheet: Sheet;
   p0: number;
   p1: number;

@@ -1,6 +1,6 @@
 import type { Hatch } from "../metalStyle";
 
-/** A metal's hatch as an SVG pattern, with the strokes that the map's own figure makes of the same numbers. */
+/** A metal's hatch as an SVG pattern, on the map and its strips. */
 export function HatchPattern({
   id,
   hatch: { shape, size: s, solidity },

@@ -13,8 +13,8 @@ export interface ShapesProps {
   view: Pick<MapView, "scale" | "colours">;
 }
 
-/** The map itself: ground, hatching, lines and marks, each trace in its order. Drawn as shapes of its own under the chart's axes, since
- *  the chart would lay out its whole figure anew at each step of a drag. The same for the screen and for pictures. */
+/** The map itself: ground, hatching, lines and marks, each trace in its order. Drawn as shapes of its own, since a chart would
+ *  lay out its whole figure anew at each step of a drag. The same for the screen and for pictures. */
 export const Shapes = memo(function Shapes({ traces, sheet, visible, view: { scale, colours } }: ShapesProps) {
   const id = useId().replace(/[^\w-]/g, "");
   const { box, toPixel } = mapPixels(sheet, {

@@ -25,7 +25,7 @@ import { namedLimits } from "./namedLimits";
 
 const loadMap = () => import("../../../map/WindowMap");
 const WindowMap = lazy(loadMap);
-// Plotly is the largest file there is: it comes in while the plan and the chemistry are read. A failure shows when the map is due.
+// The map comes in while the plan and the chemistry are read. A failure shows when it is due.
 void loadMap().catch(() => undefined);
 
 export interface MapPanelProps extends SightInHand {
