@@ -2,9 +2,9 @@ import { celsius, significant } from "../words/numbers";
 import type { Robust } from "./robust";
 
 /** What was looked at for a window over ranges, so that nobody takes it for more.
- *  @param checked  of `robustWindow`     @param metalName  "zinc" for Zn     @returns  sentences     @source  docs/method.md, Over ranges */
+ *  @param robust  of `robustWindow`     @param metalName  "zinc" for Zn     @returns  sentences     @source  docs/method.md, Over ranges */
 export function checkedWords(
-  { temperatures, rules, settled, activities }: Robust["checked"],
+  { windows, checked: { temperatures, rules, settled, activities } }: Robust,
   metalName: (element: string) => string,
 ): string {
   const [first, last] = [temperatures[0] ?? 0, temperatures.at(-1) ?? 0];
@@ -12,9 +12,11 @@ export function checkedWords(
     temperatures.length === 1
       ? `Solved at ${celsius(first, 1)}.`
       : `Solved at ${temperatures.length} temperatures from ${celsius(first, 1)} to ${celsius(last, 1)}; ${
-          settled
-            ? "more between them moved no edge by 0.001 pH or 1 mV."
-            : "its edges still moved when that was the most to be tried: take it with care."
+          windows.length === 0
+            ? "nothing holds at all of these, so no more were tried."
+            : settled
+              ? "more between them moved no edge by 0.001 pH or 1 mV."
+              : "its edges still moved when that was the most to be tried: take it with care."
         }${rules.length === 0 ? "" : ` The solids that count change at ${rules.map((t) => celsius(t)).join(" and ")}: solved on both sides.`}`;
   const each = activities.map(({ metal, at, why }) => `${metalName(metal)} at ${significant(at)} (${why})`);
   return each.length === 0

@@ -31,7 +31,7 @@ export interface Robust {
     readonly temperatures: readonly number[];
     /** C, where the solids that count change: solved on both sides */
     readonly rules: readonly number[];
-    /** between any two temperatures three more moved no edge by 0.001 pH or 1 mV */
+    /** between any two temperatures three more moved no edge by 0.001 pH or 1 mV, or no ground is left to have one */
     readonly settled: boolean;
     readonly activities: readonly { metal: string; at: number; why: string }[];
   };

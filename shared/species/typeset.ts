@@ -28,19 +28,6 @@ export function typeset(formula: string): FormulaPart[] {
   return parts;
 }
 
-const escapes: Readonly<Record<string, string>> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;" };
-const escaped = (text: string): string => text.replace(/[&<>"]/g, (c) => escapes[c] ?? c);
-
-/** A formula for Plotly's text, which knows `<sub>` and `<sup>`; everything else is escaped.
- *  @param formula  as typed     @returns  `Cu(NH<sub>3</sub>)<sub>4</sub><sup>2+</sup>`
- *  @source  as `typeset`
- *  @example formulaHtml("HSO4^-").length // => 27 */
-export function formulaHtml(formula: string): string {
-  return typeset(formula)
-    .map(({ text, kind }) => (kind === "plain" ? escaped(text) : `<${kind}>${escaped(text)}</${kind}>`))
-    .join("");
-}
-
 /** A formula read aloud or put in a title: charge behind a space, true minus, middle dot, no markup.
  *  @param formula  as typed     @returns  `Cu(NH3)4 2+`
  *  @source  as `typeset`

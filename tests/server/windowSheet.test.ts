@@ -292,7 +292,7 @@ test("what holds over the plan's ranges is drawn inside the window, with its dee
   expect(sheet.words).toContain(
     `Deepest point pH ${fixed(best!.setPoint.pH, 2)}, ${fixed(best!.setPoint.Eh, 2)} V vs SHE, margin ${fixed(best!.setPoint.margin, 1)} ${marginWords(best!.setPoint)}`,
   );
-  expect(sheet.words).toContain(plain2(checkedWords(robust.checked, (e) => (e === "Fe" ? "iron" : e))));
+  expect(sheet.words).toContain(plain2(checkedWords(robust, (e) => (e === "Fe" ? "iron" : e))));
   const without = await drawn(sheetInputs);
   expect(without.words).not.toContain("Over the ranges");
   expect(outlineDrawn(without, best!.outer)).toBe(false);

@@ -22,5 +22,5 @@ export function robustSays({ robust, naming }: SheetWork): Inline[] | null {
         robust.windows.length > 1 ? `; ${robust.windows.length} pieces hold, this is the deepest.` : ".",
       ]
     : [bold("No point holds over all of it.")];
-  return [found, checkedWords(robust.checked, naming.metalName)];
+  return [found, checkedWords(robust, naming.metalName)];
 }

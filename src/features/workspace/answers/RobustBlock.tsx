@@ -50,7 +50,7 @@ export function RobustBlock({
 }
 
 function Found({
-  robust: { windows, checked },
+  robust,
   scale,
   metalName,
 }: {
@@ -58,6 +58,7 @@ function Found({
   scale: PotentialScale;
   metalName: (element: string) => string;
 }) {
+  const { windows } = robust;
   const best = [...windows].sort((a, b) => b.setPoint.margin - a.setPoint.margin)[0];
   return (
     <>
@@ -82,7 +83,7 @@ function Found({
           <b>No point holds over all of it.</b> Narrow a range, or widen what is asked.
         </p>
       )}
-      <Note className="py-1">{checkedWords(checked, metalName)}</Note>
+      <Note className="py-1">{checkedWords(robust, metalName)}</Note>
     </>
   );
 }
