@@ -7,7 +7,7 @@ import type { MapView } from "../view";
 import { placedNames } from "./placedNames";
 
 /** ms: so often, and no oftener, names follow while the hand moves: those that still fit stay where they are */
-const FOLLOW = 90;
+const FOLLOW = 160;
 /** ms without a change: the hand rests, and every name takes the best place there is */
 const REST = 150;
 

@@ -61,7 +61,11 @@ function watch(): void {
       handle: grip ? [parseFloat(grip.style.left), parseFloat(grip.style.top)] : null,
       answer: text("[data-testid=set-point]"),
       readOut: text("[data-testid=read-out] > span"),
-      limits: text("section[aria-label^='What shuts']"),
+      // what would move a limit is worked out after the hand
+      limits: Array.from(
+        document.querySelectorAll<HTMLElement>("section[aria-label^='What shuts'] li > div:first-child"),
+        (line) => line.innerText,
+      ).join(),
     };
   };
   const channel = new MessageChannel();
@@ -74,7 +78,9 @@ function watch(): void {
     const now = seen(performance.now() - timed.since);
     const { mark, handle, answer, readOut } = now;
     const moved = now.polygons !== timed.last.polygons || String(mark) !== String(timed.last.mark);
-    const together = mark !== null && handle !== null && Math.hypot(mark[0] - handle[0], mark[1] - handle[1]) < 1.5;
+    // neither stands where no window is open
+    const together =
+      mark === null || handle === null ? mark === handle : Math.hypot(mark[0] - handle[0], mark[1] - handle[1]) < 1.5;
     // over the map the read-out speaks of the pointer
     const read = timed.overMap ? readOut !== timed.last.readOut : readOut.startsWith(answer);
     if (timed.mode === "drag" && !(moved && together && read)) return;

@@ -6,6 +6,7 @@ import type { Solution } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { placedTrials, type PlacedTrial } from "../../../lib/judgedTrials";
 import { useMapTrials } from "../../../lib/trials";
+import { useRested } from "../../../lib/useRested";
 import { colourScale, type ColourScale, type MarkSymbol, type TrialMark } from "../../../map/trialMarks";
 import { type Brushed, TrialStore } from "../../../map/trialStore";
 import type { ShownTrials } from "../../../map/TrialsLayer";
@@ -66,8 +67,9 @@ export function usePlanTrials(
   const query = useMapTrials(planId, scope, enabled);
   const answer = enabled ? query.data : undefined;
 
-  // A drag of the plan moves at once; two thousand verdicts follow when there is time.
-  const ground = useDeferredValue(useMemo(() => ({ inputs, solution, data }), [inputs, solution, data]));
+  // A drag of the plan moves at once; two thousand verdicts follow when the hand rests and there is time.
+  const asked = useMemo(() => ({ inputs, solution, data }), [inputs, solution, data]);
+  const ground = useDeferredValue(useRested(asked, 120, 500));
   const judged = useMemo(() => (answer ? placedTrials(answer, () => ground) : NONE), [answer, ground]);
   const trials = useMemo(
     () => (hidden.size === 0 ? judged : judged.filter(({ campaignId }) => !hidden.has(campaignId))),
