@@ -111,9 +111,9 @@ function Stage({ start }: { start: PlanInputs }) {
 }
 const kept = () => JSON.parse(screen.getByRole("status").textContent ?? "") as unknown;
 
-test("the asks: the rule's pH is typed, changed to a pressure, and let in", () => {
+test("the asks: the rule's pH is typed, changed to a pressure, and let in", async () => {
   render(<Stage start={gold} />);
-  const pH = screen.getByLabelText("Lowest pH against HCN");
+  const pH = await screen.findByLabelText("Lowest pH against HCN");
   fireEvent.change(pH, { target: { value: "11" } });
   fireEvent.keyDown(pH, { key: "Enter" });
   expect(kept()).toEqual([{ gas: "HCN", pHAtLeast: 11 }]);
@@ -123,7 +123,7 @@ test("the asks: the rule's pH is typed, changed to a pressure, and let in", () =
   expect(kept()).toEqual([]);
 });
 
-test("a gas that the liquor cannot give off says that it cuts nothing", () => {
+test("a gas that the liquor cannot give off says that it cuts nothing", async () => {
   render(<Stage start={{ ...gold, ligands: [], preset: "water" }} />);
-  expect(screen.getByText(/Cuts nothing: the plan holds no cyanide/)).toBeTruthy();
+  expect(await screen.findByText(/Cuts nothing: the plan holds no cyanide/)).toBeTruthy();
 });
