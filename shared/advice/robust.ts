@@ -41,6 +41,7 @@ const SETTLED: readonly [number, number] = [0.001, 0.001];
 /** bisections in a row that must move nothing before a stretch is done */
 const QUIET = 2;
 const ON_FRAME = 1e-9;
+/** As many temperatures are solved at most; then the answer says that its edges still moved. */
 export const MOST_TEMPERATURES = 129;
 
 /** The window that holds over stated ranges of temperature and of each metal's activity.

@@ -372,13 +372,23 @@ test("overall reactions stand on the sheet as the plan chose them, with reagents
     metals: dust.metals.slice(0, 2),
     overall: { "Zn(s)": { redox: "peroxide" }, "CdSO4(aq)": { products: { Zn: "Zn^2+(aq)" } } },
   };
-  const { words } = await drawn(inputs);
-  expect(words).toContain("Overall reactions at the set point mol/mol, kg/kg, kg/t of the start");
+  const sheet = await drawn(inputs);
+  const { words } = sheet;
+  expect(collisions(sheet)).toEqual([]);
+  expect(words).toContain("Overall reactions at the set point; mol/mol, kg/t of the start");
   expect(words).toMatch(/CdSO4 \+ Zn → Cd \+ SO42− \+ Zn2\+ chosen: Zn2\+/);
   expect(words).toMatch(/Zn dust: Zn 1\.00, 0\.582 kg\/kg Cd, 314 kg\/t; log K/); // practice, section 6: 0.582
   expect(words).toMatch(/H2O2: H2SO4 1\.00, 1\.50 kg\/kg Zn, \d+ kg\/t; H2O2 1\.00, 0\.520 kg\/kg Zn, 520 kg\/t/);
   const refused = { ...inputs, overall: { "CdSO4(aq)": { products: { Cd: "ZnO(s)" } } } };
   expect((await drawn(refused)).words).toContain("Cannot be written: ZnO(s) holds no Cd");
+});
+
+test("what stands around the leach is told beside the cautions that rest on it", async () => {
+  const circuit = { sxOrganic: true, oxygenKPa: 350, reagents: ["peroxide", "zinc-dust"] };
+  const sheet = await drawn({ ...sheetInputs, circuit });
+  expect(sheet.words).toContain("Around the leach H2O2, Zn dust in use; extraction organic met; oxygen at 350 kPa");
+  expect(collisions(sheet)).toEqual([]);
+  expect((await drawn(sheetInputs)).words).not.toContain("Around the leach");
 });
 
 test("the sheet speaks of the window asked for, and of the best where that one is not there", () => {

@@ -92,7 +92,7 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
     ...(balanced.length > 0
       ? [
           gap(size * 0.8),
-          heading(pen, "Overall reactions at the set point", "mol/mol, kg/kg, kg/t of the start", size, width),
+          heading(pen, "Overall reactions", "at the set point; mol/mol, kg/t of the start", size, width),
           rows(pen, balanced, caps.reactions, size, width, "reactions"),
         ]
       : []),

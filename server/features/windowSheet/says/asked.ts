@@ -1,6 +1,7 @@
 import { askedOf } from "../../../../shared/hazards/excluded";
 import { keptWords } from "../../../../shared/hazards/words";
 import { gramsPerMole, weighedAs } from "../../../../shared/plan/totals";
+import { reagentById } from "../../../../shared/reach/reagents";
 import type { PlanMetal, PlanTotal } from "../../../../shared/schemas/plan";
 import { ligandWord } from "../../../../shared/words/componentWord";
 import { celsius, fixed, withUnit } from "../../../../shared/words/numbers";
@@ -84,6 +85,15 @@ export function inputsSay({ revision: { inputs }, data }: SheetWork): [string, I
     ...Object.entries(activities).map(([e, [lo, hi]]): Inline => [`${e} `, quantity(lo), " to ", quantity(hi)]),
   ];
   if (over.length > 0) said.push(["To hold over", joined(over)]);
+  const { reagents = [], sxOrganic = false, oxygenKPa } = inputs.circuit ?? {};
+  const around: Inline[] = [
+    ...(reagents.length > 0
+      ? [[joined(reagents.map((id) => formula(reagentById.get(id)?.name ?? id))), " in use"]]
+      : []),
+    ...(sxOrganic ? ["extraction organic met"] : []),
+    ...(oxygenKPa === undefined ? [] : [["oxygen at ", quantity(oxygenKPa, "kPa")]]),
+  ];
+  if (around.length > 0) said.push(["Around the leach", joined(around, "; ")]);
   if (inputs.leftOut.length > 0)
     said.push(["Left out", joined(inputs.leftOut.map((l): Inline => [speciesName(l.species), `\u00a0(${l.reason})`]))]);
   if (inputs.putBack.length > 0) said.push(["Put back", joined(inputs.putBack.map(speciesName))]);
