@@ -70,13 +70,19 @@ function Procedure({
   onName: (code: string, procedure: string) => void;
 }) {
   const [ticked, setTicked] = useState(named !== "");
+  // What is typed stands here: the plan's answer comes back late (`later`), and would take letters away again.
+  const [text, setText] = useState(named);
+  const name = (next: string) => {
+    setText(next);
+    onName(code, next);
+  };
   return (
     <div className="mt-1">
       <Check
         checked={ticked}
         onChange={(on) => {
           setTicked(on);
-          if (!on) onName(code, "");
+          if (!on) name("");
         }}
       >
         {words}
@@ -84,10 +90,10 @@ function Procedure({
       {ticked && (
         <TextField
           label="Name or number of the procedure"
-          value={named}
+          value={text}
           maxLength={200}
-          onChange={(event) => onName(code, event.target.value)}
-          error={named.trim() === "" ? "Not confirmed until the procedure is named." : null}
+          onChange={(event) => name(event.target.value)}
+          error={text.trim() === "" ? "Not confirmed until the procedure is named." : null}
         />
       )}
     </div>
