@@ -1,5 +1,6 @@
 import "../setup";
-import { render, screen } from "@testing-library/react";
+import { fireEvent, render, screen } from "@testing-library/react";
+import { Fragment, useState } from "react";
 import { MemoryRouter } from "react-router-dom";
 import { expect, test } from "vitest";
 import { toProblem } from "../../../shared/plan/toProblem";
@@ -57,4 +58,23 @@ test("without a window there is no verdict, and the rest stands", () => {
   expect(texts[0]).toContain("450 … 750 mV");
   expect(texts[0]).toContain("equilibrium of O2/H2O");
   expect(texts[0]).not.toContain("set point");
+});
+
+test("reagents ticked quickly one after the other all count, though the lines follow late", () => {
+  const chosen: (readonly string[])[] = [];
+  function Screen() {
+    const [ids, setIds] = useState<readonly string[]>([]);
+    const reaches = reachesOf(library, ids, liquor.preset, liquor.temperatureC);
+    chosen.push(ids);
+    const tick = (id: string) => <button onClick={() => setIds([...ids, id])}>{id}</button>;
+    const choose = ["air", "chlorate"].map((id) => <Fragment key={id}>{tick(id)}</Fragment>);
+    return (
+      <MemoryRouter>
+        <ReachBlock {...{ reaches, window: window!, data: library, liquor, pH, scale, choose }} />
+      </MemoryRouter>
+    );
+  }
+  render(<Screen />);
+  for (const id of ["air", "chlorate"]) fireEvent.click(screen.getByRole("button", { name: id }));
+  expect(chosen.at(-1)).toEqual(["air", "chlorate"]);
 });

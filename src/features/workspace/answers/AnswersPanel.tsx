@@ -43,7 +43,6 @@ const Couples = later(CouplesBlock);
 const Fields = later(FieldsBlock);
 const Gas = later(GasBlock);
 const Overall = later(OverallBlock);
-const ReachLines = later(ReachBlock);
 const Warnings = later(WarningsBlock);
 
 export interface AnswersProps {
@@ -142,7 +141,7 @@ export function AnswersPanel(props: AnswersProps) {
           {cautions.length > 0 && said}
         </>
       )}
-      <ReachLines
+      <ReachBlock
         reaches={reaches}
         window={window}
         data={data}

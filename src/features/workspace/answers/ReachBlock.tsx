@@ -1,3 +1,4 @@
+import type { ReactNode } from "react";
 import { type Reach, standsAt } from "../../../../shared/reach/reach";
 import { type ReachAnswer, reachOf } from "../../../../shared/reach/verdict";
 import type { PresetName } from "../../../../shared/schemas/plan";
@@ -6,6 +7,7 @@ import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { Formula } from "../../../components/Formula";
 import { FormulaText } from "../../../components/FormulaText";
 import { Help, Term } from "../../../components/Help";
+import { later } from "../../../components/later";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
 import { fixed, withUnit } from "../../../lib/format";
@@ -33,16 +35,7 @@ function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialSc
 const differenceText = (mV: number, scale: PotentialScale): string =>
   withUnit(fixed(scale.differenceToShown(mV / 1000), scale.digits), scale.unit);
 
-/** What each reagent brings the slurry to, and whether that is inside the window. */
-export function ReachBlock({
-  reaches,
-  window,
-  data,
-  liquor,
-  pH,
-  scale,
-  choose,
-}: {
+interface ReachProps {
   reaches: readonly Reach[];
   window: Window | null;
   data: ChemicalData;
@@ -50,40 +43,48 @@ export function ReachBlock({
   /** where the equilibria are read */
   pH: number;
   scale: PotentialScale;
-  /** the control that picks reagents */
-  choose: React.ReactNode;
-}) {
+}
+
+/** What each reagent brings the slurry to, and whether that is inside the window.
+ *  @param choose  the control that picks reagents: it follows at once, so that no tick of a quick hand is lost */
+export function ReachBlock({ choose, ...reach }: ReachProps & { choose: ReactNode }) {
   return (
     <section aria-label="Reach" className="mt-4">
       <SectionHead aside={choose}>
         <Term word="reach">Reach</Term>
       </SectionHead>
-      {reaches.length === 0 && <Note className="py-1">No reagent is chosen.</Note>}
-      <ul>
-        {reaches.map((reach) => {
-          const equilibrium = standsAt(reach, pH);
-          return (
-            <li key={reach.reagent.id} className="hairline py-1">
-              <div className="flex items-baseline justify-between gap-3">
-                <Name reach={reach} equilibrium={equilibrium} scale={scale} />
-                <span className="font-mono whitespace-nowrap">{range(reach, scale)}</span>
-              </div>
-              <div className="text-sm">
-                {window
-                  ? verdictText(reachOf(data, reach.reagent, window, liquor), scale)
-                  : reach.practical === null && NO_RANGE}
-              </div>
-              {equilibrium !== null && <Equilibrium reach={reach} Eh={equilibrium} scale={scale} />}
-              <div className="mt-0.5 border-l-2 border-signal pl-2 text-sm text-muted">
-                <FormulaText text={reach.reagent.hazard} />
-              </div>
-            </li>
-          );
-        })}
-      </ul>
+      <Lines {...reach} />
     </section>
   );
 }
+
+const Lines = later(function Lines({ reaches, window, data, liquor, pH, scale }: ReachProps) {
+  if (reaches.length === 0) return <Note className="py-1">No reagent is chosen.</Note>;
+  return (
+    <ul>
+      {reaches.map((reach) => {
+        const equilibrium = standsAt(reach, pH);
+        return (
+          <li key={reach.reagent.id} className="hairline py-1">
+            <div className="flex items-baseline justify-between gap-3">
+              <Name reach={reach} equilibrium={equilibrium} scale={scale} />
+              <span className="font-mono whitespace-nowrap">{range(reach, scale)}</span>
+            </div>
+            <div className="text-sm">
+              {window
+                ? verdictText(reachOf(data, reach.reagent, window, liquor), scale)
+                : reach.practical === null && NO_RANGE}
+            </div>
+            {equilibrium !== null && <Equilibrium reach={reach} Eh={equilibrium} scale={scale} />}
+            <div className="mt-0.5 border-l-2 border-signal pl-2 text-sm text-muted">
+              <FormulaText text={reach.reagent.hazard} />
+            </div>
+          </li>
+        );
+      })}
+    </ul>
+  );
+});
 
 /** Where the couple would stand, second to what practice shows and said to be no reading. */
 function Equilibrium({ reach: { reagent, line }, Eh, scale }: { reach: Reach; Eh: number; scale: PotentialScale }) {
