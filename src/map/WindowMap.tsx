@@ -1,4 +1,14 @@
-import { lazy, Suspense, useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
+import {
+  type ComponentType,
+  lazy,
+  Suspense,
+  useCallback,
+  useEffect,
+  useLayoutEffect,
+  useMemo,
+  useRef,
+  useState,
+} from "react";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import { mapPixels, sheetBoxes } from "./boxes";
@@ -10,6 +20,7 @@ import type { SetPointHandleProps } from "./handle";
 import { LimitHover, type NamedLimit } from "./LimitHover";
 import type { LimitStore } from "./limitStore";
 import { Over } from "./Over";
+import type { PlotProps } from "./Plot";
 import type { ProposalStore } from "./proposalStore";
 import type { Figure, PlotLayout, PlotTrace } from "./plotTypes";
 import { Touch } from "./Touch";
@@ -21,8 +32,8 @@ import { afterRelayout, MovingView } from "./zoom";
 
 const NO_MARKS: ShownTrials["marks"] = [];
 
-/** The chart is the largest file there is, and nothing that is seen needs it. */
-const Plot = lazy(() => import("./Plot"));
+/** The chart is the largest file there is, and nothing that is seen needs it: where it does not come, keys, fingers and buttons still zoom. */
+const Plot = lazy<ComponentType<PlotProps>>(() => import("./Plot").catch(() => ({ default: () => null })));
 const ProposalsLayer = lazy(async () => ({ default: (await import("./ProposalsLayer")).ProposalsLayer }));
 
 export interface WindowMapProps {
