@@ -70,7 +70,10 @@ export function Cursor({ sheet, visible, frame, through, store, holder, onPick, 
       if (t && inMap.y && s.alongEh && x >= s.alongEh.x0 && x <= s.alongEh.x1) return [t[0], Eh];
       return null;
     };
+    // Ahead of what is shown by less than a frame: keys that repeat faster than the screen draws must each count.
+    let wanted = store.get();
     const show = (at: Point | null) => {
+      wanted = at;
       cancelAnimationFrame(frame);
       frame = requestAnimationFrame(() => {
         place(at);
@@ -111,12 +114,12 @@ export function Cursor({ sheet, visible, frame, through, store, holder, onPick, 
       if (event.ctrlKey || event.metaKey || event.altKey) return;
       if (zoom !== undefined || event.key === "Home") {
         event.preventDefault();
-        const about = store.get() ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
+        const about = wanted ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
         now.current.onSight(zoom === undefined ? null : zoomedRound(about, zoom, v, f));
-        show(store.get());
+        show(wanted);
       } else if (step) {
         event.preventDefault();
-        const from = store.get() ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
+        const from = wanted ?? t ?? [(v.pH[0] + v.pH[1]) / 2, (v.Eh[0] + v.Eh[1]) / 2];
         const fine = event.shiftKey ? 5 : 1;
         const clamp = (x: number, [lo, hi]: readonly [number, number]) => Math.min(hi, Math.max(lo, x));
         const to: Point = [
@@ -127,8 +130,7 @@ export function Cursor({ sheet, visible, frame, through, store, holder, onPick, 
         if (outside) now.current.onSight(broughtInSight(to, v, f));
         show(to);
       } else if (event.key === "Enter") {
-        const at = store.get();
-        if (at) now.current.onPick(at);
+        if (wanted) now.current.onPick(wanted);
       } else if (event.key === "Escape") {
         show(null);
         now.current.onPick(null);
@@ -141,7 +143,10 @@ export function Cursor({ sheet, visible, frame, through, store, holder, onPick, 
     window.addEventListener("pointerup", onUp, true);
     element.addEventListener("keydown", onKey);
     // Two maps with one store move together.
-    const stop = store.subscribe(() => place(store.get()));
+    const stop = store.subscribe(() => {
+      wanted = store.get();
+      place(wanted);
+    });
     return () => {
       stop();
       cancelAnimationFrame(frame);

@@ -169,7 +169,7 @@ test("lists, menus and help are worked by keys alone, and give the focus back", 
   await page.keyboard.press("ArrowDown");
   await page.keyboard.press("Enter");
   await expect.poll(focused).toBe("Lixiviant");
-  expect(await liquor.innerText()).not.toMatch(/^sulfate\n/);
+  await expect.poll(() => liquor.innerText()).not.toMatch(/^sulfate\n/);
   await expect.poll(() => plan.answers()).not.toEqual(before);
 
   await page.getByRole("button", { name: "Solids basis: what is this?" }).focus();

@@ -36,6 +36,8 @@ test("an administrator invites, the link of the letter opens one account once, t
   await members.row(name).getByRole("gridcell", { name: "manager" }).waitFor();
   await theirs.goto("/plans");
   await theirs.getByRole("button", { name: "manager", exact: true }).waitFor();
+  // what is still asked for after the account is closed would be refused
+  await theirs.getByRole("link", { name: "Neutral leach, second tank" }).waitFor();
 
   await members.detail(name).getByRole("button", { name: "Close the account" }).click();
   await page.getByRole("dialog").getByRole("button", { name: "Close the account" }).click();
