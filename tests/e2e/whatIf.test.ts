@@ -54,6 +54,26 @@ test("B is taken into the plan from beside A in one step, which one Undo takes b
   await expect.poll(() => plan.number("Temperature of the liquor").inputValue()).toBe("60");
 });
 
+test("a draft beside a revision is what the address says, in the scale it was read in, for somebody else as well", async () => {
+  const { page } = shared();
+  await turnTo(page, path);
+  const plan = new WorkspaceScreen(page);
+  await plan.drawn();
+  await plan.type("Temperature of the liquor", "45");
+  await plan.header().getByText("Unsaved changes").waitFor();
+  await page.waitForTimeout(500); // the draft is kept when the hand rests
+  await page.goto(`${path}/compare?a=3&b=draft&scale=mV,SHE,liquor`);
+  const sideB = (of: Page) => of.getByRole("combobox", { name: "Side B" });
+  const words = (of: Page) => of.getByRole("region", { name: "The difference in words" });
+  await expect.poll(() => sideB(page).innerText()).toMatch(/^my draft/);
+  await expect.poll(() => new URL(page.url()).searchParams.get("b")).toBe("3~temperatureC:45");
+  await expect.poll(() => words(page).innerText()).toMatch(/mV/);
+  const { page: other } = await openPageAs("manager", { path: `${path}/compare${new URL(page.url()).search}` });
+  await expect.poll(() => sideB(other).innerText()).toMatch(/^settings from revision 3/);
+  await expect.poll(async () => (await words(other).innerText()).replaceAll("settings from revision 3", "my draft")).toBe(await words(page).innerText()); // prettier-ignore
+  await expect.poll(() => new URL(other.url()).search).toBe(new URL(page.url()).search);
+});
+
 /** What of a view shows: the figure, the words over it, the list beside it. */
 async function seen(page: Page) {
   const plan = new WorkspaceScreen(page);

@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useRef, useState } from "react";
+import { useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
 import { Link, useNavigate, useParams, useSearchParams } from "react-router-dom";
 import { groundDifference } from "../../../../shared/compare/ground";
 import { limitMoves } from "../../../../shared/compare/limits";
@@ -11,15 +11,17 @@ import { Note } from "../../../components/text";
 import { savedAt } from "../../../lib/format";
 import { usePlan, useRevisions } from "../../../lib/plans";
 import { usePotentialScale } from "../../../lib/potential";
+import { bringScale, useScaleChoice } from "../../../lib/scaleChoice";
 import { useThemeColours } from "../../../lib/theme";
 import { usePageTitle } from "../../../lib/title";
-import { queryText } from "../address/codec";
+import { decodeView, encodeView, queryText } from "../address/codec";
 import { TAKE_SETTINGS } from "../address/useOpened";
 import { encodeSettings } from "../address/settings";
+import { bareView } from "../address/view";
 import { ChangeB } from "./ChangeB";
 import { CompareMaps, type ShownMap } from "./CompareMaps";
 import { CompareWords } from "./CompareWords";
-import { type Side, useSide, useSolvedSide } from "./sides";
+import { MY_DRAFT, type Side, useSide, useSolvedSide } from "./sides";
 
 /** Two states of a plan side by side: revisions, the draft, or settings tried here. */
 export default function ComparePage() {
@@ -83,7 +85,9 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
   const [trying, setTrying] = useState(false);
   const [tried, setTried] = useState<PlanInputs | null>(null);
   const sideB = useMemo(() => (tried ? { ...b, name: "settings tried here", inputs: tried } : b), [b, tried]);
+  useScaleOfAddress(search, a.inputs);
   const scale = usePotentialScale(a.inputs.temperatureC);
+  const [scaleChoice] = useScaleChoice();
   const colours = useThemeColours();
   const [one, two] = [useSolvedSide(a, scale, colours, false), useSolvedSide(sideB, scale, colours, false)];
   const difference = useMemo(
@@ -113,6 +117,17 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
   const changeLater = useRef(change);
   useEffect(() => {
     changeLater.current = change;
+  });
+  // The address says what is compared, whoever opens it: a draft as settings, the scale in force.
+  const scaleText = encodeView({ ...bareView, scale: scaleChoice }).find(([key]) => key === "scale")?.[1] ?? null;
+  const said = {
+    a: aText === "draft" ? encodeSettings(plan.latest, a.inputs) : aText,
+    b: bText === "draft" ? encodeSettings(plan.latest, b.inputs) : bText,
+    scale: scaleText,
+  };
+  const unsaid = Object.entries(said).some(([key, value]) => search.get(key) !== value);
+  useEffect(() => {
+    if (unsaid) changeLater.current(said);
   });
   // Settings tried go into the address when the hand rests.
   useEffect(() => {
@@ -197,6 +212,16 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
   );
 }
 
+/** A scale that the address names stands over the member's own while the comparison is open. */
+function useScaleOfAddress(search: URLSearchParams, inputs: PlanInputs) {
+  const [brought] = useState(() => (search.has("scale") ? decodeView(search, inputs).view.scale : null));
+  useLayoutEffect(() => {
+    if (!brought) return;
+    bringScale(brought);
+    return () => bringScale(null);
+  }, [brought]);
+}
+
 /** One side: the draft, or a revision. */
 function Choose({
   plan,
@@ -212,14 +237,15 @@ function Choose({
   onChange: (value: string) => void;
 }) {
   const revisions = useRevisions(plan.id).data ?? [plan.latest];
-  const listed = value === "draft" || /^\d+$/.test(value);
+  const draft = name.startsWith(MY_DRAFT);
+  const listed = draft || /^\d+$/.test(value);
   return (
     <span className="inline-flex items-baseline gap-2">
       <b className="font-mono">{label}</b>
       <Select
         label={`Side ${label}`}
         layout="bare"
-        value={listed && name !== "settings tried here" ? value : "settings"}
+        value={draft ? "draft" : listed && name !== "settings tried here" ? value : "settings"}
         onChange={(next) => next !== "settings" && onChange(next)}
         options={[
           ...(listed && name !== "settings tried here" ? [] : [{ value: "settings", label: name, text: name }]),

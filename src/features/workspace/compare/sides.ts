@@ -9,6 +9,7 @@ import type { ThemeColours } from "../../../lib/theme";
 import type { Layers } from "../../../map/view";
 import { baseOf, decodeSettings } from "../address/settings";
 import { readDraft } from "../model/draftShelf";
+import { sameInputs } from "../model/history";
 import { useMapModel } from "../model/useMapModel";
 import { useHeld } from "../model/usePoint";
 import { wholeSight } from "../model/useSight";
@@ -21,6 +22,8 @@ export interface Side {
   inputs: PlanInputs;
   data: ChemicalData;
 }
+
+export const MY_DRAFT = "my draft";
 
 type Found = { state: "reading" } | { state: "wrong"; why: string } | { state: "there"; side: Side };
 
@@ -44,14 +47,17 @@ export function useSide(plan: PlanRow, text: string): Found {
     if (!base) return null;
     return isRevision ? { inputs: base.inputs } : decodeSettings(base.inputs, text);
   }, [text, number, isRevision, base, draft, plan.latest]);
-  const name =
-    text === "draft"
-      ? draft
-        ? "my draft"
-        : `my draft, as revision ${plan.latest.number}`
-      : isRevision
-        ? `revision ${number}`
-        : `settings from revision ${number}`;
+  // Settings in an address that are this browser's draft are called so.
+  const drafted =
+    text === "draft" ||
+    (!isRevision && draft !== null && inputs !== null && "inputs" in inputs && sameInputs(inputs.inputs, draft.inputs));
+  const name = drafted
+    ? draft
+      ? MY_DRAFT
+      : `${MY_DRAFT}, as revision ${plan.latest.number}`
+    : isRevision
+      ? `revision ${number}`
+      : `settings from revision ${number}`;
   return useMemo((): Found => {
     if (revision.error)
       return { state: "wrong", why: `Revision ${number} could not be read: ${revision.error.message}` };
