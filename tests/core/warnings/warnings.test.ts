@@ -19,6 +19,35 @@ const neutral: Problem = {
 const said = (problem: Problem, code: string) => solved(problem).warnings.filter((w) => w.code === code);
 const texts = (problem: Problem, code: string) => said(problem, code).map((w) => w.text).join("\n"); // prettier-ignore
 
+describe("LIGAND_DRAWN_DOWN", () => {
+  const cyanide = (total: number, silver: number): Problem => ({
+    temperatureC: 25,
+    metals: [{ element: "Ag", role: "target", requirement: "dissolved", activity: silver }],
+    ligands: [{ component: "CN", activity: total }],
+    frame: { pH: [9, 12], Eh: [-0.8, 0.4] },
+    controlBand: band,
+  });
+
+  test("a total of which the dissolved metal would bind more than a third is said to be drawn down", () => {
+    // by the formula alone: a dicyano or tricyano complex binds two or three cyanides a silver
+    const ruling = solved(cyanide(0.01, 0.003)).fields.map((f) => /^Ag\(CN\)([234])/.exec(f.species)?.[1]);
+    const bound = Math.max(...ruling.map((n) => Number(n ?? 0))) * 0.003;
+    expect(bound).toBeGreaterThan(0.01 / 3);
+    const [warning, ...more] = said(cyanide(0.01, 0.003), "LIGAND_DRAWN_DOWN");
+    expect(more).toEqual([]);
+    expect(warning).toMatchObject({ metal: "Ag" });
+    expect(warning!.text).toBe(
+      `Ag at 0.003 would bind ${bound.toPrecision(2)} of CN, more than a third of its total 0.01: the total is not drawn down here`,
+    );
+  });
+
+  test("not where there is plenty, nor where no complex of the ligand has a field", () => {
+    expect(said(cyanide(0.05, 1e-4), "LIGAND_DRAWN_DOWN")).toEqual([]);
+    const trace = { ...neutral, ligands: [{ component: "Cl", activity: 1e-6 }] };
+    expect(said(trace, "LIGAND_DRAWN_DOWN")).toEqual([]);
+  });
+});
+
 describe("METASTABLE", () => {
   test("a limit on ferrihydrite names the more stable solid left out, and by how much", () => {
     const [warning, ...more] = said(neutral, "METASTABLE").filter((w) => w.metal === "Fe");
