@@ -164,7 +164,9 @@ test("lists, menus and help are worked by keys alone, and give the focus back", 
   const before = await plan.answers();
   await liquor.focus();
   await page.keyboard.press("ArrowDown");
-  await page.getByRole("option", { name: "sulfate", exact: false, selected: true }).waitFor();
+  const chosen = page.getByRole("option", { name: "sulfate", exact: false, selected: true });
+  // The list stands a moment before the chosen line has the focus.
+  await expect.poll(() => chosen.evaluate((option) => option === document.activeElement)).toBe(true);
   await page.keyboard.press("ArrowDown");
   await page.keyboard.press("ArrowDown");
   await page.keyboard.press("Enter");
