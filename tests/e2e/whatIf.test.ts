@@ -36,10 +36,23 @@ test("two revisions stand side by side with what was lost; a setting varied show
   await film.getByRole("button", { name: /^4\.64e−3: margin/ }).click();
   await plan.header().getByText("Unsaved changes").waitFor();
   await plan.button("Undo").click();
+  // "Back" from the moment the address has followed, drawn or not.
+  const back = page.evaluate(
+    () =>
+      new Promise<void>((resolve) => {
+        const push = history.pushState.bind(history);
+        history.pushState = (...entry) => {
+          push(...entry);
+          history.pushState = push;
+          history.back();
+          resolve();
+        };
+      }),
+  );
   await film.getByRole("button", { name: "back to the map" }).click();
-  await plan.drawn();
-  await page.goBack();
+  await back;
   await film.waitFor();
+  expect(new URL(page.url()).searchParams.get("vary")).toBe("amount-Fe");
 });
 
 test("B is taken into the plan from beside A in one step, which one Undo takes back", async () => {

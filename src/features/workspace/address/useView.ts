@@ -39,6 +39,18 @@ export function useView(start: PlanView, planId: string, inputs: PlanInputs) {
       setView(settled(decodeView(new URLSearchParams(location.search), now.current).view, planId)),
     );
   }, [location, planId]);
+  // "Back" may come before a busy page has shown the address it is back from: the location is then seen to change by nobody.
+  useEffect(() => {
+    const { pathname } = window.location;
+    const back = () => {
+      if (window.location.pathname !== pathname) return;
+      own.current = false;
+      const query = new URLSearchParams(window.location.search);
+      void import("./codec").then(({ decodeView }) => setView(settled(decodeView(query, now.current).view, planId)));
+    };
+    window.addEventListener("popstate", back);
+    return () => window.removeEventListener("popstate", back);
+  }, [planId]);
   useLayoutEffect(() => {
     bringScale(view.scale);
     return () => bringScale(null);
