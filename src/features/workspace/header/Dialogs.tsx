@@ -1,11 +1,10 @@
 import { useState } from "react";
 import { useNavigate } from "react-router-dom";
-import type { PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import { whenOpened } from "../../../components/whenOpened";
 import { DuplicateDialog } from "../../plans/DuplicateDialog";
 import { type PlanDialogProps, RenameDialog } from "../../plans/RenameDialog";
 import { RevisionsDialog } from "../../plans/RevisionsDialog";
-import type { DraftInHand } from "../model/useDraft";
+import type { Table } from "../model/useTable";
 import type { DifferenceDialogProps } from "./DifferenceDialog";
 import type { SaveDialogProps } from "./SaveDialog";
 
@@ -20,20 +19,15 @@ export type DialogName = "save" | "difference" | "revisions" | "rename" | "dupli
 export function Dialogs({
   open,
   onOpen,
-  plan,
-  draft,
+  table,
   unconfirmed,
-  frozen,
-  onRestore,
 }: {
   open: DialogName | null;
   onOpen: (dialog: DialogName | null) => void;
-  plan: PlanRow;
-  draft: DraftInHand;
+  table: Table;
   unconfirmed: readonly string[];
-  frozen: boolean;
-  onRestore: (revision: RevisionRow) => void;
 }) {
+  const { plan, draft, frozen, restore } = table;
   const navigate = useNavigate();
   const [note, setNote] = useState("");
   const show = (name: DialogName) => ({
@@ -60,7 +54,7 @@ export function Dialogs({
       <RevisionsDialog
         {...show("revisions")}
         plan={plan}
-        onTake={(revision) => (frozen ? onRestore(revision) : draft.take(revision))}
+        onTake={(revision) => (frozen ? restore(revision) : draft.take(revision))}
         onLook={(revision) => {
           onOpen(null);
           void navigate(`/plans/${plan.id}?revision=${revision.number}`);

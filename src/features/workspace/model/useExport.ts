@@ -1,33 +1,27 @@
 import { useCallback } from "react";
-import type { PlanInputs, PlanRow, RevisionRow } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
-import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { messageOf } from "../../../lib/failure";
 import type { PotentialScale } from "../../../lib/potential";
 import type { ProposalStore } from "../../../map/proposalStore";
 import type { ShownTrials } from "../../../map/TrialsLayer";
 import type { ExportKind, Said } from "../header/WorkspaceHeader";
-import type { DraftInHand } from "./useDraft";
 import type { MapModel } from "./useMapModel";
+import type { Table } from "./useTable";
 
-interface OnTheTable {
-  plan: PlanRow;
-  frozen: RevisionRow | null;
-  draft: DraftInHand;
-  inputs: PlanInputs;
+interface Shown {
   problem: Problem;
   solution: Solution | null;
   model: MapModel | null;
   trials: ShownTrials | null;
   proposals: ProposalStore;
   scale: PotentialScale;
-  data: ChemicalData;
 }
 
-/** Makes a file of what is on the table, and says how it goes. */
-export function useExport(table: OnTheTable, say: (word: Said | null) => void) {
-  const { plan, frozen, draft, inputs, problem, solution, model, trials, proposals, scale, data } = table;
+/** Makes a file of what is on the table and shown of it, and says how it goes. */
+export function useExport(table: Table, shown: Shown, say: (word: Said | null) => void) {
+  const { plan, frozen, draft, inputs, data } = table;
+  const { problem, solution, model, trials, proposals, scale } = shown;
   return useCallback(
     (kind: ExportKind) => {
       if (!solution || !model) return;

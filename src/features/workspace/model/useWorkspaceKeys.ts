@@ -1,25 +1,24 @@
 import type { DialogName } from "../header/Dialogs";
-import type { DraftInHand } from "./useDraft";
-import type { useLook } from "./useLook";
+import type { Answers } from "./useAnswers";
 import { useKeys } from "./useKeys";
+import type { useLook } from "./useLook";
 import type { SightInHand } from "./useSight";
+import type { Table } from "./useTable";
 
-/** What the keyboard does on the plan's screen; KeysDialog names it all.
- *  @param fixed  the settings are only looked at     @param windows  how many there are, which is in hand, and how to take another */
+/** What the keyboard does on the plan's screen; KeysDialog names it all. */
 export function useWorkspaceKeys(
-  draft: DraftInHand,
-  look: ReturnType<typeof useLook>,
+  { draft, inputs, fixed }: Table,
+  { focus, setFocus, map }: ReturnType<typeof useLook>,
+  { solution, chosen, choose }: Answers,
   see: SightInHand["change"],
-  elements: readonly string[],
-  fixed: boolean,
-  mayWrite: boolean,
-  windows: { count: number; chosen: number; choose: (index: number) => void },
-  open: (dialog: DialogName) => void,
-  copyLink: () => void,
-  comments: () => void,
+  {
+    mayWrite,
+    open,
+    copyLink,
+    comments,
+  }: { mayWrite: boolean; open: (dialog: DialogName) => void; copyLink: () => void; comments: () => void },
 ): void {
-  const { count, chosen, choose } = windows;
-  const { focus, setFocus, map } = look;
+  const count = solution?.windows.length ?? 0;
   useKeys([
     { key: "z", ctrl: true, shift: false, run: () => fixed || draft.undo() },
     { key: "z", ctrl: true, shift: true, run: () => fixed || draft.redo() },
@@ -35,7 +34,7 @@ export function useWorkspaceKeys(
       key,
       run: () => see({ focus: null, pair: null, pinned: null, ...(key === "0" ? { hidden: [] } : {}) }),
     })),
-    ...elements.slice(0, 9).map((element, i) => ({
+    ...inputs.metals.slice(0, 9).map(({ element }, i) => ({
       key: String(i + 1),
       run: () => setFocus(focus === element ? null : element),
     })),
