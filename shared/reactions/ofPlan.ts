@@ -72,6 +72,21 @@ export function planReaction(
   return { from, electrons, redox, chosen, rules, outcome };
 }
 
+/** Whether a start is its own product: nothing reacts, and that is no error.
+ *  @param outcome  of `planReaction`     @source  docs/method.md, section 8 */
+export const staysAsItIs = (outcome: PlanReaction["outcome"]): boolean =>
+  !outcome.ok && outcome.error.code === "INVALID_INPUT" && outcome.error.path === "from";
+
+/** The sentence for such a start, after its name.
+ *  @param from  species id     @param data  library     @returns  words without a full stop
+ *  @example staysWords("Cu(s)", chemistry()).length // => 59 */
+export function staysWords(from: string, data: ChemicalData): string {
+  const species = data.species.get(from);
+  if (species?.phase === "aq") return "stays dissolved as it is: this species rules at the set point";
+  const element = species !== undefined && species.charge === 0 && Object.keys(species.composition).length === 1;
+  return `stays as it is: the ${element ? "metal" : "mineral"} itself is stable at the set point`;
+}
+
 /** Every overall reaction of a plan at its set point, in the order of its starts; a start that already stands as its own product is left
  *  out.
  *  @param problem, data, inputs, solution  of the plan     @param at  set point     @returns  as `planReaction`     @source  as `planReaction` */
@@ -84,5 +99,5 @@ export function planReactions(
 ): PlanReaction[] {
   return startsOf(inputs, solution, data)
     .map((from) => planReaction(problem, data, inputs, at, from))
-    .filter(({ outcome }) => outcome.ok || outcome.error.code !== "INVALID_INPUT" || outcome.error.path !== "from");
+    .filter(({ outcome }) => !staysAsItIs(outcome));
 }

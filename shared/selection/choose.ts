@@ -3,7 +3,9 @@ import type { Problem } from "../schemas/problem";
 import type { ChemicalData, Species } from "../species/chemicalData";
 import { componentKind, ligandNumbers, speciesHolding, SULFIDE_SULFUR } from "./components";
 import { isSulfate } from "../species/sulfur";
+import { ligandWord } from "../words/componentWord";
 import { leavesOut, temperatureStage } from "./leftOut";
+import { withoutTotal } from "./missing";
 
 /** Which species count, in the order of the problem's components and metals. */
 export interface Chosen {
@@ -20,7 +22,7 @@ const REMEMBERED = 16;
  *  through the temperature stages of the defaults, so that a choice can be used again.
  *  @param problem, data     @param totals  component -> total     @param sulfateReduction  one sulfur pool or two
  *  @returns  the choice, or UNKNOWN_METAL, UNKNOWN_COMPONENT, UNKNOWN_SPECIES, LIGAND_MISSING, INVALID_INPUT with a path
- *  @source  docs/method.md, steps 2 and 3 */
+ *  @source  docs/method.md, sections 2 and 3 */
 export function chooseSpecies(
   problem: Problem,
   data: ChemicalData,
@@ -155,12 +157,11 @@ function namedSpecies(
       const path = `${list}.${i}`;
       if (!species) return fail("UNKNOWN_SPECIES", path, `"${id}" is not a species of the library`);
       if (list === "leftOut") continue;
-      const metal = metals.find((m) => species.composition[m] !== undefined);
-      if (metal === undefined) continue;
-      for (const [component] of ligandNumbers(species, metal, sulfateReduction)) {
-        if (totals.has(component) || componentKind(data, component) === "metal") continue;
-        return fail("LIGAND_MISSING", path, `${id} needs ${component}, which has no total in this problem`);
-      }
+      const [component] = withoutTotal(species, metals, (c) => totals.has(c), data, sulfateReduction);
+      if (component === undefined) continue;
+      const word = ligandWord(data, component, sulfateReduction);
+      const remedy = `give ${component} (${word}) a total, or take ${species.name} out of ${list}`;
+      return fail("LIGAND_MISSING", path, `${id} needs ${component}, which has no total in this problem: ${remedy}`);
     }
   }
   return ok(null);

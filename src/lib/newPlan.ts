@@ -1,3 +1,4 @@
+import { withMissingTotals } from "../../shared/plan/missingTotals";
 import type { PlanInputs, PlanMetal, PresetName } from "../../shared/schemas/plan";
 import type { Frame } from "../../shared/schemas/problem";
 import type { ChemicalData } from "../../shared/species/chemicalData";
@@ -98,7 +99,8 @@ export interface FeedPlan {
   sulfate: number | null;
 }
 
-/** The first question of a leach of a feed: its metals at the tenors taken over, its minerals named. */
+/** The first question of a leach of a feed: its metals at the tenors taken over, its minerals named, and what these need of
+ *  the liquor given a first total. */
 export function feedPlanInputs(
   { preset, temperatureC, lines, minerals, sulfate }: FeedPlan,
   data: ChemicalData,
@@ -117,5 +119,5 @@ export function feedPlanInputs(
     gamma: null,
   }));
   const ligands = base.ligands.map((l) => (l.component === "S" && sulfate !== null ? { ...l, activity: sulfate } : l));
-  return { ...base, metals, ligands, feedMinerals: [...minerals] };
+  return withMissingTotals({ ...base, metals, ligands, feedMinerals: [...minerals] }, data);
 }

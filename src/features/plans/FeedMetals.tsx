@@ -4,6 +4,7 @@ import type { PlanInputs } from "../../../shared/schemas/plan";
 import { roles } from "../../../shared/schemas/problem";
 import { solve } from "../../../shared/solve";
 import { marginWords } from "../../../shared/windows/limitWords";
+import { ligandWord } from "../../../shared/words/componentWord";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { Check } from "../../components/choice";
 import { SpeciesName } from "../../components/Formula";
@@ -12,6 +13,7 @@ import { Term } from "../../components/Help";
 import { NumberField } from "../../components/NumberField";
 import { Select } from "../../components/Select";
 import { Note, Remark, SectionHead } from "../../components/text";
+import { presetLigands } from "../../lib/presetLigands";
 import { counted, fixed, inputText, significant, withUnit } from "../../lib/format";
 import type { LineEdit, ShownLine } from "./feedLines";
 
@@ -83,6 +85,7 @@ export function FeedMetals({
           {minerals.unknown.length > 0 && (
             <Note>Not in the chemistry library, so not drawn: {minerals.unknown.join(", ")}.</Note>
           )}
+          {inputs !== null && <BroughtIn inputs={inputs} data={data} />}
         </section>
       )}
       {inputs === null ? (
@@ -93,6 +96,22 @@ export function FeedMetals({
         <Preview inputs={inputs} data={data} />
       )}
     </>
+  );
+}
+
+/** Totals that the liquor has only because a mineral needs them. */
+function BroughtIn({ inputs, data }: { inputs: PlanInputs; data: ChemicalData }) {
+  const usual = new Set(presetLigands(data, inputs.preset).map((l) => l.component));
+  const brought = [...inputs.ligands, ...inputs.others].filter((t) => !usual.has(t.component));
+  if (brought.length === 0) return null;
+  return (
+    <Note>
+      For these minerals the liquor starts with{" "}
+      {brought
+        .map((t) => `${t.activity} mol/L ${ligandWord(data, t.component, inputs.sulfateReduction)}`)
+        .join(" and ")}
+      : a start, not a measurement; change it in the plan.
+    </Note>
   );
 }
 

@@ -1,7 +1,14 @@
 import { describe, expect, test } from "vitest";
 import { toProblem } from "../../../shared/plan/toProblem";
 import { overallReaction } from "../../../shared/reactions/atSetPoint";
-import { planReaction, planReactions, startsOf, usualRedox } from "../../../shared/reactions/ofPlan";
+import {
+  planReaction,
+  planReactions,
+  startsOf,
+  staysAsItIs,
+  staysWords,
+  usualRedox,
+} from "../../../shared/reactions/ofPlan";
 import type { PlanInputs } from "../../../shared/schemas/plan";
 import { metal, sheetInputs } from "../../support/sheetFixture";
 import { library as data, solved } from "../../support/solver";
@@ -70,6 +77,16 @@ describe("what the plan has chosen is what is written", () => {
     expect(outcome).toMatchObject({ ok: false, error: { code: "INVALID_INPUT", path: "products.Cu" } });
   });
 });
+
+test("a metal won, and any start that rules at the set point, is said to stay; no reaction to itself is written", () => {
+  const at = { pH: 3.5, Eh: -0.74 };
+  const found = startsOf(purification, solved(toProblem(purification, data)), data).map((from) => of(purification, at, from));
+  expect(found.filter(({ outcome }) => staysAsItIs(outcome)).map(({ from }) => from)).toEqual(["Cd(s)"]);
+  expect(planReactions(toProblem(purification, data), data, purification, solved(toProblem(purification, data)), at).map((r) => r.from)).toEqual(["CdSO4(aq)", "Zn(s)"]);
+  expect(staysWords("Cd(s)", data)).toBe("stays as it is: the metal itself is stable at the set point");
+  expect(staysWords("CuFeS2(s)", data)).toBe("stays as it is: the mineral itself is stable at the set point");
+  expect(staysWords("CdSO4(aq)", data)).toMatch(/^stays dissolved as it is/);
+}); // prettier-ignore
 
 test("a cementing metal's own product is named: what rules at the set point without a choice, the choice with it", () => {
   const at = { pH: 3.5, Eh: -0.74 };

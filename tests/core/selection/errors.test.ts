@@ -81,7 +81,7 @@ const chemistry: Wrong[] = [
   ["a component twice", but({ others: [{ component: "Cl", activity: 1 }] }), "INVALID_INPUT", "others.0.component", /Cl has two totals/],
   ["a component without species", but({ leftOut: [...library.species.keys()].filter((id) => id.includes("Cl")) }), "UNKNOWN_COMPONENT", "ligands.0.component", /Cl has no species left/],
   ["sulfide sulfur with one pool", but({ sulfateReduction: true, ligands: [{ component: "S(sulfide)", activity: 1 }] }), "INVALID_INPUT", "ligands.0.component", /one pool: give its total as S/],
-  ["a feed mineral without its ligand", but({ feedMinerals: ["CuO(s,tenorite)", "CuS(s)"].slice(-1) }), "LIGAND_MISSING", "feedMinerals.0", /CuS\(s\) needs S\(sulfide\)/],
+  ["a feed mineral without its ligand", but({ feedMinerals: ["CuO(s,tenorite)", "CuS(s)"].slice(-1) }), "LIGAND_MISSING", "feedMinerals.0", /^CuS\(s\) needs S\(sulfide\), .*: give S\(sulfide\) \(sulfide\) a total, or take covellite out of feedMinerals$/],
   ["a species put back without its partner", but({ metals: [{ ...metal, element: "Fe" }], ligands: [{ component: "S", activity: 1 }], putBack: ["KFe3(SO4)2(OH)6(s,jarosite)"] }), "LIGAND_MISSING", "putBack.0", /needs K, which has no total/],
   ["a species alone without its ligand", but({ only: ["Cu(s)", "Cu(NH3)4^2+(aq)"] }), "LIGAND_MISSING", "only.1", /needs NH3/],
   ["a feed mineral that is none", but({ feedMinerals: ["CuQ(s)"] }), "UNKNOWN_SPECIES", "feedMinerals.0", /"CuQ\(s\)" is not a species/],

@@ -1,7 +1,5 @@
 import { lazy, Suspense } from "react";
-import { FormulaText } from "../../../components/FormulaText";
 import { Loading } from "../../../components/status";
-import { Remark } from "../../../components/text";
 import type { PotentialScale } from "../../../lib/potential";
 import type { LimitStore } from "../../../map/limitStore";
 import type { ProposalStore } from "../../../map/proposalStore";
@@ -17,6 +15,7 @@ import { AnswersPanel } from "./AnswersPanel";
 import { ChooseReagents } from "./ChooseReagents";
 
 const DataChanged = lazy(async () => ({ default: (await import("../../../components/DataChanged")).DataChanged }));
+const NotSolved = lazy(() => import("../asks/NotSolved"));
 const CommentsPanel = lazy(() => import("../comments/CommentsPanel"));
 
 /** The right side: the comments while they are open, else what the plan answers and what was tried on it. */
@@ -82,15 +81,9 @@ export function AnswersSide({
         </Suspense>
       )}
       {failure && (
-        <Remark className="mb-3 border-signal!">
-          <p role="alert">
-            <b>This cannot be solved.</b> <FormulaText text={failure.message} />.{" "}
-            <span className="text-muted">
-              At <span className="font-mono">{failure.path || "the plan"}</span>.
-              {solution && " The map still shows the last answer; nothing you entered is lost."}
-            </span>
-          </p>
-        </Remark>
+        <Suspense fallback={null}>
+          <NotSolved />
+        </Suspense>
       )}
       {solution && map && (
         <AnswersPanel

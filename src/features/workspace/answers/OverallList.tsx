@@ -2,7 +2,7 @@ import { useDeferredValue, useMemo } from "react";
 import { Link } from "react-router-dom";
 import { reagentById } from "../../../../shared/reach/reagents";
 import type { Demand } from "../../../../shared/reactions/demand";
-import { planReaction, startsOf } from "../../../../shared/reactions/ofPlan";
+import { planReaction, startsOf, staysAsItIs, staysWords } from "../../../../shared/reactions/ofPlan";
 import { type RedoxReagent, redoxReagents } from "../../../../shared/reactions/redoxReagents";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Problem } from "../../../../shared/schemas/problem";
@@ -15,6 +15,7 @@ import { Quantity } from "../../../components/Quantity";
 import { Select, type SelectOption } from "../../../components/Select";
 import { Note } from "../../../components/text";
 import { celsius, fixed, significant } from "../../../lib/format";
+import { Fold } from "../asks/Fold";
 import type { Edit } from "../model/edit";
 import { chooseProduct, chooseRedox } from "../model/overallEdit";
 import { Products } from "./Products";
@@ -65,6 +66,22 @@ function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallPro
       .filter((r) => (electrons > 0 ? r.role === "oxidant" : r.role !== "oxidant"))
       .map((r) => ({ value: r.id, label: <Formula formula={nameOf(r)} />, text: nameOf(r), note: r.role })),
   ];
+  const products = (
+    <Products
+      {...{ from, data, redox, rules, chosen }}
+      sulfateReduction={problem.sulfateReduction ?? problem.temperatureC >= 150}
+      onChoose={onInputs && ((component, product) => onInputs(chooseProduct(from, component, product)))}
+    />
+  );
+  if (!byHand && staysAsItIs(outcome))
+    return (
+      <li className="hairline py-1.5">
+        <b>
+          <SpeciesName id={from} withPhase />
+        </b>{" "}
+        {staysWords(from, data)}.{onInputs && <Fold title="choose what it becomes">{products}</Fold>}
+      </li>
+    );
   return (
     <li className="hairline py-1.5">
       <div className="font-bold">
@@ -80,11 +97,7 @@ function Overall({ from, problem, inputs, setPoint, data, onInputs }: OverallPro
           options={options}
         />
       )}
-      <Products
-        {...{ from, data, redox, rules, chosen }}
-        sulfateReduction={problem.sulfateReduction ?? problem.temperatureC >= 150}
-        onChoose={onInputs && ((component, product) => onInputs(chooseProduct(from, component, product)))}
-      />
+      {products}
       {outcome.ok ? (
         <>
           <p className="py-1 leading-relaxed">

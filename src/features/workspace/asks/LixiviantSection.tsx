@@ -1,4 +1,5 @@
 import { presetCaution } from "../../../../shared/hazards/presetCautions";
+import { FIRST_TOTAL } from "../../../../shared/plan/missingTotals";
 import { presetNames } from "../../../../shared/schemas/plan";
 import { componentKind, SULFIDE_SULFUR } from "../../../../shared/selection/components";
 import { Check } from "../../../components/choice";
@@ -87,7 +88,10 @@ function AddComponent() {
       value=""
       onChange={(component) =>
         edit(
-          addTotal(componentKind(data, component) === "partner" ? "others" : "ligands", { component, activity: 0.01 }),
+          addTotal(componentKind(data, component) === "partner" ? "others" : "ligands", {
+            component,
+            activity: FIRST_TOTAL,
+          }),
         )
       }
       options={[...ligands.map(option("ligand")), ...partners.map(option("other component"))]}
