@@ -123,7 +123,8 @@ export const revisionCreate = z.object({ note: z.string().trim().max(500), input
 
 /** What a window sheet shows beside the revision itself: a scale beside SHE (an electrode of electrodes.csv at its temperature, C; the
  *  liquor's unless given), the window it speaks of (the best unless given; one that is not there gives the best), and the gases whose regions
- *  are drawn, parted by commas (those that reach the window unless given). */
+ *  are drawn, parted by commas (those that reach the window unless given); and the reagents whose reach is told, likewise (the usual ones of
+ *  the liquor unless given). */
 export const windowSheetQuery = z.object({
   electrode: z.string().min(1).max(40).optional(),
   electrodeC: z.coerce.number().min(0).max(100).optional(),
@@ -133,6 +134,11 @@ export const windowSheetQuery = z.object({
     .max(200)
     .transform((text) => text.split(",").filter((gas) => gas !== ""))
     .pipe(z.array(z.enum(hazardGases)))
+    .optional(),
+  reach: z
+    .string()
+    .max(1000)
+    .transform((text) => text.split(",").filter((id) => id !== ""))
     .optional(),
 });
 

@@ -6,6 +6,7 @@ import type { Pen } from "./pen";
 import { inputsSay } from "./says/asked";
 import { cautionsSay } from "./says/cautions";
 import { reactionsSay } from "./says/reactions";
+import { reachSays } from "./says/reach";
 import { robustSays } from "./says/robust";
 import { gradesSay, warningsSay } from "./says/trust";
 import { conflictSays, limitSays } from "./says/window";
@@ -19,6 +20,7 @@ export interface Caps {
   inputs: number;
   warnings: number;
   reactions: number;
+  reach: number;
   exposure: boolean;
   /** every species is named with its grade, not only those on a limit */
   grades: boolean;
@@ -28,6 +30,7 @@ export const ALL: Caps = {
   inputs: Infinity,
   warnings: Infinity,
   reactions: Infinity,
+  reach: Infinity,
   exposure: true,
   grades: true,
 };
@@ -76,6 +79,7 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
   const pair: readonly Column[] = [{ share: 0.27 }, { share: 0.73 }];
   const asked = inputsSay(work).map(([label, value]) => cells(pen, pair, [label, value], style, width));
   const over = robustSays(work)?.map((text) => textBlock(pen, text, style, width));
+  const reached = reachSays(work).map((text) => textBlock(pen, text, style, width));
   const balanced = reactionsSay(work).map(({ reaction, demand }) =>
     stack([textBlock(pen, reaction, style, width), textBlock(pen, demand, mutedStyle(size - 0.5), width)]),
   );
@@ -87,6 +91,13 @@ function leftColumn(pen: Pen, work: SheetWork, size: number, width: number, caps
           gap(size * 0.8),
           heading(pen, "Over the ranges", "dashed inner outline", size, width),
           rows(pen, over, Infinity, size, width, "lines"),
+        ]
+      : []),
+    ...(reached.length > 0
+      ? [
+          gap(size * 0.8),
+          heading(pen, "Reach", "what platinum commonly reads, vs SHE; no equilibrium", size, width),
+          rows(pen, reached, caps.reach, size, width, "reagents"),
         ]
       : []),
     ...(balanced.length > 0

@@ -88,16 +88,18 @@ function fitted(pen: Pen, work: SheetWork, room: number, least: number): { mapHe
     const mapHeight = heights.find((h) => below.height <= room - h);
     if (mapHeight !== undefined) return { mapHeight, below };
   }
-  const caps: Caps = { ...ALL, limits: work.sentences.length + 1, inputs: 14, reactions: 5 };
+  const caps: Caps = { ...ALL, limits: work.sentences.length + 1, inputs: 14, reactions: 5, reach: 5 };
   let below = belowMap(pen, work, SMALLEST, WIDTH, caps);
   while (below.height > room - least) {
-    if (caps.reactions > 3) caps.reactions--;
+    if (caps.reach > 3) caps.reach = Math.min(caps.reach, work.reach.length + 1) - 1;
+    else if (caps.reactions > 3) caps.reactions--;
     else if (caps.warnings > 3) caps.warnings = Math.min(caps.warnings, work.solution.warnings.length + 1) - 1;
     else if (caps.limits > 7) caps.limits--;
     else if (caps.exposure) caps.exposure = false;
     else if (caps.inputs > 7) caps.inputs--;
     else if (caps.grades) caps.grades = false;
     else if (caps.limits > 4) caps.limits--;
+    else if (caps.reach > 1) caps.reach--;
     else if (caps.reactions > 1) caps.reactions--;
     else if (caps.warnings > 1) caps.warnings--;
     else if (caps.inputs > 4) caps.inputs--;

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { reagentById } from "../../../shared/reach/reagents";
 import { windowSheetQuery } from "../../../shared/schemas/plan";
 import type { Deps } from "../../deps";
 import { file } from "../../http/answer";
@@ -32,7 +33,15 @@ export const windowSheetRoutes = ({ db, chemistry }: Deps) => [
         const message = `The library has no electrode ${query.electrode} at ${query.electrodeC ?? revision.inputs.temperatureC} C.`;
         throw new Refusal("INVALID_INPUT", "electrode", message);
       }
-      const work = workOf(plan, revision, data, { probe, window: query.window, gases: query.gases });
+      const unknown = query.reach?.find((id) => !reagentById.has(id));
+      if (unknown !== undefined)
+        throw new Refusal("INVALID_INPUT", "reach", `No oxidant, reductant or cementing metal is called "${unknown}".`);
+      const work = workOf(plan, revision, data, {
+        probe,
+        window: query.window,
+        gases: query.gases,
+        reach: query.reach,
+      });
       if (!work.ok) throw Refusal.from(work.error);
       return file(await windowSheet(work.value), {
         "Content-Type": "application/pdf",

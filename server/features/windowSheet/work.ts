@@ -11,6 +11,8 @@ import { hazardRegions, type HazardMap, type HazardRegion } from "../../../share
 import { cautionsFor, hazardContext, type Caution } from "../../../shared/hazards/rules";
 import { toProblem } from "../../../shared/plan/toProblem";
 import { rangesOf } from "../../../shared/plan/rangesOf";
+import { usualReagents } from "../../../shared/reach/reach";
+import { reachAnswers, type ReachAnswer } from "../../../shared/reach/verdict";
 import { planReactions, type PlanReaction } from "../../../shared/reactions/ofPlan";
 import type { PlanInputs, PlanRow, RevisionRow } from "../../../shared/schemas/plan";
 import type { Problem } from "../../../shared/schemas/problem";
@@ -63,6 +65,8 @@ export interface SheetWork {
   reachingGases: readonly HazardRegion[];
   /** what holds over the ranges of the plan; null where it has none, or a failure in words */
   robust: Robust | { failed: string } | null;
+  /** what the reagents chosen bring the slurry to, in the order of the table; none without a window */
+  reach: readonly ReachAnswer[];
   /** overall reactions at the set point as the plan's choices have them; none without a window */
   reactions: readonly PlanReaction[];
   cautions: readonly Caution[];
@@ -118,6 +122,8 @@ export interface SheetWishes {
   probe?: ProbeScale | null | undefined;
   window?: number | undefined;
   gases?: readonly HazardGas[] | undefined;
+  /** reagents whose reach is told; the usual ones of the liquor unless given */
+  reach?: readonly string[] | undefined;
 }
 
 /** Solves a revision once more and gathers what its sheet says.
@@ -126,7 +132,7 @@ export function workOf(
   plan: SheetWork["plan"],
   revision: RevisionRow,
   data: ChemicalData,
-  { probe = null, window: wanted = 0, gases }: SheetWishes = {},
+  { probe = null, window: wanted = 0, gases, reach = usualReagents(revision.inputs) }: SheetWishes = {},
 ) {
   const { inputs } = revision;
   const problem = toProblem(inputs, data);
@@ -160,6 +166,7 @@ export function workOf(
     drawnGases: gases ? (hazards?.regions.filter((r) => gases.includes(r.gas)) ?? []) : reachingGases,
     reachingGases,
     robust: robustOf(problem, inputs, data),
+    reach: window ? reachAnswers(data, window, inputs, reach) : [],
     reactions: setPoint ? planReactions(problem, data, inputs, solution, setPoint) : [],
     cautions: cautionsFor(hazardContext(inputs, setPoint)),
     species: gradesOf(data, solution, window),

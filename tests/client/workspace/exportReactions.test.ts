@@ -2,6 +2,7 @@ import { expect, test } from "vitest";
 import { DEFERENCE } from "../../../shared/hazards/exposure";
 import { hazardRegions } from "../../../shared/hazards/regions";
 import { analyse } from "../../../shared/analysis";
+import { reachesOf } from "../../../shared/reach/reach";
 import { valueOf } from "../../../shared/outcome";
 import { toProblem } from "../../../shared/plan/toProblem";
 import { planReactions } from "../../../shared/reactions/ofPlan";
@@ -76,7 +77,7 @@ const exported = (state: string, hazard = true): Exported => ({
     asked: { metals: [], solution, other: null, through: null, reaches: [], cyanide: false, gases },
     view: { ...view, window: 0, layers: { ...view.layers, hazard } },
     metals: [],
-    reaches: [],
+    reaches: reachesOf(data, ["peroxide", "air"], inputs.preset, inputs.temperatureC),
     practice: [],
     through: [1, 0],
   },
@@ -93,8 +94,10 @@ test("the plan as a file holds its choices, what they give, and its cautions wit
   expect(file).toMatchObject({ deference: DEFERENCE, dataVersion: data.version, state: "revision 2" });
 });
 
-test("the sheet is asked for the window in hand and the gases drawn; a draft leaves both to the saved state", () => {
-  expect(sheetQuery(exported("revision 2"))).toBe(`?window=0&gases=${gases.map((g) => g.gas).join("%2C")}`);
-  expect(sheetQuery(exported("revision 2", false))).toBe("?window=0&gases=");
-  expect(sheetQuery(exported("draft on revision 2"))).toBe("");
+test("the sheet is asked for the window in hand, the gases drawn and the reagents looked at; a draft leaves window and gases to the saved state", () => {
+  expect(sheetQuery(exported("revision 2"))).toBe(
+    `?window=0&gases=${gases.map((g) => g.gas).join("%2C")}&reach=air%2Cperoxide`,
+  );
+  expect(sheetQuery(exported("revision 2", false))).toBe("?window=0&gases=&reach=air%2Cperoxide");
+  expect(sheetQuery(exported("draft on revision 2"))).toBe("?reach=air%2Cperoxide");
 });

@@ -1,3 +1,4 @@
+import { gapSentence, wayWords, type Way } from "../../../../shared/advice/gapWords";
 import { demandName } from "../../../../shared/solution";
 import { marginWords, windowName, type LimitSentence } from "../../../../shared/windows/limitWords";
 import { keptWords } from "../../../../shared/hazards/words";
@@ -99,25 +100,25 @@ export function conflictSays({ solution, naming, gaps }: SheetWork): Inline[] {
     const [only] = set;
     const found = gaps.find((g) => g.members.join() === set.map(demandName).join());
     const gap = found?.gap ?? { pH: null, Eh: null };
-    const ways = [
-      gap.pH === null ? null : `${fixed(gap.pH, 2)} pH at one Eh`,
-      gap.Eh === null ? null : `${volts(gap.Eh)} at one pH`,
-    ].filter((part) => part !== null);
+    const along: (Way | null)[] = [
+      gap.pH === null ? null : [`${fixed(gap.pH, 2)} pH`, "at one Eh"],
+      gap.Eh === null ? null : [volts(gap.Eh), "at one pH"],
+    ];
+    const ways = along.filter((way) => way !== null);
     if (set.length === 1 && only) {
       const past = found && found.across !== "members" && ways.length > 0 ? beyondWord[found.across] : null;
       return [
         "Nowhere on this map is ",
         each,
-        past === null ? "." : `: it would be ${past}, ${ways.join(", and ")} away.`,
+        past === null ? "." : `: it would be ${past}, ${wayWords(ways, "away")}.`,
       ];
     }
-    const nearest = set.length > 2 && found?.nearest ? ` (nearest: ${naming.metalName(found.nearest)})` : "";
     return [
       joined(each.slice(0, -1)),
       " and ",
       each.at(-1) ?? "",
-      " cannot hold together",
-      ways.length > 0 ? `: their grounds stand ${ways.join(", and ")} apart${nearest}.` : ".",
+      " cannot hold together.",
+      found && ways.length > 0 ? [" ", prose(gapSentence(set, found.nearest, ways, naming.metalName))] : "",
     ];
   });
 }

@@ -1,4 +1,5 @@
 import { Fragment } from "react";
+import { gapSentence, wayWords, type Way } from "../../../../shared/advice/gapWords";
 import type { Advice, ConflictGap, Opening } from "../../../../shared/advice/openings";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import { keptWords, pressureWords } from "../../../../shared/hazards/words";
@@ -42,7 +43,7 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
             return (
               <li key={key} className="hairline py-1">
                 <ConflictWords set={set} metalName={metalName} />
-                {gap && <GapWords gap={gap} scale={scale} metalName={metalName} />}
+                {gap && <GapWords gap={gap} set={set} scale={scale} metalName={metalName} />}
               </li>
             );
           })}
@@ -123,13 +124,15 @@ const where: Readonly<Record<Exclude<ConflictGap["across"], "members">, string>>
   "frame and water": "It would be beyond this map and the water lines",
 };
 
-/** "Their grounds stand 0.62 pH apart at one Eh, and 0.21 V apart at one pH." */
+/** "Their grounds lie 0.62 pH apart at one Eh, and 0.21 V apart at one pH." */
 function GapWords({
   gap: { gap, members, across, nearest },
+  set,
   scale,
   metalName,
 }: {
   gap: ConflictGap;
+  set: Conflict;
   scale: PotentialScale;
   metalName: (element: string) => string;
 }) {
@@ -137,25 +140,22 @@ function GapWords({
   const together = many && <>Any two of them can; it is the {members.length} together that leave no ground. </>;
   if (gap === null)
     return members.length === 1 ? <Note>Nor is it anywhere within the widest map.</Note> : <Note>{together}</Note>;
-  const apart = across === "members" ? "apart " : "";
-  const pH = gap.pH === null ? null : `${withUnit(fixed(gap.pH, 2), "pH")} ${apart}at one Eh`;
+  const pH: Way | null = gap.pH === null ? null : [withUnit(fixed(gap.pH, 2), "pH"), "at one Eh"];
   const volts = withUnit(fixed(scale.differenceToShown(gap.Eh ?? 0), scale.digits), scale.unit);
-  const Eh = gap.Eh === null ? null : `${volts} ${apart}at one pH`;
+  const Eh: Way | null = gap.Eh === null ? null : [volts, "at one pH"];
   const parts = [pH, Eh].filter((part) => part !== null);
   const sentence =
     across === "members"
       ? parts.length === 0
         ? "Their grounds share neither a pH nor an Eh."
-        : many && nearest !== null
-          ? `Nearest is ${metalName(nearest)}: from the ground of the others ${parts.join(", and ")}.`
-          : `Their grounds stand ${parts.join(", and ")}.`
+        : gapSentence(set, nearest, parts, metalName)
       : parts.length === 0
         ? `${where[across]}, at another pH and another Eh.`
-        : `${where[across]}, ${parts.join(", and ")} away.`;
+        : `${where[across]}, ${wayWords(parts, "away")}.`;
   return (
     <Note>
       {together}
-      {sentence}
+      <FormulaText text={sentence} />
       {parts.length > 0 && pH === null && " No Eh meets both."}
       {parts.length > 0 && Eh === null && " No pH meets both."}
     </Note>

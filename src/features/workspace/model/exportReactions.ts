@@ -90,7 +90,8 @@ export function planFile(e: Exported) {
   };
 }
 
-/** What the sheet of a saved revision is to show as the screen does: the member's electrode, the window in hand, the gases drawn. */
+/** What the sheet of a saved revision is to show as the screen does: the member's electrode, the window in hand, the gases drawn,
+ *  the reagents whose reach is looked at. */
 export function sheetQuery({ scale, state, model }: Pick<Exported, "scale" | "state" | "model">): string {
   const { reference } = scale;
   const { layers, window } = model.view;
@@ -104,5 +105,7 @@ export function sheetQuery({ scale, state, model }: Pick<Exported, "scale" | "st
     query.set("window", String(window));
     query.set("gases", layers.hazard ? (model.asked.gases ?? []).map((g) => g.gas).join(",") : "");
   }
-  return query.size > 0 ? `?${query}` : "";
+  // Which reagents are looked at is the member's choice on a draft, too.
+  query.set("reach", model.reaches.map((r) => r.reagent.id).join(","));
+  return `?${query}`;
 }
