@@ -33,5 +33,23 @@ export default tseslint.config(
     "shared/ is pure: numbers and text in, values out",
   ),
   forbid("src", "^node:|/server/", "src/ reaches the server through the API and shared/schemas"),
+  {
+    files: ["{shared,src,server}/**/*.{ts,tsx}"],
+    ignores: ["shared/schemas/z.ts"],
+    rules: {
+      "@typescript-eslint/no-restricted-imports": [
+        "error",
+        {
+          paths: [
+            {
+              name: "zod",
+              allowTypeImports: true,
+              message: "take z from shared/schemas/z: it complains in plain words",
+            },
+          ],
+        },
+      ],
+    },
+  },
   forbid("server", "/src/|^react", "server/ knows shared/, never the client"),
 );

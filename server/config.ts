@@ -1,5 +1,5 @@
 import { resolve } from "node:path";
-import { z } from "zod";
+import { z } from "../shared/schemas/z";
 import { projectRoot } from "./root";
 
 const flag = z.enum(["0", "1"]).transform((value) => value === "1");

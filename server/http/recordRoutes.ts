@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../shared/schemas/z";
 import { withReason } from "../../shared/schemas/history";
 import type { Member, MemberRole } from "../../shared/schemas/member";
 import type { Author } from "../features/history/service";

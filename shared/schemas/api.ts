@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import type { FieldDifference } from "./history";
 
 /** `?limit=50&offset=0` of every list route. */

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { pageQuery } from "./api";
 
 const text = (max: number) => z.string().trim().max(max);

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import type { CampaignPair, StagePair } from "../trials/pair";
 import type { StageSummary } from "../trials/summary";
 

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 
 /** Empty cell of a table (blanks are empty too) means "unknown", never zero. */
 const empty = (v: unknown): boolean => v === undefined || (typeof v === "string" && v.trim() === "");

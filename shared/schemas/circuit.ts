@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 
 /** What stands around a leach and the chemistry does not say, but the caution rules ask about. */
 export const circuitSchema = z.object({

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { pageQuery } from "./api";
 
 const text = z.string().trim().min(1, "a comment needs words").max(4000);

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { quantities, unitsOf, type QuantityInfo, type QuantityName } from "../entry/quantities";
 import { readEntry, type Entry } from "../entry/readEntry";
 

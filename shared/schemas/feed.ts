@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { pageQuery } from "./api";
 import { entryOf } from "./entry";
 

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 
 /** Why a row is changed: kept beside what changed, in the words of whoever did it. */
 export const reason = z.string().trim().max(500).default("");

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 
 export const memberRoles = ["admin", "metallurgist", "technician", "manager"] as const;
 export type MemberRole = (typeof memberRoles)[number];

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { hazardGases } from "../hazards/gases";
 import { circuitSchema } from "./circuit";
 import {

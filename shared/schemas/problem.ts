@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { hazardGases } from "../hazards/gases";
 import { speciesRow } from "./chemistry";
 

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { TEMPERATURE_RANGE_C } from "./problem";
 
 const { min, max } = TEMPERATURE_RANGE_C;

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { pageQuery } from "./api";
 import { charge, measured, planned, products, sample } from "./trialRecord";
 

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import { readEntry } from "../entry/readEntry";
 import { entryOf, solidAssays, solutionAssays } from "./entry";
 

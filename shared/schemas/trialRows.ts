@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "./z";
 import type { CampaignRow } from "./campaign";
 import { trialsQuery, type TrialFigures, type TrialKind, type TrialRow, type TrialStatus } from "./trial";
 import type { Charge, Measured, Planned, Products } from "./trialRecord";

@@ -49,26 +49,17 @@ function shown(value: unknown): string {
   return text.length > 80 ? `${text.slice(0, 77)}...` : text;
 }
 
-/** A number beyond its bound, in words with the sign that states the bound exactly. */
-function boundOf(issue: z.core.$ZodIssue): string | null {
-  if (issue.code === "too_big" && issue.origin === "number")
-    return `must be ${issue.inclusive ? "at most" : "below"} ${String(issue.maximum)}`;
-  if (issue.code === "too_small" && issue.origin === "number")
-    return `must be ${issue.inclusive ? "at least" : "above"} ${String(issue.minimum)}`;
-  return null;
-}
-
 /** The first complaint of zod as a failure with path, bound and value. */
 export function failureOf(error: z.ZodError, input: unknown): Outcome<never> {
   const issue = error.issues[0]!;
   const unknown = issue.code === "unrecognized_keys" ? issue.keys.slice(0, 1) : [];
   const keys = [...issue.path, ...unknown];
   const outside = (issue.code === "too_small" || issue.code === "too_big") && issue.origin === "number";
-  const got = shown(valueAt(input, keys));
+  const given = valueAt(input, keys);
   return fail(
     outside ? "OUT_OF_RANGE" : "INVALID_INPUT",
     keys.map(String).join("."),
-    `${boundOf(issue) ?? issue.message}; got ${got}`,
+    given === undefined && issue.code !== "custom" ? issue.message : `${issue.message}; got ${shown(given)}`,
   );
 }
 

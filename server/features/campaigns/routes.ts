@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { campaignCreate, campaignsQuery, campaignUpdate } from "../../../shared/schemas/campaign";
 import { campaignPairQuery } from "../../../shared/schemas/campaignSummary";
 import type { Deps } from "../../deps";

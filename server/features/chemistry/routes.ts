@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import type { ChemistryAnswer } from "../../../shared/schemas/speciesEdit";
 import type { Deps } from "../../deps";
 import { ok } from "../../http/answer";

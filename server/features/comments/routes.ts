@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { commentCreate, commentsQuery, commentUpdate } from "../../../shared/schemas/comment";
 import { memberRoles } from "../../../shared/schemas/member";
 import type { Deps } from "../../deps";

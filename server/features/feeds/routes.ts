@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { feedCreate, feedsQuery, feedUpdate } from "../../../shared/schemas/feed";
 import type { Deps } from "../../deps";
 import { ok } from "../../http/answer";

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { pageQuery } from "../../../shared/schemas/api";
 import type { Db } from "../../db/open";
 import { ok } from "../../http/answer";

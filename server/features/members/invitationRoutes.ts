@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { invitationAccept, invitationCreate, invitationsQuery } from "../../../shared/schemas/invitation";
 import type { Member, SessionAnswer } from "../../../shared/schemas/member";
 import type { Deps } from "../../deps";

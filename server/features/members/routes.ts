@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { pageQuery } from "../../../shared/schemas/api";
 import { memberUpdate } from "../../../shared/schemas/invitation";
 import { preferences } from "../../../shared/schemas/member";

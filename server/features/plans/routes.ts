@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { pageQuery, planDuplicate, plansQuery } from "../../../shared/schemas/api";
 import { withReason } from "../../../shared/schemas/history";
 import type { Member } from "../../../shared/schemas/member";

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { reactionDesk } from "../../../shared/reactions/desk";
 import type { Deps } from "../../deps";
 import { ok } from "../../http/answer";

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { withReason } from "../../../shared/schemas/history";
 import { speciesEditCreate, speciesEditsQuery } from "../../../shared/schemas/speciesEdit";
 import type { Deps } from "../../deps";

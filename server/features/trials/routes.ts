@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { reasonRequired } from "../../../shared/schemas/history";
 import { trialCreate, trialsQuery, trialUpdate } from "../../../shared/schemas/trial";
 import { mapTrialsQuery, trialsCsvQuery } from "../../../shared/schemas/trialRows";

@@ -1,5 +1,5 @@
-import { z } from "zod";
 import { reagentById } from "../../../shared/reach/reagents";
+import { z } from "../../../shared/schemas/z";
 import { windowSheetQuery } from "../../../shared/schemas/plan";
 import type { Deps } from "../../deps";
 import { file } from "../../http/answer";

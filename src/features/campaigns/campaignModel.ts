@@ -16,9 +16,9 @@ export const campaignValues = ({
 export function campaignProblems(changed: Partial<CampaignValues>): Problem[] {
   const parsed = campaignUpdate.safeParse(changed);
   if (parsed.success) return [];
-  return parsed.error.issues.map(({ path, message }) => ({
+  return parsed.error.issues.map(({ code, path, message }) => ({
     path: path.join("."),
-    message: typeof path[1] === "number" && message.startsWith("Too small") ? `${String(path[2])} is missing` : message,
+    message: typeof path[1] === "number" && code === "too_small" ? `${String(path[2])} is missing` : message,
   }));
 }
 

@@ -1,6 +1,6 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { Controller, useForm } from "react-hook-form";
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { planCreate } from "../../../shared/schemas/plan";
 import { Button } from "../../components/Button";
 import { Dialog } from "../../components/Dialog";

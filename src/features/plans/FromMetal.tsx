@@ -1,6 +1,6 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { Controller, useForm, useWatch } from "react-hook-form";
-import { z } from "zod";
+import { z } from "../../../shared/schemas/z";
 import { presetCaution } from "../../../shared/hazards/presetCautions";
 import { planCreate, planInputs, presetNames } from "../../../shared/schemas/plan";
 import type { ChemicalData } from "../../../shared/species/chemicalData";

@@ -20,23 +20,23 @@ const row = (id: string): Record<string, unknown> => ({ ...library.species.get(i
 type Wrong = [what: string, input: unknown, code: Failure["code"], path: string, says: RegExp];
 
 const shapes: Wrong[] = [
-  ["null", null, "INVALID_INPUT", "", /expected object.*got null/],
-  ["nothing", undefined, "INVALID_INPUT", "", /expected object.*got nothing/],
-  ["a number", 42, "INVALID_INPUT", "", /expected object.*got 42/],
-  ["a text", "plan", "INVALID_INPUT", "", /expected object.*got "plan"/],
-  ["a list", [], "INVALID_INPUT", "", /expected object.*got \[\]/],
-  ["an empty object", {}, "INVALID_INPUT", "temperatureC", /got nothing/],
-  ["a key it does not know", but({ sulphateReduction: true }), "INVALID_INPUT", "sulphateReduction", /Unrecognized key.*got true/],
-  ["a misspelt key of a metal", copper({ activty: 2 }), "INVALID_INPUT", "metals.0.activty", /Unrecognized key.*got 2/],
-  ["a misspelt key of the water lines", but({ water: { bound: "both", oxygenv: 0.3 } }), "INVALID_INPUT", "water.oxygenv", /Unrecognized key/],
-  ["metals that are no list", but({ metals: metal }), "INVALID_INPUT", "metals", /expected array/],
-  ["no metals", but({ metals: [] }), "INVALID_INPUT", "metals", />=1 items; got \[\]/],
-  ["seventeen metals", but({ metals: Array(17).fill(metal) }), "INVALID_INPUT", "metals", /<=16 items; got .{60,90}$/],
+  ["null", null, "INVALID_INPUT", "", /must be an object; got null/],
+  ["nothing", undefined, "INVALID_INPUT", "", /is missing$/],
+  ["a number", 42, "INVALID_INPUT", "", /must be an object; got 42/],
+  ["a text", "plan", "INVALID_INPUT", "", /must be an object; got "plan"/],
+  ["a list", [], "INVALID_INPUT", "", /must be an object; got \[\]/],
+  ["an empty object", {}, "INVALID_INPUT", "temperatureC", /^is missing$/],
+  ["a key it does not know", but({ sulphateReduction: true }), "INVALID_INPUT", "sulphateReduction", /is not a field here.*got true/],
+  ["a misspelt key of a metal", copper({ activty: 2 }), "INVALID_INPUT", "metals.0.activty", /is not a field here.*got 2/],
+  ["a misspelt key of the water lines", but({ water: { bound: "both", oxygenv: 0.3 } }), "INVALID_INPUT", "water.oxygenv", /is not a field here/],
+  ["metals that are no list", but({ metals: metal }), "INVALID_INPUT", "metals", /must be a list; got/],
+  ["no metals", but({ metals: [] }), "INVALID_INPUT", "metals", /at least 1 entry; got \[\]/],
+  ["seventeen metals", but({ metals: Array(17).fill(metal) }), "INVALID_INPUT", "metals", /at most 16 entries; got .{60,90}$/],
   ["a requirement it does not know", copper({ requirement: "liquid" }), "INVALID_INPUT", "metals.0.requirement", /"dissolved".*got "liquid"/],
   ["a role it does not know", copper({ role: "boss" }), "INVALID_INPUT", "metals.0.role", /got "boss"/],
   ["a solids basis it does not know", but({ solidsBasis: "old" }), "INVALID_INPUT", "solidsBasis", /"aged".*got "old"/],
   ["a water bound it does not know", but({ water: { bound: "left" } }), "INVALID_INPUT", "water.bound", /"both".*got "left"/],
-  ["text for a number", but({ temperatureC: "60" }), "INVALID_INPUT", "temperatureC", /expected number.*got "60"/],
+  ["text for a number", but({ temperatureC: "60" }), "INVALID_INPUT", "temperatureC", /must be a number; got "60"/],
   ["one end of a frame", but({ frame: { pH: [0], Eh: [-1, 1] } }), "INVALID_INPUT", "frame.pH", /got \[0\]/],
 ]; // prettier-ignore
 
@@ -89,8 +89,8 @@ const chemistry: Wrong[] = [
 ]; // prettier-ignore
 
 const ownRows: Wrong[] = [
-  ["without a formula", but({ species: [{ id: "Cu(s,own)" }] }), "INVALID_INPUT", "species.0.formula", /got nothing/],
-  ["that is no object", but({ species: [7] }), "INVALID_INPUT", "species.0", /expected object.*got 7/],
+  ["without a formula", but({ species: [{ id: "Cu(s,own)" }] }), "INVALID_INPUT", "species.0.formula", /^is missing$/],
+  ["that is no object", but({ species: [7] }), "INVALID_INPUT", "species.0", /must be an object; got 7/],
   ["whose charge is not its formula's", but({ species: [{ ...row("CuO(s)"), id: "CuO(s,own)", charge: 1 }] }), "BAD_DATA", "species.0.charge", /1, but the formula CuO says 0/],
   ["given twice", but({ species: [row("CuO(s)"), row("CuO(s)")] }), "BAD_DATA", "species.1.id", /given twice/],
   ["with an energy off any scale", but({ species: [{ ...row("CuO(s)"), dGf_kJ: 2e5, dHf_kJ: null, S_J: null }] }), "OUT_OF_RANGE", "species.0.dGf_kJ", /at most 100000.*got 200000/],

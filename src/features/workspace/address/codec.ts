@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../../shared/schemas/z";
 import { hazardGases } from "../../../../shared/hazards/pressures";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Frame } from "../../../../shared/schemas/problem";

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import { z } from "../../../../shared/schemas/z";
 import { planInputs, type PlanInputs } from "../../../../shared/schemas/plan";
 
 /** What a browser keeps of a plan until it is saved, so that a closed page or a lost network loses nothing. */

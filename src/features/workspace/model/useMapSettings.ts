@@ -1,5 +1,5 @@
 import { useCallback, useMemo } from "react";
-import { z } from "zod";
+import { z } from "../../../../shared/schemas/z";
 import { usualReagents } from "../../../../shared/reach/reach";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import { usePreferences } from "../../../lib/preferences";
