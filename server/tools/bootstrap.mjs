@@ -1,22 +1,28 @@
 // Brings a clone into a state in which it runs: node_modules, and as asked for the build and a Chromium.
 //   node server/tools/bootstrap.mjs [build] [chromium]
 // Uses Node's own modules only, and prints on stderr only (the command line solver's stdout is JSON).
-import { spawnSync } from "node:child_process";
+import { spawn } from "node:child_process";
 import { createHash } from "node:crypto";
 import { existsSync, mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from "node:fs";
 import { createRequire } from "node:module";
+import { availableParallelism } from "node:os";
 import { delimiter, join } from "node:path";
-import { findChromium } from "./chromium.mjs";
+import { findHeadless } from "./chromium.mjs";
 
 const root = join(import.meta.dirname, "../..");
 const require = createRequire(join(root, "package.json"));
 const say = (text) => process.stderr.write(`${text}\n`);
 
-function run(command, args, env = process.env) {
-  const { status, error } = spawnSync(command, args, { cwd: root, stdio: ["ignore", 2, 2], env });
-  if (error) say(`${command}: ${error.message}`);
-  return status === 0;
-}
+/** @returns {Promise<boolean>} whether it went well */
+const run = (command, args, env = process.env) =>
+  new Promise((resolve) => {
+    const child = spawn(command, args, { cwd: root, stdio: ["ignore", 2, 2], env });
+    child.once("error", (error) => {
+      say(`${command}: ${error.message}`);
+      resolve(false);
+    });
+    child.once("close", (status) => resolve(status === 0));
+  });
 
 const readJson = (path) => JSON.parse(readFileSync(join(root, path), "utf8"));
 
@@ -52,13 +58,16 @@ function explainFailedInstall() {
   say("On Debian or Ubuntu: apt-get install python3 make g++. Then run the same command again.");
 }
 
-function install() {
-  if (packagesMatch() && databaseLoads()) return;
+/** @returns {Promise<boolean>} whether every package is there */
+async function install() {
+  if (packagesMatch() && databaseLoads()) return true;
   say("Installing packages; the SQLite driver is compiled meanwhile, which takes a minute or two.");
-  const env = { ...process.env, NODE_ENV: "development" };
-  if (run("npm", ["ci", "--include=dev", "--loglevel=error"], env) && packagesMatch() && databaseLoads()) return;
+  // node-gyp compiles as many files at a time as JOBS says.
+  const env = { JOBS: String(availableParallelism()), ...process.env, NODE_ENV: "development" };
+  if ((await run("npm", ["ci", "--include=dev", "--loglevel=error"], env)) && packagesMatch() && databaseLoads())
+    return true;
   explainFailedInstall();
-  process.exit(1);
+  return false;
 }
 
 const sources = [
@@ -82,34 +91,36 @@ function hashOfSources() {
   return hash.digest("hex");
 }
 
-function build() {
+async function build() {
   const stamp = join(root, "dist/.built-from");
   const now = hashOfSources();
   if (existsSync(stamp) && readFileSync(stamp, "utf8") === now) return;
   say("Building ...");
-  if (!run("npm", ["run", "--silent", "build"])) process.exit(1);
+  if (!(await run("npm", ["run", "--silent", "build"]))) process.exit(1);
   mkdirSync(join(root, "dist"), { recursive: true });
   writeFileSync(stamp, now);
 }
 
-function installChromium() {
-  if (findChromium()) return;
+async function installChromium() {
+  if (findHeadless()) return;
   if (process.getuid?.() !== 0 || !onPath("apt-get")) {
     say(
-      "No Chromium here: the browser tests will fail. Install one (Debian: apt-get install chromium) or set CHROMIUM_PATH.",
+      "No Chromium here: the browser tests will fail. Install one (Debian: apt-get install chromium-headless-shell) or set CHROMIUM_PATH.",
     );
     return;
   }
   say("Installing Debian's Chromium for the browser tests ...");
   const wait = ["-o", "DPkg::Lock::Timeout=300"];
   const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
-  run("apt-get", [...wait, "-qq", "update"], env);
-  if (!run("apt-get", [...wait, "-qq", "install", "-y", "--no-install-recommends", "chromium"], env)) {
+  await run("apt-get", [...wait, "-qq", "update"], env);
+  const got = (name) => run("apt-get", [...wait, "-qq", "install", "-y", "--no-install-recommends", name], env);
+  // An older Debian has no such package.
+  if (!(await got("chromium-headless-shell")) && !(await got("chromium")))
     say("Chromium could not be installed: the browser tests will fail.");
-  }
 }
 
 const wanted = process.argv.slice(2);
-install();
-if (wanted.includes("chromium")) installChromium();
-if (wanted.includes("build")) build();
+// One mostly fetches while the other compiles.
+const [installed] = await Promise.all([install(), wanted.includes("chromium") && installChromium()]);
+if (!installed) process.exit(1);
+if (wanted.includes("build")) await build();

@@ -32,10 +32,10 @@ async function scriptsOf(page: Page, path: string, until: () => Promise<void> = 
 const total = (scripts: readonly string[]) => scripts.reduce((sum, path) => sum + compressed(path), 0);
 
 test("sign-in and plans fetch at most 250 kB of compressed JavaScript, and no plot", async () => {
-  const { page } = await openPage();
+  const { page } = await openPage({ cold: true });
   const signIn = await scriptsOf(page, "/");
   await page.getByRole("button", { name: "Sign in" }).waitFor();
-  const { page: inside } = await openPageAs("metallurgist", { path: "about:blank" });
+  const { page: inside } = await openPageAs("metallurgist", { path: "about:blank", cold: true });
   const plans = await scriptsOf(inside, "/plans");
   await inside.getByRole("link", { name: "Zinc-dust purification" }).waitFor();
   for (const scripts of [signIn, plans]) {
@@ -46,7 +46,7 @@ test("sign-in and plans fetch at most 250 kB of compressed JavaScript, and no pl
 });
 
 test("a plan opened by its address fetches at most 250 kB of compressed JavaScript beside the plot", async () => {
-  const { page } = await openPageAs("metallurgist", { path: "about:blank" });
+  const { page } = await openPageAs("metallurgist", { path: "about:blank", cold: true });
   const scripts = await scriptsOf(page, "/plans/demo-neutral-leach", () => new WorkspaceScreen(page).drawn());
   const plot = scripts.filter((path) => plotChunk.test(path));
   expect(total(plot)).toBeGreaterThan(400_000);

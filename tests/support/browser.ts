@@ -1,4 +1,4 @@
-import { chromium, type Browser, type BrowserContextOptions, type Page } from "playwright-core";
+import { chromium, type Browser, type ConsoleMessage, type Page, type Request } from "playwright-core";
 import { afterAll, afterEach, beforeAll, expect, inject, onTestFinished } from "vitest";
 import { demoAccounts, demoPassword } from "../../server/demo/accounts";
 import type { MemberRole } from "../../shared/schemas/member";
@@ -23,8 +23,11 @@ export interface OpenPage {
 }
 
 /** Refusals that a test provokes show in the console as well: `expected` names the status codes that are no complaint. */
-export interface PageOptions extends BrowserContextOptions {
+export interface PageOptions {
   expected?: number[];
+  viewport?: { width: number; height: number };
+  /** a browser context of its own, with nothing in its cache, for what is fetched at first */
+  cold?: boolean;
 }
 
 /** `path`: where to start; the start page unless given. */
@@ -32,35 +35,72 @@ export interface SignedInOptions extends PageOptions {
   path?: string;
 }
 
-async function opened({ expected = [], ...options }: PageOptions): Promise<OpenPage> {
+/** Pages that no test has now. A renderer that has run the application's scripts opens a plan in a third of the time of a new one. */
+const idle: Page[] = [];
+
+/** Everything a site can leave in a browser goes, and the document with it: what is kept is the compiled code and the HTTP cache. */
+async function emptied(page: Page): Promise<void> {
+  await page.unrouteAll({ behavior: "ignoreErrors" });
+  await page.goto("/api/health");
+  await page.mouse.move(-9, -9);
+  const context = page.context();
+  await context.clearCookies();
+  await page.evaluate(() => sessionStorage.clear());
+  const devtools = await context.newCDPSession(page);
+  await devtools.send("Storage.clearDataForOrigin", { origin: new URL(page.url()).origin, storageTypes: "all" });
+  await devtools.send("Page.resetNavigationHistory");
+  await devtools.detach();
+}
+
+async function freshPage(baseUrl: string): Promise<Page> {
+  const context = await (await launched()).newContext({ baseURL: baseUrl });
+  return context.newPage();
+}
+
+interface TakenPage extends OpenPage {
+  /** Ends the test's hold of the page; one that stayed in order is there for another test. */
+  giveBack: (inOrder: boolean) => Promise<void>;
+}
+
+async function opened({
+  expected = [],
+  viewport = { width: 1280, height: 800 },
+  cold,
+}: PageOptions): Promise<TakenPage> {
   const baseUrl = address();
-  const context = await (
-    await launched()
-  ).newContext({ baseURL: baseUrl, viewport: { width: 1280, height: 800 }, ...options });
-  const page = await context.newPage();
+  const page = (cold ? undefined : idle.pop()) ?? (await freshPage(baseUrl));
+  await page.setViewportSize(viewport);
   const complaints: string[] = [];
   const provoked = (text: string) => expected.some((status) => text.includes(`status of ${status}`));
-  page.on("console", (message) => {
+  const onConsole = (message: ConsoleMessage) => {
     const bad = message.type() === "error" || message.type() === "warning";
     if (bad && !provoked(message.text()))
       complaints.push(`${message.type()}: ${message.text()} ${message.location().url}`);
-  });
-  page.on("pageerror", (error) => complaints.push(`uncaught: ${error.message}`));
-  page.on("requestfailed", (request) => {
+  };
+  const onError = (error: Error) => complaints.push(`uncaught: ${error.message}`);
+  const onFailed = (request: Request) => {
     const reason = request.failure()?.errorText ?? "";
     // A page that moves on drops what it had asked for.
     if (reason !== "net::ERR_ABORTED") complaints.push(`request failed: ${request.url()} ${reason}`);
-  });
-  return { page, baseUrl, complaints };
+  };
+  page.on("console", onConsole).on("pageerror", onError).on("requestfailed", onFailed);
+  const giveBack = async (inOrder: boolean) => {
+    page.off("console", onConsole).off("pageerror", onError).off("requestfailed", onFailed);
+    const pages = page.context().pages();
+    if (cold || !inOrder || page.isClosed() || pages.length > 1) return page.context().close();
+    await emptied(page);
+    idle.push(page);
+  };
+  return { page, baseUrl, complaints, giveBack };
 }
 
 const quiet = ({ complaints }: OpenPage) => expect(complaints.join("\n"), "the console").toBe("");
 
-/** A page of a fresh browser context (1280x800 unless given), not signed in. */
+/** A page (1280x800 unless given) that knows nothing of the tests before it, not signed in. */
 export async function openPage(options: PageOptions = {}): Promise<OpenPage> {
   const open = await opened(options);
-  onTestFinished(async () => {
-    await open.page.context().close();
+  onTestFinished(async ({ task }) => {
+    await open.giveBack(task.result?.state !== "fail" && open.complaints.length === 0);
     quiet(open);
   });
   return open;
@@ -90,16 +130,18 @@ export async function openPageAs(
  *  found it, or says what the next one finds.
  *  @returns  the page, from the first test on */
 export function sharedPageAs(role: MemberRole, { path = "/", ...options }: SignedInOptions = {}): () => OpenPage {
-  let open: OpenPage | undefined;
+  let open: TakenPage | undefined;
+  let inOrder = true;
   beforeAll(async () => {
     open = await opened(options);
     await signIn(open, role);
     await open.page.goto(path);
   });
-  afterEach(() => {
+  afterEach(({ task }) => {
+    inOrder &&= task.result?.state !== "fail";
     if (open) quiet({ ...open, complaints: open.complaints.splice(0) });
   });
-  afterAll(() => open?.page.context().close());
+  afterAll(() => open?.giveBack(inOrder));
   return () => {
     if (!open) throw new Error("The page opens before the first test, not earlier.");
     return open;

@@ -6,7 +6,7 @@ import { join } from "node:path";
 import { chromium } from "playwright-core";
 import type { TestProject } from "vitest/node";
 import { projectRoot } from "../../server/root";
-import { findChromium } from "../../server/tools/chromium.mjs";
+import { findHeadless } from "../../server/tools/chromium.mjs";
 
 declare module "vitest" {
   interface ProvidedContext {
@@ -60,9 +60,11 @@ function application(folder: string, name: string) {
 /** Starts one application a worker, and the browser that all of them share. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
   if (!existsSync(bundle)) throw new Error("The application is not built: npm run build.");
-  const executablePath = findChromium();
+  const executablePath = findHeadless();
   if (executablePath === undefined)
-    throw new Error("No Chromium: install one (Debian: apt-get install chromium) or name it in CHROMIUM_PATH.");
+    throw new Error(
+      "No Chromium: install one (Debian: apt-get install chromium-headless-shell) or name it in CHROMIUM_PATH.",
+    );
   const folder = mkdtempSync(join(tmpdir(), "gangueway-e2e-"));
   const workers = Math.max(1, Number(project.config.maxWorkers));
   const applications = Array.from({ length: workers }, (_, i) => application(folder, `e2e-${i + 1}`));
