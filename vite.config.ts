@@ -123,7 +123,10 @@ export default defineConfig({
           name: "client",
           environment: "jsdom",
           include: ["tests/client/**/*.test.{ts,tsx}"],
+          setupFiles: ["tests/client/setup.ts"],
           testTimeout: 20_000,
+          // Modules and the browser that is none are made once a worker; what a test drew, or kept there, is gone after it.
+          isolate: false,
         },
       },
       {

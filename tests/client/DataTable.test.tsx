@@ -3,7 +3,6 @@ import { useState } from "react";
 import { expect, test, vi } from "vitest";
 import { DataTable } from "../../src/components/DataTable";
 import { tableCsv, type Column } from "../../src/components/tableModel";
-import "./setup";
 
 interface Metal {
   symbol: string;

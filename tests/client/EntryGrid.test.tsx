@@ -3,7 +3,6 @@ import { useState } from "react";
 import { describe, expect, test } from "vitest";
 import { EntryGrid } from "../../src/components/EntryGrid";
 import { clipboardBlock, layBlock, type GridColumn } from "../../src/components/entryGridModel";
-import "./setup";
 
 interface Line {
   name: string;

@@ -3,7 +3,6 @@ import { expect, test } from "vitest";
 import { Formula, SpeciesName } from "../../src/components/Formula";
 import { FormulaText } from "../../src/components/FormulaText";
 import { Quantity } from "../../src/components/Quantity";
-import "./setup";
 
 const html = (element: React.ReactElement) => render(element).container.firstElementChild?.innerHTML;
 

@@ -2,7 +2,6 @@ import { fireEvent, render, screen } from "@testing-library/react";
 import { useState } from "react";
 import { expect, test, vi } from "vitest";
 import { NumberField, type NumberFieldProps } from "../../src/components/NumberField";
-import "./setup";
 
 function Held({ start, seen, ...rest }: { start: number; seen: (x: number) => void } & Partial<NumberFieldProps>) {
   const [value, setValue] = useState(start);

@@ -2,7 +2,6 @@ import { fireEvent, render, screen } from "@testing-library/react";
 import { useState } from "react";
 import { expect, test, vi } from "vitest";
 import { LogSlider, Slider } from "../../src/components/Slider";
-import "./setup";
 
 function Activity({ start, seen, done }: { start: number; seen: (x: number) => void; done: (x: number) => void }) {
   const [value, setValue] = useState(start);

@@ -1,5 +1,5 @@
 import { cleanup } from "@testing-library/react";
-import { afterEach } from "vitest";
+import { afterEach, vi } from "vitest";
 
 // jsdom lays nothing out; what the components ask of a browser's layout is answered with nothing.
 class NoObserver {
@@ -20,4 +20,10 @@ for (const [name, answer] of Object.entries(missing)) {
   if (!(name in Element.prototype)) Object.defineProperty(Element.prototype, name, { value: answer });
 }
 
-afterEach(cleanup);
+// Files share a worker: nothing of a test is left to the next.
+afterEach(() => {
+  cleanup();
+  localStorage.clear();
+  vi.useRealTimers();
+  vi.unstubAllGlobals();
+});

@@ -1,4 +1,3 @@
-import "../setup";
 import { fireEvent, render, screen } from "@testing-library/react";
 import { expect, test, vi } from "vitest";
 import type { Point } from "../../../shared/solution";

@@ -1,4 +1,3 @@
-import "../setup";
 import { render, screen } from "@testing-library/react";
 import { expect, test } from "vitest";
 import { demoPlans } from "../../../server/demo/plans";

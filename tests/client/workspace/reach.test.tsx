@@ -1,4 +1,3 @@
-import "../setup";
 import { fireEvent, render, screen } from "@testing-library/react";
 import { Fragment, useState } from "react";
 import { MemoryRouter } from "react-router-dom";

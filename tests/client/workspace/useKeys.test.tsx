@@ -3,7 +3,6 @@ import { useState } from "react";
 import { expect, test, vi } from "vitest";
 import { NumberField } from "../../../src/components/NumberField";
 import { useKeys } from "../../../src/features/workspace/model/useKeys";
-import "../setup";
 
 function Screen({ undo, save, letter }: { undo: () => void; save: (value: number) => void; letter: () => void }) {
   const [value, setValue] = useState(60);
