@@ -1,5 +1,5 @@
 import { celsius, significant } from "../words/numbers";
-import type { Robust } from "./robust";
+import type { CoupleOver, Robust } from "./robust";
 
 /** What was looked at for a window over ranges, so that nobody takes it for more.
  *  @param robust  of `robustWindow`     @param metalName  "zinc" for Zn     @returns  sentences     @source  docs/method.md, Over ranges */
@@ -22,4 +22,18 @@ export function checkedWords(
   return each.length === 0
     ? heat
     : `${heat} Of each activity range the worse end alone is solved, since the ground shrinks all the way to it: ${each.join("; ")}.`;
+}
+
+/** What sets Eh over the range, temperature by temperature where it is not the same couple throughout.
+ *  @param couples  of a window over ranges     @returns  a sentence with ids of species; null where Eh is a mixed potential
+ *  @source  docs/method.md, section 7 */
+export function coupleOverWords(couples: readonly CoupleOver[]): string | null {
+  const over = ({ couple: [reduced, oxidised] }: CoupleOver) => `${oxidised} over ${reduced}`;
+  const [first, ...rest] = couples;
+  if (first === undefined) return null;
+  if (rest.length === 0)
+    return `Eh is set by ${over(first)}${first.from === first.to ? "" : " at every temperature solved"}.`;
+  const span = ({ from, to }: CoupleOver) =>
+    from === to ? `at ${celsius(from, 1)}` : `from ${celsius(from, 1)} to ${celsius(to, 1)}`;
+  return `Eh is set by ${couples.map((c) => `${over(c)} ${span(c)}`).join(", by ")}, of the temperatures solved.`;
 }

@@ -22,6 +22,16 @@ export interface RobustWindow extends Outline {
   readonly area: number;
   /** by the metric of the plan; a couple counts where it sets Eh at every temperature solved */
   readonly setPoint: SetPoint;
+  /** what sets Eh there, temperature by temperature from low to high; none where Eh is a mixed potential at one of them */
+  readonly couples: readonly CoupleOver[];
+}
+
+/** A couple that sets Eh from one temperature solved to another, C. */
+export interface CoupleOver {
+  /** reduced, oxidised */
+  readonly couple: readonly [string, string];
+  readonly from: number;
+  readonly to: number;
 }
 
 export interface Robust {
@@ -118,9 +128,9 @@ export function robustWindow(
     }
     open = next;
   }
-  const analyses = [...solved.values()];
+  const byHeat = [...solved].sort(([a], [b]) => a - b);
   return ok({
-    windows: border.map((outline) => robustWindowOf(outline, problem, (at) => coupleOverAll(analyses, least, at))),
+    windows: border.map((outline) => robustWindowOf(outline, problem, (at) => couplesOverAll(byHeat, least, at))),
     checked: {
       temperatures: [...solved.keys()].sort((a, b) => a - b),
       rules,
@@ -130,22 +140,25 @@ export function robustWindow(
   });
 }
 
-/** The couple that sets Eh at a point at every temperature, each metal at the least it may carry; null where at one there is none. */
-function coupleOverAll(
-  analyses: readonly Analysis[],
+/** The couples that set Eh at a point at every temperature, each metal at the least it may carry; none where at one there is none. */
+function couplesOverAll(
+  byHeat: readonly (readonly [temperatureC: number, Analysis])[],
   least: ReadonlyMap<string, number>,
   at: Point,
-): [string, string] | null {
-  let couple: [string, string] | null = null;
-  for (const { prepared, cells, metals, basis } of analyses) {
+): CoupleOver[] {
+  const runs: CoupleOver[] = [];
+  for (const [temperatureC, { prepared, cells, metals, basis }] of byHeat) {
     const poorest = metals.map((m) => ({
       ...m,
       metal: { ...m.metal, activity: least.get(m.metal.element) ?? m.metal.activity },
     }));
-    couple = coupleAt(prepared.data, cells, poorest, basis, at);
-    if (couple === null) return null;
+    const couple = coupleAt(prepared.data, cells, poorest, basis, at);
+    if (couple === null) return [];
+    const last = runs.at(-1);
+    if (last?.couple.join() === couple.join()) runs[runs.length - 1] = { ...last, to: temperatureC };
+    else runs.push({ couple, from: temperatureC, to: temperatureC });
   }
-  return couple;
+  return runs;
 }
 
 const hydrideOf: Partial<Record<HazardGas, string>> = { AsH3: "As", SbH3: "Sb" };
@@ -173,7 +186,7 @@ function badRange({ temperatureC, activities = {} }: Ranges): Outcome<never> | n
 function robustWindowOf(
   outline: Outline,
   problem: Problem,
-  coupleFor: (at: Point) => [string, string] | null,
+  couplesFor: (at: Point) => readonly CoupleOver[],
 ): RobustWindow {
   const { controlBand: band, frame } = problem;
   const onFrame = (p: Point, q: Point): boolean =>
@@ -196,7 +209,14 @@ function robustWindowOf(
     }),
   );
   const area = loops.reduce((sum, loop) => sum + signedArea(loop), 0);
-  return { ...outline, area, setPoint: setPointOf(segments, band, coupleFor)! };
+  let couples: readonly CoupleOver[] = [];
+  const setPoint = setPointOf(segments, band, (at) => {
+    couples = couplesFor(at);
+    // the plan's own temperature speaks for the set point where it is one of those solved
+    const own = couples.find((c) => problem.temperatureC <= c.to) ?? couples.at(-1);
+    return own ? [...own.couple] : null;
+  })!;
+  return { ...outline, area, setPoint, couples };
 }
 
 const signedArea = (loop: readonly Point[]): number =>

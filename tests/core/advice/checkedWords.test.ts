@@ -4,7 +4,7 @@ import type { Robust } from "../../../shared/advice/robust";
 
 const checked: Robust["checked"] = { temperatures: [50, 60, 70], rules: [], settled: true, activities: [] };
 const setPoint = { pH: 5, Eh: 0.4, margin: 2, mixedPotential: false, cutByFrame: false };
-const window: Robust["windows"][number] = { outer: [], holes: [], area: 1, setPoint };
+const window: Robust["windows"][number] = { outer: [], holes: [], area: 1, setPoint, couples: [] };
 const plain = (robust: Robust) => checkedWords(robust, (e) => e).replace(/[\u2009\u00a0]/g, " ");
 
 test("where something holds, what more temperatures would change is said", () => {

@@ -1,8 +1,9 @@
-import { checkedWords } from "../../../../shared/advice/checkedWords";
+import { checkedWords, coupleOverWords } from "../../../../shared/advice/checkedWords";
 import { marginWords } from "../../../../shared/windows/limitWords";
 import { fixed } from "../../../../shared/words/numbers";
 import type { Inline } from "../pen";
 import type { SheetWork } from "../work";
+import { prose } from "../words";
 import { bold, volts } from "./style";
 
 /** What holds over the plan's ranges, and what was checked for it; null where the plan has none. */
@@ -22,5 +23,6 @@ export function robustSays({ robust, naming }: SheetWork): Inline[] | null {
         robust.windows.length > 1 ? `; ${robust.windows.length} pieces hold, this is the deepest.` : ".",
       ]
     : [bold("No point holds over all of it.")];
-  return [found, checkedWords(robust, naming.metalName)];
+  const coupled = coupleOverWords(best?.couples ?? []);
+  return [coupled === null ? found : [found, " ", prose(coupled)], checkedWords(robust, naming.metalName)];
 }

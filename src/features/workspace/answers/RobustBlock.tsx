@@ -1,6 +1,7 @@
-import { checkedWords } from "../../../../shared/advice/checkedWords";
+import { checkedWords, coupleOverWords } from "../../../../shared/advice/checkedWords";
 import type { Robust } from "../../../../shared/advice/robust";
 import { marginWords } from "../../../../shared/windows/limitWords";
+import { FormulaText } from "../../../components/FormulaText";
 import { Term } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
@@ -60,6 +61,7 @@ function Found({
 }) {
   const { windows } = robust;
   const best = [...windows].sort((a, b) => b.setPoint.margin - a.setPoint.margin)[0];
+  const coupled = coupleOverWords(best?.couples ?? []);
   return (
     <>
       {best ? (
@@ -74,6 +76,11 @@ function Found({
           </Row>
           {best.setPoint.mixedPotential && (
             <Note>Not at every temperature of the range does a couple set Eh, so the margin counts pH alone.</Note>
+          )}
+          {coupled !== null && (
+            <Note>
+              <FormulaText text={coupled} />
+            </Note>
           )}
           {best.setPoint.cutByFrame && <Note>Cut by the frame: it may hold further out.</Note>}
           {windows.length > 1 && <Note>{windows.length} pieces hold; this is the deepest.</Note>}
