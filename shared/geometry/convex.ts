@@ -161,7 +161,7 @@ function retag(piece: Convex, h: Line, tag: number, sign: readonly number[], pre
 
 /** Area of a piece, pH x V; shoelace on the drawn corners.
  *  @source  Gauss's area formula */
-export function areaOf(piece: Convex): number {
+export function areaOf(piece: Pick<Convex, "x" | "y">): number {
   const n = piece.x.length;
   let twice = 0;
   for (let i = 0; i < n; i++) {

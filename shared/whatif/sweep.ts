@@ -6,8 +6,9 @@ import { heldSetPoint } from "../setpoint/held";
 import { solve } from "../solve";
 import type { Point, SetPoint, Solution } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
-import { gripBetween, turnBetween, type Turn } from "./turns";
-import { isLogarithmic, settingBounds, settingOf, steps, withSetting, type Varied } from "./vary";
+import { stands, steps } from "./jumps";
+import { gripBetween, jumpBetween, turnBetween, type Turn } from "./turns";
+import { isLogarithmic, settingBounds, settingOf, steps as evenSteps, withSetting, type Varied } from "./vary";
 
 export interface SweepWish {
   readonly varied: Varied;
@@ -60,13 +61,14 @@ interface State {
 }
 
 /** One setting of a plan varied over a range, everything else as it stands: the windows at each setting, and the settings at which
- *  a window opens, closes, parts, joins or passes a margin of one control band.
+ *  a window opens, closes, parts, joins or passes a margin of one control band, or at which margin or open ground jump.
  *  @param inputs  of a plan     @param wish  what is varied, over which range, how finely     @param data  library
  *  @param tell  told the share done, 0 to 1, after every setting
  *  @returns  samples, frames and turns; a range that does not rise or leaves the bounds fails with its values. A setting that cannot be
  *            solved is listed, not drawn. Between two samples two turns that undo each other can be missed: the samples are as close
  *            as `frames` and `between` say
- *  @source  the solver at each setting (solve.ts); bisection on the number of windows, and on the margin, to the tolerance */
+ *  @source  the solver at each setting (solve.ts); bisection on the number of windows, on the margin, and on every
+ *            stretch over which margin or ground step further than a smooth line would, to the tolerance */
 export function sweep(
   inputs: PlanInputs,
   wish: SweepWish,
@@ -78,7 +80,7 @@ export function sweep(
   const { varied, range, kept } = wish;
   const band = inputs.controlBand;
   const stride = wish.between + 1;
-  const settings = steps(varied, range, (wish.frames - 1) * stride + 1);
+  const settings = evenSteps(varied, range, (wish.frames - 1) * stride + 1);
   const tolerance = TOLERANCE[varied.kind];
   const failed: { at: number; error: Failure }[] = [];
 
@@ -106,19 +108,13 @@ export function sweep(
     const state = stateAt(at, isFrame);
     if (state) {
       const { solution } = state;
-      const sample: Sample = {
-        at,
-        windows: solution.windows.length,
-        area: solution.windows.reduce((sum, w) => sum + w.area, 0),
-        setPoint: solution.setPoint,
-        kept: keptMargin(at, solution),
-      };
+      const sample = sampleOf(state);
+      if (before) turns.push(...turnsBetween(before, state));
       samples.push(sample);
       if (isFrame) {
         const { windows, shut, waterLines, frame } = solution;
         frames.push({ ...sample, solution: { windows, waterLines, frame, ...(shut ? { shut } : {}) } });
       }
-      if (before) turns.push(...turnsBetween(before, state));
     }
     before = state;
     tell((i + 1) / settings.length);
@@ -126,11 +122,34 @@ export function sweep(
   return ok({ varied, frames, samples, turns, tolerance, failed });
 
   function turnsBetween(low: State, high: State): Turn[] {
-    const found = [
+    const met = [
       ...narrowed(low, high, (s) => s.windows.length).map(([a, b]) => turnBetween(a, b, band)),
       ...narrowed(low, high, (s) => Number((s.setPoint?.margin ?? 0) >= 1)).map(([a, b]) => gripBetween(a, b, band)),
     ];
-    return found.sort((a, b) => a.at - b.at);
+    const jumps = jumpsBetween(low, high).filter(([a, b]) => !met.some(({ between: [c, d] }) => a.at < d && c < b.at));
+    // both sides are drawn, so that the curve stands upright there
+    samples.push(...jumps.flat().map(sampleOf));
+    const jumped = jumps.map(([a, b]) => jumpBetween(a, b, band)).filter((turn) => turn !== null);
+    return [...met, ...jumped].sort((a, b) => a.at - b.at);
+  }
+
+  function sampleOf({ at, solution }: State): Sample {
+    return {
+      at,
+      windows: solution.windows.length,
+      area: solution.windows.reduce((sum, w) => sum + w.area, 0),
+      setPoint: solution.setPoint,
+      kept: keptMargin(at, solution),
+    };
+  }
+
+  /** Neighbouring settings within the tolerance between which margin or ground still step. */
+  function jumpsBetween(low: State, high: State): [State, State][] {
+    if (!steps(stands(low.solution, high.solution), band)) return [];
+    const [a, b] = [scale(low.at), scale(high.at)];
+    if (b - a <= tolerance) return [[low, high]];
+    const middle = stateAt(unscale((a + b) / 2), false);
+    return middle === null ? [] : [...jumpsBetween(low, middle), ...jumpsBetween(middle, high)];
   }
 
   /** Neighbouring settings within the tolerance between which a count changes; where it changes twice on the way, both. */

@@ -2,11 +2,13 @@ import type { Problem } from "../schemas/problem";
 import { deepestPoint } from "../setpoint/deepestPoint";
 import { clearances, widest, type Segment } from "../setpoint/segments";
 import type { Limit, Solution, Window } from "../solution";
+import { changesBetween, stands, steps, type Changes, type Stands } from "./jumps";
 
 /** What happens at one setting as it rises.
  *  opens, closes: a window comes from nothing or shrinks to nothing; parts, joins: a window becomes two or two become one;
- *  holds, slips: the best margin rises above one control band or falls below it */
-export type TurnKind = "opens" | "closes" | "parts" | "joins" | "holds" | "slips";
+ *  holds, slips: the best margin rises above one control band or falls below it;
+ *  jumps: neither, but margin or open ground are other at one stroke */
+export type TurnKind = "opens" | "closes" | "parts" | "joins" | "holds" | "slips" | "jumps";
 
 export interface Turn {
   readonly kind: TurnKind;
@@ -22,6 +24,35 @@ export interface Turn {
   readonly conflicts: Solution["conflicts"];
   /** the window did not shrink: candidates or rules change here, and with them the ground at one stroke */
   readonly abrupt: boolean;
+  /** of a jump: margin and ground on both sides, and what is other beyond it; null where nothing jumps */
+  readonly jump: (Stands & Changes) | null;
+}
+
+const jumpOf = (low: Solution, high: Solution, band: Problem["controlBand"]): Turn["jump"] => {
+  const sides = stands(low, high);
+  return steps(sides, band) ? { ...sides, ...changesBetween(low, high, band) } : null;
+};
+
+/** Where margin or open ground jump and nothing opens, closes or passes a band.
+ *  @param low, high  settings a tolerance apart and their solutions, low first     @param band  control bands     @returns  the turn; null where nothing jumps */
+export function jumpBetween(
+  low: { at: number; solution: Solution },
+  high: { at: number; solution: Solution },
+  band: Problem["controlBand"],
+): Turn | null {
+  const jump = jumpOf(low.solution, high.solution, band);
+  return (
+    jump && {
+      kind: "jumps",
+      at: (low.at + high.at) / 2,
+      between: [low.at, high.at],
+      windows: [low.solution.windows.length, high.solution.windows.length],
+      limits: [],
+      conflicts: [],
+      abrupt: true,
+      jump,
+    }
+  );
 }
 
 /** A window under this many control bands of depth, next to a root, is one that comes or goes. */
@@ -76,6 +107,7 @@ export function turnBetween(
     limits: vanishes ? once(least.limits) : [],
     conflicts: less.conflicts,
     abrupt: !vanishes && none,
+    jump: jumpOf(low.solution, high.solution, band),
   };
 }
 
@@ -98,6 +130,7 @@ export function gripBetween(
     limits: best ? once(best.setPoint.mixedPotential ? pHWalls(best, band) : depthOf(best, band).limits) : [],
     conflicts: [],
     abrupt: Math.abs((low.solution.setPoint?.margin ?? 0) - (high.solution.setPoint?.margin ?? 0)) > NOTHING_LEFT,
+    jump: jumpOf(low.solution, high.solution, band),
   };
 }
 

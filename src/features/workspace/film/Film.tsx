@@ -3,8 +3,10 @@ import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Limit, SetPoint } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { Sweep, SweepWish } from "../../../../shared/whatif/sweep";
+import { jumpReasons, jumpWords } from "../../../../shared/whatif/jumpWords";
 import type { Turn, TurnKind } from "../../../../shared/whatif/turns";
 import { settingBounds, settingOf, usualRange, variedOf, withSetting } from "../../../../shared/whatif/vary";
+import { componentWord } from "../../../../shared/words/componentWord";
 import type { Asker, Tell } from "../../../workers/asker";
 import { Button } from "../../../components/Button";
 import { FormulaText } from "../../../components/FormulaText";
@@ -143,22 +145,23 @@ export function Film({ wish, onWish, inputs, data, metals, setPoint, edit }: Fil
             })}
           </ol>
           <Curve sweep={answer.value} inputs={inputs} here={here} />
-          <SectionHead className="mt-2">Where it opens and closes</SectionHead>
+          <SectionHead className="mt-2">Where it opens, closes and jumps</SectionHead>
           {answer.value.turns.length === 0 && (
             <Note className="py-1">
-              Nowhere in this range: windows neither open nor close, and the margin stays on one side of a control band.
+              Nowhere in this range: windows neither open nor close, nothing jumps, and the margin stays on one side of
+              a control band.
             </Note>
           )}
           <ul>
             {answer.value.turns.map((turn) => (
               <li key={`${turn.kind} ${turn.at}`} className="hairline py-1">
-                <TurnLine turn={turn} inputs={inputs} wish={wish} />
+                <TurnLine turn={turn} inputs={inputs} wish={wish} data={data} />
               </li>
             ))}
           </ul>
           <Note className="pt-1">
-            Worked out at {answer.value.samples.length} settings, straight lines between them; openings and closings are
-            narrowed to {vary.kind === "temperature" ? "0.01 K" : "0.02 %"}. Two that undo each other between
+            Worked out at {answer.value.samples.length} settings, straight lines between them; openings, closings and
+            jumps are narrowed to {vary.kind === "temperature" ? "0.01 K" : "0.02 %"}. Two that undo each other between
             neighbouring settings can be missed.
           </Note>
           {answer.value.failed.map(({ at, error }) => (
@@ -179,16 +182,34 @@ const does: Readonly<Record<TurnKind, string>> = {
   joins: "two windows join",
   holds: "the margin rises above one control band",
   slips: "the margin falls below one control band",
+  jumps: "",
 };
 
 const limitText = (l: Limit): string =>
   l.kind === "metal" ? `${l.inside ?? ""} / ${l.outside ?? ""}` : l.kind === "water" ? `water’s ${l.side ?? ""} line` : l.kind === "frame" ? "the edge of the frame" : `hazard ${l.side ?? ""}`; // prettier-ignore
 
-function TurnLine({ turn, inputs, wish }: { turn: Turn; inputs: PlanInputs; wish: FilmWish }) {
+function TurnLine({
+  turn,
+  inputs,
+  wish,
+  data,
+}: {
+  turn: Turn;
+  inputs: PlanInputs;
+  wish: FilmWish;
+  data: ChemicalData;
+}) {
+  const reasons = turn.jump ? jumpReasons(turn.jump, (element) => componentWord(data, element)) : [];
   return (
     <>
-      <b className="font-mono">{settingText(inputs, wish.vary, turn.at, 4)}</b> {does[turn.kind]}
-      {turn.abrupt && ", all at once: the candidates change here"}
+      <b className="font-mono">{settingText(inputs, wish.vary, turn.at, 4)}</b>{" "}
+      {turn.kind === "jumps" && turn.jump ? jumpWords(turn.jump) : does[turn.kind]}
+      {turn.abrupt && turn.kind !== "jumps" && ", all at once"}
+      {reasons.length > 0 && (
+        <>
+          : <FormulaText text={reasons.join("; ")} />
+        </>
+      )}
       {turn.limits.length > 0 && (
         <>
           {turn.kind === "opens" || turn.kind === "closes" ? ", closed by " : ", between "}
