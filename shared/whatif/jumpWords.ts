@@ -21,11 +21,16 @@ export function jumpReasons(
   return [
     ...comes.map((c) => `${c.species} counts for ${metalName(c.metal)} from here on (below, ${c.reason})`),
     ...goes.map((c) => `${c.species} no longer counts for ${metalName(c.metal)} from here on (${c.reason})`),
-    ...takes.map(
-      (id) => `${id} takes its ground at one stroke: the liquor is saturated with it whatever pH and Eh are`,
-    ),
-    ...loses.map((id) => `${id} loses its ground at one stroke`),
+    ...(comes.length + goes.length > 0 ? [] : strokes(takes, loses)),
     ...(couple === "begins" ? ["from here on a couple sets Eh, and the margin counts pH and Eh"] : []),
     ...(couple === "ceases" ? ["from here on no couple sets Eh, and the margin counts pH alone"] : []),
   ];
 }
+
+/** Where the candidates are the same on both sides: what gains or loses ground whose border no pH and no Eh moves. */
+const strokes = (takes: readonly string[], loses: readonly string[]): string[] => [
+  ...takes.map(
+    (id) => `${id} takes its ground at one stroke: the liquor is saturated with it over a range of pH and Eh`,
+  ),
+  ...loses.map((id) => `${id} loses its ground at one stroke`),
+];
