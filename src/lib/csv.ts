@@ -1,3 +1,5 @@
+import { saveFile } from "./saveFile";
+
 type Cell = string | number | null | undefined;
 
 /** A spreadsheet would run text that begins like a formula; a leading apostrophe keeps it text. */
@@ -15,8 +17,5 @@ export const toCsv = (header: string[], rows: Cell[][]): string =>
 
 /** Hands a text to the browser as a file. The byte-order mark makes spreadsheets read it as UTF-8. */
 export function downloadText(name: string, text: string, type = "text/csv"): void {
-  const url = URL.createObjectURL(new Blob(["\ufeff", text], { type: `${type};charset=utf-8` }));
-  const link = Object.assign(document.createElement("a"), { href: url, download: name });
-  link.click();
-  URL.revokeObjectURL(url);
+  saveFile(name, new Blob(["\ufeff", text], { type: `${type};charset=utf-8` }));
 }

@@ -8,13 +8,13 @@ import { toCsv } from "../../../lib/csv";
 import { celsius, fixed, significant } from "../../../lib/format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord } from "../../../lib/planWords";
 import type { PotentialScale } from "../../../lib/potential";
+import { saveFile, saveJson } from "../../../lib/saveFile";
 import { mapContent } from "../../../map/content";
 import { drawnMetals } from "../../../map/view";
 import { captionedPicture, mapPicture } from "../../../map/picture";
 import type { ExportKind } from "../header/WorkspaceHeader";
 import { planFile, reactionsTable, sheetQuery } from "./exportReactions";
 import { fileStem, limitsTable, polygonsTable, type Table, windowsTable, withOrigin } from "./exports";
-import { saveFile, saveJson } from "./saveFile";
 import type { MapModel } from "./useMapModel";
 
 export interface Exported {
