@@ -95,13 +95,14 @@ export default defineConfig({
   server: { proxy: { "/api": `http://127.0.0.1:${apiPort}` } },
   test: {
     projects: [
+      // A timeout ends what hangs, and is no word on speed: beside other work a test may take ten times as long.
       {
         extends: true,
         test: {
           name: "core",
           environment: "node",
           include: ["tests/{core,golden,properties,cases}/**/*.test.ts"],
-          testTimeout: 30_000,
+          testTimeout: 120_000,
           // Pure functions: nothing to keep apart.
           isolate: false,
         },
@@ -112,7 +113,8 @@ export default defineConfig({
           name: "server",
           environment: "node",
           include: ["tests/server/**/*.test.ts"],
-          testTimeout: 20_000,
+          testTimeout: 120_000,
+          hookTimeout: 60_000,
           // Every test has an application and a database of its own; the modules may be loaded once a worker.
           isolate: false,
         },
@@ -124,7 +126,7 @@ export default defineConfig({
           environment: "jsdom",
           include: ["tests/client/**/*.test.{ts,tsx}"],
           setupFiles: ["tests/client/setup.ts"],
-          testTimeout: 20_000,
+          testTimeout: 60_000,
           // Modules and the browser that is none are made once a worker; what a test drew, or kept there, is gone after it.
           isolate: false,
         },

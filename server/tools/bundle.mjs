@@ -1,9 +1,9 @@
-// Bundles the server into dist/server.mjs, beside the pages Vite built into dist/client.
+// Bundles the server into dist/server.mjs, beside the pages Vite built into dist/client; or into the file that is named.
 import { build } from "esbuild";
 
 await build({
   entryPoints: ["server/index.ts"],
-  outfile: "dist/server.mjs",
+  outfile: process.argv[2] ?? "dist/server.mjs",
   bundle: true,
   platform: "node",
   format: "esm",
