@@ -25,14 +25,14 @@ export interface SolveOptions {
  *  and the set point. Potentials in V vs SHE at T, activities dimensionless.
  *  @param input  a problem (schemas/problem.ts); anything else fails     @param library  chemistry
  *  @returns  the solution, or the first failure with code, path, bound and value. Valid 0 to 250 C.
- *  @source  docs/method.md, steps 1 to 6; interface in docs/solver.md */
+ *  @source  docs/method.md, sections 1 to 6; interface in docs/solver.md */
 export function solve(input: unknown, library: ChemicalData, options: SolveOptions = {}): Outcome<Solution> {
   const analysed = analyse(input, library); // 1 to 5: energies, planes, ligand cells, fields, window pieces
   return analysed.ok ? ok(solutionOf(analysed.value, options)) : analysed;
 }
 
 /** The last step of `solve`, where the exact pieces are wanted as well: windows, limits, set points, warnings.
- *  @param analysis  of the problem     @returns  the solution; it cannot fail     @source  docs/method.md, step 6 */
+ *  @param analysis  of the problem     @returns  the solution; it cannot fail     @source  docs/method.md, section 6 */
 export function solutionOf(analysis: Analysis, options: SolveOptions = {}): Solution {
   const { prepared, basis, cells, metals, bounds, hazards, pieces } = analysis;
   const { problem, data } = prepared;

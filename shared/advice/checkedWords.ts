@@ -2,7 +2,7 @@ import { celsius, significant } from "../words/numbers";
 import type { CoupleOver, Robust } from "./robust";
 
 /** What was looked at for a window over ranges, so that nobody takes it for more.
- *  @param robust  of `robustWindow`     @param metalName  "zinc" for Zn     @returns  sentences     @source  docs/method.md, Over ranges */
+ *  @param robust  of `robustWindow`     @param metalName  "zinc" for Zn     @returns  sentences     @source  docs/method.md, section 7 */
 export function checkedWords(
   { windows, checked: { temperatures, rules, settled, activities } }: Robust,
   metalName: (element: string) => string,

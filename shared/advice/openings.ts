@@ -58,7 +58,7 @@ const MOST_BAR = 1e4;
  *  @param input  problem     @param data  library     @param onProgress  steps of the search done, and in all
  *  @param gammas  of the plan: tenors by Davies become activities anew at every temperature tried
  *  @returns  advice; openings are empty where there is a window already
- *  @source  docs/method.md: outward search in even steps, then bisection on the existence of a window; between two steps
+ *  @source  outward search in even steps, then bisection on the existence of a window; between two steps
  *           an opening narrower than a step can be missed, and `searched` says how far and how finely it looked */
 export function adviceFor(
   input: unknown,

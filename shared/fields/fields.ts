@@ -35,7 +35,7 @@ function statesOf(species: readonly Species[]): readonly State[] {
 /** Predominance fields of one metal: in every ligand cell the lower envelope of its species per mole of metal, each less
  *  the potentials of its ligands there. Across a cell's border the two planes of one species meet exactly on it.
  *  @param metal  chosen species and activity     @param cells  ligand cells     @param basis  prices at T
- *  @returns  exact convex pieces     @source  docs/method.md, step 4 */
+ *  @returns  exact convex pieces     @source  docs/method.md, section 4 */
 export function fieldsOf(
   metal: PreparedMetal,
   cells: readonly LigandCell[],

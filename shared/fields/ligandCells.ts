@@ -19,7 +19,7 @@ export interface LigandCell {
 
 /** Overlays the lower envelopes of all ligands, each at its total activity.
  *  @param components  ligands and partners with totals     @param frame  rectangle with frame tags     @param basis  prices at T
- *  @returns  cells that partition the frame     @source  docs/method.md, step 3 */
+ *  @returns  cells that partition the frame     @source  docs/method.md, section 3 */
 export function ligandCells(components: readonly PreparedComponent[], frame: Convex, basis: Basis): LigandCell[] {
   let cells: LigandCell[] = [{ piece: frame, holders: new Map() }];
   for (const { component, activity, species } of components) {

@@ -113,7 +113,7 @@ export function carrierOf(
  *  plan: a liquor that has lost its gas, or a vessel that is swept, stands lower; a dead corner may stand there.
  *  @param liquor  of the plan     @param gas  one of hazardGases
  *  @returns  pieces that cover the frame, or in words why the plan gives no pressure
- *  @source  docs/method.md, hazards; the same planes as fields and cells */
+ *  @source  docs/method.md, section 10; the same planes as fields and cells */
 export function gasPressure(liquor: Liquor, gas: HazardGas): GasPressure | { readonly absent: string } {
   const { basis, cells, prepared } = liquor;
   const thermal = basis.thermal * STEPS_PER_JOULE;

@@ -66,7 +66,7 @@ function isoLinesOf(pieces: readonly Convex[], regions: readonly Region[]): Poin
 }
 
 /** Where the equilibrium pressure of a gas reaches a threshold: exact convex pieces joined, never a grid.
- *  @param pressure  of a gas     @param bar  threshold, above zero     @returns  region, iso-pressure lines     @source  docs/method.md, hazards */
+ *  @param pressure  of a gas     @param bar  threshold, above zero     @returns  region, iso-pressure lines     @source  docs/method.md, section 10 */
 export function regionAbove(pressure: GasPressure, bar: number): Pick<HazardRegion, "region" | "isoLines"> {
   const pieces = above(pressure, bar);
   const regions = connect(pieces);
@@ -101,7 +101,7 @@ function caution(gas: HazardGas, { words }: Threshold, hot: boolean): string {
  *  @param analysis  of the plan
  *  @param options  set point to read the pressures at; thresholds in bar in place of the usual ones; gases (all unless named)
  *  @returns  regions in the order of hazardGases; OUT_OF_RANGE for a threshold that is not above zero
- *  @source  docs/method.md, hazards; thresholds of hazards/exposure.ts; saturation pressure of gibbs/water.ts */
+ *  @source  docs/method.md, section 10; thresholds of hazards/exposure.ts; saturation pressure of gibbs/water.ts */
 export function hazardRegions(
   analysis: Analysis,
   options: {

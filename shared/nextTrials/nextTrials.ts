@@ -80,7 +80,7 @@ const alongPH = (s: Segment, u: number, v: number): number =>
 
 /** How a condition stands, proposed or moved by hand.
  *  @param at  pH, V vs SHE     @param window  solved     @param band  control bands     @param sites  what is taken
- *  @returns  gap, nearest site, distance inside and the limit faced     @source  distances of docs/method.md, step 6 */
+ *  @returns  gap, nearest site, distance inside and the limit faced     @source  distances of docs/method.md, section 6 */
 export function standingAt(
   at: { readonly pH: number; readonly Eh: number },
   window: Pick<Window, "limits" | "setPoint">,

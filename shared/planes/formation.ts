@@ -63,7 +63,7 @@ function wholeNumbers(numbers: Numbers, factor: number): Numbers {
  *  @param species  holds `main`     @param main  element or ligand group     @param activity  total, > 0     @param ligands  numbers of the other components
  *  @param basis  prices at T     @returns  snapped plane; `atoms` = nu (times the factor that makes the formula whole)
  *  @throws Error where its atoms come in fractions finer than a twelfth (prepare refuses such rows)
- *  @source  docs/method.md, step 2: sp = nu M + l L + o H2O + (h - 2o) H^+ + (h - 2o - z) e^- */
+ *  @source  docs/method.md, section 2: sp = nu M + l L + o H2O + (h - 2o) H^+ + (h - 2o - z) e^- */
 export function formationOf(
   species: Species,
   main: string,

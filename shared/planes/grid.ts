@@ -24,7 +24,7 @@ export interface Basis {
 export const snap = (joule: number): number => Math.round(joule * STEPS_PER_JOULE);
 
 /** Prices of H^+, e^- and water at T. The electron is half a hydrogen molecule less a proton at E = 0 (SHE at T).
- *  @param energies  Gibbs energies at T     @returns  the basis     @source  docs/method.md, step 2 */
+ *  @param energies  Gibbs energies at T     @returns  the basis     @source  docs/method.md, section 2 */
 export function basisAt(energies: EnergiesAtT): Basis {
   const thermal = GAS_CONSTANT * energies.T;
   return {

@@ -33,7 +33,7 @@ const takesSulfideUp = (data: ChemicalData, products: ReadonlyMap<string, string
  *  @param asked  start and set point, and what the user chooses: redox reagent, acid (by the lixiviant unless named), base, metal, products
  *  @returns  as `overallOf`, with the products found and the activities assumed for what the plan does not name; INVALID_INPUT for a
  *    product that cannot be one (`products.ts`)
- *  @source  docs/method.md, step 8. While sulfate is not reduced a sulfide's sulfur stops at sulfur or H2S, above 150 C at sulfate */
+ *  @source  docs/method.md, section 8. While sulfate is not reduced a sulfide's sulfur stops at sulfur or H2S, above 150 C at sulfate */
 export function overallReaction(
   problem: Problem,
   data: ChemicalData,

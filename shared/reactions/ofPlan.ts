@@ -48,7 +48,7 @@ export interface PlanReaction {
 /** One overall reaction of a plan as its choices have it: products and redox reagent kept with the plan, the usual ones where it has none.
  *  @param problem, data, inputs  of the plan     @param at  pH and Eh of the set point, V vs SHE at T     @param from  species id of the start
  *  @returns  the choices in force, what would rule without them, and the reaction or why it cannot be written
- *  @source  docs/method.md, step 8 */
+ *  @source  docs/method.md, section 8 */
 export function planReaction(
   problem: Problem,
   data: ChemicalData,

@@ -99,7 +99,7 @@ const firstMetal = (data: ChemicalData, species: Species): string | null =>
  *  @param data  the library     @param question  start, products, ligands, reagent, T, pH
  *  @returns  smallest whole coefficients, demand, masses made, dG and log K at T. UNKNOWN_SPECIES, LIGAND_MISSING, INVALID_INPUT where the
  *    start is its own product, the reagent works the wrong way, or products leave more than one reaction
- *  @source  docs/method.md, step 8; Smith and Missen 1982 for the matrix
+ *  @source  docs/method.md, section 8; Smith and Missen 1982 for the matrix
  *  @example valueOf(overallOf(chemistry(), { from: "UO2(s,uraninite)", products: ["UO2^2+(aq)"], redox: "ferric", temperatureC: 25, pH: 1.5 })).demand[0].kgPerKgMetal // => 0.469 */
 export function overallOf(data: ChemicalData, question: OverallQuestion): Outcome<OverallReaction> {
   const from = data.species.get(question.from);

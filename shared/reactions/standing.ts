@@ -61,7 +61,7 @@ const holds = (piece: Convex, pH: number, Eh: number): boolean => piece.lines.ev
  *  the solver's own cells and fields around the point.
  *  @param problem  a plan's question     @param data  the library     @param at  pH and Eh, V vs SHE at T
  *  @param asked  components wanted beside the plan's own     @returns  ids by component; failures as `prepare`
- *  @source  docs/method.md, steps 3 and 4 */
+ *  @source  docs/method.md, sections 3 and 4 */
 export function standingAt(
   problem: Problem,
   data: ChemicalData,

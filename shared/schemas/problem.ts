@@ -5,7 +5,7 @@ import { speciesRow } from "./chemistry";
 export const roles = ["target", "gangue", "watched"] as const;
 export const requirements = ["dissolved", "solid", "metal", "compound", "free"] as const;
 export type Requirement = (typeof requirements)[number];
-/** Range of the temperature models, C (docs/method.md, step 1). */
+/** Range of the temperature models, C (docs/method.md, section 1). */
 export const TEMPERATURE_RANGE_C = { min: 0, max: 250 } as const;
 export const solidsBases = ["feed", "fresh", "aged"] as const;
 

@@ -66,7 +66,7 @@ export function failureOf(error: z.ZodError, input: unknown): Outcome<never> {
 /** Validates a problem and chooses the species that count.
  *  @param input  anything; must be a problem (schemas/problem.ts)     @param library  chemistry
  *  @returns  the prepared problem, or the first failure with path, bound and value
- *  @source  docs/method.md, steps 1 to 3 */
+ *  @source  docs/method.md, sections 1 to 3 */
 export function prepare(input: unknown, library: ChemicalData): Outcome<Prepared> {
   const parsed = problemSchema.safeParse(input);
   if (!parsed.success) return failureOf(parsed.error, input);

@@ -49,7 +49,7 @@ function isConvex(segments: readonly Segment[]): boolean {
  *  Exact to 1e-6.
  *  @param segments  all loops of one region, region on the left, consecutive within a loop; u, v in control bands
  *  @returns  the deepest point, null for an empty border
- *  @source  docs/method.md, step 6: a linear program for a convex region; else branch and bound whose bounds are linear
+ *  @source  docs/method.md, section 6: a linear program for a convex region; else branch and bound whose bounds are linear
  *           programs too, so that long ridges of equal depth are settled at once */
 export function deepestPoint(segments: readonly Segment[]): Deepest | null {
   if (segments.length === 0) return null;

@@ -55,7 +55,7 @@ export interface HeldSetPoint {
  *  @param analysis  of the plan, for the couple that sets Eh there     @param solution  of the same plan
  *  @param at  pH, Eh (V vs SHE at T)     @param band  control bands
  *  @returns  the window as if this were its set point; margin below zero outside; null without a window
- *  @source  docs/method.md, step 6, at another point */
+ *  @source  docs/method.md, section 6, at another point */
 export function heldSetPoint(
   analysis: Analysis,
   solution: Pick<Solution, "windows">,

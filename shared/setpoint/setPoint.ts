@@ -11,7 +11,7 @@ export interface BorderSegment extends Segment {
  *  else Eh is a mixed potential: the margin counts pH alone, Eh is a range. Then the set point stands on the widest chord
  *  along pH, or as much higher or lower as keeps one band from the ends of that range, in the middle of the chord there.
  *  @param border  in control bands, region on the left     @param band  pH and V     @param coupleAt  couple at a point, or null
- *  @returns  set point in pH and V; null for an empty border     @source  docs/method.md, step 6 */
+ *  @returns  set point in pH and V; null for an empty border     @source  docs/method.md, section 6 */
 export function setPointOf(
   border: readonly BorderSegment[],
   band: { pH: number; Eh: number },

@@ -112,9 +112,11 @@ export function comparable(
       `${target} ${say(tenor.lo, 3)} g/L, the plan ${say(wanted, 3)} g/L: more than a factor ${MOST_FACTOR} apart`,
     );
 
+  const onRecord = (list: ComparedTrial["measured"]["ligands"], component: string) =>
+    ligandTotalIn(list, component, data, inputs.sulfateReduction);
   for (const { component, activity } of inputs.ligands) {
-    const found = ligandTotalIn(trial.measured.ligands, component, data);
-    const laidOut = ligandTotalIn(trial.planned.ligands, component, data)?.lo ?? activity;
+    const found = onRecord(trial.measured.ligands, component);
+    const laidOut = onRecord(trial.planned.ligands, component)?.lo ?? activity;
     if (found === null) unknown.push(`${component} total not measured`);
     else if (factorBetween(found, laidOut) > MOST_FACTOR)
       reasons.push(

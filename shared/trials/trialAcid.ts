@@ -2,6 +2,7 @@ import { FREE_ACID_BELOW, freeAcidCurve } from "../activity/freeAcid";
 import { numberIn } from "../entry/measure";
 import { liquorContext } from "../metallurgy/account/liquor";
 import type { MolarMasses } from "../metallurgy/molarMass";
+import type { PlanInputs } from "../schemas/plan";
 import type { Trial } from "../schemas/trial";
 import type { LigandTotal } from "../schemas/trialRecord";
 import type { ChemicalData } from "../species/chemicalData";
@@ -29,33 +30,51 @@ export function titratedAcid(trial: Pick<Trial, "charge" | "products">, masses: 
   return entry ? numberIn(entry, "solutionAssay", liquorContext(trial, "H2SO4", masses, "end")) : null;
 }
 
+/** What a trial's plan says of its sulfur. */
+export interface AcidPlan {
+  /** mol/L; null where it names none */
+  readonly sulfate: number | null;
+  readonly sulfateReduction: boolean;
+}
+
+/** @param inputs  of the plan     @returns  what it says of its sulfur */
+export const acidPlan = ({
+  ligands,
+  sulfateReduction,
+}: Pick<PlanInputs, "ligands" | "sulfateReduction">): AcidPlan => ({
+  sulfate: ligands.find(({ component }) => component === "S")?.activity ?? null,
+  sulfateReduction,
+});
+
 export interface AcidTrial {
   readonly planned: { readonly ligands: readonly LigandTotal[] };
   readonly measured: { readonly ligands: readonly LigandTotal[] };
 }
 
-const sulfateIn = (list: readonly LigandTotal[], data: ChemicalData): number | null => {
-  const found = ligandTotalIn(list, "S", data);
+const sulfateIn = (list: readonly LigandTotal[], data: ChemicalData, onePool: boolean): number | null => {
+  const found = ligandTotalIn(list, "S", data, onePool);
   return found !== null && found.lo === found.hi && found.lo > 0 ? found.lo : null;
 };
 
 /** What a pH below 1.5 of a trial is in free acid, beside what was titrated. Neither corrects the other.
  *  @param trial  its ligand totals, measured before planned     @param at  pH and temperature it was held at; pH null: nothing to say
- *  @param titrated  of `titratedAcid`     @param planSulfate  mol/L of the plan, where the trial names none     @param data  library
- *  @returns  null at pH 1.5 and above, or without a pH     @source  activity/freeAcid.ts; docs/method.md, free acid */
+ *  @param titrated  of `titratedAcid`     @param plan  its mol/L of sulfate, where the trial names none, and whether its sulfur is one pool;
+ *    null without a plan     @param data  library
+ *  @returns  null at pH 1.5 and above, or without a pH     @source  activity/freeAcid.ts; docs/method.md, section 11 */
 export function trialAcid(
   trial: AcidTrial,
   at: { readonly pH: number | null; readonly temperatureC: number | null },
   titrated: number | null,
-  planSulfate: number | null,
+  plan: AcidPlan | null,
   data: ChemicalData,
 ): TrialAcid | null {
   const { pH, temperatureC } = at;
   if (pH === null || pH >= FREE_ACID_BELOW) return null;
+  const onePool = plan?.sulfateReduction ?? false;
   const candidates = [
-    ["measured", sulfateIn(trial.measured.ligands, data)],
-    ["planned", sulfateIn(trial.planned.ligands, data)],
-    ["plan", planSulfate],
+    ["measured", sulfateIn(trial.measured.ligands, data, onePool)],
+    ["planned", sulfateIn(trial.planned.ligands, data, onePool)],
+    ["plan", plan?.sulfate ?? null],
   ] as const;
   const [from, molPerL = null] = candidates.find(([, total]) => total !== null) ?? [];
   const sulfate = from === undefined || molPerL === null ? null : { molPerL, from };

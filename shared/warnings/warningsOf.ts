@@ -12,7 +12,7 @@ const DRAWN_DOWN_SHARE = 1 / 3;
 /** What the user must know before trusting the picture: fields and ligand cells that rest on a G outside its trusted range, ligands that
  *  the metals would use up, solids that time replaces, steps that are slow, saturation pressure.
  *  @param prepared, metals, fields, basis, relevant  of one solution     @returns  sentences with a code
- *  @source  docs/method.md, steps 1 and 3, warnings */
+ *  @source  docs/method.md, sections 1 and 3 */
 export function warningsOf(
   prepared: Prepared,
   metals: readonly MetalFields[],

@@ -100,7 +100,7 @@ function wayAlong(l: RawLimit, p: Point, axis: 0 | 1): number | null {
 
 /** A border stretch in full: names, reaction, line, distances from the set point.
  *  @param ground  the solved plane     @param raw  border stretch     @param at  set point     @param band  control bands
- *  @returns  the limit as the solution prints it     @source  docs/method.md, step 5 */
+ *  @returns  the limit as the solution prints it     @source  docs/method.md, section 5 */
 export function limitOf(ground: Ground, raw: RawLimit, at: Point, band: { pH: number; Eh: number }): Limit {
   const { piece, cell } = ground.pieces[raw.piece]!;
   const line = piece.lines[raw.edge]!;

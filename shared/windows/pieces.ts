@@ -76,7 +76,7 @@ const apart = (a: Convex, b: Convex): boolean => apartAlong(a.x, b.x) || apartAl
  *  the hazards' ground.
  *  @param cells  ligand cells     @param metals  fields of each metal over the same cells     @param bounds  water lines that bind
  *  @param hazards  ground kept out
- *  @returns  convex pieces with disjoint interiors; none where all of them are slivers     @source  docs/method.md, step 5 */
+ *  @returns  convex pieces with disjoint interiors; none where all of them are slivers     @source  docs/method.md, section 5 */
 export function windowPieces(
   cells: readonly LigandCell[],
   metals: readonly MetalFields[],

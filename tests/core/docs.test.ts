@@ -1,4 +1,4 @@
-import { readFileSync } from "node:fs";
+import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import { problemSchema } from "../../shared/schemas/problem";
 import { solve } from "../../shared/solve";
@@ -82,4 +82,25 @@ describe("the keys documented are those of the code", () => {
     for (const key of seen) expect(page, `docs/solver.md says nothing of ${key}`).toContain(key);
     for (const key of named(solutionPart)) expect([...seen], `${key} is in docs/solver.md alone`).toContain(key);
   });
+});
+
+test("what comments say of docs/method.md is there: sections, no steps; decision records are headed alike", () => {
+  const sections = new Set(
+    [...readFileSync("docs/method.md", "utf8").matchAll(/^## (\d+)\. /gm)].map((m) => Number(m[1])),
+  );
+  const code = ["shared", "server", "src"].flatMap((folder) =>
+    readdirSync(folder, { recursive: true, encoding: "utf8" })
+      .filter((name) => /\.tsx?$/.test(name))
+      .map((name) => readFileSync(`${folder}/${name}`, "utf8")),
+  );
+  const named = code.flatMap((text) => [...text.matchAll(/docs\/method\.md, (\w+) ((?:\d+|,| |and|to)+)/g)]);
+  expect(named.length).toBeGreaterThan(30);
+  for (const [all, word, numbers = ""] of named) {
+    expect(["section", "sections"], all).toContain(word);
+    for (const n of numbers.match(/\d+/g) ?? []) expect(sections.has(Number(n)), all).toBe(true);
+  }
+  for (const name of readdirSync("docs/decisions"))
+    expect(readFileSync(`docs/decisions/${name}`, "utf8").split("\n")[0]).toMatch(
+      new RegExp(`^# ${name.slice(0, 4)} [A-Z]`),
+    );
 });

@@ -2,11 +2,12 @@ import { eq, inArray, sql } from "drizzle-orm";
 import type { z } from "zod";
 import type { trialsCsvQuery } from "../../../shared/schemas/trialRows";
 import { measuredPoint } from "../../../shared/trials/measuredPoint";
-import { titratedAcid, trialAcid } from "../../../shared/trials/trialAcid";
+import { titratedAcid, trialAcid, type AcidPlan } from "../../../shared/trials/trialAcid";
 import type { Db } from "../../db/open";
 import { byteOrderMark, csvLine, type Cell } from "../../http/csv";
 import { campaigns } from "../campaigns/schema";
 import { feeds } from "../feeds/schema";
+import { revisionOf } from "../plans/rows";
 import { projects } from "../projects/schema";
 import { trialColumns, type ExportedTrial, type Stream } from "./csvColumns";
 import { assayHeader, assayLines, readingHeader, readingLines } from "./csvLines";
@@ -44,7 +45,13 @@ function exported(db: Db, ids: readonly string[], { electrodes, masses, data }: 
   const rows = trialsOf(db, ids);
   const of = new Map(
     db
-      .select({ id: campaigns.id, stages: campaigns.stages, projectName: projects.name })
+      .select({
+        id: campaigns.id,
+        stages: campaigns.stages,
+        planId: campaigns.planId,
+        planRevision: campaigns.planRevision,
+        projectName: projects.name,
+      })
       .from(campaigns)
       .innerJoin(projects, eq(projects.id, campaigns.projectId))
       .where(inArray(campaigns.id, [...new Set(rows.map(({ campaignId }) => campaignId))]))
@@ -68,6 +75,14 @@ function exported(db: Db, ids: readonly string[], { electrodes, masses, data }: 
       .all()
       .map(({ id, code }) => [id, code]),
   );
+  // Grams of sulfur are weighed as the campaign's plan weighs them; its sulfate stands in for none that is not on the trial's own record.
+  const onePool = new Map(
+    [...of].map(([id, { planId, planRevision }]) => [id, revisionOf(db, planId, planRevision).inputs.sulfateReduction]),
+  );
+  const planOf = (campaignId: string): AcidPlan => ({
+    sulfate: null,
+    sulfateReduction: onePool.get(campaignId) ?? false,
+  });
   return rows
     .map((trial) => ({ trial, point: measuredPoint(trial, electrodes).point }))
     .map(({ trial, point }) => ({
@@ -79,7 +94,13 @@ function exported(db: Db, ids: readonly string[], { electrodes, masses, data }: 
       conversion: point?.conversion ?? null,
       acid:
         point &&
-        trialAcid(trial, { pH: point.pH, temperatureC: point.pHTemperatureC }, titratedAcid(trial, masses), null, data),
+        trialAcid(
+          trial,
+          { pH: point.pH, temperatureC: point.pHTemperatureC },
+          titratedAcid(trial, masses),
+          planOf(trial.campaignId),
+          data,
+        ),
     }));
 }
 

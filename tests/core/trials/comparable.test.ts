@@ -124,6 +124,14 @@ test("ligands: the total the trial was laid out on counts before the plan's acti
   ]);
 });
 
+test("where the plan lets sulfate be reduced its S is all sulfur, and a trial's grams are weighed as S", () => {
+  const pool = { ...heap, sulfateReduction: true };
+  expect(judged({ measured: sulfate("3.206 g/L"), planned: sulfate("0.1 mol/L") }, 25, pool).reasons).toEqual([]);
+  expect(judged({ measured: sulfate("11.2 g/L") }, 25, pool).reasons).toEqual([
+    "S 0.349 mol/L, the plan 0.1 mol/L: more than a factor 3 apart",
+  ]);
+});
+
 test("in a cementation the starting tenor counts, and never what may be left", () => {
   const cement = { code: "CD", name: "zinc dust", target: "Cd", gangue: null };
   const record = (Cd: string): Partial<TrialInput> => ({

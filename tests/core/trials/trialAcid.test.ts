@@ -15,7 +15,7 @@ const byPH = (pH: number, sulfate: number) => valueOf(freeAcid(data, pH, sulfate
 
 describe("free acid beside the pH of a trial", () => {
   test("titrated and by pH stand side by side, and the difference is said", () => {
-    const acid = trialAcid(trial(total("0.8")), at(1.1), 48, 0.5, data)!;
+    const acid = trialAcid(trial(total("0.8")), at(1.1), 48, { sulfate: 0.5, sulfateReduction: false }, data)!;
     expect(acid.titrated).toBe(48);
     expect(acid.byPH).toBeCloseTo(byPH(1.1, 0.8), 9);
     expect(acid.difference).toBeCloseTo(48 - byPH(1.1, 0.8), 9);
@@ -23,12 +23,21 @@ describe("free acid beside the pH of a trial", () => {
     expect(acid.doubts).toHaveLength(1);
   });
   test("the trial's own sulfate counts, measured before planned, the plan's last", () => {
-    expect(trialAcid(trial([], total("0.3")), at(1.2), null, 0.5, data)!.sulfate?.from).toBe("planned");
-    expect(trialAcid(trial([]), at(1.2), null, 0.5, data)!.sulfate).toEqual({ molPerL: 0.5, from: "plan" });
+    expect(
+      trialAcid(trial([], total("0.3")), at(1.2), null, { sulfate: 0.5, sulfateReduction: false }, data)!.sulfate?.from,
+    ).toBe("planned");
+    expect(trialAcid(trial([]), at(1.2), null, { sulfate: 0.5, sulfateReduction: false }, data)!.sulfate).toEqual({
+      molPerL: 0.5,
+      from: "plan",
+    });
   });
   test("grams of a total are grams of sulfate, as in a plan: 48.03 g/L is half a mole a litre, not one and a half", () => {
     const acid = trialAcid(trial(total("48.03", "g/L")), at(1.2), null, null, data)!;
     expect(acid.sulfate!.molPerL).toBeCloseTo(0.5, 3);
+    // where the plan's sulfur is one pool, S is weighed as S: 32.06 g/mol
+    const pool = { sulfate: null, sulfateReduction: true };
+    expect(trialAcid(trial(total("16.03", "g/L")), at(1.2), null, pool, data)!.sulfate!.molPerL).toBeCloseTo(0.5, 3);
+    expect(trialAcid(trial(total("0.5")), at(1.2), null, pool, data)!.sulfate!.molPerL).toBe(0.5);
     expect(trialAcid(trial(total("48030", "mg/L")), at(1.2), null, null, data)!.sulfate!.molPerL).toBeCloseTo(0.5, 3);
     expect(acid.sulfate!.molPerL).toBeCloseTo(48.03 / gramsPerMole(data, "S", false), 12);
   });

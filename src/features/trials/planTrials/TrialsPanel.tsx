@@ -1,7 +1,7 @@
 import { useCallback, useDeferredValue, useMemo, useState } from "react";
 import { Link } from "react-router-dom";
 import { FREE_ACID_BELOW } from "../../../../shared/activity/freeAcid";
-import { trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
+import { acidPlan, trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
 import { acidFigures } from "../../../components/AcidAmount";
 import { Button } from "../../../components/Button";
 import { Check, Segmented } from "../../../components/choice";
@@ -181,10 +181,9 @@ function LinkedTable({
   const [chosen, setChosen] = useState<string>();
   const acidOf = useCallback(
     ({ compared, figures }: PlacedTrial) => {
-      const sulfate = ground.inputs.ligands.find(({ component }) => component === "S")?.activity ?? null;
       // A cooled sample has a temperature of its own, which a point on the map does not carry.
       const at = { pH: figures.pH, temperatureC: figures.pHCooled ? null : figures.temperatureC };
-      return trialAcid(compared, at, compared.freeAcid ?? null, sulfate, ground.data);
+      return trialAcid(compared, at, compared.freeAcid ?? null, acidPlan(ground.inputs), ground.data);
     },
     [ground],
   );

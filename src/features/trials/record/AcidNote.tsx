@@ -1,7 +1,7 @@
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import type { MeasuredPoint } from "../../../../shared/trials/measuredPoint";
-import { titratedAcid, trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
+import { acidPlan, titratedAcid, trialAcid, type TrialAcid } from "../../../../shared/trials/trialAcid";
 import { AcidAmount, acidFigures } from "../../../components/AcidAmount";
 import { Help } from "../../../components/Help";
 import { MethodLink } from "../../../components/SourceLink";
@@ -14,12 +14,11 @@ export function trialAcidOf(
   record: TrialValues,
   point: Pick<MeasuredPoint, "pH" | "pHTemperatureC"> | null,
   data: ChemicalData,
-  inputs: Pick<PlanInputs, "ligands"> | undefined,
+  inputs: Pick<PlanInputs, "ligands" | "sulfateReduction"> | undefined,
 ): TrialAcid | null {
   if (point === null) return null;
-  const sulfate = inputs?.ligands.find(({ component }) => component === "S")?.activity ?? null;
   const at = { pH: point.pH, temperatureC: point.pHTemperatureC };
-  return trialAcid(record, at, titratedAcid(record, data.molarMass), sulfate, data);
+  return trialAcid(record, at, titratedAcid(record, data.molarMass), inputs ? acidPlan(inputs) : null, data);
 }
 
 const whose = { measured: "measured here", planned: "planned here", plan: "of the plan" } as const;

@@ -127,7 +127,10 @@ export function PlannedSection() {
               caption="Ligand totals planned"
               rowName="ligand"
               rows={planned.ligands}
-              columns={ligandColumns(solved?.inputs.ligands.map((l) => l.component) ?? [])}
+              columns={ligandColumns(
+                solved?.inputs.ligands.map((l) => l.component) ?? [],
+                solved?.inputs.sulfateReduction ?? false,
+              )}
               blank={nextLigand}
               onChange={(ligands) => put({ ligands }, "ligands")}
               readOnly={readOnly}

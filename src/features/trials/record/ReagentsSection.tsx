@@ -210,7 +210,10 @@ export function ReagentsSection() {
             caption="Ligand totals measured"
             rowName="ligand"
             rows={ligands}
-            columns={ligandColumns(solved?.inputs.ligands.map((l) => l.component) ?? [])}
+            columns={ligandColumns(
+              solved?.inputs.ligands.map((l) => l.component) ?? [],
+              solved?.inputs.sulfateReduction ?? false,
+            )}
             blank={nextLigand}
             onChange={(next: LigandTotal[]) => set("ligands", next)}
             readOnly={readOnly}

@@ -9,8 +9,9 @@ export const nextLigand = (rows: readonly LigandTotal[]): LigandTotal => ({
   value: { text: "", unit: rows.at(-1)?.value.unit ?? "mol/L" },
 });
 
-/** Total of a ligand as the plan names it, and what its grams are grams of. @param expected  ligands of the plan */
-export const ligandColumns = (expected: readonly string[]): GridColumn<LigandTotal>[] => [
+/** Total of a ligand as the plan names it, and what its grams are grams of. @param expected  ligands of the plan
+ *  @param sulfateReduction  of the plan: its S is all sulfur, weighed as S */
+export const ligandColumns = (expected: readonly string[], sulfateReduction: boolean): GridColumn<LigandTotal>[] => [
   {
     id: "component",
     kind: "text",
@@ -51,6 +52,8 @@ export const ligandColumns = (expected: readonly string[]): GridColumn<LigandTot
     label: "weighed as",
     width: "6em",
     show: ({ component, value: { unit } }) =>
-      component.trim() === "" || unit === "mol/L" ? null : <Formula formula={weighedAs(component.trim(), false)} />,
+      component.trim() === "" || unit === "mol/L" ? null : (
+        <Formula formula={weighedAs(component.trim(), sulfateReduction)} />
+      ),
   },
 ];
