@@ -9,6 +9,7 @@ import { coupleAt } from "../setpoint/couple";
 import { setPointOf } from "../setpoint/setPoint";
 import type { Outline, Point, SetPoint } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
+import { atOnce, type InTurns } from "../turns";
 import type { OnProgress } from "./search";
 import { borderMove, borderOf, ruleTemperatures, smoothStretches } from "./temperatures";
 
@@ -66,13 +67,23 @@ export const MOST_TEMPERATURES = 129;
  *  @param gammas  of the plan: tenors by Davies without a range become activities anew at every temperature
  *  @returns  outlines with set points (margin in control bands), and what was checked
  *  @source  docs/method.md, section 7 */
-export function robustWindow(
+export const robustWindow = (
   problem: Problem,
   ranges: Ranges,
   data: ChemicalData,
   onProgress?: OnProgress,
   gammas?: Gammas,
-): Outcome<Robust> {
+): Outcome<Robust> => atOnce(robustInTurns(problem, ranges, data, onProgress, gammas));
+
+/** The same, a temperature a turn.
+ *  @param problem, ranges, data, onProgress, gammas  as `robustWindow`     @returns  as `robustWindow`     @source  as `robustWindow` */
+export function* robustInTurns(
+  problem: Problem,
+  ranges: Ranges,
+  data: ChemicalData,
+  onProgress?: OnProgress,
+  gammas?: Gammas,
+): InTurns<Outcome<Robust>> {
   const bad = badRange(ranges);
   if (bad) return bad;
   const activities: { metal: string; at: number; why: string }[] = [];
@@ -111,6 +122,7 @@ export function robustWindow(
   for (const t of low === high ? [low] : stretches.flat()) {
     const taken = take(t);
     if (!taken.ok) return taken;
+    yield;
   }
   let border = borderOf(ground ?? []);
   // breadth first, so that what is left undone at the end is spread over the range
@@ -121,6 +133,7 @@ export function robustWindow(
       const middle = (from + to) / 2;
       const taken = take(middle);
       if (!taken.ok) return taken;
+      yield;
       const now = borderOf(ground ?? []);
       const still = borderMove(border, now, SETTLED) < 1 ? quiet + 1 : 0;
       border = now;

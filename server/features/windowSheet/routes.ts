@@ -4,10 +4,11 @@ import { windowSheetQuery } from "../../../shared/schemas/plan";
 import type { Deps } from "../../deps";
 import { file } from "../../http/answer";
 import { Refusal } from "../../http/refusal";
+import { lettingOthers } from "../../http/lettingOthers";
 import { route } from "../../http/route";
 import { revisionOf, storedPlan } from "../plans/rows";
 import { windowSheet } from "./page";
-import { probeScale, workOf } from "./work";
+import { probeScale, workInTurns } from "./work";
 
 const fileName = (name: string): string =>
   name
@@ -36,12 +37,13 @@ export const windowSheetRoutes = ({ db, chemistry }: Deps) => [
       const unknown = query.reach?.find((id) => !reagentById.has(id));
       if (unknown !== undefined)
         throw new Refusal("INVALID_INPUT", "reach", `No oxidant, reductant or cementing metal is called "${unknown}".`);
-      const work = workOf(plan, revision, data, {
+      const asked = workInTurns(plan, revision, data, {
         probe,
         window: query.window,
         gases: query.gases,
         reach: query.reach,
       });
+      const work = await lettingOthers(asked);
       if (!work.ok) throw Refusal.from(work.error);
       return file(await windowSheet(work.value), {
         "Content-Type": "application/pdf",

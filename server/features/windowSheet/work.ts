@@ -1,5 +1,5 @@
 import { adviceGaps, type ConflictGap } from "../../../shared/advice/openings";
-import { robustWindow, type Robust } from "../../../shared/advice/robust";
+import { robustInTurns, type Robust } from "../../../shared/advice/robust";
 import { freeAcid, FREE_ACID_BELOW, type FreeAcid } from "../../../shared/activity/freeAcid";
 import { analyse } from "../../../shared/analysis";
 import { referencePotential } from "../../../shared/electrodes/convert";
@@ -9,6 +9,7 @@ import type { HazardGas } from "../../../shared/hazards/gases";
 import { sharesGround } from "../../../shared/hazards/reachesWindow";
 import { hazardRegions, type HazardMap, type HazardRegion } from "../../../shared/hazards/regions";
 import { cautionsFor, hazardContext, type Caution } from "../../../shared/hazards/rules";
+import { ok, type Outcome } from "../../../shared/outcome";
 import { toProblem } from "../../../shared/plan/toProblem";
 import { rangesOf } from "../../../shared/plan/rangesOf";
 import { usualReagents } from "../../../shared/reach/reach";
@@ -20,6 +21,7 @@ import { heldSetPoint, type HeldSetPoint } from "../../../shared/setpoint/held";
 import { solve } from "../../../shared/solve";
 import type { Solution, Window } from "../../../shared/solution";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
+import { atOnce, type InTurns } from "../../../shared/turns";
 import { kelvin } from "../../../shared/units";
 import { limitSentences, namingOf, type LimitSentence, type Naming } from "../../../shared/windows/limitWords";
 import { celsius } from "../../../shared/words/numbers";
@@ -109,11 +111,11 @@ function gradesOf(data: ChemicalData, { fields, temperatureC }: Solution, window
     .map(({ id, grade, limits: on }) => ({ id, grade, limits: on }));
 }
 
-function robustOf(problem: Problem, inputs: PlanInputs, data: ChemicalData): SheetWork["robust"] {
+function* robustOf(problem: Problem, inputs: PlanInputs, data: ChemicalData): InTurns<SheetWork["robust"]> {
   const asking = problem.metals.filter((m) => m.requirement !== "free").map((m) => m.element);
   const over = rangesOf(inputs.ranges, asking);
   if (over === null) return null;
-  const found = robustWindow(problem, over, data, undefined, inputs);
+  const found = yield* robustInTurns(problem, over, data, undefined, inputs);
   return found.ok ? found.value : { failed: found.error.message };
 }
 
@@ -126,14 +128,14 @@ export interface SheetWishes {
   reach?: readonly string[] | undefined;
 }
 
-/** Solves a revision once more and gathers what its sheet says.
+/** Solves a revision once more and gathers what its sheet says; over ranges a temperature a turn, so that others are answered meanwhile.
  *  @returns  the work; a failure where the inputs cannot be solved with the library */
-export function workOf(
+export function* workInTurns(
   plan: SheetWork["plan"],
   revision: RevisionRow,
   data: ChemicalData,
   { probe = null, window: wanted = 0, gases, reach = usualReagents(revision.inputs) }: SheetWishes = {},
-) {
+): InTurns<Outcome<SheetWork>> {
   const { inputs } = revision;
   const problem = toProblem(inputs, data);
   const solved = solve(problem, data, { shutGround: true });
@@ -165,7 +167,7 @@ export function workOf(
     hazards,
     drawnGases: gases ? (hazards?.regions.filter((r) => gases.includes(r.gas)) ?? []) : reachingGases,
     reachingGases,
-    robust: robustOf(problem, inputs, data),
+    robust: yield* robustOf(problem, inputs, data),
     reach: window ? reachAnswers(data, window, inputs, reach) : [],
     reactions: setPoint ? planReactions(problem, data, inputs, solution, setPoint) : [],
     cautions: cautionsFor(hazardContext(inputs, setPoint)),
@@ -173,5 +175,8 @@ export function workOf(
     acid: freeAcidAt(data, revision, window),
     probe,
   };
-  return { ok: true as const, value: work };
+  return ok(work);
 }
+
+/** The same at once, for those who have nobody waiting. */
+export const workOf = (...asked: Parameters<typeof workInTurns>): Outcome<SheetWork> => atOnce(workInTurns(...asked));
