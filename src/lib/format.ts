@@ -1,3 +1,4 @@
+import { typedFigures } from "../../shared/words/tenor";
 import { significantPlain, trueMinus, withUnit } from "../../shared/words/numbers";
 
 export {
@@ -20,8 +21,7 @@ export const inputText = (x: number, figures = 2): string => {
 
 /** Activities and tenors as inputs show them: at least `figures` figures, and all the user typed up to six. */
 export const inputTextExact = (x: number, figures = 2): string => {
-  const typed = Number(x.toPrecision(6)).toExponential().replace(/e.*/, "").replace(/[-.]/g, "").length;
-  return inputText(x, Math.max(figures, typed));
+  return inputText(x, typedFigures(x, figures));
 };
 
 export type Parsed = { ok: true; value: number } | { ok: false; message: string };

@@ -1,6 +1,7 @@
 import { askedOf } from "../../shared/hazards/excluded";
 import { keptWords } from "../../shared/hazards/words";
 import type { OverallChoice, PlanInputs, PlanMetal, PlanTotal } from "../../shared/schemas/plan";
+import { tenorText } from "../../shared/words/tenor";
 import { fixed, MINUS, significant, withUnit } from "./format";
 import { amountWord, lixiviantName, requirementWord, solidsBasisWord, waterBoundWord } from "./planWords";
 
@@ -15,13 +16,15 @@ export interface PlanChange {
 interface Figures {
   sig: (x: number, figures?: number) => string;
   fix: (x: number, digits: number) => string;
+  /** g/L */
+  tenor: (x: number) => string;
 }
-const rounded: Figures = { sig: significant, fix: fixed };
+const rounded: Figures = { sig: significant, fix: fixed, tenor: tenorText };
 const inFull = (x: number) => String(Number(x.toPrecision(15))).replaceAll("-", MINUS);
-const full: Figures = { sig: inFull, fix: inFull };
+const full: Figures = { sig: inFull, fix: inFull, tenor: (x) => withUnit(inFull(x), "g/L") };
 
-export const metalText = (m: PlanMetal, { sig } = rounded): string => {
-  const amount = m.entry === "gPerL" ? withUnit(sig(m.value, 3), "g/L") : sig(m.value);
+export const metalText = (m: PlanMetal, { sig, tenor } = rounded): string => {
+  const amount = m.entry === "gPerL" ? tenor(m.value) : sig(m.value);
   const gamma = m.gammaFrom === "typed" && m.gamma !== null ? `, gamma ${sig(m.gamma)}` : "";
   const davies = m.gammaFrom === "davies" ? ", gamma by Davies" : "";
   return `${m.role}, ${requirementWord[m.requirement]}, ${amountWord(m)} ${amount}${gamma}${davies}`;

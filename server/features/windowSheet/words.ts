@@ -3,6 +3,7 @@ import { needsPhase, speciesParts } from "../../../shared/species/parts";
 import { typeset } from "../../../shared/species/typeset";
 import type { ReactionTerm } from "../../../shared/solution";
 import { fixed, MINUS, scientificParts, THIN_SPACE } from "../../../shared/words/numbers";
+import { tenorParts } from "../../../shared/words/tenor";
 import type { Inline, Piece } from "./pen";
 
 /** A formula with true sub- and superscripts. */
@@ -39,6 +40,12 @@ export function quantity(value: number, unit = "", figures = 2): Inline {
         ],
     unit === "" ? "" : `${THIN_SPACE}${unit}`,
   ];
+}
+
+/** A tenor in the unit the trade would take. */
+export function tenor(gPerL: number, figures = 3): Inline {
+  const { text, unit } = tenorParts(gPerL, figures);
+  return [{ text, face: "mono" }, `${THIN_SPACE}${unit}`];
 }
 
 const amount = (n: number): string =>

@@ -6,6 +6,7 @@ import { solve } from "../../../shared/solve";
 import { marginWords } from "../../../shared/windows/limitWords";
 import { ligandWord } from "../../../shared/words/componentWord";
 import type { ChemicalData } from "../../../shared/species/chemicalData";
+import { tenorInput } from "../../../shared/words/tenor";
 import { Check } from "../../components/choice";
 import { SpeciesName } from "../../components/Formula";
 import { FormulaText } from "../../components/FormulaText";
@@ -164,7 +165,7 @@ function MetalRow({
         label={`Tenor of ${element}`}
         layout="bare"
         value={gPerL}
-        show={(x) => inputText(x, 3)}
+        show={(x) => tenorInput(Number(x.toPrecision(3)), 3)}
         onCommit={(next) => edit({ gPerL: next })}
         unit="g/L"
         above={0}

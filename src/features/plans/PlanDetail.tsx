@@ -1,5 +1,6 @@
 import { useState } from "react";
 import type { PlanMetal, PlanRow } from "../../../shared/schemas/plan";
+import { tenorText } from "../../../shared/words/tenor";
 import { Button, ButtonLink } from "../../components/Button";
 import { DataChanged } from "../../components/DataChanged";
 import { Term } from "../../components/Help";
@@ -117,7 +118,11 @@ function Amount({ metal }: { metal: PlanMetal }) {
       <span className="font-sans text-sm text-muted">
         <Term word={amountTerm[amountWord(metal)]}>{amountWord(metal)}</Term>{" "}
       </span>
-      <Quantity value={metal.value} {...(metal.entry === "gPerL" ? { unit: "g/L", figures: 3 } : {})} />
+      {metal.entry === "gPerL" ? (
+        <span className="font-mono whitespace-nowrap">{tenorText(metal.value)}</span>
+      ) : (
+        <Quantity value={metal.value} />
+      )}
     </>
   );
 }

@@ -51,7 +51,7 @@ test("says which requirements clash, by how much, and offers what helps first", 
   expect(section.textContent).toContain("none opens a window; looked over 0 to 250 C");
   expect(section.textContent).toContain("Tenor of iron");
   expect(section.textContent?.indexOf("iron solid")).toBeLessThan(section.textContent?.indexOf("Temperature") ?? 0);
-  fireEvent.click(screen.getByRole("button", { name: /Set 2\.00e.8.g\/L/ }));
+  fireEvent.click(screen.getByRole("button", { name: /Set 0\.0200.µg\/L/ }));
   expect(onApply).toHaveBeenCalledWith(iron);
 });
 

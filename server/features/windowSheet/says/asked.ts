@@ -14,7 +14,7 @@ import {
 } from "../../../../shared/words/planWords";
 import type { Inline } from "../pen";
 import type { SheetWork } from "../work";
-import { formula, joined, prose, quantity, speciesName } from "../words";
+import { formula, joined, prose, quantity, speciesName, tenor } from "../words";
 import { bold, inSans, volts } from "./style";
 
 const gammaWord = { one: " taken as 1", davies: " by Davies", typed: " typed" } as const;
@@ -26,16 +26,14 @@ export function metalSays(metal: PlanMetal, { solution, naming }: SheetWork, bri
   const asks = metal.requirement === "free" ? "watched" : requirementWord[metal.requirement];
   const [activity, gamma] = [solved?.activity ?? metal.value, fixed(solved?.gamma ?? 1, 2)];
   if (brief) {
-    const tenor: Inline = metal.entry === "activity" ? "" : [quantity(metal.value, "g/L"), ` γ\u00a0${gamma}: `];
+    const typed: Inline = metal.entry === "activity" ? "" : [tenor(metal.value, 2), ` γ\u00a0${gamma}: `];
     const word = metal.role === "watched" ? "" : `, ${amountWord(metal)}`;
-    return [bold(metal.element), " ", bold(asks), `${word} `, inSans([tenor, quantity(activity)])];
+    return [bold(metal.element), " ", bold(asks), `${word} `, inSans([typed, quantity(activity)])];
   }
-  const tenor: Inline =
-    metal.entry === "activity"
-      ? ""
-      : [quantity(metal.value, "g/L", 3), `, γ\u00a0${gamma}${gammaWord[metal.gammaFrom]}: `];
+  const typed: Inline =
+    metal.entry === "activity" ? "" : [tenor(metal.value), `, γ\u00a0${gamma}${gammaWord[metal.gammaFrom]}: `];
   const name = ` ${naming.metalName(metal.element)}, ${metal.role === "watched" ? "" : `${metal.role}, `}`;
-  return [bold(metal.element), name, bold(asks), `; ${amountWord(metal)} `, tenor, quantity(activity), " activity"];
+  return [bold(metal.element), name, bold(asks), `; ${amountWord(metal)} `, typed, quantity(activity), " activity"];
 }
 
 /** The band of pH as it was typed: in pH, or as free acid. */
@@ -53,7 +51,7 @@ export function inputsSay({ revision: { inputs }, data }: SheetWork): [string, I
     unit === "g/L"
       ? [
           " (",
-          quantity(activity * gramsPerMole(data, component, inputs.sulfateReduction), "g/L", 3),
+          tenor(activity * gramsPerMole(data, component, inputs.sulfateReduction)),
           " as ",
           formula(weighedAs(component, inputs.sulfateReduction)),
           ")",

@@ -4,6 +4,7 @@ import type { Planned } from "../../../../shared/schemas/trialRecord";
 import type { Solution } from "../../../../shared/solution";
 import { tenorOfLine } from "../../../../shared/trials/comparable";
 import { couldCarry } from "../../../../shared/trials/couldCarry";
+import { tenorInput } from "../../../../shared/words/tenor";
 import { fixed, inputTextExact, withUnit } from "../../../lib/format";
 import type { SolvedRevision } from "../../../lib/solvedRevision";
 import type { TrialValues } from "./trialValues";
@@ -57,7 +58,7 @@ export function plannedFromPlan(
         electrodeTemperature: { text: "", unit: "C" },
       },
     }),
-    ...(tenor !== null && { tenor: { text: typed(tenor), unit: "g/L" } }),
+    ...(tenor !== null && { tenor: { text: tenorInput(Number(tenor.toPrecision(3))), unit: "g/L" } }),
     ligands: inputs.ligands.map(({ component, activity }) => ({
       component,
       value: { text: typed(activity), unit: "mol/L" },

@@ -4,6 +4,7 @@ import type { Advice, ConflictGap, Opening } from "../../../../shared/advice/ope
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import { keptWords, pressureWords } from "../../../../shared/hazards/words";
 import { type Demand, demandName, type Solution } from "../../../../shared/solution";
+import { tenorText } from "../../../../shared/words/tenor";
 import { Button } from "../../../components/Button";
 import { Formula } from "../../../components/Formula";
 import { MethodLink } from "../../../components/SourceLink";
@@ -291,7 +292,8 @@ function Amount({
   if (typeof of === "string") return <b className="font-normal text-ink">{of}</b>;
   const text = opening.change === "temperature" ? celsius(of, 1) : significant(of, 3);
   const unit = unitOf(opening, inputs);
-  return <span className="font-mono whitespace-nowrap">{unit ? withUnit(text, unit) : text}</span>;
+  const said = unit === "g/L" ? tenorText(of, 3) : unit ? withUnit(text, unit) : text;
+  return <span className="font-mono whitespace-nowrap">{said}</span>;
 }
 
 /** How much that is: 40 times less, 12 K warmer. */
@@ -316,5 +318,6 @@ function actionWords(opening: Opening, inputs: Pick<PlanInputs, "metals">): stri
   if (typeof to === "string") return `Take ${to}`;
   if (change === "temperature") return `Set ${celsius(to ?? 0, 1)}`;
   const unit = unitOf(opening, inputs);
+  if (unit === "g/L") return `Set ${tenorText(to ?? 0, 3)}`;
   return `Set ${withUnit(significant(to ?? 0, 3), unit ?? "")}`.trim();
 }

@@ -2,6 +2,7 @@ import { DAVIES_LIMIT } from "../../../../shared/activity/davies";
 import { gammaOf } from "../../../../shared/plan/toProblem";
 import type { PlanMetal } from "../../../../shared/schemas/plan";
 import { type Requirement, requirements, roles } from "../../../../shared/schemas/problem";
+import { tenorInput, tenorText } from "../../../../shared/words/tenor";
 import { Button } from "../../../components/Button";
 import { Segmented } from "../../../components/choice";
 import { Term } from "../../../components/Help";
@@ -74,7 +75,7 @@ export default function MetalEditor({
         value={metal.value}
         readOnly={readOnly}
         {...(metal.entry === "gPerL"
-          ? { min: 1e-4, max: 200, typedMax: 1000, unit: "g/L" }
+          ? { min: 1e-4, max: 200, typedMax: 1000, unit: "g/L", show: tenorInput }
           : { min: 1e-8, max: 10, typedMax: 100, noun: "activity" })}
         onChange={(value) => change({ value }, about)}
         onCommit={settle}
@@ -135,9 +136,9 @@ function AsTenor({ metal: { element, value } }: { metal: PlanMetal }) {
   if (molar === undefined) return null;
   return (
     <Note className="py-1">
-      An activity, not a total. At γ = 1 it is <Quantity value={value * molar} unit="g/L" /> of {element}; at γ = 0.1,{" "}
-      <Quantity value={value * molar * 10} unit="g/L" />. In sulfate liquors above 0.1 mol/L take 0.05 to 0.2 of the
-      tenor (<MethodLink to="activity">why</MethodLink>).
+      An activity, not a total. At γ = 1 it is {tenorText(value * molar, 2)} of {element}; at γ = 0.1,{" "}
+      {tenorText(value * molar * 10, 2)}. In sulfate liquors above 0.1 mol/L take 0.05 to 0.2 of the tenor (
+      <MethodLink to="activity">why</MethodLink>).
     </Note>
   );
 }

@@ -1,11 +1,12 @@
 import { lazy, Suspense, useState } from "react";
 import type { PlanMetal } from "../../../../shared/schemas/plan";
+import { tenorText, typedFigures } from "../../../../shared/words/tenor";
 import { MetalName } from "../../../components/MetalLine";
 import { Select } from "../../../components/Select";
 import { Note, SectionHead } from "../../../components/text";
 import { Term } from "../../../components/Help";
 import { classes } from "../../../lib/classes";
-import { inputTextExact, withUnit } from "../../../lib/format";
+import { inputTextExact } from "../../../lib/format";
 import { metalOptions } from "../../../lib/metals";
 import { amountWord, requirementWord } from "../../../lib/planWords";
 import { cssMetalColour, hatchesOf, shuts } from "../../../map/metalStyle";
@@ -65,7 +66,7 @@ export function MetalsSection() {
 }
 
 const amount = (m: PlanMetal): string =>
-  m.entry === "gPerL" ? withUnit(inputTextExact(m.value), "g/L") : inputTextExact(m.value);
+  m.entry === "gPerL" ? tenorText(m.value, typedFigures(m.value)) : inputTextExact(m.value);
 
 function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean; onToggle: () => void }) {
   const { inputs, focus, onFocus } = useAsking();

@@ -1,6 +1,7 @@
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import { isLogarithmic, settingOf, type Varied } from "../../../../shared/whatif/vary";
 import { amountWord } from "../../../../shared/words/planWords";
+import { tenorText, typedFigures } from "../../../../shared/words/tenor";
 import { celsius, inputText, significant, withUnit } from "../../../lib/format";
 
 /** "temperature", "Fe, at most", "S, total activity": what is varied. */
@@ -27,7 +28,8 @@ export function settingUnit(inputs: PlanInputs, varied: Varied): string {
 /** A setting as prose writes it: "71.3 °C", "2.0e−4". */
 export function settingText(inputs: PlanInputs, varied: Varied, at: number, figures = 3): string {
   if (varied.kind === "temperature") return celsius(at, figures > 3 ? 2 : 1);
-  return withUnit(significant(at, figures), settingUnit(inputs, varied));
+  const unit = settingUnit(inputs, varied);
+  return unit === "g/L" ? tenorText(at, figures) : withUnit(significant(at, figures), unit);
 }
 
 /** How a setting taken from a picture is written into the plan: as coarse as a hand would type it. */
@@ -41,5 +43,7 @@ export const settingKey = (varied: Varied): string =>
 /** The setting as it stands, for a list: "60 °C". */
 export function standing(inputs: PlanInputs, varied: Varied): string {
   const at = settingOf(inputs, varied);
-  return at === null ? "" : withUnit(inputText(at), settingUnit(inputs, varied));
+  const unit = settingUnit(inputs, varied);
+  if (at === null) return "";
+  return unit === "g/L" ? tenorText(at, typedFigures(at)) : withUnit(inputText(at), unit);
 }
