@@ -35,7 +35,7 @@ function HelpButton({ title, trigger, word, children }: HelpButtonProps) {
         type="button"
         aria-haspopup="dialog"
         aria-expanded={Sheet !== null}
-        className="cursor-help rounded-sm text-left underline decoration-muted decoration-dotted underline-offset-3 hover:decoration-ink"
+        className="touch-word cursor-help rounded-sm text-left underline decoration-muted decoration-dotted underline-offset-3 hover:decoration-ink"
         aria-label={`${title}: what is this?`}
         title={failed ? lateFailure : undefined}
         onClick={Sheet ? close : open}

@@ -127,7 +127,7 @@ export function NumberField(props: NumberFieldProps) {
         style={{ width: `${width}ch` }}
         className={classes(
           layout === "stacked" ? "h-8" : "h-6",
-          "rounded-sm border bg-sheet px-1 text-right font-mono text-base disabled:opacity-60",
+          "rounded-sm border bg-sheet px-1 text-right font-mono text-base disabled:opacity-60 pointer-coarse:min-h-11",
           message !== null ? "border-signal" : "border-rule hover:border-muted",
         )}
       />

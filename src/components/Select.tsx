@@ -58,7 +58,7 @@ export function Select<Value extends string>(props: SelectProps<Value>) {
     "aria-invalid": Boolean(error),
     "data-cell": props.cell,
     className: classes(
-      "inline-flex h-6 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
+      "inline-flex h-6 pointer-coarse:min-h-11 min-w-0 items-center font-sans justify-between gap-2 rounded-sm border bg-sheet px-2 text-left text-base disabled:opacity-60",
       layout === "stacked" && "h-8! w-full",
       error ? "border-signal" : "border-rule hover:border-muted",
     ),

@@ -140,7 +140,7 @@ interface TrackProps {
 function Track({ label, position, low, high, step, marks, said, onMove, onRest }: TrackProps) {
   return (
     <Radix.Root
-      className="relative flex h-5 w-full touch-none items-center select-none"
+      className="relative flex h-5 w-full pointer-coarse:h-11 touch-none items-center select-none"
       value={[position]}
       min={low}
       max={high}
@@ -161,7 +161,7 @@ function Track({ label, position, low, high, step, marks, said, onMove, onRest }
       <Radix.Thumb
         aria-label={`${label}, slider`}
         aria-valuetext={said}
-        className="block h-4 w-2 rounded-sm bg-verdigris"
+        className="block h-4 w-2 rounded-sm bg-verdigris pointer-coarse:h-7 pointer-coarse:w-4"
       />
     </Radix.Root>
   );

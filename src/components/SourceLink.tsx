@@ -11,7 +11,7 @@ export const MethodLink = memo(function MethodLink({ to, children }: { to: Sourc
   return (
     <Link
       to={sourcePath(to)}
-      className={`no-print whitespace-nowrap ${quiet}`}
+      className={`touch-word no-print whitespace-nowrap ${quiet}`}
       {...(children === undefined
         ? { "aria-label": `The ${document}: ${words}`, title: `The ${document}: ${words}` }
         : {})}

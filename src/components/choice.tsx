@@ -40,7 +40,7 @@ export function Segmented<Value extends string>({
           value={option.value}
           disabled={option.disabled ?? false}
           title={option.title}
-          className="h-6 border-l border-ink px-2 text-sm whitespace-nowrap first:border-l-0 hover:bg-tint focus-visible:z-10 disabled:opacity-50 data-[state=on]:bg-ink data-[state=on]:font-bold data-[state=on]:text-paper"
+          className="h-6 pointer-coarse:min-h-11 pointer-coarse:min-w-11 border-l border-ink px-2 text-sm whitespace-nowrap first:border-l-0 hover:bg-tint focus-visible:z-10 disabled:opacity-50 data-[state=on]:bg-ink data-[state=on]:font-bold data-[state=on]:text-paper"
         >
           {option.label}
         </ToggleGroup.Item>
@@ -72,7 +72,7 @@ export function Tabs<Value extends string>({
             key={panel.value}
             value={panel.value}
             disabled={panel.disabled ?? false}
-            className="-mb-px border-b-[3px] border-transparent px-0 py-1 text-sm whitespace-nowrap data-[state=active]:border-verdigris data-[state=active]:font-bold"
+            className="-mb-px border-b-[3px] border-transparent px-0 py-1 text-sm whitespace-nowrap pointer-coarse:min-h-11 pointer-coarse:min-w-11 data-[state=active]:border-verdigris data-[state=active]:font-bold"
           >
             {panel.label}
           </RadixTabs.Trigger>
@@ -113,8 +113,8 @@ export function Check({
 }) {
   const id = useId();
   return (
-    <div className="py-1">
-      <div className="flex items-baseline gap-2">
+    <div className="py-1 pointer-coarse:py-0">
+      <div className="flex items-baseline gap-2 pointer-coarse:items-center pointer-coarse:gap-0">
         <input
           id={id}
           type="checkbox"
@@ -122,9 +122,9 @@ export function Check({
           checked={checked}
           disabled={disabled}
           onChange={(event) => onChange(event.target.checked)}
-          className="relative top-0.5 h-3.5 w-3.5 shrink-0 accent-verdigris"
+          className="relative top-0.5 h-3.5 w-3.5 shrink-0 pointer-coarse:top-0 accent-verdigris pointer-coarse:h-5 pointer-coarse:w-5"
         />
-        <label htmlFor={id} className="min-w-0">
+        <label htmlFor={id} className="min-w-0 pointer-coarse:py-3 pointer-coarse:pl-3">
           {children}
         </label>
       </div>

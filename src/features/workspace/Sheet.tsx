@@ -18,7 +18,7 @@ export function Sheet({
   return (
     <div
       style={height}
-      className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(var(--map),62dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:flex print:flex-col"
+      className="grid min-h-0 flex-1 grid-cols-2 grid-rows-[minmax(var(--map),62dvh)_auto] max-lg:pointer-coarse:grid-rows-[minmax(calc(var(--map)+48px),68dvh)_auto] lg:h-full lg:grid-cols-[264px_minmax(0,1fr)_290px] lg:grid-rows-1 print:flex print:flex-col"
     >
       <div className="order-2 border-r border-rule pr-4 pl-5 pt-3 pb-8 lg:order-1 lg:min-h-0 lg:overflow-y-auto print:order-3 print:border-0 print:columns-2 print:[&_section]:break-inside-avoid">
         {asks}

@@ -11,8 +11,9 @@ import type { AnchoredText } from "../texts";
 import { edgesOf } from "../traces/kept";
 import type { ShownRange } from "../traces/practice";
 import type { MapView } from "../view";
+import { typeSize } from "../typeSize";
 
-const SMALL_SIZE = 10;
+const SMALL_SIZE = typeSize(10);
 
 /** The points of lines in sight that are nearest to some shares of the map's width. */
 function onLines(lines: readonly (readonly Point[])[], { visible: { pH, Eh } }: MapView, shares: number[]): Point[] {

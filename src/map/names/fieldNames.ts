@@ -7,11 +7,12 @@ import { plainText, speciesText, textWidth } from "../speciesText";
 import type { TextLine } from "../texts";
 import { BEYOND, isBeyond } from "../trust";
 import { drawnMetals, type MapMetal, type MapView, windowName } from "../view";
+import { typeSize } from "../typeSize";
 
-export const NAME_SIZE = 11;
+export const NAME_SIZE = typeSize(11);
 const LINE_HEIGHT = 15;
-const WINDOW_SIZE = 13;
-const NOTE_SIZE = 10;
+const WINDOW_SIZE = typeSize(13);
+const NOTE_SIZE = typeSize(10);
 
 /** A name that asks for room in a field, and how it is to be set. */
 export interface NameWish extends LabelWish {

@@ -5,12 +5,13 @@ import { plainText, textWidth } from "../speciesText";
 import type { MapView } from "../view";
 import { acidTicks } from "./acidTicks";
 import { SvgText } from "./SvgText";
+import { typeSize } from "../typeSize";
 
 /** px below the map: the line of the second row, the foot of its ticks, the middle of its numbers */
 const LINE = 24;
 const TICK = 29;
 const NUMBERS = 37;
-const SIZE = 11;
+const SIZE = typeSize(11);
 const title = [...plainText("free acid, g/L "), ...typeset("H2SO4")];
 
 /** The second row under the pH axis: free acid where pH is below 1.5, as far as the sulfate of the liquor balances it. */

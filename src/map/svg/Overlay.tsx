@@ -16,6 +16,7 @@ import { limitMarks } from "./stripModel";
 import { Strips } from "./Strips";
 import { SvgText } from "./SvgText";
 import { TrialMarks } from "./TrialMarks";
+import { typeSize } from "../typeSize";
 
 export interface OverlayProps {
   content: MapContent;
@@ -88,7 +89,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
       </g>
       <SvgText
         label="axis pH"
-        lines={[{ parts: plainText(`pH at ${content.solution.temperatureC} °C`), size: 11 }]}
+        lines={[{ parts: plainText(`pH at ${content.solution.temperatureC} °C`), size: typeSize(11) }]}
         x={box.x1}
         y={box.y1 + 33}
         anchor="end"
@@ -96,7 +97,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
       />
       <SvgText
         label="axis Eh"
-        lines={[{ parts: plainText(`Eh / ${scale.unit} vs ${scale.short}`), size: 11 }]}
+        lines={[{ parts: plainText(`Eh / ${scale.unit} vs ${scale.short}`), size: typeSize(11) }]}
         x={box.x0 - 50}
         y={(box.y0 + box.y1) / 2}
         turned

@@ -4,6 +4,7 @@ import { fromTop, mapPixels, type Sheet } from "../boxes";
 import { plainText, textWidth } from "../speciesText";
 import type { MapView } from "../view";
 import { SvgText } from "./SvgText";
+import { typeSize } from "../typeSize";
 
 export interface ReachBar {
   /** practical range inside what is in sight, V vs SHE; null where there is none on record or in sight */
@@ -49,7 +50,7 @@ export function ReachBars({
   return (
     <g data-reach="" stroke={colours.water} fill="none">
       <SvgText
-        lines={[{ parts: plainText("reach"), size: 11 }]}
+        lines={[{ parts: plainText("reach"), size: typeSize(11) }]}
         x={(box.x0 + box.x1) / 2}
         y={box.y0 - 9}
         colour={colours.muted}
@@ -71,9 +72,9 @@ export function ReachBars({
             )}
             {solid && <path d={`M${x} ${y(solid[0])}V${y(solid[1])}`} strokeWidth={6} />}
             <SvgText
-              lines={[{ parts: name, size: 11 }]}
+              lines={[{ parts: name, size: typeSize(11) }]}
               x={x}
-              y={box.y1 + 8 + textWidth(name, 11) / 2}
+              y={box.y1 + 8 + textWidth(name, typeSize(11)) / 2}
               colour={colours.ink}
               halo={colours.paper}
               turned

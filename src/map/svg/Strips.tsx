@@ -6,6 +6,7 @@ import { plainText, speciesText, textWidth } from "../speciesText";
 import { isDrawn, type MapView } from "../view";
 import { type Crosscut, differingStretches, type Direction, type LimitMark } from "./stripModel";
 import { SvgText } from "./SvgText";
+import { typeSize } from "../typeSize";
 
 export interface StripsProps {
   direction: Direction;
@@ -22,7 +23,7 @@ export interface StripsProps {
 
 /** size of the names by the thickness of a strip; null: too thin for a name */
 const nameSize = (thickness: number): number | null =>
-  thickness >= 17 ? 11 : thickness >= 13 ? 10 : thickness >= 10 ? 9 : null;
+  thickness >= 17 ? typeSize(11) : thickness >= 13 ? 10 : thickness >= 10 ? 9 : null;
 
 /** One strip a metal along pH or along Eh: what is as required tinted, the rest hatched as on the map, the way to the limits beyond
  *  their ends. With a pinned point each metal has two, and a bar between them where they differ. */
@@ -55,7 +56,7 @@ export function Strips({ direction, cuts: all, through, pinned, marks, sheet, vi
 
   const strip = (key: string, { metal }: Crosscut, parts: readonly CrosscutPart[], a: number, b: number) => {
     const aside = view.focus !== null && view.focus !== metal.element;
-    const colour = aside ? colours.rule : metal.role === "target" ? metalColour(metal, view) : colours.ink;
+    const colour = aside ? colours.muted : metal.role === "target" ? metalColour(metal, view) : colours.ink;
     const size = nameSize(b - a);
     return (
       <g key={key}>
@@ -100,10 +101,12 @@ export function Strips({ direction, cuts: all, through, pinned, marks, sheet, vi
         return (
           <g key={metal.element}>
             <SvgText
-              lines={[{ parts: plainText(metal.element), size: Math.min(11, Math.max(10, row - 2)), bold: true }]}
+              lines={[
+                { parts: plainText(metal.element), size: Math.min(typeSize(11), Math.max(10, row - 2)), bold: true },
+              ]}
               {...(upright ? { x: middle, y: box.y0 - 9 } : { x: box.x0 - 7, y: middle })}
               anchor={upright ? "middle" : "end"}
-              colour={aside ? colours.rule : metalColour(metal, view)}
+              colour={aside ? colours.muted : metalColour(metal, view)}
             />
             {strip("first", cut, partsOf(cut), a, second ? middle - 1 : b)}
             {second && strip("second", second, partsOf(second), middle + 1, b)}
@@ -138,7 +141,7 @@ export function Strips({ direction, cuts: all, through, pinned, marks, sheet, vi
               strokeDasharray="3 2"
             />
             <SvgText
-              lines={[{ parts: plainText(m.kind === "frame" ? "frame" : m.text), size: 10 }]}
+              lines={[{ parts: plainText(m.kind === "frame" ? "frame" : m.text), size: typeSize(10) }]}
               {...spot(clear(m, marks, at, upright), end + 10)}
               colour={m.kind === "frame" ? colours.muted : colours.verdigris}
               turned={upright}

@@ -115,7 +115,7 @@ export default function NextList(props: NextListProps) {
   const counting = counted(sites.length, "trial");
   return (
     <>
-      <div className="no-print flex items-center justify-between gap-2 py-1.5">
+      <div className="no-print flex flex-wrap items-center justify-between gap-2 py-1.5">
         <span>Trials</span>
         <Segmented
           label="How many"

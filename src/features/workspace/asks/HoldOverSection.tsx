@@ -31,7 +31,7 @@ function RangeRow({
     );
   if (readOnly) return null;
   return (
-    <div className="hairline flex items-baseline justify-between gap-2 py-1">
+    <div className="hairline flex items-baseline justify-between gap-2 py-1 pointer-coarse:py-3">
       <span>{label}</span>
       <Button
         kind="quiet"

@@ -74,14 +74,17 @@ function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean;
   const focused = focus === metal.element;
   const number = inputs.metals.indexOf(metal) + 1;
   return (
-    <div className="flex items-baseline gap-2 py-1">
+    <div className="flex items-baseline gap-2 py-1 pointer-coarse:gap-4 pointer-coarse:py-0">
       <button
         type="button"
         aria-pressed={focused}
         aria-label={`Focus on ${metal.element} on the map`}
         title={`Focus on ${metal.element} (key ${number})`}
         onClick={() => onFocus(focused ? null : metal.element)}
-        className={classes("relative top-0.5 shrink-0", focused && "outline-2 outline-offset-1 outline-verdigris")}
+        className={classes(
+          "touch-word relative top-0.5 shrink-0",
+          focused && "outline-2 outline-offset-1 outline-verdigris",
+        )}
       >
         <Swatch hatch={shuts(metal) ? hatch : null} colour={cssMetalColour(metal)} />
       </button>
@@ -91,7 +94,7 @@ function MetalHead({ metal, open, onToggle }: { metal: PlanMetal; open: boolean;
         onClick={onToggle}
         onPointerEnter={fetchEditor}
         onFocus={fetchEditor}
-        className="flex min-w-0 flex-1 flex-wrap items-baseline justify-between gap-x-2 text-left hover:underline"
+        className="flex min-w-0 flex-1 flex-wrap items-baseline justify-between gap-x-2 text-left hover:underline pointer-coarse:min-h-11 pointer-coarse:py-3"
       >
         <span className="whitespace-nowrap">
           <MetalName {...metal} />{" "}

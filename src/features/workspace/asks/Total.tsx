@@ -26,7 +26,8 @@ export function Total({ list, component, activity, unit }: PlanTotal & { list: "
   const inGrams = unit === "g/L";
   const perMole = inGrams ? gramsPerMole(data, component, inputs.sulfateReduction) : 1;
   const formula = weighedAs(component, inputs.sulfateReduction);
-  const quiet = "mr-3 h-auto! text-xs! font-normal! text-muted";
+  const quiet =
+    "mr-3 h-auto! text-xs! font-normal! text-muted after:hidden pointer-coarse:min-h-11 pointer-coarse:pr-3 pointer-coarse:text-sm!";
   return (
     <LogSlider
       label={`Total of ${component}`}
