@@ -194,7 +194,7 @@ function temperatureKnob(problem: Problem, data: ChemicalData, gammas?: Gammas):
   const { min, max } = TEMPERATURE_RANGE_C;
   const from = problem.temperatureC;
   return {
-    base: { change: "temperature", from, searched: `${min} to ${max} C in steps of ${KELVIN_STEP} K` },
+    base: { change: "temperature", from, searched: `${min} to ${max} °C in steps of ${KELVIN_STEP} K` },
     walk: { from, low: min, high: max, step: KELVIN_STEP },
     at: atTemperature(problem, gammas, data),
     value: (x) => x,

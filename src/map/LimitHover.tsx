@@ -2,7 +2,7 @@ import { type ReactNode, useEffect } from "react";
 import type { Frame } from "../../shared/schemas/problem";
 import type { Point } from "../../shared/solution";
 import type { ThemeColours } from "../lib/theme";
-import { mapPixels, type Sheet } from "./boxes";
+import { mapPixels, type Sheet, type SheetBox } from "./boxes";
 import { type CursorStore, useCursor } from "./cursorStore";
 import type { LimitStore } from "./limitStore";
 import { useTold } from "./trialStore";
@@ -17,8 +17,9 @@ export interface NamedLimit {
   words: ReactNode;
 }
 
-/** px from an edge that still mean it */
+/** px from an edge that still mean it: of a pointer, and of a finger */
 const REACH = 7;
+const FINGER = 22;
 
 function distanceTo(
   [x, y]: readonly [number, number],
@@ -35,16 +36,23 @@ export function nearestLimit(
   limits: readonly NamedLimit[],
   toPixel: (pH: number, Eh: number) => [number, number],
   at: Point,
+  byFinger = false,
 ): NamedLimit | null {
   const here = toPixel(...at);
   let best: NamedLimit | null = null;
-  let least = REACH;
+  let least = byFinger ? FINGER : REACH;
   for (const limit of limits) {
     const distance = distanceTo(here, toPixel(...limit.from), toPixel(...limit.to));
     if (distance < least) [best, least] = [limit, distance];
   }
   return best;
 }
+
+/** Beside a limit that lies out of sight its name stands at the border. */
+const into = ({ x0, y0, x1, y1 }: SheetBox, [x, y]: readonly [number, number]): [number, number] => [
+  Math.min(x1, Math.max(x0, x)),
+  Math.min(y1, Math.max(y0, y)),
+];
 
 interface LimitHoverProps {
   limits: readonly NamedLimit[];
@@ -55,10 +63,12 @@ interface LimitHoverProps {
   colours: ThemeColours;
 }
 
-/** Names the window limit under the cursor and shows where it runs; one that is pointed at in the list is shown as well. */
+/** Names the window limit under the cursor and shows where it runs; one that is pointed at in the list is shown as well. A limit that was
+ *  tapped, or pressed in the list, keeps its name until it is pressed again, something else is tapped or Escape lets it go. */
 export function LimitHover({ limits, store, cursor, sheet, visible, colours }: LimitHoverProps) {
   const at = useCursor(cursor);
   const pointed = useTold(store.pointed);
+  const named = useTold(store.named);
   const { toPixel, box } = mapPixels(sheet, visible);
   const under = at && nearestLimit(limits, toPixel, at);
   const key = under?.key ?? null;
@@ -68,9 +78,20 @@ export function LimitHover({ limits, store, cursor, sheet, visible, colours }: L
   }, [store, key, pointing]);
   useEffect(() => (pointing ? () => store.pointed.set(null) : undefined), [store, pointing]);
 
-  const shown = limits.filter((l) => l.key === (key ?? pointed));
+  useEffect(() => {
+    if (named === null) return;
+    const onKey = (event: KeyboardEvent) => {
+      if (event.key === "Escape") store.named.set(null);
+    };
+    window.addEventListener("keydown", onKey);
+    return () => window.removeEventListener("keydown", onKey);
+  }, [named, store]);
+
+  const keys = under ? [under.key] : [pointed, named?.key];
+  const shown = limits.filter((l) => keys.includes(l.key));
   if (shown.length === 0) return null;
-  const [x, y] = at ? toPixel(...at) : [0, 0];
+  const said = under ?? (named && shown.find((l) => l.key === named.key));
+  const [x, y] = under && at ? toPixel(...at) : named ? into(box, toPixel(...named.at)) : [0, 0];
   const left = x < (box.x0 + box.x1) / 2;
   const above = y > (box.y0 + box.y1) / 2;
   return (
@@ -96,7 +117,7 @@ export function LimitHover({ limits, store, cursor, sheet, visible, colours }: L
           );
         })}
       </svg>
-      {under && (
+      {said && (
         <div
           role="tooltip"
           data-testid="limit-words"
@@ -106,7 +127,7 @@ export function LimitHover({ limits, store, cursor, sheet, visible, colours }: L
             [above ? "bottom" : "top"]: above ? sheet.height - y + 14 : y + 14,
           }}
         >
-          {under.words}
+          {said.words}
         </div>
       )}
     </>

@@ -17,7 +17,7 @@ import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
 import { mapLayout, mapTraces } from "./figure";
 import type { SetPointHandleProps } from "./handle";
-import { LimitHover, type NamedLimit } from "./LimitHover";
+import { LimitHover, type NamedLimit, nearestLimit } from "./LimitHover";
 import type { LimitStore } from "./limitStore";
 import { Over } from "./Over";
 import type { PlotProps } from "./Plot";
@@ -141,14 +141,22 @@ export default function WindowMap(props: WindowMapProps) {
     },
     [live, onSight],
   );
+  const { limits, limitStore } = props;
   const pick = useCallback(
-    (at: Point | null) => {
+    (at: Point | null, byFinger = false) => {
       const pixels = sheet && at && mapPixels(sheet, visible);
       const mark = pixels && trials && nearestMark(trials.marks, pixels.toPixel, ...pixels.toPixel(at[0], at[1]));
-      if (mark) trials.onOpen(mark.id);
-      else onPick(at);
+      if (mark) return trials.onOpen(mark.id);
+      // A finger points at nothing before it presses: its tap names the limit that lies under it, and the next one lets it go.
+      if (byFinger && at && pixels && limits && limitStore) {
+        const limit = nearestLimit(limits, pixels.toPixel, at, true);
+        const before = limitStore.named.get();
+        limitStore.named.set(limit && limit.key !== before?.key ? { key: limit.key, at } : null);
+        if (limit || before) return;
+      }
+      onPick(at);
     },
-    [sheet, visible, trials, onPick],
+    [sheet, visible, trials, limits, limitStore, onPick],
   );
   // A trial run at the set point lies under its handle: a press that moves nothing means the trial.
   const openAt = useCallback(
@@ -198,10 +206,10 @@ export default function WindowMap(props: WindowMapProps) {
               holder={holder}
             />
           )}
-          {props.limits && props.limitStore && (
+          {limits && limitStore && (
             <LimitHover
-              limits={props.limits}
-              store={props.limitStore}
+              limits={limits}
+              store={limitStore}
               cursor={cursor}
               sheet={sheet}
               visible={visible}

@@ -43,6 +43,8 @@ const AXIS = { plain: 42, withFreeAcid: 60 };
 const DISTANCES = 17;
 const REACH_COLUMN = 18;
 const GAP = 14;
+/** In front of the reach bars: the last figure of the pH axis stands half beyond the map, beside their names. */
+const REACH_GAP = 20;
 
 /** Thickness of a metal's strip: thinner where there are many metals, double where two points are compared. */
 export function stripThickness(metals: number, pinned: boolean): number {
@@ -62,11 +64,11 @@ export function sheetBoxes(width: number, height: number, wishes: SheetWishes): 
   const margin = { l: LEFT, r: RIGHT, t: TOP, b: crosscuts ? DISTANCES : axisBelow, pad: 0 as const };
   const mapRight = Math.max(
     LEFT + 120,
-    width - RIGHT - columns - (columns > 0 ? GAP + DISTANCES : 0) - bars - (bars > 0 ? GAP : 0),
+    width - RIGHT - columns - (columns > 0 ? GAP + DISTANCES : 0) - bars - (bars > 0 ? REACH_GAP : 0),
   );
   const mapBottom = Math.min(height - TOP - 120, crosscuts ? margin.b + rows + axisBelow : axisBelow);
   const map = { x0: LEFT, x1: mapRight, y0: mapBottom, y1: height - TOP };
-  const barsLeft = mapRight + GAP;
+  const barsLeft = mapRight + REACH_GAP;
   const columnsLeft = bars > 0 ? barsLeft + bars + GAP : mapRight + GAP;
   return {
     width,

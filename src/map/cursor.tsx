@@ -12,7 +12,7 @@ interface CursorProps {
   through: Point | null;
   store: CursorStore;
   holder: RefObject<HTMLDivElement | null>;
-  onPick: (at: Point | null) => void;
+  onPick: (at: Point | null, byFinger?: boolean) => void;
   frame: Frame;
   /** keys zoom, a cursor that leaves the part in sight takes it along, a double click goes back to the whole frame */
   onSight: (next: Frame | null) => void;
@@ -101,9 +101,10 @@ export function Cursor({ sheet, visible, frame, through, store, holder, onPick, 
         now.current.onSight(null);
         return;
       }
+      const byFinger = event.pointerType === "touch";
       click = window.setTimeout(() => {
         click = 0;
-        now.current.onPick(at);
+        now.current.onPick(at, byFinger);
       }, DOUBLE);
     };
     const onKey = (event: KeyboardEvent) => {

@@ -86,8 +86,8 @@ test("the whole job by keyboard alone: sign in, open a plan, change it, move the
   await keys.press("Shift+ArrowRight");
   await page.getByTestId("held").waitFor();
 
-  // The limits: each that names species leads to them.
-  const limits = page.getByRole("region", { name: /^What shuts window/ }).locator("ul > li:has(a)");
+  // The limits: each is reached, and its name shown on the map; those with species lead to them.
+  const limits = page.getByRole("region", { name: /^What shuts window/ }).locator("ul > li");
   expect(await limits.count()).toBeGreaterThan(2);
   for (let i = 0; i < (await limits.count()); i++) {
     for (let tries = 0; !(await limits.nth(i).evaluate((li) => li.contains(document.activeElement))); tries++) {
@@ -99,6 +99,14 @@ test("the whole job by keyboard alone: sign in, open a plan, change it, move the
         () => (document.activeElement?.getBoundingClientRect().bottom ?? Infinity) <= window.innerHeight,
       ),
     ).toBe(true);
+    const [what = ""] = (await limits.nth(i).innerText()).split("\n");
+    await keys.press("Enter");
+    await page
+      .getByTestId("limit-words")
+      .getByText(what.replace(/^(low|high) (pH|Eh) /, ""))
+      .waitFor();
+    await keys.press("Escape");
+    await page.getByTestId("limit-words").waitFor({ state: "detached" });
   }
 
   // Next trials: proposed, and planned in a campaign of their own.

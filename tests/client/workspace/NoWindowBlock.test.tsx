@@ -4,7 +4,6 @@ import { expect, test, vi } from "vitest";
 import type { Advice, Opening } from "../../../shared/advice/openings";
 import { NoWindowBlock } from "../../../src/features/workspace/answers/NoWindowBlock";
 import type { Awaited } from "../../../src/features/workspace/model/useAsked";
-import { potentialScale } from "../../../src/lib/potential";
 
 const iron: Opening = { change: "activity", of: "Fe", from: 1e-9, to: 2e-8, searched: "8 decades" };
 const heat: Opening = { change: "temperature", from: 60, to: null, searched: "0 to 250 C" };
@@ -36,7 +35,6 @@ const props = {
     ],
   },
   metalName: (e: string) => ({ Zn: "zinc", Fe: "iron" })[e] ?? e,
-  scale: potentialScale("mV"),
 };
 
 const renderLinked = (block: React.ReactElement) => render(<MemoryRouter>{block}</MemoryRouter>);

@@ -96,13 +96,20 @@ export function AnswersPanel(props: AnswersProps) {
     <>
       {solution.windows.length > 1 && (
         <Suspense fallback={null}>
-          <WindowsBlock solution={solution} chosen={chosen} onChoose={onChoose} scale={scale} />
+          <WindowsBlock {...{ solution, chosen, onChoose, scale }} band={inputs.controlBand} />
         </Suspense>
       )}
       {window ? (
         <>
-          <SetPointBlock window={window} data={data} scale={scale} name={`window ${name}`} />
-          {held && <HeldNote held={held} naming={naming} {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})} />}
+          <SetPointBlock window={window} band={inputs.controlBand} data={data} scale={scale} name={`window ${name}`} />
+          {held && (
+            <HeldNote
+              held={held}
+              band={inputs.controlBand}
+              naming={naming}
+              {...(props.onLetGo ? { onLetGo: props.onLetGo } : {})}
+            />
+          )}
           {props.freeAcid && window.setPoint.pH < FREE_ACID_BELOW && (
             <Suspense fallback={null}>
               <FreeAcidRow at={window.setPoint} inputs={inputs} curve={props.freeAcid} />
@@ -114,7 +121,7 @@ export function AnswersPanel(props: AnswersProps) {
             window={window}
             name={name}
             naming={naming}
-            scale={scale}
+            band={inputs.controlBand}
             freeAcid={props.freeAcid}
             analysis={props.analysis}
             data={data}
@@ -122,7 +129,7 @@ export function AnswersPanel(props: AnswersProps) {
           />
           {props.robust.state !== "none" && (
             <Suspense fallback={null}>
-              <RobustBlock robust={props.robust} scale={scale} metalName={naming.metalName} />
+              <RobustBlock robust={props.robust} band={inputs.controlBand} scale={scale} metalName={naming.metalName} />
             </Suspense>
           )}
         </>
@@ -134,7 +141,6 @@ export function AnswersPanel(props: AnswersProps) {
               inputs={inputs}
               metalName={naming.metalName}
               advice={props.advice}
-              scale={scale}
               {...(props.onApply ? { onApply: props.onApply } : {})}
             />
           </Suspense>

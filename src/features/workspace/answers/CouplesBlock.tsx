@@ -47,7 +47,7 @@ export function CouplesBlock({
               <span>
                 <SpeciesLink id={couple.oxidised} /> / <SpeciesLink id={couple.reduced} />
               </span>
-              <span className="font-mono whitespace-nowrap">{couple.held ? range(couple.held) : "none"}</span>
+              <span className="font-mono whitespace-nowrap">{couple.held ? range(couple.held) : "sets no Eh"}</span>
             </div>
             <div className="text-sm text-muted">
               <Why couple={couple} scale={scale} />
@@ -70,10 +70,10 @@ function Why({
   const cut = held === null || held[0] > range[0] + 1e-6 || held[1] < range[1] - 1e-6;
   return (
     <>
-      {held === null ? "shut all along" : `even parts at ${scale.format(middle)}`}
+      {held === null ? "the two are never stable side by side" : `equal parts at ${scale.format(middle)}`}
       {cut && solids.length > 0 && (
         <>
-          {held === null ? " by " : "; ended by "}
+          {held === null ? ": there stands " : "; ended by "}
           {solids.map((s, i) => (
             <span key={s.species}>
               {i > 0 && ", "}

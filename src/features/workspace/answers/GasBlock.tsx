@@ -26,18 +26,13 @@ export function GasBlock({ gases: { map, reaching } }: { gases: Gases }) {
   const quiet = map.regions.filter((r) => !speaking.includes(r));
   return (
     <section aria-label="Gas over the liquor" className="mt-4" data-testid="gases">
-      <SectionHead
-        aside={
-          <>
-            {map.saturationBar === null ? "equilibrium" : "equilibrium, absolute"} · <MethodLink to="hazards" />
-          </>
-        }
-      >
+      <SectionHead aside={<MethodLink to="hazards" />}>
         <Term word="gasPressure">Gas over the liquor</Term>
       </SectionHead>
       {map.saturationBar !== null && (
         <Note className="py-1">
-          The vessel is closed: water alone stands at {withUnit(fixed(map.saturationBar, 2), "bar")} here.
+          The vessel is closed: water alone stands at {withUnit(fixed(map.saturationBar, 2), "bar")} here. All pressures
+          are absolute.
         </Note>
       )}
       <ul>

@@ -6,7 +6,6 @@ import { limitMoves } from "../../../../shared/windows/limitMoves";
 import type { LimitSentence } from "../../../../shared/windows/limitWords";
 import { ligandWord } from "../../../../shared/words/componentWord";
 import { later } from "../../../components/later";
-import type { PotentialScale } from "../../../lib/potential";
 import { moveWords } from "../model/moveWords";
 
 interface LimitMovesProps {
@@ -15,21 +14,18 @@ interface LimitMovesProps {
   analysis: Analysis;
   data: ChemicalData;
   metalName: (element: string) => string;
-  scale: PotentialScale;
 }
 
 /** What would move a limit, one thing at a time. */
 export const LimitMoves = later(function LimitMoves(props: LimitMovesProps) {
-  const { sentence, setPoint, analysis, data, metalName, scale } = props;
+  const { sentence, setPoint, analysis, data, metalName } = props;
   const words = useMemo(
     () =>
-      moveWords(
-        sentence,
-        limitMoves(analysis, sentence.limit, setPoint),
-        { metalName, componentName: (component) => ligandWord(data, component, analysis.prepared.sulfateReduction) },
-        scale,
-      ),
-    [sentence, setPoint, analysis, data, metalName, scale],
+      moveWords(sentence, limitMoves(analysis, sentence.limit, setPoint), {
+        metalName,
+        componentName: (component) => ligandWord(data, component, analysis.prepared.sulfateReduction),
+      }),
+    [sentence, setPoint, analysis, data, metalName],
   );
   return words === null ? null : (
     <p className="text-sm" data-testid="limit-moves">

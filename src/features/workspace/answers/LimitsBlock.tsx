@@ -1,7 +1,8 @@
 import { useMemo, type ReactNode } from "react";
 import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
 import type { Analysis } from "../../../../shared/analysis";
-import type { Limit, Window } from "../../../../shared/solution";
+import type { Problem } from "../../../../shared/schemas/problem";
+import type { Limit, Point, Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { type LimitSentence, limitSentences, type Naming } from "../../../../shared/windows/limitWords";
 import { AcidAmount } from "../../../components/AcidAmount";
@@ -10,9 +11,9 @@ import { MethodLink, SpeciesLink } from "../../../components/SourceLink";
 import { SectionHead } from "../../../components/text";
 import { classes } from "../../../lib/classes";
 import { fixed, withUnit } from "../../../lib/format";
-import type { PotentialScale } from "../../../lib/potential";
 import type { LimitStore } from "../../../map/limitStore";
 import { useTold } from "../../../map/trialStore";
+import { bandWords, mVWords, pHWords } from "../model/distances";
 import { limitKey } from "../model/limitKey";
 import { LimitMoves } from "./LimitMoves";
 import { Reaction } from "./Reaction";
@@ -22,7 +23,7 @@ export function LimitsBlock({
   window,
   name,
   naming,
-  scale,
+  band,
   freeAcid = null,
   analysis,
   data,
@@ -31,7 +32,7 @@ export function LimitsBlock({
   window: Window;
   name: string;
   naming: Naming;
-  scale: PotentialScale;
+  band: Problem["controlBand"];
   /** of a sulfate liquor */
   freeAcid?: FreeAcidCurve | null;
   /** what the solution was read from; null while the plan cannot be solved */
@@ -57,16 +58,12 @@ export function LimitsBlock({
           <Sentence
             key={`${sentence.side} ${sentence.what}`}
             sentence={sentence}
-            scale={scale}
+            band={band}
             acid={acidTo(sentence, window, freeAcid)}
             limitStore={limitStore}
             moves={
               analysis && (
-                <LimitMoves
-                  {...{ sentence, analysis, data, scale }}
-                  setPoint={window.setPoint}
-                  metalName={naming.metalName}
-                />
+                <LimitMoves {...{ sentence, analysis, data }} setPoint={window.setPoint} metalName={naming.metalName} />
               )
             }
           />
@@ -85,22 +82,25 @@ function acidTo({ axis, distance, side }: LimitSentence, { setPoint }: Window, c
   return here.withinSulfate && there.withinSulfate ? there.gPerL - here.gPerL : null;
 }
 
+const middle = ({ from, to }: Limit): Point => [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+
 function Sentence({
   sentence,
-  scale,
+  band,
   acid,
   moves,
   limitStore,
 }: {
   sentence: LimitSentence;
-  scale: PotentialScale;
+  band: Problem["controlBand"];
   acid: number | null;
   moves: ReactNode;
   limitStore: LimitStore;
 }) {
   const key = limitKey(sentence);
   const pointed = useTold(limitStore.pointed) === key;
-  const { side, what, limit, others } = sentence;
+  const named = useTold(limitStore.named)?.key === key;
+  const { side, what, limit, others, distance, axis, bands } = sentence;
   const further = others.filter((o) => o.reaction !== limit.reaction);
   return (
     <li
@@ -111,12 +111,30 @@ function Sentence({
       onBlur={() => limitStore.pointed.set(null)}
     >
       <div className="flex items-baseline justify-between gap-3">
-        <span>
+        <button
+          type="button"
+          aria-pressed={named}
+          title={named ? "Take its name off the map" : "Name it on the map"}
+          className="touch-word text-left hover:underline"
+          onClick={() => limitStore.named.set(named ? null : { key, at: middle(limit) })}
+        >
           <b>{side}</b> {what}
+        </button>
+        <span className="shrink-0 font-mono whitespace-nowrap">
+          {distance === null
+            ? withUnit(fixed(bands, 1), "bands")
+            : axis === "pH"
+              ? pHWords(distance)
+              : mVWords(distance)}
         </span>
-        <Distance sentence={sentence} scale={scale} />
       </div>
       <Why limit={limit} />
+      {distance === null && (
+        <div className="text-sm text-muted">
+          not straight along {axis} from the set point: nearest within{" "}
+          <span className="whitespace-nowrap">{bandWords(bands, band)}</span>
+        </div>
+      )}
       {acid !== null && (
         <div className="text-sm text-muted">
           <AcidAmount gPerL={Math.abs(acid)} /> {acid > 0 ? "more" : "less"} free acid, by the same reckoning
@@ -134,23 +152,6 @@ function Sentence({
         </details>
       )}
     </li>
-  );
-}
-
-function Distance({ sentence: { distance, axis, bands }, scale }: { sentence: LimitSentence; scale: PotentialScale }) {
-  const text =
-    distance === null
-      ? withUnit(fixed(bands, 1), "bands")
-      : axis === "pH"
-        ? withUnit(fixed(distance, 2), "pH")
-        : withUnit(fixed(scale.differenceToShown(distance), scale.digits), scale.unit);
-  return (
-    <span
-      className="shrink-0 font-mono whitespace-nowrap"
-      title={distance === null ? "nearest way, counted in control bands" : `${fixed(bands, 1)} control bands away`}
-    >
-      {text}
-    </span>
   );
 }
 

@@ -12,7 +12,7 @@ import { FormulaText } from "../../../components/FormulaText";
 import { Note, SectionHead } from "../../../components/text";
 import { celsius, fixed, significant, withUnit } from "../../../lib/format";
 import { requirementWord } from "../../../lib/planWords";
-import type { PotentialScale } from "../../../lib/potential";
+import { mVWords, pHWords } from "../model/distances";
 import type { Awaited } from "../model/useAsked";
 import { Stopped, Working } from "./Working";
 
@@ -23,13 +23,12 @@ export interface NoWindowProps {
   inputs: Pick<PlanInputs, "metals">;
   metalName: (element: string) => string;
   advice: Awaited<Advice>;
-  scale: PotentialScale;
   /** absent where the plan is only looked at */
   onApply?: (opening: Opening) => void;
 }
 
 /** No window: which requirements cannot hold together, how far apart they stand, and the smallest change that opens one. */
-export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onApply }: NoWindowProps) {
+export function NoWindowBlock({ solution, inputs, metalName, advice, onApply }: NoWindowProps) {
   const gaps = advice.state === "there" ? advice.value.gaps : [];
   return (
     <section aria-label="No window">
@@ -44,22 +43,14 @@ export function NoWindowBlock({ solution, inputs, metalName, advice, scale, onAp
             return (
               <li key={key} className="hairline py-1">
                 <ConflictWords set={set} metalName={metalName} />
-                {gap && <GapWords gap={gap} set={set} scale={scale} metalName={metalName} />}
+                {gap && <GapWords gap={gap} set={set} metalName={metalName} />}
               </li>
             );
           })}
         </ul>
       )}
       <div className="mt-4">
-        <SectionHead
-          aside={
-            <>
-              one at a time · <MethodLink to="opens" />
-            </>
-          }
-        >
-          What would open one
-        </SectionHead>
+        <SectionHead aside={<MethodLink to="opens" />}>What would open one</SectionHead>
         {advice.state === "waiting" && (
           <Working
             awaited={advice}
@@ -129,21 +120,18 @@ const where: Readonly<Record<Exclude<ConflictGap["across"], "members">, string>>
 function GapWords({
   gap: { gap, members, across, nearest },
   set,
-  scale,
   metalName,
 }: {
   gap: ConflictGap;
   set: Conflict;
-  scale: PotentialScale;
   metalName: (element: string) => string;
 }) {
   const many = members.length > 2;
   const together = many && <>Any two of them can; it is the {members.length} together that leave no ground. </>;
   if (gap === null)
     return members.length === 1 ? <Note>Nor is it anywhere within the widest map.</Note> : <Note>{together}</Note>;
-  const pH: Way | null = gap.pH === null ? null : [withUnit(fixed(gap.pH, 2), "pH"), "at one Eh"];
-  const volts = withUnit(fixed(scale.differenceToShown(gap.Eh ?? 0), scale.digits), scale.unit);
-  const Eh: Way | null = gap.Eh === null ? null : [volts, "at one pH"];
+  const pH: Way | null = gap.pH === null ? null : [pHWords(gap.pH), "at one Eh"];
+  const Eh: Way | null = gap.Eh === null ? null : [mVWords(gap.Eh), "at one pH"];
   const parts = [pH, Eh].filter((part) => part !== null);
   const sentence =
     across === "members"

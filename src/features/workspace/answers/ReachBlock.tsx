@@ -10,14 +10,15 @@ import { Help, Term } from "../../../components/Help";
 import { later } from "../../../components/later";
 import { MethodLink } from "../../../components/SourceLink";
 import { Note, SectionHead } from "../../../components/text";
-import { fixed, withUnit } from "../../../lib/format";
+import { fixed } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
+import { mVWords } from "../model/distances";
 
 const NO_RANGE = "no practical range on record for this liquor";
 
-/** The verdict in words, potentials on the member's scale. */
-function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialScale): string {
-  const off = differenceText(shortMV ?? 0, scale);
+/** The verdict in words. */
+function verdictText({ verdict, side, shortMV }: ReachAnswer): string {
+  const off = mVWords((shortMV ?? 0) / 1000);
   switch (verdict) {
     case "reachable":
       return "reaches the set point";
@@ -31,9 +32,6 @@ function verdictText({ verdict, side, shortMV }: ReachAnswer, scale: PotentialSc
       return NO_RANGE;
   }
 }
-
-const differenceText = (mV: number, scale: PotentialScale): string =>
-  withUnit(fixed(scale.differenceToShown(mV / 1000), scale.digits), scale.unit);
 
 interface ReachProps {
   reaches: readonly Reach[];
@@ -72,7 +70,7 @@ const Lines = later(function Lines({ reaches, window, data, liquor, pH, scale }:
             </div>
             <div className="text-sm">
               {window
-                ? verdictText(reachOf(data, reach.reagent, window, liquor), scale)
+                ? verdictText(reachOf(data, reach.reagent, window, liquor))
                 : reach.practical === null && NO_RANGE}
             </div>
             {equilibrium !== null && <Equilibrium reach={reach} Eh={equilibrium} scale={scale} />}

@@ -1,5 +1,6 @@
 import { checkedWords, coupleOverWords } from "../../../../shared/advice/checkedWords";
 import type { Robust } from "../../../../shared/advice/robust";
+import type { Problem } from "../../../../shared/schemas/problem";
 import { marginWords } from "../../../../shared/windows/limitWords";
 import { FormulaText } from "../../../components/FormulaText";
 import { Term } from "../../../components/Help";
@@ -7,16 +8,19 @@ import { MethodLink } from "../../../components/SourceLink";
 import { Note, Row, SectionHead } from "../../../components/text";
 import { fixed } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
+import { marginInUnits } from "../model/distances";
 import type { Awaited } from "../model/useAsked";
 import { Stopped, Working } from "./Working";
 
 /** The window that holds over all the ranges, its set point, and what was checked for it. */
 export function RobustBlock({
   robust,
+  band,
   scale,
   metalName,
 }: {
   robust: Awaited<Robust>;
+  band: Problem["controlBand"];
   scale: PotentialScale;
   metalName: (element: string) => string;
 }) {
@@ -45,17 +49,19 @@ export function RobustBlock({
           Not solved: {robust.message}.
         </p>
       )}
-      {robust.state === "there" && <Found robust={robust.value} scale={scale} metalName={metalName} />}
+      {robust.state === "there" && <Found robust={robust.value} {...{ band, scale, metalName }} />}
     </section>
   );
 }
 
 function Found({
   robust,
+  band,
   scale,
   metalName,
 }: {
   robust: Robust;
+  band: Problem["controlBand"];
   scale: PotentialScale;
   metalName: (element: string) => string;
 }) {
@@ -69,7 +75,7 @@ function Found({
           <Row label="Deepest point">
             pH {fixed(best.setPoint.pH, 2)}, {scale.format(best.setPoint.Eh)}
           </Row>
-          <Row label="Margin there">
+          <Row label="Margin there" below={`${marginInUnits(best.setPoint, band)} to either side`}>
             <b>
               {fixed(best.setPoint.margin, 1)} {marginWords(best.setPoint)}
             </b>

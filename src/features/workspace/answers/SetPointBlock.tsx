@@ -1,4 +1,5 @@
 import { fromSHE } from "../../../../shared/electrodes/convert";
+import type { Problem } from "../../../../shared/schemas/problem";
 import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { marginWords } from "../../../../shared/windows/limitWords";
@@ -9,16 +10,19 @@ import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import { useScaleChoice } from "../../../lib/scaleChoice";
+import { bandWords, marginInUnits, pHWords } from "../model/distances";
 import { usualProbe } from "../model/exports";
 
 /** Where to run, in figures one can read across the room, and how sure the loop can be of staying there. */
 export function SetPointBlock({
   window,
+  band,
   data,
   scale,
   name,
 }: {
   window: Window;
+  band: Problem["controlBand"];
   data: ChemicalData;
   scale: PotentialScale;
   name: string;
@@ -46,7 +50,13 @@ export function SetPointBlock({
       <Row
         className="mt-1"
         label={<Term word="margin">Margin</Term>}
-        below={at.cutByFrame ? "Cut by the frame: the window may be wider than the map." : undefined}
+        below={
+          <>
+            {marginInUnits(at, band)} to either side; the loop strays ±
+            {at.mixedPotential ? pHWords(band.pH) : bandWords(1, band)}.
+            {at.cutByFrame && " Cut by the frame: the window may be wider than the map."}
+          </>
+        }
       >
         <b>
           {fixed(at.margin, 1)} {marginWords(at)}

@@ -1,15 +1,19 @@
 import type { HeldSetPoint } from "../../../../shared/setpoint/held";
+import type { Problem } from "../../../../shared/schemas/problem";
 import { limitSentences, marginWords, type Naming } from "../../../../shared/windows/limitWords";
 import { Button } from "../../../components/Button";
 import { fixed } from "../../../lib/format";
+import { marginInUnits } from "../model/distances";
 
 /** A set point placed by hand: what is nearest, and the way back. */
 export function HeldNote({
   held,
+  band,
   naming,
   onLetGo,
 }: {
   held: HeldSetPoint;
+  band: Problem["controlBand"];
   naming: Naming;
   /** absent where the plan is only looked at */
   onLetGo?: () => void;
@@ -30,7 +34,9 @@ export function HeldNote({
         )
       ) : (
         <span className="text-signal">
-          Outside the window{here && `, by ${fixed(Math.abs(here.margin), 1)} ${words}`}
+          Outside the window
+          {here &&
+            `, by ${fixed(Math.abs(here.margin), 1)} ${words} (${marginInUnits({ ...window.setPoint, margin: Math.abs(here.margin) }, band)})`}
           {nearest && `: ${nearest.what}`}.
         </span>
       )}

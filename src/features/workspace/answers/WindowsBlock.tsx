@@ -1,3 +1,4 @@
+import type { Problem } from "../../../../shared/schemas/problem";
 import type { Solution } from "../../../../shared/solution";
 import { marginWords } from "../../../../shared/windows/limitWords";
 import { Term } from "../../../components/Help";
@@ -7,6 +8,7 @@ import { classes } from "../../../lib/classes";
 import { fixed } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import { windowName } from "../../../map/view";
+import { marginInUnits } from "../model/distances";
 
 /** Where several windows are open: which one the answers speak of. */
 export function WindowsBlock({
@@ -14,11 +16,13 @@ export function WindowsBlock({
   chosen,
   onChoose,
   scale,
+  band,
 }: {
   solution: Solution;
   chosen: number;
   onChoose: (index: number) => void;
   scale: PotentialScale;
+  band: Problem["controlBand"];
 }) {
   return (
     <section aria-label="Windows" className="mb-4">
@@ -49,8 +53,8 @@ export function WindowsBlock({
                   pH {fixed(window.pH[0], 2)} to {fixed(window.pH[1], 2)}
                 </span>
                 <span className="block text-sm font-normal text-muted">
-                  margin {fixed(window.setPoint.margin, 1)} {marginWords(window.setPoint)}
-                  {!window.controllable && ", narrower than the control bands"}
+                  margin {fixed(window.setPoint.margin, 1)} {marginWords(window.setPoint)} (
+                  {marginInUnits(window.setPoint, band)}){!window.controllable && ", narrower than the control bands"}
                 </span>
               </span>
               <span className="font-mono font-normal whitespace-nowrap">

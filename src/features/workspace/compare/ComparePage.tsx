@@ -12,6 +12,7 @@ import { savedAt } from "../../../lib/format";
 import { usePlan, useRevisions } from "../../../lib/plans";
 import { usePotentialScale } from "../../../lib/potential";
 import { bringScale, useScaleChoice } from "../../../lib/scaleChoice";
+import { useMay } from "../../../lib/session";
 import { useThemeColours } from "../../../lib/theme";
 import { usePageTitle } from "../../../lib/title";
 import { decodeView, encodeView, queryText } from "../address/codec";
@@ -104,6 +105,7 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
     return pH && Eh ? { pH, Eh } : null;
   }, [search]);
   const map = search.get("map");
+  const mayWrite = useMay("writePlans");
   const change = (parts: Record<string, string | null>) =>
     setSearch(
       (old) => {
@@ -173,9 +175,15 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
           <Button aria-expanded={trying} onClick={() => setTrying(!trying)}>
             {trying ? "Close the settings" : "Change B"}
           </Button>
-          <Button kind="primary" onClick={() => take(sideB)}>
-            Take B into the plan
-          </Button>
+          {mayWrite ? (
+            <Button kind="primary" onClick={() => take(sideB)}>
+              Take B into the plan
+            </Button>
+          ) : (
+            <Button title="On your screen alone; a metallurgist saves" onClick={() => take(sideB)}>
+              Try B in the plan
+            </Button>
+          )}
         </span>
       </div>
       <div className="grid min-h-0 flex-1 grid-cols-1 lg:grid-cols-2 lg:grid-rows-2">

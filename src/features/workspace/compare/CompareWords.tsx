@@ -8,12 +8,15 @@ import { Note, Row, SectionHead } from "../../../components/text";
 import { fixed } from "../../../lib/format";
 import { planChanges } from "../../../lib/planChanges";
 import type { PotentialScale } from "../../../lib/potential";
+import { marginInUnits } from "../model/distances";
 import type { Side, SolvedSide } from "./sides";
 import { area, moveLines, verdict } from "./words";
 
 const point = (at: SetPoint | undefined, scale: PotentialScale) =>
   at ? `pH ${fixed(at.pH, 2)}, ${scale.format(at.Eh)}` : "no window";
 const margin = (at: SetPoint | undefined) => (at ? `${fixed(at.margin, 1)} ${marginWords(at)}` : "none");
+const inUnits = (at: SetPoint | undefined, { inputs }: Side) =>
+  at && `${marginInUnits(at, inputs.controlBand)} to either side`;
 
 /** What the difference says, in words and numbers. */
 export function CompareWords({
@@ -96,8 +99,12 @@ export function CompareWords({
         <SectionHead aside={`vs ${scale.short}`}>Set point</SectionHead>
         <Row label="A">{point(was, scale)}</Row>
         <Row label="B">{point(is, scale)}</Row>
-        <Row label="Margin of A">{margin(was)}</Row>
-        <Row label="Margin of B">{margin(is)}</Row>
+        <Row label="Margin of A" below={inUnits(was, a.side)}>
+          {margin(was)}
+        </Row>
+        <Row label="Margin of B" below={inUnits(is, b.side)}>
+          {margin(is)}
+        </Row>
       </section>
       <section aria-label="Limits that moved" className="mt-4">
         <SectionHead>Limits, from A to B</SectionHead>

@@ -18,6 +18,7 @@ import { classes } from "../../../lib/classes";
 import { fixed } from "../../../lib/format";
 import type { MapMetal } from "../../../map/view";
 import type { FilmWish } from "../address/view";
+import { bandWords } from "../model/distances";
 import type { Edit } from "../model/edit";
 import { useAsked } from "../model/useAsked";
 import { Curve } from "./Curve";
@@ -162,7 +163,7 @@ export function Film({ wish, onWish, inputs, data, metals, setPoint, edit }: Fil
           <Note className="pt-1">
             Worked out at {answer.value.samples.length} settings, straight lines between them; openings, closings and
             jumps are narrowed to {vary.kind === "temperature" ? "0.01 K" : "0.02 %"}. Two that undo each other between
-            neighbouring settings can be missed.
+            neighbouring settings can be missed. One control band is ±{bandWords(1, inputs.controlBand)}.
           </Note>
           {answer.value.failed.map(({ at, error }) => (
             <Note key={at}>

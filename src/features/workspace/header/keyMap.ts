@@ -24,6 +24,7 @@ export const keyMap: readonly {
     keys: [
       ["arrow keys", "move the cursor; with Shift five times as far"],
       ["Enter or a click", "pin a second pair of crosscuts there; on a trial: open it"],
+      ["a tap on a limit", "name it; the next tap, or Escape, lets it go"],
       ["+ and −", "zoom in and out round the cursor, or the set point"],
       ["Home", "the whole frame again"],
       ["two fingers", "zoom and move; one finger moves the map once it is zoomed"],

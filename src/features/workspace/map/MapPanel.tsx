@@ -76,15 +76,16 @@ export function MapPanel(props: MapPanelProps) {
   const window = solution.windows[chosen];
   const setPoint = window?.setPoint;
   const naming = useMemo(() => namingOf(data, solution), [data, solution]);
-  const limits = useMemo(() => namedLimits(window, naming, scale), [window, naming, scale]);
+  const limits = useMemo(() => namedLimits(window, naming, inputs.controlBand), [window, naming, inputs.controlBand]);
   const inWords = useMemo(
-    () => ({ solution, metals, scale, naming, chosen, through, sight }),
-    [solution, metals, scale, naming, chosen, through, sight],
+    () => ({ solution, metals, scale, band: inputs.controlBand, naming, chosen, through, sight }),
+    [solution, metals, scale, inputs.controlBand, naming, chosen, through, sight],
   );
   const drawn = useMemo(() => drawnMetals(view), [view]);
   const onSight = useCallback((zoom: Frame | null) => change({ zoom }), [change]);
   const onPick = useCallback((pinned: Point | null) => change({ pinned }), [change]);
-  const where = setPoint ? `at the set point of window ${windowName(chosen)}` : "in the middle of the frame";
+  const several = solution.windows.length > 1 ? ` ${windowName(chosen)}` : "";
+  const where = setPoint ? `at the set point${several}` : "in the middle of the frame";
   return (
     <div className="flex min-h-0 flex-1 flex-col">
       <div className="px-4 pt-2">

@@ -53,8 +53,11 @@ export function MapTools(props: MapToolsProps) {
       <Word onClick={props.onFilm} title="One setting varied: small maps and curves">
         what if
       </Word>
-      <Word onClick={() => onPlain(!plain)} title="Key f">
-        {plain ? "shut and open ground" : "all fields"}
+      <Word
+        onClick={() => onPlain(!plain)}
+        title={plain ? "Shut ground hatched, open ground lit: key f" : "Every field named, nothing hatched: key f"}
+      >
+        {plain ? "open ground" : "all fields"}
       </Word>
     </div>
   );
@@ -97,7 +100,7 @@ export function ZoomTools({ sight, change, frame, through, moving, onMoving }: Z
 }
 
 const word =
-  "leading-none underline decoration-rule underline-offset-4 hover:decoration-ink disabled:text-muted disabled:no-underline [@media(pointer:coarse)]:min-h-8 [@media(pointer:coarse)]:min-w-8";
+  "leading-none whitespace-nowrap underline decoration-rule underline-offset-4 hover:decoration-ink disabled:text-muted disabled:no-underline pointer-coarse:min-h-11 pointer-coarse:min-w-11";
 
 function Word({
   children,

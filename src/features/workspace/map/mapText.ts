@@ -1,11 +1,13 @@
+import type { Problem } from "../../../../shared/schemas/problem";
 import { type CrosscutPart, crosscut, speciesAt } from "../../../../shared/setpoint/crosscut";
 import type { Point, Solution, State } from "../../../../shared/solution";
 import { speciesParts } from "../../../../shared/species/parts";
 import { limitSentences, marginWords, type Naming, windowName } from "../../../../shared/windows/limitWords";
-import { celsius, fixed, withUnit } from "../../../lib/format";
+import { celsius, fixed } from "../../../lib/format";
 import { requirementWord } from "../../../lib/planWords";
 import type { PotentialScale } from "../../../lib/potential";
 import type { MapMetal } from "../../../map/view";
+import { bandWords, mVWords, pHWords } from "../model/distances";
 import type { Sight } from "../model/useSight";
 
 export interface MapText {
@@ -16,7 +18,8 @@ export interface MapText {
 interface Asked {
   solution: Solution;
   metals: readonly MapMetal[];
-  scale: Pick<PotentialScale, "format" | "label" | "differenceToShown" | "digits" | "unit">;
+  scale: Pick<PotentialScale, "format" | "label">;
+  band: Problem["controlBand"];
   naming: Naming;
   /** index of the window in hand */
   chosen: number;
@@ -49,7 +52,7 @@ function beyondText({ warnings, temperatureC }: Solution): string[] {
 
 /** The window map in words: what a reader who does not see it would ask. Windows, set point, limits, what every metal is there, and
  *  both crosscuts. */
-export function mapText({ solution, metals, scale, naming, chosen, through, sight }: Asked): MapText[] {
+export function mapText({ solution, metals, scale, band, naming, chosen, through, sight }: Asked): MapText[] {
   const { windows, frame, temperatureC } = solution;
   const window = windows[chosen];
   const pH = (x: number) => `pH ${fixed(x, 2)}`;
@@ -85,10 +88,8 @@ export function mapText({ solution, metals, scale, naming, chosen, through, sigh
     ? limitSentences(window, naming).map(({ side, what, axis, distance, bands, limit }) => {
         const way =
           distance === null
-            ? `${fixed(bands, 1)} control bands away`
-            : axis === "pH"
-              ? `${withUnit(fixed(distance, 2), "pH")} away`
-              : `${withUnit(fixed(scale.differenceToShown(distance), scale.digits), scale.unit)} away`;
+            ? `${fixed(bands, 1)} control bands away, within ${bandWords(bands, band)}`
+            : `${axis === "pH" ? pHWords(distance) : mVWords(distance)} away`;
         return `${upper(side)}, ${way}: ${what}${limit.reaction ? `, ${limit.reaction}` : ""}.`;
       })
     : [];

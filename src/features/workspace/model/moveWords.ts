@@ -1,7 +1,8 @@
+import { NARROW_NO_BREAK } from "../../../../shared/words/numbers";
 import type { LimitMove } from "../../../../shared/windows/limitMoves";
 import type { LimitSentence } from "../../../../shared/windows/limitWords";
-import { fixed, signed, withUnit } from "../../../lib/format";
-import type { PotentialScale } from "../../../lib/potential";
+import { signed, THIN_SPACE, withUnit } from "../../../lib/format";
+import { mVWords, pHWords } from "./distances";
 
 /** Less than the last figure shown is no move. */
 const LEAST = { pH: 0.005, Eh: 0.0005 };
@@ -18,7 +19,6 @@ export function moveWords(
   { axis, side }: Pick<LimitSentence, "axis" | "side">,
   moves: readonly LimitMove[],
   { metalName, componentName }: MoveNaming,
-  scale: Pick<PotentialScale, "differenceToShown" | "unit">,
 ): string | null {
   let first = true;
   const parts = moves.flatMap(({ by, ...move }) => {
@@ -28,16 +28,14 @@ export function moveWords(
       by.kind === "temperature"
         ? withUnit(signed(by.kelvin, 0), "K")
         : `ten times less ${by.kind === "metal" ? metalName(by.component) : componentName(by.component)}`;
-    const size =
-      axis === "pH"
-        ? withUnit(fixed(Math.abs(far), 2), "pH")
-        : withUnit(fixed(scale.differenceToShown(Math.abs(far)), scale.unit === "mV" ? 0 : 3), scale.unit);
+    const size = axis === "pH" ? pHWords(far) : mVWords(far);
     const wider = side.startsWith("low") === far < 0;
     const window = first ? "the window" : "it";
     first = false;
     return [`${what} moves it ${size} ${far > 0 ? "up" : "down"} and ${wider ? "widens" : "narrows"} ${window}`];
   });
   if (parts.length === 0) return null;
-  const text = parts.join("; ");
+  // Number and unit stay together where the line breaks.
+  const text = parts.join("; ").replaceAll(THIN_SPACE, NARROW_NO_BREAK);
   return `${text.charAt(0).toUpperCase()}${text.slice(1)}.`;
 }
