@@ -138,6 +138,7 @@ export function Workspace({ plan, frozen, data, start }: WorkspaceProps) {
         ignored={start.ignored}
         mayWrite={mayWrite}
         said={said}
+        onUnsay={() => setSaid(null)}
         onExport={onExport}
         onComments={toggleComments}
         onOpen={setDialog}

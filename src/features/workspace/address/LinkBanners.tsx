@@ -3,6 +3,7 @@ import { Button } from "../../../components/Button";
 import { FormulaText } from "../../../components/FormulaText";
 import { counted } from "../../../lib/format";
 import { planChanges } from "../../../lib/planChanges";
+import { useMay } from "../../../lib/session";
 
 /** Over settings that a link brought: what they are and what differs, and the two ways on. Nothing changes until they are kept. */
 export function ProposalBanner({
@@ -23,18 +24,19 @@ export function ProposalBanner({
   onLeave: () => void;
 }) {
   const changes = planChanges(mine, settings);
+  const mayWrite = useMay("writePlans");
   return (
     <div className="shrink-0 border-b border-ink bg-sheet px-5 py-1.5" role="region" aria-label="Settings from a link">
       <div className="flex min-h-8 flex-wrap items-center gap-x-3 gap-y-1">
         <h1 className="text-lg">{plan.name}</h1>
         <p className="min-w-0 flex-1 text-sm">
           <b>Settings from a link</b>, a proposal: {counted(changes.length, "difference")} from{" "}
-          {unsaved ? "your unsaved draft" : `revision ${plan.latest.number}`}. Nothing of the plan changes until you
-          keep them.
+          {unsaved ? "your unsaved draft" : `revision ${plan.latest.number}`}. Nothing of the plan changes until{" "}
+          {mayWrite ? "you keep them" : "a metallurgist saves them"}.
         </p>
         <span className="no-print flex gap-2">
           <Button kind="primary" onClick={onKeep}>
-            Keep as my draft
+            {mayWrite ? "Keep as my draft" : "Try them here"}
           </Button>
           <Button onClick={onLeave}>Leave them</Button>
         </span>

@@ -10,6 +10,7 @@ import { staleAnswer } from "../../../lib/failure";
 import { planChanges } from "../../../lib/planChanges";
 import { useSaveRevision } from "../../../lib/plans";
 import { keys } from "../../../lib/queries";
+import { sameInputs } from "../model/history";
 import type { DraftInHand } from "../model/useDraft";
 
 const LONGEST = 500;
@@ -31,6 +32,7 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
   const save = useSaveRevision();
   const { inputs, procedures } = draft;
   const changes = planChanges(plan.latest.inputs, inputs);
+  const same = sameInputs(plan.latest.inputs, inputs);
   const named = Object.entries(procedures).filter(([, p]) => p.trim() !== "");
   const procedureNote = named.map(([code, p]) => `${code} under procedure ${p.trim()}.`).join(" ");
   const whole = [note.trim(), procedureNote].filter((part) => part !== "").join(" ");
@@ -71,7 +73,7 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
             kind="primary"
             type="submit"
             form="save-revision"
-            disabled={save.isPending || changes.length === 0 || whole.length > LONGEST}
+            disabled={save.isPending || same || whole.length > LONGEST}
           >
             {save.isPending ? "Saving …" : "Save revision"}
           </Button>
@@ -100,8 +102,13 @@ export default function SaveDialog({ plan, draft, open, onOpenChange, note, onNo
         </p>
       )}
       <div className="mt-3">
-        {changes.length === 0 ? (
-          <Note>Nothing has changed since revision {plan.latest.number}.</Note>
+        {same ? (
+          <Note>Nothing to save: these are the settings of revision {plan.latest.number}.</Note>
+        ) : changes.length === 0 ? (
+          <Note>
+            What differs from revision {plan.latest.number} has no words here: the order of entries, or less than the
+            last figure shown. It can be saved.
+          </Note>
         ) : (
           <PlainTable
             caption={`What changes from revision ${plan.latest.number}`}

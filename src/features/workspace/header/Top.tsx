@@ -31,6 +31,7 @@ export function Top({
             onRestore={() => table.restore(frozen)}
             onCopyLink={commands.onCopyLink}
             said={commands.said}
+            onUnsay={commands.onUnsay}
             onSheet={() => commands.onExport("sheet")}
             onComments={commands.onComments}
           />

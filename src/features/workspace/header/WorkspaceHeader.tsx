@@ -2,9 +2,9 @@ import { lazy, Suspense } from "react";
 import type { PlanRow } from "../../../../shared/schemas/plan";
 import { Button, ButtonLink } from "../../../components/Button";
 import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../../components/Menu";
-import { Status } from "../../../components/status";
 import { fullTime, savedAt } from "../../../lib/format";
 import type { DraftInHand } from "../model/useDraft";
+import { SaidLine } from "./SaidLine";
 
 const NewerRevision = lazy(async () => ({ default: (await import("./NewerRevision")).NewerRevision }));
 
@@ -22,6 +22,7 @@ export interface HeaderProps {
   mayWrite: boolean;
   /** a word on the command that runs, is done or failed */
   said: Said | null;
+  onUnsay: () => void;
   onExport: (kind: ExportKind) => void;
   onCopyLink: () => void;
   /** shows the comments, or the answers again */
@@ -35,6 +36,7 @@ export function WorkspaceHeader({
   draft,
   mayWrite,
   said,
+  onUnsay,
   onExport,
   onCopyLink,
   onComments,
@@ -42,7 +44,7 @@ export function WorkspaceHeader({
 }: HeaderProps) {
   const { latest } = plan;
   const header = (
-    <div className="flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
+    <div className="relative flex min-h-11 shrink-0 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-5 py-1.5 lg:flex-nowrap">
       <h1 className="truncate text-lg">{plan.name}</h1>
       <p
         className="min-w-64 flex-1 truncate text-sm text-muted"
@@ -50,12 +52,15 @@ export function WorkspaceHeader({
       >
         <Saved plan={plan} draft={draft} mayWrite={mayWrite} />
       </p>
-      {said && <Status tone={said.bad ? "bad" : "quiet"}>{said.text}</Status>}
       <span className="no-print flex shrink-0 gap-2">
-        <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl Z">
+        <Button disabled={!draft.canUndo} onClick={draft.undo} title={draft.canUndo ? "Ctrl Z" : "Nothing to undo"}>
           Undo
         </Button>
-        <Button disabled={!draft.canRedo} onClick={draft.redo} title="Ctrl Shift Z">
+        <Button
+          disabled={!draft.canRedo}
+          onClick={draft.redo}
+          title={draft.canRedo ? "Ctrl Shift Z" : "Nothing to do again"}
+        >
           Redo
         </Button>
         <Button onClick={() => onOpen("revisions")} title="r">
@@ -66,7 +71,12 @@ export function WorkspaceHeader({
         </ButtonLink>
         <CommentsButton count={plan.commentCount} onClick={onComments} />
         {mayWrite && (
-          <Button kind="primary" disabled={!draft.changed} onClick={() => onOpen("save")} title="Ctrl S">
+          <Button
+            kind="primary"
+            disabled={!draft.changed}
+            onClick={() => onOpen("save")}
+            title={draft.changed ? "Ctrl S" : `These are the settings of revision ${draft.basedOn}`}
+          >
             Save revision
           </Button>
         )}
@@ -123,6 +133,7 @@ export function WorkspaceHeader({
           </MenuItem>
         </Menu>
       </span>
+      <SaidLine said={said} onClose={onUnsay} />
     </div>
   );
   if (draft.basedOn >= latest.number) return header;
