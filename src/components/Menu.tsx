@@ -7,7 +7,7 @@ import { lateFailure, useLate } from "./useLate";
 const loadList = () => import("./MenuList");
 
 const item =
-  "flex cursor-pointer items-baseline justify-between gap-6 px-3 py-1.5 pointer-coarse:min-h-11 -outline-offset-2 data-[highlighted]:bg-tint data-[disabled]:cursor-not-allowed data-[disabled]:opacity-50";
+  "flex cursor-pointer items-baseline justify-between gap-6 px-3 py-1.5 pointer-coarse:min-h-11 pointer-coarse:items-center -outline-offset-2 data-[highlighted]:bg-tint data-[disabled]:cursor-not-allowed data-[disabled]:opacity-50";
 
 export interface MenuProps {
   /** one button */
