@@ -128,9 +128,9 @@ export const demoPlans: DemoPlan[] = [
         inputs: { ...neutralLeach, metals: neutralLeach.metals.slice(0, 2) },
       },
       {
-        note: "Copper and cadmium watched, after the thickener overflow showed both.",
+        note: "Copper and cadmium watched, after the thickener overflow showed both; zincite named as what the calcine brings.",
         at: "2026-09-21T06:55:00.000Z",
-        inputs: neutralLeach,
+        inputs: { ...neutralLeach, feedMinerals: ["ZnO(s)"] },
       },
     ],
   },

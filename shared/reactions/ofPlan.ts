@@ -5,8 +5,8 @@ import type { Solution } from "../solution";
 import type { ChemicalData } from "../species/chemicalData";
 import { type OverallAtSetPoint, overallReaction } from "./atSetPoint";
 
-/** What a plan's overall reactions may start from: the feed's minerals, what is to be won as metal as it stands in the liquor, the metals
- *  themselves.
+/** What a plan's overall reactions may start from: the feed's minerals, what is to be won as metal as it stands in the liquor, and the
+ *  metals that no mineral brings, as metals.
  *  @param inputs, solution, data  of the plan     @returns  species ids, each once     @source  a choice */
 export function startsOf(
   { metals, feedMinerals }: Pick<PlanInputs, "metals" | "feedMinerals">,
@@ -17,7 +17,11 @@ export function startsOf(
     .filter((m) => m.requirement === "metal")
     .flatMap((m) => fields.filter((f) => f.metal === m.element && f.state === "dissolved"))
     .map((f) => f.species);
-  const elements = metals.map((m) => `${m.element}(s)`).filter((id) => data.species.has(id));
+  const brought = new Set(feedMinerals.flatMap((id) => Object.keys(data.species.get(id)?.composition ?? {})));
+  const elements = metals
+    .filter((m) => !brought.has(m.element))
+    .map((m) => `${m.element}(s)`)
+    .filter((id) => data.species.has(id));
   return [...new Set([...feedMinerals, ...ions, ...elements])];
 }
 

@@ -36,8 +36,9 @@ const amount = ({ outcome }: ReturnType<typeof of>, formula: string) =>
   outcome.ok ? outcome.value.demand.find((d) => d.formula === formula)?.kgPerKgMetal : undefined;
 
 describe("starts", () => {
-  test("feed minerals first, then what is won as it stands in the liquor, then the metals, each once", () => {
-    expect(startsOf(leach, solved(toProblem(leach, data)), data)).toEqual(["CuFeS2(s)", "Cu(s)"]);
+  test("feed minerals first, then what is won as it stands in the liquor, then the metals that no mineral brings, each once", () => {
+    expect(startsOf(leach, solved(toProblem(leach, data)), data)).toEqual(["CuFeS2(s)"]);
+    expect(startsOf({ ...leach, feedMinerals: [] }, solved(toProblem(leach, data)), data)).toEqual(["Cu(s)"]);
     const starts = startsOf(purification, solved(toProblem(purification, data)), data);
     expect(starts).toEqual(["CdSO4(aq)", "Cd(s)", "Zn(s)"]);
   });
