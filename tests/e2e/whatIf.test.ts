@@ -74,7 +74,7 @@ test("a draft beside a revision is what the address says, in the scale it was re
   await plan.drawn();
   await plan.type("Temperature of the liquor", "45");
   await plan.header().getByText("Unsaved changes").waitFor();
-  await page.waitForTimeout(500); // the draft is kept when the hand rests
+  // Gone at once: what was typed is kept on the way out.
   await page.goto(`${path}/compare?a=3&b=draft&scale=mV,SHE,liquor`);
   const sideB = (of: Page) => of.getByRole("combobox", { name: "Side B" });
   const words = (of: Page) => of.getByRole("region", { name: "The difference in words" });

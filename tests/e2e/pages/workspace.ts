@@ -75,6 +75,18 @@ export class WorkspaceScreen {
     return { pH: shownNumber(pH), Eh: shownNumber(EhText), EhText, limits };
   }
 
+  /** The same once it rests: the last move of a hand is drawn a moment after it was made. */
+  async restedAnswers(): Promise<Answers> {
+    let read = await this.answers();
+    for (let still = 0; still < 2;) {
+      await this.page.waitForTimeout(130);
+      const next = await this.answers();
+      still = JSON.stringify(next) === JSON.stringify(read) ? still + 1 : 0;
+      read = next;
+    }
+    return read;
+  }
+
   traces(): Promise<DrawnTrace[]> {
     return this.plot().evaluate((element) => {
       const { xaxis, yaxis } = (element as PlotlyElement)._fullLayout;
