@@ -2,9 +2,7 @@ import type { PlanInputs } from "../schemas/plan";
 import { componentKind } from "../selection/components";
 import { withoutTotal } from "../selection/missing";
 import type { ChemicalData } from "../species/chemicalData";
-
-/** What a component comes into a liquor with until somebody says how much there is, mol/L: common practice, no source. */
-export const FIRST_TOTAL = 0.01;
+import { FIRST_TOTAL } from "./totals";
 
 export interface MissingTotal {
   readonly component: string;

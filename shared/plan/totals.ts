@@ -2,6 +2,9 @@ import { massOf } from "../metallurgy/molarMass";
 import { SULFIDE_SULFUR } from "../selection/components";
 import type { ChemicalData } from "../species/chemicalData";
 
+/** What a component comes into a liquor with until somebody says how much there is, mol/L: common practice, no source. */
+export const FIRST_TOTAL = 0.01;
+
 /** What the trade weighs where a component is no element or group that stands by itself in a liquor. */
 const weighed: Readonly<Record<string, string>> = {
   S: "SO4^2-",

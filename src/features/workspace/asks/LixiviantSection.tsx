@@ -1,5 +1,5 @@
 import { presetCaution } from "../../../../shared/hazards/presetCautions";
-import { FIRST_TOTAL } from "../../../../shared/plan/missingTotals";
+import { FIRST_TOTAL } from "../../../../shared/plan/totals";
 import { presetNames } from "../../../../shared/schemas/plan";
 import { componentKind, SULFIDE_SULFUR } from "../../../../shared/selection/components";
 import { Check } from "../../../components/choice";

@@ -1,4 +1,5 @@
-import { FIRST_TOTAL, missingTotals, withMissingTotals } from "../../../../shared/plan/missingTotals";
+import { missingTotals, withMissingTotals } from "../../../../shared/plan/missingTotals";
+import { FIRST_TOTAL } from "../../../../shared/plan/totals";
 import { ligandWord } from "../../../../shared/words/componentWord";
 import { Button } from "../../../components/Button";
 import { SpeciesName } from "../../../components/Formula";
