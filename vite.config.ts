@@ -142,7 +142,7 @@ export default defineConfig({
           maxWorkers: 2,
           // What the tests compare with, solver and chemistry, is loaded once a worker.
           isolate: false,
-          testTimeout: 120_000,
+          testTimeout: 240_000,
           hookTimeout: 60_000,
           // A screen follows at once where nothing else runs; beside other work it may take a while.
           expect: { poll: { timeout: 15_000 } },
