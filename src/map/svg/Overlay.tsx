@@ -12,6 +12,7 @@ import { Axes } from "./Axes";
 import { HatchPattern } from "./HatchPattern";
 import { ProposalMarks } from "./ProposalMarks";
 import { ReachBars } from "./ReachBars";
+import { SheetSvg } from "./SheetSvg";
 import { limitMarks } from "./stripModel";
 import { Strips } from "./Strips";
 import { SvgText } from "./SvgText";
@@ -52,33 +53,25 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
     [window, freeAcid],
   );
   return (
-    <svg
-      xmlns="http://www.w3.org/2000/svg"
-      className="pointer-events-none absolute top-0 left-0"
-      width={sheet.width}
-      height={sheet.height}
-      aria-hidden
-      data-testid="map-overlay"
+    <SheetSvg
+      {...{ sheet, box }}
+      clip={`${id}-map`}
+      testId="map-overlay"
+      defs={drawnMetals(view).map((metal) => {
+        const hatch = hatches.get(metal.element);
+        return (
+          hatch && (
+            <HatchPattern
+              key={metal.element}
+              id={patternOf(metal.element)}
+              hatch={hatch}
+              colour={metalColour(metal, view)}
+              opacity={hatchWeight[metal.role] * emphasis(metal.element, view)}
+            />
+          )
+        );
+      })}
     >
-      <defs>
-        {drawnMetals(view).map((metal) => {
-          const hatch = hatches.get(metal.element);
-          return (
-            hatch && (
-              <HatchPattern
-                key={metal.element}
-                id={patternOf(metal.element)}
-                hatch={hatch}
-                colour={metalColour(metal, view)}
-                opacity={hatchWeight[metal.role] * emphasis(metal.element, view)}
-              />
-            )
-          );
-        })}
-        <clipPath id={`${id}-map`}>
-          <rect x={box.x0} y={box.y0} width={box.x1 - box.x0} height={box.y1 - box.y0} />
-        </clipPath>
-      </defs>
       <Axes sheet={sheet} visible={view.visible} scale={scale} colour={colours.ink} />
       <g clipPath={`url(#${id}-map)`}>
         {pinned && layers.crosscuts && <Pin at={toPixel(...pinned.through)} box={box} view={view} />}
@@ -109,7 +102,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
       {sheet.reach && (
         <ReachBars reaches={content.reaches} pH={(through ?? [view.frame.pH[0]])[0]} sheet={sheet} view={view} />
       )}
-    </svg>
+    </SheetSvg>
   );
 }
 

@@ -4,6 +4,7 @@ import { mapPixels, type Sheet } from "../boxes";
 import type { Coordinate, PlotTrace } from "../plotTypes";
 import type { MapView } from "../view";
 import { HatchPattern } from "./HatchPattern";
+import { SheetSvg } from "./SheetSvg";
 
 export interface ShapesProps {
   traces: readonly PlotTrace[];
@@ -21,32 +22,30 @@ export const Shapes = memo(function Shapes({ traces, sheet, visible, view: { sca
     pH: visible.pH,
     Eh: [scale.toShown(visible.Eh[0]), scale.toShown(visible.Eh[1])],
   });
-  const [width, height] = [box.x1 - box.x0, box.y1 - box.y0];
   return (
-    <svg
-      xmlns="http://www.w3.org/2000/svg"
-      className="pointer-events-none absolute top-0 left-0"
-      width={sheet.width}
-      height={sheet.height}
-      aria-hidden
-      data-testid="map-shapes"
+    <SheetSvg
+      {...{ sheet, box }}
+      clip={`${id}-clip`}
+      testId="map-shapes"
+      defs={traces.map(
+        ({ uid, fillpattern: p }) =>
+          p && <HatchPattern key={uid} id={`${id}-${uid}`} hatch={p} colour={p.fgcolor} opacity={p.fgopacity} />,
+      )}
     >
-      <defs>
-        <clipPath id={`${id}-clip`}>
-          <rect x={box.x0} y={box.y0} width={width} height={height} />
-        </clipPath>
-        {traces.map(
-          ({ uid, fillpattern: p }) =>
-            p && <HatchPattern key={uid} id={`${id}-${uid}`} hatch={p} colour={p.fgcolor} opacity={p.fgopacity} />,
-        )}
-      </defs>
-      <rect x={box.x0} y={box.y0} width={width} height={height} fill={colours.sheet} data-ground="" />
+      <rect
+        x={box.x0}
+        y={box.y0}
+        width={box.x1 - box.x0}
+        height={box.y1 - box.y0}
+        fill={colours.sheet}
+        data-ground=""
+      />
       <g clipPath={`url(#${id}-clip)`} strokeMiterlimit={2}>
         {traces.map((trace) => (
           <Shape key={trace.uid} trace={trace} pattern={`${id}-${trace.uid}`} toPixel={toPixel} />
         ))}
       </g>
-    </svg>
+    </SheetSvg>
   );
 });
 
