@@ -1,24 +1,22 @@
-import { fireEvent, render, screen } from "@testing-library/react";
-import { useState } from "react";
+import { fireEvent, screen } from "@testing-library/react";
 import { describe, expect, test } from "vitest";
 import { toProblem } from "../../../shared/plan/toProblem";
-import { planInputs, type PlanInputs } from "../../../shared/schemas/plan";
+import { planInputs } from "../../../shared/schemas/plan";
 import { beyondWords } from "../../../shared/hazards/words";
 import { limitSentences, namingOf } from "../../../shared/windows/limitWords";
 import { keptAt } from "../../../shared/windows/shutGround";
-import { AskingContext } from "../../../src/features/workspace/asks/context";
 import { KeptOutSection } from "../../../src/features/workspace/asks/KeptOutSection";
 import { addTotal, keepOut, letIn, setPreset } from "../../../src/features/workspace/model/edit";
 import { limitsTable } from "../../../src/features/workspace/model/exports";
 import { limitName } from "../../../src/features/trials/model/placeWords";
 import { newPlanInputs } from "../../../src/lib/newPlan";
 import { planChanges } from "../../../src/lib/planChanges";
-import { potentialScale } from "../../../src/lib/potential";
 import { mapContent } from "../../../src/map/content";
 import { keptNames } from "../../../src/map/names/anchoredNames";
 import { keptTraces } from "../../../src/map/traces/kept";
 import { view } from "../map/fixture";
 import { library, solved } from "../../support/solver";
+import { renderAsking } from "./askingStage";
 
 const gold = newPlanInputs({ step: "leach", preset: "cyanide", target: "Au", other: "Fe", temperatureC: 25 }, library);
 const rule = { gas: "HCN", pHAtLeast: 10.5 } as const;
@@ -86,43 +84,19 @@ describe("in the answers", () => {
   });
 });
 
-function Stage({ start }: { start: PlanInputs }) {
-  const [inputs, setInputs] = useState(start);
-  const asking = {
-    inputs,
-    edit: (change: (p: PlanInputs) => PlanInputs) => setInputs(change),
-    settle: () => {},
-    data: library,
-    solution: null,
-    failure: null,
-    setPoint: null,
-    scale: potentialScale("V"),
-    readOnly: false,
-    focus: null,
-    onFocus: () => {},
-  };
-  return (
-    <AskingContext value={asking}>
-      <KeptOutSection />
-      <output>{JSON.stringify(inputs.excludedHazards ?? [])}</output>
-    </AskingContext>
-  );
-}
-const kept = () => JSON.parse(screen.getByRole("status").textContent ?? "") as unknown;
-
 test("the asks: the rule's pH is typed, changed to a pressure, and let in", async () => {
-  render(<Stage start={gold} />);
+  const now = renderAsking(<KeptOutSection />, { from: gold });
   const pH = await screen.findByLabelText("Lowest pH against HCN");
   fireEvent.change(pH, { target: { value: "11" } });
   fireEvent.keyDown(pH, { key: "Enter" });
-  expect(kept()).toEqual([{ gas: "HCN", pHAtLeast: 11 }]);
+  expect(now().excludedHazards).toEqual([{ gas: "HCN", pHAtLeast: 11 }]);
   fireEvent.click(screen.getByRole("radio", { name: "by pressure" }));
   expect(screen.getByLabelText("Highest pressure of HCN")).toHaveProperty("value", "50");
   fireEvent.click(screen.getByRole("button", { name: "No longer keep HCN out" }));
-  expect(kept()).toEqual([]);
+  expect(now().excludedHazards ?? []).toEqual([]);
 });
 
 test("a gas that the liquor cannot give off says that it cuts nothing", async () => {
-  render(<Stage start={{ ...gold, ligands: [], preset: "water" }} />);
+  renderAsking(<KeptOutSection />, { from: { ...gold, ligands: [], preset: "water" } });
   expect(await screen.findByText(/Cuts nothing: the plan holds no cyanide/)).toBeTruthy();
 });
