@@ -2,60 +2,39 @@
  *  Fills a database of its own with 20,000 trials and prints how long the server takes for list pages, the map, summaries and
  *  files: over HTTP on loopback, signed in, answers read to the end. Beside the time on the wall stands what the processor
  *  worked, server and client together: on a machine with other work that is the number to trust. `LIST_TRIALS=2000` for less. */
-import { mkdtempSync, rmSync } from "node:fs";
-import { createServer } from "node:http";
-import type { AddressInfo } from "node:net";
-import { tmpdir } from "node:os";
-import { join } from "node:path";
-import pino from "pino";
-import { createApp } from "../../server/app";
-import { readTables } from "../../server/chemistry/readTables";
-import { readConfig } from "../../server/config";
-import { migrateDatabase } from "../../server/db/migrate";
-import { openDatabase } from "../../server/db/open";
-import { seedDemo } from "../../server/demo/seed";
-import { createSessions } from "../../server/features/auth/sessions";
-import { createChemistry } from "../../server/features/chemistry/library";
-import { keepVersion } from "../../server/features/chemistry/service";
-import { createMailer } from "../../server/features/mailbox/mailer";
 import { trialSorts } from "../../shared/schemas/trial";
-import { solve } from "../../shared/solve";
 import { fillTrials } from "./fill/trials";
 import { median, table } from "./rivals/measure";
+import { startBenchServer, type BenchServer } from "./server/benchServer";
 
 const wanted = Number(process.env.LIST_TRIALS ?? 20_000);
 const rounds = 15;
-const folder = mkdtempSync(join(tmpdir(), "gangueway-bench-"));
 
-const open = openDatabase(join(folder, "bench.db"));
-migrateDatabase(open);
-open.raw.pragma("synchronous = OFF"); // filling is not what is measured
-const { db } = open;
-const { tables } = readTables();
-const clock = () => new Date();
-keepVersion(db, tables, clock());
-const chemistry = createChemistry(db, tables, clock());
+type Filled = ReturnType<typeof fillTrials>;
 
 async function main(): Promise<void> {
-  await seedDemo(db, chemistry);
-  const began = performance.now();
-  const { trialCount, campaignIds, mapCampaigns, planId } = fillTrials(open, chemistry, wanted);
-  console.log(
-    `${trialCount} trials in ${campaignIds.length} campaigns, filled in ${((performance.now() - began) / 1000).toFixed(0)} s\n`,
-  );
+  let filled: Filled | undefined;
+  const server = await startBenchServer(({ open, chemistry }) => {
+    const began = performance.now();
+    filled = fillTrials(open, chemistry, wanted);
+    console.log(
+      `${filled.trialCount} trials in ${filled.campaignIds.length} campaigns, filled in ${((performance.now() - began) / 1000).toFixed(0)} s\n`,
+    );
+  });
+  try {
+    await measure(server, filled!);
+  } finally {
+    server.end();
+  }
+}
 
-  const config = readConfig({ LOG_LEVEL: "silent" });
-  const sessions = createSessions(db, { https: false, days: 1 });
-  const mailer = createMailer(db, { smtpUrl: null, from: config.mailFrom, clock });
-  const log = pino({ level: "silent" });
-  const server = createServer(createApp({ db, config, clock, log, sessions, mailer, chemistry, solve }, folder));
-  await new Promise<void>((resolve) => server.listen(0, "127.0.0.1", resolve));
-  const { port } = server.address() as AddressInfo;
-  const cookie = (await sessions.start("demo-manager")).split(";")[0] ?? "";
+async function measure({ baseURL, cookieOf }: BenchServer, filled: Filled): Promise<void> {
+  const { trialCount, campaignIds, mapCampaigns, planId } = filled;
+  const cookie = await cookieOf("demo-manager");
 
   const get = async (path: string): Promise<{ wall: number; cpu: number }> => {
     const [from, worked] = [performance.now(), process.cpuUsage()];
-    const answer = await fetch(`http://127.0.0.1:${port}${path}`, { headers: { cookie, "accept-encoding": "gzip" } });
+    const answer = await fetch(`${baseURL}${path}`, { headers: { cookie, "accept-encoding": "gzip" } });
     const { byteLength } = await answer.arrayBuffer();
     if (!answer.ok || byteLength === 0) throw new Error(`${path}: ${answer.status}`);
     const { user, system } = process.cpuUsage(worked);
@@ -103,16 +82,9 @@ async function main(): Promise<void> {
   console.log(
     `A file of all ${trialCount} trials: ${(wall / 1000).toFixed(1)} s, processor ${(cpu / 1000).toFixed(1)} s\n`,
   );
-  server.closeAllConnections();
-  server.close();
 }
 
-main()
-  .catch((error: unknown) => {
-    console.error(error);
-    process.exitCode = 1;
-  })
-  .finally(() => {
-    open.raw.close();
-    rmSync(folder, { recursive: true, force: true });
-  });
+main().catch((error: unknown) => {
+  console.error(error);
+  process.exitCode = 1;
+});

@@ -2,43 +2,13 @@
  *  Opens the plan workspace in Chromium with 2,000 trials on one map and with the same map without them, and prints how long the page
  *  takes from an input to the frame that shows it, while the map is panned, zoomed, pointed over and brushed. Nothing is asserted: the
  *  machine may be busy. `MAP_TRIALS=500` for fewer, `CLIENT_FOLDER=…` for a client built elsewhere. */
-import { existsSync, mkdtempSync, rmSync } from "node:fs";
-import { createServer } from "node:http";
-import type { AddressInfo } from "node:net";
-import { tmpdir } from "node:os";
-import { join, resolve } from "node:path";
-import pino from "pino";
-import { chromium, type CDPSession, type Page } from "playwright-core";
-import { createApp } from "../../server/app";
-import { readTables } from "../../server/chemistry/readTables";
-import { readConfig } from "../../server/config";
-import { migrateDatabase } from "../../server/db/migrate";
-import { openDatabase } from "../../server/db/open";
-import { seedDemo } from "../../server/demo/seed";
-import { createSessions } from "../../server/features/auth/sessions";
-import { createChemistry } from "../../server/features/chemistry/library";
-import { keepVersion } from "../../server/features/chemistry/service";
-import { createMailer } from "../../server/features/mailbox/mailer";
+import type { CDPSession, Page } from "playwright-core";
 import { setPreferences } from "../../server/features/members/service";
-import { findChromium } from "../../server/tools/chromium.mjs";
-import { solve } from "../../shared/solve";
+import { benchMember, startBenchApp } from "./browser/app";
 import { fillTrials } from "./fill/trials";
 import { table } from "./rivals/measure";
 
 const wanted = Number(process.env.MAP_TRIALS ?? 2000);
-const clientFolder = resolve(process.env.CLIENT_FOLDER ?? "dist/client");
-if (!existsSync(join(clientFolder, "index.html"))) throw new Error("The client is not built: npm run build.");
-
-const member = "demo-metallurgist";
-const folder = mkdtempSync(join(tmpdir(), "gangueway-bench-"));
-const open = openDatabase(join(folder, "bench.db"));
-migrateDatabase(open);
-open.raw.pragma("synchronous = OFF"); // filling is not what is measured
-const { db } = open;
-const { tables } = readTables();
-const clock = () => new Date();
-keepVersion(db, tables, clock());
-const chemistry = createChemistry(db, tables, clock());
 
 /** The part of the page's window that the measurement needs. */
 interface Timed {
@@ -155,37 +125,22 @@ async function measured(page: Page, url: string): Promise<Map<string, Found>> {
 }
 
 async function main(): Promise<void> {
-  await seedDemo(db, chemistry);
-  // About half of the demo's trials lie on the plan that is opened.
-  const { planId } = fillTrials(open, chemistry, Math.ceil(wanted * 2.06));
-  const config = readConfig({ LOG_LEVEL: "silent" });
-  const sessions = createSessions(db, { https: false, days: 1 });
-  const mailer = createMailer(db, { smtpUrl: null, from: config.mailFrom, clock });
-  const log = pino({ level: "silent" });
-  const server = createServer(createApp({ db, config, clock, log, sessions, mailer, chemistry, solve }, clientFolder));
-  await new Promise<void>((listening) => server.listen(0, "127.0.0.1", listening));
-  const baseURL = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
-  const [name = "", value = ""] = ((await sessions.start(member)).split(";")[0] ?? "").split("=");
-
-  const executablePath = findChromium();
-  if (executablePath === undefined) throw new Error("No Chromium: see the README.");
-  const browser = await chromium.launch({ executablePath, args: ["--disable-gpu", "--disable-background-networking"] });
+  let planId = "";
+  const app = await startBenchApp(({ open, chemistry }) => {
+    // About half of the demo's trials lie on the plan that is opened.
+    ({ planId } = fillTrials(open, chemistry, Math.ceil(wanted * 2.06)));
+  });
   const runs: { trials: number; found: Map<string, Found> }[] = [];
   for (const trials of [false, true]) {
-    setPreferences(db, member, { layers: { trials } });
-    const context = await browser.newContext({ baseURL, viewport: { width: 1280, height: 800 } });
-    await context.addCookies([{ name, value, url: baseURL }]);
+    setPreferences(app.open.db, benchMember, { layers: { trials } });
+    const context = await app.signedIn();
     const page = await context.newPage();
     const found = await measured(page, `/plans/${planId}`);
     const shown = await page.getByRole("tab", { name: /^Trials/ }).allTextContents();
     runs.push({ trials: Number(/\d+/.exec(shown[0] ?? "")?.[0] ?? 0), found });
     await context.close();
   }
-  await browser.close();
-  server.close();
-  server.closeAllConnections();
-  open.raw.close();
-  rmSync(folder, { recursive: true, force: true });
+  await app.end();
 
   const [without, withThem] = runs as [(typeof runs)[0], (typeof runs)[0]];
   console.log(
