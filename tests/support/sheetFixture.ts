@@ -48,3 +48,19 @@ export const sheetRevision = (dataVersion: string, inputs = sheetInputs): Revisi
   dataVersion,
   inputs,
 });
+
+/** Cadmium cemented on zinc dust, arsenic beside it. */
+export const dustInputs: PlanInputs = {
+  ...sheetInputs,
+  temperatureC: 55,
+  metals: [
+    metal("Cd", "gangue", "metal", 1e-6),
+    metal("Zn", "target", "dissolved", 0.1),
+    metal("As", "watched", "free", 1e-4),
+  ],
+  feedMinerals: [],
+  dosed: [],
+  leftOut: [],
+  frame: { pH: [1, 7], Eh: [-1.2, 0.6] },
+  water: { bound: "upper" },
+};

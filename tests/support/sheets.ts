@@ -3,7 +3,10 @@ import { windowSheet } from "../../server/features/windowSheet/page";
 import { workOf } from "../../server/features/windowSheet/work";
 import { valueOf } from "../../shared/outcome";
 import type { ProjectRow } from "../../shared/schemas/api";
+import { toProblem } from "../../shared/plan/toProblem";
 import type { PlanInputs, PlanRow } from "../../shared/schemas/plan";
+import type { Point } from "../../shared/solution";
+import { solve } from "../../shared/solve";
 import { readPdf, type PdfText, type ReadPdf } from "./pdf";
 import { sheetInputs, sheetPlan, sheetRevision } from "./sheetFixture";
 import { library, tables } from "./testServer";
@@ -49,3 +52,21 @@ export function collisions({ texts }: ReadPdf): string[] {
   });
   return found;
 }
+
+/** The plan solved as its sheet draws it. */
+export const solved = (inputs: PlanInputs) => valueOf(solve(toProblem(inputs, library), library, { shutGround: true }));
+
+/** Whether a closed path of the page has the shape of a ring in (pH, Eh), whatever the scales. */
+export const outlineDrawn = ({ paths }: ReadPdf, ring: readonly Point[]): boolean => {
+  const [xs, ys] = [ring.map((p) => p[0]), ring.map((p) => -p[1])];
+  const size = (v: readonly number[]) => Math.max(...v) - Math.min(...v);
+  const want = ring.map(([x, y]) => [(x - Math.min(...xs)) / size(xs), (-y - Math.min(...ys)) / size(ys)] as const);
+  return paths.some((path) => {
+    if (path.length !== ring.length) return false;
+    const [px, py] = [path.map((p) => p[0]), path.map((p) => p[1])];
+    return path.every(([x, y], i) => {
+      const [u, v] = [(x - Math.min(...px)) / size(px), (y - Math.min(...py)) / size(py)];
+      return Math.hypot(u - want[i]![0], v - want[i]![1]) < 1e-3;
+    });
+  });
+};
