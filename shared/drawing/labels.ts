@@ -1,3 +1,5 @@
+import { insideLoop } from "../geometry/loop";
+
 /** Label placement in pixels of the map, y downwards. Pure; nothing here knows chemistry. */
 export type Pixel = readonly [x: number, y: number];
 export interface Box {
@@ -25,17 +27,6 @@ const FINE = 5;
 const GROWTH = [1, 1.25, 1.6, 2.1, 2.8] as const;
 
 const overlaps = (a: Box, b: Box): boolean => a.x0 < b.x1 && b.x0 < a.x1 && a.y0 < b.y1 && b.y0 < a.y1;
-
-/** Even-odd, for rings of any shape. */
-function inside(ring: readonly Pixel[], x: number, y: number): boolean {
-  let odd = false;
-  for (let i = 0, j = ring.length - 1; i < ring.length; j = i++) {
-    const [ax, ay] = ring[i] as Pixel;
-    const [bx, by] = ring[j] as Pixel;
-    if (ay > y !== by > y && x < ax + ((y - ay) / (by - ay)) * (bx - ax)) odd = !odd;
-  }
-  return odd;
-}
 
 /** Clips a polygon to a box (Sutherland and Hodgman 1974). */
 export function clipToBox(ring: readonly Pixel[], { x0, y0, x1, y1 }: Box): Pixel[] {
@@ -142,10 +133,10 @@ function place(
   const bounds = pieces.map(boundsOf);
   const holes = wish.holes ?? [];
   const within = ([x, y]: Pixel) =>
-    !holes.some((ring) => inside(ring, x, y)) &&
+    !holes.some((ring) => insideLoop(ring, x, y)) &&
     pieces.some((ring, i) => {
       const b = bounds[i] as Box;
-      return x >= b.x0 && x <= b.x1 && y >= b.y0 && y <= b.y1 && inside(ring, x, y);
+      return x >= b.x0 && x <= b.x1 && y >= b.y0 && y <= b.y1 && insideLoop(ring, x, y);
     });
   const fits = (x: number, y: number, growth: number) =>
     around(centredBox(x, y, wish.width * growth, wish.height * growth)).every(within);

@@ -24,3 +24,19 @@ export function sideOfLoop(loop: readonly Corner[], x: number, y: number): -1 | 
 }
 
 const between = (a: number, b: number, v: number): boolean => (a <= v && v <= b) || (b <= v && v <= a);
+
+/** Whether a point lies inside a closed loop of corners, for drawing: in floating point, so that a point on an edge may count either way.
+ *  @param loop  corners, either direction     @param x, y  the point, same units
+ *  @source  crossing count; where the answer decides something, sideOfLoop
+ *  @example insideLoop([[0, 0], [2, 0], [0, 2]], 0.5, 0.5) // => true
+ *  @example insideLoop([[0, 0], [2, 0], [0, 2]], 2, 2) // => false */
+export function insideLoop(loop: readonly Corner[], x: number, y: number): boolean {
+  let inside = false;
+  let p = loop.at(-1);
+  for (const q of loop) {
+    if (p !== undefined && p[1] > y !== q[1] > y && x < p[0] + ((y - p[1]) / (q[1] - p[1])) * (q[0] - p[0]))
+      inside = !inside;
+    p = q;
+  }
+  return inside;
+}

@@ -1,15 +1,9 @@
+import { sideOfLoop } from "../geometry/loop";
 import type { Outline, Point } from "../solution";
 
-/** Whether a point lies inside an outline, its holes left out: crossing number. */
-function holds({ outer, holes }: Outline, [x, y]: Point): boolean {
-  let inside = false;
-  for (const ring of [outer, ...holes])
-    ring.forEach(([ax, ay], i) => {
-      const [bx, by] = ring[(i + 1) % ring.length] ?? [ax, ay];
-      if (ay > y !== by > y && x < ax + ((y - ay) / (by - ay)) * (bx - ax)) inside = !inside;
-    });
-  return inside;
-}
+/** Whether a point lies inside an outline, its holes left out. */
+const holds = ({ outer, holes }: Outline, [x, y]: Point): boolean =>
+  sideOfLoop(outer, x, y) > 0 && holes.every((hole) => sideOfLoop(hole, x, y) < 0);
 
 const sidesOf = ({ outer, holes }: Outline): [Point, Point][] =>
   [outer, ...holes].flatMap((ring) => ring.map((p, i): [Point, Point] => [p, ring[(i + 1) % ring.length] ?? p]));
