@@ -1,9 +1,9 @@
 import { useState } from "react";
 import type { DemoAccounts } from "../../../shared/schemas/member";
 import { SectionHead } from "../../components/text";
-
 import { usePageTitle } from "../../lib/title";
 import SignInForm from "./SignInForm";
+import { WindowSketch } from "./WindowSketch";
 
 const answers = [
   [
@@ -24,11 +24,19 @@ export default function SignInPage({ demo }: { demo: DemoAccounts | null }) {
         <h1 className="text-lg">Gangueway</h1>
       </header>
       <main className="grid flex-1 md:grid-cols-[1fr_420px]">
-        <div className="px-5 pt-[9vh] pb-10 md:pr-16">
+        <div className="px-5 pt-[5vh] pb-10 md:pr-16">
           <p className="max-w-[24em] font-mono text-xl font-bold">
             Process windows for leach, purification and cementation circuits
           </p>
-          <dl className="mt-8 max-w-[620px] border-t border-ink">
+          <figure className="mt-5">
+            <WindowSketch width={760} height={310} className="max-xl:hidden" />
+            <WindowSketch width={400} height={330} className="xl:hidden" />
+            <figcaption className="max-w-[760px] text-sm text-muted">
+              Neutral leach of an invented zinc calcine. Hatched ground is shut by a metal; the square is the set point
+              with what its control loop needs.
+            </figcaption>
+          </figure>
+          <dl className="mt-5 max-w-[760px] border-t border-ink">
             {answers.map(([question, answer]) => (
               <div key={question} className="hairline grid grid-cols-[7em_1fr] gap-3 py-3">
                 <dt className="font-mono font-bold">{question}</dt>
@@ -36,12 +44,12 @@ export default function SignInPage({ demo }: { demo: DemoAccounts | null }) {
               </div>
             ))}
           </dl>
-          <p className="mt-4 max-w-[620px] text-sm text-muted">
+          <p className="mt-4 max-w-[760px] text-sm text-muted">
             Decision support. It says what can happen, not how fast, and it does not replace test work, the site’s
             procedures or licensed practice.
           </p>
         </div>
-        <div className="space-y-8 border-rule px-5 pt-[9vh] pb-10 max-md:border-t md:border-l md:px-8">
+        <div className="space-y-8 border-rule px-5 pt-[5vh] pb-10 max-md:border-t md:border-l md:px-8">
           <section>
             <SectionHead>Sign in</SectionHead>
             <div className="pt-4">
