@@ -4,7 +4,15 @@ import type { StageSummary } from "../trials/summary";
 
 /** Whose figures they are, and what inside and outside are judged against. */
 export interface SummaryHead {
-  campaign: { id: string; code: string; title: string; question: string; projectName: string; invented: boolean };
+  campaign: {
+    id: string;
+    code: string;
+    title: string;
+    question: string;
+    projectId: string;
+    projectName: string;
+    invented: boolean;
+  };
   plan: {
     id: string;
     name: string;

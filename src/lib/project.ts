@@ -38,7 +38,10 @@ export function useProject(): { project: ProjectRow | undefined; projects: Proje
   return { projects, project: projects?.find((p) => p.id === id) ?? projects?.[0] };
 }
 
-/** A screen of one record: its project becomes the one in hand, so that the way back leads to its own lists. */
-export function useProjectOf(projectId: string): void {
-  useEffect(() => selectProject(projectId), [projectId]);
+/** A screen of one record: its project becomes the one in hand, so that the way back leads to its own lists.
+ *  @param projectId  undefined until the record is read */
+export function useProjectOf(projectId: string | undefined): void {
+  useEffect(() => {
+    if (projectId !== undefined) selectProject(projectId);
+  }, [projectId]);
 }

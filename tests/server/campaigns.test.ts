@@ -221,6 +221,7 @@ test("the summary counts inside and outside against the plan revision, apart wha
     code: "C-26A",
     title: unusualCampaign.title,
     question: unusualCampaign.question,
+    projectId: campaign.projectId,
     projectName: "Calcine",
     invented: false,
   });

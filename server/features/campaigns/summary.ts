@@ -57,12 +57,12 @@ function sideOf(db: Db, solved: RevisionSolver, id: string, path: string): Side 
     const judgement = judgementOf(point, against);
     return [{ ...point, kind: point.compared.kind, judgement, comparability: comparabilityOf(point, stage, against) }];
   });
-  const { code, title, question, projectName, invented, planId } = campaign;
+  const { code, title, question, projectId, projectName, invented, planId } = campaign;
   return {
     campaign,
     trials,
     head: {
-      campaign: { id, code, title, question, projectName, invented },
+      campaign: { id, code, title, question, projectId, projectName, invented },
       plan: {
         id: planId,
         name: storedPlan(db, planId).name,

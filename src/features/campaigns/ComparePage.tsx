@@ -10,7 +10,7 @@ import { useCampaignPair, useCampaigns } from "../../lib/campaigns";
 import { downloadText } from "../../lib/csv";
 import { counted } from "../../lib/format";
 import { placedTrials } from "../../lib/judgedTrials";
-import { useProject } from "../../lib/project";
+import { useProject, useProjectOf } from "../../lib/project";
 import { useSolvedRevision } from "../../lib/solvedRevision";
 import { usePageTitle } from "../../lib/title";
 import { useCampaignTrials } from "../../lib/trials";
@@ -26,6 +26,7 @@ export default function ComparePage() {
   const campaigns = useCampaigns(project?.id).data ?? [];
   const pair = useCampaignPair(a, b);
   const data = pair.data;
+  useProjectOf(data?.left.campaign.projectId);
   usePageTitle(data ? `${data.left.campaign.code} against ${data.right.campaign.code}` : "Compare campaigns");
   const choose = (name: "a" | "b", label: string, value: string) => (
     <Select

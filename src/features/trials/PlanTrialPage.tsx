@@ -7,7 +7,7 @@ import { Empty, Note } from "../../components/text";
 import { useCampaign, useCampaigns } from "../../lib/campaigns";
 import { useChemistry } from "../../lib/chemistry";
 import { useFeeds } from "../../lib/feeds";
-import { useProject } from "../../lib/project";
+import { useProject, useProjectOf } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { useSolvedRevision } from "../../lib/solvedRevision";
 import { usePageTitle } from "../../lib/title";
@@ -22,6 +22,7 @@ export default function PlanTrialPage() {
   const { project } = useProject();
   const wanted = search.get("campaign") ?? undefined;
   const campaign = useCampaign(wanted);
+  useProjectOf(campaign.data?.projectId);
   const projectId = campaign.data?.projectId ?? project?.id;
   const campaigns = useCampaigns(projectId);
   const feeds = useFeeds(projectId);
