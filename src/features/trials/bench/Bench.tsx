@@ -162,7 +162,7 @@ export function Bench({ trial, campaign, data }: { trial: TrialRow; campaign: Ca
               End the trial
             </button>
           </div>
-          <div className="grid gap-5 px-5 py-4 sm:grid-cols-[minmax(0,1fr)_330px]">
+          <div className="grid gap-5 px-5 py-4 sm:grid-cols-[minmax(0,1fr)_330px] sm:[&>:last-child]:sticky sm:[&>:last-child]:top-4 sm:[&>:last-child]:self-start">
             {task === "reading" && (
               <ReadingPanel
                 {...shared}

@@ -85,34 +85,41 @@ export function ReadingPanel({ form, carried, change, minutes, busy, onKeep }: R
   const step = stepFromLast(reading, readings, electrodes);
   return (
     <>
-      <div className="space-y-3">
-        {big("pH", "pH", {
-          aside: form.cooled ? "of a cooled sample" : "in the pulp",
-          said: [pHSaid(form, readings), said?.held ?? null, said?.place ?? null],
-        })}
-        <div className="grid grid-cols-2 gap-3">
-          <BigButton pressed={form.cooled} onClick={() => change({ cooled: !form.cooled })}>
-            Cooled sample
-          </BigButton>
-          {form.cooled ? (
-            big("pHTemperature", "Its temperature", { unit: "°C" })
-          ) : (
-            <p className="self-center text-sm text-muted">A pH is kept as read, with the temperature it was read at.</p>
-          )}
+      {/* Wide: pH and ORP side by side, so that the whole question stands above the fold. */}
+      <div className="grid content-start gap-3 lg:grid-cols-2">
+        <div className="space-y-3">
+          {big("pH", "pH", {
+            aside: form.cooled ? "of a cooled sample" : "in the pulp",
+            said: [pHSaid(form, readings), said?.held ?? null, said?.place ?? null],
+          })}
+          <div className="grid grid-cols-2 gap-3">
+            <BigButton pressed={form.cooled} onClick={() => change({ cooled: !form.cooled })}>
+              Cooled sample
+            </BigButton>
+            {form.cooled ? (
+              big("pHTemperature", "Its temperature", { unit: "°C" })
+            ) : (
+              <p className="self-center text-sm text-muted">
+                A pH is kept as read, with the temperature it was read at.
+              </p>
+            )}
+          </div>
         </div>
-        {big("orp", "ORP as read", {
-          unit: "mV",
-          aside: electrodeName(electrodes, form.electrode),
-          said: [orpWords, step === null ? null : { text: step, tone: "quiet" }],
-          error: shown("orp") ?? (pressed || hasText(form.orp) ? problems.electrode : undefined),
-        })}
-        <div className="grid grid-cols-2 gap-3">
-          <BigButton onClick={() => setChoosing(true)}>
-            {form.electrode === null ? "Choose the electrode" : "Other electrode"}
-          </BigButton>
-          {big("electrodeTemperature", "Electrode at", { unit: "°C", placeholder: "as the pulp" })}
+        <div className="space-y-3">
+          {big("orp", "ORP as read", {
+            unit: "mV",
+            aside: electrodeName(electrodes, form.electrode),
+            said: [orpWords, step === null ? null : { text: step, tone: "quiet" }],
+            error: shown("orp") ?? (pressed || hasText(form.orp) ? problems.electrode : undefined),
+          })}
+          <div className="grid grid-cols-2 gap-3">
+            <BigButton onClick={() => setChoosing(true)}>
+              {form.electrode === null ? "Choose the electrode" : "Other electrode"}
+            </BigButton>
+            {big("electrodeTemperature", "Electrode at", { unit: "°C", placeholder: "as the pulp" })}
+          </div>
         </div>
-        <div className="grid grid-cols-2 gap-3">
+        <div className="grid grid-cols-2 gap-3 lg:col-span-2">
           {big("temperature", "Pulp temperature", { unit: "°C", said: [temperatureSaid(form, values)] })}
           {big("at", "Minutes since the start", {
             unit: "min",
@@ -126,7 +133,7 @@ export function ReadingPanel({ form, carried, change, minutes, busy, onKeep }: R
           })}
         </div>
         {pressed && problems.none !== undefined && (
-          <p role="alert" className="text-base font-bold text-signal">
+          <p role="alert" className="text-base font-bold text-signal lg:col-span-2">
             {problems.none}
           </p>
         )}
