@@ -10,6 +10,7 @@ import { ErrorNote, Loading } from "../../components/status";
 import { Note, SectionHead } from "../../components/text";
 import { TextField } from "../../components/TextField";
 import { api } from "../../lib/api";
+import { ApiFailure } from "../../lib/failure";
 import { fullTime } from "../../lib/format";
 import { keys } from "../../lib/queries";
 import { useSessionQuery } from "../../lib/session";
@@ -33,7 +34,10 @@ export default function InvitationPage() {
             className="mt-6"
             doing="This link opens nothing"
             error={offer.error}
-            retry={() => void offer.refetch()}
+            // A link that is used up, taken back or cut short stays so.
+            {...(offer.error instanceof ApiFailure && offer.error.status < 500
+              ? {}
+              : { retry: () => void offer.refetch() })}
           />
           <div className="mt-6">
             <ButtonLink to="/">To the sign-in</ButtonLink>
