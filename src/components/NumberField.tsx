@@ -1,6 +1,7 @@
 import { useId, useRef, useState, type KeyboardEvent, type ReactNode } from "react";
 import { classes } from "../lib/classes";
 import { inputTextExact, outOfBounds, parseNumber, withUnit } from "../lib/format";
+import { FieldFrame } from "./FieldFrame";
 
 export interface NumberFieldProps {
   /** accessible name; also drawn unless `labelText` says otherwise */
@@ -157,27 +158,10 @@ export function NumberField(props: NumberFieldProps) {
       </span>
     );
   }
-  if (layout === "stacked") {
-    return (
-      <div className={props.className}>
-        <label htmlFor={id} className="mb-1 block text-sm">
-          {labelText ?? label}
-        </label>
-        {field}
-        {below}
-      </div>
-    );
-  }
   return (
-    <div className={classes("hairline py-1", props.className)}>
-      <div className="flex items-baseline justify-between gap-3">
-        <label htmlFor={id} className="min-w-0">
-          {labelText ?? label}
-        </label>
-        {field}
-      </div>
-      {below}
-    </div>
+    <FieldFrame {...{ id, layout, below }} label={labelText ?? label} className={props.className}>
+      {field}
+    </FieldFrame>
   );
 }
 

@@ -1,5 +1,6 @@
 import { useEffect, useId, useRef, type KeyboardEvent, type ReactNode } from "react";
 import { classes } from "../lib/classes";
+import { FieldFrame } from "./FieldFrame";
 import { lateFailure, useLate } from "./useLate";
 
 const loadList = () => import("./SelectList");
@@ -108,26 +109,9 @@ export function Select<Value extends string>(props: SelectProps<Value>) {
     </>
   );
   if (layout === "bare") return control;
-  if (layout === "stacked") {
-    return (
-      <div className={props.className}>
-        <label htmlFor={id} className="mb-1 block text-sm">
-          {labelText ?? label}
-        </label>
-        {control}
-        {below}
-      </div>
-    );
-  }
   return (
-    <div className={classes("hairline py-1", props.className)}>
-      <div className="flex items-baseline justify-between gap-3">
-        <label htmlFor={id} className="min-w-0">
-          {labelText ?? label}
-        </label>
-        {control}
-      </div>
-      {below}
-    </div>
+    <FieldFrame {...{ id, layout, below }} label={labelText ?? label} className={props.className}>
+      {control}
+    </FieldFrame>
   );
 }

@@ -50,6 +50,31 @@ export function Loading({ label = "Reading" }: { label?: string }) {
   );
 }
 
+/** In the place of a record's screen until it is read: that it is on its way, or why not and the way to ask again.
+ *  @param what  the kind of record: "feed"     @param asked  all that the screen needs */
+export function Opening({
+  what,
+  asked,
+}: {
+  what: string;
+  asked: readonly { error: unknown; refetch: () => unknown }[];
+}) {
+  const error = asked.find((query) => query.error !== null)?.error;
+  return (
+    <div className="measure px-5 py-3">
+      {error === undefined ? (
+        <Loading label={`Opening the ${what}`} />
+      ) : (
+        <ErrorNote
+          doing={`The ${what} could not be opened`}
+          error={error}
+          retry={() => asked.forEach((query) => void query.refetch())}
+        />
+      )}
+    </div>
+  );
+}
+
 /** A moving hairline while the end is unknown, a growing one when `share` (0 to 1) is given. */
 export function Progress({ share, label }: { share?: number; label?: string }) {
   return (

@@ -86,3 +86,6 @@ const startOfDay = (d: Date) => new Date(d.getFullYear(), d.getMonth(), d.getDat
 
 /** "1 revision", "2 revisions" */
 export const counted = (n: number, one: string, many = `${one}s`): string => `${n} ${n === 1 ? one : many}`;
+
+/** "the window" -> "The window" */
+export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -4,13 +4,15 @@ import { Button } from "../../components/Button";
 import { ConflictDialog } from "../../components/ConflictDialog";
 import { DraftStatus } from "../../components/DraftStatus";
 import { EntryGrid } from "../../components/EntryGrid";
+import { PageHead } from "../../components/PageHead";
 import type { GridColumn } from "../../components/entryGridModel";
 import { Select } from "../../components/Select";
-import { ErrorNote, Loading } from "../../components/status";
+import { ErrorNote, Opening } from "../../components/status";
 import { Note, Remark, SectionHead } from "../../components/text";
 import { TextArea, TextField } from "../../components/TextField";
 import { useCampaign, useUpdateCampaign } from "../../lib/campaigns";
 import { usePlans, useRevisions } from "../../lib/plans";
+import { useProjectOf } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
 import { useRecordDraft } from "../../lib/useRecordDraft";
@@ -22,19 +24,7 @@ export default function CampaignEditPage() {
   const campaign = useCampaign(campaignId);
   usePageTitle(campaign.data ? `Edit ${campaign.data.code}` : "Campaign");
   if (campaign.data) return <Edit key={campaignId} campaign={campaign.data} />;
-  return (
-    <div className="measure px-5 py-3">
-      {campaign.error ? (
-        <ErrorNote
-          doing="The campaign could not be opened"
-          error={campaign.error}
-          retry={() => void campaign.refetch()}
-        />
-      ) : (
-        <Loading label="Opening the campaign" />
-      )}
-    </div>
-  );
+  return <Opening what="campaign" asked={[campaign]} />;
 }
 
 const stageColumns = (usual: readonly string[]): GridColumn<CampaignStage>[] => [
@@ -90,6 +80,7 @@ const stageColumns = (usual: readonly string[]): GridColumn<CampaignStage>[] => 
 /** Question, plan and stages of a campaign. */
 function Edit({ campaign }: { campaign: CampaignRow }) {
   const navigate = useNavigate();
+  useProjectOf(campaign.projectId);
   const readOnly = !useMay("review") || campaign.deletedAt !== null;
   const update = useUpdateCampaign();
   const draft = useRecordDraft<CampaignValues, CampaignRow>({
@@ -114,13 +105,15 @@ function Edit({ campaign }: { campaign: CampaignRow }) {
   const planChanged = values.planId !== campaign.planId || values.planRevision !== campaign.planRevision;
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <Link to={`/campaigns/${campaign.id}`} className="text-sm text-muted">
-          {campaign.code}
-        </Link>
-        <h1 className="text-lg">Edit the campaign</h1>
-        <DraftStatus draft={draft} />
-        <span className="flex-1" />
+      <PageHead
+        up={
+          <Link to={`/campaigns/${campaign.id}`} className="text-sm text-muted">
+            {campaign.code}
+          </Link>
+        }
+        title="Edit the campaign"
+        about={<DraftStatus draft={draft} />}
+      >
         {!readOnly && (
           <>
             <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl+Z">
@@ -136,7 +129,7 @@ function Edit({ campaign }: { campaign: CampaignRow }) {
             </Button>
           </>
         )}
-      </div>
+      </PageHead>
       <ConflictDialog
         conflicts={draft.conflicts}
         what={`campaign ${campaign.code}`}

@@ -4,8 +4,9 @@ import type { CampaignRow } from "../../../shared/schemas/campaign";
 import { Button, ButtonLink } from "../../components/Button";
 import { HistoryDialog } from "../../components/HistoryDialog";
 import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../components/Menu";
+import { PageHead } from "../../components/PageHead";
 import { ReasonDialog } from "../../components/ReasonDialog";
-import { ErrorNote, Loading, Status } from "../../components/status";
+import { ErrorNote, Loading, Opening, Status } from "../../components/status";
 import { Note, Remark, Row, SectionHead } from "../../components/text";
 import {
   useCampaign,
@@ -29,19 +30,7 @@ export default function CampaignPage() {
   const campaign = useCampaign(campaignId);
   usePageTitle(campaign.data ? `Campaign ${campaign.data.code}` : "Campaign");
   if (campaign.data) return <Campaign key={campaignId} campaign={campaign.data} />;
-  return (
-    <div className="measure px-5 py-3">
-      {campaign.error ? (
-        <ErrorNote
-          doing="The campaign could not be opened"
-          error={campaign.error}
-          retry={() => void campaign.refetch()}
-        />
-      ) : (
-        <Loading label="Opening the campaign" />
-      )}
-    </div>
-  );
+  return <Opening what="campaign" asked={[campaign]} />;
 }
 
 /** The trials of one campaign, and beside them what it asks and what came out. */
@@ -59,16 +48,22 @@ function Campaign({ campaign }: { campaign: CampaignRow }) {
   const deleted = campaign.deletedAt !== null;
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <Link to="/campaigns" className="text-sm text-muted">
-          Campaigns
-        </Link>
-        <h1 className="text-lg">{campaign.code}</h1>
-        <span className="min-w-0 truncate">{campaign.title}</span>
-        {campaign.figuresDue > 0 && (
-          <Status>figures of {counted(campaign.figuresDue, "trial")} are being worked out anew …</Status>
-        )}
-        <span className="flex-1" />
+      <PageHead
+        up={
+          <Link to="/campaigns" className="text-sm text-muted">
+            Campaigns
+          </Link>
+        }
+        title={campaign.code}
+        about={
+          <>
+            <span className="min-w-0 truncate">{campaign.title}</span>
+            {campaign.figuresDue > 0 && (
+              <Status>figures of {counted(campaign.figuresDue, "trial")} are being worked out anew …</Status>
+            )}
+          </>
+        }
+      >
         <Menu trigger={<Button>Export</Button>}>
           <MenuLabel>As listed, all pages, CSV</MenuLabel>
           {(
@@ -121,7 +116,7 @@ function Campaign({ campaign }: { campaign: CampaignRow }) {
                 Plan a trial
               </ButtonLink>
             )}
-      </div>
+      </PageHead>
       <div className="flex min-h-0 flex-1 max-lg:flex-col max-lg:overflow-y-auto">
         <section
           aria-label="Trials of the campaign"

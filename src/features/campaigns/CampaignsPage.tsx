@@ -4,11 +4,10 @@ import { useNavigate } from "react-router-dom";
 import type { CampaignRow } from "../../../shared/schemas/campaign";
 import type { CampaignSummaryAnswer } from "../../../shared/schemas/campaignSummary";
 import { Button } from "../../components/Button";
-import { Segmented } from "../../components/choice";
+import { PageHead } from "../../components/PageHead";
 import { DataTable } from "../../components/DataTable";
-import { SearchField } from "../../components/SearchField";
+import { ListPane } from "../../components/ListPane";
 import { NoProject } from "../../components/NoProject";
-import { ErrorNote, Loading } from "../../components/status";
 import { tableCsv } from "../../components/tableModel";
 import { Empty, Note } from "../../components/text";
 import { campaignSummaryQuery, useCampaigns } from "../../lib/campaigns";
@@ -53,13 +52,15 @@ export default function CampaignsPage() {
     );
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Campaigns</h1>
-        <Note>
-          {campaigns.data &&
-            `${counted(campaigns.data.length, deleted === "true" ? "deleted campaign" : "campaign")} in this project`}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Campaigns"
+        about={
+          <Note>
+            {campaigns.data &&
+              `${counted(campaigns.data.length, deleted === "true" ? "deleted campaign" : "campaign")} in this project`}
+          </Note>
+        }
+      >
         <Button
           disabled={shown.length === 0}
           onClick={() => downloadText("gangueway-campaigns.csv", tableCsv(shown, exportedStageColumns))}
@@ -68,32 +69,23 @@ export default function CampaignsPage() {
         </Button>
         {/* The list has a primary action of its own beside it: opening what is chosen. */}
         {create(false)}
-      </div>
+      </PageHead>
       {projects?.length === 0 ? (
         <div className="px-5">
           <NoProject />
         </div>
       ) : (
         <div className="flex min-h-0 flex-1">
-          <section aria-label="Campaigns of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
-            <div className="flex flex-wrap items-center gap-4 pb-2">
-              <SearchField
-                label="Filter campaigns"
-                placeholder="code, title, stage, metal"
-                value={filter}
-                onChange={setFilter}
-              />
-              <Segmented label="Which campaigns" value={deleted} onChange={setDeleted} options={shelves} />
-            </div>
-            {campaigns.error ? (
-              <ErrorNote
-                doing="The campaigns could not be read"
-                error={campaigns.error}
-                retry={() => void campaigns.refetch()}
-              />
-            ) : !campaigns.data ? (
-              <Loading label="Reading the campaigns" />
-            ) : campaigns.data.length === 0 ? (
+          <ListPane
+            records="campaigns"
+            sought="code, title, stage, metal"
+            filter={filter}
+            onFilter={setFilter}
+            shelf={deleted}
+            onShelf={setDeleted}
+            shelves={shelves}
+            query={campaigns}
+            empty={
               deleted === "true" ? (
                 <Empty title="Nothing deleted">A deleted campaign keeps its trials and can be restored.</Empty>
               ) : (
@@ -102,31 +94,28 @@ export default function CampaignsPage() {
                   {!mayWrite && " A metallurgist makes the first one."}
                 </Empty>
               )
-            ) : (
-              <>
-                <DataTable
-                  caption="Campaigns, a line a stage"
-                  rows={rows}
-                  columns={stageColumns}
-                  rowKey={({ key }) => key}
-                  filter={filter}
-                  initialSort={{ id: "campaign" }}
-                  selectedKey={selected?.key}
-                  onSelect={({ key }) => setChosen(key)}
-                  onOpen={({ campaign }) => open(campaign)}
-                  onShown={setShown}
-                  rowHeight={48}
-                  className="min-h-0 flex-1"
-                  empty={`No campaign matches “${filter}”.`}
-                />
-                <Note className="py-2">
-                  Mean over the trials that have the figure, range below it; rejected trials are left out. Reagent:
-                  acid, or cementing metal, consumed per kg of target. Inside and outside: by the plan revision of each
-                  campaign.
-                </Note>
-              </>
-            )}
-          </section>
+            }
+          >
+            <DataTable
+              caption="Campaigns, a line a stage"
+              rows={rows}
+              columns={stageColumns}
+              rowKey={({ key }) => key}
+              filter={filter}
+              initialSort={{ id: "campaign" }}
+              selectedKey={selected?.key}
+              onSelect={({ key }) => setChosen(key)}
+              onOpen={({ campaign }) => open(campaign)}
+              onShown={setShown}
+              rowHeight={48}
+              className="min-h-0 flex-1"
+              empty={`No campaign matches “${filter}”.`}
+            />
+            <Note className="py-2">
+              Mean over the trials that have the figure, range below it; rejected trials are left out. Reagent: acid, or
+              cementing metal, consumed per kg of target. Inside and outside: by the plan revision of each campaign.
+            </Note>
+          </ListPane>
           {selected && (
             <CampaignDetail
               key={selected.campaign.id}

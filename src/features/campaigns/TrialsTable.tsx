@@ -39,8 +39,8 @@ export function TrialsTable({ campaign, list }: { campaign: CampaignRow; list: R
       <div className="flex flex-wrap items-center gap-x-3 gap-y-2 pb-2">
         <SearchField
           label="Find a trial"
-          placeholder="code, operator, notes"
-          className="w-44!"
+          placeholder="code, operator, note"
+          className="w-48!"
           value={asked.find}
           onChange={(find) => put({ find })}
         />

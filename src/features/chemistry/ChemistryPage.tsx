@@ -1,4 +1,5 @@
 import { useSearchParams } from "react-router-dom";
+import { PageHead } from "../../components/PageHead";
 import { Tabs } from "../../components/choice";
 import { ErrorNote, Loading } from "../../components/status";
 import { Note } from "../../components/text";
@@ -44,19 +45,21 @@ export default function ChemistryPage() {
   const data = chemistry.data;
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Chemistry</h1>
-        <Note>
-          {counted(data.species.size, "species", "species")}, {counted(data.tables.references.length, "source")}. Data
-          version{" "}
-          <span className="font-mono text-ink" title={data.version}>
-            {data.version.slice(0, 12)}
-          </span>
-          <span className="max-lg:hidden">; a saved revision of a plan keeps the version it used</span>.
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Chemistry"
+        about={
+          <Note>
+            {counted(data.species.size, "species", "species")}, {counted(data.tables.references.length, "source")}. Data
+            version{" "}
+            <span className="font-mono text-ink" title={data.version}>
+              {data.version.slice(0, 12)}
+            </span>
+            <span className="max-lg:hidden">; a saved revision of a plan keeps the version it used</span>.
+          </Note>
+        }
+      >
         <AddSpecies data={data} />
-      </div>
+      </PageHead>
       <Tabs
         label="Tables of the library"
         className="flex min-h-0 flex-1 flex-col px-5 pt-2"

@@ -1,7 +1,6 @@
 import { useState } from "react";
 import type { FeedRow } from "../../../shared/schemas/feed";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
+import { FormDialog } from "../../components/FormDialog";
 import { ErrorNote } from "../../components/status";
 import { TextArea, TextField } from "../../components/TextField";
 import { useCreateFeed } from "../../lib/feeds";
@@ -25,47 +24,35 @@ function Create({ open, onOpenChange, projectId, onCreated }: CreateFeedDialogPr
   const [pressed, setPressed] = useState(false);
   const missing = name.trim() === "";
   return (
-    <Dialog
+    <FormDialog
       open={open}
       onOpenChange={onOpenChange}
       title="New feed"
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="new-feed" kind="primary" disabled={create.isPending}>
-            Create and open
-          </Button>
-        </>
-      }
+      action="Create and open"
+      disabled={create.isPending}
+      onSubmit={(event) => {
+        event.preventDefault();
+        setPressed(true);
+        if (!missing) create.mutate({ projectId, name, description }, { onSuccess: onCreated });
+      }}
     >
-      <form
-        id="new-feed"
-        noValidate
-        className="space-y-4"
-        onSubmit={(event) => {
-          event.preventDefault();
-          setPressed(true);
-          if (!missing) create.mutate({ projectId, name, description }, { onSuccess: onCreated });
-        }}
-      >
-        <TextField
-          label="Name"
-          placeholder="such as composite A, west pit"
-          autoFocus
-          maxLength={120}
-          value={name}
-          error={pressed && missing ? "A name of 1 to 120 characters" : null}
-          onChange={(event) => setName(event.target.value)}
-        />
-        <TextArea
-          label="What it is"
-          hint="Where it was taken, what it is a composite of, how it was kept: sulfides oxidise in storage."
-          maxLength={2000}
-          value={description}
-          onChange={(event) => setDescription(event.target.value)}
-        />
-        {create.error && <ErrorNote doing="Not created" error={create.error} />}
-      </form>
-    </Dialog>
+      <TextField
+        label="Name"
+        placeholder="such as composite A, west pit"
+        autoFocus
+        maxLength={120}
+        value={name}
+        error={pressed && missing ? "A name of 1 to 120 characters" : null}
+        onChange={(event) => setName(event.target.value)}
+      />
+      <TextArea
+        label="What it is"
+        hint="Where it was taken, what it is a composite of, how it was kept: sulfides oxidise in storage."
+        maxLength={2000}
+        value={description}
+        onChange={(event) => setDescription(event.target.value)}
+      />
+      {create.error && <ErrorNote doing="Not created" error={create.error} />}
+    </FormDialog>
   );
 }

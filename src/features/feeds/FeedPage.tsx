@@ -7,8 +7,9 @@ import { DraftStatus } from "../../components/DraftStatus";
 import { EntryField } from "../../components/EntryField";
 import { FormulaText } from "../../components/FormulaText";
 import { HistoryDialog } from "../../components/HistoryDialog";
+import { PageHead } from "../../components/PageHead";
 import { ReasonDialog } from "../../components/ReasonDialog";
-import { ErrorNote, Loading, Status } from "../../components/status";
+import { ErrorNote, Opening, Status } from "../../components/status";
 import { Note, Remark, SectionHead } from "../../components/text";
 import { TextArea, TextField } from "../../components/TextField";
 import { useChemistry } from "../../lib/chemistry";
@@ -29,15 +30,7 @@ export default function FeedPage() {
   const feed = useFeed(feedId);
   usePageTitle(feed.data?.name ?? "Feed");
   if (feed.data) return <FeedEditor key={feedId} feed={feed.data} />;
-  return (
-    <div className="measure px-5 py-3">
-      {feed.error ? (
-        <ErrorNote doing="The feed could not be opened" error={feed.error} retry={() => void feed.refetch()} />
-      ) : (
-        <Loading label="Opening the feed" />
-      )}
-    </div>
-  );
+  return <Opening what="feed" asked={[feed]} />;
 }
 
 /** Head assays, minerals and the rest of one feed. What is typed is kept in the browser until it is saved. */
@@ -68,16 +61,22 @@ function FeedEditor({ feed }: { feed: FeedRow }) {
   const elsewhere = problems.filter(({ path }) => path !== "name");
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <Link to="/feeds" className="text-sm text-muted">
-          Feeds
-        </Link>
-        <h1 className="text-lg">{values.name || "unnamed"}</h1>
-        <DraftStatus draft={draft} />
-        {feed.figuresDue > 0 && (
-          <Status>figures of {counted(feed.figuresDue, "trial")} are being worked out anew …</Status>
-        )}
-        <span className="flex-1" />
+      <PageHead
+        up={
+          <Link to="/feeds" className="text-sm text-muted">
+            Feeds
+          </Link>
+        }
+        title={values.name || "unnamed"}
+        about={
+          <>
+            <DraftStatus draft={draft} />
+            {feed.figuresDue > 0 && (
+              <Status>figures of {counted(feed.figuresDue, "trial")} are being worked out anew …</Status>
+            )}
+          </>
+        }
+      >
         {!readOnly && (
           <>
             <Button disabled={!draft.canUndo} onClick={draft.undo} title="Ctrl+Z">
@@ -101,7 +100,7 @@ function FeedEditor({ feed }: { feed: FeedRow }) {
             Restore
           </Button>
         )}
-      </div>
+      </PageHead>
       <ConflictDialog
         conflicts={draft.conflicts}
         what={`feed ${feed.name}`}

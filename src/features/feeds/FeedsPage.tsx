@@ -2,11 +2,10 @@ import { useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { FeedRow } from "../../../shared/schemas/feed";
 import { Button } from "../../components/Button";
-import { Segmented } from "../../components/choice";
+import { PageHead } from "../../components/PageHead";
 import { DataTable } from "../../components/DataTable";
-import { SearchField } from "../../components/SearchField";
+import { ListPane } from "../../components/ListPane";
 import { NoProject } from "../../components/NoProject";
-import { ErrorNote, Loading } from "../../components/status";
 import { Empty, Note } from "../../components/text";
 import { useFeeds, type DeletedFilter } from "../../lib/feeds";
 import { counted } from "../../lib/format";
@@ -44,31 +43,34 @@ export default function FeedsPage() {
     );
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Feeds</h1>
-        <Note>
-          {feeds.data && `${counted(feeds.data.length, deleted === "true" ? "deleted feed" : "feed")} in this project`}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Feeds"
+        about={
+          <Note>
+            {feeds.data &&
+              `${counted(feeds.data.length, deleted === "true" ? "deleted feed" : "feed")} in this project`}
+          </Note>
+        }
+      >
         {/* The list has a primary action of its own beside it: opening what is chosen. */}
         {create(false)}
-      </div>
+      </PageHead>
       {projects?.length === 0 ? (
         <div className="px-5">
           <NoProject />
         </div>
       ) : (
         <div className="flex min-h-0 flex-1">
-          <section aria-label="Feeds of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
-            <div className="flex flex-wrap items-center gap-4 pb-2">
-              <SearchField label="Filter feeds" placeholder="name, element" value={filter} onChange={setFilter} />
-              <Segmented label="Which feeds" value={deleted} onChange={setDeleted} options={shelves} />
-            </div>
-            {feeds.error ? (
-              <ErrorNote doing="The feeds could not be read" error={feeds.error} retry={() => void feeds.refetch()} />
-            ) : !feeds.data ? (
-              <Loading label="Reading the feeds" />
-            ) : feeds.data.length === 0 ? (
+          <ListPane
+            records="feeds"
+            sought="name, element"
+            filter={filter}
+            onFilter={setFilter}
+            shelf={deleted}
+            onShelf={setDeleted}
+            shelves={shelves}
+            query={feeds}
+            empty={
               deleted === "true" ? (
                 <Empty title="Nothing deleted">A deleted feed keeps its assays and can be restored.</Empty>
               ) : (
@@ -77,23 +79,23 @@ export default function FeedsPage() {
                   metal. Every account starts from it.{!mayWrite && " A metallurgist enters the first one."}
                 </Empty>
               )
-            ) : (
-              <DataTable
-                caption="Feeds"
-                rows={feeds.data}
-                columns={feedColumns}
-                rowKey={({ id }) => id}
-                filter={filter}
-                initialSort={{ id: "name" }}
-                selectedKey={selected?.id}
-                onSelect={({ id }) => setChosen(id)}
-                onOpen={open}
-                rowHeight={48}
-                className="min-h-0 flex-1 pb-4"
-                empty={`No feed matches “${filter}”.`}
-              />
-            )}
-          </section>
+            }
+          >
+            <DataTable
+              caption="Feeds"
+              rows={feeds.data ?? []}
+              columns={feedColumns}
+              rowKey={({ id }) => id}
+              filter={filter}
+              initialSort={{ id: "name" }}
+              selectedKey={selected?.id}
+              onSelect={({ id }) => setChosen(id)}
+              onOpen={open}
+              rowHeight={48}
+              className="min-h-0 flex-1 pb-4"
+              empty={`No feed matches “${filter}”.`}
+            />
+          </ListPane>
           {selected && <FeedDetail key={selected.id} feed={selected} onOpen={() => open(selected)} />}
         </div>
       )}

@@ -57,7 +57,7 @@ const columns = (rows: readonly HeadAssay[]): GridColumn<HeadAssay>[] => [
     kind: "text",
     header: "laboratory",
     label: "laboratory",
-    width: "17em",
+    width: "20em",
     words: true,
     usual: [...new Set(rows.map((h) => h.laboratory).filter(Boolean))],
     get: (h) => h.laboratory,

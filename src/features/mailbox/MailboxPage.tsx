@@ -2,6 +2,7 @@ import { useQuery } from "@tanstack/react-query";
 import { Fragment, useState } from "react";
 import type { MailRow } from "../../../shared/schemas/invitation";
 import { Button, ButtonLink } from "../../components/Button";
+import { PageHead } from "../../components/PageHead";
 import { ErrorNote, Loading } from "../../components/status";
 import { Empty, Note } from "../../components/text";
 import { classes } from "../../lib/classes";
@@ -40,16 +41,18 @@ function Mailbox() {
   const letter = rows.find(({ id }) => id === chosen) ?? rows[0];
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Letters</h1>
-        <Note>
-          {letters.data && counted(rows.length, "letter")}
-          {rows.some(({ state }) => state === "kept") && ". No mail server is set up: kept letters are read here."}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Letters"
+        about={
+          <Note>
+            {letters.data && counted(rows.length, "letter")}
+            {rows.some(({ state }) => state === "kept") && ". No mail server is set up: kept letters are read here."}
+          </Note>
+        }
+      >
         <Button onClick={() => void letters.refetch()}>Look again</Button>
         <ButtonLink to="/members">Members</ButtonLink>
-      </div>
+      </PageHead>
       {letters.error ? (
         <div className="measure p-5">
           <ErrorNote doing="The letters could not be read" error={letters.error} retry={() => void letters.refetch()} />

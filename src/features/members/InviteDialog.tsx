@@ -1,11 +1,12 @@
 import { zodResolver } from "@hookform/resolvers/zod";
-import { Controller, useForm } from "react-hook-form";
+import { useForm, useWatch } from "react-hook-form";
 import { Link } from "react-router-dom";
 import type { z } from "zod";
 import { invitationCreate } from "../../../shared/schemas/invitation";
 import { Button } from "../../components/Button";
 import { Dialog } from "../../components/Dialog";
-import { Select } from "../../components/Select";
+import { FormDialog } from "../../components/FormDialog";
+import { SelectField } from "../../components/SelectField";
 import { ErrorNote } from "../../components/status";
 import { TextArea, TextField } from "../../components/TextField";
 import { useInvite } from "./members";
@@ -29,6 +30,7 @@ function Invite({ open, onOpenChange }: InviteDialogProps) {
   });
   const submit = form.handleSubmit((values) => invite.mutate(values));
   const { errors } = form.formState;
+  const role = useWatch({ control: form.control, name: "role" });
   if (invite.data) {
     const { email, mail } = invite.data;
     return (
@@ -61,50 +63,36 @@ function Invite({ open, onOpenChange }: InviteDialogProps) {
     );
   }
   return (
-    <Dialog
+    <FormDialog
       open={open}
       onOpenChange={onOpenChange}
       title="Invite a member"
       description="They get a letter with a link, choose their name and password, and are in. The link works once and expires."
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="invite" kind="primary" disabled={invite.isPending}>
-            {invite.isPending ? "Sending …" : "Send the letter"}
-          </Button>
-        </>
-      }
+      action={invite.isPending ? "Sending …" : "Send the letter"}
+      disabled={invite.isPending}
+      onSubmit={(event) => void submit(event)}
     >
-      <form id="invite" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="E-mail"
-          type="email"
-          autoComplete="off"
-          autoFocus
-          error={errors.email && "An e-mail address, such as name@site.example"}
-          {...form.register("email")}
-        />
-        <Controller
-          control={form.control}
-          name="role"
-          render={({ field }) => (
-            <Select
-              label="Role"
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={roleOptions}
-              hint={roleOptions.find(({ value }) => value === field.value)?.note}
-            />
-          )}
-        />
-        <TextArea
-          label="A line of your own, if you like"
-          error={errors.message && "At most 500 characters"}
-          {...form.register("message")}
-        />
-        {invite.error && <ErrorNote doing="Not invited" error={invite.error} />}
-      </form>
-    </Dialog>
+      <TextField
+        label="E-mail"
+        type="email"
+        autoComplete="off"
+        autoFocus
+        error={errors.email && "An e-mail address, such as name@site.example"}
+        {...form.register("email")}
+      />
+      <SelectField
+        control={form.control}
+        name="role"
+        label="Role"
+        options={roleOptions}
+        hint={roleOptions.find(({ value }) => value === role)?.note}
+      />
+      <TextArea
+        label="A line of your own, if you like"
+        error={errors.message && "At most 500 characters"}
+        {...form.register("message")}
+      />
+      {invite.error && <ErrorNote doing="Not invited" error={invite.error} />}
+    </FormDialog>
   );
 }

@@ -1,6 +1,7 @@
 import { useState } from "react";
 import { useSearchParams } from "react-router-dom";
 import { Button, ButtonLink } from "../../components/Button";
+import { PageHead } from "../../components/PageHead";
 import { Tabs } from "../../components/choice";
 import { Empty, Note } from "../../components/text";
 import { counted } from "../../lib/format";
@@ -32,18 +33,20 @@ function Members() {
   const open = invitations.data?.filter(({ state }) => state === "open").length ?? 0;
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Members</h1>
-        <Note>
-          {members.data && counted(members.data.filter(({ disabled }) => !disabled).length, "member")}
-          {open > 0 && `, ${counted(open, "open invitation")}`}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Members"
+        about={
+          <Note>
+            {members.data && counted(members.data.filter(({ disabled }) => !disabled).length, "member")}
+            {open > 0 && `, ${counted(open, "open invitation")}`}
+          </Note>
+        }
+      >
         <ButtonLink to="/mailbox">Letters</ButtonLink>
         <Button kind="primary" onClick={() => setInviting(true)}>
           Invite a member
         </Button>
-      </div>
+      </PageHead>
       <Tabs
         label="Members and invitations"
         className="flex min-h-0 flex-1 flex-col px-5 pt-2"

@@ -2,8 +2,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm } from "react-hook-form";
 import type { z } from "zod";
 import { projectCreate } from "../../../shared/schemas/api";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
+import { FormDialog } from "../../components/FormDialog";
 import { ErrorNote } from "../../components/status";
 import { TextField } from "../../components/TextField";
 import { useCreateProject } from "../../lib/plans";
@@ -30,35 +29,28 @@ export default function CreateProject({ open, onOpenChange }: CreateProjectDialo
     }),
   );
   return (
-    <Dialog
+    <FormDialog
       open={open}
       onOpenChange={onOpenChange}
       title="New project"
       description="A project is one circuit of a site; its plans stay together and stand under its name."
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="new-project" kind="primary" disabled={create.isPending}>
-            Create project
-          </Button>
-        </>
-      }
+      action="Create project"
+      disabled={create.isPending}
+      onSubmit={(event) => void submit(event)}
     >
-      <form id="new-project" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="Site"
-          placeholder="where the plant stands"
-          error={errors.siteName && "The site’s name, 1 to 120 characters"}
-          {...form.register("siteName")}
-        />
-        <TextField
-          label="Project"
-          placeholder="such as calcine circuit, heap 3, gold plant"
-          error={errors.name && "The project’s name, 1 to 120 characters"}
-          {...form.register("name")}
-        />
-        {create.error && <ErrorNote doing="Not created" error={create.error} />}
-      </form>
-    </Dialog>
+      <TextField
+        label="Site"
+        placeholder="where the plant stands"
+        error={errors.siteName && "The site’s name, 1 to 120 characters"}
+        {...form.register("siteName")}
+      />
+      <TextField
+        label="Project"
+        placeholder="such as calcine circuit, heap 3, gold plant"
+        error={errors.name && "The project’s name, 1 to 120 characters"}
+        {...form.register("name")}
+      />
+      {create.error && <ErrorNote doing="Not created" error={create.error} />}
+    </FormDialog>
   );
 }

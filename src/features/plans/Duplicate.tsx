@@ -1,10 +1,9 @@
 import { zodResolver } from "@hookform/resolvers/zod";
-import { Controller, useForm } from "react-hook-form";
+import { useForm } from "react-hook-form";
 import { z } from "../../../shared/schemas/z";
 import { planCreate } from "../../../shared/schemas/plan";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
-import { Select } from "../../components/Select";
+import { FormDialog } from "../../components/FormDialog";
+import { SelectField } from "../../components/SelectField";
 import { ErrorNote } from "../../components/status";
 import { TextField } from "../../components/TextField";
 import { ApiFailure } from "../../lib/failure";
@@ -41,61 +40,40 @@ export default function Duplicate({ plan, open, onOpenChange, onCopied }: Duplic
     ),
   );
   return (
-    <Dialog
+    <FormDialog
       open={open}
       onOpenChange={onOpenChange}
       title={`Duplicate ${plan.name}`}
       description="A plan of its own from then on; it says where it comes from."
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="duplicate-plan" kind="primary" disabled={duplicate.isPending}>
-            Duplicate
-          </Button>
-        </>
-      }
+      action="Duplicate"
+      disabled={duplicate.isPending}
+      onSubmit={(event) => void submit(event)}
     >
-      <form id="duplicate-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="Name of the copy"
-          error={form.formState.errors.name ? "A name of 1 to 120 characters" : aboutName(duplicate.error)}
-          {...form.register("name")}
+      <TextField
+        label="Name of the copy"
+        error={form.formState.errors.name ? "A name of 1 to 120 characters" : aboutName(duplicate.error)}
+        {...form.register("name")}
+      />
+      {projects.length > 1 && (
+        <SelectField
+          control={form.control}
+          name="projectId"
+          label="Project"
+          options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
         />
-        {projects.length > 1 && (
-          <Controller
-            control={form.control}
-            name="projectId"
-            render={({ field }) => (
-              <Select
-                label="Project"
-                layout="stacked"
-                value={field.value}
-                onChange={field.onChange}
-                options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
-              />
-            )}
-          />
-        )}
-        {plan.revisionCount > 1 && (
-          <Controller
-            control={form.control}
-            name="revisions"
-            render={({ field }) => (
-              <Select
-                label="Takes along"
-                layout="stacked"
-                value={field.value}
-                onChange={field.onChange}
-                options={[
-                  { value: "latest", label: `the inputs of revision ${plan.latest.number}, as its revision 1` },
-                  { value: "all", label: `all ${plan.revisionCount} revisions, with their authors and notes` },
-                ]}
-              />
-            )}
-          />
-        )}
-        {duplicate.error && !aboutName(duplicate.error) && <ErrorNote doing="Not duplicated" error={duplicate.error} />}
-      </form>
-    </Dialog>
+      )}
+      {plan.revisionCount > 1 && (
+        <SelectField
+          control={form.control}
+          name="revisions"
+          label="Takes along"
+          options={[
+            { value: "latest", label: `the inputs of revision ${plan.latest.number}, as its revision 1` },
+            { value: "all", label: `all ${plan.revisionCount} revisions, with their authors and notes` },
+          ]}
+        />
+      )}
+      {duplicate.error && !aboutName(duplicate.error) && <ErrorNote doing="Not duplicated" error={duplicate.error} />}
+    </FormDialog>
   );
 }

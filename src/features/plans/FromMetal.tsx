@@ -7,7 +7,7 @@ import type { ChemicalData } from "../../../shared/species/chemicalData";
 import { Caution } from "../../components/Caution";
 import { Segmented } from "../../components/choice";
 import { NumberField } from "../../components/NumberField";
-import { Select } from "../../components/Select";
+import { SelectField } from "../../components/SelectField";
 import { ErrorNote } from "../../components/status";
 import { Note } from "../../components/text";
 import { TextField } from "../../components/TextField";
@@ -70,18 +70,11 @@ export function FromMetal({ data, projects, projectId, onOpenChange }: CreatePla
         {...form.register("name")}
       />
       {projects.length > 1 && (
-        <Controller
+        <SelectField
           control={form.control}
           name="projectId"
-          render={({ field }) => (
-            <Select
-              label="Project"
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
-            />
-          )}
+          label="Project"
+          options={projects.map((p) => ({ value: p.id, label: `${p.siteName} / ${p.name}` }))}
         />
       )}
       <Controller
@@ -107,45 +100,24 @@ export function FromMetal({ data, projects, projectId, onOpenChange }: CreatePla
         )}
       />
       <div className="grid grid-cols-2 gap-4">
-        <Controller
+        <SelectField
           control={form.control}
           name="target"
-          render={({ field }) => (
-            <Select
-              label={targetLabel[step]}
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={metals}
-              error={errors.target && "Which metal is this plan about?"}
-            />
-          )}
+          label={targetLabel[step]}
+          options={metals}
+          error={errors.target && "Which metal is this plan about?"}
         />
-        <Controller
+        <SelectField
           control={form.control}
           name="other"
-          render={({ field }) => (
-            <Select
-              label={otherLabel[step]}
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={[{ value: "none", label: "none yet" }, ...metals.filter((m) => m.value !== target)]}
-            />
-          )}
+          label={otherLabel[step]}
+          options={[{ value: "none", label: "none yet" }, ...metals.filter((m) => m.value !== target)]}
         />
-        <Controller
+        <SelectField
           control={form.control}
           name="preset"
-          render={({ field }) => (
-            <Select
-              label="Lixiviant"
-              layout="stacked"
-              value={field.value}
-              onChange={field.onChange}
-              options={presetNames.map((value) => ({ value, label: lixiviantName[value] }))}
-            />
-          )}
+          label="Lixiviant"
+          options={presetNames.map((value) => ({ value, label: lixiviantName[value] }))}
         />
         <Controller
           control={form.control}

@@ -2,10 +2,10 @@ import { useState } from "react";
 import { useNavigate, useSearchParams } from "react-router-dom";
 import type { PlanRow } from "../../../shared/schemas/plan";
 import { Button } from "../../components/Button";
-import { Segmented } from "../../components/choice";
 import { DataTable } from "../../components/DataTable";
-import { SearchField } from "../../components/SearchField";
-import { ErrorNote, Loading, Status } from "../../components/status";
+import { ListPane } from "../../components/ListPane";
+import { PageHead } from "../../components/PageHead";
+import { ErrorNote, Status } from "../../components/status";
 import { Empty, Note } from "../../components/text";
 import { counted } from "../../lib/format";
 import { usePlans, useUpdatePlan, type ArchivedFilter } from "../../lib/plans";
@@ -46,21 +46,23 @@ export default function PlansPage() {
 
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Plans</h1>
-        <Note>
-          {project && plans.data
-            ? `${counted(plans.data.length, archived === "true" ? "archived plan" : "plan")} in this project`
-            : ""}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Plans"
+        about={
+          <Note>
+            {project && plans.data
+              ? `${counted(plans.data.length, archived === "true" ? "archived plan" : "plan")} in this project`
+              : ""}
+          </Note>
+        }
+      >
         {mayWrite && projects?.length !== 0 && (
           <>
             <Button onClick={() => setDialog("project")}>New project</Button>
             {project && <Button onClick={() => setDialog("plan")}>New plan</Button>}
           </>
         )}
-      </div>
+      </PageHead>
       {projects?.length === 0 ? (
         <div className="px-5">
           <Empty
@@ -79,41 +81,65 @@ export default function PlansPage() {
         </div>
       ) : (
         <div className="flex min-h-0 flex-1">
-          <section aria-label="Plans of the project" className="flex min-w-0 flex-1 flex-col px-5 pt-3">
-            <div className="flex flex-wrap items-center gap-4 pb-2">
-              <SearchField
-                label="Filter plans"
-                placeholder="name, metal, lixiviant"
-                value={filter}
-                onChange={setFilter}
-              />
-              <Segmented
-                label="Which plans"
-                value={archived}
-                onChange={(next) => {
-                  setArchived(next);
-                  setShelved(null);
-                }}
-                options={shelves}
-              />
-            </div>
-            {shelved && <Shelved key={shelved.version} plan={shelved} onDone={() => setShelved(null)} />}
-            {plans.error ? (
-              <ErrorNote doing="The plans could not be read" error={plans.error} retry={() => void plans.refetch()} />
-            ) : !plans.data ? (
-              <Loading label="Reading the plans" />
-            ) : (
-              <List
-                plans={plans.data}
-                {...{ filter, archived, mayWrite }}
-                selected={selected?.id}
-                onSelect={(plan) => setChosen(plan.id)}
-                onOpen={(plan) => void navigate(`/plans/${plan.id}`)}
-                onCreate={() => setDialog("plan")}
-                onClear={() => setFilter("")}
-              />
-            )}
-          </section>
+          <ListPane
+            records="plans"
+            sought="name, metal, lixiviant"
+            filter={filter}
+            onFilter={setFilter}
+            shelf={archived}
+            onShelf={(next) => {
+              setArchived(next);
+              setShelved(null);
+            }}
+            shelves={shelves}
+            query={plans}
+            said={shelved && <Shelved key={shelved.version} plan={shelved} onDone={() => setShelved(null)} />}
+            empty={
+              archived === "true" ? (
+                <Empty title="Nothing archived">
+                  An archived plan keeps its revisions and can be taken back at any time.
+                </Empty>
+              ) : (
+                <Empty
+                  title="No plan yet"
+                  action={
+                    mayWrite && (
+                      <Button kind="primary" onClick={() => setDialog("plan")}>
+                        New plan
+                      </Button>
+                    )
+                  }
+                >
+                  A plan asks one question: at which pH and potential is every metal as it should be in this step? It
+                  starts from a feed’s assays, or from a metal and a lixiviant.
+                  {!mayWrite && " A metallurgist writes the first one."}
+                </Empty>
+              )
+            }
+          >
+            <DataTable
+              caption="Plans"
+              rows={plans.data ?? []}
+              columns={planColumns}
+              rowKey={(plan) => plan.id}
+              filter={filter}
+              initialSort={{ id: "saved", desc: true }}
+              selectedKey={selected?.id}
+              onSelect={(plan) => setChosen(plan.id)}
+              onOpen={(plan) => void navigate(`/plans/${plan.id}`)}
+              muted={(plan) => plan.archived}
+              rowHeight={48}
+              className="min-h-0 flex-1 pb-4"
+              empty={
+                <>
+                  No plan matches “{filter}”.{" "}
+                  <Button kind="quiet" onClick={() => setFilter("")}>
+                    Clear the filter
+                  </Button>
+                </>
+              }
+            />
+          </ListPane>
           {selected && (
             <PlanDetail
               key={selected.id}
@@ -153,64 +179,5 @@ function Shelved({ plan, onDone }: { plan: PlanRow; onDone: () => void }) {
       </Button>
       {update.error && <ErrorNote error={update.error} />}
     </div>
-  );
-}
-
-interface ListProps {
-  plans: readonly PlanRow[];
-  filter: string;
-  archived: ArchivedFilter;
-  mayWrite: boolean;
-  selected: string | undefined;
-  onSelect: (plan: PlanRow) => void;
-  onOpen: (plan: PlanRow) => void;
-  onCreate: () => void;
-  onClear: () => void;
-}
-
-function List({ plans, filter, archived, mayWrite, selected, onSelect, onOpen, onCreate, onClear }: ListProps) {
-  if (plans.length === 0) {
-    return archived === "true" ? (
-      <Empty title="Nothing archived">An archived plan keeps its revisions and can be taken back at any time.</Empty>
-    ) : (
-      <Empty
-        title="No plan yet"
-        action={
-          mayWrite && (
-            <Button kind="primary" onClick={onCreate}>
-              New plan
-            </Button>
-          )
-        }
-      >
-        A plan asks one question: at which pH and potential is every metal as it should be in this step? It starts from
-        a feed’s assays, or from a metal and a lixiviant.
-        {!mayWrite && " A metallurgist writes the first one."}
-      </Empty>
-    );
-  }
-  return (
-    <DataTable
-      caption="Plans"
-      rows={plans}
-      columns={planColumns}
-      rowKey={(plan) => plan.id}
-      filter={filter}
-      initialSort={{ id: "saved", desc: true }}
-      selectedKey={selected}
-      onSelect={onSelect}
-      onOpen={onOpen}
-      muted={(plan) => plan.archived}
-      rowHeight={48}
-      className="min-h-0 flex-1 pb-4"
-      empty={
-        <>
-          No plan matches “{filter}”.{" "}
-          <Button kind="quiet" onClick={onClear}>
-            Clear the filter
-          </Button>
-        </>
-      }
-    />
   );
 }

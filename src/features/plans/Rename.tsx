@@ -2,8 +2,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm } from "react-hook-form";
 import type { z } from "zod";
 import { planUpdate } from "../../../shared/schemas/plan";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
+import { FormDialog } from "../../components/FormDialog";
 import { ErrorNote } from "../../components/status";
 import { TextArea, TextField } from "../../components/TextField";
 import { useUpdatePlan } from "../../lib/plans";
@@ -23,33 +22,26 @@ export default function Rename({ plan, open, onOpenChange }: PlanDialogProps) {
     update.mutate({ id: plan.id, version: plan.version, ...values }, { onSuccess: () => onOpenChange(false) }),
   );
   return (
-    <Dialog
+    <FormDialog
       open={open}
       onOpenChange={onOpenChange}
       title="Name and description"
-      footer={
-        <>
-          <Button onClick={() => onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form="rename-plan" kind="primary" disabled={update.isPending}>
-            Save
-          </Button>
-        </>
-      }
+      action="Save"
+      disabled={update.isPending}
+      onSubmit={(event) => void submit(event)}
     >
-      <form id="rename-plan" onSubmit={(event) => void submit(event)} noValidate className="space-y-4">
-        <TextField
-          label="Name"
-          error={form.formState.errors.name && "A name of 1 to 120 characters"}
-          {...form.register("name")}
-        />
-        <TextArea
-          label="Description"
-          hint="What the step does and why, for those who find this plan later."
-          error={form.formState.errors.description && "At most 2000 characters"}
-          {...form.register("description")}
-        />
-        {update.error && <ErrorNote doing="Not saved" error={update.error} />}
-      </form>
-    </Dialog>
+      <TextField
+        label="Name"
+        error={form.formState.errors.name && "A name of 1 to 120 characters"}
+        {...form.register("name")}
+      />
+      <TextArea
+        label="Description"
+        hint="What the step does and why, for those who find this plan later."
+        error={form.formState.errors.description && "At most 2000 characters"}
+        {...form.register("description")}
+      />
+      {update.error && <ErrorNote doing="Not saved" error={update.error} />}
+    </FormDialog>
   );
 }

@@ -3,11 +3,12 @@ import type { TrialStatus } from "../../../shared/schemas/trial";
 import type { TrialListRow } from "../../../shared/schemas/trialRows";
 import { ButtonLink } from "../../components/Button";
 import { NoProject } from "../../components/NoProject";
+import { PageHead } from "../../components/PageHead";
 import { ErrorNote, Loading } from "../../components/status";
 import { Note, SectionHead } from "../../components/text";
 import { classes } from "../../lib/classes";
 import { shelved } from "../../lib/draftShelf";
-import { fullTime, savedAt } from "../../lib/format";
+import { fixed, fullTime, savedAt, withUnit } from "../../lib/format";
 import { useProject } from "../../lib/project";
 import { useMay } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
@@ -44,18 +45,21 @@ export default function BenchPage() {
   const kept = new Set(shelved("trial.").map((name) => name.slice("trial.".length)));
   return (
     <>
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-rule px-5 py-2">
-        <h1 className="text-lg">Bench</h1>
-        <Note>
-          {kept.size > 0 && `${kept.size} ${kept.size === 1 ? "record" : "records"} kept on this device, not saved yet`}
-        </Note>
-        <span className="flex-1" />
+      <PageHead
+        title="Bench"
+        about={
+          <Note>
+            {kept.size > 0 &&
+              `${kept.size} ${kept.size === 1 ? "record" : "records"} kept on this device, not saved yet`}
+          </Note>
+        }
+      >
         {mayRecord && (
           <ButtonLink to="/trials/plan" className="h-14! px-5! text-lg!">
             Plan a trial
           </ButtonLink>
         )}
-      </div>
+      </PageHead>
       <div className="px-5 pt-3 pb-12">
         {project || !projects ? (
           project &&
@@ -130,8 +134,8 @@ function Tile({ trial, kept }: { trial: TrialListRow; kept: boolean }) {
           </span>
           <span className="block truncate text-base text-muted">
             {trial.operator || "no operator"}
-            {pH !== null && Eh !== null && `; last pH ${pH.toFixed(2)}, ${Eh.toFixed(2)} V vs SHE`}
-            {temperatureC !== null && `, ${temperatureC.toFixed(0)} °C`}
+            {pH !== null && Eh !== null && `; last pH ${fixed(pH, 2)}, ${withUnit(fixed(Eh, 2), "V")} vs SHE`}
+            {temperatureC !== null && `, ${withUnit(fixed(temperatureC, 0), "°C")}`}
           </span>
         </span>
         <span className="text-right text-lg">

@@ -1,5 +1,5 @@
 import { useParams } from "react-router-dom";
-import { ErrorNote, Loading } from "../../components/status";
+import { Opening } from "../../components/status";
 import { useCampaign } from "../../lib/campaigns";
 import { useChemistry } from "../../lib/chemistry";
 import { usePageTitle } from "../../lib/title";
@@ -13,20 +13,7 @@ export default function BenchTrialPage() {
   const campaign = useCampaign(trial.data?.campaignId);
   const chemistry = useChemistry();
   usePageTitle(trial.data ? `Bench, ${trial.data.code}` : "Bench");
-  const error = trial.error ?? campaign.error ?? chemistry.error;
   if (trial.data && campaign.data && chemistry.data)
     return <Bench key={trialId} trial={trial.data} campaign={campaign.data} data={chemistry.data} />;
-  return (
-    <div className="measure px-5 py-3 text-lg">
-      {error ? (
-        <ErrorNote
-          doing="The trial could not be opened"
-          error={error}
-          retry={() => void Promise.all([trial.refetch(), campaign.refetch(), chemistry.refetch()])}
-        />
-      ) : (
-        <Loading label="Opening the trial" />
-      )}
-    </div>
-  );
+  return <Opening what="trial" asked={[trial, campaign, chemistry]} />;
 }

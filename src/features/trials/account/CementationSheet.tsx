@@ -3,9 +3,9 @@ import type { Interval } from "../../../../shared/entry/interval";
 import { FormulaText } from "../../../components/FormulaText";
 import { PlainTable } from "../../../components/PlainTable";
 import { Note, SectionHead } from "../../../components/text";
-import { fixed, withUnit } from "../../../lib/format";
+import { capital, fixed, withUnit } from "../../../lib/format";
 import { massText, rangeText, Value, Working } from "./figures";
-import { BasesTable, capital, Flags, Missing, NumbersUsed } from "./parts";
+import { BasesTable, Flags, Missing, NumbersUsed } from "./parts";
 
 /** What became of one metal in a cementation, and of the metal that won it. */
 export function CementationSheet({ account }: { account: CementationAccount }) {

@@ -5,7 +5,7 @@ import type { RecoveryBasis } from "../../../../shared/metallurgy/account/metalA
 import { PlainTable } from "../../../components/PlainTable";
 import { SectionHead } from "../../../components/text";
 import { classes } from "../../../lib/classes";
-import { fixed, MINUS, significant } from "../../../lib/format";
+import { capital, fixed, MINUS, significant } from "../../../lib/format";
 import { sectionOf } from "../model/trialWords";
 import { Value, Working } from "./figures";
 
@@ -76,8 +76,6 @@ export function Flags({ flags }: { flags: readonly AccountFlag[] }) {
     </>
   );
 }
-
-export const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** What the account still needs; each leads to where it is entered. */
 export function Missing({ missing }: { missing: readonly MissingInput[] }) {
