@@ -133,7 +133,7 @@ function Campaign({ campaign }: { campaign: CampaignRow }) {
           aria-label="What the campaign says"
           className="shrink-0 border-rule px-5 pt-3 pb-8 max-lg:border-t lg:w-[300px] lg:overflow-y-auto lg:border-l"
         >
-          {campaign.invented && <Note>Invented data, for demonstration.</Note>}
+          {campaign.invented && <Note className="pb-2">Invented data, for demonstration.</Note>}
           {campaign.question !== "" && (
             <>
               <SectionHead>Question</SectionHead>

@@ -74,8 +74,8 @@ export function PlannedSection() {
           )}
         </div>
       )}
-      <div className="grid gap-x-10 md:grid-cols-2">
-        <div>
+      <div className="grid gap-x-10 md:grid-cols-2 lg:grid-rows-[auto_1fr]">
+        <div className="lg:row-span-2">
           {lines.slice(0, 4).map(({ key, label, quantity }) => (
             <EntryField
               key={key}
@@ -122,22 +122,23 @@ export function PlannedSection() {
               emptyText="not planned"
             />
           ))}
-          <div className="pt-3">
-            <EntryGrid
-              caption="Ligand totals planned"
-              rowName="ligand"
-              rows={planned.ligands}
-              columns={ligandColumns(
-                solved?.inputs.ligands.map((l) => l.component) ?? [],
-                solved?.inputs.sulfateReduction ?? false,
-              )}
-              blank={nextLigand}
-              onChange={(ligands) => put({ ligands }, "ligands")}
-              readOnly={readOnly}
-              problems={rowProblems(problems, "planned.ligands", (rest) => rest.split(".")[0] ?? "")}
-              emptyText="No ligand planned."
-            />
-          </div>
+        </div>
+        {/* half of a tablet is too narrow for it */}
+        <div className="pt-3 md:col-span-2 lg:col-span-1">
+          <EntryGrid
+            caption="Ligand totals planned"
+            rowName="ligand"
+            rows={planned.ligands}
+            columns={ligandColumns(
+              solved?.inputs.ligands.map((l) => l.component) ?? [],
+              solved?.inputs.sulfateReduction ?? false,
+            )}
+            blank={nextLigand}
+            onChange={(ligands) => put({ ligands }, "ligands")}
+            readOnly={readOnly}
+            problems={rowProblems(problems, "planned.ligands", (rest) => rest.split(".")[0] ?? "")}
+            emptyText="No ligand planned."
+          />
         </div>
       </div>
       {(planned.doses.length > 0 || !readOnly) && (
