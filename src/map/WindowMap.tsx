@@ -17,8 +17,9 @@ import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
 import { mapLayout, mapTraces } from "./figure";
 import type { SetPointHandleProps } from "./handle";
-import { LimitHover, type NamedLimit, nearestLimit } from "./LimitHover";
+import { LateLimitHover } from "./LateLimitHover";
 import type { LimitStore } from "./limitStore";
+import { type NamedLimit, nearestLimit } from "./nearestLimit";
 import { Over } from "./Over";
 import type { PlotProps } from "./Plot";
 import type { ProposalStore } from "./proposalStore";
@@ -207,7 +208,7 @@ export default function WindowMap(props: WindowMapProps) {
             />
           )}
           {limits && limitStore && (
-            <LimitHover
+            <LateLimitHover
               limits={limits}
               store={limitStore}
               cursor={cursor}
