@@ -60,7 +60,7 @@ export interface Bounds {
 
 /** Why a value is out of its bounds, naming value and bound; null when it is inside. */
 export function outOfBounds(value: number, { min, max, above }: Bounds, unit?: string): string | null {
-  const say = (x: number) => withUnit(trueMinus(String(x)), unit);
+  const say = (x: number) => withUnit(trueMinus(String(Number(x.toPrecision(12)))), unit);
   if (above !== undefined && value <= above) return `${say(value)} is too low: it must be above ${say(above)}`;
   if (min !== undefined && value < min) return `${say(value)} is too low: the least is ${say(min)}`;
   if (max !== undefined && value > max) return `${say(value)} is too high: the most is ${say(max)}`;
