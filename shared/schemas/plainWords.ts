@@ -40,9 +40,8 @@ function bound(origin: string, [open, closed]: readonly [string, string], inclus
 }
 
 /** What zod found, as the end of a sentence that begins with the field's name: "is missing", "must be at most 250", "is not a field
- *  here". Where a schema has words of its own, those are said instead.
- *  @returns  null where zod's own words are as good */
-export function plainWords(issue: z.core.$ZodRawIssue): string | null {
+ *  here". Where a schema has words of its own, those are said instead. */
+export function plainWords(issue: z.core.$ZodRawIssue): string {
   switch (issue.code) {
     case "invalid_type":
       return issue.input === undefined ? "is missing" : `must be ${kinds[issue.expected] ?? issue.expected}`;
@@ -57,11 +56,11 @@ export function plainWords(issue: z.core.$ZodRawIssue): string | null {
     case "unrecognized_keys":
       return `is not a field here (${issue.keys.map(quoted).join(", ")})`;
     case "invalid_format":
-      return formats[issue.format] ?? null;
+      return formats[issue.format] ?? "is not written as it must be";
     case "invalid_union":
       if (issue.input === undefined) return "is missing";
       return Array.isArray(issue.options) ? oneOf(issue.options) : "is none of the forms that fit here";
     default:
-      return null;
+      return "is not as it must be";
   }
 }

@@ -28,6 +28,8 @@ test.each([
   ["a misspelt field", z.strictObject({}), { activty: 2 }, 'is not a field here ("activty")'],
   ["no address", z.email(), "bench", "must be a mail address (name@host.example)"],
   ["no day", z.iso.date(), "yesterday", "must be a day (2026-03-31)"],
+  ["a text of another form", z.string().regex(/^a/), "b", "is not written as it must be"],
+  ["a key of another form", z.record(z.string().min(2), z.number()), { b: 1 }, "is not as it must be"],
   ["an odd number", z.number().multipleOf(2), 3, "must be a multiple of 2"],
   ["what a schema has words for", z.number({ error: "the feed's moisture is missing" }), "x", "the feed's moisture is missing"], // prettier-ignore
 ])("%s", (_what, schema, value, words) => expect(said(schema, value)).toEqual([words]));
