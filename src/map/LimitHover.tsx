@@ -1,11 +1,52 @@
-import { useEffect } from "react";
+import { type ReactNode, useEffect } from "react";
 import type { Frame } from "../../shared/schemas/problem";
+import type { Point } from "../../shared/solution";
 import type { ThemeColours } from "../lib/theme";
 import { mapPixels, type Sheet, type SheetBox } from "./boxes";
 import { type CursorStore, useCursor } from "./cursorStore";
 import type { LimitStore } from "./limitStore";
-import { type NamedLimit, nearestLimit } from "./nearestLimit";
 import { useTold } from "./trialStore";
+
+/** One edge of a window and what is said of it. */
+export interface NamedLimit {
+  /** the sentence it belongs to; several edges may share one */
+  key: string;
+  from: Point;
+  to: Point;
+  /** metal, reaction, distance */
+  words: ReactNode;
+}
+
+/** px from an edge that still mean it: of a pointer, and of a finger */
+const REACH = 7;
+const FINGER = 22;
+
+function distanceTo(
+  [x, y]: readonly [number, number],
+  [ax, ay]: readonly [number, number],
+  [bx, by]: readonly [number, number],
+): number {
+  const [dx, dy] = [bx - ax, by - ay];
+  const t = Math.min(1, Math.max(0, ((x - ax) * dx + (y - ay) * dy) / (dx * dx + dy * dy || 1)));
+  return Math.hypot(ax + t * dx - x, ay + t * dy - y);
+}
+
+/** The edge nearest to a place, within a finger's reach of it. */
+export function nearestLimit(
+  limits: readonly NamedLimit[],
+  toPixel: (pH: number, Eh: number) => [number, number],
+  at: Point,
+  byFinger = false,
+): NamedLimit | null {
+  const here = toPixel(...at);
+  let best: NamedLimit | null = null;
+  let least = byFinger ? FINGER : REACH;
+  for (const limit of limits) {
+    const distance = distanceTo(here, toPixel(...limit.from), toPixel(...limit.to));
+    if (distance < least) [best, least] = [limit, distance];
+  }
+  return best;
+}
 
 /** Beside a limit that lies out of sight its name stands at the border. */
 const into = ({ x0, y0, x1, y1 }: SheetBox, [x, y]: readonly [number, number]): [number, number] => [
@@ -13,7 +54,7 @@ const into = ({ x0, y0, x1, y1 }: SheetBox, [x, y]: readonly [number, number]): 
   Math.min(y1, Math.max(y0, y)),
 ];
 
-export interface LimitHoverProps {
+interface LimitHoverProps {
   limits: readonly NamedLimit[];
   store: LimitStore;
   cursor: CursorStore;
@@ -24,7 +65,7 @@ export interface LimitHoverProps {
 
 /** Names the window limit under the cursor and shows where it runs; one that is pointed at in the list is shown as well. A limit that was
  *  tapped, or pressed in the list, keeps its name until it is pressed again, something else is tapped or Escape lets it go. */
-export default function LimitHover({ limits, store, cursor, sheet, visible, colours }: LimitHoverProps) {
+export function LimitHover({ limits, store, cursor, sheet, visible, colours }: LimitHoverProps) {
   const at = useCursor(cursor);
   const pointed = useTold(store.pointed);
   const named = useTold(store.named);

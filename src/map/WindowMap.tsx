@@ -17,9 +17,8 @@ import { Cursor } from "./cursor";
 import type { CursorStore } from "./cursorStore";
 import { mapLayout, mapTraces } from "./figure";
 import type { SetPointHandleProps } from "./handle";
-import { LateLimitHover } from "./LateLimitHover";
+import { LimitHover, type NamedLimit, nearestLimit } from "./LimitHover";
 import type { LimitStore } from "./limitStore";
-import { type NamedLimit, nearestLimit } from "./nearestLimit";
 import { Over } from "./Over";
 import type { PlotProps } from "./Plot";
 import type { ProposalStore } from "./proposalStore";
@@ -208,7 +207,7 @@ export default function WindowMap(props: WindowMapProps) {
             />
           )}
           {limits && limitStore && (
-            <LateLimitHover
+            <LimitHover
               limits={limits}
               store={limitStore}
               cursor={cursor}

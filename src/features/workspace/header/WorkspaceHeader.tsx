@@ -4,8 +4,8 @@ import { Button, ButtonLink } from "../../../components/Button";
 import { Menu, MenuItem, MenuLabel, MenuSeparator } from "../../../components/Menu";
 import { fullTime, savedAt } from "../../../lib/format";
 import type { DraftInHand } from "../model/useDraft";
+import { SaidLine } from "./SaidLine";
 
-const SaidLine = lazy(async () => ({ default: (await import("./SaidLine")).SaidLine }));
 const NewerRevision = lazy(async () => ({ default: (await import("./NewerRevision")).NewerRevision }));
 
 export type ExportKind =
@@ -133,11 +133,7 @@ export function WorkspaceHeader({
           </MenuItem>
         </Menu>
       </span>
-      {said && (
-        <Suspense fallback={null}>
-          <SaidLine said={said} onClose={onUnsay} />
-        </Suspense>
-      )}
+      <SaidLine said={said} onClose={onUnsay} />
     </div>
   );
   if (draft.basedOn >= latest.number) return header;

@@ -1,7 +1,7 @@
 import { limitSentences, type Naming } from "../../../../shared/windows/limitWords";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Limit, Window } from "../../../../shared/solution";
-import type { NamedLimit } from "../../../map/nearestLimit";
+import type { NamedLimit } from "../../../map/LimitHover";
 import { Reaction } from "../answers/Reaction";
 import { bandWords, mVWords, pHWords } from "../model/distances";
 import { limitKey } from "../model/limitKey";
