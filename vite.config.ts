@@ -24,12 +24,12 @@ const withoutUnusedZod: Plugin = {
 
 /** Files that the entry itself brings. */
 const fromTheFirst =
-  /\/(rolldown-runtime|react|queries|schemas|member|chunk|controls|preload-helper|formula|constants|coerce|chemistry|units|sulfur|gases|words|problem|view|solver|session|inProse|typeset|parts|preferences)-/;
+  /\/(rolldown-runtime|react|queries|z|leaves|chunk|controls|preload-helper|formula|coerce|view|solver|parts)-/;
 
 /** Modules of src/lib and src/components that nearly every page is made of. */
 const parts = [
   "api|chemistry|classes|failure|format|glossaryTitles|metals|pages|planWords|plans|potential|queries|scaleChoice|title|units|useRested",
-  "Button|Caution|ComponentName|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
+  "preferences|session|Button|Caution|ComponentName|FieldFrame|Formula|FormulaText|Help|MetalLine|NumberField|Quantity|Select|Slider|TextField",
   "choice|status|text|useLate|whenOpened",
 ];
 
@@ -70,6 +70,26 @@ export default defineConfig({
             {
               name: "parts",
               test: new RegExp(`src[\\\\/](lib|components)[\\\\/](${parts.join("|")})\\.|shared[\\\\/]words[\\\\/]`),
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
+            // Small modules of the core that ask for none of it: solver and parts both build on them.
+            {
+              name: "leaves",
+              test: /shared[\\/](constants|units|species[\\/](inProse|parts|sulfur|typeset)|hazards[\\/](gases|words)|schemas[\\/](chemistry|member|problem))\./,
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
+            // What every opened plan needs and other pages share, in two pieces by what they are about.
+            {
+              name: "tried",
+              test: /shared[\\/](entry[\\/](interval|measure|quantities|readEntry)|metallurgy[\\/](dissolvedMetal|molarMass|account[\\/](liquor|words))|plan[\\/]totals|trials[\\/](comparable|judge|ligandTotal|spread|tally))\.|src[\\/]lib[\\/](judgedTrials|tallyWords|trials)\./,
+              includeDependenciesRecursively: false,
+              priority: 1,
+            },
+            {
+              name: "asked",
+              test: /shared[\\/](activity[\\/]freeAcid|drawing[\\/]hatches|hazards[\\/]presetCautions|practice[\\/]box|reach[\\/]reach|schemas[\\/](circuit|plan))\.|src[\\/](components[\\/](AcidAmount|SourceLink)|lib[\\/](presetLigands|sources)|map[\\/](cursorStore|metalStyle|trialMarks|trialStore|trust|typeSize|useSize|zoom))\.|workspace[\\/](answers[\\/]Reaction|asks[\\/]context|model[\\/]edit)\./,
               includeDependenciesRecursively: false,
               priority: 1,
             },

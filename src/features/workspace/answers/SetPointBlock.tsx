@@ -1,4 +1,5 @@
 import { fromSHE } from "../../../../shared/electrodes/convert";
+import { electrodeSeries } from "../../../../shared/electrodes/series";
 import type { Problem } from "../../../../shared/schemas/problem";
 import type { Window } from "../../../../shared/solution";
 import type { ChemicalData } from "../../../../shared/species/chemicalData";
@@ -11,7 +12,6 @@ import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import { useScaleChoice } from "../../../lib/scaleChoice";
 import { bandWords, marginInUnits, pHWords } from "../model/distances";
-import { usualProbe } from "../model/exports";
 
 /** Where to run, in figures one can read across the room, and how sure the loop can be of staying there. */
 export function SetPointBlock({
@@ -92,6 +92,12 @@ export function SetPointBlock({
       )}
     </section>
   );
+}
+
+/** The electrode a reading is quoted for where the screen itself is on SHE: the common 3 M Ag/AgCl, else the first. */
+function usualProbe(data: ChemicalData) {
+  const all = electrodeSeries(data.tables);
+  return all.find((s) => s.id === "AGCL-3M") ?? all[0];
 }
 
 /** On SHE: what a common probe would show. On an electrode's own scale: what that is on SHE. */

@@ -1,7 +1,5 @@
 import { FREE_ACID_BELOW, type FreeAcidCurve } from "../../../../shared/activity/freeAcid";
-import { electrodeSeries } from "../../../../shared/electrodes/series";
 import type { Outline, Point, Solution, Window } from "../../../../shared/solution";
-import type { ChemicalData } from "../../../../shared/species/chemicalData";
 import { windowName } from "../../../map/view";
 import { hazardWords, sideOf } from "../../../../shared/windows/limitWords";
 
@@ -114,10 +112,4 @@ export function polygonsTable({ windows, shut = [], fields }: Pick<Solution, "wi
     add(`field, ${state}`, metal, species, n, "outer", polygon);
   }
   return { header: ["what", "metal", "of", "polygon", "ring", "corner", "pH", "Eh_V_SHE"], rows };
-}
-
-/** The electrode a reading is quoted for where the screen itself is on SHE: the common 3 M Ag/AgCl, else the first. */
-export function usualProbe(data: ChemicalData) {
-  const all = electrodeSeries(data.tables);
-  return all.find((s) => s.id === "AGCL-3M") ?? all[0];
 }
