@@ -28,8 +28,8 @@ const between = (a: number, b: number, v: number): boolean => (a <= v && v <= b)
 /** Whether a point lies inside a closed loop of corners, for drawing: in floating point, so that a point on an edge may count either way.
  *  @param loop  corners, either direction     @param x, y  the point, same units
  *  @source  crossing count; where the answer decides something, sideOfLoop
- *  @example insideLoop([[0, 0], [2, 0], [0, 2]], 0.5, 0.5) // => true
- *  @example insideLoop([[0, 0], [2, 0], [0, 2]], 2, 2) // => false */
+ *  @example Number(insideLoop([[0, 0], [2, 0], [0, 2]], 0.5, 0.5)) // => 1
+ *  @example Number(insideLoop([[0, 0], [2, 0], [0, 2]], 2, 2)) // => 0 */
 export function insideLoop(loop: readonly Corner[], x: number, y: number): boolean {
   let inside = false;
   let p = loop.at(-1);

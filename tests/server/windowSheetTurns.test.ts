@@ -3,8 +3,7 @@ import { workInTurns, workOf } from "../../server/features/windowSheet/work";
 import { lettingOthers } from "../../server/http/lettingOthers";
 import type { PlanInputs } from "../../shared/schemas/plan";
 import { sheetInputs, sheetPlan, sheetRevision } from "../support/sheetFixture";
-import { bytesOf, planOf } from "../support/sheets";
-import { library, tables, testServer } from "../support/testServer";
+import { library, tables } from "../support/testServer";
 
 const ranged: PlanInputs = { ...sheetInputs, ranges: { temperatureC: [25, 95], activities: { Fe: [1e-6, 1e-4] } } };
 
@@ -27,20 +26,4 @@ test("over ranges each temperature is a turn of its own: what is due runs betwee
   const solved = robust && "checked" in robust ? robust.checked.temperatures.length : 0;
   expect(solved).toBeGreaterThan(10);
   expect(others).toBeGreaterThanOrEqual(solved - 1);
-});
-
-test("a request that comes while a sheet is solved is answered before the sheet", async () => {
-  const { as } = await testServer();
-  const made = await planOf(await as("metallurgist"), ranged);
-  const [slow, quick] = [await as("manager"), await as("technician")];
-  const order: string[] = [];
-  const sheet = bytesOf(slow, `/api/plans/${made.id}/revisions/1/window-sheet.pdf`).then(() => order.push("sheet"));
-  const asked = async () => {
-    await quick.get(`/api/plans/${made.id}`).expect(200);
-    order.push("plan");
-  };
-  // one after the other: a server that solves without a pause answers none of these, or one, before the sheet
-  for (let i = 0; i < 3; i++) await asked();
-  await sheet;
-  expect(order).toEqual(["plan", "plan", "plan", "sheet"]);
 });

@@ -21,7 +21,7 @@ import { library as data, solved } from "../../support/solver";
 const inputs: PlanInputs = {
   ...sheetInputs,
   temperatureC: 25,
-  metals: [metal("Cu", "target", "dissolved", 0.01)],
+  metals: [metal("Cu", "target", "dissolved", 0.01), metal("Cd", "watched", "free", 0.001)],
   ligands: [...sheetInputs.ligands, { component: "S(sulfide)", activity: 0.01 }],
   feedMinerals: ["CuFeS2(s)", "CuO(s)"],
   dosed: [],
@@ -29,7 +29,7 @@ const inputs: PlanInputs = {
   circuit: { oxygenKPa: 500 },
   overall: {
     "CuFeS2(s)": { redox: "ferric", products: { Fe: "Fe^2+(aq)", "S(sulfide)": "SO4^2-(aq)" } },
-    "Cu(s)": { products: { Cu: "ZnO(s)" } },
+    "Cd(s)": { products: { Cd: "ZnO(s)" } },
   },
 };
 const problem = toProblem(inputs, data);
@@ -60,9 +60,9 @@ test("reactions as a table: the choices, the reaction, and a line a reagent per 
   const oxide = lines.find((l) => l.from === "CuO(s)")!;
   expect(oxide.kg_per_kg_metal).toBeCloseTo(1.543, 2); // practice, section 3.6: acid of a copper oxide
   expect(oxide).toMatchObject({ role: "acid", reagent: "H2SO4", chosen_by_hand: "", redox_reagent: null });
-  const refused = lines.find((l) => l.from === "Cu(s)")!;
-  expect(refused).toMatchObject({ reaction: null, chosen_by_hand: "Cu=ZnO(s)" });
-  expect(refused.not_written_because).toMatch(/ZnO\(s\) holds no Cu/);
+  const refused = lines.find((l) => l.from === "Cd(s)")!;
+  expect(refused).toMatchObject({ reaction: null, chosen_by_hand: "Cd=ZnO(s)" });
+  expect(refused.not_written_because).toMatch(/ZnO\(s\) holds no Cd/);
 });
 
 const gases = valueOf(hazardRegions(valueOf(analyse(problem, data)))).regions;
