@@ -1,3 +1,4 @@
+import { significant } from "../words/numbers";
 import type { MetalFields } from "../fields/fields";
 import type { Prepared } from "../selection/prepare";
 import type { Basis } from "../planes/grid";
@@ -6,7 +7,7 @@ import { kineticsWarnings } from "./kinetics";
 import { metastableWarnings } from "./metastable";
 import type { Relevant } from "./relevant";
 
-/** A ligand's total is not drawn down by the metals; beyond this share of it the plan says so (design, method step 3). */
+/** A ligand's total is not drawn down by the metals; beyond this share of it the plan says so (docs/method.md, section 3). */
 const DRAWN_DOWN_SHARE = 1 / 3;
 
 /** What the user must know before trusting the picture: fields and ligand cells that rest on a G outside its trusted range, ligands that
@@ -39,7 +40,7 @@ export function warningsOf(
         warnings.push({
           code: "LIGAND_DRAWN_DOWN",
           metal: m.metal.element,
-          text: `${m.metal.element} at ${m.metal.activity} would bind ${need.toPrecision(2)} of ${component}, more than a third of its total ${activity}: the total is not drawn down here`,
+          text: `${m.metal.element} at activity ${significant(m.metal.activity)} would bind ${significant(need)} mol/L of ${component}, more than a third of its total of ${significant(activity)} mol/L: the total is not drawn down here`,
         });
     }
   }

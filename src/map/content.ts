@@ -14,6 +14,8 @@ import type { MapMetal } from "./view";
 /** Everything a map shows, worked out before the view comes in, so that a theme or a zoom redoes none of it. */
 export interface MapContent {
   solution: Solution;
+  /** of the liquor, C: one, or two laid over each other */
+  temperatures: readonly number[];
   shut: ReadonlyMap<string, readonly Outline[]>;
   boundaries: ReadonlyMap<string, readonly (readonly Point[])[]>;
   /** the point the crosscuts run through; null hides them */
@@ -44,6 +46,8 @@ export interface ContentWishes {
   metals: readonly MapMetal[];
   /** solved with the shut ground outlined */
   solution: Solution;
+  /** of the liquor, C, where two solutions are laid over each other; else the solution's own */
+  temperatures?: readonly number[];
   /** the same question on the other solids basis */
   other: { basis: string; solution: Solution } | null;
   /** where the crosscuts run: the set point of the window in hand */
@@ -71,6 +75,7 @@ export function mapContent(wishes: ContentWishes): MapContent {
     }));
   return {
     solution,
+    temperatures: wishes.temperatures ?? [solution.temperatureC],
     shut: new Map((solution.shut ?? []).map(({ metal, polygons }) => [metal, polygons])),
     boundaries: boundariesByMetal(solution.fields, solution.frame),
     through,

@@ -82,7 +82,7 @@ export function Overlay({ content, sheet, view, names, trials, picture = false }
       </g>
       <SvgText
         label="axis pH"
-        lines={[{ parts: plainText(`pH at ${content.solution.temperatureC} °C`), size: typeSize(11) }]}
+        lines={[{ parts: plainText(`pH at ${content.temperatures.join(" and ")} °C`), size: typeSize(11) }]}
         x={box.x1}
         y={box.y1 + 33}
         anchor="end"

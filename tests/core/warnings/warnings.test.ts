@@ -37,7 +37,7 @@ describe("LIGAND_DRAWN_DOWN", () => {
     expect(more).toEqual([]);
     expect(warning).toMatchObject({ metal: "Ag" });
     expect(warning!.text).toBe(
-      `Ag at 0.003 would bind ${bound.toPrecision(2)} of CN, more than a third of its total 0.01: the total is not drawn down here`,
+      `Ag at activity 3.0e−3 would bind ${bound.toExponential(1).replace("-", "−")} mol/L of CN, more than a third of its total of 0.010 mol/L: the total is not drawn down here`,
     );
   });
 

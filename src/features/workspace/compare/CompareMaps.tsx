@@ -39,12 +39,13 @@ export function CompareMaps({ a, b, difference, scale, zoom, onZoom, shown, onSh
   const third = useMemo(() => {
     if (!one || !two || !difference) return null;
     const solution = { ...one.asked.solution, windows: [], shut: [], fields: [] };
+    const heats = [...new Set([solution.temperatureC, two.asked.solution.temperatureC])];
     const of = ({ solved }: Props["a"]) => ({
       windows: solved.solution?.windows ?? [],
       setPoint: solved.window?.setPoint ?? null,
     });
     return {
-      asked: { ...one.asked, solution, metals: [], other: null },
+      asked: { ...one.asked, solution, temperatures: heats, metals: [], other: null },
       view: { ...one.view, layers: { ...one.view.layers, setPoint: false } },
       overlay: differenceTraces(difference, of(a), of(b), one.view),
     };
