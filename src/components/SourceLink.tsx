@@ -27,7 +27,7 @@ export const SpeciesLink = memo(function SpeciesLink({ id, withPhase = false }: 
     <Link
       to={`/chemistry/${encodeURIComponent(id)}`}
       title="Its row of the library, with source and grade"
-      className="no-underline hover:underline"
+      className="relative no-underline hover:underline"
     >
       <SpeciesName id={id} withPhase={withPhase} />
     </Link>

@@ -16,6 +16,10 @@ import { keys } from "../../lib/queries";
 import { useSessionQuery } from "../../lib/session";
 import { usePageTitle } from "../../lib/title";
 
+/** Refused for good: not the server's silence (0), its own fault, or too many attempts for now. */
+const staysSo = (error: unknown): boolean =>
+  error instanceof ApiFailure && error.status >= 400 && error.status < 500 && error.status !== 429;
+
 /** Behind the link of an invitation: choose a name and a password, and be in. Open to those who are not signed in. */
 export default function InvitationPage() {
   usePageTitle("Invitation");
@@ -35,9 +39,7 @@ export default function InvitationPage() {
             doing="This link opens nothing"
             error={offer.error}
             // A link that is used up, taken back or cut short stays so.
-            {...(offer.error instanceof ApiFailure && offer.error.status < 500
-              ? {}
-              : { retry: () => void offer.refetch() })}
+            {...(staysSo(offer.error) ? {} : { retry: () => void offer.refetch() })}
           />
           <div className="mt-6">
             <ButtonLink to="/">To the sign-in</ButtonLink>

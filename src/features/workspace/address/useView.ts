@@ -90,7 +90,8 @@ export function useAddress(seen: PlanView, own: { current: boolean }, settings: 
         const write = (search: string) => {
           if (!open) return;
           film.current = seen.film === null;
-          if (search === here.current.search) return;
+          // After "back" the address may say so before the location does: an entry of its own would undo the going back.
+          if (search === here.current.search || search === window.location.search) return;
           own.current = true;
           void navigate({ search }, { replace: !opened, preventScrollReset: true });
         };

@@ -19,7 +19,7 @@ function Half({ terms }: { terms: readonly ReactionTerm[] }) {
           <Link
             to={`/chemistry/${encodeURIComponent(term.species)}`}
             title={`${term.species}: its row of the library`}
-            className="no-underline hover:underline"
+            className="relative no-underline hover:underline"
           >
             <Formula formula={term.formula} />
           </Link>

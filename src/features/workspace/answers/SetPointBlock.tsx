@@ -11,7 +11,7 @@ import { Note, Remark, Row, SectionHead } from "../../../components/text";
 import { celsius, fixed, withUnit } from "../../../lib/format";
 import type { PotentialScale } from "../../../lib/potential";
 import { useScaleChoice } from "../../../lib/scaleChoice";
-import { bandWords, marginInUnits, pHWords } from "../model/distances";
+import { bandWords, marginSides, pHWords } from "../model/distances";
 
 /** Where to run, in figures one can read across the room, and how sure the loop can be of staying there. */
 export function SetPointBlock({
@@ -52,8 +52,7 @@ export function SetPointBlock({
         label={<Term word="margin">Margin</Term>}
         below={
           <>
-            {marginInUnits(at, band)} to either side; the loop strays ±
-            {at.mixedPotential ? pHWords(band.pH) : bandWords(1, band)}.
+            {marginSides(at, band)}; the loop strays ±{at.mixedPotential ? pHWords(band.pH) : bandWords(1, band)}.
             {at.cutByFrame && " Cut by the frame: the window may be wider than the map."}
           </>
         }

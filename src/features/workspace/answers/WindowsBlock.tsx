@@ -54,7 +54,9 @@ export function WindowsBlock({
                 </span>
                 <span className="block text-sm font-normal text-muted">
                   margin {fixed(window.setPoint.margin, 1)} {marginWords(window.setPoint)} (
-                  {marginInUnits(window.setPoint, band)}){!window.controllable && ", narrower than the control bands"}
+                  {marginInUnits(window.setPoint, band)}
+                  {window.setPoint.margin < 0 && " outside"})
+                  {!window.controllable && ", narrower than the control bands"}
                 </span>
               </span>
               <span className="font-mono font-normal whitespace-nowrap">

@@ -54,7 +54,8 @@ export default function NotSolved() {
         </Button>
       )}
       <p className="text-sm text-muted">
-        A start, not a measurement: it then stands under Lixiviant, where you change it. {kept}
+        {!readOnly && "A start, not a measurement: it then stands under Lixiviant, where you change it. "}
+        {kept}
       </p>
     </Remark>
   );

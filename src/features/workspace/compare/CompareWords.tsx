@@ -8,15 +8,14 @@ import { Note, Row, SectionHead } from "../../../components/text";
 import { fixed } from "../../../lib/format";
 import { planChanges } from "../../../lib/planChanges";
 import type { PotentialScale } from "../../../lib/potential";
-import { marginInUnits } from "../model/distances";
+import { marginSides } from "../model/distances";
 import type { Side, SolvedSide } from "./sides";
 import { area, moveLines, verdict } from "./words";
 
 const point = (at: SetPoint | undefined, scale: PotentialScale) =>
   at ? `pH ${fixed(at.pH, 2)}, ${scale.format(at.Eh)}` : "no window";
 const margin = (at: SetPoint | undefined) => (at ? `${fixed(at.margin, 1)} ${marginWords(at)}` : "none");
-const inUnits = (at: SetPoint | undefined, { inputs }: Side) =>
-  at && `${marginInUnits(at, inputs.controlBand)} to either side`;
+const inUnits = (at: SetPoint | undefined, { inputs }: Side) => at && marginSides(at, inputs.controlBand);
 
 /** What the difference says, in words and numbers. */
 export function CompareWords({

@@ -5,11 +5,11 @@ import type { Said } from "./WorkspaceHeader";
 /** How a command of the header goes, under its right end: however long, it moves nothing and hides no name. */
 export function SaidLine({ said, onClose }: { said: Said | null; onClose: () => void }) {
   return (
-    <div role="status" className="no-print absolute top-full right-5 left-5 z-30 flex justify-end">
+    <div role="status" className="no-print pointer-events-none absolute top-full right-5 left-5 z-30 flex justify-end">
       {said && (
         <p
           className={classes(
-            "flex max-w-[68ch] items-baseline gap-4 border bg-sheet px-3 py-1 text-sm",
+            "pointer-events-auto flex max-w-[68ch] items-baseline gap-4 border bg-sheet px-3 py-1 text-sm",
             said.bad ? "border-signal text-signal" : "border-ink",
           )}
         >

@@ -17,3 +17,7 @@ export const marginInUnits = (
   { margin, mixedPotential }: Pick<SetPoint, "margin" | "mixedPotential">,
   band: Problem["controlBand"],
 ): string => (mixedPotential ? pHWords(margin * band.pH) : bandWords(margin, band));
+
+/** The same as a sentence tells it: a point placed by hand may stand outside, and its margin is then below zero. */
+export const marginSides = (at: Pick<SetPoint, "margin" | "mixedPotential">, band: Problem["controlBand"]): string =>
+  `${marginInUnits(at, band)} ${at.margin < 0 ? "outside the window" : "to either side"}`;
