@@ -1,4 +1,4 @@
-import { useId, type SubmitEvent } from "react";
+import { useId, type ReactNode, type SubmitEvent } from "react";
 import { Button } from "./Button";
 import { Dialog, type DialogProps } from "./Dialog";
 
@@ -7,6 +7,7 @@ export function FormDialog({
   action,
   disabled = false,
   onSubmit,
+  came,
   children,
   ...dialog
 }: Omit<DialogProps, "footer" | "toRead" | "fixed"> & {
@@ -15,23 +16,37 @@ export function FormDialog({
   /** on its way, or nothing to send yet */
   disabled?: boolean;
   onSubmit: (event: SubmitEvent<HTMLFormElement>) => void;
+  /** what came of it, in place of the form; the dialog stays the same one, so that focus goes back to where it was opened */
+  came?: ReactNode;
 }) {
   const id = useId();
+  const close = () => dialog.onOpenChange(false);
+  const done = came !== undefined;
   return (
     <Dialog
       {...dialog}
       footer={
-        <>
-          <Button onClick={() => dialog.onOpenChange(false)}>Cancel</Button>
-          <Button type="submit" form={id} kind="primary" disabled={disabled}>
-            {action}
+        done ? (
+          <Button kind="primary" onClick={close}>
+            Done
           </Button>
-        </>
+        ) : (
+          <>
+            <Button onClick={close}>Cancel</Button>
+            <Button type="submit" form={id} kind="primary" disabled={disabled}>
+              {action}
+            </Button>
+          </>
+        )
       }
     >
-      <form id={id} onSubmit={onSubmit} noValidate className="space-y-4">
-        {children}
-      </form>
+      {done ? (
+        came
+      ) : (
+        <form id={id} onSubmit={onSubmit} noValidate className="space-y-4">
+          {children}
+        </form>
+      )}
     </Dialog>
   );
 }

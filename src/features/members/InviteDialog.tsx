@@ -2,9 +2,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useForm, useWatch } from "react-hook-form";
 import { Link } from "react-router-dom";
 import type { z } from "zod";
-import { invitationCreate } from "../../../shared/schemas/invitation";
-import { Button } from "../../components/Button";
-import { Dialog } from "../../components/Dialog";
+import { invitationCreate, type InvitationRow } from "../../../shared/schemas/invitation";
 import { FormDialog } from "../../components/FormDialog";
 import { SelectField } from "../../components/SelectField";
 import { ErrorNote } from "../../components/status";
@@ -31,43 +29,17 @@ function Invite({ open, onOpenChange }: InviteDialogProps) {
   const submit = form.handleSubmit((values) => invite.mutate(values));
   const { errors } = form.formState;
   const role = useWatch({ control: form.control, name: "role" });
-  if (invite.data) {
-    const { email, mail } = invite.data;
-    return (
-      <Dialog
-        open={open}
-        onOpenChange={onOpenChange}
-        title="Invited"
-        footer={
-          <Button kind="primary" onClick={() => onOpenChange(false)}>
-            Done
-          </Button>
-        }
-      >
-        {mail?.state === "sent" ? (
-          <p>
-            A letter went to <b>{email}</b>. Its link works once.
-          </p>
-        ) : mail?.state === "failed" ? (
-          <ErrorNote
-            doing={`The letter to ${email} was not taken`}
-            error={new Error(`${mail.error ?? "The mail server refused it"}. The invitation stands; send it again.`)}
-          />
-        ) : (
-          <p>
-            No mail server is set up here: the letter to <b>{email}</b> is kept on this server. Read it in the{" "}
-            <Link to="/mailbox">mailbox</Link> and pass the link on; it works once.
-          </p>
-        )}
-      </Dialog>
-    );
-  }
   return (
     <FormDialog
       open={open}
       onOpenChange={onOpenChange}
-      title="Invite a member"
-      description="They get a letter with a link, choose their name and password, and are in. The link works once and expires."
+      {...(invite.data
+        ? { title: "Invited", came: <Came {...invite.data} /> }
+        : {
+            title: "Invite a member",
+            description:
+              "They get a letter with a link, choose their name and password, and are in. The link works once and expires.",
+          })}
       action={invite.isPending ? "Sending …" : "Send the letter"}
       disabled={invite.isPending}
       onSubmit={(event) => void submit(event)}
@@ -94,5 +66,28 @@ function Invite({ open, onOpenChange }: InviteDialogProps) {
       />
       {invite.error && <ErrorNote doing="Not invited" error={invite.error} />}
     </FormDialog>
+  );
+}
+
+/** What became of the letter. */
+function Came({ email, mail }: Pick<InvitationRow, "email" | "mail">) {
+  if (mail?.state === "sent")
+    return (
+      <p>
+        A letter went to <b>{email}</b>. Its link works once.
+      </p>
+    );
+  if (mail?.state === "failed")
+    return (
+      <ErrorNote
+        doing={`The letter to ${email} was not taken`}
+        error={new Error(`${mail.error ?? "The mail server refused it"}. The invitation stands; send it again.`)}
+      />
+    );
+  return (
+    <p>
+      No mail server is set up here: the letter to <b>{email}</b> is kept on this server. Read it in the{" "}
+      <Link to="/mailbox">mailbox</Link> and pass the link on; it works once.
+    </p>
   );
 }
