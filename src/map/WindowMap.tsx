@@ -150,7 +150,8 @@ export default function WindowMap(props: WindowMapProps) {
       // A finger points at nothing before it presses: its tap names the limit that lies under it, and the next one lets it go.
       if (byFinger && at && pixels && limits && limitStore) {
         const limit = nearestLimit(limits, pixels.toPixel, at, true);
-        const before = limitStore.named.get();
+        // one whose limit has gone since is not seen
+        const before = limits.find((l) => l.key === limitStore.named.get()?.key);
         limitStore.named.set(limit && limit.key !== before?.key ? { key: limit.key, at } : null);
         if (limit || before) return;
       }
