@@ -24,9 +24,14 @@ import { MapTools, ZoomTools } from "./MapTools";
 import { namedLimits } from "./namedLimits";
 
 const loadMap = () => import("../../../map/WindowMap");
-const WindowMap = lazy(loadMap);
-// The map comes in while the plan and the chemistry are read. A failure shows when it is due.
-void loadMap().catch(() => undefined);
+const LateMap = lazy(loadMap);
+let map: typeof LateMap | typeof import("../../../map/WindowMap").default = LateMap;
+// The map comes in while the plan and the chemistry are read, and is then drawn with the rest at once, without a picture of the page
+// around it first. A failure shows when it is due.
+loadMap().then(
+  (module) => (map = module.default),
+  () => undefined,
+);
 
 export interface MapPanelProps extends SightInHand {
   /** one setting varied, in place of the map */
@@ -72,6 +77,7 @@ export function MapPanel(props: MapPanelProps) {
   const { solution } = asked;
   const { plain, window: chosen } = view;
   const [moving, setMoving] = useState(false);
+  const [Map] = useState(() => map);
   const textId = useId();
   const window = solution.windows[chosen];
   const setPoint = window?.setPoint;
@@ -128,7 +134,7 @@ export function MapPanel(props: MapPanelProps) {
       <div className="relative min-h-0 flex-1 px-2 pb-2">
         <MapAsText id={textId} open={asText} asked={inWords} />
         <Suspense fallback={<Loading label="Opening the map" />}>
-          <WindowMap
+          <Map
             asked={asked}
             view={view}
             onSight={onSight}
