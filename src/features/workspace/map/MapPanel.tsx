@@ -1,4 +1,4 @@
-import { lazy, Suspense, useCallback, useId, useMemo, useState } from "react";
+import { type ComponentType, lazy, Suspense, useCallback, useId, useMemo, useState } from "react";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Frame } from "../../../../shared/schemas/problem";
 import type { Point } from "../../../../shared/solution";
@@ -16,6 +16,7 @@ import type { ProposalStore } from "../../../map/proposalStore";
 import { ReadOut } from "../../../map/ReadOut";
 import type { ShownTrials } from "../../../map/TrialsLayer";
 import { drawnMetals, windowName } from "../../../map/view";
+import type { WindowMapProps } from "../../../map/WindowMap";
 import type { MapModel } from "../model/useMapModel";
 import type { SightInHand } from "../model/useSight";
 import { MapAsText } from "./MapAsText";
@@ -25,7 +26,7 @@ import { namedLimits } from "./namedLimits";
 
 const loadMap = () => import("../../../map/WindowMap");
 const LateMap = lazy(loadMap);
-let map: typeof LateMap | typeof import("../../../map/WindowMap").default = LateMap;
+let map: ComponentType<WindowMapProps> = LateMap;
 // The map comes in while the plan and the chemistry are read, and is then drawn with the rest at once, without a picture of the page
 // around it first. A failure shows when it is due.
 loadMap().then(
