@@ -54,7 +54,7 @@ export class Refusal extends Error {
 const secret = (path: string) => /password/i.test(path);
 
 function withValue(path: string, { message, input }: z.core.$ZodIssue): string {
-  if (Number.isNaN(input)) return "expected a number";
+  if (Number.isNaN(input)) return "must be a number";
   const plain = typeof input === "string" || typeof input === "number" || typeof input === "boolean";
   return plain && !secret(path) ? `${message} (got ${JSON.stringify(input).slice(0, 80)})` : message;
 }

@@ -7,7 +7,7 @@ export const signIn = z.object({ email: z.email(), password: z.string().min(1).m
 export const firstAdmin = z.object({
   email: z.email(),
   name: z.string().trim().min(1).max(100),
-  password: z.string().min(12, "at least 12 characters").max(200),
+  password: z.string().min(12, "Too short: at least 12 characters").max(200, "Too long: at most 200 characters"),
 });
 /** Remembered per user; the client merges its defaults under it. */
 export const preferences = z.object({

@@ -122,13 +122,19 @@ export function sweep(
   return ok({ varied, frames, samples, turns, tolerance, failed });
 
   function turnsBetween(low: State, high: State): Turn[] {
-    const met = [
-      ...narrowed(low, high, (s) => s.windows.length).map(([a, b]) => turnBetween(a, b, band)),
-      ...narrowed(low, high, (s) => Number((s.setPoint?.margin ?? 0) >= 1)).map(([a, b]) => gripBetween(a, b, band)),
+    const paired = [
+      ...narrowed(low, high, (s) => s.windows.length).map((pair) => ({ pair, turn: turnBetween(...pair, band) })),
+      ...narrowed(low, high, (s) => Number((s.setPoint?.margin ?? 0) >= 1)).map((pair) => ({
+        pair,
+        turn: gripBetween(...pair, band),
+      })),
     ];
+    const met = paired.map(({ turn }) => turn);
     const jumps = jumpsBetween(low, high).filter(([a, b]) => !met.some(({ between: [c, d] }) => a.at < d && c < b.at));
-    // both sides are drawn, so that the curve stands upright there
-    samples.push(...jumps.flat().map(sampleOf));
+    // Both sides are drawn, once each, so that the curve stands upright there.
+    const sides = [...paired.filter(({ turn }) => turn.jump !== null).map(({ pair }) => pair), ...jumps].flat();
+    const each = new Map(sides.map((state) => [state.at, state]));
+    samples.push(...[...each.values()].sort((a, b) => a.at - b.at).map(sampleOf));
     const jumped = jumps.map(([a, b]) => jumpBetween(a, b, band)).filter((turn) => turn !== null);
     return [...met, ...jumped].sort((a, b) => a.at - b.at);
   }

@@ -21,14 +21,14 @@ export interface NamedLimit {
 const REACH = 7;
 const FINGER = 22;
 
-function distanceTo(
-  [x, y]: readonly [number, number],
-  [ax, ay]: readonly [number, number],
-  [bx, by]: readonly [number, number],
-): number {
+type Pixel = readonly [number, number];
+
+/** Where an edge comes nearest to a place, and how far that is. */
+function nearestOn([x, y]: Pixel, [ax, ay]: Pixel, [bx, by]: Pixel): { place: [number, number]; distance: number } {
   const [dx, dy] = [bx - ax, by - ay];
   const t = Math.min(1, Math.max(0, ((x - ax) * dx + (y - ay) * dy) / (dx * dx + dy * dy || 1)));
-  return Math.hypot(ax + t * dx - x, ay + t * dy - y);
+  const place: [number, number] = [ax + t * dx, ay + t * dy];
+  return { place, distance: Math.hypot(place[0] - x, place[1] - y) };
 }
 
 /** The edge nearest to a place, within a finger's reach of it. */
@@ -42,7 +42,7 @@ export function nearestLimit(
   let best: NamedLimit | null = null;
   let least = byFinger ? FINGER : REACH;
   for (const limit of limits) {
-    const distance = distanceTo(here, toPixel(...limit.from), toPixel(...limit.to));
+    const { distance } = nearestOn(here, toPixel(...limit.from), toPixel(...limit.to));
     if (distance < least) [best, least] = [limit, distance];
   }
   return best;
@@ -91,7 +91,13 @@ export function LimitHover({ limits, store, cursor, sheet, visible, colours }: L
   const shown = limits.filter((l) => keys.includes(l.key));
   if (shown.length === 0) return null;
   const said = under ?? (named && shown.find((l) => l.key === named.key));
-  const [x, y] = under && at ? toPixel(...at) : named ? into(box, toPixel(...named.at)) : [0, 0];
+  // The plan may have moved the limit since it was named: its name goes along.
+  const beside = (wanted: Point) =>
+    shown
+      .filter((l) => l.key === named?.key)
+      .map(({ from, to }) => nearestOn(toPixel(...wanted), toPixel(...from), toPixel(...to)))
+      .reduce((a, b) => (b.distance < a.distance ? b : a)).place;
+  const [x, y] = under && at ? toPixel(...at) : said && named ? into(box, beside(named.at)) : [0, 0];
   const left = x < (box.x0 + box.x1) / 2;
   const above = y > (box.y0 + box.y1) / 2;
   return (

@@ -209,7 +209,7 @@ test.each([
     "row.source",
     /source "NOBODY99" is not in references/,
   ],
-  ["no number where one is needed", { ...own, dGf_kJ: "much" }, "row.dGf_kJ", /expected a number/],
+  ["no number where one is needed", { ...own, dGf_kJ: "much" }, "row.dGf_kJ", /must be a number/],
   ["the zero of the scale", { ...shippedRow("H^+(aq)"), dGf_kJ: 1 }, "row.id", /zero of the scale/],
 ])("a row with %s is refused with row and column, and nothing changes", async (_what, row, path, words) => {
   const { as } = await testServer();

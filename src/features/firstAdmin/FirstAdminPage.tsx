@@ -50,7 +50,7 @@ export default function FirstAdminPage() {
             type="password"
             autoComplete="new-password"
             {...(errors.password ? {} : { hint: "At least 12 characters; a few unrelated words do well." })}
-            error={errors.password?.message && `Too short: ${errors.password.message}`}
+            error={errors.password?.message}
             {...form.register("password")}
           />
           {create.error && <ErrorNote error={create.error} />}

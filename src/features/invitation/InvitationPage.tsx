@@ -100,7 +100,7 @@ function Accept({ token, offer }: { token: string; offer: InvitationOffer }) {
           type="password"
           autoComplete="new-password"
           hint="At least 12 characters; a few unrelated words do well."
-          error={errors.password?.message && `Too short: ${errors.password.message}`}
+          error={errors.password?.message}
           {...form.register("password")}
         />
         {accept.error && <ErrorNote doing="Not accepted" error={accept.error} />}

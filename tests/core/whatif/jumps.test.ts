@@ -37,6 +37,15 @@ describe("where margin and ground jump", () => {
     }
   });
 
+  test("a window that opens at one stroke is drawn with both sides as well, each once", () => {
+    const s = swept({ ...neutral, frame: { ...neutral.frame, pH: [1, 3.8] } }, heat([41, 93]));
+    const opens = s.turns.find((t) => t.kind === "opens")!;
+    expect(opens).toMatchObject({ abrupt: true, windows: [0, 1] });
+    const ats = s.samples.map((x) => x.at);
+    expect(ats).toEqual([...new Set(ats)].sort((a, b) => a - b));
+    expect(ats).toEqual(expect.arrayContaining([...opens.between]));
+  });
+
   test("with goethite left out, or counting all the way, nothing jumps", () => {
     const without = { ...neutral, leftOut: [...neutral.leftOut, { species: "FeOOH(s,goethite)", reason: "not in this tank" }] };
     expect(jumpsOf(swept(without, heat([41, 93])))).toEqual([]);

@@ -1,4 +1,4 @@
-import { type ComponentType, lazy, Suspense, useCallback, useId, useMemo, useState } from "react";
+import { type ComponentType, lazy, Suspense, useCallback, useEffect, useId, useMemo, useState } from "react";
 import type { PlanInputs } from "../../../../shared/schemas/plan";
 import type { Frame } from "../../../../shared/schemas/problem";
 import type { Point } from "../../../../shared/solution";
@@ -84,6 +84,8 @@ export function MapPanel(props: MapPanelProps) {
   const setPoint = window?.setPoint;
   const naming = useMemo(() => namingOf(data, solution), [data, solution]);
   const limits = useMemo(() => namedLimits(window, naming, inputs.controlBand), [window, naming, inputs.controlBand]);
+  // Another window's limit of the same words is another limit.
+  useEffect(() => limitStore.named.set(null), [limitStore, chosen]);
   const inWords = useMemo(
     () => ({ solution, metals, scale, band: inputs.controlBand, naming, chosen, through, sight }),
     [solution, metals, scale, inputs.controlBand, naming, chosen, through, sight],
