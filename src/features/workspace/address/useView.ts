@@ -88,7 +88,8 @@ export function useAddress(seen: PlanView, own: { current: boolean }, settings: 
           return value === null || (key === "settings" && !settings) ? [] : [[key, value]];
         });
         const write = (search: string) => {
-          if (!open) return;
+          // Whoever has followed a link is on the way out, though this screen stands until the next has come: their address is not ours.
+          if (!open || window.location.pathname !== here.current.pathname) return;
           film.current = seen.film === null;
           // After "back" the address may say so before the location does: an entry of its own would undo the going back.
           if (search === here.current.search || search === window.location.search) return;

@@ -1,5 +1,5 @@
 import { useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
-import { Link, useNavigate, useParams, useSearchParams } from "react-router-dom";
+import { Link, useLocation, useNavigate, useParams, useSearchParams } from "react-router-dom";
 import { groundDifference } from "../../../../shared/compare/ground";
 import { limitMoves } from "../../../../shared/compare/limits";
 import type { PlanInputs, PlanRow } from "../../../../shared/schemas/plan";
@@ -106,7 +106,10 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
   }, [search]);
   const map = search.get("map");
   const mayWrite = useMay("writePlans");
-  const change = (parts: Record<string, string | null>) =>
+  const { pathname } = useLocation();
+  const change = (parts: Record<string, string | null>) => {
+    // A link was followed and the next screen is still coming: its address is not ours to write.
+    if (window.location.pathname !== pathname) return;
     setSearch(
       (old) => {
         for (const [key, value] of Object.entries({ a: aText, b: bText, ...parts }))
@@ -116,6 +119,7 @@ function Compared({ plan, texts: [aText, bText], a, b }: { plan: PlanRow; texts:
       },
       { replace: true, preventScrollReset: true },
     );
+  };
   const changeLater = useRef(change);
   useEffect(() => {
     changeLater.current = change;
